@@ -1,0 +1,55 @@
+// Errors a person may see. Services throw them; route(), formAction() and orNotFound() translate them, nobody else.
+
+export type AppErrorCode = 'invalid_input' | 'not_signed_in' | 'not_found' | 'forbidden' | 'conflict' | 'rate_limited'
+
+/** `message` is fit for the person; anything that is not an AppError is a bug and stays inside. */
+export class AppError extends Error {
+  constructor(
+    readonly code: AppErrorCode,
+    message: string,
+    options?: ErrorOptions,
+  ) {
+    super(message, options)
+    this.name = new.target.name
+  }
+}
+
+/** `fields` maps a form field to what is wrong with it. */
+export class InvalidInputError extends AppError {
+  constructor(
+    message: string,
+    readonly fields: Record<string, string> = {},
+  ) {
+    super('invalid_input', message)
+  }
+}
+
+export class NotSignedInError extends AppError {
+  constructor() {
+    super('not_signed_in', 'Please sign in first.')
+  }
+}
+
+export class NotFoundError extends AppError {
+  constructor(what: string) {
+    super('not_found', `${what} not found.`)
+  }
+}
+
+export class ForbiddenError extends AppError {
+  constructor() {
+    super('forbidden', 'Your role on this rink does not allow that.')
+  }
+}
+
+export class ConflictError extends AppError {
+  constructor(message: string) {
+    super('conflict', message)
+  }
+}
+
+export class RateLimitedError extends AppError {
+  constructor(readonly retryAfterSeconds: number) {
+    super('rate_limited', 'Too many tries. Please wait a few minutes and try again.')
+  }
+}

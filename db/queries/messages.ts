@@ -1,0 +1,64 @@
+// Promised messages and their deliveries.
+import type { Db } from '@/db/knex'
+
+export type MessageKind =
+  | 'flood-tonight'
+  | 'flood-changed'
+  | 'flood-closed'
+  | 'verify-address'
+  | 'sign-in-link'
+  | 'reset-password'
+  | 'address-already-registered'
+
+export type MessageState = 'promised' | 'delivered' | 'expired' | 'dead'
+
+export interface NewMessage {
+  /** Why this message exists once: the same key again changes nothing. */
+  dedupeKey: string
+  userId: string
+  rinkId?: string
+  nightDate?: string
+  channel: 'email' | 'push'
+  kind: MessageKind
+  /** Finished words for alerts; for account mail `{ linkId }`, never a token. */
+  content: Record<string, unknown>
+  windowId?: string
+  sendAt: Date
+  expiresAt: Date
+}
+
+/**
+ * Promises a message and its delivery together: called inside the transaction of the decision.
+ * @returns true when this call made the promise, false when it stood already.
+ */
+export async function promiseMessage(trx: Db, message: NewMessage, now: Date): Promise<boolean> {
+  const [row] = await trx('messages')
+    .insert({
+      dedupe_key: message.dedupeKey,
+      user_id: message.userId,
+      rink_id: message.rinkId ?? null,
+      night_date: message.nightDate ?? null,
+      channel: message.channel,
+      kind: message.kind,
+      content: JSON.stringify(message.content),
+      window_id: message.windowId ?? null,
+      send_at: message.sendAt,
+      expires_at: message.expiresAt,
+      created_at: now,
+    })
+    .onConflict('dedupe_key')
+    .ignore()
+    .returning('id')
+  if (!row) return false
+  await enqueueDelivery(trx, row.id as string, message.sendAt)
+  return true
+}
+
+/** One pending delivery job per message, however often it is asked for. */
+export async function enqueueDelivery(trx: Db, messageId: string, runAt: Date): Promise<void> {
+  await trx.raw(`select graphile_worker.add_job('deliver-message', :payload::json, run_at => :runAt, job_key => :key)`, {
+    payload: JSON.stringify({ messageId }),
+    runAt,
+    key: `message:${messageId}`,
+  })
+}

@@ -1,0 +1,8 @@
+// The scheduled job acts for nobody in particular. Importable from jobs/ only (eslint.config.mjs).
+import type { RinkPermission } from './permissions'
+import type { RinkAccess } from './proofs'
+
+/** A proof for work that no person asked for. */
+export function systemRinkAccess<P extends RinkPermission>(rinkId: string): RinkAccess<P> {
+  return { rinkId } as RinkAccess<P>
+}

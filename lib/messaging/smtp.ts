@@ -62,7 +62,10 @@ function toDeliveryError(error: unknown): DeliveryError {
   // No cause: its text carries the address that the server refused.
   const reason = redactReason(response || message)
   const isRefusedRecipient = command === 'RCPT TO' && response !== undefined && isDeadMailbox(response)
-  return new DeliveryError(`mail not accepted (${[code, command].filter(Boolean).join(', ')}): ${reason}`, isRefusedRecipient)
+  return new DeliveryError(
+    `mail not accepted (${[code, command].filter(Boolean).join(', ')}): ${reason}`,
+    isRefusedRecipient,
+  )
 }
 
 /**

@@ -73,7 +73,8 @@ function areUsableKeys({ p256dh, auth }: PushMessage['subscription']): boolean {
 const PERMANENT_STATUSES = [404, 410, 413]
 
 function toDeliveryError(error: unknown): DeliveryError {
-  if (!(error instanceof webPush.WebPushError)) return new DeliveryError('push service not reached', false, { cause: error })
+  if (!(error instanceof webPush.WebPushError))
+    return new DeliveryError('push service not reached', false, { cause: error })
   const { statusCode, headers, body } = error
   const reason = `push service answered ${statusCode} ${redactReason(body)}`.trim()
   return new DeliveryError(reason, PERMANENT_STATUSES.includes(statusCode), {

@@ -3,6 +3,7 @@ import path from 'node:path'
 import { fileURLToPath } from 'node:url'
 import knex, { type Knex } from 'knex'
 import pg from 'pg'
+import './types'
 
 /** A pool or a transaction: queries do not care which. */
 export type Db = Knex

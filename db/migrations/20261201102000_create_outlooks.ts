@@ -25,6 +25,8 @@ export async function up(knex: Knex): Promise<void> {
       settings_version integer not null,
       model_version text not null,
       judged_at timestamptz not null,
+      -- The hour it was judged in: the same forecast is judged again in the next hour when no newer one came.
+      slot_at timestamptz not null check (slot_at = date_trunc('hour', slot_at)),
       time_zone text not null,
       -- Tonight, as the rink's zone counts it.
       night_date date not null,
@@ -33,7 +35,7 @@ export async function up(knex: Knex): Promise<void> {
       summary jsonb not null,
       fill jsonb not null,
       thaws jsonb not null,
-      unique (rink_id, forecast_id, settings_version)
+      unique (rink_id, forecast_id, settings_version, slot_at)
     );
     create index outlooks_rink_id_judged_at_idx on outlooks (rink_id, judged_at desc);
     create index outlooks_forecast_id_idx on outlooks (forecast_id);

@@ -1,0 +1,38 @@
+// Who belongs to a rink, and as what.
+import type { Db } from '@/db/knex'
+import type { RinkAccess } from '@/lib/access/proofs'
+import type { Role } from '@/lib/access/permissions'
+
+export interface MemberRow {
+  userId: string
+  name: string
+  role: Role
+}
+
+const UUID = /^[0-9a-f]{8}-[0-9a-f]{4}-[0-9a-f]{4}-[0-9a-f]{4}-[0-9a-f]{12}$/i
+
+/** Needs no proof: it is what proofs are made from. An id that is no UUID belongs to nothing. */
+export async function findMembership(
+  db: Db,
+  { rinkId, userId }: { rinkId: string; userId: string },
+): Promise<{ role: Role } | undefined> {
+  if (!UUID.test(rinkId)) return undefined
+  return db('rink_members').where({ rink_id: rinkId, user_id: userId }).first('role')
+}
+
+export async function listMembers(db: Db, access: RinkAccess): Promise<MemberRow[]> {
+  return db('rink_members as m')
+    .join('users as u', 'u.id', 'm.user_id')
+    .where('m.rink_id', access.rinkId)
+    .orderBy(['m.joined_at', 'u.id'])
+    .select({ userId: 'u.id', name: 'u.name', role: 'm.role' })
+}
+
+/** The person who sets a rink up keeps it. */
+export async function insertMember(
+  db: Db,
+  member: { rinkId: string; userId: string; role: Role },
+  now: Date,
+): Promise<void> {
+  await db('rink_members').insert({ rink_id: member.rinkId, user_id: member.userId, role: member.role, joined_at: now })
+}

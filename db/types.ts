@@ -1,0 +1,271 @@
+// One row type per table, and Knex's map of them. Instants are Date, nights are text, ids are strings.
+import type { Knex } from 'knex'
+import type { Role } from '@/lib/access/permissions'
+
+export interface UserRow {
+  id: string
+  email: string
+  name: string
+  password_hash: string | null
+  email_verified_at: Date | null
+  is_admin: boolean
+  units: 'metric' | 'imperial'
+  clock: '12' | '24'
+  created_at: Date
+  updated_at: Date
+}
+
+export interface SessionRow {
+  token_hash: string
+  user_id: string
+  created_at: Date
+  expires_at: Date
+}
+
+export interface AccountLinkRow {
+  id: string
+  user_id: string
+  purpose: 'verify' | 'sign-in' | 'reset'
+  created_at: Date
+  expires_at: Date
+  used_at: Date | null
+}
+
+export interface RateLimitRow {
+  key: string
+  window_starts_at: Date
+  hits: number
+}
+
+export interface GridCellRow {
+  id: string
+  latitude_deg: number
+  longitude_deg: number
+  last_tried_at: Date | null
+  last_error: string | null
+  retry_at: Date | null
+}
+
+export interface RinkRow {
+  id: string
+  name: string
+  place_name: string
+  latitude_deg: number
+  longitude_deg: number
+  grid_cell_id: string
+  time_zone: string
+  length_m: number
+  width_m: number
+  base: 'liner' | 'ground' | 'snow'
+  phase: 'planning' | 'waiting' | 'filling' | 'freezing' | 'skating' | 'thaw' | 'closed'
+  shelter: 'open' | 'suburban' | 'tight'
+  sky_view: number
+  max_passes: number
+  settings_version: number
+  created_by: string | null
+  creation_key: string
+  created_at: Date
+  updated_at: Date
+}
+
+export interface RinkMemberRow {
+  rink_id: string
+  user_id: string
+  role: Role
+  joined_at: Date
+}
+
+export interface WaterSourceRow {
+  id: string
+  rink_id: string
+  kind: 'cold-tap' | 'hot-tap' | 'hydrant' | 'tanker'
+  flow_l_per_min: number
+  temperature_c: number
+  layer_mm: number
+  fill_depth_mm: number
+  is_default: boolean
+}
+
+export interface AvailableHoursRow {
+  rink_id: string
+  from_local: string
+  to_local: string
+}
+
+export interface SheetStateRow {
+  rink_id: string
+  as_of: Date
+  origin: 'reported' | 'modelled'
+  model_version: string | null
+  thickness_mm: number
+  temperature_c: number
+  snow_cover_cm: number
+  /** The model's own state, opaque to the database; absent when a person reported the sheet. */
+  state: unknown
+}
+
+export interface FloodRow {
+  id: string
+  rink_id: string
+  night_date: string
+  pass_number: number
+  poured_at: Date
+  layer_mm: number
+  water_l: number
+  water_temperature_c: number
+  poured_by: string | null
+  created_at: Date
+}
+
+export interface ForecastRow {
+  id: string
+  grid_cell_id: string
+  provider: string
+  slot_at: Date
+  issued_at: Date | null
+  fetched_at: Date
+  expires_at: Date
+  hours: unknown
+  members: unknown
+  attribution: unknown
+}
+
+export interface OutlookRow {
+  id: string
+  rink_id: string
+  forecast_id: string
+  settings_version: number
+  model_version: string
+  judged_at: Date
+  slot_at: Date
+  time_zone: string
+  night_date: string
+  verdict: 'fill' | 'flood' | 'hold' | 'unknown'
+  summary: unknown
+  fill: unknown
+  thaws: unknown
+}
+
+export interface ScoredHourRow {
+  outlook_id: string
+  starts_at: Date
+  is_known: boolean
+  net_heat_loss_wm2: number | null
+  freeze_rate_mm_per_h: number | null
+  wind_chill_c: number | null
+  sets_at: Date | null
+  fill_score: number
+  flood_score: number
+  hold_score: number
+  verdict: 'fill' | 'flood' | 'hold'
+  parts: unknown
+  reasons: unknown
+  sheet: unknown
+}
+
+export interface AdvisedWindowRow {
+  id: string
+  rink_id: string
+  night_date: string
+  time_zone: string
+  kind: 'fill' | 'flood'
+  version: number
+  state: 'open' | 'closed'
+  outlook_id: string | null
+  forecast_id: string
+  model_version: string
+  advised_at: Date
+  starts_at: Date | null
+  ends_at: Date | null
+  latest_start_at: Date | null
+  set_by_at: Date | null
+  score: number | null
+  agreement: number | null
+  runs: number | null
+  passes: unknown
+  closed_reason: unknown
+}
+
+export interface AlertPreferenceRow {
+  rink_id: string
+  user_id: string
+  tell_at: string
+  wants_email: boolean
+  wants_push: boolean
+  muted_through: string | null
+  updated_at: Date
+}
+
+export interface PushSubscriptionRow {
+  id: string
+  user_id: string
+  endpoint: string
+  p256dh: string
+  auth: string
+  created_at: Date
+  disabled_at: Date | null
+  disabled_reason: string | null
+}
+
+export interface MessageRow {
+  id: string
+  dedupe_key: string
+  user_id: string
+  rink_id: string | null
+  night_date: string | null
+  channel: 'email' | 'push'
+  kind: string
+  content: unknown
+  window_id: string | null
+  send_at: Date
+  expires_at: Date
+  state: 'promised' | 'delivered' | 'expired' | 'dead'
+  settled_at: Date | null
+  created_at: Date
+}
+
+export interface DeliveryAttemptRow {
+  id: string
+  message_id: string
+  push_subscription_id: string | null
+  attempted_at: Date
+  outcome: 'delivered' | 'temporary' | 'permanent'
+  error: string | null
+}
+
+export interface JobRunRow {
+  job: string
+  key: string
+  last_started_at: Date
+  last_succeeded_at: Date | null
+  last_failed_at: Date | null
+  last_error: string | null
+}
+
+/** Inserts may leave out what the database fills in; updates may name any column. */
+type Table<Row> = Knex.CompositeTableType<Row, Partial<Row>, Partial<Row>>
+
+declare module 'knex/types/tables.js' {
+  interface Tables {
+    users: Table<UserRow>
+    sessions: Table<SessionRow>
+    account_links: Table<AccountLinkRow>
+    rate_limits: Table<RateLimitRow>
+    grid_cells: Table<GridCellRow>
+    rinks: Table<RinkRow>
+    rink_members: Table<RinkMemberRow>
+    water_sources: Table<WaterSourceRow>
+    available_hours: Table<AvailableHoursRow>
+    sheet_states: Table<SheetStateRow>
+    floods: Table<FloodRow>
+    forecasts: Table<ForecastRow>
+    outlooks: Table<OutlookRow>
+    scored_hours: Table<ScoredHourRow>
+    advised_windows: Table<AdvisedWindowRow>
+    alert_preferences: Table<AlertPreferenceRow>
+    push_subscriptions: Table<PushSubscriptionRow>
+    messages: Table<MessageRow>
+    delivery_attempts: Table<DeliveryAttemptRow>
+    job_runs: Table<JobRunRow>
+  }
+}

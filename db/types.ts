@@ -159,6 +159,8 @@ export interface ScoredHourRow {
   hold_score: number
   verdict: 'fill' | 'flood' | 'hold'
   parts: unknown
+  weather: unknown
+  limits: unknown
   reasons: unknown
   sheet: unknown
 }

@@ -53,6 +53,8 @@ export async function up(knex: Knex): Promise<void> {
       hold_score smallint not null check (hold_score between 0 and 100),
       verdict text not null check (verdict in ('fill', 'flood', 'hold')),
       parts jsonb,
+      weather jsonb,
+      limits jsonb,
       reasons jsonb not null,
       sheet jsonb not null,
       check (is_known or verdict = 'hold'),

@@ -183,15 +183,13 @@ export async function findRinkForJudging(db: Db, rinkId: string): Promise<RinkFo
     })
   if (!rink) return undefined
   const { cellLatitudeDeg, cellLongitudeDeg, ...settings } = rink
-  const water = await db('water_sources')
-    .where({ rink_id: rinkId, is_default: true })
-    .first({
-      kind: 'kind',
-      flowLPerMin: 'flow_l_per_min',
-      temperatureC: 'temperature_c',
-      layerMm: 'layer_mm',
-      fillDepthMm: 'fill_depth_mm',
-    })
+  const water = await db('water_sources').where({ rink_id: rinkId, is_default: true }).first({
+    kind: 'kind',
+    flowLPerMin: 'flow_l_per_min',
+    temperatureC: 'temperature_c',
+    layerMm: 'layer_mm',
+    fillDepthMm: 'fill_depth_mm',
+  })
   const available = await db('available_hours')
     .where({ rink_id: rinkId })
     .orderBy('from_local')

@@ -2,15 +2,9 @@
 import type { Role } from '@/lib/access/permissions'
 import type { NightSummary } from '@/lib/advice/night-summary'
 import type { PlannedPass, ScoredHour, Thaw, Phase } from '@/lib/advice/types'
-import type { HourlyRecord } from '@/lib/physics/types'
 
-/** One hour of the night sheet: the weather and what the model made of it. */
-export interface TonightHour extends ScoredHour {
-  weather: Pick<
-    HourlyRecord,
-    'airTemperatureC' | 'dewPointC' | 'windSpeedMps' | 'windGustMps' | 'cloudCover' | 'precipitationMm' | 'rainMm' | 'snowfallCm'
-  >
-}
+/** One hour of the night sheet: what the model made of it, with the weather it rests on. */
+export type TonightHour = ScoredHour
 
 /** One calendar day in the rink's zone, for the ten-day chart. Null where hours are missing. */
 export interface DayAhead {

@@ -5,16 +5,23 @@ const base64Url = (what: string) => z.string().regex(/^[A-Za-z0-9_-]{40,}$/, `mu
 
 const environmentSchema = z.object({
   DATABASE_URL: z.string().regex(/^postgres(ql)?:\/\//, 'must be a postgres:// address'),
-  PUBLIC_URL: z.url({ protocol: /^https?$/, message: 'must be the http(s) address that people type' }).transform((url) => url.replace(/\/$/, '')),
+  PUBLIC_URL: z
+    .url({ protocol: /^https?$/, message: 'must be the http(s) address that people type' })
+    .transform((url) => url.replace(/\/$/, '')),
   NEXTAUTH_SECRET: z.string().min(32, 'must be at least 32 random characters'),
   WEATHER_PROVIDER: z.enum(['open-meteo'], 'must be open-meteo').default('open-meteo'),
   OPEN_METEO_URL: z.url('must be an http(s) address').default('https://api.open-meteo.com'),
   OPEN_METEO_API_KEY: z.string().optional(),
+  /** Asks for the other runs too, which weighs ten times a forecast against the quota. */
+  OPEN_METEO_ENSEMBLE_URL: z.url('must be an http(s) address').optional(),
   SMTP_URL: z.string().regex(/^smtps?:\/\//, 'must be an smtp:// or smtps:// address'),
   MAIL_FROM: z.string().min(3).default('Nightsheet <nightsheet@localhost>'),
   VAPID_PUBLIC_KEY: base64Url('VAPID public key'),
   VAPID_PRIVATE_KEY: base64Url('VAPID private key'),
-  VAPID_SUBJECT: z.string().regex(/^(mailto:|https:)/, 'must be a mailto: or https: address').default('mailto:nightsheet@localhost'),
+  VAPID_SUBJECT: z
+    .string()
+    .regex(/^(mailto:|https:)/, 'must be a mailto: or https: address')
+    .default('mailto:nightsheet@localhost'),
   /** Push services besides the browsers' own, comma-separated origins: the local fake, a self-hosted one. */
   PUSH_ORIGINS: z
     .string()
@@ -23,7 +30,10 @@ const environmentSchema = z.object({
   /** PEM file of a certificate authority that PUSH_ORIGINS use. */
   PUSH_CA_FILE: z.string().optional(),
   /** Takes the address of the visitor from X-Forwarded-For: only behind a proxy that sets it. */
-  TRUST_PROXY: z.enum(['0', '1']).default('0').transform((value) => value === '1'),
+  TRUST_PROXY: z
+    .enum(['0', '1'])
+    .default('0')
+    .transform((value) => value === '1'),
 })
 
 export type Environment = z.infer<typeof environmentSchema>

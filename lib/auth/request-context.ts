@@ -1,0 +1,35 @@
+// Who asks, and when: every page, action and route handler starts with one of these.
+import 'server-only'
+import { headers } from 'next/headers'
+import { redirect } from 'next/navigation'
+import { connection } from 'next/server'
+import { readClock } from '@/lib/clock'
+import type { ServiceContext, Viewer } from '@/lib/context'
+import { NotSignedInError } from '@/lib/errors'
+import { localPath } from './next-path'
+import { sharedPool } from './pool'
+import { readViewer } from './session'
+
+/** The path that proxy.ts wrote down; pages do not know their own address. */
+export const PATH_HEADER = 'x-nightsheet-path'
+
+/** The viewer, or undefined for a stranger. */
+export async function maybeViewer(): Promise<Viewer | undefined> {
+  await connection()
+  return readViewer()
+}
+
+/** For actions and route handlers. @throws NotSignedInError */
+export async function requestContext(): Promise<ServiceContext> {
+  const viewer = await maybeViewer()
+  if (!viewer) throw new NotSignedInError()
+  return { db: sharedPool(), now: readClock(), viewer }
+}
+
+/** For pages: strangers go to sign-in, and come back afterwards. */
+export async function pageContext(): Promise<ServiceContext> {
+  const viewer = await maybeViewer()
+  if (viewer) return { db: sharedPool(), now: readClock(), viewer }
+  const path = localPath((await headers()).get(PATH_HEADER))
+  redirect(path ? `/sign-in?next=${encodeURIComponent(path)}` : '/sign-in')
+}

@@ -1,0 +1,51 @@
+// Every server action of a form runs inside formAction(): parse, one piece of work, and a state that the form can show.
+import { unstable_rethrow } from 'next/navigation'
+import { ZodError, type z } from 'zod'
+import { AppError, InvalidInputError } from '@/lib/errors'
+import { faultsByField, INVALID_INPUT_MESSAGE } from './errors-by-field'
+import type { FormState } from './form-state'
+
+/** Runs with the parsed input; what it returns is shown as the good news. A redirect passes through. */
+type Work<S extends z.ZodType> = (input: z.output<S>) => Promise<string | void>
+
+/** The text fields of a form. Next's own fields and files are left out. */
+function textFields(formData: FormData): Record<string, string> {
+  const fields: Record<string, string> = {}
+  for (const [name, value] of formData) {
+    if (typeof value === 'string' && !name.startsWith('$ACTION')) fields[name] = value
+  }
+  return fields
+}
+
+function withoutPasswords(fields: Record<string, string>): Record<string, string> {
+  return Object.fromEntries(Object.entries(fields).filter(([name]) => !/password/i.test(name)))
+}
+
+function faultState(error: unknown, values: Record<string, string>): FormState {
+  if (error instanceof ZodError) {
+    return { status: 'error', message: INVALID_INPUT_MESSAGE, fields: faultsByField(error), values }
+  }
+  if (error instanceof AppError) {
+    const fields = error instanceof InvalidInputError ? error.fields : {}
+    return { status: 'error', message: error.message, fields, values }
+  }
+  throw error
+}
+
+/** Makes a server action for useActionState. Errors that are not meant for people go on to error.tsx. */
+export function formAction<S extends z.ZodType>(
+  schema: S,
+  work: Work<S>,
+): (state: FormState, formData: FormData) => Promise<FormState> {
+  return async (_state, formData) => {
+    const fields = textFields(formData)
+    const values = withoutPasswords(fields)
+    try {
+      const message = await work(schema.parse(fields))
+      return { status: 'ok', message: message ?? undefined, values }
+    } catch (error) {
+      unstable_rethrow(error)
+      return faultState(error, values)
+    }
+  }
+}

@@ -72,7 +72,9 @@ export function findPlace(wanted) {
   }
   if (fs.existsSync(wanted) && fs.statSync(wanted).uid !== process.getuid()) {
     const name = nameOf(fs.statSync(wanted).uid)
-    throw new Problem(`The database in ${wanted} belongs to ${name}: start as that user or as root, or remove the folder and its data.`)
+    throw new Problem(
+      `The database in ${wanted} belongs to ${name}: start as that user or as root, or remove the folder and its data.`,
+    )
   }
   return { folder: wanted, owner: undefined }
 }

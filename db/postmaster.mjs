@@ -40,6 +40,7 @@ export function findPostmaster(folder) {
 export function disownStalePidFile(folder) {
   const lines = readPidFile(folder)
   if (!lines || findPostmaster(folder)) return
-  if (Number(lines[0]) > 0 && lines.length > 6) fs.writeFileSync(pidFile(folder), [NOBODY, ...lines.slice(1)].join('\n'))
+  if (Number(lines[0]) > 0 && lines.length > 6)
+    fs.writeFileSync(pidFile(folder), [NOBODY, ...lines.slice(1)].join('\n'))
   else fs.rmSync(pidFile(folder))
 }

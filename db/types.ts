@@ -142,8 +142,7 @@ export interface OutlookRow {
   night_date: string
   verdict: 'fill' | 'flood' | 'hold' | 'unknown'
   summary: unknown
-  fill: unknown
-  thaws: unknown
+  advice: unknown
 }
 
 export interface ScoredHourRow {
@@ -158,11 +157,8 @@ export interface ScoredHourRow {
   flood_score: number
   hold_score: number
   verdict: 'fill' | 'flood' | 'hold'
-  parts: unknown
-  weather: unknown
-  limits: unknown
   reasons: unknown
-  sheet: unknown
+  detail: unknown
 }
 
 export interface AdvisedWindowRow {

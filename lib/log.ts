@@ -11,7 +11,8 @@ export function logEvent(event: string, fields: Fields = {}): void {
 /** Logs a failure with its message and the messages of its causes; stacks stay in `stack`. */
 export function logFailure(event: string, error: unknown, fields: Fields = {}): void {
   const messages: string[] = []
-  for (let e: unknown = error; e instanceof Error && messages.length < 5; e = e.cause) messages.push(`${e.name}: ${e.message}`)
+  for (let e: unknown = error; e instanceof Error && messages.length < 5; e = e.cause)
+    messages.push(`${e.name}: ${e.message}`)
   const stack = error instanceof Error ? error.stack?.split('\n').slice(1, 6).join(' | ') : undefined
   process.stderr.write(
     `${JSON.stringify({ at: readClock().toISOString(), event, ...fields, error: messages.join(' <- ') || String(error), stack })}\n`,

@@ -12,7 +12,11 @@ const LOOKS: Record<Look, string> = {
   quiet: 'text-ink underline',
 }
 
-export function Button({ look = 'plain', className = '', ...rest }: ButtonHTMLAttributes<HTMLButtonElement> & { look?: Look }) {
+export function Button({
+  look = 'plain',
+  className = '',
+  ...rest
+}: ButtonHTMLAttributes<HTMLButtonElement> & { look?: Look }) {
   return <button type="button" className={`${SHAPE} ${LOOKS[look]} cursor-pointer ${className}`} {...rest} />
 }
 

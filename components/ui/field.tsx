@@ -36,7 +36,14 @@ export function FieldFrame({ label, name, hint, error, children }: Around & { ch
   )
 }
 
-export function TextField({ label, name, hint, error, unit, ...rest }: Around & { unit?: string } & InputHTMLAttributes<HTMLInputElement>) {
+export function TextField({
+  label,
+  name,
+  hint,
+  error,
+  unit,
+  ...rest
+}: Around & { unit?: string } & InputHTMLAttributes<HTMLInputElement>) {
   return (
     <FieldFrame label={label} name={name} hint={hint} error={error}>
       <div className="flex items-center gap-2">

@@ -31,10 +31,9 @@ export async function up(knex: Knex): Promise<void> {
       -- Tonight, as the rink's zone counts it.
       night_date date not null,
       verdict text not null check (verdict in ('fill', 'flood', 'hold', 'unknown')),
-      -- The night in data (lib/advice/night-summary.ts), the fill outlook and the thaws.
+      -- The night in data as it was decided on (lib/advice/night-summary.ts), and all windows, passes and thaws.
       summary jsonb not null,
-      fill jsonb not null,
-      thaws jsonb not null,
+      advice jsonb not null,
       unique (rink_id, forecast_id, settings_version, slot_at)
     );
     create index outlooks_rink_id_judged_at_idx on outlooks (rink_id, judged_at desc);
@@ -52,11 +51,9 @@ export async function up(knex: Knex): Promise<void> {
       flood_score smallint not null check (flood_score between 0 and 100),
       hold_score smallint not null check (hold_score between 0 and 100),
       verdict text not null check (verdict in ('fill', 'flood', 'hold')),
-      parts jsonb,
-      weather jsonb,
-      limits jsonb,
       reasons jsonb not null,
-      sheet jsonb not null,
+      -- Parts of the heat balance, weather, limits and sheet of the hour.
+      detail jsonb not null,
       check (is_known or verdict = 'hold'),
       check (is_known = (net_heat_loss_wm2 is not null)),
       primary key (outlook_id, starts_at)

@@ -1,5 +1,6 @@
 // Promised messages and their deliveries.
 import type { Db } from '@/db/knex'
+import { enqueueJob } from './jobs'
 
 export type MessageKind =
   | 'flood-tonight'
@@ -55,10 +56,6 @@ export async function promiseMessage(trx: Db, message: NewMessage, now: Date): P
 }
 
 /** One pending delivery job per message, however often it is asked for. */
-export async function enqueueDelivery(trx: Db, messageId: string, runAt: Date): Promise<void> {
-  await trx.raw(`select graphile_worker.add_job('deliver-message', :payload::json, run_at => :runAt, job_key => :key)`, {
-    payload: JSON.stringify({ messageId }),
-    runAt,
-    key: `message:${messageId}`,
-  })
+export async function enqueueDelivery(db: Db, messageId: string, runAt: Date): Promise<void> {
+  await enqueueJob(db, 'deliver-message', { messageId }, { key: `message:${messageId}`, runAt })
 }

@@ -29,16 +29,13 @@ export async function countPushSubscriptions(db: Db, userId: string): Promise<nu
 }
 
 export async function listDevices(db: Db, userId: string): Promise<DeviceRow[]> {
-  return db('push_subscriptions')
-    .where({ user_id: userId })
-    .orderBy(['created_at', 'id'])
-    .select({
-      id: 'id',
-      endpoint: 'endpoint',
-      createdAt: 'created_at',
-      disabledAt: 'disabled_at',
-      disabledReason: 'disabled_reason',
-    })
+  return db('push_subscriptions').where({ user_id: userId }).orderBy(['created_at', 'id']).select({
+    id: 'id',
+    endpoint: 'endpoint',
+    createdAt: 'created_at',
+    disabledAt: 'disabled_at',
+    disabledReason: 'disabled_reason',
+  })
 }
 
 /** Where a push to this person goes now. */

@@ -1,0 +1,37 @@
+// Is there something to tell one person about tonight, now? Once per thing worth saying, silence otherwise.
+
+export type AlertKind = 'flood-tonight' | 'flood-changed' | 'flood-closed'
+
+export interface AlertQuestion {
+  now: Date
+  /** The person's own time of day on this night. */
+  tellAt: Date
+  isMuted: boolean
+  /** Advice from an old forecast is shown with its age and never sent. */
+  isForecastStale: boolean
+  /** The advised flood window that stands, by version. */
+  window: { version: number; state: 'open' | 'closed'; latestStartAt: Date | null } | null
+  /** What the person was told last for this night. */
+  told: { version: number; kind: AlertKind } | null
+  /** Change messages sent for this night so far. */
+  changesTold: number
+  /** Somebody is out flooding: from here on the crew sees for itself. */
+  hasPoured: boolean
+}
+
+/** A forecast that flips all evening must not ring all evening. Ours. */
+const MOST_CHANGES_A_NIGHT = 3
+
+/**
+ * What to tell now, or null. Same question, same answer; the caller's unique key makes it happen once.
+ * In a thaw no window is advised, so nothing is due: that is the silence.
+ */
+export function dueAlert(question: AlertQuestion): AlertKind | null {
+  const { now, tellAt, window, told } = question
+  if (!window || question.isMuted || question.isForecastStale || question.hasPoured || now < tellAt) return null
+  if (window.state === 'open' && window.latestStartAt && now >= window.latestStartAt) return null
+  if (!told) return window.state === 'open' ? 'flood-tonight' : null
+  if (told.version >= window.version || question.changesTold >= MOST_CHANGES_A_NIGHT) return null
+  if (window.state === 'open') return 'flood-changed'
+  return told.kind === 'flood-closed' ? null : 'flood-closed'
+}

@@ -6,6 +6,9 @@ export type Base = 'liner' | 'ground' | 'snow'
 export type ShelterName = 'open' | 'suburban' | 'tight'
 export type Verdict = 'fill' | 'flood' | 'hold'
 
+/** A sheet's state as kept between runs: plain JSON, opaque outside lib/physics. */
+export type StoredSheet = unknown
+
 /** One request for judgement. Everything it depends on is in here: same input, same output. */
 export interface JudgeInput {
   /** Nothing before this hour is advised. ISO 8601, UTC. */
@@ -25,7 +28,15 @@ export interface JudgeInput {
   }
   water: { temperatureC: number; flowLPerMin: number; layerMm: number; fillDepthMm: number }
   /** The sheet at `asOf` (default: at the first hour). */
-  sheet: { thicknessMm: number; temperatureC: number; snowCoverCm: number; liquidMm?: number; asOf?: string }
+  sheet: {
+    thicknessMm: number
+    temperatureC: number
+    snowCoverCm: number
+    liquidMm?: number
+    asOf?: string
+    /** A state kept from an earlier judgement (`sheetState.state`); it wins over the plain numbers. */
+    state?: StoredSheet
+  }
   /** When the keeper can go out, local wall time "HH:MM"; `to` before `from` runs past midnight. */
   available: { from: string; to: string }[]
   maxPasses: number
@@ -52,6 +63,19 @@ export interface SheetReport {
   snowCoverCm: number
 }
 
+/** The weather that an hour's score rests on, at the yard. */
+export interface HourWeather {
+  airTemperatureC: number
+  dewPointC: number
+  /** At rink height, after the yard's shelter. [m/s] */
+  windAtRinkMps: number
+  /** 0-1, null when neither cloud nor longwave was given */
+  cloudCover: number | null
+  precipitationMm: number
+  rainMm: number
+  snowfallCm: number
+}
+
 export interface ScoredHour {
   time: string
   /** False when weather is missing for longer than one hour: scores are 0/0/100 and the verdict is hold. */
@@ -69,6 +93,12 @@ export interface ScoredHour {
   reasons: Reason[]
   /** At the end of the hour. */
   sheet: SheetReport
+  /** 0-100 each and never averaged: what the ice allows and what the person and the hose allow. */
+  limits?: { ice: number; person: number }
+  /** Null when the weather is unknown. */
+  weather?: HourWeather | null
+  /** Whether the keeper can go out in this hour; windows and plans keep to such hours, scores do not. */
+  isAvailable?: boolean
 }
 
 export interface AdviceWindow {
@@ -85,6 +115,8 @@ export interface AdviceWindow {
   /** Share of forecast runs that agree, 0-1, and how many runs that is out of. */
   agreement: number
   runs: number
+  /** Start of the best hour in it. */
+  bestStartAt?: string
 }
 
 export interface PlannedPass {
@@ -117,4 +149,30 @@ export interface Judgement {
   plan: { passes: PlannedPass[] }
   fill: FillOutlook
   thaws: Thaw[]
+  /** The sheet at `options.stateAt`, plain JSON: feed it back as `sheet.state` with `asOf` set to `at`. */
+  sheetState?: { at: string; state: StoredSheet }
+}
+
+export interface JudgeOptions {
+  /** Perturbed runs to judge when no members are given; 0 turns agreement into the main run's own word. Default 10. */
+  runs?: number
+  /** Seed of the perturbed runs. */
+  seed?: number
+  /** Ask for the sheet's state at the start of this hour. */
+  stateAt?: string
+}
+
+/** Snow or rain that ends the good hours or comes after them. */
+export interface ComingPrecipitation {
+  kind: 'snow' | 'rain'
+  startsAt: string
+  endsAt: string
+  rainMm: number
+  snowfallCm: number
+}
+
+/** Something the keeper must mind tonight; `code` and numbers, words are made in lib/words. */
+export interface Caution {
+  code: string
+  values: Record<string, number | string>
 }

@@ -1,0 +1,147 @@
+// One night in data: the verdict, its window and passes, why, and what to mind. Page, alerts and words all use this.
+import { nightBounds } from './night'
+import { cautionsOf, whyOf } from './night-why'
+import { toIso } from './zoned-time'
+import type {
+  AdviceWindow,
+  Caution,
+  ComingPrecipitation,
+  Judgement,
+  PlannedPass,
+  Reason,
+  ScoredHour,
+  Thaw,
+} from './types'
+
+export type NightVerdict = 'flood' | 'fill' | 'hold' | 'unknown'
+
+export interface NightSummary {
+  nightDate: string
+  startsAt: string
+  endsAt: string
+  verdict: NightVerdict
+  /** The longest window of the night, the better one of two equals. */
+  window: AdviceWindow | null
+  /** All windows that touch the night, in order of time. */
+  windows: AdviceWindow[]
+  /** Passes planned in this night. */
+  passes: PlannedPass[]
+  lastSetBy: string | null
+  /** Share of forecast runs that agree with the window, and out of how many; null without a window. */
+  agreement: number | null
+  runs: number
+  /** Why to hold, when the verdict is hold. */
+  leadingReason: Reason | null
+  /** Start of the first window after this night. */
+  nextGoodAt: string | null
+  nextKind: 'fill' | 'flood' | null
+  /** Until when nothing needs doing: the next window, else the end of the thaw, else unknown. */
+  holdUntil: string | null
+  /** First snow or rain after now within the night and the twelve hours after it. */
+  precipitation: ComingPrecipitation | null
+  thaw: Thaw | null
+  /** Reasons for the list "why these hours", weightiest first. */
+  why: Reason[]
+  cautions: Caution[]
+}
+
+const PRECIPITATION_LOOKAHEAD_MILLIS = 12 * 3_600_000
+/** A trace below this is not worth a word; the limit of the advice is in thresholds.ts. */
+const WORTH_SAYING_MM = 0.1
+
+/**
+ * What a judgement says of one night.
+ *
+ * @param judgement Result of `judge`, or the same shape read back from storage.
+ * @param options.nightDate 'yyyy-MM-dd', see night.ts.
+ * @param options.now Nothing before it is advised.
+ * @param options.timeZone IANA zone of the rink.
+ */
+export function summariseNight(
+  judgement: Judgement,
+  options: { nightDate: string; now: Date; timeZone: string },
+): NightSummary {
+  const bounds = nightBounds(options.nightDate, options.timeZone)
+  const fromMillis = Math.max(bounds.startsAt.getTime(), options.now.getTime())
+  const toMillis = bounds.endsAt.getTime()
+  const hours = judgement.hours.filter((hour) => {
+    const startsAt = Date.parse(hour.time)
+    return startsAt + 3_600_000 > fromMillis && startsAt < toMillis
+  })
+  const windows = judgement.windows.filter(
+    (w) => Date.parse(w.endsAt) > fromMillis && Date.parse(w.startsAt) < toMillis,
+  )
+  const window = longestOf(windows)
+  const passes = judgement.plan.passes.filter((pass) => isWithin(pass.startsAt, fromMillis - 900_000, toMillis))
+  const verdict = window?.kind ?? (hours.some((hour) => hour.isKnown) ? 'hold' : 'unknown')
+  const next = judgement.windows.find((w) => Date.parse(w.startsAt) >= toMillis) ?? null
+  const thaw =
+    judgement.thaws.find((t) => Date.parse(t.endsAt) > fromMillis && Date.parse(t.startsAt) < toMillis) ?? null
+  const precipitation = nextPrecipitation(judgement.hours, fromMillis, toMillis + PRECIPITATION_LOOKAHEAD_MILLIS)
+  return {
+    nightDate: options.nightDate,
+    startsAt: toIso(bounds.startsAt.getTime()),
+    endsAt: toIso(bounds.endsAt.getTime()),
+    verdict,
+    window,
+    windows,
+    passes,
+    lastSetBy: passes.at(-1)?.setBy ?? null,
+    agreement: window?.agreement ?? null,
+    runs: window?.runs ?? 0,
+    leadingReason: verdict === 'hold' ? leadingHoldReason(hours) : null,
+    nextGoodAt: next?.startsAt ?? null,
+    nextKind: next?.kind ?? null,
+    holdUntil: verdict === 'hold' ? (next?.startsAt ?? thaw?.endsAt ?? null) : null,
+    precipitation,
+    thaw,
+    why: whyOf(hours, window, precipitation),
+    cautions: cautionsOf(hours, window, passes),
+  }
+}
+
+function isWithin(time: string, fromMillis: number, toMillis: number): boolean {
+  const at = Date.parse(time)
+  return at >= fromMillis && at < toMillis
+}
+
+function longestOf(windows: AdviceWindow[]): AdviceWindow | null {
+  const lengthOf = (w: AdviceWindow) => Date.parse(w.endsAt) - Date.parse(w.startsAt)
+  return [...windows].sort((a, b) => lengthOf(b) - lengthOf(a) || b.score - a.score)[0] ?? null
+}
+
+/** The reason that leads in most of the hours in which the keeper could go out; earliest first among equals. */
+function leadingHoldReason(hours: ScoredHour[]): Reason | null {
+  const known = hours.filter((hour) => hour.isKnown)
+  const outside = known.filter((hour) => hour.verdict !== 'hold' && hour.isAvailable === false)
+  const first = outside[0]
+  if (first) {
+    const lastMillis = Date.parse((outside.at(-1) ?? first).time) + 3_600_000
+    return { code: 'outside_your_hours', factor: 0, values: { startsAt: first.time, endsAt: toIso(lastMillis) } }
+  }
+  const reachable = known.filter((hour) => hour.isAvailable !== false)
+  const leads = (reachable.length > 0 ? reachable : known).flatMap((hour) => hour.reasons.slice(0, 1))
+  const counts = new Map<string, number>()
+  for (const lead of leads) counts.set(lead.code, (counts.get(lead.code) ?? 0) + 1)
+  const most = Math.max(0, ...counts.values())
+  return leads.find((lead) => counts.get(lead.code) === most) ?? null
+}
+
+function nextPrecipitation(hours: ScoredHour[], fromMillis: number, toMillis: number): ComingPrecipitation | null {
+  let coming: ComingPrecipitation | null = null
+  for (const { time, weather } of hours) {
+    const startsAt = Date.parse(time)
+    if (startsAt + 3_600_000 <= fromMillis || startsAt >= toMillis) continue
+    const isWet = weather != null && (weather.precipitationMm > WORTH_SAYING_MM || weather.snowfallCm > WORTH_SAYING_MM)
+    if (!isWet) {
+      if (coming) break
+      continue
+    }
+    const kind = weather.snowfallCm > 0 ? 'snow' : 'rain'
+    coming ??= { kind, startsAt: time, endsAt: time, rainMm: 0, snowfallCm: 0 }
+    coming.endsAt = toIso(startsAt + 3_600_000)
+    coming.rainMm += weather.rainMm
+    coming.snowfallCm += weather.snowfallCm
+  }
+  return coming
+}

@@ -2,14 +2,14 @@
 import { spawn } from 'node:child_process'
 import fs from 'node:fs'
 import path from 'node:path'
-import { fileURLToPath, pathToFileURL } from 'node:url'
 
 import { Problem } from './problem.mjs'
 
-const DIE_WITH_PARENT = pathToFileURL(fileURLToPath(new URL('./die-with-parent.mjs', import.meta.url))).href
-const running = new Set()
+const DIE_WITH_PARENT = new URL('./die-with-parent.mjs', import.meta.url).href
+const children = new Set()
+const runs = new Set()
 
-/** Field of /proc/<pid>/…; undefined when there is no such process or it is not ours to see. */
+/** A file of /proc/<pid>; undefined when there is no such process or it is not ours to see. */
 function readProc(pid, name) {
   try {
     return fs.readFileSync(`/proc/${pid}/${name}`, 'utf8')
@@ -24,14 +24,14 @@ export function isAlive(pid) {
   return state !== undefined && state !== 'Z' && state !== 'X'
 }
 
-/** Name, arguments and start time in clock ticks: together they tell a process from a later one of the same number. */
+/** Name, arguments and start in clock ticks (proc(5), stat, field 22), which tells it from a later one of the same number. */
 export function describeProcess(pid) {
   const stat = readProc(pid, 'stat') ?? ''
-  const afterName = stat.slice(stat.lastIndexOf(')') + 2).split(' ')
+  const fromThirdField = stat.slice(stat.lastIndexOf(')') + 2).split(' ')
   return {
     name: readProc(pid, 'comm')?.trim(),
     args: (readProc(pid, 'cmdline') ?? '').split('\0'),
-    startedAt: afterName[19],
+    startedAt: fromThirdField[19],
   }
 }
 
@@ -44,38 +44,37 @@ export function tail(logFile, lines = 20) {
   }
 }
 
-function signalGroup(child, signal) {
+function signalGroup({ pid }, signal) {
   try {
-    process.kill(-child.pid, signal)
+    if (pid) process.kill(-pid, signal)
   } catch {
     // It ended by itself in between.
   }
 }
 
 /**
- * Starts a program in a process group of its own (Ctrl-C in the terminal must not reach it before us) with its output
- * in `logFile`. A `node` program also gets a channel by which it notices our death.
+ * Starts a program with its output in `logFile`, in a process group of its own: Ctrl-C in the terminal must not reach
+ * it before us. `show` lets its standard output through to the terminal.
  */
 export function startChild(name, program, args, { env, cwd, logFile, show = false }) {
   fs.mkdirSync(path.dirname(logFile), { recursive: true })
   const log = fs.openSync(logFile, 'w')
   const isNode = program === process.execPath
-  const stdout = show ? 'inherit' : log
   const child = spawn(program, isNode ? ['--import', DIE_WITH_PARENT, ...args] : args, {
-    env,
+    env: isNode ? { ...env, NIGHTSHEET_PARENT: String(process.pid) } : env,
     cwd,
     detached: true,
-    stdio: ['ignore', stdout, log, ...(isNode ? ['ipc'] : [])],
+    stdio: ['ignore', show ? 'inherit' : log, log],
   })
   fs.closeSync(log)
-  running.add(child)
+  children.add(child)
   const ended = new Promise((resolve) => {
-    const end = (code, signal, error) => {
-      running.delete(child)
-      resolve({ code, signal, error })
+    const end = (outcome) => {
+      children.delete(child)
+      resolve(outcome)
     }
-    child.once('exit', (code, signal) => end(code, signal))
-    child.once('error', (error) => end(null, null, error))
+    child.once('exit', (code, signal) => end({ code: code ?? `signal ${signal}` }))
+    child.once('error', (error) => end({ error }))
   })
   return { name, child, logFile, ended }
 }
@@ -89,20 +88,28 @@ export async function stopChild({ child, ended }, patienceMillis = 20_000) {
   signalGroup(child, 'SIGKILL')
 }
 
-/** Ends whatever is still running, at once: for the second Ctrl-C and for a failed set-up. */
-export function killAllChildren() {
-  for (const child of running) signalGroup(child, 'SIGKILL')
-}
-
-/** Runs a program to its end and returns its exit code; throws only when it cannot be started. */
+/** Runs a program to its end and returns its exit code. */
 export async function runForCode(name, program, args, options) {
-  const { code, signal, error } = await startChild(name, program, args, options).ended
+  const started = startChild(name, program, args, options)
+  runs.add(started.child)
+  const { code, error } = await started.ended
+  runs.delete(started.child)
   if (error) throw new Problem(`${name}: cannot run ${program} (${error.message}).`)
-  return code ?? `signal ${signal}`
+  return code
 }
 
 /** Runs a program to its end; throws a Problem with the log when it fails. */
 export async function run(name, program, args, options) {
   const code = await runForCode(name, program, args, options)
   if (code !== 0) throw new Problem(`${name} failed (exit code ${code}).`, { logFile: options.logFile })
+}
+
+/** Asks everything that `run` waits for to end, for a Ctrl-C during set-up. */
+export function interruptRuns() {
+  for (const child of runs) signalGroup(child, 'SIGTERM')
+}
+
+/** Ends whatever is still running, at once, for a second Ctrl-C. */
+export function killAllChildren() {
+  for (const child of children) signalGroup(child, 'SIGKILL')
 }

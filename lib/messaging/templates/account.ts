@@ -1,0 +1,82 @@
+// Mail about the account itself. It names nobody: whoever types a stranger's address cannot make us deliver their words.
+import { writeLetter } from './letter'
+import type { Letter, MailWords } from './letter'
+
+export interface LinkMail {
+  /** Works once. */
+  url: string
+  /** "24 hours" */
+  validFor: string
+}
+
+/** Sent after sign-up: nothing is told to an address that nobody confirmed. */
+export function verifyAddressMail({ url, validFor }: LinkMail): MailWords {
+  return writeLetter({
+    ...ACCOUNT_LETTER,
+    subject: 'Confirm your e-mail address for Nightsheet',
+    heading: 'Confirm your e-mail address',
+    paragraphs: [
+      'Once it is confirmed, we can tell you when to fill, flood or hold off.',
+      `The link works once, within ${validFor}.`,
+    ],
+    action: { label: 'Confirm this address', url },
+    closing: [
+      'If you did not sign up, leave this mail unanswered. Without your confirmation this address hears no more from us.',
+    ],
+    reason: 'You get this because someone signed up to Nightsheet with this address.',
+  })
+}
+
+export function signInLinkMail({ url, validFor }: LinkMail): MailWords {
+  return writeLetter({
+    ...ACCOUNT_LETTER,
+    subject: 'Your sign-in link for Nightsheet',
+    heading: 'Sign in to Nightsheet',
+    paragraphs: [`The link works once, within ${validFor}. Do not pass it on: whoever opens it is signed in as you.`],
+    action: { label: 'Sign in', url },
+    closing: [NOT_YOU],
+    reason: 'You get this because a sign-in link was asked for with this address.',
+  })
+}
+
+export function resetPasswordMail({ url, validFor }: LinkMail): MailWords {
+  return writeLetter({
+    ...ACCOUNT_LETTER,
+    subject: 'Choose a new password for Nightsheet',
+    heading: 'Choose a new password',
+    paragraphs: [
+      `The link works once, within ${validFor}. Your old password stays good until you have chosen a new one.`,
+    ],
+    action: { label: 'Choose a new password', url },
+    closing: [NOT_YOU],
+    reason: 'You get this because a new password was asked for with this address.',
+  })
+}
+
+/** Sent when a known address signs up again: the page answers as it does for a new one, so it gives nobody away. */
+export function addressAlreadyRegisteredMail({
+  signInUrl,
+  resetUrl,
+}: {
+  signInUrl: string
+  resetUrl: string
+}): MailWords {
+  return writeLetter({
+    ...ACCOUNT_LETTER,
+    subject: 'You already have a Nightsheet account',
+    heading: 'You already have an account',
+    paragraphs: ['Someone signed up with this address just now. It has an account, so no second one was made.'],
+    action: { label: 'Sign in', url: signInUrl },
+    closing: ['If that was not you, there is nothing to do: your account is as it was.'],
+    reason: 'You get this because someone signed up to Nightsheet with this address.',
+    footLinks: [{ label: 'Choose a new password', url: resetUrl }],
+  })
+}
+
+const NOT_YOU = 'If you did not ask for this, there is nothing to do: nothing changes unless the link is opened.'
+
+const ACCOUNT_LETTER: Pick<Letter, 'kicker' | 'lists' | 'footLinks'> = {
+  kicker: 'Nightsheet',
+  lists: [],
+  footLinks: [],
+}

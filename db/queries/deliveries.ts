@@ -1,0 +1,78 @@
+// A promised message on its way out: claim, attempts, settlement.
+import type { Db } from '@/db/knex'
+import type { MessageKind, MessageState } from './messages'
+
+export interface MessageToDeliver {
+  id: string
+  userId: string
+  rinkId: string | null
+  channel: 'email' | 'push'
+  kind: MessageKind
+  content: Record<string, unknown>
+  expiresAt: Date
+  createdAt: Date
+  email: string
+  attempts: number
+}
+
+/** The message with the address it goes to, or undefined when it is settled or gone. */
+export async function findMessageToDeliver(db: Db, messageId: string): Promise<MessageToDeliver | undefined> {
+  const message = await db('messages as m')
+    .join('users as u', 'u.id', 'm.user_id')
+    .where({ 'm.id': messageId, 'm.state': 'promised' })
+    .first<Omit<MessageToDeliver, 'attempts'> | undefined>({
+      id: 'm.id',
+      userId: 'm.user_id',
+      rinkId: 'm.rink_id',
+      channel: 'm.channel',
+      kind: 'm.kind',
+      content: 'm.content',
+      expiresAt: 'm.expires_at',
+      createdAt: 'm.created_at',
+      email: 'u.email',
+    })
+  if (!message) return undefined
+  const counted = await db('delivery_attempts')
+    .where({ message_id: messageId })
+    .countDistinct({ tries: 'attempted_at' })
+    .first()
+  return { ...message, attempts: Number(counted?.tries ?? 0) }
+}
+
+/** Devices that took this message already: another try leaves them alone. */
+export async function listDeliveredDevices(db: Db, messageId: string): Promise<string[]> {
+  const rows = await db('delivery_attempts')
+    .where({ message_id: messageId, outcome: 'delivered' })
+    .whereNotNull('push_subscription_id')
+    .select('push_subscription_id')
+  return rows.flatMap(({ push_subscription_id: id }) => (id ? [id] : []))
+}
+
+export interface Attempt {
+  messageId: string
+  pushSubscriptionId?: string
+  attemptedAt: Date
+  outcome: 'delivered' | 'temporary' | 'permanent'
+  error?: string
+}
+
+export async function insertAttempt(db: Db, attempt: Attempt): Promise<void> {
+  await db('delivery_attempts').insert({
+    message_id: attempt.messageId,
+    push_subscription_id: attempt.pushSubscriptionId ?? null,
+    attempted_at: attempt.attemptedAt,
+    outcome: attempt.outcome,
+    error: attempt.error?.slice(0, 500) ?? null,
+  })
+}
+
+/** Ends a message once; false when it was ended before. */
+export async function settleMessage(
+  db: Db,
+  messageId: string,
+  state: Exclude<MessageState, 'promised'>,
+  now: Date,
+): Promise<boolean> {
+  const count = await db('messages').where({ id: messageId, state: 'promised' }).update({ state, settled_at: now })
+  return count > 0
+}

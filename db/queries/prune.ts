@@ -1,0 +1,40 @@
+// Deletes rows that nobody will read again.
+import type { Db } from '@/db/knex'
+
+const HOUR_MILLIS = 3_600_000
+
+/** How long each kind of row is kept. Ours. [h] */
+const KEEP_HOURS = { outlooks: 48, modelledSheets: 72, links: 24 * 7, rateLimits: 48, runs: 24 * 7 } as const
+
+/**
+ * Outlooks go but for the newest of each rink: what was advised lives on in advised_windows, the weather in forecasts.
+ * @returns rows deleted by kind.
+ */
+export async function pruneExpired(db: Db, now: Date): Promise<Record<string, number>> {
+  const before = (hours: number) => new Date(now.getTime() - hours * HOUR_MILLIS)
+  const outlooks = await db('outlooks as o')
+    .where('o.judged_at', '<', before(KEEP_HOURS.outlooks))
+    .whereExists(
+      db('outlooks as newer')
+        .select(db.raw('1'))
+        .whereRaw('newer.rink_id = o.rink_id and newer.judged_at > o.judged_at'),
+    )
+    .delete()
+  const sheets = await db('sheet_states')
+    .where({ origin: 'modelled' })
+    .where('as_of', '<', before(KEEP_HOURS.modelledSheets))
+    .whereRaw(
+      `exists (select 1 from sheet_states newer where newer.rink_id = sheet_states.rink_id
+               and newer.as_of > sheet_states.as_of and newer.as_of < ?)`,
+      [before(24)],
+    )
+    .delete()
+  const sessions = await db('sessions').where('expires_at', '<', now).delete()
+  const links = await db('account_links').where('expires_at', '<', before(KEEP_HOURS.links)).delete()
+  const limits = await db('rate_limits').where('window_starts_at', '<', before(KEEP_HOURS.rateLimits)).delete()
+  const runs = await db('job_runs')
+    .whereNot({ key: '' })
+    .where('last_started_at', '<', before(KEEP_HOURS.runs))
+    .delete()
+  return { outlooks, sheets, sessions, links, limits, runs }
+}

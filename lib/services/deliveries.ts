@@ -1,0 +1,118 @@
+// Delivering promised messages. Sending happens outside any transaction; the outcome is settled by a conditional update.
+import {
+  findMessageToDeliver,
+  insertAttempt,
+  listDeliveredDevices,
+  settleMessage,
+  type MessageToDeliver,
+} from '@/db/queries/deliveries'
+import { enqueueDelivery } from '@/db/queries/messages'
+import { disablePushSubscription, listEnabledPushSubscriptions } from '@/db/queries/push-subscriptions'
+import type { Db } from '@/db/knex'
+import { logEvent } from '@/lib/log'
+import { DeliveryError, type EmailTransport, type PushTransport } from '@/lib/messaging/port'
+import { nextAttemptAt } from '@/lib/messaging/retry'
+import { pushTopic } from '@/lib/messaging/push-topic'
+import { renderEmail, renderPush, type RenderSettings } from './render-message'
+
+export interface Delivering {
+  db: Db
+  /** Read again after each send: a send can take its time. */
+  readClock: () => Date
+  email: EmailTransport
+  push: PushTransport
+  settings: RenderSettings
+}
+
+interface Failure {
+  isPermanent: boolean
+  retryAfterSeconds: number | null
+}
+
+/**
+ * Tries to deliver a message. A crash between sending and settling sends again: mail then carries the same Message-ID
+ * and a push the same topic and tag, so the person sees one.
+ */
+export async function deliverMessage(delivering: Delivering, messageId: string): Promise<void> {
+  const { db, readClock } = delivering
+  const message = await findMessageToDeliver(db, messageId)
+  if (!message) return
+  if (readClock() >= message.expiresAt) {
+    await settleMessage(db, message.id, 'expired', readClock())
+    logEvent('message.expired', { messageId: message.id, kind: message.kind })
+    return
+  }
+  const failures =
+    message.channel === 'email' ? await sendEmail(delivering, message) : await sendPushes(delivering, message)
+  await settle(delivering, message, failures)
+}
+
+async function settle({ db, readClock }: Delivering, message: MessageToDeliver, failures: Failure[]): Promise<void> {
+  const now = readClock()
+  const temporary = failures.filter((failure) => !failure.isPermanent)
+  if (temporary.length === 0) {
+    const state = failures.length === 0 ? 'delivered' : 'dead'
+    if (await settleMessage(db, message.id, state, now))
+      logEvent(`message.${state}`, { messageId: message.id, kind: message.kind })
+    return
+  }
+  const retryAfterSeconds = Math.max(...temporary.map((failure) => failure.retryAfterSeconds ?? 0))
+  const again = nextAttemptAt({
+    attempt: message.attempts + 1,
+    now,
+    expiresAt: message.expiresAt,
+    retryAfterSeconds,
+    key: message.id,
+  })
+  if (again) await enqueueDelivery(db, message.id, again)
+  else if (await settleMessage(db, message.id, 'dead', now))
+    logEvent('message.dead', { messageId: message.id, kind: message.kind })
+}
+
+/** Sends one thing and keeps the attempt; undefined when it went. */
+async function attempt(
+  { db, readClock }: Delivering,
+  target: { messageId: string; pushSubscriptionId?: string },
+  send: () => Promise<void>,
+): Promise<(Failure & { error: string }) | undefined> {
+  const attemptedAt = readClock()
+  try {
+    await send()
+  } catch (error) {
+    if (!(error instanceof DeliveryError)) throw error
+    const outcome = error.permanent ? 'permanent' : 'temporary'
+    await insertAttempt(db, { ...target, attemptedAt, outcome, error: error.message })
+    return { isPermanent: error.permanent, retryAfterSeconds: error.retryAfterSeconds, error: error.message }
+  }
+  await insertAttempt(db, { ...target, attemptedAt, outcome: 'delivered' })
+  return undefined
+}
+
+async function sendEmail(delivering: Delivering, message: MessageToDeliver): Promise<Failure[]> {
+  const mail = renderEmail(message, delivering.settings)
+  const failure = await attempt(delivering, { messageId: message.id }, () => delivering.email.send(mail))
+  return failure ? [failure] : []
+}
+
+/** One send per device; devices that took it stay served, devices that are gone are disabled and no failure of the message. */
+async function sendPushes(delivering: Delivering, message: MessageToDeliver): Promise<Failure[]> {
+  const { db, readClock } = delivering
+  const served = new Set(await listDeliveredDevices(db, message.id))
+  const devices = (await listEnabledPushSubscriptions(db, message.userId)).filter(({ id }) => !served.has(id))
+  const failures: Failure[] = []
+  for (const { id, ...subscription } of devices) {
+    const failure = await attempt(delivering, { messageId: message.id, pushSubscriptionId: id }, () =>
+      delivering.push.send({
+        subscription,
+        payload: renderPush(message, delivering.settings),
+        topic: pushTopic(`${message.rinkId}:${message.kind}`),
+        ttlSeconds: Math.max(0, Math.floor((message.expiresAt.getTime() - readClock().getTime()) / 1000)),
+      }),
+    )
+    if (failure) failures.push(failure)
+    if (failure?.isPermanent) await disablePushSubscription(db, id, failure.error, readClock())
+  }
+  const isServed = served.size > 0 || devices.length > failures.length
+  if (isServed) return failures.filter((failure) => !failure.isPermanent)
+  return failures.length > 0 ? failures : [{ isPermanent: true, retryAfterSeconds: null }]
+}

@@ -1,0 +1,64 @@
+// Puts together what the model is asked: the rink, its water, its sheet, what was poured, and the forecast.
+import type { PouredPass } from '@/db/queries/floods'
+import type { StoredForecast } from '@/db/queries/forecasts'
+import type { RinkForJudging } from '@/db/queries/rinks'
+import type { StoredSheet } from '@/db/queries/sheet-states'
+import type { JudgeInput } from '@/lib/advice/types'
+
+const HOUR_MILLIS = 3_600_000
+
+/** What is on the ground before anybody reported a sheet. */
+const BARE = { thicknessMm: 0, temperatureC: 0, snowCoverCm: 0 }
+
+function sheetOf(sheet: StoredSheet | undefined, firstHourAt: Date): JudgeInput['sheet'] {
+  if (!sheet) return BARE
+  const hourAt = Math.floor(sheet.asOf.getTime() / HOUR_MILLIS) * HOUR_MILLIS
+  return {
+    thicknessMm: sheet.thicknessMm,
+    temperatureC: sheet.temperatureC,
+    snowCoverCm: sheet.snowCoverCm,
+    asOf: new Date(Math.max(hourAt, firstHourAt.getTime())).toISOString(),
+    ...(sheet.state ? { state: sheet.state } : {}),
+  }
+}
+
+export function judgeInputOf(facts: {
+  rink: RinkForJudging
+  forecast: StoredForecast
+  sheet: StoredSheet | undefined
+  poured: readonly PouredPass[]
+  firstHourAt: Date
+  now: Date
+}): JudgeInput {
+  const { rink, forecast, sheet, poured, firstHourAt, now } = facts
+  return {
+    now: now.toISOString(),
+    rink: {
+      latitude: rink.latitudeDeg,
+      longitude: rink.longitudeDeg,
+      timeZone: rink.timeZone,
+      lengthM: rink.lengthM,
+      widthM: rink.widthM,
+      shelter: rink.shelter,
+      skyView: rink.skyView,
+      base: rink.base,
+      phase: rink.phase,
+    },
+    water: {
+      temperatureC: rink.water.temperatureC,
+      flowLPerMin: rink.water.flowLPerMin,
+      layerMm: rink.water.layerMm,
+      fillDepthMm: rink.water.fillDepthMm,
+    },
+    sheet: sheetOf(sheet, firstHourAt),
+    available: rink.available,
+    maxPasses: rink.maxPasses,
+    hours: forecast.hours,
+    ...(forecast.members ? { members: forecast.members } : {}),
+    poured: poured.map((pass) => ({
+      at: pass.pouredAt.toISOString(),
+      layerMm: pass.layerMm,
+      temperatureC: pass.waterTemperatureC,
+    })),
+  }
+}

@@ -1,0 +1,93 @@
+// Judging a rink: newest forecast and sheet in; scored hours, advised window and what there is to tell out.
+import { listFloodsSince } from '@/db/queries/floods'
+import { findNewestForecast, type StoredForecast } from '@/db/queries/forecasts'
+import { hasOutlook, insertOutlook, insertScoredHours } from '@/db/queries/outlooks'
+import { findRinkForJudging, type RinkForJudging } from '@/db/queries/rinks'
+import { findStartingSheet, keepModelledSheet } from '@/db/queries/sheet-states'
+import type { Db } from '@/db/knex'
+import type { RinkAccess } from '@/lib/access/proofs'
+import { judge } from '@/lib/advice/judge'
+import { tonightDate } from '@/lib/advice/night'
+import { summariseNight } from '@/lib/advice/night-summary'
+import type { Judgement } from '@/lib/advice/types'
+import { adviseNight, type TellingSettings } from './alerts'
+import { slotOf } from './forecasts'
+import { judgeInputOf } from './judge-input'
+
+interface Judged {
+  rink: RinkForJudging
+  forecast: StoredForecast
+  judgement: Judgement
+}
+
+/**
+ * Judges a rink with its newest forecast and, in one transaction, stores the outlook, the sheet, the advised window and
+ * the messages it calls for. Once per forecast, settings and hour; repeating it, or two workers at once, changes nothing.
+ *
+ * @returns false when there was nothing to do.
+ */
+export async function refreshOutlook(
+  { db, now, settings }: { db: Db; now: Date; settings: TellingSettings },
+  access: RinkAccess<'view'>,
+): Promise<boolean> {
+  const slotAt = slotOf(now)
+  const judged = await judgeRink(db, access, slotAt, now)
+  if (!judged) return false
+  const { rink, forecast, judgement } = judged
+  const summary = summariseNight(judgement, {
+    nightDate: tonightDate(now, rink.timeZone),
+    now,
+    timeZone: rink.timeZone,
+  })
+  return db.transaction(async (trx) => {
+    const outlookId = await insertOutlook(trx, {
+      rinkId: rink.id,
+      forecastId: forecast.id,
+      settingsVersion: rink.settingsVersion,
+      modelVersion: judgement.modelVersion,
+      judgedAt: now,
+      slotAt,
+      timeZone: rink.timeZone,
+      nightDate: summary.nightDate,
+      summary,
+      advice: { windows: judgement.windows, plan: judgement.plan, fill: judgement.fill, thaws: judgement.thaws },
+    })
+    if (!outlookId) return false
+    await insertScoredHours(trx, outlookId, judgement.hours)
+    await keepSheet(trx, rink.id, judgement)
+    const outlook = { id: outlookId, forecastId: forecast.id, modelVersion: judgement.modelVersion, summary }
+    await adviseNight({ trx, access, now, settings }, rink, outlook, forecast.expiresAt)
+    return true
+  })
+}
+
+/** Runs the model; the slow part, outside any transaction. */
+async function judgeRink(db: Db, access: RinkAccess<'view'>, slotAt: Date, now: Date): Promise<Judged | undefined> {
+  const rink = await findRinkForJudging(db, access.rinkId)
+  const forecast = rink && (await findNewestForecast(db, rink.gridCellId))
+  const firstHour = forecast?.hours[0]
+  if (!rink || !forecast || !firstHour) return undefined
+  const key = { rinkId: rink.id, forecastId: forecast.id, settingsVersion: rink.settingsVersion, slotAt }
+  if (await hasOutlook(db, key)) return undefined
+  const firstHourAt = new Date(firstHour.time)
+  const sheet = await findStartingSheet(db, rink.id, { firstHourAt, now })
+  const poured = await listFloodsSince(db, access, sheet && sheet.asOf > firstHourAt ? sheet.asOf : firstHourAt)
+  const input = judgeInputOf({ rink, forecast, sheet, poured, firstHourAt, now })
+  return { rink, forecast, judgement: judge(input, { stateAt: slotAt.toISOString() }) }
+}
+
+/** Tomorrow's run starts where today's carried the sheet. */
+async function keepSheet(trx: Db, rinkId: string, { sheetState, modelVersion, hours }: Judgement): Promise<void> {
+  if (!sheetState) return
+  const before = hours.findLast((hour) => hour.time < sheetState.at)
+  if (!before) return
+  const { thicknessMm, temperatureC, snowCoverCm } = before.sheet
+  await keepModelledSheet(trx, rinkId, {
+    asOf: new Date(sheetState.at),
+    modelVersion,
+    thicknessMm,
+    temperatureC,
+    snowCoverCm,
+    state: sheetState.state,
+  })
+}

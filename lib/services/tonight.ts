@@ -1,0 +1,129 @@
+// The night sheet: everything the Tonight page shows of one rink and one night.
+import { getTimes } from 'suncalc'
+import { findAlertPreferences } from '@/db/queries/alert-preferences'
+import { findCellTrouble } from '@/db/queries/cell-reads'
+import { listFloodsSince, type PouredPass } from '@/db/queries/floods'
+import { findForecastHead } from '@/db/queries/forecasts'
+import { findMembership, listMembers } from '@/db/queries/members'
+import { findNewestOutlook, listScoredHours, type StoredOutlook } from '@/db/queries/outlooks'
+import { findRinkForJudging, type RinkForJudging } from '@/db/queries/rinks'
+import { findViewerSettings } from '@/db/queries/users'
+import { requireRink } from '@/lib/access/require-rink'
+import type { RinkAccess } from '@/lib/access/proofs'
+import { nightBounds, tonightDate } from '@/lib/advice/night'
+import { summariseNight } from '@/lib/advice/night-summary'
+import type { PlannedPass } from '@/lib/advice/types'
+import type { ServiceContext } from '@/lib/context'
+import { NotFoundError } from '@/lib/errors'
+import type { TonightPass, TonightView } from '@/lib/schemas/tonight-view'
+import { daysAhead } from './days-ahead'
+
+/** @throws NotFoundError when the viewer is no member of the rink. */
+export async function getTonight(context: ServiceContext, rinkId: string): Promise<TonightView> {
+  const access = await requireRink(context, rinkId, 'view')
+  const { db, now, viewer } = context
+  const [rink, membership, people, preferences, person, outlook] = await Promise.all([
+    findRinkForJudging(db, rinkId),
+    findMembership(db, { rinkId, userId: viewer.userId }),
+    listMembers(db, access),
+    findAlertPreferences(db, access, viewer.userId),
+    findViewerSettings(db, viewer.userId),
+    findNewestOutlook(db, access),
+  ])
+  if (!rink || !membership || !person) throw new NotFoundError('Rink')
+  const nightDate = tonightDate(now, rink.timeZone)
+  return {
+    readAt: now.toISOString(),
+    rink: {
+      id: rink.id,
+      name: rink.name,
+      placeName: rink.placeName,
+      timeZone: rink.timeZone,
+      phase: rink.phase,
+      people: people.length,
+      water: {
+        temperatureC: rink.water.temperatureC,
+        flowLPerMin: rink.water.flowLPerMin,
+        layerMm: rink.water.layerMm,
+      },
+    },
+    viewer: {
+      role: membership.role,
+      units: person.units,
+      clock: person.clock,
+      mutedThrough: preferences?.mutedThroughDate ?? null,
+    },
+    night: nightOf(rink, nightDate),
+    outlook: outlook ? await outlookOf(context, access, rink, outlook, nightDate) : null,
+    forecast: outlook ? await forecastOf(context, outlook) : null,
+    lastReadFailed: (await findCellTrouble(db, rink.gridCellId)) !== null,
+  }
+}
+
+function nightOf(rink: RinkForJudging, date: string): TonightView['night'] {
+  const { startsAt, endsAt } = nightBounds(date, rink.timeZone)
+  const iso = (at: Date | null, isWithin: (at: Date) => boolean) => (at && isWithin(at) ? at.toISOString() : null)
+  const evening = getTimes(startsAt, rink.latitudeDeg, rink.longitudeDeg)
+  const morning = getTimes(endsAt, rink.latitudeDeg, rink.longitudeDeg)
+  const isWithin = (at: Date) => at >= startsAt && at <= endsAt
+  return {
+    date,
+    startsAt: startsAt.toISOString(),
+    endsAt: endsAt.toISOString(),
+    sunsetAt: iso(evening.sunset, isWithin),
+    sunriseAt: iso(morning.sunrise, isWithin),
+  }
+}
+
+async function outlookOf(
+  { db, now }: ServiceContext,
+  access: RinkAccess,
+  rink: RinkForJudging,
+  outlook: StoredOutlook,
+  nightDate: string,
+): Promise<TonightView['outlook']> {
+  const { timeZone } = rink
+  const { startsAt, endsAt } = nightBounds(nightDate, timeZone)
+  const [hours, floods] = await Promise.all([listScoredHours(db, outlook.id), listFloodsSince(db, access, startsAt)])
+  const judgement = { modelVersion: outlook.modelVersion, hours, ...outlook.advice }
+  const summary = summariseNight(judgement, { nightDate, now, timeZone })
+  const poured = floods.filter((flood) => flood.nightDate === nightDate)
+  return {
+    judgedAt: outlook.judgedAt.toISOString(),
+    modelVersion: outlook.modelVersion,
+    summary,
+    hours: hours.filter((hour) => hour.time >= isoHour(startsAt) && hour.time < isoHour(endsAt)),
+    passes: passesOf(poured, summary.passes),
+    days: daysAhead(hours, now, timeZone),
+    thaws: outlook.advice.thaws,
+  }
+}
+
+const isoHour = (at: Date) => at.toISOString().replace('.000Z', 'Z')
+
+/** What was poured first, then what is still planned, numbered on. */
+function passesOf(poured: readonly PouredPass[], planned: readonly PlannedPass[]): TonightPass[] {
+  const done = poured.map((flood) => ({
+    number: flood.passNumber,
+    startsAt: flood.pouredAt.toISOString(),
+    setBy: flood.pouredAt.toISOString(),
+    layerMm: flood.layerMm,
+    waterL: flood.waterL,
+    hoseMinutes: 0,
+    poured: { at: flood.pouredAt.toISOString(), by: flood.by },
+  }))
+  const last = Math.max(0, ...done.map((pass) => pass.number))
+  return [...done, ...planned.map((pass, index) => ({ ...pass, number: last + index + 1, poured: null }))]
+}
+
+async function forecastOf({ db, now }: ServiceContext, outlook: StoredOutlook): Promise<TonightView['forecast']> {
+  const forecast = await findForecastHead(db, outlook.forecastId)
+  if (!forecast) return null
+  return {
+    provider: forecast.provider,
+    issuedAt: forecast.issuedAt?.toISOString() ?? null,
+    fetchedAt: forecast.fetchedAt.toISOString(),
+    isStale: now >= forecast.expiresAt,
+    attribution: forecast.attribution,
+  }
+}

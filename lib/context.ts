@@ -11,3 +11,12 @@ export interface ServiceContext {
   now: Date
   viewer: Viewer
 }
+
+/** What a use case is given when nobody is signed in: the secret that mailed links are made with, and where the visitor comes from. */
+export interface OpenContext {
+  db: Db
+  now: Date
+  secret: string
+  /** Undefined when no trustworthy part of the request says it. */
+  ipAddress: string | undefined
+}

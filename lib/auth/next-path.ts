@@ -1,5 +1,8 @@
 // Where to go after sign-in: a path on this site, or nowhere.
 
+/** Request header in which proxy.ts tells pages their own address; it overwrites whatever the visitor sent. */
+export const PATH_HEADER = 'x-nightsheet-path'
+
 const HERE = 'http://here.invalid'
 
 /** The path when it stays on this site, otherwise undefined: `//evil.example` and `/\evil.example` leave it. */

@@ -6,12 +6,9 @@ import { connection } from 'next/server'
 import { readClock } from '@/lib/clock'
 import type { ServiceContext, Viewer } from '@/lib/context'
 import { NotSignedInError } from '@/lib/errors'
-import { localPath } from './next-path'
+import { localPath, PATH_HEADER } from './next-path'
 import { sharedPool } from './pool'
 import { readViewer } from './session'
-
-/** The path that proxy.ts wrote down; pages do not know their own address. */
-export const PATH_HEADER = 'x-nightsheet-path'
 
 /** The viewer, or undefined for a stranger. */
 export async function maybeViewer(): Promise<Viewer | undefined> {

@@ -1,7 +1,40 @@
-// Reads the signed-in person from the request. next-auth is the only reader of sessions.
+// Reads the signed-in person from the request, and starts and ends sessions in this browser.
 import 'server-only'
+import { cookies } from 'next/headers'
+import { getServerSession } from 'next-auth'
+import { cache } from 'react'
+import { deleteSession } from '@/db/queries/sessions'
+import { readClock } from '@/lib/clock'
 import type { Viewer } from '@/lib/context'
+import { readEnvironment } from '@/lib/env'
+import { authOptions } from './options'
+import { sharedPool } from './pool'
+import { sessionCookie } from './session-cookie'
+import { hashSessionToken } from './session-tokens'
+import { openSession } from './sessions'
 
-export async function readViewer(): Promise<Viewer | undefined> {
-  return undefined
+/** Once per rendering, however many parts of a page ask. */
+export const readViewer = cache(async (): Promise<Viewer | undefined> => {
+  const session = await getServerSession(authOptions())
+  return session ? { userId: session.user.id, isAdmin: session.user.isAdmin } : undefined
+})
+
+/** Signs a person in, in this browser; a session that it had before ends. For server actions, which may set cookies. */
+export async function startSession(userId: string): Promise<void> {
+  await endSession()
+  const { token, expiresAt } = await openSession(sharedPool(), userId, readClock())
+  const { name, options } = sessionCookie(readEnvironment().PUBLIC_URL)
+  const jar = await cookies()
+  jar.set(name, token, { ...options, expires: expiresAt })
+}
+
+/** Signs this browser out. */
+export async function endSession(): Promise<void> {
+  const { name, options } = sessionCookie(readEnvironment().PUBLIC_URL)
+  const jar = await cookies()
+  const token = jar.get(name)?.value
+  if (!token) return
+  await deleteSession(sharedPool(), hashSessionToken(token))
+  // `delete` alone leaves out Secure, and browsers then ignore it for a __Host- cookie.
+  jar.set(name, '', { ...options, maxAge: 0 })
 }

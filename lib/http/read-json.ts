@@ -12,7 +12,7 @@ export class BodyTooLargeError extends Error {
 }
 
 /** The body's bytes. @throws BodyTooLargeError without having kept more than the limit. */
-async function readBytes(request: Request): Promise<Uint8Array> {
+export async function readBytes(request: Request): Promise<Uint8Array<ArrayBuffer>> {
   if (Number(request.headers.get('content-length') ?? 0) > BODY_LIMIT_BYTES) throw new BodyTooLargeError()
   const chunks: Uint8Array[] = []
   let size = 0
@@ -25,7 +25,7 @@ async function readBytes(request: Request): Promise<Uint8Array> {
     }
     chunks.push(part.value)
   }
-  return Buffer.concat(chunks)
+  return new Uint8Array(Buffer.concat(chunks))
 }
 
 /** @throws BodyTooLargeError, InvalidInputError when the body is no JSON, ZodError when it does not fit the schema. */

@@ -1,0 +1,61 @@
+// What people type about themselves.
+import { z } from 'zod'
+
+export const MIN_PASSWORD_LENGTH = 10
+
+const emailSchema = z
+  .string('Type your e-mail address.')
+  .trim()
+  .toLowerCase()
+  .min(1, 'Type your e-mail address.')
+  .max(254, 'That address is too long.')
+  .pipe(z.email('That does not look like an e-mail address: name@example.org'))
+
+const nameSchema = z
+  .string('Type your name.')
+  .trim()
+  .min(1, 'Type your name.')
+  .max(80, 'At most 80 characters.')
+  .regex(/^\P{Cc}*$/u, 'Letters, figures and spaces only, please.')
+
+/** Composed and decomposed accents are the same password, whatever keyboard typed it. */
+const givenPasswordSchema = z
+  .string('Type your password.')
+  .min(1, 'Type your password.')
+  .max(200, 'At most 200 characters.')
+  .transform((password) => password.normalize('NFC'))
+
+const newPasswordSchema = z
+  .string('Choose a password.')
+  .min(MIN_PASSWORD_LENGTH, `At least ${MIN_PASSWORD_LENGTH} characters.`)
+  .max(200, 'At most 200 characters.')
+  .transform((password) => password.normalize('NFC'))
+
+const keySchema = z.string('This link is not complete.').max(200, 'This link is not complete.')
+
+export const signUpSchema = z.object({ name: nameSchema, email: emailSchema, password: newPasswordSchema })
+export const passwordSignInSchema = z.object({ email: emailSchema, password: givenPasswordSchema })
+export const mailRequestSchema = z.object({ email: emailSchema })
+export const linkSchema = z.object({ key: keySchema })
+export const newPasswordByLinkSchema = z.object({ key: keySchema, password: newPasswordSchema })
+export const passwordChangeSchema = z.object({
+  // Absent for people who have only ever signed in by link.
+  currentPassword: z
+    .string()
+    .max(200, 'At most 200 characters.')
+    .default('')
+    .transform((password) => password.normalize('NFC')),
+  newPassword: newPasswordSchema,
+})
+export const accountSchema = z.object({
+  name: nameSchema,
+  units: z.enum(['metric', 'imperial'], 'Choose metric or imperial.'),
+  clock: z.enum(['12', '24'], 'Choose a 12-hour or a 24-hour clock.'),
+})
+
+export type SignUpInput = z.output<typeof signUpSchema>
+export type PasswordSignInInput = z.output<typeof passwordSignInSchema>
+export type MailRequestInput = z.output<typeof mailRequestSchema>
+export type NewPasswordByLinkInput = z.output<typeof newPasswordByLinkSchema>
+export type PasswordChangeInput = z.output<typeof passwordChangeSchema>
+export type AccountInput = z.output<typeof accountSchema>

@@ -1,0 +1,38 @@
+// Promises the mails about an account. The job that delivers them makes the link's secret part from its id.
+import type { Db } from '@/db/knex'
+import { insertAccountLink, type LinkPurpose } from '@/db/queries/account-links'
+import { promiseMessage, type MessageKind } from '@/db/queries/messages'
+import { LINK_LIFETIME_SECONDS } from '@/lib/auth/account-links'
+
+const KINDS: Record<LinkPurpose, MessageKind> = {
+  verify: 'verify-address',
+  'sign-in': 'sign-in-link',
+  reset: 'reset-password',
+}
+
+const NOTE_LIFETIME_SECONDS = 24 * 60 * 60
+
+function later(now: Date, seconds: number): Date {
+  return new Date(now.getTime() + seconds * 1000)
+}
+
+/** A new link and its mail; the mail is dropped when it could only arrive with a dead link. */
+export async function promiseLink(trx: Db, userId: string, purpose: LinkPurpose, now: Date): Promise<void> {
+  const expiresAt = later(now, LINK_LIFETIME_SECONDS[purpose])
+  const link = await insertAccountLink(trx, { userId, purpose, expiresAt }, now)
+  const kind = KINDS[purpose]
+  const content = { linkId: link.id }
+  await promiseMessage(
+    trx,
+    { dedupeKey: `${kind}:${link.id}`, userId, channel: 'email', kind, content, sendAt: now, expiresAt },
+    now,
+  )
+}
+
+/** Tells the owner of a known address that somebody signed up with it; the visitor learns nothing. */
+export async function promiseAlreadyRegistered(trx: Db, userId: string, now: Date): Promise<void> {
+  const kind = 'address-already-registered'
+  const dedupeKey = `${kind}:${userId}:${now.toISOString()}`
+  const expiresAt = later(now, NOTE_LIFETIME_SECONDS)
+  await promiseMessage(trx, { dedupeKey, userId, channel: 'email', kind, content: {}, sendAt: now, expiresAt }, now)
+}

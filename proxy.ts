@@ -1,0 +1,36 @@
+// Runs before every page: gives it its Content-Security-Policy, and sends browsers without a session cookie to sign-in.
+// Not an authorisation: services check who asks.
+import { randomBytes } from 'node:crypto'
+import { NextResponse, type NextRequest } from 'next/server'
+import { PATH_HEADER } from '@/lib/auth/next-path'
+import { sessionCookie } from '@/lib/auth/session-cookie'
+import { readEnvironment } from '@/lib/env'
+import { contentSecurityPolicy } from '@/lib/http/content-security-policy'
+
+const MEMBER_PATHS = /^\/(rinks|account|admin)(\/|$)/
+
+export function proxy(request: NextRequest): NextResponse {
+  const { PUBLIC_URL } = readEnvironment()
+  const { pathname, search } = request.nextUrl
+  if (MEMBER_PATHS.test(pathname) && !request.cookies.has(sessionCookie(PUBLIC_URL).name)) {
+    const signIn = new URL('/sign-in', request.url)
+    signIn.searchParams.set('next', pathname + search)
+    return NextResponse.redirect(signIn)
+  }
+  const policy = contentSecurityPolicy({
+    nonce: randomBytes(16).toString('base64'),
+    isDevelopment: process.env.NODE_ENV === 'development',
+    isHttps: PUBLIC_URL.startsWith('https:'),
+  })
+  const headers = new Headers(request.headers)
+  // Next reads the nonce for its own scripts from this request header.
+  headers.set('Content-Security-Policy', policy)
+  headers.set(PATH_HEADER, pathname + search)
+  const response = NextResponse.next({ request: { headers } })
+  response.headers.set('Content-Security-Policy', policy)
+  return response
+}
+
+export const config = {
+  matcher: ['/((?!_next/|api/|sw\\.js$|manifest\\.webmanifest$|icon|apple-icon|favicon\\.ico$|robots\\.txt$).*)'],
+}

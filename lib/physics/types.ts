@@ -50,3 +50,40 @@ export interface HeatBalanceParts {
   shortwave: number
   precipitation: number
 }
+
+/** What the rink lies on. */
+export type Base = 'liner' | 'ground' | 'snow'
+
+/** How much wind reaches the yard. */
+export type ShelterName = 'open' | 'suburban' | 'tight'
+
+/**
+ * An hour of weather with every gap closed, at one rink. Made by prepareHours. Where `isKnown` is false the numbers are
+ * placeholders and must not be used.
+ */
+export interface PreparedHour {
+  /** [ms since 1970-01-01 UTC] */
+  startsAtMillis: number
+  /** As in the record. */
+  time: string
+  isKnown: boolean
+  airTemperatureC: number
+  vapourPressureHpa: number
+  /** At rink height, behind the yard's shelter. [m/s] */
+  windAtRinkMps: number
+  /** At 10 m. [m/s] */
+  windSpeedMps: number
+  windGustMps: number
+  /** [0-1] */
+  cloudCover: number
+  shortwaveWm2: number
+  /** From the open sky and from what stands around. */
+  longwaveDownWm2: number
+  /** All phases, water equivalent. [mm in the hour] */
+  precipitationMm: number
+  rainMm: number
+  snowfallCm: number
+  pressureHpa: number
+  /** Measured snow on the sheet, or null. [cm] */
+  snowOnIceCm: number | null
+}

@@ -1,0 +1,12 @@
+// Range checks for the arguments of physics functions.
+
+/**
+ * Passes a number through when it lies in its range.
+ *
+ * @param name What it is, with its unit, for the message.
+ * @throws RangeError when it is not a finite number from `min` to `max`.
+ */
+export function inRange(name: string, value: number, min: number, max: number): number {
+  if (!(value >= min && value <= max)) throw new RangeError(`${name} must be from ${min} to ${max}, got ${value}`)
+  return value
+}

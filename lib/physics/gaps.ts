@@ -1,0 +1,46 @@
+// One missing hour is bridged by its neighbours; longer gaps stay gaps.
+import type { HourlyRecord } from './types'
+
+const NEEDED = ['airTemperatureC', 'dewPointC', 'windSpeedMps'] as const
+const BRIDGED = [
+  ...NEEDED,
+  'windGustMps',
+  'cloudCover',
+  'shortwaveWm2',
+  'precipitationMm',
+  'rainMm',
+  'snowfallCm',
+  'pressureHpa',
+  'longwaveDownWm2',
+] as const
+
+/**
+ * Fills single missing values from the hour before and the hour after.
+ *
+ * @param records Hours in order.
+ * @returns Copies with every lone gap filled by the mean of its neighbours; longer gaps stay null.
+ */
+export function bridgeLoneGaps(records: readonly HourlyRecord[]): HourlyRecord[] {
+  return records.map((record, index) => {
+    const before = records[index - 1]
+    const after = records[index + 1]
+    if (!before || !after || BRIDGED.every((field) => isNumber(record[field]))) return record
+    const filled: HourlyRecord = { ...record }
+    for (const field of BRIDGED) {
+      const from = before[field]
+      const to = after[field]
+      if (!isNumber(record[field]) && isNumber(from) && isNumber(to)) filled[field] = (from + to) / 2
+    }
+    return filled
+  })
+}
+
+/** True when the model can work with the hour. */
+export function hasNeeded(record: HourlyRecord): boolean {
+  const hasSky = isNumber(record.cloudCover) || isNumber(record.longwaveDownWm2)
+  return hasSky && isNumber(record.precipitationMm) && NEEDED.every((field) => isNumber(record[field]))
+}
+
+export function isNumber(value: number | null | undefined): value is number {
+  return typeof value === 'number' && Number.isFinite(value)
+}

@@ -1,0 +1,89 @@
+// Water vapour: saturation over water and ice, dew and frost point, the psychrometric coefficient.
+import { AIR_HEAT_CAPACITY, VAPORISATION_J_PER_KG, VAPOUR_MASS_RATIO } from './constants'
+import { inRange } from './check'
+
+/**
+ * Saturation vapour pressure over liquid (below 0 °C: supercooled) water.
+ *
+ * @param temperatureC Water temperature. [°C], valid -60 to 100 (the source claims -45 to 60)
+ * @returns Saturation vapour pressure. [hPa]
+ * @throws RangeError outside -60 to 100.
+ *
+ * Source: WMO-No. 8, Annex 4.B, Magnus form for the pure phase; seen in public code, not in the book.
+ */
+export function saturationOverWaterHpa(temperatureC: number): number {
+  inRange('temperatureC [°C]', temperatureC, -60, 100)
+  return 6.112 * Math.exp((17.62 * temperatureC) / (243.12 + temperatureC))
+}
+
+/**
+ * Saturation vapour pressure over a flat ice surface.
+ *
+ * @param temperatureC Ice temperature. [°C], valid -90 to 0.01 (the source claims -65 to 0)
+ * @returns Saturation vapour pressure. [hPa]
+ * @throws RangeError outside -90 to 0.01.
+ *
+ * Source: WMO-No. 8, Annex 4.B, Magnus form for the pure phase; seen in public code, not in the book.
+ */
+export function saturationOverIceHpa(temperatureC: number): number {
+  inRange('temperatureC [°C]', temperatureC, -90, 0.01)
+  return 6.112 * Math.exp((22.46 * temperatureC) / (272.62 + temperatureC))
+}
+
+/**
+ * Dew point (over water) from vapour pressure.
+ *
+ * @param vapourPressureHpa Vapour pressure. [hPa], above 0
+ * @returns Dew point. [°C]
+ * @throws RangeError at or below 0.
+ *
+ * Source: inversion of the Magnus form above, as printed in the Vaisala AWS330 manual.
+ */
+export function dewPointC(vapourPressureHpa: number): number {
+  inRange('vapourPressureHpa [hPa]', vapourPressureHpa, 1e-6, 1100)
+  const logRatio = Math.log(vapourPressureHpa / 6.112)
+  return (243.12 * logRatio) / (17.62 - logRatio)
+}
+
+/**
+ * Frost point (over ice) from vapour pressure.
+ *
+ * @param vapourPressureHpa Vapour pressure. [hPa], above 0 to 6.112
+ * @returns Frost point. [°C]
+ * @throws RangeError outside the range: above 6.112 hPa there is no frost point.
+ *
+ * Source: inversion of the WMO-No. 8 Magnus form over ice.
+ */
+export function frostPointC(vapourPressureHpa: number): number {
+  inRange('vapourPressureHpa [hPa]', vapourPressureHpa, 1e-6, 6.112)
+  const logRatio = Math.log(vapourPressureHpa / 6.112)
+  return (272.62 * logRatio) / (22.46 - logRatio)
+}
+
+/**
+ * Dew point from relative humidity over water, the convention of weather services below 0 °C too.
+ *
+ * @param temperatureC Air temperature. [°C], -60 to 60
+ * @param relativeHumidity Share of saturation over water. [0-1], above 0 to 1
+ * @returns Dew point. [°C]
+ * @throws RangeError outside the ranges.
+ */
+export function dewPointFromHumidityC(temperatureC: number, relativeHumidity: number): number {
+  inRange('relativeHumidity [0-1]', relativeHumidity, 1e-4, 1)
+  return dewPointC(relativeHumidity * saturationOverWaterHpa(temperatureC))
+}
+
+/**
+ * Psychrometric coefficient: heat flux per kelvin over vapour flux per hectopascal when both share one exchange (Lewis factor 1).
+ *
+ * @param pressureHpa Air pressure. [hPa], 300 to 1100
+ * @param latentJPerKg Latent heat of the phase change. [J/kg]
+ * @returns Coefficient. [hPa/K]
+ * @throws RangeError outside 300 to 1100 hPa.
+ *
+ * Source: FAO-56 eq. 8.
+ */
+export function psychrometricHpaPerK(pressureHpa: number, latentJPerKg = VAPORISATION_J_PER_KG): number {
+  inRange('pressureHpa [hPa]', pressureHpa, 300, 1100)
+  return (AIR_HEAT_CAPACITY * pressureHpa) / (VAPOUR_MASS_RATIO * latentJPerKg)
+}

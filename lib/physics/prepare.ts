@@ -1,0 +1,110 @@
+// From provider-neutral records to hours without gaps, seen from one rink.
+import { bridgeLoneGaps, hasNeeded } from './gaps'
+import { inRange } from './check'
+import { STANDARD_PRESSURE_HPA } from './constants'
+import { saturationOverWaterHpa } from './humidity'
+import { windAtRinkMps } from './site'
+import { blackBodyWm2, clearSkyEmissivity, cloudySkyEmissivity, longwaveOnRinkWm2 } from './sky'
+import { precipitationPhase } from './snow'
+import { clearSkyShortwaveWm2, cloudShortwaveFactor, sunAltitudeDeg } from './sun'
+import type { HourlyRecord, PreparedHour, Site } from './types'
+
+const HOUR_MILLIS = 3_600_000
+/** Gust over mean wind where no gust is reported. [-] Usual ratio over land, 1.4-1.6; from memory. */
+const GUST_FACTOR = 1.5
+
+/**
+ * Prepares a run of hours for one rink: bridges lone gaps, marks longer ones unknown, derives what services leave out.
+ *
+ * @param records Consecutive hours, oldest first.
+ * @param site Place, shelter [0-1] and open sky [0-1].
+ * @returns As many hours as records.
+ * @throws RangeError when hours are not consecutive, a value is out of its physical range or the site is off the globe.
+ */
+export function prepareHours(records: readonly HourlyRecord[], site: Site): PreparedHour[] {
+  inRange('latitudeDeg [°]', site.latitudeDeg, -90, 90)
+  inRange('longitudeDeg [°]', site.longitudeDeg, -180, 180)
+  inRange('shelter [0-1]', site.shelter, 0, 1)
+  inRange('skyView [0-1]', site.skyView, 0, 1)
+  let expectedMillis: number | null = null
+  return bridgeLoneGaps(records).map((record) => {
+    const startsAtMillis = Date.parse(record.time)
+    if (Number.isNaN(startsAtMillis)) throw new RangeError(`time must be an ISO 8601 instant, got ${record.time}`)
+    if (expectedMillis !== null && startsAtMillis !== expectedMillis) {
+      throw new RangeError(`hours must follow each other: ${record.time} does not follow the hour before it`)
+    }
+    expectedMillis = startsAtMillis + HOUR_MILLIS
+    return hasNeeded(record) ? knownHour(record, startsAtMillis, site) : unknownHour(record, startsAtMillis)
+  })
+}
+
+function knownHour(record: HourlyRecord, startsAtMillis: number, site: Site): PreparedHour {
+  const airTemperatureC = inRange('airTemperatureC [°C]', record.airTemperatureC!, -60, 50)
+  const dewPoint = inRange('dewPointC [°C]', Math.min(record.dewPointC!, airTemperatureC), -80, 50)
+  const vapourPressureHpa = saturationOverWaterHpa(Math.max(-60, dewPoint))
+  const windSpeedMps = inRange('windSpeedMps [m/s]', record.windSpeedMps!, 0, 75)
+  const precipitationMm = inRange('precipitationMm [mm]', record.precipitationMm!, 0, 200)
+  const clearEmissivity = clearSkyEmissivity(airTemperatureC, vapourPressureHpa)
+  const cloudCover = record.cloudCover ?? cloudFromLongwave(record.longwaveDownWm2!, airTemperatureC, clearEmissivity)
+  const skyWm2 =
+    record.longwaveDownWm2 ?? cloudySkyEmissivity(clearEmissivity, cloudCover) * blackBodyWm2(airTemperatureC)
+  return {
+    startsAtMillis,
+    time: record.time,
+    isKnown: true,
+    airTemperatureC,
+    vapourPressureHpa,
+    windSpeedMps,
+    windAtRinkMps: windAtRinkMps(windSpeedMps, site.shelter),
+    windGustMps: inRange('windGustMps [m/s]', record.windGustMps ?? windSpeedMps * GUST_FACTOR, 0, 120),
+    cloudCover,
+    shortwaveWm2: inRange(
+      'shortwaveWm2 [W/m²]',
+      Math.max(0, record.shortwaveWm2 ?? shortwaveFromSun(startsAtMillis, site, cloudCover)),
+      0,
+      1500,
+    ),
+    longwaveDownWm2: longwaveOnRinkWm2(
+      inRange('longwaveDownWm2 [W/m²]', skyWm2, 50, 600),
+      airTemperatureC,
+      site.skyView,
+    ),
+    precipitationMm,
+    ...precipitationPhase(record, airTemperatureC, precipitationMm),
+    pressureHpa: inRange('pressureHpa [hPa]', record.pressureHpa ?? STANDARD_PRESSURE_HPA, 400, 1100),
+    snowOnIceCm: record.snowOnIceCm ?? null,
+  }
+}
+
+function shortwaveFromSun(startsAtMillis: number, site: Site, cloudCover: number): number {
+  const middle = startsAtMillis + HOUR_MILLIS / 2
+  const altitude = sunAltitudeDeg(middle, site.latitudeDeg, site.longitudeDeg)
+  return clearSkyShortwaveWm2(altitude) * cloudShortwaveFactor(cloudCover)
+}
+
+function cloudFromLongwave(longwaveDownWm2: number, airTemperatureC: number, clearEmissivity: number): number {
+  const emissivity = longwaveDownWm2 / blackBodyWm2(airTemperatureC)
+  const share = (emissivity - clearEmissivity) / (0.84 * (1 - clearEmissivity))
+  return Math.min(1, Math.max(0, share))
+}
+
+function unknownHour(record: HourlyRecord, startsAtMillis: number): PreparedHour {
+  return {
+    startsAtMillis,
+    time: record.time,
+    isKnown: false,
+    airTemperatureC: 0,
+    vapourPressureHpa: 0,
+    windSpeedMps: 0,
+    windAtRinkMps: 0,
+    windGustMps: 0,
+    cloudCover: 0,
+    shortwaveWm2: 0,
+    longwaveDownWm2: 0,
+    precipitationMm: 0,
+    rainMm: 0,
+    snowfallCm: 0,
+    pressureHpa: STANDARD_PRESSURE_HPA,
+    snowOnIceCm: null,
+  }
+}

@@ -1,0 +1,114 @@
+// How fast the cold stored in a sheet can freeze water poured on it: the heat equation by its decay modes.
+import { cellLiquidKgM2, cellTemperatureC } from './column'
+import { FUSION_J_PER_KG, ICE_CONDUCTIVITY, ICE_DENSITY, ICE_HEAT_CAPACITY } from './constants'
+import type { SheetState } from './sheet-state'
+
+/** Diffusivity of ice. [m²/s] */
+const DIFFUSIVITY = ICE_CONDUCTIVITY / (ICE_DENSITY * ICE_HEAT_CAPACITY)
+/** Modes kept; what faster ones hold is given at once, which for 0.1 m of ice means within half a minute. */
+const MODES = 8
+/** Deeper ice does not reach the surface within a night. [m] */
+const DEEPEST_M = 0.5
+
+/** Heat the sheet has drawn from a surface held at 0 °C, `total - Σ share · exp(-rate t)`. */
+export interface SheetCold {
+  /** [J/m²] */
+  totalJM2: number
+  sharesJM2: Float64Array
+  /** [1/s] */
+  ratesPerS: Float64Array
+  /** Water lying on the sheet already. [kg/m²] */
+  liquidKgM2: number
+  /** Enthalpy above 0 °C in that water. [J/m²] */
+  warmthJM2: number
+  /** Constant heat that comes through from below once the sheet is spent. [W/m²] */
+  bottomWm2: number
+}
+
+/**
+ * Splits the cold of a sheet into decay modes.
+ *
+ * @param state Sheet at the time of pouring.
+ * @param bottomWm2 Ground heat into its foot (not for a sheet on water, whose foot is at 0 °C). [W/m²]
+ * @returns Modes of the heat it can draw from above.
+ *
+ * Source: heat equation on a slab, Carslaw & Jaeger; face at 0 °C, foot insulated (on the ground) or at 0 °C (on water).
+ * The front of new ice that moves up from the sheet slows the draw by the Stefan number; see `slowed`.
+ */
+export function sheetCold(state: SheetState, bottomWm2: number): SheetCold {
+  const { massKgM2: mass, enthalpyJM2: enthalpy } = state
+  const isFloating = state.belowKgM2 > 0
+  let first = 0
+  let liquidKgM2 = 0
+  let warmthJM2 = 0
+  while (first < mass.length && cellLiquidKgM2(mass[first]!, enthalpy[first]!) > 0) {
+    liquidKgM2 += cellLiquidKgM2(mass[first]!, enthalpy[first]!)
+    warmthJM2 += Math.max(0, enthalpy[first]!)
+    first++
+  }
+  let heightM = 0
+  for (let i = first; i < mass.length && heightM < DEEPEST_M; i++) heightM += mass[i]! / ICE_DENSITY
+  const cold: SheetCold = {
+    totalJM2: 0,
+    sharesJM2: new Float64Array(MODES),
+    ratesPerS: new Float64Array(MODES),
+    liquidKgM2,
+    warmthJM2,
+    bottomWm2: isFloating ? 0 : bottomWm2,
+  }
+  if (heightM > 0) projectOnModes(cold, state, first, heightM, isFloating)
+  return cold
+}
+
+function projectOnModes(cold: SheetCold, state: SheetState, first: number, heightM: number, isFloating: boolean): void {
+  const { massKgM2: mass, enthalpyJM2: enthalpy } = state
+  const firstWave = ((isFloating ? 1 : 0.5) * Math.PI) / heightM
+  const waveStep = Math.PI / heightM
+  const cosines = new Float64Array(MODES).fill(1)
+  let depth = 0
+  let topC = 0
+  for (let i = first; i < mass.length && depth < heightM; i++) {
+    const nextDepth = depth + mass[i]! / ICE_DENSITY
+    const cellC = cellTemperatureC(mass[i]!, enthalpy[i]!)
+    if (i === first) topC = cellC
+    const weight = isFloating ? 1 - (depth + nextDepth) / (2 * heightM) : 1
+    cold.totalJM2 -= mass[i]! * ICE_HEAT_CAPACITY * cellC * weight
+    // cos((m + o) θ) for all modes by the Chebyshev recurrence.
+    const turn = 2 * Math.cos(waveStep * nextDepth)
+    let current = Math.cos(firstWave * nextDepth)
+    let previous = Math.cos((firstWave - waveStep) * nextDepth)
+    for (let m = 0; m < MODES; m++) {
+      cold.sharesJM2[m]! += cellC * (cosines[m]! - current)
+      cosines[m] = current
+      const next = turn * current - previous
+      previous = current
+      current = next
+    }
+    depth = nextDepth
+  }
+  const slowing = slowed(topC)
+  for (let m = 0; m < MODES; m++) {
+    const wave = firstWave + m * waveStep
+    cold.sharesJM2[m]! *= (-2 * ICE_DENSITY * ICE_HEAT_CAPACITY) / (heightM * wave * wave)
+    cold.ratesPerS[m] = DIFFUSIVITY * wave * wave * slowing
+  }
+}
+
+/**
+ * Time runs slower for the sheet because new ice builds up between it and the water. Neumann's solution for freezing onto
+ * cold ice has a flux lower by 1/(1 + erf λ), λ near Ste/√π; flux goes as the root of time, so time by twice that.
+ */
+function slowed(topC: number): number {
+  const stefanNumber = (-topC * ICE_HEAT_CAPACITY) / FUSION_J_PER_KG
+  return 1 / (1 + (4 / Math.PI) * stefanNumber)
+}
+
+/** Heat drawn by a time after pouring. [J/m²] */
+export function heatDrawnJM2(cold: SheetCold, seconds: number): number {
+  let held = 0
+  for (let m = 0; m < MODES; m++) {
+    const decay = cold.ratesPerS[m]! * seconds
+    if (decay < 30) held += cold.sharesJM2[m]! * Math.exp(-decay)
+  }
+  return cold.totalJM2 - held - cold.bottomWm2 * seconds
+}

@@ -1,0 +1,139 @@
+// The sheet: made, carried through an hour of weather, poured on, cleared, reported.
+import { cellLiquidKgM2, cellTemperatureC } from './column'
+import { cellThicknesses, tidyCells } from './grid'
+import { FUSION_J_PER_KG, ICE_DENSITY, ICE_HEAT_CAPACITY, WATER_HEAT_CAPACITY } from './constants'
+import { inRange } from './check'
+import { SETTLED_SNOW_DENSITY } from './snow'
+import { runHour } from './sheet-hour'
+import type { SheetState } from './sheet-state'
+import type { Base, PreparedHour } from './types'
+
+export type { SheetState } from './sheet-state'
+
+export interface NewSheet {
+  /** Ice. [mm], 0 to 3000 */
+  thicknessMm: number
+  /** Mean of the ice. [°C], -50 to 0 (above 0 counts as 0) */
+  temperatureC: number
+  /** Lying on it. [cm], 0 to 300 */
+  snowCoverCm: number
+  /** Water standing on it. [mm], 0 to 1000 */
+  liquidMm?: number
+  /** Unfrozen water under it. [mm], 0 to 1e6 */
+  unfrozenBelowMm?: number
+  /** Of that water. [°C], 0 to 40 */
+  waterTemperatureC?: number
+  base: Base
+}
+
+/**
+ * Makes a sheet from what a keeper knows of it. Ice on the ground has one temperature; ice on water is 0 °C at its foot and
+ * twice as cold at its top as in the mean.
+ *
+ * @param sheet What is known; ranges at the fields.
+ * @returns State to carry forward.
+ * @throws RangeError for a value out of range.
+ */
+export function createSheet(sheet: NewSheet): SheetState {
+  const thicknessM = inRange('thicknessMm [mm]', sheet.thicknessMm, 0, 3000) / 1000
+  const meanC = Math.min(0, inRange('temperatureC [°C]', sheet.temperatureC, -50, 50))
+  const snowDepthCm = inRange('snowCoverCm [cm]', sheet.snowCoverCm, 0, 300)
+  const liquidMm = inRange('liquidMm [mm]', sheet.liquidMm ?? 0, 0, 1000)
+  const belowKgM2 = inRange('unfrozenBelowMm [mm]', sheet.unfrozenBelowMm ?? 0, 0, 1e6)
+  const belowTemperatureC = inRange('waterTemperatureC [°C]', sheet.waterTemperatureC ?? 0, 0, 40)
+  const massKgM2: number[] = []
+  const enthalpyJM2: number[] = []
+  let depth = 0
+  for (const cellM of cellThicknesses(thicknessM)) {
+    const share = (depth + cellM / 2) / thicknessM
+    const temperatureC = belowKgM2 > 0 ? 2 * meanC * (1 - share) : meanC
+    massKgM2.push(cellM * ICE_DENSITY)
+    enthalpyJM2.push(cellM * ICE_DENSITY * (ICE_HEAT_CAPACITY * temperatureC - FUSION_J_PER_KG))
+    depth += cellM
+  }
+  if (liquidMm > 0) {
+    massKgM2.unshift(liquidMm)
+    enthalpyJM2.unshift(0)
+  }
+  return {
+    base: sheet.base,
+    massKgM2,
+    enthalpyJM2,
+    snowKgM2: (snowDepthCm / 100) * SETTLED_SNOW_DENSITY,
+    snowDepthCm,
+    belowKgM2,
+    belowTemperatureC,
+    surfaceTemperatureC: massKgM2.length > 0 ? meanC : belowTemperatureC,
+  }
+}
+
+/**
+ * Carries a sheet through one hour of weather.
+ *
+ * @param state Sheet at the start of the hour.
+ * @param hour Prepared hour; an unknown one leaves the sheet as it is.
+ * @returns Sheet at the end of the hour; the state given is not changed.
+ */
+export function advanceSheet(state: SheetState, hour: PreparedHour): SheetState {
+  return hour.isKnown ? runHour(state, hour).state : state
+}
+
+/**
+ * Pours a layer. Snow still lying is soaked and becomes part of it.
+ *
+ * @param state Sheet before.
+ * @param layer Depth [mm], above 0 to 500, and water temperature [°C], 0 to 100.
+ * @returns Sheet after, the water on top.
+ * @throws RangeError for a value out of range.
+ */
+export function pourLayer(state: SheetState, layer: { layerMm: number; temperatureC: number }): SheetState {
+  const layerKgM2 = inRange('layerMm [mm]', layer.layerMm, 0, 500)
+  const warmth = layerKgM2 * WATER_HEAT_CAPACITY * inRange('temperatureC [°C]', layer.temperatureC, 0, 100)
+  const column = {
+    massKgM2: [layerKgM2 + state.snowKgM2, ...state.massKgM2],
+    enthalpyJM2: [warmth - FUSION_J_PER_KG * state.snowKgM2, ...state.enthalpyJM2],
+  }
+  tidyCells(column)
+  return { ...state, ...column, snowKgM2: 0, snowDepthCm: 0, surfaceTemperatureC: 0 }
+}
+
+/** Clears the snow off. */
+export function clearSnow(state: SheetState): SheetState {
+  return { ...state, snowKgM2: 0, snowDepthCm: 0 }
+}
+
+/**
+ * What a keeper would measure.
+ *
+ * @param state Sheet.
+ * @returns Ice [mm], mean temperature of the ice [°C], water on or in the sheet (not under it) [mm], snow [cm].
+ */
+export function reportSheet(state: SheetState): {
+  thicknessMm: number
+  temperatureC: number
+  liquidMm: number
+  snowCoverCm: number
+} {
+  let iceKgM2 = 0
+  let liquidMm = 0
+  let coldKKgM2 = 0
+  for (let i = 0; i < state.massKgM2.length; i++) {
+    const mass = state.massKgM2[i]!
+    const liquid = cellLiquidKgM2(mass, state.enthalpyJM2[i]!)
+    liquidMm += liquid
+    iceKgM2 += mass - liquid
+    coldKKgM2 += (mass - liquid) * cellTemperatureC(mass, state.enthalpyJM2[i]!)
+  }
+  return {
+    thicknessMm: (iceKgM2 / ICE_DENSITY) * 1000,
+    temperatureC: iceKgM2 > 0 ? coldKKgM2 / iceKgM2 : 0,
+    liquidMm,
+    snowCoverCm: state.snowDepthCm,
+  }
+}
+
+/** All enthalpy in and on the sheet and in the water below, 0 for liquid water at 0 °C. [J/m²] */
+export function sheetEnthalpyJM2(state: SheetState): number {
+  const inCells = state.enthalpyJM2.reduce((sum, one) => sum + one, 0)
+  return inCells - FUSION_J_PER_KG * state.snowKgM2 + state.belowKgM2 * WATER_HEAT_CAPACITY * state.belowTemperatureC
+}

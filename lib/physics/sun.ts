@@ -1,0 +1,48 @@
+// Sunshine when none is reported: position of the sun and cloud.
+import { getPosition } from 'suncalc'
+import { inRange } from './check'
+
+const RADIANS = Math.PI / 180
+
+/**
+ * Apparent (refracted) altitude of the sun.
+ *
+ * @param atMillis Instant. [ms since 1970-01-01 UTC]
+ * @param latitudeDeg Latitude, north positive. [°], -90 to 90
+ * @param longitudeDeg Longitude, east positive. [°], -180 to 180
+ * @returns Altitude above the horizon. [°]
+ * @throws RangeError for a place off the globe.
+ *
+ * Source: suncalc 2 (degrees, with refraction).
+ */
+export function sunAltitudeDeg(atMillis: number, latitudeDeg: number, longitudeDeg: number): number {
+  inRange('latitudeDeg [°]', latitudeDeg, -90, 90)
+  inRange('longitudeDeg [°]', longitudeDeg, -180, 180)
+  return getPosition(new Date(atMillis), latitudeDeg, longitudeDeg).altitude
+}
+
+/**
+ * Global radiation on level ground under a cloudless sky.
+ *
+ * @param altitudeDeg Sun above the horizon. [°]
+ * @returns Flux. [W/m²], 0 when the sun is down
+ *
+ * Source: Haurwitz 1945, 1098 sin h exp(-0.059 / sin h), coefficients as in pvlib.
+ */
+export function clearSkyShortwaveWm2(altitudeDeg: number): number {
+  const sine = Math.sin(altitudeDeg * RADIANS)
+  return sine <= 0 ? 0 : 1098 * sine * Math.exp(-0.059 / sine)
+}
+
+/**
+ * Share of clear-sky radiation that passes cloud.
+ *
+ * @param cloudCover Share of the sky. [0-1]
+ * @returns Factor. [0.25-1]
+ * @throws RangeError outside 0-1.
+ *
+ * Source: Kasten & Czeplak 1980, Solar Energy 24, 177: 1 - 0.75 (N/8)^3.4.
+ */
+export function cloudShortwaveFactor(cloudCover: number): number {
+  return 1 - 0.75 * Math.pow(inRange('cloudCover [0-1]', cloudCover, 0, 1), 3.4)
+}

@@ -1,9 +1,8 @@
 // Jobs of a worker that was killed stay locked, and the queue would wait hours for it. Who lives holds an advisory lock.
 import pg from 'pg'
+import { PRESENCE_LOCK } from '@/db/queries/health'
 import { logEvent, logFailure } from '@/lib/log'
 
-/** Any constant will do; it names "a worker of this product is alive" among the database's advisory locks. */
-const PRESENCE_LOCK = 7_204_811
 /** No handler runs this long: the time limits of providers and mail servers are far shorter. */
 const LONGEST_JOB_MINUTES = 15
 const REJOIN_MILLIS = 5_000

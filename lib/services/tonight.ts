@@ -7,7 +7,7 @@ import { findForecastHead } from '@/db/queries/forecasts'
 import { findMembership, listMembers } from '@/db/queries/members'
 import { findNewestOutlook, listScoredHours, type StoredOutlook } from '@/db/queries/outlooks'
 import { findRinkForJudging, type RinkForJudging } from '@/db/queries/rinks'
-import { findViewerSettings } from '@/db/queries/users'
+import { findAccount } from '@/db/queries/users'
 import { requireRink } from '@/lib/access/require-rink'
 import type { RinkAccess } from '@/lib/access/proofs'
 import { nightBounds, tonightDate } from '@/lib/advice/night'
@@ -27,7 +27,7 @@ export async function getTonight(context: ServiceContext, rinkId: string): Promi
     findMembership(db, { rinkId, userId: viewer.userId }),
     listMembers(db, access),
     findAlertPreferences(db, access, viewer.userId),
-    findViewerSettings(db, viewer.userId),
+    findAccount(db, viewer.userId),
     findNewestOutlook(db, access),
   ])
   if (!rink || !membership || !person) throw new NotFoundError('Rink')

@@ -1,0 +1,73 @@
+// Turns a promised message into the mail or push that goes out.
+import { LINK_LIFETIME_SECONDS, linkUrl } from '@/lib/auth/account-links'
+import type { MessageToDeliver } from '@/db/queries/deliveries'
+import type { EmailMessage, PushMessage } from '@/lib/messaging/port'
+import {
+  addressAlreadyRegisteredMail,
+  resetPasswordMail,
+  signInLinkMail,
+  verifyAddressMail,
+} from '@/lib/messaging/templates/account'
+import { alertMail, alertPush, type AlertWords } from '@/lib/messaging/templates/alerts'
+import type { MailWords } from '@/lib/messaging/templates/letter'
+import { alertContentSchema, linkContentSchema } from '@/lib/schemas/alert-content'
+import { unsubscribeUrl } from './unsubscribe'
+
+export interface RenderSettings {
+  publicUrl: string
+  secret: string
+}
+
+type AlertKind = Extract<MessageToDeliver['kind'], `flood-${string}`>
+
+const LINK_MAILS = {
+  'verify-address': { purpose: 'verify', write: verifyAddressMail },
+  'sign-in-link': { purpose: 'sign-in', write: signInLinkMail },
+  'reset-password': { purpose: 'reset', write: resetPasswordMail },
+} as const
+
+function isAlert(kind: MessageToDeliver['kind']): kind is AlertKind {
+  return kind.startsWith('flood-')
+}
+
+function alertWords(message: MessageToDeliver, { publicUrl, secret }: RenderSettings): AlertWords {
+  const { rinkId, words } = alertContentSchema.parse(message.content)
+  return {
+    ...words,
+    tonightUrl: `${publicUrl}/rinks/${rinkId}`,
+    manageUrl: `${publicUrl}/rinks/${rinkId}/alerts`,
+    unsubscribeUrl: unsubscribeUrl(publicUrl, secret, { userId: message.userId, rinkId }),
+  }
+}
+
+function accountMail(message: MessageToDeliver, { publicUrl, secret }: RenderSettings): MailWords {
+  if (message.kind === 'address-already-registered') {
+    return addressAlreadyRegisteredMail({ signInUrl: `${publicUrl}/sign-in`, resetUrl: `${publicUrl}/reset` })
+  }
+  if (isAlert(message.kind)) throw new Error(`${message.kind} is no account mail`)
+  const { purpose, write } = LINK_MAILS[message.kind]
+  const { linkId } = linkContentSchema.parse(message.content)
+  return write({
+    url: linkUrl(publicUrl, secret, { id: linkId, purpose }),
+    validFor: lifetime(LINK_LIFETIME_SECONDS[purpose]),
+  })
+}
+
+function lifetime(seconds: number): string {
+  return seconds >= 7200 ? `${seconds / 3600} hours` : `${seconds / 60} minutes`
+}
+
+/** The mail, with the same Message-ID at every try. */
+export function renderEmail(message: MessageToDeliver, settings: RenderSettings): EmailMessage {
+  const messageId = `<${message.id}@${new URL(settings.publicUrl).hostname}>`
+  if (!isAlert(message.kind)) return { to: message.email, messageId, ...accountMail(message, settings) }
+  const words = alertWords(message, settings)
+  return { to: message.email, messageId, ...alertMail(message.kind, words), unsubscribeUrl: words.unsubscribeUrl }
+}
+
+/** What the service worker shows; one tag per rink and night, so that newer news replaces older. */
+export function renderPush(message: MessageToDeliver, settings: RenderSettings): PushMessage['payload'] {
+  if (!isAlert(message.kind)) throw new Error(`${message.kind} is not sent by push`)
+  const { rinkId, nightDate } = alertContentSchema.parse(message.content)
+  return alertPush(message.kind, alertWords(message, settings), `night:${rinkId}:${nightDate}`)
+}

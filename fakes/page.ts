@@ -11,7 +11,8 @@ p{margin:4px 0 16px;color:var(--graphite);max-width:68ch}
 a{color:inherit;text-underline-offset:3px}
 :focus-visible{outline:2px solid var(--lamp);outline-offset:2px}
 table{width:100%;border-collapse:collapse;background:var(--sheet);border:1px solid var(--rule)}
-th,td{text-align:left;vertical-align:top;padding:10px 12px;border-top:1px solid var(--rule);overflow-wrap:anywhere}
+th,td{text-align:left;vertical-align:top;padding:10px 12px;border-top:1px solid var(--rule);overflow-wrap:break-word}
+th,td:first-child{white-space:nowrap}
 th{font-size:13px;font-weight:500;color:var(--graphite);border-top:0}
 pre{white-space:pre-wrap;overflow-wrap:anywhere;background:var(--sheet);border:1px solid var(--rule);padding:14px;margin:0;font:13px/1.5 ui-monospace,monospace}
 iframe{width:100%;height:640px;border:1px solid var(--rule);background:#FFFDF8}

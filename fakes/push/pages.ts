@@ -12,7 +12,7 @@ export function listPage(pushes: CaughtPush[]): string {
     .map((push) => [
       escapeHtml(push.receivedAt.slice(11, 19)),
       describe(push),
-      `${push.ttlSeconds} s, ${escapeHtml(push.urgency)}<br>${push.sizeBytes} bytes`,
+      `${push.ttlSeconds} s, urgency ${escapeHtml(push.urgency)}, ${push.sizeBytes} bytes`,
       escapeHtml(push.subscriptionId.slice(0, 8)),
     ])
   const found = rows.length

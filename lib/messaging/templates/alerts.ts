@@ -67,7 +67,7 @@ export function alertMail(kind: AlertKind, words: AlertWords): MailWords {
     subject: `${rinkName}: ${subjectLead}${words.sentence.replace(/\.$/, '')}`,
     kicker: `${rinkName}, ${words.nightLabel}`,
     heading: words.sentence,
-    paragraphs: [words.sure, opening],
+    paragraphs: [opening, words.sure],
     lists: [
       { title: 'The plan', items: words.passes.map(({ at, what }) => ({ lead: at, text: what })) },
       { title: 'Take care', items: words.cautions.map((text) => ({ text })), isCaution: true },

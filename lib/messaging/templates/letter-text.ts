@@ -9,8 +9,7 @@ export function letterText(letter: Letter): string {
     ...lists.map(listText),
     `${action.label}:\n${action.url}`,
     closing.join('\n'),
-    '--',
-    [reason, ...footLinks.map(({ label, url }) => `${label}: ${url}`)].join('\n'),
+    ['--', reason, ...footLinks.map(({ label, url }) => `${label}: ${url}`)].join('\n'),
   ]
     .filter(Boolean)
     .join('\n\n')

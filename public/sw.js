@@ -1,0 +1,189 @@
+// Service worker: shows notifications, and keeps the last good copy of each night sheet for when there is no network.
+
+const PAGES = 'night-sheets-1'
+const FILES = 'files-1'
+const MOST_PAGES = 10
+const MOST_FILES = 120
+/** A phone at the far end of a yard may hold a weak line for minutes. */
+const PATIENCE_MILLIS = 4000
+const FRESH_MILLIS = 10 * 60 * 1000
+
+/** The Tonight page of a rink, which shows the age of its own forecast. Nothing else of a person's is kept. */
+const NIGHT_SHEET = /^\/rinks\/[0-9a-f]{8}-[0-9a-f-]{27}$/
+/** How a streamed page that answered 200 says that it was a redirect or not found, or that it broke. */
+const REFUSED = /NEXT_REDIRECT|NEXT_HTTP_ERROR/
+const BROKEN = /data-dgst="\d+"/
+
+self.addEventListener('install', () => self.skipWaiting())
+self.addEventListener('activate', (event) => event.waitUntil(takeOver()))
+
+async function takeOver() {
+  const names = await caches.keys()
+  await Promise.all(names.filter((name) => name !== PAGES && name !== FILES).map((name) => caches.delete(name)))
+  await self.clients.claim()
+}
+
+// Notifications
+
+self.addEventListener('push', (event) => event.waitUntil(showMessage(event.data)))
+
+async function showMessage(data) {
+  const {
+    title = 'Nightsheet',
+    body = 'There is news about your rink.',
+    url = '/rinks',
+    tag = 'news',
+  } = readMessage(data)
+  const [shown] = await self.registration.getNotifications({ tag })
+  await self.registration.showNotification(title, {
+    body,
+    tag,
+    // A repeat of the same words stays silent; changed words are worth a second sound.
+    renotify: shown !== undefined && shown.body !== body,
+    data: { url },
+    icon: '/notification-icon.png',
+    badge: '/notification-badge.png',
+  })
+}
+
+/** Every push must show something, even one that cannot be read. */
+function readMessage(data) {
+  try {
+    return data.json() ?? {}
+  } catch {
+    return {}
+  }
+}
+
+self.addEventListener('notificationclick', (event) => {
+  event.notification.close()
+  event.waitUntil(openTab(event.notification.data?.url))
+})
+
+async function openTab(address) {
+  const wanted = new URL(address ?? '/rinks', self.location.origin)
+  const target = wanted.origin === self.location.origin ? wanted : new URL('/rinks', self.location.origin)
+  const tabs = await self.clients.matchAll({ type: 'window', includeUncontrolled: true })
+  const open = tabs.find((tab) => tab.url.split('#')[0] === target.href.split('#')[0])
+  return open ? open.focus() : self.clients.openWindow(target.href)
+}
+
+/** The browser gave the device a new address: without this its owner would stop hearing from us. */
+self.addEventListener('pushsubscriptionchange', (event) => event.waitUntil(replaceSubscription(event)))
+
+async function replaceSubscription({ oldSubscription, newSubscription }) {
+  const subscription = newSubscription ?? (await subscribeAgain(oldSubscription))
+  if (!subscription) return
+  await fetch('/api/push-subscriptions', {
+    method: 'PUT',
+    headers: { 'Content-Type': 'application/json' },
+    body: JSON.stringify({ oldEndpoint: oldSubscription?.endpoint ?? null, subscription: subscription.toJSON() }),
+  })
+}
+
+function subscribeAgain(oldSubscription) {
+  const applicationServerKey = oldSubscription?.options.applicationServerKey
+  return (
+    applicationServerKey && self.registration.pushManager.subscribe({ userVisibleOnly: true, applicationServerKey })
+  )
+}
+
+// Copies for when there is no network
+
+self.addEventListener('fetch', (event) => {
+  const { request } = event
+  const url = new URL(request.url)
+  if (request.method !== 'GET' || url.origin !== self.location.origin) return
+  if (url.pathname.startsWith('/_next/static/')) event.respondWith(answerFile(event))
+  else if (request.mode === 'navigate') event.respondWith(answerPage(event, url.pathname))
+  else if (NIGHT_SHEET.test(url.pathname) && isVisit(request)) event.waitUntil(keepFresh(url.pathname))
+})
+
+/** The person may have signed out, so that whoever uses the browser next finds nothing. */
+self.addEventListener('message', (event) => {
+  if (event.data !== 'forget') return
+  const forgotten = Promise.all([caches.delete(PAGES), caches.delete(FILES)])
+  event.waitUntil(forgotten.then(() => event.ports[0]?.postMessage('forgotten')))
+})
+
+/** Network first; the copy when the network fails, the server breaks, or neither answers in time. */
+async function answerPage(event, path) {
+  const fromNetwork = fetch(event.request)
+  if (!NIGHT_SHEET.test(path)) return fromNetwork.catch(offlinePage)
+  const kept = await (await caches.open(PAGES)).match(path)
+  const answered = fromNetwork.then((response) => {
+    event.waitUntil(keepPage(path, response.clone()))
+    return response.status >= 500 && kept ? kept : response
+  })
+  event.waitUntil(answered.catch(() => undefined))
+  if (!kept) return answered.catch(offlinePage)
+  const outOfPatience = new Promise((resolve) => setTimeout(resolve, PATIENCE_MILLIS, kept))
+  return Promise.race([answered.catch(() => kept), outOfPatience])
+}
+
+/** After a redirect or a refusal the reader may no longer see the sheet: then the copy goes too. */
+async function keepPage(path, response) {
+  if (response.status >= 500) return
+  const pages = await caches.open(PAGES)
+  const text = response.ok && !response.redirected ? await response.clone().text() : ''
+  if (BROKEN.test(text)) return
+  await pages.delete(path)
+  if (!text || REFUSED.test(text)) return
+  await pages.put(path, response)
+  await drop(pages, MOST_PAGES)
+}
+
+/** Moving between screens fetches data, not pages; so a visit to a sheet also fetches its page, now and then. */
+async function keepFresh(path) {
+  const kept = await (await caches.open(PAGES)).match(path)
+  if (kept && Date.now() - Date.parse(kept.headers.get('Date')) < FRESH_MILLIS) return
+  await fetch(path, { redirect: 'manual', headers: { Accept: 'text/html' } }).then(
+    (response) => keepPage(path, response),
+    () => undefined,
+  )
+}
+
+/** Next marks the data of a screen so, and what it fetches ahead of a touch. */
+function isVisit({ headers }) {
+  return (
+    headers.get('RSC') === '1' && !headers.get('Next-Router-Prefetch') && !headers.get('Next-Router-Segment-Prefetch')
+  )
+}
+
+/** Their names carry a hash of their content, so a copy never goes stale. */
+async function answerFile({ request }) {
+  const files = await caches.open(FILES)
+  const kept = await files.match(request)
+  if (kept) return kept
+  const response = await fetch(request)
+  if (response.ok && response.headers.get('Cache-Control')?.includes('immutable')) {
+    await files.put(request, response.clone())
+    await drop(files, MOST_FILES)
+  }
+  return response
+}
+
+/** The oldest first, down to so many. */
+async function drop(cache, most) {
+  const requests = await cache.keys()
+  await Promise.all(requests.slice(0, Math.max(0, requests.length - most)).map((request) => cache.delete(request)))
+}
+
+async function offlinePage() {
+  const pages = await caches.open(PAGES)
+  const links = await Promise.all((await pages.keys()).map((request) => linkTo(pages, request)))
+  const found = links.length ? `<p>Kept from your last visit:</p><ul>${links.join('')}</ul>` : ''
+  return new Response(
+    `<!doctype html><html lang="en"><meta charset="utf-8"><meta name="viewport" content="width=device-width,initial-scale=1">
+<title>No network · Nightsheet</title><style>:root{color-scheme:light dark}body{font:17px/1.5 "IBM Plex Sans",system-ui,sans-serif;max-width:36rem;margin:48px auto;padding:0 20px}
+h1{font-size:28px;font-weight:500}a{color:inherit;display:inline-block;padding:12px 0}</style>
+<h1>No network.</h1><p>This page could not be fetched. Try again where the signal is better.</p>${found}</html>`,
+    { status: 503, headers: { 'Content-Type': 'text/html; charset=utf-8' } },
+  )
+}
+
+/** The title is taken as it stands in the page, already escaped. */
+async function linkTo(pages, request) {
+  const title = /<title>([^<]*)<\/title>/.exec(await (await pages.match(request)).text())?.[1]
+  return `<li><a href="${new URL(request.url).pathname}">${title || 'Night sheet'}</a></li>`
+}

@@ -153,23 +153,6 @@ export async function replaceAvailableHours(trx: Db, rinkId: string, hours: read
   )
 }
 
-/** The sheet as the keeper saw it at `now`. */
-export async function insertReportedSheet(
-  trx: Db,
-  rinkId: string,
-  sheet: { thicknessMm: number; temperatureC: number; snowCoverCm: number },
-  now: Date,
-): Promise<void> {
-  await trx('sheet_states').insert({
-    rink_id: rinkId,
-    as_of: now,
-    origin: 'reported',
-    thickness_mm: sheet.thicknessMm,
-    temperature_c: sheet.temperatureC,
-    snow_cover_cm: sheet.snowCoverCm,
-  })
-}
-
 export async function findRinkForJudging(db: Db, rinkId: string): Promise<RinkForJudging | undefined> {
   const rink = await db('rinks as r')
     .join('grid_cells as c', 'c.id', 'r.grid_cell_id')

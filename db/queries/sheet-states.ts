@@ -61,3 +61,24 @@ export async function keepModelledSheet(
     { rinkId, ...sheet, state: JSON.stringify(sheet.state) },
   )
 }
+
+/** The sheet as a person saw it at `now`; it outranks what the model carried to that instant. */
+export async function insertReportedSheet(
+  db: Db,
+  rinkId: string,
+  sheet: { thicknessMm: number; temperatureC: number; snowCoverCm: number },
+  now: Date,
+): Promise<void> {
+  const seen = {
+    origin: 'reported' as const,
+    model_version: null,
+    thickness_mm: sheet.thicknessMm,
+    temperature_c: sheet.temperatureC,
+    snow_cover_cm: sheet.snowCoverCm,
+    state: null,
+  }
+  await db('sheet_states')
+    .insert({ rink_id: rinkId, as_of: now, ...seen })
+    .onConflict(['rink_id', 'as_of'])
+    .merge(seen)
+}

@@ -1,0 +1,165 @@
+// Setting up a rink and changing its settings: one set of fields for the form, the action, the service and the tests.
+import { z } from 'zod'
+import { latitudeSchema, longitudeSchema } from './coordinates'
+import { clockTimeSchema, doOverlap, timeZoneSchema } from './local-time'
+import { lineOfText, measured, orEmpty, secondsSchema, tickSchema } from './fields'
+import { fitsMeasure, rangeMessage, type UnitSystem } from './measures'
+import {
+  BASES,
+  hasIce,
+  PHASES,
+  RINK_DEFAULTS,
+  SHELTERS,
+  SKIES,
+  SKY_VIEWS,
+  WATER_DEFAULTS,
+  WATER_KINDS,
+} from './rink-choices'
+
+export const rinkIdSchema = z.uuid('That is no rink.')
+
+function rinkFields(units: UnitSystem) {
+  return {
+    units: z.literal(units),
+    name: lineOfText('Give the rink a name.', 60),
+    placeName: orEmpty(lineOfText('Name the place.', 120)),
+    latitude: latitudeSchema,
+    longitude: longitudeSchema,
+    timeZone: orEmpty(timeZoneSchema),
+    length: measured('side', units).default(RINK_DEFAULTS.sideM),
+    width: measured('side', units).default(RINK_DEFAULTS.sideM),
+    base: z.enum(BASES, 'Choose what the rink lies on.').default('liner'),
+    shelter: z.enum(SHELTERS, 'Choose how the wind reaches the rink.').default('suburban'),
+    sky: z.enum(SKIES, 'Choose how much sky the rink sees.').default('edged'),
+    phase: z.enum(PHASES, 'Choose what there is now.').default('waiting'),
+    iceThickness: orEmpty(measured('iceThickness', units)),
+    fillDepth: measured('fillDepth', units).default(RINK_DEFAULTS.fillDepthMm),
+    waterKind: z.enum(WATER_KINDS, 'Choose where the water comes from.').default('cold-tap'),
+    flow: orEmpty(measured('flow', units)),
+    bucketSize: orEmpty(measured('bucket', units)),
+    bucketSeconds: orEmpty(secondsSchema),
+    waterTemperature: orEmpty(measured('waterTemperature', units)),
+    layer: measured('layer', units).default(RINK_DEFAULTS.layerMm),
+    maxPasses: z.coerce.number().int().min(1, 'At least one.').max(6, 'At most six.').default(RINK_DEFAULTS.maxPasses),
+    hoursFrom: clockTimeSchema.default(RINK_DEFAULTS.from),
+    hoursTo: clockTimeSchema.default(RINK_DEFAULTS.to),
+    moreHoursFrom: orEmpty(clockTimeSchema),
+    moreHoursTo: orEmpty(clockTimeSchema),
+  }
+}
+
+type Fields = z.output<z.ZodObject<ReturnType<typeof rinkFields>>>
+
+/** The flow of a bucket test. [L/min] */
+export function bucketFlowLPerMin(litres: number, seconds: number): number {
+  return (litres / seconds) * 60
+}
+
+/** What single fields cannot know: the answers have to fit each other. */
+function checkTogether(fields: Fields & { units: UnitSystem }, context: z.RefinementCtx): void {
+  const refuse = (field: string, message: string) => context.addIssue({ code: 'custom', path: [field], message })
+  const { bucketSize, bucketSeconds, moreHoursFrom, moreHoursTo } = fields
+  if (fields.flow === undefined && (bucketSize === undefined) !== (bucketSeconds === undefined)) {
+    refuse(
+      bucketSize === undefined ? 'bucketSize' : 'bucketSeconds',
+      'The bucket test needs both: how big, and how long.',
+    )
+  } else if (fields.flow === undefined && !fitsMeasure('flow', flowOf(fields))) {
+    refuse('bucketSeconds', `That would be no hose we know. ${rangeMessage('flow', fields.units)}`)
+  }
+  if (fields.hoursFrom === fields.hoursTo) refuse('hoursTo', 'These hours end when they start.')
+  if (fields.phase === 'skating' && fields.iceThickness === 0)
+    refuse('iceThickness', 'Ice that carries skaters has a thickness.')
+  if ((moreHoursFrom === undefined) !== (moreHoursTo === undefined)) {
+    refuse(moreHoursFrom === undefined ? 'moreHoursFrom' : 'moreHoursTo', 'These hours need a start and an end.')
+  }
+  if (moreHoursFrom === undefined || moreHoursTo === undefined) return
+  const [first, second] = [
+    { from: fields.hoursFrom, to: fields.hoursTo },
+    { from: moreHoursFrom, to: moreHoursTo },
+  ]
+  if (moreHoursFrom === moreHoursTo) refuse('moreHoursTo', 'These hours end when they start.')
+  else if (doOverlap(first, second)) refuse('moreHoursFrom', 'These hours run into the ones above.')
+}
+
+/** A rink that is new to us has told nothing of its ice yet. */
+function askForThickness({ phase, iceThickness }: Fields, context: z.RefinementCtx): void {
+  if (phase !== 'skating' || iceThickness !== undefined) return
+  context.addIssue({
+    code: 'custom',
+    path: ['iceThickness'],
+    message: 'How thick is the ice? A drilled hole tells best.',
+  })
+}
+
+/** Typed, else measured by bucket, else what such a source usually gives. [L/min] */
+function flowOf({ flow, bucketSize, bucketSeconds, waterKind }: Fields): number {
+  if (flow !== undefined) return flow
+  if (bucketSize !== undefined && bucketSeconds !== undefined) return bucketFlowLPerMin(bucketSize, bucketSeconds)
+  return WATER_DEFAULTS[waterKind].flowLPerMin
+}
+
+/** From the fields of the form to what is stored, in SI. */
+function toRink(fields: Fields) {
+  const { moreHoursFrom, moreHoursTo } = fields
+  const more = moreHoursFrom && moreHoursTo ? [{ from: moreHoursFrom, to: moreHoursTo }] : []
+  return {
+    name: fields.name,
+    placeName: fields.placeName,
+    latitudeDeg: fields.latitude,
+    longitudeDeg: fields.longitude,
+    timeZone: fields.timeZone,
+    lengthM: fields.length,
+    widthM: fields.width,
+    base: fields.base,
+    shelter: fields.shelter,
+    skyView: SKY_VIEWS[fields.sky],
+    phase: fields.phase,
+    /** As the keeper reports it now; undefined when nothing was said. */
+    iceThicknessMm: hasIce(fields.phase) ? fields.iceThickness : undefined,
+    water: {
+      kind: fields.waterKind,
+      flowLPerMin: flowOf(fields),
+      temperatureC: fields.waterTemperature ?? WATER_DEFAULTS[fields.waterKind].temperatureC,
+      layerMm: fields.layer,
+      fillDepthMm: fields.fillDepth,
+    },
+    maxPasses: fields.maxPasses,
+    available: [{ from: fields.hoursFrom, to: fields.hoursTo }, ...more],
+  }
+}
+
+export type RinkInput = ReturnType<typeof toRink>
+
+const toldFields = {
+  tellAt: clockTimeSchema.default(RINK_DEFAULTS.tellAt),
+  wantsPush: tickSchema,
+  wantsEmail: tickSchema,
+}
+
+const creationFields = { creationKey: z.uuid('Please load this page again.'), ...toldFields }
+
+export const setUpRinkSchema = z
+  .discriminatedUnion('units', [
+    z.object({ ...rinkFields('metric'), ...creationFields }),
+    z.object({ ...rinkFields('imperial'), ...creationFields }),
+  ])
+  .superRefine(checkTogether)
+  .superRefine(askForThickness)
+  .transform((fields) => ({
+    creationKey: fields.creationKey,
+    units: fields.units,
+    rink: toRink(fields),
+    told: { tellAt: fields.tellAt, wantsPush: fields.wantsPush, wantsEmail: fields.wantsEmail },
+  }))
+
+export const changeRinkSchema = z
+  .discriminatedUnion('units', [
+    z.object({ ...rinkFields('metric'), rinkId: rinkIdSchema }),
+    z.object({ ...rinkFields('imperial'), rinkId: rinkIdSchema }),
+  ])
+  .superRefine(checkTogether)
+  .transform((fields) => ({ rinkId: fields.rinkId, rink: toRink(fields) }))
+
+export type SetUpRinkInput = z.output<typeof setUpRinkSchema>
+export type ChangeRinkInput = z.output<typeof changeRinkSchema>

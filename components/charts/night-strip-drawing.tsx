@@ -191,20 +191,25 @@ function Floor({ layout, words }: { layout: StripLayout; words: StripWords }) {
   )
 }
 
+/** From pour to set; a poured pass is a wedge at its pour. */
 function Passes({ layout, words }: { layout: StripLayout; words: StripWords }) {
   const top = layout.frame.plotTop - 11
   return (
     <g>
       {layout.brackets.map(({ number, x, width, isPoured }) => (
         <g key={number}>
-          <path
-            d={`M${x + 1},${top + 8} v-8 h${Math.max(width - 2, 1)} v8`}
-            fill="none"
-            className="stroke-ink"
-            strokeWidth={isPoured ? 3 : 1.4}
-          />
-          <text x={x + width / 2} y={top - 6} textAnchor="middle" className="fill-ink" fontWeight={500}>
-            {words.passLabel(number, width)}
+          {isPoured ? (
+            <path d={`M${x - 5},${top} h10 l-5,9 z`} className="fill-ink" />
+          ) : (
+            <path
+              d={`M${x + 1},${top + 8} v-8 h${Math.max(width - 2, 1)} v8`}
+              fill="none"
+              className="stroke-ink"
+              strokeWidth={1.4}
+            />
+          )}
+          <text x={isPoured ? x : x + width / 2} y={top - 6} textAnchor="middle" className="fill-ink" fontWeight={500}>
+            {words.passLabel(number, isPoured ? 0 : width)}
           </text>
         </g>
       ))}

@@ -39,7 +39,7 @@ export function rateScale(rates: number[], leastTop: number): Scale {
   return { low, high, ticks: ticksBetween(low, high, step) }
 }
 
-/** Scale for air temperatures: half a step of room at both ends, three or four ticks. */
+/** Scale for air temperatures: half a step of room at both ends, at most five steps of ticks. */
 export function airScale(temperatures: number[]): Scale | null {
   if (temperatures.length === 0) return null
   const least = Math.min(...temperatures)
@@ -47,5 +47,5 @@ export function airScale(temperatures: number[]): Scale | null {
   const middle = (least + most) / 2
   const half = Math.max((most - least) / 2, 3) * 1.15
   const [low, high] = [middle - half, middle + half]
-  return { low, high, ticks: ticksBetween(low, high, roundStep(low, high, 4)) }
+  return { low, high, ticks: ticksBetween(low, high, roundStep(low, high, 5)) }
 }

@@ -1,0 +1,22 @@
+// The present minute for the screen. The first render uses the server's reading, so that both sides draw the same.
+'use client'
+import { useEffect, useState } from 'react'
+
+const MINUTE = 60_000
+
+/** @param readAt When the server read its clock, ISO text. */
+export function useClock(readAt: string): number {
+  const [now, setNow] = useState(() => Date.parse(readAt))
+  useEffect(() => {
+    const tick = () => setNow(Date.now())
+    const first = setTimeout(tick, 0)
+    const timer = setInterval(tick, MINUTE / 2)
+    document.addEventListener('visibilitychange', tick)
+    return () => {
+      clearTimeout(first)
+      clearInterval(timer)
+      document.removeEventListener('visibilitychange', tick)
+    }
+  }, [])
+  return now
+}

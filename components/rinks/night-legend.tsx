@@ -1,0 +1,59 @@
+// What the strip's marks mean, in words; every verdict with its own pattern.
+import type { StripSource } from './strip-input'
+import { clockTime, type Reader } from './quantities'
+
+export function NightLegend({
+  source,
+  reader,
+  hasFill,
+  hasGap,
+}: {
+  source: StripSource
+  reader: Reader
+  hasFill: boolean
+  hasGap: boolean
+}) {
+  const { sunsetAt, sunriseAt } = source.night
+  return (
+    <ul className="flex list-none pt-2 flex-wrap gap-x-[18px] gap-y-1 p-0 text-small text-graphite">
+      <Key word="flood">
+        <rect x={1} y={1} width={13} height={11} className="fill-lamp stroke-lamp-text" />
+      </Key>
+      {hasFill ? (
+        <Key word="fill">
+          <path d="M1,2 h13 M1,6 h13 M1,10 h13" className="stroke-hose" strokeWidth={1.8} />
+        </Key>
+      ) : null}
+      <Key word="hold off">
+        <rect x={1} y={1} width={13} height={11} fill="none" className="stroke-still" strokeWidth={1.3} />
+      </Key>
+      <Key word={reader.units === 'imperial' ? 'air, °F' : 'air, °C'}>
+        <path d="M0,6.5 h15" className="stroke-ink" strokeWidth={2} />
+      </Key>
+      {hasGap ? (
+        <Key word="no forecast">
+          <path d="M0,10 l8,-8 M4,12 l9,-9 M9,13 l6,-6" className="stroke-still" strokeWidth={1.3} />
+        </Key>
+      ) : null}
+      <li>
+        {reader.units === 'imperial' ? 'bars: inches of water frozen per hour' : 'bars: mm of water frozen per hour'}
+      </li>
+      {sunsetAt && sunriseAt ? (
+        <li>
+          dark from {clockTime(sunsetAt, reader)} to {clockTime(sunriseAt, reader)}
+        </li>
+      ) : null}
+    </ul>
+  )
+}
+
+function Key({ word, children }: { word: string; children: React.ReactNode }) {
+  return (
+    <li className="inline-flex items-center gap-[7px]">
+      <svg width={15} height={13} aria-hidden="true">
+        {children}
+      </svg>
+      {word}
+    </li>
+  )
+}

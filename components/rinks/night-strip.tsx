@@ -1,0 +1,76 @@
+// The night strip of one rink: drawing, hours to open, legend, and the same numbers as a table.
+'use client'
+import { useState } from 'react'
+import { useHydrated } from '../hooks/use-hydrated'
+import { layOutNightStrip } from '../charts/night-strip-layout'
+import { NightStripDrawing } from '../charts/night-strip-drawing'
+import { StripHours } from '../charts/strip-hours'
+import { HourPanel } from './hour-panel'
+import { NightLegend } from './night-legend'
+import { NightTable } from './night-table'
+import { clockTime, readerOf } from './quantities'
+import { hoursOfNight, stripHours, stripInput, type StripSize, type StripSource } from './strip-input'
+import { stripWords } from './strip-words'
+
+const SHOWN: Record<StripSize, string> = {
+  wide: 'relative hidden min-[720px]:block',
+  narrow: 'relative min-[720px]:hidden',
+}
+
+export function NightStrip({ source, now }: { source: StripSource; now: number }) {
+  const [selected, setSelected] = useState<number | null>(null)
+  const isHydrated = useHydrated()
+  const reader = readerOf(source)
+  const hours = hoursOfNight(source, now)
+  const drawn = stripHours(hours, reader.units)
+  const open = selected === null ? undefined : hours[selected]
+  const start = Math.max(
+    0,
+    drawn.findIndex((hour) => hour.startsAt + 3_600_000 > now),
+  )
+  return (
+    <figure className="-mx-5 border-y border-rule bg-sheet pt-3 lg:mx-0 lg:border-x print:mx-0 print:border">
+      {(['wide', 'narrow'] as const).map((size) => {
+        const layout = layOutNightStrip(stripInput(source, drawn, now, size))
+        return (
+          <div key={size} className={SHOWN[size]}>
+            <NightStripDrawing
+              id={`strip-${size}`}
+              layout={layout}
+              words={stripWords(source, hours, drawn, now, size)}
+            />
+            {isHydrated ? (
+              <StripHours
+                layout={layout}
+                label="Hours of the night"
+                nameOf={(index) => clockTime(hours[index]?.time ?? 0, reader)}
+                selected={selected}
+                start={start}
+                onSelect={setSelected}
+              />
+            ) : null}
+          </div>
+        )
+      })}
+      <HourPanel
+        hour={open}
+        reader={reader}
+        onStep={(step) => setSelected(stepped(selected, step, hours.length))}
+        onClose={() => setSelected(null)}
+      />
+      <figcaption className="px-5 pb-1">
+        <NightLegend
+          source={source}
+          reader={reader}
+          hasFill={hours.some((hour) => hour.verdict === 'fill')}
+          hasGap={drawn.some((hour) => hour.rate === null)}
+        />
+        <NightTable hours={hours} reader={reader} />
+      </figcaption>
+    </figure>
+  )
+}
+
+function stepped(selected: number | null, step: number, count: number): number {
+  return Math.min(Math.max((selected ?? 0) + step, 0), count - 1)
+}

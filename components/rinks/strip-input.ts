@@ -1,0 +1,96 @@
+// From tonight's view to the numbers and words of the strip, in the reader's units and the rink's time.
+import { addDays, instantOfLocal } from '@/lib/advice/zoned-time'
+import type { TonightHour, TonightView } from '@/lib/schemas/tonight-view'
+import { celsiusToFahrenheit, mmToInches } from '@/lib/units'
+import type { StripFrame, StripHour, StripInput } from '../charts/night-strip-layout'
+
+export type StripSize = 'wide' | 'narrow'
+
+const FRAMES: Record<StripSize, StripFrame> = {
+  wide: { width: 800, height: 274, left: 34, right: 44, plotTop: 52, plotBottom: 214 },
+  narrow: { width: 390, height: 268, left: 34, right: 40, plotTop: 52, plotBottom: 208 },
+}
+/** A phone shows the hours in which floods happen: 3 pm to 9 am. */
+const NARROW_FROM_MINUTE = 15 * 60
+const NARROW_TO_MINUTE = 9 * 60
+
+export type StripSource = Pick<TonightView, 'rink' | 'viewer' | 'night'> & {
+  outlook: NonNullable<TonightView['outlook']>
+}
+
+const HOUR = 3_600_000
+
+/** The hours of the night, oldest first; hours to come that the forecast does not have are there, unknown. */
+export function hoursOfNight({ night, outlook }: Pick<StripSource, 'night' | 'outlook'>, now: number): TonightHour[] {
+  const [from, to] = [Date.parse(night.startsAt), Date.parse(night.endsAt)]
+  const within = outlook.hours.filter(({ time }) => Date.parse(time) + HOUR > from && Date.parse(time) < to)
+  const known = new Set(within.map(({ time }) => Date.parse(time)))
+  const missing: TonightHour[] = []
+  for (let at = Math.floor(Math.max(from, now) / HOUR) * HOUR; at < to; at += HOUR) {
+    if (!known.has(at)) missing.push(unknownHour(at))
+  }
+  return [...within, ...missing].sort((a, b) => Date.parse(a.time) - Date.parse(b.time))
+}
+
+function unknownHour(at: number): TonightHour {
+  return {
+    time: new Date(at).toISOString(),
+    isKnown: false,
+    netHeatLossWm2: null,
+    parts: null,
+    freezeRateMmPerH: null,
+    windChillC: null,
+    setsAt: null,
+    scores: { fill: 0, flood: 0, hold: 100 },
+    verdict: 'hold',
+    reasons: [],
+    sheet: { thicknessMm: 0, temperatureC: 0, liquidMm: 0, snowCoverCm: 0 },
+    weather: null,
+  }
+}
+
+export function stripHours(hours: TonightHour[], units: 'metric' | 'imperial'): StripHour[] {
+  return hours.map((hour) => ({
+    startsAt: Date.parse(hour.time),
+    verdict: hour.verdict,
+    rate: hour.isKnown ? inUnit(hour.freezeRateMmPerH, units, mmToInches) : null,
+    air: inUnit(hour.weather?.airTemperatureC ?? null, units, celsiusToFahrenheit),
+    snowCm: hour.weather?.snowfallCm ?? 0,
+    rainMm: hour.weather?.rainMm ?? 0,
+  }))
+}
+
+function inUnit(value: number | null, units: 'metric' | 'imperial', convert: (value: number) => number): number | null {
+  return value === null || units === 'metric' ? value : convert(value)
+}
+
+/** First and last instant that a size of the strip shows. */
+export function spanOf(
+  { night, rink }: Pick<StripSource, 'night' | 'rink'>,
+  size: StripSize,
+): { startsAt: number; endsAt: number } {
+  if (size === 'wide') return { startsAt: Date.parse(night.startsAt), endsAt: Date.parse(night.endsAt) }
+  return {
+    startsAt: instantOfLocal(night.date, NARROW_FROM_MINUTE, rink.timeZone),
+    endsAt: instantOfLocal(addDays(night.date, 1), NARROW_TO_MINUTE, rink.timeZone),
+  }
+}
+
+export function stripInput(source: StripSource, hours: StripHour[], now: number, size: StripSize): StripInput {
+  const { night, outlook, viewer } = source
+  return {
+    frame: FRAMES[size],
+    ...spanOf(source, size),
+    hours,
+    passes: outlook.passes.map(({ number, startsAt, setBy, poured }) => ({
+      number,
+      startsAt: Date.parse(startsAt),
+      setBy: Date.parse(setBy),
+      isPoured: poured !== null,
+    })),
+    sunsetAt: night.sunsetAt === null ? null : Date.parse(night.sunsetAt),
+    sunriseAt: night.sunriseAt === null ? null : Date.parse(night.sunriseAt),
+    now,
+    leastRateTop: viewer.units === 'imperial' ? 0.04 : 1,
+  }
+}

@@ -1,10 +1,18 @@
 // Deletes rows that nobody will read again.
 import type { Db } from '@/db/knex'
+import { deleteUnconfirmedUsersBefore } from './users'
 
 const HOUR_MILLIS = 3_600_000
 
 /** How long each kind of row is kept. Ours. [h] */
-const KEEP_HOURS = { outlooks: 48, modelledSheets: 72, links: 24 * 7, rateLimits: 48, runs: 24 * 7 } as const
+const KEEP_HOURS = {
+  outlooks: 48,
+  modelledSheets: 72,
+  links: 24 * 7,
+  rateLimits: 48,
+  runs: 24 * 7,
+  unconfirmed: 24 * 7,
+} as const
 
 /**
  * Outlooks go but for the newest of each rink: what was advised lives on in advised_windows, the weather in forecasts.
@@ -36,5 +44,6 @@ export async function pruneExpired(db: Db, now: Date): Promise<Record<string, nu
     .whereNot({ key: '' })
     .where('last_started_at', '<', before(KEEP_HOURS.runs))
     .delete()
-  return { outlooks, sheets, sessions, links, limits, runs }
+  const unconfirmed = await deleteUnconfirmedUsersBefore(db, before(KEEP_HOURS.unconfirmed))
+  return { unconfirmed, outlooks, sheets, sessions, links, limits, runs }
 }

@@ -91,3 +91,8 @@ export async function isOnAnyRink(db: Db, userId: string): Promise<boolean> {
 export async function deleteUnconfirmedUsersBefore(db: Db, instant: Date): Promise<number> {
   return db('users').whereNull('email_verified_at').where('updated_at', '<', instant).delete()
 }
+
+/** The units a person typed in are the ones they want to read. */
+export async function chooseUnits(db: Db, userId: string, units: UserRow['units'], now: Date): Promise<void> {
+  await db('users').where({ id: userId }).update({ units, updated_at: now })
+}

@@ -35,6 +35,13 @@ const keySchema = z.string('This link is not complete.').max(200, 'This link is 
 
 export const signUpSchema = z.object({ name: nameSchema, email: emailSchema, password: newPasswordSchema })
 export const passwordSignInSchema = z.object({ email: emailSchema, password: givenPasswordSchema })
+/** One form with two buttons: the password counts only for one of them. */
+export const signInFormSchema = z.object({
+  by: z.enum(['password', 'link']).default('password'),
+  email: emailSchema,
+  password: z.string().default(''),
+  next: z.string().optional(),
+})
 export const mailRequestSchema = z.object({ email: emailSchema })
 export const linkSchema = z.object({ key: keySchema })
 export const newPasswordByLinkSchema = z.object({ key: keySchema, password: newPasswordSchema })

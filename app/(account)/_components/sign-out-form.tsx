@@ -1,0 +1,24 @@
+'use client'
+// Signs out, and lets the service worker forget the night sheets that it keeps for when there is no network.
+import { ActionForm, type FormAction } from '@/components/ui/action-form'
+
+function forgetKeptPages(): void {
+  // Absent on plain http and in old browsers; then nothing was kept.
+  navigator.serviceWorker?.controller?.postMessage({ type: 'forget' })
+}
+
+export function SignOutForm({
+  action,
+  submit,
+  look = 'plain',
+}: {
+  action: FormAction
+  submit: string
+  look?: 'main' | 'plain'
+}) {
+  return (
+    <div onSubmit={forgetKeptPages}>
+      <ActionForm action={action} submit={submit} look={look} />
+    </div>
+  )
+}

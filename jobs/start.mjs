@@ -28,29 +28,24 @@ function readEnvFile() {
 
 /** The private cluster with our database in it; returns the address. */
 async function startOwnDatabase(session) {
-  await session.step('PostgreSQL programs', async () =>
-    (await ensurePostgresInstalled(logFolder)) ? 'installed' : 'already there',
-  )
-  let address
-  await session.step('PostgreSQL server', async () => {
+  await session.step('PostgreSQL programs', async (note) => {
+    note((await ensurePostgresInstalled(logFolder)) ? 'installed' : 'already there')
+  })
+  return session.step('PostgreSQL server', async (note) => {
     const cluster = await startCluster({
       folder: path.join(dataFolder, 'postgres'),
       preferredPort: POSTGRES_PORT,
       logFile: path.join(logFolder, 'postgres.log'),
     })
     session.defer(() => stopCluster(cluster))
-    address = await ensureDatabase(cluster, 'nightsheet')
-    return `port ${cluster.port}`
+    note(`port ${cluster.port}`)
+    return ensureDatabase(cluster, 'nightsheet')
   })
-  return address
 }
 
 async function setUp(session) {
-  await session.step('Packages', () => ensureDependencies('start'))
-  let plan
-  await session.step('Settings', async () => {
-    plan = await planStart()
-  })
+  await session.step('Packages', (note) => ensureDependencies('start', note))
+  const plan = await session.step('Settings', planStart)
   const mode = { NODE_ENV: dev ? 'development' : 'production' }
   const ownDatabase = plan.hasOwnDatabase ? { DATABASE_URL: await startOwnDatabase(session) } : {}
   return { ...plan, env: { ...plan.settings, ...plan.fakeEnvironment, ...mode, ...ownDatabase } }
@@ -60,7 +55,7 @@ async function runParts(session, { env, isDemo, wantsDemoData, host, ports }) {
   await session.step('Migrations', () => runScript('Migrating', 'db/migrate.ts', 'migrate', env))
   if (isDemo) await session.step('Fakes of weather, mail and push', () => startFakes(session, 'fakes', env))
   if (wantsDemoData) await session.step('Demo data', () => runScript('Seeding', 'db/seed.ts', 'seed', env))
-  if (!dev) await session.step('Production build', () => ensureBuild({ distFolder: DIST_FOLDER, env }))
+  if (!dev) await session.step('Production build', (note) => ensureBuild({ distFolder: DIST_FOLDER, env }, note))
   await session.step('Worker', () => startWorker(session, 'worker', env))
   const web = { env, host, port: ports.web, distFolder: DIST_FOLDER, dev }
   await session.step('Web server', () => startWeb(session, 'web', web))

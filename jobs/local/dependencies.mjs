@@ -35,7 +35,7 @@ function isUpToDate() {
 }
 
 /** Installs what is missing; `command` is ours, any other command that runs here forbids it. */
-export async function ensureDependencies(command) {
+export async function ensureDependencies(command, note) {
   if (!isUpToDate()) {
     const other = ['start', 'test'].find((name) => name !== command && findHolder(name))
     if (other) throw new Problem(`package-lock.json has changed: stop \`npm ${other}\` in this folder first.`)
@@ -46,9 +46,6 @@ export async function ensureDependencies(command) {
     const words = ['ci', '--include=dev', '--no-audit', '--no-fund']
     const [program, args] = npm ? [process.execPath, [npm, ...words]] : ['npm', words]
     await run('npm ci', program, args, inProject('npm-ci', env))
-  } else if (fs.existsSync(marker)) {
-    return 'up to date'
-  }
+  } else note('up to date')
   fs.writeFileSync(marker, hashLock())
-  return undefined
 }

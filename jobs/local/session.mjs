@@ -13,36 +13,43 @@ export function formatSeconds(millis) {
   return `${(millis / 1000).toFixed(1)} s`
 }
 
-/** Prints a Problem as one line with the end of its log; anything else is a bug and keeps its stack. */
-function report(error) {
-  if (!(error instanceof Problem)) return console.error(error)
-  console.error(error.message)
-  if (!error.logFile) return undefined
+/** A Problem as one line with the end of its log; anything else is a bug and keeps its stack. */
+export function describeFailure(error) {
+  if (!(error instanceof Problem)) return error?.stack ?? String(error)
+  if (!error.logFile) return error.message
   const lines = tail(error.logFile)
-  return console.error(lines ? `The end of ${error.logFile}:\n${lines.replace(/^/gm, '  | ')}` : `See ${error.logFile}`)
+  const log = lines ? `The end of ${error.logFile}:\n${lines.replace(/^/gm, '  | ')}` : `See ${error.logFile}`
+  return `${error.message}\n${log}`
 }
 
+const report = (error) => console.error(describeFailure(error))
+
 export class Session {
-  /** Said when everything is undone. */
-  farewell = ''
   #cleanups = []
-  #isStopping = false
   #stoppedAt = 0
   #end = deferEnd()
+  isStopping = false
 
-  /** Prints what is being done, then how long it took and what `work` says about it. */
+  /** `farewell` is said when everything is undone. */
+  constructor({ farewell = '' } = {}) {
+    this.farewell = farewell
+  }
+
+  /** Prints what is being done, then how long it took and what `work` notes about it; returns what `work` returns. */
   async step(title, work) {
     this.#refuseWhenStopping()
     const startedAt = Date.now()
+    const notes = []
     process.stdout.write(`  ${title} … `)
     try {
-      const note = await work()
-      console.log(formatSeconds(Date.now() - startedAt) + (typeof note === 'string' ? `, ${note}` : ''))
+      const result = await work((note) => notes.push(note))
+      console.log([formatSeconds(Date.now() - startedAt), ...notes].join(', '))
+      this.#refuseWhenStopping()
+      return result
     } catch (error) {
-      console.log(this.#isStopping ? 'stopped' : 'failed')
+      if (!(error instanceof Interrupted)) console.log(this.isStopping ? 'stopped' : 'failed')
       throw error
     }
-    this.#refuseWhenStopping()
   }
 
   /** Has `cleanup` called at the end, last one first. */
@@ -67,10 +74,10 @@ export class Session {
     try {
       code = (await main(this)) ?? 0
     } catch (error) {
-      code = error instanceof Interrupted || this.#isStopping ? INTERRUPTED : 1
+      code = error instanceof Interrupted || this.isStopping ? INTERRUPTED : 1
       if (code === 1) report(error)
     }
-    this.#isStopping = true
+    this.isStopping = true
     for (const cleanup of this.#cleanups.reverse()) await Promise.resolve(cleanup()).catch(report)
     if (this.farewell) console.log(this.farewell)
     process.exit(code)
@@ -88,18 +95,18 @@ export class Session {
   }
 
   #stop() {
-    if (this.#isStopping) {
+    if (this.isStopping) {
       if (Date.now() - this.#stoppedAt > SAME_SIGNAL_MILLIS) killAllChildren()
       return
     }
-    this.#isStopping = true
+    this.isStopping = true
     this.#stoppedAt = Date.now()
     interruptRuns()
     this.#end.resolve()
   }
 
   #refuseWhenStopping() {
-    if (this.#isStopping) throw new Interrupted()
+    if (this.isStopping) throw new Interrupted()
   }
 }
 

@@ -1,10 +1,11 @@
 // The settings of a local deployment: what the environment says, else the private database, the fakes and kept secrets.
+import fs from 'node:fs'
 import path from 'node:path'
 
 import { pickPort } from '../../lib/machine/ports.mjs'
 import { Problem } from '../../lib/machine/problem.mjs'
 
-import { cleanEnvironment, dataFolder } from './project.mjs'
+import { cleanEnvironment, dataFolder, projectFolder } from './project.mjs'
 import { keepSecrets } from './secrets.mjs'
 
 const DATABASE_TO_COME = 'postgres://127.0.0.1/to-come'
@@ -18,12 +19,12 @@ const USUAL_PORTS = {
   pushPage: ['FAKE_PUSH_PAGE_PORT', 3231],
 }
 
-/** The usual port of each server or the next free one; `shift` moves them all out of another command's way. */
-export async function pickPorts(shift = 0) {
+/** The usual port of each server, or what the environment says, or the next free one; `shift` moves the usual ones. */
+export async function pickPorts({ shift = 0, environment = process.env } = {}) {
   const given = new Set()
   const ports = {}
   for (const [server, [setting, usual]] of Object.entries(USUAL_PORTS)) {
-    const wanted = process.env[setting] || usual + shift
+    const wanted = environment[setting] || usual + shift
     if (!/^\d{1,5}$/.test(wanted)) throw new Problem(`Settings: ${setting} must be a port number`)
     ports[server] = await pickPort(Number(wanted), given)
   }
@@ -57,6 +58,13 @@ export function describeFakes(ports, caFile) {
     PUSH_CA_FILE: caFile,
   }
   return { addresses, environment, settings }
+}
+
+/** The environment without any setting of ours, for runs that bring all of them. */
+export function withoutSettings(environment) {
+  const example = fs.readFileSync(path.join(projectFolder, '.env.example'), 'utf8')
+  const names = new Set([...example.matchAll(/^#? ?([A-Z][A-Z0-9_]+)=/gm)].map(([, name]) => name))
+  return Object.fromEntries(Object.entries(environment).filter(([name]) => !names.has(name)))
 }
 
 /** `defaults` beneath what the environment says; the two VAPID keys go together, and an empty setting counts as none. */

@@ -1,11 +1,10 @@
 // Reads what the test tools write about a run, into one form: counts, and what failed in a line or two each.
 import fs from 'node:fs'
+import { stripVTControlCharacters } from 'node:util'
 
 const MESSAGE_LINES = 6
-// Colours that the tools put into messages.
-const COLOURS = new RegExp(`${String.fromCharCode(27)}\\[[0-9;]*m`, 'g')
 
-const shorten = (message = '') => message.replace(COLOURS, '').trim().split('\n').slice(0, MESSAGE_LINES).join('\n')
+const shorten = (message = '') => stripVTControlCharacters(message).trim().split('\n').slice(0, MESSAGE_LINES).join('\n')
 
 function readReport(file) {
   try {

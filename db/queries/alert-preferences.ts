@@ -103,3 +103,17 @@ export async function turnEmailOff(
   )
   return result.rowCount === 1
 }
+
+/** For the page behind a mail's unsubscribe link; undefined when the person has left the rink. */
+export async function findMailChoice(
+  db: Db,
+  { rinkId, userId }: { rinkId: string; userId: string },
+): Promise<{ rinkName: string; wantsEmail: boolean } | undefined> {
+  const row = await db('rink_members as m')
+    .join('rinks as r', 'r.id', 'm.rink_id')
+    .leftJoin('alert_preferences as p', (on) => on.on('p.rink_id', 'm.rink_id').andOn('p.user_id', 'm.user_id'))
+    .where('m.rink_id', rinkId)
+    .where('m.user_id', userId)
+    .first({ rinkName: 'r.name', wantsEmail: 'p.wants_email' })
+  return row && { rinkName: row.rinkName, wantsEmail: row.wantsEmail ?? DEFAULT_PREFERENCES.wantsEmail }
+}

@@ -1,5 +1,6 @@
 // Rinks with their water and their keeper's hours.
 import type { Db } from '@/db/knex'
+import { NotFoundError } from '@/lib/errors'
 import type { RinkAccess } from '@/lib/access/proofs'
 import type { Role } from '@/lib/access/permissions'
 import type { Base, Phase, ShelterName } from '@/lib/advice/types'
@@ -193,4 +194,11 @@ export async function listRinksOfUser(db: Db, userId: string): Promise<RinkOfUse
       phase: 'r.phase',
       role: 'm.role',
     })
+}
+
+/** What a page about something else needs of its rink. */
+export async function getRinkHead(db: Db, access: RinkAccess): Promise<{ name: string; timeZone: string }> {
+  const row = await db('rinks').where({ id: access.rinkId }).first({ name: 'name', timeZone: 'time_zone' })
+  if (!row) throw new NotFoundError('Rink')
+  return row
 }

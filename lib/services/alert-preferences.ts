@@ -1,0 +1,108 @@
+// How a person wants to hear about a rink, and for how long they want silence.
+import { createHash } from 'node:crypto'
+import {
+  DEFAULT_PREFERENCES,
+  findAlertPreferences,
+  putAlertPreferences,
+  type AlertPreferences,
+} from '@/db/queries/alert-preferences'
+import { enqueueJob } from '@/db/queries/jobs'
+import { listDevices, type DeviceRow } from '@/db/queries/push-subscriptions'
+import { getRinkHead } from '@/db/queries/rinks'
+import { listToldMessages, type ToldMessageRow } from '@/db/queries/told-messages'
+import { findAccount } from '@/db/queries/users'
+import type { Db } from '@/db/knex'
+import { requireRink } from '@/lib/access/require-rink'
+import { tonightDate } from '@/lib/advice/night'
+import { addDays } from '@/lib/advice/zoned-time'
+import type { ServiceContext } from '@/lib/context'
+import { InvalidInputError, NotFoundError } from '@/lib/errors'
+import type { AlertPreferencesInput, MuteInput } from '@/lib/schemas/alerts'
+
+export interface Device {
+  id: string
+  /** Who carries the pushes: names the browser well enough to tell a phone from a laptop. */
+  pushHost: string
+  /** SHA-256 of the address, by which a browser knows itself in the list. */
+  fingerprint: string
+  addedAt: Date
+  disabledReason: string | null
+}
+
+export interface AlertSettings {
+  rink: { name: string; timeZone: string }
+  tonightDate: string
+  preferences: AlertPreferences
+  email: string
+  clock: '12' | '24'
+  devices: Device[]
+  told: ToldMessageRow[]
+}
+
+const TOLD_SHOWN = 30
+const LONGEST_MUTE_DAYS = 366
+
+function toDevice({ id, endpoint, createdAt, disabledReason }: DeviceRow): Device {
+  const fingerprint = createHash('sha256').update(endpoint).digest('hex')
+  return { id, pushHost: new URL(endpoint).hostname, fingerprint, addedAt: createdAt, disabledReason }
+}
+
+/** @throws ForbiddenError for skaters, who are not told; NotFoundError for strangers. */
+export async function getAlertSettings(context: ServiceContext, rinkId: string): Promise<AlertSettings> {
+  const { db, now, viewer } = context
+  const access = await requireRink(context, rinkId, 'receiveAlerts')
+  const account = await findAccount(db, viewer.userId)
+  if (!account) throw new NotFoundError('Account')
+  const rink = await getRinkHead(db, access)
+  return {
+    rink,
+    tonightDate: tonightDate(now, rink.timeZone),
+    preferences: (await findAlertPreferences(db, access, viewer.userId)) ?? DEFAULT_PREFERENCES,
+    email: account.email,
+    clock: account.clock,
+    devices: (await listDevices(db, viewer.userId)).map(toDevice),
+    told: await listToldMessages(db, access, viewer.userId, TOLD_SHOWN),
+  }
+}
+
+/** An earlier time of day, or the end of silence, may make something due at once. */
+async function decideAgain(trx: Db, rinkId: string): Promise<void> {
+  await enqueueJob(trx, 'decide-alerts', { rinkId }, { key: `decide:${rinkId}:now` })
+}
+
+export async function chooseAlertPreferences(context: ServiceContext, input: AlertPreferencesInput): Promise<void> {
+  const { rinkId, ...choice } = input
+  const access = await requireRink(context, rinkId, 'receiveAlerts')
+  await context.db.transaction(async (trx) => {
+    await putAlertPreferences(trx, access, context.viewer.userId, choice, context.now)
+    await decideAgain(trx, rinkId)
+  })
+}
+
+/** @returns the last silent night, null when alerts are on again. */
+export async function muteAlerts(
+  context: ServiceContext,
+  input: MuteInput,
+): Promise<{ mutedThroughDate: string | null }> {
+  const access = await requireRink(context, input.rinkId, 'receiveAlerts')
+  const { timeZone } = await getRinkHead(context.db, access)
+  const mutedThroughDate = lastSilentNight(input, tonightDate(context.now, timeZone))
+  await context.db.transaction(async (trx) => {
+    await putAlertPreferences(trx, access, context.viewer.userId, { mutedThroughDate }, context.now)
+    if (mutedThroughDate === null) await decideAgain(trx, input.rinkId)
+  })
+  return { mutedThroughDate }
+}
+
+/** @throws InvalidInputError at the date, for one that is over or so far ahead that it was a slip. */
+function lastSilentNight(input: MuteInput, tonight: string): string | null {
+  if (input.until === 'never') return null
+  if (input.until === 'tonight') return tonight
+  const throughDate = input.throughDate ?? tonight
+  if (throughDate < tonight)
+    throw new InvalidInputError('That night is over.', { throughDate: 'Choose tonight or a later night.' })
+  if (throughDate > addDays(tonight, LONGEST_MUTE_DAYS)) {
+    throw new InvalidInputError('That is too far ahead.', { throughDate: 'At most a year ahead.' })
+  }
+  return throughDate
+}

@@ -103,13 +103,22 @@ export const THAW = {
   leastHours: 24,
   /** Less than this is wear, not thaw. Ours. [mm] */
   leastLossMm: 1,
+  /** Slower than this is evaporation, not melting. Ours. [mm/h] */
+  losingMmPerH: 0.05,
+}
+
+export const AGREEMENT = {
+  /** A run agrees with a window when this share of its starting hours is good in that run. Ours. */
+  goodShare: 0.5,
+  /** Perturbed runs where the provider has no members. Ours. */
+  defaultRuns: 10,
 }
 
 export const PLAN = {
   /** Passes start on the quarter hour. Ours. */
   stepMinutes: 15,
-  /** Ice that a trip must bring before it is worth putting boots on. Ours. [mm] */
-  tripCostMm: 0.75,
+  /** What a trip costs, as a share of a layer: a pass must be worth more than this to be planned. Ours. */
+  tripCostShare: 0.25,
 }
 
 export const SNOW_RULES = {

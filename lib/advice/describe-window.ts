@@ -1,0 +1,49 @@
+// A range of good hours turned into a window: to the quarter hour, with its latest start and when the last layer is set.
+import type { PreparedHour } from '@/lib/physics/types'
+import { judgeFloodStart } from './flood-factors'
+import type { ForecastRun } from './forecast-run'
+import { isGood, setsAtOf } from './score-hours'
+import { isAvailableAt, type Setting } from './setting'
+import { PLAN } from './thresholds'
+import { toIso } from './zoned-time'
+import type { HourRange } from './windows'
+import type { AdviceWindow, ScoredHour } from './types'
+
+const HOUR_MILLIS = 3_600_000
+const QUARTERS = Array.from({ length: 60 / PLAN.stepMinutes }, (_, step) => (step * PLAN.stepMinutes) / 60)
+
+/** Without its agreement, which needs the other forecast runs. */
+export type WindowDraft = Omit<AdviceWindow, 'agreement' | 'runs'>
+
+/** @param fillSetBy When the water of a fill started in the range is skinned over, for fill windows. */
+export function describeWindow(
+  setting: Setting,
+  run: ForecastRun,
+  scored: readonly ScoredHour[],
+  range: HourRange,
+  fillSetBy: (index: number) => string | null,
+): WindowDraft {
+  const startOf = (index: number) => (run.hours[index] as PreparedHour).startsAtMillis
+  const lastIndex = range.to - 1
+  const openIn = (index: number) => QUARTERS.filter((q) => isAvailableAt(setting, startOf(index) + q * HOUR_MILLIS))
+  const startsAt = startOf(range.from) + (openIn(range.from)[0] ?? 0) * HOUR_MILLIS
+  const lastOpen = openIn(lastIndex).at(-1) ?? 0
+  const endsAt = startOf(lastIndex) + (lastOpen + PLAN.stepMinutes / 60) * HOUR_MILLIS
+  const scores = scored.slice(range.from, range.to).map((hour) => hour.scores[range.kind])
+  const common = {
+    kind: range.kind,
+    startsAt: toIso(startsAt),
+    endsAt: toIso(endsAt),
+    score: Math.round(scores.reduce((sum, score) => sum + score, 0) / scores.length),
+    bestStartAt: toIso(Math.max(startsAt, startOf(range.from + scores.indexOf(Math.max(...scores))))),
+  }
+  if (range.kind === 'fill') {
+    return { ...common, latestStartAt: toIso(startOf(lastIndex)), setBy: fillSetBy(lastIndex) ?? toIso(endsAt) }
+  }
+  const last = openIn(lastIndex)
+    .reverse()
+    .map((fraction) => judgeFloodStart(setting, run, lastIndex, fraction))
+    .find((start) => isGood(start))
+  const setBy = (last && setsAtOf(last)) ?? (scored[lastIndex] as ScoredHour).setsAt
+  return { ...common, latestStartAt: toIso(last?.startMillis ?? startOf(lastIndex)), setBy: setBy ?? toIso(endsAt) }
+}

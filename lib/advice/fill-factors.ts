@@ -1,0 +1,118 @@
+// The factors of a fill started in one hour, as numbers from 0 to 1, with what they rest on.
+import { growFill, type FillGrowth } from '@/lib/physics/fill'
+import { reportSheet } from '@/lib/physics/sheet'
+import type { PreparedHour } from '@/lib/physics/types'
+import { windChillC } from '@/lib/physics/wind-chill'
+import { overallDesirability, rampDesirability } from './desirability'
+import { fillReasons } from './fill-reasons'
+import { fillSession, type FillSession } from './fill-session'
+import type { ForecastRun } from './forecast-run'
+import type { Setting } from './setting'
+import { FILL, PERSON } from './thresholds'
+import type { Reason } from './types'
+
+export interface FillFactors {
+  cold: number
+  snow: number
+  liner: number
+  air: number
+}
+
+/** What the hours of a fill and after it bring; null where the forecast does not reach. */
+export interface FillOutcome {
+  session: FillSession
+  hasGap: boolean
+  lowestAirC: number
+  highestAirC: number
+  lowestWindChillC: number
+  highestGustMps: number
+  lookAheadHours: number
+  iceAfterMm: number
+  snowBeforeSkinCm: number
+  skinIndex: number | null
+}
+
+export interface FillStart {
+  ice: number
+  person: number
+  outcome: FillOutcome | null
+  reasons: Reason[]
+}
+
+/** Growth by the hour in which the water is in: many starts share one. */
+export type GrowthCache = Map<number, FillGrowth>
+
+/** Judges a fill started in an hour. */
+export function judgeFillStart(setting: Setting, run: ForecastRun, index: number, cache: GrowthCache): FillStart {
+  const session = fillSession(setting, run, index)
+  const outcome = session ? outcomeOf(setting, run, session, cache) : null
+  const factors = outcome ? factorsOf(setting, outcome) : { cold: 0, snow: 1, liner: 1, air: 1 }
+  const hour = run.hours[index] as PreparedHour
+  const lowestAirC = outcome?.lowestAirC ?? hour.airTemperatureC
+  const lowestWindChillC = outcome?.lowestWindChillC ?? windChillC(hour.airTemperatureC, hour.windSpeedMps)
+  const hose = rampDesirability(lowestAirC, PERSON.fillHoseC)
+  const hands = rampDesirability(lowestWindChillC, PERSON.fillWindChillC)
+  const limits = { hose, hands, lowestAirC, lowestWindChillC }
+  return {
+    ice: outcome?.hasGap ? 0 : overallDesirability(factors, FILL.weights),
+    person: Math.min(hose, hands),
+    outcome,
+    reasons: fillReasons(setting, factors, outcome, limits),
+  }
+}
+
+function outcomeOf(setting: Setting, run: ForecastRun, session: FillSession, cache: GrowthCache): FillOutcome {
+  const hours = session.hoseHours.map((index) => run.hours[index] as PreparedHour)
+  const first = session.hoseHours[0] as number
+  const weather = {
+    session,
+    hasGap: hours.some((hour) => !hour.isKnown),
+    lowestAirC: Math.min(...hours.map((hour) => hour.airTemperatureC)),
+    highestAirC: Math.max(...hours.map((hour) => hour.airTemperatureC)),
+    lowestWindChillC: Math.min(...hours.map((hour) => windChillC(hour.airTemperatureC, hour.windSpeedMps))),
+    highestGustMps: Math.max(...hours.map((hour) => hour.windGustMps)) * setting.gustFactor,
+    lookAheadHours: Math.min(FILL.coldLookAheadHours, run.hours.length - session.doneIndex),
+  }
+  // A fill that the hose, the hands or the wind forbid needs no look at the days after it.
+  const isHopeless =
+    weather.lowestAirC <= PERSON.fillHoseC.zero || weather.lookAheadHours < FILL.leastLookAheadHours || weather.hasGap
+  if (isHopeless) return { ...weather, iceAfterMm: 0, snowBeforeSkinCm: 0, skinIndex: null }
+  const growth = growthFrom(setting, run, session.doneIndex, cache)
+  const skinHours = growth.hoursToThickness[0]
+  const skinIndex = skinHours == null ? null : session.doneIndex + Math.ceil(skinHours)
+  const untilSkin = run.hours.slice(first, skinIndex ?? session.doneIndex + weather.lookAheadHours)
+  return {
+    ...weather,
+    iceAfterMm: reportSheet(growth.state).thicknessMm,
+    snowBeforeSkinCm: untilSkin.reduce((sum, hour) => sum + hour.snowfallCm, 0),
+    skinIndex,
+  }
+}
+
+function growthFrom(setting: Setting, run: ForecastRun, doneIndex: number, cache: GrowthCache): FillGrowth {
+  const known = cache.get(doneIndex)
+  if (known) return known
+  const { fillDepthMm, temperatureC } = setting.input.water
+  const fill = {
+    depthMm: Math.max(1, fillDepthMm),
+    waterTemperatureC: Math.min(40, temperatureC),
+    base: setting.input.rink.base,
+  }
+  const hours = run.hours.slice(doneIndex, doneIndex + FILL.coldLookAheadHours)
+  const growth = growFill(fill, hours, 0, [FILL.skinMm])
+  cache.set(doneIndex, growth)
+  return growth
+}
+
+function factorsOf(setting: Setting, outcome: FillOutcome): FillFactors {
+  const share = outcome.lookAheadHours / FILL.coldLookAheadHours
+  // A shallow fill that froze through has all the ice it can have.
+  const mostMm = Math.min(FILL.iceAfterMm.one, setting.input.water.fillDepthMm)
+  const wanted = { one: mostMm * share, zero: Math.min(FILL.iceAfterMm.zero, mostMm / 2) * share }
+  return {
+    cold: outcome.lookAheadHours < FILL.leastLookAheadHours ? 0 : rampDesirability(outcome.iceAfterMm, wanted),
+    snow: rampDesirability(outcome.snowBeforeSkinCm, FILL.snowBeforeSkinCm),
+    liner: setting.input.rink.base === 'liner' ? rampDesirability(outcome.highestGustMps, FILL.linerGustMps) : 1,
+    air: rampDesirability(outcome.highestAirC, FILL.airTooWarmC),
+  }
+}

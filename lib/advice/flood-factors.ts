@@ -1,0 +1,163 @@
+// The factors of a flood started at one moment, as numbers from 0 to 1; flood-reasons.ts puts names to them.
+import { minutesToSet } from '@/lib/physics/layer'
+import { freezeRateMmPerH, wetSurfaceBalance } from '@/lib/physics/balance'
+import { clearSnow, reportSheet, type SheetState } from '@/lib/physics/sheet'
+import type { HeatBalanceParts, PreparedHour } from '@/lib/physics/types'
+import { windChillC } from '@/lib/physics/wind-chill'
+import { overallDesirability, rampDesirability } from './desirability'
+import type { ForecastRun } from './forecast-run'
+import { neededMillis, type Setting } from './setting'
+import { FLOOD, PERSON } from './thresholds'
+import type { SheetReport } from './types'
+
+const MINUTE_MILLIS = 60_000
+const HOUR_MILLIS = 3_600_000
+
+export interface FloodFactors {
+  bears: number
+  rate: number
+  dry: number
+  set: number
+  slack: number
+  air: number
+  wind: number
+  gust: number
+  lastLayer: number
+  snow: number
+}
+
+/** Everything known of a flood started at one moment. */
+export interface FloodStart {
+  startMillis: number
+  hour: PreparedHour
+  parts: HeatBalanceParts
+  netWm2: number
+  rateMmPerH: number
+  windChillC: number
+  windAtRinkMps: number
+  gustAtRinkMps: number
+  sheet: SheetReport
+  setMinutes: number | null
+  neededMillis: number
+  /** From pour to set, or to when it is needed if it does not set. [mm] */
+  wetMm: number
+  factors: FloodFactors
+  hose: number
+  skin: number
+  /** 0-1 */
+  ice: number
+  /** 0-1, the worse of hose and skin */
+  person: number
+}
+
+/**
+ * Judges a flood started in a known hour.
+ *
+ * @param setting The rink.
+ * @param run Forecast run with its sheet.
+ * @param index Hour of the start; must be known.
+ * @param fraction Share of that hour gone by, 0 to below 1.
+ * @param sheet The sheet to pour on, when it is not the run's own.
+ */
+export function judgeFloodStart(
+  setting: Setting,
+  run: ForecastRun,
+  index: number,
+  fraction = 0,
+  sheet: SheetState = run.sheets[index] as SheetState,
+): FloodStart {
+  const hour = run.hours[index] as PreparedHour
+  const startMillis = hour.startsAtMillis + fraction * HOUR_MILLIS
+  const { netWm2, parts } = wetSurfaceBalance(hour)
+  const report = reportSheet(sheet)
+  const cleared = report.snowCoverCm > 0 ? clearSnow(sheet) : sheet
+  const rateMmPerH = freezeRateMmPerH(netWm2)
+  const needed = neededMillis(setting, startMillis)
+  const setMinutes = knownMinutesToSet(setting, run, index, fraction, cleared)
+  const untilMillis = setMinutes === null ? needed : startMillis + setMinutes * MINUTE_MILLIS
+  const start = {
+    startMillis,
+    hour,
+    parts,
+    netWm2,
+    rateMmPerH,
+    windChillC: windChillC(hour.airTemperatureC, hour.windSpeedMps),
+    windAtRinkMps: hour.windAtRinkMps,
+    gustAtRinkMps: hour.windGustMps * setting.gustFactor,
+    sheet: report,
+    setMinutes,
+    neededMillis: needed,
+    wetMm: wetBetween(run, index, untilMillis),
+  }
+  const factors = floodFactors(start, setting)
+  const hose = rampDesirability(hour.airTemperatureC, PERSON.floodHoseC)
+  const skin = rampDesirability(start.windChillC, PERSON.windChillC)
+  return {
+    ...start,
+    factors,
+    hose,
+    skin,
+    ice: overallDesirability(factors, FLOOD.weights),
+    person: Math.min(hose, skin),
+  }
+}
+
+/** Null also when the weather is unknown before the layer is set: no flood is advised into a gap. */
+function knownMinutesToSet(
+  setting: Setting,
+  run: ForecastRun,
+  index: number,
+  fraction: number,
+  sheet: SheetState,
+): number | null {
+  const minutes = minutesToSet(sheet, run.hours, index, fraction, setting.layer)
+  if (minutes === null) return null
+  const lastHour = Math.min(run.hours.length, Math.ceil(index + fraction + minutes / 60))
+  return (run.unknownBefore[lastHour] as number) > (run.unknownBefore[index] as number) ? null : minutes
+}
+
+/** Whole hours are counted, the first and the last too: when in the hour it falls is not known. */
+export function wetBetween(run: ForecastRun, index: number, untilMillis: number): number {
+  const first = run.hours[0] as PreparedHour
+  const end = Math.ceil((untilMillis - first.startsAtMillis) / HOUR_MILLIS)
+  const last = Math.min(run.hours.length, Math.max(index + 1, end))
+  return (run.wetBefore[last] as number) - (run.wetBefore[index] as number)
+}
+
+type Measured = Omit<FloodStart, 'factors' | 'hose' | 'skin' | 'ice' | 'person'>
+
+function floodFactors(start: Measured, setting: Setting): FloodFactors {
+  const { setMinutes, sheet } = start
+  const isDry = start.wetMm <= FLOOD.precipitationMm
+  const slack = setMinutes === null ? 0 : (start.neededMillis - start.startMillis) / MINUTE_MILLIS - setMinutes
+  return {
+    bears: bearsFlood(setting, sheet.thicknessMm),
+    rate: rampDesirability(start.rateMmPerH, FLOOD.freezeRateMmPerH),
+    dry: isDry ? 1 - (1 - FLOOD.traceFactor) * (start.wetMm / FLOOD.precipitationMm) : 0,
+    set: setDesirability(setMinutes),
+    slack: rampDesirability(slack, FLOOD.slackMinutes),
+    air: Math.min(
+      rampDesirability(start.hour.airTemperatureC, FLOOD.airTooWarmC),
+      rampDesirability(start.hour.airTemperatureC, FLOOD.airTooColdC),
+    ),
+    wind: rampDesirability(start.windAtRinkMps, FLOOD.windAtRinkMps),
+    gust: rampDesirability(start.gustAtRinkMps, FLOOD.gustAtRinkMps),
+    lastLayer: rampDesirability(sheet.liquidMm, FLOOD.wetMm),
+    snow: rampDesirability(sheet.snowCoverCm, FLOOD.snowToClearCm),
+  }
+}
+
+function setDesirability(setMinutes: number | null): number {
+  if (setMinutes === null || setMinutes > FLOOD.longestSetMinutes) return 0
+  return Math.min(1, Math.exp(-(setMinutes - FLOOD.set.quickMinutes) / FLOOD.set.fadeMinutes))
+}
+
+/** On bare ground and on snow the sheet is built up by floods, so only a lined sheet must first bear the person. */
+function bearsFlood({ input }: Setting, thicknessMm: number): number {
+  const { phase, base } = input.rink
+  if (phase === 'planning' || phase === 'waiting' || phase === 'filling' || phase === 'closed') {
+    const isBuiltByFloods = base !== 'liner' && phase === 'filling'
+    return isBuiltByFloods ? 1 : 0
+  }
+  return base === 'liner' || phase === 'freezing' ? rampDesirability(thicknessMm, FLOOD.bearsMm) : 1
+}

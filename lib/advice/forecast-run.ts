@@ -1,0 +1,96 @@
+// One forecast run seen by the advice: prepared hours, running sums, and the sheet carried through them.
+import { advanceSheet, createSheet, pourLayer, reportSheet, type SheetState } from '@/lib/physics/sheet'
+import { minutesToSet, type Layer } from '@/lib/physics/layer'
+import type { PreparedHour } from '@/lib/physics/types'
+import { readStoredSheet } from './stored-sheet'
+import type { Setting } from './setting'
+import type { SheetReport } from './types'
+
+const HOUR_MILLIS = 3_600_000
+
+export interface ForecastRun {
+  hours: PreparedHour[]
+  /** Rain and snow before each hour, water equivalent; one more entry than hours. [mm] */
+  wetBefore: Float64Array
+  /** Unknown hours before each hour; one more entry than hours. */
+  unknownBefore: Int32Array
+  /** The sheet at the start of each hour, poured layers on it. */
+  sheets: SheetState[]
+  /** The same before the layers poured at that hour, and one more at the end: what is kept to resume from. */
+  carried: SheetState[]
+  reports: SheetReport[]
+  /** When the last layer that was really poured is set, or the end of the run when it is not; null when none was. */
+  pouredSetMillis: number | null
+}
+
+/** New snow is taken as one millimetre of water a centimetre where only its depth is given. */
+export function wetMmOf(hour: PreparedHour): number {
+  return Math.max(hour.precipitationMm, hour.snowfallCm)
+}
+
+/** Carries the sheet of the input through a run of hours. */
+export function carrySheet(setting: Setting, hours: PreparedHour[]): ForecastRun {
+  const run: ForecastRun = {
+    hours,
+    wetBefore: new Float64Array(hours.length + 1),
+    unknownBefore: new Int32Array(hours.length + 1),
+    sheets: [],
+    carried: [],
+    reports: [],
+    pouredSetMillis: null,
+  }
+  const asOf = setting.input.sheet.asOf
+  const asOfMillis = asOf === undefined ? setting.firstMillis : Date.parse(asOf)
+  const poured = (setting.input.poured ?? []).filter((layer) => entryMillis(layer.at) >= asOfMillis)
+  let sheet = startingSheet(setting)
+  for (const [index, hour] of hours.entries()) {
+    run.wetBefore[index + 1] = (run.wetBefore[index] as number) + wetMmOf(hour)
+    run.unknownBefore[index + 1] = (run.unknownBefore[index] as number) + (hour.isKnown ? 0 : 1)
+    run.carried.push(sheet)
+    for (const layer of poured) {
+      if (entryMillis(layer.at) === hour.startsAtMillis) sheet = pourLayer(sheet, layer)
+      noteWhenSet(run, sheet, index, layer)
+    }
+    run.sheets.push(sheet)
+    if (hour.startsAtMillis >= asOfMillis) sheet = advanceSheet(sheet, hour)
+    run.reports.push(reportSheet(sheet))
+  }
+  run.carried.push(sheet)
+  return run
+}
+
+/** A layer enters the sheet at the full hour nearest to its time. */
+function entryMillis(at: string): number {
+  return Math.round(Date.parse(at) / HOUR_MILLIS) * HOUR_MILLIS
+}
+
+/** When a poured layer is set is reckoned from its own minute, not from the hour at which it enters the sheet. */
+function noteWhenSet(run: ForecastRun, sheet: SheetState, index: number, poured: Layer & { at: string }): void {
+  const { startsAtMillis } = run.hours[index] as PreparedHour
+  const atMillis = Date.parse(poured.at)
+  const fraction = (atMillis - startsAtMillis) / HOUR_MILLIS
+  if (fraction < 0 || fraction >= 1) return
+  const before = fraction < 0.5 ? (run.carried[index] as SheetState) : sheet
+  const minutes = minutesToSet(before, run.hours, index, fraction, poured)
+  const endMillis = startsAtMillis + (run.hours.length - index) * HOUR_MILLIS
+  run.pouredSetMillis = minutes === null ? endMillis : atMillis + minutes * 60_000
+}
+
+function startingSheet({ input }: Setting): SheetState {
+  if (input.sheet.state !== undefined) return readStoredSheet(input.sheet.state)
+  const { thicknessMm, temperatureC, snowCoverCm, liquidMm = 0 } = input.sheet
+  const { fillDepthMm, temperatureC: waterTemperatureC } = input.water
+  const isFloating = input.rink.phase === 'freezing'
+  return createSheet({
+    thicknessMm,
+    temperatureC,
+    snowCoverCm,
+    liquidMm,
+    unfrozenBelowMm: isFloating ? Math.max(0, fillDepthMm - thicknessMm * ICE_TO_WATER) : 0,
+    waterTemperatureC,
+    base: input.rink.base,
+  })
+}
+
+/** Depth of water that a depth of ice was: ice of 916.7 kg/m³ at 0 °C (CRC Handbook, IAPWS). */
+const ICE_TO_WATER = 0.9167

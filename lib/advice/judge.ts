@@ -1,0 +1,119 @@
+// The one way in: weather, rink and settings go in, scored hours, windows, a plan, the fill and thaws come out.
+import { prepareHours } from '@/lib/physics/prepare'
+import { reportSheet, type SheetState } from '@/lib/physics/sheet'
+import { agreementOf, carryRuns, otherRuns } from './agreement'
+import { describeWindow } from './describe-window'
+import { judgeFillStart, type FillStart, type GrowthCache } from './fill-factors'
+import { fillOutlook } from './fill-outlook'
+import { carrySheet, type ForecastRun } from './forecast-run'
+import { round, scoreHour } from './score-hours'
+import { makeSetting, type Setting } from './setting'
+import { findThaws } from './thaw'
+import { VERDICT } from './thresholds'
+import { planTonight } from './tonight-plan'
+import { findWindows, type HourRange } from './windows'
+import { toIso } from './zoned-time'
+import type { AdviceWindow, FillOutlook, Judgement, JudgeInput, JudgeOptions, ScoredHour } from './types'
+
+/** Changes when the same input may give another judgement. */
+export const MODEL_VERSION = 'nightsheet-1'
+const HOUR_MILLIS = 3_600_000
+/** Hours after a window that other runs need, so that its last layer can set in them. */
+const HOURS_TO_SET = 24
+
+/**
+ * Judges a forecast for one rink.
+ *
+ * @param input Rink, water, sheet, hours and settings; see JudgeInput. Hours must follow each other without a gap; what
+ *   is missing in them is null.
+ * @param options Other runs and their seed, and the hour at which the sheet's state is wanted.
+ * @returns Scores for every hour given, and from `now` on the windows, the plan of tonight, the fill and thaws.
+ * @throws RangeError for values out of range, hours that do not follow each other, or an unknown zone.
+ */
+export function judge(input: JudgeInput, options: JudgeOptions = {}): Judgement {
+  const setting = makeSetting(input)
+  const main = carrySheet(setting, prepareHours(input.hours, setting.site))
+  const fills = fillStarts(setting, main)
+  const hours = main.hours.map((_, index) => scoreHour(setting, main, index, fills[index] ?? null))
+  const ranges = openRanges(setting, main, hours)
+  const records = otherRuns(setting, options)
+  const runs = needsRuns(setting, ranges) ? carryRuns(setting, records, hoursNeeded(setting, ranges, main)) : []
+  const windows = ranges.map((range): AdviceWindow => {
+    const draft = describeWindow(setting, main, hours, range, (index) => skinAtOf(main, fills[index]))
+    return { ...draft, agreement: round(agreementOf(setting, runs, range), 3), runs: records.length }
+  })
+  return {
+    modelVersion: MODEL_VERSION,
+    hours,
+    windows,
+    plan: { passes: planTonight(setting, main, hours) },
+    fill: outlookOf(setting, main, runs, ranges, hours),
+    thaws: thawsOf(main, hours),
+    ...(options.stateAt === undefined ? {} : { sheetState: sheetStateAt(main, options.stateAt) }),
+  }
+}
+
+/** Only rinks that wait for a fill, or are being filled, are asked about filling. */
+function fillStarts(setting: Setting, run: ForecastRun): (FillStart | null)[] {
+  const { phase } = setting.input.rink
+  if (phase !== 'waiting' && phase !== 'filling') return []
+  const cache: GrowthCache = new Map()
+  return run.hours.map((hour, index) => (hour.isKnown ? judgeFillStart(setting, run, index, cache) : null))
+}
+
+function openRanges(setting: Setting, run: ForecastRun, hours: readonly ScoredHour[]): HourRange[] {
+  return findWindows(
+    hours.map(({ verdict, isAvailable }, index) => {
+      const endMillis = (run.hours[index]?.startsAtMillis ?? 0) + HOUR_MILLIS
+      return { verdict, isOpen: isAvailable === true && endMillis > setting.nowMillis }
+    }),
+  )
+}
+
+function needsRuns(setting: Setting, ranges: readonly HourRange[]): boolean {
+  return ranges.length > 0 || setting.input.rink.phase === 'freezing'
+}
+
+/** Fill and freezing look to the end of the forecast; floods only until the last window's last layer is set. */
+function hoursNeeded(setting: Setting, ranges: readonly HourRange[], run: ForecastRun): number {
+  const isFloodOnly = ranges.every((range) => range.kind === 'flood') && setting.input.rink.phase !== 'freezing'
+  return isFloodOnly ? Math.min(run.hours.length, (ranges.at(-1)?.to ?? 0) + HOURS_TO_SET) : run.hours.length
+}
+
+function skinAtOf(run: ForecastRun, fill: FillStart | null | undefined): string | null {
+  const index = fill?.outcome?.skinIndex
+  return index == null ? null : toIso((run.hours[0]?.startsAtMillis ?? 0) + index * HOUR_MILLIS)
+}
+
+function outlookOf(
+  setting: Setting,
+  main: ForecastRun,
+  runs: ForecastRun[],
+  ranges: readonly HourRange[],
+  hours: readonly ScoredHour[],
+): FillOutlook {
+  const range = ranges.find((one) => one.kind === 'fill')
+  const inRange = range ? hours.slice(range.from, range.to).map((hour) => hour.scores.fill) : []
+  const startIndex = range ? range.from + inRange.indexOf(Math.max(...inRange)) : null
+  return fillOutlook(setting, runs.length > 0 ? [main, ...runs] : [main], startIndex)
+}
+
+function thawsOf(run: ForecastRun, hours: readonly ScoredHour[]) {
+  const startThicknessMm = reportSheet(run.sheets[0] as SheetState).thicknessMm
+  return findThaws(
+    hours.map(({ isKnown, limits, sheet }, index) => ({
+      startMillis: run.hours[index]?.startsAtMillis ?? 0,
+      isGood: (limits?.ice ?? 0) >= VERDICT.goodScore,
+      isKnown,
+      thicknessMm: sheet.thicknessMm,
+    })),
+    startThicknessMm,
+  )
+}
+
+function sheetStateAt(run: ForecastRun, at: string): NonNullable<Judgement['sheetState']> {
+  const first = run.hours[0]?.startsAtMillis ?? 0
+  const index = Math.floor((Date.parse(at) - first) / HOUR_MILLIS)
+  if (!(index >= 0 && index <= run.hours.length)) throw new RangeError(`stateAt ${at} lies outside the hours`)
+  return { at: toIso(first + index * HOUR_MILLIS), state: run.carried[index] }
+}

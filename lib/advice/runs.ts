@@ -1,0 +1,121 @@
+// Other runs of the same forecast: the provider's members when there are any, else runs perturbed by the error model.
+import type { HourlyRecord } from '@/lib/physics/types'
+import { ERROR_MEMORY_HOURS, errorAt, FORECAST_ERROR } from './error-model'
+import { normalFrom, seededUniform } from './random'
+
+const HOUR_MILLIS = 3_600_000
+/** Longwave from the sky rises with the air and with cloud: 4 ε σ T³ near 0 °C, and what full cloud adds. [W/m² per K, W/m²] Ours. */
+const LONGWAVE_PER_K = 3.8
+const LONGWAVE_PER_CLOUD = 70
+/** Light precipitation that was not forecast. [mm/h] Ours. */
+const UNFORESEEN_MM = 0.3
+const BLOCK_HOURS = 12
+
+/**
+ * One perturbed run. Hours that began before `nowMillis` stay as they are: they are known.
+ *
+ * @param hours The forecast.
+ * @param nowMillis Lead times count from here. [ms]
+ * @param seed Same seed, same run.
+ */
+export function perturbRun(hours: readonly HourlyRecord[], nowMillis: number, seed: number): HourlyRecord[] {
+  const uniform = seededUniform(seed)
+  const normal = normalFrom(uniform)
+  const timing = normal()
+  const amount = normal()
+  const drift = { air: normal(), dew: normal(), wind: normal(), cloud: normal() }
+  const keep = Math.exp(-1 / ERROR_MEMORY_HOURS)
+  const fresh = Math.sqrt(1 - keep * keep)
+  const wet = perturbPrecipitation(hours, nowMillis, timing, amount, uniform)
+  return hours.map((hour, index) => {
+    const lead = (Date.parse(hour.time) - nowMillis) / HOUR_MILLIS
+    if (lead < 0) return hour
+    drift.air = keep * drift.air + fresh * normal()
+    drift.dew = keep * drift.dew + fresh * normal()
+    drift.wind = keep * drift.wind + fresh * normal()
+    drift.cloud = keep * drift.cloud + fresh * normal()
+    return perturbHour(hour, wet[index] as Wet, {
+      airC: drift.air * errorAt(FORECAST_ERROR.airTemperatureC, lead),
+      spreadC: drift.dew * errorAt(FORECAST_ERROR.dewPointSpreadC, lead),
+      windFactor: Math.exp(drift.wind * errorAt(FORECAST_ERROR.windLog, lead)),
+      cloud: drift.cloud * errorAt(FORECAST_ERROR.cloudCover, lead),
+    })
+  })
+}
+
+type Wet = Pick<HourlyRecord, 'precipitationMm' | 'rainMm' | 'snowfallCm'>
+
+interface HourError {
+  airC: number
+  spreadC: number
+  windFactor: number
+  cloud: number
+}
+
+const limit = (value: number, low: number, high: number) => Math.min(high, Math.max(low, value))
+
+function perturbHour(hour: HourlyRecord, wet: Wet, error: HourError): HourlyRecord {
+  const { airTemperatureC: air, dewPointC: dew, cloudCover, shortwaveWm2, longwaveDownWm2 } = hour
+  const newAir = air === null ? null : limit(air + error.airC, -60, 50)
+  const spread = air === null || dew === null ? null : Math.max(0, air - dew + error.spreadC)
+  const newCloud = cloudCover === null ? null : limit(cloudCover + error.cloud, 0, 1)
+  const cloudChange = newCloud === null || cloudCover === null ? error.cloud : newCloud - cloudCover
+  return {
+    ...hour,
+    ...wet,
+    airTemperatureC: newAir,
+    dewPointC: newAir === null || spread === null ? null : limit(newAir - spread, -80, 50),
+    windSpeedMps: scaled(hour.windSpeedMps, error.windFactor, 75),
+    windGustMps: scaled(hour.windGustMps, error.windFactor, 120),
+    cloudCover: newCloud,
+    shortwaveWm2: scaled(shortwaveWm2, Math.max(0.2, 1 - 0.75 * cloudChange), 1500),
+    longwaveDownWm2:
+      longwaveDownWm2 == null
+        ? longwaveDownWm2
+        : limit(longwaveDownWm2 + LONGWAVE_PER_K * error.airC + LONGWAVE_PER_CLOUD * cloudChange, 50, 600),
+  }
+}
+
+function scaled(value: number | null, factor: number, most: number): number | null {
+  return value === null ? null : limit(value * factor, 0, most)
+}
+
+const wetOf = ({ precipitationMm, rainMm, snowfallCm }: HourlyRecord): Wet => ({ precipitationMm, rainMm, snowfallCm })
+const isDry = (wet: Wet) => (wet.precipitationMm ?? 0) <= 0 && (wet.snowfallCm ?? 0) <= 0
+
+/** Precipitation comes earlier or later, heavier or lighter, not at all, or where none was forecast. */
+function perturbPrecipitation(
+  hours: readonly HourlyRecord[],
+  nowMillis: number,
+  timing: number,
+  amount: number,
+  uniform: () => number,
+): Wet[] {
+  let isMissed = false
+  let isFalse = false
+  return hours.map((hour, index) => {
+    const lead = (Date.parse(hour.time) - nowMillis) / HOUR_MILLIS
+    if (lead < 0) return wetOf(hour)
+    const shift = Math.round(timing * errorAt(FORECAST_ERROR.timingHours, lead))
+    const source = hours[limit(index - shift, 0, hours.length - 1)] as HourlyRecord
+    const chance = uniform()
+    if (hour.precipitationMm === null || source.precipitationMm === null) return wetOf(hour)
+    if (isDry(wetOf(source))) {
+      isMissed = chance < errorAt(FORECAST_ERROR.missChance, lead)
+      if (index % BLOCK_HOURS === 0) isFalse = chance < errorAt(FORECAST_ERROR.falseChance, lead)
+      const isCloudy = (hour.cloudCover ?? 1) > 0.7
+      return isFalse && isCloudy ? unforeseen() : wetOf(source)
+    }
+    const factor = isMissed ? 0 : Math.exp(amount * errorAt(FORECAST_ERROR.amountLog, lead))
+    return {
+      precipitationMm: scaled(source.precipitationMm, factor, 200),
+      rainMm: scaled(source.rainMm, factor, 200),
+      snowfallCm: scaled(source.snowfallCm, factor, 100),
+    }
+  })
+}
+
+/** Whether it falls as rain or snow follows from the air. */
+function unforeseen(): Wet {
+  return { precipitationMm: UNFORESEEN_MM, rainMm: null, snowfallCm: null }
+}

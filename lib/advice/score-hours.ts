@@ -1,0 +1,128 @@
+// Every hour of a run with its scores, verdict and reasons, as the hour in which the keeper would start.
+import { dewPointC } from '@/lib/physics/humidity'
+import type { PreparedHour } from '@/lib/physics/types'
+import { judgeFloodStart, type FloodStart } from './flood-factors'
+import { floodReasons } from './flood-reasons'
+import type { FillStart } from './fill-factors'
+import type { ForecastRun } from './forecast-run'
+import { isAvailableAt, type Setting } from './setting'
+import { PLAN, VERDICT } from './thresholds'
+import { toIso } from './zoned-time'
+import type { HourWeather, Reason, ScoredHour, SheetReport } from './types'
+
+const HOUR_MILLIS = 3_600_000
+const MINUTE_MILLIS = 60_000
+
+/** Score of a start, 0-100: the worse of what the ice and what the person allow, never their mean. */
+export function scoreOf({ ice, person }: { ice: number; person: number }): number {
+  return Math.round(100 * Math.min(ice, person))
+}
+
+export function isGood(start: { ice: number; person: number }): boolean {
+  return scoreOf(start) >= VERDICT.goodScore
+}
+
+/** Whether the keeper can go out in some quarter of an hour. */
+export function isHourAvailable(setting: Setting, startMillis: number): boolean {
+  const step = PLAN.stepMinutes * MINUTE_MILLIS
+  for (let at = startMillis; at < startMillis + HOUR_MILLIS; at += step) if (isAvailableAt(setting, at)) return true
+  return false
+}
+
+/**
+ * Scores one hour.
+ *
+ * @param fill What a fill started in this hour would be, where the phase asks for one.
+ */
+export function scoreHour(setting: Setting, run: ForecastRun, index: number, fill: FillStart | null): ScoredHour {
+  const hour = run.hours[index] as PreparedHour
+  const sheet = roundedSheet(run.reports[index] as SheetReport)
+  const isAvailable = isHourAvailable(setting, hour.startsAtMillis)
+  if (!hour.isKnown) return unknownHour(hour, sheet, isAvailable)
+  const flood = judgeFloodStart(setting, run, index)
+  const reasons = fill ? fill.reasons : floodReasons(flood, setting, run, index)
+  const floodScore = scoreOf(flood)
+  const fillScore = fill ? scoreOf(fill) : 0
+  const best = Math.max(floodScore, fillScore)
+  const limits = fill && fillScore >= floodScore ? fill : flood
+  return {
+    time: toIso(hour.startsAtMillis),
+    isKnown: true,
+    netHeatLossWm2: round(flood.netWm2, 1),
+    parts: {
+      longwave: round(flood.parts.longwave, 1),
+      sensible: round(flood.parts.sensible, 1),
+      latent: round(flood.parts.latent, 1),
+      shortwave: round(flood.parts.shortwave, 1),
+      precipitation: round(flood.parts.precipitation, 1),
+    },
+    freezeRateMmPerH: round(flood.rateMmPerH, 3),
+    windChillC: round(flood.windChillC, 1),
+    setsAt: setsAtOf(flood),
+    scores: { fill: fillScore, flood: floodScore, hold: 100 - best },
+    verdict: best < VERDICT.goodScore ? 'hold' : floodScore >= fillScore ? 'flood' : 'fill',
+    reasons: reasons.map(roundedReason),
+    sheet,
+    limits: { ice: Math.round(100 * limits.ice), person: Math.round(100 * limits.person) },
+    weather: weatherOf(hour),
+    isAvailable,
+  }
+}
+
+function unknownHour(hour: PreparedHour, sheet: SheetReport, isAvailable: boolean): ScoredHour {
+  return {
+    time: toIso(hour.startsAtMillis),
+    isKnown: false,
+    netHeatLossWm2: null,
+    parts: null,
+    freezeRateMmPerH: null,
+    windChillC: null,
+    setsAt: null,
+    scores: { fill: 0, flood: 0, hold: 100 },
+    verdict: 'hold',
+    reasons: [{ code: 'weather_unknown', factor: 0, values: {} }],
+    sheet,
+    limits: { ice: 0, person: 0 },
+    weather: null,
+    isAvailable,
+  }
+}
+
+/** Set times are told to the minute, and never too early. */
+export function setsAtOf({ startMillis, setMinutes }: Pick<FloodStart, 'startMillis' | 'setMinutes'>): string | null {
+  return setMinutes === null ? null : toIso(Math.ceil(startMillis / MINUTE_MILLIS + setMinutes) * MINUTE_MILLIS)
+}
+
+function weatherOf(hour: PreparedHour): HourWeather {
+  return {
+    airTemperatureC: hour.airTemperatureC,
+    dewPointC: round(dewPointC(hour.vapourPressureHpa), 1),
+    windAtRinkMps: round(hour.windAtRinkMps, 2),
+    cloudCover: round(hour.cloudCover, 2),
+    precipitationMm: hour.precipitationMm,
+    rainMm: round(hour.rainMm, 2),
+    snowfallCm: round(hour.snowfallCm, 2),
+  }
+}
+
+function roundedSheet(sheet: SheetReport): SheetReport {
+  return {
+    thicknessMm: round(sheet.thicknessMm, 2),
+    temperatureC: round(sheet.temperatureC, 2),
+    liquidMm: round(sheet.liquidMm, 2),
+    snowCoverCm: round(sheet.snowCoverCm, 2),
+  }
+}
+
+function roundedReason({ code, factor, values }: Reason): Reason {
+  const rounded: Reason['values'] = {}
+  for (const [name, value] of Object.entries(values))
+    rounded[name] = typeof value === 'number' ? round(value, 2) : value
+  return { code, factor: round(factor, 3), values: rounded }
+}
+
+/** Rounded for reading, and never -0. */
+export function round(value: number, digits: number): number {
+  const power = 10 ** digits
+  return Math.round(value * power) / power + 0
+}

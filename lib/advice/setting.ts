@@ -1,0 +1,93 @@
+// What all parts of one judgement share: the rink's clock, its site, its layer, when the keeper can go out.
+import { RINK_WIND_RATIO, shelterFactor } from '@/lib/physics/site'
+import { NEEDED } from './thresholds'
+import { addDays, instantOfLocal, localDateOf, zoneOffsetsMinutes } from './zoned-time'
+import type { Site } from '@/lib/physics/types'
+import type { JudgeInput } from './types'
+
+const HOUR_MILLIS = 3_600_000
+const MINUTE_MILLIS = 60_000
+const MINUTES_A_DAY = 1440
+
+export interface Setting {
+  input: JudgeInput
+  site: Site
+  /** Factor from a gust at 10 m to one at the rink. */
+  gustFactor: number
+  layer: { layerMm: number; temperatureC: number }
+  nowMillis: number
+  firstMillis: number
+  /** The rink's offset at each hour. [min] */
+  offsets: number[]
+  /** The instants, ascending, at which floods must be set: each 7 am from the first hour to two days past the last. */
+  readyMillis: number[]
+  /** Half-open ranges of minutes of the local day in which the keeper can go out. */
+  ranges: [from: number, to: number][]
+}
+
+/** @throws RangeError for an unknown zone, a shelter out of range or an unreadable time. */
+export function makeSetting(input: JudgeInput): Setting {
+  const { rink, water } = input
+  const shelter = shelterFactor(rink.shelter)
+  const starts = input.hours.map((hour) => Date.parse(hour.time))
+  const nowMillis = Date.parse(input.now)
+  if (Number.isNaN(nowMillis)) throw new RangeError(`now must be an ISO 8601 instant, got ${input.now}`)
+  const firstMillis = starts[0]
+  if (firstMillis === undefined) throw new RangeError('hours must not be empty')
+  return {
+    input,
+    site: { latitudeDeg: rink.latitude, longitudeDeg: rink.longitude, shelter, skyView: rink.skyView },
+    gustFactor: RINK_WIND_RATIO * shelter,
+    layer: { layerMm: water.layerMm, temperatureC: water.temperatureC },
+    nowMillis,
+    firstMillis,
+    offsets: zoneOffsetsMinutes(starts, rink.timeZone),
+    readyMillis: readyInstants(firstMillis, starts.length, rink.timeZone),
+    ranges: input.available.flatMap(toRanges),
+  }
+}
+
+function readyInstants(firstMillis: number, hourCount: number, timeZone: string): number[] {
+  const instants: number[] = []
+  const endMillis = firstMillis + (hourCount + 48) * HOUR_MILLIS
+  let date = localDateOf(firstMillis, timeZone)
+  for (let millis = 0; millis < endMillis; date = addDays(date, 1)) {
+    millis = instantOfLocal(date, NEEDED.readyByMinuteOfDay, timeZone)
+    instants.push(millis)
+  }
+  return instants
+}
+
+/** "HH:MM" to "HH:MM" as ranges of minutes; past midnight it is two, and equal ends mean the whole day. */
+function toRanges({ from, to }: { from: string; to: string }): [number, number][] {
+  const start = minuteOf(from)
+  const end = minuteOf(to)
+  if (start === end) return [[0, MINUTES_A_DAY]]
+  if (start < end) return [[start, end]]
+  return [
+    [start, MINUTES_A_DAY],
+    [0, end],
+  ]
+}
+
+function minuteOf(clock: string): number {
+  return Number(clock.slice(0, 2)) * 60 + Number(clock.slice(3, 5))
+}
+
+/** Whether the keeper can go out at an instant. */
+export function isAvailableAt(setting: Setting, atMillis: number): boolean {
+  const index = Math.floor((atMillis - setting.firstMillis) / HOUR_MILLIS)
+  const offset = setting.offsets[Math.min(Math.max(0, index), setting.offsets.length - 1)] ?? 0
+  const minute = (((Math.floor(atMillis / MINUTE_MILLIS) + offset) % MINUTES_A_DAY) + MINUTES_A_DAY) % MINUTES_A_DAY
+  return setting.ranges.some(([from, to]) => minute >= from && minute < to)
+}
+
+/** When a flood started at an instant must be set: the first 7 am that leaves it a fair time. */
+export function neededMillis(setting: Setting, startMillis: number): number {
+  const least = startMillis + NEEDED.leastMinutesAhead * MINUTE_MILLIS
+  const days = setting.readyMillis
+  // The instants are a day apart to the hour, so a guess by division is off by one at most.
+  let index = Math.max(0, Math.floor((least - (days[0] as number)) / (24 * HOUR_MILLIS)) - 1)
+  while (index < days.length - 1 && (days[index] as number) < least) index += 1
+  return days[index] as number
+}

@@ -1,0 +1,101 @@
+// The plan for tonight: quarter hours as slots, each with a first pass and a pass on a sheet that has just been flooded.
+import { advanceSheet, clearSnow, pourLayer, type SheetState } from '@/lib/physics/sheet'
+import type { PreparedHour } from '@/lib/physics/types'
+import { judgeFloodStart } from './flood-factors'
+import type { ForecastRun } from './forecast-run'
+import { nightBounds, nightDateOf, tonightDate } from './night'
+import { planPasses, type PlanSlot, type SlotOutcome } from './plan'
+import { isGood, scoreOf } from './score-hours'
+import { isAvailableAt, type Setting } from './setting'
+import { PLAN } from './thresholds'
+import { toIso } from './zoned-time'
+import type { PlannedPass, ScoredHour } from './types'
+
+const HOUR_MILLIS = 3_600_000
+const MINUTE_MILLIS = 60_000
+const STEP_MILLIS = PLAN.stepMinutes * MINUTE_MILLIS
+
+/** Passes for the night that `now` is in, poured ones counted against `maxPasses`. */
+export function planTonight(setting: Setting, run: ForecastRun, scored: readonly ScoredHour[]): PlannedPass[] {
+  const { input, nowMillis } = setting
+  const night = tonightDate(new Date(nowMillis), input.rink.timeZone)
+  const bounds = nightBounds(night, input.rink.timeZone)
+  const poured = (input.poured ?? []).filter((layer) => nightDateOf(new Date(layer.at), input.rink.timeZone) === night)
+  const fromMillis = Math.max(nowMillis, bounds.startsAt.getTime(), poured.length > 0 ? (run.pouredSetMillis ?? 0) : 0)
+  const hours: number[] = []
+  for (const [index, hour] of run.hours.entries()) {
+    const isInNight = hour.startsAtMillis + HOUR_MILLIS > fromMillis && hour.startsAtMillis < bounds.endsAt.getTime()
+    if (isInNight && scored[index]?.verdict === 'flood') hours.push(index)
+  }
+  const maxPasses = input.maxPasses - poured.length
+  if (maxPasses <= 0 || hours.length === 0) return []
+  const spent = maxPasses > 1 ? spentSheets(setting, run, scored, hours) : new Map<number, SheetState>()
+  const slots = hours.flatMap((index) => slotsOfHour(setting, run, index, fromMillis, spent.get(index)))
+  return planPasses(slots, maxPasses).map(({ startMillis, setMillis }) => {
+    const waterL = input.water.layerMm * input.rink.lengthM * input.rink.widthM
+    return {
+      startsAt: toIso(startMillis),
+      setBy: toIso(setMillis),
+      layerMm: input.water.layerMm,
+      waterL: Math.round(waterL),
+      hoseMinutes: Math.ceil(waterL / input.water.flowLPerMin),
+    }
+  })
+}
+
+function slotsOfHour(
+  setting: Setting,
+  run: ForecastRun,
+  index: number,
+  fromMillis: number,
+  spent: SheetState | undefined,
+): PlanSlot[] {
+  const slots: PlanSlot[] = []
+  const { startsAtMillis } = run.hours[index] as PreparedHour
+  for (let at = startsAtMillis; at < startsAtMillis + HOUR_MILLIS; at += STEP_MILLIS) {
+    if (at < fromMillis || !isAvailableAt(setting, at)) continue
+    const fraction = (at - startsAtMillis) / HOUR_MILLIS
+    const first = outcomeOf(setting, run, index, fraction, run.sheets[index] as SheetState)
+    const later = spent ? outcomeOf(setting, run, index, fraction, spent) : first
+    slots.push({ startMillis: at, first, later })
+  }
+  return slots
+}
+
+function outcomeOf(
+  setting: Setting,
+  run: ForecastRun,
+  index: number,
+  fraction: number,
+  sheet: SheetState,
+): SlotOutcome | null {
+  const start = judgeFloodStart(setting, run, index, fraction, sheet)
+  if (!isGood(start) || start.setMinutes === null) return null
+  const setMillis = Math.ceil(start.startMillis / MINUTE_MILLIS + start.setMinutes) * MINUTE_MILLIS
+  return { setMillis, gain: setting.layer.layerMm * (scoreOf(start) / 100 - PLAN.tripCostShare) }
+}
+
+/**
+ * For each hour, the sheet as it is when passes have followed each other as fast as they set: the warmest it can be at
+ * that hour, so that a later pass is never promised too soon.
+ */
+function spentSheets(
+  setting: Setting,
+  run: ForecastRun,
+  scored: readonly ScoredHour[],
+  hours: readonly number[],
+): Map<number, SheetState> {
+  const spent = new Map<number, SheetState>()
+  for (const index of hours) {
+    const startMillis = (run.hours[index] as PreparedHour).startsAtMillis
+    const before = hours.findLast((one) => {
+      const setsAt = scored[one]?.setsAt
+      return one < index && setsAt != null && Date.parse(setsAt) <= startMillis
+    })
+    if (before === undefined) continue
+    let sheet = pourLayer(clearSnow(spent.get(before) ?? (run.sheets[before] as SheetState)), setting.layer)
+    for (let hour = before; hour < index; hour += 1) sheet = advanceSheet(sheet, run.hours[hour] as PreparedHour)
+    spent.set(index, sheet)
+  }
+  return spent
+}

@@ -1,6 +1,6 @@
 // The sheet as somebody saw it or as the model carried it.
 import type { Db } from '@/db/knex'
-import type { SheetState } from '@/lib/physics/sheet'
+import type { StoredSheet as ModelState } from '@/lib/advice/types'
 
 export interface StoredSheet {
   asOf: Date
@@ -9,7 +9,7 @@ export interface StoredSheet {
   thicknessMm: number
   temperatureC: number
   snowCoverCm: number
-  state: SheetState | null
+  state: ModelState | null
 }
 
 const COLUMNS = {
@@ -49,7 +49,7 @@ export async function findStartingSheet(
 export async function keepModelledSheet(
   db: Db,
   rinkId: string,
-  sheet: Omit<StoredSheet, 'origin'> & { state: SheetState; modelVersion: string },
+  sheet: Omit<StoredSheet, 'origin'> & { state: ModelState; modelVersion: string },
 ): Promise<void> {
   await db.raw(
     `insert into sheet_states (rink_id, as_of, origin, model_version, thickness_mm, temperature_c, snow_cover_cm, state)

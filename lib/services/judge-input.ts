@@ -3,6 +3,7 @@ import type { PouredPass } from '@/db/queries/floods'
 import type { StoredForecast } from '@/db/queries/forecasts'
 import type { RinkForJudging } from '@/db/queries/rinks'
 import type { StoredSheet } from '@/db/queries/sheet-states'
+import { MODEL_VERSION } from '@/lib/advice/judge'
 import type { JudgeInput } from '@/lib/advice/types'
 
 const HOUR_MILLIS = 3_600_000
@@ -18,7 +19,8 @@ function sheetOf(sheet: StoredSheet | undefined, firstHourAt: Date): JudgeInput[
     temperatureC: sheet.temperatureC,
     snowCoverCm: sheet.snowCoverCm,
     asOf: new Date(Math.max(hourAt, firstHourAt.getTime())).toISOString(),
-    ...(sheet.state ? { state: sheet.state } : {}),
+    // A state of another model is not read: its plain numbers are a fair start.
+    ...(sheet.state && sheet.modelVersion === MODEL_VERSION ? { state: sheet.state } : {}),
   }
 }
 

@@ -4,7 +4,8 @@ import { stripVTControlCharacters } from 'node:util'
 
 const MESSAGE_LINES = 6
 
-const shorten = (message = '') => stripVTControlCharacters(message).trim().split('\n').slice(0, MESSAGE_LINES).join('\n')
+const shorten = (message = '') =>
+  stripVTControlCharacters(message).trim().split('\n').slice(0, MESSAGE_LINES).join('\n')
 
 function readReport(file) {
   try {

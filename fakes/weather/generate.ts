@@ -1,6 +1,6 @@
 // The weather of one hour at one place in one scenario: a pure function, so that every answer tells the same story.
 import { getPosition } from 'suncalc'
-import { NIGHTS, type Curve, type NightSketch, type Points } from './nights'
+import { NIGHTS, type CurveField, type NightSketch, type Points } from './nights'
 import { noise } from './noise'
 import { solarOffsetHours, type Place } from './place'
 import { SCENARIOS, type Scenario, type ScenarioName } from './scenarios'
@@ -45,29 +45,23 @@ export function weatherAt(story: Story, unixHour: number): Weather | null {
   const night = nightAt(scenario, index)
   if (night.unknown?.some(([from, to]) => hour - 24 * index >= from && hour - 24 * index < to)) return null
 
-  const read = (pick: (sketch: NightSketch) => Curve | undefined) => interpolate(scenario, index, hour, pick)
+  const read = (field: CurveField) => interpolate(pointsAround(story.scenario, index, field), hour)
   const uneven = (size: number, salt: number) => size * noise(place.latitude, place.longitude, unixHour, salt)
-  const cloud = clamp(read((n) => n.cloud) + uneven(0.03, 1), 0, 1)
-  const windMps = Math.max(0.2, read((n) => n.windMps) + uneven(0.25, 2))
+  const cloud = clamp(read('cloud') + uneven(0.03, 1), 0, 1)
+  const windMps = Math.max(0.2, read('windMps') + uneven(0.25, 2))
   const cellC = 0.3 * noise(place.latitude, place.longitude)
   return {
-    temperatureC: read((n) => n.temperatureC) + cellC + uneven(0.15, 3),
-    humidity: clamp(read((n) => n.humidity) + uneven(0.01, 4), 0.2, 1),
+    temperatureC: read('temperatureC') + cellC + uneven(0.15, 3),
+    humidity: clamp(read('humidity') + uneven(0.01, 4), 0.2, 1),
     cloud,
     windMps,
     windFromDeg: (night.windFromDeg + uneven(15, 5) + 360) % 360,
-    pressureMslHpa: read((n) => n.pressureHpa) + uneven(0.2, 6),
+    pressureMslHpa: read('pressureHpa') + uneven(0.2, 6),
     sunUp: sunHeightDeg(unixHour, place) > 0,
     gustMps: windMps * night.gustFactor,
     shortwaveWm2: shortwave(unixHour, place, cloud),
-    rainMm: Math.max(
-      0,
-      read((n) => n.rainMmPerH),
-    ),
-    snowCm: Math.max(
-      0,
-      read((n) => n.snowCmPerH),
-    ),
+    rainMm: Math.max(0, read('rainMmPerH')),
+    snowCm: Math.max(0, read('snowCmPerH')),
   }
 }
 
@@ -78,22 +72,29 @@ function nightAt(scenario: Scenario, index: number): NightSketch {
   return NIGHTS[name ?? before]
 }
 
-/** Straight lines through the points of this night and its neighbours. */
-function interpolate(
-  scenario: Scenario,
-  index: number,
-  hour: number,
-  pick: (sketch: NightSketch) => Curve | undefined,
-): number {
-  const points = [index - 1, index, index + 1].flatMap((i) => {
-    const curve = pick(nightAt(scenario, i)) ?? NONE
-    const own: Points = typeof curve === 'number' ? steady(curve) : curve
-    return own.map(([h, value]): [number, number] => [h + 24 * i, value])
-  })
+/** Straight lines through the points. */
+function interpolate(points: Points, hour: number): number {
   const after = points.findIndex(([h]) => h >= hour)
   const [toHour, toValue] = points[after] ?? [hour, 0]
   const [fromHour, fromValue] = points[after - 1] ?? [toHour, toValue]
   return toHour === fromHour ? toValue : fromValue + ((toValue - fromValue) * (hour - fromHour)) / (toHour - fromHour)
+}
+
+/** Kept, since a series of ten days asks for the same points hundreds of times. */
+const knownPoints = new Map<string, Points>()
+
+/** The points of a night and its neighbours, in hours from midnight before tonight. */
+function pointsAround(name: ScenarioName, index: number, field: CurveField): Points {
+  const key = `${name} ${index} ${field}`
+  const known = knownPoints.get(key)
+  if (known) return known
+  const points = [index - 1, index, index + 1].flatMap((i) => {
+    const curve = nightAt(SCENARIOS[name], i)[field] ?? NONE
+    const own: Points = typeof curve === 'number' ? steady(curve) : curve
+    return own.map(([h, value]): [number, number] => [h + 24 * i, value])
+  })
+  knownPoints.set(key, points)
+  return points
 }
 
 /** Reached in the afternoon and kept to the morning, so that the change to another night takes hours. */

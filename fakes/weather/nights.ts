@@ -22,6 +22,8 @@ export interface NightSketch {
   unknown?: [from: number, to: number][]
 }
 
+export type CurveField = 'temperatureC' | 'humidity' | 'cloud' | 'windMps' | 'pressureHpa' | 'rainMmPerH' | 'snowCmPerH'
+
 const high = { pressureHpa: 1031, windFromDeg: 310, gustFactor: 1.7 }
 const low = { pressureHpa: 1004, windFromDeg: 130, gustFactor: 1.6 }
 

@@ -4,18 +4,18 @@
 export const STEFAN_BOLTZMANN = 5.670374e-8
 /** 0 °C in kelvin. [K] */
 export const ZERO_CELSIUS_K = 273.15
-/** Enthalpy of fusion at 0 °C. [J/kg] IAPWS R10-06 gives 333.4e3, CRC Handbook 333.6e3, Ashton 334e3; the middle. */
-export const FUSION_J_PER_KG = 333_600
+/** Enthalpy of fusion at 0 °C. [J/kg] IAPWS R10-06 with IAPWS-95: 333.43e3; CRC Handbook prints 333.6e3, Ashton 334e3. */
+export const FUSION_J_PER_KG = 333_400
 /** Enthalpy of vaporisation at 0 °C. [J/kg] FAO-56 and meteorological practice. */
 export const VAPORISATION_J_PER_KG = 2.501e6
 /** Enthalpy of sublimation at 0 °C: vaporisation plus fusion. [J/kg] CRC Handbook prints 2.838e6. */
 export const SUBLIMATION_J_PER_KG = VAPORISATION_J_PER_KG + FUSION_J_PER_KG
-/** Density of ice at 0 °C. [kg/m³] IAPWS R10-06: 916.7. */
-export const ICE_DENSITY = 916.7
+/** Density of ice at 0 °C. [kg/m³] IAPWS R10-06. */
+export const ICE_DENSITY = 916.721
 /** Density of liquid water near 0 °C, so that 1 mm is 1 kg/m². [kg/m³] IAPWS SR6-08: 999.8, rounded. */
 export const WATER_DENSITY = 1000
-/** Heat capacity of ice near 0 °C. [J kg⁻¹ K⁻¹] IAPWS R10-06: 2097 at 0 °C. */
-export const ICE_HEAT_CAPACITY = 2097
+/** Heat capacity of ice near 0 °C. [J kg⁻¹ K⁻¹] IAPWS R10-06. */
+export const ICE_HEAT_CAPACITY = 2096.71
 /** Heat capacity of liquid water between 0 and 10 °C. [J kg⁻¹ K⁻¹] IAPWS SR6-08: 4.22e3 at 0, 4.19e3 at 10 °C. */
 export const WATER_HEAT_CAPACITY = 4200
 /** Conductivity of ice near 0 °C. [W m⁻¹ K⁻¹] Ashton, Encyclopaedia Britannica "Ice in lakes and rivers": 2.24. */

@@ -76,7 +76,8 @@ export function minutesToSet(
     const seconds = (1 - fraction) * HOUR_SECONDS
     budget.restJM2 += wet.fallsKgM2 * (1 - fraction) * FUSION_J_PER_KG
     fraction = 0
-    const drawnAfter = heatDrawnJM2(cold, elapsed + seconds)
+    // Once the ground gives more than the sheet still takes, the sheet melts at its foot; none of that reaches the layer.
+    const drawnAfter = Math.max(drawn, heatDrawnJM2(cold, elapsed + seconds))
     const lost = skinLoss(wet, budget.skinM, seconds) + drawnAfter - drawn
     if (lost >= budget.restJM2) {
       return (elapsed + timeWithin(wet, budget.skinM, cold, elapsed, drawn, budget.restJM2, seconds)) / 60
@@ -140,7 +141,7 @@ function timeWithin(
   let late = seconds
   for (let round = 0; round < 12; round++) {
     const middle = (early + late) / 2
-    const lost = skinLoss(wet, skinM, middle) + heatDrawnJM2(cold, elapsed + middle) - drawn
+    const lost = skinLoss(wet, skinM, middle) + Math.max(0, heatDrawnJM2(cold, elapsed + middle) - drawn)
     if (lost >= restJM2) late = middle
     else early = middle
   }

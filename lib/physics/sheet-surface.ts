@@ -111,12 +111,12 @@ function underSnow(state: SheetState, hour: PreparedHour, mass: number, enthalpy
     lossAt0Wm2: 0,
     lossSlopeWm2K: 1 / resistance,
     finish: (after, topCellC, seconds) =>
-      meltSnow(after, gainWm2 + topCellC / resistance, gainWm2, topCellC / resistance, seconds),
+      hour.snowOnIceCm === null ? meltSnow(after, gainWm2 + topCellC / resistance, seconds) : keepSnow(after),
   }
 }
 
 /** Melts snow with what the surface gains beyond what it passes down; the water goes to the top cell, which may freeze it. */
-function meltSnow(state: SheetState, spareWm2: number, _gainWm2: number, _downWm2: number, seconds: number): number {
+function meltSnow(state: SheetState, spareWm2: number, seconds: number): number {
   state.surfaceTemperatureC = 0
   const spareJM2 = Math.max(0, spareWm2) * seconds
   const meltKg = Math.min(state.snowKgM2, spareJM2 / FUSION_J_PER_KG)
@@ -125,6 +125,12 @@ function meltSnow(state: SheetState, spareWm2: number, _gainWm2: number, _downWm
   state.snowKgM2 = left
   addToTop(state, meltKg, spareJM2 - meltKg * FUSION_J_PER_KG)
   return spareJM2
+}
+
+/** Measured snow says itself what has melted; how much of it went into the ice is not known, so none is added. */
+function keepSnow(state: SheetState): number {
+  state.surfaceTemperatureC = 0
+  return 0
 }
 
 /** Where conduction from the top cell meets the law of the surface. [°C] */

@@ -109,3 +109,18 @@ function errorFunction(x: number): number {
   }
   return (2 / Math.sqrt(Math.PI)) * sum
 }
+
+/**
+ * Ice thickness by a degree-day coefficient.
+ *
+ * @param coefficient By exposure: windy lake 2.7, average lake with snow 1.7-2.4, river 1.4-1.7. [cm (°C d)^-1/2]
+ * @param freezingDegreeDays Degree-days below 0 °C. [°C d], 0 or more
+ * @returns Thickness. [cm]
+ * @throws RangeError for negative arguments.
+ *
+ * Source: US Army Corps of Engineers, EM 1110-2-1612 and ERDC/CRREL TN 04-3; season-scale lake ice, poor under 10 cm.
+ */
+export function degreeDayThicknessCm(coefficient: number, freezingDegreeDays: number): number {
+  inRange('coefficient [cm (°C d)^-1/2]', coefficient, 0, 4)
+  return coefficient * Math.sqrt(inRange('freezingDegreeDays [°C d]', freezingDegreeDays, 0, 1e5))
+}

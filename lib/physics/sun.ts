@@ -1,5 +1,5 @@
 // Sunshine when none is reported: position of the sun and cloud.
-import { getPosition } from 'suncalc'
+import { getPosition, getTimes } from 'suncalc'
 import { inRange } from './check'
 
 const RADIANS = Math.PI / 180
@@ -45,4 +45,23 @@ export function clearSkyShortwaveWm2(altitudeDeg: number): number {
  */
 export function cloudShortwaveFactor(cloudCover: number): number {
   return 1 - 0.75 * Math.pow(inRange('cloudCover [0-1]', cloudCover, 0, 1), 3.4)
+}
+
+/**
+ * Sunrise and sunset of a day.
+ *
+ * @param atMillis Any instant of that solar day. [ms since 1970-01-01 UTC]
+ * @param latitudeDeg Latitude. [°], -90 to 90
+ * @param longitudeDeg Longitude. [°], -180 to 180
+ * @returns Instants, null where the sun does not rise or set. [ms since 1970-01-01 UTC]
+ *
+ * Source: suncalc 2.
+ */
+export function sunUpDownMillis(
+  atMillis: number,
+  latitudeDeg: number,
+  longitudeDeg: number,
+): { riseMillis: number | null; setMillis: number | null } {
+  const { sunrise, sunset } = getTimes(new Date(atMillis), latitudeDeg, longitudeDeg)
+  return { riseMillis: sunrise?.getTime() ?? null, setMillis: sunset?.getTime() ?? null }
 }

@@ -13,7 +13,7 @@ let transport: EmailTransport
 
 beforeAll(async () => {
   fake = await startMailFake({ smtpPort: 0, pagePort: 0 })
-  transport = createSmtpTransport({ url: fake.smtpUrl, from, silenceMillis: 500 })
+  transport = createSmtpTransport({ url: fake.smtpUrl, from })
 })
 afterAll(() => fake.close())
 beforeEach(async () => {
@@ -40,8 +40,8 @@ async function caughtFor(to: string): Promise<CaughtMail[]> {
 }
 
 /** The error of a delivery that must fail. */
-async function failure(message: EmailMessage): Promise<DeliveryError> {
-  const error: unknown = await transport.send(message).then(
+async function failure(message: EmailMessage, through = transport): Promise<DeliveryError> {
+  const error: unknown = await through.send(message).then(
     () => undefined,
     (reason: unknown) => reason,
   )
@@ -109,11 +109,17 @@ describe('what fails', () => {
     expect(await caughtFor(greylisted.to)).toHaveLength(1)
   })
 
-  test.each(['451', 'hang', 'drop'])('%s is temporary, and the next try arrives', async (kind) => {
+  test.each(['451', 'drop'])('%s is temporary, and the next try arrives', async (kind) => {
     await setFault(kind)
     expect((await failure(mail)).permanent).toBe(false)
     await transport.send(mail)
     expect(await caughtFor(mail.to)).toHaveLength(1)
+  })
+
+  test('a server that says nothing is given up after the time limit, as temporary', async () => {
+    await setFault('hang')
+    const impatient = createSmtpTransport({ url: fake.smtpUrl, from, silenceMillis: 500 })
+    expect((await failure(mail, impatient)).permanent).toBe(false)
   })
 
   test('a fault lasts as many times as told', async () => {

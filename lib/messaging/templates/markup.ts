@@ -7,7 +7,7 @@ export class Markup {
 type Value = string | Markup | Markup[]
 
 /** Every value put into the template is escaped, unless it is markup made by this same function. */
-export function html(literals: TemplateStringsArray, ...values: Value[]): Markup {
+export function markup(literals: TemplateStringsArray, ...values: Value[]): Markup {
   const parts = literals.map((literal, index) => literal + write(values[index] ?? ''))
   return new Markup(parts.join(''))
 }

@@ -8,9 +8,10 @@ export function writePage(state: FakeState): string {
   const body = `<h1>Pretended weather service</h1>
 <p>It answers <code>/v1/forecast</code> and <code>/v1/ensemble</code> with weather made up for tonight. Its clock says ${escape(state.now().toUTCString())}.</p>
 <h2>Weather everywhere</h2>
-<dl>${Object.entries(SCENARIOS)
-    .map(([name, scenario]) => writeScenario(name, scenario, name === state.scenario))
-    .join('')}</dl>
+${table(
+  ['Weather', 'What comes', ''],
+  Object.entries(SCENARIOS).map(([name, scenario]) => scenarioRow(name, scenario, name === state.scenario)),
+)}
 <h2>Weather near a place</h2>
 ${writePlaces(state)}
 <form method="post" action="/__fake/scenario"><select name="scenario" aria-label="Weather">${options(Object.keys(SCENARIOS))}</select>
@@ -24,11 +25,11 @@ ${writeRequests(state)}`
   return page('Pretended weather service', body)
 }
 
-function writeScenario(name: string, scenario: { title: string; tells: string }, isCurrent: boolean): string {
+function scenarioRow(name: string, scenario: { title: string; tells: string }, isCurrent: boolean): string[] {
   const action = isCurrent
     ? '<b>told now</b>'
-    : `<form method="post" action="/__fake/scenario"><input type="hidden" name="scenario" value="${escape(name)}"><button aria-label="Tell ${escape(scenario.title)}">Tell this</button></form>`
-  return `<dt>${escape(scenario.title)} ${action}</dt><dd>${escape(scenario.tells)}</dd>`
+    : `<form method="post" action="/__fake/scenario"><button name="scenario" value="${escape(name)}" aria-label="Tell ${escape(scenario.title)}">Tell this</button></form>`
+  return [escape(scenario.title), escape(scenario.tells), action]
 }
 
 function writePlaces(state: FakeState): string {
@@ -49,7 +50,7 @@ function writeRequests(state: FakeState): string {
       r.at.slice(11, 19),
       `${r.status ?? 'no answer'}${r.fault ? ` (${escape(r.fault)})` : ''}`,
       r.weight.toFixed(1),
-      escape(`${r.path}?${r.query}`),
+      escape(`${r.path}?${r.query}`).replace(/(&amp;|,)/g, '$1<wbr>'),
     ])
   return `<p>${state.requests.length} kept, weighing ${weight.toFixed(1)} calls; the latest first.</p>
 ${table(['UTC', 'Answer', 'Weight', 'Asked'], rows)}`

@@ -153,10 +153,12 @@ describe('control', () => {
     expect((await temperatures(47.5))?.every((value) => (value ?? 0) < 0)).toBe(true)
   })
 
-  test('an unknown scenario, half a place and an unknown fault are refused', async () => {
+  test('an unknown scenario, half a place, an unknown fault and no JSON at all are refused', async () => {
     expect(await post('scenario', { scenario: 'hail' })).toBe(400)
     expect(await post('scenario', { scenario: 'windy', latitude: 46.5 })).toBe(400)
     expect(await post('fault', { kind: 'mood' })).toBe(400)
+    const broken = await fetch(`${fake.url}/__fake/fault`, { method: 'POST', body: '{"kind":' })
+    expect(broken.status).toBe(400)
   })
 
   test('the page shows the weather told and the requests, and its buttons work without a script', async () => {
@@ -165,7 +167,7 @@ describe('control', () => {
     expect([set.status, set.headers.get('location')]).toEqual([303, '/'])
     await ask('latitude=46.5&longitude=-94.25&hourly=temperature_2m<b>')
     const page = await (await fetch(fake.url)).text()
-    expect(page).toContain('Deep cold <b>told now</b>')
+    expect(page).toMatch(/Deep cold<\/td>.*<b>told now<\/b>/)
     expect(page).toContain('hourly=temperature_2m&lt;b&gt;')
   })
 })

@@ -42,6 +42,17 @@ export function NightStripDrawing({ id, layout, words }: { id: string; layout: S
         className="stroke-graphite"
         strokeWidth={1.2}
       />
+      {layout.openSpans.map(({ x, width }) => (
+        <line
+          key={x}
+          x1={x}
+          x2={x + width}
+          y1={layout.baselineY}
+          y2={layout.baselineY}
+          className="stroke-ink"
+          strokeWidth={4}
+        />
+      ))}
       <AirLine layout={layout} words={words} />
       <Floor layout={layout} words={words} />
       <Passes layout={layout} words={words} />

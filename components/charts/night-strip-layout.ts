@@ -12,6 +12,8 @@ export interface StripHour {
   air: number | null
   snowCm: number
   rainMm: number
+  /** The keeper can go out in it. */
+  isOpen: boolean
 }
 
 export interface StripPass {
@@ -62,6 +64,8 @@ export interface StripLayout {
   columns: { index: number; x: number; width: number }[]
   bars: StripBar[]
   gaps: { x: number; width: number }[]
+  /** The keeper's own hours, neighbours joined; empty when every hour is theirs. */
+  openSpans: { x: number; width: number }[]
   airLines: string[]
   rateTicks: { y: number; value: number }[]
   airTicks: { y: number; value: number }[]
@@ -104,7 +108,8 @@ export function layOutNightStrip(input: StripInput): StripLayout {
     bars: seen.flatMap(({ hour, index, x, width }) =>
       hour.rate === null ? [] : [barOf(frame, rates, hour, { index, x, width })],
     ),
-    gaps: gapsOf(seen),
+    gaps: joined(seen.filter(({ hour }) => hour.rate === null)),
+    openSpans: ownHours(seen.filter(({ hour }) => hour.rate !== null)),
     airLines: air ? airLines(frame, air, seen) : [],
     rateTicks: rates.ticks.map((value) => ({ value, y: yOf(frame, rates, value) })),
     airTicks: air ? air.ticks.map((value) => ({ value, y: yOf(frame, air, value) })) : [],
@@ -151,16 +156,20 @@ function nightGround(input: StripInput): StripLayout['night'] {
   return width > 0 ? { x, width } : null
 }
 
-/** Hours without a forecast, neighbours joined. */
-function gapsOf(seen: Seen[]): StripLayout['gaps'] {
-  const gaps: StripLayout['gaps'] = []
-  for (const { hour, x, width } of seen) {
-    if (hour.rate !== null) continue
-    const last = gaps.at(-1)
+function ownHours(known: Seen[]): StripLayout['openSpans'] {
+  const open = known.filter(({ hour }) => hour.isOpen)
+  return open.length === known.length ? [] : joined(open)
+}
+
+/** Stretches of hours that follow each other. */
+function joined(hours: Seen[]): { x: number; width: number }[] {
+  const stretches: { x: number; width: number }[] = []
+  for (const { x, width } of hours) {
+    const last = stretches.at(-1)
     if (last && Math.abs(last.x + last.width - x) < 0.05) last.width = round(last.width + width)
-    else gaps.push({ x, width })
+    else stretches.push({ x, width })
   }
-  return gaps
+  return stretches
 }
 
 /** The air temperature through the middles of the hours, broken where it is missing. */

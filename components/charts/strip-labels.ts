@@ -1,5 +1,5 @@
 // Words along the strip: which hours carry a tick, and which runs of snow or rain carry an amount.
-import { formatInTimeZone } from 'date-fns-tz'
+import { zoneOffsetsMinutes } from '@/lib/advice/zoned-time'
 import type { StripHour } from './night-strip-layout'
 
 const QUARTER = 900_000
@@ -10,12 +10,13 @@ const HOUR = 3_600_000
  * off by a half or a quarter, and nights are 23 or 25 hours long when the clocks change.
  */
 export function tickInstants(startsAt: number, endsAt: number, timeZone: string): { at: number; localHour: number }[] {
-  const ticks: { at: number; localHour: number }[] = []
-  for (let at = Math.ceil(startsAt / QUARTER) * QUARTER; at <= endsAt; at += QUARTER) {
-    const [hour, minute] = formatInTimeZone(at, timeZone, 'H:mm').split(':').map(Number)
-    if (minute === 0 && hour !== undefined && hour % 3 === 0) ticks.push({ at, localHour: hour })
-  }
-  return ticks
+  const first = Math.ceil(startsAt / QUARTER) * QUARTER
+  const quarters = Array.from({ length: Math.floor((endsAt - first) / QUARTER) + 1 }, (_, n) => first + n * QUARTER)
+  const offsets = zoneOffsetsMinutes(quarters, timeZone)
+  return quarters.flatMap((at, index) => {
+    const localHour = (((at / HOUR + (offsets[index] ?? 0) / 60) % 24) + 24) % 24
+    return localHour % 3 === 0 ? [{ at, localHour }] : []
+  })
 }
 
 /** "3 pm", "noon", "midnight"; or "15:00". */

@@ -1,25 +1,22 @@
 // What the strip's marks mean, in words; every verdict with its own pattern.
+import type { StripHour } from '../charts/night-strip-layout'
 import type { StripSource } from './strip-input'
 import { clockTime, type Reader } from './quantities'
 
-export function NightLegend({
-  source,
-  reader,
-  hasFill,
-  hasGap,
-}: {
+interface LegendProps {
   source: StripSource
   reader: Reader
-  hasFill: boolean
-  hasGap: boolean
-}) {
+  drawn: StripHour[]
+}
+
+export function NightLegend({ source, reader, drawn }: LegendProps) {
   const { sunsetAt, sunriseAt } = source.night
   return (
     <ul className="flex list-none pt-2 flex-wrap gap-x-[18px] gap-y-1 p-0 text-small text-graphite">
       <Key word="flood">
         <rect x={1} y={1} width={13} height={11} className="fill-lamp stroke-lamp-text" />
       </Key>
-      {hasFill ? (
+      {drawn.some((hour) => hour.verdict === 'fill') ? (
         <Key word="fill">
           <path d="M1,2 h13 M1,6 h13 M1,10 h13" className="stroke-hose" strokeWidth={1.8} />
         </Key>
@@ -30,7 +27,12 @@ export function NightLegend({
       <Key word={reader.units === 'imperial' ? 'air, °F' : 'air, °C'}>
         <path d="M0,6.5 h15" className="stroke-ink" strokeWidth={2} />
       </Key>
-      {hasGap ? (
+      {drawn.some((hour) => !hour.isOpen) ? (
+        <Key word="your hours">
+          <path d="M0,6.5 h15" className="stroke-ink" strokeWidth={4} />
+        </Key>
+      ) : null}
+      {drawn.some((hour) => hour.rate === null) ? (
         <Key word="no forecast">
           <path d="M0,10 l8,-8 M4,12 l9,-9 M9,13 l6,-6" className="stroke-still" strokeWidth={1.3} />
         </Key>

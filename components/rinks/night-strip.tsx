@@ -1,6 +1,6 @@
 // The night strip of one rink: drawing, hours to open, legend, and the same numbers as a table.
 'use client'
-import { useState } from 'react'
+import { useMemo, useState } from 'react'
 import { useHydrated } from '../hooks/use-hydrated'
 import { layOutNightStrip } from '../charts/night-strip-layout'
 import { NightStripDrawing } from '../charts/night-strip-drawing'
@@ -20,55 +20,49 @@ const SHOWN: Record<StripSize, string> = {
 export function NightStrip({ source, now }: { source: StripSource; now: number }) {
   const [selected, setSelected] = useState<number | null>(null)
   const isHydrated = useHydrated()
-  const reader = readerOf(source)
-  const hours = hoursOfNight(source, now)
-  const drawn = stripHours(hours, reader.units)
-  const open = selected === null ? undefined : hours[selected]
-  const start = Math.max(
-    0,
-    drawn.findIndex((hour) => hour.startsAt + 3_600_000 > now),
-  )
+  const { reader, hours, drawn, figures } = useMemo(() => prepare(source, now), [source, now])
+  const present = drawn.findIndex((hour) => hour.startsAt + 3_600_000 > now)
   return (
-    <figure className="-mx-5 border-y border-rule bg-sheet pt-3 lg:mx-0 lg:border-x print:mx-0 print:border">
-      {(['wide', 'narrow'] as const).map((size) => {
-        const layout = layOutNightStrip(stripInput(source, drawn, now, size))
-        return (
-          <div key={size} className={SHOWN[size]}>
-            <NightStripDrawing
-              id={`strip-${size}`}
+    <figure className="-mx-5 border-y border-rule bg-sheet pt-3 lg:mx-0 lg:border-x print:mx-0 print:border-x">
+      {figures.map(({ size, layout, words }) => (
+        <div key={size} className={SHOWN[size]}>
+          <NightStripDrawing id={`strip-${size}`} layout={layout} words={words} />
+          {isHydrated ? (
+            <StripHours
               layout={layout}
-              words={stripWords(source, hours, drawn, now, size)}
+              label="Hours of the night"
+              nameOf={(index) => clockTime(hours[index]?.time ?? 0, reader)}
+              selected={selected}
+              start={Math.max(present, 0)}
+              onSelect={setSelected}
             />
-            {isHydrated ? (
-              <StripHours
-                layout={layout}
-                label="Hours of the night"
-                nameOf={(index) => clockTime(hours[index]?.time ?? 0, reader)}
-                selected={selected}
-                start={start}
-                onSelect={setSelected}
-              />
-            ) : null}
-          </div>
-        )
-      })}
+          ) : null}
+        </div>
+      ))}
       <HourPanel
-        hour={open}
+        hour={selected === null ? undefined : hours[selected]}
         reader={reader}
         onStep={(step) => setSelected(stepped(selected, step, hours.length))}
         onClose={() => setSelected(null)}
       />
       <figcaption className="px-5 pb-1">
-        <NightLegend
-          source={source}
-          reader={reader}
-          hasFill={hours.some((hour) => hour.verdict === 'fill')}
-          hasGap={drawn.some((hour) => hour.rate === null)}
-        />
+        <NightLegend source={source} reader={reader} drawn={drawn} />
         <NightTable hours={hours} reader={reader} />
       </figcaption>
     </figure>
   )
+}
+
+/** Everything that opening an hour does not change. */
+function prepare(source: StripSource, now: number) {
+  const reader = readerOf(source)
+  const hours = hoursOfNight(source, now)
+  const drawn = stripHours(hours, reader.units)
+  const figures = (['wide', 'narrow'] as const).map((size) => {
+    const input = stripInput(source, drawn, now, size)
+    return { size, layout: layOutNightStrip(input), words: stripWords(input, hours, reader) }
+  })
+  return { reader, hours, drawn, figures }
 }
 
 function stepped(selected: number | null, step: number, count: number): number {

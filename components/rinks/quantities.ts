@@ -1,7 +1,8 @@
 // Figures for people: one quantity, one form, in the reader's units and by the rink's clock.
 import { formatInTimeZone } from 'date-fns-tz'
 import type { TonightView } from '@/lib/schemas/tonight-view'
-import { celsiusToFahrenheit, mmToInches } from '@/lib/units'
+import { addDays } from '@/lib/advice/zoned-time'
+import { celsiusToFahrenheit, litresToGallons, mmToInches } from '@/lib/units'
 
 export interface Reader {
   units: 'metric' | 'imperial'
@@ -13,12 +14,25 @@ export function readerOf({ viewer, rink }: Pick<TonightView, 'viewer' | 'rink'>)
   return { units: viewer.units, clock: viewer.clock, timeZone: rink.timeZone }
 }
 
-/** "9 pm", "9:42 pm"; or "21:42". */
+// A page shows some hundred times of day; making a formatter for each would take a quarter of a second.
+const clocks = new Map<string, Intl.DateTimeFormat>()
+
+function clockOf(timeZone: string): Intl.DateTimeFormat {
+  const made =
+    clocks.get(timeZone) ??
+    new Intl.DateTimeFormat('en', { timeZone, hour: '2-digit', minute: '2-digit', hourCycle: 'h23' })
+  clocks.set(timeZone, made)
+  return made
+}
+
+/** "9 pm", "9:42 pm", "noon", "midnight"; or "21:42". */
 export function clockTime(at: string | number, { clock, timeZone }: Reader): string {
-  const instant = new Date(at)
-  if (clock === '24') return formatInTimeZone(instant, timeZone, 'H:mm')
-  const isWhole = formatInTimeZone(instant, timeZone, 'mm') === '00'
-  return formatInTimeZone(instant, timeZone, isWhole ? 'h aaa' : 'h:mm aaa')
+  const [hour = 0, minute = 0] = clockOf(timeZone).format(new Date(at)).split(':').map(Number)
+  const minutes = String(minute).padStart(2, '0')
+  if (clock === '24') return `${hour}:${minutes}`
+  if (minute === 0 && hour % 12 === 0) return hour === 0 ? 'midnight' : 'noon'
+  const half = hour < 12 ? 'am' : 'pm'
+  return minute === 0 ? `${hour % 12 || 12} ${half}` : `${hour % 12 || 12}:${minutes} ${half}`
 }
 
 const minus = (text: string) => text.replace('-', '−')
@@ -48,3 +62,34 @@ export function heatText(wattsPerM2: number): string {
 }
 
 export const axisNumber = (value: number) => minus(String(value))
+
+export function waterText(litres: number, { units }: Reader): string {
+  const amount = units === 'imperial' ? litresToGallons(litres) : litres
+  return `${amount.toLocaleString('en', { maximumFractionDigits: 0 })} ${units === 'imperial' ? 'gal' : 'L'}`
+}
+
+export function flowText(litresPerMin: number, reader: Reader): string {
+  return `${waterText(litresPerMin, reader)} a minute`
+}
+
+/** "Fri 15 January"; a calendar date has no zone. */
+export function dayText(date: string): string {
+  return formatInTimeZone(`${date}T12:00:00Z`, 'UTC', 'EEE d MMMM')
+}
+
+/** "Tue 12 to Wed 13 January" */
+export function nightText(date: string): string {
+  const next = addDays(date, 1)
+  const isSameMonth = date.slice(0, 7) === next.slice(0, 7)
+  return `${formatInTimeZone(`${date}T12:00:00Z`, 'UTC', isSameMonth ? 'EEE d' : 'EEE d MMMM')} to ${dayText(next)}`
+}
+
+/** How long ago, in the largest unit that fits. */
+export function ageText(from: string, now: number): string {
+  const minutes = Math.max(0, Math.round((now - Date.parse(from)) / 60_000))
+  if (minutes < 1) return 'just now'
+  if (minutes < 60) return `${minutes} ${minutes === 1 ? 'minute' : 'minutes'} ago`
+  const hours = Math.round(minutes / 60)
+  if (hours < 48) return `${hours} ${hours === 1 ? 'hour' : 'hours'} ago`
+  return `${Math.round(hours / 24)} days ago`
+}

@@ -57,6 +57,7 @@ export function stripHours(hours: TonightHour[], units: 'metric' | 'imperial'): 
     air: inUnit(hour.weather?.airTemperatureC ?? null, units, celsiusToFahrenheit),
     snowCm: hour.weather?.snowfallCm ?? 0,
     rainMm: hour.weather?.rainMm ?? 0,
+    isOpen: hour.isAvailable !== false,
   }))
 }
 

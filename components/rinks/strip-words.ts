@@ -1,35 +1,17 @@
 // The words along the strip, and its summary for people who do not see it.
 import type { TonightHour } from '@/lib/schemas/tonight-view'
 import type { StripWords } from '../charts/night-strip-drawing'
-import { xOf, type StripHour } from '../charts/night-strip-layout'
+import { xOf, type StripHour, type StripInput } from '../charts/night-strip-layout'
 import { placeLabels, tickInstants, tickLabel, wetRuns, type WetRun } from '../charts/strip-labels'
-import {
-  axisNumber,
-  clockTime,
-  rainText,
-  rateText,
-  readerOf,
-  snowText,
-  temperatureText,
-  type Reader,
-} from './quantities'
-import { stripInput, type StripSize, type StripSource } from './strip-input'
+import { axisNumber, clockTime, rainText, rateText, snowText, temperatureText, type Reader } from './quantities'
 
 const CHARACTER = 6.3
 
 export const VERDICT_WORDS = { flood: 'flood', fill: 'fill', hold: 'hold off' } as const
 
-export function stripWords(
-  source: StripSource,
-  hours: TonightHour[],
-  drawn: StripHour[],
-  now: number,
-  size: StripSize,
-): StripWords {
-  const reader = readerOf(source)
-  const input = stripInput(source, drawn, now, size)
+export function stripWords(input: StripInput, hours: TonightHour[], reader: Reader): StripWords {
   const middleOf = (run: WetRun) => (xOf(input, run.startsAt) + xOf(input, run.endsAt)) / 2
-  const runs = wetRuns(drawn, input.startsAt, input.endsAt)
+  const runs = wetRuns(input.hours, input.startsAt, input.endsAt)
   return {
     title: 'How fast water freezes, hour by hour',
     description: describeNight(hours, reader),
@@ -45,7 +27,7 @@ export function stripWords(
     rateLabel: axisNumber,
     airLabel: (value) => `${axisNumber(value)}°`,
     passLabel: (number, width) => (width > 44 ? `Pass ${number}` : String(number)),
-    now: `now ${clockTime(now, reader)}`,
+    now: input.now === null ? '' : `now ${clockTime(input.now, reader)}`,
     gap: 'no forecast',
   }
 }
@@ -104,5 +86,6 @@ function stripWet(hours: TonightHour[]): StripHour[] {
     air: null,
     snowCm: hour.weather?.snowfallCm ?? 0,
     rainMm: hour.weather?.rainMm ?? 0,
+    isOpen: true,
   }))
 }

@@ -7,7 +7,16 @@ const NOON = Date.parse('2027-01-12T17:00:00Z')
 const frame = { width: 280, height: 200, left: 20, right: 20, plotTop: 40, plotBottom: 140 }
 
 function hour(index: number, change: Partial<StripHour> = {}): StripHour {
-  return { startsAt: NOON + index * HOUR, verdict: 'hold', rate: 1, air: -5, snowCm: 0, rainMm: 0, ...change }
+  return {
+    startsAt: NOON + index * HOUR,
+    verdict: 'hold',
+    rate: 1,
+    air: -5,
+    snowCm: 0,
+    rainMm: 0,
+    isOpen: true,
+    ...change,
+  }
 }
 
 function night(change: Partial<StripInput> = {}): StripInput {
@@ -66,6 +75,12 @@ describe('across', () => {
     expect(layOutNightStrip(night({ passes: [pass] })).brackets).toEqual([
       { number: 1, x: 100, width: 15, isPoured: false },
     ])
+  })
+
+  test('the keeper’s hours are one stretch, and nothing when every hour is theirs', () => {
+    const hours = Array.from({ length: 24 }, (_, index) => hour(index, { isOpen: index >= 5 && index < 13 }))
+    expect(layOutNightStrip(night({ hours })).openSpans).toEqual([{ x: 70, width: 80 }])
+    expect(layOutNightStrip(night()).openSpans).toEqual([])
   })
 
   test('now is a line inside the night and nothing outside it', () => {

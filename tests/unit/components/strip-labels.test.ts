@@ -56,6 +56,7 @@ test('snow with one dry hour between is one run with one amount', () => {
     air: -3,
     snowCm,
     rainMm: 0,
+    isOpen: true,
   }))
   const runs = wetRuns(hours, start, start + 24 * HOUR)
   expect(runs.map((run) => run.snowCm)).toEqual([1, 1])

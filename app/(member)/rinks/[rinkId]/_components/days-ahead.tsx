@@ -1,0 +1,82 @@
+// The ten days to come: a chart that is fetched once it is nearly in view, and the same numbers as a table.
+'use client'
+import dynamic from 'next/dynamic'
+import { useRef } from 'react'
+import { useNearViewport } from '@/components/hooks/use-near-viewport'
+import { dayText, rainText, readerOf, snowText, temperatureText, type Reader } from '@/components/rinks/quantities'
+import { DataTable } from '@/components/ui/data-table'
+import { Disclosure } from '@/components/ui/disclosure'
+import type { DayAhead, TonightView } from '@/lib/schemas/tonight-view'
+import { celsiusToFahrenheit, mmToInches } from '@/lib/units'
+
+const Chart = dynamic(() => import('@/components/charts/days-ahead-chart'), { ssr: false })
+
+const COLUMNS = [
+  { head: 'Day' },
+  { head: 'Low', isFigure: true },
+  { head: 'High', isFigure: true },
+  { head: 'Could freeze', isFigure: true },
+  { head: 'Hours to flood', isFigure: true },
+  { head: 'Snow', isFigure: true },
+  { head: 'Rain', isFigure: true },
+]
+
+export function DaysAhead({ view, days }: { view: TonightView; days: DayAhead[] }) {
+  const frame = useRef<HTMLDivElement>(null)
+  const isNear = useNearViewport(frame)
+  const reader = readerOf(view)
+  const isImperial = reader.units === 'imperial'
+  return (
+    <section className="mt-10">
+      <h2 className="mb-2 text-body font-semibold">The days ahead</h2>
+      <div ref={frame} aria-hidden="true" className="h-[240px] print:hidden">
+        {isNear ? (
+          <Chart
+            days={days.map((day) => columnOf(day, isImperial))}
+            depthUnit={isImperial ? 'in' : 'mm'}
+            airUnit={isImperial ? '°F' : '°C'}
+          />
+        ) : null}
+      </div>
+      <p className="mt-1 text-small text-graphite print:hidden">
+        Bars: {isImperial ? 'inches' : 'mm'} of water that could freeze in the day, solid where there are hours to
+        flood. Lines: high and low of the air, {isImperial ? '°F' : '°C'}.
+      </p>
+      <Disclosure summary="Show as table" className="text-small">
+        <DataTable
+          caption="The days ahead"
+          columns={COLUMNS}
+          rows={days.map((day) => ({ key: day.date, cells: cellsOf(day, reader) }))}
+        />
+      </Disclosure>
+    </section>
+  )
+}
+
+function columnOf(day: DayAhead, isImperial: boolean) {
+  const round = (value: number | null, digits: number) => (value === null ? null : Number(value.toFixed(digits)))
+  const air = (value: number | null) => round(value === null || !isImperial ? value : celsiusToFahrenheit(value), 0)
+  return {
+    day: dayText(day.date).split(' ').slice(0, 2).join(' '),
+    freezable: isImperial
+      ? round(day.freezableMm === null ? null : mmToInches(day.freezableMm), 2)
+      : round(day.freezableMm, 0),
+    low: air(day.lowC),
+    high: air(day.highC),
+    hasFloodHours: day.floodHours > 0,
+  }
+}
+
+function cellsOf(day: DayAhead, reader: Reader): string[] {
+  const text = (value: number | null, write: (value: number, reader: Reader) => string) =>
+    value === null ? 'unknown' : write(value, reader)
+  return [
+    dayText(day.date),
+    text(day.lowC, temperatureText),
+    text(day.highC, temperatureText),
+    text(day.freezableMm, rainText),
+    String(day.floodHours),
+    text(day.snowCm, snowText),
+    text(day.rainMm, rainText),
+  ]
+}

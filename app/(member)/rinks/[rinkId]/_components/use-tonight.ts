@@ -1,0 +1,73 @@
+// Tonight's view, kept fresh while you look: every minute and on return; every 2 s until the first forecast is read.
+'use client'
+import { useState } from 'react'
+import useSWR from 'swr'
+import { useOnline } from '@/components/hooks/use-online'
+import { outlookKey } from '@/lib/cache-keys/outlook'
+import { fetchJson, FetchJsonError } from '@/lib/http/fetch-json'
+import type { FormState } from '@/lib/http/form-state'
+import type { TonightView } from '@/lib/schemas/tonight-view'
+
+const MINUTE = 60_000
+const SOON = 2000
+const NO_ANSWER = 'There was no answer from the server, so nothing was changed. Try again when you have a connection.'
+
+/** Why what is on screen may be old: no network, signed out, no longer on the rink's list, or a fault of ours. */
+export type ReadTrouble = 'offline' | 'signed-out' | 'gone' | 'failed' | null
+
+/** Does the work while `shown` is on screen; gives what went wrong as a sentence, or null. */
+export type ChangeView = (work: () => Promise<FormState>, shown: TonightView) => Promise<string | null>
+
+class Refused extends Error {}
+
+export function useTonight(initial: TonightView) {
+  const key = outlookKey(initial.rink.id)
+  const isOnline = useOnline()
+  const [isFresh, setIsFresh] = useState(true)
+  const { data, error, mutate } = useSWR<TonightView, Error>(key, fetchJson<TonightView>, {
+    fallbackData: initial,
+    refreshInterval: (latest) => (isSettled(latest ?? initial) ? MINUTE : SOON),
+    refreshWhenOffline: false,
+    dedupingInterval: 1000,
+    onErrorRetry: (_error, _key, _config, retry, { retryCount }) => setTimeout(() => retry({ retryCount }), MINUTE / 4),
+    onError: () => setIsFresh(false),
+    onSuccess: () => setIsFresh(true),
+  })
+
+  const change: ChangeView = async (work, shown) => {
+    const run = async () => {
+      const state = await work()
+      if (state.status === 'error') throw new Refused(Object.values(state.fields ?? {})[0] ?? state.message)
+      return fetchJson<TonightView>(key)
+    }
+    try {
+      await mutate(run(), { optimisticData: shown, rollbackOnError: true, revalidate: false })
+      return null
+    } catch (fault) {
+      return fault instanceof Refused ? fault.message : NO_ANSWER
+    }
+  }
+
+  return {
+    view: data ?? initial,
+    trouble: troubleOf(isOnline, isFresh ? undefined : error),
+    change,
+    readAgain: () => void mutate(),
+  }
+}
+
+/** False while the server still judges: the first forecast, or the plan after a pass was poured. */
+function isSettled({ outlook }: TonightView): boolean {
+  if (!outlook) return false
+  return outlook.passes.every(({ poured }) => poured === null || poured.at <= outlook.judgedAt)
+}
+
+function troubleOf(isOnline: boolean, error: Error | undefined): ReadTrouble {
+  if (!isOnline) return 'offline'
+  if (!error) return null
+  if (error instanceof FetchJsonError) {
+    if (error.status === 401) return 'signed-out'
+    return error.status === 404 || error.status === 403 ? 'gone' : 'failed'
+  }
+  return 'offline'
+}

@@ -1,0 +1,26 @@
+// The water tonight's plan rests on: what the tap gives, and what the passes take in all.
+import { Facts } from '@/components/ui/facts'
+import { flowText, readerOf, temperatureText, waterText } from '@/components/rinks/quantities'
+import type { TonightView } from '@/lib/schemas/tonight-view'
+
+export function WaterAndHose({ view }: { view: TonightView }) {
+  const reader = readerOf(view)
+  const { temperatureC, flowLPerMin } = view.rink.water
+  const planned = (view.outlook?.passes ?? []).filter((pass) => pass.poured === null)
+  const litres = planned.reduce((sum, pass) => sum + pass.waterL, 0)
+  const minutes = planned.reduce((sum, pass) => sum + pass.hoseMinutes, 0)
+  return (
+    <section>
+      <h2 className="mt-8 mb-2 text-body font-semibold">Water and hose</h2>
+      <Facts
+        rows={[
+          { name: 'Water at the hose', figure: temperatureText(temperatureC, reader) },
+          { name: 'Flow', figure: flowText(flowLPerMin, reader) },
+          ...(planned.length > 0
+            ? [{ name: 'Still to pour tonight', figure: `${waterText(litres, reader)}, ${Math.round(minutes)} min` }]
+            : []),
+        ]}
+      />
+    </section>
+  )
+}

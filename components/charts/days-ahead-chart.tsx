@@ -1,0 +1,96 @@
+// Ten days ahead: what could freeze each day as bars, low and high of the air as lines. Loaded on demand (recharts is heavy).
+'use client'
+import { Bar, CartesianGrid, Cell, ComposedChart, Line, ResponsiveContainer, Tooltip, XAxis, YAxis } from 'recharts'
+
+export interface DayColumn {
+  day: string
+  /** Depth that could freeze, in the reader's unit. */
+  freezable: number | null
+  low: number | null
+  high: number | null
+  hasFloodHours: boolean
+}
+
+interface DaysAheadChartProps {
+  days: DayColumn[]
+  depthUnit: string
+  airUnit: string
+}
+
+const TEXT = { fontSize: 12, fill: 'var(--graphite)' }
+
+export default function DaysAheadChart({ days, depthUnit, airUnit }: DaysAheadChartProps) {
+  return (
+    <ResponsiveContainer width="100%" height="100%">
+      <ComposedChart data={days} margin={{ top: 12, right: 4, bottom: 0, left: 0 }} accessibilityLayer={false}>
+        <CartesianGrid vertical={false} stroke="var(--rule)" />
+        <XAxis
+          dataKey="day"
+          tick={TEXT}
+          tickLine={false}
+          axisLine={{ stroke: 'var(--graphite)' }}
+          interval="equidistantPreserveStart"
+        />
+        <YAxis yAxisId="depth" width={34} tick={TEXT} tickLine={false} axisLine={false} />
+        <YAxis
+          yAxisId="air"
+          orientation="right"
+          width={38}
+          tick={TEXT}
+          tickLine={false}
+          axisLine={false}
+          tickFormatter={(value: number) => `${value}°`.replace('-', '−')}
+        />
+        <Tooltip
+          isAnimationActive={false}
+          cursor={{ fill: 'var(--night)' }}
+          contentStyle={{
+            background: 'var(--sheet)',
+            border: '1px solid var(--graphite)',
+            borderRadius: 4,
+            fontSize: 13,
+          }}
+          labelStyle={{ color: 'var(--ink)' }}
+          itemStyle={{ color: 'var(--ink)' }}
+        />
+        <Bar
+          yAxisId="depth"
+          dataKey="freezable"
+          name="could freeze"
+          unit={` ${depthUnit}`}
+          maxBarSize={38}
+          isAnimationActive={false}
+        >
+          {days.map(({ day, hasFloodHours }) =>
+            hasFloodHours ? (
+              <Cell key={day} fill="var(--lamp)" stroke="var(--lamp-text)" />
+            ) : (
+              <Cell key={day} fill="transparent" stroke="var(--still)" strokeWidth={1.3} />
+            ),
+          )}
+        </Bar>
+        <Line
+          yAxisId="air"
+          dataKey="high"
+          name="high"
+          unit={` ${airUnit}`}
+          stroke="var(--ink)"
+          strokeWidth={1.8}
+          dot={false}
+          isAnimationActive={false}
+        />
+        <Line
+          yAxisId="air"
+          dataKey="low"
+          name="low"
+          unit={` ${airUnit}`}
+          stroke="var(--ink)"
+          strokeWidth={1.8}
+          strokeDasharray="4 3"
+          dot={false}
+          isAnimationActive={false}
+        />
+      </ComposedChart>
+    </ResponsiveContainer>
+  )
+}

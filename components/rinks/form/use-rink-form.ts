@@ -1,0 +1,62 @@
+// The state of the rink form: what is typed, what was wrong with it, and the way to the server.
+'use client'
+import { startTransition, useActionState, useEffect, useRef, useState, type FormEvent } from 'react'
+import type { FormAction } from '@/components/ui/action-form'
+import { IDLE } from '@/lib/http/form-state'
+import { unitOf, type UnitSystem } from '@/lib/schemas/measures'
+import { inUnits, MEASURE_OF, type FormValues } from './values'
+
+export type RinkForm = ReturnType<typeof useRinkForm>
+
+/** Whatever a fault belongs to: a field, or a group of choices. */
+const FAULTY = 'input[aria-invalid=true], select[aria-invalid=true], fieldset[aria-invalid=true] input'
+
+export function useRinkForm(action: FormAction, initial: FormValues) {
+  const [state, dispatch, isPending] = useActionState(action, IDLE)
+  // Without script the page comes back whole, and this is where what was typed is found again.
+  const [values, setValues] = useState<FormValues>(state.values ?? initial)
+  const form = useRef<HTMLFormElement>(null)
+  const units: UnitSystem = values.units === 'imperial' ? 'imperial' : 'metric'
+
+  useEffect(() => {
+    if (state.status === 'error') form.current?.querySelector<HTMLElement>(FAULTY)?.focus()
+  }, [state])
+
+  const set = (changed: FormValues) => setValues((before) => ({ ...before, ...changed }))
+
+  return {
+    ref: form,
+    state,
+    dispatch,
+    isPending,
+    values,
+    units,
+    set,
+    chooseUnits: (chosen: UnitSystem) => setValues((before) => inUnits(before, chosen)),
+    /** Sent by hand, because React empties a form that it sends itself. */
+    submit: (event: FormEvent<HTMLFormElement>) => {
+      event.preventDefault()
+      const sent = new FormData(event.currentTarget)
+      startTransition(() => dispatch(sent))
+    },
+    error: (name: string) => state.fields?.[name],
+    text: (name: string) => ({
+      name,
+      value: values[name] ?? '',
+      error: state.fields?.[name],
+      unit: MEASURE_OF[name] && unitOf(MEASURE_OF[name], units),
+      onChange: (event: { target: { value: string } }) => set({ [name]: event.target.value }),
+    }),
+    choice: (name: string) => ({
+      name,
+      value: values[name] ?? '',
+      error: state.fields?.[name],
+      onChoose: (value: string) => set({ [name]: value }),
+    }),
+    tick: (name: string) => ({
+      name,
+      checked: values[name] === 'on',
+      onChange: (event: { target: { checked: boolean } }) => set({ [name]: event.target.checked ? 'on' : '' }),
+    }),
+  }
+}

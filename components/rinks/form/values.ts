@@ -1,0 +1,91 @@
+// What the rink form starts from: its text fields, for a new rink and for one that exists.
+import { MEASURES, parseNumber, typed, type MeasureName, type UnitSystem } from '@/lib/schemas/measures'
+import { RINK_DEFAULTS, SKIES, SKY_VIEWS, type SkyChoice } from '@/lib/schemas/rink-choices'
+import type { RinkInput } from '@/lib/schemas/rinks'
+
+/** Text by field name, as FormData has it; a box that is not ticked is absent. */
+export type FormValues = Record<string, string>
+
+/** The fields that carry a unit. */
+export const MEASURE_OF: Record<string, MeasureName> = {
+  length: 'side',
+  width: 'side',
+  iceThickness: 'iceThickness',
+  fillDepth: 'fillDepth',
+  flow: 'flow',
+  bucketSize: 'bucket',
+  waterTemperature: 'waterTemperature',
+  layer: 'layer',
+}
+
+/** Ten metres are 33 feet; a form starts with round numbers in both. */
+const ROUND: Record<UnitSystem, FormValues> = {
+  metric: { length: '10', width: '10', fillDepth: '10', layer: '3' },
+  imperial: { length: '33', width: '33', fillDepth: '4', layer: '0.12' },
+}
+
+export function newRinkValues(units: UnitSystem, creationKey: string): FormValues {
+  return {
+    creationKey,
+    units,
+    ...ROUND[units],
+    base: 'liner',
+    shelter: 'suburban',
+    sky: 'edged',
+    phase: 'waiting',
+    waterKind: 'cold-tap',
+    maxPasses: String(RINK_DEFAULTS.maxPasses),
+    hoursFrom: RINK_DEFAULTS.from,
+    hoursTo: RINK_DEFAULTS.to,
+    tellAt: RINK_DEFAULTS.tellAt,
+    wantsPush: 'on',
+    wantsEmail: 'on',
+  }
+}
+
+/** The description whose share of open sky is nearest to the stored one. */
+function nearestSky(skyView: number): SkyChoice {
+  const distance = (sky: SkyChoice) => Math.abs(SKY_VIEWS[sky] - skyView)
+  return SKIES.reduce((best, sky) => (distance(sky) < distance(best) ? sky : best))
+}
+
+/** The ice is left open: it is told when somebody has measured it. */
+export function rinkValues(rink: RinkInput & { id: string }, units: UnitSystem): FormValues {
+  const { water, available } = rink
+  const [hours, more] = available
+  return {
+    rinkId: rink.id,
+    units,
+    name: rink.name,
+    placeName: rink.placeName ?? '',
+    latitude: String(rink.latitudeDeg),
+    longitude: String(rink.longitudeDeg),
+    timeZone: rink.timeZone ?? '',
+    length: typed('side', units, rink.lengthM),
+    width: typed('side', units, rink.widthM),
+    base: rink.base,
+    shelter: rink.shelter,
+    sky: nearestSky(rink.skyView),
+    phase: rink.phase,
+    fillDepth: typed('fillDepth', units, water.fillDepthMm),
+    waterKind: water.kind,
+    flow: typed('flow', units, water.flowLPerMin),
+    waterTemperature: typed('waterTemperature', units, water.temperatureC),
+    layer: typed('layer', units, water.layerMm),
+    maxPasses: String(rink.maxPasses),
+    hoursFrom: hours?.from ?? RINK_DEFAULTS.from,
+    hoursTo: hours?.to ?? RINK_DEFAULTS.to,
+    moreHoursFrom: more?.from ?? '',
+    moreHoursTo: more?.to ?? '',
+  }
+}
+
+/** Rewrites every quantity that was typed; what is no number stays for the person to mend. */
+export function inUnits(values: FormValues, units: UnitSystem): FormValues {
+  const from: UnitSystem = values.units === 'imperial' ? 'imperial' : 'metric'
+  const converted = Object.entries(MEASURE_OF).flatMap(([field, measure]) => {
+    const number = parseNumber(values[field] ?? '')
+    return number === undefined ? [] : [[field, typed(measure, units, MEASURES[measure].scales[from].toSi(number))]]
+  })
+  return { ...values, ...Object.fromEntries(converted), units }
+}

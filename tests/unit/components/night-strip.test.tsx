@@ -1,0 +1,91 @@
+// The strip as the server sends it: complete before any script, the same numbers in the table, nothing the CSP would drop.
+import { renderToStaticMarkup } from 'react-dom/server'
+import { describe, expect, test } from 'vitest'
+import { NightStrip } from '@/components/rinks/night-strip'
+import type { StripSource } from '@/components/rinks/strip-input'
+import type { TonightView } from '@/lib/schemas/tonight-view'
+import { hourAt, isoAt, NOON, outlookOf, tonightView } from '../../fixtures/tonight-view'
+
+const HOUR = 3_600_000
+
+function draw(change: Partial<TonightView> = {}, now = NOON + 6.7 * HOUR): string {
+  return renderToStaticMarkup(<NightStrip source={tonightView(change) as StripSource} now={now} />)
+}
+
+const rowsOf = (markup: string) =>
+  [...markup.matchAll(/<tr>(.*?)<\/tr>/g)].map(([, row]) =>
+    [...(row ?? '').matchAll(/<t[hd][^>]*>(.*?)<\/t[hd]>/g)].map(([, cell]) => cell ?? ''),
+  )
+
+describe('the night strip', () => {
+  test('has a title, a summary and one row in the table for each hour', () => {
+    const markup = draw()
+    expect(markup).toContain('How fast water freezes, hour by hour')
+    expect(markup).toContain('Hours to flood: 7 pm to 2 am.')
+    expect(markup).toContain('From 5 am to 9 am snow 2.9 cm.')
+    const rows = rowsOf(markup)
+    expect(rows).toHaveLength(25)
+    expect(rows[1]?.slice(0, 5)).toEqual(['noon', 'hold off', '−1.2 mm/h', 'not set', '−2 °C'])
+    expect(rows[12]).toEqual(['11 pm', 'flood', '2.3 mm/h', '12:18 am', '−10 °C', 'none', 'none'])
+  })
+
+  test('carries no style attribute and no inline script handler', () => {
+    expect(draw()).not.toMatch(/ style=| on[a-z]+="/)
+  })
+
+  test('draws 24 hours wide and the 18 hours from 3 pm to 9 am narrow', () => {
+    const [wide = '', narrow = ''] = draw()
+      .split('<svg')
+      .filter((part) => part.includes('strip-'))
+      .slice(0, 2)
+    expect(wide.match(/noon|midnight|\d [ap]m/g)).not.toBeNull()
+    expect(narrow).toContain('>3 pm<')
+    expect(narrow).not.toContain('>noon<')
+  })
+
+  test('tells verdicts apart without colour: solid, barred, outlined', () => {
+    const hours = [hourAt(6, { verdict: 'fill' }), hourAt(7), hourAt(15)]
+    const markup = draw({ outlook: outlookOf({ hours }) })
+    expect(markup).toContain('fill="url(#strip-wide-barred)"')
+    expect(markup).toContain('class="fill-lamp stroke-lamp-text"')
+    expect(markup).toContain('>fill<')
+  })
+
+  test('hours to come without a forecast are hatched and named', () => {
+    const hours = Array.from({ length: 14 }, (_, index) => hourAt(index))
+    const markup = draw({ outlook: outlookOf({ hours }) })
+    expect(markup).toContain('url(#strip-wide-hatch)')
+    expect(markup).toContain('>no forecast<')
+    expect(markup).toContain('No forecast for 10 of 24 hours.')
+  })
+
+  test('speaks Fahrenheit, inches and the 24-hour clock to those who read them', () => {
+    const view = tonightView()
+    const markup = draw({ viewer: { ...view.viewer, units: 'imperial', clock: '24' } })
+    const [, , , , , , , , , , , , eleven] = rowsOf(markup)
+    expect(eleven?.slice(0, 5)).toEqual(['23:00', 'flood', '0.09 in/h', '0:18', '15 °F'])
+    expect(markup).toContain('air, °F')
+  })
+
+  test('a thaw night with rain still has its frame and says that no hour is good', () => {
+    const thaw = Array.from({ length: 24 }, (_, index) => {
+      const base = hourAt(index)
+      const weather = {
+        ...base.weather,
+        airTemperatureC: 5,
+        precipitationMm: 1,
+        rainMm: 1,
+        snowfallCm: 0,
+      } as typeof base.weather
+      return { ...base, freezeRateMmPerH: -2, verdict: 'hold' as const, setsAt: null, weather }
+    })
+    const markup = draw({ outlook: outlookOf({ hours: thaw, passes: [] }) })
+    expect(markup).toContain('No hour is good for flooding or filling.')
+    expect(markup).toContain('rain 24.0 mm')
+  })
+
+  test('now is drawn while the night lasts and not after it', () => {
+    expect(draw()).toContain('now 6:42 pm')
+    expect(draw({}, Date.parse(isoAt(25)))).not.toContain('stroke-rust')
+  })
+})

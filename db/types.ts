@@ -8,6 +8,7 @@ export interface UserRow {
   name: string
   password_hash: string | null
   email_verified_at: Date | null
+  email_refused_at: Date | null
   is_admin: boolean
   units: 'metric' | 'imperial'
   clock: '12' | '24'

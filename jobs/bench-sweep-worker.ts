@@ -7,7 +7,6 @@ import { readClock } from '@/lib/clock'
 import { refreshOutlook } from '@/lib/services/outlooks'
 
 const connectionString = process.env.DATABASE_URL ?? ''
-const settings = { publicUrl: 'http://localhost', secret: 'a secret for the bench and nothing else' }
 const db = createPool(connectionString)
 const pgPool = new pg.Pool({ connectionString, max: 6 })
 
@@ -20,7 +19,7 @@ const runner = await run({
   taskList: {
     'refresh-outlook': async (payload) => {
       const { rinkId } = payload as { rinkId: string }
-      await refreshOutlook({ db, now: readClock(), settings }, systemRinkAccess<'view'>(rinkId))
+      await refreshOutlook({ db, now: readClock() }, systemRinkAccess<'view'>(rinkId))
     },
   },
 })

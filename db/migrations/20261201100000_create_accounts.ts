@@ -9,6 +9,8 @@ export async function up(knex: Knex): Promise<void> {
       name text not null check (length(name) between 1 and 80),
       password_hash text,
       email_verified_at timestamptz,
+      -- The mail server said for good that this address takes no mail; a link opened from a mail clears it.
+      email_refused_at timestamptz,
       is_admin boolean not null default false,
       units text not null default 'metric' check (units in ('metric', 'imperial')),
       clock text not null default '12' check (clock in ('12', '24')),

@@ -18,6 +18,7 @@ export interface AlertRecipient extends AlertPreferences {
   name: string
   email: string
   isEmailVerified: boolean
+  isEmailRefused: boolean
   units: 'metric' | 'imperial'
   clock: '12' | '24'
 }
@@ -57,6 +58,7 @@ export async function listAlertRecipients(db: Db, access: RinkAccess): Promise<A
       name: 'u.name',
       email: 'u.email',
       emailVerifiedAt: 'u.email_verified_at',
+      emailRefusedAt: 'u.email_refused_at',
       units: 'u.units',
       clock: 'u.clock',
       tellAt: 'p.tell_at',
@@ -64,9 +66,10 @@ export async function listAlertRecipients(db: Db, access: RinkAccess): Promise<A
       wantsPush: 'p.wants_push',
       mutedThroughDate: 'p.muted_through',
     })
-  return rows.map(({ emailVerifiedAt, tellAt, wantsEmail, wantsPush, ...row }) => ({
+  return rows.map(({ emailVerifiedAt, emailRefusedAt, tellAt, wantsEmail, wantsPush, ...row }) => ({
     ...row,
     isEmailVerified: emailVerifiedAt !== null,
+    isEmailRefused: emailRefusedAt !== null,
     tellAt: tellAt ?? DEFAULT_PREFERENCES.tellAt,
     wantsEmail: wantsEmail ?? DEFAULT_PREFERENCES.wantsEmail,
     wantsPush: wantsPush ?? DEFAULT_PREFERENCES.wantsPush,

@@ -63,7 +63,7 @@ export async function confirmEmail(db: Db, userId: string, now: Date): Promise<b
   const changed = await db('users')
     .where({ id: userId })
     .whereNull('email_verified_at')
-    .update({ email_verified_at: now, updated_at: now })
+    .update({ email_verified_at: now, email_refused_at: null, updated_at: now })
   return changed === 1
 }
 
@@ -95,4 +95,9 @@ export async function deleteUnconfirmedUsersBefore(db: Db, instant: Date): Promi
 /** The units a person typed in are the ones they want to read. */
 export async function chooseUnits(db: Db, userId: string, units: UserRow['units'], now: Date): Promise<void> {
   await db('users').where({ id: userId }).update({ units, updated_at: now })
+}
+
+/** A refusal for good: alerts leave the address alone from now on, and the alerts page says so. */
+export async function noteEmailRefused(db: Db, userId: string, now: Date): Promise<void> {
+  await db('users').where({ id: userId }).update({ email_refused_at: now })
 }

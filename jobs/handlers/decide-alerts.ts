@@ -4,8 +4,5 @@ import { decideAlerts } from '@/lib/services/alerts'
 import type { WorkerParts } from '../parts'
 
 export async function decideAlertsJob(parts: WorkerParts, { rinkId }: { rinkId: string }): Promise<void> {
-  await decideAlerts(
-    { db: parts.db, now: parts.readClock(), settings: parts.settings },
-    systemRinkAccess<'view'>(rinkId),
-  )
+  await decideAlerts({ db: parts.db, now: parts.readClock() }, systemRinkAccess<'view'>(rinkId))
 }

@@ -7,6 +7,6 @@ import type { WorkerParts } from '../parts'
 export async function refreshOutlookJob(parts: WorkerParts, { rinkId }: { rinkId: string }): Promise<void> {
   const startedAt = parts.readClock()
   const access = systemRinkAccess<'view'>(rinkId)
-  const isNew = await refreshOutlook({ db: parts.db, now: startedAt, settings: parts.settings }, access)
+  const isNew = await refreshOutlook({ db: parts.db, now: startedAt }, access)
   if (isNew) logEvent('outlook.stored', { rinkId, millis: parts.readClock().getTime() - startedAt.getTime() })
 }

@@ -22,9 +22,7 @@ import { nightBounds } from '@/lib/advice/night'
 import type { NightSummary } from '@/lib/advice/night-summary'
 import { nextWindowStep } from '@/lib/advice/window-change'
 import { instantOfLocal } from '@/lib/advice/zoned-time'
-import { alertContent, type TellingSettings } from './alert-content'
-
-export type { TellingSettings }
+import { alertContent } from './alert-content'
 
 type JudgedOutlook = Pick<StoredOutlook, 'id' | 'forecastId' | 'modelVersion' | 'summary'>
 
@@ -32,7 +30,6 @@ interface Deciding {
   trx: Db
   access: RinkAccess<'view'>
   now: Date
-  settings: TellingSettings
 }
 
 /** Two workers never decide one rink at the same time; the lock goes with the transaction. */
@@ -55,10 +52,7 @@ export async function adviseNight(
 }
 
 /** Tells those whose time of day has come, with the outlook that stands. */
-export async function decideAlerts(
-  { db, now, settings }: { db: Db; now: Date; settings: TellingSettings },
-  access: RinkAccess<'view'>,
-): Promise<void> {
+export async function decideAlerts({ db, now }: { db: Db; now: Date }, access: RinkAccess<'view'>): Promise<void> {
   await db.transaction(async (trx) => {
     await lockRink(trx, access.rinkId)
     const rink = await findRinkForJudging(trx, access.rinkId)
@@ -66,7 +60,7 @@ export async function decideAlerts(
     const forecast = outlook && (await findForecastHead(trx, outlook.forecastId))
     if (!rink || !outlook || !forecast) return
     const window = await findAdvisedWindow(trx, { rinkId: rink.id, nightDate: outlook.nightDate, kind: 'flood' })
-    await tellRecipients({ trx, access, now, settings }, rink, outlook.summary, window, forecast.expiresAt)
+    await tellRecipients({ trx, access, now }, rink, outlook.summary, window, forecast.expiresAt)
   })
 }
 
@@ -159,11 +153,14 @@ interface Alert {
   heard: ToldAlert[]
 }
 
-async function promiseAlert({ trx, now, settings }: Deciding, alert: Alert): Promise<void> {
+async function promiseAlert({ trx, now }: Deciding, alert: Alert): Promise<void> {
   const { kind, rink, summary, window, person } = alert
   const devices = person.wantsPush ? await listEnabledPushSubscriptions(trx, person.userId) : []
-  const channels = [...(person.wantsEmail ? ['email' as const] : []), ...(devices.length > 0 ? ['push' as const] : [])]
-  const content = alertContent({ kind, rink, summary, window, person }, settings, now)
+  const channels = [
+    ...(person.wantsEmail && !person.isEmailRefused ? ['email' as const] : []),
+    ...(devices.length > 0 ? ['push' as const] : []),
+  ]
+  const content = alertContent({ kind, rink, summary, window, person }, now)
   const expiresAt = expiryOf(window, summary)
   if (expiresAt <= now) return
   for (const channel of channels) {

@@ -8,6 +8,7 @@ import {
 } from '@/db/queries/deliveries'
 import { enqueueDelivery } from '@/db/queries/messages'
 import { disablePushSubscription, listEnabledPushSubscriptions } from '@/db/queries/push-subscriptions'
+import { noteEmailRefused } from '@/db/queries/users'
 import type { Db } from '@/db/knex'
 import { logEvent } from '@/lib/log'
 import { DeliveryError, type EmailTransport, type PushTransport } from '@/lib/messaging/port'
@@ -91,6 +92,7 @@ async function attempt(
 async function sendEmail(delivering: Delivering, message: MessageToDeliver): Promise<Failure[]> {
   const mail = renderEmail(message, delivering.settings)
   const failure = await attempt(delivering, { messageId: message.id }, () => delivering.email.send(mail))
+  if (failure?.isPermanent) await noteEmailRefused(delivering.db, message.userId, delivering.readClock())
   return failure ? [failure] : []
 }
 
@@ -99,13 +101,14 @@ async function sendPushes(delivering: Delivering, message: MessageToDeliver): Pr
   const { db, readClock } = delivering
   const served = new Set(await listDeliveredDevices(db, message.id))
   const devices = (await listEnabledPushSubscriptions(db, message.userId)).filter(({ id }) => !served.has(id))
+  const payload = renderPush(message, delivering.settings)
   const failures: Failure[] = []
   for (const { id, ...subscription } of devices) {
     const failure = await attempt(delivering, { messageId: message.id, pushSubscriptionId: id }, () =>
       delivering.push.send({
         subscription,
-        payload: renderPush(message, delivering.settings),
-        topic: pushTopic(`${message.rinkId}:${message.kind}`),
+        payload,
+        topic: pushTopic(payload.tag),
         ttlSeconds: Math.max(0, Math.floor((message.expiresAt.getTime() - readClock().getTime()) / 1000)),
       }),
     )

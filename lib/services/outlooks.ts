@@ -10,7 +10,7 @@ import { judge } from '@/lib/advice/judge'
 import { tonightDate } from '@/lib/advice/night'
 import { summariseNight } from '@/lib/advice/night-summary'
 import type { Judgement } from '@/lib/advice/types'
-import { adviseNight, type TellingSettings } from './alerts'
+import { adviseNight } from './alerts'
 import { slotOf } from './forecasts'
 import { judgeInputOf } from './judge-input'
 
@@ -26,10 +26,7 @@ interface Judged {
  *
  * @returns false when there was nothing to do.
  */
-export async function refreshOutlook(
-  { db, now, settings }: { db: Db; now: Date; settings: TellingSettings },
-  access: RinkAccess<'view'>,
-): Promise<boolean> {
+export async function refreshOutlook({ db, now }: { db: Db; now: Date }, access: RinkAccess<'view'>): Promise<boolean> {
   const slotAt = slotOf(now)
   const judged = await judgeRink(db, access, slotAt, now)
   if (!judged) return false
@@ -56,7 +53,7 @@ export async function refreshOutlook(
     await insertScoredHours(trx, outlookId, judgement.hours)
     await keepSheet(trx, rink.id, judgement)
     const outlook = { id: outlookId, forecastId: forecast.id, modelVersion: judgement.modelVersion, summary }
-    await adviseNight({ trx, access, now, settings }, rink, outlook, forecast.expiresAt)
+    await adviseNight({ trx, access, now }, rink, outlook, forecast.expiresAt)
     return true
   })
 }

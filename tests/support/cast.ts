@@ -23,14 +23,18 @@ export async function addActor(db: Knex, name: string, options: { isAdmin?: bool
   return { userId, email, at: (now) => ({ db, now, viewer: { userId, isAdmin } }) }
 }
 
+/** Rinks of one test file lie in cells of their own: a cell has one forecast an hour. */
+let rinksMade = 0
+
 /** What a keeper near the Ottawa types into the set-up form; `changes` replaces fields. */
 export function rinkForm(changes: Record<string, string> = {}): Record<string, string> {
+  rinksMade += 1
   return {
     units: 'metric',
     creationKey: randomUUID(),
     name: 'Birch Lane',
     placeName: 'Upper Ottawa Valley',
-    latitude: '45.9',
+    latitude: (45 + rinksMade * 0.02).toFixed(2),
     longitude: '-77.3',
     timeZone: 'America/Toronto',
     phase: 'skating',

@@ -4,7 +4,7 @@ import { ActionForm, type FormAction } from '@/components/ui/action-form'
 
 function forgetKeptPages(): void {
   // Absent on plain http and in old browsers; then nothing was kept.
-  navigator.serviceWorker?.controller?.postMessage({ type: 'forget' })
+  navigator.serviceWorker?.controller?.postMessage('forget')
 }
 
 export function SignOutForm({

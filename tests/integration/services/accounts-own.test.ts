@@ -1,0 +1,117 @@
+// One's own account and its sessions, as next-auth sees them.
+import { afterAll, beforeAll, expect, test } from 'vitest'
+import { sessionAdapter } from '@/lib/auth/adapter'
+import { openSession, SESSION_SECONDS } from '@/lib/auth/sessions'
+import type { ServiceContext } from '@/lib/context'
+import { pruneAccounts } from '@/lib/services/account-upkeep'
+import { requestLink, signInWithLink, signInWithPassword, signUp } from '@/lib/services/accounts'
+import { changePassword, getAccount, saveAccount, signOutEverywhere } from '@/lib/services/own-account'
+import { LIMITS } from '@/lib/services/rate-limits'
+import { createTestDatabase, type TestDatabase } from '@/tests/support/test-database'
+import { newEmail, newestKey, newMember, NOW, PASSWORD, visitor } from '@/tests/support/visitor'
+
+let database: TestDatabase
+beforeAll(async () => {
+  database = await createTestDatabase()
+})
+afterAll(() => database.drop())
+
+// next-auth's adapter reads the clock itself, so sessions here begin in the present.
+const present = () => new Date()
+const as = (userId: string, now = NOW): ServiceContext => ({ db: database.db, now, viewer: { userId, isAdmin: false } })
+const open = (userId: string) => openSession(database.db, userId, present())
+const read = (token: string) => sessionAdapter(database.db).getSessionAndUser?.(token)
+
+test('a session is found by its token, which the database does not hold', async () => {
+  const { email, userId } = await newMember(database.db)
+  const { token, expiresAt } = await open(userId)
+  expect(await read(token)).toMatchObject({
+    session: { sessionToken: token, userId, expires: expiresAt },
+    user: { id: userId, email, name: 'Anna', isAdmin: false },
+  })
+  expect(JSON.stringify(await database.db('sessions').select())).not.toContain(token)
+  expect(await read(`${token}x`)).toBeNull()
+})
+
+test('who becomes admin is one from the next request on', async () => {
+  const { userId } = await newMember(database.db)
+  const { token } = await open(userId)
+  await database.db('users').where({ id: userId }).update({ is_admin: true })
+  expect(await read(token)).toMatchObject({ user: { isAdmin: true } })
+})
+
+test('an expired session is none', async () => {
+  const { userId } = await newMember(database.db)
+  const longAgo = new Date(present().getTime() - SESSION_SECONDS * 1000 - 1000)
+  const { token } = await openSession(database.db, userId, longAgo)
+  expect(await read(token)).toBeNull()
+})
+
+test('signing out ends one session, signing out everywhere ends all and kills links on their way', async () => {
+  const { email, userId } = await newMember(database.db)
+  const [first, second, third] = [await open(userId), await open(userId), await open(userId)]
+  await sessionAdapter(database.db).deleteSession?.(first.token)
+  expect([await read(first.token), await read(second.token)]).toMatchObject([null, { user: { id: userId } }])
+  await requestLink(visitor(database.db), { email }, 'sign-in')
+  const other = await newMember(database.db)
+  const othersSession = await open(other.userId)
+  await signOutEverywhere(as(userId))
+  expect([await read(second.token), await read(third.token)]).toEqual([null, null])
+  expect(await read(othersSession.token)).not.toBeNull()
+  const key = await newestKey(database.db, email, 'sign-in')
+  await expect(signInWithLink(visitor(database.db), key)).rejects.toMatchObject({ code: 'invalid_input' })
+})
+
+test('changing the password needs the present one and ends every session', async () => {
+  const { email, userId } = await newMember(database.db)
+  const { token } = await open(userId)
+  const wrong = changePassword(as(userId), { currentPassword: 'a guess', newPassword: 'a newly chosen one' })
+  await expect(wrong).rejects.toMatchObject({ code: 'invalid_input', fields: { currentPassword: expect.any(String) } })
+  expect(await read(token)).not.toBeNull()
+  await changePassword(as(userId), { currentPassword: PASSWORD, newPassword: 'a newly chosen one' })
+  expect(await read(token)).toBeNull()
+  await expect(
+    signInWithPassword(visitor(database.db), { email, password: 'a newly chosen one' }),
+  ).resolves.toBeDefined()
+})
+
+test('guessing the present password is limited', async () => {
+  const { userId } = await newMember(database.db)
+  const guess = () => changePassword(as(userId), { currentPassword: 'a guess', newPassword: 'a newly chosen one' })
+  for (let hit = 0; hit < LIMITS.passwordChangeByUser.hits; hit++) await expect(guess()).rejects.toThrow('Nothing')
+  await expect(guess()).rejects.toMatchObject({ code: 'rate_limited' })
+})
+
+test('somebody who only ever used links sets a first password', async () => {
+  const email = newEmail()
+  await signUp(visitor(database.db), { name: 'Lin', email, password: PASSWORD })
+  await requestLink(visitor(database.db), { email }, 'sign-in')
+  const { userId } = await signInWithLink(visitor(database.db), await newestKey(database.db, email, 'sign-in'))
+  expect(await getAccount(as(userId))).toMatchObject({ hasPassword: false })
+  await changePassword(as(userId), { currentPassword: '', newPassword: 'a first password' })
+  expect(await getAccount(as(userId))).toMatchObject({ hasPassword: true })
+})
+
+test('name, units and clock are kept, one’s own only', async () => {
+  const { email, userId } = await newMember(database.db)
+  const other = await newMember(database.db)
+  await saveAccount(as(userId), { name: 'Anna B.', units: 'imperial', clock: '24' })
+  const expected = { email, name: 'Anna B.', units: 'imperial', clock: '24', hasPassword: true }
+  expect(await getAccount(as(userId))).toEqual(expected)
+  expect(await getAccount(as(other.userId))).toMatchObject({ name: 'Anna', units: 'metric', clock: '12' })
+  await expect(getAccount(as('11111111-1111-4111-8111-111111111111'))).rejects.toMatchObject({ code: 'not_found' })
+})
+
+test('pruning forgets what is over and nothing that still counts', async () => {
+  const { userId } = await newMember(database.db)
+  const unconfirmed = newEmail()
+  await signUp(visitor(database.db), { name: 'Gone', email: unconfirmed, password: PASSWORD })
+  const { token } = await open(userId)
+  const inTwentyDays = new Date(NOW.getTime() + 20 * 24 * 60 * 60 * 1000)
+  await pruneAccounts({ db: database.db, now: inTwentyDays })
+  expect(await read(token)).not.toBeNull()
+  expect(await database.db('users').where({ email: unconfirmed })).toEqual([])
+  expect(await database.db('users').where({ id: userId })).toHaveLength(1)
+  expect(await database.db('rate_limits')).toEqual([])
+  expect(await database.db('account_links')).toEqual([])
+})

@@ -1,0 +1,95 @@
+// Signing in: one refusal for every reason, after the same work.
+import { afterAll, beforeAll, expect, test } from 'vitest'
+import { signInWithPassword, signUp, SIGN_IN_REFUSED } from '@/lib/services/accounts'
+import { LIMITS } from '@/lib/services/rate-limits'
+import { createTestDatabase, type TestDatabase } from '@/tests/support/test-database'
+import { mailsTo, minutesLater, newEmail, newMember, PASSWORD, visitor } from '@/tests/support/visitor'
+
+let database: TestDatabase
+beforeAll(async () => {
+  database = await createTestDatabase()
+})
+afterAll(() => database.drop())
+
+async function refusal(email: string, password: string): Promise<unknown> {
+  return signInWithPassword(visitor(database.db), { email, password }).then(
+    () => 'signed in',
+    (error: Error & { code?: string; fields?: unknown }) => ({
+      name: error.name,
+      message: error.message,
+      code: error.code,
+      fields: error.fields,
+    }),
+  )
+}
+
+test('the right password of a confirmed address signs in', async () => {
+  const { email, userId } = await newMember(database.db)
+  expect(await signInWithPassword(visitor(database.db), { email, password: PASSWORD })).toEqual({
+    userId,
+    hasRink: false,
+  })
+})
+
+test('wrong password, unknown address and unconfirmed address are refused alike', async () => {
+  const { email } = await newMember(database.db)
+  const unconfirmed = newEmail()
+  await signUp(visitor(database.db), { name: 'Uwe', email: unconfirmed, password: PASSWORD })
+  const refusals = [
+    await refusal(email, 'not the password'),
+    await refusal(newEmail(), PASSWORD),
+    await refusal(unconfirmed, 'not the password'),
+    await refusal(unconfirmed, PASSWORD),
+  ]
+  expect(new Set(refusals.map((each) => JSON.stringify(each))).size).toBe(1)
+  expect(refusals[0]).toEqual({
+    name: 'InvalidInputError',
+    message: SIGN_IN_REFUSED,
+    code: 'invalid_input',
+    fields: {},
+  })
+})
+
+test('a refusal of an unknown address takes the time of a password check', async () => {
+  const { email } = await newMember(database.db)
+  const timed = async (address: string) => {
+    const startedAt = performance.now()
+    await refusal(address, 'not the password')
+    return performance.now() - startedAt
+  }
+  await timed(newEmail())
+  const known: number[] = []
+  const unknown: number[] = []
+  for (let round = 0; round < 7; round++) {
+    known.push(await timed(email))
+    unknown.push(await timed(newEmail()))
+  }
+  const median = (values: number[]) => values.sort((a, b) => a - b)[Math.floor(values.length / 2)] ?? NaN
+  // Without the decoy hash the unknown address answers several times sooner.
+  expect(median(unknown)).toBeGreaterThan(median(known) * 0.5)
+})
+
+test('the right password of an unconfirmed address brings a fresh link', async () => {
+  const email = newEmail()
+  await signUp(visitor(database.db), { name: 'Uwe', email, password: PASSWORD })
+  await refusal(email, 'not the password')
+  expect(await mailsTo(database.db, email)).toHaveLength(1)
+  await refusal(email, PASSWORD)
+  expect((await mailsTo(database.db, email)).map(({ kind }) => kind)).toEqual(['verify-address', 'verify-address'])
+})
+
+test('after too many tries on one address even the right password waits', async () => {
+  const { email } = await newMember(database.db)
+  for (let hit = 0; hit < LIMITS.signInByEmail.hits; hit++) await refusal(email, 'a guess')
+  const attempt = signInWithPassword(visitor(database.db), { email, password: PASSWORD })
+  // NOW is on the quarter hour, so the whole window is still ahead.
+  await expect(attempt).rejects.toMatchObject({ code: 'rate_limited', retryAfterSeconds: 900 })
+  const later = signInWithPassword(visitor(database.db, minutesLater(15)), { email, password: PASSWORD })
+  await expect(later).resolves.toMatchObject({ hasRink: false })
+})
+
+test('an unknown address is limited like a known one', async () => {
+  const email = newEmail()
+  for (let hit = 0; hit < LIMITS.signInByEmail.hits; hit++) await refusal(email, 'a guess')
+  expect(await refusal(email, 'a guess')).toMatchObject({ code: 'rate_limited' })
+})

@@ -160,7 +160,7 @@ async function promiseAlert({ trx, now }: Deciding, alert: Alert): Promise<void>
     ...(person.wantsEmail && !person.isEmailRefused ? ['email' as const] : []),
     ...(devices.length > 0 ? ['push' as const] : []),
   ]
-  const content = alertContent({ kind, rink, summary, window, person }, now)
+  const content = alertContent({ rink, summary, person }, now)
   const expiresAt = expiryOf(window, summary)
   if (expiresAt <= now) return
   for (const channel of channels) {

@@ -75,31 +75,44 @@ export function judgeFloodStart(
   const needed = neededMillis(setting, startMillis)
   const setMinutes = knownMinutesToSet(setting, run, index, fraction, cleared)
   const untilMillis = setMinutes === null ? needed : startMillis + setMinutes * MINUTE_MILLIS
-  const start = {
+  const chill = windChillC(hour.airTemperatureC, hour.windSpeedMps)
+  const hose = rampDesirability(hour.airTemperatureC, PERSON.floodHoseC)
+  const skin = rampDesirability(chill, PERSON.windChillC)
+  const start: FloodStart = {
     startMillis,
     hour,
     parts,
     netWm2,
     rateMmPerH,
-    windChillC: windChillC(hour.airTemperatureC, hour.windSpeedMps),
+    windChillC: chill,
     windAtRinkMps: hour.windAtRinkMps,
     gustAtRinkMps: hour.windGustMps * setting.gustFactor,
     sheet: report,
     setMinutes,
     neededMillis: needed,
     wetMm: wetBetween(run, index, untilMillis),
-  }
-  const factors = floodFactors(start, setting)
-  const hose = rampDesirability(hour.airTemperatureC, PERSON.floodHoseC)
-  const skin = rampDesirability(start.windChillC, PERSON.windChillC)
-  return {
-    ...start,
-    factors,
+    factors: NO_FACTORS,
     hose,
     skin,
-    ice: overallDesirability(factors, FLOOD.weights),
+    ice: 0,
     person: Math.min(hose, skin),
   }
+  start.factors = floodFactors(start, setting)
+  start.ice = overallDesirability(start.factors, FLOOD.weights)
+  return start
+}
+
+const NO_FACTORS: FloodFactors = {
+  bears: 0,
+  rate: 0,
+  dry: 0,
+  set: 0,
+  slack: 0,
+  air: 0,
+  wind: 0,
+  gust: 0,
+  lastLayer: 0,
+  snow: 0,
 }
 
 /** Null also when the weather is unknown before the layer is set: no flood is advised into a gap. */
@@ -124,9 +137,7 @@ export function wetBetween(run: ForecastRun, index: number, untilMillis: number)
   return (run.wetBefore[last] as number) - (run.wetBefore[index] as number)
 }
 
-type Measured = Omit<FloodStart, 'factors' | 'hose' | 'skin' | 'ice' | 'person'>
-
-function floodFactors(start: Measured, setting: Setting): FloodFactors {
+function floodFactors(start: FloodStart, setting: Setting): FloodFactors {
   const { setMinutes, sheet } = start
   const isDry = start.wetMm <= FLOOD.precipitationMm
   const slack = setMinutes === null ? 0 : (start.neededMillis - start.startMillis) / MINUTE_MILLIS - setMinutes

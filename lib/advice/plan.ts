@@ -31,7 +31,7 @@ const NOTHING: Chain = { gain: 0, passes: 0, endMillis: Number.NEGATIVE_INFINITY
 
 /**
  * The passes that bring most in all, no pass before the one before it is set. Of plans that bring the same, the one
- * with fewer trips; of those, the one that is done earliest.
+ * with fewer trips; of those, the one that is done earliest; of those, the one whose passes start earliest.
  *
  * @param slots Possible starts in ascending order.
  * @param maxPasses Most passes, 0 or more.
@@ -90,9 +90,10 @@ function firstSlotFrom(slots: readonly PlanSlot[], millis: number): number {
   return low
 }
 
+/** `b` starts no later than `a`, so it wins a full tie. */
 function betterOf(a: Chain, b: Chain): Chain {
   const difference = b.gain - a.gain
   if (Math.abs(difference) > 1e-9) return difference > 0 ? b : a
   if (a.passes !== b.passes) return a.passes < b.passes ? a : b
-  return b.endMillis < a.endMillis ? b : a
+  return b.endMillis <= a.endMillis ? b : a
 }

@@ -61,7 +61,7 @@ export function scoreHour(setting: Setting, run: ForecastRun, index: number, fil
     setsAt: setsAtOf(flood),
     scores: { fill: fillScore, flood: floodScore, hold: 100 - best },
     verdict: best < VERDICT.goodScore ? 'hold' : floodScore >= fillScore ? 'flood' : 'fill',
-    reasons: reasons.map(roundedReason),
+    reasons: roundReasons(reasons),
     sheet,
     limits: { ice: Math.round(100 * limits.ice), person: Math.round(100 * limits.person) },
     weather: weatherOf(hour),
@@ -114,11 +114,16 @@ function roundedSheet(sheet: SheetReport): SheetReport {
   }
 }
 
-function roundedReason({ code, factor, values }: Reason): Reason {
-  const rounded: Reason['values'] = {}
-  for (const [name, value] of Object.entries(values))
-    rounded[name] = typeof value === 'number' ? round(value, 2) : value
-  return { code, factor: round(factor, 3), values: rounded }
+/** Rounds in place: the reasons were made for this hour and nobody else holds them. */
+function roundReasons(reasons: Reason[]): Reason[] {
+  for (const reason of reasons) {
+    reason.factor = round(reason.factor, 3)
+    for (const name in reason.values) {
+      const value = reason.values[name]
+      if (typeof value === 'number') reason.values[name] = round(value, 2)
+    }
+  }
+  return reasons
 }
 
 /** Rounded for reading, and never -0. */

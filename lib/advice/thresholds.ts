@@ -25,13 +25,13 @@ export const FLOOD = {
    * Time to set, as exp(-(minutes - quick) / fade). Rules E01: Brampton rink diary (10-30 min for light coats) and
    * E05: Lynwood Village (3 h for two); the fade is ours. [min]
    */
-  set: { quickMinutes: 60, fadeMinutes: 300 },
+  set: { quickMinutes: 30, fadeMinutes: 300 },
   /** Longer than this is no flood. Rule E04: AQLM and Ville de Montréal (a deep flood freezes through within 24 h). [min] */
   longestSetMinutes: 24 * 60,
   /** Minutes between set and needed. Ours. */
   slackMinutes: { one: 120, zero: 0 } satisfies Ramp,
-  /** Wet surface at 0 °C. 1.5 mm/h sets the common 3 mm coat (rule D03: Truro News) in two hours; ours. [mm/h] */
-  freezeRateMmPerH: { one: 1.5, zero: 0 } satisfies Ramp,
+  /** Wet surface at 0 °C. 2.5 mm/h sets the common 3 mm coat (rule D03: Truro News) in little over an hour; ours. [mm/h] */
+  freezeRateMmPerH: { one: 2.5, zero: 0 } satisfies Ramp,
   /** Above this a thin coat freezes in an evening, whatever the thermometer says. Ours. [mm/h] */
   freezesWellMmPerH: 0.4,
   /** Rain or snow from pour to set. Rule I05: Les Versants (no watering in snowfall, however light); a tenth is a trace. [mm] */
@@ -117,6 +117,8 @@ export const AGREEMENT = {
 export const PLAN = {
   /** Passes start on the quarter hour. Ours. */
   stepMinutes: 15,
+  /** Scores are compared in steps of this size; within a step the earlier plan is preferred. Ours. */
+  scoreStep: 10,
   /** What a trip costs, as a share of a layer: a pass must be worth more than this to be planned. Ours. */
   tripCostShare: 0.25,
 }

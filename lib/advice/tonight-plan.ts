@@ -1,5 +1,6 @@
 // The plan for tonight: quarter hours as slots, each with a first pass and a pass on a sheet that has just been flooded.
 import { advanceSheet, clearSnow, pourLayer, type SheetState } from '@/lib/physics/sheet'
+import { minutesToSet } from '@/lib/physics/layer'
 import type { PreparedHour } from '@/lib/physics/types'
 import { judgeFloodStart } from './flood-factors'
 import type { ForecastRun } from './forecast-run'
@@ -29,7 +30,7 @@ export function planTonight(setting: Setting, run: ForecastRun, scored: readonly
   }
   const maxPasses = input.maxPasses - poured.length
   if (maxPasses <= 0 || hours.length === 0) return []
-  const spent = maxPasses > 1 ? spentSheets(setting, run, scored, hours) : new Map<number, SheetState>()
+  const spent = maxPasses > 1 ? spentSheets(setting, run, hours) : new Map<number, SheetState>()
   const slots = hours.flatMap((index) => slotsOfHour(setting, run, index, fromMillis, spent.get(index)))
   return planPasses(slots, maxPasses).map(({ startMillis, setMillis }) => {
     const waterL = input.water.layerMm * input.rink.lengthM * input.rink.widthM
@@ -72,30 +73,32 @@ function outcomeOf(
   const start = judgeFloodStart(setting, run, index, fraction, sheet)
   if (!isGood(start) || start.setMinutes === null) return null
   const setMillis = Math.ceil(start.startMillis / MINUTE_MILLIS + start.setMinutes) * MINUTE_MILLIS
-  return { setMillis, gain: setting.layer.layerMm * (scoreOf(start) / 100 - PLAN.tripCostShare) }
+  return { setMillis, gain: setting.layer.layerMm * (coarse(scoreOf(start)) / 100 - PLAN.tripCostShare) }
+}
+
+/** A few points more are within the forecast's error; then the earlier start is better for the person. */
+function coarse(score: number): number {
+  return Math.round(score / PLAN.scoreStep) * PLAN.scoreStep
 }
 
 /**
  * For each hour, the sheet as it is when passes have followed each other as fast as they set: the warmest it can be at
  * that hour, so that a later pass is never promised too soon.
  */
-function spentSheets(
-  setting: Setting,
-  run: ForecastRun,
-  scored: readonly ScoredHour[],
-  hours: readonly number[],
-): Map<number, SheetState> {
+function spentSheets(setting: Setting, run: ForecastRun, hours: readonly number[]): Map<number, SheetState> {
   const spent = new Map<number, SheetState>()
+  const setMillis = new Map<number, number>()
   for (const index of hours) {
-    const startMillis = (run.hours[index] as PreparedHour).startsAtMillis
-    const before = hours.findLast((one) => {
-      const setsAt = scored[one]?.setsAt
-      return one < index && setsAt != null && Date.parse(setsAt) <= startMillis
-    })
-    if (before === undefined) continue
-    let sheet = pourLayer(clearSnow(spent.get(before) ?? (run.sheets[before] as SheetState)), setting.layer)
-    for (let hour = before; hour < index; hour += 1) sheet = advanceSheet(sheet, run.hours[hour] as PreparedHour)
-    spent.set(index, sheet)
+    const { startsAtMillis } = run.hours[index] as PreparedHour
+    const before = hours.findLast((one) => one < index && (setMillis.get(one) ?? Infinity) <= startsAtMillis)
+    const sheetBefore = (one: number) => clearSnow(spent.get(one) ?? (run.sheets[one] as SheetState))
+    if (before !== undefined) {
+      let sheet = pourLayer(sheetBefore(before), setting.layer)
+      for (let hour = before; hour < index; hour += 1) sheet = advanceSheet(sheet, run.hours[hour] as PreparedHour)
+      spent.set(index, sheet)
+    }
+    const minutes = minutesToSet(sheetBefore(index), run.hours, index, 0, setting.layer)
+    if (minutes !== null) setMillis.set(index, startsAtMillis + minutes * MINUTE_MILLIS)
   }
   return spent
 }

@@ -87,5 +87,5 @@ export function addDays(date: string, days: number): string {
 
 /** ISO 8601 in UTC without milliseconds, as in the records of the forecast. */
 export function toIso(atMillis: number): string {
-  return new Date(atMillis).toISOString().replace('.000Z', 'Z')
+  return new Date(atMillis).toISOString().slice(0, 19) + 'Z'
 }

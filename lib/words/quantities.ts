@@ -1,0 +1,95 @@
+// Quantities in words: a number, rounded as people read it, with its unit.
+import { celsiusToFahrenheit, litresToGallons, mmToInches, mpsToKmh, mpsToMph } from '@/lib/units'
+import type { WordOptions } from './options'
+
+/** A real minus sign, and no "−0". */
+export function numberText(value: number, digits: number, { locale }: Pick<WordOptions, 'locale'>): string {
+  const rounded = Number(value.toFixed(digits)) + 0
+  const format = {
+    minimumFractionDigits: digits,
+    maximumFractionDigits: digits,
+    useGrouping: Math.abs(rounded) >= 10_000,
+  }
+  return rounded.toLocaleString(locale, format).replace('-', '−')
+}
+
+export function temperatureText(temperatureC: number, words: WordOptions): string {
+  return words.units === 'imperial'
+    ? `${numberText(celsiusToFahrenheit(temperatureC), 0, words)} °F`
+    : `${numberText(temperatureC, 0, words)} °C`
+}
+
+/** Warm temperatures with their plus sign, where the sign is the point. */
+export function signedTemperatureText(temperatureC: number, words: WordOptions): string {
+  const isAbove = words.units === 'metric' && Math.round(temperatureC) > 0
+  return (isAbove ? '+' : '') + temperatureText(temperatureC, words)
+}
+
+/** Wind chill is an index: a number without a unit in Canada, degrees Fahrenheit in the United States. */
+export function windChillText(windChillC: number, words: WordOptions): string {
+  return words.units === 'imperial' ? temperatureText(windChillC, words) : numberText(windChillC, 0, words)
+}
+
+export function windText(mps: number, words: WordOptions): string {
+  return words.units === 'imperial'
+    ? `${numberText(mpsToMph(mps), 0, words)} mph`
+    : `${numberText(mpsToKmh(mps), 0, words)} km/h`
+}
+
+/** Films and layers: millimetres, or hundredths of an inch. */
+export function layerText(mm: number, words: WordOptions): string {
+  if (words.units === 'imperial') return `${numberText(mmToInches(mm), 2, words)} in`
+  return `${numberText(mm, mm < 10 && !Number.isInteger(Math.round(mm * 10) / 10) ? 1 : 0, words)} mm`
+}
+
+/** Ice: centimetres, or inches. */
+export function iceText(mm: number, words: WordOptions): string {
+  return words.units === 'imperial'
+    ? `${numberText(mmToInches(mm), 1, words)} in`
+    : `${numberText(mm / 10, 1, words)} cm`
+}
+
+export function snowText(cm: number, words: WordOptions): string {
+  if (words.units === 'imperial') return `${numberText(mmToInches(cm * 10), 1, words)} in`
+  return `${numberText(cm, cm < 10 ? 1 : 0, words)} cm`
+}
+
+export function rainText(mm: number, words: WordOptions): string {
+  return words.units === 'imperial' ? `${numberText(mmToInches(mm), 2, words)} in` : `${numberText(mm, 1, words)} mm`
+}
+
+export function rateText(mmPerH: number, words: WordOptions): string {
+  return words.units === 'imperial'
+    ? `${numberText(mmToInches(mmPerH), 2, words)} in an hour`
+    : `${numberText(mmPerH, 1, words)} mm an hour`
+}
+
+export function fluxText(wm2: number, words: WordOptions): string {
+  return `${numberText(wm2, 0, words)} W/m²`
+}
+
+export function waterText(litres: number, words: WordOptions): string {
+  return words.units === 'imperial'
+    ? `${numberText(litresToGallons(litres), 0, words)} gal`
+    : `${numberText(litres, 0, words)} L`
+}
+
+/** "40 min", "1 h 50 min", "3 h". */
+export function durationText(minutes: number): string {
+  const whole = Math.max(0, Math.round(minutes))
+  const hours = Math.floor(whole / 60)
+  const rest = whole % 60
+  if (hours === 0) return `${rest} min`
+  return rest === 0 ? `${hours} h` : `${hours} h ${rest} min`
+}
+
+const NUMBER_WORDS = ['no', 'one', 'two', 'three', 'four', 'five', 'six', 'seven', 'eight', 'nine', 'ten']
+
+/** Small counts as words, larger ones in figures. */
+export function countText(count: number): string {
+  return NUMBER_WORDS[count] ?? String(count)
+}
+
+export function capitalised(text: string): string {
+  return text.charAt(0).toUpperCase() + text.slice(1)
+}

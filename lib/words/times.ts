@@ -1,0 +1,61 @@
+// Times in words, always by the rink's clock.
+import { formatInTimeZone } from 'date-fns-tz'
+import { localMinuteOf, nightDateOf, tonightDate } from '@/lib/advice/night'
+import { addDays, localDateOf } from '@/lib/advice/zoned-time'
+import type { WordOptions } from './options'
+
+const MINUTE = 60_000
+
+/** "8 pm", "1:50 am", "midnight"; on a 24-hour clock "20:00". */
+export function clockText(at: string | Date, words: WordOptions): string {
+  const date = new Date(Math.round(new Date(at).getTime() / MINUTE) * MINUTE)
+  if (words.clock === '24') return formatInTimeZone(date, words.timeZone, 'HH:mm')
+  const minute = localMinuteOf(date.getTime(), words.timeZone)
+  if (minute === 0) return 'midnight'
+  if (minute === 720) return 'noon'
+  return formatInTimeZone(date, words.timeZone, minute % 60 === 0 ? 'h aaa' : 'h:mm aaa')
+}
+
+/** A moment by which something is done, to the next five minutes, so that the promise holds. */
+export function doneByText(at: string, words: WordOptions): string {
+  return clockText(new Date(Math.ceil(Date.parse(at) / (5 * MINUTE)) * 5 * MINUTE), words)
+}
+
+/** Name of the weekday of an instant, by the rink's clock. */
+export function weekdayText(at: string | Date, words: WordOptions): string {
+  return new Intl.DateTimeFormat(words.locale, { weekday: 'long', timeZone: words.timeZone }).format(new Date(at))
+}
+
+const PARTS: [fromMinute: number, name: string][] = [
+  [18 * 60, 'evening'],
+  [12 * 60, 'afternoon'],
+  [5 * 60, 'morning'],
+]
+
+/** "Thursday evening", "tomorrow morning", "this evening", "Wednesday night" for the small hours. */
+export function dayPartText(at: string, now: Date, words: WordOptions): string {
+  const instant = Date.parse(at)
+  const part = PARTS.find(([from]) => localMinuteOf(instant, words.timeZone) >= from)?.[1]
+  const nightDate = nightDateOf(new Date(instant), words.timeZone)
+  if (!part || localMinuteOf(instant, words.timeZone) >= 21 * 60) return nightText(nightDate, now, words)
+  const date = localDateOf(instant, words.timeZone)
+  const today = localDateOf(now.getTime(), words.timeZone)
+  if (date === today) return `this ${part}`
+  if (date === addDays(today, 1)) return `tomorrow ${part}`
+  return `${weekdayText(at, words)} ${part}`
+}
+
+/** "tonight", "tomorrow night", "Thursday night". */
+export function nightText(nightDate: string, now: Date, words: WordOptions): string {
+  const tonight = tonightDate(now, words.timeZone)
+  if (nightDate === tonight) return 'tonight'
+  if (nightDate === addDays(tonight, 1)) return 'tomorrow night'
+  const weekday = new Intl.DateTimeFormat(words.locale, { weekday: 'long', timeZone: 'UTC' })
+  return `${weekday.format(Date.parse(`${nightDate}T00:00:00Z`))} night`
+}
+
+/** "between 8 pm and 1 am"; "until 1 am" once it has begun. */
+export function spanText(startsAt: string, endsAt: string, now: Date, words: WordOptions): string {
+  if (Date.parse(startsAt) <= now.getTime()) return `until ${clockText(endsAt, words)}`
+  return `between ${clockText(startsAt, words)} and ${clockText(endsAt, words)}`
+}

@@ -83,10 +83,15 @@ export async function startCluster({ folder: wanted, preferredPort, logFile, set
   return { folder, pid, port, password, urlOf }
 }
 
+/** Whether the server that `startCluster` gave still runs. */
+export function isRunning({ folder, pid }) {
+  return findPostmaster(folder)?.pid === pid
+}
+
 /** Stops a cluster that `startCluster` gave, without waiting for its clients to leave. */
 export async function stopCluster({ folder, pid }) {
   for (const signal of ['SIGINT', 'SIGQUIT']) {
-    if (findPostmaster(folder)?.pid === pid) process.kill(pid, signal)
+    if (isRunning({ folder, pid })) process.kill(pid, signal)
     for (const end = Date.now() + STOP_SECONDS * 1000; Date.now() < end && isAlive(pid);) await wait(30)
   }
 }

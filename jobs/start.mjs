@@ -4,7 +4,8 @@ import path from 'node:path'
 
 import { makeDataFolder } from '../db/cluster-place.mjs'
 import { ensurePostgresInstalled } from '../db/postgres-programs.mjs'
-import { ensureDatabase, startCluster, stopCluster } from '../db/server.mjs'
+import { ensureDatabase, isRunning, startCluster, stopCluster } from '../db/server.mjs'
+import { Problem } from '../lib/machine/problem.mjs'
 
 import { ensureBuild } from './local/build.mjs'
 import { ensureDependencies } from './local/dependencies.mjs'
@@ -16,6 +17,7 @@ import { planStart } from './local/settings.mjs'
 import { welcome } from './local/welcome.mjs'
 
 const POSTGRES_PORT = 54329
+const WATCH_MILLIS = 1000
 const DIST_FOLDER = '.next'
 const dev = process.argv.includes('--dev')
 const startedAt = Date.now()
@@ -26,18 +28,23 @@ function readEnvFile() {
   if (fs.existsSync(file)) process.loadEnvFile(file)
 }
 
+/** The server may be an earlier start's, so its end is not told to us. */
+function watch(session, cluster, logFile) {
+  const fail = () => session.fail(new Problem('The PostgreSQL server ended unexpectedly.', { logFile }))
+  setInterval(() => isRunning(cluster) || fail(), WATCH_MILLIS).unref()
+}
+
 /** The private cluster with our database in it; returns the address. */
 async function startOwnDatabase(session) {
   await session.step('PostgreSQL programs', async (note) => {
     note((await ensurePostgresInstalled(logFolder)) ? 'installed' : 'already there')
   })
   return session.step('PostgreSQL server', async (note) => {
-    const cluster = await startCluster({
-      folder: path.join(dataFolder, 'postgres'),
-      preferredPort: POSTGRES_PORT,
-      logFile: path.join(logFolder, 'postgres.log'),
-    })
+    const logFile = path.join(logFolder, 'postgres.log')
+    const folder = path.join(dataFolder, 'postgres')
+    const cluster = await startCluster({ folder, preferredPort: POSTGRES_PORT, logFile })
     session.defer(() => stopCluster(cluster))
+    watch(session, cluster, logFile)
     note(`port ${cluster.port}`)
     return ensureDatabase(cluster, 'nightsheet')
   })

@@ -2,6 +2,7 @@
 import { spawn } from 'node:child_process'
 import fs from 'node:fs'
 import path from 'node:path'
+import { stripVTControlCharacters } from 'node:util'
 
 import { Problem } from './problem.mjs'
 
@@ -38,7 +39,7 @@ export function describeProcess(pid) {
 /** The last lines of a log, for showing why a child died. */
 export function tail(logFile, lines = 20) {
   try {
-    return fs.readFileSync(logFile, 'utf8').trimEnd().split('\n').slice(-lines).join('\n')
+    return stripVTControlCharacters(fs.readFileSync(logFile, 'utf8')).trimEnd().split('\n').slice(-lines).join('\n')
   } catch {
     return ''
   }

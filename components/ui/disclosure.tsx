@@ -5,13 +5,16 @@ export function Disclosure({
   summary,
   children,
   className = '',
+  open,
 }: {
   summary: string
   children: ReactNode
   className?: string
+  /** Open from the start, or opened again because something in it needs a look. */
+  open?: boolean
 }) {
   return (
-    <details className={className}>
+    <details className={className} open={open}>
       <summary className="inline-flex min-h-touch cursor-pointer items-center underline print:hidden">
         {summary}
       </summary>

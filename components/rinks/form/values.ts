@@ -50,7 +50,7 @@ function nearestSky(skyView: number): SkyChoice {
 }
 
 /** The ice is left open: it is told when somebody has measured it. */
-export function rinkValues(rink: RinkInput & { id: string }, units: UnitSystem): FormValues {
+export function rinkValues(rink: Omit<RinkInput, 'iceThicknessMm'> & { id: string }, units: UnitSystem): FormValues {
   const { water, available } = rink
   const [hours, more] = available
   return {

@@ -18,6 +18,7 @@ export function WaterFields({ form }: { form: RinkForm }) {
   const usual = WATER_DEFAULTS[kind]
   const usualFlow = `${typed('flow', form.units, usual.flowLPerMin)} ${unitOf('flow', form.units)}`
   const usualWarmth = `${typed('waterTemperature', form.units, usual.temperatureC)} ${unitOf('waterTemperature', form.units)}`
+  const isFaulty = Boolean(form.error('bucketSize') ?? form.error('bucketSeconds'))
   return (
     <>
       <SelectField label="Where does the water come from?" {...form.text('waterKind')}>
@@ -33,7 +34,7 @@ export function WaterFields({ form }: { form: RinkForm }) {
         hint={`If you leave it empty, we reckon with ${usualFlow}.`}
         {...form.text('flow')}
       />
-      <Disclosure summary="Measure the flow with a bucket" className="mb-5">
+      <Disclosure summary="Measure the flow with a bucket" className="mb-5" open={isFaulty}>
         <BucketTest form={form} />
       </Disclosure>
       <TextField

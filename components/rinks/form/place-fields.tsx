@@ -1,0 +1,102 @@
+// Where the rink is: found by name or position, or typed as coordinates; the zone of its clock follows.
+'use client'
+import { useState } from 'react'
+import { Disclosure } from '@/components/ui/disclosure'
+import { TextField } from '@/components/ui/field'
+import { useHydrated } from '@/components/hooks/use-hydrated'
+import { lookUpPosition, PlaceSearch, type ChosenPlace } from './place-search'
+import type { RinkForm } from './use-rink-form'
+
+export function PlaceFields({ form }: { form: RinkForm }) {
+  const isHydrated = useHydrated()
+  const { latitude, longitude } = form.values
+  const choose = (place: ChosenPlace) => form.set({ ...place })
+  const isMissing = !latitude || !longitude
+  const fault = form.error('latitude') ?? form.error('longitude')
+  const isFaulty = Boolean(fault ?? form.error('placeName') ?? form.error('timeZone'))
+  return (
+    <>
+      {isHydrated ? <PlaceSearch onChoose={choose} error={isMissing ? fault : undefined} /> : null}
+      {isHydrated && !isMissing ? <ChosenLine form={form} /> : null}
+      <noscript>
+        <p className="mb-3">Search needs script. Open the coordinates below and type where the rink is.</p>
+      </noscript>
+      <Disclosure summary="Coordinates and time zone" className="mb-5" open={isFaulty && !(isHydrated && isMissing)}>
+        <Coordinates form={form} />
+      </Disclosure>
+    </>
+  )
+}
+
+function ChosenLine({ form }: { form: RinkForm }) {
+  const { placeName, latitude, longitude, timeZone } = form.values
+  return (
+    <p role="status" className="mb-3 border-l-[3px] border-hose pl-3.5">
+      <span className="font-medium">{placeName || 'This position'}</span>
+      <span className="block text-note text-graphite">
+        {latitude}°, {longitude}°{timeZone ? `; clock of ${timeZone}` : ''}
+      </span>
+    </p>
+  )
+}
+
+/** Typing another position by hand moves name and zone along; both may then be changed. */
+function Coordinates({ form }: { form: RinkForm }) {
+  const { latitude = '', longitude = '' } = form.values
+  const [lookedUp, setLookedUp] = useState(`${latitude} ${longitude}`)
+  const follow = async () => {
+    const position = `${latitude} ${longitude}`
+    if (!latitude || !longitude || position === lookedUp) return
+    setLookedUp(position)
+    const place = await lookUpPosition(latitude, longitude)
+    if (place) form.set({ placeName: place.placeName, timeZone: place.timeZone })
+  }
+  return (
+    <>
+      <div className="grid grid-cols-2 gap-4">
+        <TextField
+          label="Latitude"
+          hint="North is positive."
+          {...form.text('latitude')}
+          onBlur={follow}
+          autoComplete="off"
+        />
+        <TextField
+          label="Longitude"
+          hint="West is negative."
+          {...form.text('longitude')}
+          onBlur={follow}
+          autoComplete="off"
+        />
+      </div>
+      <TextField
+        label="Name of the place"
+        hint="If empty, we take the nearest town."
+        maxLength={120}
+        {...form.text('placeName')}
+      />
+      <TextField
+        label="Time zone"
+        hint="If empty, it follows from the place."
+        list="time-zones"
+        autoComplete="off"
+        spellCheck={false}
+        {...form.text('timeZone')}
+      />
+      <TimeZones />
+    </>
+  )
+}
+
+/** Drawn by the browser from its own list: 18 kB that need not travel. */
+function TimeZones() {
+  const isHydrated = useHydrated()
+  if (!isHydrated) return null
+  return (
+    <datalist id="time-zones">
+      {Intl.supportedValuesOf('timeZone').map((zone) => (
+        <option key={zone} value={zone} />
+      ))}
+    </datalist>
+  )
+}

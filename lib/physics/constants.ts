@@ -4,8 +4,8 @@
 export const STEFAN_BOLTZMANN = 5.670374e-8
 /** 0 °C in kelvin. [K] */
 export const ZERO_CELSIUS_K = 273.15
-/** Enthalpy of fusion at 0 °C. [J/kg] IAPWS R10-06 with IAPWS-95: 333.43e3; CRC Handbook prints 333.6e3, Ashton 334e3. */
-export const FUSION_J_PER_KG = 333_400
+/** Enthalpy of fusion at 0 °C. [J/kg] CRC Handbook; IAPWS R10-06 with IAPWS-95 gives 333.43e3, Ashton takes 334e3. */
+export const FUSION_J_PER_KG = 333_600
 /** Enthalpy of vaporisation at 0 °C. [J/kg] FAO-56 and meteorological practice. */
 export const VAPORISATION_J_PER_KG = 2.501e6
 /** Enthalpy of sublimation at 0 °C: vaporisation plus fusion. [J/kg] CRC Handbook prints 2.838e6. */

@@ -2,6 +2,9 @@
 import { WATER_DENSITY, WATER_HEAT_CAPACITY } from './constants'
 import { inRange } from './check'
 
+/** Hazen-Williams factor for m and m³/s, from the US form below. */
+const HEAD_FACTOR = 10.9617
+
 /**
  * Flow by the bucket test.
  *
@@ -25,10 +28,10 @@ export function bucketFlowLPerMin(litres: number, seconds: number): number {
  * @param smoothness Hazen-Williams coefficient. [-], 140-150 for plastic and rubber
  * @returns Head. [m of water]
  *
- * Source: Hazen-Williams, 10.67 L Q^1.852 / (C^1.852 d^4.8704).
+ * Source: Hazen-Williams as printed in US units, 0.2083 (100/C)^1.852 q^1.852 / d^4.8655 ft per 100 ft, converted.
  */
 export function frictionHeadM(flowM3PerS: number, diameterM: number, lengthM: number, smoothness = 140): number {
-  return (10.67 * lengthM * Math.pow(flowM3PerS / smoothness, 1.852)) / Math.pow(diameterM, 4.8704)
+  return (HEAD_FACTOR * lengthM * Math.pow(flowM3PerS / smoothness, 1.852)) / Math.pow(diameterM, 4.8655)
 }
 
 /**
@@ -44,7 +47,7 @@ export function frictionHeadM(flowM3PerS: number, diameterM: number, lengthM: nu
  */
 export function openHoseFlowLPerMin(pressurePa: number, diameterM: number, lengthM: number, smoothness = 140): number {
   const headM = pressurePa / (WATER_DENSITY * 9.80665)
-  const flow = smoothness * Math.pow((headM * Math.pow(diameterM, 4.8704)) / (10.67 * lengthM), 1 / 1.852)
+  const flow = smoothness * Math.pow((headM * Math.pow(diameterM, 4.8655)) / (HEAD_FACTOR * lengthM), 1 / 1.852)
   return flow * 60_000
 }
 

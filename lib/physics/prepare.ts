@@ -41,7 +41,7 @@ export function prepareHours(records: readonly HourlyRecord[], site: Site): Prep
 function knownHour(record: HourlyRecord, startsAtMillis: number, site: Site): PreparedHour {
   const airTemperatureC = inRange('airTemperatureC [°C]', record.airTemperatureC!, -60, 50)
   const dewPoint = inRange('dewPointC [°C]', Math.min(record.dewPointC!, airTemperatureC), -80, 50)
-  const vapourPressureHpa = saturationOverWaterHpa(Math.max(-60, dewPoint))
+  const vapourPressureHpa = saturationOverWaterHpa(dewPoint)
   const windSpeedMps = inRange('windSpeedMps [m/s]', record.windSpeedMps!, 0, 75)
   const precipitationMm = inRange('precipitationMm [mm]', record.precipitationMm!, 0, 200)
   const clearEmissivity = clearSkyEmissivity(airTemperatureC, vapourPressureHpa)

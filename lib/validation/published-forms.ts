@@ -65,3 +65,21 @@ export function iapwsSaturationPa(kelvin: number): number {
     1.80122502 * tau ** 7.5
   return 22.064e6 * Math.exp((647.096 / kelvin) * sum)
 }
+
+/** Wind chill of the US National Weather Service, 2001. [°F] Air in °F, wind in mph. The model uses the same index in SI. */
+export function usWindChillF(airF: number, windMph: number): number {
+  const power = Math.pow(windMph, 0.16)
+  return 35.74 + 0.6215 * airF - 35.75 * power + 0.4275 * airF * power
+}
+
+/** Sunshine of a day above the atmosphere, FAO-56 eq. 21. [MJ m⁻² d⁻¹] Latitude in degrees, day of the year. */
+export function extraterrestrialMj(latitudeDeg: number, dayOfYear: number): number {
+  const latitude = (latitudeDeg * Math.PI) / 180
+  const declination = 0.409 * Math.sin((2 * Math.PI * dayOfYear) / 365 - 1.39)
+  const distance = 1 + 0.033 * Math.cos((2 * Math.PI * dayOfYear) / 365)
+  const sunset = Math.acos(Math.min(1, Math.max(-1, -Math.tan(latitude) * Math.tan(declination))))
+  const sines = sunset * Math.sin(latitude) * Math.sin(declination)
+  return (
+    ((24 * 60) / Math.PI) * 0.082 * distance * (sines + Math.cos(latitude) * Math.cos(declination) * Math.sin(sunset))
+  )
+}

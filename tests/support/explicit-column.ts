@@ -2,7 +2,7 @@
 import { surfaceBalance } from '@/lib/physics/balance'
 import type { PreparedHour } from '@/lib/physics/types'
 
-const FUSION = 333_400
+const FUSION = 333_600
 const ICE = { density: 916.721, heat: 2096.71, conductivity: 2.24 }
 const WATER = { density: 1000, heat: 4200, conductivity: 0.56 }
 /** Half a cell's thickness over its conductivity, per mass. [m² K/W per kg/m²] */

@@ -58,8 +58,9 @@ async function setUp(session) {
   return { ...plan, env: { ...plan.settings, ...plan.fakeEnvironment, ...mode, ...ownDatabase } }
 }
 
-async function runParts(session, { env, isDemo, wantsDemoData, host, ports }) {
-  await session.step('Migrations', () => runScript('Migrating', 'db/migrate.ts', 'migrate', env))
+async function runParts(session, { env, isDemo, hasOwnDatabase, wantsDemoData, host, ports }) {
+  const database = hasOwnDatabase ? 'the database' : 'the database of DATABASE_URL'
+  await session.step('Migrations', () => runScript(`Migrating ${database}`, 'db/migrate.ts', 'migrate', env))
   if (isDemo) await session.step('Fakes of weather, mail and push', () => startFakes(session, 'fakes', env))
   if (wantsDemoData) await session.step('Demo data', () => runScript('Seeding', 'db/seed.ts', 'seed', env))
   if (!dev) await session.step('Production build', (note) => ensureBuild({ distFolder: DIST_FOLDER, env }, note))

@@ -106,7 +106,10 @@ export async function insertScoredHours(trx: Db, outlookId: string, hours: reado
 export async function findNewestOutlook(db: Db, access: RinkAccess): Promise<StoredOutlook | undefined> {
   return db('outlooks')
     .where({ rink_id: access.rinkId })
-    .orderBy('judged_at', 'desc')
+    .orderBy([
+      { column: 'judged_at', order: 'desc' },
+      { column: 'settings_version', order: 'desc' },
+    ])
     .first<StoredOutlook | undefined>(COLUMNS)
 }
 

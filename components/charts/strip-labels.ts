@@ -35,7 +35,11 @@ export interface WetRun {
 }
 
 /** Runs of hours with snow or rain between two instants; one dry hour does not break a run. */
-export function wetRuns(hours: StripHour[], startsAt: number, endsAt: number): WetRun[] {
+export function wetRuns(
+  hours: Pick<StripHour, 'startsAt' | 'snowCm' | 'rainMm'>[],
+  startsAt: number,
+  endsAt: number,
+): WetRun[] {
   const runs: WetRun[] = []
   for (const hour of hours) {
     const isWet = hour.snowCm >= 0.05 || hour.rainMm >= 0.05

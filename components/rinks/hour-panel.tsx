@@ -1,13 +1,27 @@
 // One hour opened: rate, set time if poured then, every part of the heat balance, and why.
 'use client'
+import type { Reason } from '@/lib/advice/types'
+import type { HeatBalanceParts } from '@/lib/physics/types'
 import type { TonightHour } from '@/lib/schemas/tonight-view'
 import { Button } from '../ui/button'
-import { clockTime, heatText, rateText, temperatureText, type Reader } from './quantities'
-import { VERDICT_WORDS } from './strip-words'
+import { Facts } from '../ui/facts'
+import type { WordOptions } from '@/lib/words/options'
+import { fluxText, rateText, temperatureText, windChillText } from '@/lib/words/quantities'
+import { reasonText } from '@/lib/words/reasons'
+import { clockText } from '@/lib/words/times'
+import { VERDICT_WORDS } from './verdict-words'
+
+const PARTS = [
+  ['longwave', 'Lost to the sky'],
+  ['sensible', 'to the air'],
+  ['latent', 'by evaporation'],
+  ['shortwave', 'from the sun'],
+  ['precipitation', 'to snow and rain'],
+] as const
 
 interface HourPanelProps {
   hour: TonightHour | undefined
-  reader: Reader
+  reader: WordOptions
   onStep: (step: number) => void
   onClose: () => void
 }
@@ -22,7 +36,7 @@ export function HourPanel({ hour, reader, onStep, onClose }: HourPanelProps) {
         <div className="border-t border-rule px-5 pt-3 pb-4 text-note">
           <div className="flex flex-wrap items-center gap-x-3">
             <h2 className="mr-auto text-lead font-semibold">
-              {clockTime(hour.time, reader)}, {VERDICT_WORDS[hour.verdict]}
+              {clockText(hour.time, reader)}, {VERDICT_WORDS[hour.verdict]}
             </h2>
             <Button look="quiet" onClick={() => onStep(-1)}>
               Earlier
@@ -41,45 +55,57 @@ export function HourPanel({ hour, reader, onStep, onClose }: HourPanelProps) {
   )
 }
 
-function KnownHour({ hour, reader }: { hour: TonightHour; reader: Reader }) {
-  const { parts } = hour
+function KnownHour({ hour, reader }: { hour: TonightHour; reader: WordOptions }) {
   return (
-    <div className="grid gap-x-14 gap-y-3 lg:grid-cols-2">
-      <dl>
-        <Row name="Freezes" figure={rateText(hour.freezeRateMmPerH ?? 0, reader)} />
-        <Row
-          name="Poured then, set by"
-          figure={hour.setsAt ? clockTime(hour.setsAt, reader) : 'not within the forecast'}
-        />
-        {hour.windChillC === null ? null : <Row name="Feels like" figure={temperatureText(hour.windChillC, reader)} />}
-      </dl>
-      {parts ? (
-        <dl>
-          <Row name="Heat lost to the sky" figure={heatText(parts.longwave)} />
-          <Row name="to cold air and wind" figure={heatText(parts.sensible)} />
-          <Row name="by evaporation" figure={heatText(parts.latent)} />
-          <Row name="gained from the sun" figure={heatText(parts.shortwave)} />
-          <Row name="through rain and snow" figure={heatText(parts.precipitation)} />
-          <Row name="In all, lost" figure={heatText(hour.netHeatLossWm2 ?? 0)} isSum />
-        </dl>
-      ) : null}
+    <div className="grid gap-x-14 gap-y-3 lg:grid-cols-[1fr_1fr_1.2fr]">
+      <Facts
+        rows={[
+          { name: 'Freezes', figure: rateText(hour.freezeRateMmPerH ?? 0, reader) },
+          {
+            name: 'Poured then, set by',
+            figure: hour.setsAt ? clockText(hour.setsAt, reader) : 'not within the forecast',
+          },
+          ...(hour.weather?.airTemperatureC != null
+            ? [{ name: 'Air', figure: temperatureText(hour.weather.airTemperatureC, reader) }]
+            : []),
+          ...(hour.windChillC === null ? [] : [{ name: 'Feels like', figure: windChillText(hour.windChillC, reader) }]),
+        ]}
+      />
+      {hour.parts ? <HeatBalance parts={hour.parts} net={hour.netHeatLossWm2 ?? 0} reader={reader} /> : null}
+      <ul className="list-none p-0">
+        {tellingReasons(hour).map((reason) => (
+          <li key={reason.code} className="border-b border-rule py-[9px]">
+            {reasonText(reason, reader)}
+          </li>
+        ))}
+      </ul>
     </div>
   )
 }
 
-function Row({ name, figure, isSum }: { name: string; figure: string; isSum?: boolean }) {
+/** Gains count against the loss, so the sun stands with a minus and the column adds up to its sum. */
+function HeatBalance({ parts, net, reader }: { parts: HeatBalanceParts; net: number; reader: WordOptions }) {
+  const figures = { ...parts, shortwave: -parts.shortwave }
   return (
-    <div className={`grid grid-cols-[1fr_auto] gap-3 py-0.5 ${isSum ? 'border-t border-graphite font-medium' : ''}`}>
-      <dt>{name}</dt>
-      <dd>{figure}</dd>
-    </div>
+    <Facts
+      rows={[
+        ...PARTS.map(([part, name]) => ({ name, figure: fluxText(figures[part], reader) })),
+        { name: 'In all', figure: fluxText(net, reader), isSum: true },
+      ]}
+    />
   )
 }
 
-function spokenHour(hour: TonightHour, reader: Reader): string {
-  if (!hour.isKnown) return `${clockTime(hour.time, reader)}: no forecast.`
+/** What holds the hour back; in an hour that nothing holds back, what leads. */
+function tellingReasons({ reasons }: TonightHour): Reason[] {
+  const against = reasons.filter((reason) => reason.factor < 1)
+  return (against.length > 0 ? against : reasons).slice(0, 4)
+}
+
+function spokenHour(hour: TonightHour, reader: WordOptions): string {
+  if (!hour.isKnown) return `${clockText(hour.time, reader)}: no forecast.`
   const set = hour.setsAt
-    ? `Poured then, set by ${clockTime(hour.setsAt, reader)}.`
+    ? `Poured then, set by ${clockText(hour.setsAt, reader)}.`
     : 'Poured then, not set within the forecast.'
-  return `${clockTime(hour.time, reader)}: ${VERDICT_WORDS[hour.verdict]}. Freezes ${rateText(hour.freezeRateMmPerH ?? 0, reader)}. ${set}`
+  return `${clockText(hour.time, reader)}: ${VERDICT_WORDS[hour.verdict]}. Freezes ${rateText(hour.freezeRateMmPerH ?? 0, reader)}. ${set}`
 }

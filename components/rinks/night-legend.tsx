@@ -1,11 +1,12 @@
 // What the strip's marks mean, in words; every verdict with its own pattern.
 import type { StripHour } from '../charts/night-strip-layout'
 import type { StripSource } from './strip-input'
-import { clockTime, type Reader } from './quantities'
+import type { WordOptions } from '@/lib/words/options'
+import { clockText } from '@/lib/words/times'
 
 interface LegendProps {
   source: StripSource
-  reader: Reader
+  reader: WordOptions
   drawn: StripHour[]
 }
 
@@ -42,7 +43,7 @@ export function NightLegend({ source, reader, drawn }: LegendProps) {
       </li>
       {sunsetAt && sunriseAt ? (
         <li>
-          dark from {clockTime(sunsetAt, reader)} to {clockTime(sunriseAt, reader)}
+          dark from {clockText(sunsetAt, reader)} to {clockText(sunriseAt, reader)}
         </li>
       ) : null}
     </ul>

@@ -8,7 +8,8 @@ import { StripHours } from '../charts/strip-hours'
 import { HourPanel } from './hour-panel'
 import { NightLegend } from './night-legend'
 import { NightTable } from './night-table'
-import { clockTime, readerOf } from './quantities'
+import { readerOf } from './reader'
+import { clockText } from '@/lib/words/times'
 import { hoursOfNight, stripHours, stripInput, type StripSize, type StripSource } from './strip-input'
 import { stripWords } from './strip-words'
 
@@ -31,7 +32,7 @@ export function NightStrip({ source, now }: { source: StripSource; now: number }
             <StripHours
               layout={layout}
               label="Hours of the night"
-              nameOf={(index) => clockTime(hours[index]?.time ?? 0, reader)}
+              nameOf={(index) => clockText(hours[index]?.time ?? source.night.startsAt, reader)}
               selected={selected}
               start={Math.max(present, 0)}
               onSelect={setSelected}
@@ -47,7 +48,7 @@ export function NightStrip({ source, now }: { source: StripSource; now: number }
       />
       <figcaption className="px-5 pb-1">
         <NightLegend source={source} reader={reader} drawn={drawn} />
-        <NightTable hours={hours} reader={reader} />
+        <NightTable hours={hours} drawn={drawn} reader={reader} />
       </figcaption>
     </figure>
   )

@@ -1,45 +1,53 @@
 // The numbers of the strip as a table.
 import type { TonightHour } from '@/lib/schemas/tonight-view'
+import type { WordOptions } from '@/lib/words/options'
+import { numberText, rainText, snowText } from '@/lib/words/quantities'
+import { clockText } from '@/lib/words/times'
+import type { StripHour } from '../charts/night-strip-layout'
 import { DataTable } from '../ui/data-table'
 import { Disclosure } from '../ui/disclosure'
-import { clockTime, rainText, rateText, snowText, temperatureText, type Reader } from './quantities'
-import { VERDICT_WORDS } from './strip-words'
+import { VERDICT_WORDS } from './verdict-words'
 
-const COLUMNS = [
-  { head: 'Hour' },
-  { head: 'Verdict' },
-  { head: 'Freezes', isFigure: true },
-  { head: 'Poured then, set by', isFigure: true },
-  { head: 'Air', isFigure: true },
-  { head: 'Snow', isFigure: true },
-  { head: 'Rain', isFigure: true },
-]
+interface NightTableProps {
+  hours: TonightHour[]
+  /** The same hours as the strip draws them: rates and temperatures in the reader's units. */
+  drawn: StripHour[]
+  reader: WordOptions
+}
 
-export function NightTable({ hours, reader }: { hours: TonightHour[]; reader: Reader }) {
+export function NightTable({ hours, drawn, reader }: NightTableProps) {
+  const isImperial = reader.units === 'imperial'
+  const columns = [
+    { head: 'Hour' },
+    { head: 'Verdict' },
+    { head: isImperial ? 'Freezes, in/h' : 'Freezes, mm/h', isFigure: true },
+    { head: 'If poured, set by', isFigure: true },
+    { head: isImperial ? 'Air, °F' : 'Air, °C', isFigure: true },
+    { head: 'Snow', isFigure: true },
+    { head: 'Rain', isFigure: true },
+  ]
+  const rows = hours.map((hour, index) => ({ key: hour.time, cells: cellsOf(hour, drawn[index], reader) }))
   return (
     <Disclosure summary="Show as table" className="text-small">
-      <DataTable
-        caption="Freeze rate, set time and weather by hour"
-        columns={COLUMNS}
-        rows={hours.map((hour) => ({ key: hour.time, cells: cellsOf(hour, reader) }))}
-      />
+      <DataTable caption="Freeze rate, set time and weather by hour" columns={columns} rows={rows} />
     </Disclosure>
   )
 }
 
-function cellsOf(hour: TonightHour, reader: Reader): string[] {
-  const { weather, freezeRateMmPerH: rate } = hour
-  const orMissing = (value: number | null | undefined, text: (value: number, reader: Reader) => string) =>
-    value === null || value === undefined ? 'no forecast' : text(value, reader)
-  const amount = (value: number | null | undefined, text: (value: number, reader: Reader) => string) =>
-    value === 0 ? 'none' : orMissing(value, text)
+type Write = (value: number, reader: WordOptions) => string
+
+function cellsOf(hour: TonightHour, drawn: StripHour | undefined, reader: WordOptions): string[] {
+  const figure = (value: number | null | undefined, digits: number) =>
+    value == null ? 'no forecast' : numberText(value, digits, reader)
+  const amount = (value: number | null | undefined, write: Write) =>
+    value == null ? 'no forecast' : value === 0 ? 'none' : write(value, reader)
   return [
-    clockTime(hour.time, reader),
+    clockText(hour.time, reader),
     VERDICT_WORDS[hour.verdict],
-    orMissing(hour.isKnown ? rate : null, rateText),
-    hour.setsAt ? clockTime(hour.setsAt, reader) : hour.isKnown ? 'not set' : 'unknown',
-    orMissing(weather?.airTemperatureC, temperatureText),
-    amount(weather?.snowfallCm, snowText),
-    amount(weather?.rainMm, rainText),
+    figure(drawn?.rate, reader.units === 'imperial' ? 2 : 1),
+    hour.setsAt ? clockText(hour.setsAt, reader) : hour.isKnown ? 'not set' : 'unknown',
+    figure(drawn?.air, 0),
+    amount(hour.weather?.snowfallCm, snowText),
+    amount(hour.weather?.rainMm, rainText),
   ]
 }

@@ -1,16 +1,17 @@
 // How old the data are, where they come from, and by which licence they may be shown.
-import { ageText, clockTime, readerOf } from '@/components/rinks/quantities'
+import { ageText, readerOf } from '@/components/rinks/reader'
+import { clockText } from '@/lib/words/times'
 import type { TonightView } from '@/lib/schemas/tonight-view'
 
 export function DataSource({ view, now }: { view: TonightView; now: number }) {
   const { forecast, outlook } = view
   if (!forecast || !outlook) return null
   const reader = readerOf(view)
-  const issued = forecast.issuedAt ? `issued ${clockTime(forecast.issuedAt, reader)}, ` : ''
+  const issued = forecast.issuedAt ? `issued ${clockText(forecast.issuedAt, reader)}, ` : ''
   return (
     <p className="mt-7 text-small text-graphite">
-      Forecast {issued}read {clockTime(forecast.fetchedAt, reader)}, {ageText(forecast.fetchedAt, now)}; judged{' '}
-      {clockTime(outlook.judgedAt, reader)} by model {outlook.modelVersion}.{' '}
+      Forecast {issued}read {clockText(forecast.fetchedAt, reader)}, {ageText(forecast.fetchedAt, now)}; judged{' '}
+      {clockText(outlook.judgedAt, reader)} by model {outlook.modelVersion}.{' '}
       <a href={forecast.attribution.url} rel="noreferrer" className="underline">
         {forecast.attribution.text}
       </a>

@@ -3,7 +3,9 @@
 import dynamic from 'next/dynamic'
 import { useRef } from 'react'
 import { useNearViewport } from '@/components/hooks/use-near-viewport'
-import { dayText, rainText, readerOf, snowText, temperatureText, type Reader } from '@/components/rinks/quantities'
+import { dayText, readerOf, shortDayText } from '@/components/rinks/reader'
+import type { WordOptions } from '@/lib/words/options'
+import { layerText, rainText, snowText, temperatureText } from '@/lib/words/quantities'
 import { DataTable } from '@/components/ui/data-table'
 import { Disclosure } from '@/components/ui/disclosure'
 import type { DayAhead, TonightView } from '@/lib/schemas/tonight-view'
@@ -57,7 +59,7 @@ function columnOf(day: DayAhead, isImperial: boolean) {
   const round = (value: number | null, digits: number) => (value === null ? null : Number(value.toFixed(digits)))
   const air = (value: number | null) => round(value === null || !isImperial ? value : celsiusToFahrenheit(value), 0)
   return {
-    day: dayText(day.date).split(' ').slice(0, 2).join(' '),
+    day: shortDayText(day.date),
     freezable: isImperial
       ? round(day.freezableMm === null ? null : mmToInches(day.freezableMm), 2)
       : round(day.freezableMm, 0),
@@ -67,14 +69,14 @@ function columnOf(day: DayAhead, isImperial: boolean) {
   }
 }
 
-function cellsOf(day: DayAhead, reader: Reader): string[] {
-  const text = (value: number | null, write: (value: number, reader: Reader) => string) =>
+function cellsOf(day: DayAhead, reader: WordOptions): string[] {
+  const text = (value: number | null, write: (value: number, reader: WordOptions) => string) =>
     value === null ? 'unknown' : write(value, reader)
   return [
     dayText(day.date),
     text(day.lowC, temperatureText),
     text(day.highC, temperatureText),
-    text(day.freezableMm, rainText),
+    text(day.freezableMm, layerText),
     String(day.floodHours),
     text(day.snowCm, snowText),
     text(day.rainMm, rainText),

@@ -6,7 +6,7 @@ import { Disclosure } from '@/components/ui/disclosure'
 import { TextField } from '@/components/ui/field'
 import { IDLE } from '@/lib/http/form-state'
 import type { TonightView } from '@/lib/schemas/tonight-view'
-import { dayText } from '@/components/rinks/quantities'
+import { dayText } from '@/components/rinks/reader'
 import { muteAction } from '../actions'
 import type { ChangeView } from './use-tonight'
 

@@ -1,15 +1,16 @@
 // What to do in a pass, and the line below it.
-import { clockTime, rainText, readerOf, waterText } from '@/components/rinks/quantities'
+import { readerOf } from '@/components/rinks/reader'
 import type { TonightPass, TonightView } from '@/lib/schemas/tonight-view'
+import { durationText, layerText, waterText } from '@/lib/words/quantities'
+import { doneByText } from '@/lib/words/times'
 
 export function passWords(pass: TonightPass, view: TonightView): { what: string; detail: string } {
   const reader = readerOf(view)
-  const what = `${rainText(pass.layerMm, reader)} over the whole sheet`
+  const what = `${layerText(pass.layerMm, reader)} over the whole sheet`
   const water = waterText(pass.waterL, reader)
-  if (pass.poured)
-    return { what, detail: [water, pass.poured.by ? `poured by ${pass.poured.by}` : 'poured'].join(', ') }
+  if (pass.poured) return { what, detail: `${water}, poured${pass.poured.by ? ` by ${pass.poured.by}` : ''}` }
   return {
     what,
-    detail: `${water}, ${Math.round(pass.hoseMinutes)} min of hose; set by ${clockTime(pass.setBy, reader)}`,
+    detail: `${water}, ${durationText(pass.hoseMinutes)} of hose; set by ${doneByText(pass.setBy, reader)}`,
   }
 }

@@ -4,7 +4,8 @@ import { useActionState, useState, type FormEvent } from 'react'
 import { isGranted } from '@/lib/access/permissions'
 import { IDLE } from '@/lib/http/form-state'
 import type { TonightPass, TonightView } from '@/lib/schemas/tonight-view'
-import { clockTime, readerOf } from '@/components/rinks/quantities'
+import { readerOf } from '@/components/rinks/reader'
+import { clockText } from '@/lib/words/times'
 import { markPassAction } from '../actions'
 import { passWords } from './pass-words'
 import type { ChangeView } from './use-tonight'
@@ -24,7 +25,7 @@ export function Plan({ view, passes, change }: { view: TonightView; passes: Toni
               className="grid grid-cols-[92px_1fr_auto] items-center gap-x-3.5 border-b border-rule py-[13px]"
             >
               <span className="text-lead font-semibold tracking-tight">
-                {clockTime(pass.poured?.at ?? pass.startsAt, reader)}
+                {clockText(pass.poured?.at ?? pass.startsAt, reader)}
               </span>
               <span className="leading-[1.35]">
                 {what}

@@ -3,7 +3,8 @@
 import type { Route } from 'next'
 import Link from 'next/link'
 import type { ReactNode } from 'react'
-import { ageText, clockTime, dayText, readerOf } from '@/components/rinks/quantities'
+import { ageText, dayText, readerOf } from '@/components/rinks/reader'
+import { clockText } from '@/lib/words/times'
 import { useHydrated } from '@/components/hooks/use-hydrated'
 import { Button } from '@/components/ui/button'
 import { Notice } from '@/components/ui/notice'
@@ -20,7 +21,7 @@ interface StatusProps {
 
 export function StatusNotices({ view, now, trouble, onReadAgain }: StatusProps) {
   const reader = readerOf(view)
-  const asOf = `As of ${clockTime(view.readAt, reader)}, ${ageText(view.readAt, now)}.`
+  const asOf = `As of ${clockText(view.readAt, reader)}, ${ageText(view.readAt, now)}.`
   return (
     <>
       {trouble ? (

@@ -1,11 +1,11 @@
 // The night sheet of one rink: verdict, how sure, the strip, the plan, cautions, why, water, source, and the days ahead.
 'use client'
 import { useClock } from '@/components/hooks/use-clock'
-import { nightText } from '@/components/rinks/quantities'
+import { nightLabel, readerOf } from '@/components/rinks/reader'
 import { NightStrip } from '@/components/rinks/night-strip'
 import { isGranted } from '@/lib/access/permissions'
 import type { TonightView } from '@/lib/schemas/tonight-view'
-import { Cautions } from './cautions'
+import { Cautions } from '@/components/rinks/cautions'
 import { DataSource } from './data-source'
 import { DaysAhead } from './days-ahead'
 import { FirstForecast } from './first-forecast'
@@ -28,7 +28,7 @@ export function TonightSheet({ initial }: { initial: TonightView }) {
     <div className="mx-auto max-w-page px-5 pb-24 lg:pb-12 lg:pl-9 print:p-0">
       <header className="flex flex-wrap items-baseline gap-x-3 border-b border-rule pt-4 pb-5">
         <span className="font-semibold">{view.rink.name}</span>
-        <span className="text-note text-graphite">{nightText(view.night.date)}</span>
+        <span className="text-note text-graphite">{nightLabel(view.night.date)}</span>
         <span className="ml-auto text-note text-graphite">
           {view.rink.people === 1 ? 'Just you' : `${view.rink.people} people`}
         </span>
@@ -46,10 +46,11 @@ export function TonightSheet({ initial }: { initial: TonightView }) {
 }
 
 function JudgedNight({ view, now, change }: { view: Judged; now: number; change: ChangeView }) {
-  const { passes, days } = view.outlook
+  const { passes, days, summary } = view.outlook
+  const reader = readerOf(view)
   return (
     <>
-      <Verdict view={view} />
+      <Verdict view={view} summary={summary} now={now} />
       <NightStrip source={view} now={now} />
       <ZoneNote view={view} />
       <div className="lg:grid lg:grid-cols-[1.25fr_1fr] lg:gap-x-14 print:block">
@@ -61,10 +62,10 @@ function JudgedNight({ view, now, change }: { view: Judged; now: number; change:
             <p className="border-t border-rule pt-3">No pass is planned for this night.</p>
           )}
           {isGranted(view.viewer.role, 'receiveAlerts') ? <Mute view={view} change={change} /> : null}
-          <Cautions view={view} />
+          <Cautions cautions={summary.cautions} reader={reader} />
         </section>
         <div>
-          <Why view={view} />
+          <Why summary={summary} reader={reader} />
           <WaterAndHose view={view} />
           <DataSource view={view} now={now} />
         </div>

@@ -1,24 +1,35 @@
 // The verdict as one sentence, and how sure it is.
-import { readerOf } from '@/components/rinks/quantities'
+import { readerOf } from '@/components/rinks/reader'
+import type { NightSummary } from '@/lib/advice/night-summary'
 import type { TonightView } from '@/lib/schemas/tonight-view'
-import { nightWords } from './night-words'
+import { sureSentence, verdictParts } from '@/lib/words/night'
 
-const LEAD = /^(Flood|Fill) tonight/
+const LEAD_COLOURS: Record<NightSummary['verdict'], string> = {
+  flood: 'text-lamp-text',
+  fill: 'text-hose',
+  hold: 'text-ink',
+  unknown: 'text-ink',
+}
 
-export function Verdict({ view }: { view: TonightView }) {
-  const { sentence, sure } = nightWords(view, readerOf(view))
-  const lead = LEAD.exec(sentence)?.[0] ?? ''
+export function Verdict({
+  view,
+  summary,
+  now,
+}: {
+  view: Pick<TonightView, 'viewer' | 'rink'>
+  summary: NightSummary
+  now: number
+}) {
+  const reader = readerOf(view)
+  const { lead, rest } = verdictParts(summary, new Date(now), reader)
+  const sure = sureSentence(summary, reader)
   return (
     <>
       <h1 className="mt-7 mb-2 max-w-[22ch] text-verdict font-medium tracking-tight lg:max-w-[24ch] lg:text-verdict-wide">
-        {lead ? (
-          <em className={`font-semibold not-italic ${lead.startsWith('Flood') ? 'text-lamp-text' : 'text-hose'}`}>
-            {lead}
-          </em>
-        ) : null}
-        {sentence.slice(lead.length)}
+        <em className={`font-semibold not-italic ${LEAD_COLOURS[summary.verdict]}`}>{lead}</em>
+        {/^[.:]/.test(rest) ? rest : ` ${rest}`}
       </h1>
-      {sure ? <p className="mb-5 max-w-[60ch] text-graphite">{sure}</p> : null}
+      <p className="mb-5 max-w-[60ch] text-graphite">{sure}</p>
     </>
   )
 }

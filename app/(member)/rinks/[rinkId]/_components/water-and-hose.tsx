@@ -1,6 +1,7 @@
 // The water tonight's plan rests on: what the tap gives, and what the passes take in all.
 import { Facts } from '@/components/ui/facts'
-import { flowText, readerOf, temperatureText, waterText } from '@/components/rinks/quantities'
+import { readerOf } from '@/components/rinks/reader'
+import { durationText, temperatureText, waterText } from '@/lib/words/quantities'
 import type { TonightView } from '@/lib/schemas/tonight-view'
 
 export function WaterAndHose({ view }: { view: TonightView }) {
@@ -15,9 +16,9 @@ export function WaterAndHose({ view }: { view: TonightView }) {
       <Facts
         rows={[
           { name: 'Water at the hose', figure: temperatureText(temperatureC, reader) },
-          { name: 'Flow', figure: flowText(flowLPerMin, reader) },
+          { name: 'Flow', figure: `${waterText(flowLPerMin, reader)} a minute` },
           ...(planned.length > 0
-            ? [{ name: 'Still to pour tonight', figure: `${waterText(litres, reader)}, ${Math.round(minutes)} min` }]
+            ? [{ name: 'Still to pour tonight', figure: `${waterText(litres, reader)}, ${durationText(minutes)}` }]
             : []),
         ]}
       />

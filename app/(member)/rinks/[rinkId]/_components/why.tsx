@@ -1,23 +1,21 @@
-// Why these hours: each reason with its figure.
-import { readerOf } from '@/components/rinks/quantities'
+// Why these hours, or why none: each reason with its figure.
 import { Facts } from '@/components/ui/facts'
-import type { TonightView } from '@/lib/schemas/tonight-view'
-import { nightWords } from './night-words'
+import type { NightSummary } from '@/lib/advice/night-summary'
+import type { WordOptions } from '@/lib/words/options'
+import { whyList } from '@/lib/words/why'
 
-export function Why({ view }: { view: TonightView }) {
-  const { why } = nightWords(view, readerOf(view))
-  if (why.length === 0) return null
+export function Why({ summary, reader }: { summary: NightSummary; reader: WordOptions }) {
+  const items = whyList(summary.why, reader)
+  if (items.length === 0) return null
   return (
     <section>
-      <h2 className="mt-8 mb-2 text-body font-semibold">
-        {view.outlook?.summary.window ? 'Why these hours' : 'Why not'}
-      </h2>
+      <h2 className="mt-8 mb-2 text-body font-semibold">{summary.window ? 'Why these hours' : 'Why not'}</h2>
       <Facts
-        rows={why.map(({ lead, text, figure }) => ({
+        rows={items.map(({ label, detail, figure }) => ({
           figure,
           name: (
             <>
-              <b className="font-medium">{lead}</b> {text}
+              <b className="font-medium">{label}</b> {detail}
             </>
           ),
         }))}

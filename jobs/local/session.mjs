@@ -16,7 +16,8 @@ export function formatSeconds(millis) {
 /** A Problem as one line with the end of its log; anything else is a bug and keeps its stack. */
 export function describeFailure(error) {
   const isClosed = error?.code === 'EACCES' || error?.code === 'EPERM'
-  if (isClosed && error.path) return `${error.path} is closed to this account: another one has made it. (${error.message})`
+  if (isClosed && error.path)
+    return `${error.path} is closed to this account: another one has made it. (${error.message})`
   if (!(error instanceof Problem)) return error?.stack ?? String(error)
   if (!error.logFile) return error.message
   const lines = tail(error.logFile)

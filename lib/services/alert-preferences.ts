@@ -29,6 +29,9 @@ export interface Device {
   disabledReason: string | null
 }
 
+/** What the person was told, as the page lists it. */
+export type ToldMessage = ToldMessageRow
+
 export interface AlertSettings {
   rink: { name: string; timeZone: string }
   tonightDate: string
@@ -36,7 +39,7 @@ export interface AlertSettings {
   email: string
   clock: '12' | '24'
   devices: Device[]
-  told: ToldMessageRow[]
+  told: ToldMessage[]
 }
 
 const TOLD_SHOWN = 30

@@ -2,7 +2,7 @@
 'use client'
 import { startTransition, useActionState, useEffect, useRef, useState, type FormEvent } from 'react'
 import type { FormAction } from '@/components/ui/action-form'
-import { IDLE } from '@/lib/http/form-state'
+import { IDLE, type FormState } from '@/lib/http/form-state'
 import { unitOf, type UnitSystem } from '@/lib/schemas/measures'
 import { inUnits, MEASURE_OF, type FormValues } from './values'
 
@@ -15,6 +15,8 @@ export function useRinkForm(action: FormAction, initial: FormValues) {
   const [state, dispatch, isPending] = useActionState(action, IDLE)
   // Without script the page comes back whole, and this is where what was typed is found again.
   const [values, setValues] = useState<FormValues>(state.values ?? initial)
+  // A fault is shown until its field is touched.
+  const [mended, setMended] = useState<{ of: FormState; names: string[] }>({ of: state, names: [] })
   const form = useRef<HTMLFormElement>(null)
   const units: UnitSystem = values.units === 'imperial' ? 'imperial' : 'metric'
 
@@ -22,7 +24,12 @@ export function useRinkForm(action: FormAction, initial: FormValues) {
     if (state.status === 'error') form.current?.querySelector<HTMLElement>(FAULTY)?.focus()
   }, [state])
 
-  const set = (changed: FormValues) => setValues((before) => ({ ...before, ...changed }))
+  const set = (changed: FormValues) => {
+    setValues((before) => ({ ...before, ...changed }))
+    setMended(({ of, names }) => ({ of: state, names: [...(of === state ? names : []), ...Object.keys(changed)] }))
+  }
+  const error = (name: string) =>
+    mended.of === state && mended.names.includes(name) ? undefined : state.fields?.[name]
 
   return {
     ref: form,
@@ -39,18 +46,18 @@ export function useRinkForm(action: FormAction, initial: FormValues) {
       const sent = new FormData(event.currentTarget)
       startTransition(() => dispatch(sent))
     },
-    error: (name: string) => state.fields?.[name],
+    error,
     text: (name: string) => ({
       name,
       value: values[name] ?? '',
-      error: state.fields?.[name],
+      error: error(name),
       unit: MEASURE_OF[name] && unitOf(MEASURE_OF[name], units),
       onChange: (event: { target: { value: string } }) => set({ [name]: event.target.value }),
     }),
     choice: (name: string) => ({
       name,
       value: values[name] ?? '',
-      error: state.fields?.[name],
+      error: error(name),
       onChoose: (value: string) => set({ [name]: value }),
     }),
     tick: (name: string) => ({

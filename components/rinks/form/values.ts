@@ -84,6 +84,8 @@ export function rinkValues(rink: Omit<RinkInput, 'iceThicknessMm'> & { id: strin
 export function inUnits(values: FormValues, units: UnitSystem): FormValues {
   const from: UnitSystem = values.units === 'imperial' ? 'imperial' : 'metric'
   const converted = Object.entries(MEASURE_OF).flatMap(([field, measure]) => {
+    const round = ROUND[units][field]
+    if (round !== undefined && values[field] === ROUND[from][field]) return [[field, round]]
     const number = parseNumber(values[field] ?? '')
     return number === undefined ? [] : [[field, typed(measure, units, MEASURES[measure].scales[from].toSi(number))]]
   })

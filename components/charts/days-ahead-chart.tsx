@@ -17,6 +17,9 @@ interface DaysAheadChartProps {
   airUnit: string
 }
 
+const AIR = [{ key: 'high' }, { key: 'low', dash: '4 3' }]
+/** Lines lie on a casing, so that they stay visible across solid bars. */
+const LINE = { yAxisId: 'air', dot: false, activeDot: false, isAnimationActive: false }
 const TEXT = { fontSize: 12, fill: 'var(--graphite)' }
 
 export default function DaysAheadChart({ days, depthUnit, airUnit }: DaysAheadChartProps) {
@@ -69,27 +72,27 @@ export default function DaysAheadChart({ days, depthUnit, airUnit }: DaysAheadCh
             ),
           )}
         </Bar>
-        <Line
-          yAxisId="air"
-          dataKey="high"
-          name="high"
-          unit={` ${airUnit}`}
-          stroke="var(--ink)"
-          strokeWidth={1.8}
-          dot={false}
-          isAnimationActive={false}
-        />
-        <Line
-          yAxisId="air"
-          dataKey="low"
-          name="low"
-          unit={` ${airUnit}`}
-          stroke="var(--ink)"
-          strokeWidth={1.8}
-          strokeDasharray="4 3"
-          dot={false}
-          isAnimationActive={false}
-        />
+        {AIR.map(({ key }) => (
+          <Line
+            key={`${key}-casing`}
+            {...LINE}
+            dataKey={key}
+            stroke="var(--paper)"
+            strokeWidth={4.6}
+            tooltipType="none"
+          />
+        ))}
+        {AIR.map(({ key, dash }) => (
+          <Line
+            key={key}
+            {...LINE}
+            dataKey={key}
+            unit={` ${airUnit}`}
+            stroke="var(--ink)"
+            strokeWidth={1.8}
+            strokeDasharray={dash}
+          />
+        ))}
       </ComposedChart>
     </ResponsiveContainer>
   )

@@ -42,7 +42,7 @@ export function DaysAhead({ view, days }: { view: TonightView; days: DayAhead[] 
       </div>
       <p className="mt-1 text-small text-graphite print:hidden">
         Bars: {isImperial ? 'inches' : 'mm'} of water that could freeze in the day, solid where there are hours to
-        flood. Lines: high and low of the air, {isImperial ? '°F' : '°C'}.
+        flood. Lines: high of the air, and low dashed, {isImperial ? '°F' : '°C'}.
       </p>
       <Disclosure summary="Show as table" className="text-small">
         <DataTable

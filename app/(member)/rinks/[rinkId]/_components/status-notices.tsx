@@ -65,7 +65,7 @@ function TroubleText({
   }
   if (trouble === 'gone') return <p>{asOf} You are no longer on this rink’s list, or the rink was removed.</p>
   return (
-    <div className="flex flex-wrap items-center gap-x-4">
+    <div className="flex flex-wrap items-center gap-x-4 gap-y-2">
       <p>
         {trouble === 'offline'
           ? `${asOf} No connection: this is the last state this device has. It is read again once you are back.`

@@ -25,13 +25,15 @@ export function TonightSheet({ initial }: { initial: TonightView }) {
   const { view, trouble, change, readAgain } = useTonight(initial)
   const now = useClock(view.readAt)
   return (
-    <div className="mx-auto max-w-page px-5 pb-24 lg:pb-12 lg:pl-9 print:p-0">
-      <header className="flex flex-wrap items-baseline gap-x-3 border-b border-rule pt-4 pb-5">
-        <span className="font-semibold">{view.rink.name}</span>
-        <span className="text-note text-graphite">{nightLabel(view.night.date)}</span>
-        <span className="ml-auto text-note text-graphite">
-          {view.rink.people === 1 ? 'Just you' : `${view.rink.people} people`}
-        </span>
+    <div className="mx-auto max-w-page px-5 pb-24 lg:px-9 lg:pb-12 print:p-0">
+      <header className="flex items-baseline gap-3 border-b border-rule pt-4 pb-5">
+        <p className="flex flex-wrap items-baseline gap-x-3">
+          <span className="font-semibold">{view.rink.name}</span>
+          <span className="text-note text-graphite">{nightLabel(view.night.date)}</span>
+        </p>
+        {view.rink.people > 1 ? (
+          <p className="ml-auto shrink-0 text-note text-graphite">{view.rink.people} people</p>
+        ) : null}
       </header>
       <main>
         <StatusNotices view={view} now={now} trouble={trouble} onReadAgain={readAgain} />

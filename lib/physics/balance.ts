@@ -107,7 +107,12 @@ export function surfaceLaw(hour: PreparedHour, kind: SurfaceKind, aroundC: numbe
   const colder = surfaceBalance(hour, kind, Math.max(-79, aroundC - 1))
   const kelvin = aroundC + ZERO_CELSIUS_K
   const radiative = 4 * SURFACE_EMISSIVITY * STEFAN_BOLTZMANN * kelvin * kelvin * kelvin
-  return { ...here, slopeWm2K: Math.max(radiative, here.netWm2 - colder.netWm2), aroundC }
+  return {
+    netWm2: here.netWm2,
+    parts: here.parts,
+    slopeWm2K: Math.max(radiative, here.netWm2 - colder.netWm2),
+    aroundC,
+  }
 }
 
 /**

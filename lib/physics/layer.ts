@@ -9,9 +9,9 @@ import {
   WATER_HEAT_CAPACITY,
 } from './constants'
 import { groundHeatWm2 } from './ground'
-import { heatDrawnJM2, sheetCold, type SheetCold } from './sheet-cold'
+import { decayModes, heatDrawnJM2, sheetCold, type SheetCold } from './sheet-cold'
 import { inRange } from './check'
-import { precipitationHeatWm2, surfaceLaw } from './balance'
+import { wetSeason, type WetSeason } from './wet-season'
 import type { PreparedHour } from './types'
 import type { SheetState } from './sheet-state'
 
@@ -22,18 +22,11 @@ export interface Layer {
   temperatureC: number
 }
 
-/** What an hour does to a wet surface at 0 °C. */
-interface WetHour {
-  lossWm2: number
-  slopeWm2K: number
-  /** Water that falls into the layer, as rain or snow. [kg/m²] */
-  fallsKgM2: number
-}
-
 /** Heat from a well-mixed warm layer to ice at 0 °C below it: see WATER_FACE in column.ts. */
 const WATER_FACE = (Math.PI ** 2 / 4) * WATER_DENSITY * WATER_CONDUCTIVITY
-/** Hours are prepared once and asked many times. The law of an hour depends on nothing but the hour. */
-const wetHours = new WeakMap<PreparedHour, WetHour>()
+const LATENT_JM3 = ICE_DENSITY * FUSION_J_PER_KG
+/** Heat that does not matter to the minute. [J/m²] */
+const CLOSE_JM2 = 20
 
 /**
  * Minutes from pouring until the last liquid in a layer is gone.
@@ -59,91 +52,95 @@ export function minutesToSet(
   inRange('layerMm [mm]', layer.layerMm, 0.01, 500)
   inRange('temperatureC [°C]', layer.temperatureC, 0, 100)
   inRange('startFraction [0-1)', startFraction, 0, 0.999999)
-  const firstHour = hours[startIndex]
-  if (!firstHour?.isKnown) return null
+  const wet = wetSeason(hours)
+  if (!(startIndex >= 0 && startIndex < hours.length) || wet.isUnknown[startIndex]) return null
   const cold = sheetCold(state, groundHeatWm2(state.base))
-  const budget = {
-    restJM2: heatToLose(layer, cold, wetHour(firstHour)),
-    skinM: 0,
-  }
+  const wantedJM2 = heatToLose(layer, cold, wet.slopeWm2K[startIndex]!) - cold.atOnceJM2
+  // No later hour brings enough loss: most of a thaw is answered here. A late start may skip the bad part of its hour.
+  const best = Math.max(wet.bestFromHereJM2[startIndex]!, wet.bestFromHereJM2[startIndex + 1] ?? 0)
+  if (wantedJM2 > cold.totalJM2 - cold.atOnceJM2 + best) return null
+  return march(wet, cold, wantedJM2, startIndex, startFraction)
+}
+
+function march(
+  wet: WetSeason,
+  cold: SheetCold,
+  wantedJM2: number,
+  first: number,
+  firstFraction: number,
+): number | null {
+  const held = cold.sharesJM2
+  let restJM2 = wantedJM2
+  let skinM = 0
   let elapsed = 0
-  let drawn = 0
-  let fraction = startFraction
-  for (let i = startIndex; i < hours.length; i++) {
-    const hour = hours[i]!
-    if (!hour.isKnown) return null
-    const wet = wetHour(hour)
-    const seconds = (1 - fraction) * HOUR_SECONDS
-    budget.restJM2 += wet.fallsKgM2 * (1 - fraction) * FUSION_J_PER_KG
-    fraction = 0
-    // Once the ground gives more than the sheet still takes, the sheet melts at its foot; none of that reaches the layer.
-    const drawnAfter = Math.max(drawn, heatDrawnJM2(cold, elapsed + seconds))
-    const lost = skinLoss(wet, budget.skinM, seconds) + drawnAfter - drawn
-    if (lost >= budget.restJM2) {
-      return (elapsed + timeWithin(wet, budget.skinM, cold, elapsed, drawn, budget.restJM2, seconds)) / 60
-    }
-    budget.skinM = grownSkin(wet, budget.skinM, seconds)
-    budget.restJM2 -= lost
+  for (let i = first; i < wet.lossWm2.length; i++) {
+    if (wet.isUnknown[i]) return null
+    const seconds = i === first ? (1 - firstFraction) * HOUR_SECONDS : HOUR_SECONDS
+    const loss = wet.lossWm2[i]!
+    const slope = wet.slopeWm2K[i]!
+    restJM2 += (wet.fallsKgM2[i]! * FUSION_J_PER_KG * seconds) / HOUR_SECONDS
+    const grownM = grownSkin(loss, slope, skinM, seconds)
+    const lost = skinLoss(loss, skinM, grownM, seconds) + heatDrawnJM2(cold, held, seconds)
+    if (lost >= restJM2) return (elapsed + timeWithin(loss, slope, skinM, cold, restJM2, seconds, lost)) / 60
+    decayModes(cold, held, seconds)
+    skinM = grownM
+    restJM2 -= lost
     elapsed += seconds
-    drawn = drawnAfter
   }
   return null
 }
 
-/** The law of an hour for a wet surface at 0 °C, worked out once. */
-export function wetHour(hour: PreparedHour): WetHour {
-  let wet = wetHours.get(hour)
-  if (!wet) {
-    const law = surfaceLaw(hour, 'wet', 0)
-    wet = {
-      lossWm2: law.netWm2 + precipitationHeatWm2(hour),
-      slopeWm2K: law.slopeWm2K,
-      fallsKgM2: hour.precipitationMm,
-    }
-    wetHours.set(hour, wet)
-  }
-  return wet
-}
-
 /** Latent heat of all the water, and its warmth less what leaves faster because the surface is warm. [J/m²] */
-function heatToLose(layer: Layer, cold: SheetCold, wet: WetHour): number {
+function heatToLose(layer: Layer, cold: SheetCold, slopeWm2K: number): number {
   const waterKg = layer.layerMm + cold.liquidKgM2
   const warmthJM2 = layer.layerMm * WATER_HEAT_CAPACITY * layer.temperatureC + cold.warmthJM2
   const toSheet = WATER_FACE / waterKg
-  const extraAtTop = Math.min(0.9, ((Math.PI / 2) * wet.slopeWm2K) / (toSheet + wet.slopeWm2K))
+  const extraAtTop = Math.min(0.9, ((Math.PI / 2) * slopeWm2K) / (toSheet + slopeWm2K))
   return waterKg * FUSION_J_PER_KG + warmthJM2 * (1 - extraAtTop)
 }
 
-function skinLoss(wet: WetHour, skinM: number, seconds: number): number {
-  if (wet.lossWm2 <= 0) return wet.lossWm2 * seconds
-  return (grownSkin(wet, skinM, seconds) - skinM) * ICE_DENSITY * FUSION_J_PER_KG
+function skinLoss(lossWm2: number, skinM: number, grownM: number, seconds: number): number {
+  return lossWm2 <= 0 ? lossWm2 * seconds : (grownM - skinM) * LATENT_JM3
 }
 
-function grownSkin(wet: WetHour, skinM: number, seconds: number): number {
-  const latent = ICE_DENSITY * FUSION_J_PER_KG
-  if (wet.lossWm2 <= 0) return Math.max(0, skinM + (wet.lossWm2 * seconds) / latent)
-  const bulk = ICE_CONDUCTIVITY / wet.slopeWm2K
+function grownSkin(lossWm2: number, slopeWm2K: number, skinM: number, seconds: number): number {
+  if (lossWm2 <= 0) return Math.max(0, skinM + (lossWm2 * seconds) / LATENT_JM3)
+  const bulk = ICE_CONDUCTIVITY / slopeWm2K
   const start = skinM + bulk
-  return Math.sqrt(start * start + (2 * bulk * wet.lossWm2 * seconds) / latent) - bulk
+  return Math.sqrt(start * start + (2 * bulk * lossWm2 * seconds) / LATENT_JM3) - bulk
 }
 
-/** Moment within an hour at which the rest is gone, by bisection; the loss may dip first, so no faster method is safe. [s] */
+/** Moment within a stretch at which the rest is gone, to a second, by false position with the Illinois rule. [s] */
 function timeWithin(
-  wet: WetHour,
+  loss: number,
+  slope: number,
   skinM: number,
   cold: SheetCold,
-  elapsed: number,
-  drawn: number,
   restJM2: number,
   seconds: number,
+  lostAtEnd: number,
 ): number {
   let early = 0
   let late = seconds
-  for (let round = 0; round < 12; round++) {
-    const middle = (early + late) / 2
-    const lost = skinLoss(wet, skinM, middle) + Math.max(0, heatDrawnJM2(cold, elapsed + middle) - drawn)
-    if (lost >= restJM2) late = middle
-    else early = middle
+  let below = restJM2
+  let above = lostAtEnd - restJM2
+  let side = 0
+  for (let round = 0; round < 20 && late - early > 1; round++) {
+    const middle = early + ((late - early) * below) / (below + above)
+    const grown = skinLoss(loss, skinM, grownSkin(loss, slope, skinM, middle), middle)
+    const missing = restJM2 - grown - heatDrawnJM2(cold, cold.sharesJM2, middle)
+    if (Math.abs(missing) < CLOSE_JM2) return middle
+    if (missing > 0) {
+      early = middle
+      below = missing
+      if (side === 1) above /= 2
+      side = 1
+    } else {
+      late = middle
+      above = -missing
+      if (side === -1) below /= 2
+      side = -1
+    }
   }
   return (early + late) / 2
 }

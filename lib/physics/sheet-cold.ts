@@ -7,13 +7,16 @@ import type { SheetState } from './sheet-state'
 const DIFFUSIVITY = ICE_CONDUCTIVITY / (ICE_DENSITY * ICE_HEAT_CAPACITY)
 /** Modes kept; what faster ones hold is given at once, which for 0.1 m of ice means within half a minute. */
 const MODES = 8
+/** A mode with less than this is done: a thousandth of a millimetre of water. [J/m²] */
+const SPENT_JM2 = 300
 /** Deeper ice does not reach the surface within a night. [m] */
 const DEEPEST_M = 0.5
 
-/** Heat the sheet has drawn from a surface held at 0 °C, `total - Σ share · exp(-rate t)`. */
+/** Heat the sheet has drawn from a surface held at 0 °C: `atOnce + Σ share · (1 - exp(-rate t))`. */
 export interface SheetCold {
-  /** [J/m²] */
+  /** All it can draw, and what of that the modes left out hold. [J/m²] */
   totalJM2: number
+  atOnceJM2: number
   sharesJM2: Float64Array
   /** [1/s] */
   ratesPerS: Float64Array
@@ -50,6 +53,7 @@ export function sheetCold(state: SheetState, bottomWm2: number): SheetCold {
   for (let i = first; i < mass.length && heightM < DEEPEST_M; i++) heightM += mass[i]! / ICE_DENSITY
   const cold: SheetCold = {
     totalJM2: 0,
+    atOnceJM2: 0,
     sharesJM2: new Float64Array(MODES),
     ratesPerS: new Float64Array(MODES),
     liquidKgM2,
@@ -87,9 +91,11 @@ function projectOnModes(cold: SheetCold, state: SheetState, first: number, heigh
     depth = nextDepth
   }
   const slowing = slowed(topC)
+  cold.atOnceJM2 = cold.totalJM2
   for (let m = 0; m < MODES; m++) {
     const wave = firstWave + m * waveStep
     cold.sharesJM2[m]! *= (-2 * ICE_DENSITY * ICE_HEAT_CAPACITY) / (heightM * wave * wave)
+    cold.atOnceJM2 -= cold.sharesJM2[m]!
     cold.ratesPerS[m] = DIFFUSIVITY * wave * wave * slowing
   }
 }
@@ -103,12 +109,28 @@ function slowed(topC: number): number {
   return 1 / (1 + (4 / Math.PI) * stefanNumber)
 }
 
-/** Heat drawn by a time after pouring. [J/m²] */
-export function heatDrawnJM2(cold: SheetCold, seconds: number): number {
-  let held = 0
+/**
+ * Heat drawn in a stretch of time.
+ *
+ * @param cold Modes.
+ * @param held Heat the modes still hold at its start. [J/m²]
+ * @param seconds Its length. [s]
+ * @returns Heat. [J/m²] Never negative: once the ground gives more than the sheet takes, the sheet melts at its foot, and none
+ * of that reaches the layer.
+ */
+export function heatDrawnJM2(cold: SheetCold, held: Float64Array, seconds: number): number {
+  let drawn = -cold.bottomWm2 * seconds
   for (let m = 0; m < MODES; m++) {
-    const decay = cold.ratesPerS[m]! * seconds
-    if (decay < 30) held += cold.sharesJM2[m]! * Math.exp(-decay)
+    if (held[m] !== 0) drawn += held[m]! * -Math.expm1(-cold.ratesPerS[m]! * seconds)
   }
-  return cold.totalJM2 - held - cold.bottomWm2 * seconds
+  return drawn > 0 ? drawn : 0
+}
+
+/** Lets the modes decay for a stretch of time; spent ones become exactly 0. */
+export function decayModes(cold: SheetCold, held: Float64Array, seconds: number): void {
+  for (let m = 0; m < MODES; m++) {
+    if (held[m] === 0) continue
+    const left = held[m]! * Math.exp(-cold.ratesPerS[m]! * seconds)
+    held[m] = Math.abs(left) < SPENT_JM2 ? 0 : left
+  }
 }

@@ -1,14 +1,17 @@
 // One hour in the life of a sheet: what falls on it, what it loses, what it gains from below.
-import { FUSION_J_PER_KG, HOUR_SECONDS, ICE_DENSITY, ICE_HEAT_CAPACITY, WATER_HEAT_CAPACITY } from './constants'
-import { cellThicknessM, stepColumn } from './column'
+import { FUSION_J_PER_KG, HOUR_SECONDS, WATER_HEAT_CAPACITY } from './constants'
+import { cellLiquidKgM2, cellThicknessM, stepColumn } from './column'
 import { groundHeatWm2, waterToIceWm2 } from './ground'
-import { closeSurface, surfaceMassLossKgM2 } from './sheet-surface'
+import { closeSurface, finishSurface, vapourLossKgM2 } from './sheet-surface'
 import { fallOnSheet, setMeasuredSnow } from './sheet-fall'
 import { freezeOpenWater, growThinIce, isThinIce } from './thin-ice'
 import { settledDepthCm } from './snow'
 import { tidyCells } from './grid'
 import type { PreparedHour } from './types'
 import type { SheetState } from './sheet-state'
+
+/** [kg/m²] */
+const DUST_KG = 0.02
 
 export interface HourResult {
   state: SheetState
@@ -35,22 +38,25 @@ function advance(state: SheetState, hour: PreparedHour, seconds: number): number
   if (state.massKgM2.length === 0) return state.belowKgM2 > 0 ? freezeOpenWater(state, hour, seconds) : 0
   if (isThinIce(state)) return growThinIce(state, hour, seconds)
   const surface = closeSurface(state, hour)
+  const { sharedWm2, throughWm2, absorbedWm2 } = surface.sun
   const isFloating = state.belowKgM2 > 0
+  const last = state.massKgM2.length - 1
+  const groundWm2 = groundHeatWm2(state.base)
   const flows = stepColumn(state, {
     seconds,
     lossAt0Wm2: surface.lossAt0Wm2,
     lossSlopeWm2K: surface.lossSlopeWm2K,
     isBottomAtZero: isFloating,
-    bottomGainWm2: groundHeatWm2(state.base) + (isFloating ? 0 : surface.throughWm2),
-    absorbedWm2: surface.absorbedWm2,
+    bottomGainWm2: groundWm2 + throughWm2,
+    absorbedWm2,
   })
-  const last = state.massKgM2.length - 1
-  const insideWm2 = surface.insideWm2
-  let receivedJM2 = (groundHeatWm2(state.base) + surface.throughWm2 + insideWm2) * seconds - flows.topLossJM2
-  if (isFloating) exchangeWithBelow(state, last, flows.bottomGainJM2, surface.throughWm2, seconds)
-  receivedJM2 += surface.finish(state, flows.topCellC, seconds)
-  receivedJM2 += loseVapour(state, surfaceMassLossKgM2(surface, seconds))
-  return receivedJM2
+  if (isFloating) exchangeWithBelow(state, last, flows.bottomGainJM2, throughWm2, seconds)
+  return (
+    (groundWm2 + sharedWm2) * seconds -
+    flows.topLossJM2 +
+    finishSurface(state, hour, surface, flows.topCellC, seconds) +
+    loseVapour(state, vapourLossKgM2(surface, seconds))
+  )
 }
 
 /** Ice at the foot grows by what conduction takes up beyond what the water gives, or melts. */
@@ -99,12 +105,25 @@ function loseVapour(state: SheetState, lossKgM2: number): number {
     return fromSnow * FUSION_J_PER_KG
   }
   const mass = state.massKgM2[0]!
-  const taken = Math.min(mass * 0.9, lossKgM2)
-  const isWet = state.enthalpyJM2[0]! > -FUSION_J_PER_KG * mass
-  const carried = isWet ? 0 : taken * (state.enthalpyJM2[0]! / mass)
+  const enthalpy = state.enthalpyJM2[0]!
+  const liquid = cellLiquidKgM2(mass, enthalpy)
+  const isMixed = liquid > 0 && liquid < mass
+  const taken = Math.min(isMixed ? liquid : 0.9 * mass, lossKgM2)
+  // Water at 0 °C carries nothing; ice and warm water carry their share.
+  const carried = isMixed ? 0 : taken * (enthalpy / mass)
   state.massKgM2[0]! -= taken
   state.enthalpyJM2[0]! -= carried
-  return -carried
+  return dropDust(state) - carried
+}
+
+/** The last film of a sheet is too thin to have a temperature of its own: it is gone. */
+function dropDust(state: SheetState): number {
+  if (state.massKgM2.length !== 1 || state.massKgM2[0]! > DUST_KG) return 0
+  const lostJM2 = state.enthalpyJM2[0]!
+  state.massKgM2 = []
+  state.enthalpyJM2 = []
+  state.surfaceTemperatureC = 0
+  return -lostJM2
 }
 
 /** Short steps while water freezes at the top or young ice grows; an implicit hour is enough for a sheet that only breathes. */
@@ -116,14 +135,4 @@ function stepsPerHour(state: SheetState): number {
   for (let i = 0; i < state.massKgM2.length; i++)
     thicknessM += cellThicknessM(state.massKgM2[i]!, state.enthalpyJM2[i]!)
   return state.belowKgM2 > 0 && thicknessM < 0.05 ? 4 : 1
-}
-
-/** Enthalpy of ice. [J/kg] */
-export function iceEnthalpyJKg(temperatureC: number): number {
-  return ICE_HEAT_CAPACITY * temperatureC - FUSION_J_PER_KG
-}
-
-/** Thickness of a mass of ice. [m] */
-export function iceThicknessM(massKgM2: number): number {
-  return massKgM2 / ICE_DENSITY
 }

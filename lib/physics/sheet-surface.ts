@@ -6,119 +6,138 @@ import {
   SUBLIMATION_J_PER_KG,
   VAPORISATION_J_PER_KG,
 } from './constants'
+import { addToTop } from './sheet-fall'
 import { cellLiquidKgM2, cellTemperatureC, faceResistance } from './column'
+import { NO_SUNSHINE, shareSunshine, type SharedSunshine } from './sunshine-in-ice'
 import { snowConductivity } from './snow'
 import { surfaceLaw, type SurfaceLaw } from './balance'
-import { addToTop } from './sheet-fall'
-import { shareSunshine } from './sunshine-in-ice'
 import type { PreparedHour } from './types'
 import type { SheetState } from './sheet-state'
 import type { SurfaceKind } from './albedo'
 
-/** The top boundary of one step, and what is left to do once the step is known. */
+/** The top boundary of one step. The column loses `lossAt0Wm2 + lossSlopeWm2K · T` of its top cell. */
 export interface ClosedSurface {
+  kind: SurfaceKind
   lossAt0Wm2: number
   lossSlopeWm2K: number
-  /** Sunshine absorbed in cells, in all cells together, and what comes out at the foot. [W/m²] */
-  absorbedWm2: Float64Array | null
-  insideWm2: number
-  throughWm2: number
   latentWm2: number
-  kind: SurfaceKind
-  /** Sets the surface temperature, melts snow; returns enthalpy that came in besides the column's flows. [J/m²] */
-  finish(state: SheetState, topCellC: number, seconds: number): number
+  /** Between the surface and the middle of the top cell. [m² K/W] */
+  resistance: number
+  sun: SharedSunshine
+  /** Held at 0 °C by melting. */
+  isMelting: boolean
+  /** What melting snow gains from above, 0 otherwise. [W/m²] */
+  snowGainWm2: number
 }
 
 /** Snow too thin to count as cover. [kg/m²] */
 const TRACE_OF_SNOW_KG = 0.1
+/** The law is drawn anew when the surface turns out further than this from where it was drawn. [K] */
+const REDRAW_K = 1
 
 /** Closes the balance of the surface for the coming step. */
 export function closeSurface(state: SheetState, hour: PreparedHour): ClosedSurface {
   const mass = state.massKgM2[0]!
   const enthalpy = state.enthalpyJM2[0]!
   const topC = cellTemperatureC(mass, enthalpy)
-  if (state.snowKgM2 > TRACE_OF_SNOW_KG) return underSnow(state, hour, mass, enthalpy)
-  if (topC > 0) return openTop(surfaceLaw(hour, 'wet', topC), 'wet', 0)
-  const liquid = cellLiquidKgM2(mass, enthalpy)
-  if (liquid > 0) {
-    const law = surfaceLaw(hour, 'wet', 0)
-    const skin = law.netWm2 > 0 ? (mass - liquid) / ICE_DENSITY / ICE_CONDUCTIVITY : 0
-    return openTop(law, 'wet', skin)
+  if (state.snowKgM2 > TRACE_OF_SNOW_KG) {
+    return frozenSurface(state, hour, 'snow', topC, snowResistance(state) + faceResistance(mass, enthalpy))
   }
-  return bareIce(state, hour, mass, enthalpy, topC)
+  const liquid = cellLiquidKgM2(mass, enthalpy)
+  if (liquid <= 0) return frozenSurface(state, hour, 'ice', topC, faceResistance(mass, enthalpy))
+  const law = surfaceLaw(hour, 'wet', topC)
+  // What is frozen of a wet cell that loses heat is its skin; while it melts, the water is on top.
+  const skin = law.netWm2 > 0 ? (mass - liquid) / ICE_DENSITY / ICE_CONDUCTIVITY : 0
+  return passedThrough('wet', law, NO_SUNSHINE, skin)
 }
 
-function bareIce(state: SheetState, hour: PreparedHour, mass: number, enthalpy: number, topC: number): ClosedSurface {
-  const resistance = faceResistance(mass, enthalpy)
-  let law = surfaceLaw(hour, 'ice', Math.min(0, state.surfaceTemperatureC))
-  let sun = shareSunshine(state, law.parts.shortwave)
-  let surfaceC = surfaceTemperature(law, sun.sharedWm2, topC, resistance)
-  if (Math.abs(surfaceC - law.aroundC) > 1) {
-    law = surfaceLaw(hour, 'ice', Math.min(0, surfaceC))
-    sun = shareSunshine(state, law.parts.shortwave)
-    surfaceC = surfaceTemperature(law, sun.sharedWm2, topC, resistance)
+/** Sets the surface temperature once the step is known and melts snow. Returns enthalpy besides the column's flows. [J/m²] */
+export function finishSurface(
+  state: SheetState,
+  hour: PreparedHour,
+  surface: ClosedSurface,
+  topC: number,
+  seconds: number,
+): number {
+  if (!surface.isMelting) {
+    const lossWm2 = surface.lossAt0Wm2 + surface.lossSlopeWm2K * topC
+    state.surfaceTemperatureC = topC - lossWm2 * surface.resistance
+    return 0
   }
-  const closed = openTop(law, 'ice', surfaceC > 0 ? 0 : resistance)
-  const damp = surfaceC > 0 ? 1 : 1 / (1 + law.slopeWm2K * resistance)
-  return {
-    ...closed,
-    lossAt0Wm2: closed.lossAt0Wm2 + sun.sharedWm2 * damp,
-    lossSlopeWm2K: surfaceC > 0 ? 0 : closed.lossSlopeWm2K,
-    absorbedWm2: sun.absorbedWm2,
-    insideWm2: sun.sharedWm2 - sun.throughWm2,
-    throughWm2: sun.throughWm2,
-    finish(after, topCellC) {
-      after.surfaceTemperatureC = Math.min(0, surfaceTemperature(law, sun.sharedWm2, topCellC, resistance))
-      return 0
-    },
+  state.surfaceTemperatureC = 0
+  // Measured snow says itself what has melted; how much of it went into the ice is not known, so none is added.
+  if (surface.kind !== 'snow' || hour.snowOnIceCm !== null) return 0
+  return meltSnow(state, Math.max(0, surface.snowGainWm2 + topC / surface.resistance) * seconds)
+}
+
+/** Mass that goes off as vapour, or comes as frost (negative). [kg/m²] */
+export function vapourLossKgM2(surface: ClosedSurface, seconds: number): number {
+  const heat = surface.kind === 'wet' ? VAPORISATION_J_PER_KG : SUBLIMATION_J_PER_KG
+  return (surface.latentWm2 * seconds) / heat
+}
+
+function frozenSurface(
+  state: SheetState,
+  hour: PreparedHour,
+  kind: 'ice' | 'snow',
+  topC: number,
+  resistance: number,
+): ClosedSurface {
+  let law = surfaceLaw(hour, kind, Math.min(0, state.surfaceTemperatureC))
+  let sun = kind === 'ice' ? shareSunshine(state, law.parts.shortwave) : NO_SUNSHINE
+  let surfaceC = surfaceTemperature(law, sun, topC, resistance)
+  if (Math.abs(surfaceC - law.aroundC) > REDRAW_K) {
+    law = surfaceLaw(hour, kind, Math.max(-60, Math.min(0, surfaceC)))
+    if (kind === 'ice') sun = shareSunshine(state, law.parts.shortwave)
+    surfaceC = surfaceTemperature(law, sun, topC, resistance)
   }
+  if (surfaceC <= 0) return passedThrough(kind, law, sun, resistance)
+  return kind === 'ice' ? meltingIce(law, sun) : meltingSnow(law, resistance)
 }
 
 /** A surface that passes its loss on to the top cell through a resistance. */
-function openTop(law: SurfaceLaw, kind: SurfaceKind, resistance: number): ClosedSurface {
+function passedThrough(kind: SurfaceKind, law: SurfaceLaw, sun: SharedSunshine, resistance: number): ClosedSurface {
   const damp = 1 / (1 + law.slopeWm2K * resistance)
-  const lossAt0 = law.netWm2 - law.slopeWm2K * law.aroundC
   return {
-    lossAt0Wm2: lossAt0 * damp,
-    lossSlopeWm2K: law.slopeWm2K * damp,
-    absorbedWm2: null,
-    insideWm2: 0,
-    throughWm2: 0,
-    latentWm2: law.parts.latent,
     kind,
-    finish(after, topCellC) {
-      const lossWm2 = (lossAt0 + law.slopeWm2K * topCellC) * damp
-      after.surfaceTemperatureC = topCellC - lossWm2 * resistance
-      return 0
-    },
+    lossAt0Wm2: lossAt0(law, sun) * damp,
+    lossSlopeWm2K: law.slopeWm2K * damp,
+    latentWm2: law.parts.latent,
+    resistance,
+    sun,
+    isMelting: false,
+    snowGainWm2: 0,
   }
 }
 
-function underSnow(state: SheetState, hour: PreparedHour, mass: number, enthalpy: number): ClosedSurface {
-  const topC = cellTemperatureC(mass, enthalpy)
-  const density = Math.min(500, Math.max(30, state.snowKgM2 / Math.max(1e-4, state.snowDepthCm / 100)))
-  const resistance = state.snowDepthCm / 100 / snowConductivity(density) + faceResistance(mass, enthalpy)
-  let law = surfaceLaw(hour, 'snow', Math.min(0, state.surfaceTemperatureC))
-  let surfaceC = surfaceTemperature(law, 0, topC, resistance)
-  if (Math.abs(surfaceC - law.aroundC) > 1) {
-    law = surfaceLaw(hour, 'snow', Math.min(0, surfaceC))
-    surfaceC = surfaceTemperature(law, 0, topC, resistance)
-  }
-  if (surfaceC <= 0) return openTop(law, 'snow', resistance)
-  const gainWm2 = -(law.netWm2 - law.slopeWm2K * law.aroundC)
+function meltingIce(law: SurfaceLaw, sun: SharedSunshine): ClosedSurface {
   return {
-    ...openTop(law, 'snow', resistance),
+    kind: 'ice',
+    lossAt0Wm2: lossAt0(law, sun),
+    lossSlopeWm2K: 0,
+    latentWm2: law.parts.latent,
+    resistance: 0,
+    sun,
+    isMelting: true,
+    snowGainWm2: 0,
+  }
+}
+
+function meltingSnow(law: SurfaceLaw, resistance: number): ClosedSurface {
+  return {
+    kind: 'snow',
     lossAt0Wm2: 0,
     lossSlopeWm2K: 1 / resistance,
-    finish: (after, topCellC, seconds) =>
-      hour.snowOnIceCm === null ? meltSnow(after, gainWm2 + topCellC / resistance, seconds) : keepSnow(after),
+    latentWm2: law.parts.latent,
+    resistance,
+    sun: NO_SUNSHINE,
+    isMelting: true,
+    snowGainWm2: -lossAt0(law, NO_SUNSHINE),
   }
 }
 
-/** Melts snow with what the surface gains beyond what it passes down; the water goes to the top cell, which may freeze it. */
-function meltSnow(state: SheetState, spareWm2: number, seconds: number): number {
-  state.surfaceTemperatureC = 0
-  const spareJM2 = Math.max(0, spareWm2) * seconds
+/** The water of melting snow goes to the top cell, which may freeze it again. */
+function meltSnow(state: SheetState, spareJM2: number): number {
   const meltKg = Math.min(state.snowKgM2, spareJM2 / FUSION_J_PER_KG)
   const left = state.snowKgM2 - meltKg
   state.snowDepthCm *= left / state.snowKgM2
@@ -127,20 +146,18 @@ function meltSnow(state: SheetState, spareWm2: number, seconds: number): number 
   return spareJM2
 }
 
-/** Measured snow says itself what has melted; how much of it went into the ice is not known, so none is added. */
-function keepSnow(state: SheetState): number {
-  state.surfaceTemperatureC = 0
-  return 0
+function snowResistance(state: SheetState): number {
+  const depthM = state.snowDepthCm / 100
+  const density = Math.min(500, Math.max(30, state.snowKgM2 / Math.max(1e-4, depthM)))
+  return depthM / snowConductivity(density)
+}
+
+function lossAt0(law: SurfaceLaw, sun: SharedSunshine): number {
+  return law.netWm2 + sun.sharedWm2 - law.slopeWm2K * law.aroundC
 }
 
 /** Where conduction from the top cell meets the law of the surface. [°C] */
-function surfaceTemperature(law: SurfaceLaw, sharedWm2: number, topC: number, resistance: number): number {
-  const lossAt0 = law.netWm2 + sharedWm2 - law.slopeWm2K * law.aroundC
-  return topC - ((lossAt0 + law.slopeWm2K * topC) / (1 + law.slopeWm2K * resistance)) * resistance
-}
-
-/** Mass that goes off as vapour, or comes as frost (negative). [kg/m²] */
-export function surfaceMassLossKgM2(surface: ClosedSurface, seconds: number): number {
-  const heat = surface.kind === 'ice' || surface.kind === 'snow' ? SUBLIMATION_J_PER_KG : VAPORISATION_J_PER_KG
-  return (surface.latentWm2 * seconds) / heat
+function surfaceTemperature(law: SurfaceLaw, sun: SharedSunshine, topC: number, resistance: number): number {
+  const lossWm2 = (lossAt0(law, sun) + law.slopeWm2K * topC) / (1 + law.slopeWm2K * resistance)
+  return topC - lossWm2 * resistance
 }

@@ -16,11 +16,12 @@ export interface SharedSunshine {
   throughWm2: number
 }
 
-const NIGHT: SharedSunshine = { sharedWm2: 0, absorbedWm2: null, throughWm2: 0 }
+/** Night, or a surface that keeps all sunshine to itself. */
+export const NO_SUNSHINE: SharedSunshine = { sharedWm2: 0, absorbedWm2: null, throughWm2: 0 }
 
 /** Shares absorbed sunshine out over the cells of a bare sheet. */
 export function shareSunshine(state: SheetState, absorbedAtAllWm2: number): SharedSunshine {
-  if (absorbedAtAllWm2 <= 0) return NIGHT
+  if (absorbedAtAllWm2 <= 0) return NO_SUNSHINE
   const sharedWm2 = absorbedAtAllWm2 * PASSING_SHARE
   const absorbedWm2 = new Float64Array(state.massKgM2.length)
   let left = sharedWm2

@@ -1,0 +1,98 @@
+// `npm run bench`: how long the model takes to score a week, one forecast run and thirty-one, and the plain column beside it.
+import { advanceSheet, createSheet, type SheetState } from '@/lib/physics/sheet'
+import { explicitMinutesToSet } from '@/tests/support/explicit-column'
+import { minutesToSet } from '@/lib/physics/layer'
+import { prepareHours } from '@/lib/physics/prepare'
+import { freezeRateMmPerH, wetSurfaceBalance } from '@/lib/physics/balance'
+import { windChillC } from '@/lib/physics/wind-chill'
+import type { HourlyRecord, PreparedHour } from '@/lib/physics/types'
+
+const HOURS = 168
+const MEMBERS = 31
+const SITE = { latitudeDeg: 45.9, longitudeDeg: -77.3, shelter: 0.6, skyView: 0.85 }
+const LAYER = { layerMm: 3, temperatureC: 6 }
+const SHEET = { thicknessMm: 90, temperatureC: -4, snowCoverCm: 0, base: 'liner' as const }
+
+/** A winter week with day and night, a cold and a mild spell; each run a little apart from the others. */
+function weekOfWeather(run: number): HourlyRecord[] {
+  return Array.from({ length: HOURS }, (_, hour) => {
+    const airTemperatureC = -6 + 5 * Math.sin((hour / 24) * 2 * Math.PI) + 5 * Math.sin(hour / 25 + run / 10) + run / 20
+    return {
+      time: new Date(Date.UTC(2027, 0, 12, 17 + hour)).toISOString(),
+      airTemperatureC,
+      dewPointC: airTemperatureC - 3,
+      windSpeedMps: 3 + 2 * Math.sin(hour / 7 + run),
+      windGustMps: null,
+      cloudCover: 0.5 + 0.5 * Math.sin(hour / 9 + run),
+      shortwaveWm2: null,
+      precipitationMm: 0,
+      rainMm: 0,
+      snowfallCm: 0,
+      pressureHpa: 1010,
+    }
+  })
+}
+
+/** Everything the physics does for a score of one run: balance, wind chill, sheet, and the set time of a layer at each hour. */
+function scoreRun(records: HourlyRecord[]): { states: SheetState[]; hours: PreparedHour[]; sum: number } {
+  const hours = prepareHours(records, SITE)
+  const states: SheetState[] = []
+  let state = createSheet(SHEET)
+  let sum = 0
+  for (let i = 0; i < hours.length; i++) {
+    const hour = hours[i]!
+    states.push(state)
+    sum += freezeRateMmPerH(wetSurfaceBalance(hour).netWm2) + windChillC(hour.airTemperatureC, hour.windSpeedMps)
+    sum += minutesToSet(state, hours, i, 0, LAYER) ?? 0
+    state = advanceSheet(state, hour)
+  }
+  return { states, hours, sum }
+}
+
+/** The same set times by the plain column; only every so many hours, scaled up, as it is slow. */
+function explicitMillis(states: SheetState[], hours: PreparedHour[], every: number): number {
+  const start = performance.now()
+  for (let i = 0; i < HOURS - 24; i += every) {
+    explicitMinutesToSet({
+      sheet: [{ thicknessMm: SHEET.thicknessMm, temperatureC: Math.min(-0.1, states[i]!.surfaceTemperatureC / 2) }],
+      layer: LAYER,
+      hours: hours.slice(i, i + 24),
+      groundWm2: 5,
+    })
+  }
+  return (performance.now() - start) * every
+}
+
+function medianMillis(rounds: number, run: () => void): number {
+  const times = Array.from({ length: rounds }, () => {
+    const start = performance.now()
+    run()
+    return performance.now() - start
+  })
+  return times.sort((a, b) => a - b)[Math.floor(rounds / 2)]!
+}
+
+const week = weekOfWeather(0)
+const members = Array.from({ length: MEMBERS }, (_, run) => weekOfWeather(run))
+medianMillis(60, () => scoreRun(week))
+const oneRunMs = medianMillis(200, () => scoreRun(week))
+const membersMs = medianMillis(20, () => members.forEach(scoreRun))
+const { states, hours } = scoreRun(week)
+const explicitMs = explicitMillis(states, hours, 6)
+const rows = [
+  { what: 'physics of 168 hours, one run', medianMs: oneRunMs, barMs: 3 },
+  { what: `physics of 168 hours, ${MEMBERS} members`, medianMs: membersMs, barMs: 60 },
+  { what: 'set times alone by the 1 mm explicit column', medianMs: explicitMs, barMs: null },
+]
+const timesFaster = explicitMs / oneRunMs
+
+if (process.argv.includes('--json')) {
+  console.log(JSON.stringify({ rows, timesFaster }, null, 2))
+} else {
+  for (const { what, medianMs, barMs } of rows) {
+    console.log(`${what.padEnd(48)}${medianMs.toFixed(2).padStart(10)} ms${barMs === null ? '' : `   (bar ${barMs})`}`)
+  }
+  console.log(
+    `${'times faster than the explicit column'.padEnd(48)}${timesFaster.toFixed(0).padStart(10)}      (bar 20)`,
+  )
+}

@@ -1,5 +1,5 @@
 // The worker: reads settings, builds the parts, runs the timetable and the queue, and drains on SIGTERM.
-import { run } from 'graphile-worker'
+import { Logger, run } from 'graphile-worker'
 import pg from 'pg'
 import { readEnvironment } from '@/lib/env'
 import { logEvent, logFailure } from '@/lib/log'
@@ -9,6 +9,11 @@ import { announcePresence } from './presence'
 import { requestSweep, startSchedule } from './schedule'
 
 const CONCURRENCY = 4
+
+/** The queue's own chatter stays out of the log; handlers and failures write one JSON line each. */
+const quietLogger = new Logger(() => (level, message) => {
+  if (level === 'error') logEvent('queue.complained', { message })
+})
 
 function queuePool(connectionString: string): pg.Pool {
   const pool = new pg.Pool({ connectionString, max: CONCURRENCY + 2, application_name: 'nightsheet queue' })
@@ -23,7 +28,13 @@ async function main(): Promise<void> {
   const parts = createParts(env)
   const leave = await announcePresence(env.DATABASE_URL)
   const pgPool = queuePool(env.DATABASE_URL)
-  const runner = await run({ pgPool, concurrency: CONCURRENCY, noHandleSignals: true, taskList: taskList(parts) })
+  const runner = await run({
+    pgPool,
+    concurrency: CONCURRENCY,
+    noHandleSignals: true,
+    logger: quietLogger,
+    taskList: taskList(parts),
+  })
   const stopSchedule = startSchedule(parts.db, parts.readClock)
   await requestSweep(parts.db, parts.readClock())
   logEvent('worker.started', { concurrency: CONCURRENCY })

@@ -47,7 +47,7 @@ export const DEMO_RINKS = [
     },
   },
   {
-    scenario: 'deep-cold',
+    scenario: 'clear-cold-night',
     fields: {
       ...USUAL,
       creationKey: '6a2f4a0e-3c1b-4a7c-9d55-0f1e2d3c4b03',
@@ -80,7 +80,7 @@ export const DEMO_RINKS = [
     },
   },
   {
-    scenario: 'clear-cold-night',
+    scenario: 'cold-and-cloudy',
     fields: {
       ...USUAL,
       phase: 'waiting',

@@ -1,4 +1,5 @@
-// Runs before every page: gives it its Content-Security-Policy, and sends browsers without a session cookie to sign-in.
+// Runs before every page: gives it its Content-Security-Policy, refuses forms of megabytes, and sends browsers without
+// a session cookie to sign-in.
 // Not an authorisation: services check who asks.
 import { randomBytes } from 'node:crypto'
 import { NextResponse, type NextRequest } from 'next/server'
@@ -6,10 +7,15 @@ import { PATH_HEADER } from '@/lib/auth/next-path'
 import { sessionCookie } from '@/lib/auth/session-cookie'
 import { readEnvironment } from '@/lib/env'
 import { contentSecurityPolicy } from '@/lib/http/content-security-policy'
+import { BODY_LIMIT_BYTES } from '@/lib/http/read-json'
 
 const MEMBER_PATHS = /^\/(rinks|account|admin)(\/|$)/
 
 export function proxy(request: NextRequest): NextResponse {
+  if (Number(request.headers.get('content-length') ?? 0) > BODY_LIMIT_BYTES) {
+    // Next would answer a form of megabytes with 500, after reading it.
+    return new NextResponse('That is more than any of our forms holds (64 kB).', { status: 413 })
+  }
   const { PUBLIC_URL } = readEnvironment()
   const { pathname, search } = request.nextUrl
   if (MEMBER_PATHS.test(pathname) && !request.cookies.has(sessionCookie(PUBLIC_URL).name)) {

@@ -25,7 +25,7 @@ export default async function CheckYourMailPage({ searchParams }: PageProps<'/ch
       <p className="mt-2 text-graphite">{why}</p>
       <p className="mt-8 border-t border-rule pt-4 text-note text-graphite">
         Nothing there after a few minutes? Look among the unwanted mail, check the spelling of the address, and{' '}
-        <Link href={again} className="inline-flex min-h-touch items-center text-ink">
+        <Link href={again} className="py-3 text-ink underline">
           try again
         </Link>
         .

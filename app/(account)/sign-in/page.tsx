@@ -20,13 +20,13 @@ export default async function SignInPage({ searchParams }: PageProps<'/sign-in'>
       {error ? <Notice tone="caution">{SIGN_IN_REFUSED}</Notice> : null}
       <SignInForm next={localPath(next)} />
       <p className="mt-4 text-note">
-        <Link href="/reset" className="inline-flex min-h-touch items-center">
+        <Link href="/reset" className="inline-flex min-h-touch items-center underline">
           I forgot my password
         </Link>
       </p>
       <p className="mt-4 border-t border-rule pt-4 text-note text-graphite">
         No account yet?{' '}
-        <Link href="/sign-up" className="inline-flex min-h-touch items-center text-ink">
+        <Link href="/sign-up" className="inline-flex min-h-touch items-center text-ink underline">
           Sign up
         </Link>
       </p>

@@ -16,7 +16,7 @@ export default async function SignUpPage() {
       <SignUpForm />
       <p className="mt-8 border-t border-rule pt-4 text-note text-graphite">
         Signed up before?{' '}
-        <Link href="/sign-in" className="inline-flex min-h-touch items-center text-ink">
+        <Link href="/sign-in" className="inline-flex min-h-touch items-center text-ink underline">
           Sign in
         </Link>
       </p>

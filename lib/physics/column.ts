@@ -88,9 +88,10 @@ export function stepColumn(column: Column, step: ColumnStep): ColumnFlows {
   const { massKgM2: mass, enthalpyJM2: enthalpy } = column
   const count = mass.length
   for (let i = 0; i < count; i++) phase[i] = phaseOf(mass[i]!, enthalpy[i]!)
+  const footC = cellTemperatureC(mass[count - 1]!, enthalpy[count - 1]!)
   let isSettled = false
   for (let round = 0; round < 8 && !isSettled; round++) {
-    fillConductances(mass, count, step)
+    fillConductances(mass, count, step, footC)
     solveTemperatures(mass, enthalpy, count, step)
     isSettled = settleEnthalpies(mass, enthalpy, count, step)
   }
@@ -114,7 +115,7 @@ function resistanceOf(mass: number, kind: number): number {
     : mass / (WATER_FACE * WATER_DENSITY * WATER_CONDUCTIVITY)
 }
 
-function fillConductances(mass: number[], count: number, step: ColumnStep): void {
+function fillConductances(mass: number[], count: number, step: ColumnStep, footC: number): void {
   let above = resistanceOf(mass[0]!, phase[0]!)
   for (let i = 1; i < count; i++) {
     const below = resistanceOf(mass[i]!, phase[i]!)
@@ -123,7 +124,14 @@ function fillConductances(mass: number[], count: number, step: ColumnStep): void
     conductance[i] = resistance > 0 ? 1 / resistance : 0
     above = below
   }
-  conductance[count] = step.isBottomAtZero && above > 0 ? 1 / above : 0
+  conductance[count] = step.isBottomAtZero && above > 0 ? 1 / (above + halfNewIce(above, footC, step.seconds)) : 0
+}
+
+/** Resistance of half the ice that will grow at the foot in this step: q (R + q dt / 2Lρk) = -T, solved for q. [m² K/W] */
+function halfNewIce(resistance: number, footC: number, seconds: number): number {
+  if (footC >= 0) return 0
+  const perFlux = seconds / (2 * FUSION_J_PER_KG * ICE_DENSITY * ICE_CONDUCTIVITY)
+  return (Math.sqrt(resistance * resistance - 4 * perFlux * footC) - resistance) / 2
 }
 
 function solveTemperatures(mass: number[], enthalpy: number[], count: number, step: ColumnStep): void {

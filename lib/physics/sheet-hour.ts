@@ -1,14 +1,16 @@
 // One hour in the life of a sheet: what falls on it, what it loses, what it gains from below.
 import { FUSION_J_PER_KG, HOUR_SECONDS, WATER_HEAT_CAPACITY } from './constants'
-import { cellLiquidKgM2, cellThicknessM, stepColumn } from './column'
+import { cellTemperatureC, cellLiquidKgM2, cellThicknessM, stepColumn } from './column'
 import { groundHeatWm2, waterToIceWm2 } from './ground'
-import { closeSurface, finishSurface, vapourLossKgM2 } from './sheet-surface'
+import { closeSurface, finishSurface, vapourLossKgM2, type ClosedSurface } from './sheet-surface'
 import { fallOnSheet, setMeasuredSnow } from './sheet-fall'
-import { freezeOpenWater, growThinIce, isThinIce } from './thin-ice'
+import { freezeOpenWater, growThinIce, isThinIce, type LinearLoss } from './thin-ice'
+import { surfaceLaw } from './balance'
 import { settledDepthCm } from './snow'
 import { tidyCells } from './grid'
 import type { PreparedHour } from './types'
 import type { SheetState } from './sheet-state'
+import type { SurfaceKind } from './albedo'
 
 /** [kg/m²] */
 const DUST_KG = 0.02
@@ -35,13 +37,24 @@ export function runHour(before: SheetState, hour: PreparedHour): HourResult {
 }
 
 function advance(state: SheetState, hour: PreparedHour, seconds: number): number {
-  if (state.massKgM2.length === 0) return state.belowKgM2 > 0 ? freezeOpenWater(state, hour, seconds) : 0
-  if (isThinIce(state)) return growThinIce(state, hour, seconds)
+  const groundWm2 = groundHeatWm2(state.base)
+  if (state.massKgM2.length === 0) {
+    if (state.belowKgM2 <= 0) return 0
+    return freezeOpenWater(state, lossOf(hour, 'water', state.belowTemperatureC), groundWm2, seconds)
+  }
+  if (isThinIce(state)) return growThinIce(state, lossOf(hour, 'wet', 0), groundWm2, seconds)
   const surface = closeSurface(state, hour)
+  const conducted = conductThrough(state, surface, groundWm2, seconds)
+  const topC = cellTemperatureC(state.massKgM2[0]!, state.enthalpyJM2[0]!)
+  return (
+    conducted + finishSurface(state, hour, surface, topC, seconds) + loseVapour(state, vapourLossKgM2(surface, seconds))
+  )
+}
+
+/** Conducts for a while under a closed surface and lets the foot grow or melt. Returns enthalpy received. [J/m²] */
+export function conductThrough(state: SheetState, surface: ClosedSurface, groundWm2: number, seconds: number): number {
   const { sharedWm2, throughWm2, absorbedWm2 } = surface.sun
   const isFloating = state.belowKgM2 > 0
-  const last = state.massKgM2.length - 1
-  const groundWm2 = groundHeatWm2(state.base)
   const flows = stepColumn(state, {
     seconds,
     lossAt0Wm2: surface.lossAt0Wm2,
@@ -50,39 +63,29 @@ function advance(state: SheetState, hour: PreparedHour, seconds: number): number
     bottomGainWm2: groundWm2 + throughWm2,
     absorbedWm2,
   })
-  if (isFloating) exchangeWithBelow(state, last, flows.bottomGainJM2, throughWm2, seconds)
-  return (
-    (groundWm2 + sharedWm2) * seconds -
-    flows.topLossJM2 +
-    finishSurface(state, hour, surface, flows.topCellC, seconds) +
-    loseVapour(state, vapourLossKgM2(surface, seconds))
-  )
+  if (isFloating) exchangeWithBelow(state, flows.bottomGainJM2, groundWm2 + throughWm2, seconds)
+  return (groundWm2 + sharedWm2) * seconds - flows.topLossJM2
+}
+
+function lossOf(hour: PreparedHour, kind: SurfaceKind, aroundC: number): LinearLoss {
+  const law = surfaceLaw(hour, kind, aroundC)
+  return { lossAt0Wm2: law.netWm2 - law.slopeWm2K * aroundC, slopeWm2K: law.slopeWm2K }
 }
 
 /** Ice at the foot grows by what conduction takes up beyond what the water gives, or melts. */
-function exchangeWithBelow(
-  state: SheetState,
-  last: number,
-  gainJM2: number,
-  throughWm2: number,
-  seconds: number,
-): void {
-  const fromWaterJM2 = Math.min(
-    waterToIceWm2(state.belowTemperatureC, state.belowKgM2) * seconds,
-    state.belowKgM2 * WATER_HEAT_CAPACITY * state.belowTemperatureC,
+function exchangeWithBelow(state: SheetState, takenJM2: number, intoWaterWm2: number, seconds: number): void {
+  const last = state.massKgM2.length - 1
+  const heatJM2 = state.belowKgM2 * WATER_HEAT_CAPACITY * state.belowTemperatureC
+  const fromWaterJM2 = Math.min(waterToIceWm2(state.belowTemperatureC, state.belowKgM2) * seconds, heatJM2)
+  const frozenKg = Math.min(
+    state.belowKgM2,
+    Math.max(-0.9 * state.massKgM2[last]!, (takenJM2 - fromWaterJM2) / FUSION_J_PER_KG),
   )
-  const wantedKg = (gainJM2 - fromWaterJM2) / FUSION_J_PER_KG
-  const mostMelt = Math.max(0, state.massKgM2[last]! * 0.9)
-  const frozenKg = Math.min(state.belowKgM2, Math.max(-mostMelt, wantedKg))
-  const givenJM2 = frozenKg * FUSION_J_PER_KG + fromWaterJM2
-  state.enthalpyJM2[last]! += givenJM2 - gainJM2 - FUSION_J_PER_KG * frozenKg
+  // New ice brings its heat of fusion with it; what could not freeze for want of water was not taken either.
+  state.enthalpyJM2[last]! += fromWaterJM2 - takenJM2
   state.massKgM2[last]! += frozenKg
-  const heatJM2 =
-    state.belowKgM2 * WATER_HEAT_CAPACITY * state.belowTemperatureC -
-    fromWaterJM2 +
-    (groundHeatWm2(state.base) + throughWm2) * seconds
   state.belowKgM2 -= frozenKg
-  warmBelow(state, last, heatJM2)
+  warmBelow(state, last, heatJM2 - fromWaterJM2 + intoWaterWm2 * seconds)
 }
 
 function warmBelow(state: SheetState, last: number, heatJM2: number): void {
@@ -127,7 +130,7 @@ function dropDust(state: SheetState): number {
 }
 
 /** Short steps while water freezes at the top or young ice grows; an implicit hour is enough for a sheet that only breathes. */
-function stepsPerHour(state: SheetState): number {
+export function stepsPerHour(state: SheetState): number {
   if (state.massKgM2.length === 0) return 4
   const isWet = state.enthalpyJM2[0]! > -FUSION_J_PER_KG * state.massKgM2[0]!
   if (isWet) return 4

@@ -96,7 +96,12 @@ function frozenSurface(
 }
 
 /** A surface that passes its loss on to the top cell through a resistance. */
-function passedThrough(kind: SurfaceKind, law: SurfaceLaw, sun: SharedSunshine, resistance: number): ClosedSurface {
+export function passedThrough(
+  kind: SurfaceKind,
+  law: SurfaceLaw,
+  sun: SharedSunshine,
+  resistance: number,
+): ClosedSurface {
   const damp = 1 / (1 + law.slopeWm2K * resistance)
   return {
     kind,

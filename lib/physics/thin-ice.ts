@@ -1,12 +1,16 @@
 // Open water and the first centimetres of ice, where the film freezes faster than a grid could follow.
 import { FUSION_J_PER_KG, ICE_CONDUCTIVITY, ICE_DENSITY, ICE_HEAT_CAPACITY, WATER_HEAT_CAPACITY } from './constants'
-import { groundHeatWm2, waterToIceWm2 } from './ground'
-import { surfaceLaw } from './balance'
-import type { PreparedHour } from './types'
+import { waterToIceWm2 } from './ground'
 import type { SheetState } from './sheet-state'
 
-/** Ice thinner than this on water grows by the closed form. [kg/m²] 15 mm */
-const THIN_KG = 15e-3 * ICE_DENSITY
+/** A surface that loses `lossAt0Wm2` at 0 °C and `slopeWm2K` more for each kelvin above. */
+export interface LinearLoss {
+  lossAt0Wm2: number
+  slopeWm2K: number
+}
+
+/** Ice thinner than this on water grows by the closed form. [kg/m²] 25 mm */
+const THIN_KG = 25e-3 * ICE_DENSITY
 
 /** Thin, bare, without water on it, afloat, and not melting from the last hour. */
 export function isThinIce(state: SheetState): boolean {
@@ -16,34 +20,28 @@ export function isThinIce(state: SheetState): boolean {
   return mass < THIN_KG
 }
 
-/** Cools open water; what it cannot give becomes the first ice. Returns enthalpy received. [J/m²] */
-export function freezeOpenWater(state: SheetState, hour: PreparedHour, seconds: number): number {
-  const law = surfaceLaw(hour, 'water', state.belowTemperatureC)
+/** Cools open water to 0 °C and freezes it in what is left of the step. Returns enthalpy received. [J/m²] */
+export function freezeOpenWater(state: SheetState, law: LinearLoss, groundWm2: number, seconds: number): number {
   const capacity = state.belowKgM2 * WATER_HEAT_CAPACITY
-  const gainWm2 = groundHeatWm2(state.base) - law.netWm2
+  const gainWm2 = groundWm2 - law.lossAt0Wm2 - law.slopeWm2K * state.belowTemperatureC
   const change = (gainWm2 * seconds) / (capacity + law.slopeWm2K * seconds)
-  const receivedJM2 = change * capacity
-  const total = capacity * state.belowTemperatureC + receivedJM2
-  if (total >= 0) {
-    state.belowTemperatureC = total / capacity
+  if (state.belowTemperatureC + change >= 0) {
+    state.belowTemperatureC += change
     state.surfaceTemperatureC = state.belowTemperatureC
-    return receivedJM2
+    return change * capacity
   }
-  const iceKg = Math.min(state.belowKgM2, -total / FUSION_J_PER_KG)
-  state.massKgM2.push(iceKg)
-  state.enthalpyJM2.push(total)
-  state.belowKgM2 -= iceKg
+  const coolingShare = -state.belowTemperatureC / change
+  const coolingJM2 = -state.belowTemperatureC * capacity
   state.belowTemperatureC = 0
-  state.surfaceTemperatureC = 0
-  return receivedJM2
+  return coolingJM2 + growThinIce(state, law, groundWm2, seconds * (1 - coolingShare))
 }
 
 /**
  * Grows (or melts) thin floating ice by the closed form h + G h²/2k: exact for a steady loss at 0 °C that falls off with slope G.
  * Returns enthalpy received. [J/m²]
  */
-export function growThinIce(state: SheetState, hour: PreparedHour, seconds: number): number {
-  const law = surfaceLaw(hour, 'wet', 0)
+export function growThinIce(state: SheetState, law: LinearLoss, groundWm2: number, seconds: number): number {
+  const { lossAt0Wm2, slopeWm2K } = law
   const iceKg = sum(state.massKgM2)
   const oldJM2 = sum(state.enthalpyJM2)
   const capacity = state.belowKgM2 * WATER_HEAT_CAPACITY
@@ -51,14 +49,14 @@ export function growThinIce(state: SheetState, hour: PreparedHour, seconds: numb
     waterToIceWm2(state.belowTemperatureC, state.belowKgM2) * seconds,
     capacity * state.belowTemperatureC,
   )
-  const groundJM2 = groundHeatWm2(state.base) * seconds
-  const lossJM2 = lossOver(law.netWm2, law.slopeWm2K, iceKg / ICE_DENSITY, seconds)
+  const groundJM2 = groundWm2 * seconds
+  const lossJM2 = lossOver(lossAt0Wm2, slopeWm2K, iceKg / ICE_DENSITY, seconds)
   const total = oldJM2 - lossJM2 + fromWaterJM2
   let heatBelow = capacity * state.belowTemperatureC - fromWaterJM2 + groundJM2
   state.massKgM2.length = 0
   state.enthalpyJM2.length = 0
   if (total < 0) {
-    const meanC = meanIceTemperature(law.netWm2, law.slopeWm2K, iceKg / ICE_DENSITY)
+    const meanC = meanIceTemperature(lossAt0Wm2, slopeWm2K, iceKg / ICE_DENSITY)
     const newKg = Math.min(state.belowKgM2 + iceKg, total / (ICE_HEAT_CAPACITY * meanC - FUSION_J_PER_KG))
     state.massKgM2.push(newKg)
     state.enthalpyJM2.push(total)

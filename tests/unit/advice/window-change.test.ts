@@ -27,18 +27,18 @@ const advised = {
   latestStartAt: new Date(at('01:30')),
 }
 
-const stepOf = (
-  summary: ReturnType<typeof summaryOf>,
-  before: Parameters<typeof nextWindowStep>[0] = advised,
-  now = NOW,
-) => nextWindowStep(before, summary, 'flood', now).step
+type Advised = NonNullable<Parameters<typeof nextWindowStep>[0]>
+
+/** `null`: nothing was advised for the night so far. */
+const stepOf = (summary: ReturnType<typeof summaryOf>, before: Advised | null = advised, now = NOW) =>
+  nextWindowStep(before ?? undefined, summary, 'flood', now).step
 
 describe('a first window', () => {
-  test('opens', () => expect(stepOf(summaryOf(windowOf('20:00', '02:00')), undefined)).toBe('open'))
+  test('opens', () => expect(stepOf(summaryOf(windowOf('20:00', '02:00')), null)).toBe('open'))
   test('that closed opens again', () =>
     expect(stepOf(summaryOf(windowOf('20:00', '02:00')), { state: 'closed' })).toBe('open'))
   test('is not made of a window of another kind', () =>
-    expect(stepOf(summaryOf(windowOf('20:00', '02:00', 'fill')), undefined)).toBe('keep'))
+    expect(stepOf(summaryOf(windowOf('20:00', '02:00', 'fill')), null)).toBe('keep'))
   test('stays closed while there is none', () => expect(stepOf(summaryOf(), { state: 'closed' })).toBe('keep'))
 })
 

@@ -89,11 +89,13 @@ export async function stopChild({ child, ended }, patienceMillis = 20_000) {
   signalGroup(child, 'SIGKILL')
 }
 
-/** Runs a program to its end and returns its exit code. */
-export async function runForCode(name, program, args, options) {
+/** Runs a program to its end and returns its exit code; one that takes longer than `limitMillis` is ended. */
+export async function runForCode(name, program, args, { limitMillis, ...options }) {
   const started = startChild(name, program, args, options)
   runs.add(started.child)
+  const limit = limitMillis ? setTimeout(() => void stopChild(started), limitMillis) : undefined
   const { code, error } = await started.ended
+  clearTimeout(limit)
   runs.delete(started.child)
   if (error) throw new Problem(`${name}: cannot run ${program} (${error.message}).`)
   return code

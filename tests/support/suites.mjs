@@ -33,7 +33,13 @@ function environment(extra = {}) {
   return env
 }
 
-const run = (suite, words, env) => runForCode(suite, process.execPath, words, inProject(`test-${suite}`, env))
+// A test that never ends must not hold up whoever waits for the last line.
+const LIMIT_MILLIS = 20 * 60_000
+
+function run(suite, words, env) {
+  const options = { ...inProject(`test-${suite}`, env), limitMillis: LIMIT_MILLIS }
+  return runForCode(suite, process.execPath, words, options)
+}
 
 /** A tool that fails without naming a test, or that finds none, has failed once. */
 function settle(suite, code, counts) {

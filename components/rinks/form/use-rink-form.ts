@@ -1,6 +1,6 @@
 // The state of the rink form: what is typed, what was wrong with it, and the way to the server.
 'use client'
-import { startTransition, useActionState, useEffect, useRef, useState, type FormEvent } from 'react'
+import { startTransition, useActionState, useState, type FormEvent } from 'react'
 import type { FormAction } from '@/components/ui/action-form'
 import { IDLE, type FormState } from '@/lib/http/form-state'
 import { unitOf, type UnitSystem } from '@/lib/schemas/measures'
@@ -8,21 +8,13 @@ import { inUnits, MEASURE_OF, type FormValues } from './values'
 
 export type RinkForm = ReturnType<typeof useRinkForm>
 
-/** Whatever a fault belongs to: a field, or a group of choices. */
-const FAULTY = 'input[aria-invalid=true], select[aria-invalid=true], fieldset[aria-invalid=true] input'
-
 export function useRinkForm(action: FormAction, initial: FormValues) {
   const [state, dispatch, isPending] = useActionState(action, IDLE)
   // Without script the page comes back whole, and this is where what was typed is found again.
   const [values, setValues] = useState<FormValues>(state.values ?? initial)
   // A fault is shown until its field is touched.
   const [mended, setMended] = useState<{ of: FormState; names: string[] }>({ of: state, names: [] })
-  const form = useRef<HTMLFormElement>(null)
   const units: UnitSystem = values.units === 'imperial' ? 'imperial' : 'metric'
-
-  useEffect(() => {
-    if (state.status === 'error') form.current?.querySelector<HTMLElement>(FAULTY)?.focus()
-  }, [state])
 
   const set = (changed: FormValues) => {
     setValues((before) => ({ ...before, ...changed }))
@@ -32,7 +24,6 @@ export function useRinkForm(action: FormAction, initial: FormValues) {
     mended.of === state && mended.names.includes(name) ? undefined : state.fields?.[name]
 
   return {
-    ref: form,
     state,
     dispatch,
     isPending,

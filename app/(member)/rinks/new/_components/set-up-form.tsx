@@ -1,5 +1,6 @@
 // The set-up form: one column, four steps on one page; sent twice, it makes one rink.
 'use client'
+import { RinkFormFrame } from '@/components/rinks/form/frame'
 import { HoursFields } from '@/components/rinks/form/hours-fields'
 import { IceFields } from '@/components/rinks/form/ice-fields'
 import { PlaceFields } from '@/components/rinks/form/place-fields'
@@ -9,16 +10,14 @@ import { useRinkForm } from '@/components/rinks/form/use-rink-form'
 import type { FormValues } from '@/components/rinks/form/values'
 import { WaterFields } from '@/components/rinks/form/water-fields'
 import { YardFields } from '@/components/rinks/form/yard-fields'
-import { Button } from '@/components/ui/button'
 import { TextField } from '@/components/ui/field'
-import { Notice } from '@/components/ui/notice'
 import { setUpRinkAction } from '../actions'
 import { ToldFields } from './told-fields'
 
 export function SetUpForm({ initial, email }: { initial: FormValues; email: string }) {
   const form = useRinkForm(setUpRinkAction, initial)
   return (
-    <form ref={form.ref} action={form.dispatch} onSubmit={form.submit} noValidate>
+    <RinkFormFrame form={form} submit="Set up this rink" busy="Setting up">
       <input type="hidden" name="creationKey" value={form.values.creationKey} />
       <Step number={1} title="The rink">
         <TextField
@@ -42,14 +41,6 @@ export function SetUpForm({ initial, email }: { initial: FormValues; email: stri
         <HoursFields form={form} />
         <ToldFields form={form} email={email} />
       </Step>
-      {form.state.message ? (
-        <Notice tone="caution" live>
-          {form.state.message}
-        </Notice>
-      ) : null}
-      <Button type="submit" look="main" disabled={form.isPending} className="mt-2 w-full lg:w-auto">
-        {form.isPending ? 'Setting up' : 'Set up this rink'}
-      </Button>
-    </form>
+    </RinkFormFrame>
   )
 }

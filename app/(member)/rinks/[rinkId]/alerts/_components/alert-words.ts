@@ -7,7 +7,7 @@ export function timeOfDayText(time: string, clock: '12' | '24'): string {
   const [hours = 0, minutes = 0] = time.split(':').map(Number)
   if (clock === '24') return time
   const half = hours < 12 ? 'am' : 'pm'
-  return `${hours % 12 || 12}${minutes ? `:${String(minutes).padStart(2, '0')}` : ''} ${half}`
+  return `${hours % 12 || 12}${minutes ? `:${String(minutes).padStart(2, '0')}` : ''}\u00a0${half}`
 }
 
 /** What holds now, in one sentence. */

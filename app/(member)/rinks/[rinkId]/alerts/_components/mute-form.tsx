@@ -1,6 +1,7 @@
 'use client'
 // Silence for tonight, through a date, or the end of it.
 import { ActionForm } from '@/components/ui/action-form'
+import { Disclosure } from '@/components/ui/disclosure'
 import { TextField } from '@/components/ui/field'
 import { dayText } from '@/components/rinks/reader'
 import { muteAction } from '../actions'
@@ -27,8 +28,8 @@ export function MuteForm({ rinkId, tonightDate, mutedThroughDate }: Props) {
       <ActionForm action={muteAction} submit="Mute for tonight" look="plain">
         {() => <Hidden rinkId={rinkId} until="tonight" />}
       </ActionForm>
-      <div className="mt-5">
-        <ActionForm action={muteAction} submit="Mute through that night" look="plain">
+      <Disclosure summary="Mute until a date" className="mt-2">
+        <ActionForm action={muteAction} submit="Mute" look="plain">
           {({ fields, values }) => (
             <>
               <Hidden rinkId={rinkId} until="date" />
@@ -43,7 +44,7 @@ export function MuteForm({ rinkId, tonightDate, mutedThroughDate }: Props) {
             </>
           )}
         </ActionForm>
-      </div>
+      </Disclosure>
     </>
   )
 }

@@ -16,7 +16,7 @@ export function ToldList({ settings: { told, rink, clock } }: { settings: AlertS
         const at = message.settledAt ?? message.createdAt
         const date = localDateOf(at.getTime(), rink.timeZone)
         return (
-          <li key={message.id} className="grid grid-cols-[7.5rem_1fr] gap-x-3 border-b border-rule py-2 first:pt-0">
+          <li key={message.id} className="grid grid-cols-[8.75rem_1fr] gap-x-3 border-b border-rule py-2 first:pt-0">
             <time dateTime={at.toISOString()} className="text-note text-graphite">
               {dayText(date)}
               <span className="block">{clockText(at, words)}</span>

@@ -1,5 +1,6 @@
 // The settings form: the fields of set-up, filled in.
 'use client'
+import { RinkFormFrame } from '@/components/rinks/form/frame'
 import { HoursFields } from '@/components/rinks/form/hours-fields'
 import { IceFields } from '@/components/rinks/form/ice-fields'
 import { PlaceFields } from '@/components/rinks/form/place-fields'
@@ -8,15 +9,13 @@ import { useRinkForm } from '@/components/rinks/form/use-rink-form'
 import type { FormValues } from '@/components/rinks/form/values'
 import { WaterFields } from '@/components/rinks/form/water-fields'
 import { YardFields } from '@/components/rinks/form/yard-fields'
-import { Button } from '@/components/ui/button'
 import { TextField } from '@/components/ui/field'
-import { Notice } from '@/components/ui/notice'
 import { changeRinkAction } from '../actions'
 
 export function SettingsForm({ initial }: { initial: FormValues }) {
   const form = useRinkForm(changeRinkAction, initial)
   return (
-    <form ref={form.ref} action={form.dispatch} onSubmit={form.submit} noValidate>
+    <RinkFormFrame form={form} submit="Save" busy="Saving">
       <input type="hidden" name="rinkId" value={form.values.rinkId} />
       <input type="hidden" name="units" value={form.values.units} />
       <Step number={1} title="Ice now">
@@ -35,14 +34,6 @@ export function SettingsForm({ initial }: { initial: FormValues }) {
       <Step number={5} title="The yard">
         <YardFields form={form} />
       </Step>
-      {form.state.message ? (
-        <Notice tone={form.state.status === 'error' ? 'caution' : 'plain'} live>
-          {form.state.message}
-        </Notice>
-      ) : null}
-      <Button type="submit" look="main" disabled={form.isPending} className="mt-2 w-full lg:w-auto">
-        {form.isPending ? 'Saving' : 'Save'}
-      </Button>
-    </form>
+    </RinkFormFrame>
   )
 }

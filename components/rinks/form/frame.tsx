@@ -1,0 +1,37 @@
+// The form round the rink's fields: sends them, says what came of it, and leads to the first fault.
+'use client'
+import { useEffect, useRef, type ReactNode } from 'react'
+import { Button } from '@/components/ui/button'
+import { Notice } from '@/components/ui/notice'
+import type { RinkForm } from './use-rink-form'
+
+/** Whatever a fault belongs to: a field, or a group of choices. */
+const FAULTY = 'input[aria-invalid=true], select[aria-invalid=true], fieldset[aria-invalid=true] input'
+
+interface Props {
+  form: RinkForm
+  submit: string
+  busy: string
+  children: ReactNode
+}
+
+export function RinkFormFrame({ form, submit, busy, children }: Props) {
+  const { state, isPending } = form
+  const element = useRef<HTMLFormElement>(null)
+  useEffect(() => {
+    if (state.status === 'error') element.current?.querySelector<HTMLElement>(FAULTY)?.focus()
+  }, [state])
+  return (
+    <form ref={element} action={form.dispatch} onSubmit={form.submit} noValidate>
+      {children}
+      {state.message ? (
+        <Notice tone={state.status === 'error' ? 'caution' : 'plain'} live>
+          {state.message}
+        </Notice>
+      ) : null}
+      <Button type="submit" look="main" disabled={isPending} className="mt-2 w-full lg:w-auto">
+        {isPending ? busy : submit}
+      </Button>
+    </form>
+  )
+}

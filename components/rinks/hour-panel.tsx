@@ -8,7 +8,7 @@ import { Facts } from '../ui/facts'
 import type { WordOptions } from '@/lib/words/options'
 import { fluxText, rateText, temperatureText, windChillText } from '@/lib/words/quantities'
 import { reasonText } from '@/lib/words/reasons'
-import { clockText } from '@/lib/words/times'
+import { clockText, doneByText } from '@/lib/words/times'
 import { VERDICT_WORDS } from './verdict-words'
 
 const PARTS = [
@@ -38,10 +38,10 @@ export function HourPanel({ hour, reader, onStep, onClose }: HourPanelProps) {
             <h2 className="mr-auto text-lead font-semibold">
               {clockText(hour.time, reader)}, {VERDICT_WORDS[hour.verdict]}
             </h2>
-            <Button look="quiet" onClick={() => onStep(-1)}>
+            <Button look="quiet" className="-mr-3 px-2" onClick={() => onStep(-1)}>
               Earlier
             </Button>
-            <Button look="quiet" onClick={() => onStep(1)}>
+            <Button look="quiet" className="-mr-3 px-2" onClick={() => onStep(1)}>
               Later
             </Button>
             <Button look="quiet" onClick={onClose}>
@@ -59,11 +59,12 @@ function KnownHour({ hour, reader }: { hour: TonightHour; reader: WordOptions })
   return (
     <div className="grid gap-x-14 gap-y-3 lg:grid-cols-[1fr_1fr_1.2fr]">
       <Facts
+        isDense
         rows={[
           { name: 'Freezes', figure: rateText(hour.freezeRateMmPerH ?? 0, reader) },
           {
             name: 'Poured then, set by',
-            figure: hour.setsAt ? clockText(hour.setsAt, reader) : 'not within the forecast',
+            figure: hour.setsAt ? doneByText(hour.setsAt, reader) : 'not within the forecast',
           },
           ...(hour.weather?.airTemperatureC != null
             ? [{ name: 'Air', figure: temperatureText(hour.weather.airTemperatureC, reader) }]
@@ -74,7 +75,7 @@ function KnownHour({ hour, reader }: { hour: TonightHour; reader: WordOptions })
       {hour.parts ? <HeatBalance parts={hour.parts} net={hour.netHeatLossWm2 ?? 0} reader={reader} /> : null}
       <ul className="list-none p-0">
         {tellingReasons(hour).map((reason) => (
-          <li key={reason.code} className="border-b border-rule py-[9px]">
+          <li key={reason.code} className="border-b border-rule py-1">
             {reasonText(reason, reader)}
           </li>
         ))}
@@ -88,6 +89,7 @@ function HeatBalance({ parts, net, reader }: { parts: HeatBalanceParts; net: num
   const figures = { ...parts, shortwave: -parts.shortwave }
   return (
     <Facts
+      isDense
       rows={[
         ...PARTS.map(([part, name]) => ({ name, figure: fluxText(figures[part], reader) })),
         { name: 'In all', figure: fluxText(net, reader), isSum: true },
@@ -105,7 +107,7 @@ function tellingReasons({ reasons }: TonightHour): Reason[] {
 function spokenHour(hour: TonightHour, reader: WordOptions): string {
   if (!hour.isKnown) return `${clockText(hour.time, reader)}: no forecast.`
   const set = hour.setsAt
-    ? `Poured then, set by ${clockText(hour.setsAt, reader)}.`
+    ? `Poured then, set by ${doneByText(hour.setsAt, reader)}.`
     : 'Poured then, not set within the forecast.'
   return `${clockText(hour.time, reader)}: ${VERDICT_WORDS[hour.verdict]}. Freezes ${rateText(hour.freezeRateMmPerH ?? 0, reader)}. ${set}`
 }

@@ -1,11 +1,12 @@
 // The numbers of the strip as a table.
 import type { TonightHour } from '@/lib/schemas/tonight-view'
 import type { WordOptions } from '@/lib/words/options'
-import { numberText, rainText, snowText } from '@/lib/words/quantities'
-import { clockText } from '@/lib/words/times'
+import { numberText } from '@/lib/words/quantities'
+import { clockText, doneByText } from '@/lib/words/times'
 import type { StripHour } from '../charts/night-strip-layout'
 import { DataTable } from '../ui/data-table'
 import { Disclosure } from '../ui/disclosure'
+import { amountText } from './amount-text'
 import { VERDICT_WORDS } from './verdict-words'
 
 interface NightTableProps {
@@ -23,8 +24,7 @@ export function NightTable({ hours, drawn, reader }: NightTableProps) {
     { head: isImperial ? 'Freezes, in/h' : 'Freezes, mm/h', isFigure: true },
     { head: 'If poured, set by', isFigure: true },
     { head: isImperial ? 'Air, °F' : 'Air, °C', isFigure: true },
-    { head: 'Snow', isFigure: true },
-    { head: 'Rain', isFigure: true },
+    { head: 'Falls', isFigure: true },
   ]
   const rows = hours.map((hour, index) => ({ key: hour.time, cells: cellsOf(hour, drawn[index], reader) }))
   return (
@@ -34,20 +34,15 @@ export function NightTable({ hours, drawn, reader }: NightTableProps) {
   )
 }
 
-type Write = (value: number, reader: WordOptions) => string
-
 function cellsOf(hour: TonightHour, drawn: StripHour | undefined, reader: WordOptions): string[] {
   const figure = (value: number | null | undefined, digits: number) =>
     value == null ? 'no forecast' : numberText(value, digits, reader)
-  const amount = (value: number | null | undefined, write: Write) =>
-    value == null ? 'no forecast' : value === 0 ? 'none' : write(value, reader)
   return [
     clockText(hour.time, reader),
     VERDICT_WORDS[hour.verdict],
     figure(drawn?.rate, reader.units === 'imperial' ? 2 : 1),
-    hour.setsAt ? clockText(hour.setsAt, reader) : hour.isKnown ? 'not set' : 'unknown',
+    hour.setsAt ? doneByText(hour.setsAt, reader) : hour.isKnown ? 'not set' : 'unknown',
     figure(drawn?.air, 0),
-    amount(hour.weather?.snowfallCm, snowText),
-    amount(hour.weather?.rainMm, rainText),
+    hour.weather && drawn ? amountText(drawn, reader) || 'nothing' : 'no forecast',
   ]
 }

@@ -7,13 +7,13 @@ export interface Fact {
   isSum?: boolean
 }
 
-export function Facts({ rows }: { rows: Fact[] }) {
+export function Facts({ rows, isDense }: { rows: Fact[]; isDense?: boolean }) {
   return (
     <dl>
       {rows.map(({ name, figure, isSum }, index) => (
         <div
           key={index}
-          className={`grid grid-cols-[1fr_auto] gap-3 border-b border-rule py-[9px] ${isSum ? 'font-medium' : ''}`}
+          className={`grid grid-cols-[1fr_auto] gap-3 border-b border-rule ${isDense ? 'py-1' : 'py-[9px]'} ${isSum ? 'font-medium' : ''}`}
         >
           <dt>{name}</dt>
           <dd>{figure}</dd>

@@ -26,7 +26,7 @@ describe('the night strip', () => {
     const rows = rowsOf(markup)
     expect(rows).toHaveLength(25)
     expect(rows[1]?.slice(0, 5)).toEqual(['noon', 'hold off', '−1.2', 'not set', '−2'])
-    expect(rows[12]).toEqual(['11 pm', 'flood', '2.3', '12:18 am', '−10', 'none', 'none'])
+    expect(rows[12]).toEqual(['11 pm', 'flood', '2.3', '12:20 am', '−10', 'nothing'])
   })
 
   test('carries no style attribute and no inline script handler', () => {
@@ -63,7 +63,7 @@ describe('the night strip', () => {
     const view = tonightView()
     const markup = draw({ viewer: { ...view.viewer, units: 'imperial', clock: '24' } })
     const [, , , , , , , , , , , , eleven] = rowsOf(markup)
-    expect(eleven?.slice(0, 5)).toEqual(['23:00', 'flood', '0.09', '00:18', '15'])
+    expect(eleven?.slice(0, 5)).toEqual(['23:00', 'flood', '0.09', '00:20', '15'])
     expect(markup).toContain('air, °F')
   })
 

@@ -31,7 +31,7 @@ export function DaysAhead({ view, days }: { view: TonightView; days: DayAhead[] 
   return (
     <section className="mt-10">
       <h2 className="mb-2 text-body font-semibold">The days ahead</h2>
-      <div ref={frame} aria-hidden="true" className="h-[240px] print:hidden">
+      <div ref={frame} aria-hidden="true" className="h-[240px]">
         {isNear ? (
           <Chart
             days={days.map((day) => columnOf(day, isImperial))}
@@ -40,7 +40,7 @@ export function DaysAhead({ view, days }: { view: TonightView; days: DayAhead[] 
           />
         ) : null}
       </div>
-      <p className="mt-1 text-small text-graphite print:hidden">
+      <p className="mt-1 text-small text-graphite">
         Bars: {isImperial ? 'inches' : 'mm'} of water that could freeze in the day, solid where there are hours to
         flood. Lines: high of the air, and low dashed, {isImperial ? '°F' : '°C'}.
       </p>

@@ -32,7 +32,7 @@ export function Mute({ view, change }: { view: TonightView; change: ChangeView }
   const dateFault = fault?.isDate ? fault.message : state.fields?.throughDate
   const otherFault = fault?.isDate === false ? fault.message : undefined
   return (
-    <form action={submitWithoutScript} onSubmit={submit} className="mt-5 print:hidden">
+    <form action={submitWithoutScript} onSubmit={submit} noValidate className="mt-5 print:hidden">
       <input type="hidden" name="rinkId" value={view.rink.id} />
       {isMuted ? (
         <div className="flex flex-wrap items-center gap-x-4 gap-y-2">

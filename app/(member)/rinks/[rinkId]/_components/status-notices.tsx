@@ -83,7 +83,7 @@ export function ZoneNote({ view }: { view: TonightView }) {
   if (!isHydrated || -new Date(at).getTimezoneOffset() === zoneOffsetMinutes(at, view.rink.timeZone)) return null
   const parts = new Intl.DateTimeFormat('en', { timeZone: view.rink.timeZone, timeZoneName: 'long' }).formatToParts(at)
   const zone = parts.find((part) => part.type === 'timeZoneName')?.value ?? view.rink.timeZone
-  return <p className="text-small text-graphite">All times are the rink’s: {zone}.</p>
+  return <p className="mt-2 text-small text-graphite">All times are the rink’s: {zone}.</p>
 }
 
 export function mutedText(mutedThrough: string, tonight: string): string {

@@ -1,6 +1,6 @@
 // Tonight's view, kept fresh while you look: every minute and on return; every 2 s until the first forecast is read.
 'use client'
-import { useState } from 'react'
+import { useCallback, useState } from 'react'
 import useSWR from 'swr'
 import { useOnline } from '@/components/hooks/use-online'
 import { outlookKey } from '@/lib/cache-keys/outlook'
@@ -18,48 +18,55 @@ export type ReadTrouble = 'offline' | 'signed-out' | 'gone' | 'failed' | null
 /** Does the work while `shown` is on screen; gives what went wrong as a sentence, or null. */
 export type ChangeView = (work: () => Promise<FormState>, shown: TonightView) => Promise<string | null>
 
+/** A new judgement is on its way, and until when it is worth asking often. */
+type Awaited = { judgedAt: string | null; until: number } | null
+
 class Refused extends Error {}
 
 export function useTonight(initial: TonightView) {
   const key = outlookKey(initial.rink.id)
   const isOnline = useOnline()
   const [isFresh, setIsFresh] = useState(true)
+  const [awaited, setAwaited] = useState<Awaited>(null)
+  // Kept between renders: a new function would start the wait anew, and the minute would never be over.
+  const refreshInterval = useCallback(
+    (latest?: TonightView) => pauseBefore(latest ?? initial, awaited),
+    [initial, awaited],
+  )
   const { data, error, mutate } = useSWR<TonightView, Error>(key, fetchJson<TonightView>, {
     fallbackData: initial,
-    refreshInterval: (latest) => (isSettled(latest ?? initial) ? MINUTE : SOON),
-    refreshWhenOffline: false,
+    refreshInterval,
     dedupingInterval: 1000,
     onErrorRetry: (_error, _key, _config, retry, { retryCount }) => setTimeout(() => retry({ retryCount }), MINUTE / 4),
     onError: () => setIsFresh(false),
     onSuccess: () => setIsFresh(true),
   })
+  const view = data ?? initial
 
   const change: ChangeView = async (work, shown) => {
-    const run = async () => {
-      const state = await work()
-      if (state.status === 'error') throw new Refused(Object.values(state.fields ?? {})[0] ?? state.message)
-      return fetchJson<TonightView>(key)
-    }
     try {
-      await mutate(run(), { optimisticData: shown, rollbackOnError: true, revalidate: false })
+      await mutate(doThenRead(work, key), { optimisticData: shown, rollbackOnError: true, revalidate: false })
+      setAwaited({ judgedAt: view.outlook?.judgedAt ?? null, until: Date.now() + MINUTE / 2 })
       return null
     } catch (fault) {
       return fault instanceof Refused ? fault.message : NO_ANSWER
     }
   }
 
-  return {
-    view: data ?? initial,
-    trouble: troubleOf(isOnline, isFresh ? undefined : error),
-    change,
-    readAgain: () => void mutate(),
-  }
+  return { view, trouble: troubleOf(isOnline, isFresh ? undefined : error), change, readAgain: () => void mutate() }
 }
 
-/** False while the server still judges: the first forecast, or the plan after a pass was poured. */
-function isSettled({ outlook }: TonightView): boolean {
-  if (!outlook) return false
-  return outlook.passes.every(({ poured }) => poured === null || poured.at <= outlook.judgedAt)
+async function doThenRead(work: () => Promise<FormState>, key: string): Promise<TonightView> {
+  const state = await work()
+  if (state.status === 'error') throw new Refused(Object.values(state.fields ?? {})[0] ?? state.message)
+  return fetchJson<TonightView>(key)
+}
+
+/** Short while the server still judges: the first forecast, or the plan after something was changed. */
+function pauseBefore({ outlook }: TonightView, awaited: Awaited): number {
+  if (!outlook) return SOON
+  const isAwaited = awaited !== null && outlook.judgedAt === awaited.judgedAt && Date.now() < awaited.until
+  return isAwaited ? SOON : MINUTE
 }
 
 function troubleOf(isOnline: boolean, error: Error | undefined): ReadTrouble {

@@ -11,6 +11,9 @@ const LEAD_COLOURS: Record<NightSummary['verdict'], string> = {
   unknown: 'text-ink',
 }
 
+/** A time of day stays on one line. */
+const unbroken = (text: string) => text.replace(/(\d) (am|pm)/g, '$1\u00a0$2')
+
 export function Verdict({
   view,
   summary,
@@ -27,9 +30,10 @@ export function Verdict({
     <>
       <h1 className="mt-7 mb-2 max-w-[22ch] text-verdict font-medium tracking-tight lg:max-w-[24ch] lg:text-verdict-wide">
         <em className={`font-semibold not-italic ${LEAD_COLOURS[summary.verdict]}`}>{lead}</em>
-        {/^[.:]/.test(rest) ? rest : ` ${rest}`}
+        {/^[.:]/.test(rest) ? '' : ' '}
+        {unbroken(rest)}
       </h1>
-      <p className="mb-5 max-w-[60ch] text-graphite">{sure}</p>
+      <p className="mb-5 max-w-[60ch] text-graphite">{unbroken(sure)}</p>
     </>
   )
 }

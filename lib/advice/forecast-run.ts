@@ -87,7 +87,7 @@ function startingSheet({ input }: Setting): SheetState {
     snowCoverCm,
     liquidMm,
     unfrozenBelowMm: isFloating ? Math.max(0, fillDepthMm - thicknessMm * ICE_TO_WATER) : 0,
-    waterTemperatureC,
+    waterTemperatureC: Math.min(40, waterTemperatureC),
     base: input.rink.base,
   })
 }

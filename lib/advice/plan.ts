@@ -67,7 +67,7 @@ function chainFrom(
   slot: PlanSlot,
   outcome: SlotOutcome | null,
 ): Chain {
-  if (!outcome || outcome.gain <= 0) return NOTHING
+  if (!outcome) return NOTHING
   const next = rest[firstSlotFrom(slots, outcome.setMillis)] as Chain
   return {
     gain: outcome.gain + next.gain,

@@ -80,7 +80,8 @@ const hoursSchema = z
     for (let index = 1; index < hours.length; index += 1) {
       const due = Date.parse((hours[index - 1] as HourlyRecord).time) + HOUR_MILLIS
       const time = (hours[index] as HourlyRecord).time
-      if (Date.parse(time) === due) continue
+      // An unreadable time has its own fault.
+      if (Date.parse(time) === due || Number.isNaN(due) || Number.isNaN(Date.parse(time))) continue
       const message = `expected ${new Date(due).toISOString().replace('.000Z', 'Z')}, one hour after the hour before it, got ${time}`
       context.addIssue({ code: 'custom', path: [index, 'time'], message })
       return

@@ -43,7 +43,7 @@ function advance(state: SheetState, hour: PreparedHour, seconds: number): number
     return freezeOpenWater(state, lossOf(hour, 'water', state.belowTemperatureC), groundWm2, seconds)
   }
   if (isThinIce(state)) return growThinIce(state, lossOf(hour, 'wet', 0), groundWm2, seconds)
-  const surface = closeSurface(state, hour)
+  const surface = closeSurface(state, hour, seconds)
   const conducted = conductThrough(state, surface, groundWm2, seconds)
   const topC = cellTemperatureC(state.massKgM2[0]!, state.enthalpyJM2[0]!)
   return (

@@ -5,6 +5,7 @@ import {
   ICE_DENSITY,
   SUBLIMATION_J_PER_KG,
   VAPORISATION_J_PER_KG,
+  WATER_HEAT_CAPACITY,
 } from './constants'
 import { addToTop } from './sheet-fall'
 import { cellLiquidKgM2, cellTemperatureC, faceResistance } from './column'
@@ -32,11 +33,13 @@ export interface ClosedSurface {
 
 /** Snow too thin to count as cover. [kg/m²] */
 const TRACE_OF_SNOW_KG = 0.1
+/** A film of water in the sun gets no warmer. [°C] Ours, against runaway steps. */
+const WARMEST_FILM_C = 60
 /** The law is drawn anew when the surface turns out further than this from where it was drawn. [K] */
 const REDRAW_K = 1
 
 /** Closes the balance of the surface for the coming step. */
-export function closeSurface(state: SheetState, hour: PreparedHour): ClosedSurface {
+export function closeSurface(state: SheetState, hour: PreparedHour, seconds: number): ClosedSurface {
   const mass = state.massKgM2[0]!
   const enthalpy = state.enthalpyJM2[0]!
   const topC = cellTemperatureC(mass, enthalpy)
@@ -45,7 +48,9 @@ export function closeSurface(state: SheetState, hour: PreparedHour): ClosedSurfa
   }
   const liquid = cellLiquidKgM2(mass, enthalpy)
   if (liquid <= 0) return frozenSurface(state, hour, 'ice', topC, faceResistance(mass, enthalpy))
-  const law = surfaceLaw(hour, 'wet', topC)
+  if (liquid >= mass)
+    return passedThrough('wet', warmWaterLaw(hour, topC, (mass * WATER_HEAT_CAPACITY) / seconds), NO_SUNSHINE, 0)
+  const law = surfaceLaw(hour, 'wet', 0)
   // What is frozen of a wet cell that loses heat is its skin; while it melts, the water is on top.
   const skin = law.netWm2 > 0 ? (mass - liquid) / ICE_DENSITY / ICE_CONDUCTIVITY : 0
   return passedThrough('wet', law, NO_SUNSHINE, skin)
@@ -74,6 +79,18 @@ export function finishSurface(
 export function vapourLossKgM2(surface: ClosedSurface, seconds: number): number {
   const heat = surface.kind === 'wet' ? VAPORISATION_J_PER_KG : SUBLIMATION_J_PER_KG
   return (surface.latentWm2 * seconds) / heat
+}
+
+/** A thin film warms or cools so fast within a step that its law must be drawn where it will end. */
+function warmWaterLaw(hour: PreparedHour, waterC: number, capacityWm2K: number): SurfaceLaw {
+  let law = surfaceLaw(hour, 'wet', waterC)
+  for (let round = 0; round < 4; round++) {
+    const endsC = waterC - (law.netWm2 + law.slopeWm2K * (waterC - law.aroundC)) / (capacityWm2K + law.slopeWm2K)
+    const towardsC = Math.min(WARMEST_FILM_C, Math.max(0, (endsC + law.aroundC) / 2))
+    if (Math.abs(towardsC - law.aroundC) < REDRAW_K) break
+    law = surfaceLaw(hour, 'wet', towardsC)
+  }
+  return law
 }
 
 function frozenSurface(
@@ -142,13 +159,31 @@ function meltingSnow(law: SurfaceLaw, resistance: number): ClosedSurface {
 }
 
 /** The water of melting snow goes to the top cell, which may freeze it again. */
-function meltSnow(state: SheetState, spareJM2: number): number {
+function meltSnow(state: SheetState, offeredJM2: number): number {
+  const spareJM2 = Math.min(offeredJM2, heatToMeltAllJM2(state))
   const meltKg = Math.min(state.snowKgM2, spareJM2 / FUSION_J_PER_KG)
   const left = state.snowKgM2 - meltKg
   state.snowDepthCm *= left / state.snowKgM2
   state.snowKgM2 = left
   addToTop(state, meltKg, spareJM2 - meltKg * FUSION_J_PER_KG)
+  if (left === 0) passWarmthDown(state)
   return spareJM2
+}
+
+/** A sheet of water at 0 °C takes no more in the rest of the step: it would warm and give it back. */
+function heatToMeltAllJM2(state: SheetState): number {
+  return state.enthalpyJM2.reduce((sum, one) => sum + Math.max(0, -one), state.snowKgM2 * FUSION_J_PER_KG)
+}
+
+/** Heat left when the last snow is gone melts the ice below it rather than boil a film of melt water. */
+function passWarmthDown(state: SheetState): void {
+  for (let i = 0; i + 1 < state.massKgM2.length && state.enthalpyJM2[i]! > 0; i++) {
+    const next = state.enthalpyJM2[i + 1]!
+    const passed = Math.min(state.enthalpyJM2[i]!, Math.max(0, -next))
+    state.enthalpyJM2[i]! -= passed
+    state.enthalpyJM2[i + 1]! = next + passed
+    if (passed === 0) return
+  }
 }
 
 function snowResistance(state: SheetState): number {

@@ -140,3 +140,16 @@ export async function listScoredHours(db: Db, outlookId: string): Promise<Scored
   )
   return rows.map(({ fill, flood, hold, detail, ...hour }) => ({ ...hour, ...detail, scores: { fill, flood, hold } }))
 }
+
+/** The newest outlook's summary of each of a person's rinks. */
+export async function listNewestSummaries(
+  db: Db,
+  userId: string,
+): Promise<{ rinkId: string; summary: NightSummary }[]> {
+  return db('outlooks as o')
+    .join('rink_members as m', 'm.rink_id', 'o.rink_id')
+    .where('m.user_id', userId)
+    .distinctOn('o.rink_id')
+    .orderBy([{ column: 'o.rink_id' }, { column: 'o.judged_at', order: 'desc' }])
+    .select<{ rinkId: string; summary: NightSummary }[]>({ rinkId: 'o.rink_id', summary: 'o.summary' })
+}

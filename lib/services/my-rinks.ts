@@ -1,0 +1,28 @@
+// A person's rinks with what tonight holds for each, in a sentence.
+import { listNewestSummaries } from '@/db/queries/outlooks'
+import { listRinksOfUser, type RinkOfUser } from '@/db/queries/rinks'
+import { findAccount } from '@/db/queries/users'
+import { tonightDate } from '@/lib/advice/night'
+import type { ServiceContext } from '@/lib/context'
+import { verdictSentence } from '@/lib/words/night'
+
+export interface MyRink extends RinkOfUser {
+  /** Null before the first outlook, or when the newest one is of another night. */
+  tonight: { isGood: boolean; sentence: string } | null
+}
+
+export async function listMyRinksTonight({ db, now, viewer }: ServiceContext): Promise<MyRink[]> {
+  const [rinks, summaries, account] = await Promise.all([
+    listRinksOfUser(db, viewer.userId),
+    listNewestSummaries(db, viewer.userId),
+    findAccount(db, viewer.userId),
+  ])
+  const byRink = new Map(summaries.map(({ rinkId, summary }) => [rinkId, summary]))
+  return rinks.map((rink) => {
+    const summary = byRink.get(rink.id)
+    if (!summary || !account || summary.nightDate !== tonightDate(now, rink.timeZone)) return { ...rink, tonight: null }
+    const words = { timeZone: rink.timeZone, units: account.units, clock: account.clock, locale: 'en' }
+    const isGood = summary.verdict === 'flood' || summary.verdict === 'fill'
+    return { ...rink, tonight: { isGood, sentence: verdictSentence(summary, now, words) } }
+  })
+}

@@ -47,7 +47,3 @@ export async function consumeAccountLink(
 export async function voidAccountLinks(db: Db, userId: string, now: Date): Promise<void> {
   await db('account_links').where({ user_id: userId, used_at: null }).update({ used_at: now })
 }
-
-export async function deleteAccountLinksBefore(db: Db, instant: Date): Promise<number> {
-  return db('account_links').where('expires_at', '<', instant).delete()
-}

@@ -11,7 +11,3 @@ export async function countHit(db: Db, key: string, windowStartsAt: Date): Promi
   if (!row) throw new Error('An upsert returned no row')
   return row.hits
 }
-
-export async function deleteRateLimitsBefore(db: Db, instant: Date): Promise<number> {
-  return db('rate_limits').where('window_starts_at', '<', instant).delete()
-}

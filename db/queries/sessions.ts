@@ -50,7 +50,3 @@ export async function deleteSession(db: Db, tokenHash: string): Promise<void> {
 export async function deleteSessionsOf(db: Db, userId: string): Promise<number> {
   return db('sessions').where({ user_id: userId }).delete()
 }
-
-export async function deleteExpiredSessions(db: Db, now: Date): Promise<number> {
-  return db('sessions').where('expires_at', '<=', now).delete()
-}

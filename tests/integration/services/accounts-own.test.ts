@@ -1,9 +1,9 @@
 // One's own account and its sessions, as next-auth sees them.
 import { afterAll, beforeAll, expect, test } from 'vitest'
+import { pruneExpired } from '@/db/queries/prune'
 import { sessionAdapter } from '@/lib/auth/adapter'
 import { openSession, SESSION_SECONDS } from '@/lib/auth/sessions'
 import type { ServiceContext } from '@/lib/context'
-import { pruneAccounts } from '@/lib/services/account-upkeep'
 import { requestLink, signInWithLink, signInWithPassword, signUp } from '@/lib/services/accounts'
 import { changePassword, getAccount, saveAccount, signOutEverywhere } from '@/lib/services/own-account'
 import { LIMITS } from '@/lib/services/rate-limits'
@@ -108,7 +108,7 @@ test('pruning forgets what is over and nothing that still counts', async () => {
   await signUp(visitor(database.db), { name: 'Gone', email: unconfirmed, password: PASSWORD })
   const { token } = await open(userId)
   const inTwentyDays = new Date(NOW.getTime() + 20 * 24 * 60 * 60 * 1000)
-  await pruneAccounts({ db: database.db, now: inTwentyDays })
+  await pruneExpired(database.db, inTwentyDays)
   expect(await read(token)).not.toBeNull()
   expect(await database.db('users').where({ email: unconfirmed })).toEqual([])
   expect(await database.db('users').where({ id: userId })).toHaveLength(1)

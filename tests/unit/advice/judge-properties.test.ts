@@ -1,6 +1,6 @@
 // What must hold for every judgement, whatever the weather and the rink.
 import fc from 'fast-check'
-import { expect, test } from 'vitest'
+import { expect, test, vi } from 'vitest'
 import { judge } from '@/lib/advice/judge'
 import { summariseNight } from '@/lib/advice/night-summary'
 import type { JudgeInput, Judgement, ScoredHour } from '@/lib/advice/types'
@@ -8,6 +8,9 @@ import { REASON_CODES, reasonText } from '@/lib/words/reasons'
 import { plainWords } from '@/lib/words/options'
 import { verdictSentence } from '@/lib/words/night'
 import { HOUR_MILLIS, inputOf, randomHours, randomInput } from '../../support/advice-weather'
+
+// Sixty judgements of two days each, on a machine that may be busy.
+vi.setConfig({ testTimeout: 120_000 })
 
 const words = plainWords('America/Toronto')
 /** Shrinking two days of weather takes minutes and tells little: the seed of a failure is enough. */
@@ -30,11 +33,13 @@ test('scores stay in 0-100, add up, and no number is NaN', () => {
   fc.assert(
     fc.property(randomInput(40), (input) => {
       const judgement = judge(input, { runs: 2 })
-      everyNumber(judgement, (number) => expect(Number.isFinite(number)).toBe(true))
+      let odd = 0
+      everyNumber(judgement, (number) => (odd += Number.isFinite(number) ? 0 : 1))
+      expect(odd).toBe(0)
       for (const { scores, reasons } of judgement.hours) {
-        for (const score of Object.values(scores)) expect(score >= 0 && score <= 100).toBe(true)
+        const all = [...Object.values(scores), ...reasons.map((reason) => 100 * reason.factor)]
+        expect(all.filter((one) => one < 0 || one > 100)).toEqual([])
         expect(scores.hold).toBe(100 - Math.max(scores.fill, scores.flood))
-        for (const { factor } of reasons) expect(factor >= 0 && factor <= 1).toBe(true)
         const factors = reasons.map((reason) => reason.factor)
         expect(factors).toEqual([...factors].sort((a, b) => a - b))
       }
@@ -92,11 +97,10 @@ test('every reason and every night has words', () => {
   fc.assert(
     fc.property(randomInput(40), (input) => {
       const judgement = judge(input, { runs: 0 })
-      for (const reason of judgement.hours.flatMap((hour) => hour.reasons)) {
-        expect(REASON_CODES).toContain(reason.code)
-        expect(reasonText(reason, words)).toMatch(/^\S.*\.$/)
-        expect(reasonText(reason, words)).not.toMatch(/NaN|undefined|null|Infinity/)
-      }
+      const reasons = judgement.hours.flatMap((hour) => hour.reasons)
+      expect(reasons.filter((reason) => !REASON_CODES.includes(reason.code))).toEqual([])
+      const odd = /NaN|undefined|null|Infinity|^\s|[^.]$/
+      expect(reasons.map((reason) => reasonText(reason, words)).filter((text) => odd.test(text))).toEqual([])
       const now = new Date(input.now)
       const summary = summariseNight(judgement, { nightDate: '2027-01-12', now, timeZone: 'America/Toronto' })
       expect(verdictSentence(summary, now, words)).toMatch(/\.$/)

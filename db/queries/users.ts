@@ -60,10 +60,12 @@ export async function findAccount(db: Db, userId: string): Promise<AccountRow | 
 
 /** The first confirmation counts. @returns true when this call confirmed the address. */
 export async function confirmEmail(db: Db, userId: string, now: Date): Promise<boolean> {
+  // Whoever opens a mailed link has a mailbox that takes mail.
+  await db('users').where({ id: userId }).update({ email_refused_at: null })
   const changed = await db('users')
     .where({ id: userId })
     .whereNull('email_verified_at')
-    .update({ email_verified_at: now, email_refused_at: null, updated_at: now })
+    .update({ email_verified_at: now, updated_at: now })
   return changed === 1
 }
 

@@ -55,7 +55,7 @@ export default async function FrontPage() {
       </p>
       <Cautions cautions={STANDING_CAUTIONS} reader={reader} />
       <p className="max-w-line">
-        <Link href="/how-it-works" className="inline-flex min-h-touch items-center">
+        <Link href="/how-it-works" className="inline-flex min-h-touch items-center underline">
           How it works, what it rests on and where it stops
         </Link>
       </p>

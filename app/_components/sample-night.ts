@@ -66,7 +66,7 @@ function judgeSample(): Sample {
     rink,
     water,
     sheet: { thicknessMm: 90, temperatureC: -3, snowCoverCm: 0 },
-    available: [{ from: '17:00', to: '01:00' }],
+    available: [{ from: '18:00', to: '01:00' }],
     maxPasses: 3,
     hours: Array.from({ length: 48 }, (_, hour) => weatherAt(hour)),
   })

@@ -14,8 +14,8 @@ import { hoursOfNight, stripHours, stripInput, type StripSize, type StripSource 
 import { stripWords } from './strip-words'
 
 const SHOWN: Record<StripSize, string> = {
-  wide: 'relative hidden min-[720px]:block',
-  narrow: 'relative min-[720px]:hidden',
+  wide: 'relative hidden min-[720px]:block print:block',
+  narrow: 'relative min-[720px]:hidden print:hidden',
 }
 
 export function NightStrip({ source, now }: { source: StripSource; now: number }) {

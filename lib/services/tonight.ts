@@ -93,7 +93,7 @@ async function outlookOf(
     modelVersion: outlook.modelVersion,
     summary,
     hours: hours.filter((hour) => hour.time >= isoHour(startsAt) && hour.time < isoHour(endsAt)),
-    passes: passesOf(poured, summary.passes),
+    passes: passesOf(poured, summary.passes, outlook.judgedAt),
     days: daysAhead(hours, now, timeZone),
     thaws: outlook.advice.thaws,
   }
@@ -101,8 +101,8 @@ async function outlookOf(
 
 const isoHour = (at: Date) => at.toISOString().replace('.000Z', 'Z')
 
-/** What was poured first, then what is still planned, numbered on. */
-function passesOf(poured: readonly PouredPass[], planned: readonly PlannedPass[]): TonightPass[] {
+/** What was poured first, then what is still planned, numbered on. A plan made before a pass was poured still holds it. */
+function passesOf(poured: readonly PouredPass[], planned: readonly PlannedPass[], judgedAt: Date): TonightPass[] {
   const done = poured.map((flood) => ({
     number: flood.passNumber,
     startsAt: flood.pouredAt.toISOString(),
@@ -112,8 +112,11 @@ function passesOf(poured: readonly PouredPass[], planned: readonly PlannedPass[]
     hoseMinutes: 0,
     poured: { at: flood.pouredAt.toISOString(), by: flood.by },
   }))
-  const last = Math.max(0, ...done.map((pass) => pass.number))
-  return [...done, ...planned.map((pass, index) => ({ ...pass, number: last + index + 1, poured: null }))]
+  const known = poured.filter((flood) => flood.pouredAt <= judgedAt).map((flood) => flood.passNumber)
+  const last = Math.max(0, ...known)
+  const isPoured = (number: number) => poured.some((flood) => flood.passNumber === number)
+  const open = planned.map((pass, index) => ({ ...pass, number: last + index + 1, poured: null }))
+  return [...done, ...open.filter((pass) => !isPoured(pass.number))]
 }
 
 async function forecastOf({ db, now }: ServiceContext, outlook: StoredOutlook): Promise<TonightView['forecast']> {

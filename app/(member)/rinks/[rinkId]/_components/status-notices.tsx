@@ -1,9 +1,8 @@
 // What stands between the page and the newest state: no network, an old forecast, a silence, another zone. And what to do.
 'use client'
-import type { Route } from 'next'
 import Link from 'next/link'
 import type { ReactNode } from 'react'
-import { ageText, dayText, readerOf } from '@/components/rinks/reader'
+import { ageText, readerOf } from '@/components/rinks/reader'
 import { clockText } from '@/lib/words/times'
 import { useHydrated } from '@/components/hooks/use-hydrated'
 import { Button } from '@/components/ui/button'
@@ -58,8 +57,11 @@ function TroubleText({
   if (trouble === 'signed-out') {
     return (
       <p>
-        {asOf} You are signed out on this device. <Link href={'/sign-in' as Route}>Sign in</Link> to see the newest
-        state.
+        {asOf} You are signed out on this device.{' '}
+        <Link href="/sign-in" className="underline">
+          Sign in
+        </Link>{' '}
+        to see the newest state.
       </p>
     )
   }
@@ -84,10 +86,4 @@ export function ZoneNote({ view }: { view: TonightView }) {
   const parts = new Intl.DateTimeFormat('en', { timeZone: view.rink.timeZone, timeZoneName: 'long' }).formatToParts(at)
   const zone = parts.find((part) => part.type === 'timeZoneName')?.value ?? view.rink.timeZone
   return <p className="mt-2 text-small text-graphite">All times are the rink’s: {zone}.</p>
-}
-
-export function mutedText(mutedThrough: string, tonight: string): string {
-  return mutedThrough === tonight
-    ? 'Alerts are silent tonight.'
-    : `Alerts are silent through the night of ${dayText(mutedThrough)}.`
 }

@@ -25,8 +25,8 @@ export interface Layer {
 /** Heat from a well-mixed warm layer to ice at 0 °C below it: see WATER_FACE in column.ts. */
 const WATER_FACE = (Math.PI ** 2 / 4) * WATER_DENSITY * WATER_CONDUCTIVITY
 const LATENT_JM3 = ICE_DENSITY * FUSION_J_PER_KG
-/** Heat that does not matter to the minute. [J/m²] */
-const CLOSE_JM2 = 20
+/** Heat that does not matter to the second. [J/m²] */
+const CLOSE_JM2 = 1
 
 /**
  * Minutes from pouring until the last liquid in a layer is gone.
@@ -110,7 +110,7 @@ function grownSkin(lossWm2: number, slopeWm2K: number, skinM: number, seconds: n
   return Math.sqrt(start * start + (2 * bulk * lossWm2 * seconds) / LATENT_JM3) - bulk
 }
 
-/** Moment within a stretch at which the rest is gone, to a second, by false position with the Illinois rule. [s] */
+/** Moment within a stretch at which the rest is gone by false position with the Illinois rule. [s] */
 function timeWithin(
   loss: number,
   slope: number,
@@ -125,7 +125,7 @@ function timeWithin(
   let below = restJM2
   let above = lostAtEnd - restJM2
   let side = 0
-  for (let round = 0; round < 20 && late - early > 1; round++) {
+  for (let round = 0; round < 40 && late - early > 0.01; round++) {
     const middle = early + ((late - early) * below) / (below + above)
     const grown = skinLoss(loss, skinM, grownSkin(loss, slope, skinM, middle), middle)
     const missing = restJM2 - grown - heatDrawnJM2(cold, cold.sharesJM2, middle)

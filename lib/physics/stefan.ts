@@ -124,3 +124,26 @@ export function degreeDayThicknessCm(coefficient: number, freezingDegreeDays: nu
   inRange('coefficient [cm (°C d)^-1/2]', coefficient, 0, 4)
   return coefficient * Math.sqrt(inRange('freezingDegreeDays [°C d]', freezingDegreeDays, 0, 1e5))
 }
+
+/** Bulk coefficient of the fall-back. [W m⁻² K⁻¹] Middle of Ashton's 10-30. */
+const FALL_BACK_BULK_WM2K = 20
+/** Conductivity of snow lying on lake ice. [W m⁻¹ K⁻¹] Wind-packed end of the range the NWS Alaska-Pacific River Forecast Center uses. */
+const LYING_SNOW_CONDUCTIVITY = 0.2
+
+/**
+ * Ice thickness when only daily mean temperatures and snow are known: Ashton's form day by day. It never melts.
+ *
+ * @param startM Ice at the start. [m], 0 or more
+ * @param days Daily mean air [°C] and snow lying on the ice [m], in order.
+ * @returns Thickness at the end. [m]
+ * @throws RangeError for arguments out of range.
+ *
+ * Source: Ashton 1989; coefficients as above. Measured lakes in Finland: see `npm run validate`.
+ */
+export function thicknessFromDaysM(startM: number, days: readonly { airC: number; snowM: number }[]): number {
+  return days.reduce(
+    (thicknessM, { airC, snowM }) =>
+      ashtonThicknessM(thicknessM, Math.max(0, -airC), FALL_BACK_BULK_WM2K, snowM / LYING_SNOW_CONDUCTIVITY),
+    inRange('startM [m]', startM, 0, 10),
+  )
+}

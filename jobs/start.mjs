@@ -13,7 +13,7 @@ import { takeLock } from './local/lock.mjs'
 import { runScript, startFakes, startWeb, startWorker } from './local/parts.mjs'
 import { dataFolder, logFolder, projectFolder } from './local/project.mjs'
 import { formatSeconds, Session } from './local/session.mjs'
-import { planStart } from './local/settings.mjs'
+import { checkSettings, planStart } from './local/settings.mjs'
 import { welcome } from './local/welcome.mjs'
 
 const POSTGRES_PORT = 54329
@@ -50,9 +50,12 @@ async function startOwnDatabase(session) {
   })
 }
 
+/** What takes long comes first: ports are picked when they are about to be used. */
 async function setUp(session) {
   await session.step('Packages', (note) => ensureDependencies('start', note))
-  const plan = await session.step('Settings', planStart)
+  await session.step('Settings', async () => checkSettings(await planStart()))
+  if (!dev) await session.step('Production build', (note) => ensureBuild(DIST_FOLDER, note))
+  const plan = await planStart()
   const mode = { NODE_ENV: dev ? 'development' : 'production' }
   const ownDatabase = plan.hasOwnDatabase ? { DATABASE_URL: await startOwnDatabase(session) } : {}
   return { ...plan, env: { ...plan.settings, ...plan.fakeEnvironment, ...mode, ...ownDatabase } }
@@ -63,7 +66,6 @@ async function runParts(session, { env, isDemo, hasOwnDatabase, wantsDemoData, h
   await session.step('Migrations', () => runScript(`Migrating ${database}`, 'db/migrate.ts', 'migrate', env))
   if (isDemo) await session.step('Fakes of weather, mail and push', () => startFakes(session, 'fakes', env))
   if (wantsDemoData) await session.step('Demo data', () => runScript('Seeding', 'db/seed.ts', 'seed', env))
-  if (!dev) await session.step('Production build', (note) => ensureBuild({ distFolder: DIST_FOLDER, env }, note))
   await session.step('Worker', () => startWorker(session, 'worker', env))
   const web = { env, host, port: ports.web, distFolder: DIST_FOLDER, dev }
   await session.step('Web server', () => startWeb(session, 'web', web))

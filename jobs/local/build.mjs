@@ -5,7 +5,7 @@ import path from 'node:path'
 
 import { run } from '../../lib/machine/processes.mjs'
 
-import { inProject, projectFolder } from './project.mjs'
+import { cleanEnvironment, inProject, projectFolder } from './project.mjs'
 
 const SOURCES = [
   'app',
@@ -41,14 +41,19 @@ function hashSources() {
 }
 
 /** Builds into `distFolder` unless it already holds what the sources make. */
-export async function ensureBuild({ distFolder, env }, note) {
+export async function ensureBuild(distFolder, note) {
   // Inside the build, so that it goes when that goes; a build that fails has none.
   const marker = path.join(projectFolder, distFolder, 'nightsheet-source-hash')
   const wanted = hashSources()
   if (fs.existsSync(marker) && fs.readFileSync(marker, 'utf8') === wanted) return note('up to date')
   fs.rmSync(marker, { force: true })
   const next = path.join(projectFolder, 'node_modules/next/dist/bin/next')
-  const buildEnv = { ...env, NODE_ENV: 'production', NEXT_DIST_DIR: distFolder, NEXT_TELEMETRY_DISABLED: '1' }
+  const buildEnv = {
+    ...cleanEnvironment(),
+    NODE_ENV: 'production',
+    NEXT_DIST_DIR: distFolder,
+    NEXT_TELEMETRY_DISABLED: '1',
+  }
   await run('next build', process.execPath, [next, 'build'], inProject(`build${distFolder}`, buildEnv))
   return fs.writeFileSync(marker, wanted)
 }

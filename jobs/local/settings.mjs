@@ -78,17 +78,17 @@ function combineSettings(defaults) {
 }
 
 /** @throws Problem with one line that names what is missing or malformed, before anything has started. */
-async function checkSettings(settings) {
+export async function checkSettings({ settings, hasOwnDatabase }) {
   const { tsImport } = await import('tsx/esm/api')
   const { parseEnvironment } = await tsImport('../../lib/env.ts', import.meta.url)
   try {
-    parseEnvironment(settings)
+    parseEnvironment(hasOwnDatabase ? { ...settings, DATABASE_URL: DATABASE_TO_COME } : settings)
   } catch (error) {
     throw new Problem(error.message)
   }
 }
 
-/** What `npm start` is to run. With DEMO=0 nothing stands in: every setting has to come from the environment. */
+/** What `npm start` is to run, on ports that are free now. With DEMO=0 nothing stands in: every setting has to come from the environment. */
 export async function planStart() {
   const isDemo = process.env.DEMO !== '0'
   const ports = await pickPorts()
@@ -96,7 +96,6 @@ export async function planStart() {
   const standIns = () => ({ PUBLIC_URL: `http://localhost:${ports.web}`, ...fakes.settings, ...keepSecrets() })
   const settings = combineSettings(isDemo ? standIns() : {})
   const hasOwnDatabase = isDemo && settings.DATABASE_URL === undefined
-  await checkSettings(hasOwnDatabase ? { ...settings, DATABASE_URL: DATABASE_TO_COME } : settings)
   return {
     settings,
     ports,

@@ -39,10 +39,10 @@ function describe(databaseUrl, ports) {
 
 /** Builds and starts everything within the session; returns the addresses that the journeys need. */
 export async function startProduct(session, databaseUrl) {
+  await session.step('Build for the tests', (note) => ensureBuild(DIST_FOLDER, note))
   const ports = await pickPorts({ shift: PORT_SHIFT, environment: {} })
   const { address, env, caFile } = describe(databaseUrl, ports)
   fs.rmSync(path.dirname(caFile), { recursive: true, force: true })
-  await session.step('Build for the tests', (note) => ensureBuild({ distFolder: DIST_FOLDER, env }, note))
   await session.step('Web, worker and fakes', async (note) => {
     await runScript('Migrating', 'db/migrate.ts', 'test-migrate', env)
     await startFakes(session, 'test-fakes', env)

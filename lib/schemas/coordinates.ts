@@ -28,10 +28,8 @@ function degrees(most: number, sides: string, missing: string) {
 export const latitudeSchema = degrees(90, 'NS', 'Choose a place, or type its latitude.')
 export const longitudeSchema = degrees(180, 'EW', 'Choose a place, or type its longitude.')
 
-/** Query of api/places: either words, or a position. */
-export const placeQuerySchema = z.union([
-  z.object({ latitude: latitudeSchema, longitude: longitudeSchema }),
-  z.object({
-    q: z.string('Type the name of a place.').trim().min(2, 'At least two letters.').max(80, 'At most 80 letters.'),
-  }),
-])
+/** Queries of api/places: words, or a position. */
+export const placeNameQuerySchema = z.object({
+  q: z.string('Type the name of a place.').trim().min(2, 'At least two letters.').max(80, 'At most 80 letters.'),
+})
+export const positionQuerySchema = z.object({ latitude: latitudeSchema, longitude: longitudeSchema })

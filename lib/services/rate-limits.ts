@@ -15,6 +15,8 @@ export const LIMITS = {
   mailByVisitor: { hits: 200, seconds: HOUR_SECONDS },
   signUpByVisitor: { hits: 100, seconds: HOUR_SECONDS },
   passwordChangeByUser: { hits: 10, seconds: QUARTER_HOUR_SECONDS },
+  // Each may ask for the weather of one more place.
+  setUpByUser: { hits: 40, seconds: HOUR_SECONDS },
   // One search per pause in typing; each costs some milliseconds of processor.
   placeSearchByUser: { hits: 600, seconds: QUARTER_HOUR_SECONDS },
 } as const

@@ -25,6 +25,7 @@ import { findNearestPlace } from '@/lib/places/gazetteer'
 import { timeZoneAt } from '@/lib/places/time-zone'
 import type { ChangeRinkInput, RinkInput, SetUpRinkInput } from '@/lib/schemas/rinks'
 import { cellOf } from '@/lib/weather/cell'
+import { spend } from './rate-limits'
 
 /** Nobody measures it, and a sheet forgets it within a day: a little below freezing. [°C] Ours. */
 const REPORTED_ICE_TEMPERATURE_C = -2
@@ -94,6 +95,7 @@ export async function setUpRink(
   const made = { createdBy: viewer.userId, creationKey: input.creationKey }
   const before = await findRinkByCreationKey(db, made)
   if (before) return { rinkId: before.id }
+  await spend(context, 'setUpByUser', viewer.userId)
   const rink = await placeRink({ ...input.rink, iceThicknessMm: input.rink.iceThicknessMm ?? 0 })
   return db.transaction(async (trx) => {
     const cell = await findOrCreateGridCell(trx, cellOf(rink.latitudeDeg, rink.longitudeDeg))

@@ -21,8 +21,11 @@ export function RinkFormFrame({ form, submit, busy, children }: Props) {
   useEffect(() => {
     if (state.status === 'error') element.current?.querySelector<HTMLElement>(FAULTY)?.focus()
   }, [state])
+  // Without script the page comes back at its top, far from the button.
+  const hasFaults = Object.keys(state.fields ?? {}).length > 0
   return (
     <form ref={element} action={form.dispatch} onSubmit={form.submit} noValidate>
+      {hasFaults ? <Notice tone="caution">{state.message}</Notice> : null}
       {children}
       {state.message ? (
         <Notice tone={state.status === 'error' ? 'caution' : 'plain'} live>

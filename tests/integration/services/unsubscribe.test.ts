@@ -1,5 +1,8 @@
 // Unsubscribing by a mail's link, and choosing under Alerts: by the right person, for one rink, as often as one likes.
+import { createHash } from 'node:crypto'
 import { afterAll, beforeAll, beforeEach, describe, expect, test } from 'vitest'
+import { promiseMessage } from '@/db/queries/messages'
+import { putPushSubscription } from '@/db/queries/push-subscriptions'
 import { ForbiddenError, InvalidInputError, NotFoundError } from '@/lib/errors'
 import { alertPreferencesSchema, muteSchema } from '@/lib/schemas/alerts'
 import { chooseAlertPreferences, getAlertSettings, muteAlerts } from '@/lib/services/alert-preferences'
@@ -108,6 +111,25 @@ describe('choosing under Alerts', () => {
       wants_push: true,
     })
     expect(await preferences(cast.keeper.userId)).toMatchObject({ tell_at: '15:30', wants_email: true })
+  })
+
+  test('each sees their own devices and messages, and what failed', async () => {
+    const endpoint = 'https://updates.push.services.mozilla.com/wpush/v2/abc'
+    const keys = { p256dh: 'p', auth: 'a' }
+    await putPushSubscription(database.db, cast.keeper.userId, { endpoint, ...keys }, NOW)
+    const night = { rinkId: cast.rinkId, nightDate: '2027-01-12', channel: 'email', kind: 'flood-tonight' } as const
+    const sending = { content: {}, sendAt: NOW, expiresAt: new Date('2027-01-13T04:00:00Z') }
+    const message = { dedupeKey: `flood-tonight:${cast.rinkId}`, userId: cast.keeper.userId, ...night, ...sending }
+    await promiseMessage(database.db, message, NOW)
+    const mine = await getAlertSettings(cast.keeper.at(NOW), cast.rinkId)
+    expect(mine.tonightDate).toBe('2027-01-12')
+    expect(mine.devices).toMatchObject([{ pushHost: 'updates.push.services.mozilla.com', disabledReason: null }])
+    // What the browser works out for itself: SHA-256 of the address, in hex.
+    expect(mine.devices[0]?.fingerprint).toBe(createHash('sha256').update(endpoint).digest('hex'))
+    expect(mine.told).toMatchObject([
+      { kind: 'flood-tonight', channel: 'email', nightDate: '2027-01-12', state: 'promised' },
+    ])
+    expect(await getAlertSettings(cast.crew.at(NOW), cast.rinkId)).toMatchObject({ devices: [], told: [] })
   })
 
   test('silence: tonight, through a date, and no more; other choices stay', async () => {

@@ -43,7 +43,7 @@ describe('by position', () => {
   })
 
   test('the date line is no wall', async () => {
-    // Taveuni, Fiji: the town of Waiyevo lies at 179.98 E on the line.
+    // Labasa, Fiji, lies west of the line, at 16.4 S 179.4 E.
     expect(await findNearestPlace(-16.8, -179.95)).toMatchObject({ country: 'Fiji' })
   })
 

@@ -1,5 +1,6 @@
 // The sentence at the head of the alerts page, and times of day as the person reads them.
 import { dayText } from '@/components/rinks/reader'
+import { countText } from '@/lib/words/quantities'
 import type { AlertSettings } from '@/lib/services/alert-preferences'
 
 /** "3:30 pm", "15:30": a time of day has no date and no zone. */
@@ -20,7 +21,7 @@ export function standingText({ preferences, tonightDate, devices, clock }: Alert
   }
   const count = wantsPush ? devices.filter(({ disabledReason }) => disabledReason === null).length : 0
   const ways = [
-    ...(count > 0 ? [count === 1 ? 'on one device' : `on ${count} devices`] : []),
+    ...(count > 0 ? [`on ${countText(count)} ${count === 1 ? 'device' : 'devices'}`] : []),
     ...(wantsEmail ? ['by e-mail'] : []),
   ]
   if (ways.length === 0) return 'You are not told about this rink.'

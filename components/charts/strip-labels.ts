@@ -21,7 +21,7 @@ export function tickInstants(startsAt: number, endsAt: number, timeZone: string)
 
 /** "3 pm", "noon", "midnight"; or "15:00". */
 export function tickLabel(localHour: number, clock: '12' | '24'): string {
-  if (clock === '24') return `${localHour}:00`
+  if (clock === '24') return `${String(localHour).padStart(2, '0')}:00`
   if (localHour === 0) return 'midnight'
   if (localHour === 12) return 'noon'
   return `${localHour % 12} ${localHour < 12 ? 'am' : 'pm'}`

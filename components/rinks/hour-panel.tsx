@@ -61,7 +61,7 @@ function KnownHour({ hour, reader }: { hour: TonightHour; reader: WordOptions })
       <Facts
         isDense
         rows={[
-          { name: 'Freezes', figure: rateText(hour.freezeRateMmPerH ?? 0, reader) },
+          freezingOrMelting(hour, reader),
           {
             name: 'Poured then, set by',
             figure: hour.setsAt ? doneByText(hour.setsAt, reader) : 'not within the forecast',
@@ -104,10 +104,16 @@ function tellingReasons({ reasons }: TonightHour): Reason[] {
   return (against.length > 0 ? against : reasons).slice(0, 4)
 }
 
+function freezingOrMelting({ freezeRateMmPerH }: TonightHour, reader: WordOptions): { name: string; figure: string } {
+  const rate = freezeRateMmPerH ?? 0
+  return { name: rate < 0 ? 'Melts' : 'Freezes', figure: rateText(Math.abs(rate), reader) }
+}
+
 function spokenHour(hour: TonightHour, reader: WordOptions): string {
   if (!hour.isKnown) return `${clockText(hour.time, reader)}: no forecast.`
+  const { name, figure } = freezingOrMelting(hour, reader)
   const set = hour.setsAt
     ? `Poured then, set by ${doneByText(hour.setsAt, reader)}.`
     : 'Poured then, not set within the forecast.'
-  return `${clockText(hour.time, reader)}: ${VERDICT_WORDS[hour.verdict]}. Freezes ${rateText(hour.freezeRateMmPerH ?? 0, reader)}. ${set}`
+  return `${clockText(hour.time, reader)}: ${VERDICT_WORDS[hour.verdict]}. ${name} ${figure}. ${set}`
 }

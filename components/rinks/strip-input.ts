@@ -7,8 +7,8 @@ import type { StripFrame, StripHour, StripInput } from '../charts/night-strip-la
 export type StripSize = 'wide' | 'narrow'
 
 const FRAMES: Record<StripSize, StripFrame> = {
-  wide: { width: 800, height: 274, left: 34, right: 44, plotTop: 52, plotBottom: 214 },
-  narrow: { width: 390, height: 268, left: 34, right: 40, plotTop: 52, plotBottom: 208 },
+  wide: { width: 800, height: 274, left: 38, right: 44, plotTop: 52, plotBottom: 214 },
+  narrow: { width: 390, height: 268, left: 38, right: 40, plotTop: 52, plotBottom: 208 },
 }
 /** A phone shows the hours in which floods happen: 3 pm to 9 am. */
 const NARROW_FROM_MINUTE = 15 * 60

@@ -43,7 +43,7 @@ describe('hour ticks', () => {
   })
 
   test('the 24-hour clock has no noon', () => {
-    expect([0, 12, 15].map((hour) => tickLabel(hour, '24'))).toEqual(['0:00', '12:00', '15:00'])
+    expect([0, 12, 15].map((hour) => tickLabel(hour, '24'))).toEqual(['00:00', '12:00', '15:00'])
   })
 })
 

@@ -61,7 +61,11 @@ function JudgedNight({ view, now, change }: { view: Judged; now: number; change:
           {passes.length > 0 ? (
             <Plan view={view} passes={passes} change={change} />
           ) : (
-            <p className="border-t border-rule pt-3">No pass is planned for this night.</p>
+            <p className="border-t border-rule pt-3">
+              {summary.verdict === 'fill'
+                ? 'No flood passes while the rink is being filled.'
+                : 'No pass is planned for this night.'}
+            </p>
           )}
           {isGranted(view.viewer.role, 'receiveAlerts') ? <Mute view={view} change={change} /> : null}
           <Cautions cautions={summary.cautions} reader={reader} />

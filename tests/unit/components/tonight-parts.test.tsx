@@ -1,0 +1,89 @@
+// Parts of the night sheet: who gets which entries, the verdict set off, and what is said when the state may be old.
+import { renderToStaticMarkup } from 'react-dom/server'
+import { describe, expect, test } from 'vitest'
+import { entriesFor } from '@/app/(member)/_components/navigation'
+import { DataSource } from '@/app/(member)/rinks/[rinkId]/_components/data-source'
+import { passWords } from '@/app/(member)/rinks/[rinkId]/_components/pass-words'
+import { StatusNotices } from '@/app/(member)/rinks/[rinkId]/_components/status-notices'
+import type { ReadTrouble } from '@/app/(member)/rinks/[rinkId]/_components/use-tonight'
+import { Verdict } from '@/app/(member)/rinks/[rinkId]/_components/verdict'
+import { ageText, nightLabel } from '@/components/rinks/reader'
+import type { TonightView } from '@/lib/schemas/tonight-view'
+import { isoAt, NOON, passAt, summaryOf, tonightView } from '../../fixtures/tonight-view'
+
+const NOW = NOON + 6.7 * 3_600_000
+const textOf = (markup: string) => markup.replace(/<[^>]+>/g, '').replaceAll('\u00a0', ' ')
+
+describe('navigation', () => {
+  const words = (role: 'keeper' | 'crew' | 'skater' | undefined) => entriesFor('1', role).map((entry) => entry.word)
+
+  test('shows each role what it may open', () => {
+    expect(words('keeper')).toEqual(['Tonight', 'Alerts', 'Rink', 'More'])
+    expect(words('crew')).toEqual(['Tonight', 'Alerts', 'More'])
+    expect(words('skater')).toEqual(['Tonight', 'More'])
+  })
+
+  test('shows nothing of a rink that is not on the person’s list', () => {
+    expect(entriesFor('1', undefined)).toEqual(entriesFor(undefined, undefined))
+  })
+})
+
+test('the verdict sets off its first words and keeps times of day on one line', () => {
+  const markup = renderToStaticMarkup(<Verdict view={tonightView()} summary={summaryOf()} now={NOW} />)
+  expect(markup).toContain('<em class="font-semibold not-italic text-lamp-text">Flood tonight</em>')
+  expect(markup).toContain('7\u00a0pm')
+  expect(textOf(markup)).toContain('27 of 30 forecast runs agree.')
+})
+
+describe('a state that may be old', () => {
+  const say = (change: Partial<TonightView>, trouble: ReadTrouble = null, now = NOW) =>
+    textOf(
+      renderToStaticMarkup(
+        <StatusNotices view={tonightView(change)} now={now} trouble={trouble} onReadAgain={() => {}} />,
+      ),
+    )
+
+  test('is silent while all is fresh', () => {
+    expect(say({})).toBe('')
+  })
+
+  test('says as of when, and how long ago, without a connection', () => {
+    expect(say({}, 'offline', NOW + 3 * 3_600_000)).toContain('As of 6:42 pm, 3 hours ago. No connection')
+  })
+
+  test('sends a signed-out person to sign-in', () => {
+    expect(say({}, 'signed-out')).toContain('Sign in to see the newest state')
+  })
+
+  test('gives a stale forecast its age, and does not repeat that the last read failed', () => {
+    const forecast = { ...tonightView().forecast, isStale: true, fetchedAt: isoAt(-1) } as TonightView['forecast']
+    const said = say({ forecast, lastReadFailed: true })
+    expect(said).toContain('This forecast was read 8 hours ago')
+    expect(said).not.toContain('The last try')
+  })
+})
+
+test('a poured pass says by whom, a planned one when it is set', () => {
+  const view = tonightView()
+  const planned = passAt(1, 8, 9.7)
+  expect(passWords(planned, view)).toEqual({
+    what: '3 mm over the whole sheet',
+    detail: '420 L, 17 min of hose; set by 9:45 pm',
+  })
+  expect(passWords({ ...planned, poured: { at: isoAt(8), by: 'Ann' } }, view).detail).toBe('420 L, poured by Ann')
+})
+
+test('the source is named with its licence and linked', () => {
+  const markup = renderToStaticMarkup(<DataSource view={tonightView()} now={NOW} />)
+  expect(markup).toContain('href="https://open-meteo.com/"')
+  expect(textOf(markup)).toContain('Forecast issued 5 pm, read 5:12 pm, 2 hours ago')
+  expect(textOf(markup)).toContain('CC BY 4.0')
+})
+
+test('nights are named by both their dates, ages by their largest unit', () => {
+  expect(nightLabel('2027-01-12')).toBe('Tue 12 to Wed 13 January')
+  expect(nightLabel('2027-01-31')).toBe('Sun 31 January to Mon 1 February')
+  expect(
+    [0, 1, 59, 61, 60 * 47, 60 * 72].map((minutes) => ageText(new Date(NOW - minutes * 60_000).toISOString(), NOW)),
+  ).toEqual(['just now', '1 minute ago', '59 minutes ago', '1 hour ago', '47 hours ago', '3 days ago'])
+})

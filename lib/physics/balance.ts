@@ -81,6 +81,19 @@ export function surfaceBalance(hour: PreparedHour, kind: SurfaceKind, surfaceTem
   return { netWm2: netOf(parts), parts }
 }
 
+// Keyed by identity: a prepared hour is never changed once made, so its law is drawn once however many sheets pass through it.
+const wetLaws = new WeakMap<PreparedHour, SurfaceLaw>()
+
+/** The law of a wet surface around 0 °C, without precipitation; drawn once an hour. */
+export function wetLaw(hour: PreparedHour): SurfaceLaw {
+  let law = wetLaws.get(hour)
+  if (!law) {
+    law = surfaceLaw(hour, 'wet', 0)
+    wetLaws.set(hour, law)
+  }
+  return law
+}
+
 /**
  * Heat balance of a fresh flood: a wet surface at 0 °C.
  *
@@ -89,7 +102,7 @@ export function surfaceBalance(hour: PreparedHour, kind: SurfaceKind, surfaceTem
  * @throws RangeError for an unknown hour.
  */
 export function wetSurfaceBalance(hour: PreparedHour): SurfaceBalance {
-  const { parts } = surfaceBalance(hour, 'wet', 0)
+  const { parts } = wetLaw(hour)
   const withRain = { ...parts, precipitation: precipitationHeatWm2(hour) }
   return { netWm2: netOf(withRain), parts: withRain }
 }

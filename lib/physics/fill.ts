@@ -66,14 +66,15 @@ export function followGrowth(
   }
   for (let i = startIndex; i < hours.length; i++) {
     state = advanceSheet(state, hours[i]!)
-    const nowThick = reportSheet(state).thicknessMm
-    const passed = (wanted: number) => i - startIndex + crossing(thickness, nowThick, wanted)
-    if (growth.hoursToSkin === null && nowThick >= SKIN_MM) growth.hoursToSkin = passed(SKIN_MM)
-    thicknessesMm.forEach((wanted, index) => {
-      if (growth.hoursToThickness[index] === null && nowThick >= wanted) growth.hoursToThickness[index] = passed(wanted)
-    })
-    if (growth.hoursToFrozen === null && state.belowKgM2 <= 0) growth.hoursToFrozen = i - startIndex + 1
-    thickness = nowThick
+    const grown = reportSheet(state).thicknessMm
+    const hour = i - startIndex
+    if (growth.hoursToSkin === null && grown >= SKIN_MM) growth.hoursToSkin = hour + crossing(thickness, grown, SKIN_MM)
+    for (let wanted = 0; wanted < thicknessesMm.length; wanted++) {
+      if (growth.hoursToThickness[wanted] !== null || grown < thicknessesMm[wanted]!) continue
+      growth.hoursToThickness[wanted] = hour + crossing(thickness, grown, thicknessesMm[wanted]!)
+    }
+    if (growth.hoursToFrozen === null && state.belowKgM2 <= 0) growth.hoursToFrozen = hour + 1
+    thickness = grown
   }
   growth.state = state
   return growth

@@ -21,18 +21,29 @@ const BRIDGED = [
  * @returns Copies with every lone gap filled by the mean of its neighbours; longer gaps stay null.
  */
 export function bridgeLoneGaps(records: readonly HourlyRecord[]): HourlyRecord[] {
-  return records.map((record, index) => {
-    const before = records[index - 1]
-    const after = records[index + 1]
-    if (!before || !after || BRIDGED.every((field) => isNumber(record[field]))) return record
-    const filled: HourlyRecord = { ...record }
-    for (const field of BRIDGED) {
-      const from = before[field]
-      const to = after[field]
-      if (!isNumber(record[field]) && isNumber(from) && isNumber(to)) filled[field] = (from + to) / 2
-    }
-    return filled
-  })
+  const bridged = records.slice()
+  for (let i = 1; i + 1 < records.length; i++) {
+    if (isComplete(records[i]!)) continue
+    bridged[i] = bridge(records[i - 1]!, records[i]!, records[i + 1]!)
+  }
+  return bridged
+}
+
+function isComplete(record: HourlyRecord): boolean {
+  for (const field of BRIDGED) if (!isNumber(record[field])) return false
+  return true
+}
+
+function bridge(before: HourlyRecord, record: HourlyRecord, after: HourlyRecord): HourlyRecord {
+  let filled: HourlyRecord | null = null
+  for (const field of BRIDGED) {
+    const from = before[field]
+    const to = after[field]
+    if (isNumber(record[field]) || !isNumber(from) || !isNumber(to)) continue
+    filled ??= { ...record }
+    filled[field] = (from + to) / 2
+  }
+  return filled ?? record
 }
 
 /** True when the model can work with the hour. */

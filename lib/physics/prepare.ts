@@ -48,6 +48,7 @@ function knownHour(record: HourlyRecord, startsAtMillis: number, site: Site): Pr
   const cloudCover = record.cloudCover ?? cloudFromLongwave(record.longwaveDownWm2!, airTemperatureC, clearEmissivity)
   const skyWm2 =
     record.longwaveDownWm2 ?? cloudySkyEmissivity(clearEmissivity, cloudCover) * blackBodyWm2(airTemperatureC)
+  const fallen = precipitationPhase(record, airTemperatureC, precipitationMm)
   return {
     startsAtMillis,
     time: record.time,
@@ -70,7 +71,8 @@ function knownHour(record: HourlyRecord, startsAtMillis: number, site: Site): Pr
       site.skyView,
     ),
     precipitationMm,
-    ...precipitationPhase(record, airTemperatureC, precipitationMm),
+    rainMm: fallen.rainMm,
+    snowfallCm: fallen.snowfallCm,
     pressureHpa: inRange('pressureHpa [hPa]', record.pressureHpa ?? STANDARD_PRESSURE_HPA, 400, 1100),
     snowOnIceCm: record.snowOnIceCm ?? null,
   }

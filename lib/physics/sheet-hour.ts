@@ -5,12 +5,11 @@ import { groundHeatWm2, waterToIceWm2 } from './ground'
 import { closeSurface, finishSurface, vapourLossKgM2, type ClosedSurface } from './sheet-surface'
 import { fallOnSheet, setMeasuredSnow } from './sheet-fall'
 import { freezeOpenWater, growThinIce, isThinIce, type LinearLoss } from './thin-ice'
-import { surfaceLaw } from './balance'
+import { surfaceLaw, wetLaw } from './balance'
 import { settledDepthCm } from './snow'
 import { tidyCells } from './grid'
 import type { PreparedHour } from './types'
 import type { SheetState } from './sheet-state'
-import type { SurfaceKind } from './albedo'
 
 /** [kg/m²] */
 const DUST_KG = 0.02
@@ -23,10 +22,16 @@ export interface HourResult {
 
 /** Carries a sheet through a known hour and accounts for every joule. */
 export function runHour(before: SheetState, hour: PreparedHour): HourResult {
+  // Written out: a spread costs more than the physics of a quiet hour.
   const state: SheetState = {
-    ...before,
+    base: before.base,
     massKgM2: before.massKgM2.slice(),
     enthalpyJM2: before.enthalpyJM2.slice(),
+    snowKgM2: before.snowKgM2,
+    snowDepthCm: before.snowDepthCm,
+    belowKgM2: before.belowKgM2,
+    belowTemperatureC: before.belowTemperatureC,
+    surfaceTemperatureC: before.surfaceTemperatureC,
   }
   let receivedJM2 = setMeasuredSnow(state, hour) + fallOnSheet(state, hour)
   const steps = stepsPerHour(state)
@@ -40,9 +45,9 @@ function advance(state: SheetState, hour: PreparedHour, seconds: number): number
   const groundWm2 = groundHeatWm2(state.base)
   if (state.massKgM2.length === 0) {
     if (state.belowKgM2 <= 0) return 0
-    return freezeOpenWater(state, lossOf(hour, 'water', state.belowTemperatureC), groundWm2, seconds)
+    return freezeOpenWater(state, openWaterLoss(hour, state.belowTemperatureC), groundWm2, seconds)
   }
-  if (isThinIce(state)) return growThinIce(state, lossOf(hour, 'wet', 0), groundWm2, seconds)
+  if (isThinIce(state)) return growThinIce(state, youngIceLoss(hour), groundWm2, seconds)
   const surface = closeSurface(state, hour, seconds)
   const conducted = conductThrough(state, surface, groundWm2, seconds)
   const topC = cellTemperatureC(state.massKgM2[0]!, state.enthalpyJM2[0]!)
@@ -67,9 +72,14 @@ export function conductThrough(state: SheetState, surface: ClosedSurface, ground
   return (groundWm2 + sharedWm2) * seconds - flows.topLossJM2
 }
 
-function lossOf(hour: PreparedHour, kind: SurfaceKind, aroundC: number): LinearLoss {
-  const law = surfaceLaw(hour, kind, aroundC)
-  return { lossAt0Wm2: law.netWm2 - law.slopeWm2K * aroundC, slopeWm2K: law.slopeWm2K }
+function openWaterLoss(hour: PreparedHour, waterC: number): LinearLoss {
+  const law = surfaceLaw(hour, 'water', waterC)
+  return { lossAt0Wm2: law.netWm2 - law.slopeWm2K * waterC, slopeWm2K: law.slopeWm2K }
+}
+
+function youngIceLoss(hour: PreparedHour): LinearLoss {
+  const law = wetLaw(hour)
+  return { lossAt0Wm2: law.netWm2, slopeWm2K: law.slopeWm2K }
 }
 
 /** Ice at the foot grows by what conduction takes up beyond what the water gives, or melts. */

@@ -11,7 +11,7 @@ import { addToTop } from './sheet-fall'
 import { cellLiquidKgM2, cellTemperatureC, faceResistance } from './column'
 import { NO_SUNSHINE, shareSunshine, type SharedSunshine } from './sunshine-in-ice'
 import { snowConductivity } from './snow'
-import { surfaceLaw, type SurfaceLaw } from './balance'
+import { surfaceLaw, wetLaw, type SurfaceLaw } from './balance'
 import type { PreparedHour } from './types'
 import type { SheetState } from './sheet-state'
 import type { SurfaceKind } from './albedo'
@@ -50,7 +50,7 @@ export function closeSurface(state: SheetState, hour: PreparedHour, seconds: num
   if (liquid <= 0) return frozenSurface(state, hour, 'ice', topC, faceResistance(mass, enthalpy))
   if (liquid >= mass)
     return passedThrough('wet', warmWaterLaw(hour, topC, (mass * WATER_HEAT_CAPACITY) / seconds), NO_SUNSHINE, 0)
-  const law = surfaceLaw(hour, 'wet', 0)
+  const law = wetLaw(hour)
   // What is frozen of a wet cell that loses heat is its skin; while it melts, the water is on top.
   const skin = law.netWm2 > 0 ? (mass - liquid) / ICE_DENSITY / ICE_CONDUCTIVITY : 0
   return passedThrough('wet', law, NO_SUNSHINE, skin)
@@ -83,7 +83,7 @@ export function vapourLossKgM2(surface: ClosedSurface, seconds: number): number 
 
 /** A thin film warms or cools so fast within a step that its law must be drawn where it will end. */
 function warmWaterLaw(hour: PreparedHour, waterC: number, capacityWm2K: number): SurfaceLaw {
-  let law = surfaceLaw(hour, 'wet', waterC)
+  let law = waterC === 0 ? wetLaw(hour) : surfaceLaw(hour, 'wet', waterC)
   for (let round = 0; round < 4; round++) {
     const endsC = waterC - (law.netWm2 + law.slopeWm2K * (waterC - law.aroundC)) / (capacityWm2K + law.slopeWm2K)
     const towardsC = Math.min(WARMEST_FILM_C, Math.max(0, (endsC + law.aroundC) / 2))

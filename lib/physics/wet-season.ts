@@ -1,6 +1,6 @@
 // What a run of hours would do to a wet surface at 0 °C, worked out once and asked many times.
 import { FUSION_J_PER_KG, HOUR_SECONDS } from './constants'
-import { precipitationHeatWm2, surfaceLaw } from './balance'
+import { precipitationHeatWm2, wetLaw } from './balance'
 import type { PreparedHour } from './types'
 
 export interface WetSeason {
@@ -15,14 +15,8 @@ export interface WetSeason {
   bestFromHereJM2: Float64Array
 }
 
-interface WetHour {
-  lossWm2: number
-  slopeWm2K: number
-}
-
 // Keyed by identity: prepared hours are never changed once made, so the same key always means the same answer.
 const wetSeasons = new WeakMap<readonly PreparedHour[], WetSeason>()
-const wetHours = new WeakMap<PreparedHour, WetHour>()
 
 /** The wet season of a run of hours. */
 export function wetSeason(hours: readonly PreparedHour[]): WetSeason {
@@ -49,23 +43,14 @@ function workOut(hours: readonly PreparedHour[]): WetSeason {
       best = 0
       continue
     }
-    const { lossWm2, slopeWm2K } = wetHour(hour)
+    const law = wetLaw(hour)
+    const lossWm2 = law.netWm2 + precipitationHeatWm2(hour)
     season.lossWm2[i] = lossWm2
-    season.slopeWm2K[i] = slopeWm2K
+    season.slopeWm2K[i] = law.slopeWm2K
     season.fallsKgM2[i] = hour.precipitationMm
     const gain = lossWm2 * HOUR_SECONDS - hour.precipitationMm * FUSION_J_PER_KG
     best = Math.max(0, best + gain)
     season.bestFromHereJM2[i] = best
   }
   return season
-}
-
-function wetHour(hour: PreparedHour): WetHour {
-  let wet = wetHours.get(hour)
-  if (!wet) {
-    const law = surfaceLaw(hour, 'wet', 0)
-    wet = { lossWm2: law.netWm2 + precipitationHeatWm2(hour), slopeWm2K: law.slopeWm2K }
-    wetHours.set(hour, wet)
-  }
-  return wet
 }

@@ -4,11 +4,12 @@ import type { AlertKind } from '@/lib/advice/alert-due'
 
 export interface ToldAlert {
   userId: string
+  channel: 'email' | 'push'
   kind: AlertKind
   version: number
 }
 
-/** Alerts promised for a night, newest window version first; one told on two channels counts once. */
+/** Alerts promised for a night, newest window version first. */
 export async function listToldAlerts(
   db: Db,
   { rinkId, nightDate }: { rinkId: string; nightDate: string },
@@ -16,6 +17,6 @@ export async function listToldAlerts(
   return db('messages as m')
     .join('advised_windows as w', 'w.id', 'm.window_id')
     .where({ 'm.rink_id': rinkId, 'm.night_date': nightDate })
-    .distinct<ToldAlert[]>({ userId: 'm.user_id', kind: 'm.kind', version: 'w.version' })
+    .distinct<ToldAlert[]>({ userId: 'm.user_id', channel: 'm.channel', kind: 'm.kind', version: 'w.version' })
     .orderBy('version', 'desc')
 }

@@ -41,3 +41,8 @@ export async function enqueuePull(db: Db, cellId: string, runAt?: Date): Promise
 export async function enqueueRefresh(db: Db, rinkId: string): Promise<void> {
   await enqueueJob(db, 'refresh-outlook', { rinkId }, { key: `refresh:${rinkId}` })
 }
+
+/** A look, soon, at whether there is something to tell about a rink's night. */
+export async function enqueueDecision(db: Db, rinkId: string): Promise<void> {
+  await enqueueJob(db, 'decide-alerts', { rinkId }, { key: `decide:${rinkId}:now` })
+}

@@ -6,6 +6,8 @@ import {
   putPushSubscription,
   type PushKeys,
 } from '@/db/queries/push-subscriptions'
+import { enqueueDecision } from '@/db/queries/jobs'
+import { listRinksOfUser } from '@/db/queries/rinks'
 import type { ServiceContext } from '@/lib/context'
 import { ConflictError, InvalidInputError, NotFoundError } from '@/lib/errors'
 import { isAllowedPushEndpoint } from '@/lib/messaging/push-services'
@@ -54,7 +56,12 @@ export async function addDevice(
   if ((await countPushSubscriptions(db, viewer.userId)) >= MOST_DEVICES) {
     throw new ConflictError(`You have ${MOST_DEVICES} devices already. Remove one under Alerts first.`)
   }
-  return putPushSubscription(db, viewer.userId, keys, now)
+  return db.transaction(async (trx) => {
+    const device = await putPushSubscription(trx, viewer.userId, keys, now)
+    // Whoever adds a device in the evening wants to hear of tonight on it too.
+    for (const { id } of await listRinksOfUser(trx, viewer.userId)) await enqueueDecision(trx, id)
+    return device
+  })
 }
 
 /** The browser gave its subscription a new address. Only one's own old address is given up. */

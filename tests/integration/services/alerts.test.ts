@@ -85,6 +85,18 @@ describe('a cold clear night', () => {
     expect(await told()).toEqual([...TOLD_ONCE, 'flood-tonight push keeper'])
   })
 
+  test('is told by push alone to somebody who adds a device after the mail', async () => {
+    await judgeAt(AT_16_10)
+    await database.db('push_subscriptions').insert({
+      user_id: cast.keeper.userId,
+      endpoint: `https://push.example/${cast.rinkId}`,
+      p256dh: 'key',
+      auth: 'auth',
+    })
+    await decideAlerts({ db: database.db, now: AT_17_10 }, systemRinkAccess<'view'>(cast.rinkId))
+    expect(await told()).toEqual([...TOLD_ONCE, 'flood-tonight push keeper'])
+  })
+
   test('waits for the time of day that the person chose', async () => {
     await judgeAt(AT_14_10)
     expect(await told()).toEqual([])

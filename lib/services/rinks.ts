@@ -88,10 +88,8 @@ async function writeAround(trx: Db, rinkId: string, rink: RinkInput, now: Date):
  *
  * @returns the rink; the one made before when this form was sent already.
  */
-export async function setUpRink(
-  { db, now, viewer }: ServiceContext,
-  input: SetUpRinkInput,
-): Promise<{ rinkId: string }> {
+export async function setUpRink(context: ServiceContext, input: SetUpRinkInput): Promise<{ rinkId: string }> {
+  const { db, now, viewer } = context
   const made = { createdBy: viewer.userId, creationKey: input.creationKey }
   const before = await findRinkByCreationKey(db, made)
   if (before) return { rinkId: before.id }

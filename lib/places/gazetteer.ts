@@ -52,13 +52,13 @@ const WHOLE_NAME_WEIGHT = 20
 
 /** The rank of an entry for a query, 0 when it does not match. */
 function rank({ city, names, qualifier }: Entry, name: string, within: string[]): number {
-  if (!names.some((candidate) => candidate.startsWith(name))) return 0
+  if (!names.some((candidate) => ` ${candidate}`.includes(` ${name}`))) return 0
   if (!within.every((word) => ` ${qualifier}`.includes(` ${word}`))) return 0
   return (city.population + 1) * (names.includes(name) ? WHOLE_NAME_WEIGHT : 1)
 }
 
 /**
- * Places whose name begins with the text, the biggest first.
+ * Places with a word that begins with the text, the biggest first: Sudbury in Ontario is Greater Sudbury.
  *
  * @param query A name, or a name, a comma and a region or country. Accents and case do not matter.
  * @param limit Most places to return.

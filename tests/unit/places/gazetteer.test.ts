@@ -19,6 +19,7 @@ describe('by name', () => {
     ['tromso', 'Tromsø'],
     ['lodz', 'Łódź'],
     ["st. john's", "St. John's"],
+    ['sudb', 'Greater Sudbury'],
   ])('%s finds %s', async (query, name) => {
     expect((await findPlaces(query))[0]?.name).toBe(name)
   })

@@ -2,7 +2,7 @@
 import type { TonightHour } from '@/lib/schemas/tonight-view'
 import { amountText } from './amount-text'
 import { describeNight } from './strip-description'
-import type { StripWords } from '../charts/night-strip-drawing'
+import type { StripWords } from '../charts/strip-parts'
 import { xOf, type StripInput } from '../charts/night-strip-layout'
 import { placeLabels, tickInstants, tickLabel, wetRuns, type WetRun } from '../charts/strip-labels'
 import type { WordOptions } from '@/lib/words/options'

@@ -16,6 +16,7 @@ const config = [
   {
     rules: {
       '@typescript-eslint/consistent-type-imports': 'error',
+      '@typescript-eslint/no-unused-vars': ['error', { argsIgnorePattern: '^_', varsIgnorePattern: '^_' }],
       'import/no-cycle': 'error',
       'import/no-restricted-paths': [
         'error',

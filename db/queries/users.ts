@@ -14,6 +14,8 @@ export interface AccountRow {
   units: UserRow['units']
   clock: UserRow['clock']
   hasPassword: boolean
+  /** The mail server refused this address for good. */
+  isEmailRefused: boolean
 }
 
 /**
@@ -55,7 +57,14 @@ export async function findEmail(db: Db, userId: string): Promise<string | undefi
 export async function findAccount(db: Db, userId: string): Promise<AccountRow | undefined> {
   return db('users')
     .where({ id: userId })
-    .first('email', 'name', 'units', 'clock', db.raw('password_hash is not null as "hasPassword"'))
+    .first(
+      'email',
+      'name',
+      'units',
+      'clock',
+      db.raw('password_hash is not null as "hasPassword"'),
+      db.raw('email_refused_at is not null as "isEmailRefused"'),
+    )
 }
 
 /** The first confirmation counts. @returns true when this call confirmed the address. */

@@ -6,12 +6,11 @@ import {
   putAlertPreferences,
   type AlertPreferences,
 } from '@/db/queries/alert-preferences'
-import { enqueueJob } from '@/db/queries/jobs'
+import { enqueueDecision } from '@/db/queries/jobs'
 import { listDevices, type DeviceRow } from '@/db/queries/push-subscriptions'
 import { getRinkHead } from '@/db/queries/rinks'
 import { listToldMessages, type ToldMessageRow } from '@/db/queries/told-messages'
 import { findAccount } from '@/db/queries/users'
-import type { Db } from '@/db/knex'
 import { requireRink } from '@/lib/access/require-rink'
 import { tonightDate } from '@/lib/advice/night'
 import { addDays } from '@/lib/advice/zoned-time'
@@ -37,6 +36,8 @@ export interface AlertSettings {
   tonightDate: string
   preferences: AlertPreferences
   email: string
+  /** Mail to it came back for good: none is sent until a mailed link was opened. */
+  isEmailRefused: boolean
   clock: '12' | '24'
   devices: Device[]
   told: ToldMessage[]
@@ -62,15 +63,11 @@ export async function getAlertSettings(context: ServiceContext, rinkId: string):
     tonightDate: tonightDate(now, rink.timeZone),
     preferences: (await findAlertPreferences(db, access, viewer.userId)) ?? DEFAULT_PREFERENCES,
     email: account.email,
+    isEmailRefused: account.isEmailRefused,
     clock: account.clock,
     devices: (await listDevices(db, viewer.userId)).map(toDevice),
     told: await listToldMessages(db, access, viewer.userId, TOLD_SHOWN),
   }
-}
-
-/** An earlier time of day, or the end of silence, may make something due at once. */
-async function decideAgain(trx: Db, rinkId: string): Promise<void> {
-  await enqueueJob(trx, 'decide-alerts', { rinkId }, { key: `decide:${rinkId}:now` })
 }
 
 export async function chooseAlertPreferences(context: ServiceContext, input: AlertPreferencesInput): Promise<void> {
@@ -78,7 +75,8 @@ export async function chooseAlertPreferences(context: ServiceContext, input: Ale
   const access = await requireRink(context, rinkId, 'receiveAlerts')
   await context.db.transaction(async (trx) => {
     await putAlertPreferences(trx, access, context.viewer.userId, choice, context.now)
-    await decideAgain(trx, rinkId)
+    // An earlier time of day, or the end of silence, may make something due at once.
+    await enqueueDecision(trx, rinkId)
   })
 }
 
@@ -92,7 +90,7 @@ export async function muteAlerts(
   const mutedThroughDate = lastSilentNight(input, tonightDate(context.now, timeZone))
   await context.db.transaction(async (trx) => {
     await putAlertPreferences(trx, access, context.viewer.userId, { mutedThroughDate }, context.now)
-    if (mutedThroughDate === null) await decideAgain(trx, input.rinkId)
+    if (mutedThroughDate === null) await enqueueDecision(trx, input.rinkId)
   })
   return { mutedThroughDate }
 }

@@ -2,6 +2,7 @@
 import type { Metadata } from 'next'
 import type { ReactNode } from 'react'
 import { DeviceSwitch } from '@/components/alerts/device-switch'
+import { Notice } from '@/components/ui/notice'
 import { PageFrame } from '@/components/ui/page-frame'
 import { pageContext } from '@/lib/auth/request-context'
 import { readEnvironment } from '@/lib/env'
@@ -30,6 +31,12 @@ export default async function AlertsPage({ params }: PageProps<'/rinks/[rinkId]/
             <MuteForm rinkId={rinkId} tonightDate={tonightDate} mutedThroughDate={preferences.mutedThroughDate} />
           </Section>
           <Section title="When and how">
+            {settings.isEmailRefused ? (
+              <Notice tone="caution">
+                Mail to {email} came back, so we send none. Once your mailbox works, sign out and sign in by mailed
+                link: that takes it back into use.
+              </Notice>
+            ) : null}
             <PreferencesForm
               rinkId={rinkId}
               email={email}

@@ -27,7 +27,7 @@ export function weekdayText(at: string | Date, words: WordOptions): string {
 }
 
 const PARTS: [fromMinute: number, name: string][] = [
-  [18 * 60, 'evening'],
+  [17 * 60, 'evening'],
   [12 * 60, 'afternoon'],
   [5 * 60, 'morning'],
 ]

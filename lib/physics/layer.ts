@@ -56,6 +56,7 @@ export function minutesToSet(
   if (!(startIndex >= 0 && startIndex < hours.length) || wet.isUnknown[startIndex]) return null
   const cold = sheetCold(state, groundHeatWm2(state.base))
   const wantedJM2 = heatToLose(layer, cold, wet.slopeWm2K[startIndex]!) - cold.atOnceJM2
+  if (wantedJM2 <= 0) return 0
   // No later hour brings enough loss: most of a thaw is answered here. A late start may skip the bad part of its hour.
   const best = Math.max(wet.bestFromHereJM2[startIndex]!, wet.bestFromHereJM2[startIndex + 1] ?? 0)
   if (wantedJM2 > cold.totalJM2 - cold.atOnceJM2 + best) return null

@@ -66,7 +66,7 @@ function knownHour(record: HourlyRecord, startsAtMillis: number, site: Site): Pr
       1500,
     ),
     longwaveDownWm2: longwaveOnRinkWm2(
-      inRange('longwaveDownWm2 [W/m²]', skyWm2, 50, 600),
+      inRange('longwaveDownWm2 [W/m²]', skyWm2, 30, 700),
       airTemperatureC,
       site.skyView,
     ),

@@ -12,6 +12,11 @@ const SPENT_JM2 = 300
 /** Deeper ice does not reach the surface within a night. [m] */
 const DEEPEST_M = 0.5
 
+// Asked for hundreds of thousands of times a run: the arrays are the module's own, and one answer lasts until the next.
+const shares = new Float64Array(MODES)
+const rates = new Float64Array(MODES)
+const cosines = new Float64Array(MODES)
+
 /** Heat the sheet has drawn from a surface held at 0 °C: `atOnce + Σ share · (1 - exp(-rate t))`. */
 export interface SheetCold {
   /** All it can draw, and what of that the modes left out hold. [J/m²] */
@@ -33,7 +38,7 @@ export interface SheetCold {
  *
  * @param state Sheet at the time of pouring.
  * @param bottomWm2 Ground heat into its foot (not for a sheet on water, whose foot is at 0 °C). [W/m²]
- * @returns Modes of the heat it can draw from above.
+ * @returns Modes of the heat it can draw from above, good until the next call.
  *
  * Source: heat equation on a slab, Carslaw & Jaeger; face at 0 °C, foot insulated (on the ground) or at 0 °C (on water).
  * The front of new ice that moves up from the sheet slows the draw by the Stefan number; see `slowed`.
@@ -54,8 +59,8 @@ export function sheetCold(state: SheetState, bottomWm2: number): SheetCold {
   const cold: SheetCold = {
     totalJM2: 0,
     atOnceJM2: 0,
-    sharesJM2: new Float64Array(MODES),
-    ratesPerS: new Float64Array(MODES),
+    sharesJM2: shares.fill(0),
+    ratesPerS: rates.fill(0),
     liquidKgM2,
     warmthJM2,
     bottomWm2: isFloating ? 0 : bottomWm2,
@@ -68,7 +73,7 @@ function projectOnModes(cold: SheetCold, state: SheetState, first: number, heigh
   const { massKgM2: mass, enthalpyJM2: enthalpy } = state
   const firstWave = ((isFloating ? 1 : 0.5) * Math.PI) / heightM
   const waveStep = Math.PI / heightM
-  const cosines = new Float64Array(MODES).fill(1)
+  cosines.fill(1)
   let depth = 0
   let topC = 0
   for (let i = first; i < mass.length && depth < heightM; i++) {

@@ -32,6 +32,14 @@ export function fallOnSheet(state: SheetState, hour: PreparedHour): number {
   return broughtJM2
 }
 
+/** Snow whose ice has melted away under it falls into the water. */
+export function sinkSnow(state: SheetState): void {
+  if (state.snowKgM2 <= 0 || state.massKgM2.length > 0 || state.belowKgM2 <= 0) return
+  mixIntoOpenWater(state, state.snowKgM2, -FUSION_J_PER_KG * state.snowKgM2)
+  state.snowKgM2 = 0
+  state.snowDepthCm = 0
+}
+
 /** A measured snow depth replaces the modelled one. Returns the enthalpy that comes with the change. [J/m²] */
 export function setMeasuredSnow(state: SheetState, hour: PreparedHour): number {
   if (hour.snowOnIceCm === null) return 0

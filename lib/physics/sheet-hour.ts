@@ -2,10 +2,10 @@
 import { FUSION_J_PER_KG, HOUR_SECONDS, WATER_HEAT_CAPACITY } from './constants'
 import { cellTemperatureC, cellLiquidKgM2, cellThicknessM, stepColumn } from './column'
 import { groundHeatWm2, waterToIceWm2 } from './ground'
-import { closeSurface, finishSurface, vapourLossKgM2, type ClosedSurface } from './sheet-surface'
-import { fallOnSheet, setMeasuredSnow } from './sheet-fall'
+import { closeSurface, finishSurface, vapourLossKgM2, warmWaterLaw, type ClosedSurface } from './sheet-surface'
+import { fallOnSheet, setMeasuredSnow, sinkSnow } from './sheet-fall'
 import { freezeOpenWater, growThinIce, isThinIce, type LinearLoss } from './thin-ice'
-import { surfaceLaw, wetLaw } from './balance'
+import { wetLaw } from './balance'
 import { settledDepthCm } from './snow'
 import { tidyCells } from './grid'
 import type { PreparedHour } from './types'
@@ -34,6 +34,7 @@ export function runHour(before: SheetState, hour: PreparedHour): HourResult {
     surfaceTemperatureC: before.surfaceTemperatureC,
   }
   let receivedJM2 = setMeasuredSnow(state, hour) + fallOnSheet(state, hour)
+  sinkSnow(state)
   const steps = stepsPerHour(state)
   for (let i = 0; i < steps; i++) receivedJM2 += advance(state, hour, HOUR_SECONDS / steps)
   tidyCells(state)
@@ -43,9 +44,10 @@ export function runHour(before: SheetState, hour: PreparedHour): HourResult {
 
 function advance(state: SheetState, hour: PreparedHour, seconds: number): number {
   const groundWm2 = groundHeatWm2(state.base)
+  if (state.belowKgM2 > 0) sinkMeltedFoot(state)
   if (state.massKgM2.length === 0) {
     if (state.belowKgM2 <= 0) return 0
-    return freezeOpenWater(state, openWaterLoss(hour, state.belowTemperatureC), groundWm2, seconds)
+    return freezeOpenWater(state, openWaterLoss(hour, state, seconds), groundWm2, seconds)
   }
   if (isThinIce(state)) return growThinIce(state, youngIceLoss(hour), groundWm2, seconds)
   const surface = closeSurface(state, hour, seconds)
@@ -54,6 +56,15 @@ function advance(state: SheetState, hour: PreparedHour, seconds: number): number
   return (
     conducted + finishSurface(state, hour, surface, topC, seconds) + loseVapour(state, vapourLossKgM2(surface, seconds))
   )
+}
+
+/** A foot that has melted through is water below like the rest. */
+function sinkMeltedFoot(state: SheetState): void {
+  for (let last = state.massKgM2.length - 1; last >= 0 && state.enthalpyJM2[last]! >= 0; last--) {
+    const heatJM2 = state.belowKgM2 * WATER_HEAT_CAPACITY * state.belowTemperatureC + state.enthalpyJM2.pop()!
+    state.belowKgM2 += state.massKgM2.pop()!
+    state.belowTemperatureC = heatJM2 / (state.belowKgM2 * WATER_HEAT_CAPACITY)
+  }
 }
 
 /** Conducts for a while under a closed surface and lets the foot grow or melt. Returns enthalpy received. [J/m²] */
@@ -72,9 +83,10 @@ export function conductThrough(state: SheetState, surface: ClosedSurface, ground
   return (groundWm2 + sharedWm2) * seconds - flows.topLossJM2
 }
 
-function openWaterLoss(hour: PreparedHour, waterC: number): LinearLoss {
-  const law = surfaceLaw(hour, 'water', waterC)
-  return { lossAt0Wm2: law.netWm2 - law.slopeWm2K * waterC, slopeWm2K: law.slopeWm2K }
+function openWaterLoss(hour: PreparedHour, state: SheetState, seconds: number): LinearLoss {
+  const capacity = (state.belowKgM2 * WATER_HEAT_CAPACITY) / seconds
+  const law = warmWaterLaw(hour, 'water', state.belowTemperatureC, capacity)
+  return { lossAt0Wm2: law.netWm2 - law.slopeWm2K * law.aroundC, slopeWm2K: law.slopeWm2K }
 }
 
 function youngIceLoss(hour: PreparedHour): LinearLoss {
@@ -129,14 +141,18 @@ function loseVapour(state: SheetState, lossKgM2: number): number {
   return dropDust(state) - carried
 }
 
-/** The last film of a sheet is too thin to have a temperature of its own: it is gone. */
+/** A film too thin to have a temperature of its own joins what it lies on; the last one is gone. Returns enthalpy received. */
 function dropDust(state: SheetState): number {
-  if (state.massKgM2.length !== 1 || state.massKgM2[0]! > DUST_KG) return 0
-  const lostJM2 = state.enthalpyJM2[0]!
-  state.massKgM2 = []
-  state.enthalpyJM2 = []
+  if (state.massKgM2[0]! > DUST_KG) return 0
+  const massKgM2 = state.massKgM2.shift()!
+  const enthalpyJM2 = state.enthalpyJM2.shift()!
+  if (state.massKgM2.length > 0) {
+    state.massKgM2[0]! += massKgM2
+    state.enthalpyJM2[0]! += enthalpyJM2
+    return 0
+  }
   state.surfaceTemperatureC = 0
-  return -lostJM2
+  return -enthalpyJM2
 }
 
 /** Short steps while water freezes at the top or young ice grows; an implicit hour is enough for a sheet that only breathes. */

@@ -33,6 +33,8 @@ export interface ClosedSurface {
 
 /** Snow too thin to count as cover. [kg/m²] */
 const TRACE_OF_SNOW_KG = 0.1
+/** No surface law is drawn below this. [°C] Ours; colder than any rink. */
+const COLDEST_SURFACE_C = -75
 /** A film of water in the sun gets no warmer. [°C] Ours, against runaway steps. */
 const WARMEST_FILM_C = 60
 /** The law is drawn anew when the surface turns out further than this from where it was drawn. [K] */
@@ -44,12 +46,12 @@ export function closeSurface(state: SheetState, hour: PreparedHour, seconds: num
   const enthalpy = state.enthalpyJM2[0]!
   const topC = cellTemperatureC(mass, enthalpy)
   if (state.snowKgM2 > TRACE_OF_SNOW_KG) {
-    return frozenSurface(state, hour, 'snow', topC, snowResistance(state) + faceResistance(mass, enthalpy))
+    return frozenSurface(state, hour, 'snow', topC, snowResistance(state) + faceResistance(mass, enthalpy), seconds)
   }
   const liquid = cellLiquidKgM2(mass, enthalpy)
-  if (liquid <= 0) return frozenSurface(state, hour, 'ice', topC, faceResistance(mass, enthalpy))
+  if (liquid <= 0) return frozenSurface(state, hour, 'ice', topC, faceResistance(mass, enthalpy), seconds)
   if (liquid >= mass)
-    return passedThrough('wet', warmWaterLaw(hour, topC, (mass * WATER_HEAT_CAPACITY) / seconds), NO_SUNSHINE, 0)
+    return passedThrough('wet', warmWaterLaw(hour, 'wet', topC, (mass * WATER_HEAT_CAPACITY) / seconds), NO_SUNSHINE, 0)
   const law = wetLaw(hour)
   // What is frozen of a wet cell that loses heat is its skin; while it melts, the water is on top.
   const skin = law.netWm2 > 0 ? (mass - liquid) / ICE_DENSITY / ICE_CONDUCTIVITY : 0
@@ -82,13 +84,18 @@ export function vapourLossKgM2(surface: ClosedSurface, seconds: number): number 
 }
 
 /** A thin film warms or cools so fast within a step that its law must be drawn where it will end. */
-function warmWaterLaw(hour: PreparedHour, waterC: number, capacityWm2K: number): SurfaceLaw {
-  let law = waterC === 0 ? wetLaw(hour) : surfaceLaw(hour, 'wet', waterC)
+export function warmWaterLaw(
+  hour: PreparedHour,
+  kind: 'wet' | 'water',
+  waterC: number,
+  capacityWm2K: number,
+): SurfaceLaw {
+  let law = surfaceLaw(hour, kind, Math.min(WARMEST_FILM_C, waterC))
   for (let round = 0; round < 4; round++) {
     const endsC = waterC - (law.netWm2 + law.slopeWm2K * (waterC - law.aroundC)) / (capacityWm2K + law.slopeWm2K)
     const towardsC = Math.min(WARMEST_FILM_C, Math.max(0, (endsC + law.aroundC) / 2))
     if (Math.abs(towardsC - law.aroundC) < REDRAW_K) break
-    law = surfaceLaw(hour, 'wet', towardsC)
+    law = surfaceLaw(hour, kind, towardsC)
   }
   return law
 }
@@ -99,17 +106,20 @@ function frozenSurface(
   kind: 'ice' | 'snow',
   topC: number,
   resistance: number,
+  seconds: number,
 ): ClosedSurface {
-  let law = surfaceLaw(hour, kind, Math.min(0, state.surfaceTemperatureC))
+  let law = surfaceLaw(hour, kind, Math.max(COLDEST_SURFACE_C, Math.min(0, state.surfaceTemperatureC)))
   let sun = kind === 'ice' ? shareSunshine(state, law.parts.shortwave) : NO_SUNSHINE
   let surfaceC = surfaceTemperature(law, sun, topC, resistance)
   if (Math.abs(surfaceC - law.aroundC) > REDRAW_K) {
-    law = surfaceLaw(hour, kind, Math.max(-60, Math.min(0, surfaceC)))
+    law = surfaceLaw(hour, kind, Math.max(COLDEST_SURFACE_C, Math.min(0, surfaceC)))
     if (kind === 'ice') sun = shareSunshine(state, law.parts.shortwave)
     surfaceC = surfaceTemperature(law, sun, topC, resistance)
   }
   if (surfaceC <= 0) return passedThrough(kind, law, sun, resistance)
-  return kind === 'ice' ? meltingIce(law, sun) : meltingSnow(law, resistance)
+  if (kind === 'snow') return meltingSnow(law, resistance)
+  const meltsAll = -lossAt0(law, sun) * seconds > FUSION_J_PER_KG * state.massKgM2[0]!
+  return meltingIce(law, sun, meltsAll ? law.slopeWm2K : 0)
 }
 
 /** A surface that passes its loss on to the top cell through a resistance. */
@@ -132,11 +142,12 @@ export function passedThrough(
   }
 }
 
-function meltingIce(law: SurfaceLaw, sun: SharedSunshine): ClosedSurface {
+/** Melting ice loses what it does at 0 °C. Where the whole cell may melt and warm up within the step, the slope keeps it in bounds. */
+function meltingIce(law: SurfaceLaw, sun: SharedSunshine, slopeWm2K: number): ClosedSurface {
   return {
     kind: 'ice',
     lossAt0Wm2: lossAt0(law, sun),
-    lossSlopeWm2K: 0,
+    lossSlopeWm2K: slopeWm2K,
     latentWm2: law.parts.latent,
     resistance: 0,
     sun,

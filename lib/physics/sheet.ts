@@ -106,7 +106,7 @@ export function clearSnow(state: SheetState): SheetState {
  * What a keeper would measure.
  *
  * @param state Sheet.
- * @returns Ice [mm], mean temperature of the ice [°C], water on or in the sheet (not under it) [mm], snow [cm].
+ * @returns Ice [mm], mean temperature of the ice [°C], water on or in the sheet (not what ground heat melts under it) [mm], snow [cm].
  */
 export function reportSheet(state: SheetState): {
   thicknessMm: number
@@ -120,7 +120,7 @@ export function reportSheet(state: SheetState): {
   for (let i = 0; i < state.massKgM2.length; i++) {
     const mass = state.massKgM2[i]!
     const liquid = cellLiquidKgM2(mass, state.enthalpyJM2[i]!)
-    liquidMm += liquid
+    if (!isFootFilm(state, i)) liquidMm += liquid
     iceKgM2 += mass - liquid
     coldKKgM2 += (mass - liquid) * cellTemperatureC(mass, state.enthalpyJM2[i]!)
   }
@@ -130,6 +130,12 @@ export function reportSheet(state: SheetState): {
     liquidMm,
     snowCoverCm: state.snowDepthCm,
   }
+}
+
+/** What ground heat has melted under frozen ice: it is under the sheet, and no layer waits for it. */
+function isFootFilm(state: SheetState, cell: number): boolean {
+  if (cell === 0 || cell !== state.massKgM2.length - 1) return false
+  return cellLiquidKgM2(state.massKgM2[cell - 1]!, state.enthalpyJM2[cell - 1]!) === 0
 }
 
 /** All enthalpy in and on the sheet and in the water below, 0 for liquid water at 0 °C. [J/m²] */

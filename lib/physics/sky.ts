@@ -17,7 +17,7 @@ export function blackBodyWm2(temperatureC: number): number {
  * Emissivity of the cloudless sky; holds well below 0 °C.
  *
  * @param temperatureC Air temperature at screen height. [°C], -60 to 60
- * @param vapourPressureHpa Vapour pressure at screen height. [hPa], 0 to 100
+ * @param vapourPressureHpa Vapour pressure at screen height. [hPa], 0 to 130
  * @returns Emissivity. [0-1]
  * @throws RangeError outside the ranges.
  *
@@ -25,7 +25,7 @@ export function blackBodyWm2(temperatureC: number): number {
  */
 export function clearSkyEmissivity(temperatureC: number, vapourPressureHpa: number): number {
   inRange('temperatureC [°C]', temperatureC, -60, 60)
-  inRange('vapourPressureHpa [hPa]', vapourPressureHpa, 0, 100)
+  inRange('vapourPressureHpa [hPa]', vapourPressureHpa, 0, 130)
   const precipitableWater = (46.5 * vapourPressureHpa) / (temperatureC + ZERO_CELSIUS_K)
   return 1 - (1 + precipitableWater) * Math.exp(-Math.sqrt(1.2 + 3 * precipitableWater))
 }

@@ -1,7 +1,7 @@
 // When a poured layer is solid: held against a plain 1 mm column, and against what must be true of any night.
 import fc from 'fast-check'
 import { describe, expect, test } from 'vitest'
-import { advanceSheet, createSheet, type SheetState } from '@/lib/physics/sheet'
+import { advanceSheet, createSheet, pourLayer, reportSheet, type SheetState } from '@/lib/physics/sheet'
 import { cellTemperatureC } from '@/lib/physics/column'
 import { explicitMinutesToSet } from '../../support/explicit-column'
 import { ICE_DENSITY } from '@/lib/physics/constants'
@@ -54,9 +54,34 @@ test(`set times over ${NIGHTS} random nights follow the plain column`, { timeout
     if (error <= 5 || error <= 0.05 * columnMinutes) isClose += 1
   }
   errors.sort((a, b) => a - b)
+  console.info(
+    `layer against column: n ${errors.length}, median ${(errors[Math.floor(errors.length / 2)]! * 100).toFixed(2)} %, ` +
+      `95th ${(errors[Math.floor(errors.length * 0.95)]! * 100).toFixed(2)} %, close ${((isClose / NIGHTS) * 100).toFixed(1)} %`,
+  )
   expect(errors.length).toBeGreaterThan(NIGHTS / 2)
   expect(errors[Math.floor(errors.length / 2)]!).toBeLessThan(0.012)
   expect(isClose / NIGHTS).toBeGreaterThan(0.98)
+})
+
+// The two ways the model has of freezing a layer must tell one story: hour by hour in the sheet, and at once for the score.
+test('a sheet that is carried through the night sets when the score said', () => {
+  let agreeing = 0
+  let asked = 0
+  for (let seed = 0; seed < 200; seed++) {
+    const pick = seeded(seed + 77)
+    const hours = prepareHours(randomNight(seed, 24, pick(-20, -2)), SITE)
+    const sheet = createSheet({ thicknessMm: pick(30, 150), temperatureC: pick(-10, 0), snowCoverCm: 0, base: 'liner' })
+    const layer = { layerMm: pick(2, 10), temperatureC: pick(1, 15) }
+    const minutes = minutesToSet(sheet, hours, 0, 0, layer)
+    if (minutes === null) continue
+    asked += 1
+    let state = pourLayer(sheet, layer)
+    let hour = 0
+    while (hour < hours.length && reportSheet(state).liquidMm > 1e-3) state = advanceSheet(state, hours[hour++]!)
+    if (minutes > (hour - 1) * 60 - 10 && minutes < hour * 60 + 10) agreeing += 1
+  }
+  expect(asked).toBeGreaterThan(150)
+  expect(agreeing / asked).toBeGreaterThan(0.97)
 })
 
 describe('the sheet below', () => {

@@ -113,6 +113,14 @@ describe('what weather does', () => {
     expect(reportSheet(frozen).thicknessMm).toBeGreaterThan(reportSheet(thawed).thicknessMm)
   })
 
+  test('what the ground melts under the ice is not water on it', () => {
+    const mild = steadyHours(48, { airTemperatureC: -0.5, cloudCover: 1, windSpeedMps: 3 })
+    const soft = createSheet({ thicknessMm: 80, temperatureC: 0, snowCoverCm: 0, base: 'liner' })
+    const after = reportSheet(mild.reduce(advanceSheet, soft))
+    expect(after.liquidMm).toBe(0)
+    expect(after.thicknessMm).toBeLessThan(80)
+  })
+
   test('rain adds its water', () => {
     const rained = advanceSheet(bare, steadyHour({ airTemperatureC: 3, precipitationMm: 4, rainMm: 4 }))
     const { thicknessMm, liquidMm } = reportSheet(rained)

@@ -1,4 +1,4 @@
-// How many forecast runs agree with a window.
+// How many forecast runs agree with the hours of a window.
 import { prepareHours } from '@/lib/physics/prepare'
 import type { HourlyRecord } from '@/lib/physics/types'
 import { judgeFillStart, type GrowthCache } from './fill-factors'
@@ -22,26 +22,32 @@ export function otherRuns(setting: Setting, options: JudgeOptions): HourlyRecord
 
 /** Prepares the runs and carries the sheet through each, as far as anybody asks. */
 export function carryRuns(setting: Setting, runs: HourlyRecord[][], hourCount: number): ForecastRun[] {
-  return runs.map((records) => carrySheet(setting, prepareHours(records.slice(0, hourCount), setting.site)))
+  return runs.map((records) => carrySheet(setting, prepareHours(records.slice(0, hourCount), setting.site), false))
 }
 
-/** Share of runs in which at least AGREEMENT.goodShare of the window's hours are good to start in. */
-export function agreementOf(setting: Setting, runs: readonly ForecastRun[], range: HourRange): number {
-  if (runs.length === 0) return 1
-  const needed = Math.max(1, Math.ceil((range.to - range.from) * AGREEMENT.goodShare))
-  const agreeing = runs.filter((run) => goodHours(setting, run, range, needed) >= needed)
-  return agreeing.length / runs.length
-}
-
-/** Counts good hours in the range, no further than `enough`. */
-function goodHours(setting: Setting, run: ForecastRun, range: HourRange, enough: number): number {
-  const cache: GrowthCache = new Map()
-  let good = 0
-  for (let index = range.from; index < range.to && good < enough; index += 1) {
-    if (!run.hours[index]?.isKnown) continue
-    const start =
-      range.kind === 'flood' ? judgeFloodStart(setting, run, index) : judgeFillStart(setting, run, index, cache)
-    if (isGood(start)) good += 1
+/**
+ * For each hour of a window, the share of runs in which it is good to start in; 1 when there are no other runs. The
+ * window's agreement is the largest of them: its best hour is the one most runs find good, and the passes are planned
+ * by these shares. Held against measured nights in `npm run bench:advice`.
+ */
+export function hourShares(setting: Setting, runs: readonly ForecastRun[], range: HourRange): number[] {
+  const hourCount = range.to - range.from
+  if (runs.length === 0) return new Array<number>(hourCount).fill(1)
+  const goodRuns = new Array<number>(hourCount).fill(0)
+  for (const run of runs) {
+    goodHours(setting, run, range).forEach(
+      (isGoodHour, hour) => (goodRuns[hour] = (goodRuns[hour] ?? 0) + Number(isGoodHour)),
+    )
   }
-  return good
+  return goodRuns.map((count) => count / runs.length)
+}
+
+function goodHours(setting: Setting, run: ForecastRun, range: HourRange): boolean[] {
+  const cache: GrowthCache = new Map()
+  return Array.from({ length: range.to - range.from }, (_, hour) => {
+    const index = range.from + hour
+    if (!run.hours[index]?.isKnown) return false
+    const isFlood = range.kind === 'flood'
+    return isGood(isFlood ? judgeFloodStart(setting, run, index) : judgeFillStart(setting, run, index, cache))
+  })
 }

@@ -11,6 +11,8 @@ import { FLOOD, PERSON } from './thresholds'
 import type { SheetReport } from './types'
 
 const MINUTE_MILLIS = 60_000
+/** Sums of tenths are a hair off. */
+const ROUNDING_MM = 1e-6
 const HOUR_MILLIS = 3_600_000
 
 export interface FloodFactors {
@@ -139,7 +141,7 @@ export function wetBetween(run: ForecastRun, index: number, untilMillis: number)
 
 function floodFactors(start: FloodStart, setting: Setting): FloodFactors {
   const { setMinutes, sheet } = start
-  const isDry = start.wetMm <= FLOOD.precipitationMm
+  const isDry = start.wetMm <= FLOOD.precipitationMm + ROUNDING_MM
   const slack = setMinutes === null ? 0 : (start.neededMillis - start.startMillis) / MINUTE_MILLIS - setMinutes
   return {
     bears: bearsFlood(setting, sheet.thicknessMm),

@@ -18,18 +18,23 @@ export interface ForecastRun {
   sheets: SheetState[]
   /** The same before the layers poured at that hour, and one more at the end: what is kept to resume from. */
   carried: SheetState[]
+  /** At the end of each hour; empty when not wanted. */
   reports: SheetReport[]
   /** When the last layer that was really poured is set, or the end of the run when it is not; null when none was. */
   pouredSetMillis: number | null
 }
 
-/** New snow is taken as one millimetre of water a centimetre where only its depth is given. */
+/** Water in what falls; where only the depth of snow is given, a centimetre is taken as a millimetre. */
 export function wetMmOf(hour: PreparedHour): number {
-  return Math.max(hour.precipitationMm, hour.snowfallCm)
+  return hour.precipitationMm > 0 ? hour.precipitationMm : hour.snowfallCm
 }
 
-/** Carries the sheet of the input through a run of hours. */
-export function carrySheet(setting: Setting, hours: PreparedHour[]): ForecastRun {
+/**
+ * Carries the sheet of the input through a run of hours.
+ *
+ * @param isReported Whether what the keeper would measure is wanted hour by hour; other runs go without.
+ */
+export function carrySheet(setting: Setting, hours: PreparedHour[], isReported = true): ForecastRun {
   const run: ForecastRun = {
     hours,
     wetBefore: new Float64Array(hours.length + 1),
@@ -53,7 +58,7 @@ export function carrySheet(setting: Setting, hours: PreparedHour[]): ForecastRun
     }
     run.sheets.push(sheet)
     if (hour.startsAtMillis >= asOfMillis) sheet = advanceSheet(sheet, hour)
-    run.reports.push(reportSheet(sheet))
+    if (isReported) run.reports.push(reportSheet(sheet))
   }
   run.carried.push(sheet)
   return run

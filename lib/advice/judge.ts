@@ -1,7 +1,7 @@
 // The one way in: weather, rink and settings go in, scored hours, windows, a plan, the fill and thaws come out.
 import { prepareHours } from '@/lib/physics/prepare'
 import { reportSheet, type SheetState } from '@/lib/physics/sheet'
-import { agreementOf, carryRuns, otherRuns } from './agreement'
+import { carryRuns, hourShares, otherRuns } from './agreement'
 import { describeWindow } from './describe-window'
 import { judgeFillStart, type FillStart, type GrowthCache } from './fill-factors'
 import { fillOutlook } from './fill-outlook'
@@ -38,15 +38,18 @@ export function judge(input: JudgeInput, options: JudgeOptions = {}): Judgement 
   const ranges = openRanges(setting, main, hours)
   const records = otherRuns(setting, options)
   const runs = needsRuns(setting, ranges) ? carryRuns(setting, records, hoursNeeded(setting, ranges, main)) : []
-  const windows = ranges.map((range): AdviceWindow => {
-    const draft = describeWindow(setting, main, hours, range, (index) => skinAtOf(main, fills[index]))
-    return { ...draft, agreement: round(agreementOf(setting, runs, range), 3), runs: records.length }
+  const shares = ranges.map((range) => hourShares(setting, runs, range))
+  const windows = ranges.map((range, index): AdviceWindow => {
+    const ofRange = shares[index] as number[]
+    const draft = describeWindow(setting, main, hours, range, ofRange, (at) => skinAtOf(main, fills[at]))
+    return { ...draft, agreement: round(Math.max(...ofRange), 3), runs: records.length }
   })
+  const shareAt = new Map(ranges.flatMap(({ from }, index) => (shares[index] as number[]).map((s, h) => [from + h, s])))
   return {
     modelVersion: MODEL_VERSION,
     hours,
     windows,
-    plan: { passes: planTonight(setting, main, hours) },
+    plan: { passes: planTonight(setting, main, hours, shareAt) },
     fill: outlookOf(setting, main, runs, ranges, hours),
     thaws: thawsOf(main, hours),
     ...(options.stateAt === undefined ? {} : { sheetState: sheetStateAt(main, options.stateAt) }),

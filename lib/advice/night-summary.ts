@@ -1,6 +1,7 @@
 // One night in data: the verdict, its window and passes, why, and what to mind. Page, alerts and words all use this.
 import { nightBounds } from './night'
 import { cautionsOf, whyOf } from './night-why'
+import { AGREEMENT } from './thresholds'
 import { toIso } from './zoned-time'
 import type {
   AdviceWindow,
@@ -20,7 +21,7 @@ export interface NightSummary {
   startsAt: string
   endsAt: string
   verdict: NightVerdict
-  /** The longest window of the night, the better one of two equals. */
+  /** The longest window that enough forecast runs agree with, the better one of two equals. */
   window: AdviceWindow | null
   /** All windows that touch the night, in order of time. */
   windows: AdviceWindow[]
@@ -71,10 +72,12 @@ export function summariseNight(
   const windows = judgement.windows.filter(
     (w) => Date.parse(w.endsAt) > fromMillis && Date.parse(w.startsAt) < toMillis,
   )
-  const window = longestOf(windows)
-  const passes = judgement.plan.passes.filter((pass) => isWithin(pass.startsAt, fromMillis - 900_000, toMillis))
+  const window = longestOf(windows.filter((one) => one.agreement >= AGREEMENT.least))
+  const planned = judgement.plan.passes.filter((pass) => isWithin(pass.startsAt, fromMillis - 900_000, toMillis))
+  const passes = window?.kind === 'flood' ? planned : []
   const verdict = window?.kind ?? (hours.some((hour) => hour.isKnown) ? 'hold' : 'unknown')
-  const next = judgement.windows.find((w) => Date.parse(w.startsAt) >= toMillis) ?? null
+  const next =
+    judgement.windows.find((w) => Date.parse(w.startsAt) >= toMillis && w.agreement >= AGREEMENT.least) ?? null
   const thaw =
     judgement.thaws.find((t) => Date.parse(t.endsAt) > fromMillis && Date.parse(t.startsAt) < toMillis) ?? null
   const precipitation = nextPrecipitation(judgement.hours, fromMillis, toMillis + PRECIPITATION_LOOKAHEAD_MILLIS)
@@ -89,7 +92,7 @@ export function summariseNight(
     lastSetBy: passes.at(-1)?.setBy ?? null,
     agreement: window?.agreement ?? null,
     runs: window?.runs ?? 0,
-    leadingReason: verdict === 'hold' ? leadingHoldReason(hours) : null,
+    leadingReason: verdict === 'hold' ? (doubtReason(windows) ?? leadingHoldReason(hours)) : null,
     nextGoodAt: next?.startsAt ?? null,
     nextKind: next?.kind ?? null,
     holdUntil: verdict === 'hold' ? (next?.startsAt ?? thaw?.endsAt ?? null) : null,
@@ -108,6 +111,14 @@ function isWithin(time: string, fromMillis: number, toMillis: number): boolean {
 function longestOf(windows: AdviceWindow[]): AdviceWindow | null {
   const lengthOf = (w: AdviceWindow) => Date.parse(w.endsAt) - Date.parse(w.startsAt)
   return [...windows].sort((a, b) => lengthOf(b) - lengthOf(a) || b.score - a.score)[0] ?? null
+}
+
+/** Good hours that too few forecast runs see are no advice to go out. */
+function doubtReason(windows: AdviceWindow[]): Reason | null {
+  const [best] = [...windows].sort((a, b) => b.agreement - a.agreement)
+  if (!best) return null
+  const values = { agreeing: Math.round(best.agreement * best.runs), runs: best.runs, startsAt: best.startsAt }
+  return { code: 'runs_disagree', factor: best.agreement, values }
 }
 
 /** The reason that leads in most of the hours in which the keeper could go out; earliest first among equals. */

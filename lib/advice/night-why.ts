@@ -82,22 +82,28 @@ function precipitationReason({ kind, startsAt, rainMm, snowfallCm }: ComingPreci
     : { code: 'why_rain', factor: 1, values: { startsAt, rainMm } }
 }
 
+/** These always apply, so they come last. */
+const STANDING: Caution[] = [
+  { code: 'thickness_is_estimate', values: {} },
+  { code: 'land_only', values: {} },
+]
+
 /** What the keeper must mind if they go out in these hours, gravest first; the standing cautions come last. */
 export function cautionsOf(hours: ScoredHour[], window: AdviceWindow | null, passes: PlannedPass[]): Caution[] {
-  if (!window)
-    return [
-      { code: 'thickness_is_estimate', values: {} },
-      { code: 'land_only', values: {} },
-    ]
+  if (!window) return [...snowRuleCautions(hours), ...STANDING]
   const lastStart = passes.at(-1)?.startsAt ?? window.endsAt
   const outside = knownHours(hours).filter((h) => h.time <= lastStart && h.time < window.endsAt)
-  const cautions = [...coldCaution(outside), ...hoseCaution(outside), ...snowCaution(hours, window)]
+  const cautions = [
+    ...coldCaution(outside),
+    ...hoseCaution(outside),
+    ...snowCaution(hours, window),
+    ...snowRuleCautions(hours),
+  ]
   cautions.push({ code: 'not_alone', values: {} })
   if (window.kind === 'fill') cautions.push({ code: 'backflow', values: {} }, { code: 'run_off', values: {} })
   else cautions.push({ code: 'wet_pavement', values: {} })
   cautions.push({ code: 'electric_leads', values: {} }, { code: 'hot_water', values: {} })
-  cautions.push({ code: 'thickness_is_estimate', values: {} }, { code: 'land_only', values: {} })
-  return cautions
+  return [...cautions, ...STANDING]
 }
 
 function coldCaution(hours: KnownHour[]): Caution[] {
@@ -118,4 +124,13 @@ function snowCaution(hours: ScoredHour[], window: AdviceWindow): Caution[] {
   const first = hours.find((hour) => hour.time >= window.startsAt)
   const snow = first?.reasons.find((reason) => reason.code === 'snow_to_clear')
   return snow ? [{ code: 'clear_snow_first', values: snow.values }] : []
+}
+
+/** The first of each remark of snow-rules.ts in these hours. */
+function snowRuleCautions(hours: ScoredHour[]): Caution[] {
+  const remarks = hours.flatMap((hour) => hour.reasons)
+  return ['finish_clearing', 'rain_is_a_flood'].flatMap((code) => {
+    const first = remarks.find((remark) => remark.code === code)
+    return first ? [{ code, values: first.values }] : []
+  })
 }

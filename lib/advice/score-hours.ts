@@ -6,6 +6,7 @@ import { floodReasons } from './flood-reasons'
 import type { FillStart } from './fill-factors'
 import type { ForecastRun } from './forecast-run'
 import { isAvailableAt, type Setting } from './setting'
+import { snowRuleReasons } from './snow-rules'
 import { PLAN, VERDICT } from './thresholds'
 import { toIso } from './zoned-time'
 import type { HourWeather, Reason, ScoredHour, SheetReport } from './types'
@@ -40,7 +41,7 @@ export function scoreHour(setting: Setting, run: ForecastRun, index: number, fil
   const isAvailable = isHourAvailable(setting, hour.startsAtMillis)
   if (!hour.isKnown) return unknownHour(hour, sheet, isAvailable)
   const flood = judgeFloodStart(setting, run, index)
-  const reasons = fill ? fill.reasons : floodReasons(flood, setting, run, index)
+  const reasons = fill ? fill.reasons : [...floodReasons(flood, setting, run, index), ...snowRuleReasons(run, index)]
   const floodScore = scoreOf(flood)
   const fillScore = fill ? scoreOf(fill) : 0
   const best = Math.max(floodScore, fillScore)

@@ -16,8 +16,17 @@ const HOUR_MILLIS = 3_600_000
 const MINUTE_MILLIS = 60_000
 const STEP_MILLIS = PLAN.stepMinutes * MINUTE_MILLIS
 
-/** Passes for the night that `now` is in, poured ones counted against `maxPasses`. */
-export function planTonight(setting: Setting, run: ForecastRun, scored: readonly ScoredHour[]): PlannedPass[] {
+/**
+ * Passes for the night that `now` is in, poured ones counted against `maxPasses`.
+ *
+ * @param shares For hours of windows, the share of forecast runs that find them good: a pass is worth its score times that.
+ */
+export function planTonight(
+  setting: Setting,
+  run: ForecastRun,
+  scored: readonly ScoredHour[],
+  shares: ReadonlyMap<number, number>,
+): PlannedPass[] {
   const { input, nowMillis } = setting
   const night = tonightDate(new Date(nowMillis), input.rink.timeZone)
   const bounds = nightBounds(night, input.rink.timeZone)
@@ -31,7 +40,9 @@ export function planTonight(setting: Setting, run: ForecastRun, scored: readonly
   const maxPasses = input.maxPasses - poured.length
   if (maxPasses <= 0 || hours.length === 0) return []
   const spent = maxPasses > 1 ? spentSheets(setting, run, hours) : new Map<number, SheetState>()
-  const slots = hours.flatMap((index) => slotsOfHour(setting, run, index, fromMillis, spent.get(index)))
+  const slots = hours.flatMap((index) =>
+    slotsOfHour(setting, run, index, fromMillis, spent.get(index), shares.get(index) ?? 1),
+  )
   return planPasses(slots, maxPasses).map(({ startMillis, setMillis }) => {
     const waterL = input.water.layerMm * input.rink.lengthM * input.rink.widthM
     return {
@@ -50,14 +61,15 @@ function slotsOfHour(
   index: number,
   fromMillis: number,
   spent: SheetState | undefined,
+  share: number,
 ): PlanSlot[] {
   const slots: PlanSlot[] = []
   const { startsAtMillis } = run.hours[index] as PreparedHour
   for (let at = startsAtMillis; at < startsAtMillis + HOUR_MILLIS; at += STEP_MILLIS) {
     if (at < fromMillis || !isAvailableAt(setting, at)) continue
     const fraction = (at - startsAtMillis) / HOUR_MILLIS
-    const first = outcomeOf(setting, run, index, fraction, run.sheets[index] as SheetState)
-    const later = spent ? outcomeOf(setting, run, index, fraction, spent) : first
+    const first = outcomeOf(setting, run, index, fraction, run.sheets[index] as SheetState, share)
+    const later = spent ? outcomeOf(setting, run, index, fraction, spent, share) : first
     slots.push({ startMillis: at, first, later })
   }
   return slots
@@ -69,11 +81,12 @@ function outcomeOf(
   index: number,
   fraction: number,
   sheet: SheetState,
+  share: number,
 ): SlotOutcome | null {
   const start = judgeFloodStart(setting, run, index, fraction, sheet)
   if (!isGood(start) || start.setMinutes === null) return null
   const setMillis = Math.ceil(start.startMillis / MINUTE_MILLIS + start.setMinutes) * MINUTE_MILLIS
-  return { setMillis, gain: setting.layer.layerMm * (coarse(scoreOf(start)) / 100 - PLAN.tripCostShare) }
+  return { setMillis, gain: setting.layer.layerMm * (coarse(scoreOf(start) * share) / 100 - PLAN.tripCostShare) }
 }
 
 /** A few points more are within the forecast's error; then the earlier start is better for the person. */

@@ -112,10 +112,10 @@ export interface AdviceWindow {
   setBy: string
   /** 0-100 */
   score: number
-  /** Share of forecast runs that agree, 0-1, and how many runs that is out of. */
+  /** Share of forecast runs in which its best hour is good, 0-1, and how many runs that is out of. */
   agreement: number
   runs: number
-  /** Start of the best hour in it. */
+  /** Start of the best hour in it: the one most runs find good, of those the one with the highest score. */
   bestStartAt?: string
 }
 

@@ -85,7 +85,22 @@ export function addDays(date: string, days: number): string {
   return toIso(Date.parse(`${date}T00:00:00Z`) + days * DAY).slice(0, 10)
 }
 
-/** ISO 8601 in UTC without milliseconds, as in the records of the forecast. */
+const TWO_DIGITS = Array.from({ length: 60 }, (_, number) => String(number).padStart(2, '0'))
+let cachedDay = Number.NaN
+let cachedDate = ''
+
+/**
+ * ISO 8601 in UTC without milliseconds, as in the records of the forecast. A judgement writes thousands of these, so the
+ * date of the day last written is kept.
+ */
 export function toIso(atMillis: number): string {
-  return new Date(atMillis).toISOString().slice(0, 19) + 'Z'
+  const day = Math.floor(atMillis / DAY)
+  if (day !== cachedDay) {
+    cachedDate = new Date(atMillis).toISOString().slice(0, 11)
+    cachedDay = day
+  }
+  const second = Math.floor((atMillis - day * DAY) / 1000)
+  const minute = Math.floor(second / 60)
+  const clock = `${TWO_DIGITS[Math.floor(minute / 60)]}:${TWO_DIGITS[minute % 60]}:${TWO_DIGITS[second % 60]}`
+  return `${cachedDate}${clock}Z`
 }

@@ -1,8 +1,9 @@
 // Cautions in words, by code.
 import type { Caution } from '@/lib/advice/types'
 import { num, text, type ClauseWriter } from './clause'
+import { FLOOD_CLAUSES } from './flood-clauses'
 import type { WordOptions } from './options'
-import { snowText, temperatureText, windChillText } from './quantities'
+import { capitalised, snowText, temperatureText, windChillText } from './quantities'
 import { clockText } from './times'
 
 const WRITERS: Record<string, ClauseWriter> = {
@@ -15,6 +16,8 @@ const WRITERS: Record<string, ClauseWriter> = {
     `Bring the hose in and drain it between passes; left full at ${temperatureText(num(v, 'airTemperatureC'), w)} it can freeze within the hour.`,
   clear_snow_first: (v, w) =>
     `Clear ${snowText(num(v, 'snowCoverCm'), w)} of snow off the whole sheet before you flood; throw it over the boards.`,
+  finish_clearing: (v, w) => `${capitalised(FLOOD_CLAUSES.finish_clearing?.(v, w) ?? '')}.`,
+  rain_is_a_flood: (v, w) => `${capitalised(FLOOD_CLAUSES.rain_is_a_flood?.(v, w) ?? '')}.`,
   not_alone: () => 'Don’t flood alone, or tell someone when you will be back in.',
   wet_pavement: () => 'Keep hose water off pavements and steps.',
   backflow: () => 'Use a backflow preventer on the tap while the hose lies in water.',

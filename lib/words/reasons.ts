@@ -1,6 +1,6 @@
 // Reasons in plain English: the one place where their codes become words, for screens, messages and `npm run score`.
 import type { Reason } from '@/lib/advice/types'
-import { text, type ClauseWriter } from './clause'
+import { num, text, type ClauseWriter } from './clause'
 import { FILL_CLAUSES } from './fill-clauses'
 import { FLOOD_CLAUSES } from './flood-clauses'
 import type { WordOptions } from './options'
@@ -9,6 +9,7 @@ import { clockText } from './times'
 
 const COMMON_CLAUSES: Record<string, ClauseWriter> = {
   weather_unknown: () => 'the forecast has a gap here',
+  runs_disagree: (v) => `only ${num(v, 'agreeing')} of ${num(v, 'runs')} forecast runs see good hours`,
   outside_your_hours: (v, w) =>
     `the good hours, ${clockText(text(v, 'startsAt'), w)} to ${clockText(text(v, 'endsAt'), w)}, fall outside the hours you set`,
 }

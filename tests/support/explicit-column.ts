@@ -14,8 +14,8 @@ const STEP_SECONDS = 0.25
 const LAW_SECONDS = 60
 
 export interface ExplicitNight {
-  /** Sheet from the top down, one temperature per slab. */
-  sheet: { thicknessMm: number; temperatureC: number }[]
+  /** Sheet from the top down, one temperature per slab; its cells are 1 mm unless told otherwise. */
+  sheet: { thicknessMm: number; temperatureC: number; cellMm?: number }[]
   layer: { layerMm: number; temperatureC: number }
   hours: PreparedHour[]
   groundWm2: number
@@ -62,7 +62,7 @@ function buildCells({ sheet, layer }: ExplicitNight): Cells {
     enthalpy.push((layer.layerMm / layerCells) * WATER.heat * layer.temperatureC)
   }
   for (const slab of sheet) {
-    const slabCells = Math.max(1, Math.round(slab.thicknessMm))
+    const slabCells = Math.max(1, Math.round(slab.thicknessMm / (slab.cellMm ?? 1)))
     for (let i = 0; i < slabCells; i++) {
       const cell = (slab.thicknessMm / slabCells / 1000) * ICE.density
       mass.push(cell)

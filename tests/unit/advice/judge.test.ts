@@ -88,6 +88,37 @@ describe('the verdict of an hour', () => {
   })
 })
 
+describe('rules about days', () => {
+  const codesOf = (hour: ScoredHour) => hour.reasons.map((reason) => reason.code)
+
+  test('rain on a clear sheet before cold is a flood for nothing', () => {
+    const hours = steadyHours(48, { airTemperatureC: -7 })
+    for (const hour of [3, 4])
+      hours[hour] = hourOf(hour, { airTemperatureC: 1, dewPointC: 1, precipitationMm: 1, rainMm: 1 })
+    const judgement = judge(inputOf(hours), alone)
+    expect(codesOf(at(judgement, 3))).toContain('rain_is_a_flood')
+    expect(at(judgement, 3).verdict).toBe('hold')
+    expect(codesOf(at(judgement, 20))).not.toContain('rain_is_a_flood')
+  })
+
+  test('snow on the sheet, then wet, then a sharp fall: finish clearing or leave it', () => {
+    const hours = steadyHours(48, { airTemperatureC: -8 })
+    for (let hour = 0; hour < 6; hour += 1) {
+      hours[hour] = hourOf(hour, {
+        airTemperatureC: 0.5,
+        dewPointC: 0,
+        cloudCover: 1,
+        precipitationMm: 0.5,
+        rainMm: 0.5,
+      })
+    }
+    const sheet = { thicknessMm: 90, temperatureC: -1, snowCoverCm: 6 }
+    expect(codesOf(at(judge(inputOf(hours, { sheet }), alone), 0))).toContain('finish_clearing')
+    const clear = { ...sheet, snowCoverCm: 0 }
+    expect(codesOf(at(judge(inputOf(hours, { sheet: clear }), alone), 0))).not.toContain('finish_clearing')
+  })
+})
+
 describe('windows and the plan', () => {
   test('windows keep to the hours in which the keeper can go out', () => {
     const [window] = judge(inputOf(steadyHours(24)), alone).windows

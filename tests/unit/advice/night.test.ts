@@ -2,7 +2,7 @@
 import { formatInTimeZone } from 'date-fns-tz'
 import { describe, expect, test } from 'vitest'
 import { nightBounds, nightDateOf, tonightDate } from '@/lib/advice/night'
-import { instantOfLocal, zoneOffsetMinutes, zoneOffsetsMinutes } from '@/lib/advice/zoned-time'
+import { instantOfLocal, toIso, zoneOffsetMinutes, zoneOffsetsMinutes } from '@/lib/advice/zoned-time'
 
 const HOUR = 3_600_000
 const at = (iso: string) => new Date(iso)
@@ -29,6 +29,18 @@ describe('the night an instant lies in', () => {
     expect(nightDateOf(at('2027-01-12T06:29:00Z'), 'Asia/Kolkata')).toBe('2027-01-11')
     expect(nightDateOf(at('2027-01-12T06:30:00Z'), 'Asia/Kolkata')).toBe('2027-01-12')
   })
+})
+
+test('instants are written as the platform writes them, without milliseconds', () => {
+  for (const text of [
+    '2027-01-12T17:00:00.000Z',
+    '2027-12-31T23:59:59.000Z',
+    '1969-07-20T20:17:40.000Z',
+    '2028-02-29T00:00:00.000Z',
+  ]) {
+    expect(toIso(Date.parse(text))).toBe(text.replace('.000', ''))
+  }
+  expect(toIso(Date.parse('2027-01-12T17:00:00.789Z'))).toBe('2027-01-12T17:00:00Z')
 })
 
 describe('the length of a night', () => {

@@ -24,13 +24,13 @@ function pair({ bias, rmse }: ErrorSummary, unit: string): string {
 
 function print(lines: ValidationLine[]): void {
   console.log(
-    `${'set'.padEnd(36)}${'n'.padStart(5)}  ${'unit'.padEnd(5)}${'bias / RMSE'.padEnd(18)}${'bar'.padEnd(24)}others`,
+    `${'set'.padEnd(36)}${'n'.padStart(5)}  ${'unit'.padEnd(5)}${'bias / RMSE'.padEnd(18)}${'bar'.padEnd(27)}others`,
   )
   for (const { set, unit, model, others, bar, isMet } of lines) {
     const beside = Object.entries(others).map(([name, summary]) => `${name} ${pair(summary, unit)}`)
     const verdict = bar === 'none' ? '-' : `${isMet ? 'met' : 'MISSED'}: ${bar}`
     console.log(
-      `${set.padEnd(36)}${String(model.n).padStart(5)}  ${unit.padEnd(5)}${pair(model, unit).padEnd(18)}${verdict.padEnd(24)}${beside.join(', ')}`,
+      `${set.padEnd(36)}${String(model.n).padStart(5)}  ${unit.padEnd(5)}${pair(model, unit).padEnd(18)}${verdict.padEnd(27)}${beside.join(', ')}`,
     )
   }
 }

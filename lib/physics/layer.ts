@@ -26,7 +26,7 @@ export interface Layer {
 const WATER_FACE = (Math.PI ** 2 / 4) * WATER_DENSITY * WATER_CONDUCTIVITY
 const LATENT_JM3 = ICE_DENSITY * FUSION_J_PER_KG
 /** Heat that does not matter to the second. [J/m²] */
-const CLOSE_JM2 = 1
+const CLOSE_JM2 = 10
 
 /**
  * Minutes from pouring until the last liquid in a layer is gone.

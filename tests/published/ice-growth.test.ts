@@ -102,7 +102,7 @@ describe('measured lake ice without snow', () => {
     expect(Math.abs(rmseM((startM, degreeDays) => ashtonThicknessM(startM, degreeDays, 15)) - 0.024)).toBeLessThan(
       0.006,
     )
-    expect(Math.abs(rmseM(stefanThicknessM) - 0.076)).toBeLessThan(0.006)
+    expect(Math.abs(rmseM(stefanThicknessM) - 0.076)).toBeLessThan(0.01)
   })
 })
 

@@ -9,7 +9,9 @@ export function Why({ summary, reader }: { summary: NightSummary; reader: WordOp
   if (items.length === 0) return null
   return (
     <section>
-      <h2 className="mt-8 mb-2 text-body font-semibold">{summary.window ? 'Why these hours' : 'Where the heat goes'}</h2>
+      <h2 className="mt-8 mb-2 text-body font-semibold">
+        {summary.window ? 'Why these hours' : 'Where the heat goes'}
+      </h2>
       <Facts
         rows={items.map(({ label, detail, figure }) => ({
           figure,

@@ -8,6 +8,9 @@ function knownHours(hours: ScoredHour[]): KnownHour[] {
   return hours.filter((hour): hour is KnownHour => hour.parts !== null && hour.weather != null)
 }
 
+/** Less absorbed sunshine than this is night or dusk. Ours. [W/m²] */
+const SUNLESS_WM2 = 5
+
 const mean = (values: number[]) => values.reduce((sum, value) => sum + value, 0) / values.length
 
 /** Reasons for the list under the plan: the window's hours, or without a window the night's, then what comes after. */
@@ -66,10 +69,12 @@ function sheetReason(hours: KnownHour[]): Reason {
   return { code: 'why_sheet', factor: 1, values: { thicknessMm, temperatureC } }
 }
 
-/** The first hour after the window in which water freezes at half the window's pace or less. */
+/** The first hour after the window, before the sun is up, in which water freezes at half the window's pace or less. */
 function slowingReason(night: KnownHour[], told: KnownHour[], window: AdviceWindow): Reason[] {
   const usual = mean(told.map((h) => h.freezeRateMmPerH ?? 0))
-  const slow = night.find((h) => h.time >= window.endsAt && (h.freezeRateMmPerH ?? 0) <= usual / 2)
+  const slow = night.find(
+    (h) => h.time >= window.endsAt && h.parts.shortwave < SUNLESS_WM2 && (h.freezeRateMmPerH ?? 0) <= usual / 2,
+  )
   if (!slow || usual <= 0) return []
   const values: Reason['values'] = { startsAt: slow.time, freezeRateMmPerH: slow.freezeRateMmPerH ?? 0 }
   if (slow.weather.cloudCover !== null) values.cloudCover = slow.weather.cloudCover

@@ -6,7 +6,8 @@ import { findOrCreateGridCell } from '@/db/queries/grid-cells'
 import { enqueueRefresh } from '@/db/queries/jobs'
 import { startWeatherFake } from '@/fakes/weather/server'
 import { readClock } from '@/lib/clock'
-import { pullForecast } from '@/lib/services/forecasts'
+import { insertForecast } from '@/db/queries/forecasts'
+import { slotOf } from '@/lib/services/forecasts'
 import { cellOf } from '@/lib/weather/cell'
 import { createOpenMeteo } from '@/lib/weather/open-meteo'
 import { eveningPlace } from '@/tests/support/evening-place'
@@ -29,7 +30,9 @@ async function setUp(): Promise<void> {
     const latitudeDeg = place.latitudeDeg + (index % 20) * 0.05
     const longitudeDeg = place.longitudeDeg + Math.floor(index / 20) * 0.05
     const cell = await findOrCreateGridCell(db, cellOf(latitudeDeg, longitudeDeg))
-    await pullForecast({ db, now: readClock(), provider }, cell.id)
+    const now = readClock()
+    const forecast = await provider.fetchHourly(cellOf(latitudeDeg, longitudeDeg), { now })
+    await insertForecast(db, { cellId: cell.id, slotAt: slotOf(now), ...forecast })
     await insertRinks({ ...place, cellId: cell.id, latitudeDeg, longitudeDeg, userId: keeper?.id ?? '' })
   }
   await weather.close()

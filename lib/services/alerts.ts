@@ -21,9 +21,12 @@ interface Deciding {
   now: Date
 }
 
-/** Two workers never decide one rink at the same time; the lock goes with the transaction. */
+/**
+ * Two workers never decide one rink at the same time; the lock goes with the transaction. "No key": rows that name the
+ * rink hold a share of its key, and two workers that had each written one would wait for each other for ever.
+ */
 async function lockRink(trx: Db, rinkId: string): Promise<void> {
-  await trx.raw('select id from rinks where id = ? for update', [rinkId])
+  await trx.raw('select id from rinks where id = ? for no key update', [rinkId])
 }
 
 /** Brings the advised window of the night up to date and promises what there is to tell about it. */
@@ -34,6 +37,9 @@ export async function adviseNight(
   forecastExpiresAt: Date,
 ): Promise<void> {
   await lockRink(deciding.trx, rink.id)
+  const newest = await findNewestOutlook(deciding.trx, deciding.access)
+  // While we judged, another worker judged later facts and has told people of them: ours would take that back.
+  if (newest && newest.judgedAt > deciding.now) return
   const night = { rinkId: rink.id, nightDate: outlook.summary.nightDate }
   await stepWindow(deciding, rink, outlook, { ...night, kind: 'fill' })
   const window = await stepWindow(deciding, rink, outlook, { ...night, kind: 'flood' })

@@ -142,6 +142,14 @@ describe('a changed forecast', () => {
     expect(await told()).toEqual(['flood-closed email crew', 'flood-closed email keeper', ...TOLD_ONCE])
   })
 
+  test('is not told by a worker that judged it and was overtaken by a later judgement', async () => {
+    await storeForecast(database.db, cast, AT_16_10)
+    await judgeNow(database.db, cast, AT_18_10)
+    await judgeAt(AT_17_10, snowFrom('2027-01-12T22:00:00Z'))
+    expect(await windows()).toEqual([{ version: 1, state: 'open' }])
+    expect(await told()).toEqual(TOLD_ONCE)
+  })
+
   test('says when a window ends hours earlier than told', async () => {
     await judgeAt(AT_16_10)
     await judgeAt(AT_17_10, snowFrom('2027-01-13T03:00:00Z'))

@@ -10,7 +10,5 @@ export const checkOffPassSchema = z.object({
   layerMm: z.coerce.number('How thick was it?').min(0.1).max(100),
 })
 
-export const undoPassSchema = checkOffPassSchema.omit({ layerMm: true })
-
 export type CheckOffPass = z.infer<typeof checkOffPassSchema>
-export type UndoPass = z.infer<typeof undoPassSchema>
+export type UndoPass = Omit<CheckOffPass, 'layerMm'>

@@ -77,4 +77,11 @@ describe('refusals', () => {
     )
     expect(await floods()).toHaveLength(0)
   })
+
+  test('taking back what was poured on a night that is over', async () => {
+    await checkOffPass(cast.keeper.at(NOW), pass())
+    const tomorrow = new Date(NOW.getTime() + 24 * 3_600_000)
+    await expect(undoPass(cast.keeper.at(tomorrow), pass())).rejects.toThrow(InvalidInputError)
+    expect(await floods()).toHaveLength(1)
+  })
 })

@@ -8,6 +8,7 @@ import {
 } from '@/db/queries/push-subscriptions'
 import { enqueueDecision } from '@/db/queries/jobs'
 import { listRinksOfUser } from '@/db/queries/rinks'
+import type { Db } from '@/db/knex'
 import type { ServiceContext } from '@/lib/context'
 import { ConflictError, InvalidInputError, NotFoundError } from '@/lib/errors'
 import { isAllowedPushEndpoint } from '@/lib/messaging/push-services'
@@ -42,6 +43,11 @@ function checkedKeys({ endpoint, keys }: PushSubscriptionInput, pushOrigins: rea
   return { endpoint, ...keys }
 }
 
+async function refuseTooMany(db: Db, userId: string): Promise<void> {
+  if ((await countPushSubscriptions(db, userId)) < MOST_DEVICES) return
+  throw new ConflictError(`You have ${MOST_DEVICES} devices already. Remove one under Alerts first.`)
+}
+
 /**
  * Adds the device, or takes it over from the account that used it before: that one hears nothing there any more.
  *
@@ -53,9 +59,7 @@ export async function addDevice(
   pushOrigins: readonly string[],
 ): Promise<{ id: string }> {
   const keys = checkedKeys(subscription, pushOrigins)
-  if ((await countPushSubscriptions(db, viewer.userId)) >= MOST_DEVICES) {
-    throw new ConflictError(`You have ${MOST_DEVICES} devices already. Remove one under Alerts first.`)
-  }
+  await refuseTooMany(db, viewer.userId)
   return db.transaction(async (trx) => {
     const device = await putPushSubscription(trx, viewer.userId, keys, now)
     // Whoever adds a device in the evening wants to hear of tonight on it too.
@@ -73,6 +77,7 @@ export async function replaceDevice(
   const keys = checkedKeys(subscription, pushOrigins)
   return db.transaction(async (trx) => {
     if (oldEndpoint) await deletePushSubscription(trx, viewer.userId, { endpoint: oldEndpoint })
+    await refuseTooMany(trx, viewer.userId)
     return putPushSubscription(trx, viewer.userId, keys, now)
   })
 }

@@ -81,6 +81,7 @@ describe('adding', () => {
   test('twenty devices are enough', async () => {
     for (let device = 0; device < 20; device += 1) await addDevice(anna.at(NOW), subscription(), [])
     await expect(addDevice(anna.at(NOW), subscription(), [])).rejects.toThrow(ConflictError)
+    await expect(replaceDevice(anna.at(NOW), { subscription: subscription() }, [])).rejects.toThrow(ConflictError)
   })
 })
 

@@ -6,10 +6,11 @@ import { logEvent, logFailure } from '@/lib/log'
 /** No handler runs this long: the time limits of providers and mail servers are far shorter. */
 const LONGEST_JOB_MINUTES = 15
 const REJOIN_MILLIS = 5_000
+const LOOK_ROUND_MILLIS = 5 * 60_000
 
 /**
  * Holds the presence lock for the life of this process, after freeing the jobs of workers that no longer live: all
- * locked jobs when nobody else is present, else those locked longer than any job can take.
+ * locked jobs when nobody else is present, else those locked longer than any job can take, then and every five minutes.
  *
  * @returns a function that gives the lock up.
  */
@@ -27,8 +28,14 @@ export async function announcePresence(connectionString: string): Promise<() => 
     }, REJOIN_MILLIS).unref()
   }
 
+  // One of several that was killed is seldom the last to start: whoever lives on hands its jobs to the others.
+  const round = setInterval(() => {
+    freeAbandonedJobs(client, LONGEST_JOB_MINUTES).catch((error: unknown) => logFailure('jobs.not_freed', error))
+  }, LOOK_ROUND_MILLIS).unref()
+
   return async () => {
     isLeaving = true
+    clearInterval(round)
     await client.end().catch(() => undefined)
   }
 }

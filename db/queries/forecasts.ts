@@ -62,7 +62,7 @@ export async function hasForecast(db: Db, cellId: string, slotAt: Date): Promise
 export async function findNewestForecast(db: Db, cellId: string): Promise<StoredForecast | undefined> {
   return db('forecasts')
     .where({ grid_cell_id: cellId })
-    .orderBy('fetched_at', 'desc')
+    .orderBy('slot_at', 'desc')
     .first<StoredForecast | undefined>({ ...HEAD, hours: 'hours', members: 'members' })
 }
 

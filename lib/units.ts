@@ -15,7 +15,4 @@ export const gallonsToLitres = (gallons: number) => gallons * 3.785411784
 
 /** International mile, 1609.344 m by definition. */
 export const mpsToMph = (mps: number) => (mps * 3600) / 1609.344
-export const mphToMps = (mph: number) => (mph * 1609.344) / 3600
 export const mpsToKmh = (mps: number) => mps * 3.6
-export const kmhToMps = (kmh: number) => kmh / 3.6
-export const squareMetresToSquareFeet = (squareMetres: number) => squareMetres / (0.3048 * 0.3048)

@@ -12,6 +12,8 @@ export interface MessageToDeliver {
   expiresAt: Date
   createdAt: Date
   email: string
+  /** The person was promised newer news of the same night on the same channel. */
+  isOvertaken: boolean
   attempts: number
 }
 
@@ -20,7 +22,7 @@ export async function findMessageToDeliver(db: Db, messageId: string): Promise<M
   const message = await db('messages as m')
     .join('users as u', 'u.id', 'm.user_id')
     .where({ 'm.id': messageId, 'm.state': 'promised' })
-    .first<Omit<MessageToDeliver, 'attempts'> | undefined>({
+    .select({
       id: 'm.id',
       userId: 'm.user_id',
       rinkId: 'm.rink_id',
@@ -31,6 +33,14 @@ export async function findMessageToDeliver(db: Db, messageId: string): Promise<M
       createdAt: 'm.created_at',
       email: 'u.email',
     })
+    .select(
+      db.raw(
+        `exists (select 1 from messages newer
+                 where newer.user_id = m.user_id and newer.rink_id = m.rink_id and newer.night_date = m.night_date
+                   and newer.channel = m.channel and newer.created_at > m.created_at) as "isOvertaken"`,
+      ),
+    )
+    .first<Omit<MessageToDeliver, 'attempts'> | undefined>()
   if (!message) return undefined
   const counted = await db('delivery_attempts')
     .where({ message_id: messageId })

@@ -38,7 +38,8 @@ export async function deliverMessage(delivering: Delivering, messageId: string):
   const { db, readClock } = delivering
   const message = await findMessageToDeliver(db, messageId)
   if (!message) return
-  if (readClock() >= message.expiresAt) {
+  // An older message that was held up must not have the last word.
+  if (readClock() >= message.expiresAt || message.isOvertaken) {
     await settleMessage(db, message.id, 'expired', readClock())
     logEvent('message.expired', { messageId: message.id, kind: message.kind })
     return

@@ -57,7 +57,7 @@ const WORDS = {
   why: [],
 }
 
-async function promise(channel: 'email' | 'push', kind: MessageKind = 'flood-tonight'): Promise<string> {
+async function promise(channel: 'email' | 'push', kind: MessageKind = 'flood-tonight', now = NOW): Promise<string> {
   const dedupeKey = `${kind}:${cast.rinkId}:2027-01-12:${channel}:${cast.keeper.userId}`
   await promiseMessage(
     database.db,
@@ -72,7 +72,7 @@ async function promise(channel: 'email' | 'push', kind: MessageKind = 'flood-ton
       sendAt: NOW,
       expiresAt: LATER,
     },
-    NOW,
+    now,
   )
   const row = await database.db('messages').where({ dedupe_key: dedupeKey }).first('id')
   return row?.id ?? ''
@@ -150,6 +150,15 @@ describe('mail', () => {
     await deliverMessage({ ...delivering, readClock: () => LATER }, id)
     expect(await stateOf(id)).toBe('expired')
     expect(await caughtMail()).toEqual([])
+  })
+
+  test('is dropped when newer news of the night was promised meanwhile', async () => {
+    const held = await promise('email')
+    const newer = await promise('email', 'flood-closed', new Date(NOW.getTime() + 1000))
+    await deliverMessage(delivering, newer)
+    await deliverMessage(delivering, held)
+    expect(await database.db('messages').where({ id: held }).first('state')).toEqual({ state: 'expired' })
+    expect(await (await fetch(`${mail.url}/api/messages`)).json()).toHaveLength(1)
   })
 
   test('sent again after a crash before settling keeps its Message-ID', async () => {

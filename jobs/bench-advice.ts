@@ -1,5 +1,12 @@
 // `npm run bench:advice`: what the advice is worth on measured winters, beside the thermometer rule. With --json, as JSON.
-import { calibration, followAdvice, scoreChoices, thermometerRule, trueNights } from '@/tests/support/advice-bench'
+import {
+  calibration,
+  followAdvice,
+  followHourly,
+  scoreChoices,
+  thermometerRule,
+  trueNights,
+} from '@/tests/support/advice-bench'
 import type { BenchScore, CalibrationRow } from '@/tests/support/advice-bench'
 import { hasMeasuredWinters } from '@/tests/support/measured-winters'
 
@@ -23,7 +30,9 @@ function measure(): { nights: number; good: number; seconds: number; rows: Row[]
   })
   rows.push({ strategy: 'Nightsheet, perfect forecasts', ...scoreChoices(followAdvice(nights, null)) })
   const degraded = SEEDS.flatMap((seed) => followAdvice(nights, seed))
-  rows.push({ strategy: 'Nightsheet, degraded forecasts', ...scoreChoices(degraded) })
+  rows.push({ strategy: 'Nightsheet, degraded, told at 15:30', ...scoreChoices(degraded) })
+  const hourly = SEEDS.flatMap((seed) => followHourly(nights, seed))
+  rows.push({ strategy: 'Nightsheet, degraded, hour by hour', ...scoreChoices(hourly) })
   return {
     nights: nights.length,
     good: nights.filter((night) => night.isGood).length,
@@ -43,7 +52,7 @@ function print(result: ReturnType<typeof measure>): void {
       return `${strategy.padEnd(36)}${percent(used)} ${percent(spoiled)} ${String(floods).padStart(7)}`
     }),
     `degraded: ${SEEDS.length} draws of the error model; too cold for the hose on ${result.rows[0]?.tooColdForHose ?? 0} good nights`,
-    'agreement    nights   good',
+    'agreement told at 15:30, and nights that were good',
     ...result.calibration.map(({ from, to, nights, good }) => {
       const range = from === 1 ? 'all runs' : `${from.toFixed(1)} to ${to.toFixed(1)}`
       return `${range.padEnd(11)} ${String(nights).padStart(7)} ${nights > 0 ? percent(good / nights) : ''}`

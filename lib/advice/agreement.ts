@@ -5,8 +5,8 @@ import { judgeFillStart, type GrowthCache } from './fill-factors'
 import { judgeFloodStart } from './flood-factors'
 import { carrySheet, type ForecastRun } from './forecast-run'
 import { perturbRun } from './runs'
-import { isGood } from './score-hours'
-import { AGREEMENT } from './thresholds'
+import { scoreOf } from './score-hours'
+import { AGREEMENT, VERDICT } from './thresholds'
 import type { HourRange } from './windows'
 import type { Setting } from './setting'
 import type { JudgeOptions } from './types'
@@ -25,29 +25,51 @@ export function carryRuns(setting: Setting, runs: HourlyRecord[][], hourCount: n
   return runs.map((records) => carrySheet(setting, prepareHours(records.slice(0, hourCount), setting.site), false))
 }
 
-/**
- * For each hour of a window, the share of runs in which it is good to start in; 1 when there are no other runs. The
- * window's agreement is the largest of them: its best hour is the one most runs find good, and the passes are planned
- * by these shares. Held against measured nights in `npm run bench:advice`.
- */
-export function hourShares(setting: Setting, runs: readonly ForecastRun[], range: HourRange): number[] {
-  const hourCount = range.to - range.from
-  if (runs.length === 0) return new Array<number>(hourCount).fill(1)
-  const goodRuns = new Array<number>(hourCount).fill(0)
-  for (const run of runs) {
-    goodHours(setting, run, range).forEach(
-      (isGoodHour, hour) => (goodRuns[hour] = (goodRuns[hour] ?? 0) + Number(isGoodHour)),
-    )
-  }
-  return goodRuns.map((count) => count / runs.length)
+/** How the runs see one hour of a window. */
+export interface HourAgreement {
+  /** Share of runs in which it is good to start in. 0-1 */
+  share: number
+  /** Mean over the runs of its score, in which a bad hour counts nothing. 0-100 */
+  meanScore: number
 }
 
-function goodHours(setting: Setting, run: ForecastRun, range: HourRange): boolean[] {
+/**
+ * How the runs see each hour of a window. The window's best hour is the one with the highest mean score, and the share at
+ * that hour is the window's agreement; held against measured nights in `npm run bench:advice`.
+ *
+ * @param scores The forecast's own scores for the range, which stand where there are no other runs.
+ */
+export function hourAgreements(
+  setting: Setting,
+  runs: readonly ForecastRun[],
+  range: HourRange,
+  scores: readonly number[],
+): HourAgreement[] {
+  if (runs.length === 0) return scores.map((score) => ({ share: 1, meanScore: score }))
+  const sums = scores.map(() => ({ share: 0, meanScore: 0 }))
+  for (const run of runs) {
+    for (const [hour, score] of runScores(setting, run, range).entries()) {
+      const sum = sums[hour] as HourAgreement
+      if (score < VERDICT.goodScore) continue
+      sum.share += 1 / runs.length
+      sum.meanScore += score / runs.length
+    }
+  }
+  return sums.map(({ share, meanScore }) => ({ share: Math.min(1, share), meanScore }))
+}
+
+/** Hour of the window with the highest mean score; the earliest of equals. */
+export function bestHour(agreements: readonly HourAgreement[]): number {
+  const scores = agreements.map(({ meanScore }) => meanScore)
+  return scores.indexOf(Math.max(...scores))
+}
+
+function runScores(setting: Setting, run: ForecastRun, range: HourRange): number[] {
   const cache: GrowthCache = new Map()
   return Array.from({ length: range.to - range.from }, (_, hour) => {
     const index = range.from + hour
-    if (!run.hours[index]?.isKnown) return false
+    if (!run.hours[index]?.isKnown) return 0
     const isFlood = range.kind === 'flood'
-    return isGood(isFlood ? judgeFloodStart(setting, run, index) : judgeFillStart(setting, run, index, cache))
+    return scoreOf(isFlood ? judgeFloodStart(setting, run, index) : judgeFillStart(setting, run, index, cache))
   })
 }

@@ -16,7 +16,7 @@ const QUARTERS = Array.from({ length: 60 / PLAN.stepMinutes }, (_, step) => (ste
 export type WindowDraft = Omit<AdviceWindow, 'agreement' | 'runs'>
 
 /**
- * @param hourShares For each hour of the range, the share of forecast runs that find it good.
+ * @param bestHour Hour of the range that the forecast runs like best.
  * @param fillSetBy When the water of a fill started in the range is skinned over, for fill windows.
  */
 export function describeWindow(
@@ -24,7 +24,7 @@ export function describeWindow(
   run: ForecastRun,
   scored: readonly ScoredHour[],
   range: HourRange,
-  hourShares: readonly number[],
+  bestHour: number,
   fillSetBy: (index: number) => string | null,
 ): WindowDraft {
   const startOf = (index: number) => (run.hours[index] as PreparedHour).startsAtMillis
@@ -39,7 +39,7 @@ export function describeWindow(
     startsAt: toIso(startsAt),
     endsAt: toIso(endsAt),
     score: Math.round(scores.reduce((sum, score) => sum + score, 0) / scores.length),
-    bestStartAt: toIso(Math.max(startsAt, startOf(range.from + bestHour(scores, hourShares)))),
+    bestStartAt: toIso(Math.max(startsAt, startOf(range.from + bestHour))),
   }
   if (range.kind === 'fill') {
     return { ...common, latestStartAt: toIso(startOf(lastIndex)), setBy: fillSetBy(lastIndex) ?? toIso(endsAt) }
@@ -50,14 +50,4 @@ export function describeWindow(
     .find((start) => isGood(start))
   const setBy = (last && setsAtOf(last)) ?? (scored[lastIndex] as ScoredHour).setsAt
   return { ...common, latestStartAt: toIso(last?.startMillis ?? startOf(lastIndex)), setBy: setBy ?? toIso(endsAt) }
-}
-
-/** The hour most runs find good; among equals the one with the highest score, the earliest of those. */
-function bestHour(scores: readonly number[], hourShares: readonly number[]): number {
-  let best = 0
-  scores.forEach((score, hour) => {
-    const more = (hourShares[hour] ?? 0) - (hourShares[best] ?? 0)
-    if (more > 1e-9 || (more > -1e-9 && score > (scores[best] ?? 0))) best = hour
-  })
-  return best
 }

@@ -41,7 +41,7 @@ export interface FloodStart {
   sheet: SheetReport
   setMinutes: number | null
   neededMillis: number
-  /** From pour to set, or to when it is needed if it does not set. [mm] */
+  /** From pour to set and a margin, or to when it is needed if it does not set. [mm] */
   wetMm: number
   factors: FloodFactors
   hose: number
@@ -76,7 +76,7 @@ export function judgeFloodStart(
   const rateMmPerH = freezeRateMmPerH(netWm2)
   const needed = neededMillis(setting, startMillis)
   const setMinutes = knownMinutesToSet(setting, run, index, fraction, cleared)
-  const untilMillis = setMinutes === null ? needed : startMillis + setMinutes * MINUTE_MILLIS
+  const untilMillis = setMinutes === null ? needed : startMillis + setMinutes * (1 + FLOOD.setMargin) * MINUTE_MILLIS
   const chill = windChillC(hour.airTemperatureC, hour.windSpeedMps)
   const hose = rampDesirability(hour.airTemperatureC, PERSON.floodHoseC)
   const skin = rampDesirability(chill, PERSON.windChillC)

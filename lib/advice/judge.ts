@@ -1,7 +1,7 @@
 // The one way in: weather, rink and settings go in, scored hours, windows, a plan, the fill and thaws come out.
 import { prepareHours } from '@/lib/physics/prepare'
 import { reportSheet, type SheetState } from '@/lib/physics/sheet'
-import { carryRuns, hourShares, otherRuns } from './agreement'
+import { bestHour, carryRuns, hourAgreements, otherRuns, type HourAgreement } from './agreement'
 import { describeWindow } from './describe-window'
 import { judgeFillStart, type FillStart, type GrowthCache } from './fill-factors'
 import { fillOutlook } from './fill-outlook'
@@ -38,13 +38,18 @@ export function judge(input: JudgeInput, options: JudgeOptions = {}): Judgement 
   const ranges = openRanges(setting, main, hours)
   const records = otherRuns(setting, options)
   const runs = needsRuns(setting, ranges) ? carryRuns(setting, records, hoursNeeded(setting, ranges, main)) : []
-  const shares = ranges.map((range) => hourShares(setting, runs, range))
+  const agreements = ranges.map((range) => hourAgreements(setting, runs, range, scoresOf(hours, range)))
   const windows = ranges.map((range, index): AdviceWindow => {
-    const ofRange = shares[index] as number[]
-    const draft = describeWindow(setting, main, hours, range, ofRange, (at) => skinAtOf(main, fills[at]))
-    return { ...draft, agreement: round(Math.max(...ofRange), 3), runs: records.length }
+    const ofRange = agreements[index] as HourAgreement[]
+    const best = bestHour(ofRange)
+    const draft = describeWindow(setting, main, hours, range, best, (at) => skinAtOf(main, fills[at]))
+    return { ...draft, agreement: round(ofRange[best]?.share ?? 1, 3), runs: records.length }
   })
-  const shareAt = new Map(ranges.flatMap(({ from }, index) => (shares[index] as number[]).map((s, h) => [from + h, s])))
+  const shareAt = new Map(
+    ranges.flatMap(({ from }, index) =>
+      (agreements[index] ?? []).map(({ share }, hour) => [from + hour, share] as const),
+    ),
+  )
   return {
     modelVersion: MODEL_VERSION,
     hours,
@@ -54,6 +59,10 @@ export function judge(input: JudgeInput, options: JudgeOptions = {}): Judgement 
     thaws: thawsOf(main, hours),
     ...(options.stateAt === undefined ? {} : { sheetState: sheetStateAt(main, options.stateAt) }),
   }
+}
+
+function scoresOf(hours: readonly ScoredHour[], range: HourRange): number[] {
+  return hours.slice(range.from, range.to).map((hour) => hour.scores[range.kind])
 }
 
 /** Only rinks that wait for a fill, or are being filled, are asked about filling. */
@@ -96,7 +105,7 @@ function outlookOf(
   hours: readonly ScoredHour[],
 ): FillOutlook {
   const range = ranges.find((one) => one.kind === 'fill')
-  const inRange = range ? hours.slice(range.from, range.to).map((hour) => hour.scores.fill) : []
+  const inRange = range ? scoresOf(hours, range) : []
   const startIndex = range ? range.from + inRange.indexOf(Math.max(...inRange)) : null
   return fillOutlook(setting, runs.length > 0 ? [main, ...runs] : [main], startIndex)
 }

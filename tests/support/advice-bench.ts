@@ -89,19 +89,35 @@ export function thermometerRule(nights: readonly BenchNight[], limitC: number): 
 
 /** Follow the advice given at 15:30, on the measured weather or on a forecast degraded by the error model. */
 export function followAdvice(nights: readonly BenchNight[], degradedSeed: number | null): BenchChoice[] {
+  return nights.map((night) => adviceAt(night, night.noonMillis + DECIDES_AFTER_NOON_MILLIS, degradedSeed))
+}
+
+/**
+ * As above, then look again each hour as the forecast is read anew, and flood when the best hour is the next one. The
+ * forecast's errors come from the same draw and shrink as the hour comes nearer.
+ */
+export function followHourly(nights: readonly BenchNight[], degradedSeed: number): BenchChoice[] {
   return nights.map((night) => {
-    const nowMillis = night.noonMillis + DECIDES_AFTER_NOON_MILLIS
-    const seed = (degradedSeed ?? 0) * 7919 + night.noonMillis / 86_400_000
-    const hours = degradedSeed === null ? night.hours : perturbRun(night.hours, nowMillis, Math.floor(seed))
-    const { windows } = judge(inputOf(night, hours, nowMillis), {
-      runs: degradedSeed === null ? 0 : AGREEMENT.defaultRuns,
-    })
-    const tonight = windows.filter((one) => Date.parse(one.startsAt) < night.noonMillis + 12 * HOUR_MILLIS)
-    const [best] = tonight.sort((a, b) => b.agreement - a.agreement || b.score - a.score)
-    if (!best) return { night, floodsAt: null, agreement: null }
-    const clock = 12 + (Date.parse(best.bestStartAt ?? best.startsAt) - night.noonMillis) / HOUR_MILLIS
-    return { night, floodsAt: best.agreement >= AGREEMENT.least ? clock : null, agreement: best.agreement }
+    let choice = adviceAt(night, night.noonMillis + DECIDES_AFTER_NOON_MILLIS, degradedSeed)
+    for (let clock = FIRST_HOUR - 1; clock < LAST_HOUR; clock += 1) {
+      choice = adviceAt(night, night.noonMillis + (clock - 12 + 0.5) * HOUR_MILLIS, degradedSeed)
+      if (choice.floodsAt !== null && choice.floodsAt <= clock + 1) return choice
+    }
+    return choice
   })
+}
+
+function adviceAt(night: BenchNight, nowMillis: number, degradedSeed: number | null): BenchChoice {
+  const seed = (degradedSeed ?? 0) * 7919 + Math.floor(night.noonMillis / 86_400_000)
+  const hours = degradedSeed === null ? night.hours : perturbRun(night.hours, nowMillis, seed)
+  const { windows } = judge(inputOf(night, hours, nowMillis), {
+    runs: degradedSeed === null ? 0 : AGREEMENT.defaultRuns,
+  })
+  const tonight = windows.filter((one) => Date.parse(one.startsAt) < night.noonMillis + 12 * HOUR_MILLIS)
+  const [best] = tonight.sort((a, b) => b.agreement - a.agreement || b.score - a.score)
+  if (!best) return { night, floodsAt: null, agreement: null }
+  const clock = 12 + Math.floor((Date.parse(best.bestStartAt ?? best.startsAt) - night.noonMillis) / HOUR_MILLIS)
+  return { night, floodsAt: best.agreement >= AGREEMENT.least ? clock : null, agreement: best.agreement }
 }
 
 function inputOf(night: BenchNight, hours: HourlyRecord[], nowMillis: number): JudgeInput {

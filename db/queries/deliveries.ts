@@ -14,6 +14,8 @@ export interface MessageToDeliver {
   email: string
   /** The person was promised newer news of the same night on the same channel. */
   isOvertaken: boolean
+  /** The person has muted the night, switched the channel off or left the rink since. */
+  isUnwanted: boolean
   attempts: number
 }
 
@@ -38,6 +40,15 @@ export async function findMessageToDeliver(db: Db, messageId: string): Promise<M
         `exists (select 1 from messages newer
                  where newer.user_id = m.user_id and newer.rink_id = m.rink_id and newer.night_date = m.night_date
                    and newer.channel = m.channel and newer.created_at > m.created_at) as "isOvertaken"`,
+      ),
+      db.raw(
+        `m.rink_id is not null and (
+           not exists (select 1 from rink_members k where k.rink_id = m.rink_id and k.user_id = m.user_id)
+           or exists (select 1 from alert_preferences p
+                      where p.rink_id = m.rink_id and p.user_id = m.user_id
+                        and (p.muted_through >= m.night_date
+                             or not case m.channel when 'email' then p.wants_email else p.wants_push end))
+         ) as "isUnwanted"`,
       ),
     )
     .first<Omit<MessageToDeliver, 'attempts'> | undefined>()

@@ -31,7 +31,8 @@ export function dueAlert(question: AlertQuestion): AlertKind | null {
   if (!window || question.isMuted || question.isForecastStale || question.hasPoured || now < tellAt) return null
   if (window.state === 'open' && window.latestStartAt && now >= window.latestStartAt) return null
   if (!told) return window.state === 'open' ? 'flood-tonight' : null
-  if (told.version >= window.version || question.changesTold >= MOST_CHANGES_A_NIGHT) return null
-  if (window.state === 'open') return 'flood-changed'
-  return told.kind === 'flood-closed' ? null : 'flood-closed'
+  if (told.version >= window.version) return null
+  // A closing is always told: somebody may be about to pour into snow.
+  if (window.state === 'closed') return told.kind === 'flood-closed' ? null : 'flood-closed'
+  return question.changesTold >= MOST_CHANGES_A_NIGHT ? null : 'flood-changed'
 }

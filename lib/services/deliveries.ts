@@ -38,8 +38,8 @@ export async function deliverMessage(delivering: Delivering, messageId: string):
   const { db, readClock } = delivering
   const message = await findMessageToDeliver(db, messageId)
   if (!message) return
-  // An older message that was held up must not have the last word.
-  if (readClock() >= message.expiresAt || message.isOvertaken) {
+  // An older message that was held up must not have the last word, nor one that the person has said no to since.
+  if (readClock() >= message.expiresAt || message.isOvertaken || message.isUnwanted) {
     await settleMessage(db, message.id, 'expired', readClock())
     logEvent('message.expired', { messageId: message.id, kind: message.kind })
     return

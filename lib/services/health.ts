@@ -2,6 +2,7 @@
 import { readVitals } from '@/db/queries/health'
 import { listRuns } from '@/db/queries/job-runs'
 import type { Db } from '@/db/knex'
+import { logFailure } from '@/lib/log'
 
 export interface Health {
   status: 'ok' | 'degraded' | 'down'
@@ -29,7 +30,8 @@ const LATE_SECONDS = 300
 export async function getHealth(db: Db, now: Date): Promise<Health> {
   try {
     return await readHealth(db, now)
-  } catch {
+  } catch (error) {
+    logFailure('health.unreadable', error)
     return { ...NOTHING_KNOWN, status: 'down', troubles: ['The database cannot be reached.'] }
   }
 }

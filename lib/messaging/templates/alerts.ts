@@ -45,7 +45,7 @@ const FRAMES: Record<AlertKind, Frame> = {
   },
   'flood-closed': {
     subjectLead: 'called off. ',
-    opening: 'The window for this night has closed. Please disregard what we told you before.',
+    opening: 'The window for this night has closed. What we told you before no longer holds.',
     pushTitle: (rinkName) => `${rinkName}: called off`,
   },
   'thaw-begins': {

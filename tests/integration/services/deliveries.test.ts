@@ -161,6 +161,17 @@ describe('mail', () => {
     expect(await (await fetch(`${mail.url}/api/messages`)).json()).toHaveLength(1)
   })
 
+  test.each([{ muted_through: '2027-01-12' }, { wants_email: false }])(
+    'is not sent to somebody who said no after it was promised: %o',
+    async (choice) => {
+      const id = await promise('email')
+      await database.db('alert_preferences').where({ rink_id: cast.rinkId, user_id: cast.keeper.userId }).update(choice)
+      await deliverMessage(delivering, id)
+      expect(await stateOf(id)).toBe('expired')
+      expect(await caughtMail()).toEqual([])
+    },
+  )
+
   test('sent again after a crash before settling keeps its Message-ID', async () => {
     const id = await promise('email')
     await database.db.raw(`alter table delivery_attempts add constraint crash check (message_id <> '${id}') not valid`)

@@ -48,6 +48,11 @@ describe('speech', () => {
     ['the first word of a good night', {}, 'flood-tonight'],
     ['a window that moved', { window: open(2), told: { version: 1, kind: 'flood-tonight' } }, 'flood-changed'],
     ['a window that closed', { window: closed(2), told: { version: 1, kind: 'flood-tonight' } }, 'flood-closed'],
+    [
+      'a closing, also after three changes',
+      { window: closed(5), told: { version: 4, kind: 'flood-changed' }, changesTold: 3 },
+      'flood-closed',
+    ],
     ['a window that opened again', { window: open(3), told: { version: 2, kind: 'flood-closed' } }, 'flood-changed'],
     ['a good night that shows itself only in the evening', { window: open(3) }, 'flood-tonight'],
   ])('%s', (_what, changes, kind) => {

@@ -11,18 +11,21 @@ import type { HourRange } from './windows'
 import type { Setting } from './setting'
 import type { JudgeOptions } from './types'
 
-/** Members of the forecast, or runs perturbed by the error model where it has none. */
-export function otherRuns(setting: Setting, options: JudgeOptions): HourlyRecord[][] {
-  const { members, hours } = setting.input
-  if (members && members.length > 0) return members
-  const count = options.runs ?? AGREEMENT.defaultRuns
-  const seed = options.seed ?? 1
-  return Array.from({ length: count }, (_, run) => perturbRun(hours, setting.nowMillis, seed * 1009 + run))
+/** How many other runs there are to ask: the members of the forecast, or perturbed ones where it has none. */
+function countRuns({ input }: Setting, options: JudgeOptions): number {
+  return input.members?.length || (options.runs ?? AGREEMENT.defaultRuns)
 }
 
-/** Prepares the runs and carries the sheet through each, as far as anybody asks. */
-export function carryRuns(setting: Setting, runs: HourlyRecord[][], hourCount: number): ForecastRun[] {
-  return runs.map((records) => carrySheet(setting, prepareHours(records.slice(0, hourCount), setting.site), false))
+/** The other runs, with the sheet carried through each, as far as anybody asks. */
+export function otherRuns(setting: Setting, options: JudgeOptions, hourCount: number): ForecastRun[] {
+  const { members, hours } = setting.input
+  const carry = (records: HourlyRecord[]) => carrySheet(setting, prepareHours(records, setting.site), false)
+  if (members && members.length > 0) return members.map((member) => carry(member.slice(0, hourCount)))
+  const asked = hours.slice(0, hourCount)
+  const seed = (options.seed ?? 1) * 1009
+  return Array.from({ length: countRuns(setting, options) }, (_, run) =>
+    carry(perturbRun(asked, setting.nowMillis, seed + run)),
+  )
 }
 
 /** How the runs see one hour of a window. */

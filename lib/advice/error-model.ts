@@ -2,8 +2,10 @@
 
 /**
  * Standard errors grow in a straight line: `start` at no lead, plus `perDay` for each day ahead.
- * All figures are ours: the size of errors at a station that public verification reports for day-ahead forecasts
- * (temperature 1.5-2 °C, wind a quarter, cloud two tenths), rounded; timing and false alarms of precipitation guessed.
+ * Temperature: mean absolute errors published for the mountain station Schmittenhöhe (Austria), winter 2011/12, days 1 to 5:
+ * 1.03, 1.15, 1.36, 1.82, 2.32 °C (metgis.com, forecast quality); times 1.25 these are standard errors of 1.3 to 2.9, and the
+ * line here gives 1.3 to 2.5. All other figures are ours: sizes usual in verification at stations, rounded; timing, misses
+ * and false alarms of precipitation guessed.
  */
 export interface ErrorGrowth {
   start: number

@@ -1,7 +1,7 @@
 // The one way in: weather, rink and settings go in, scored hours, windows, a plan, the fill and thaws come out.
 import { prepareHours } from '@/lib/physics/prepare'
 import { reportSheet, type SheetState } from '@/lib/physics/sheet'
-import { bestHour, carryRuns, hourAgreements, otherRuns, type HourAgreement } from './agreement'
+import { bestHour, hourAgreements, otherRuns, type HourAgreement } from './agreement'
 import { describeWindow } from './describe-window'
 import { judgeFillStart, type FillStart, type GrowthCache } from './fill-factors'
 import { fillOutlook } from './fill-outlook'
@@ -36,14 +36,13 @@ export function judge(input: JudgeInput, options: JudgeOptions = {}): Judgement 
   const fills = fillStarts(setting, main)
   const hours = main.hours.map((_, index) => scoreHour(setting, main, index, fills[index] ?? null))
   const ranges = openRanges(setting, main, hours)
-  const records = otherRuns(setting, options)
-  const runs = needsRuns(setting, ranges) ? carryRuns(setting, records, hoursNeeded(setting, ranges, main)) : []
+  const runs = needsRuns(setting, ranges) ? otherRuns(setting, options, hoursNeeded(setting, ranges, main)) : []
   const agreements = ranges.map((range) => hourAgreements(setting, runs, range, scoresOf(hours, range)))
   const windows = ranges.map((range, index): AdviceWindow => {
     const ofRange = agreements[index] as HourAgreement[]
     const best = bestHour(ofRange)
     const draft = describeWindow(setting, main, hours, range, best, (at) => skinAtOf(main, fills[at]))
-    return { ...draft, agreement: round(ofRange[best]?.share ?? 1, 3), runs: records.length }
+    return { ...draft, agreement: round(ofRange[best]?.share ?? 1, 3), runs: runs.length }
   })
   const shareAt = new Map(
     ranges.flatMap(({ from }, index) =>

@@ -19,6 +19,9 @@ const BLOCK_HOURS = 12
  * @param seed Same seed, same run.
  */
 export function perturbRun(hours: readonly HourlyRecord[], nowMillis: number, seed: number): HourlyRecord[] {
+  const first = hours[0]
+  if (!first) return []
+  const firstLead = (Date.parse(first.time) - nowMillis) / HOUR_MILLIS
   const uniform = seededUniform(seed)
   const normal = normalFrom(uniform)
   const timing = normal()
@@ -26,9 +29,9 @@ export function perturbRun(hours: readonly HourlyRecord[], nowMillis: number, se
   const drift = { air: normal(), dew: normal(), wind: normal(), cloud: normal() }
   const keep = Math.exp(-1 / ERROR_MEMORY_HOURS)
   const fresh = Math.sqrt(1 - keep * keep)
-  const wet = perturbPrecipitation(hours, nowMillis, timing, amount, uniform)
+  const wet = perturbPrecipitation(hours, firstLead, timing, amount, uniform)
   return hours.map((hour, index) => {
-    const lead = (Date.parse(hour.time) - nowMillis) / HOUR_MILLIS
+    const lead = firstLead + index
     if (lead < 0) return hour
     drift.air = keep * drift.air + fresh * normal()
     drift.dew = keep * drift.dew + fresh * normal()
@@ -60,19 +63,24 @@ function perturbHour(hour: HourlyRecord, wet: Wet, error: HourError): HourlyReco
   const spread = air === null || dew === null ? null : Math.max(0, air - dew + error.spreadC)
   const newCloud = cloudCover === null ? null : limit(cloudCover + error.cloud, 0, 1)
   const cloudChange = newCloud === null || cloudCover === null ? error.cloud : newCloud - cloudCover
+  // Written out: copying the record by spreading it costs more than all the rest.
   return {
-    ...hour,
-    ...wet,
+    time: hour.time,
     airTemperatureC: newAir,
     dewPointC: newAir === null || spread === null ? null : limit(newAir - spread, -80, 50),
     windSpeedMps: scaled(hour.windSpeedMps, error.windFactor, 75),
     windGustMps: scaled(hour.windGustMps, error.windFactor, 120),
     cloudCover: newCloud,
     shortwaveWm2: scaled(shortwaveWm2, Math.max(0.2, 1 - 0.75 * cloudChange), 1500),
+    precipitationMm: wet.precipitationMm,
+    rainMm: wet.rainMm,
+    snowfallCm: wet.snowfallCm,
+    pressureHpa: hour.pressureHpa,
     longwaveDownWm2:
       longwaveDownWm2 == null
         ? longwaveDownWm2
         : limit(longwaveDownWm2 + LONGWAVE_PER_K * error.airC + LONGWAVE_PER_CLOUD * cloudChange, 50, 600),
+    snowOnIceCm: hour.snowOnIceCm,
   }
 }
 
@@ -80,13 +88,12 @@ function scaled(value: number | null, factor: number, most: number): number | nu
   return value === null ? null : limit(value * factor, 0, most)
 }
 
-const wetOf = ({ precipitationMm, rainMm, snowfallCm }: HourlyRecord): Wet => ({ precipitationMm, rainMm, snowfallCm })
 const isDry = (wet: Wet) => (wet.precipitationMm ?? 0) <= 0 && (wet.snowfallCm ?? 0) <= 0
 
 /** Precipitation comes earlier or later, heavier or lighter, not at all, or where none was forecast. */
 function perturbPrecipitation(
   hours: readonly HourlyRecord[],
-  nowMillis: number,
+  firstLead: number,
   timing: number,
   amount: number,
   uniform: () => number,
@@ -94,17 +101,17 @@ function perturbPrecipitation(
   let isMissed = false
   let isFalse = false
   return hours.map((hour, index) => {
-    const lead = (Date.parse(hour.time) - nowMillis) / HOUR_MILLIS
-    if (lead < 0) return wetOf(hour)
+    const lead = firstLead + index
+    if (lead < 0) return hour
     const shift = Math.round(timing * errorAt(FORECAST_ERROR.timingHours, lead))
     const source = hours[limit(index - shift, 0, hours.length - 1)] as HourlyRecord
     const chance = uniform()
-    if (hour.precipitationMm === null || source.precipitationMm === null) return wetOf(hour)
-    if (isDry(wetOf(source))) {
+    if (hour.precipitationMm === null || source.precipitationMm === null) return hour
+    if (isDry(source)) {
       isMissed = chance < errorAt(FORECAST_ERROR.missChance, lead)
       if (index % BLOCK_HOURS === 0) isFalse = chance < errorAt(FORECAST_ERROR.falseChance, lead)
       const isCloudy = (hour.cloudCover ?? 1) > 0.7
-      return isFalse && isCloudy ? unforeseen() : wetOf(source)
+      return isFalse && isCloudy ? unforeseen() : source
     }
     const factor = isMissed ? 0 : Math.exp(amount * errorAt(FORECAST_ERROR.amountLog, lead))
     return {

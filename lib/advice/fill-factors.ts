@@ -73,13 +73,13 @@ function outcomeOf(setting: Setting, run: ForecastRun, session: FillSession, cac
     highestGustMps: Math.max(...hours.map((hour) => hour.windGustMps)) * setting.gustFactor,
     lookAheadHours: Math.min(FILL.coldLookAheadHours, run.hours.length - session.doneIndex),
   }
-  // A fill that the hose, the hands or the wind forbid needs no look at the days after it.
-  const isHopeless =
-    weather.lowestAirC <= PERSON.fillHoseC.zero || weather.lookAheadHours < FILL.leastLookAheadHours || weather.hasGap
-  if (isHopeless) return { ...weather, iceAfterMm: 0, snowBeforeSkinCm: 0, skinIndex: null }
-  const growth = growthFrom(setting, run, session.doneIndex, cache)
+  if (weather.lookAheadHours < FILL.leastLookAheadHours || weather.hasGap) {
+    return { ...weather, iceAfterMm: 0, snowBeforeSkinCm: 0, skinIndex: null }
+  }
+  const grownFrom = growthStart(run, session.doneIndex)
+  const growth = growthFrom(setting, run, grownFrom, cache)
   const skinHours = growth.hoursToThickness[0]
-  const skinIndex = skinHours == null ? null : session.doneIndex + Math.ceil(skinHours)
+  const skinIndex = skinHours == null ? null : grownFrom + Math.ceil(skinHours)
   const untilSkin = run.hours.slice(first, skinIndex ?? session.doneIndex + weather.lookAheadHours)
   return {
     ...weather,
@@ -87,6 +87,12 @@ function outcomeOf(setting: Setting, run: ForecastRun, session: FillSession, cac
     snowBeforeSkinCm: untilSkin.reduce((sum, hour) => sum + hour.snowfallCm, 0),
     skinIndex,
   }
+}
+
+/** Fills done within the same few hours share one look at the days after them, from the last of these hours. */
+function growthStart(run: ForecastRun, doneIndex: number): number {
+  const shared = Math.ceil(doneIndex / FILL.lookEveryHours) * FILL.lookEveryHours
+  return Math.min(shared, run.hours.length - FILL.leastLookAheadHours)
 }
 
 function growthFrom(setting: Setting, run: ForecastRun, doneIndex: number, cache: GrowthCache): FillGrowth {

@@ -89,6 +89,8 @@ export const FILL = {
   /** Over how long, and the least that must be forecast to tell. Ours. [h] */
   coldLookAheadHours: 72,
   leastLookAheadHours: 24,
+  /** Fills done within so many hours are taken to freeze alike. Ours. [h] */
+  lookEveryHours: 3,
   /** Snow before the skin bears it: it sinks in and turns to slush. Rules I05: Les Versants, I07: KSTP Saint Paul (light snow workable). [cm] */
   snowBeforeSkinCm: { one: 1, zero: 5 } satisfies Ramp,
   /** Air so warm that the water only warms. Ours. [°C] */

@@ -197,6 +197,15 @@ describe('the other results', () => {
     expect(verdicts).toEqual([0, 0, 0])
   })
 
+  test('a fill that the hose forbids still says that the cold would follow', () => {
+    const input = inputOf(steadyHours(120, { airTemperatureC: -12 }))
+    const hour = at(judge({ ...input, rink: { ...input.rink, phase: 'waiting' } }, alone), 0)
+    expect(hour.reasons[0]?.code).toBe('fill_hose_freezes')
+    expect(hour.reasons.find((reason) => reason.code === 'cold_follows')?.factor).toBeGreaterThan(0.5)
+    expect(hour.limits?.person).toBe(0)
+    expect(hour.limits?.ice).toBeGreaterThan(50)
+  })
+
   test('a state kept at an hour and taken up again gives what one run gives', () => {
     const input = scoreExample()
     const poured = [{ at: '2027-01-13T01:10:00Z', layerMm: 3, temperatureC: 6 }]

@@ -22,11 +22,12 @@ const MINUTE_MILLIS = 60_000
  */
 export function nextWindowStep(
   advised: AdvisedTimes | undefined,
-  summary: Pick<NightSummary, 'windows' | 'window' | 'leadingReason'>,
+  summary: Pick<NightSummary, 'window' | 'leadingReason'>,
   kind: 'fill' | 'flood',
   now: Date,
 ): WindowStep {
-  const window = summary.window?.kind === kind ? summary.window : (summary.windows.find((w) => w.kind === kind) ?? null)
+  // Only what the verdict stands by: a window that too few forecast runs agree with is shown, and not advised.
+  const window = summary.window?.kind === kind ? summary.window : null
   if (advised?.state !== 'open') return window ? { step: 'open', window } : { step: 'keep' }
   // Past its latest start a window has run out; that is the evening passing, not the forecast changing.
   if (now >= advised.latestStartAt) return { step: 'keep' }

@@ -19,7 +19,7 @@ function windowOf(startsAt: string, endsAt: string, kind: 'flood' | 'fill' = 'fl
   }
 }
 
-const summaryOf = (...windows: AdviceWindow[]) => ({ windows, window: windows[0] ?? null, leadingReason: null })
+const summaryOf = (window: AdviceWindow | null = null) => ({ window, leadingReason: null })
 const advised = {
   state: 'open' as const,
   startsAt: new Date(at('20:00')),

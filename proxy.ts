@@ -12,6 +12,10 @@ import { BODY_LIMIT_BYTES } from '@/lib/http/read-json'
 const MEMBER_PATHS = /^\/(rinks|account|admin)(\/|$)/
 
 export function proxy(request: NextRequest): NextResponse {
+  if (request.headers.has('transfer-encoding')) {
+    // Browsers say how long a form is; a body of unknown length could only be refused after reading it.
+    return new NextResponse('Say how long the form is (Content-Length).', { status: 411 })
+  }
   if (Number(request.headers.get('content-length') ?? 0) > BODY_LIMIT_BYTES) {
     // Next would answer a form of megabytes with 500, after reading it.
     return new NextResponse('That is more than any of our forms holds (64 kB).', { status: 413 })

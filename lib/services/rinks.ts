@@ -43,35 +43,8 @@ async function placeRink(rink: RinkInput): Promise<PlacedRink> {
 }
 
 function settingsRow(rink: PlacedRink, gridCellId: string): RinkSettingsRow {
-  const {
-    name,
-    placeName,
-    latitudeDeg,
-    longitudeDeg,
-    timeZone,
-    lengthM,
-    widthM,
-    base,
-    phase,
-    shelter,
-    skyView,
-    maxPasses,
-  } = rink
-  return {
-    name,
-    placeName,
-    latitudeDeg,
-    longitudeDeg,
-    gridCellId,
-    timeZone,
-    lengthM,
-    widthM,
-    base,
-    phase,
-    shelter,
-    skyView,
-    maxPasses,
-  }
+  const { available: _available, water: _water, iceThicknessMm: _iceThicknessMm, ...settings } = rink
+  return { ...settings, gridCellId }
 }
 
 /** Everything beside the rink's own row that set-up and change have in common. */

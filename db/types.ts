@@ -12,6 +12,8 @@ export interface UserRow {
   is_admin: boolean
   units: 'metric' | 'imperial'
   clock: '12' | '24'
+  theme: 'system' | 'light' | 'dark' | 'dark-after-sunset'
+  deletion_due_at: Date | null
   created_at: Date
   updated_at: Date
 }
@@ -21,6 +23,8 @@ export interface SessionRow {
   user_id: string
   created_at: Date
   expires_at: Date
+  device: string
+  last_seen_at: Date
 }
 
 export interface AccountLinkRow {
@@ -63,6 +67,12 @@ export interface RinkRow {
   sky_view: number
   max_passes: number
   settings_version: number
+  floor: unknown
+  board_height_mm: number | null
+  carries_skater_mm: number
+  wind_limit_mps: number | null
+  wind_chill_limit_c: number | null
+  water_price_per_m3: number | null
   created_by: string | null
   creation_key: string
   created_at: Date
@@ -88,9 +98,11 @@ export interface WaterSourceRow {
 }
 
 export interface AvailableHoursRow {
+  id: string
   rink_id: string
   from_local: string
   to_local: string
+  weekdays: number[]
 }
 
 export interface SheetStateRow {
@@ -105,17 +117,88 @@ export interface SheetStateRow {
   state: unknown
 }
 
-export interface FloodRow {
+export interface LogEntryRow {
   id: string
   rink_id: string
+  kind: 'fill' | 'flood' | 'scrape' | 'clear' | 'repair' | 'reading' | 'thaw' | 'note'
+  happened_at: Date
   night_date: string
-  pass_number: number
-  poured_at: Date
-  layer_mm: number
-  water_l: number
-  water_temperature_c: number
-  poured_by: string | null
+  pass_number: number | null
+  layer_mm: number | null
+  water_l: number | null
+  water_temperature_c: number | null
+  thickness_mm: number | null
+  said_set_by_at: Date | null
+  outcome: 'set' | 'wet' | 'spoiled' | null
+  outcome_at: Date | null
+  note: string
+  written_by: string | null
+  entry_key: string
+  version: number
   created_at: Date
+  updated_at: Date
+  deleted_at: Date | null
+}
+
+export interface LogRevisionRow {
+  entry_id: string
+  version: number
+  was: unknown
+  changed_by: string | null
+  changed_at: Date
+}
+
+export interface FillRow {
+  id: string
+  rink_id: string
+  started_at: Date
+  started_by: string | null
+  target_depth_mm: number
+  finished_at: Date | null
+}
+
+export interface FillSessionRow {
+  id: string
+  fill_id: string
+  started_at: Date
+  stopped_at: Date | null
+  flow_l_per_min: number
+}
+
+export interface FillCheckRow {
+  id: string
+  fill_id: string
+  checked_at: Date
+  checked_by: string | null
+  low_corner_depth_mm: number | null
+  note: string
+}
+
+export interface NightOutcomeRow {
+  rink_id: string
+  night_date: string
+  said: 'fill' | 'flood' | 'hold'
+  window_id: string | null
+  starts_at: Date | null
+  ends_at: Date | null
+  set_by_at: Date | null
+  agreement: number | null
+  result: 'kept' | 'broken' | 'unknown'
+  source: 'report' | 'weather' | 'none'
+  detail: unknown
+  model_version: string
+  settled_at: Date
+}
+
+export interface YardEstimateRow {
+  rink_id: string
+  estimated_at: Date
+  model_version: string
+  is_learned: boolean
+  shelter: number
+  sky_view: number
+  reports: number
+  detail: unknown
 }
 
 export interface ForecastRow {
@@ -256,7 +339,13 @@ declare module 'knex/types/tables.js' {
     water_sources: Table<WaterSourceRow>
     available_hours: Table<AvailableHoursRow>
     sheet_states: Table<SheetStateRow>
-    floods: Table<FloodRow>
+    log_entries: Table<LogEntryRow>
+    log_revisions: Table<LogRevisionRow>
+    fills: Table<FillRow>
+    fill_sessions: Table<FillSessionRow>
+    fill_checks: Table<FillCheckRow>
+    night_outcomes: Table<NightOutcomeRow>
+    yard_estimates: Table<YardEstimateRow>
     forecasts: Table<ForecastRow>
     outlooks: Table<OutlookRow>
     scored_hours: Table<ScoredHourRow>

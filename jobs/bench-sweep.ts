@@ -56,7 +56,7 @@ async function insertRinks(at: {
      water as (
        insert into water_sources (rink_id, kind, flow_l_per_min, temperature_c, layer_mm, fill_depth_mm)
        select id, 'cold-tap', 25, 6, 3, 100 from rink),
-     hours as (insert into available_hours select id, '17:00', '01:00' from rink),
+     hours as (insert into available_hours (rink_id, from_local, to_local) select id, '17:00', '01:00' from rink),
      sheet as (
        insert into sheet_states (rink_id, as_of, origin, thickness_mm, temperature_c, snow_cover_cm)
        select id, now() - interval '2 days', 'reported', 90, -3, 0 from rink),

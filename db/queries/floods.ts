@@ -1,10 +1,11 @@
-// Passes that were poured.
+// Passes that were poured: the floods of the log, as the model and the plan need them.
 import type { Db } from '@/db/knex'
 import type { RinkAccess } from '@/lib/access/proofs'
 
 export interface PouredPass {
   nightDate: string
-  passNumber: number
+  /** Of a planned pass; null for a flood that was written into the log by hand. */
+  passNumber: number | null
   pouredAt: Date
   layerMm: number
   waterL: number
@@ -12,26 +13,29 @@ export interface PouredPass {
   by: string | null
 }
 
-/** Logs a pass once per night and number; false when it is logged already. */
+/** Logs a planned pass once per night and number; false when it is logged already. */
 export async function insertFlood(
   trx: Db,
-  access: RinkAccess<'logFlood'>,
-  flood: Omit<PouredPass, 'by'> & { pouredBy: string },
+  access: RinkAccess<'writeLog'>,
+  flood: Omit<PouredPass, 'by'> & { pouredBy: string; saidSetByAt: Date | null },
   now: Date,
 ): Promise<boolean> {
-  const rows = await trx('floods')
+  const rows = await trx('log_entries')
     .insert({
       rink_id: access.rinkId,
+      kind: 'flood',
       night_date: flood.nightDate,
       pass_number: flood.passNumber,
-      poured_at: flood.pouredAt,
+      happened_at: flood.pouredAt,
       layer_mm: flood.layerMm,
       water_l: flood.waterL,
       water_temperature_c: flood.waterTemperatureC,
-      poured_by: flood.pouredBy,
+      said_set_by_at: flood.saidSetByAt,
+      written_by: flood.pouredBy,
       created_at: now,
+      updated_at: now,
     })
-    .onConflict(['rink_id', 'night_date', 'pass_number'])
+    .onConflict(trx.raw('(rink_id, night_date, pass_number) where deleted_at is null'))
     .ignore()
     .returning('id')
   return rows.length > 0
@@ -40,26 +44,27 @@ export async function insertFlood(
 /** Takes back a pass that was checked off by mistake; false when there is none. */
 export async function deleteFlood(
   trx: Db,
-  access: RinkAccess<'logFlood'>,
+  access: RinkAccess<'writeLog'>,
   pass: { nightDate: string; passNumber: number },
+  now: Date,
 ): Promise<boolean> {
-  const count = await trx('floods')
-    .where({ rink_id: access.rinkId, night_date: pass.nightDate, pass_number: pass.passNumber })
-    .delete()
+  const count = await trx('log_entries')
+    .where({ rink_id: access.rinkId, night_date: pass.nightDate, pass_number: pass.passNumber, deleted_at: null })
+    .update({ deleted_at: now, updated_at: now })
   return count > 0
 }
 
 /** Passes since an instant, oldest first. */
 export async function listFloodsSince(db: Db, access: RinkAccess, since: Date): Promise<PouredPass[]> {
-  return db('floods as f')
-    .leftJoin('users as u', 'u.id', 'f.poured_by')
-    .where('f.rink_id', access.rinkId)
-    .where('f.poured_at', '>=', since)
-    .orderBy(['f.poured_at', 'f.pass_number'])
+  return db('log_entries as f')
+    .leftJoin('users as u', 'u.id', 'f.written_by')
+    .where({ 'f.rink_id': access.rinkId, 'f.kind': 'flood', 'f.deleted_at': null })
+    .where('f.happened_at', '>=', since)
+    .orderBy(['f.happened_at', 'f.pass_number'])
     .select({
       nightDate: 'f.night_date',
       passNumber: 'f.pass_number',
-      pouredAt: 'f.poured_at',
+      pouredAt: 'f.happened_at',
       layerMm: 'f.layer_mm',
       waterL: 'f.water_l',
       waterTemperatureC: 'f.water_temperature_c',
@@ -68,6 +73,6 @@ export async function listFloodsSince(db: Db, access: RinkAccess, since: Date): 
 }
 
 /** Counts a change that the advice depends on. */
-export async function bumpSettingsVersion(trx: Db, access: RinkAccess<'logFlood'>, now: Date): Promise<void> {
+export async function bumpSettingsVersion(trx: Db, access: RinkAccess<'writeLog'>, now: Date): Promise<void> {
   await trx('rinks').where({ id: access.rinkId }).update({ updated_at: now }).increment('settings_version')
 }

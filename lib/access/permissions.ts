@@ -1,12 +1,12 @@
 // Who may do what, in one table. Everything else asks here.
 
 export type Role = 'keeper' | 'crew' | 'skater'
-export type RinkPermission = 'view' | 'logFlood' | 'receiveAlerts' | 'manage'
+export type RinkPermission = 'view' | 'writeLog' | 'receiveAlerts' | 'manage'
 
 const GRANTED: Record<Role, readonly RinkPermission[]> = {
   skater: ['view'],
-  crew: ['view', 'receiveAlerts', 'logFlood'],
-  keeper: ['view', 'receiveAlerts', 'logFlood', 'manage'],
+  crew: ['view', 'receiveAlerts', 'writeLog'],
+  keeper: ['view', 'receiveAlerts', 'writeLog', 'manage'],
 }
 
 /** True when the role includes the permission; screens use it to leave out buttons, services to refuse. */

@@ -81,17 +81,17 @@ export function surfaceBalance(hour: PreparedHour, kind: SurfaceKind, surfaceTem
   return { netWm2: netOf(parts), parts }
 }
 
-// Keyed by identity: a prepared hour is never changed once made, so its law is drawn once however many sheets pass through it.
-const wetLaws = new WeakMap<PreparedHour, SurfaceLaw>()
+// A sheet asks for the same hour several times in a row, and a prepared hour is never changed once made.
+let lastHour: PreparedHour | null = null
+let lastLaw: SurfaceLaw | null = null
 
-/** The law of a wet surface around 0 °C, without precipitation; drawn once an hour. */
+/** The law of a wet surface around 0 °C, without precipitation. */
 export function wetLaw(hour: PreparedHour): SurfaceLaw {
-  let law = wetLaws.get(hour)
-  if (!law) {
-    law = surfaceLaw(hour, 'wet', 0)
-    wetLaws.set(hour, law)
+  if (lastHour !== hour || lastLaw === null) {
+    lastLaw = surfaceLaw(hour, 'wet', 0)
+    lastHour = hour
   }
-  return law
+  return lastLaw
 }
 
 /**

@@ -34,6 +34,34 @@ export function clearSkyShortwaveWm2(altitudeDeg: number): number {
   return sine <= 0 ? 0 : 1098 * sine * Math.exp(-0.059 / sine)
 }
 
+// Runs of one forecast ask for the same hours at the same place; the sun does not depend on the run.
+const clearSkyAt = new Map<number, number>()
+let clearSkyPlace = ''
+const MOST_HOURS_KEPT = 5000
+
+/**
+ * The same at an instant and place.
+ *
+ * @param atMillis Instant. [ms since 1970-01-01 UTC]
+ * @param latitudeDeg Latitude. [°], -90 to 90
+ * @param longitudeDeg Longitude. [°], -180 to 180
+ * @returns Flux. [W/m²]
+ * @throws RangeError for a place off the globe.
+ */
+export function clearSkyShortwaveAtWm2(atMillis: number, latitudeDeg: number, longitudeDeg: number): number {
+  const place = `${latitudeDeg} ${longitudeDeg}`
+  if (place !== clearSkyPlace || clearSkyAt.size > MOST_HOURS_KEPT) {
+    clearSkyAt.clear()
+    clearSkyPlace = place
+  }
+  let flux = clearSkyAt.get(atMillis)
+  if (flux === undefined) {
+    flux = clearSkyShortwaveWm2(sunAltitudeDeg(atMillis, latitudeDeg, longitudeDeg))
+    clearSkyAt.set(atMillis, flux)
+  }
+  return flux
+}
+
 /**
  * Share of clear-sky radiation that passes cloud.
  *

@@ -103,8 +103,8 @@ const isoHour = (at: Date) => at.toISOString().replace('.000Z', 'Z')
 
 /** What was poured first, then what is still planned, numbered on. A plan made before a pass was poured still holds it. */
 function passesOf(poured: readonly PouredPass[], planned: readonly PlannedPass[], judgedAt: Date): TonightPass[] {
-  const done = poured.map((flood) => ({
-    number: flood.passNumber,
+  const done = poured.map((flood, index) => ({
+    number: flood.passNumber ?? index + 1,
     startsAt: flood.pouredAt.toISOString(),
     setBy: flood.pouredAt.toISOString(),
     layerMm: flood.layerMm,
@@ -112,9 +112,9 @@ function passesOf(poured: readonly PouredPass[], planned: readonly PlannedPass[]
     hoseMinutes: 0,
     poured: { at: flood.pouredAt.toISOString(), by: flood.by },
   }))
-  const known = poured.filter((flood) => flood.pouredAt <= judgedAt).map((flood) => flood.passNumber)
+  const known = done.filter((_, index) => poured[index]!.pouredAt <= judgedAt).map((pass) => pass.number)
   const last = Math.max(0, ...known)
-  const isPoured = (number: number) => poured.some((flood) => flood.passNumber === number)
+  const isPoured = (number: number) => done.some((pass) => pass.number === number)
   const open = planned.map((pass, index) => ({ ...pass, number: last + index + 1, poured: null }))
   return [...done, ...open.filter((pass) => !isPoured(pass.number))]
 }

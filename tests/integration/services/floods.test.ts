@@ -24,13 +24,13 @@ beforeEach(async () => {
 })
 
 const pass = (changes = {}) => ({ rinkId: cast.rinkId, nightDate: NIGHT, passNumber: 1, layerMm: 3, ...changes })
-const floods = () => database.db('floods').where({ rink_id: cast.rinkId })
+const floods = () => database.db('log_entries').where({ rink_id: cast.rinkId, kind: 'flood', deleted_at: null })
 const tonight = (actor: Actor) => getTonight(actor.at(NOW), cast.rinkId)
 
 test('a pass is logged with its water, and shown as poured with who did it', async () => {
   await checkOffPass(cast.crew.at(NOW), pass())
   const [flood] = await floods()
-  expect(flood).toMatchObject({ layer_mm: 3, water_l: 300, poured_by: cast.crew.userId })
+  expect(flood).toMatchObject({ layer_mm: 3, water_l: 300, written_by: cast.crew.userId })
   const view = await tonight(cast.keeper)
   expect(view.outlook?.passes[0]).toMatchObject({ number: 1, poured: { by: 'Crew' } })
 })

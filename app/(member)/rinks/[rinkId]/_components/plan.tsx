@@ -12,7 +12,7 @@ import type { ChangeView } from './use-tonight'
 
 export function Plan({ view, passes, change }: { view: TonightView; passes: TonightPass[]; change: ChangeView }) {
   const [fault, setFault] = useState<string | null>(null)
-  const mayLog = isGranted(view.viewer.role, 'logFlood')
+  const mayLog = isGranted(view.viewer.role, 'writeLog')
   const reader = readerOf(view)
   return (
     <>

@@ -1,147 +1,85 @@
-// The floor of a rink: how water stands on it, from the depths below a level line at its corners.
+// The floor of a rink: how water stands on it, from the depths below a level line at its corners or on a grid.
 import { inRange } from './check'
 
 /** Depths of the floor below a level reference (the string line), in row order on a regular grid of at least two by two points. [m] */
 export interface FloorGrid {
   lengthM: number
   widthM: number
+  /** Rows follow one another along the length, the points of a row lie across the width. */
   depthsM: number[][]
 }
 
-/** Pieces each grid cell is cut into along each side, so that a shore line through it is followed. */
-const PIECES = 24
+/** A floor as a keeper measures it, below any level line: four corners going round, or a grid of points. [m] */
+export type FloorShape = { cornersM: readonly number[] } | { depthsM: readonly (readonly number[])[] }
+
+/** Deepest and highest floor against the line. [m] A rink with more fall than this is no rink. */
+const LINE_RANGE_M = 5
+/** Points along one side of a grid: more than anybody measures. */
+const MOST_POINTS = 50
 
 /**
  * A floor between four corners.
  *
- * @param lengthM Length. [m], above 0 to 200
- * @param widthM Width. [m], above 0 to 200
- * @param cornersM Floor below the line at the corners, going round: two on one end, two on the other. [m]
+ * @param lengthM Length. [m], above 0 to 500
+ * @param widthM Width. [m], above 0 to 500
+ * @param cornersM Floor below the line at the corners, going round: two on one end, two on the other. [m], -5 to 5
  * @returns Grid for the other functions.
- * @throws RangeError for a size out of range or not four corners.
+ * @throws RangeError for a value out of range or not four corners.
  */
 export function floorFromCorners(lengthM: number, widthM: number, cornersM: readonly number[]): FloorGrid {
-  inRange('lengthM [m]', lengthM, 0.1, 200)
-  inRange('widthM [m]', widthM, 0.1, 200)
   if (cornersM.length !== 4) throw new RangeError(`cornersM must hold four depths, got ${cornersM.length}`)
   const [a, b, c, d] = cornersM as [number, number, number, number]
-  return {
-    lengthM,
-    widthM,
-    depthsM: [
-      [a, b],
-      [d, c],
-    ],
+  return floorFromGrid(lengthM, widthM, [
+    [a, b],
+    [d, c],
+  ])
+}
+
+/**
+ * A floor measured on a grid, first and last points on the boards.
+ *
+ * @param lengthM Length. [m], above 0 to 500
+ * @param widthM Width. [m], above 0 to 500
+ * @param depthsM Floor below the line, rows along the length. [m], -5 to 5; 2 by 2 to 50 by 50 points, rows alike
+ * @returns Grid for the other functions.
+ * @throws RangeError for a value out of range or rows that differ in length.
+ */
+export function floorFromGrid(lengthM: number, widthM: number, depthsM: readonly (readonly number[])[]): FloorGrid {
+  inRange('lengthM [m]', lengthM, 0.1, 500)
+  inRange('widthM [m]', widthM, 0.1, 500)
+  const columns = depthsM[0]?.length ?? 0
+  inRange('rows of depthsM', depthsM.length, 2, MOST_POINTS)
+  inRange('points in a row of depthsM', columns, 2, MOST_POINTS)
+  for (const row of depthsM) {
+    if (row.length !== columns) throw new RangeError(`rows of depthsM must be alike, got ${columns} and ${row.length}`)
+    for (const depth of row) inRange('depthsM [m]', depth, -LINE_RANGE_M, LINE_RANGE_M)
   }
+  return { lengthM, widthM, depthsM: depthsM.map((row) => [...row]) }
 }
 
-/** Water at one level. */
-export interface Stage {
-  /** [m³] */
-  volumeM3: number
-  /** Share of the floor under water. [0-1] */
-  wetShare: number
-  /** Deepest water. [m] */
-  deepestM: number
+/** The floor of a rink as measured; level ground when nothing was. @throws RangeError as the two functions above. */
+export function floorOf(lengthM: number, widthM: number, shape?: FloorShape | null): FloorGrid {
+  if (!shape) return floorFromCorners(lengthM, widthM, [0, 0, 0, 0])
+  if ('cornersM' in shape) return floorFromCorners(lengthM, widthM, shape.cornersM)
+  return floorFromGrid(lengthM, widthM, shape.depthsM)
 }
 
-/**
- * Water that stands on a floor at a level.
- *
- * @param floor Floor.
- * @param levelM Water surface below the reference line (0 is at the line). [m]
- * @returns Volume, wet share and greatest depth.
- *
- * Source: bilinear floor between grid points, summed over small pieces; area times mean depth where no corner is dry.
- */
-export function stageAt(floor: FloorGrid, levelM: number): Stage {
-  const rows = floor.depthsM.length - 1
-  const columns = floor.depthsM[0]!.length - 1
-  const pieceM2 = (floor.lengthM * floor.widthM) / (rows * columns * PIECES * PIECES)
-  let volumeM3 = 0
-  let wetPieces = 0
-  let deepestM = 0
-  for (const depth of pieceDepths(floor, rows, columns)) {
-    const water = depth - levelM
-    if (water <= 0) continue
-    volumeM3 += water * pieceM2
-    wetPieces += 1
-  }
-  for (const row of floor.depthsM) for (const depth of row) deepestM = Math.max(deepestM, depth - levelM)
-  return { volumeM3, wetShare: wetPieces / (rows * columns * PIECES * PIECES), deepestM }
+/** Floor below the line at the four corners, going round as in floorFromCorners. [m] */
+export function cornerDepthsM({ depthsM }: FloorGrid): [number, number, number, number] {
+  const first = depthsM[0]!
+  const last = depthsM[depthsM.length - 1]!
+  return [first[0]!, first[first.length - 1]!, last[last.length - 1]!, last[0]!]
 }
 
-/**
- * Level of a given volume of water.
- *
- * @param floor Floor.
- * @param volumeM3 Water. [m³], 0 or more
- * @returns Level below the reference line; negative when it stands above the line. [m]
- * @throws RangeError for a negative volume.
- */
-export function levelOf(floor: FloorGrid, volumeM3: number): number {
-  inRange('volumeM3 [m³]', volumeM3, 0, 1e6)
-  const depths = floor.depthsM.flat()
-  let low = Math.min(...depths) - volumeM3 / (floor.lengthM * floor.widthM) - 1e-6
-  let high = Math.max(...depths)
-  for (let round = 0; round < 40; round++) {
-    const middle = (low + high) / 2
-    if (stageAt(floor, middle).volumeM3 > volumeM3) low = middle
-    else high = middle
-  }
-  return (low + high) / 2
-}
-
-/**
- * Fill of a floor with the hose, hour by hour.
- *
- * @param floor Floor.
- * @param flowLPerMin Flow. [L/min], above 0 to 2000
- * @param volumeM3 Water wanted. [m³]
- * @returns Stages at full hours and at the end.
- * @throws RangeError for a flow out of range.
- */
-export function fillByHour(floor: FloorGrid, flowLPerMin: number, volumeM3: number): { hours: number; stage: Stage }[] {
-  inRange('flowLPerMin [L/min]', flowLPerMin, 0.1, 2000)
-  const hoursInAll = hoseHours(volumeM3 * 1000, flowLPerMin)
-  const steps: number[] = []
-  for (let hour = 1; hour < hoursInAll; hour++) steps.push(hour)
-  return [...steps, hoursInAll].map((hours) => ({
-    hours,
-    stage: stageAt(floor, levelOf(floor, (hours * 60 * flowLPerMin) / 1000)),
-  }))
-}
-
-/** Hours of running hose. @param litres [L] @param flowLPerMin [L/min] @returns [h] */
-export function hoseHours(litres: number, flowLPerMin: number): number {
-  return litres / inRange('flowLPerMin [L/min]', flowLPerMin, 0.1, 2000) / 60
-}
-
-/**
- * Liner for a rink.
- *
- * @param insideM Inside length or width. [m]
- * @param boardM Height of the boards. [m]
- * @param tuckM Down the outside and folds, each side. [m]
- * @returns Liner in that direction: across, up and over both boards, tuck. [m]
- *
- * Source: ours; up and over is common practice.
- */
-export function linerLengthM(insideM: number, boardM: number, tuckM: number): number {
-  return inRange('insideM [m]', insideM, 0.1, 300) + 2 * (boardM + tuckM)
-}
-
-function* pieceDepths(floor: FloorGrid, rows: number, columns: number): Generator<number> {
-  for (let row = 0; row < rows; row++) {
-    for (let column = 0; column < columns; column++) {
-      const near = floor.depthsM[row]!
-      const far = floor.depthsM[row + 1]!
-      for (let i = 0; i < PIECES; i++) {
-        const down = (i + 0.5) / PIECES
-        const left = near[column]! * (1 - down) + far[column]! * down
-        const right = near[column + 1]! * (1 - down) + far[column + 1]! * down
-        for (let j = 0; j < PIECES; j++) yield left + ((right - left) * (j + 0.5)) / PIECES
-      }
+/** The highest and the lowest point of the floor, below the line. [m] */
+export function floorExtremesM({ depthsM }: FloorGrid): { highestM: number; lowestM: number } {
+  let highestM = Number.POSITIVE_INFINITY
+  let lowestM = Number.NEGATIVE_INFINITY
+  for (const row of depthsM) {
+    for (const depth of row) {
+      highestM = Math.min(highestM, depth)
+      lowestM = Math.max(lowestM, depth)
     }
   }
+  return { highestM, lowestM }
 }

@@ -3,7 +3,8 @@ import { describe, expect, test } from 'vitest'
 import { bucketFlowLPerMin, frictionHeadM, hoursToCool, openHoseFlowLPerMin } from '@/lib/physics/hose'
 import { FUSION_J_PER_KG, WATER_HEAT_CAPACITY } from '@/lib/physics/constants'
 import { floatingLoadKg, CAUTIOUS_GOLD_PA } from '@/lib/physics/bearing'
-import { floorFromCorners, hoseHours, stageAt } from '@/lib/physics/floor'
+import { floorFromCorners } from '@/lib/physics/floor'
+import { hoseHours, stageAt } from '@/lib/physics/stage'
 import { newSnowDensity, snowConductivity } from '@/lib/physics/snow'
 
 const M_PER_INCH = 0.0254

@@ -29,17 +29,30 @@ export function bridgeLoneGaps(records: readonly HourlyRecord[]): HourlyRecord[]
   return bridged
 }
 
+/** Written out, because it is asked of every hour of every run. */
 function isComplete(record: HourlyRecord): boolean {
-  for (const field of BRIDGED) if (!isNumber(record[field])) return false
-  return true
+  return (
+    isNumber(record.airTemperatureC) &&
+    isNumber(record.dewPointC) &&
+    isNumber(record.windSpeedMps) &&
+    isNumber(record.windGustMps) &&
+    isNumber(record.cloudCover) &&
+    isNumber(record.shortwaveWm2) &&
+    isNumber(record.precipitationMm) &&
+    isNumber(record.rainMm) &&
+    isNumber(record.snowfallCm) &&
+    isNumber(record.pressureHpa) &&
+    isNumber(record.longwaveDownWm2)
+  )
 }
 
 function bridge(before: HourlyRecord, record: HourlyRecord, after: HourlyRecord): HourlyRecord {
   let filled: HourlyRecord | null = null
   for (const field of BRIDGED) {
+    if (isNumber(record[field])) continue
     const from = before[field]
     const to = after[field]
-    if (isNumber(record[field]) || !isNumber(from) || !isNumber(to)) continue
+    if (!isNumber(from) || !isNumber(to)) continue
     filled ??= { ...record }
     filled[field] = (from + to) / 2
   }

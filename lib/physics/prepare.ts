@@ -6,7 +6,8 @@ import { saturationOverWaterHpa } from './humidity'
 import { windAtRinkMps } from './site'
 import { blackBodyWm2, clearSkyEmissivity, cloudySkyEmissivity, longwaveOnRinkWm2 } from './sky'
 import { precipitationPhase } from './snow'
-import { clearSkyShortwaveWm2, cloudShortwaveFactor, sunAltitudeDeg } from './sun'
+import { sunshineOnRinkWm2 } from './horizon'
+import { clearSkyShortwaveAtWm2, cloudShortwaveFactor } from './sun'
 import type { HourlyRecord, PreparedHour, Site } from './types'
 
 const HOUR_MILLIS = 3_600_000
@@ -34,8 +35,31 @@ export function prepareHours(records: readonly HourlyRecord[], site: Site): Prep
       throw new RangeError(`hours must follow each other: ${record.time} does not follow the hour before it`)
     }
     expectedMillis = startsAtMillis + HOUR_MILLIS
-    return hasNeeded(record) ? knownHour(record, startsAtMillis, site) : unknownHour(record, startsAtMillis)
+    return preparedHour(record, startsAtMillis, site)
   })
+}
+
+/**
+ * Prepares other runs of hours that have been prepared before: same times, same site, gaps already bridged.
+ *
+ * @param records Bridged hours of the other run.
+ * @param before The hours as prepared for the first run; their times stand for these.
+ * @param from First hour that differs; earlier ones are taken over.
+ */
+export function prepareLike(
+  records: readonly HourlyRecord[],
+  before: readonly PreparedHour[],
+  from: number,
+  site: Site,
+): PreparedHour[] {
+  return records.map((record, index) => {
+    const same = before[index]!
+    return index < from ? same : preparedHour(record, same.startsAtMillis, site)
+  })
+}
+
+function preparedHour(record: HourlyRecord, startsAtMillis: number, site: Site): PreparedHour {
+  return hasNeeded(record) ? knownHour(record, startsAtMillis, site) : unknownHour(record, startsAtMillis)
 }
 
 function knownHour(record: HourlyRecord, startsAtMillis: number, site: Site): PreparedHour {
@@ -49,6 +73,12 @@ function knownHour(record: HourlyRecord, startsAtMillis: number, site: Site): Pr
   const skyWm2 =
     record.longwaveDownWm2 ?? cloudySkyEmissivity(clearEmissivity, cloudCover) * blackBodyWm2(airTemperatureC)
   const fallen = precipitationPhase(record, airTemperatureC, precipitationMm)
+  const openShortwaveWm2 = inRange(
+    'shortwaveWm2 [W/m²]',
+    Math.max(0, record.shortwaveWm2 ?? shortwaveFromSun(startsAtMillis, site, cloudCover)),
+    0,
+    1500,
+  )
   return {
     startsAtMillis,
     time: record.time,
@@ -59,12 +89,7 @@ function knownHour(record: HourlyRecord, startsAtMillis: number, site: Site): Pr
     windAtRinkMps: windAtRinkMps(windSpeedMps, site.shelter),
     windGustMps: inRange('windGustMps [m/s]', record.windGustMps ?? windSpeedMps * GUST_FACTOR, 0, 120),
     cloudCover,
-    shortwaveWm2: inRange(
-      'shortwaveWm2 [W/m²]',
-      Math.max(0, record.shortwaveWm2 ?? shortwaveFromSun(startsAtMillis, site, cloudCover)),
-      0,
-      1500,
-    ),
+    shortwaveWm2: sunshineOnRinkWm2(openShortwaveWm2, cloudCover, startsAtMillis, site),
     longwaveDownWm2: longwaveOnRinkWm2(
       inRange('longwaveDownWm2 [W/m²]', skyWm2, 30, 700),
       airTemperatureC,
@@ -80,8 +105,8 @@ function knownHour(record: HourlyRecord, startsAtMillis: number, site: Site): Pr
 
 function shortwaveFromSun(startsAtMillis: number, site: Site, cloudCover: number): number {
   const middle = startsAtMillis + HOUR_MILLIS / 2
-  const altitude = sunAltitudeDeg(middle, site.latitudeDeg, site.longitudeDeg)
-  return clearSkyShortwaveWm2(altitude) * cloudShortwaveFactor(cloudCover)
+  const clearWm2 = clearSkyShortwaveAtWm2(middle, site.latitudeDeg, site.longitudeDeg)
+  return clearWm2 > 0 ? clearWm2 * cloudShortwaveFactor(cloudCover) : 0
 }
 
 function cloudFromLongwave(longwaveDownWm2: number, airTemperatureC: number, clearEmissivity: number): number {

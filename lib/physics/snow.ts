@@ -48,20 +48,21 @@ export function precipitationPhase(
   airTemperatureC: number,
   precipitationMm: number,
 ): { rainMm: number; snowfallCm: number } {
-  const cmPerMm = 100 / newSnowDensity(airTemperatureC)
+  const depthCm = (snowMm: number) => (snowMm > 0 ? (snowMm * 100) / newSnowDensity(airTemperatureC) : 0)
   if (isNumber(record.rainMm)) {
     const rainMm = Math.min(inRange('rainMm [mm]', record.rainMm, 0, 200), precipitationMm)
-    const snowfallCm = record.snowfallCm ?? (precipitationMm - rainMm) * cmPerMm
+    const snowfallCm = record.snowfallCm ?? depthCm(precipitationMm - rainMm)
     return { rainMm, snowfallCm: inRange('snowfallCm [cm]', snowfallCm, 0, 100) }
   }
   if (isNumber(record.snowfallCm)) {
-    const snowMm = inRange('snowfallCm [cm]', record.snowfallCm, 0, 100) / cmPerMm
+    const snowfallCm = inRange('snowfallCm [cm]', record.snowfallCm, 0, 100)
+    const snowMm = (snowfallCm * newSnowDensity(airTemperatureC)) / 100
     return {
-      rainMm: record.snowfallCm > 0 ? Math.max(0, precipitationMm - snowMm) : precipitationMm,
-      snowfallCm: record.snowfallCm,
+      rainMm: snowfallCm > 0 ? Math.max(0, precipitationMm - snowMm) : precipitationMm,
+      snowfallCm,
     }
   }
   return airTemperatureC > RAIN_ABOVE_C
     ? { rainMm: precipitationMm, snowfallCm: 0 }
-    : { rainMm: 0, snowfallCm: precipitationMm * cmPerMm }
+    : { rainMm: 0, snowfallCm: depthCm(precipitationMm) }
 }

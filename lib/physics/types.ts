@@ -39,6 +39,10 @@ export interface Site {
   shelter: number
   /** Share of the sky dome that is open, 0-1; the rest radiates at air temperature. */
   skyView: number
+  /** Height of the skyline: one all round, or eight from north clockwise. [°] None when absent. */
+  horizonDeg?: number | readonly number[]
+  /** Share of direct sunshine that trees or a cloth keep off, 0-1. None when absent. */
+  shade?: number
 }
 
 /** What a wet surface at 0 °C loses, positive when heat leaves it. [W/m²] */

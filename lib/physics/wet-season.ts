@@ -1,6 +1,6 @@
 // What a run of hours would do to a wet surface at 0 °C, worked out once and asked many times.
 import { FUSION_J_PER_KG, HOUR_SECONDS } from './constants'
-import { precipitationHeatWm2, wetLaw } from './balance'
+import { precipitationHeatWm2, surfaceLaw } from './balance'
 import type { PreparedHour } from './types'
 
 export interface WetSeason {
@@ -43,7 +43,7 @@ function workOut(hours: readonly PreparedHour[]): WetSeason {
       best = 0
       continue
     }
-    const law = wetLaw(hour)
+    const law = surfaceLaw(hour, 'wet', 0)
     const lossWm2 = law.netWm2 + precipitationHeatWm2(hour)
     season.lossWm2[i] = lossWm2
     season.slopeWm2K[i] = law.slopeWm2K

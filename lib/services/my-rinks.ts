@@ -2,8 +2,11 @@
 import { listNewestSummaries } from '@/db/queries/outlooks'
 import { listRinksOfUser, type RinkOfUser } from '@/db/queries/rinks'
 import { findAccount } from '@/db/queries/users'
+import { requireRink } from '@/lib/access/require-rink'
 import { tonightDate } from '@/lib/advice/night'
 import type { ServiceContext } from '@/lib/context'
+import { NotFoundError } from '@/lib/errors'
+import { rinkIdSchema } from '@/lib/schemas/rinks'
 import { verdictSentence } from '@/lib/words/night'
 
 export interface MyRink extends RinkOfUser {
@@ -25,4 +28,12 @@ export async function listMyRinksTonight({ db, now, viewer }: ServiceContext): P
     const isGood = summary.verdict === 'flood' || summary.verdict === 'fill'
     return { ...rink, tonight: { isGood, sentence: verdictSentence(summary, now, words) } }
   })
+}
+
+/** One rink of the viewer's with their role. @throws NotFoundError for strangers. */
+export async function getMyRink(context: ServiceContext, rinkId: string): Promise<RinkOfUser> {
+  const access = await requireRink(context, rinkIdSchema.parse(rinkId), 'view')
+  const rink = (await listRinksOfUser(context.db, context.viewer.userId)).find(({ id }) => id === access.rinkId)
+  if (!rink) throw new NotFoundError('Rink')
+  return rink
 }

@@ -1,23 +1,35 @@
-// The way round: a bar under the thumb on phones, a rail at the left from 1024 px. Shows only what the person may open.
+// The way round: a bar under the thumb on phones, a rail at the left from 1024 px.
 'use client'
 import Link from 'next/link'
 import type { Route } from 'next'
 import { useParams, usePathname } from 'next/navigation'
-import { isGranted, type Role } from '@/lib/access/permissions'
+import type { Role } from '@/lib/access/permissions'
 
 interface Entry {
   href: string
   word: string
 }
 
+const RINKS: Entry = { href: '/rinks', word: 'Rinks' }
+
 /** Entries for one rink, or for the pages that belong to none. */
 export function entriesFor(rinkId: string | undefined, role: Role | undefined): Entry[] {
-  const more = { href: '/account', word: 'More' }
-  if (!rinkId || !role) return [{ href: '/rinks', word: 'Tonight' }, more]
-  const entries = [{ href: `/rinks/${rinkId}`, word: 'Tonight' }]
-  if (isGranted(role, 'receiveAlerts')) entries.push({ href: `/rinks/${rinkId}/alerts`, word: 'Alerts' })
-  if (isGranted(role, 'manage')) entries.push({ href: `/rinks/${rinkId}/settings`, word: 'Rink' })
-  return [...entries, more]
+  if (!rinkId || !role) return [RINKS, { href: '/account', word: 'Account' }]
+  const base = `/rinks/${rinkId}`
+  return [
+    { href: base, word: 'Tonight' },
+    { href: `${base}/week`, word: 'Week' },
+    { href: `${base}/log`, word: 'Log' },
+    { href: `${base}/more`, word: 'More' },
+  ]
+}
+
+/** The entry a page belongs to: what has no entry of its own is reached through More. */
+export function entryOf(pathname: string, entries: readonly Entry[]): Entry | undefined {
+  const within = ({ href }: Entry) => pathname === href || pathname.startsWith(`${href}/`)
+  const nearest = entries.filter(within).sort((a, b) => b.href.length - a.href.length)[0]
+  const isDeeper = nearest !== undefined && nearest === entries[0] && pathname !== nearest.href
+  return isDeeper && nearest.word === 'Tonight' ? entries.at(-1) : nearest
 }
 
 const LINK =
@@ -29,14 +41,21 @@ export function Navigation({ rinks }: { rinks: { id: string; role: Role }[] }) {
   const { rinkId } = useParams<{ rinkId?: string }>()
   const pathname = usePathname()
   const role = rinks.find((rink) => rink.id === rinkId)?.role
+  const entries = entriesFor(rinkId, role)
+  const current = entryOf(pathname, entries)
   return (
     <nav
       aria-label="Main"
       className="fixed inset-x-0 bottom-0 z-10 flex border-t border-rule bg-sheet pb-[env(safe-area-inset-bottom)] lg:inset-y-0 lg:right-auto lg:w-[164px] lg:flex-col lg:border-t-0 lg:border-r lg:pt-[72px] print:hidden"
     >
-      {entriesFor(rinkId, role).map(({ href, word }) => (
-        <Link key={href} href={href as Route} aria-current={pathname === href ? 'page' : undefined} className={LINK}>
-          {word}
+      {entries.map((entry) => (
+        <Link
+          key={entry.href}
+          href={entry.href as Route}
+          aria-current={entry !== current ? undefined : pathname === entry.href ? 'page' : 'true'}
+          className={LINK}
+        >
+          {entry.word}
         </Link>
       ))}
     </nav>

@@ -1,7 +1,7 @@
 // Parts of the night sheet: who gets which entries, the verdict set off, and what is said when the state may be old.
 import { renderToStaticMarkup } from 'react-dom/server'
 import { describe, expect, test } from 'vitest'
-import { entriesFor } from '@/app/(member)/_components/navigation'
+import { entriesFor, entryOf } from '@/app/(member)/_components/navigation'
 import { DataSource } from '@/app/(member)/rinks/[rinkId]/_components/data-source'
 import { passWords } from '@/app/(member)/rinks/[rinkId]/_components/pass-words'
 import { StatusNotices } from '@/app/(member)/rinks/[rinkId]/_components/status-notices'
@@ -15,16 +15,24 @@ const NOW = NOON + 6.7 * 3_600_000
 const textOf = (markup: string) => markup.replace(/<[^>]+>/g, '').replaceAll('\u00a0', ' ')
 
 describe('navigation', () => {
-  const words = (role: 'keeper' | 'crew' | 'skater' | undefined) => entriesFor('1', role).map((entry) => entry.word)
+  const entries = entriesFor('1', 'keeper')
 
-  test('shows each role what it may open', () => {
-    expect(words('keeper')).toEqual(['Tonight', 'Alerts', 'Rink', 'More'])
-    expect(words('crew')).toEqual(['Tonight', 'Alerts', 'More'])
-    expect(words('skater')).toEqual(['Tonight', 'More'])
+  test('leads round one rink', () => {
+    expect(entries.map(({ word }) => word)).toEqual(['Tonight', 'Week', 'Log', 'More'])
   })
 
   test('shows nothing of a rink that is not on the person’s list', () => {
     expect(entriesFor('1', undefined)).toEqual(entriesFor(undefined, undefined))
+  })
+
+  test.each([
+    ['/rinks/1', 'Tonight'],
+    ['/rinks/1/log', 'Log'],
+    ['/rinks/1/log/2', 'Log'],
+    ['/rinks/1/plan', 'More'],
+    ['/rinks/1/settings', 'More'],
+  ])('%s belongs to %s', (pathname, word) => {
+    expect(entryOf(pathname, entries)?.word).toBe(word)
   })
 })
 

@@ -3,6 +3,7 @@
 import { useClock } from '@/components/hooks/use-clock'
 import { nightLabel, readerOf } from '@/components/rinks/reader'
 import { NightStrip } from '@/components/rinks/night-strip'
+import { RinkHeader } from '@/components/rinks/rink-header'
 import { isGranted } from '@/lib/access/permissions'
 import type { TonightView } from '@/lib/schemas/tonight-view'
 import { Cautions } from '@/components/rinks/cautions'
@@ -26,15 +27,7 @@ export function TonightSheet({ initial }: { initial: TonightView }) {
   const now = useClock(view.readAt)
   return (
     <div className="mx-auto max-w-page px-5 pb-24 lg:px-9 lg:pb-12 print:p-0">
-      <header className="flex items-baseline gap-3 border-b border-rule pt-4 pb-5">
-        <p className="flex flex-wrap items-baseline gap-x-3">
-          <span className="font-semibold">{view.rink.name}</span>
-          <span className="text-note text-graphite">{nightLabel(view.night.date)}</span>
-        </p>
-        {view.rink.people > 1 ? (
-          <p className="ml-auto shrink-0 text-note text-graphite">{view.rink.people} people</p>
-        ) : null}
-      </header>
+      <RinkHeader name={view.rink.name} about={nightLabel(view.night.date)} people={view.rink.people} />
       <main>
         <StatusNotices view={view} now={now} trouble={trouble} onReadAgain={readAgain} />
         {isJudged(view) ? (

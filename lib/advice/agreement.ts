@@ -1,10 +1,10 @@
 // How many forecast runs agree with the hours of a window.
-import { prepareHours } from '@/lib/physics/prepare'
-import type { HourlyRecord } from '@/lib/physics/types'
+import { bridgeLoneGaps } from '@/lib/physics/gaps'
+import { prepareHours, prepareLike } from '@/lib/physics/prepare'
 import { judgeFillStart, type GrowthCache } from './fill-factors'
 import { judgeFloodStart } from './flood-factors'
 import { carrySheet, type ForecastRun } from './forecast-run'
-import { perturbRun } from './runs'
+import { firstPerturbed, perturbRun } from './runs'
 import { scoreOf } from './score-hours'
 import { AGREEMENT, VERDICT } from './thresholds'
 import type { HourRange } from './windows'
@@ -16,16 +16,30 @@ function countRuns({ input }: Setting, options: JudgeOptions): number {
   return input.members?.length || (options.runs ?? AGREEMENT.defaultRuns)
 }
 
-/** The other runs, with the sheet carried through each, as far as anybody asks. */
-export function otherRuns(setting: Setting, options: JudgeOptions, hourCount: number): ForecastRun[] {
+/**
+ * The other runs one after the other, with the sheet carried through each as far as anybody asks; one at a time, so that
+ * none needs to be kept. Perturbed runs differ from now on: what lies before is the main run's.
+ */
+export function* otherRuns(
+  setting: Setting,
+  options: JudgeOptions,
+  main: ForecastRun,
+  hourCount: number,
+): Generator<ForecastRun> {
   const { members, hours } = setting.input
-  const carry = (records: HourlyRecord[]) => carrySheet(setting, prepareHours(records, setting.site), false)
-  if (members && members.length > 0) return members.map((member) => carry(member.slice(0, hourCount)))
-  const asked = hours.slice(0, hourCount)
+  if (members && members.length > 0) {
+    for (const member of members) {
+      yield carrySheet(setting, prepareHours(member.slice(0, hourCount), setting.site), { run: main, count: 0 })
+    }
+    return
+  }
+  const asked = bridgeLoneGaps(hours.slice(0, hourCount))
+  const count = firstPerturbed(asked, setting.nowMillis)
   const seed = (options.seed ?? 1) * 1009
-  return Array.from({ length: countRuns(setting, options) }, (_, run) =>
-    carry(perturbRun(asked, setting.nowMillis, seed + run)),
-  )
+  for (let run = 0; run < countRuns(setting, options); run += 1) {
+    const records = perturbRun(asked, setting.nowMillis, seed + run)
+    yield carrySheet(setting, prepareLike(records, main.hours, count, setting.site), { run: main, count })
+  }
 }
 
 /** How the runs see one hour of a window. */
@@ -36,43 +50,44 @@ export interface HourAgreement {
   meanScore: number
 }
 
+/** What the runs asked so far say of the hours of a window. */
+export type RangeTally = { range: HourRange; shares: Float64Array; scoreSums: Float64Array }
+
+export function startTally(range: HourRange): RangeTally {
+  const length = range.to - range.from
+  return { range, shares: new Float64Array(length), scoreSums: new Float64Array(length) }
+}
+
+/** Asks one run about the hours of a window. */
+export function addToTally({ range, shares, scoreSums }: RangeTally, setting: Setting, run: ForecastRun): void {
+  const cache: GrowthCache = new Map()
+  for (let index = range.from; index < range.to; index += 1) {
+    if (!run.hours[index]?.isKnown) continue
+    const isFlood = range.kind === 'flood'
+    const score = scoreOf(isFlood ? judgeFloodStart(setting, run, index) : judgeFillStart(setting, run, index, cache))
+    if (score < VERDICT.goodScore) continue
+    shares[index - range.from]! += 1
+    scoreSums[index - range.from]! += score
+  }
+}
+
 /**
  * How the runs see each hour of a window. The window's best hour is the one with the highest mean score, and the share at
  * that hour is the window's agreement; held against measured nights in `npm run bench:advice`.
  *
+ * @param runs How many have been asked.
  * @param scores The forecast's own scores for the range, which stand where there are no other runs.
  */
-export function hourAgreements(
-  setting: Setting,
-  runs: readonly ForecastRun[],
-  range: HourRange,
-  scores: readonly number[],
-): HourAgreement[] {
-  if (runs.length === 0) return scores.map((score) => ({ share: 1, meanScore: score }))
-  const sums = scores.map(() => ({ share: 0, meanScore: 0 }))
-  for (const run of runs) {
-    for (const [hour, score] of runScores(setting, run, range).entries()) {
-      const sum = sums[hour] as HourAgreement
-      if (score < VERDICT.goodScore) continue
-      sum.share += 1 / runs.length
-      sum.meanScore += score / runs.length
-    }
-  }
-  return sums.map(({ share, meanScore }) => ({ share: Math.min(1, share), meanScore }))
+export function hourAgreements(tally: RangeTally, runs: number, scores: readonly number[]): HourAgreement[] {
+  if (runs === 0) return scores.map((score) => ({ share: 1, meanScore: score }))
+  return scores.map((_, hour) => ({
+    share: (tally.shares[hour] ?? 0) / runs,
+    meanScore: (tally.scoreSums[hour] ?? 0) / runs,
+  }))
 }
 
 /** Hour of the window with the highest mean score; the earliest of equals. */
 export function bestHour(agreements: readonly HourAgreement[]): number {
   const scores = agreements.map(({ meanScore }) => meanScore)
   return scores.indexOf(Math.max(...scores))
-}
-
-function runScores(setting: Setting, run: ForecastRun, range: HourRange): number[] {
-  const cache: GrowthCache = new Map()
-  return Array.from({ length: range.to - range.from }, (_, hour) => {
-    const index = range.from + hour
-    if (!run.hours[index]?.isKnown) return 0
-    const isFlood = range.kind === 'flood'
-    return scoreOf(isFlood ? judgeFloodStart(setting, run, index) : judgeFillStart(setting, run, index, cache))
-  })
 }

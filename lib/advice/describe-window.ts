@@ -1,8 +1,8 @@
 // A range of good hours turned into a window: to the quarter hour, with its latest start and when the last layer is set.
 import type { PreparedHour } from '@/lib/physics/types'
-import { judgeFloodStart } from './flood-factors'
+import { judgeFloodStart, setsAtOf } from './flood-factors'
 import type { ForecastRun } from './forecast-run'
-import { isGood, setsAtOf } from './score-hours'
+import { isGood } from './score-hours'
 import { isAvailableAt, type Setting } from './setting'
 import { PLAN } from './thresholds'
 import { toIso } from './zoned-time'

@@ -31,7 +31,8 @@ export function overallDesirability<Name extends string>(
   let weightSum = 0
   for (const name in weights) {
     if (factors[name] <= 0) return 0
-    logSum += weights[name] * Math.log(factors[name])
+    // Most factors are 1, whose logarithm is 0.
+    if (factors[name] < 1) logSum += weights[name] * Math.log(factors[name])
     weightSum += weights[name]
   }
   return Math.exp(logSum / weightSum)

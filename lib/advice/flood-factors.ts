@@ -1,13 +1,15 @@
 // The factors of a flood started at one moment, as numbers from 0 to 1; flood-reasons.ts puts names to them.
 import { minutesToSet } from '@/lib/physics/layer'
-import { freezeRateMmPerH, wetSurfaceBalance } from '@/lib/physics/balance'
+import { freezeRateMmPerH } from '@/lib/physics/balance'
 import { clearSnow, reportSheet, type SheetState } from '@/lib/physics/sheet'
-import type { HeatBalanceParts, PreparedHour } from '@/lib/physics/types'
+import type { PreparedHour } from '@/lib/physics/types'
+import { wetSeason } from '@/lib/physics/wet-season'
 import { windChillC } from '@/lib/physics/wind-chill'
 import { overallDesirability, rampDesirability } from './desirability'
 import type { ForecastRun } from './forecast-run'
 import { neededMillis, type Setting } from './setting'
 import { FLOOD, PERSON } from './thresholds'
+import { toIso } from './zoned-time'
 import type { SheetReport } from './types'
 
 const MINUTE_MILLIS = 60_000
@@ -32,7 +34,7 @@ export interface FloodFactors {
 export interface FloodStart {
   startMillis: number
   hour: PreparedHour
-  parts: HeatBalanceParts
+  /** Of a wet surface at 0 °C. */
   netWm2: number
   rateMmPerH: number
   windChillC: number
@@ -70,7 +72,7 @@ export function judgeFloodStart(
 ): FloodStart {
   const hour = run.hours[index] as PreparedHour
   const startMillis = hour.startsAtMillis + fraction * HOUR_MILLIS
-  const { netWm2, parts } = wetSurfaceBalance(hour)
+  const netWm2 = wetSeason(run.hours).lossWm2[index] as number
   const report = reportSheet(sheet)
   const cleared = report.snowCoverCm > 0 ? clearSnow(sheet) : sheet
   const rateMmPerH = freezeRateMmPerH(netWm2)
@@ -83,7 +85,6 @@ export function judgeFloodStart(
   const start: FloodStart = {
     startMillis,
     hour,
-    parts,
     netWm2,
     rateMmPerH,
     windChillC: chill,
@@ -102,6 +103,11 @@ export function judgeFloodStart(
   start.factors = floodFactors(start, setting)
   start.ice = overallDesirability(start.factors, FLOOD.weights)
   return start
+}
+
+/** Set times are told to the minute, and never too early. */
+export function setsAtOf({ startMillis, setMinutes }: Pick<FloodStart, 'startMillis' | 'setMinutes'>): string | null {
+  return setMinutes === null ? null : toIso(Math.ceil(startMillis / MINUTE_MILLIS + setMinutes) * MINUTE_MILLIS)
 }
 
 const NO_FACTORS: FloodFactors = {

@@ -1,8 +1,9 @@
 // Names for the factors of a flood: each becomes a reason with its code, its value and the numbers its sentence needs.
+import type { HeatBalanceParts } from '@/lib/physics/types'
 import { wetMmOf, type ForecastRun } from './forecast-run'
 import { toIso } from './zoned-time'
 import { FLOOD } from './thresholds'
-import type { FloodStart } from './flood-factors'
+import { setsAtOf, type FloodStart } from './flood-factors'
 import type { Setting } from './setting'
 import type { Reason } from './types'
 
@@ -13,14 +14,21 @@ const HOUR_MILLIS = 3_600_000
  * All factors of a flood as reasons, the one that lets least through first; limits of the person are among them, each
  * with its own value.
  */
-export function floodReasons(start: FloodStart, setting: Setting, run: ForecastRun, index: number): Reason[] {
+export function floodReasons(
+  start: FloodStart,
+  parts: HeatBalanceParts,
+  setting: Setting,
+  run: ForecastRun,
+  index: number,
+): Reason[] {
+  const setsAt = setsAtOf(start)
   const reasons = [
     bearsReason(start, setting),
     lastLayerReason(start),
-    rateReason(start),
+    rateReason(start, parts),
     dryReason(start, run, index),
-    setReason(start, run),
-    slackReason(start),
+    setReason(start, setsAt, run),
+    slackReason(start, setsAt),
     airReason(start),
     windReason(start),
     gustReason(start),
@@ -45,7 +53,7 @@ function lastLayerReason({ factors, sheet }: FloodStart): Reason {
 }
 
 /** Where the balance and the thermometer rule disagree, the code says which way. */
-function rateReason({ factors, hour, parts, rateMmPerH }: FloodStart): Reason {
+function rateReason({ factors, hour, rateMmPerH }: FloodStart, parts: HeatBalanceParts): Reason {
   const values = {
     freezeRateMmPerH: rateMmPerH,
     airTemperatureC: hour.airTemperatureC,
@@ -86,22 +94,25 @@ function dryReason({ factors, wetMm, hour, startMillis }: FloodStart, run: Forec
   return { code: isSnow ? 'snow_before_set' : 'rain_before_set', factor: 0, values }
 }
 
-function setReason({ factors, setMinutes, startMillis, neededMillis }: FloodStart, run: ForecastRun): Reason {
-  if (setMinutes === null) {
+function setReason(
+  { factors, setMinutes, startMillis, neededMillis }: FloodStart,
+  setsAt: string | null,
+  run: ForecastRun,
+): Reason {
+  if (setMinutes === null || setsAt === null) {
     const last = run.hours.at(-1)
     const endMillis = (last?.startsAtMillis ?? startMillis) + HOUR_MILLIS
     const values = { forecastEndsAt: toIso(endMillis), neededAt: toIso(neededMillis) }
     return { code: endMillis < neededMillis ? 'forecast_ends_first' : 'does_not_set', factor: 0, values }
   }
-  const setsAt = toIso(Math.round((startMillis + setMinutes * MINUTE_MILLIS) / MINUTE_MILLIS) * MINUTE_MILLIS)
   return { code: factors.set < 0.5 ? 'sets_slowly' : 'sets_soon', factor: factors.set, values: { setMinutes, setsAt } }
 }
 
-function slackReason({ factors, setMinutes, startMillis, neededMillis }: FloodStart): Reason {
+function slackReason({ factors, setMinutes, startMillis, neededMillis }: FloodStart, setsAt: string | null): Reason {
   const values: Reason['values'] = { neededAt: toIso(neededMillis) }
-  if (setMinutes !== null) {
+  if (setMinutes !== null && setsAt !== null) {
     values.slackMinutes = (neededMillis - startMillis) / MINUTE_MILLIS - setMinutes
-    values.setsAt = toIso(Math.round((startMillis + setMinutes * MINUTE_MILLIS) / MINUTE_MILLIS) * MINUTE_MILLIS)
+    values.setsAt = setsAt
   }
   const code = factors.slack === 0 ? 'not_set_in_time' : factors.slack < 1 ? 'barely_in_time' : 'set_in_time'
   return { code, factor: factors.slack, values }

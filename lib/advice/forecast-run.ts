@@ -29,28 +29,37 @@ export function wetMmOf(hour: PreparedHour): number {
   return hour.precipitationMm > 0 ? hour.precipitationMm : hour.snowfallCm
 }
 
+/** Hours that a run has in common with another, from the first one on. */
+export interface SharedStart {
+  run: ForecastRun
+  count: number
+}
+
 /**
  * Carries the sheet of the input through a run of hours.
  *
- * @param isReported Whether what the keeper would measure is wanted hour by hour; other runs go without.
+ * @param shared What it has in common with the main run: sheets are taken from there, and no reports are made.
  */
-export function carrySheet(setting: Setting, hours: PreparedHour[], isReported = true): ForecastRun {
+export function carrySheet(setting: Setting, hours: PreparedHour[], shared?: SharedStart): ForecastRun {
+  const from = shared?.count ?? 0
   const run: ForecastRun = {
     hours,
     wetBefore: new Float64Array(hours.length + 1),
     unknownBefore: new Int32Array(hours.length + 1),
-    sheets: [],
-    carried: [],
+    sheets: shared?.run.sheets.slice(0, from) ?? [],
+    carried: shared?.run.carried.slice(0, from) ?? [],
     reports: [],
     pouredSetMillis: null,
   }
   const asOf = setting.input.sheet.asOf
   const asOfMillis = asOf === undefined ? setting.firstMillis : Date.parse(asOf)
   const poured = (setting.input.poured ?? []).filter((layer) => entryMillis(layer.at) >= asOfMillis)
-  let sheet = startingSheet(setting)
-  for (const [index, hour] of hours.entries()) {
+  let sheet = shared?.run.carried[from] ?? startingSheet(setting)
+  for (let index = 0; index < hours.length; index += 1) {
+    const hour = hours[index] as PreparedHour
     run.wetBefore[index + 1] = (run.wetBefore[index] as number) + wetMmOf(hour)
     run.unknownBefore[index + 1] = (run.unknownBefore[index] as number) + (hour.isKnown ? 0 : 1)
+    if (index < from) continue
     run.carried.push(sheet)
     for (const layer of poured) {
       if (entryMillis(layer.at) === hour.startsAtMillis) sheet = pourLayer(sheet, layer)
@@ -58,7 +67,7 @@ export function carrySheet(setting: Setting, hours: PreparedHour[], isReported =
     }
     run.sheets.push(sheet)
     if (hour.startsAtMillis >= asOfMillis) sheet = advanceSheet(sheet, hour)
-    if (isReported) run.reports.push(reportSheet(sheet))
+    if (!shared) run.reports.push(reportSheet(sheet))
   }
   run.carried.push(sheet)
   return run

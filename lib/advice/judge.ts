@@ -1,10 +1,10 @@
 // The one way in: weather, rink and settings go in, scored hours, windows, a plan, the fill and thaws come out.
 import { prepareHours } from '@/lib/physics/prepare'
 import { reportSheet, type SheetState } from '@/lib/physics/sheet'
-import { bestHour, hourAgreements, otherRuns, type HourAgreement } from './agreement'
+import { addToTally, bestHour, hourAgreements, otherRuns, startTally, type HourAgreement } from './agreement'
 import { describeWindow } from './describe-window'
 import { judgeFillStart, type FillStart, type GrowthCache } from './fill-factors'
-import { fillOutlook } from './fill-outlook'
+import { fillOutlook, growthOf, type Grown } from './fill-outlook'
 import { carrySheet, type ForecastRun } from './forecast-run'
 import { round, scoreHour } from './score-hours'
 import { makeSetting, type Setting } from './setting'
@@ -13,7 +13,7 @@ import { VERDICT } from './thresholds'
 import { planTonight } from './tonight-plan'
 import { findWindows, type HourRange } from './windows'
 import { toIso } from './zoned-time'
-import type { AdviceWindow, FillOutlook, Judgement, JudgeInput, JudgeOptions, ScoredHour } from './types'
+import type { AdviceWindow, Judgement, JudgeInput, JudgeOptions, ScoredHour } from './types'
 
 /** Changes when the same input may give another judgement. */
 export const MODEL_VERSION = 'nightsheet-1'
@@ -36,13 +36,12 @@ export function judge(input: JudgeInput, options: JudgeOptions = {}): Judgement 
   const fills = fillStarts(setting, main)
   const hours = main.hours.map((_, index) => scoreHour(setting, main, index, fills[index] ?? null))
   const ranges = openRanges(setting, main, hours)
-  const runs = needsRuns(setting, ranges) ? otherRuns(setting, options, hoursNeeded(setting, ranges, main)) : []
-  const agreements = ranges.map((range) => hourAgreements(setting, runs, range, scoresOf(hours, range)))
+  const { agreements, growths, runs } = askRuns(setting, options, main, ranges, hours)
   const windows = ranges.map((range, index): AdviceWindow => {
     const ofRange = agreements[index] as HourAgreement[]
     const best = bestHour(ofRange)
     const draft = describeWindow(setting, main, hours, range, best, (at) => skinAtOf(main, fills[at]))
-    return { ...draft, agreement: round(ofRange[best]?.share ?? 1, 3), runs: runs.length }
+    return { ...draft, agreement: round(ofRange[best]?.share ?? 1, 3), runs }
   })
   const shareAt = new Map(
     ranges.flatMap(({ from }, index) =>
@@ -54,7 +53,7 @@ export function judge(input: JudgeInput, options: JudgeOptions = {}): Judgement 
     hours,
     windows,
     plan: { passes: planTonight(setting, main, hours, shareAt) },
-    fill: outlookOf(setting, main, runs, ranges, hours),
+    fill: fillOutlook(setting, main, growths, fillStartIndex(ranges, hours)),
     thaws: thawsOf(main, hours),
     ...(options.stateAt === undefined ? {} : { sheetState: sheetStateAt(main, options.stateAt) }),
   }
@@ -81,6 +80,40 @@ function openRanges(setting: Setting, run: ForecastRun, hours: readonly ScoredHo
   )
 }
 
+interface Asked {
+  /** For each range. */
+  agreements: HourAgreement[][]
+  /** How the fill freezes in the main run and in the others. */
+  growths: (Grown | null)[]
+  runs: number
+}
+
+/** Asks the other runs, where anything hangs on them. */
+function askRuns(
+  setting: Setting,
+  options: JudgeOptions,
+  main: ForecastRun,
+  ranges: readonly HourRange[],
+  hours: readonly ScoredHour[],
+): Asked {
+  const tallies = ranges.map(startTally)
+  const startIndex = fillStartIndex(ranges, hours)
+  const growths = [growthOf(setting, main, startIndex)]
+  let runs = 0
+  if (needsRuns(setting, ranges)) {
+    for (const run of otherRuns(setting, options, main, hoursNeeded(setting, ranges, main))) {
+      runs += 1
+      for (const tally of tallies) addToTally(tally, setting, run)
+      growths.push(growthOf(setting, run, startIndex))
+    }
+  }
+  return {
+    agreements: tallies.map((tally) => hourAgreements(tally, runs, scoresOf(hours, tally.range))),
+    growths,
+    runs,
+  }
+}
+
 function needsRuns(setting: Setting, ranges: readonly HourRange[]): boolean {
   return ranges.length > 0 || setting.input.rink.phase === 'freezing'
 }
@@ -96,17 +129,12 @@ function skinAtOf(run: ForecastRun, fill: FillStart | null | undefined): string 
   return index == null ? null : toIso((run.hours[0]?.startsAtMillis ?? 0) + index * HOUR_MILLIS)
 }
 
-function outlookOf(
-  setting: Setting,
-  main: ForecastRun,
-  runs: ForecastRun[],
-  ranges: readonly HourRange[],
-  hours: readonly ScoredHour[],
-): FillOutlook {
+/** The best hour of the first fill window. */
+function fillStartIndex(ranges: readonly HourRange[], hours: readonly ScoredHour[]): number | null {
   const range = ranges.find((one) => one.kind === 'fill')
-  const inRange = range ? scoresOf(hours, range) : []
-  const startIndex = range ? range.from + inRange.indexOf(Math.max(...inRange)) : null
-  return fillOutlook(setting, runs.length > 0 ? [main, ...runs] : [main], startIndex)
+  if (!range) return null
+  const inRange = scoresOf(hours, range)
+  return range.from + inRange.indexOf(Math.max(...inRange))
 }
 
 function thawsOf(run: ForecastRun, hours: readonly ScoredHour[]) {

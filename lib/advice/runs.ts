@@ -46,6 +46,13 @@ export function perturbRun(hours: readonly HourlyRecord[], nowMillis: number, se
   })
 }
 
+/** Index of the first hour that perturbation touches; the number of hours when it touches none. */
+export function firstPerturbed(hours: readonly HourlyRecord[], nowMillis: number): number {
+  const first = hours[0]
+  if (!first) return 0
+  return Math.min(hours.length, Math.max(0, Math.ceil((nowMillis - Date.parse(first.time)) / HOUR_MILLIS)))
+}
+
 type Wet = Pick<HourlyRecord, 'precipitationMm' | 'rainMm' | 'snowfallCm'>
 
 interface HourError {

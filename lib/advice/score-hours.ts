@@ -1,7 +1,8 @@
 // Every hour of a run with its scores, verdict and reasons, as the hour in which the keeper would start.
+import { wetSurfaceBalance } from '@/lib/physics/balance'
 import { dewPointC } from '@/lib/physics/humidity'
 import type { PreparedHour } from '@/lib/physics/types'
-import { judgeFloodStart, type FloodStart } from './flood-factors'
+import { judgeFloodStart, setsAtOf } from './flood-factors'
 import { floodReasons } from './flood-reasons'
 import type { FillStart } from './fill-factors'
 import type { ForecastRun } from './forecast-run'
@@ -41,7 +42,10 @@ export function scoreHour(setting: Setting, run: ForecastRun, index: number, fil
   const isAvailable = isHourAvailable(setting, hour.startsAtMillis)
   if (!hour.isKnown) return unknownHour(hour, sheet, isAvailable)
   const flood = judgeFloodStart(setting, run, index)
-  const reasons = fill ? fill.reasons : [...floodReasons(flood, setting, run, index), ...snowRuleReasons(run, index)]
+  const { parts } = wetSurfaceBalance(hour)
+  const reasons = fill
+    ? fill.reasons
+    : [...floodReasons(flood, parts, setting, run, index), ...snowRuleReasons(run, index)]
   const floodScore = scoreOf(flood)
   const fillScore = fill ? scoreOf(fill) : 0
   const best = Math.max(floodScore, fillScore)
@@ -51,11 +55,11 @@ export function scoreHour(setting: Setting, run: ForecastRun, index: number, fil
     isKnown: true,
     netHeatLossWm2: round(flood.netWm2, 1),
     parts: {
-      longwave: round(flood.parts.longwave, 1),
-      sensible: round(flood.parts.sensible, 1),
-      latent: round(flood.parts.latent, 1),
-      shortwave: round(flood.parts.shortwave, 1),
-      precipitation: round(flood.parts.precipitation, 1),
+      longwave: round(parts.longwave, 1),
+      sensible: round(parts.sensible, 1),
+      latent: round(parts.latent, 1),
+      shortwave: round(parts.shortwave, 1),
+      precipitation: round(parts.precipitation, 1),
     },
     freezeRateMmPerH: round(flood.rateMmPerH, 3),
     windChillC: round(flood.windChillC, 1),
@@ -87,11 +91,6 @@ function unknownHour(hour: PreparedHour, sheet: SheetReport, isAvailable: boolea
     weather: null,
     isAvailable,
   }
-}
-
-/** Set times are told to the minute, and never too early. */
-export function setsAtOf({ startMillis, setMinutes }: Pick<FloodStart, 'startMillis' | 'setMinutes'>): string | null {
-  return setMinutes === null ? null : toIso(Math.ceil(startMillis / MINUTE_MILLIS + setMinutes) * MINUTE_MILLIS)
 }
 
 function weatherOf(hour: PreparedHour): HourWeather {
@@ -127,8 +126,10 @@ function roundReasons(reasons: Reason[]): Reason[] {
   return reasons
 }
 
+const POWERS = [1, 10, 100, 1000] as const
+
 /** Rounded for reading, and never -0. */
-export function round(value: number, digits: number): number {
-  const power = 10 ** digits
+export function round(value: number, digits: 0 | 1 | 2 | 3): number {
+  const power = POWERS[digits]
   return Math.round(value * power) / power + 0
 }

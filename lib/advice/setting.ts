@@ -1,13 +1,14 @@
 // What all parts of one judgement share: the rink's clock, its site, its layer, when the keeper can go out.
 import { RINK_WIND_RATIO, shelterFactor } from '@/lib/physics/site'
 import { NEEDED } from './thresholds'
-import { addDays, instantOfLocal, localDateOf, zoneOffsetsMinutes } from './zoned-time'
+import { addDays, instantOfLocal, localDateOf, steadyOffsetMinutes, zoneOffsetsMinutes } from './zoned-time'
 import type { Site } from '@/lib/physics/types'
 import type { JudgeInput } from './types'
 
 const HOUR_MILLIS = 3_600_000
 const MINUTE_MILLIS = 60_000
 const MINUTES_A_DAY = 1440
+const DAY_MILLIS = 24 * HOUR_MILLIS
 
 export interface Setting {
   input: JudgeInput
@@ -50,12 +51,25 @@ export function makeSetting(input: JudgeInput): Setting {
 function readyInstants(firstMillis: number, hourCount: number, timeZone: string): number[] {
   const instants: number[] = []
   const endMillis = firstMillis + (hourCount + 48) * HOUR_MILLIS
+  const steady = steadyOffsetMinutes(firstMillis - DAY_MILLIS, endMillis + DAY_MILLIS, timeZone)
+  if (steady !== null) return readyWithoutChange(firstMillis, endMillis, steady)
   let date = localDateOf(firstMillis, timeZone)
   for (let millis = 0; millis < endMillis; date = addDays(date, 1)) {
     millis = instantOfLocal(date, NEEDED.readyByMinuteOfDay, timeZone)
     instants.push(millis)
   }
   return instants
+}
+
+/** The same where no clock changes: a day apart. */
+function readyWithoutChange(firstMillis: number, endMillis: number, offsetMinutes: number): number[] {
+  const offsetMillis = offsetMinutes * MINUTE_MILLIS
+  const midnight = Math.floor((firstMillis + offsetMillis) / DAY_MILLIS) * DAY_MILLIS - offsetMillis
+  const instants: number[] = []
+  for (let at = midnight + NEEDED.readyByMinuteOfDay * MINUTE_MILLIS; ; at += DAY_MILLIS) {
+    instants.push(at)
+    if (at >= endMillis) return instants
+  }
 }
 
 /** "HH:MM" to "HH:MM" as ranges of minutes; past midnight it is two, and equal ends mean the whole day. */

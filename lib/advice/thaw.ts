@@ -36,20 +36,29 @@ export function findThaws(hours: readonly ThawHour[], startThicknessMm: number):
 }
 
 function thawWithin(hours: readonly ThawHour[], from: number, to: number, startThicknessMm: number): Thaw | null {
-  const before = (index: number) => (index === 0 ? startThicknessMm : (hours[index - 1] as ThawHour).thicknessMm)
-  const isLosing = (index: number) => before(index) - (hours[index] as ThawHour).thicknessMm > THAW.losingMmPerH
+  // No spell this short is a thaw, and most stretches are.
+  if (to - from < THAW.leastHours) return null
   let first = from
-  while (first < to && !isLosing(first)) first += 1
+  while (first < to && lossMm(hours, first, startThicknessMm) <= THAW.losingMmPerH) first += 1
   let last = to - 1
-  while (last >= first && !isLosing(last)) last -= 1
+  while (last >= first && lossMm(hours, last, startThicknessMm) <= THAW.losingMmPerH) last -= 1
   if (last < first || last + 1 - first < THAW.leastHours) return null
-  let leastMm = before(first)
+  const beforeMm = thicknessBefore(hours, first, startThicknessMm)
+  let leastMm = beforeMm
   for (let index = first; index <= last; index += 1) leastMm = Math.min(leastMm, (hours[index] as ThawHour).thicknessMm)
-  const lossMm = before(first) - leastMm
-  if (lossMm < THAW.leastLossMm) return null
+  const lostMm = beforeMm - leastMm
+  if (lostMm < THAW.leastLossMm) return null
   return {
     startsAt: toIso((hours[first] as ThawHour).startMillis),
     endsAt: toIso((hours[last] as ThawHour).startMillis + HOUR_MILLIS),
-    lossMm: Math.round(lossMm * 10) / 10,
+    lossMm: Math.round(lostMm * 10) / 10,
   }
+}
+
+function thicknessBefore(hours: readonly ThawHour[], index: number, startThicknessMm: number): number {
+  return index === 0 ? startThicknessMm : (hours[index - 1] as ThawHour).thicknessMm
+}
+
+function lossMm(hours: readonly ThawHour[], index: number, startThicknessMm: number): number {
+  return thicknessBefore(hours, index, startThicknessMm) - (hours[index] as ThawHour).thicknessMm
 }

@@ -28,9 +28,15 @@ export function zoneOffsetMinutes(atMillis: number, timeZone: string): number {
   return (found[1] === '-' ? -1 : 1) * (Number(found[2]) * 60 + Number(found[3]))
 }
 
+/** The offset of a whole stretch when it begins and ends with the same and is too short to change and change back; else null. [min] */
+export function steadyOffsetMinutes(fromMillis: number, toMillis: number, timeZone: string): number | null {
+  const atFirst = zoneOffsetMinutes(fromMillis, timeZone)
+  const isShort = toMillis - fromMillis < 25 * DAY
+  return isShort && atFirst === zoneOffsetMinutes(toMillis, timeZone) ? atFirst : null
+}
+
 /**
- * Offsets of many ascending instants, cheaply: when the first and the last agree and lie less than a month apart, no
- * zone changes and changes back between them, so all agree.
+ * Offsets of many ascending instants, cheaply where no clock changes between them.
  *
  * @returns Offsets, positive east, one for each instant. [min]
  */
@@ -38,9 +44,8 @@ export function zoneOffsetsMinutes(atMillis: readonly number[], timeZone: string
   const first = atMillis[0]
   const last = atMillis[atMillis.length - 1]
   if (first === undefined || last === undefined) return []
-  const atFirst = zoneOffsetMinutes(first, timeZone)
-  const isSteady = last - first < 25 * DAY && atFirst === zoneOffsetMinutes(last, timeZone)
-  return atMillis.map((millis) => (isSteady ? atFirst : zoneOffsetMinutes(millis, timeZone)))
+  const steady = steadyOffsetMinutes(first, last, timeZone)
+  return atMillis.map((millis) => steady ?? zoneOffsetMinutes(millis, timeZone))
 }
 
 /** Local calendar date of an instant, 'yyyy-MM-dd'. */

@@ -42,16 +42,20 @@ export function settledDepthCm(depthCm: number, massKgM2: number): number {
   return depthCm <= floorCm ? depthCm : floorCm + (depthCm - floorCm) * Math.exp(-1 / SETTLING_HOURS)
 }
 
+/** Depth of new snow from its water. [cm] */
+function newSnowDepthCm(snowMm: number, airTemperatureC: number): number {
+  return snowMm > 0 ? (snowMm * 100) / newSnowDensity(airTemperatureC) : 0
+}
+
 /** Splits what falls into rain and snow where the record does not. */
 export function precipitationPhase(
   record: HourlyRecord,
   airTemperatureC: number,
   precipitationMm: number,
 ): { rainMm: number; snowfallCm: number } {
-  const depthCm = (snowMm: number) => (snowMm > 0 ? (snowMm * 100) / newSnowDensity(airTemperatureC) : 0)
   if (isNumber(record.rainMm)) {
     const rainMm = Math.min(inRange('rainMm [mm]', record.rainMm, 0, 200), precipitationMm)
-    const snowfallCm = record.snowfallCm ?? depthCm(precipitationMm - rainMm)
+    const snowfallCm = record.snowfallCm ?? newSnowDepthCm(precipitationMm - rainMm, airTemperatureC)
     return { rainMm, snowfallCm: inRange('snowfallCm [cm]', snowfallCm, 0, 100) }
   }
   if (isNumber(record.snowfallCm)) {
@@ -64,5 +68,5 @@ export function precipitationPhase(
   }
   return airTemperatureC > RAIN_ABOVE_C
     ? { rainMm: precipitationMm, snowfallCm: 0 }
-    : { rainMm: 0, snowfallCm: depthCm(precipitationMm) }
+    : { rainMm: 0, snowfallCm: newSnowDepthCm(precipitationMm, airTemperatureC) }
 }

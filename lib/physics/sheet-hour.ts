@@ -20,8 +20,8 @@ export interface HourResult {
   receivedJM2: number
 }
 
-/** Carries a sheet through a known hour and accounts for every joule. */
-export function runHour(before: SheetState, hour: PreparedHour): HourResult {
+/** Carries a sheet through a known hour, or through a share of one, and accounts for every joule. */
+export function runHour(before: SheetState, hour: PreparedHour, share = 1): HourResult {
   // Written out: a spread costs more than the physics of a quiet hour.
   const state: SheetState = {
     base: before.base,
@@ -33,13 +33,22 @@ export function runHour(before: SheetState, hour: PreparedHour): HourResult {
     belowTemperatureC: before.belowTemperatureC,
     surfaceTemperatureC: before.surfaceTemperatureC,
   }
-  let receivedJM2 = setMeasuredSnow(state, hour) + fallOnSheet(state, hour)
+  let receivedJM2 = setMeasuredSnow(state, hour) + fallOnSheet(state, share === 1 ? hour : fallsIn(hour, share))
   sinkSnow(state)
   const steps = stepsPerHour(state)
-  for (let i = 0; i < steps; i++) receivedJM2 += advance(state, hour, HOUR_SECONDS / steps)
+  for (let i = 0; i < steps; i++) receivedJM2 += advance(state, hour, (share * HOUR_SECONDS) / steps)
   tidyCells(state)
   state.snowDepthCm = settledDepthCm(state.snowDepthCm, state.snowKgM2)
   return { state, receivedJM2 }
+}
+
+function fallsIn(hour: PreparedHour, share: number): PreparedHour {
+  return {
+    ...hour,
+    precipitationMm: hour.precipitationMm * share,
+    rainMm: hour.rainMm * share,
+    snowfallCm: hour.snowfallCm * share,
+  }
 }
 
 function advance(state: SheetState, hour: PreparedHour, seconds: number): number {

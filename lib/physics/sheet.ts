@@ -79,6 +79,20 @@ export function advanceSheet(state: SheetState, hour: PreparedHour): SheetState 
 }
 
 /**
+ * Carries a sheet through part of an hour of weather, to the minute at which something is poured on it.
+ *
+ * @param state Sheet at the start of the part.
+ * @param hour Prepared hour; an unknown one leaves the sheet as it is.
+ * @param share Of the hour, 0 to 1; 0 leaves the sheet as it is.
+ * @returns Sheet at the end of the part; the state given is not changed.
+ * @throws RangeError for a share out of range.
+ */
+export function advanceSheetPart(state: SheetState, hour: PreparedHour, share: number): SheetState {
+  inRange('share [0-1]', share, 0, 1)
+  return hour.isKnown && share > 0 ? runHour(state, hour, share).state : state
+}
+
+/**
  * Pours a layer. Snow still lying is soaked and becomes part of it.
  *
  * @param state Sheet before.

@@ -1,6 +1,14 @@
 // The sheet: energy and mass are kept, a stored sheet goes on where it stopped, and thaw and frost do what they must.
 import { describe, expect, test } from 'vitest'
-import { advanceSheet, clearSnow, createSheet, pourLayer, reportSheet, sheetEnthalpyJM2 } from '@/lib/physics/sheet'
+import {
+  advanceSheet,
+  advanceSheetPart,
+  clearSnow,
+  createSheet,
+  pourLayer,
+  reportSheet,
+  sheetEnthalpyJM2,
+} from '@/lib/physics/sheet'
 import { FUSION_J_PER_KG } from '@/lib/physics/constants'
 import { prepareHours } from '@/lib/physics/prepare'
 import { runHour } from '@/lib/physics/sheet-hour'
@@ -60,6 +68,17 @@ describe('resuming', () => {
     const half = hours.slice(0, 48).reduce(advanceSheet, randomSheet(seed + 100))
     const stored = JSON.parse(JSON.stringify(half)) as SheetState
     expect(hours.slice(48).reduce(advanceSheet, stored)).toEqual(whole)
+  })
+
+  test('a wet hour in two parts freezes what it freezes in one, to a hundredth of a millimetre', () => {
+    const hour = { ...steadyHour({ airTemperatureC: -8 }) }
+    const bare = createSheet({ thicknessMm: 80, temperatureC: -4, snowCoverCm: 0, base: 'liner' })
+    const wet = pourLayer(bare, { layerMm: 3, temperatureC: 6 })
+    const whole = reportSheet(advanceSheet(wet, hour))
+    const parts = reportSheet(advanceSheetPart(advanceSheetPart(wet, hour, 0.4), hour, 0.6))
+    expect(Math.abs(parts.liquidMm - whole.liquidMm)).toBeLessThan(0.01)
+    expect(Math.abs(parts.temperatureC - whole.temperatureC)).toBeLessThan(0.05)
+    expect(advanceSheetPart(wet, hour, 0)).toBe(wet)
   })
 
   test('an unknown hour leaves the sheet as it is', () => {

@@ -9,6 +9,7 @@ import { deliverMessageJob } from './handlers/deliver-message'
 import { pruneJob } from './handlers/prune'
 import { pullForecastJob } from './handlers/pull-forecast'
 import { refreshOutlookJob } from './handlers/refresh-outlook'
+import { settleNightJob } from './handlers/settle-night'
 import { sweepJob } from './handlers/sweep'
 import type { WorkerParts } from './parts'
 
@@ -27,6 +28,7 @@ export const definitions: Definitions = {
   'refresh-outlook': { schema: z.object({ rinkId: id }), run: refreshOutlookJob },
   'decide-alerts': { schema: z.object({ rinkId: id }), run: decideAlertsJob },
   'deliver-message': { schema: z.object({ messageId: id }), run: deliverMessageJob },
+  'settle-night': { schema: z.object({ rinkId: id, nightDate: z.iso.date() }), run: settleNightJob },
   prune: { schema: z.object({ slotAt: z.iso.datetime() }), run: pruneJob },
 }
 

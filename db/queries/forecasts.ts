@@ -66,6 +66,19 @@ export async function findNewestForecast(db: Db, cellId: string): Promise<Stored
     .first<StoredForecast | undefined>({ ...HEAD, hours: 'hours', members: 'members' })
 }
 
+/** The first forecast that was read at or after an instant. */
+export async function findOldestForecastSince(
+  db: Db,
+  cellId: string,
+  since: Date,
+): Promise<Pick<StoredForecast, 'id' | 'hours'> | undefined> {
+  return db('forecasts')
+    .where({ grid_cell_id: cellId })
+    .where('slot_at', '>=', since)
+    .orderBy('slot_at')
+    .first<Pick<StoredForecast, 'id' | 'hours'> | undefined>({ id: 'id', hours: 'hours' })
+}
+
 /** Where a forecast came from and how old it is, without its hours. */
 export async function findForecastHead(
   db: Db,

@@ -8,6 +8,7 @@ export interface JobPayloads {
   'refresh-outlook': { rinkId: string }
   'decide-alerts': { rinkId: string }
   'deliver-message': { messageId: string }
+  'settle-night': { rinkId: string; nightDate: string }
   prune: { slotAt: string }
 }
 
@@ -45,4 +46,9 @@ export async function enqueueRefresh(db: Db, rinkId: string): Promise<void> {
 /** A look, soon, at whether there is something to tell about a rink's night. */
 export async function enqueueDecision(db: Db, rinkId: string): Promise<void> {
   await enqueueJob(db, 'decide-alerts', { rinkId }, { key: `decide:${rinkId}:now` })
+}
+
+/** A night that is over, to be held against what came. */
+export async function enqueueSettling(db: Db, rinkId: string, nightDate: string): Promise<void> {
+  await enqueueJob(db, 'settle-night', { rinkId, nightDate }, { key: `settle:${rinkId}:${nightDate}` })
 }

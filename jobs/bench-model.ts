@@ -1,4 +1,7 @@
-// `npm run bench`: how long the model takes to score a week, one forecast run and thirty-one, and the plain column beside it.
+// `npm run bench`: how long a week takes to be judged, with one forecast run and with many, and the plain column beside it.
+import { judge } from '@/lib/advice/judge'
+import { AGREEMENT } from '@/lib/advice/thresholds'
+import type { JudgeInput } from '@/lib/advice/types'
 import { advanceSheet, createSheet, type SheetState } from '@/lib/physics/sheet'
 import { explicitMinutesToSet } from '@/tests/support/explicit-column'
 import { minutesToSet } from '@/lib/physics/layer'
@@ -31,6 +34,31 @@ function weekOfWeather(run: number): HourlyRecord[] {
       pressureHpa: 1010,
     }
   })
+}
+
+/** A rink that is looked after every evening, at the start of the week. */
+function inputOf(hours: HourlyRecord[], runs?: HourlyRecord[][]): JudgeInput {
+  const { latitudeDeg, longitudeDeg, skyView } = SITE
+  return {
+    now: '2027-01-12T21:42:00Z',
+    rink: {
+      latitude: latitudeDeg,
+      longitude: longitudeDeg,
+      timeZone: 'America/Toronto',
+      lengthM: 10,
+      widthM: 10,
+      shelter: 'suburban',
+      skyView,
+      base: 'liner',
+      phase: 'skating',
+    },
+    water: { ...LAYER, flowLPerMin: 25, fillDepthMm: 120 },
+    sheet: SHEET,
+    available: [{ from: '17:00', to: '01:00' }],
+    maxPasses: 3,
+    hours,
+    ...(runs ? { members: runs } : {}),
+  }
 }
 
 /** Everything the physics does for a score of one run: balance, wind chill, sheet, and the set time of a layer at each hour. */
@@ -79,13 +107,18 @@ function timed(rounds: number, run: () => void): { medianMs: number; cpuMs: numb
 const week = weekOfWeather(0)
 const members = Array.from({ length: MEMBERS }, (_, run) => weekOfWeather(run))
 timed(100, () => scoreRun(week))
-const oneRun = timed(200, () => scoreRun(week))
-const allMembers = timed(20, () => members.forEach(scoreRun))
+timed(200, () => judge(inputOf(week), { runs: 0 }))
+const oneRun = timed(300, () => judge(inputOf(week), { runs: 0 }))
+const allMembers = timed(30, () => judge(inputOf(week, members)))
+const perturbed = timed(30, () => judge(inputOf(week)))
+const physics = timed(200, () => scoreRun(week))
 const { states, hours } = scoreRun(week)
 const explicitMs = explicitMillis(states, hours, 6)
 const rows = [
-  { what: 'physics of 168 hours, one run', ...oneRun, barMs: 3 },
-  { what: `physics of 168 hours, ${MEMBERS} members`, ...allMembers, barMs: 60 },
+  { what: 'judge() of 168 hours, one run', ...oneRun, barMs: 3 },
+  { what: `judge() of 168 hours, ${MEMBERS} members`, ...allMembers, barMs: 60 },
+  { what: `judge() of 168 hours, ${AGREEMENT.defaultRuns} perturbed runs`, ...perturbed, barMs: null },
+  { what: 'physics alone of 168 hours, one run', ...physics, barMs: null },
   { what: 'set times alone by the 1 mm explicit column', medianMs: explicitMs, cpuMs: null, barMs: null },
 ]
 const timesFaster = explicitMs / oneRun.medianMs

@@ -5,10 +5,11 @@ import type { PreparedHour } from '@/lib/physics/types'
 import { windChillC } from '@/lib/physics/wind-chill'
 import { overallDesirability, rampDesirability } from './desirability'
 import { fillReasons } from './fill-reasons'
-import { fillSession, type FillSession } from './fill-session'
+import { fillSession, hoseAndHands, type FillSession } from './fill-session'
+import { deepestFillMm } from './fill-water'
 import type { ForecastRun } from './forecast-run'
 import type { Setting } from './setting'
-import { FILL, PERSON } from './thresholds'
+import { FILL } from './thresholds'
 import type { Reason } from './types'
 
 export interface FillFactors {
@@ -50,8 +51,7 @@ export function judgeFillStart(setting: Setting, run: ForecastRun, index: number
   const hour = run.hours[index] as PreparedHour
   const lowestAirC = outcome?.lowestAirC ?? hour.airTemperatureC
   const lowestWindChillC = outcome?.lowestWindChillC ?? windChillC(hour.airTemperatureC, hour.windSpeedMps)
-  const hose = rampDesirability(lowestAirC, PERSON.fillHoseC)
-  const hands = rampDesirability(lowestWindChillC, PERSON.fillWindChillC)
+  const { hose, hands } = hoseAndHands(lowestAirC, lowestWindChillC)
   const limits = { hose, hands, lowestAirC, lowestWindChillC }
   return {
     ice: outcome?.hasGap ? 0 : overallDesirability(factors, FILL.weights),
@@ -98,9 +98,9 @@ function growthStart(run: ForecastRun, doneIndex: number): number {
 function growthFrom(setting: Setting, run: ForecastRun, doneIndex: number, cache: GrowthCache): FillGrowth {
   const known = cache.get(doneIndex)
   if (known) return known
-  const { fillDepthMm, temperatureC } = setting.input.water
+  const { temperatureC } = setting.input.water
   const fill = {
-    depthMm: Math.max(1, fillDepthMm),
+    depthMm: Math.max(1, deepestFillMm(setting)),
     waterTemperatureC: Math.min(40, temperatureC),
     base: setting.input.rink.base,
   }
@@ -113,7 +113,7 @@ function growthFrom(setting: Setting, run: ForecastRun, doneIndex: number, cache
 function factorsOf(setting: Setting, outcome: FillOutcome): FillFactors {
   const share = outcome.lookAheadHours / FILL.coldLookAheadHours
   // A shallow fill that froze through has all the ice it can have.
-  const mostMm = Math.min(FILL.iceAfterMm.one, setting.input.water.fillDepthMm)
+  const mostMm = Math.min(FILL.iceAfterMm.one, deepestFillMm(setting))
   const wanted = { one: mostMm * share, zero: Math.min(FILL.iceAfterMm.zero, mostMm / 2) * share }
   return {
     cold: outcome.lookAheadHours < FILL.leastLookAheadHours ? 0 : rampDesirability(outcome.iceAfterMm, wanted),

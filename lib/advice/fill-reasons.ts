@@ -1,5 +1,5 @@
 // Names for the factors of a fill.
-import { hosePlanOf } from './fill-session'
+import { hosePlanOf } from './fill-water'
 import { FILL } from './thresholds'
 import type { FillFactors, FillOutcome } from './fill-factors'
 import type { Setting } from './setting'

@@ -88,6 +88,8 @@ export const FILL = {
   iceAfterMm: { one: 50, zero: 10 } satisfies Ramp,
   /** Over how long, and the least that must be forecast to tell. Ours. [h] */
   coldLookAheadHours: 72,
+  /** A fill split over more than this is not one fill: what is in freezes to the floor between the sessions. Ours. [h] */
+  longestHours: 72,
   leastLookAheadHours: 24,
   /** Fills done within so many hours are taken to freeze alike. Ours. [h] */
   lookEveryHours: 3,

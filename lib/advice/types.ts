@@ -1,4 +1,5 @@
 // What the advice takes and gives: the shapes behind `npm run score`, the outlook job and the Tonight page.
+import type { FloorShape } from '@/lib/physics/floor'
 import type { HeatBalanceParts, HourlyRecord } from '@/lib/physics/types'
 
 export type Phase = 'planning' | 'waiting' | 'filling' | 'freezing' | 'skating' | 'thaw' | 'closed'
@@ -25,8 +26,13 @@ export interface JudgeInput {
     skyView: number
     base: Base
     phase: Phase
+    /** Below any level line; level ground when absent. The fill's depth is then its mean, and the deepest place freezes last. */
+    floor?: FloorShape | null
   }
-  water: { temperatureC: number; flowLPerMin: number; layerMm: number; fillDepthMm: number }
+  /** `filledLitres` is what of the fill is in already. */
+  water: { temperatureC: number; flowLPerMin: number; layerMm: number; fillDepthMm: number; filledLitres?: number }
+  /** Ice at which the keeper lets people on. [mm] Default 100. */
+  carriesSkaterMm?: number
   /** The sheet at `asOf` (default: at the first hour). */
   sheet: {
     thicknessMm: number
@@ -127,12 +133,47 @@ export interface PlannedPass {
   hoseMinutes: number
 }
 
+/** When something happens over the forecast runs: by p10 in one run of ten, by p90 in nine; null when not within the forecast. */
+export interface Spread {
+  p10: string | null
+  p50: string | null
+  p90: string | null
+}
+
+/** One time of running hose. */
+export interface FillSpan {
+  startsAt: string
+  endsAt: string
+  litres: number
+}
+
+/** The water at the end of an hour of hose, or of the part of it in which the hose runs. */
+export interface FillHour {
+  at: string
+  litresSoFar: number
+  /** Water surface below the line that the floor was measured from. [m] */
+  levelM: number
+  /** 0-1 */
+  wettedShare: number
+  /** Water at the corners, in the order of the floor; 0 is dry. [m] */
+  cornerDepthsM: [number, number, number, number]
+}
+
 export interface FillOutlook {
   startsAt: string | null
+  /** Of what is still to pour, as `litres` is. */
   hoseHours: number
   litres: number
+  /** In the forecast itself. */
   skinAt: string | null
-  carriesSkaterAt: { p10: string | null; p50: string | null; p90: string | null }
+  carriesSkaterAt: Spread
+  /** From here on absent in judgements kept from before there were any. */
+  skinAtSpread?: Spread
+  /** No water left over the deepest place. */
+  frozenThroughAt?: Spread
+  /** When the hose runs, in the forecast itself. */
+  sessions?: FillSpan[]
+  hours?: FillHour[]
 }
 
 export interface Thaw {

@@ -106,6 +106,22 @@ const shelterSchema = z.union([z.enum(['open', 'suburban', 'tight']), z.number()
   error: 'expected open, suburban, tight or a number from 0 to 1',
 })
 
+const cornerSchema = between(-5, 5, 'm below a level line')
+
+const floorSchema = z.union(
+  [
+    z.object({ cornersM: z.tuple([cornerSchema, cornerSchema, cornerSchema, cornerSchema]) }),
+    z.object({ depthsM: z.array(z.array(cornerSchema).min(2).max(50)).min(2).max(50).refine(isGrid) }),
+  ],
+  {
+    error: 'expected four cornersM going round, or depthsM with rows alike of 2 to 50 points, in m below a level line',
+  },
+)
+
+function isGrid(rows: readonly (readonly number[])[]): boolean {
+  return rows.every((row) => row.length === rows[0]?.length)
+}
+
 const rinkSchema = z.object({
   latitude: between(-90, 90, '°'),
   longitude: between(-180, 180, '°'),
@@ -116,6 +132,7 @@ const rinkSchema = z.object({
   skyView: between(0, 1),
   base: z.enum(['liner', 'ground', 'snow']),
   phase: z.enum(['planning', 'waiting', 'filling', 'freezing', 'skating', 'thaw', 'closed']),
+  floor: floorSchema.nullish(),
 })
 
 const waterSchema = z.object({
@@ -123,6 +140,7 @@ const waterSchema = z.object({
   flowLPerMin: between(0.5, 400, 'L/min'),
   layerMm: between(0.2, 100, 'mm'),
   fillDepthMm: between(0, 200_000, 'mm'),
+  filledLitres: between(0, 1e8, 'L').optional(),
 })
 
 const sheetSchema = z.object({
@@ -145,6 +163,7 @@ export const scoreInputSchema = z
     rink: rinkSchema,
     water: waterSchema,
     sheet: sheetSchema,
+    carriesSkaterMm: between(10, 1000, 'mm').optional(),
     available: z.array(z.object({ from: clockSchema, to: clockSchema })).max(20),
     maxPasses: z.int().min(0).max(12),
     hours: hoursSchema,

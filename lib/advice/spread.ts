@@ -1,0 +1,27 @@
+// Quantiles over forecast runs.
+import { toIso } from './zoned-time'
+import type { Spread } from './types'
+
+const MINUTE_MILLIS = 60_000
+
+/**
+ * Nearest-rank quantile.
+ *
+ * @param ascending Values of all runs, at least one.
+ * @param share 0-1
+ */
+export function quantile(ascending: readonly number[], share: number): number {
+  return ascending[Math.max(0, Math.ceil(ascending.length * share) - 1)] as number
+}
+
+/** When something happens over the runs; a run in which it does not within the forecast has Infinity. */
+export function spreadOf(millis: readonly number[]): Spread {
+  const ascending = [...millis].sort((a, b) => a - b)
+  const at = (share: number) => (ascending.length > 0 ? isoOrNull(quantile(ascending, share)) : null)
+  return { p10: at(0.1), p50: at(0.5), p90: at(0.9) }
+}
+
+/** An instant told to the minute and never too early; null for Infinity. */
+export function isoOrNull(millis: number): string | null {
+  return Number.isFinite(millis) ? toIso(Math.ceil(millis / MINUTE_MILLIS) * MINUTE_MILLIS) : null
+}

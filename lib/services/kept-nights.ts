@@ -1,0 +1,36 @@
+// The open record: what was said of each night of a season, and what came of it.
+import { listNightOutcomes, type NightOutcome } from '@/db/queries/night-outcomes'
+import { getRinkHead } from '@/db/queries/rinks'
+import { findAccount } from '@/db/queries/users'
+import { requireRink } from '@/lib/access/require-rink'
+import { keptRates, type KeptRates } from '@/lib/advice/kept-rates'
+import { nightDateOf } from '@/lib/advice/night'
+import { seasonOf, seasonOfYear, type Season } from '@/lib/advice/season'
+import type { ServiceContext } from '@/lib/context'
+import { NotFoundError } from '@/lib/errors'
+import type { WordOptions } from '@/lib/words/options'
+
+export interface KeptView {
+  rink: { id: string; name: string; timeZone: string }
+  reader: WordOptions
+  season: Season
+  rates: KeptRates
+  nights: NightOutcome[]
+}
+
+/** @param year The season that begins in that year; the present one by default. */
+export async function getKeptNights(context: ServiceContext, rinkId: string, year?: number): Promise<KeptView> {
+  const access = await requireRink(context, rinkId, 'view')
+  const { db, now, viewer } = context
+  const [rink, account] = await Promise.all([getRinkHead(db, access), findAccount(db, viewer.userId)])
+  if (!account) throw new NotFoundError('Account')
+  const season = year === undefined ? seasonOf(nightDateOf(now, rink.timeZone)) : seasonOfYear(year)
+  const nights = await listNightOutcomes(db, access, season)
+  return {
+    rink: { id: rinkId, ...rink },
+    reader: { units: account.units, clock: account.clock, timeZone: rink.timeZone, locale: 'en' },
+    season,
+    rates: keptRates(nights),
+    nights,
+  }
+}

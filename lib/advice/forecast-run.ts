@@ -2,6 +2,7 @@
 import { advanceSheet, createSheet, pourLayer, reportSheet, type SheetState } from '@/lib/physics/sheet'
 import { minutesToSet, type Layer } from '@/lib/physics/layer'
 import type { PreparedHour } from '@/lib/physics/types'
+import { deepestFillMm } from './fill-water'
 import { readStoredSheet } from './stored-sheet'
 import type { Setting } from './setting'
 import type { SheetReport } from './types'
@@ -90,17 +91,18 @@ function noteWhenSet(run: ForecastRun, sheet: SheetState, index: number, poured:
   run.pouredSetMillis = minutes === null ? endMillis : atMillis + minutes * 60_000
 }
 
-function startingSheet({ input }: Setting): SheetState {
+function startingSheet(setting: Setting): SheetState {
+  const { input } = setting
   if (input.sheet.state !== undefined) return readStoredSheet(input.sheet.state)
   const { thicknessMm, temperatureC, snowCoverCm, liquidMm = 0 } = input.sheet
-  const { fillDepthMm, temperatureC: waterTemperatureC } = input.water
+  const { temperatureC: waterTemperatureC } = input.water
   const isFloating = input.rink.phase === 'freezing'
   return createSheet({
     thicknessMm,
     temperatureC,
     snowCoverCm,
     liquidMm,
-    unfrozenBelowMm: isFloating ? Math.max(0, fillDepthMm - thicknessMm * ICE_TO_WATER) : 0,
+    unfrozenBelowMm: isFloating ? Math.max(0, deepestFillMm(setting) - thicknessMm * ICE_TO_WATER) : 0,
     waterTemperatureC: Math.min(40, waterTemperatureC),
     base: input.rink.base,
   })

@@ -37,7 +37,14 @@ export function makeSetting(input: JudgeInput): Setting {
   if (firstMillis === undefined) throw new RangeError('hours must not be empty')
   return {
     input,
-    site: { latitudeDeg: rink.latitude, longitudeDeg: rink.longitude, shelter, skyView: rink.skyView },
+    site: {
+      latitudeDeg: rink.latitude,
+      longitudeDeg: rink.longitude,
+      shelter,
+      skyView: rink.skyView,
+      ...(rink.horizonDeg === undefined ? {} : { horizonDeg: rink.horizonDeg }),
+      ...(rink.shade === undefined ? {} : { shade: rink.shade }),
+    },
     gustFactor: RINK_WIND_RATIO * shelter,
     layer: { layerMm: water.layerMm, temperatureC: water.temperatureC },
     nowMillis,

@@ -24,6 +24,10 @@ export interface JudgeInput {
     shelter: ShelterName | number
     /** 0-1 */
     skyView: number
+    /** Height of the skyline: one all round, or eight from north clockwise. [°] None when absent. */
+    horizonDeg?: number | number[]
+    /** Share of direct sunshine that trees or a cloth keep off, 0-1. None when absent. */
+    shade?: number
     base: Base
     phase: Phase
     /** Below any level line; level ground when absent. The fill's depth is then its mean, and the deepest place freezes last. */

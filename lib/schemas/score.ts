@@ -122,6 +122,11 @@ function isGrid(rows: readonly (readonly number[])[]): boolean {
   return rows.every((row) => row.length === rows[0]?.length)
 }
 
+/** One height all round, or eight from north clockwise. */
+const horizonSchema = z.union([between(0, 90, '°'), z.array(between(0, 90, '°')).length(8)], {
+  error: 'expected a number from 0 to 90 ° or eight of them, from north clockwise',
+})
+
 const rinkSchema = z.object({
   latitude: between(-90, 90, '°'),
   longitude: between(-180, 180, '°'),
@@ -130,6 +135,8 @@ const rinkSchema = z.object({
   widthM: between(1, 500, 'm'),
   shelter: shelterSchema,
   skyView: between(0, 1),
+  horizonDeg: horizonSchema.optional(),
+  shade: between(0, 1).optional(),
   base: z.enum(['liner', 'ground', 'snow']),
   phase: z.enum(['planning', 'waiting', 'filling', 'freezing', 'skating', 'thaw', 'closed']),
   floor: floorSchema.nullish(),

@@ -1,6 +1,7 @@
 // One row type per table, and Knex's map of them. Instants are Date, nights are text, ids are strings.
 import type { Knex } from 'knex'
 import type { Role } from '@/lib/access/permissions'
+import type { Units } from '@/lib/units'
 
 export interface UserRow {
   id: string
@@ -10,7 +11,11 @@ export interface UserRow {
   email_verified_at: Date | null
   email_refused_at: Date | null
   is_admin: boolean
-  units: 'metric' | 'imperial'
+  unit_temperature: Units['temperature']
+  unit_ice: Units['ice']
+  unit_water: Units['water']
+  unit_size: Units['size']
+  unit_wind: Units['wind']
   clock: '12' | '24'
   theme: 'system' | 'light' | 'dark' | 'dark-after-sunset'
   deletion_due_at: Date | null
@@ -127,7 +132,9 @@ export interface LogEntryRow {
   layer_mm: number | null
   water_l: number | null
   water_temperature_c: number | null
+  water_kind: 'cold-tap' | 'hot-tap' | 'hydrant' | 'tanker' | null
   thickness_mm: number | null
+  model_thickness_mm: number | null
   said_set_by_at: Date | null
   outcome: 'set' | 'wet' | 'spoiled' | null
   outcome_at: Date | null

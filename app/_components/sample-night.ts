@@ -4,6 +4,7 @@ import { nightBounds } from '@/lib/advice/night'
 import { summariseNight } from '@/lib/advice/night-summary'
 import type { HourlyRecord } from '@/lib/physics/types'
 import type { TonightView } from '@/lib/schemas/tonight-view'
+import { METRIC } from '@/lib/units'
 
 const HOUR = 3_600_000
 const TIME_ZONE = 'America/Toronto'
@@ -75,7 +76,7 @@ function judgeSample(): Sample {
   return {
     readAt: NOW.toISOString(),
     rink: { id: '', name: 'A sample rink', placeName: '', timeZone: TIME_ZONE, phase: 'skating', people: 1, water },
-    viewer: { role: 'skater', units: 'metric', clock: '12', mutedThrough: null },
+    viewer: { role: 'skater', units: METRIC, clock: '12', mutedThrough: null },
     night: {
       date: NIGHT_DATE,
       startsAt: startsAt.toISOString(),

@@ -25,7 +25,7 @@ export function NightLegend({ source, reader, drawn }: LegendProps) {
       <Key word="hold off">
         <rect x={1} y={1} width={13} height={11} fill="none" className="stroke-still" strokeWidth={1.3} />
       </Key>
-      <Key word={reader.units === 'imperial' ? 'air, °F' : 'air, °C'}>
+      <Key word={`air, °${reader.units.temperature}`}>
         <path d="M0,6.5 h15" className="stroke-ink" strokeWidth={2} />
       </Key>
       {drawn.some((hour) => !hour.isOpen) ? (
@@ -39,7 +39,7 @@ export function NightLegend({ source, reader, drawn }: LegendProps) {
         </Key>
       ) : null}
       <li>
-        {reader.units === 'imperial' ? 'bars: inches of water frozen per hour' : 'bars: mm of water frozen per hour'}
+        {reader.units.ice === 'in' ? 'bars: inches of water frozen per hour' : 'bars: mm of water frozen per hour'}
       </li>
       {sunsetAt && sunriseAt ? (
         <li>

@@ -17,13 +17,12 @@ interface NightTableProps {
 }
 
 export function NightTable({ hours, drawn, reader }: NightTableProps) {
-  const isImperial = reader.units === 'imperial'
   const columns = [
     { head: 'Hour' },
     { head: 'Verdict' },
-    { head: isImperial ? 'Freezes, in/h' : 'Freezes, mm/h', isFigure: true },
+    { head: reader.units.ice === 'in' ? 'Freezes, in/h' : 'Freezes, mm/h', isFigure: true },
     { head: 'If poured, set by', isFigure: true },
-    { head: isImperial ? 'Air, °F' : 'Air, °C', isFigure: true },
+    { head: `Air, °${reader.units.temperature}`, isFigure: true },
     { head: 'Falls', isFigure: true },
   ]
   const rows = hours.map((hour, index) => ({ key: hour.time, cells: cellsOf(hour, drawn[index], reader) }))
@@ -40,7 +39,7 @@ function cellsOf(hour: TonightHour, drawn: StripHour | undefined, reader: WordOp
   return [
     clockText(hour.time, reader),
     VERDICT_WORDS[hour.verdict],
-    figure(drawn?.rate, reader.units === 'imperial' ? 2 : 1),
+    figure(drawn?.rate, reader.units.ice === 'in' ? 2 : 1),
     hour.setsAt ? doneByText(hour.setsAt, reader) : hour.isKnown ? 'not set' : 'unknown',
     figure(drawn?.air, 0),
     hour.weather && drawn ? amountText(drawn, reader) || 'nothing' : 'no forecast',

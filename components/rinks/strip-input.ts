@@ -1,7 +1,7 @@
 // From tonight's view to the numbers and words of the strip, in the reader's units and the rink's time.
 import { addDays, instantOfLocal } from '@/lib/advice/zoned-time'
 import type { TonightHour, TonightView } from '@/lib/schemas/tonight-view'
-import { celsiusToFahrenheit, mmToInches } from '@/lib/units'
+import { celsiusToFahrenheit, mmToInches, type Units } from '@/lib/units'
 import type { StripFrame, StripHour, StripInput } from '../charts/night-strip-layout'
 
 export type StripSize = 'wide' | 'narrow'
@@ -49,20 +49,20 @@ function unknownHour(at: number): TonightHour {
   }
 }
 
-export function stripHours(hours: TonightHour[], units: 'metric' | 'imperial'): StripHour[] {
+export function stripHours(hours: TonightHour[], units: Units): StripHour[] {
   return hours.map((hour) => ({
     startsAt: Date.parse(hour.time),
     verdict: hour.verdict,
-    rate: hour.isKnown ? inUnit(hour.freezeRateMmPerH, units, mmToInches) : null,
-    air: inUnit(hour.weather?.airTemperatureC ?? null, units, celsiusToFahrenheit),
+    rate: hour.isKnown ? inUnit(hour.freezeRateMmPerH, units.ice === 'in', mmToInches) : null,
+    air: inUnit(hour.weather?.airTemperatureC ?? null, units.temperature === 'F', celsiusToFahrenheit),
     snowCm: hour.weather?.snowfallCm ?? 0,
     rainMm: hour.weather?.rainMm ?? 0,
     isOpen: hour.isAvailable !== false,
   }))
 }
 
-function inUnit(value: number | null, units: 'metric' | 'imperial', convert: (value: number) => number): number | null {
-  return value === null || units === 'metric' ? value : convert(value)
+function inUnit(value: number | null, isOther: boolean, convert: (value: number) => number): number | null {
+  return value === null || !isOther ? value : convert(value)
 }
 
 /** First and last instant that a size of the strip shows. */
@@ -92,6 +92,6 @@ export function stripInput(source: StripSource, hours: StripHour[], now: number,
     sunsetAt: night.sunsetAt === null ? null : Date.parse(night.sunsetAt),
     sunriseAt: night.sunriseAt === null ? null : Date.parse(night.sunriseAt),
     now,
-    leastRateTop: viewer.units === 'imperial' ? 0.04 : 1,
+    leastRateTop: viewer.units.ice === 'in' ? 0.04 : 1,
   }
 }

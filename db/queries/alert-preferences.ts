@@ -2,6 +2,8 @@
 import type { Db } from '@/db/knex'
 import type { RinkAccess } from '@/lib/access/proofs'
 import type { Role } from '@/lib/access/permissions'
+import type { Units } from '@/lib/units'
+import { unitsColumn } from './unit-columns'
 
 export interface AlertPreferences {
   /** "HH:MM" in the rink's zone. */
@@ -19,7 +21,7 @@ export interface AlertRecipient extends AlertPreferences {
   email: string
   isEmailVerified: boolean
   isEmailRefused: boolean
-  units: 'metric' | 'imperial'
+  units: Units
   clock: '12' | '24'
 }
 
@@ -59,7 +61,7 @@ export async function listAlertRecipients(db: Db, access: RinkAccess): Promise<A
       email: 'u.email',
       emailVerifiedAt: 'u.email_verified_at',
       emailRefusedAt: 'u.email_refused_at',
-      units: 'u.units',
+      units: unitsColumn(db, 'u'),
       clock: 'u.clock',
       tellAt: 'p.tell_at',
       wantsEmail: 'p.wants_email',

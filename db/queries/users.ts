@@ -1,6 +1,8 @@
 // People: who they are to us, how they prove it, and how they like figures shown.
 import type { Db } from '@/db/knex'
 import type { UserRow } from '@/db/types'
+import type { Units } from '@/lib/units'
+import { unitColumns, unitsColumn } from './unit-columns'
 
 export interface SignInRow {
   id: string
@@ -11,7 +13,7 @@ export interface SignInRow {
 export interface AccountRow {
   email: string
   name: string
-  units: UserRow['units']
+  units: Units
   clock: UserRow['clock']
   hasPassword: boolean
   /** The mail server refused this address for good. */
@@ -60,8 +62,8 @@ export async function findAccount(db: Db, userId: string): Promise<AccountRow | 
     .first(
       'email',
       'name',
-      'units',
       'clock',
+      unitsColumn(db, 'users').wrap('', ' as units'),
       db.raw('password_hash is not null as "hasPassword"'),
       db.raw('email_refused_at is not null as "isEmailRefused"'),
     )
@@ -86,12 +88,12 @@ export async function setPasswordHash(db: Db, userId: string, passwordHash: stri
 export async function updateAccount(
   db: Db,
   userId: string,
-  values: Pick<UserRow, 'name' | 'units' | 'clock'>,
+  { units, ...values }: Pick<UserRow, 'name' | 'clock'> & { units: Units },
   now: Date,
 ): Promise<void> {
   await db('users')
     .where({ id: userId })
-    .update({ ...values, updated_at: now })
+    .update({ ...values, ...unitColumns(units), updated_at: now })
 }
 
 export async function isOnAnyRink(db: Db, userId: string): Promise<boolean> {
@@ -104,8 +106,10 @@ export async function deleteUnconfirmedUsersBefore(db: Db, instant: Date): Promi
 }
 
 /** The units a person typed in are the ones they want to read. */
-export async function chooseUnits(db: Db, userId: string, units: UserRow['units'], now: Date): Promise<void> {
-  await db('users').where({ id: userId }).update({ units, updated_at: now })
+export async function chooseUnits(db: Db, userId: string, units: Units, now: Date): Promise<void> {
+  await db('users')
+    .where({ id: userId })
+    .update({ ...unitColumns(units), updated_at: now })
 }
 
 /** A refusal for good: alerts leave the address alone from now on, and the alerts page says so. */

@@ -7,6 +7,8 @@ export interface Place {
   name: string
   region: string
   country: string
+  /** ISO 3166-1, two letters. */
+  countryCode: string
   latitudeDeg: number
   longitudeDeg: number
 }
@@ -44,7 +46,8 @@ function loadGazetteer(): Promise<Gazetteer> {
 
 function toPlace(city: City, regionOf: Gazetteer['regionOf']): Place {
   const [longitudeDeg, latitudeDeg] = city.loc.coordinates
-  return { name: city.name, region: regionOf(city), country: countryName(city.country), latitudeDeg, longitudeDeg }
+  const { name, country: countryCode } = city
+  return { name, region: regionOf(city), country: countryName(countryCode), countryCode, latitudeDeg, longitudeDeg }
 }
 
 /** A whole name outranks a beginning, unless the beginning is that of a place twenty times its size (our weighting). */

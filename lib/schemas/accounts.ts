@@ -1,5 +1,6 @@
 // What people type about themselves.
 import { z } from 'zod'
+import { UNIT_CHOICES, type UnitName } from '@/lib/units'
 
 export const MIN_PASSWORD_LENGTH = 10
 
@@ -16,7 +17,7 @@ const nameSchema = z
   .trim()
   .min(1, 'Type your name.')
   .max(80, 'At most 80 characters.')
-  .regex(/^\P{Cc}*$/u, 'Letters, figures and spaces only, please.')
+  .regex(/^\P{Cc}*$/u, 'Letters, figures and spaces only.')
 
 /** Composed and decomposed accents are the same password, whatever keyboard typed it. */
 const givenPasswordSchema = z
@@ -54,11 +55,19 @@ export const passwordChangeSchema = z.object({
     .transform((password) => password.normalize('NFC')),
   newPassword: newPasswordSchema,
 })
-export const accountSchema = z.object({
-  name: nameSchema,
-  units: z.enum(['metric', 'imperial'], 'Choose metric or imperial.'),
-  clock: z.enum(['12', '24'], 'Choose a 12-hour or a 24-hour clock.'),
-})
+const unitSchema = <Name extends UnitName>(name: Name) => z.enum(UNIT_CHOICES[name], 'Choose one of the units offered.')
+
+export const accountSchema = z
+  .object({
+    name: nameSchema,
+    temperature: unitSchema('temperature'),
+    ice: unitSchema('ice'),
+    water: unitSchema('water'),
+    size: unitSchema('size'),
+    wind: unitSchema('wind'),
+    clock: z.enum(['12', '24'], 'Choose a 12-hour or a 24-hour clock.'),
+  })
+  .transform(({ name, clock, ...units }) => ({ name, clock, units }))
 
 export type SignUpInput = z.output<typeof signUpSchema>
 export type PasswordSignInInput = z.output<typeof passwordSignInSchema>

@@ -1,14 +1,33 @@
 // Kinds of fields that forms share: quantities in the person's units, lines of text, boxes to tick.
 import { z } from 'zod'
-import { fitsMeasure, MEASURES, parseNumber, rangeMessage, type MeasureName, type UnitSystem } from './measures'
+import { unitsOfCode, type Units } from '@/lib/units'
+import { fitsMeasure, parseNumber, rangeMessage, scaleOf, type MeasureName } from './measures'
 
 /** A quantity in the person's units, as SI. */
-export function measured(measure: MeasureName, units: UnitSystem) {
+export function measured(measure: MeasureName, units: Units) {
   return z.string().transform((text, context) => {
     const value = parseNumber(text)
-    const valueSi = value === undefined ? NaN : MEASURES[measure].scales[units].toSi(value)
+    const valueSi = value === undefined ? NaN : scaleOf(measure, units).toSi(value)
     if (fitsMeasure(measure, valueSi)) return valueSi
     context.addIssue(value === undefined ? 'Type a number here.' : rangeMessage(measure, units))
+    return z.NEVER
+  })
+}
+
+/** The units that a form was typed in, by their code. */
+const unitsSchema = z.string('Choose your units.').transform((code, context) => {
+  const units = unitsOfCode(code)
+  if (units) return units
+  context.addIssue('Choose your units.')
+  return z.NEVER
+})
+
+/** A form whose quantities are read in the units sent along with them. */
+export function inUnitsOf<S extends z.ZodType>(schemaFor: (units: Units) => S) {
+  return z.looseObject({ units: unitsSchema }).transform((fields, context): z.output<S> => {
+    const result = schemaFor(fields.units).safeParse(fields)
+    if (result.success) return result.data
+    for (const { path, message } of result.error.issues) context.addIssue({ code: 'custom', path, message })
     return z.NEVER
   })
 }
@@ -28,7 +47,7 @@ export const lineOfText = (missing: string, most: number) =>
     .trim()
     .min(1, missing)
     .max(most, `At most ${most} characters.`)
-    .regex(/^\P{Cc}*$/u, 'Letters, figures and spaces only, please.')
+    .regex(/^\P{Cc}*$/u, 'Letters, figures and spaces only.')
 
 /** A box that is not ticked sends nothing. */
 export const tickSchema = z
@@ -40,6 +59,6 @@ export const tickSchema = z
 export const secondsSchema = z.string().transform((text, context) => {
   const seconds = parseNumber(text) ?? NaN
   if (seconds > 0 && seconds <= 3600) return seconds
-  context.addIssue('Between 1 and 3600 seconds, please.')
+  context.addIssue('Between 1 and 3600 seconds.')
   return z.NEVER
 })

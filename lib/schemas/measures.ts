@@ -5,13 +5,15 @@ import {
   feetToMetres,
   gallonsToLitres,
   inchesToMm,
+  kmhToMps,
   litresToGallons,
   metresToFeet,
   mmToInches,
+  mphToMps,
+  mpsToKmh,
+  mpsToMph,
+  type Units,
 } from '@/lib/units'
-
-export const unitSystems = ['metric', 'imperial'] as const
-export type UnitSystem = (typeof unitSystems)[number]
 
 interface Scale {
   unit: string
@@ -25,63 +27,60 @@ interface Measure {
   /** Smallest and largest that make sense; the database refuses the rest too. [SI] */
   least: number
   most: number
-  scales: Record<UnitSystem, Scale>
+  scaleIn: (units: Units) => Scale
 }
 
 const same = (value: number) => value
-const metric = (unit: string, decimals: number, factor = 1): Scale => ({
-  unit,
-  decimals,
-  toSi: (value) => value * factor,
-  fromSi: (value) => value / factor,
-})
-const inches: Scale = { unit: 'in', decimals: 2, toSi: inchesToMm, fromSi: mmToInches }
+const plain = (unit: string, decimals: number): Scale => ({ unit, decimals, toSi: same, fromSi: same })
 
-/** Keyed by the quantity; SI is m, mm, L/min, L and °C. */
+const INCHES: Scale = { unit: 'in', decimals: 2, toSi: inchesToMm, fromSi: mmToInches }
+const CENTIMETRES: Scale = { unit: 'cm', decimals: 1, toSi: (cm) => cm * 10, fromSi: (mm) => mm / 10 }
+const FEET: Scale = { unit: 'ft', decimals: 1, toSi: feetToMetres, fromSi: metresToFeet }
+const FAHRENHEIT: Scale = { unit: '°F', decimals: 0, toSi: fahrenheitToCelsius, fromSi: celsiusToFahrenheit }
+const WINDS: Record<Units['wind'], Scale> = {
+  'km/h': { unit: 'km/h', decimals: 0, toSi: kmhToMps, fromSi: mpsToKmh },
+  'm/s': plain('m/s', 1),
+  mph: { unit: 'mph', decimals: 0, toSi: mphToMps, fromSi: mpsToMph },
+}
+const gallons = (unit: string): Scale => ({ unit, decimals: 1, toSi: gallonsToLitres, fromSi: litresToGallons })
+
+const thickness = ({ ice }: Units) => (ice === 'in' ? INCHES : CENTIMETRES)
+const warmth = ({ temperature }: Units) => (temperature === 'F' ? FAHRENHEIT : plain('°C', 1))
+
+/** Keyed by the quantity; SI is m, mm, L/min, L, m/s and °C. */
 export const MEASURES = {
-  side: {
-    least: 2,
-    most: 100,
-    scales: { metric: metric('m', 1), imperial: { unit: 'ft', decimals: 1, toSi: feetToMetres, fromSi: metresToFeet } },
-  },
-  iceThickness: { least: 0, most: 2000, scales: { metric: metric('cm', 1, 10), imperial: inches } },
-  fillDepth: { least: 20, most: 1000, scales: { metric: metric('cm', 1, 10), imperial: inches } },
-  layer: { least: 0.5, most: 30, scales: { metric: metric('mm', 1), imperial: inches } },
+  side: { least: 2, most: 100, scaleIn: ({ size }) => (size === 'ft' ? FEET : plain('m', 1)) },
+  iceThickness: { least: 0, most: 2000, scaleIn: thickness },
+  fillDepth: { least: 20, most: 1000, scaleIn: thickness },
+  layer: { least: 0.5, most: 30, scaleIn: ({ ice }) => (ice === 'in' ? INCHES : plain('mm', 1)) },
+  /** How far the ground lies below its highest point. */
+  drop: { least: 0, most: 1000, scaleIn: thickness },
+  boardHeight: { least: 50, most: 1500, scaleIn: thickness },
+  carriesSkater: { least: 70, most: 300, scaleIn: thickness },
   flow: {
     least: 1,
     most: 400,
-    scales: {
-      metric: metric('L/min', 1),
-      imperial: { unit: 'US gal/min', decimals: 1, toSi: gallonsToLitres, fromSi: litresToGallons },
-    },
+    scaleIn: ({ water }) => (water === 'gal' ? gallons('US gal/min') : plain('L/min', 1)),
   },
-  bucket: {
-    least: 1,
-    most: 1000,
-    scales: {
-      metric: metric('L', 1),
-      imperial: { unit: 'US gal', decimals: 1, toSi: gallonsToLitres, fromSi: litresToGallons },
-    },
-  },
-  waterTemperature: {
-    least: 0,
-    most: 95,
-    scales: {
-      metric: { unit: '°C', decimals: 1, toSi: same, fromSi: same },
-      imperial: { unit: '°F', decimals: 0, toSi: fahrenheitToCelsius, fromSi: celsiusToFahrenheit },
-    },
-  },
+  bucket: { least: 1, most: 1000, scaleIn: ({ water }) => (water === 'gal' ? gallons('US gal') : plain('L', 1)) },
+  waterTemperature: { least: 0, most: 95, scaleIn: warmth },
+  windChill: { least: -60, most: 0, scaleIn: warmth },
+  windLimit: { least: 1, most: 30, scaleIn: ({ wind }) => WINDS[wind] },
 } satisfies Record<string, Measure>
 
 export type MeasureName = keyof typeof MEASURES
 
-export function unitOf(measure: MeasureName, units: UnitSystem): string {
-  return MEASURES[measure].scales[units].unit
+export function scaleOf(measure: MeasureName, units: Units): Scale {
+  return MEASURES[measure].scaleIn(units)
+}
+
+export function unitOf(measure: MeasureName, units: Units): string {
+  return scaleOf(measure, units).unit
 }
 
 /** An SI value as a person would type it: "33", "0.12". */
-export function typed(measure: MeasureName, units: UnitSystem, valueSi: number): string {
-  const { decimals, fromSi } = MEASURES[measure].scales[units]
+export function typed(measure: MeasureName, units: Units, valueSi: number): string {
+  const { decimals, fromSi } = scaleOf(measure, units)
   return String(Number(fromSi(valueSi).toFixed(decimals)))
 }
 
@@ -89,8 +88,8 @@ const NUMBER = /^[+-]?(\d+([.,]\d*)?|[.,]\d+)$/
 
 /** A number as typed, with a point or a comma; undefined when it is none. */
 export function parseNumber(text: string): number | undefined {
-  const plain = text.trim().replace(/^[\u2212\u2013]/, '-')
-  return NUMBER.test(plain) ? Number(plain.replace(',', '.')) : undefined
+  const tidy = text.trim().replace(/^[\u2212\u2013]/, '-')
+  return NUMBER.test(tidy) ? Number(tidy.replace(',', '.')) : undefined
 }
 
 /** Between the limits, also where they look rounded in the person's units. */
@@ -100,12 +99,12 @@ export function fitsMeasure(measure: MeasureName, valueSi: number): boolean {
 }
 
 /** "Between 2 and 100 m." The limits are rounded inward, so that what they promise is accepted. */
-export function rangeMessage(measure: MeasureName, units: UnitSystem): string {
-  const { least, most, scales } = MEASURES[measure]
-  const { unit, decimals, fromSi } = scales[units]
+export function rangeMessage(measure: MeasureName, units: Units): string {
+  const { least, most } = MEASURES[measure]
+  const { unit, decimals, fromSi } = scaleOf(measure, units)
   const step = 10 ** decimals
   const tidy = (value: number) => Number(value.toFixed(6))
   const low = Math.ceil(tidy(fromSi(least) * step)) / step
   const high = Math.floor(tidy(fromSi(most) * step)) / step
-  return `Between ${low} and ${high} ${unit}, please.`
+  return `Between ${low} and ${high} ${unit}.`
 }

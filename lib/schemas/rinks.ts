@@ -1,9 +1,10 @@
 // Setting up a rink and changing its settings: one set of fields for the form, the action, the service and the tests.
 import { z } from 'zod'
+import type { Units } from '@/lib/units'
 import { latitudeSchema, longitudeSchema } from './coordinates'
 import { clockTimeSchema, doOverlap, timeZoneSchema } from './local-time'
-import { lineOfText, measured, orEmpty, secondsSchema, tickSchema } from './fields'
-import { fitsMeasure, rangeMessage, type UnitSystem } from './measures'
+import { inUnitsOf, lineOfText, measured, orEmpty, secondsSchema, tickSchema } from './fields'
+import { fitsMeasure, rangeMessage } from './measures'
 import {
   BASES,
   hasIce,
@@ -18,9 +19,9 @@ import {
 
 export const rinkIdSchema = z.uuid('That is no rink.')
 
-function rinkFields(units: UnitSystem) {
+function rinkFields(units: Units) {
   return {
-    units: z.literal(units),
+    units: z.custom<Units>(),
     name: lineOfText('Give the rink a name.', 60),
     placeName: orEmpty(lineOfText('Name the place.', 120)),
     latitude: latitudeSchema,
@@ -56,7 +57,7 @@ export function bucketFlowLPerMin(litres: number, seconds: number): number {
 }
 
 /** What single fields cannot know: the answers have to fit each other. */
-function checkTogether(fields: Fields & { units: UnitSystem }, context: z.RefinementCtx): void {
+function checkTogether(fields: Fields & { units: Units }, context: z.RefinementCtx): void {
   const refuse = (field: string, message: string) => context.addIssue({ code: 'custom', path: [field], message })
   const { bucketSize, bucketSeconds, moreHoursFrom, moreHoursTo } = fields
   if (fields.flow === undefined && (bucketSize === undefined) !== (bucketSeconds === undefined)) {
@@ -137,29 +138,27 @@ const toldFields = {
   wantsEmail: tickSchema,
 }
 
-const creationFields = { creationKey: z.uuid('Please load this page again.'), ...toldFields }
+const creationFields = { creationKey: z.uuid('Load this page again.'), ...toldFields }
 
-export const setUpRinkSchema = z
-  .discriminatedUnion('units', [
-    z.object({ ...rinkFields('metric'), ...creationFields }),
-    z.object({ ...rinkFields('imperial'), ...creationFields }),
-  ])
-  .superRefine(checkTogether)
-  .superRefine(askForThickness)
-  .transform((fields) => ({
-    creationKey: fields.creationKey,
-    units: fields.units,
-    rink: toRink(fields),
-    told: { tellAt: fields.tellAt, wantsPush: fields.wantsPush, wantsEmail: fields.wantsEmail },
-  }))
+export const setUpRinkSchema = inUnitsOf((units) =>
+  z
+    .object({ ...rinkFields(units), ...creationFields })
+    .superRefine(checkTogether)
+    .superRefine(askForThickness)
+    .transform((fields) => ({
+      creationKey: fields.creationKey,
+      units: fields.units,
+      rink: toRink(fields),
+      told: { tellAt: fields.tellAt, wantsPush: fields.wantsPush, wantsEmail: fields.wantsEmail },
+    })),
+)
 
-export const changeRinkSchema = z
-  .discriminatedUnion('units', [
-    z.object({ ...rinkFields('metric'), rinkId: rinkIdSchema }),
-    z.object({ ...rinkFields('imperial'), rinkId: rinkIdSchema }),
-  ])
-  .superRefine(checkTogether)
-  .transform((fields) => ({ rinkId: fields.rinkId, rink: toRink(fields) }))
+export const changeRinkSchema = inUnitsOf((units) =>
+  z
+    .object({ ...rinkFields(units), rinkId: rinkIdSchema })
+    .superRefine(checkTogether)
+    .transform((fields) => ({ rinkId: fields.rinkId, rink: toRink(fields) })),
+)
 
 export type SetUpRinkInput = z.output<typeof setUpRinkSchema>
 export type ChangeRinkInput = z.output<typeof changeRinkSchema>

@@ -2,6 +2,7 @@
 import type { Role } from '@/lib/access/permissions'
 import type { NightSummary } from '@/lib/advice/night-summary'
 import type { PlannedPass, ScoredHour, Thaw, Phase } from '@/lib/advice/types'
+import type { Units } from '@/lib/units'
 
 /** One hour of the night sheet: what the model made of it, with the weather it rests on. */
 export type TonightHour = ScoredHour
@@ -38,7 +39,7 @@ export interface TonightView {
   }
   viewer: {
     role: Role
-    units: 'metric' | 'imperial'
+    units: Units
     clock: '12' | '24'
     /** Silent up to and including this night. */
     mutedThrough: string | null

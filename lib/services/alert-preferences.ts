@@ -17,6 +17,7 @@ import { addDays } from '@/lib/advice/zoned-time'
 import type { ServiceContext } from '@/lib/context'
 import { InvalidInputError, NotFoundError } from '@/lib/errors'
 import type { AlertPreferencesInput, MuteInput } from '@/lib/schemas/alerts'
+import type { Units } from '@/lib/units'
 
 export interface Device {
   id: string
@@ -38,6 +39,7 @@ export interface AlertSettings {
   email: string
   /** Mail to it came back for good: none is sent until a mailed link was opened. */
   isEmailRefused: boolean
+  units: Units
   clock: '12' | '24'
   devices: Device[]
   told: ToldMessage[]
@@ -64,6 +66,7 @@ export async function getAlertSettings(context: ServiceContext, rinkId: string):
     preferences: (await findAlertPreferences(db, access, viewer.userId)) ?? DEFAULT_PREFERENCES,
     email: account.email,
     isEmailRefused: account.isEmailRefused,
+    units: account.units,
     clock: account.clock,
     devices: (await listDevices(db, viewer.userId)).map(toDevice),
     told: await listToldMessages(db, access, viewer.userId, TOLD_SHOWN),

@@ -6,12 +6,13 @@ import { hashPassword, verifyPassword } from '@/lib/auth/passwords'
 import type { ServiceContext } from '@/lib/context'
 import { InvalidInputError, NotFoundError } from '@/lib/errors'
 import type { AccountInput, PasswordChangeInput } from '@/lib/schemas/accounts'
+import type { Units } from '@/lib/units'
 import { spend } from './rate-limits'
 
 export interface AccountView {
   email: string
   name: string
-  units: 'metric' | 'imperial'
+  units: Units
   clock: '12' | '24'
   hasPassword: boolean
 }

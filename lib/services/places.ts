@@ -2,6 +2,8 @@
 import type { ServiceContext } from '@/lib/context'
 import { findNearestPlace, findPlaces, type Place } from '@/lib/places/gazetteer'
 import { timeZoneAt } from '@/lib/places/time-zone'
+import { usualUnits } from '@/lib/places/usual-units'
+import { unitsCode } from '@/lib/units'
 import { spend } from './rate-limits'
 
 export interface PlaceSuggestion {
@@ -11,6 +13,8 @@ export interface PlaceSuggestion {
   latitudeDeg: number
   longitudeDeg: number
   timeZone: string
+  /** The usual ones there, as a form sends them. */
+  units: string
 }
 
 function placeName({ name, region, country }: Place): string {
@@ -18,13 +22,14 @@ function placeName({ name, region, country }: Place): string {
 }
 
 function toSuggestion(place: Place): PlaceSuggestion {
-  const { latitudeDeg, longitudeDeg, country } = place
+  const { latitudeDeg, longitudeDeg, country, countryCode } = place
   return {
     placeName: placeName(place),
     country,
     latitudeDeg,
     longitudeDeg,
     timeZone: timeZoneAt(latitudeDeg, longitudeDeg),
+    units: unitsCode(usualUnits(countryCode)),
   }
 }
 
@@ -45,5 +50,6 @@ export async function describePosition(
     placeName: nearest ? `Near ${placeName(nearest)}` : '',
     country: nearest?.country ?? '',
     timeZone: timeZoneAt(position.latitudeDeg, position.longitudeDeg),
+    units: unitsCode(usualUnits(nearest?.countryCode ?? '')),
   }
 }

@@ -1,5 +1,13 @@
 // Quantities in words: a number, rounded as people read it, with its unit.
-import { celsiusToFahrenheit, litresToGallons, mmToInches, mpsToKmh, mpsToMph } from '@/lib/units'
+import {
+  celsiusToFahrenheit,
+  litresToGallons,
+  m2ToFt2,
+  metresToFeet,
+  mmToInches,
+  mpsToKmh,
+  mpsToMph,
+} from '@/lib/units'
 import type { WordOptions } from './options'
 
 /** A real minus sign, and no "−0". */
@@ -14,53 +22,53 @@ export function numberText(value: number, digits: number, { locale }: Pick<WordO
 }
 
 export function temperatureText(temperatureC: number, words: WordOptions): string {
-  return words.units === 'imperial'
+  return words.units.temperature === 'F'
     ? `${numberText(celsiusToFahrenheit(temperatureC), 0, words)} °F`
     : `${numberText(temperatureC, 0, words)} °C`
 }
 
 /** Warm temperatures with their plus sign, where the sign is the point. */
 export function signedTemperatureText(temperatureC: number, words: WordOptions): string {
-  const isAbove = words.units === 'metric' && Math.round(temperatureC) > 0
+  const isAbove = words.units.temperature === 'C' && Math.round(temperatureC) > 0
   return (isAbove ? '+' : '') + temperatureText(temperatureC, words)
 }
 
 /** Wind chill is an index: a number without a unit in Canada, degrees Fahrenheit in the United States. */
 export function windChillText(windChillC: number, words: WordOptions): string {
-  return words.units === 'imperial' ? temperatureText(windChillC, words) : numberText(windChillC, 0, words)
+  return words.units.temperature === 'F' ? temperatureText(windChillC, words) : numberText(windChillC, 0, words)
 }
 
 export function windText(mps: number, words: WordOptions): string {
-  return words.units === 'imperial'
-    ? `${numberText(mpsToMph(mps), 0, words)} mph`
-    : `${numberText(mpsToKmh(mps), 0, words)} km/h`
+  const { wind } = words.units
+  if (wind === 'm/s') return `${numberText(mps, 0, words)} m/s`
+  return `${numberText(wind === 'mph' ? mpsToMph(mps) : mpsToKmh(mps), 0, words)} ${wind}`
 }
+
+const inchesText = (mm: number, digits: number, words: WordOptions) => `${numberText(mmToInches(mm), digits, words)} in`
 
 /** Films and layers: millimetres, or hundredths of an inch. */
 export function layerText(mm: number, words: WordOptions): string {
-  if (words.units === 'imperial') return `${numberText(mmToInches(mm), 2, words)} in`
+  if (words.units.ice === 'in') return inchesText(mm, 2, words)
   return `${numberText(mm, mm < 10 && !Number.isInteger(Math.round(mm * 10) / 10) ? 1 : 0, words)} mm`
 }
 
 /** Ice: centimetres, or inches. */
 export function iceText(mm: number, words: WordOptions): string {
-  return words.units === 'imperial'
-    ? `${numberText(mmToInches(mm), 1, words)} in`
-    : `${numberText(mm / 10, 1, words)} cm`
+  return words.units.ice === 'in' ? inchesText(mm, 1, words) : `${numberText(mm / 10, 1, words)} cm`
 }
 
 export function snowText(cm: number, words: WordOptions): string {
-  if (words.units === 'imperial') return `${numberText(mmToInches(cm * 10), 1, words)} in`
+  if (words.units.ice === 'in') return inchesText(cm * 10, 1, words)
   return `${numberText(cm, cm < 10 ? 1 : 0, words)} cm`
 }
 
 export function rainText(mm: number, words: WordOptions): string {
-  return words.units === 'imperial' ? `${numberText(mmToInches(mm), 2, words)} in` : `${numberText(mm, 1, words)} mm`
+  return words.units.ice === 'in' ? inchesText(mm, 2, words) : `${numberText(mm, 1, words)} mm`
 }
 
 export function rateText(mmPerH: number, words: WordOptions): string {
-  return words.units === 'imperial'
-    ? `${numberText(mmToInches(mmPerH), 2, words)} in an hour`
+  return words.units.ice === 'in'
+    ? `${inchesText(mmPerH, 2, words)} an hour`
     : `${numberText(mmPerH, 1, words)} mm an hour`
 }
 
@@ -69,9 +77,27 @@ export function fluxText(wm2: number, words: WordOptions): string {
 }
 
 export function waterText(litres: number, words: WordOptions): string {
-  return words.units === 'imperial'
+  return words.units.water === 'gal'
     ? `${numberText(litresToGallons(litres), 0, words)} gal`
     : `${numberText(litres, 0, words)} L`
+}
+
+/** What a hose gives: litres, or US gallons to the tenth, a minute. */
+export function flowText(lPerMin: number, words: WordOptions): string {
+  return words.units.water === 'gal'
+    ? `${numberText(litresToGallons(lPerMin), 1, words)} gal/min`
+    : `${numberText(lPerMin, 0, words)} L/min`
+}
+
+/** Sides of the yard. */
+export function sizeText(metres: number, words: WordOptions): string {
+  return words.units.size === 'ft'
+    ? `${numberText(metresToFeet(metres), 0, words)} ft`
+    : `${numberText(metres, 1, words)} m`
+}
+
+export function areaText(m2: number, words: WordOptions): string {
+  return words.units.size === 'ft' ? `${numberText(m2ToFt2(m2), 0, words)} ft²` : `${numberText(m2, 0, words)} m²`
 }
 
 /** "40 min", "1 h 50 min", "3 h". */

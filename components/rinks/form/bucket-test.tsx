@@ -4,7 +4,7 @@ import { useEffect, useState } from 'react'
 import { Button } from '@/components/ui/button'
 import { TextField } from '@/components/ui/field'
 import { useHydrated } from '@/components/hooks/use-hydrated'
-import { MEASURES, parseNumber, typed, unitOf } from '@/lib/schemas/measures'
+import { parseNumber, scaleOf, typed, unitOf } from '@/lib/schemas/measures'
 import type { RinkForm } from './use-rink-form'
 
 const TICK_MILLIS = 100
@@ -14,7 +14,7 @@ function flowText({ values, units }: RinkForm): string | undefined {
   const size = parseNumber(values.bucketSize ?? '')
   const seconds = parseNumber(values.bucketSeconds ?? '')
   if (!size || !seconds || size < 0 || seconds < 0) return undefined
-  return typed('flow', units, (MEASURES.bucket.scales[units].toSi(size) / seconds) * 60)
+  return typed('flow', units, (scaleOf('bucket', units).toSi(size) / seconds) * 60)
 }
 
 export function BucketTest({ form }: { form: RinkForm }) {

@@ -10,7 +10,10 @@ import type { RinkForm } from './use-rink-form'
 export function PlaceFields({ form }: { form: RinkForm }) {
   const isHydrated = useHydrated()
   const { latitude, longitude } = form.values
-  const choose = (place: ChosenPlace) => form.set({ ...place })
+  const choose = ({ units, ...place }: ChosenPlace) => {
+    form.set(place)
+    form.suggestUnits(units)
+  }
   const isMissing = !latitude || !longitude
   const fault = form.error('latitude') ?? form.error('longitude')
   const isFaulty = Boolean(fault ?? form.error('placeName') ?? form.error('timeZone'))

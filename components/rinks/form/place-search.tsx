@@ -12,15 +12,18 @@ interface Found {
   places: PlaceSuggestion[]
 }
 
-export type ChosenPlace = Pick<PlaceSuggestion, 'placeName' | 'timeZone'> & { latitude: string; longitude: string }
+export type ChosenPlace = Pick<PlaceSuggestion, 'placeName' | 'timeZone' | 'units'> & {
+  latitude: string
+  longitude: string
+}
 
 const PAUSE_MILLIS = 250
 /** Four decimals are about ten metres: the yard, and not the chair in the kitchen. */
 const DECIMALS = 4
 
-function toChosen({ placeName, timeZone, latitudeDeg, longitudeDeg }: PlaceSuggestion): ChosenPlace {
+function toChosen({ placeName, timeZone, units, latitudeDeg, longitudeDeg }: PlaceSuggestion): ChosenPlace {
   const text = (degrees: number) => String(Number(degrees.toFixed(DECIMALS)))
-  return { placeName, timeZone, latitude: text(latitudeDeg), longitude: text(longitudeDeg) }
+  return { placeName, timeZone, units, latitude: text(latitudeDeg), longitude: text(longitudeDeg) }
 }
 
 /** What the server knows of a position; undefined when it cannot be asked, for it will work it out again when the form arrives. */
@@ -108,7 +111,9 @@ function DevicePosition({ onChoose }: { onChoose: (place: ChosenPlace) => void }
   const [isBusy, setIsBusy] = useState(false)
   const found = async ({ coords }: GeolocationPosition) => {
     const [latitude, longitude] = [coords.latitude.toFixed(DECIMALS), coords.longitude.toFixed(DECIMALS)]
-    onChoose((await lookUpPosition(latitude, longitude)) ?? { latitude, longitude, placeName: '', timeZone: '' })
+    onChoose(
+      (await lookUpPosition(latitude, longitude)) ?? { latitude, longitude, placeName: '', timeZone: '', units: '' },
+    )
     setNote('')
     setIsBusy(false)
   }

@@ -3,18 +3,22 @@
 import { startTransition, useActionState, useState, type FormEvent } from 'react'
 import type { FormAction } from '@/components/ui/action-form'
 import { IDLE, type FormState } from '@/lib/http/form-state'
-import { unitOf, type UnitSystem } from '@/lib/schemas/measures'
-import { inUnits, MEASURE_OF, type FormValues } from './values'
+import { unitOf } from '@/lib/schemas/measures'
+import { unitsOfCode, type Units } from '@/lib/units'
+import { inUnits, MEASURE_OF, unitsIn, type FormValues } from './values'
 
 export type RinkForm = ReturnType<typeof useRinkForm>
 
-export function useRinkForm(action: FormAction, initial: FormValues) {
+/** @param followsPlace Whether the units may follow the place until somebody chooses them. */
+export function useRinkForm(action: FormAction, initial: FormValues, followsPlace = false) {
   const [state, dispatch, isPending] = useActionState(action, IDLE)
   // Without script the page comes back whole, and this is where what was typed is found again.
   const [values, setValues] = useState<FormValues>(state.values ?? initial)
   // A fault is shown until its field is touched.
   const [mended, setMended] = useState<{ of: FormState; names: string[] }>({ of: state, names: [] })
-  const units: UnitSystem = values.units === 'imperial' ? 'imperial' : 'metric'
+  const units = unitsIn(values)
+  const [mayFollow, setMayFollow] = useState(followsPlace)
+  const [offeredUnits, setOfferedUnits] = useState([unitsIn(initial)])
 
   const set = (changed: FormValues) => {
     setValues((before) => ({ ...before, ...changed }))
@@ -30,7 +34,18 @@ export function useRinkForm(action: FormAction, initial: FormValues) {
     values,
     units,
     set,
-    chooseUnits: (chosen: UnitSystem) => setValues((before) => inUnits(before, chosen)),
+    offeredUnits,
+    chooseUnits: (chosen: Units) => {
+      setMayFollow(false)
+      setValues((before) => inUnits(before, chosen))
+    },
+    /** The usual units of a place that was chosen. */
+    suggestUnits: (code: string) => {
+      const suggested = unitsOfCode(code)
+      if (!mayFollow || !suggested) return
+      setOfferedUnits([suggested])
+      setValues((before) => inUnits(before, suggested))
+    },
     /** Sent by hand, because React empties a form that it sends itself. */
     submit: (event: FormEvent<HTMLFormElement>) => {
       event.preventDefault()

@@ -1,7 +1,8 @@
 // What the rink form starts from: its text fields, for a new rink and for one that exists.
-import { MEASURES, parseNumber, typed, type MeasureName, type UnitSystem } from '@/lib/schemas/measures'
+import { parseNumber, scaleOf, typed, type MeasureName } from '@/lib/schemas/measures'
 import { RINK_DEFAULTS, SKIES, SKY_VIEWS, type SkyChoice } from '@/lib/schemas/rink-choices'
 import type { RinkInput } from '@/lib/schemas/rinks'
+import { METRIC, unitsCode, unitsOfCode, type Units } from '@/lib/units'
 
 /** Text by field name, as FormData has it; a box that is not ticked is absent. */
 export type FormValues = Record<string, string>
@@ -18,17 +19,23 @@ export const MEASURE_OF: Record<string, MeasureName> = {
   layer: 'layer',
 }
 
-/** Ten metres are 33 feet; a form starts with round numbers in both. */
-const ROUND: Record<UnitSystem, FormValues> = {
-  metric: { length: '10', width: '10', fillDepth: '10', layer: '3' },
-  imperial: { length: '33', width: '33', fillDepth: '4', layer: '0.12' },
+/** Ten metres are 33 feet; a form starts with round numbers in all units. */
+function roundValues({ size, ice }: Units): FormValues {
+  const side = size === 'ft' ? '33' : '10'
+  const depths = ice === 'in' ? { fillDepth: '4', layer: '0.12' } : { fillDepth: '10', layer: '3' }
+  return { length: side, width: side, ...depths }
 }
 
-export function newRinkValues(units: UnitSystem, creationKey: string): FormValues {
+/** The units that the form's quantities are typed in. */
+export function unitsIn(values: FormValues): Units {
+  return unitsOfCode(values.units ?? '') ?? METRIC
+}
+
+export function newRinkValues(units: Units, creationKey: string): FormValues {
   return {
     creationKey,
-    units,
-    ...ROUND[units],
+    units: unitsCode(units),
+    ...roundValues(units),
     base: 'liner',
     shelter: 'suburban',
     sky: 'edged',
@@ -50,12 +57,12 @@ function nearestSky(skyView: number): SkyChoice {
 }
 
 /** The ice is left open: it is told when somebody has measured it. */
-export function rinkValues(rink: Omit<RinkInput, 'iceThicknessMm'> & { id: string }, units: UnitSystem): FormValues {
+export function rinkValues(rink: Omit<RinkInput, 'iceThicknessMm'> & { id: string }, units: Units): FormValues {
   const { water, available } = rink
   const [hours, more] = available
   return {
     rinkId: rink.id,
-    units,
+    units: unitsCode(units),
     name: rink.name,
     placeName: rink.placeName ?? '',
     latitude: String(rink.latitudeDeg),
@@ -81,13 +88,15 @@ export function rinkValues(rink: Omit<RinkInput, 'iceThicknessMm'> & { id: strin
 }
 
 /** Rewrites every quantity that was typed; what is no number stays for the person to mend. */
-export function inUnits(values: FormValues, units: UnitSystem): FormValues {
-  const from: UnitSystem = values.units === 'imperial' ? 'imperial' : 'metric'
+export function inUnits(values: FormValues, units: Units): FormValues {
+  const from = unitsIn(values)
+  const [roundBefore, round] = [roundValues(from), roundValues(units)]
   const converted = Object.entries(MEASURE_OF).flatMap(([field, measure]) => {
-    const round = ROUND[units][field]
-    if (round !== undefined && values[field] === ROUND[from][field]) return [[field, round]]
+    const starting = round[field]
+    if (starting !== undefined && values[field] === roundBefore[field]) return [[field, starting]]
     const number = parseNumber(values[field] ?? '')
-    return number === undefined ? [] : [[field, typed(measure, units, MEASURES[measure].scales[from].toSi(number))]]
+    if (number === undefined || scaleOf(measure, from).unit === scaleOf(measure, units).unit) return []
+    return [[field, typed(measure, units, scaleOf(measure, from).toSi(number))]]
   })
-  return { ...values, ...Object.fromEntries(converted), units }
+  return { ...values, ...Object.fromEntries(converted), units: unitsCode(units) }
 }

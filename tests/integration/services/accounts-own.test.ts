@@ -1,4 +1,5 @@
 // One's own account and its sessions, as next-auth sees them.
+import { METRIC, type Units } from '@/lib/units'
 import { afterAll, beforeAll, expect, test } from 'vitest'
 import { pruneExpired } from '@/db/queries/prune'
 import { sessionAdapter } from '@/lib/auth/adapter'
@@ -92,13 +93,15 @@ test('somebody who only ever used links sets a first password', async () => {
   expect(await getAccount(as(userId))).toMatchObject({ hasPassword: true })
 })
 
+const MIXED: Units = { temperature: 'C', ice: 'in', water: 'gal', size: 'ft', wind: 'm/s' }
+
 test('name, units and clock are kept, one’s own only', async () => {
   const { email, userId } = await newMember(database.db)
   const other = await newMember(database.db)
-  await saveAccount(as(userId), { name: 'Anna B.', units: 'imperial', clock: '24' })
-  const expected = { email, name: 'Anna B.', units: 'imperial', clock: '24', hasPassword: true, isEmailRefused: false }
+  await saveAccount(as(userId), { name: 'Anna B.', units: MIXED, clock: '24' })
+  const expected = { email, name: 'Anna B.', units: MIXED, clock: '24', hasPassword: true, isEmailRefused: false }
   expect(await getAccount(as(userId))).toEqual(expected)
-  expect(await getAccount(as(other.userId))).toMatchObject({ name: 'Anna', units: 'metric', clock: '12' })
+  expect(await getAccount(as(other.userId))).toMatchObject({ name: 'Anna', units: METRIC, clock: '12' })
   await expect(getAccount(as('11111111-1111-4111-8111-111111111111'))).rejects.toMatchObject({ code: 'not_found' })
 })
 

@@ -1,4 +1,6 @@
 // Setting up a rink and changing it: all or nothing, once, and only by those who may.
+import { findAccount } from '@/db/queries/users'
+import { IMPERIAL } from '@/lib/units'
 import { randomUUID } from 'node:crypto'
 import { afterAll, beforeAll, beforeEach, describe, expect, test } from 'vitest'
 import { findRinkForJudging } from '@/db/queries/rinks'
@@ -99,7 +101,7 @@ describe('setting up', () => {
     expect(rink?.water.temperatureC).toBeCloseTo(5, 9)
     expect(rink?.water.layerMm).toBeCloseTo(3.175, 9)
     expect(rink?.water.fillDepthMm).toBeCloseTo(101.6, 9)
-    expect(await database.db('users').where({ id: anna.userId }).first('units')).toEqual({ units: 'imperial' })
+    expect((await findAccount(database.db, anna.userId))?.units).toEqual(IMPERIAL)
   })
 
   test('a form sent twice, and two at once, make one rink', async () => {

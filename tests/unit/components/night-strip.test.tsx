@@ -1,4 +1,5 @@
 // The strip as the server sends it: complete before any script, the same numbers in the table, nothing the CSP would drop.
+import { IMPERIAL } from '@/lib/units'
 import { renderToStaticMarkup } from 'react-dom/server'
 import { describe, expect, test } from 'vitest'
 import { NightStrip } from '@/components/rinks/night-strip'
@@ -61,7 +62,7 @@ describe('the night strip', () => {
 
   test('speaks Fahrenheit, inches and the 24-hour clock to those who read them', () => {
     const view = tonightView()
-    const markup = draw({ viewer: { ...view.viewer, units: 'imperial', clock: '24' } })
+    const markup = draw({ viewer: { ...view.viewer, units: IMPERIAL, clock: '24' } })
     const [, , , , , , , , , , , , eleven] = rowsOf(markup)
     expect(eleven?.slice(0, 5)).toEqual(['23:00', 'flood', '0.09', '00:20', '15'])
     expect(markup).toContain('air, °F')

@@ -1,4 +1,5 @@
 // A night in sentences, from summaries written by hand; the sentences are those of the product's voice.
+import { IMPERIAL, METRIC } from '@/lib/units'
 import { describe, expect, test } from 'vitest'
 import type { NightSummary } from '@/lib/advice/night-summary'
 import { CAUTION_CODES, cautionText } from '@/lib/words/cautions'
@@ -7,7 +8,7 @@ import type { WordOptions } from '@/lib/words/options'
 import { reasonClause, REASON_CODES, reasonText } from '@/lib/words/reasons'
 import { WHY_CODES, whyList } from '@/lib/words/why'
 
-const words: WordOptions = { timeZone: 'America/Toronto', units: 'metric', clock: '12', locale: 'en' }
+const words: WordOptions = { timeZone: 'America/Toronto', units: METRIC, clock: '12', locale: 'en' }
 const now = new Date('2027-01-12T23:42:00Z')
 const pass = (startsAt: string, setBy: string) => ({ startsAt, setBy, layerMm: 3, waterL: 300, hoseMinutes: 12 })
 
@@ -124,7 +125,7 @@ describe('reasons', () => {
 
   test('in Fahrenheit and inches', () => {
     const values = { snowCoverCm: 5 }
-    expect(reasonClause({ code: 'snow_to_clear', values }, { ...words, units: 'imperial' })).toBe(
+    expect(reasonClause({ code: 'snow_to_clear', values }, { ...words, units: IMPERIAL })).toBe(
       '2.0 in of snow lies on the sheet: clear all of it first',
     )
   })

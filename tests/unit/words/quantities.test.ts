@@ -1,13 +1,17 @@
 // Quantities and times in words, in both units and on both clocks.
 import { describe, expect, test } from 'vitest'
+import { IMPERIAL, METRIC } from '@/lib/units'
 import type { WordOptions } from '@/lib/words/options'
 import {
+  areaText,
   durationText,
+  flowText,
   iceText,
   layerText,
   numberText,
   rateText,
   signedTemperatureText,
+  sizeText,
   snowText,
   temperatureText,
   waterText,
@@ -15,13 +19,15 @@ import {
 } from '@/lib/words/quantities'
 import { clockText, dayPartText, doneByText, nightText, spanText } from '@/lib/words/times'
 
-const metric: WordOptions = { timeZone: 'America/Toronto', units: 'metric', clock: '12', locale: 'en' }
-const imperial: WordOptions = { ...metric, units: 'imperial' }
+const metric: WordOptions = { timeZone: 'America/Toronto', units: METRIC, clock: '12', locale: 'en' }
+const imperial: WordOptions = { ...metric, units: IMPERIAL }
+/** As many Canadians read them. */
+const mixed: WordOptions = { ...metric, units: { temperature: 'C', ice: 'in', water: 'gal', size: 'ft', wind: 'm/s' } }
 const clock24: WordOptions = { ...metric, clock: '24' }
 
 describe('quantities', () => {
   // Conversions by hand: -10 °C = 14 °F; 3 mm = 0.118 in; 94 mm = 3.70 in; 3.4 cm = 1.34 in; 2 m/s = 7.2 km/h = 4.47 mph;
-  // 300 L = 79.25 US gal; 2.5 mm/h = 0.098 in/h.
+  // 300 L = 79.25 US gal; 25 L = 6.60 US gal; 12.192 m = 40 ft; 100 m² = 1076.4 ft²; 2.5 mm/h = 0.098 in/h.
   test.each([
     [temperatureText(-10, metric), '−10 °C'],
     [temperatureText(-10, imperial), '14 °F'],
@@ -38,6 +44,15 @@ describe('quantities', () => {
     [windText(2, imperial), '4 mph'],
     [waterText(300, metric), '300 L'],
     [waterText(300, imperial), '79 gal'],
+    [temperatureText(-10, mixed), '−10 °C'],
+    [iceText(94, mixed), '3.7 in'],
+    [windText(2, mixed), '2 m/s'],
+    [flowText(25, metric), '25 L/min'],
+    [flowText(25, mixed), '6.6 gal/min'],
+    [sizeText(12.192, metric), '12.2 m'],
+    [sizeText(12.192, mixed), '40 ft'],
+    [areaText(100, metric), '100 m²'],
+    [areaText(100, mixed), '1076 ft²'],
     [rateText(2.49, metric), '2.5 mm an hour'],
     [rateText(2.5, imperial), '0.10 in an hour'],
     [durationText(110), '1 h 50 min'],

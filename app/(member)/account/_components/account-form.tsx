@@ -3,7 +3,53 @@
 import { ActionForm } from '@/components/ui/action-form'
 import { SelectField, TextField } from '@/components/ui/field'
 import type { AccountView } from '@/lib/services/own-account'
+import type { UnitName } from '@/lib/units'
 import { saveAccountAction } from '../actions'
+
+/** Each with what is read and typed in it. */
+const UNIT_FIELDS: readonly { name: UnitName; label: string; choices: readonly (readonly [string, string])[] }[] = [
+  {
+    name: 'temperature',
+    label: 'Temperature',
+    choices: [
+      ['C', '°C'],
+      ['F', '°F'],
+    ],
+  },
+  {
+    name: 'ice',
+    label: 'Ice, snow, rain and depths',
+    choices: [
+      ['cm', 'Centimetres and millimetres'],
+      ['in', 'Inches'],
+    ],
+  },
+  {
+    name: 'water',
+    label: 'Water',
+    choices: [
+      ['L', 'Litres'],
+      ['gal', 'US gallons'],
+    ],
+  },
+  {
+    name: 'size',
+    label: 'Size of the yard',
+    choices: [
+      ['m', 'Metres'],
+      ['ft', 'Feet'],
+    ],
+  },
+  {
+    name: 'wind',
+    label: 'Wind',
+    choices: [
+      ['km/h', 'Kilometres an hour'],
+      ['m/s', 'Metres a second'],
+      ['mph', 'Miles an hour'],
+    ],
+  },
+]
 
 export function AccountForm({ name, units, clock }: Pick<AccountView, 'name' | 'units' | 'clock'>) {
   return (
@@ -18,17 +64,22 @@ export function AccountForm({ name, units, clock }: Pick<AccountView, 'name' | '
             defaultValue={values?.name ?? name}
             error={fields?.name}
           />
-          {/* React resets a select to the choice it was first drawn with; the key draws it anew. */}
-          <SelectField
-            key={`units ${values?.units}`}
-            label="Units"
-            name="units"
-            defaultValue={values?.units ?? units}
-            error={fields?.units}
-          >
-            <option value="metric">Metric: °C, mm, litres</option>
-            <option value="imperial">Imperial: °F, inches, gallons</option>
-          </SelectField>
+          {UNIT_FIELDS.map(({ name: unit, label, choices }) => (
+            // React resets a select to the choice it was first drawn with; the key draws it anew.
+            <SelectField
+              key={`${unit} ${values?.[unit]}`}
+              label={label}
+              name={unit}
+              defaultValue={values?.[unit] ?? units[unit]}
+              error={fields?.[unit]}
+            >
+              {choices.map(([value, words]) => (
+                <option key={value} value={value}>
+                  {words}
+                </option>
+              ))}
+            </SelectField>
+          ))}
           <SelectField
             key={`clock ${values?.clock}`}
             label="Clock"

@@ -27,22 +27,19 @@ export function DaysAhead({ view, days }: { view: TonightView; days: DayAhead[] 
   const frame = useRef<HTMLDivElement>(null)
   const isNear = useNearViewport(frame)
   const reader = readerOf(view)
-  const isImperial = reader.units === 'imperial'
+  const depthUnit = reader.units.ice === 'in' ? 'in' : 'mm'
+  const airUnit = `°${reader.units.temperature}`
   return (
     <section className="mt-10">
       <h2 className="mb-2 text-body font-semibold">The days ahead</h2>
       <div ref={frame} aria-hidden="true" className="h-[240px]">
         {isNear ? (
-          <Chart
-            days={days.map((day) => columnOf(day, isImperial))}
-            depthUnit={isImperial ? 'in' : 'mm'}
-            airUnit={isImperial ? '°F' : '°C'}
-          />
+          <Chart days={days.map((day) => columnOf(day, reader))} depthUnit={depthUnit} airUnit={airUnit} />
         ) : null}
       </div>
       <p className="mt-1 text-small text-graphite">
-        Bars: {isImperial ? 'inches' : 'mm'} of water that could freeze in the day, solid where there are hours to
-        flood. Lines: high of the air, and low dashed, {isImperial ? '°F' : '°C'}.
+        Bars: {depthUnit === 'in' ? 'inches' : depthUnit} of water that could freeze in the day, solid where there are
+        hours to flood. Lines: high of the air, and low dashed, {airUnit}.
       </p>
       <Disclosure summary="Show as table" className="text-small">
         <DataTable
@@ -55,14 +52,16 @@ export function DaysAhead({ view, days }: { view: TonightView; days: DayAhead[] 
   )
 }
 
-function columnOf(day: DayAhead, isImperial: boolean) {
+function columnOf(day: DayAhead, { units }: WordOptions) {
   const round = (value: number | null, digits: number) => (value === null ? null : Number(value.toFixed(digits)))
-  const air = (value: number | null) => round(value === null || !isImperial ? value : celsiusToFahrenheit(value), 0)
+  const air = (value: number | null) =>
+    round(value === null || units.temperature === 'C' ? value : celsiusToFahrenheit(value), 0)
   return {
     day: shortDayText(day.date),
-    freezable: isImperial
-      ? round(day.freezableMm === null ? null : mmToInches(day.freezableMm), 2)
-      : round(day.freezableMm, 0),
+    freezable:
+      units.ice === 'in'
+        ? round(day.freezableMm === null ? null : mmToInches(day.freezableMm), 2)
+        : round(day.freezableMm, 0),
     low: air(day.lowC),
     high: air(day.highC),
     hasFloodHours: day.floodHours > 0,

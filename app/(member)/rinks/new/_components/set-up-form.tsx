@@ -14,8 +14,8 @@ import { TextField } from '@/components/ui/field'
 import { setUpRinkAction } from '../actions'
 import { ToldFields } from './told-fields'
 
-export function SetUpForm({ initial, email }: { initial: FormValues; email: string }) {
-  const form = useRinkForm(setUpRinkAction, initial)
+export function SetUpForm({ initial, email, isFirst }: { initial: FormValues; email: string; isFirst: boolean }) {
+  const form = useRinkForm(setUpRinkAction, initial, isFirst)
   return (
     <RinkFormFrame form={form} submit="Set up this rink" busy="Setting up">
       <input type="hidden" name="creationKey" value={form.values.creationKey} />

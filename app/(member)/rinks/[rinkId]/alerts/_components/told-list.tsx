@@ -5,11 +5,11 @@ import { localDateOf } from '@/lib/advice/zoned-time'
 import type { AlertSettings } from '@/lib/services/alert-preferences'
 import { clockText } from '@/lib/words/times'
 
-export function ToldList({ settings: { told, rink, clock } }: { settings: AlertSettings }) {
+export function ToldList({ settings: { told, rink, units, clock } }: { settings: AlertSettings }) {
   if (told.length === 0) {
     return <p className="text-graphite">Nothing yet. The first word comes on the afternoon before a good night.</p>
   }
-  const words = { units: 'metric', clock, timeZone: rink.timeZone, locale: 'en' } as const
+  const words = { units, clock, timeZone: rink.timeZone, locale: 'en' }
   return (
     <ul>
       {told.map((message) => {

@@ -3,9 +3,11 @@ import { advanceSheet, clearSnow, pourLayer, type SheetState } from '@/lib/physi
 import { minutesToSet } from '@/lib/physics/layer'
 import type { PreparedHour } from '@/lib/physics/types'
 import { judgeFloodStart } from './flood-factors'
+import { judgePasses } from './move-pass'
 import type { ForecastRun } from './forecast-run'
 import { nightBounds, nightDateOf, tonightDate } from './night'
-import { planPasses, type PlanSlot, type SlotOutcome } from './plan'
+import type { NightRun } from './night-model'
+import { planPasses, type PlannedStart, type PlanSlot, type SlotOutcome } from './plan'
 import { isGood, scoreOf } from './score-hours'
 import { isAvailableAt, type Setting } from './setting'
 import { PLAN } from './thresholds'
@@ -43,15 +45,42 @@ export function planTonight(
   const slots = hours.flatMap((index) =>
     slotsOfHour(setting, run, index, fromMillis, spent.get(index), shares.get(index) ?? 1),
   )
-  return planPasses(slots, maxPasses).map(({ startMillis, setMillis }) => {
-    const waterL = input.water.layerMm * input.rink.lengthM * input.rink.widthM
-    return {
-      startsAt: toIso(startMillis),
-      setBy: toIso(setMillis),
-      layerMm: input.water.layerMm,
-      waterL: Math.round(waterL),
-      hoseMinutes: Math.ceil(waterL / input.water.flowLPerMin),
-    }
+  const waterL = input.water.layerMm * input.rink.lengthM * input.rink.widthM
+  return plannedOn({ setting, run }, slots, maxPasses).map(({ startMillis, setMillis }) => ({
+    startsAt: toIso(startMillis),
+    setBy: toIso(setMillis),
+    layerMm: input.water.layerMm,
+    waterL: Math.round(waterL),
+    hoseMinutes: Math.ceil(waterL / input.water.flowLPerMin),
+  }))
+}
+
+/**
+ * Plans, and tells when each pass is set on the very sheet that the passes before it leave. Where that is later than the
+ * slots had it, the rest of the night is planned anew from then on.
+ */
+function plannedOn(night: NightRun, slots: readonly PlanSlot[], maxPasses: number): PlannedStart[] {
+  let starts = planPasses(slots, maxPasses)
+  for (let kept = 1; kept <= maxPasses; kept += 1) {
+    starts = truly(night, starts)
+    const early = starts.findIndex(({ startMillis }, index) => startMillis < (starts[index - 1]?.setMillis ?? 0))
+    if (early < 0) return starts
+    const free = (starts[early - 1] as PlannedStart).setMillis
+    const later = slots.filter(({ startMillis }) => startMillis >= free).map((slot) => ({ ...slot, first: slot.later }))
+    starts = [...starts.slice(0, early), ...planPasses(later, maxPasses - early)]
+  }
+  return truly(night, starts)
+}
+
+function truly(night: NightRun, starts: readonly PlannedStart[]): PlannedStart[] {
+  const { layer } = night.setting
+  const judged = judgePasses(
+    night,
+    starts.map(({ startMillis }) => ({ startsAt: toIso(startMillis), ...layer })),
+  )
+  return starts.map((start, index) => {
+    const setBy = judged[index]?.setBy
+    return setBy ? { ...start, setMillis: Date.parse(setBy) } : start
   })
 }
 

@@ -141,6 +141,14 @@ export const SNOW_RULES = {
   freeFloodMm: 0.5,
 }
 
+export const SNOW_ON_THIN_ICE = {
+  /** Snow due within so long is worth a word, from so much on. Ours. [h, cm] */
+  aheadHours: 24,
+  leastCm: 1,
+  /** New snow near -5 °C. Anderson 1976: 104 kg/m³; 10:1 in the NCDC table for 34-28 °F. [kg/m³] */
+  newSnowKgM3: 100,
+}
+
 export const CAUTIONS = {
   /** From here the page says how cold it feels. Ours. [°C wind chill] */
   feelsColdC: -10,

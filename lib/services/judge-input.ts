@@ -1,8 +1,10 @@
 // Puts together what the model is asked: the rink, its water, its sheet, what was poured, and the forecast.
-import type { PouredPass } from '@/db/queries/floods'
+import type { Db } from '@/db/knex'
+import { listFloodsSince, type PouredPass } from '@/db/queries/floods'
 import type { StoredForecast } from '@/db/queries/forecasts'
 import type { RinkForJudging } from '@/db/queries/rinks'
-import type { StoredSheet } from '@/db/queries/sheet-states'
+import { findStartingSheet, type StoredSheet } from '@/db/queries/sheet-states'
+import type { RinkAccess } from '@/lib/access/proofs'
 import { MODEL_VERSION } from '@/lib/advice/judge'
 import type { JudgeInput } from '@/lib/advice/types'
 
@@ -22,6 +24,20 @@ function sheetOf(sheet: StoredSheet | undefined, firstHourAt: Date): JudgeInput[
     // A state of another model is not read: its plain numbers are a fair start.
     ...(sheet.state && sheet.modelVersion === MODEL_VERSION ? { state: sheet.state } : {}),
   }
+}
+
+/** What the model is asked about a rink now; undefined when the forecast is empty. */
+export async function gatherJudgeInput(
+  db: Db,
+  access: RinkAccess,
+  { rink, forecast, now }: { rink: RinkForJudging; forecast: StoredForecast; now: Date },
+): Promise<JudgeInput | undefined> {
+  const firstHour = forecast.hours[0]
+  if (!firstHour) return undefined
+  const firstHourAt = new Date(firstHour.time)
+  const sheet = await findStartingSheet(db, rink.id, { firstHourAt, now })
+  const poured = await listFloodsSince(db, access, sheet && sheet.asOf > firstHourAt ? sheet.asOf : firstHourAt)
+  return judgeInputOf({ rink, forecast, sheet, poured, firstHourAt, now })
 }
 
 export function judgeInputOf(facts: {

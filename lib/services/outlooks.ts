@@ -1,9 +1,8 @@
 // Judging a rink: newest forecast and sheet in; scored hours, advised window and what there is to tell out.
-import { listFloodsSince } from '@/db/queries/floods'
 import { findNewestForecast, type StoredForecast } from '@/db/queries/forecasts'
 import { hasOutlook, insertOutlook, insertScoredHours } from '@/db/queries/outlooks'
 import { findRinkForJudging, type RinkForJudging } from '@/db/queries/rinks'
-import { findStartingSheet, keepModelledSheet } from '@/db/queries/sheet-states'
+import { keepModelledSheet } from '@/db/queries/sheet-states'
 import type { Db } from '@/db/knex'
 import type { RinkAccess } from '@/lib/access/proofs'
 import { judge } from '@/lib/advice/judge'
@@ -12,7 +11,7 @@ import { summariseNight } from '@/lib/advice/night-summary'
 import type { Judgement } from '@/lib/advice/types'
 import { adviseNight } from './alerts'
 import { slotOf } from './forecasts'
-import { judgeInputOf } from './judge-input'
+import { gatherJudgeInput } from './judge-input'
 
 interface Judged {
   rink: RinkForJudging
@@ -62,14 +61,11 @@ export async function refreshOutlook({ db, now }: { db: Db; now: Date }, access:
 async function judgeRink(db: Db, access: RinkAccess<'view'>, slotAt: Date, now: Date): Promise<Judged | undefined> {
   const rink = await findRinkForJudging(db, access.rinkId)
   const forecast = rink && (await findNewestForecast(db, rink.gridCellId))
-  const firstHour = forecast?.hours[0]
-  if (!rink || !forecast || !firstHour) return undefined
+  if (!rink || !forecast) return undefined
   const key = { rinkId: rink.id, forecastId: forecast.id, settingsVersion: rink.settingsVersion, slotAt }
   if (await hasOutlook(db, key)) return undefined
-  const firstHourAt = new Date(firstHour.time)
-  const sheet = await findStartingSheet(db, rink.id, { firstHourAt, now })
-  const poured = await listFloodsSince(db, access, sheet && sheet.asOf > firstHourAt ? sheet.asOf : firstHourAt)
-  const input = judgeInputOf({ rink, forecast, sheet, poured, firstHourAt, now })
+  const input = await gatherJudgeInput(db, access, { rink, forecast, now })
+  if (!input) return undefined
   return { rink, forecast, judgement: judge(input, { stateAt: slotAt.toISOString() }) }
 }
 

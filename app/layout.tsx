@@ -1,7 +1,9 @@
-// Html shell. Pages are rendered per request, because each gets its own CSP nonce (proxy.ts).
+// Html shell. Pages are rendered per request, because each gets its own CSP nonce (proxy.ts) and its reader's theme.
 import type { Metadata, Viewport } from 'next'
 import { connection } from 'next/server'
 import type { ReactNode } from 'react'
+import { LightChanges } from '@/components/theme/light-changes'
+import { readPageTheme } from '@/lib/auth/page-theme'
 import './globals.css'
 
 export const metadata: Metadata = {
@@ -9,20 +11,32 @@ export const metadata: Metadata = {
   description: 'When to fill, when to flood and when to hold off, for keepers of outdoor ice rinks.',
 }
 
-export const viewport: Viewport = {
-  width: 'device-width',
-  initialScale: 1,
-  themeColor: [
-    { media: '(prefers-color-scheme: light)', color: '#f6f3ec' },
-    { media: '(prefers-color-scheme: dark)', color: '#0f161d' },
-  ],
+/** The tokens of paper (globals.css), for what the browser draws round the page. */
+const PAPER = { light: '#f6f3ec', dark: '#0f161d' }
+
+export async function generateViewport(): Promise<Viewport> {
+  const { theme } = await readPageTheme()
+  return {
+    width: 'device-width',
+    initialScale: 1,
+    themeColor: theme
+      ? PAPER[theme]
+      : [
+          { media: '(prefers-color-scheme: light)', color: PAPER.light },
+          { media: '(prefers-color-scheme: dark)', color: PAPER.dark },
+        ],
+  }
 }
 
 export default async function RootLayout({ children }: { children: ReactNode }) {
   await connection()
+  const { theme, changes } = await readPageTheme()
   return (
-    <html lang="en">
-      <body className="font-sans text-body">{children}</body>
+    <html lang="en" data-theme={theme}>
+      <body className="font-sans text-body">
+        {children}
+        <LightChanges theme={theme} changes={changes} />
+      </body>
     </html>
   )
 }

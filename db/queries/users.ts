@@ -15,6 +15,7 @@ export interface AccountRow {
   name: string
   units: Units
   clock: UserRow['clock']
+  theme: UserRow['theme']
   hasPassword: boolean
   /** The mail server refused this address for good. */
   isEmailRefused: boolean
@@ -63,6 +64,7 @@ export async function findAccount(db: Db, userId: string): Promise<AccountRow | 
       'email',
       'name',
       'clock',
+      'theme',
       unitsColumn(db, 'users').wrap('', ' as units'),
       db.raw('password_hash is not null as "hasPassword"'),
       db.raw('email_refused_at is not null as "isEmailRefused"'),
@@ -88,7 +90,7 @@ export async function setPasswordHash(db: Db, userId: string, passwordHash: stri
 export async function updateAccount(
   db: Db,
   userId: string,
-  { units, ...values }: Pick<UserRow, 'name' | 'clock'> & { units: Units },
+  { units, ...values }: Pick<UserRow, 'name' | 'clock' | 'theme'> & { units: Units },
   now: Date,
 ): Promise<void> {
   await db('users')

@@ -1,5 +1,6 @@
 // What people type about themselves.
 import { z } from 'zod'
+import { THEMES } from './themes'
 import { UNIT_CHOICES, type UnitName } from '@/lib/units'
 
 export const MIN_PASSWORD_LENGTH = 10
@@ -66,8 +67,9 @@ export const accountSchema = z
     size: unitSchema('size'),
     wind: unitSchema('wind'),
     clock: z.enum(['12', '24'], 'Choose a 12-hour or a 24-hour clock.'),
+    theme: z.enum(THEMES, 'Choose one of these looks.'),
   })
-  .transform(({ name, clock, ...units }) => ({ name, clock, units }))
+  .transform(({ name, clock, theme, ...units }) => ({ name, clock, theme, units }))
 
 export type SignUpInput = z.output<typeof signUpSchema>
 export type PasswordSignInInput = z.output<typeof passwordSignInSchema>

@@ -6,6 +6,7 @@ import { hashPassword, verifyPassword } from '@/lib/auth/passwords'
 import type { ServiceContext } from '@/lib/context'
 import { InvalidInputError, NotFoundError } from '@/lib/errors'
 import type { AccountInput, PasswordChangeInput } from '@/lib/schemas/accounts'
+import type { ThemeChoice } from '@/lib/schemas/themes'
 import type { Units } from '@/lib/units'
 import { spend } from './rate-limits'
 
@@ -14,6 +15,7 @@ export interface AccountView {
   name: string
   units: Units
   clock: '12' | '24'
+  theme: ThemeChoice
   hasPassword: boolean
 }
 

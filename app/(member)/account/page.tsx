@@ -17,14 +17,14 @@ export const metadata: Metadata = { title: 'Your account' }
 
 export default async function AccountPage() {
   const context = await pageContext()
-  const { email, name, units, clock, hasPassword } = await orNotFound(getAccount(context))
+  const { email, name, units, clock, theme, hasPassword } = await orNotFound(getAccount(context))
   const rinks = await listMyRinks(context)
   return (
     <PageFrame>
       <div className="max-w-[30rem]">
         <h1 className="mb-2 text-verdict font-medium tracking-tight">Your account</h1>
         <p className="mb-6 break-words text-graphite">{email}</p>
-        <AccountForm name={name} units={units} clock={clock} />
+        <AccountForm name={name} units={units} clock={clock} theme={theme} />
         <Section title="Rinks">
           <ul className="mb-4 list-none p-0">
             {rinks.map((rink) => (

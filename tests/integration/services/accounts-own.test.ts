@@ -98,10 +98,23 @@ const MIXED: Units = { temperature: 'C', ice: 'in', water: 'gal', size: 'ft', wi
 test('name, units and clock are kept, one’s own only', async () => {
   const { email, userId } = await newMember(database.db)
   const other = await newMember(database.db)
-  await saveAccount(as(userId), { name: 'Anna B.', units: MIXED, clock: '24' })
-  const expected = { email, name: 'Anna B.', units: MIXED, clock: '24', hasPassword: true, isEmailRefused: false }
+  await saveAccount(as(userId), { name: 'Anna B.', units: MIXED, clock: '24', theme: 'dark' })
+  const expected = {
+    email,
+    name: 'Anna B.',
+    units: MIXED,
+    clock: '24',
+    theme: 'dark',
+    hasPassword: true,
+    isEmailRefused: false,
+  }
   expect(await getAccount(as(userId))).toEqual(expected)
-  expect(await getAccount(as(other.userId))).toMatchObject({ name: 'Anna', units: METRIC, clock: '12' })
+  expect(await getAccount(as(other.userId))).toMatchObject({
+    name: 'Anna',
+    units: METRIC,
+    clock: '12',
+    theme: 'system',
+  })
   await expect(getAccount(as('11111111-1111-4111-8111-111111111111'))).rejects.toMatchObject({ code: 'not_found' })
 })
 

@@ -37,9 +37,18 @@ test('an accent is the same password from every keyboard', () => {
 })
 
 test('units and clock are of the known kinds', () => {
-  const fields = { name: 'Anna', temperature: 'C', ice: 'in', water: 'gal', size: 'ft', wind: 'm/s', clock: '24' }
+  const fields = {
+    name: 'Anna',
+    temperature: 'C',
+    ice: 'in',
+    water: 'gal',
+    size: 'ft',
+    wind: 'm/s',
+    clock: '24',
+    theme: 'dark',
+  }
   const units = { temperature: 'C', ice: 'in', water: 'gal', size: 'ft', wind: 'm/s' }
-  expect(accountSchema.parse(fields)).toEqual({ name: 'Anna', clock: '24', units })
-  const faults = accountSchema.safeParse({ ...fields, ice: 'stone', wind: 'knots', clock: '25' }).error
-  expect(faults?.issues.map(({ path }) => path[0])).toEqual(['ice', 'wind', 'clock'])
+  expect(accountSchema.parse(fields)).toEqual({ name: 'Anna', clock: '24', theme: 'dark', units })
+  const faults = accountSchema.safeParse({ ...fields, ice: 'stone', wind: 'knots', clock: '25', theme: 'pink' }).error
+  expect(faults?.issues.map(({ path }) => path[0])).toEqual(['ice', 'wind', 'clock', 'theme'])
 })

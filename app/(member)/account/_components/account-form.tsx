@@ -51,7 +51,7 @@ const UNIT_FIELDS: readonly { name: UnitName; label: string; choices: readonly (
   },
 ]
 
-export function AccountForm({ name, units, clock }: Pick<AccountView, 'name' | 'units' | 'clock'>) {
+export function AccountForm({ name, units, clock, theme }: Pick<AccountView, 'name' | 'units' | 'clock' | 'theme'>) {
   return (
     <ActionForm action={saveAccountAction} submit="Save">
       {({ fields, values }) => (
@@ -89,6 +89,19 @@ export function AccountForm({ name, units, clock }: Pick<AccountView, 'name' | '
           >
             <option value="12">8:30 pm</option>
             <option value="24">20:30</option>
+          </SelectField>
+          <SelectField
+            key={`theme ${values?.theme}`}
+            label="Look"
+            name="theme"
+            hint="After sunset is told by the sky over your rink."
+            defaultValue={values?.theme ?? theme}
+            error={fields?.theme}
+          >
+            <option value="system">As this device has it</option>
+            <option value="light">Light</option>
+            <option value="dark">Dark</option>
+            <option value="dark-after-sunset">Dark after sunset at the rink</option>
           </SelectField>
         </>
       )}

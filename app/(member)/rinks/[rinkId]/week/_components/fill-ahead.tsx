@@ -1,0 +1,58 @@
+// While waiting for the fill: when the hose could run, and when the ice would be there.
+import { Facts, type Fact } from '@/components/ui/facts'
+import type { AdviceWindow, FillOutlook, Spread } from '@/lib/advice/types'
+import type { WeekView } from '@/lib/schemas/week-view'
+import type { WordOptions } from '@/lib/words/options'
+import { waterText } from '@/lib/words/quantities'
+import { clockText, doneByText } from '@/lib/words/times'
+import { longDayText } from '@/lib/words/week'
+import { hoseHoursText } from '@/lib/words/week-night'
+
+export function FillAhead({ outlook, reader }: { outlook: NonNullable<WeekView['outlook']>; reader: WordOptions }) {
+  const { fill, fillWindows } = outlook
+  if (!fill.startsAt) return null
+  return (
+    <div className="mb-8 gap-x-14 lg:grid lg:grid-cols-2">
+      <section>
+        <h2 className="mb-2 font-semibold">The fill</h2>
+        <div className="border-t border-rule">
+          <Facts rows={factsOf(fill, reader)} />
+        </div>
+        <p className="mt-2 text-small text-graphite">
+          Dates are those by which one, five and nine of ten forecast runs get there. Drill before anyone skates.
+        </p>
+      </section>
+      <section className="mt-7 lg:mt-0">
+        <h2 className="mb-2 font-semibold">Times to start</h2>
+        <div className="border-t border-rule">
+          <Facts rows={fillWindows.map((window) => windowFact(window, reader))} />
+        </div>
+      </section>
+    </div>
+  )
+}
+
+const momentText = (at: string, reader: WordOptions) => `${longDayText(at, reader)}, ${doneByText(at, reader)}`
+
+function factsOf(fill: FillOutlook, reader: WordOptions): Fact[] {
+  const skin = fill.skinAtSpread?.p50 ?? fill.skinAt
+  return [
+    ...(fill.startsAt ? [{ name: 'Best start', figure: momentText(fill.startsAt, reader) }] : []),
+    { name: 'Hose', figure: `${hoseHoursText(fill.hoseHours)}, ${waterText(fill.litres, reader)}` },
+    { name: 'Skinned over', figure: skin ? momentText(skin, reader) : 'not within the forecast' },
+    { name: 'Carries skaters', figure: spreadText(fill.carriesSkaterAt, reader) },
+    ...(fill.frozenThroughAt ? [{ name: 'Frozen through', figure: spreadText(fill.frozenThroughAt, reader) }] : []),
+  ]
+}
+
+function spreadText({ p10, p50, p90 }: Spread, reader: WordOptions): string {
+  if (!p10) return 'not within the forecast'
+  const days = [p10, p50, p90].map((at) => (at ? longDayText(at, reader) : 'later'))
+  return [...new Set(days)].join(' · ')
+}
+
+function windowFact(window: AdviceWindow, reader: WordOptions): Fact {
+  const span = `${clockText(window.startsAt, reader)} to ${clockText(window.latestStartAt, reader)}`
+  const runs = window.runs > 0 ? `${Math.round(window.agreement * window.runs)} of ${window.runs} runs` : ''
+  return { name: `${longDayText(window.startsAt, reader)}, ${span}`, figure: runs }
+}

@@ -1,0 +1,39 @@
+// The nights ahead at a glance; a night's link opens its hours in place. All of it is drawn on the server.
+import type { Metadata } from 'next'
+import { pageContext } from '@/lib/auth/request-context'
+import { orNotFound } from '@/lib/http/or-not-found'
+import { dateSchema } from '@/lib/schemas/local-time'
+import type { WeekView } from '@/lib/schemas/week-view'
+import { getWeek } from '@/lib/services/week'
+import type { WordOptions } from '@/lib/words/options'
+import { FillAhead } from './_components/fill-ahead'
+import { NightList } from './_components/night-list'
+import { WeekHeadline } from './_components/week-headline'
+import { WeekNotices } from './_components/week-notices'
+import { WeekSource } from './_components/week-source'
+import { WithoutNights } from './_components/without-nights'
+
+export const metadata: Metadata = { title: 'The nights ahead' }
+
+export default async function WeekPage({ params, searchParams }: PageProps<'/rinks/[rinkId]/week'>) {
+  const [{ rinkId }, { night }] = await Promise.all([params, searchParams])
+  const openDate = dateSchema.safeParse(night).data
+  const view = await orNotFound(getWeek(await pageContext(), rinkId, openDate))
+  const { outlook } = view
+  if (view.rink.phase === 'closed' || !outlook || outlook.nights.length === 0) return <WithoutNights view={view} />
+  return <Nights view={view} outlook={outlook} />
+}
+
+function Nights({ view, outlook }: { view: WeekView; outlook: NonNullable<WeekView['outlook']> }) {
+  const reader: WordOptions = { ...view.viewer, timeZone: view.rink.timeZone, locale: 'en' }
+  const isBeforeFill = view.rink.phase === 'waiting' || view.rink.phase === 'filling'
+  return (
+    <>
+      <WeekNotices view={view} />
+      <WeekHeadline view={view} outlook={outlook} reader={reader} />
+      {isBeforeFill ? <FillAhead outlook={outlook} reader={reader} /> : null}
+      <NightList view={view} outlook={outlook} reader={reader} />
+      <WeekSource view={view} reader={reader} />
+    </>
+  )
+}

@@ -1,0 +1,44 @@
+// How many passes a later night has room for: a count from the window, until the plan of that day is made.
+import { PLAN } from './thresholds'
+import { toIso } from './zoned-time'
+import type { AdviceWindow, ScoredHour } from './types'
+
+const HOUR_MILLIS = 3_600_000
+const STEP_MILLIS = PLAN.stepMinutes * 60_000
+
+export interface NightPasses {
+  count: number
+  /** First pour and last set. */
+  startsAt: string
+  setBy: string
+  /** Counted from the window; only tonight has a plan. */
+  isEstimate: boolean
+}
+
+/**
+ * Passes one after the other from the start of the window, each once the last is set. Every pass is taken to set as fast
+ * as the first one of its hour would; on a sheet that the pass before has warmed it takes somewhat longer, so the count is
+ * an upper one.
+ *
+ * @param hours The night's hours, in order.
+ * @param maxPasses Most passes of a night, 0 or more.
+ * @returns Null when no pass fits.
+ */
+export function estimatePasses(
+  window: AdviceWindow,
+  hours: readonly ScoredHour[],
+  maxPasses: number,
+): NightPasses | null {
+  const lastStart = Date.parse(window.latestStartAt)
+  let at = Date.parse(window.startsAt)
+  let count = 0
+  let setMillis = at
+  while (count < maxPasses && at <= lastStart) {
+    const hour = hours.find(({ time }) => Date.parse(time) <= at && at < Date.parse(time) + HOUR_MILLIS)
+    if (hour?.verdict !== 'flood' || hour.setsAt === null) break
+    setMillis = at + Date.parse(hour.setsAt) - Date.parse(hour.time)
+    count += 1
+    at = Math.ceil(setMillis / STEP_MILLIS) * STEP_MILLIS
+  }
+  return count === 0 ? null : { count, startsAt: window.startsAt, setBy: toIso(setMillis), isEstimate: true }
+}

@@ -1,0 +1,169 @@
+// The nights ahead, one by one: verdict, ice gained or lost, what falls, and how many forecast runs agree.
+import { ICE_DENSITY, WATER_DENSITY } from '@/lib/physics/constants'
+import { tonightDate } from './night'
+import { summariseNight, type NightSummary, type NightVerdict } from './night-summary'
+import { estimatePasses, type NightPasses } from './week-passes'
+import { addDays, toIso } from './zoned-time'
+import type { AdviceWindow, Judgement, Phase, Reason, ScoredHour, Thaw } from './types'
+
+const HOUR_MILLIS = 3_600_000
+/** From the fourth night on people plan with a forecast and do not decide on it. Ours. */
+const NEAR_NIGHTS = 3
+/** A night of which the forecast covers less than half tells nothing. Ours. */
+const LEAST_HOURS = 12
+/** A night with this many hours of a thaw belongs to it. Ours. */
+const THAW_HOURS = 12
+/** A trace below this is not worth a word. [mm, cm] */
+const WORTH_SAYING = 0.1
+
+const HAS_ICE: readonly Phase[] = ['freezing', 'skating', 'thaw']
+
+/** Snow and rain of a night, from the first wet hour to the last. */
+export interface NightFall {
+  startsAt: string
+  endsAt: string
+  rainMm: number
+  snowfallCm: number
+}
+
+export interface NightAhead {
+  nightDate: string
+  startsAt: string
+  endsAt: string
+  verdict: NightVerdict | 'thaw'
+  /** Beyond the horizon of a decision. */
+  isFar: boolean
+  window: AdviceWindow | null
+  /** Runs that find the window good, or of the best window that too few agree with; null where no run was asked. */
+  agreement: { agreeing: number; runs: number } | null
+  /** Null when nothing is to be poured. */
+  passes: NightPasses | null
+  /** What the weather does to the sheet, noon to noon, without floods; null without ice or with hours missing. [mm of ice] */
+  weatherMm: number | null
+  /** What the passes would add. [mm of ice] */
+  floodsMm: number
+  /** Water that could freeze in the night; null with hours missing. [mm] */
+  freezableMm: number | null
+  lowC: number | null
+  highC: number | null
+  falls: NightFall | null
+  /** Snow to clear before the flood. [cm] */
+  snowToClearCm: number
+  /** Why to hold. */
+  reason: Reason | null
+  thaw: Thaw | null
+  /** Where the forecast ends inside the night. */
+  forecastEndsAt: string | null
+}
+
+export interface WeekSetting {
+  now: Date
+  timeZone: string
+  phase: Phase
+  layerMm: number
+  maxPasses: number
+  /** At most so many nights. */
+  nights: number
+}
+
+/**
+ * The nights from tonight on, as far as the forecast covers them.
+ *
+ * @param judgement Result of `judge`, or the same shape read back from storage.
+ * @param setting.layerMm Water of one pass. [mm], above 0
+ * @returns Nights in order. Passes of tonight are the plan's; those of later nights are estimated from the window.
+ */
+export function nightsAhead(judgement: Judgement, setting: WeekSetting): NightAhead[] {
+  const tonight = tonightDate(setting.now, setting.timeZone)
+  const nights: NightAhead[] = []
+  for (let index = 0; index < setting.nights; index += 1) {
+    const nightDate = addDays(tonight, index)
+    const summary = summariseNight(judgement, { nightDate, now: setting.now, timeZone: setting.timeZone })
+    const hours = judgement.hours.filter(({ time }) => time >= summary.startsAt && time < summary.endsAt)
+    if (hours.length < LEAST_HOURS) break
+    nights.push(nightAhead(judgement, setting, summary, hours, index))
+  }
+  return nights
+}
+
+function nightAhead(
+  judgement: Judgement,
+  setting: WeekSetting,
+  summary: NightSummary,
+  hours: ScoredHour[],
+  index: number,
+): NightAhead {
+  const passes = passesOf(summary, hours, setting, index)
+  const isWhole = hours.every((hour) => hour.isKnown)
+  const air = hours.flatMap(({ weather }) => (weather ? [weather.airTemperatureC] : []))
+  const lastEnd = Date.parse(hours.at(-1)?.time ?? summary.startsAt) + HOUR_MILLIS
+  return {
+    nightDate: summary.nightDate,
+    startsAt: summary.startsAt,
+    endsAt: summary.endsAt,
+    verdict: verdictOf(summary, hours),
+    isFar: index >= NEAR_NIGHTS,
+    window: summary.window,
+    agreement: agreementOf(summary),
+    passes,
+    weatherMm: isWhole && HAS_ICE.includes(setting.phase) ? weatherChange(judgement.hours, hours) : null,
+    floodsMm: ((passes?.count ?? 0) * setting.layerMm * WATER_DENSITY) / ICE_DENSITY,
+    freezableMm: isWhole ? hours.reduce((sum, hour) => sum + Math.max(0, hour.freezeRateMmPerH ?? 0), 0) : null,
+    lowC: air.length > 0 ? Math.min(...air) : null,
+    highC: air.length > 0 ? Math.max(...air) : null,
+    falls: fallsOf(hours, setting.now),
+    snowToClearCm: summary.verdict === 'flood' ? snowToClear(summary, hours) : 0,
+    reason: summary.leadingReason,
+    thaw: summary.thaw,
+    forecastEndsAt: lastEnd < Date.parse(summary.endsAt) ? toIso(lastEnd) : null,
+  }
+}
+
+/** Cold hours between two mild spells freeze what melted: a thaw that long is the night's only when the air is mild too. */
+function verdictOf({ verdict, thaw }: NightSummary, hours: readonly ScoredHour[]): NightAhead['verdict'] {
+  if (verdict !== 'hold' || !thaw) return verdict
+  const thawing = hours.filter(({ time }) => time >= thaw.startsAt && time < thaw.endsAt)
+  const mild = hours.filter(({ weather }) => (weather?.airTemperatureC ?? 0) > 0)
+  return thawing.length >= THAW_HOURS && mild.length >= hours.length / 2 ? 'thaw' : 'hold'
+}
+
+function agreementOf({ window, windows }: NightSummary): NightAhead['agreement'] {
+  const asked = window ?? [...windows].sort((a, b) => b.agreement - a.agreement)[0]
+  if (!asked || asked.runs === 0) return null
+  return { agreeing: Math.round(asked.agreement * asked.runs), runs: asked.runs }
+}
+
+function passesOf(summary: NightSummary, hours: ScoredHour[], setting: WeekSetting, index: number): NightPasses | null {
+  if (summary.window?.kind !== 'flood') return null
+  if (index > 0) return estimatePasses(summary.window, hours, setting.maxPasses)
+  const [first] = summary.passes
+  if (!first || !summary.lastSetBy) return null
+  return { count: summary.passes.length, startsAt: first.startsAt, setBy: summary.lastSetBy, isEstimate: false }
+}
+
+/** Thickness at the end of the night less that at its start; before the forecast's first hour it is taken as that hour's. */
+function weatherChange(all: readonly ScoredHour[], hours: readonly ScoredHour[]): number {
+  const [first, last] = [hours[0], hours.at(-1)]
+  if (!first || !last) return 0
+  const before = all.findLast((hour) => hour.time < first.time) ?? first
+  return last.sheet.thicknessMm - before.sheet.thicknessMm
+}
+
+function fallsOf(hours: readonly ScoredHour[], now: Date): NightFall | null {
+  let falls: NightFall | null = null
+  for (const { time, weather } of hours) {
+    const endMillis = Date.parse(time) + HOUR_MILLIS
+    if (!weather || endMillis <= now.getTime()) continue
+    if (weather.rainMm <= WORTH_SAYING && weather.snowfallCm <= WORTH_SAYING) continue
+    falls ??= { startsAt: time, endsAt: time, rainMm: 0, snowfallCm: 0 }
+    falls.endsAt = toIso(endMillis)
+    falls.rainMm += weather.rainMm
+    falls.snowfallCm += weather.snowfallCm
+  }
+  return falls
+}
+
+function snowToClear({ window }: NightSummary, hours: readonly ScoredHour[]): number {
+  const start = hours.findLast((hour) => hour.time <= (window?.startsAt ?? ''))
+  return start?.reasons.some(({ code }) => code === 'snow_to_clear') ? start.sheet.snowCoverCm : 0
+}

@@ -1,0 +1,125 @@
+// The week in sentences: its headline, and how far to trust it.
+import type { FillOutlook, Phase } from '@/lib/advice/types'
+import type { WeekSummary } from '@/lib/advice/week-summary'
+import { addDays, localDateOf } from '@/lib/advice/zoned-time'
+import type { WordOptions } from './options'
+import { capitalised, countText, iceText, layerText } from './quantities'
+import { dayPartText, nightText, weekdayText } from './times'
+
+/** The headline in parts, so that a page can set off the middle one. */
+export interface WeekHeadline {
+  before: string
+  key: string
+  after: string
+  tone: 'flood' | 'fill' | 'thaw' | 'plain'
+}
+
+interface Week {
+  phase: Phase
+  summary: WeekSummary
+  fill: FillOutlook
+}
+
+const plain = (before: string): WeekHeadline => ({ before, key: '', after: '', tone: 'plain' })
+
+export function weekHeadline({ phase, summary, fill }: Week, now: Date, words: WordOptions): WeekHeadline {
+  if (phase === 'planning') return plain('Nothing to flood yet: the rink is still being planned.')
+  if (phase === 'waiting' || phase === 'filling') return fillHeadline(phase, summary, fill, now, words)
+  if (phase === 'freezing') return freezingHeadline(fill, now, words)
+  if (summary.thaw) return thawHeadline(summary, now, words)
+  const good = summary.goodDates.length
+  if (good === 0) return plain(`No good night in the ${countText(summary.nights)} ahead.`)
+  if (good === summary.nights) {
+    return { before: 'All', key: `${countText(good)} nights`, after: ' ahead are good.', tone: 'flood' }
+  }
+  const key = capitalised(nightsText(good))
+  return { before: '', key, after: ` of the ${countText(summary.nights)} ahead.`, tone: 'flood' }
+}
+
+const nightsText = (count: number) => `${countText(count)} good ${count === 1 ? 'night' : 'nights'}`
+
+function thawHeadline(summary: WeekSummary, now: Date, words: WordOptions): WeekHeadline {
+  const { thaw, isThawOn, goodBeforeThaw, goodAfterThaw } = summary
+  if (!thaw) return plain('')
+  const after = goodAfterThaw > 0 ? ` ${capitalised(nightsText(goodAfterThaw))} after it.` : ''
+  if (isThawOn) {
+    const key = `thaw until ${dayPartText(thaw.endsAt, now, words)}`
+    return { before: 'A', key, after: `.${after || ' No good night after it in this forecast.'}`, tone: 'thaw' }
+  }
+  const count = goodBeforeThaw === 0 ? 'No good night' : capitalised(nightsText(goodBeforeThaw))
+  const key = `thaw ${dayText(thaw.startsAt, now, words)}`
+  return { before: `${count} before the`, key, after: goodBeforeThaw === 0 ? `.${after}` : '.', tone: 'thaw' }
+}
+
+function fillHeadline(
+  phase: Phase,
+  summary: WeekSummary,
+  fill: FillOutlook,
+  now: Date,
+  words: WordOptions,
+): WeekHeadline {
+  if (!fill.startsAt) return plain(`No time to fill in the ${countText(summary.nights)} days ahead.`)
+  const { p50 } = fill.carriesSkaterAt
+  const carries = p50 ? `: skaters from about ${longDayText(p50, words)}.` : '.'
+  const when = dayPartText(fill.startsAt, now, words)
+  if (phase === 'filling') return { before: 'Go on', key: `filling ${when}`, after: carries, tone: 'fill' }
+  return { before: '', key: `Fill ${when}`, after: carries, tone: 'fill' }
+}
+
+function freezingHeadline(fill: FillOutlook, now: Date, words: WordOptions): WeekHeadline {
+  const { p50 } = fill.carriesSkaterAt
+  if (!p50) return plain('Keep off: the sheet will not carry skaters within this forecast.')
+  if (Date.parse(p50) <= now.getTime()) return plain('By the forecast the sheet carries. Drill before anyone skates.')
+  return { before: 'Keep off: skaters from about', key: longDayText(p50, words), after: '.', tone: 'plain' }
+}
+
+/** What stands under the headline: what the near nights could bring, what the thaw takes, how wide the dates are. */
+export function weekDetail({ phase, summary, fill }: Week, now: Date, words: WordOptions): string {
+  if (phase === 'planning')
+    return `About ${layerText(Math.round(summary.freezableMm), words)} of water could freeze in these nights.`
+  if (phase === 'waiting' || phase === 'filling' || phase === 'freezing') return spreadText(fill, words)
+  return [floodsText(summary, now, words), thawText(summary, words)].filter(Boolean).join(' ')
+}
+
+function floodsText({ nearGoodDates, nearFloodsMm, goodDates }: WeekSummary, now: Date, words: WordOptions): string {
+  const [firstGood] = goodDates
+  if (nearGoodDates.length === 0 || nearFloodsMm === 0)
+    return firstGood ? `The first good night is ${nightText(firstGood, now, words)}.` : ''
+  const names = nearGoodDates.map((date) => nightText(date, now, words))
+  return `Floods ${joined(names)} could add about ${layerText(Math.round(nearFloodsMm), words)} of ice.`
+}
+
+function thawText({ thaw, thinnest }: WeekSummary, words: WordOptions): string {
+  if (!thaw) return ''
+  const loss = `The thaw takes about ${layerText(Math.max(1, Math.round(thaw.lossMm)), words)} in this forecast`
+  if (!thinnest) return `${loss}.`
+  if (thinnest.thicknessMm < 1) return `${loss}, and with it the whole sheet.`
+  return `${loss}; without floods the sheet comes down to ${iceText(thinnest.thicknessMm, words)}.`
+}
+
+/** "Nine of ten forecast runs have it carry skaters by Sat 23 January, one of ten by Wed 20 January." */
+function spreadText({ startsAt, carriesSkaterAt: { p10, p50, p90 } }: FillOutlook, words: WordOptions): string {
+  if (!p50) return startsAt ? 'The forecast ends before the ice carries skaters.' : ''
+  const early = p10 ? `one forecast run in ten has it carry by ${longDayText(p10, words)}` : ''
+  const late = p90 ? `nine in ten by ${longDayText(p90, words)}` : 'one in ten not before the forecast ends'
+  return capitalised(`${[early, late].filter(Boolean).join(', ')}. Drill before anyone skates.`)
+}
+
+/** "today", "tomorrow", "on Sunday". */
+function dayText(at: string, now: Date, words: WordOptions): string {
+  const date = localDateOf(Date.parse(at), words.timeZone)
+  const today = localDateOf(now.getTime(), words.timeZone)
+  if (date === today) return 'today'
+  return date === addDays(today, 1) ? 'tomorrow' : `on ${weekdayText(at, words)}`
+}
+
+/** "Thu 21 January" */
+export function longDayText(at: string, { locale, timeZone }: WordOptions): string {
+  const part = (options: Intl.DateTimeFormatOptions) =>
+    new Intl.DateTimeFormat(locale, { ...options, timeZone }).format(Date.parse(at))
+  return `${part({ weekday: 'short' })} ${part({ day: 'numeric' })} ${part({ month: 'long' })}`
+}
+
+function joined(names: string[]): string {
+  return names.length < 2 ? names.join('') : `${names.slice(0, -1).join(', ')} and ${names.at(-1)}`
+}

@@ -81,7 +81,7 @@ export function judgeFloodStart(
   const untilMillis = setMinutes === null ? needed : startMillis + setMinutes * (1 + FLOOD.setMargin) * MINUTE_MILLIS
   const chill = windChillC(hour.airTemperatureC, hour.windSpeedMps)
   const hose = rampDesirability(hour.airTemperatureC, PERSON.floodHoseC)
-  const skin = rampDesirability(chill, PERSON.windChillC)
+  const skin = isBeyondLimit(setting, 'windChillC', chill) ? 0 : rampDesirability(chill, PERSON.windChillC)
   const start: FloodStart = {
     startMillis,
     hour,
@@ -145,6 +145,12 @@ export function wetBetween(run: ForecastRun, index: number, untilMillis: number)
   return (run.wetBefore[last] as number) - (run.wetBefore[index] as number)
 }
 
+/** Whether the keeper said that they stay in at such wind or cold. */
+function isBeyondLimit({ input }: Setting, limit: 'windMps' | 'windChillC', value: number): boolean {
+  const { windMps = Infinity, windChillC: leastC = -Infinity } = input.limits ?? {}
+  return limit === 'windMps' ? value > windMps : value < leastC
+}
+
 function floodFactors(start: FloodStart, setting: Setting): FloodFactors {
   const { setMinutes, sheet } = start
   const isDry = start.wetMm <= FLOOD.precipitationMm + ROUNDING_MM
@@ -159,7 +165,9 @@ function floodFactors(start: FloodStart, setting: Setting): FloodFactors {
       rampDesirability(start.hour.airTemperatureC, FLOOD.airTooWarmC),
       rampDesirability(start.hour.airTemperatureC, FLOOD.airTooColdC),
     ),
-    wind: rampDesirability(start.windAtRinkMps, FLOOD.windAtRinkMps),
+    wind: isBeyondLimit(setting, 'windMps', start.windAtRinkMps)
+      ? 0
+      : rampDesirability(start.windAtRinkMps, FLOOD.windAtRinkMps),
     gust: rampDesirability(start.gustAtRinkMps, FLOOD.gustAtRinkMps),
     lastLayer: rampDesirability(sheet.liquidMm, FLOOD.wetMm),
     snow: rampDesirability(sheet.snowCoverCm, FLOOD.snowToClearCm),

@@ -10,6 +10,13 @@ const MINUTE_MILLIS = 60_000
 const MINUTES_A_DAY = 1440
 const DAY_MILLIS = 24 * HOUR_MILLIS
 
+/** Half-open, in minutes of the local day; `days` has bit 0 for Monday to bit 6 for Sunday. */
+interface MinuteRange {
+  from: number
+  to: number
+  days: number
+}
+
 export interface Setting {
   input: JudgeInput
   site: Site
@@ -22,8 +29,8 @@ export interface Setting {
   offsets: number[]
   /** The instants, ascending, at which floods must be set: each 7 am from the first hour to two days past the last. */
   readyMillis: number[]
-  /** Half-open ranges of minutes of the local day in which the keeper can go out. */
-  ranges: [from: number, to: number][]
+  /** When the keeper can go out. */
+  ranges: MinuteRange[]
 }
 
 /** @throws RangeError for an unknown zone, a shelter out of range or an unreadable time. */
@@ -79,15 +86,19 @@ function readyWithoutChange(firstMillis: number, endMillis: number, offsetMinute
   }
 }
 
-/** "HH:MM" to "HH:MM" as ranges of minutes; past midnight it is two, and equal ends mean the whole day. */
-function toRanges({ from, to }: { from: string; to: string }): [number, number][] {
+const EVERY_DAY = 0b111_1111
+
+/** "HH:MM" to "HH:MM" as ranges of minutes; past midnight it is two, the second a day later, and equal ends mean a whole day. */
+function toRanges({ from, to, weekdays }: JudgeInput['available'][number]): MinuteRange[] {
   const start = minuteOf(from)
   const end = minuteOf(to)
-  if (start === end) return [[0, MINUTES_A_DAY]]
-  if (start < end) return [[start, end]]
+  const days = weekdays ? weekdays.reduce((bits, day) => bits | (1 << (day - 1)), 0) : EVERY_DAY
+  if (start === end) return [{ from: 0, to: MINUTES_A_DAY, days }]
+  if (start < end) return [{ from: start, to: end, days }]
+  const daysAfter = ((days << 1) | (days >> 6)) & EVERY_DAY
   return [
-    [start, MINUTES_A_DAY],
-    [0, end],
+    { from: start, to: MINUTES_A_DAY, days },
+    { from: 0, to: end, days: daysAfter },
   ]
 }
 
@@ -99,8 +110,12 @@ function minuteOf(clock: string): number {
 export function isAvailableAt(setting: Setting, atMillis: number): boolean {
   const index = Math.floor((atMillis - setting.firstMillis) / HOUR_MILLIS)
   const offset = setting.offsets[Math.min(Math.max(0, index), setting.offsets.length - 1)] ?? 0
-  const minute = (((Math.floor(atMillis / MINUTE_MILLIS) + offset) % MINUTES_A_DAY) + MINUTES_A_DAY) % MINUTES_A_DAY
-  return setting.ranges.some(([from, to]) => minute >= from && minute < to)
+  const localMinutes = Math.floor(atMillis / MINUTE_MILLIS) + offset
+  const day = Math.floor(localMinutes / MINUTES_A_DAY)
+  const minute = localMinutes - day * MINUTES_A_DAY
+  // 1 January 1970 was a Thursday.
+  const weekday = (((day + 3) % 7) + 7) % 7
+  return setting.ranges.some(({ from, to, days }) => minute >= from && minute < to && (days >> weekday) % 2 === 1)
 }
 
 /** When a flood started at an instant must be set: the first 7 am that leaves it a fair time. */

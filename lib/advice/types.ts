@@ -47,8 +47,13 @@ export interface JudgeInput {
     /** A state kept from an earlier judgement (`sheetState.state`); it wins over the plain numbers. */
     state?: StoredSheet
   }
-  /** When the keeper can go out, local wall time "HH:MM"; `to` before `from` runs past midnight. */
-  available: { from: string; to: string }[]
+  /**
+   * When the keeper can go out, local wall time "HH:MM"; `to` before `from` runs past midnight. `weekdays` are the days
+   * on which the hours start, Monday 1 to Sunday 7; every day when absent.
+   */
+  available: { from: string; to: string; weekdays?: readonly number[] }[]
+  /** Beyond these the keeper stays in, whatever the ice: wind at the rink [m/s] and wind chill [°C]. */
+  limits?: { windMps?: number; windChillC?: number }
   maxPasses: number
   hours: HourlyRecord[]
   /** Other runs of the same forecast, same hours. Without them the runs are perturbed from a stated error model. */
@@ -122,10 +127,10 @@ export interface AdviceWindow {
   setBy: string
   /** 0-100 */
   score: number
-  /** Share of forecast runs in which its best hour is good, 0-1, and how many runs that is out of. */
+  /** Share of forecast runs in which what is started in its best hour comes off, 0-1, and how many runs that is out of. */
   agreement: number
   runs: number
-  /** Start of the best hour in it: the one most runs find good, of those the one with the highest score. */
+  /** Start of the best hour in it: the one in which most runs come off, of those the one with the highest score. */
   bestStartAt?: string
 }
 

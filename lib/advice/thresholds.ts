@@ -34,6 +34,8 @@ export const FLOOD = {
   freezeRateMmPerH: { one: 2.5, zero: 0 } satisfies Ramp,
   /** Above this a thin coat freezes in an evening, whatever the thermometer says. Ours. [mm/h] */
   freezesWellMmPerH: 0.4,
+  /** Less than this is slow for a night that the thermometer calls cold enough: a clear one at -5 °C brings about twice that. Ours. [mm/h] */
+  slowForColdMmPerH: 1,
   /** Rain or snow from pour to set. Rule I05: Les Versants (no watering in snowfall, however light); a tenth is a trace. [mm] */
   precipitationMm: 0.1,
   /** It must stay dry this share of the set time longer, for what the model may be off. Ours. */
@@ -102,6 +104,42 @@ export const FILL = {
   /** Ice that carries skaters on land. Rules G02: Naperville Park District (4 in), G03: MétéoMédia. [mm] */
   carriesSkaterMm: 100,
   weights: { cold: 3, snow: 2, liner: 2, air: 1 },
+}
+
+/** Before a rink is built. */
+export const BUILD = {
+  /** High to low side. Rule M01: City of Burlington (10 to 12 in). [m] */
+  mostFallM: 0.305,
+  /** Board above the water: it takes the rise on freezing and a season's floods. Ours. [m] */
+  freeboardM: 0.05,
+  /** Nominal two-inch lumber, dressed: 1½ in. Softwood standard PS 20, from memory. [m] */
+  boardThicknessM: 0.0381,
+  /** Liner down the outside, to spare each side, and for folds. Up and over is common practice; figures ours. [m, m, share] */
+  tuckM: 0.15,
+  overlapM: 0.15,
+  foldShare: 0.03,
+  /** Liners are sold by the half metre. Ours. [m] */
+  linerStepM: 0.5,
+  /** Liners are ordered by the end of September; by late November stock is thin. Common practice, no source. */
+  orderByMonthDay: '09-30',
+}
+
+/** While the hose runs. */
+export const FILLING = {
+  /** Somebody looks at hose and liner every couple of hours. Common practice, no source. [h] */
+  checkEveryHours: 2,
+  /** A running cold hose has frozen at -4 to -5. Common practice, no source. [°C] */
+  hoseFreezesC: -4,
+  /** How far a warning looks ahead. Ours. [h] */
+  hoseAheadHours: 24,
+  /** What a level read off a stick is good for, two readings together. Ours. [mm] */
+  readingToleranceMm: 5,
+  /** A hose gives this much less than the bucket said before the level tells of a leak. Ours. [share of the rise] */
+  flowTolerance: 0.15,
+  /** Evaporation allowed for: a latent loss of 60 W/m² over a day, typical of open water in light wind at -10 °C. Derived. [mm/day] */
+  evaporationMmPerDay: 2,
+  /** Readings further back say little of a leak now. Ours. [h] */
+  leakLookBackHours: 24,
 }
 
 export const THAW = {

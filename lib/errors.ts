@@ -42,8 +42,12 @@ export class ForbiddenError extends AppError {
   }
 }
 
+/** `latest` holds the fields that the form must send to overwrite deliberately. */
 export class ConflictError extends AppError {
-  constructor(message: string) {
+  constructor(
+    message: string,
+    readonly latest: Record<string, string> = {},
+  ) {
     super('conflict', message)
   }
 }

@@ -31,9 +31,12 @@ export async function pruneExpired(db: Db, now: Date): Promise<Record<string, nu
   const sheets = await db('sheet_states')
     .where({ origin: 'modelled' })
     .where('as_of', '<', before(KEEP_HOURS.modelledSheets))
+    // The last of each day by the rink's clock stays: the season's thickness is drawn from it, and a run may start there.
     .whereRaw(
-      `exists (select 1 from sheet_states newer where newer.rink_id = sheet_states.rink_id
-               and newer.as_of > sheet_states.as_of and newer.as_of < ?)`,
+      `exists (select 1 from sheet_states newer join rinks r on r.id = newer.rink_id
+               where newer.rink_id = sheet_states.rink_id and newer.origin = 'modelled'
+               and newer.as_of > sheet_states.as_of and newer.as_of < ?
+               and (newer.as_of at time zone r.time_zone)::date = (sheet_states.as_of at time zone r.time_zone)::date)`,
       [before(24)],
     )
     .delete()

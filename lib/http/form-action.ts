@@ -1,7 +1,7 @@
 // Every server action of a form runs inside formAction(): parse, one piece of work, and a state that the form can show.
 import { unstable_rethrow } from 'next/navigation'
 import { ZodError, type z } from 'zod'
-import { AppError, InvalidInputError } from '@/lib/errors'
+import { AppError, ConflictError, InvalidInputError } from '@/lib/errors'
 import { faultsByField, INVALID_INPUT_MESSAGE } from './errors-by-field'
 import type { FormState } from './form-state'
 
@@ -27,7 +27,8 @@ function faultState(error: unknown, values: Record<string, string>): FormState {
   }
   if (error instanceof AppError) {
     const fields = error instanceof InvalidInputError ? error.fields : {}
-    return { status: 'error', message: error.message, fields, values }
+    const latest = error instanceof ConflictError ? { latest: error.latest } : {}
+    return { status: 'error', message: error.message, fields, values, ...latest }
   }
   throw error
 }

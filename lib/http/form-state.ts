@@ -7,6 +7,8 @@ export interface FormState {
   fields?: Record<string, string>
   /** What was typed, so that nothing is lost; never passwords. */
   values?: Record<string, string>
+  /** Somebody else was faster: the fields that a form must send to overwrite them deliberately. */
+  latest?: Record<string, string>
 }
 
 export const IDLE: FormState = { status: 'idle' }

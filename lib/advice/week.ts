@@ -2,6 +2,7 @@
 import { ICE_DENSITY, WATER_DENSITY } from '@/lib/physics/constants'
 import { tonightDate } from './night'
 import { summariseNight, type NightSummary, type NightVerdict } from './night-summary'
+import { FLOOD } from './thresholds'
 import { estimatePasses, type NightPasses } from './week-passes'
 import { addDays, toIso } from './zoned-time'
 import type { AdviceWindow, Judgement, Phase, Reason, ScoredHour, Thaw } from './types'
@@ -76,12 +77,15 @@ export interface WeekSetting {
 export function nightsAhead(judgement: Judgement, setting: WeekSetting): NightAhead[] {
   const tonight = tonightDate(setting.now, setting.timeZone)
   const nights: NightAhead[] = []
+  let clearedAt: string | null = null
   for (let index = 0; index < setting.nights; index += 1) {
     const nightDate = addDays(tonight, index)
     const summary = summariseNight(judgement, { nightDate, now: setting.now, timeZone: setting.timeZone })
     const hours = judgement.hours.filter(({ time }) => time >= summary.startsAt && time < summary.endsAt)
     if (hours.length < LEAST_HOURS) break
-    nights.push(nightAhead(judgement, setting, summary, hours, index))
+    const snowToClearCm = snowToClear(judgement.hours, summary, clearedAt)
+    if (snowToClearCm > 0) clearedAt = summary.window?.startsAt ?? clearedAt
+    nights.push({ ...nightAhead(judgement, setting, summary, hours, index), snowToClearCm })
   }
   return nights
 }
@@ -92,7 +96,7 @@ function nightAhead(
   summary: NightSummary,
   hours: ScoredHour[],
   index: number,
-): NightAhead {
+): Omit<NightAhead, 'snowToClearCm'> {
   const passes = passesOf(summary, hours, setting, index)
   const isWhole = hours.every((hour) => hour.isKnown)
   const air = hours.flatMap(({ weather }) => (weather ? [weather.airTemperatureC] : []))
@@ -112,7 +116,6 @@ function nightAhead(
     lowC: air.length > 0 ? Math.min(...air) : null,
     highC: air.length > 0 ? Math.max(...air) : null,
     falls: fallsOf(hours, setting.now),
-    snowToClearCm: summary.verdict === 'flood' ? snowToClear(summary, hours) : 0,
     reason: summary.leadingReason,
     thaw: summary.thaw,
     forecastEndsAt: lastEnd < Date.parse(summary.endsAt) ? toIso(lastEnd) : null,
@@ -163,7 +166,16 @@ function fallsOf(hours: readonly ScoredHour[], now: Date): NightFall | null {
   return falls
 }
 
-function snowToClear({ window }: NightSummary, hours: readonly ScoredHour[]): number {
-  const start = hours.findLast((hour) => hour.time <= (window?.startsAt ?? ''))
-  return start?.reasons.some(({ code }) => code === 'snow_to_clear') ? start.sheet.snowCoverCm : 0
+/**
+ * The sheet is carried on as if nobody cleared it. Once an earlier night of the list asks for clearing, only the snow since
+ * then is left to clear.
+ */
+function snowToClear(hours: readonly ScoredHour[], { window }: NightSummary, clearedAt: string | null): number {
+  if (window?.kind !== 'flood') return 0
+  const start = hours.findLast(({ time }) => time <= window.startsAt)
+  if (!start?.reasons.some(({ code }) => code === 'snow_to_clear')) return 0
+  if (clearedAt === null) return start.sheet.snowCoverCm
+  const since = hours.filter(({ time }) => time >= clearedAt && time < window.startsAt)
+  const fallenCm = since.reduce((sum, { weather }) => sum + (weather?.snowfallCm ?? 0), 0)
+  return fallenCm > FLOOD.snowToClearCm.one ? Math.min(fallenCm, start.sheet.snowCoverCm) : 0
 }

@@ -51,7 +51,7 @@ export function NightRow({ rinkId, night, scale, isOpen, reader }: NightRowProps
       </p>
       <Brings night={night} reader={reader} />
       <span className="col-start-3 row-start-3 text-right text-small text-graphite lg:col-start-6 lg:row-start-1">
-        {nightAgreement(night)}
+        {nightAgreement(night) ?? 'not compared'}
       </span>
     </div>
   )

@@ -4,6 +4,7 @@ import { prepareHours, prepareLike } from '@/lib/physics/prepare'
 import { judgeFillStart, type GrowthCache } from './fill-factors'
 import { judgeFloodStart } from './flood-factors'
 import { carrySheet, type ForecastRun } from './forecast-run'
+import { spreadStarts } from './run-starts'
 import { firstPerturbed, perturbRun } from './runs'
 import { scoreOf } from './score-hours'
 import { AGREEMENT, VERDICT } from './thresholds'
@@ -36,17 +37,17 @@ export function* otherRuns(
   const asked = bridgeLoneGaps(hours.slice(0, hourCount))
   const count = firstPerturbed(asked, setting.nowMillis)
   const seed = (options.seed ?? 1) * 1009
-  for (let run = 0; run < countRuns(setting, options); run += 1) {
-    const records = perturbRun(asked, setting.nowMillis, seed + run)
+  for (const [run, start] of spreadStarts(countRuns(setting, options), seed).entries()) {
+    const records = perturbRun(asked, setting.nowMillis, seed + run, start)
     yield carrySheet(setting, prepareLike(records, main.hours, count, setting.site), { run: main, count })
   }
 }
 
 /** How the runs see one hour of a window. */
 export interface HourAgreement {
-  /** Share of runs in which it is good to start in. 0-1 */
+  /** Share of runs in which what is started in it comes off. 0-1 */
   share: number
-  /** Mean over the runs of its score, in which a bad hour counts nothing. 0-100 */
+  /** Mean over the runs of its score, counted nothing where it does not come off. 0-100 */
   meanScore: number
 }
 
@@ -63,16 +64,29 @@ export function addToTally({ range, shares, scoreSums }: RangeTally, setting: Se
   const cache: GrowthCache = new Map()
   for (let index = range.from; index < range.to; index += 1) {
     if (!run.hours[index]?.isKnown) continue
-    const isFlood = range.kind === 'flood'
-    const score = scoreOf(isFlood ? judgeFloodStart(setting, run, index) : judgeFillStart(setting, run, index, cache))
-    if (score < VERDICT.goodScore) continue
+    const score = range.kind === 'flood' ? floodScore(setting, run, index) : fillScore(setting, run, index, cache)
+    if (score === null) continue
     shares[index - range.from]! += 1
     scoreSums[index - range.from]! += score
   }
 }
 
 /**
- * How the runs see each hour of a window. The window's best hour is the one with the highest mean score, and the share at
+ * A flood comes off when it sets in time and dry and nothing else about it is fatal, and the person can be out. How well
+ * it scores is another matter: a slow flood that is set at dawn is no disagreement. Null when it does not come off.
+ */
+function floodScore(setting: Setting, run: ForecastRun, index: number): number | null {
+  const start = judgeFloodStart(setting, run, index)
+  return start.ice > 0 && 100 * start.person >= VERDICT.goodScore ? scoreOf(start) : null
+}
+
+function fillScore(setting: Setting, run: ForecastRun, index: number, cache: GrowthCache): number | null {
+  const score = scoreOf(judgeFillStart(setting, run, index, cache))
+  return score >= VERDICT.goodScore ? score : null
+}
+
+/**
+ * How the runs see each hour of a window. The window's best hour is the one in which most runs come off, and the share at
  * that hour is the window's agreement; held against measured nights in `npm run bench:advice`.
  *
  * @param runs How many have been asked.
@@ -86,8 +100,12 @@ export function hourAgreements(tally: RangeTally, runs: number, scores: readonly
   }))
 }
 
-/** Hour of the window with the highest mean score; the earliest of equals. */
+/** Hour of the window in which most runs come off; of equals the one with the highest mean score, then the earliest. */
 export function bestHour(agreements: readonly HourAgreement[]): number {
-  const scores = agreements.map(({ meanScore }) => meanScore)
-  return scores.indexOf(Math.max(...scores))
+  let best = 0
+  for (const [index, { share, meanScore }] of agreements.entries()) {
+    const lead = agreements[best]
+    if (lead && (share > lead.share || (share === lead.share && meanScore > lead.meanScore))) best = index
+  }
+  return best
 }

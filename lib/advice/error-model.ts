@@ -27,7 +27,7 @@ export const FORECAST_ERROR = {
   amountLog: { start: 0.4, perDay: 0.05 },
   /** Chance that a spell of it does not come. [-] */
   missChance: { start: 0.05, perDay: 0.03 },
-  /** Chance that twelve cloudy hours without it bring some. [-] */
+  /** Chance that twelve cloudy hours without it bring some; hours under way are left as they are. [-] */
   falseChance: { start: 0.03, perDay: 0.02 },
 } satisfies Record<string, ErrorGrowth>
 

@@ -54,6 +54,7 @@ function lastLayerReason({ factors, sheet }: FloodStart): Reason {
 
 /** Where the balance and the thermometer rule disagree, the code says which way. */
 function rateReason({ factors, hour, rateMmPerH }: FloodStart, parts: HeatBalanceParts): Reason {
+  const isLate = factors.slack === 0 || factors.set < 0.5
   const values = {
     freezeRateMmPerH: rateMmPerH,
     airTemperatureC: hour.airTemperatureC,
@@ -65,14 +66,18 @@ function rateReason({ factors, hour, rateMmPerH }: FloodStart, parts: HeatBalanc
     latentWm2: parts.latent,
     shortwaveWm2: parts.shortwave,
   }
-  return { code: rateCode(values), factor: factors.rate, values }
+  return { code: rateCode(values, isLate), factor: factors.rate, values }
 }
 
 function rateCode(
   values: Record<'freezeRateMmPerH' | 'airTemperatureC' | 'ruleC' | 'longwaveWm2' | 'shortwaveWm2', number>,
+  isLate: boolean,
 ) {
   const isMild = values.airTemperatureC > values.ruleC
-  if (values.freezeRateMmPerH >= FLOOD.freezesWellMmPerH) return isMild ? 'freezes_though_mild' : 'freezes_well'
+  if (values.freezeRateMmPerH >= FLOOD.freezesWellMmPerH) {
+    if (isMild) return 'freezes_though_mild'
+    return isLate && values.freezeRateMmPerH < FLOOD.slowForColdMmPerH ? 'slow_though_cold' : 'freezes_well'
+  }
   if (values.shortwaveWm2 > Math.max(0, values.longwaveWm2)) return 'sun_warms'
   if (values.airTemperatureC < 0) return 'slow_though_cold'
   return values.freezeRateMmPerH > 0 ? 'freezes_slowly' : 'not_freezing'

@@ -1,5 +1,5 @@
 // Why a night's hours are good or poor, and what to mind: reasons and cautions drawn from its scored hours.
-import { CAUTIONS } from './thresholds'
+import { CAUTIONS, FLOOD } from './thresholds'
 import type { AdviceWindow, Caution, ComingPrecipitation, HourWeather, PlannedPass, Reason, ScoredHour } from './types'
 
 type KnownHour = ScoredHour & { parts: NonNullable<ScoredHour['parts']>; weather: HourWeather }
@@ -24,6 +24,7 @@ export function whyOf(
   const told = inWindow.length > 0 ? inWindow : night
   if (told.length === 0) return []
   const reasons = [skyReason(told), airReason(told), vapourReason(told), ...sunReason(told), sheetReason(told)]
+  reasons.push(...ruleReason(told, window))
   if (window) reasons.push(...slowingReason(night, told, window))
   if (precipitation) reasons.push(precipitationReason(precipitation))
   return reasons
@@ -62,6 +63,23 @@ function vapourReason(hours: KnownHour[]): Reason {
 function sunReason(hours: KnownHour[]): Reason[] {
   const shortwaveWm2 = mean(hours.map((h) => h.parts.shortwave))
   return shortwaveWm2 >= 5 ? [{ code: 'why_sun', factor: 1, values: { shortwaveWm2 } }] : []
+}
+
+/** Where the heat balance and the thermometer rule part, a doubting keeper is told why. */
+function ruleReason(hours: KnownHour[], window: AdviceWindow | null): Reason[] {
+  const values = {
+    ruleC: FLOOD.thermometerRuleC,
+    airTemperatureC: mean(hours.map((h) => h.weather.airTemperatureC)),
+    freezeRateMmPerH: mean(hours.map((h) => h.freezeRateMmPerH ?? 0)),
+    longwaveWm2: mean(hours.map((h) => h.parts.longwave)),
+    latentWm2: mean(hours.map((h) => h.parts.latent)),
+    cloudCover: mean(hours.map((h) => h.weather.cloudCover ?? 0)),
+  }
+  if (window?.kind === 'flood' && values.airTemperatureC > values.ruleC) {
+    return [{ code: 'why_warmer_than_rule', factor: 1, values }]
+  }
+  const isSlow = values.airTemperatureC <= values.ruleC && values.freezeRateMmPerH < FLOOD.slowForColdMmPerH
+  return !window && isSlow ? [{ code: 'why_slow_for_cold', factor: 1, values }] : []
 }
 
 function sheetReason(hours: KnownHour[]): Reason {

@@ -19,3 +19,18 @@ export function seededUniform(seed: number): () => number {
 export function normalFrom(uniform: () => number): () => number {
   return () => Math.sqrt(-2 * Math.log(1 - uniform())) * Math.cos(2 * Math.PI * uniform())
 }
+
+/**
+ * Standard normal number below which a share of all lies.
+ *
+ * @param share Above 0 to below 1.
+ *
+ * Source: Winitzki 2008, closed form for the inverse error function with a = 0.147; off by 0.2 % at most; from memory.
+ */
+export function normalOf(share: number): number {
+  const a = 0.147
+  const x = 2 * Math.min(1 - 1e-9, Math.max(1e-9, share)) - 1
+  const log = Math.log(1 - x * x)
+  const first = 2 / (Math.PI * a) + log / 2
+  return Math.SQRT2 * Math.sign(x) * Math.sqrt(Math.sqrt(first * first - log / a) - first)
+}

@@ -2,6 +2,7 @@
 import type { HourlyRecord } from '@/lib/physics/types'
 import { ERROR_MEMORY_HOURS, errorAt, FORECAST_ERROR } from './error-model'
 import { normalFrom, seededUniform } from './random'
+import { randomStart, type RunStart } from './run-starts'
 
 const HOUR_MILLIS = 3_600_000
 /** Longwave from the sky rises with the air and with cloud: 4 ε σ T³ near 0 °C, and what full cloud adds. [W/m² per K, W/m²] Ours. */
@@ -17,19 +18,24 @@ const BLOCK_HOURS = 12
  * @param hours The forecast.
  * @param nowMillis Lead times count from here. [ms]
  * @param seed Same seed, same run.
+ * @param given Where the run begins; drawn from the seed when absent.
  */
-export function perturbRun(hours: readonly HourlyRecord[], nowMillis: number, seed: number): HourlyRecord[] {
+export function perturbRun(
+  hours: readonly HourlyRecord[],
+  nowMillis: number,
+  seed: number,
+  given?: RunStart,
+): HourlyRecord[] {
   const first = hours[0]
   if (!first) return []
   const firstLead = (Date.parse(first.time) - nowMillis) / HOUR_MILLIS
   const uniform = seededUniform(seed)
   const normal = normalFrom(uniform)
-  const timing = normal()
-  const amount = normal()
-  const drift = { air: normal(), dew: normal(), wind: normal(), cloud: normal() }
+  const start = given ?? randomStart(uniform, normal)
+  const drift = { air: start.air, dew: start.dew, wind: start.wind, cloud: start.cloud }
   const keep = Math.exp(-1 / ERROR_MEMORY_HOURS)
   const fresh = Math.sqrt(1 - keep * keep)
-  const wet = perturbPrecipitation(hours, firstLead, timing, amount, uniform)
+  const wet = perturbPrecipitation(hours, firstLead, start, uniform)
   return hours.map((hour, index) => {
     const lead = firstLead + index
     if (lead < 0) return hour
@@ -101,26 +107,35 @@ const isDry = (wet: Wet) => (wet.precipitationMm ?? 0) <= 0 && (wet.snowfallCm ?
 function perturbPrecipitation(
   hours: readonly HourlyRecord[],
   firstLead: number,
-  timing: number,
-  amount: number,
+  start: RunStart,
   uniform: () => number,
 ): Wet[] {
-  let isMissed = false
-  let isFalse = false
+  const { timing, amount } = start
+  let miss = start.miss
+  let isInSpell = false
+  // Twelve hours that have begun dry are left dry: what is under way is known far better than what is to come.
+  let unforeseenChance = 1
+  let nextChance = start.unforeseen
   return hours.map((hour, index) => {
     const lead = firstLead + index
     if (lead < 0) return hour
     const shift = Math.round(timing * errorAt(FORECAST_ERROR.timingHours, lead))
     const source = hours[limit(index - shift, 0, hours.length - 1)] as HourlyRecord
-    const chance = uniform()
+    if (index % BLOCK_HOURS === 0) {
+      unforeseenChance = nextChance
+      nextChance = uniform()
+    }
     if (hour.precipitationMm === null || source.precipitationMm === null) return hour
     if (isDry(source)) {
-      isMissed = chance < errorAt(FORECAST_ERROR.missChance, lead)
-      if (index % BLOCK_HOURS === 0) isFalse = chance < errorAt(FORECAST_ERROR.falseChance, lead)
+      if (isInSpell) miss = uniform()
+      isInSpell = false
+      const isFalse = unforeseenChance < errorAt(FORECAST_ERROR.falseChance, lead)
       const isCloudy = (hour.cloudCover ?? 1) > 0.7
       return isFalse && isCloudy ? unforeseen() : source
     }
-    const factor = isMissed ? 0 : Math.exp(amount * errorAt(FORECAST_ERROR.amountLog, lead))
+    isInSpell = true
+    const factor =
+      miss < errorAt(FORECAST_ERROR.missChance, lead) ? 0 : Math.exp(amount * errorAt(FORECAST_ERROR.amountLog, lead))
     return {
       precipitationMm: scaled(source.precipitationMm, factor, 200),
       rainMm: scaled(source.rainMm, factor, 200),

@@ -76,7 +76,7 @@ const PHASE_CLAUSES: Record<string, string> = {
 }
 
 /** The one or two ways in which a mild night cools the water most. */
-function coolingText(v: Parameters<ClauseWriter>[0], w: Parameters<ClauseWriter>[1]): string {
+export function coolingText(v: Parameters<ClauseWriter>[0], w: Parameters<ClauseWriter>[1]): string {
   const longwave = num(v, 'longwaveWm2')
   const latent = num(v, 'latentWm2')
   const sky = `a clear sky takes ${fluxText(longwave, w)}`
@@ -86,7 +86,7 @@ function coolingText(v: Parameters<ClauseWriter>[0], w: Parameters<ClauseWriter>
 }
 
 /** What keeps the heat in on a night that is cold by the thermometer. */
-function holdingText(v: Parameters<ClauseWriter>[0]): string {
+export function holdingText(v: Parameters<ClauseWriter>[0]): string {
   const isCloudy = num(v, 'cloudCover') >= 0.6
   const isDamp = num(v, 'latentWm2') < 25
   if (isCloudy && isDamp) return 'cloud and damp air hold the heat in'

@@ -1,6 +1,7 @@
 // The list "why these hours": a label, what it means here, and the figure beside it.
 import type { Reason } from '@/lib/advice/types'
 import { num, text } from './clause'
+import { coolingText, holdingText } from './flood-clauses'
 import type { WordOptions } from './options'
 import { fluxText, iceText, rainText, rateText, snowText, temperatureText, windText } from './quantities'
 import { clockText } from './times'
@@ -36,6 +37,16 @@ const WRITERS: Record<string, WhyWriter> = {
         ? `${iceText(num(v, 'thicknessMm'), w)} of it draws heat from below.`
         : `${iceText(num(v, 'thicknessMm'), w)} of it gives no help from below.`,
     figure: temperatureText(num(v, 'temperatureC'), w),
+  }),
+  why_warmer_than_rule: (v, w) => ({
+    label: 'Warmer than the usual rule.',
+    detail: `The rule waits for ${temperatureText(num(v, 'ruleC'), w)}, but ${coolingText(v, w)}: water freezes all the same.`,
+    figure: rateText(num(v, 'freezeRateMmPerH'), w),
+  }),
+  why_slow_for_cold: (v, w) => ({
+    label: 'Cold enough by the usual rule.',
+    detail: `But ${holdingText(v)}, so little water freezes in an hour.`,
+    figure: rateText(num(v, 'freezeRateMmPerH'), w),
   }),
   why_slower_later: (v, w) => ({
     label: `After ${clockText(text(v, 'startsAt'), w)}`,

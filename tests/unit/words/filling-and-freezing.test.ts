@@ -1,0 +1,85 @@
+// A fill and a freezing rink in words.
+import { describe, expect, test } from 'vitest'
+import { fillProgress, type FillProgressInput } from '@/lib/advice/fill-progress'
+import { freezingOutlook } from '@/lib/advice/freezing'
+import { METRIC } from '@/lib/units'
+import * as filling from '@/lib/words/filling'
+import { freezingSentence, snowOnIceText } from '@/lib/words/freezing'
+import { inputOf, steadyHours } from '../../support/advice-weather'
+
+const words = { timeZone: 'UTC', units: METRIC, clock: '24' as const, locale: 'en' }
+const input: FillProgressInput = {
+  now: '2026-12-20T21:00:00Z',
+  lengthM: 10,
+  widthM: 10,
+  floor: { cornersM: [0, 0, 0.3, 0.3] },
+  targetL: 15_000,
+  sessions: [{ startedAt: '2026-12-20T18:00:00Z', stoppedAt: null, flowLPerMin: 25 }],
+}
+
+describe('filling', () => {
+  test('the lead', () => {
+    expect(filling.fillProgressSentence(fillProgress(input), words)).toBe(
+      '4500 L in, 30 % of the fill. Done by 04:00 if the hose runs on.',
+    )
+    expect(filling.fillSpreadSentence(fillProgress(input), words)).toBe(
+      'Water covers 55 % of the floor, 16.4 cm at the deepest.',
+    )
+    expect(filling.nextCheckSentence(fillProgress(input), words)).toMatch(/^Look now at hose and liner/)
+  })
+  test('off, and full', () => {
+    const off = [{ startedAt: '2026-12-20T18:00:00Z', stoppedAt: '2026-12-20T20:00:00Z', flowLPerMin: 25 }]
+    const sentence = filling.fillProgressSentence(fillProgress({ ...input, sessions: off }), words)
+    expect(sentence).toBe('3000 L in, 20 % of the fill. 8 h of hose to go.')
+    const full = fillProgress({ ...input, targetL: 4000 })
+    expect(filling.fillProgressSentence(full, words)).toMatch(/turn the hose off/)
+  })
+  test('each warning', () => {
+    const values = {
+      riseMm: -8,
+      expectedRiseMm: 30,
+      lostLPerHour: 400,
+      since: '2026-12-20T18:00:00Z',
+      airTemperatureC: -6,
+    }
+    for (const code of filling.FILLING_CODES) {
+      const text = filling.fillWarningText(
+        { code, values: { ...values, startsAt: '2026-12-20T23:00:00Z', minutesToIce: 14 } },
+        words,
+      )
+      expect(text).toMatch(/\.$/)
+      expect(text).not.toMatch(/NaN|undefined/)
+    }
+    expect(filling.fillWarningText({ code: 'level_falls', values }, words)).toContain('fallen 8 mm since 18:00')
+  })
+})
+
+describe('freezing', () => {
+  const given = inputOf(steadyHours(96, { airTemperatureC: -10 }), {
+    sheet: { thicknessMm: 40, temperatureC: -3, snowCoverCm: 3 },
+  })
+  const outlook = freezingOutlook({ ...given, rink: { ...given.rink, phase: 'freezing' } }, { runs: 0 })
+  test('how thick and when', () => {
+    const text = freezingSentence(outlook, new Date(given.now), words)
+    expect(text).toMatch(/^4\.0 cm of ice on 8\.3 cm of water\. 10\.0 cm to carry a skater: /)
+  })
+  test('a sheet that carries still asks for the drill', () => {
+    const thick = { ...outlook, now: { ...outlook.now, thicknessMm: 110 } }
+    expect(freezingSentence(thick, new Date(given.now), words)).toContain('drill before anyone skates')
+  })
+  test('every word about snow', () => {
+    expect(outlook.snow.length).toBeGreaterThan(1)
+    for (const caution of outlook.snow) expect(snowOnIceText(caution, words)).toMatch(/\.$/)
+  })
+  test('a spread in words', () => {
+    const now = new Date('2026-12-20T12:00:00Z')
+    const at = (day: number) => `2026-12-${day}T18:00:00Z`
+    expect(filling.spreadText({ p10: at(22), p50: at(23), p90: at(24) }, now, words)).toBe(
+      'Wednesday evening; from Tuesday evening to Thursday evening over the forecast runs',
+    )
+    expect(filling.spreadText({ p10: at(22), p50: at(23), p90: null }, now, words)).toBe(
+      'Wednesday evening, or later than the forecast reaches',
+    )
+    expect(filling.spreadText({ p10: null, p50: null, p90: null }, now, words)).toBe('not within the forecast')
+  })
+})

@@ -60,10 +60,10 @@ function nightOf(report: YardReport, { longitudeDeg }: Place): number {
 }
 
 /**
- * Square-summed, this is the loss of Charbonnier and others (1997), a smooth form of Huber's (1964): quadratic near 0, straight
- * far out.
+ * Square-summed, this is the loss named after Cauchy: quadratic near 0, hardly rising far out, so that a slip of the pen
+ * neither pulls the fit nor hides what the other nights gain. Source: Holland & Welsch (1977), from memory.
  */
 function soften(deviations: number): number {
   const scaled = deviations / WILD_BEYOND_SD
-  return Math.sign(scaled) * WILD_BEYOND_SD * Math.sqrt(2 * (Math.sqrt(1 + scaled * scaled) - 1))
+  return Math.sign(scaled) * WILD_BEYOND_SD * Math.sqrt(Math.log1p(scaled * scaled))
 }

@@ -64,6 +64,7 @@ export interface RinkRow {
   longitude_deg: number
   grid_cell_id: string
   time_zone: string
+  time_zone_by: 'place' | 'keeper'
   length_m: number
   width_m: number
   base: 'liner' | 'ground' | 'snow'
@@ -147,6 +148,18 @@ export interface LogEntryRow {
   deleted_at: Date | null
 }
 
+export interface OwnPassRow {
+  rink_id: string
+  night_date: string
+  pass_number: number
+  starts_at: Date
+  layer_mm: number
+  water_temperature_c: number
+  flow_l_per_min: number
+  changed_by: string | null
+  changed_at: Date
+}
+
 export interface LogRevisionRow {
   entry_id: string
   version: number
@@ -195,6 +208,14 @@ export interface NightOutcomeRow {
   detail: unknown
   model_version: string
   settled_at: Date
+}
+
+export interface YardReportRow {
+  entry_id: string
+  rink_id: string
+  entry_version: number
+  happened_at: Date
+  report: unknown
 }
 
 export interface YardEstimateRow {
@@ -348,10 +369,12 @@ declare module 'knex/types/tables.js' {
     sheet_states: Table<SheetStateRow>
     log_entries: Table<LogEntryRow>
     log_revisions: Table<LogRevisionRow>
+    own_passes: Table<OwnPassRow>
     fills: Table<FillRow>
     fill_sessions: Table<FillSessionRow>
     fill_checks: Table<FillCheckRow>
     night_outcomes: Table<NightOutcomeRow>
+    yard_reports: Table<YardReportRow>
     yard_estimates: Table<YardEstimateRow>
     forecasts: Table<ForecastRow>
     outlooks: Table<OutlookRow>

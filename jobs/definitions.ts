@@ -6,6 +6,7 @@ import { noteRun } from '@/db/queries/job-runs'
 import { logFailure } from '@/lib/log'
 import { decideAlertsJob } from './handlers/decide-alerts'
 import { deliverMessageJob } from './handlers/deliver-message'
+import { learnYardJob } from './handlers/learn-yard'
 import { pruneJob } from './handlers/prune'
 import { pullForecastJob } from './handlers/pull-forecast'
 import { refreshOutlookJob } from './handlers/refresh-outlook'
@@ -29,6 +30,7 @@ export const definitions: Definitions = {
   'decide-alerts': { schema: z.object({ rinkId: id }), run: decideAlertsJob },
   'deliver-message': { schema: z.object({ messageId: id }), run: deliverMessageJob },
   'settle-night': { schema: z.object({ rinkId: id, nightDate: z.iso.date() }), run: settleNightJob },
+  'learn-yard': { schema: z.object({ rinkId: id }), run: learnYardJob },
   prune: { schema: z.object({ slotAt: z.iso.datetime() }), run: pruneJob },
 }
 

@@ -58,10 +58,11 @@ export async function hasForecast(db: Db, cellId: string, slotAt: Date): Promise
   return (await db('forecasts').where({ grid_cell_id: cellId, slot_at: slotAt }).first('id')) !== undefined
 }
 
-/** The newest good forecast of a cell, however old. */
-export async function findNewestForecast(db: Db, cellId: string): Promise<StoredForecast | undefined> {
+/** The newest good forecast of a cell, however old; with `readBy` the newest of that time. */
+export async function findNewestForecast(db: Db, cellId: string, readBy?: Date): Promise<StoredForecast | undefined> {
   return db('forecasts')
     .where({ grid_cell_id: cellId })
+    .modify((query) => void (readBy && query.where('slot_at', '<=', readBy)))
     .orderBy('slot_at', 'desc')
     .first<StoredForecast | undefined>({ ...HEAD, hours: 'hours', members: 'members' })
 }

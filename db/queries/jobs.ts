@@ -9,6 +9,7 @@ export interface JobPayloads {
   'decide-alerts': { rinkId: string }
   'deliver-message': { messageId: string }
   'settle-night': { rinkId: string; nightDate: string }
+  'learn-yard': { rinkId: string }
   prune: { slotAt: string }
 }
 
@@ -51,4 +52,9 @@ export async function enqueueDecision(db: Db, rinkId: string): Promise<void> {
 /** A night that is over, to be held against what came. */
 export async function enqueueSettling(db: Db, rinkId: string, nightDate: string): Promise<void> {
   await enqueueJob(db, 'settle-night', { rinkId, nightDate }, { key: `settle:${rinkId}:${nightDate}` })
+}
+
+/** A new look at what a yard's reports teach, soon. */
+export async function enqueueLearning(db: Db, rinkId: string): Promise<void> {
+  await enqueueJob(db, 'learn-yard', { rinkId }, { key: `learn:${rinkId}` })
 }

@@ -45,6 +45,16 @@ export async function findStartingSheet(
   return before ?? (await states().orderBy('as_of').first<StoredSheet | undefined>())
 }
 
+/** The newest state at or before an instant, reported or modelled. */
+export async function findSheetBefore(db: Db, rinkId: string, at: Date): Promise<StoredSheet | undefined> {
+  return db('sheet_states')
+    .where({ rink_id: rinkId })
+    .where('as_of', '<=', at)
+    .orderBy('as_of', 'desc')
+    .select(COLUMNS)
+    .first<StoredSheet | undefined>()
+}
+
 /** Keeps where the model has carried the sheet; what a person reported for that instant stays. */
 export async function keepModelledSheet(
   db: Db,

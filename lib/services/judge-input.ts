@@ -6,7 +6,9 @@ import type { RinkForJudging } from '@/db/queries/rinks'
 import { findStartingSheet, type StoredSheet } from '@/db/queries/sheet-states'
 import type { RinkAccess } from '@/lib/access/proofs'
 import { MODEL_VERSION } from '@/lib/advice/judge'
+import type { Yard } from '@/lib/advice/yard/types'
 import type { JudgeInput } from '@/lib/advice/types'
+import { findYardInUse } from './yard-in-use'
 
 const HOUR_MILLIS = 3_600_000
 
@@ -37,18 +39,19 @@ export async function gatherJudgeInput(
   const firstHourAt = new Date(firstHour.time)
   const sheet = await findStartingSheet(db, rink.id, { firstHourAt, now })
   const poured = await listFloodsSince(db, access, sheet && sheet.asOf > firstHourAt ? sheet.asOf : firstHourAt)
-  return judgeInputOf({ rink, forecast, sheet, poured, firstHourAt, now })
+  return judgeInputOf({ rink, yard: await findYardInUse(db, rink), forecast, sheet, poured, firstHourAt, now })
 }
 
 export function judgeInputOf(facts: {
   rink: RinkForJudging
-  forecast: StoredForecast
+  yard: Yard
+  forecast: Pick<StoredForecast, 'hours' | 'members'>
   sheet: StoredSheet | undefined
   poured: readonly PouredPass[]
   firstHourAt: Date
   now: Date
 }): JudgeInput {
-  const { rink, forecast, sheet, poured, firstHourAt, now } = facts
+  const { rink, yard, forecast, sheet, poured, firstHourAt, now } = facts
   return {
     now: now.toISOString(),
     rink: {
@@ -57,10 +60,11 @@ export function judgeInputOf(facts: {
       timeZone: rink.timeZone,
       lengthM: rink.lengthM,
       widthM: rink.widthM,
-      shelter: rink.shelter,
-      skyView: rink.skyView,
+      shelter: yard.shelter,
+      skyView: yard.skyView,
       base: rink.base,
       phase: rink.phase,
+      floor: rink.floor,
     },
     water: {
       temperatureC: rink.water.temperatureC,
@@ -70,6 +74,11 @@ export function judgeInputOf(facts: {
     },
     sheet: sheetOf(sheet, firstHourAt),
     available: rink.available,
+    limits: {
+      ...(rink.windLimitMps === null ? {} : { windMps: rink.windLimitMps }),
+      ...(rink.windChillLimitC === null ? {} : { windChillC: rink.windChillLimitC }),
+    },
+    carriesSkaterMm: rink.carriesSkaterMm,
     maxPasses: rink.maxPasses,
     hours: forecast.hours,
     ...(forecast.members ? { members: forecast.members } : {}),

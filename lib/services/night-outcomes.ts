@@ -1,5 +1,4 @@
 // Nights that are over: what was said is held against people's reports and against the weather as it came.
-import { findOldestForecastSince, findNewestForecast } from '@/db/queries/forecasts'
 import { enqueueSettling } from '@/db/queries/jobs'
 import {
   insertNightOutcome,
@@ -16,8 +15,9 @@ import { judge, MODEL_VERSION } from '@/lib/advice/judge'
 import { nightBounds } from '@/lib/advice/night'
 import { settleNight } from '@/lib/advice/settle-night'
 import type { Judgement } from '@/lib/advice/types'
-import type { HourlyRecord } from '@/lib/physics/types'
 import { judgeInputOf } from './judge-input'
+import { weatherAsItCame } from './weather-as-it-came'
+import { findYardInUse } from './yard-in-use'
 
 /** Asks for every night that ended since the last round to be settled. @returns how many. */
 export async function startSettling(db: Db, now: Date): Promise<number> {
@@ -80,40 +80,26 @@ async function judgeInHindsight(
   nightDate: string,
 ): Promise<Pick<Judgement, 'hours' | 'windows'>> {
   const { startsAt, endsAt } = nightBounds(nightDate, rink.timeZone)
-  const [early, late] = await Promise.all([
-    findOldestForecastSince(db, rink.gridCellId, startsAt),
-    findNewestForecast(db, rink.gridCellId),
-  ])
-  if (!early || !late) return { hours: [], windows: [] }
-  const hours = weatherAsItCame(early.hours, late.hours, startsAt, endsAt)
+  // A day more, so that a layer poured late can set within the hours.
+  const hours = await weatherAsItCame(db, rink.gridCellId, { from: startsAt, to: endsAt, aheadHours: 24 })
   const firstHour = hours[0]
   if (!firstHour) return { hours: [], windows: [] }
   const firstHourAt = new Date(firstHour.time)
   const sheet = await findStartingSheet(db, rink.id, { firstHourAt, now: startsAt })
-  const forecast = { ...late, hours, members: null }
   const { hours: scored, windows } = judge(
-    judgeInputOf({ rink, forecast, sheet, poured: [], firstHourAt, now: startsAt }),
+    judgeInputOf({
+      rink,
+      yard: await findYardInUse(db, rink),
+      forecast: { hours, members: null },
+      sheet,
+      poured: [],
+      firstHourAt,
+      now: startsAt,
+    }),
     { runs: 0 },
   )
   return {
     hours: scored.filter(({ time }) => Date.parse(time) < endsAt.getTime()),
     windows: windows.filter((window) => Date.parse(window.startsAt) < endsAt.getTime()),
   }
-}
-
-/** The newest forecast knows the past hours best; what it no longer reaches back to is taken from the one of that noon. */
-function weatherAsItCame(
-  early: readonly HourlyRecord[],
-  late: readonly HourlyRecord[],
-  startsAt: Date,
-  endsAt: Date,
-): HourlyRecord[] {
-  const reachesFrom = Date.parse(late[0]?.time ?? '')
-  const before = early.filter(({ time }) => Date.parse(time) < reachesFrom)
-  // A day more, so that a layer poured late can set within the hours.
-  const lastMillis = endsAt.getTime() + 24 * 3_600_000
-  return [...before, ...late].filter(({ time }) => {
-    const millis = Date.parse(time)
-    return millis >= startsAt.getTime() - 3_600_000 && millis < lastMillis
-  })
 }

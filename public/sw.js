@@ -1,4 +1,5 @@
-// Service worker: shows notifications, and keeps the last good copy of each night sheet for when there is no network.
+// Service worker: shows notifications, keeps the last good copy of each night sheet for when there is no network, and sends
+// check-offs that were made without one.
 
 const PAGES = 'night-sheets-1'
 const FILES = 'files-1'
@@ -10,6 +11,8 @@ const FRESH_MILLIS = 10 * 60 * 1000
 
 /** The Tonight page of a rink, which shows the age of its own forecast. Nothing else of a person's is kept. */
 const NIGHT_SHEET = /^\/rinks\/[0-9a-f]{8}-[0-9a-f-]{27}$/
+/** Pages through which one person leaves or another comes in. */
+const DOORS = /^\/(sign-in|sign-up|sign-out|verify|reset)(\/|$)/
 /** How a streamed page that answered 200 says that it was a redirect or not found, or that it broke. */
 const REFUSED = /NEXT_REDIRECT|NEXT_HTTP_ERROR/
 const BROKEN = /data-dgst="\d+"/
@@ -93,11 +96,68 @@ function subscribeAgain(oldSubscription) {
 self.addEventListener('fetch', (event) => {
   const { request } = event
   const url = new URL(request.url)
-  if (request.method !== 'GET' || url.origin !== self.location.origin) return
+  if (url.origin !== self.location.origin) return
+  // Somebody signs in or out: whoever comes next must not find the sheets of whoever was here before.
+  if (request.method === 'POST' && DOORS.test(url.pathname)) event.waitUntil(caches.delete(PAGES))
+  if (request.method !== 'GET') return
   if (url.pathname.startsWith('/_next/static/')) event.respondWith(answerFile(event))
   else if (request.mode === 'navigate') event.respondWith(answerPage(event, url.pathname))
   else if (NIGHT_SHEET.test(url.pathname) && isVisit(request)) event.waitUntil(keepFresh(url.pathname))
 })
+
+// Check-offs made without a network; names as in components/rinks/kept-check-offs.ts
+
+const DATABASE = 'nightsheet'
+const CHECK_OFFS = 'check-offs'
+/** Sign-in, waiting and broken servers pass; other refusals are the last word. */
+const PASSING = [401, 408, 425, 429]
+
+self.addEventListener('sync', (event) => {
+  if (event.tag === CHECK_OFFS) event.waitUntil(sendCheckOffs())
+})
+
+/** Throws when some are left, so that the browser tries again. */
+async function sendCheckOffs() {
+  const store = await openCheckOffs()
+  const kept = await answerOf(store('readonly').getAll())
+  const left = await Promise.all(kept.filter((one) => !one.refused).map((one) => sendCheckOff(store, one)))
+  const pages = await self.clients.matchAll({ type: 'window' })
+  for (const page of pages) page.postMessage('check-offs-sent')
+  if (left.some((isLeft) => isLeft)) throw new Error('Some check-offs are still to be sent.')
+}
+
+async function sendCheckOff(store, checkOff) {
+  const response = await fetch(`/api/rinks/${checkOff.rinkId}/check-offs`, {
+    method: 'POST',
+    headers: { 'Content-Type': 'application/json' },
+    body: JSON.stringify(checkOff),
+  }).catch(() => null)
+  if (response === null || response.status >= 500 || PASSING.includes(response.status)) return true
+  if (response.ok) {
+    await answerOf(store('readwrite').delete(checkOff.entryKey))
+    return false
+  }
+  const answer = await response.json().catch(() => ({}))
+  const refused = answer.error?.message ?? 'The server did not take it.'
+  await answerOf(store('readwrite').put({ ...checkOff, refused }, checkOff.entryKey))
+  return false
+}
+
+async function openCheckOffs() {
+  const opening = indexedDB.open(DATABASE)
+  opening.onupgradeneeded = () => opening.result.createObjectStore(CHECK_OFFS)
+  const database = await answerOf(opening)
+  return (mode) => database.transaction(CHECK_OFFS, mode).objectStore(CHECK_OFFS)
+}
+
+function answerOf(request) {
+  return new Promise((resolve, reject) => {
+    request.onsuccess = () => resolve(request.result)
+    request.onerror = () => reject(request.error)
+  })
+}
+
+// Whose copies these are
 
 /** The person may have signed out, so that whoever uses the browser next finds nothing. */
 self.addEventListener('message', (event) => {

@@ -76,7 +76,7 @@ function judgeSample(): Sample {
   return {
     readAt: NOW.toISOString(),
     rink: { id: '', name: 'A sample rink', placeName: '', timeZone: TIME_ZONE, phase: 'skating', people: 1, water },
-    viewer: { role: 'skater', units: METRIC, clock: '12', mutedThrough: null },
+    viewer: { id: '', role: 'skater', units: METRIC, clock: '12', mutedThrough: null },
     night: {
       date: NIGHT_DATE,
       startsAt: startsAt.toISOString(),
@@ -89,7 +89,17 @@ function judgeSample(): Sample {
       modelVersion: MODEL_VERSION,
       summary,
       hours: judgement.hours.filter((hour) => hour.time < endsAt.toISOString()),
-      passes: summary.passes.map((pass, index) => ({ ...pass, number: index + 1, poured: null })),
+      passes: summary.passes.map((pass, index) => ({
+        ...pass,
+        number: index + 1,
+        temperatureC: water.temperatureC,
+        flowLPerMin: water.flowLPerMin,
+        warnings: [],
+        limits: [],
+        poured: null,
+      })),
+      ownPlan: null,
+      wouldTurn: [],
       days: [],
       thaws: [],
     },

@@ -4,13 +4,18 @@ import type { Caution } from '@/lib/advice/types'
 import { cautionText } from '@/lib/words/cautions'
 import type { WordOptions } from '@/lib/words/options'
 
-export function Cautions({ cautions, reader }: { cautions: Caution[]; reader: WordOptions }) {
+interface CautionsProps {
+  cautions: Caution[]
+  reader: WordOptions
+  /** Shown; without one there is a heading for screen readers. */
+  heading?: string
+}
+
+export function Cautions({ cautions, reader, heading }: CautionsProps) {
   if (cautions.length === 0) return null
   return (
-    <section aria-labelledby="cautions" className="mt-7">
-      <h2 id="cautions" className="sr-only">
-        Cautions
-      </h2>
+    <section className="mt-7">
+      <h2 className={heading ? 'mb-2 text-body font-semibold' : 'sr-only'}>{heading ?? 'Cautions'}</h2>
       <Notice tone="caution">
         {cautions.map((caution) => (
           <p key={caution.code} className="my-1">

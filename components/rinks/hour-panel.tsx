@@ -1,14 +1,13 @@
 // One hour opened: rate, set time if poured then, every part of the heat balance, and why.
 'use client'
-import type { Reason } from '@/lib/advice/types'
 import type { HeatBalanceParts } from '@/lib/physics/types'
 import type { TonightHour } from '@/lib/schemas/tonight-view'
 import { Button } from '../ui/button'
 import { Facts } from '../ui/facts'
 import type { WordOptions } from '@/lib/words/options'
 import { fluxText, rateText, temperatureText, windChillText } from '@/lib/words/quantities'
-import { reasonText } from '@/lib/words/reasons'
 import { clockText, doneByText } from '@/lib/words/times'
+import { HourReasons } from './hour-reasons'
 import { VERDICT_WORDS } from './verdict-words'
 
 const PARTS = [
@@ -37,6 +36,7 @@ export function HourPanel({ hour, reader, onStep, onClose }: HourPanelProps) {
           <div className="flex flex-wrap items-center gap-x-3">
             <h2 className="mr-auto text-lead font-semibold">
               {clockText(hour.time, reader)}, {VERDICT_WORDS[hour.verdict]}
+              {hour.isAvailable === false ? <span className="font-normal"> (outside your hours)</span> : null}
             </h2>
             <Button look="quiet" className="-mr-3 px-2" onClick={() => onStep(-1)}>
               Earlier
@@ -73,13 +73,7 @@ function KnownHour({ hour, reader }: { hour: TonightHour; reader: WordOptions })
         ]}
       />
       {hour.parts ? <HeatBalance parts={hour.parts} net={hour.netHeatLossWm2 ?? 0} reader={reader} /> : null}
-      <ul className="list-none p-0">
-        {tellingReasons(hour).map((reason) => (
-          <li key={reason.code} className="border-b border-rule py-1">
-            {reasonText(reason, reader)}
-          </li>
-        ))}
-      </ul>
+      <HourReasons hour={hour} reader={reader} />
     </div>
   )
 }
@@ -96,12 +90,6 @@ function HeatBalance({ parts, net, reader }: { parts: HeatBalanceParts; net: num
       ]}
     />
   )
-}
-
-/** What holds the hour back; in an hour that nothing holds back, what leads. */
-function tellingReasons({ reasons }: TonightHour): Reason[] {
-  const against = reasons.filter((reason) => reason.factor < 1)
-  return (against.length > 0 ? against : reasons).slice(0, 4)
 }
 
 function freezingOrMelting({ freezeRateMmPerH }: TonightHour, reader: WordOptions): { name: string; figure: string } {

@@ -5,13 +5,13 @@ import type { WordOptions } from '@/lib/words/options'
 import { clockText } from '@/lib/words/times'
 
 interface LegendProps {
-  source: StripSource
+  night: StripSource['night']
   reader: WordOptions
   drawn: StripHour[]
 }
 
-export function NightLegend({ source, reader, drawn }: LegendProps) {
-  const { sunsetAt, sunriseAt } = source.night
+export function NightLegend({ night, reader, drawn }: LegendProps) {
+  const { sunsetAt, sunriseAt } = night
   return (
     <ul className="flex list-none pt-2 flex-wrap gap-x-[18px] gap-y-1 p-0 text-small text-graphite">
       <Key word="flood">

@@ -1,6 +1,6 @@
 // The night strip of one rink: drawing, hours to open, legend, and the same numbers as a table.
 'use client'
-import { useMemo, useState } from 'react'
+import { memo, useMemo, useState } from 'react'
 import { useHydrated } from '../hooks/use-hydrated'
 import { layOutNightStrip } from '../charts/night-strip-layout'
 import { NightStripDrawing } from '../charts/night-strip-drawing'
@@ -13,15 +13,29 @@ import { clockText } from '@/lib/words/times'
 import { hoursOfNight, stripHours, stripInput, type StripSize, type StripSource } from './strip-input'
 import { stripWords } from './strip-words'
 
+const Legend = memo(NightLegend)
+const Table = memo(NightTable)
+
 const SHOWN: Record<StripSize, string> = {
   wide: 'relative hidden min-[720px]:block print:block',
   narrow: 'relative min-[720px]:hidden print:hidden',
 }
 
+/** The drawing and its hours; the table and the legend are drawn anew only when the hours change. */
 export function NightStrip({ source, now }: { source: StripSource; now: number }) {
   const [selected, setSelected] = useState<number | null>(null)
   const isHydrated = useHydrated()
-  const { reader, hours, drawn, figures } = useMemo(() => prepare(source, now), [source, now])
+  const { night, rink, viewer } = source
+  const { hours: scored, passes } = source.outlook
+  // Hours stay as they are while passes are moved: only the figures are laid out again then.
+  const { reader, hours, drawn } = useMemo(
+    () => readHours({ night, rink, viewer, outlook: { hours: scored, passes: [] } }, now),
+    [night, rink, viewer, scored, now],
+  )
+  const figures = useMemo(
+    () => layOut({ night, rink, viewer, outlook: { hours: scored, passes } }, { reader, hours, drawn }, now),
+    [night, rink, viewer, scored, passes, reader, hours, drawn, now],
+  )
   const present = drawn.findIndex((hour) => hour.startsAt + 3_600_000 > now)
   return (
     <figure className="-mx-5 border-y border-rule bg-sheet pt-3 lg:mx-0 lg:border-x print:mx-0 print:border-x">
@@ -47,23 +61,26 @@ export function NightStrip({ source, now }: { source: StripSource; now: number }
         onClose={() => setSelected(null)}
       />
       <figcaption className="px-5 pb-1">
-        <NightLegend source={source} reader={reader} drawn={drawn} />
-        <NightTable hours={hours} drawn={drawn} reader={reader} />
+        <Legend night={night} reader={reader} drawn={drawn} />
+        <Table hours={hours} drawn={drawn} reader={reader} />
       </figcaption>
     </figure>
   )
 }
 
-/** Everything that opening an hour does not change. */
-function prepare(source: StripSource, now: number) {
+type ReadHours = ReturnType<typeof readHours>
+
+function readHours(source: StripSource, now: number) {
   const reader = readerOf(source)
   const hours = hoursOfNight(source, now)
-  const drawn = stripHours(hours, reader.units)
-  const figures = (['wide', 'narrow'] as const).map((size) => {
+  return { reader, hours, drawn: stripHours(hours, reader.units) }
+}
+
+function layOut(source: StripSource, { reader, hours, drawn }: ReadHours, now: number) {
+  return (['wide', 'narrow'] as const).map((size) => {
     const input = stripInput(source, drawn, now, size)
     return { size, layout: layOutNightStrip(input), words: stripWords(input, hours, reader) }
   })
-  return { reader, hours, drawn, figures }
 }
 
 function stepped(selected: number | null, step: number, count: number): number {

@@ -15,7 +15,7 @@ const NARROW_FROM_MINUTE = 15 * 60
 const NARROW_TO_MINUTE = 9 * 60
 
 export type StripSource = Pick<TonightView, 'rink' | 'viewer' | 'night'> & {
-  outlook: NonNullable<TonightView['outlook']>
+  outlook: Pick<NonNullable<TonightView['outlook']>, 'hours' | 'passes'>
 }
 
 const HOUR = 3_600_000
@@ -86,7 +86,8 @@ export function stripInput(source: StripSource, hours: StripHour[], now: number,
     passes: outlook.passes.map(({ number, startsAt, setBy, poured }) => ({
       number,
       startsAt: Date.parse(startsAt),
-      setBy: Date.parse(setBy),
+      // A pass that does not set is drawn to the end of the night.
+      setBy: Date.parse(setBy ?? night.endsAt),
       isPoured: poured !== null,
     })),
     sunsetAt: night.sunsetAt === null ? null : Date.parse(night.sunsetAt),

@@ -3,9 +3,10 @@ import type { Db } from '@/db/knex'
 import type { RinkAccess } from '@/lib/access/proofs'
 import type { NightSummary } from '@/lib/advice/night-summary'
 import type { Judgement, ScoredHour } from '@/lib/advice/types'
+import type { WhatWouldTurn } from '@/lib/advice/what-would-change'
 
-/** A judgement without its hours. */
-export type Advice = Pick<Judgement, 'windows' | 'plan' | 'fill' | 'thaws'>
+/** A judgement without its hours. `wouldTurn` is absent in outlooks from before it was asked. */
+export type Advice = Pick<Judgement, 'windows' | 'plan' | 'fill' | 'thaws'> & { wouldTurn?: WhatWouldTurn[] }
 
 export interface StoredOutlook {
   id: string

@@ -6,6 +6,7 @@ import { frostbiteBand } from '@/lib/physics/wind-chill'
 import { judgeFloodStart, setsAtOf, type FloodStart } from './flood-factors'
 import { floodReasons } from './flood-reasons'
 import type { NightRun } from './night-model'
+import { isPersonal } from './personal'
 import { isAvailableAt } from './setting'
 import type { Reason } from './types'
 
@@ -50,7 +51,7 @@ export function judgePasses(night: NightRun, wanted: readonly WantedPass[]): (Ju
       judged.set(pass, null)
       continue
     }
-    const under = before ? sheetAfter(night, at, before) : sheetAt(night, at)
+    const under: SheetState = before ? sheetAfter(night, at, before) : sheetAt(night, at)
     // The first of the night meets the sheet of the full hour, as every scored hour does.
     const met = before ? under : (night.run.sheets[at.index] as SheetState)
     const start = judgeFloodStart(withLayer(night, pass), night.run, at.index, at.fraction, met)
@@ -131,11 +132,4 @@ function frostbiteReason({ windChillC }: FloodStart, { startsAt }: WantedPass): 
   const band = frostbiteBand(windChillC)
   if (!band) return []
   return [{ code: 'frostbite', factor: 0, values: { at: startsAt, windChillC, minutes: band.toMinutes } }]
-}
-
-const PERSONAL = new Set(['hose_freezes', 'hose_runs', 'skin_freezes', 'skin_bears'])
-
-/** Whether a reason of a flood is about the person and the hose, not about the ice. */
-export function isPersonal(code: string): boolean {
-  return PERSONAL.has(code)
 }

@@ -1,28 +1,42 @@
 // Passes poured tonight: checked off once, taken back when it was a slip.
-import { bumpSettingsVersion, deleteFlood, insertFlood, listFloodsSince } from '@/db/queries/floods'
+import { randomUUID } from 'node:crypto'
+import { bumpSettingsVersion, insertFlood } from '@/db/queries/floods'
 import { enqueueRefresh } from '@/db/queries/jobs'
-import { findNewestOutlook } from '@/db/queries/outlooks'
+import { lockPass, updateEntry } from '@/db/queries/log-entries'
 import { findRinkForJudging, type RinkForJudging } from '@/db/queries/rinks'
 import type { RinkAccess } from '@/lib/access/proofs'
 import { requireRink } from '@/lib/access/require-rink'
+import { judgePasses } from '@/lib/advice/move-pass'
 import { tonightDate } from '@/lib/advice/night'
+import { unpackNight } from '@/lib/advice/night-model'
 import type { ServiceContext } from '@/lib/context'
-import { InvalidInputError, NotFoundError } from '@/lib/errors'
-import type { CheckOffPass, UndoPass } from '@/lib/schemas/floods'
+import { ForbiddenError, InvalidInputError, NotFoundError } from '@/lib/errors'
+import type { CheckOffPass, SentCheckOff, UndoPass } from '@/lib/schemas/floods'
+import { readNightModel } from './night-model'
 
-const DAY_MILLIS = 86_400_000
+/** What a phone kept while it had no network may be this old. */
+const LATEST_NEWS_MILLIS = 48 * 3_600_000
+/** Phones' clocks run a little ahead. */
+const CLOCK_AHEAD_MILLIS = 5 * 60_000
+
+/** What only a phone says of a check-off; without it the pass is poured now. */
+type Sent = Partial<Pick<SentCheckOff, 'entryKey' | 'pouredAt' | 'userId'>>
 
 /**
- * Logs a pass as poured now. The plan is judged anew, since the sheet has grown and carries water.
- * Checking off the same pass again changes nothing.
+ * Logs a pass as poured. The plan is judged anew, since the sheet has grown and carries water.
+ * Checking off the same pass again, or sending the same check-off twice, changes nothing.
  *
- * @throws ForbiddenError for skaters; InvalidInputError for a night other than tonight.
+ * @throws ForbiddenError for skaters, and for what somebody else kept on this device; InvalidInputError for a night other
+ *   than the one that was tonight when it was poured.
  */
-export async function checkOffPass(context: ServiceContext, input: CheckOffPass): Promise<void> {
+export async function checkOffPass(context: ServiceContext, input: CheckOffPass & Sent): Promise<void> {
   const access = await requireRink(context, input.rinkId, 'writeLog')
   const { db, now, viewer } = context
-  const rink = await getRinkIfTonight(context, input)
-  const saidSetByAt = await saidSetBy(context, access, input)
+  if (input.userId !== undefined && input.userId !== viewer.userId) throw new ForbiddenError()
+  const pouredAt = pouredAtOf(input, now)
+  const rink = await getRinkIfTonight({ ...context, now: pouredAt }, input)
+  const waterTemperatureC = input.waterTemperatureC ?? rink.water.temperatureC
+  const saidSetByAt = await saidSetBy(context, access, rink, { ...input, pouredAt, waterTemperatureC })
   await db.transaction(async (trx) => {
     const isNew = await insertFlood(
       trx,
@@ -30,12 +44,14 @@ export async function checkOffPass(context: ServiceContext, input: CheckOffPass)
       {
         nightDate: input.nightDate,
         passNumber: input.passNumber,
-        pouredAt: now,
+        pouredAt,
         layerMm: input.layerMm,
         waterL: input.layerMm * rink.lengthM * rink.widthM,
-        waterTemperatureC: rink.water.temperatureC,
+        waterTemperatureC,
+        waterKind: rink.water.kind,
         pouredBy: viewer.userId,
         saidSetByAt,
+        entryKey: input.entryKey ?? randomUUID(),
       },
       now,
     )
@@ -43,6 +59,15 @@ export async function checkOffPass(context: ServiceContext, input: CheckOffPass)
     await bumpSettingsVersion(trx, access, now)
     await enqueueRefresh(trx, input.rinkId)
   })
+}
+
+function pouredAtOf({ pouredAt }: Sent, now: Date): Date {
+  if (!pouredAt) return now
+  const ageMillis = now.getTime() - pouredAt.getTime()
+  if (ageMillis > LATEST_NEWS_MILLIS || ageMillis < -CLOCK_AHEAD_MILLIS) {
+    throw new InvalidInputError('That was poured too long ago to be checked off here. Write it into the log instead.')
+  }
+  return ageMillis < 0 ? now : pouredAt
 }
 
 /**
@@ -53,9 +78,12 @@ export async function checkOffPass(context: ServiceContext, input: CheckOffPass)
 export async function undoPass(context: ServiceContext, input: UndoPass): Promise<void> {
   const access = await requireRink(context, input.rinkId, 'writeLog')
   await getRinkIfTonight(context, input)
-  await context.db.transaction(async (trx) => {
-    if (!(await deleteFlood(trx, access, input, context.now))) return
-    await bumpSettingsVersion(trx, access, context.now)
+  const { db, now, viewer } = context
+  await db.transaction(async (trx) => {
+    const entry = await lockPass(trx, access, input)
+    if (!entry) return
+    await updateEntry(trx, entry, { deletedAt: now }, { changedBy: viewer.userId, now })
+    await bumpSettingsVersion(trx, access, now)
     await enqueueRefresh(trx, input.rinkId)
   })
 }
@@ -67,18 +95,20 @@ async function getRinkIfTonight({ db, now }: ServiceContext, { rinkId, nightDate
   throw new InvalidInputError('That night is over.', { nightDate: 'Only tonight’s passes can be checked off.' })
 }
 
-/** When the plan said that this pass would be set, shifted by how late it was poured. */
+/** When the model has this very pass set: its water, its minute, the sheet and the weather as known now. */
 async function saidSetBy(
-  { db, now }: ServiceContext,
+  context: ServiceContext,
   access: RinkAccess<'writeLog'>,
-  { nightDate, passNumber }: UndoPass,
+  rink: RinkForJudging,
+  pass: CheckOffPass & { pouredAt: Date; waterTemperatureC: number },
 ): Promise<Date | null> {
-  const [outlook, poured] = await Promise.all([
-    findNewestOutlook(db, access),
-    listFloodsSince(db, access, new Date(now.getTime() - DAY_MILLIS)),
-  ])
-  const before = poured.filter((pass) => pass.nightDate === nightDate && pass.pouredAt <= (outlook?.judgedAt ?? now))
-  const last = Math.max(0, ...before.map((pass) => pass.passNumber ?? 0))
-  const pass = outlook?.summary.nightDate === nightDate ? outlook.summary.passes[passNumber - last - 1] : undefined
-  return pass ? new Date(now.getTime() + Date.parse(pass.setBy) - Date.parse(pass.startsAt)) : null
+  const model = await readNightModel(context, access, rink, pass.nightDate)
+  if (!model) return null
+  const wanted = {
+    startsAt: pass.pouredAt.toISOString(),
+    layerMm: pass.layerMm,
+    temperatureC: pass.waterTemperatureC,
+  }
+  const setBy = judgePasses(unpackNight(model), [wanted])[0]?.setBy
+  return setBy ? new Date(setBy) : null
 }

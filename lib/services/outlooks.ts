@@ -8,7 +8,8 @@ import type { RinkAccess } from '@/lib/access/proofs'
 import { judge } from '@/lib/advice/judge'
 import { tonightDate } from '@/lib/advice/night'
 import { summariseNight } from '@/lib/advice/night-summary'
-import type { Judgement } from '@/lib/advice/types'
+import type { Judgement, JudgeInput } from '@/lib/advice/types'
+import { whatWouldTurn } from '@/lib/advice/what-would-change'
 import { adviseNight } from './alerts'
 import { slotOf } from './forecasts'
 import { gatherJudgeInput } from './judge-input'
@@ -16,6 +17,7 @@ import { gatherJudgeInput } from './judge-input'
 interface Judged {
   rink: RinkForJudging
   forecast: StoredForecast
+  input: JudgeInput
   judgement: Judgement
 }
 
@@ -29,12 +31,13 @@ export async function refreshOutlook({ db, now }: { db: Db; now: Date }, access:
   const slotAt = slotOf(now)
   const judged = await judgeRink(db, access, slotAt, now)
   if (!judged) return false
-  const { rink, forecast, judgement } = judged
+  const { rink, forecast, input, judgement } = judged
   const summary = summariseNight(judgement, {
     nightDate: tonightDate(now, rink.timeZone),
     now,
     timeZone: rink.timeZone,
   })
+  const wouldTurn = summary.verdict === 'hold' ? whatWouldTurn(input, summary.nightDate) : []
   return db.transaction(async (trx) => {
     const outlookId = await insertOutlook(trx, {
       rinkId: rink.id,
@@ -46,7 +49,13 @@ export async function refreshOutlook({ db, now }: { db: Db; now: Date }, access:
       timeZone: rink.timeZone,
       nightDate: summary.nightDate,
       summary,
-      advice: { windows: judgement.windows, plan: judgement.plan, fill: judgement.fill, thaws: judgement.thaws },
+      advice: {
+        windows: judgement.windows,
+        plan: judgement.plan,
+        fill: judgement.fill,
+        thaws: judgement.thaws,
+        wouldTurn,
+      },
     })
     if (!outlookId) return false
     await insertScoredHours(trx, outlookId, judgement.hours)
@@ -66,7 +75,7 @@ async function judgeRink(db: Db, access: RinkAccess<'view'>, slotAt: Date, now: 
   if (await hasOutlook(db, key)) return undefined
   const input = await gatherJudgeInput(db, access, { rink, forecast, now })
   if (!input) return undefined
-  return { rink, forecast, judgement: judge(input, { stateAt: slotAt.toISOString() }) }
+  return { rink, forecast, input, judgement: judge(input, { stateAt: slotAt.toISOString() }) }
 }
 
 /** Tomorrow's run starts where today's carried the sheet. */

@@ -17,6 +17,7 @@ import type { ServiceContext } from '@/lib/context'
 import { NotFoundError } from '@/lib/errors'
 import type { TonightPass, TonightView } from '@/lib/schemas/tonight-view'
 import { daysAhead } from './days-ahead'
+import { judgeOwnPasses } from './own-passes'
 
 /** @throws NotFoundError when the viewer is no member of the rink. */
 export async function getTonight(context: ServiceContext, rinkId: string): Promise<TonightView> {
@@ -48,6 +49,7 @@ export async function getTonight(context: ServiceContext, rinkId: string): Promi
       },
     },
     viewer: {
+      id: viewer.userId,
       role: membership.role,
       units: person.units,
       clock: person.clock,
@@ -84,7 +86,11 @@ async function outlookOf(
 ): Promise<TonightView['outlook']> {
   const { timeZone } = rink
   const { startsAt, endsAt } = nightBounds(nightDate, timeZone)
-  const [hours, floods] = await Promise.all([listScoredHours(db, outlook.id), listFloodsSince(db, access, startsAt)])
+  const [hours, floods, own] = await Promise.all([
+    listScoredHours(db, outlook.id),
+    listFloodsSince(db, access, startsAt),
+    judgeOwnPasses({ db, now }, access, rink, nightDate),
+  ])
   const judgement = { modelVersion: outlook.modelVersion, hours, ...outlook.advice }
   const summary = summariseNight(judgement, { nightDate, now, timeZone })
   const poured = floods.filter((flood) => flood.nightDate === nightDate)
@@ -93,7 +99,8 @@ async function outlookOf(
     modelVersion: outlook.modelVersion,
     summary,
     hours: hours.filter((hour) => hour.time >= isoHour(startsAt) && hour.time < isoHour(endsAt)),
-    passes: passesOf(poured, summary.passes, outlook.judgedAt),
+    ...passesOf(rink, poured, own, summary.passes, outlook.judgedAt),
+    wouldTurn: summary.verdict === 'hold' ? (outlook.advice.wouldTurn ?? []) : [],
     days: daysAhead(hours, now, timeZone),
     thaws: outlook.advice.thaws,
   }
@@ -101,22 +108,68 @@ async function outlookOf(
 
 const isoHour = (at: Date) => at.toISOString().replace('.000Z', 'Z')
 
-/** What was poured first, then what is still planned, numbered on. A plan made before a pass was poured still holds it. */
-function passesOf(poured: readonly PouredPass[], planned: readonly PlannedPass[], judgedAt: Date): TonightPass[] {
-  const done = poured.map((flood, index) => ({
+type Plan = Pick<NonNullable<TonightView['outlook']>, 'passes' | 'ownPlan'>
+
+/** What was poured first, then what is still planned: the keeper's own plan where there is one. */
+function passesOf(
+  rink: RinkForJudging,
+  poured: readonly PouredPass[],
+  own: Awaited<ReturnType<typeof judgeOwnPasses>>,
+  planned: readonly PlannedPass[],
+  judgedAt: Date,
+): Plan {
+  const done = poured.map((flood, index) => pouredView(rink, flood, index))
+  const isPoured = ({ number }: TonightPass) => done.some((pass) => pass.number === number)
+  const open = own ? own.passes : advisedPasses(rink, poured, planned, judgedAt)
+  return { passes: [...done, ...open.filter((pass) => !isPoured(pass))], ownPlan: own && { by: own.by } }
+}
+
+function pouredView({ water }: RinkForJudging, flood: PouredPass, index: number): TonightPass {
+  const at = flood.pouredAt.toISOString()
+  const saidSetByAt = flood.saidSetByAt?.toISOString() ?? null
+  return {
     number: flood.passNumber ?? index + 1,
-    startsAt: flood.pouredAt.toISOString(),
-    setBy: flood.pouredAt.toISOString(),
+    startsAt: at,
+    setBy: saidSetByAt ?? at,
     layerMm: flood.layerMm,
     waterL: flood.waterL,
     hoseMinutes: 0,
-    poured: { at: flood.pouredAt.toISOString(), by: flood.by },
-  }))
-  const known = done.filter((_, index) => poured[index]!.pouredAt <= judgedAt).map((pass) => pass.number)
+    temperatureC: flood.waterTemperatureC,
+    flowLPerMin: water.flowLPerMin,
+    warnings: [],
+    limits: [],
+    poured: {
+      at,
+      by: flood.by,
+      entry: { id: flood.id, version: flood.version },
+      saidSetByAt,
+      outcome: flood.outcome,
+      outcomeAt: flood.outcomeAt?.toISOString() ?? null,
+    },
+  }
+}
+
+/** Numbered on from what was poured. A plan made before a pass was poured still holds it. */
+function advisedPasses(
+  { water }: RinkForJudging,
+  poured: readonly PouredPass[],
+  planned: readonly PlannedPass[],
+  judgedAt: Date,
+): TonightPass[] {
+  const known = poured.flatMap(({ passNumber, pouredAt }, index) =>
+    pouredAt <= judgedAt ? [passNumber ?? index + 1] : [],
+  )
   const last = Math.max(0, ...known)
-  const isPoured = (number: number) => done.some((pass) => pass.number === number)
-  const open = planned.map((pass, index) => ({ ...pass, number: last + index + 1, poured: null }))
-  return [...done, ...open.filter((pass) => !isPoured(pass.number))]
+  const { temperatureC, flowLPerMin } = water
+  return planned.map((pass, index) => ({
+    ...pass,
+    number: last + index + 1,
+    temperatureC,
+    flowLPerMin,
+    warnings: [],
+    limits: [],
+    poured: null,
+  }))
 }
 
 async function forecastOf({ db, now }: ServiceContext, outlook: StoredOutlook): Promise<TonightView['forecast']> {

@@ -8,8 +8,8 @@ import { clockText } from './times'
 
 const WRITERS: Record<string, ClauseWriter> = {
   frostbite: (v, w) =>
-    `At ${clockText(text(v, 'at'), w)} it feels like ${windChillText(num(v, 'windChillC'), w)}: bare skin can freeze within ` +
-    `${num(v, 'minutes')} minutes. Cover it, or let tonight go.`,
+    `At ${clockText(text(v, 'at'), w)} it feels like ${windChillText(num(v, 'windChillC'), w)} by Environment Canada’s index: ` +
+    `bare skin can freeze within ${num(v, 'minutes')} minutes. Cover it, or let tonight go.`,
   cold_skin: (v, w) =>
     `At ${clockText(text(v, 'at'), w)} it feels like ${windChillText(num(v, 'windChillC'), w)}: cover skin.`,
   hose_freezes_between: (v, w) =>
@@ -27,6 +27,21 @@ const WRITERS: Record<string, ClauseWriter> = {
   thickness_is_estimate: () => 'Thickness is an estimate: drill and measure before anyone skates. The keeper decides.',
   land_only: () =>
     'For ice on land only. Never judge ponds, lakes or rivers by this page: follow local authorities there.',
+}
+
+const FOR_THE_PERSON: ReadonlySet<string> = new Set([
+  'frostbite',
+  'cold_skin',
+  'not_alone',
+  'hose_freezes_between',
+  'hot_water',
+  'electric_leads',
+  'wet_pavement',
+])
+
+/** Whether a caution is about the person and the hose; the others are about the ice and the water. */
+export function isForPerson({ code }: Pick<Caution, 'code'>): boolean {
+  return FOR_THE_PERSON.has(code)
 }
 
 export const CAUTION_CODES: readonly string[] = Object.keys(WRITERS)

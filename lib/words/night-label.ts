@@ -1,11 +1,18 @@
-// The name of a night in a heading.
-import { formatInTimeZone } from 'date-fns-tz'
+// Calendar dates in words, for headings and lists; a date has no zone.
 import { addDays } from '@/lib/advice/zoned-time'
+
+const part = (date: string, form: Intl.DateTimeFormatOptions) =>
+  new Intl.DateTimeFormat('en', { ...form, timeZone: 'UTC' }).format(Date.parse(`${date}T12:00:00Z`))
+
+/** "Fri 15" */
+export const shortDayText = (date: string) => `${part(date, { weekday: 'short' })} ${part(date, { day: 'numeric' })}`
+
+/** "Fri 15 January" */
+export const dayText = (date: string) => `${shortDayText(date)} ${part(date, { month: 'long' })}`
 
 /** "Tue 12 to Wed 13 January" */
 export function nightLabel(nightDate: string): string {
   const next = addDays(nightDate, 1)
-  const write = (date: string, pattern: string) => formatInTimeZone(`${date}T12:00:00Z`, 'UTC', pattern)
   const isSameMonth = nightDate.slice(0, 7) === next.slice(0, 7)
-  return `${write(nightDate, isSameMonth ? 'EEE d' : 'EEE d MMMM')} to ${write(next, 'EEE d MMMM')}`
+  return `${isSameMonth ? shortDayText(nightDate) : dayText(nightDate)} to ${dayText(next)}`
 }

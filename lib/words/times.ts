@@ -1,5 +1,4 @@
 // Times in words, always by the rink's clock.
-import { formatInTimeZone } from 'date-fns-tz'
 import { localMinuteOf, nightDateOf, tonightDate } from '@/lib/advice/night'
 import { addDays, localDateOf } from '@/lib/advice/zoned-time'
 import type { WordOptions } from './options'
@@ -8,12 +7,14 @@ const MINUTE = 60_000
 
 /** "8 pm", "1:50 am", "midnight"; on a 24-hour clock "20:00". */
 export function clockText(at: string | Date, words: WordOptions): string {
-  const date = new Date(Math.round(new Date(at).getTime() / MINUTE) * MINUTE)
-  if (words.clock === '24') return formatInTimeZone(date, words.timeZone, 'HH:mm')
-  const minute = localMinuteOf(date.getTime(), words.timeZone)
+  const minute = localMinuteOf(Math.round(new Date(at).getTime() / MINUTE) * MINUTE, words.timeZone)
+  const hour = Math.floor(minute / 60)
+  const twoDigits = (number: number) => String(number).padStart(2, '0')
+  if (words.clock === '24') return `${twoDigits(hour)}:${twoDigits(minute % 60)}`
   if (minute === 0) return 'midnight'
   if (minute === 720) return 'noon'
-  return formatInTimeZone(date, words.timeZone, minute % 60 === 0 ? 'h aaa' : 'h:mm aaa')
+  const past = minute % 60 === 0 ? '' : `:${twoDigits(minute % 60)}`
+  return `${hour % 12 || 12}${past} ${hour < 12 ? 'am' : 'pm'}`
 }
 
 /** A moment by which something is done, to the next five minutes, so that the promise holds. */

@@ -3,12 +3,13 @@ import { renderToStaticMarkup } from 'react-dom/server'
 import { describe, expect, test } from 'vitest'
 import { entriesFor, entryOf } from '@/app/(member)/_components/navigation'
 import { DataSource } from '@/app/(member)/rinks/[rinkId]/_components/data-source'
-import { passWords } from '@/app/(member)/rinks/[rinkId]/_components/pass-words'
+import { passWords, setWords } from '@/app/(member)/rinks/[rinkId]/_components/pass-words'
+import { isAsked } from '@/app/(member)/rinks/[rinkId]/_components/set-question'
 import { StatusNotices } from '@/app/(member)/rinks/[rinkId]/_components/status-notices'
 import type { ReadTrouble } from '@/app/(member)/rinks/[rinkId]/_components/use-tonight'
 import { Verdict } from '@/app/(member)/rinks/[rinkId]/_components/verdict'
-import { ageText, nightLabel } from '@/components/rinks/reader'
-import type { TonightView } from '@/lib/schemas/tonight-view'
+import { ageText, nightLabel, readerOf } from '@/components/rinks/reader'
+import type { PouredPassView, TonightView } from '@/lib/schemas/tonight-view'
 import { isoAt, NOON, passAt, summaryOf, tonightView } from '../../fixtures/tonight-view'
 
 const NOW = NOON + 6.7 * 3_600_000
@@ -71,6 +72,47 @@ describe('a state that may be old', () => {
   })
 })
 
+const POURED: PouredPassView = {
+  at: isoAt(8),
+  by: 'Ann',
+  entry: { id: '6d2b3d0a-6f5e-4c3b-9c56-0a4be1d0a0e1', version: 1 },
+  saidSetByAt: isoAt(9.6),
+  outcome: null,
+  outcomeAt: null,
+}
+
+describe('whether a poured pass is set', () => {
+  const view = tonightView()
+  const at = (hours: number) => NOON + hours * 3_600_000
+
+  test('keep off until it should be set; from then on the page asks', () => {
+    expect(setWords(POURED, at(9), readerOf(view))).toBe('Keep off until 9:40 pm.')
+    expect(isAsked(POURED, at(9))).toBe(false)
+    expect(setWords(POURED, at(9.7), readerOf(view))).toBe('')
+    expect(isAsked(POURED, at(9.7))).toBe(true)
+  })
+
+  test('found set or spoiled is the last word; found wet is asked again after half an hour', () => {
+    const wet = { ...POURED, outcome: 'wet', outcomeAt: isoAt(9.75) } as const
+    expect(setWords(wet, at(9.8), readerOf(view))).toBe('Still wet at 9:45 pm: keep off.')
+    expect([at(10), at(10.25)].map((now) => isAsked(wet, now))).toEqual([false, true])
+    expect(isAsked({ ...wet, outcome: 'set' }, at(20))).toBe(false)
+  })
+
+  test('nothing is asked of a check-off that the server does not have yet', () => {
+    expect(isAsked({ ...POURED, entry: null }, at(20))).toBe(false)
+  })
+})
+
+test('warmer water than usual, and a pass that does not set, are said', () => {
+  const view = tonightView()
+  const moved = { ...passAt(3, 12, 13.7), temperatureC: 45, setBy: null }
+  expect(passWords(moved, view)).toEqual({
+    what: '3 mm over the whole sheet, water at 45 °C',
+    detail: '420 L, 17 min of hose; not set within the forecast',
+  })
+})
+
 test('a poured pass says by whom, a planned one when it is set', () => {
   const view = tonightView()
   const planned = passAt(1, 8, 9.7)
@@ -78,7 +120,7 @@ test('a poured pass says by whom, a planned one when it is set', () => {
     what: '3 mm over the whole sheet',
     detail: '420 L, 17 min of hose; set by 9:45 pm',
   })
-  expect(passWords({ ...planned, poured: { at: isoAt(8), by: 'Ann' } }, view).detail).toBe('420 L, poured by Ann')
+  expect(passWords({ ...planned, poured: POURED }, view).detail).toBe('420 L, poured by Ann')
 })
 
 test('the source is named with its licence and linked', () => {

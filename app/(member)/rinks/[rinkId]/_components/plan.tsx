@@ -1,40 +1,65 @@
-// The plan as a numbered list; a round button checks a pass off, another press takes it back.
+// The plan as a numbered list: check-off, whether it is set, and for the keeper a way to change each pass.
 'use client'
-import { useActionState, useState, type FormEvent } from 'react'
+import { useState } from 'react'
 import { isGranted } from '@/lib/access/permissions'
-import { IDLE } from '@/lib/http/form-state'
 import type { TonightPass, TonightView } from '@/lib/schemas/tonight-view'
 import { readerOf } from '@/components/rinks/reader'
+import { passWarningText } from '@/lib/words/pass'
 import { clockText } from '@/lib/words/times'
-import { markPassAction } from '../actions'
-import { passWords } from './pass-words'
+import { CheckOff } from './check-off'
+import { OwnPlanNote } from './own-plan-note'
+import { passWords, setWords } from './pass-words'
+import { PassMover } from './pass-mover-loader'
+import { SetQuestion } from './set-question'
+import type { CheckOffs } from './use-check-offs'
 import type { ChangeView } from './use-tonight'
 
-export function Plan({ view, passes, change }: { view: TonightView; passes: TonightPass[]; change: ChangeView }) {
+export interface PlanProps {
+  view: TonightView
+  /** As the keeper has moved them so far, else as they stand. */
+  passes: TonightPass[]
+  now: number
+  change: ChangeView
+  checkOffs: CheckOffs
+  onMove: (passes: TonightPass[] | null) => void
+}
+
+export function Plan({ view, passes, now, change, checkOffs, onMove }: PlanProps) {
+  const [moving, setMoving] = useState<number | null>(null)
   const [fault, setFault] = useState<string | null>(null)
-  const mayLog = isGranted(view.viewer.role, 'writeLog')
-  const reader = readerOf(view)
+  const mayMove = isGranted(view.viewer.role, 'manage')
+  const close = () => {
+    setMoving(null)
+    onMove(null)
+  }
   return (
     <>
+      <OwnPlanNote view={view} change={change} onFault={setFault} />
       <ol className="list-none border-t border-rule p-0">
-        {passes.map((pass) => {
-          const { what, detail } = passWords(pass, view)
-          return (
-            <li
-              key={pass.number}
-              className="grid grid-cols-[92px_1fr_auto] items-center gap-x-3.5 border-b border-rule py-[13px]"
-            >
-              <span className="text-lead font-semibold tracking-tight">
-                {clockText(pass.poured?.at ?? pass.startsAt, reader)}
-              </span>
-              <span className="leading-[1.35]">
-                {what}
-                <span className="block text-note text-graphite">{detail}</span>
-              </span>
-              {mayLog ? <CheckOff view={view} pass={pass} change={change} onFault={setFault} /> : null}
-            </li>
-          )
-        })}
+        {passes.map((pass) => (
+          <li key={pass.number} className="border-b border-rule py-[13px]">
+            <PassRow view={view} pass={pass} now={now} change={change} checkOffs={checkOffs} onFault={setFault} />
+            {mayMove && !pass.poured && moving === null ? (
+              <button
+                type="button"
+                className="min-h-touch cursor-pointer text-note underline print:hidden"
+                onClick={() => setMoving(pass.number)}
+              >
+                Change this pass<span className="sr-only">: pass {pass.number}</span>
+              </button>
+            ) : null}
+            {moving === pass.number ? (
+              <PassMover
+                view={view}
+                passes={passes}
+                number={pass.number}
+                change={change}
+                onMove={onMove}
+                onClose={close}
+              />
+            ) : null}
+          </li>
+        ))}
       </ol>
       <p role="alert" className="mt-2 text-note text-rust empty:hidden">
         {fault}
@@ -43,55 +68,54 @@ export function Plan({ view, passes, change }: { view: TonightView; passes: Toni
   )
 }
 
-interface CheckOffProps {
-  view: TonightView
+type PassRowProps = Omit<PlanProps, 'passes' | 'onMove'> & {
   pass: TonightPass
-  change: ChangeView
   onFault: (message: string | null) => void
 }
 
-/** A form, so that it works before any script; with script the list changes at once, and back when the server refuses. */
-function CheckOff({ view, pass, change, onFault }: CheckOffProps) {
-  const [state, submitWithoutScript] = useActionState(markPassAction, IDLE)
-  const isPoured = pass.poured !== null
-
-  async function submit(event: FormEvent<HTMLFormElement>) {
-    event.preventDefault()
-    const fields = new FormData(event.currentTarget)
-    onFault(null)
-    const shown = withPoured(view, pass.number, isPoured ? null : { at: new Date().toISOString(), by: null })
-    onFault(await change(() => markPassAction(IDLE, fields), shown))
-  }
-
-  const fields = {
-    rinkId: view.rink.id,
-    nightDate: view.night.date,
-    passNumber: pass.number,
-    layerMm: pass.layerMm,
-    isPoured: isPoured ? 'no' : 'yes',
-  }
+function PassRow({ view, pass, now, change, checkOffs, onFault }: PassRowProps) {
+  const reader = readerOf(view)
+  const { what, detail } = passWords(pass, view)
+  const state = pass.poured ? setWords(pass.poured, now, reader) : ''
+  const isWaiting = checkOffs.isStuck(pass.number)
   return (
-    <form action={submitWithoutScript} onSubmit={submit} className="print:hidden">
-      {Object.entries(fields).map(([name, value]) => (
-        <input key={name} type="hidden" name={name} value={value} />
-      ))}
-      <button
-        type="submit"
-        aria-pressed={isPoured}
-        aria-label={`Pass ${pass.number} is poured`}
-        className="grid h-12 w-12 cursor-pointer place-items-center rounded-full border-[1.5px] border-ink text-ink aria-pressed:bg-ink aria-pressed:text-paper"
-      >
-        <svg viewBox="0 0 20 20" width={20} height={20} aria-hidden="true">
-          <path d="M4,10.5 l4,4 l8,-9" fill="none" stroke="currentColor" strokeWidth={2} />
-        </svg>
-      </button>
-      {state.status === 'error' ? <p className="mt-1 text-note text-rust">{state.message}</p> : null}
-    </form>
+    <>
+      <div className="grid grid-cols-[92px_1fr_auto] items-center gap-x-3.5">
+        <span className="text-lead font-semibold tracking-tight">
+          {clockText(pass.poured?.at ?? pass.startsAt, reader)}
+        </span>
+        <span className="leading-[1.35]">
+          {what}
+          <span className="block text-note text-graphite">{detail}</span>
+          {state ? <span className="block text-note">{state}</span> : null}
+          {isWaiting ? <span className="block text-note text-rust">Waiting to be sent from this device.</span> : null}
+        </span>
+        {isGranted(view.viewer.role, 'writeLog') ? (
+          <CheckOff view={view} pass={pass} change={change} checkOffs={checkOffs} onFault={onFault} />
+        ) : null}
+      </div>
+      <PassWarnings pass={pass} view={view} />
+      {pass.poured ? (
+        <SetQuestion view={view} poured={pass.poured} number={pass.number} now={now} change={change} />
+      ) : null}
+    </>
   )
 }
 
-function withPoured(view: TonightView, number: number, poured: TonightPass['poured']): TonightView {
-  if (!view.outlook) return view
-  const passes = view.outlook.passes.map((pass) => (pass.number === number ? { ...pass, poured } : pass))
-  return { ...view, outlook: { ...view.outlook, passes } }
+/** Limits of the ice and of the person are told apart: neither makes up for the other. */
+function PassWarnings({ pass, view }: { pass: TonightPass; view: TonightView }) {
+  const reader = readerOf(view)
+  if (pass.poured || pass.warnings.length + pass.limits.length === 0) return null
+  return (
+    <ul className="mt-1.5 list-none border-l-[3px] border-rust p-0 pl-3.5 text-note">
+      {pass.warnings.map((warning) => (
+        <li key={warning.code}>{passWarningText(warning, reader)}</li>
+      ))}
+      {pass.limits.map((limit) => (
+        <li key={limit.code}>
+          <b className="font-medium">For you:</b> {passWarningText(limit, reader)}
+        </li>
+      ))}
+    </ul>
+  )
 }

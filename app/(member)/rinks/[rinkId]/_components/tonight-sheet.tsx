@@ -1,18 +1,24 @@
 // The night sheet of one rink: verdict, how sure, the strip, the plan, cautions, why, water, source, and the days ahead.
 'use client'
+import { memo, useMemo, useState } from 'react'
 import { useClock } from '@/components/hooks/use-clock'
 import { nightLabel, readerOf } from '@/components/rinks/reader'
 import { NightStrip } from '@/components/rinks/night-strip'
 import { RinkHeader } from '@/components/rinks/rink-header'
 import { isGranted } from '@/lib/access/permissions'
-import type { TonightView } from '@/lib/schemas/tonight-view'
+import type { TonightPass, TonightView } from '@/lib/schemas/tonight-view'
 import { Cautions } from '@/components/rinks/cautions'
+import { isForPerson } from '@/lib/words/cautions'
 import { DataSource } from './data-source'
 import { DaysAhead } from './days-ahead'
 import { FirstForecast } from './first-forecast'
+import { HoldNote } from './hold-note'
 import { Mute } from './mute'
+import { PhaseNote } from './phase-note'
 import { Plan } from './plan'
+import { RefusedCheckOffs } from './refused-check-offs'
 import { StatusNotices, ZoneNote } from './status-notices'
+import { useCheckOffs, type CheckOffs } from './use-check-offs'
 import { useTonight, type ChangeView } from './use-tonight'
 import { Verdict } from './verdict'
 import { WaterAndHose } from './water-and-hose'
@@ -23,15 +29,18 @@ type Judged = TonightView & { outlook: NonNullable<TonightView['outlook']> }
 const isJudged = (view: TonightView): view is Judged => view.outlook !== null
 
 export function TonightSheet({ initial }: { initial: TonightView }) {
-  const { view, trouble, change, readAgain } = useTonight(initial)
+  const { view: read, trouble, change, readAgain, readAfterChange } = useTonight(initial)
+  const checkOffs = useCheckOffs(read, readAfterChange)
+  const view = checkOffs.shown
   const now = useClock(view.readAt)
   return (
     <div className="mx-auto max-w-page px-5 pb-24 lg:px-9 lg:pb-12 print:p-0">
       <RinkHeader name={view.rink.name} about={nightLabel(view.night.date)} people={view.rink.people} />
       <main>
         <StatusNotices view={view} now={now} trouble={trouble} onReadAgain={readAgain} />
+        <RefusedCheckOffs view={view} checkOffs={checkOffs} />
         {isJudged(view) ? (
-          <JudgedNight view={view} now={now} change={change} />
+          <JudgedNight view={view} now={now} change={change} checkOffs={checkOffs} />
         ) : (
           <FirstForecast hasFailed={view.lastReadFailed} />
         )}
@@ -40,19 +49,30 @@ export function TonightSheet({ initial }: { initial: TonightView }) {
   )
 }
 
-function JudgedNight({ view, now, change }: { view: Judged; now: number; change: ChangeView }) {
-  const { passes, days, summary } = view.outlook
-  const reader = readerOf(view)
+interface JudgedNightProps {
+  view: Judged
+  now: number
+  change: ChangeView
+  checkOffs: CheckOffs
+}
+
+function JudgedNight({ view, now, change, checkOffs }: JudgedNightProps) {
+  const [moved, setMoved] = useState<TonightPass[] | null>(null)
+  const { days, summary } = view.outlook
+  const passes = moved ?? view.outlook.passes
+  // A moved pass is drawn at once, before it is kept.
+  const drawn = useMemo(() => ({ ...view, outlook: { ...view.outlook, passes } }), [view, passes])
   return (
     <>
       <Verdict view={view} summary={summary} now={now} />
-      <NightStrip source={view} now={now} />
+      <PhaseNote rink={view.rink} viewer={view.viewer} />
+      <NightStrip source={drawn} now={now} />
       <ZoneNote view={view} />
       <div className="lg:grid lg:grid-cols-[1.25fr_1fr] lg:gap-x-14 print:block">
         <section>
           <h2 className="mt-8 mb-2 text-body font-semibold">The plan</h2>
           {passes.length > 0 ? (
-            <Plan view={view} passes={passes} change={change} />
+            <Plan view={view} passes={passes} now={now} change={change} checkOffs={checkOffs} onMove={setMoved} />
           ) : (
             <p className="border-t border-rule pt-3">
               {summary.verdict === 'fill'
@@ -61,15 +81,36 @@ function JudgedNight({ view, now, change }: { view: Judged; now: number; change:
             </p>
           )}
           {isGranted(view.viewer.role, 'receiveAlerts') ? <Mute view={view} change={change} /> : null}
-          <Cautions cautions={summary.cautions} reader={reader} />
+          <SteadyForYou view={view} />
         </section>
-        <div>
-          <Why summary={summary} reader={reader} />
-          <WaterAndHose view={view} />
-          <DataSource view={view} now={now} />
-        </div>
+        <SteadyReasons view={view} now={now} />
       </div>
-      <DaysAhead view={view} days={days} />
+      <SteadyDays view={view} days={days} />
     </>
   )
 }
+
+// Moving a pass changes none of these: they are drawn again only when the view does.
+const SteadyDays = memo(DaysAhead)
+
+const SteadyForYou = memo(function ForYouAndTheIce({ view }: { view: Judged }) {
+  const reader = readerOf(view)
+  const { cautions } = view.outlook.summary
+  return (
+    <>
+      <Cautions heading="For you" cautions={cautions.filter(isForPerson)} reader={reader} />
+      <Cautions heading="For the ice" cautions={cautions.filter((one) => !isForPerson(one))} reader={reader} />
+    </>
+  )
+})
+
+const SteadyReasons = memo(function Reasons({ view, now }: { view: Judged; now: number }) {
+  return (
+    <div>
+      <HoldNote view={view} now={now} />
+      <Why summary={view.outlook.summary} reader={readerOf(view)} />
+      <WaterAndHose view={view} />
+      <DataSource view={view} now={now} />
+    </div>
+  )
+})

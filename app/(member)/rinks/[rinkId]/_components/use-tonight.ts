@@ -42,18 +42,26 @@ export function useTonight(initial: TonightView) {
     onSuccess: () => setIsFresh(true),
   })
   const view = data ?? initial
+  const judgedAt = view.outlook?.judgedAt
 
   const change: ChangeView = async (work, shown) => {
     try {
       await mutate(doThenRead(work, key), { optimisticData: shown, rollbackOnError: true, revalidate: false })
-      setAwaited({ judgedAt: view.outlook?.judgedAt ?? null, until: Date.now() + MINUTE / 2 })
+      setAwaited({ judgedAt: judgedAt ?? null, until: Date.now() + MINUTE / 2 })
       return null
     } catch (fault) {
       return fault instanceof Refused ? fault.message : NO_ANSWER
     }
   }
 
-  return { view, trouble: troubleOf(isOnline, isFresh ? undefined : error), change, readAgain: () => void mutate() }
+  /** After something was sent by another way than `change`: a new judgement is on its way too. */
+  const readAfterChange = useCallback(async () => {
+    setAwaited({ judgedAt: judgedAt ?? null, until: Date.now() + MINUTE / 2 })
+    await mutate()
+  }, [mutate, judgedAt])
+
+  const trouble = troubleOf(isOnline, isFresh ? undefined : error)
+  return { view, trouble, change, readAgain: () => void mutate(), readAfterChange }
 }
 
 async function doThenRead(work: () => Promise<FormState>, key: string): Promise<TonightView> {

@@ -1,0 +1,119 @@
+// Check-offs that the server may not have yet: shown at once, sent when there is a network, each once, taken back when refused.
+'use client'
+import { useCallback, useEffect, useRef, useState } from 'react'
+import type { KeptCheckOff } from '@/components/rinks/kept-check-offs'
+import type { TonightPass, TonightView } from '@/lib/schemas/tonight-view'
+
+export interface CheckOffs {
+  /** The view with what this device has checked off. */
+  shown: TonightView
+  checkOff: (pass: TonightPass) => Promise<string | null>
+  /** True when the check-off was still on this device only. */
+  takeBack: (passNumber: number) => Promise<boolean>
+  /** A try to send it has failed; it waits for a network. */
+  isStuck: (passNumber: number) => boolean
+  /** What was kept here and then refused, with the reason. */
+  refused: KeptCheckOff[]
+  dismiss: (entryKey: string) => void
+}
+
+const loadKept = () => import('@/components/rinks/kept-check-offs')
+
+export function useCheckOffs(view: TonightView, readAgain: () => Promise<unknown>): CheckOffs {
+  const { id: rinkId } = view.rink
+  const { id: userId } = view.viewer
+  const [waiting, setWaiting] = useState<KeptCheckOff[]>([])
+  const [refused, setRefused] = useState<KeptCheckOff[]>([])
+  const [stuck, setStuck] = useState<ReadonlySet<string>>(new Set())
+  const sending = useRef(false)
+
+  const readKept = useCallback(async () => {
+    const { listKept } = await loadKept()
+    const kept = await listKept(userId, rinkId)
+    setWaiting(kept.filter((one) => !one.refused))
+    setRefused(kept.filter((one) => one.refused))
+    return kept.filter((one) => !one.refused)
+  }, [userId, rinkId])
+
+  const sendKept = useCallback(async () => {
+    if (sending.current) return
+    sending.current = true
+    try {
+      const { send } = await loadKept()
+      const left = await readKept()
+      const outcomes = await Promise.all(left.map(async (one) => [one.entryKey, await send(one)] as const))
+      setStuck(new Set(outcomes.flatMap(([key, outcome]) => (outcome === 'stuck' ? [key] : []))))
+      // Read before it is taken off the list, so that it does not flicker.
+      if (outcomes.some(([, outcome]) => outcome === 'sent')) await readAgain().catch(() => undefined)
+      await readKept()
+    } finally {
+      sending.current = false
+    }
+  }, [readKept, readAgain])
+
+  useEffect(() => {
+    const first = setTimeout(() => void sendKept(), 0)
+    const onMessage = ({ data }: MessageEvent) => (data === 'check-offs-sent' ? void sendKept() : undefined)
+    const onOnline = () => void sendKept()
+    window.addEventListener('online', onOnline)
+    navigator.serviceWorker?.addEventListener('message', onMessage)
+    return () => {
+      clearTimeout(first)
+      window.removeEventListener('online', onOnline)
+      navigator.serviceWorker?.removeEventListener('message', onMessage)
+    }
+  }, [sendKept])
+
+  async function checkOff(pass: TonightPass): Promise<string | null> {
+    const made: KeptCheckOff = {
+      entryKey: crypto.randomUUID(),
+      userId,
+      rinkId,
+      nightDate: view.night.date,
+      passNumber: pass.number,
+      layerMm: pass.layerMm,
+      waterTemperatureC: pass.temperatureC,
+      pouredAt: new Date().toISOString(),
+    }
+    setWaiting((before) => [...before, made])
+    const { keep } = await loadKept()
+    await keep(made)
+    await sendKept()
+    return null
+  }
+
+  async function takeBack(passNumber: number): Promise<boolean> {
+    const one = waiting.find((kept) => kept.passNumber === passNumber && kept.nightDate === view.night.date)
+    if (!one) return false
+    const { drop } = await loadKept()
+    await drop(one.entryKey)
+    setWaiting((before) => before.filter(({ entryKey }) => entryKey !== one.entryKey))
+    return true
+  }
+
+  function dismiss(entryKey: string): void {
+    setRefused((before) => before.filter((one) => one.entryKey !== entryKey))
+    void loadKept().then(({ drop }) => drop(entryKey))
+  }
+
+  const ofTonight = waiting.filter(({ nightDate }) => nightDate === view.night.date)
+  return {
+    shown: withWaiting(view, ofTonight),
+    checkOff,
+    takeBack,
+    isStuck: (passNumber) => ofTonight.some((one) => one.passNumber === passNumber && stuck.has(one.entryKey)),
+    refused,
+    dismiss,
+  }
+}
+
+function withWaiting(view: TonightView, waiting: readonly KeptCheckOff[]): TonightView {
+  if (!view.outlook || waiting.length === 0) return view
+  const passes = view.outlook.passes.map((pass): TonightPass => {
+    const kept = waiting.find(({ passNumber }) => passNumber === pass.number)
+    if (!kept || pass.poured) return pass
+    const unknown = { by: null, entry: null, saidSetByAt: null, outcome: null, outcomeAt: null }
+    return { ...pass, poured: { at: kept.pouredAt, ...unknown } }
+  })
+  return { ...view, outlook: { ...view.outlook, passes } }
+}

@@ -25,7 +25,7 @@ export function learnYard(lesson: YardLesson): LearnedYard {
   const reports = newest.map((report) => holdReport(report, lesson)).filter((held) => held !== null)
   const nights = new Set(reports.map((report) => report.night)).size
   const counts = { reportsUsed: reports.length, reportsLeftOut: lesson.reports.length - reports.length, nights, prior }
-  const kept = { ...prior, ...counts, isLearned: false, sd: PRIOR_SD, ledBy: 'neither' as const }
+  const kept = { ...prior, ...counts, isLearned: false, sd: { ...PRIOR_SD }, ledBy: 'neither' as const }
   if (nights < LEAST_NIGHTS) return { ...kept, keptBecause: 'too_few_nights', setTimeError: null }
   const foretold = reports.map((report) =>
     fitYard(

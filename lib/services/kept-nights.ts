@@ -2,10 +2,12 @@
 import { listNightOutcomes, type NightOutcome } from '@/db/queries/night-outcomes'
 import { getRinkHead } from '@/db/queries/rinks'
 import { findAccount } from '@/db/queries/users'
+import { findYardEstimate } from '@/db/queries/yards'
 import { requireRink } from '@/lib/access/require-rink'
 import { keptRates, type KeptRates } from '@/lib/advice/kept-rates'
 import { nightDateOf } from '@/lib/advice/night'
 import { seasonOf, seasonOfYear, type Season } from '@/lib/advice/season'
+import type { LearnedYard } from '@/lib/advice/yard/types'
 import type { ServiceContext } from '@/lib/context'
 import { NotFoundError } from '@/lib/errors'
 import type { WordOptions } from '@/lib/words/options'
@@ -16,6 +18,8 @@ export interface KeptView {
   season: Season
   rates: KeptRates
   nights: NightOutcome[]
+  /** What the yard's reports have taught; null before the first look. */
+  learned: LearnedYard | null
 }
 
 /** @param year The season that begins in that year; the present one by default. */
@@ -25,12 +29,16 @@ export async function getKeptNights(context: ServiceContext, rinkId: string, yea
   const [rink, account] = await Promise.all([getRinkHead(db, access), findAccount(db, viewer.userId)])
   if (!account) throw new NotFoundError('Account')
   const season = year === undefined ? seasonOf(nightDateOf(now, rink.timeZone)) : seasonOfYear(year)
-  const nights = await listNightOutcomes(db, access, season)
+  const [nights, estimate] = await Promise.all([
+    listNightOutcomes(db, access, season),
+    findYardEstimate(db, access.rinkId),
+  ])
   return {
     rink: { id: rinkId, ...rink },
     reader: { units: account.units, clock: account.clock, timeZone: rink.timeZone, locale: 'en' },
     season,
     rates: keptRates(nights),
     nights,
+    learned: estimate?.learned ?? null,
   }
 }

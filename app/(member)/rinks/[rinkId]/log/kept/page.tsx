@@ -9,6 +9,7 @@ import { orNotFound } from '@/lib/http/or-not-found'
 import { seasonYearSchema } from '@/lib/schemas/season'
 import { getKeptNights, type KeptView } from '@/lib/services/kept-nights'
 import { cameText, keptSentence, rateText, saidText } from '@/lib/words/kept'
+import { yardDoubtSentence, yardSentence } from '@/lib/words/yard'
 
 export const metadata: Metadata = { title: 'Forecasts kept' }
 
@@ -18,7 +19,7 @@ export default async function KeptPage({ params, searchParams }: PageProps<'/rin
   const { rinkId } = await params
   const year = seasonYearSchema.parse((await searchParams).season)
   const view = await orNotFound(getKeptNights(await pageContext(), rinkId, year))
-  const { rink, rates, season, nights } = view
+  const { rink, reader, rates, season, nights, learned } = view
   return (
     <RinkFrame name={rink.name} about={`Season ${seasonName(season)}`}>
       <h1 className="mb-4 max-w-[26ch] text-verdict font-medium tracking-tight lg:text-verdict-wide">
@@ -30,6 +31,14 @@ export default async function KeptPage({ params, searchParams }: PageProps<'/rin
         on it; holding off is kept when no hour turned out good.
       </p>
       {nights.length === 0 ? null : <Record view={view} />}
+      {learned ? (
+        <section className="mt-8 max-w-line">
+          <h2 className="mb-3 border-b border-rule pb-2 font-semibold">What your yard has taught</h2>
+          <p>
+            {yardSentence(learned, reader)} {yardDoubtSentence(learned, reader)}
+          </p>
+        </section>
+      ) : null}
     </RinkFrame>
   )
 }

@@ -24,8 +24,8 @@ const HOUR_MILLIS = 3_600_000
 const FRESH_HOURS = 66
 /** A yard changes with its trees and boards: reports of one winter count. Ours. [d] */
 const REPORTS_DAYS = 150
-/** Hours after a report that a slow layer may still need. */
-const AHEAD_HOURS = 12
+/** Hours after a report that a slow layer may still need. [h] */
+const AHEAD_HOURS = 24
 /** A drilled hole says something of the yard when the sheet has grown for a day since it was last known. Ours. [h] */
 const GROWTH_HOURS = 24
 /** An answer that names an earlier time than its own tells when the layer set; else only that it had. [min] Ours. */

@@ -204,7 +204,7 @@ export interface Judgement {
 }
 
 export interface JudgeOptions {
-  /** Perturbed runs to judge when no members are given; 0 turns agreement into the main run's own word. Default 10. */
+  /** Perturbed runs to judge when no members are given; 0 turns agreement into the main run's own word. Default: AGREEMENT.defaultRuns. */
   runs?: number
   /** Seed of the perturbed runs. */
   seed?: number

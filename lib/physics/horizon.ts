@@ -1,6 +1,6 @@
 // What a hill, a house or a shade cloth keeps of the sunshine: the direct part is cut, the rest comes from the sky that is left.
-import { getPosition } from 'suncalc'
 import { inRange } from './check'
+import { sunPositionDeg } from './sun'
 import type { Site } from './types'
 
 const QUARTER_MILLIS = 900_000
@@ -63,11 +63,11 @@ function shareOverSkyline(startsAtMillis: number, site: Site): number {
   let up = 0
   let over = 0
   for (let quarter = 0; quarter < 4; quarter += 1) {
-    const at = new Date(startsAtMillis + (quarter + 0.5) * QUARTER_MILLIS)
-    const { altitude, azimuth } = getPosition(at, site.latitudeDeg, site.longitudeDeg)
-    if (altitude <= 0) continue
+    const at = startsAtMillis + (quarter + 0.5) * QUARTER_MILLIS
+    const { altitudeDeg, azimuthDeg } = sunPositionDeg(at, site.latitudeDeg, site.longitudeDeg)
+    if (altitudeDeg <= 0) continue
     up += 1
-    if (altitude > skylineDeg(site.horizonDeg ?? 0, azimuth)) over += 1
+    if (altitudeDeg > skylineDeg(site.horizonDeg ?? 0, azimuthDeg)) over += 1
   }
   return up === 0 ? 0 : over / up
 }

@@ -5,20 +5,30 @@ import { inRange } from './check'
 const RADIANS = Math.PI / 180
 
 /**
- * Apparent (refracted) altitude of the sun.
+ * Where the sun stands, refraction included.
  *
  * @param atMillis Instant. [ms since 1970-01-01 UTC]
  * @param latitudeDeg Latitude, north positive. [°], -90 to 90
  * @param longitudeDeg Longitude, east positive. [°], -180 to 180
- * @returns Altitude above the horizon. [°]
+ * @returns Altitude above the horizon and direction from north clockwise. [°]
  * @throws RangeError for a place off the globe.
  *
  * Source: suncalc 2 (degrees, with refraction).
  */
-export function sunAltitudeDeg(atMillis: number, latitudeDeg: number, longitudeDeg: number): number {
+export function sunPositionDeg(
+  atMillis: number,
+  latitudeDeg: number,
+  longitudeDeg: number,
+): { altitudeDeg: number; azimuthDeg: number } {
   inRange('latitudeDeg [°]', latitudeDeg, -90, 90)
   inRange('longitudeDeg [°]', longitudeDeg, -180, 180)
-  return getPosition(new Date(atMillis), latitudeDeg, longitudeDeg).altitude
+  const { altitude, azimuth } = getPosition(new Date(atMillis), latitudeDeg, longitudeDeg)
+  return { altitudeDeg: altitude, azimuthDeg: azimuth }
+}
+
+/** Altitude alone of the above. [°] */
+export function sunAltitudeDeg(atMillis: number, latitudeDeg: number, longitudeDeg: number): number {
+  return sunPositionDeg(atMillis, latitudeDeg, longitudeDeg).altitudeDeg
 }
 
 /**

@@ -83,3 +83,15 @@ export function extraterrestrialMj(latitudeDeg: number, dayOfYear: number): numb
     ((24 * 60) / Math.PI) * 0.082 * distance * (sines + Math.cos(latitude) * Math.cos(declination) * Math.sin(sunset))
   )
 }
+
+/**
+ * Julian date of an instant, the day count that sun positions are reckoned by.
+ *
+ * @param atMillis Instant. [ms since 1970-01-01 UTC]
+ * @returns Days. [d]
+ *
+ * Source: definition; the Unix epoch is 2440587.5.
+ */
+export function julianDate(atMillis: number): number {
+  return atMillis / 86_400_000 + 2_440_587.5
+}

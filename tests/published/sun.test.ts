@@ -1,7 +1,13 @@
 // Sun position and clear-sky radiation against observatories. The source stands beside each value.
 import { describe, expect, test } from 'vitest'
-import { clearSkyShortwaveWm2, cloudShortwaveFactor, sunAltitudeDeg, sunUpDownMillis } from '@/lib/physics/sun'
-import { extraterrestrialMj } from '@/lib/validation/published-forms'
+import {
+  clearSkyShortwaveWm2,
+  cloudShortwaveFactor,
+  sunAltitudeDeg,
+  sunPositionDeg,
+  sunUpDownMillis,
+} from '@/lib/physics/sun'
+import { extraterrestrialMj, julianDate } from '@/lib/validation/published-forms'
 
 const PLACES: Record<string, [number, number]> = {
   Stockholm: [59.32938, 18.06871],
@@ -54,6 +60,19 @@ describe('altitude', () => {
     { at: PLACES.Reykjavik!, when: '2026-03-20T12:00:00Z', degrees: 23.525223 },
   ])('JPL Horizons at $when', ({ at, when, degrees }) => {
     expect(Math.abs(sunAltitudeDeg(Date.parse(when), ...at) - degrees)).toBeLessThan(0.05)
+  })
+  // Reda & Andreas 2003, the same case: 194.34024° from north. JPL Horizons for the other two.
+  test.each([
+    { at: [39.742476, -105.1786], when: '2003-10-17T19:30:30Z', degrees: 194.34024, tolerance: 0.02 },
+    { at: PLACES.Stockholm!, when: '2026-12-21T12:00:00Z', degrees: 197.065, tolerance: 0.05 },
+    { at: PLACES.Reykjavik!, when: '2026-03-20T12:00:00Z', degrees: 153.947, tolerance: 0.05 },
+  ])('direction at $when is $degrees° from north', ({ at, when, degrees, tolerance }) => {
+    expect(Math.abs(sunPositionDeg(Date.parse(when), at[0]!, at[1]!).azimuthDeg - degrees)).toBeLessThan(tolerance)
+  })
+  // Meeus, Astronomical Algorithms, 2nd ed., example 7.a: 1957 October 4.81 is 2436116.31.
+  test('Julian date', () => {
+    const atMillis = Date.parse('1957-10-04T00:00:00Z') + 0.81 * 86_400_000
+    expect(Math.abs(julianDate(atMillis) - 2_436_116.31)).toBeLessThan(0.001)
   })
   // The sun stands in the zenith at the latitude of its declination: Reda & Andreas 2003, -9.31434°; Meeus, Astronomical
   // Algorithms, 2nd ed., p. 165 (1992-10-13 0h TD, 59 s before 0h UTC), -7.785°.

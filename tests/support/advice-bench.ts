@@ -6,9 +6,16 @@ import type { JudgeInput } from '@/lib/advice/types'
 import { addDays, instantOfLocal } from '@/lib/advice/zoned-time'
 import { prepareHours } from '@/lib/physics/prepare'
 import { shelterFactor } from '@/lib/physics/site'
-import type { HourlyRecord } from '@/lib/physics/types'
+import type { HourlyRecord, PreparedHour } from '@/lib/physics/types'
 import { JOKIOINEN_SITE, readJokioinen } from './measured-winters'
-import { carryPlainSheet, floodOnPlainSheet, meanTemperatureC, plainSheet, type TrueFlood } from './true-nights'
+import {
+  carryPlainSheet,
+  floodOnPlainSheet,
+  meanTemperatureC,
+  plainSheet,
+  type PlainSheet,
+  type TrueFlood,
+} from './true-nights'
 
 const HOUR_MILLIS = 3_600_000
 const SPIN_UP_HOURS = 72
@@ -18,6 +25,8 @@ const READY_HOUR = 24 + 7
 const LAYER = { layerMm: 3, temperatureC: 8 }
 const THICKNESS_MM = 100
 const SKY_VIEW = 0.85
+/** The hours of a night, those most often good first. */
+const LIKELY_FIRST = [20, 22, 18, 23, 21, 19, 17]
 /** The keeper decides at 15:30. */
 const DECIDES_AFTER_NOON_MILLIS = 3.5 * HOUR_MILLIS
 
@@ -27,10 +36,11 @@ export interface BenchNight {
   /** Measured, from noon to midnight of the next day. */
   hours: HourlyRecord[]
   sheetC: number
-  /** For starts at 17:00 to 23:00. */
-  floods: TrueFlood[]
+  /** What becomes of a flood at a full hour from 17 to 23; worked out when first asked, because it is slow. */
+  floodAt: (clock: number) => TrueFlood
   airAt20C: number
-  isGood: boolean
+  /** Whether some hour's flood is good. */
+  isGood: () => boolean
 }
 
 /** Nights from one date to another, each with what became of a flood at every full hour. */
@@ -56,21 +66,32 @@ function trueNight(date: string, noonMillis: number, records: HourlyRecord[]): B
   const before = plainSheet(THICKNESS_MM, -1)
   for (let index = 0; index < SPIN_UP_HOURS; index += 1) carryPlainSheet(before, hours[index]!)
   const sheetC = meanTemperatureC(before)
-  const sheet = plainSheet(THICKNESS_MM, sheetC)
-  const floods: TrueFlood[] = []
-  for (let clock = 12; clock <= LAST_HOUR; clock += 1) {
-    const index = SPIN_UP_HOURS + clock - 12
-    if (clock >= FIRST_HOUR) floods.push(floodOnPlainSheet(sheet, LAYER, hours.slice(index), (READY_HOUR - clock) * 60))
-    carryPlainSheet(sheet, hours[index]!)
-  }
+  const floodAt = laterAsked(plainSheet(THICKNESS_MM, sheetC), hours)
   return {
     date,
     noonMillis,
     hours: records.slice(SPIN_UP_HOURS),
     sheetC,
-    floods,
+    floodAt,
     airAt20C: hours[SPIN_UP_HOURS + 8]!.airTemperatureC,
-    isGood: floods.some((flood) => flood.isGood),
+    isGood: () => LIKELY_FIRST.some((clock) => floodAt(clock).isGood),
+  }
+}
+
+/** Floods at each hour on the sheet as it then is, each worked out once and only when asked. */
+function laterAsked(sheet: PlainSheet, hours: PreparedHour[]): (clock: number) => TrueFlood {
+  const sheets = new Map<number, PlainSheet>()
+  for (let clock = 12; clock <= LAST_HOUR; clock += 1) {
+    if (clock >= FIRST_HOUR) sheets.set(clock, sheet.slice())
+    carryPlainSheet(sheet, hours[SPIN_UP_HOURS + clock - 12]!)
+  }
+  const known = new Map<number, TrueFlood>()
+  return (clock) => {
+    const flood =
+      known.get(clock) ??
+      floodOnPlainSheet(sheets.get(clock)!, LAYER, hours.slice(SPIN_UP_HOURS + clock - 12), (READY_HOUR - clock) * 60)
+    known.set(clock, flood)
+    return flood
   }
 }
 
@@ -78,6 +99,8 @@ export interface BenchChoice {
   night: BenchNight
   /** Clock hour of the flood, or null when the strategy holds off. */
   floodsAt: number | null
+  /** Clock hour of the best start, advised or not; null when there is none. */
+  bestAt?: number | null
   /** Share of runs that agreed with the night's best window; null for rules and for nights without one. */
   agreement: number | null
 }
@@ -117,7 +140,8 @@ function adviceAt(night: BenchNight, nowMillis: number, degradedSeed: number | n
   const [best] = tonight.sort((a, b) => b.agreement - a.agreement || b.score - a.score)
   if (!best) return { night, floodsAt: null, agreement: null }
   const clock = 12 + Math.floor((Date.parse(best.bestStartAt ?? best.startsAt) - night.noonMillis) / HOUR_MILLIS)
-  return { night, floodsAt: best.agreement >= AGREEMENT.least ? clock : null, agreement: best.agreement }
+  const floodsAt = best.agreement >= AGREEMENT.least ? clock : null
+  return { night, floodsAt, bestAt: clock, agreement: best.agreement }
 }
 
 function inputOf(night: BenchNight, hours: HourlyRecord[], nowMillis: number): JudgeInput {
@@ -151,9 +175,8 @@ export interface BenchScore {
 }
 
 export function scoreChoices(choices: readonly BenchChoice[]): BenchScore {
-  const good = choices.filter(({ night }) => night.isGood)
-  const isSound = ({ night, floodsAt }: BenchChoice) =>
-    floodsAt !== null && night.floods[floodsAt - FIRST_HOUR]?.isGood === true
+  const good = choices.filter(({ night }) => night.isGood())
+  const isSound = ({ night, floodsAt }: BenchChoice) => floodsAt !== null && night.floodAt(floodsAt).isGood
   const floods = choices.filter(({ floodsAt }) => floodsAt !== null)
   return {
     used: good.filter(isSound).length / Math.max(1, good.length),
@@ -182,6 +205,28 @@ export function calibration(choices: readonly BenchChoice[]): CalibrationRow[] {
     const called = choices.filter(
       ({ agreement }) => agreement !== null && agreement >= from - 1e-9 && agreement < to - 1e-9,
     )
-    return { from, to: Math.min(1, to), nights: called.length, good: called.filter(({ night }) => night.isGood).length }
+    return {
+      from,
+      to: Math.min(1, to),
+      nights: called.length,
+      good: called.filter(({ night }) => night.isGood()).length,
+    }
   })
+}
+
+/** The same choices under another least share of runs. */
+export function withLeastShare(choices: readonly BenchChoice[], least: number): BenchChoice[] {
+  return choices.map((choice) => {
+    const isAdvised = choice.agreement !== null && choice.agreement >= least - 1e-9
+    return { ...choice, floodsAt: isAdvised ? (choice.bestAt ?? null) : null }
+  })
+}
+
+const SHARES = [0.5, 0.55, 0.6, 0.65, 0.7, 0.75, 0.8, 0.85, 0.9]
+const MOST_SPOILED = 0.05
+
+/** The least share that uses most good nights while spoiling no more than one flood in twenty. */
+export function chooseLeastShare(choices: readonly BenchChoice[]): number {
+  const isSparing = (least: number) => scoreChoices(withLeastShare(choices, least)).spoiled <= MOST_SPOILED
+  return SHARES.find(isSparing) ?? (SHARES.at(-1) as number)
 }

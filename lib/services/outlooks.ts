@@ -69,7 +69,7 @@ export async function refreshOutlook({ db, now }: { db: Db; now: Date }, access:
 /** Runs the model; the slow part, outside any transaction. */
 async function judgeRink(db: Db, access: RinkAccess<'view'>, slotAt: Date, now: Date): Promise<Judged | undefined> {
   const rink = await findRinkForJudging(db, access.rinkId)
-  const forecast = rink && (await findNewestForecast(db, rink.gridCellId))
+  const forecast = rink && (await findNewestForecast(db, rink.gridCellId, now))
   if (!rink || !forecast) return undefined
   const key = { rinkId: rink.id, forecastId: forecast.id, settingsVersion: rink.settingsVersion, slotAt }
   if (await hasOutlook(db, key)) return undefined

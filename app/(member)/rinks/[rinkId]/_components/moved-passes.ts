@@ -46,7 +46,7 @@ function withMove(pass: TonightPass, by: Move, areaM2: number): TonightPass {
 
 const onQuarter = (at: number) => new Date(Math.round(at / STEP) * STEP).toISOString()
 
-/** Which steps are open to a pass, and what is sent of the plan. */
+/** Which steps are open to a pass. */
 export function stepsOf(pass: TonightPass, { night, readAt }: Pick<TonightView, 'night' | 'readAt'>) {
   const at = Date.parse(pass.startsAt)
   return {
@@ -54,20 +54,5 @@ export function stepsOf(pass: TonightPass, { night, readAt }: Pick<TonightView, 
     later: at + STEP < Date.parse(night.endsAt),
     thinner: pass.layerMm - 0.5 >= LEAST_MM,
     thicker: pass.layerMm + 0.5 <= MOST_MM,
-    kept: (passes: readonly TonightPass[]) =>
-      passes
-        .filter(({ poured }) => poured === null)
-        .map(({ number, startsAt, layerMm, temperatureC, flowLPerMin }) => ({
-          number,
-          startsAt: new Date(startsAt).toISOString(),
-          layerMm,
-          temperatureC,
-          flowLPerMin,
-        })),
   }
-}
-
-export function withKept(view: TonightView, passes: TonightPass[]): TonightView {
-  if (!view.outlook) return view
-  return { ...view, outlook: { ...view.outlook, passes, ownPlan: { by: null } } }
 }

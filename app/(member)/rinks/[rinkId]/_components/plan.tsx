@@ -6,6 +6,7 @@ import type { TonightPass, TonightView } from '@/lib/schemas/tonight-view'
 import { readerOf } from '@/components/rinks/reader'
 import { passWarningText } from '@/lib/words/pass'
 import { clockText } from '@/lib/words/times'
+import { ChangePlan } from './change-plan'
 import { CheckOff } from './check-off'
 import { OwnPlanNote } from './own-plan-note'
 import { passWords, setWords } from './pass-words'
@@ -27,9 +28,11 @@ export interface PlanProps {
 export function Plan({ view, passes, now, change, checkOffs, onMove }: PlanProps) {
   const [moving, setMoving] = useState<number | null>(null)
   const [fault, setFault] = useState<string | null>(null)
-  const mayMove = isGranted(view.viewer.role, 'manage')
+  const mayChange = isGranted(view.viewer.role, 'manage')
+  const firstOpen = passes.find(({ poured }) => poured === null)?.number
   const close = () => {
     setMoving(null)
+    setFault(null)
     onMove(null)
   }
   return (
@@ -39,24 +42,16 @@ export function Plan({ view, passes, now, change, checkOffs, onMove }: PlanProps
         {passes.map((pass) => (
           <li key={pass.number} className="border-b border-rule py-[13px]">
             <PassRow view={view} pass={pass} now={now} change={change} checkOffs={checkOffs} onFault={setFault} />
-            {mayMove && !pass.poured && moving === null ? (
+            {moving === pass.number ? (
+              <PassMover view={view} passes={passes} number={pass.number} onMove={onMove} />
+            ) : moving !== null && !pass.poured ? (
               <button
                 type="button"
                 className="min-h-touch cursor-pointer text-note underline print:hidden"
                 onClick={() => setMoving(pass.number)}
               >
-                Change this pass<span className="sr-only">: pass {pass.number}</span>
+                Change pass {pass.number}
               </button>
-            ) : null}
-            {moving === pass.number ? (
-              <PassMover
-                view={view}
-                passes={passes}
-                number={pass.number}
-                change={change}
-                onMove={onMove}
-                onClose={close}
-              />
             ) : null}
           </li>
         ))}
@@ -64,6 +59,17 @@ export function Plan({ view, passes, now, change, checkOffs, onMove }: PlanProps
       <p role="alert" className="mt-2 text-note text-rust empty:hidden">
         {fault}
       </p>
+      {mayChange && firstOpen !== undefined ? (
+        <ChangePlan
+          view={view}
+          passes={passes}
+          isChanging={moving !== null}
+          change={change}
+          onOpen={() => setMoving(firstOpen)}
+          onClose={close}
+          onFault={setFault}
+        />
+      ) : null}
     </>
   )
 }

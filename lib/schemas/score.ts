@@ -122,10 +122,13 @@ function isGrid(rows: readonly (readonly number[])[]): boolean {
   return rows.every((row) => row.length === rows[0]?.length)
 }
 
+const EXPECTED_HORIZON = 'expected a number from 0 to 90 ° or eight of them, from north clockwise'
+
 /** One height all round, or eight from north clockwise. */
-const horizonSchema = z.union([between(0, 90, '°'), z.array(between(0, 90, '°')).length(8)], {
-  error: 'expected a number from 0 to 90 ° or eight of them, from north clockwise',
-})
+const horizonSchema = z.union(
+  [between(0, 90, '°'), z.array(between(0, 90, '°')).refine((all) => all.length === 8, { error: EXPECTED_HORIZON })],
+  { error: EXPECTED_HORIZON },
+)
 
 const rinkSchema = z.object({
   latitude: between(-90, 90, '°'),

@@ -47,13 +47,19 @@ describe('npm run score', () => {
   test(
     'exits 2 with the JSON path, and writes nothing on standard output',
     () => {
-      const input = scoreExample()
-      const spoiled = {
-        ...input,
-        hours: input.hours.map((hour, index) => (index === 3 ? { ...hour, airTemperatureC: 60 } : hour)),
-      }
+      const { hours, ...rest } = scoreExample()
+      const withHours = (change: (one: object[]) => object[]) => JSON.stringify({ ...rest, hours: change([...hours]) })
+      const withHour = (index: number, change: object) =>
+        withHours((all) => all.map((one, at) => (at === index ? { ...one, ...change } : one)))
       for (const [text, path] of [
-        [JSON.stringify(spoiled), 'hours[3].airTemperatureC: expected'],
+        [withHour(3, { airTemperatureC: 60 }), 'hours[3].airTemperatureC: expected'],
+        [withHour(3, { airTemperatureC: 'x' }).replace('"x"', 'NaN'), 'hours[3].airTemperatureC: expected'],
+        [withHour(4, { relativeHumidity: 140 }), 'hours[4].relativeHumidity: expected'],
+        [withHour(6, { precipitationMm: -0.1 }), 'hours[6].precipitationMm: expected'],
+        [withHours((all) => all.filter((_, at) => at !== 8)), 'hours[8].time: expected'],
+        [withHours((all) => [...all.slice(0, 9), ...all.slice(8)]), 'hours[9].time: expected'],
+        [withHours((all) => all.reverse()), 'hours[1].time: expected'],
+        [withHours(() => []), 'hours: expected at least one hour'],
         ['not json', '(document): expected one JSON document'],
         ['[]', '(document): '],
       ] as const) {

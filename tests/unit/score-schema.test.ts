@@ -56,6 +56,17 @@ describe('nonsense is refused at its path', () => {
     ['hours[8].time: expected 2027-01-13T01:00:00Z', (d) => d.hours.splice(8, 1)],
     ['hours[9].time: expected 2027-01-13T02:00:00Z', (d) => d.hours.splice(8, 0, { ...hour(d, 8) })],
     ['hours[1].time: expected', (d) => d.hours.reverse()],
+    // Local times, as a clock change repeats them: the second 01:00 is not an hour after the first.
+    [
+      'hours[1].time: expected 2027-11-07T02:00:00Z',
+      (d) => {
+        hour(d, 0).time = '2027-11-07T01:00:00Z'
+        hour(d, 1).time = '2027-11-07T01:00:00Z'
+      },
+    ],
+    ['hours[0].time: expected an instant in UTC', (d) => (hour(d, 0).time = '2027-11-07T01:00:00-04:00')],
+    ['rink.horizonDeg: expected a number from 0 to 90', (d) => (d.rink.horizonDeg = [10, 20])],
+    ['rink.shade: expected a number from 0 to 1', (d) => (d.rink.shade = 2)],
     ['hours[0].time: expected an instant in UTC', (d) => (hour(d, 0).time = 'yesterday')],
     ['hours[0].time: expected an instant in UTC', (d) => (hour(d, 0).time = '2027-01-12T17:00:00')],
     ['rink.timeZone: expected an IANA time zone', (d) => (d.rink.timeZone = 'Mars/Olympus')],

@@ -127,3 +127,37 @@ test('a thicker or a warmer layer never sets sooner', () => {
     quiet,
   )
 })
+
+const milder = (hour: JudgeInput['hours'][number], change: number) =>
+  hour.airTemperatureC === null || hour.dewPointC === null
+    ? hour
+    : { ...hour, airTemperatureC: hour.airTemperatureC + change, dewPointC: hour.dewPointC + change }
+
+test('colder, drier or clearer weather never sets a layer later, nor more wind while the air is below -2 °C', () => {
+  // Measured longwave and sunshine would outweigh cloud and are absent; precipitation and gaps have tests of their own.
+  const nights = randomHours(24).map((hours) =>
+    hours.map((hour) => ({ ...hour, precipitationMm: hour.precipitationMm === null ? null : 0, shortwaveWm2: 0 })),
+  )
+  fc.assert(
+    fc.property(nights, fc.integer({ min: 0, max: 8 }), (hours, index) => {
+      const setsWith = (changed: JudgeInput['hours']) => setMillis(judge(inputOf(changed), { runs: 0 }), index)
+      const sets = setsWith(hours)
+      expect(setsWith(hours.map((hour) => milder(hour, -2)))).toBeLessThanOrEqual(sets)
+      expect(
+        setsWith(hours.map((hour) => ({ ...hour, dewPointC: hour.dewPointC === null ? null : hour.dewPointC - 2 }))),
+      ).toBeLessThanOrEqual(sets)
+      expect(
+        setsWith(hours.map((hour) => ({ ...hour, cloudCover: hour.cloudCover === null ? null : hour.cloudCover / 2 }))),
+      ).toBeLessThanOrEqual(sets)
+      const cold = hours.map((hour) => milder(hour, Math.min(0, -2.1 - (hour.airTemperatureC ?? 0))))
+      const windy = cold.map((hour) => ({
+        ...hour,
+        windSpeedMps: hour.windSpeedMps === null ? null : hour.windSpeedMps + 1,
+      }))
+      // Poured at once: wind over a sheet colder than the air would warm the sheet first.
+      const setsAtOnce = (changed: JudgeInput['hours']) => setMillis(judge(inputOf(changed), { runs: 0 }), 0)
+      expect(setsAtOnce(windy)).toBeLessThanOrEqual(setsAtOnce(cold))
+    }),
+    quiet,
+  )
+})

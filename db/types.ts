@@ -160,18 +160,6 @@ export interface OwnPassRow {
   changed_at: Date
 }
 
-export interface OwnPassRow {
-  rink_id: string
-  night_date: string
-  pass_number: number
-  starts_at: Date
-  layer_mm: number
-  water_temperature_c: number
-  flow_l_per_min: number
-  changed_by: string | null
-  changed_at: Date
-}
-
 export interface LogRevisionRow {
   entry_id: string
   version: number
@@ -381,7 +369,6 @@ declare module 'knex/types/tables.js' {
     sheet_states: Table<SheetStateRow>
     log_entries: Table<LogEntryRow>
     log_revisions: Table<LogRevisionRow>
-    own_passes: Table<OwnPassRow>
     own_passes: Table<OwnPassRow>
     fills: Table<FillRow>
     fill_sessions: Table<FillSessionRow>

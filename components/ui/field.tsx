@@ -1,5 +1,5 @@
 // Form fields: label above, hint under it, the fault beside the field and tied to it.
-import type { InputHTMLAttributes, ReactNode, SelectHTMLAttributes } from 'react'
+import type { InputHTMLAttributes, ReactNode, SelectHTMLAttributes, TextareaHTMLAttributes } from 'react'
 
 interface Around {
   label: string
@@ -57,6 +57,21 @@ export function TextField({
         />
         {unit ? <span className="shrink-0 text-graphite">{unit}</span> : null}
       </div>
+    </FieldFrame>
+  )
+}
+
+export function AreaField({ label, name, hint, error, ...rest }: Around & TextareaHTMLAttributes<HTMLTextAreaElement>) {
+  return (
+    <FieldFrame label={label} name={name} hint={hint} error={error}>
+      <textarea
+        id={name}
+        name={name}
+        className={`${BOX} py-2`}
+        aria-invalid={error ? true : undefined}
+        aria-describedby={describedBy({ name, hint, error })}
+        {...rest}
+      />
     </FieldFrame>
   )
 }

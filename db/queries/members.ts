@@ -36,3 +36,17 @@ export async function insertMember(
 ): Promise<void> {
   await db('rink_members').insert({ rink_id: member.rinkId, user_id: member.userId, role: member.role, joined_at: now })
 }
+
+/** Their choice of alerts goes along. @returns what they were, undefined when they had left already. */
+export async function deleteMember(trx: Db, access: RinkAccess, userId: string): Promise<{ role: Role } | undefined> {
+  // The rink's lock first: of two keepers who leave at once, the second sees that the first is gone.
+  await trx('rinks').where({ id: access.rinkId }).forUpdate().first('id')
+  await trx('alert_preferences').where({ rink_id: access.rinkId, user_id: userId }).delete()
+  const [left] = await trx('rink_members').where({ rink_id: access.rinkId, user_id: userId }).delete('role')
+  return left && { role: left.role }
+}
+
+export async function countKeepers(db: Db, access: RinkAccess): Promise<number> {
+  const row = await db('rink_members').where({ rink_id: access.rinkId, role: 'keeper' }).count({ keepers: '*' }).first()
+  return Number(row?.keepers ?? 0)
+}

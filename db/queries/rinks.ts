@@ -1,9 +1,12 @@
 // Rinks with their water and their keeper's hours.
 import type { Db } from '@/db/knex'
+import type { RinkRow } from '@/db/types'
 import { NotFoundError } from '@/lib/errors'
 import type { RinkAccess } from '@/lib/access/proofs'
 import type { Role } from '@/lib/access/permissions'
 import type { Base, Phase, ShelterName } from '@/lib/advice/types'
+import type { FloorShape } from '@/lib/physics/floor'
+import { readFloor } from '@/lib/schemas/floor'
 
 export type WaterKind = 'cold-tap' | 'hot-tap' | 'hydrant' | 'tanker'
 
@@ -15,10 +18,11 @@ export interface WaterRow {
   fillDepthMm: number
 }
 
-/** "HH:MM" in the rink's zone; `to` before `from` runs past midnight. */
+/** "HH:MM" in the rink's zone; `to` before `from` runs past midnight. The days, Monday 1 to Sunday 7, are those of the start. */
 export interface HoursRow {
   from: string
   to: string
+  weekdays: number[]
 }
 
 /** What a keeper can set, apart from water and hours. */
@@ -36,12 +40,20 @@ export interface RinkSettingsRow {
   shelter: ShelterName
   skyView: number
   maxPasses: number
+  /** Whether the clock follows from the place, or was chosen and stays. */
+  timeZoneBy: RinkRow['time_zone_by']
 }
 
 /** Everything a judgement depends on, except the weather and the sheet. */
 export interface RinkForJudging extends RinkSettingsRow {
   id: string
   settingsVersion: number
+  /** Null is level ground. */
+  floor: FloorShape | null
+  boardHeightMm: number | null
+  carriesSkaterMm: number
+  windLimitMps: number | null
+  windChillLimitC: number | null
   cell: { latitudeDeg: number; longitudeDeg: number }
   water: WaterRow
   available: HoursRow[]
@@ -70,9 +82,10 @@ const SETTINGS = {
   shelter: 'r.shelter',
   skyView: 'r.sky_view',
   maxPasses: 'r.max_passes',
+  timeZoneBy: 'r.time_zone_by',
 }
 
-function toColumns(rink: RinkSettingsRow) {
+export function toColumns(rink: RinkSettingsRow) {
   return {
     name: rink.name,
     place_name: rink.placeName,
@@ -87,6 +100,7 @@ function toColumns(rink: RinkSettingsRow) {
     shelter: rink.shelter,
     sky_view: rink.skyView,
     max_passes: rink.maxPasses,
+    time_zone_by: rink.timeZoneBy,
   }
 }
 
@@ -120,40 +134,6 @@ export async function findRinkByCreationKey(
   return db('rinks').where({ created_by: made.createdBy, creation_key: made.creationKey }).first('id')
 }
 
-/** Counts the change, so that outlooks made before it are known to be old. */
-export async function updateRinkSettings(
-  trx: Db,
-  access: RinkAccess<'manage'>,
-  rink: RinkSettingsRow,
-  now: Date,
-): Promise<void> {
-  await trx('rinks')
-    .where({ id: access.rinkId })
-    .update({ ...toColumns(rink), updated_at: now })
-    .increment('settings_version')
-}
-
-/** Sets the rink's default water source, replacing the one before. */
-export async function putDefaultWater(trx: Db, rinkId: string, water: WaterRow): Promise<void> {
-  const row = {
-    rink_id: rinkId,
-    kind: water.kind,
-    flow_l_per_min: water.flowLPerMin,
-    temperature_c: water.temperatureC,
-    layer_mm: water.layerMm,
-    fill_depth_mm: water.fillDepthMm,
-  }
-  await trx('water_sources').insert(row).onConflict(trx.raw('(rink_id) where is_default')).merge()
-}
-
-/** Sets all hours in which somebody can go out. */
-export async function replaceAvailableHours(trx: Db, rinkId: string, hours: readonly HoursRow[]): Promise<void> {
-  await trx('available_hours').where({ rink_id: rinkId }).delete()
-  await trx('available_hours').insert(
-    hours.map(({ from, to }) => ({ rink_id: rinkId, from_local: from, to_local: to })),
-  )
-}
-
 export async function findRinkForJudging(db: Db, rinkId: string): Promise<RinkForJudging | undefined> {
   const rink = await db('rinks as r')
     .join('grid_cells as c', 'c.id', 'r.grid_cell_id')
@@ -162,11 +142,16 @@ export async function findRinkForJudging(db: Db, rinkId: string): Promise<RinkFo
       id: 'r.id',
       settingsVersion: 'r.settings_version',
       ...SETTINGS,
+      storedFloor: 'r.floor',
+      boardHeightMm: 'r.board_height_mm',
+      carriesSkaterMm: 'r.carries_skater_mm',
+      windLimitMps: 'r.wind_limit_mps',
+      windChillLimitC: 'r.wind_chill_limit_c',
       cellLatitudeDeg: 'c.latitude_deg',
       cellLongitudeDeg: 'c.longitude_deg',
     })
   if (!rink) return undefined
-  const { cellLatitudeDeg, cellLongitudeDeg, ...settings } = rink
+  const { cellLatitudeDeg, cellLongitudeDeg, storedFloor, ...settings } = rink
   const water = await db('water_sources').where({ rink_id: rinkId, is_default: true }).first({
     kind: 'kind',
     flowLPerMin: 'flow_l_per_min',
@@ -177,8 +162,9 @@ export async function findRinkForJudging(db: Db, rinkId: string): Promise<RinkFo
   const available = await db('available_hours')
     .where({ rink_id: rinkId })
     .orderBy('from_local')
-    .select({ from: 'from_local', to: 'to_local' })
-  return { ...settings, cell: { latitudeDeg: cellLatitudeDeg, longitudeDeg: cellLongitudeDeg }, water, available }
+    .select({ from: 'from_local', to: 'to_local', weekdays: 'weekdays' })
+  const cell = { latitudeDeg: cellLatitudeDeg, longitudeDeg: cellLongitudeDeg }
+  return { ...settings, floor: readFloor(storedFloor), cell, water, available }
 }
 
 export async function listRinksOfUser(db: Db, userId: string): Promise<RinkOfUser[]> {

@@ -34,16 +34,34 @@ function minuteOf(time: string): number {
   return hours * 60 + minutes
 }
 
-/** Whether two spans of the day share a minute; a span whose end is before its start runs past midnight. */
+/** Hours that start on some days of the week only: Monday 1 to Sunday 7. */
+export interface WeekHours extends Hours {
+  weekdays: number[]
+}
+
+const WEEK_MINUTES = 7 * DAY_MINUTES
+export const EVERY_DAY = [1, 2, 3, 4, 5, 6, 7]
+
+/** Spans in minutes of the week; the last one may run over its end. */
+function weekSpans({ from, to, weekdays }: WeekHours): [start: number, end: number][] {
+  const length = (minuteOf(to) - minuteOf(from) + DAY_MINUTES) % DAY_MINUTES || DAY_MINUTES
+  return weekdays.map((day) => {
+    const start = (day - 1) * DAY_MINUTES + minuteOf(from)
+    return [start, start + length]
+  })
+}
+
+/** Whether two rows of hours share a minute of the week; an end before the start runs past midnight. */
+export function shareAMinute(a: WeekHours, b: WeekHours): boolean {
+  const apart = (startA: number, endA: number, startB: number, endB: number) => endA <= startB || endB <= startA
+  return weekSpans(a).some(([startA, endA]) =>
+    weekSpans(b).some(([startB, endB]) =>
+      [-WEEK_MINUTES, 0, WEEK_MINUTES].some((shift) => !apart(startA, endA, startB + shift, endB + shift)),
+    ),
+  )
+}
+
+/** The same of hours that are the same every day. */
 export function doOverlap(a: Hours, b: Hours): boolean {
-  const spans = ({ from, to }: Hours): [number, number][] => {
-    const [start, end] = [minuteOf(from), minuteOf(to)]
-    return end > start
-      ? [[start, end]]
-      : [
-          [start, DAY_MINUTES],
-          [0, end],
-        ]
-  }
-  return spans(a).some(([startA, endA]) => spans(b).some(([startB, endB]) => startA < endB && startB < endA))
+  return shareAMinute({ ...a, weekdays: EVERY_DAY }, { ...b, weekdays: EVERY_DAY })
 }

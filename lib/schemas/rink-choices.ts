@@ -4,6 +4,7 @@ export const BASES = ['liner', 'ground', 'snow'] as const
 export const SHELTERS = ['open', 'suburban', 'tight'] as const
 export const SKIES = ['wide', 'edged', 'yard', 'closed-in'] as const
 export const PHASES = ['planning', 'waiting', 'filling', 'freezing', 'skating', 'thaw', 'closed'] as const
+export const FLOOR_KINDS = ['level', 'corners', 'grid'] as const
 export const WATER_KINDS = ['cold-tap', 'hot-tap', 'hydrant', 'tanker'] as const
 
 export type SkyChoice = (typeof SKIES)[number]

@@ -1,8 +1,8 @@
-// Setting up a rink and changing its settings: one set of fields for the form, the action, the service and the tests.
+// Setting up a rink: one set of fields for the form, the action, the service and the tests. Settings share them (rink-settings.ts).
 import { z } from 'zod'
 import type { Units } from '@/lib/units'
 import { latitudeSchema, longitudeSchema } from './coordinates'
-import { clockTimeSchema, doOverlap, timeZoneSchema } from './local-time'
+import { clockTimeSchema, doOverlap, EVERY_DAY, timeZoneSchema } from './local-time'
 import { inUnitsOf, lineOfText, measured, orEmpty, secondsSchema, tickSchema } from './fields'
 import { fitsMeasure, rangeMessage } from './measures'
 import {
@@ -19,6 +19,36 @@ import {
 
 export const rinkIdSchema = z.uuid('That is no rink.')
 
+/** What is chosen from a list. */
+export const choiceFields = {
+  base: z.enum(BASES, 'Choose what the rink lies on.').default('liner'),
+  shelter: z.enum(SHELTERS, 'Choose how the wind reaches the rink.').default('suburban'),
+  sky: z.enum(SKIES, 'Choose how much sky the rink sees.').default('edged'),
+  phase: z.enum(PHASES, 'Choose what there is now.').default('waiting'),
+}
+
+export const maxPassesSchema = z.coerce
+  .number()
+  .int()
+  .min(1, 'At least one.')
+  .max(6, 'At most six.')
+  .default(RINK_DEFAULTS.maxPasses)
+
+/** One source of water, and what is poured from it. */
+export function waterFields(units: Units) {
+  return {
+    fillDepth: measured('fillDepth', units).default(RINK_DEFAULTS.fillDepthMm),
+    waterKind: z.enum(WATER_KINDS, 'Choose where the water comes from.').default('cold-tap'),
+    flow: orEmpty(measured('flow', units)),
+    bucketSize: orEmpty(measured('bucket', units)),
+    bucketSeconds: orEmpty(secondsSchema),
+    waterTemperature: orEmpty(measured('waterTemperature', units)),
+    layer: measured('layer', units).default(RINK_DEFAULTS.layerMm),
+  }
+}
+
+type WaterFields = z.output<z.ZodObject<ReturnType<typeof waterFields>>>
+
 function rinkFields(units: Units) {
   return {
     units: z.custom<Units>(),
@@ -29,19 +59,10 @@ function rinkFields(units: Units) {
     timeZone: orEmpty(timeZoneSchema),
     length: measured('side', units).default(RINK_DEFAULTS.sideM),
     width: measured('side', units).default(RINK_DEFAULTS.sideM),
-    base: z.enum(BASES, 'Choose what the rink lies on.').default('liner'),
-    shelter: z.enum(SHELTERS, 'Choose how the wind reaches the rink.').default('suburban'),
-    sky: z.enum(SKIES, 'Choose how much sky the rink sees.').default('edged'),
-    phase: z.enum(PHASES, 'Choose what there is now.').default('waiting'),
+    ...choiceFields,
     iceThickness: orEmpty(measured('iceThickness', units)),
-    fillDepth: measured('fillDepth', units).default(RINK_DEFAULTS.fillDepthMm),
-    waterKind: z.enum(WATER_KINDS, 'Choose where the water comes from.').default('cold-tap'),
-    flow: orEmpty(measured('flow', units)),
-    bucketSize: orEmpty(measured('bucket', units)),
-    bucketSeconds: orEmpty(secondsSchema),
-    waterTemperature: orEmpty(measured('waterTemperature', units)),
-    layer: measured('layer', units).default(RINK_DEFAULTS.layerMm),
-    maxPasses: z.coerce.number().int().min(1, 'At least one.').max(6, 'At most six.').default(RINK_DEFAULTS.maxPasses),
+    ...waterFields(units),
+    maxPasses: maxPassesSchema,
     hoursFrom: clockTimeSchema.default(RINK_DEFAULTS.from),
     hoursTo: clockTimeSchema.default(RINK_DEFAULTS.to),
     moreHoursFrom: orEmpty(clockTimeSchema),
@@ -56,18 +77,26 @@ export function bucketFlowLPerMin(litres: number, seconds: number): number {
   return (litres / seconds) * 60
 }
 
-/** What single fields cannot know: the answers have to fit each other. */
-function checkTogether(fields: Fields & { units: Units }, context: z.RefinementCtx): void {
+/** A bucket test needs both its numbers, and has to give a flow that a hose could have. */
+export function checkFlow(fields: WaterFields, units: Units, context: z.RefinementCtx): void {
   const refuse = (field: string, message: string) => context.addIssue({ code: 'custom', path: [field], message })
-  const { bucketSize, bucketSeconds, moreHoursFrom, moreHoursTo } = fields
-  if (fields.flow === undefined && (bucketSize === undefined) !== (bucketSeconds === undefined)) {
+  const { flow, bucketSize, bucketSeconds } = fields
+  if (flow !== undefined) return
+  if ((bucketSize === undefined) !== (bucketSeconds === undefined)) {
     refuse(
       bucketSize === undefined ? 'bucketSize' : 'bucketSeconds',
       'The bucket test needs both: how big, and how long.',
     )
-  } else if (fields.flow === undefined && !fitsMeasure('flow', flowOf(fields))) {
-    refuse('bucketSeconds', `That would be no hose we know. ${rangeMessage('flow', fields.units)}`)
+  } else if (!fitsMeasure('flow', flowOf(fields))) {
+    refuse('bucketSeconds', `That would be no hose we know. ${rangeMessage('flow', units)}`)
   }
+}
+
+/** What single fields cannot know: the answers have to fit each other. */
+function checkTogether(fields: Fields & { units: Units }, context: z.RefinementCtx): void {
+  const refuse = (field: string, message: string) => context.addIssue({ code: 'custom', path: [field], message })
+  const { moreHoursFrom, moreHoursTo } = fields
+  checkFlow(fields, fields.units, context)
   if (fields.hoursFrom === fields.hoursTo) refuse('hoursTo', 'These hours end when they start.')
   if (fields.phase === 'skating' && fields.iceThickness === 0)
     refuse('iceThickness', 'Ice that carries skaters has a thickness.')
@@ -94,10 +123,15 @@ function askForThickness({ phase, iceThickness }: Fields, context: z.RefinementC
 }
 
 /** Typed, else measured by bucket, else what such a source usually gives. [L/min] */
-function flowOf({ flow, bucketSize, bucketSeconds, waterKind }: Fields): number {
+export function flowOf({ flow, bucketSize, bucketSeconds, waterKind }: WaterFields): number {
   if (flow !== undefined) return flow
   if (bucketSize !== undefined && bucketSeconds !== undefined) return bucketFlowLPerMin(bucketSize, bucketSeconds)
   return WATER_DEFAULTS[waterKind].flowLPerMin
+}
+
+/** [°C] */
+export function waterTemperatureOf({ waterTemperature, waterKind }: WaterFields): number {
+  return waterTemperature ?? WATER_DEFAULTS[waterKind].temperatureC
 }
 
 /** From the fields of the form to what is stored, in SI. */
@@ -121,12 +155,15 @@ function toRink(fields: Fields) {
     water: {
       kind: fields.waterKind,
       flowLPerMin: flowOf(fields),
-      temperatureC: fields.waterTemperature ?? WATER_DEFAULTS[fields.waterKind].temperatureC,
+      temperatureC: waterTemperatureOf(fields),
       layerMm: fields.layer,
       fillDepthMm: fields.fillDepth,
     },
     maxPasses: fields.maxPasses,
-    available: [{ from: fields.hoursFrom, to: fields.hoursTo }, ...more],
+    available: [{ from: fields.hoursFrom, to: fields.hoursTo }, ...more].map((hours) => ({
+      ...hours,
+      weekdays: EVERY_DAY,
+    })),
   }
 }
 
@@ -153,12 +190,4 @@ export const setUpRinkSchema = inUnitsOf((units) =>
     })),
 )
 
-export const changeRinkSchema = inUnitsOf((units) =>
-  z
-    .object({ ...rinkFields(units), rinkId: rinkIdSchema })
-    .superRefine(checkTogether)
-    .transform((fields) => ({ rinkId: fields.rinkId, rink: toRink(fields) })),
-)
-
 export type SetUpRinkInput = z.output<typeof setUpRinkSchema>
-export type ChangeRinkInput = z.output<typeof changeRinkSchema>

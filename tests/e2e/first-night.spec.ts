@@ -127,7 +127,7 @@ test('a keeper signs up, sets a rink up, sees tonight and is told', async ({ pag
     await page.goto(`${rinkUrl}/alerts`)
     await expect(page.getByLabel('Tell me at')).toHaveValue('15:30')
     await expectAccessible(page)
-    await page.goto(`${rinkUrl}/settings`)
+    await page.goto(`${rinkUrl}/settings/place`)
     await expect(page.getByLabel('Name', { exact: true })).toHaveValue('Alder Court')
     await expectAccessible(page)
     await page.goto('/account')

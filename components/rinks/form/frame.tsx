@@ -6,7 +6,8 @@ import { Notice } from '@/components/ui/notice'
 import type { RinkForm } from './use-rink-form'
 
 /** Whatever a fault belongs to: a field, or a group of choices. */
-const FAULTY = 'input[aria-invalid=true], select[aria-invalid=true], fieldset[aria-invalid=true] input'
+const FAULTY =
+  'input[aria-invalid=true], select[aria-invalid=true], textarea[aria-invalid=true], fieldset[aria-invalid=true] input'
 
 interface Props {
   form: RinkForm

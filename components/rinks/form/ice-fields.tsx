@@ -2,17 +2,8 @@
 import { SelectField, TextField } from '@/components/ui/field'
 import { useHydrated } from '@/components/hooks/use-hydrated'
 import { hasIce, PHASES } from '@/lib/schemas/rink-choices'
+import { PHASE_WORDS } from '../choice-words'
 import type { RinkForm } from './use-rink-form'
-
-const PHASE_WORDS: Record<(typeof PHASES)[number], string> = {
-  planning: 'Nothing built yet',
-  waiting: 'Built, waiting for cold to fill',
-  filling: 'Filling now',
-  freezing: 'Filled, freezing through',
-  skating: 'Ice that carries skaters',
-  thaw: 'Ice, thawing',
-  closed: 'Closed for the season',
-}
 
 /** Only while a rink runs do these two make sense as an answer. */
 const LATE_PHASES = ['thaw', 'closed']
@@ -42,14 +33,22 @@ export function IceFields({ form, isNew }: { form: RinkForm; isNew: boolean }) {
           {...form.text('iceThickness')}
         />
       </div>
-      <div hidden={isHydrated && form.values.base !== 'liner'}>
-        <TextField
-          label="Water in the liner when full"
-          inputMode="decimal"
-          hint="Mean depth. Shallow freezes through sooner."
-          {...form.text('fillDepth')}
-        />
-      </div>
+      {isNew ? <FillDepthField form={form} /> : null}
     </>
+  )
+}
+
+/** Only a liner holds a fill. */
+export function FillDepthField({ form }: { form: RinkForm }) {
+  const isHydrated = useHydrated()
+  return (
+    <div hidden={isHydrated && form.values.base !== 'liner'}>
+      <TextField
+        label="Water in the liner when full"
+        inputMode="decimal"
+        hint="Mean depth. Shallow freezes through sooner."
+        {...form.text('fillDepth')}
+      />
+    </div>
   )
 }

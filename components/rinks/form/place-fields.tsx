@@ -1,17 +1,24 @@
 // Where the rink is: found by name or position, or typed as coordinates; the zone of its clock follows.
 'use client'
 import { useState } from 'react'
+import { ChoiceField } from '@/components/ui/choice-field'
 import { Disclosure } from '@/components/ui/disclosure'
 import { TextField } from '@/components/ui/field'
 import { useHydrated } from '@/components/hooks/use-hydrated'
 import { lookUpPosition, PlaceSearch, type ChosenPlace } from './place-search'
 import type { RinkForm } from './use-rink-form'
 
-export function PlaceFields({ form }: { form: RinkForm }) {
+interface Props {
+  form: RinkForm
+  /** Settings ask apart whose clock counts. */
+  asksWhoseClock?: boolean
+}
+
+export function PlaceFields({ form, asksWhoseClock }: Props) {
   const isHydrated = useHydrated()
   const { latitude, longitude } = form.values
   const choose = ({ units, ...place }: ChosenPlace) => {
-    form.set(place)
+    form.set(movedTo(form, place))
     form.suggestUnits(units)
   }
   const isMissing = !latitude || !longitude
@@ -20,31 +27,40 @@ export function PlaceFields({ form }: { form: RinkForm }) {
   return (
     <>
       {isHydrated ? <PlaceSearch onChoose={choose} error={isMissing ? fault : undefined} /> : null}
-      {isHydrated && !isMissing ? <ChosenLine form={form} /> : null}
+      {isHydrated && !isMissing ? <ChosenLine form={form} asksWhoseClock={asksWhoseClock} /> : null}
       <noscript>
         <p className="mb-3">Search needs script. Open the coordinates below and type where the rink is.</p>
       </noscript>
-      <Disclosure summary="Coordinates and time zone" className="mb-5" open={isFaulty && !(isHydrated && isMissing)}>
-        <Coordinates form={form} />
+      <Disclosure
+        summary={asksWhoseClock ? 'Coordinates' : 'Coordinates and time zone'}
+        className="mb-5"
+        open={isFaulty && !(isHydrated && isMissing)}
+      >
+        <Coordinates form={form} asksWhoseClock={asksWhoseClock} />
       </Disclosure>
     </>
   )
 }
 
-function ChosenLine({ form }: { form: RinkForm }) {
+/** A clock that somebody chose stays, wherever the rink is moved. */
+function movedTo(form: RinkForm, { timeZone, ...place }: Omit<ChosenPlace, 'units'>) {
+  return form.values.zoneBy === 'keeper' ? place : { ...place, timeZone }
+}
+
+function ChosenLine({ form, asksWhoseClock }: Props) {
   const { placeName, latitude, longitude, timeZone } = form.values
   return (
     <p role="status" className="mb-3 border-l-[3px] border-hose pl-3.5">
       <span className="font-medium">{placeName || 'This position'}</span>
       <span className="block text-note text-graphite">
-        {latitude}°, {longitude}°{timeZone ? `; clock of ${timeZone}` : ''}
+        {latitude}°, {longitude}°{timeZone && !asksWhoseClock ? `; clock of ${timeZone}` : ''}
       </span>
     </p>
   )
 }
 
 /** Typing another position by hand moves name and zone along; both may then be changed. */
-function Coordinates({ form }: { form: RinkForm }) {
+function Coordinates({ form, asksWhoseClock }: Props) {
   const { latitude = '', longitude = '' } = form.values
   const [lookedUp, setLookedUp] = useState(`${latitude} ${longitude}`)
   const follow = async () => {
@@ -52,7 +68,7 @@ function Coordinates({ form }: { form: RinkForm }) {
     if (!latitude || !longitude || position === lookedUp) return
     setLookedUp(position)
     const place = await lookUpPosition(latitude, longitude)
-    if (place) form.set({ placeName: place.placeName, timeZone: place.timeZone })
+    if (place) form.set(movedTo(form, { placeName: place.placeName, timeZone: place.timeZone, latitude, longitude }))
   }
   return (
     <>
@@ -78,13 +94,49 @@ function Coordinates({ form }: { form: RinkForm }) {
         maxLength={120}
         {...form.text('placeName')}
       />
+      {asksWhoseClock ? null : <ZoneField form={form} hint="If empty, it follows from the place." />}
+    </>
+  )
+}
+
+const CLOCK_CHOICES = [
+  { value: 'place', label: 'The place’s own', note: 'It follows when the rink is moved.' },
+  {
+    value: 'keeper',
+    label: 'Another, that you choose',
+    note: 'It stays, also when the rink is moved across a border.',
+  },
+]
+
+/** Whose clock counts at the rink. */
+export function ClockFields({ form }: { form: RinkForm }) {
+  const isHydrated = useHydrated()
+  return (
+    <>
+      <ChoiceField legend="Which clock does the rink go by?" choices={CLOCK_CHOICES} {...form.choice('zoneBy')} />
+      <div hidden={isHydrated && form.values.zoneBy !== 'keeper'}>
+        <ZoneField form={form} hint="By the name of its city, like America/Toronto." />
+      </div>
+    </>
+  )
+}
+
+/** Whoever types here has chosen. */
+function ZoneField({ form, hint }: { form: RinkForm; hint: string }) {
+  const onChange = (event: { target: { value: string } }) => {
+    const timeZone = event.target.value
+    form.set({ timeZone, zoneBy: timeZone.trim() ? 'keeper' : 'place' })
+  }
+  return (
+    <>
       <TextField
         label="Time zone"
-        hint="If empty, it follows from the place."
+        hint={hint}
         list="time-zones"
         autoComplete="off"
         spellCheck={false}
         {...form.text('timeZone')}
+        onChange={onChange}
       />
       <TimeZones />
     </>

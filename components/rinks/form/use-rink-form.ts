@@ -60,6 +60,12 @@ export function useRinkForm(action: FormAction, initial: FormValues, followsPlac
       unit: MEASURE_OF[name] && unitOf(MEASURE_OF[name], units),
       onChange: (event: { target: { value: string } }) => set({ [name]: event.target.value }),
     }),
+    area: (name: string) => ({
+      name,
+      value: values[name] ?? '',
+      error: error(name),
+      onChange: (event: { target: { value: string } }) => set({ [name]: event.target.value }),
+    }),
     choice: (name: string) => ({
       name,
       value: values[name] ?? '',

@@ -1,7 +1,6 @@
-// What the rink form starts from: its text fields, for a new rink and for one that exists.
+// What the set-up form starts from, and the units that its quantities are typed in.
 import { parseNumber, scaleOf, typed, type MeasureName } from '@/lib/schemas/measures'
-import { RINK_DEFAULTS, SKIES, SKY_VIEWS, type SkyChoice } from '@/lib/schemas/rink-choices'
-import type { RinkInput } from '@/lib/schemas/rinks'
+import { RINK_DEFAULTS } from '@/lib/schemas/rink-choices'
 import { METRIC, unitsCode, unitsOfCode, type Units } from '@/lib/units'
 
 /** Text by field name, as FormData has it; a box that is not ticked is absent. */
@@ -17,6 +16,14 @@ export const MEASURE_OF: Record<string, MeasureName> = {
   bucketSize: 'bucket',
   waterTemperature: 'waterTemperature',
   layer: 'layer',
+  cornerNorth: 'drop',
+  cornerEast: 'drop',
+  cornerSouth: 'drop',
+  cornerWest: 'drop',
+  boardHeight: 'boardHeight',
+  windLimit: 'windLimit',
+  windChillLimit: 'windChill',
+  carriesSkater: 'carriesSkater',
 }
 
 /** Ten metres are 33 feet; a form starts with round numbers in all units. */
@@ -47,43 +54,6 @@ export function newRinkValues(units: Units, creationKey: string): FormValues {
     tellAt: RINK_DEFAULTS.tellAt,
     wantsPush: 'on',
     wantsEmail: 'on',
-  }
-}
-
-/** The description whose share of open sky is nearest to the stored one. */
-function nearestSky(skyView: number): SkyChoice {
-  const distance = (sky: SkyChoice) => Math.abs(SKY_VIEWS[sky] - skyView)
-  return SKIES.reduce((best, sky) => (distance(sky) < distance(best) ? sky : best))
-}
-
-/** The ice is left open: it is told when somebody has measured it. */
-export function rinkValues(rink: Omit<RinkInput, 'iceThicknessMm'> & { id: string }, units: Units): FormValues {
-  const { water, available } = rink
-  const [hours, more] = available
-  return {
-    rinkId: rink.id,
-    units: unitsCode(units),
-    name: rink.name,
-    placeName: rink.placeName ?? '',
-    latitude: String(rink.latitudeDeg),
-    longitude: String(rink.longitudeDeg),
-    timeZone: rink.timeZone ?? '',
-    length: typed('side', units, rink.lengthM),
-    width: typed('side', units, rink.widthM),
-    base: rink.base,
-    shelter: rink.shelter,
-    sky: nearestSky(rink.skyView),
-    phase: rink.phase,
-    fillDepth: typed('fillDepth', units, water.fillDepthMm),
-    waterKind: water.kind,
-    flow: typed('flow', units, water.flowLPerMin),
-    waterTemperature: typed('waterTemperature', units, water.temperatureC),
-    layer: typed('layer', units, water.layerMm),
-    maxPasses: String(rink.maxPasses),
-    hoursFrom: hours?.from ?? RINK_DEFAULTS.from,
-    hoursTo: hours?.to ?? RINK_DEFAULTS.to,
-    moreHoursFrom: more?.from ?? '',
-    moreHoursTo: more?.to ?? '',
   }
 }
 

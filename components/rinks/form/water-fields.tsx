@@ -3,15 +3,9 @@ import { Disclosure } from '@/components/ui/disclosure'
 import { SelectField, TextField } from '@/components/ui/field'
 import { typed, unitOf } from '@/lib/schemas/measures'
 import { WATER_DEFAULTS, WATER_KINDS } from '@/lib/schemas/rink-choices'
+import { WATER_WORDS } from '../choice-words'
 import { BucketTest } from './bucket-test'
 import type { RinkForm } from './use-rink-form'
-
-const WATER_WORDS: Record<(typeof WATER_KINDS)[number], string> = {
-  'cold-tap': 'Cold tap and hose',
-  'hot-tap': 'Hot tap and hose',
-  hydrant: 'Hydrant',
-  tanker: 'Tanker',
-}
 
 export function WaterFields({ form }: { form: RinkForm }) {
   const kind = WATER_KINDS.find((name) => name === form.values.waterKind) ?? 'cold-tap'

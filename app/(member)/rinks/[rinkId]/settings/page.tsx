@@ -1,26 +1,34 @@
-// The rink's settings, for its keeper.
-import type { Metadata } from 'next'
-import { rinkValues } from '@/components/rinks/form/values'
-import { PageFrame } from '@/components/ui/page-frame'
-import { pageContext } from '@/lib/auth/request-context'
-import { orNotFound } from '@/lib/http/or-not-found'
-import { getAccount } from '@/lib/services/own-account'
-import { getRinkSettings } from '@/lib/services/rinks'
-import { SettingsForm } from './_components/settings-form'
+// All settings of a rink, for its keeper: what each says now, and the way to change it.
+import type { Metadata, Route } from 'next'
+import Link from 'next/link'
+import { RinkFrame } from '@/components/rinks/rink-frame'
+import { readSettings } from './_components/read-settings'
+import { summaries } from './_components/summaries'
 
 export const metadata: Metadata = { title: 'Rink settings' }
 
 export default async function SettingsPage({ params }: PageProps<'/rinks/[rinkId]/settings'>) {
-  const context = await pageContext()
-  const rink = await orNotFound(getRinkSettings(context, (await params).rinkId))
-  const { units } = await orNotFound(getAccount(context))
+  const { rink, words } = await readSettings((await params).rinkId)
+  const entries = [
+    ...summaries(rink, words),
+    { path: 'delete', word: 'Delete the rink', says: 'For good, with its log' },
+  ]
   return (
-    <PageFrame>
+    <RinkFrame name={rink.name} about="Settings">
       <div className="max-w-[34rem]">
-        <h1 className="mb-2 text-verdict font-medium lg:text-verdict-wide">{rink.name}: settings</h1>
-        <p className="max-w-line">The advice follows what you write here within a minute.</p>
-        <SettingsForm initial={rinkValues(rink, units)} />
+        <h1 className="mb-2 text-verdict font-medium lg:text-verdict-wide">Rink settings</h1>
+        <p className="mb-5 max-w-line text-graphite">The advice follows what you write here within a minute.</p>
+        <ul className="list-none border-t border-rule p-0">
+          {entries.map(({ path, word, says }) => (
+            <li key={path} className="border-b border-rule">
+              <Link href={`/rinks/${rink.id}/settings/${path}` as Route} className="grid min-h-touch py-3 no-underline">
+                <span className="font-medium">{word}</span>
+                <span className="text-note text-graphite">{says}</span>
+              </Link>
+            </li>
+          ))}
+        </ul>
       </div>
-    </PageFrame>
+    </RinkFrame>
   )
 }

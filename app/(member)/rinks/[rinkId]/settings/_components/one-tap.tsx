@@ -1,0 +1,26 @@
+// A button that does one thing to one source of water.
+'use client'
+import { ActionForm, type FormAction } from '@/components/ui/action-form'
+
+export function OneTap({
+  action,
+  submit,
+  rinkId,
+  sourceId,
+}: {
+  action: FormAction
+  submit: string
+  rinkId: string
+  sourceId: string
+}) {
+  return (
+    <ActionForm action={action} submit={submit} look="plain">
+      {() => (
+        <>
+          <input type="hidden" name="rinkId" value={rinkId} />
+          <input type="hidden" name="sourceId" value={sourceId} />
+        </>
+      )}
+    </ActionForm>
+  )
+}

@@ -1,0 +1,63 @@
+// Changes to a rink that its advice depends on; each is counted, so that outlooks made before it are known to be old.
+import type { Db } from '@/db/knex'
+import type { RinkRow } from '@/db/types'
+import type { RinkAccess } from '@/lib/access/proofs'
+import type { HoursRow } from './rinks'
+
+/** What settings pages change. */
+export type RinkChanges = Partial<
+  Pick<
+    RinkRow,
+    | 'name'
+    | 'place_name'
+    | 'latitude_deg'
+    | 'longitude_deg'
+    | 'grid_cell_id'
+    | 'time_zone'
+    | 'time_zone_by'
+    | 'length_m'
+    | 'width_m'
+    | 'base'
+    | 'phase'
+    | 'shelter'
+    | 'sky_view'
+    | 'max_passes'
+    | 'board_height_mm'
+    | 'carries_skater_mm'
+    | 'wind_limit_mps'
+    | 'wind_chill_limit_c'
+    | 'floor'
+  >
+>
+
+/** Of two changes at once the second waits here until the first is done. */
+export async function lockRink(trx: Db, access: RinkAccess<'manage'>): Promise<void> {
+  await trx('rinks').where({ id: access.rinkId }).forUpdate().first('id')
+}
+
+/** Counts the change, too. */
+export async function changeRink(
+  trx: Db,
+  access: RinkAccess<'manage'>,
+  { floor, ...changes }: RinkChanges,
+  now: Date,
+): Promise<void> {
+  const columns = floor === undefined ? changes : { ...changes, floor: floor === null ? null : JSON.stringify(floor) }
+  await trx('rinks')
+    .where({ id: access.rinkId })
+    .update({ ...columns, updated_at: now })
+    .increment('settings_version')
+}
+
+/** Sets all hours in which somebody can go out. */
+export async function replaceAvailableHours(trx: Db, rinkId: string, hours: readonly HoursRow[]): Promise<void> {
+  await trx('available_hours').where({ rink_id: rinkId }).delete()
+  await trx('available_hours').insert(
+    hours.map(({ from, to, weekdays }) => ({ rink_id: rinkId, from_local: from, to_local: to, weekdays })),
+  )
+}
+
+/** Everything of the rink goes with it. */
+export async function deleteRink(db: Db, access: RinkAccess<'manage'>): Promise<void> {
+  await db('rinks').where({ id: access.rinkId }).delete()
+}

@@ -6,7 +6,7 @@ import { Button } from '../ui/button'
 import { Facts } from '../ui/facts'
 import type { WordOptions } from '@/lib/words/options'
 import { fluxText, rateText, temperatureText, windChillText } from '@/lib/words/quantities'
-import { clockText, doneByText } from '@/lib/words/times'
+import { doneByText } from '@/lib/words/times'
 import { HourReasons } from './hour-reasons'
 import { VERDICT_WORDS } from './verdict-words'
 
@@ -20,22 +20,23 @@ const PARTS = [
 
 interface HourPanelProps {
   hour: TonightHour | undefined
+  name: string
   reader: WordOptions
   onStep: (step: number) => void
   onClose: () => void
 }
 
-export function HourPanel({ hour, reader, onStep, onClose }: HourPanelProps) {
+export function HourPanel({ hour, name, reader, onStep, onClose }: HourPanelProps) {
   return (
     <>
       <p aria-live="polite" className="sr-only">
-        {hour ? spokenHour(hour, reader) : ''}
+        {hour ? spokenHour(hour, name, reader) : ''}
       </p>
       {hour ? (
         <div className="border-t border-rule px-5 pt-3 pb-4 text-note">
           <div className="flex flex-wrap items-center gap-x-3">
             <h2 className="mr-auto text-lead font-semibold">
-              {clockText(hour.time, reader)}, {VERDICT_WORDS[hour.verdict]}
+              {name}, {VERDICT_WORDS[hour.verdict]}
               {hour.isAvailable === false ? <span className="font-normal"> (outside your hours)</span> : null}
             </h2>
             <Button look="quiet" className="-mr-3 px-2" onClick={() => onStep(-1)}>
@@ -97,11 +98,11 @@ function freezingOrMelting({ freezeRateMmPerH }: TonightHour, reader: WordOption
   return { name: rate < 0 ? 'Melts' : 'Freezes', figure: rateText(Math.abs(rate), reader) }
 }
 
-function spokenHour(hour: TonightHour, reader: WordOptions): string {
-  if (!hour.isKnown) return `${clockText(hour.time, reader)}: no forecast.`
-  const { name, figure } = freezingOrMelting(hour, reader)
+function spokenHour(hour: TonightHour, name: string, reader: WordOptions): string {
+  if (!hour.isKnown) return `${name}: no forecast.`
+  const { name: does, figure } = freezingOrMelting(hour, reader)
   const set = hour.setsAt
     ? `Poured then, set by ${doneByText(hour.setsAt, reader)}.`
     : 'Poured then, not set within the forecast.'
-  return `${clockText(hour.time, reader)}: ${VERDICT_WORDS[hour.verdict]}. ${name} ${figure}. ${set}`
+  return `${name}: ${VERDICT_WORDS[hour.verdict]}. ${does} ${figure}. ${set}`
 }

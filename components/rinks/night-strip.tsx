@@ -5,11 +5,11 @@ import { useHydrated } from '../hooks/use-hydrated'
 import { layOutNightStrip } from '../charts/night-strip-layout'
 import { NightStripDrawing } from '../charts/night-strip-drawing'
 import { StripHours } from '../charts/strip-hours'
+import { hourNames } from './hour-names'
 import { HourPanel } from './hour-panel'
 import { NightLegend } from './night-legend'
 import { NightTable } from './night-table'
 import { readerOf } from './reader'
-import { clockText } from '@/lib/words/times'
 import { hoursOfNight, stripHours, stripInput, type StripSize, type StripSource } from './strip-input'
 import { stripWords } from './strip-words'
 
@@ -28,7 +28,7 @@ export function NightStrip({ source, now }: { source: StripSource; now: number }
   const { night, rink, viewer } = source
   const { hours: scored, passes } = source.outlook
   // Hours stay as they are while passes are moved: only the figures are laid out again then.
-  const { reader, hours, drawn } = useMemo(
+  const { reader, hours, names, drawn } = useMemo(
     () => readHours({ night, rink, viewer, outlook: { hours: scored, passes: [] } }, now),
     [night, rink, viewer, scored, now],
   )
@@ -46,7 +46,7 @@ export function NightStrip({ source, now }: { source: StripSource; now: number }
             <StripHours
               layout={layout}
               label="Hours of the night"
-              nameOf={(index) => clockText(hours[index]?.time ?? source.night.startsAt, reader)}
+              nameOf={(index) => names[index] ?? ''}
               selected={selected}
               start={Math.max(present, 0)}
               onSelect={setSelected}
@@ -56,13 +56,14 @@ export function NightStrip({ source, now }: { source: StripSource; now: number }
       ))}
       <HourPanel
         hour={selected === null ? undefined : hours[selected]}
+        name={selected === null ? '' : (names[selected] ?? '')}
         reader={reader}
         onStep={(step) => setSelected(stepped(selected, step, hours.length))}
         onClose={() => setSelected(null)}
       />
       <figcaption className="px-5 pb-1">
         <Legend night={night} reader={reader} drawn={drawn} />
-        <Table hours={hours} drawn={drawn} reader={reader} />
+        <Table hours={hours} names={names} drawn={drawn} reader={reader} />
       </figcaption>
     </figure>
   )
@@ -73,10 +74,10 @@ type ReadHours = ReturnType<typeof readHours>
 function readHours(source: StripSource, now: number) {
   const reader = readerOf(source)
   const hours = hoursOfNight(source, now)
-  return { reader, hours, drawn: stripHours(hours, reader.units) }
+  return { reader, hours, names: hourNames(hours, reader), drawn: stripHours(hours, reader.units) }
 }
 
-function layOut(source: StripSource, { reader, hours, drawn }: ReadHours, now: number) {
+function layOut(source: StripSource, { reader, hours, drawn }: Omit<ReadHours, 'names'>, now: number) {
   return (['wide', 'narrow'] as const).map((size) => {
     const input = stripInput(source, drawn, now, size)
     return { size, layout: layOutNightStrip(input), words: stripWords(input, hours, reader) }

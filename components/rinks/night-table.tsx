@@ -2,7 +2,7 @@
 import type { TonightHour } from '@/lib/schemas/tonight-view'
 import type { WordOptions } from '@/lib/words/options'
 import { numberText } from '@/lib/words/quantities'
-import { clockText, doneByText } from '@/lib/words/times'
+import { doneByText } from '@/lib/words/times'
 import type { StripHour } from '../charts/night-strip-layout'
 import { DataTable } from '../ui/data-table'
 import { Disclosure } from '../ui/disclosure'
@@ -11,12 +11,14 @@ import { VERDICT_WORDS } from './verdict-words'
 
 interface NightTableProps {
   hours: TonightHour[]
+  /** Of each hour. */
+  names: string[]
   /** The same hours as the strip draws them: rates and temperatures in the reader's units. */
   drawn: StripHour[]
   reader: WordOptions
 }
 
-export function NightTable({ hours, drawn, reader }: NightTableProps) {
+export function NightTable({ hours, names, drawn, reader }: NightTableProps) {
   const columns = [
     { head: 'Hour' },
     { head: 'Verdict' },
@@ -25,7 +27,10 @@ export function NightTable({ hours, drawn, reader }: NightTableProps) {
     { head: `Air, °${reader.units.temperature}`, isFigure: true },
     { head: 'Falls', isFigure: true },
   ]
-  const rows = hours.map((hour, index) => ({ key: hour.time, cells: cellsOf(hour, drawn[index], reader) }))
+  const rows = hours.map((hour, index) => ({
+    key: hour.time,
+    cells: [names[index] ?? '', ...cellsOf(hour, drawn[index], reader)],
+  }))
   return (
     <Disclosure summary="Show as table" className="text-small">
       <DataTable caption="Freeze rate, set time and weather by hour" columns={columns} rows={rows} />
@@ -37,7 +42,6 @@ function cellsOf(hour: TonightHour, drawn: StripHour | undefined, reader: WordOp
   const figure = (value: number | null | undefined, digits: number) =>
     value == null ? 'no forecast' : numberText(value, digits, reader)
   return [
-    clockText(hour.time, reader),
     VERDICT_WORDS[hour.verdict],
     figure(drawn?.rate, reader.units.ice === 'in' ? 2 : 1),
     hour.setsAt ? doneByText(hour.setsAt, reader) : hour.isKnown ? 'not set' : 'unknown',

@@ -18,6 +18,49 @@ const rowsOf = (markup: string) =>
     [...(row ?? '').matchAll(/<t[hd][^>]*>(.*?)<\/t[hd]>/g)].map(([, cell]) => cell ?? ''),
   )
 
+// Clocks in Toronto go back at 2 am on 1 November 2026, forward at 2 am on 14 March 2027; noon is 16:00 UTC in summer, 17:00 in winter.
+describe.each([
+  {
+    name: 'back',
+    startsAt: '2026-10-31T16:00:00Z',
+    endsAt: '2026-11-01T17:00:00Z',
+    hours: 25,
+    after: ['1 am', '1 am again', '2 am'],
+  },
+  {
+    name: 'forward',
+    startsAt: '2027-03-13T17:00:00Z',
+    endsAt: '2027-03-14T16:00:00Z',
+    hours: 23,
+    after: ['1 am', '3 am', '4 am'],
+  },
+])('the night on which clocks go $name', ({ startsAt, endsAt, hours: count, after }) => {
+  const from = Date.parse(startsAt)
+  const hours = Array.from({ length: count }, (_, index) =>
+    hourAt(index % 24, { time: new Date(from + index * HOUR).toISOString() }),
+  )
+  const night = { date: startsAt.slice(0, 10), startsAt, endsAt, sunsetAt: null, sunriseAt: null }
+  const markup = draw({ night, outlook: outlookOf({ hours, passes: [] }) }, from)
+  const names = rowsOf(markup)
+    .slice(1)
+    .map(([name]) => name)
+
+  test('has one row for each of its hours, from noon to 11 am', () => {
+    expect(names).toHaveLength(count)
+    expect([names[0], names.at(-1)]).toEqual(['noon', '11 am'])
+    expect(names.slice(names.indexOf('1 am'), names.indexOf('1 am') + 3)).toEqual(after)
+  })
+
+  test('draws one bar for each of its hours, side by side', () => {
+    const [, wide = ''] = markup.split('<svg')
+    const bars = [...wide.matchAll(/<(?:rect|path) [^>]*class="(?:fill-lamp stroke-lamp-text|stroke-still)"/g)]
+    expect(bars).toHaveLength(count)
+    const lefts = bars.flatMap(([bar]) => /(?: x="| d="M)([\d.]+)/.exec(bar)?.[1] ?? []).map(Number)
+    expect(new Set(lefts).size).toBe(count)
+    expect([...lefts].sort((a, b) => a - b)).toEqual(lefts)
+  })
+})
+
 describe('the night strip', () => {
   test('has a title, a summary and one row in the table for each hour', () => {
     const markup = draw()

@@ -10,6 +10,9 @@ export const shortDayText = (date: string) => `${part(date, { weekday: 'short' }
 /** "Fri 15 January" */
 export const dayText = (date: string) => `${shortDayText(date)} ${part(date, { month: 'long' })}`
 
+/** "Fri 15 Jan" */
+export const shortDateText = (date: string) => `${shortDayText(date)} ${part(date, { month: 'short' })}`
+
 /** "Tue 12 to Wed 13 January" */
 export function nightLabel(nightDate: string): string {
   const next = addDays(nightDate, 1)

@@ -1,8 +1,7 @@
 // Forecasts kept: the open record of what was said of each night and what came of it.
 import type { Metadata } from 'next'
-import { dayText } from '@/components/rinks/reader'
+import { shortDateText } from '@/lib/words/night-label'
 import { RinkFrame } from '@/components/rinks/rink-frame'
-import { DataTable } from '@/components/ui/data-table'
 import { seasonName } from '@/lib/advice/season'
 import { pageContext } from '@/lib/auth/request-context'
 import { orNotFound } from '@/lib/http/or-not-found'
@@ -47,33 +46,27 @@ function Record({ view: { rates, nights, reader } }: { view: KeptView }) {
   const bands = rates.bands.filter(({ rate }) => rate.of > 0)
   return (
     <div className="grid gap-x-14 gap-y-8 lg:grid-cols-[1fr_18rem]">
-      <DataTable
-        caption="Night by night, newest first"
-        columns={[
-          { head: 'Night' },
-          { head: 'Said' },
-          { head: 'Runs that agreed', isFigure: true },
-          { head: 'Result' },
-          { head: 'What came' },
-        ]}
-        rows={nights.map((night) => ({
-          key: night.nightDate,
-          cells: [
-            dayText(night.nightDate),
-            saidText(
-              {
-                said: night.said,
-                startsAt: night.startsAt?.toISOString() ?? null,
-                endsAt: night.endsAt?.toISOString() ?? null,
-              },
-              reader,
-            ),
-            night.agreement === null ? '' : `${Math.round(night.agreement * 100)} %`,
-            RESULT_WORDS[night.result],
-            cameText(night, reader),
-          ],
-        }))}
-      />
+      <table className="w-full border-collapse text-note">
+        <caption className="pb-1 text-left text-graphite">Night by night, newest first</caption>
+        <thead>
+          <tr className="border-b border-rule text-left">
+            <th scope="col" className="py-2 pr-4 font-medium">
+              Night
+            </th>
+            <th scope="col" className="py-2 pr-4 font-medium">
+              What was said, and what came
+            </th>
+            <th scope="col" className="py-2 font-medium">
+              Result
+            </th>
+          </tr>
+        </thead>
+        <tbody>
+          {nights.map((night) => (
+            <NightRow key={night.nightDate} night={night} reader={reader} />
+          ))}
+        </tbody>
+      </table>
       <section>
         <h2 className="mb-3 border-b border-rule pb-2 font-semibold">Rates</h2>
         <dl className="grid grid-cols-[1fr_auto] gap-x-4 gap-y-2">
@@ -90,6 +83,28 @@ function Record({ view: { rates, nights, reader } }: { view: KeptView }) {
         </dl>
       </section>
     </div>
+  )
+}
+
+function NightRow({ night, reader }: { night: KeptView['nights'][number]; reader: KeptView['reader'] }) {
+  const { startsAt, endsAt, agreement } = night
+  const times = { startsAt: startsAt?.toISOString() ?? null, endsAt: endsAt?.toISOString() ?? null }
+  return (
+    <tr className="border-b border-rule align-baseline">
+      <th scope="row" className="py-2 pr-4 text-left font-medium whitespace-nowrap">
+        {shortDateText(night.nightDate)}
+      </th>
+      <td className="py-2 pr-4">
+        {saidText({ said: night.said, ...times }, reader)}
+        {agreement === null ? null : (
+          <span className="text-graphite">, {Math.round(agreement * 100)} % of runs agreed</span>
+        )}
+        <span className="block text-small text-graphite">{cameText(night, reader)}</span>
+      </td>
+      <td className={`py-2 whitespace-nowrap ${night.result === 'broken' ? 'font-medium text-rust' : ''}`}>
+        {RESULT_WORDS[night.result]}
+      </td>
+    </tr>
   )
 }
 

@@ -19,6 +19,8 @@ export const LIMITS = {
   setUpByUser: { hits: 40, seconds: HOUR_SECONDS },
   // One search per pause in typing; each costs some milliseconds of processor.
   placeSearchByUser: { hits: 600, seconds: QUARTER_HOUR_SECONDS },
+  // Each reads everything a person or a rink has.
+  exportByUser: { hits: 30, seconds: QUARTER_HOUR_SECONDS },
 } as const
 
 export type LimitName = keyof typeof LIMITS

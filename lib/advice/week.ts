@@ -63,6 +63,8 @@ export interface WeekSetting {
   phase: Phase
   layerMm: number
   maxPasses: number
+  /** The night that the judgement's plan is for; an old one planned for another. */
+  plannedDate: string
   /** At most so many nights. */
   nights: number
 }
@@ -72,7 +74,7 @@ export interface WeekSetting {
  *
  * @param judgement Result of `judge`, or the same shape read back from storage.
  * @param setting.layerMm Water of one pass. [mm], above 0
- * @returns Nights in order. Passes of tonight are the plan's; those of later nights are estimated from the window.
+ * @returns Nights in order. Passes of the planned night are the plan's; those of other nights are estimated from the window.
  */
 export function nightsAhead(judgement: Judgement, setting: WeekSetting): NightAhead[] {
   const tonight = tonightDate(setting.now, setting.timeZone)
@@ -97,7 +99,7 @@ function nightAhead(
   hours: ScoredHour[],
   index: number,
 ): Omit<NightAhead, 'snowToClearCm'> {
-  const passes = passesOf(summary, hours, setting, index)
+  const passes = passesOf(summary, hours, setting)
   const isWhole = hours.every((hour) => hour.isKnown)
   const air = hours.flatMap(({ weather }) => (weather ? [weather.airTemperatureC] : []))
   const lastEnd = Date.parse(hours.at(-1)?.time ?? summary.startsAt) + HOUR_MILLIS
@@ -136,9 +138,9 @@ function agreementOf({ window, windows }: NightSummary): NightAhead['agreement']
   return { agreeing: Math.round(asked.agreement * asked.runs), runs: asked.runs }
 }
 
-function passesOf(summary: NightSummary, hours: ScoredHour[], setting: WeekSetting, index: number): NightPasses | null {
+function passesOf(summary: NightSummary, hours: ScoredHour[], setting: WeekSetting): NightPasses | null {
   if (summary.window?.kind !== 'flood') return null
-  if (index > 0) return estimatePasses(summary.window, hours, setting.maxPasses)
+  if (summary.nightDate !== setting.plannedDate) return estimatePasses(summary.window, hours, setting.maxPasses)
   const [first] = summary.passes
   if (!first || !summary.lastSetBy) return null
   return { count: summary.passes.length, startsAt: first.startsAt, setBy: summary.lastSetBy, isEstimate: false }

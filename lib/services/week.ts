@@ -48,7 +48,15 @@ async function outlookOf(
   const hours = await listScoredHours(db, outlook.id)
   const judgement = { modelVersion: outlook.modelVersion, hours, ...outlook.advice }
   const { timeZone, phase, maxPasses, water } = rink
-  const nights = nightsAhead(judgement, { now, timeZone, phase, maxPasses, layerMm: water.layerMm, nights: NIGHTS })
+  const nights = nightsAhead(judgement, {
+    now,
+    timeZone,
+    phase,
+    maxPasses,
+    layerMm: water.layerMm,
+    plannedDate: outlook.nightDate,
+    nights: NIGHTS,
+  })
   const asked = nights.find((night) => night.nightDate === openDate)
   return {
     judgedAt: outlook.judgedAt.toISOString(),

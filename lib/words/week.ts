@@ -27,13 +27,15 @@ export function weekHeadline({ phase, summary, fill }: Week, now: Date, words: W
   if (phase === 'waiting' || phase === 'filling') return fillHeadline(phase, summary, fill, now, words)
   if (phase === 'freezing') return freezingHeadline(fill, now, words)
   if (summary.thaw) return thawHeadline(summary, now, words)
-  const good = summary.goodDates.length
-  if (good === 0) return plain(`No good night in the ${countText(summary.nights)} ahead.`)
-  if (good === summary.nights) {
+  return countHeadline(summary.goodDates.length, summary.nights)
+}
+
+function countHeadline(good: number, nights: number): WeekHeadline {
+  if (nights === 1) return plain(`The one night that the forecast covers is ${good === 1 ? 'good' : 'not good'}.`)
+  if (good === 0) return plain(`No good night in the ${countText(nights)} ahead.`)
+  if (good === nights)
     return { before: 'All', key: `${countText(good)} nights`, after: ' ahead are good.', tone: 'flood' }
-  }
-  const key = capitalised(nightsText(good))
-  return { before: '', key, after: ` of the ${countText(summary.nights)} ahead.`, tone: 'flood' }
+  return { before: '', key: capitalised(nightsText(good)), after: ` of the ${countText(nights)} ahead.`, tone: 'flood' }
 }
 
 const nightsText = (count: number) => `${countText(count)} good ${count === 1 ? 'night' : 'nights'}`

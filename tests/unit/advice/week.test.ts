@@ -16,6 +16,7 @@ const SETTING: WeekSetting = {
   phase: 'skating',
   layerMm: 3,
   maxPasses: 3,
+  plannedDate: '2027-01-12',
   nights: 10,
 }
 
@@ -115,6 +116,15 @@ test('tonight shows the passes of its plan, a later night those counted from its
   // Pours at 30, 32 and 34.
   expect(tomorrow?.passes).toMatchObject({ count: 3, setBy: at(36), isEstimate: true })
   expect(tomorrow?.floodsMm).toBeCloseTo(9.8176, 3)
+})
+
+test('a plan made for another night counts for none', () => {
+  const hours = hoursOf(24, (index) => (index >= 6 && index < 12 ? floodHour(index, 2) : hourAt(index)))
+  const judgement = judgementOf(hours, { windows: [windowAt(6, 12)] })
+  const passesFor = (plannedDate: string) => nightsAhead(judgement, { ...SETTING, plannedDate })[0]?.passes
+  // Pours at 6, 8 and 10; the plan of tonight itself found no pass worth a trip.
+  expect(passesFor('2027-01-11')).toMatchObject({ count: 3, isEstimate: true })
+  expect(passesFor('2027-01-12')).toBeNull()
 })
 
 test('a window that too few runs agree with is no good night, and says how many do', () => {

@@ -52,6 +52,7 @@ test('without a thaw the headline counts what there is', () => {
   expect(headline({})).toBe('Three good nights of the ten ahead.')
   expect(headline({ goodDates: [] })).toBe('No good night in the ten ahead.')
   expect(headline({ nights: 3 })).toBe('All three nights ahead are good.')
+  expect(headline({ nights: 1, goodDates: ['2027-01-12'] })).toBe('The one night that the forecast covers is good.')
 })
 
 test('before the fill the headline says when to fill and when skaters may come', () => {

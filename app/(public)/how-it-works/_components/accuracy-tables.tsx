@@ -1,5 +1,4 @@
 // What was measured, with its date: the model beside drilled ice and finer sums, the advice beside thermometer rules.
-import { DataTable } from '@/components/ui/data-table'
 import { dayText } from '@/components/rinks/reader'
 import { ADVICE_FIGURES, MEASURED_ON, MODEL_FIGURES } from './accuracy'
 
@@ -26,14 +25,40 @@ export function AccuracyTables() {
         The advice, on three winters of measured weather, beside people who go by the thermometer at 8 pm. Used: good
         nights in which they flooded. Spoiled: floods that were still wet when snow, rain or the morning came.
       </p>
-      <DataTable
-        caption="Advice on three measured winters"
-        columns={[{ head: 'Who' }, { head: 'Used', isFigure: true }, { head: 'Spoiled', isFigure: true }]}
-        rows={ADVICE_FIGURES.map(({ who, usedPercent, spoiledPercent }) => ({
-          key: who,
-          cells: [who, percent(usedPercent), percent(spoiledPercent)],
-        }))}
-      />
+      <AdviceTable />
     </section>
+  )
+}
+
+function AdviceTable() {
+  const figure = 'border-b border-rule py-2 pl-4 text-right whitespace-nowrap'
+  return (
+    <table className="w-full border-collapse border-t border-rule text-note">
+      <caption className="sr-only">Advice on three measured winters</caption>
+      <thead>
+        <tr className="text-left">
+          <th scope="col" className="border-b border-rule py-2 font-medium">
+            Who
+          </th>
+          <th scope="col" className={`${figure} font-medium`}>
+            Used
+          </th>
+          <th scope="col" className={`${figure} font-medium`}>
+            Spoiled
+          </th>
+        </tr>
+      </thead>
+      <tbody>
+        {ADVICE_FIGURES.map(({ who, usedPercent, spoiledPercent }) => (
+          <tr key={who}>
+            <th scope="row" className="border-b border-rule py-2 text-left font-normal">
+              {who}
+            </th>
+            <td className={figure}>{percent(usedPercent)}</td>
+            <td className={figure}>{percent(spoiledPercent)}</td>
+          </tr>
+        ))}
+      </tbody>
+    </table>
   )
 }

@@ -1,4 +1,5 @@
 // The formulas of the model as the help page shows them; the docstrings of lib/physics and lib/advice say the same.
+import { AGREEMENT, VERDICT } from '@/lib/advice/thresholds'
 
 export interface Formula {
   name: string
@@ -79,14 +80,14 @@ export const ADVICE_FORMULAS: Formula[] = [
   {
     name: 'The score of an hour',
     formula: 'D = (d₁^w₁ · d₂^w₂ · …)^(1/Σw)',
-    text: 'Each point (sets soon, dry until set, in time, wind, cold, snow to clear) counts from 0 to 1. One that is fatal is fatal. 35 of 100 is a good hour; what the person and the hose bear is a lid on top, never an average.',
+    text: `Each point (sets soon, dry until set, in time, wind, cold, snow to clear) counts from 0 to 1. One that is fatal is fatal. ${VERDICT.goodScore} of 100 is a good hour; what the person and the hose bear is a lid on top, never an average.`,
     source:
       'Derringer & Suich 1980; the points and weights are ours, each beside a written rule of towns and rink keepers.',
   },
   {
     name: 'How sure',
     formula: 'share of forecast runs in which the hour is good',
-    text: 'Runs of the weather service where there are some, else twenty runs disturbed as forecasts of that age are known to err. Below three in four we say hold off.',
+    text: `Runs of the weather service where there are some, else ${AGREEMENT.defaultRuns} runs disturbed as forecasts of that age are known to err. Below ${Math.round(AGREEMENT.least * 100)} of 100 we say hold off.`,
     source: 'Temperature errors by lead time from a published verification; the other sizes are ours.',
   },
   {

@@ -3,6 +3,7 @@ import Link from 'next/link'
 import type { Route } from 'next'
 import { layOutNightStrip, type StripFrame, type StripInput } from '@/components/charts/night-strip-layout'
 import { NightStripDrawing } from '@/components/charts/night-strip-drawing'
+import { hourNames } from '@/components/rinks/hour-names'
 import { NightTable } from '@/components/rinks/night-table'
 import { stripHours } from '@/components/rinks/strip-input'
 import { stripWords } from '@/components/rinks/strip-words'
@@ -61,7 +62,7 @@ export function OpenNight({ night, hours, view, reader }: OpenNightProps) {
         <p className="text-small text-graphite">
           Bars: water frozen in an hour, left scale; line: air temperature, right scale. {nightLabel(night.nightDate)}.
         </p>
-        <NightTable hours={hours} drawn={drawn} reader={reader} />
+        <NightTable hours={hours} names={hourNames(hours, reader)} drawn={drawn} reader={reader} />
         {now >= Date.parse(night.startsAt) ? (
           <p className="text-note">
             <Link href={`/rinks/${view.rink.id}` as Route} className="inline-flex min-h-touch items-center underline">

@@ -16,7 +16,8 @@ export function WeekSource({ view, reader }: { view: WeekView; reader: WordOptio
       <a href={forecast.attribution.url} rel="noreferrer" className="underline">
         {forecast.attribution.text}
       </a>
-      , {forecast.attribution.licence}. Thickness is an estimate: drill and measure before anyone skates.
+      {forecast.attribution.licence ? `, ${forecast.attribution.licence}` : ''}. Thickness is an estimate: drill and
+      measure before anyone skates.
     </p>
   )
 }

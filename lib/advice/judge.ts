@@ -16,7 +16,7 @@ import { toIso } from './zoned-time'
 import type { AdviceWindow, Judgement, JudgeInput, JudgeOptions, ScoredHour } from './types'
 
 /** Changes when the same input may give another judgement. */
-export const MODEL_VERSION = 'nightsheet-1'
+export const MODEL_VERSION = 'nightsheet-2'
 const HOUR_MILLIS = 3_600_000
 /** Hours after a window that other runs need, so that its last layer can set in them. */
 const HOURS_TO_SET = 24

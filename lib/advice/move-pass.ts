@@ -7,6 +7,7 @@ import { judgeFloodStart, setsAtOf, type FloodStart } from './flood-factors'
 import { floodReasons } from './flood-reasons'
 import type { NightRun } from './night-model'
 import { isPersonal } from './personal'
+import { isGood } from './score-hours'
 import { isAvailableAt } from './setting'
 import type { Reason } from './types'
 
@@ -27,6 +28,8 @@ export interface WantedPass {
 export interface JudgedPass extends WantedPass {
   /** Null when it does not set within a day after the night, or the forecast ends before. */
   setBy: string | null
+  /** Whether the advice itself would plan it so. */
+  isAdvisable: boolean
   windChillC: number
   /** What speaks against the pass and the ice, gravest first. */
   warnings: Reason[]
@@ -116,6 +119,7 @@ function judgedPass(
     layerMm: pass.layerMm,
     temperatureC: pass.temperatureC,
     setBy,
+    isAdvisable: isGood(start) && setBy !== null,
     windChillC: start.windChillC,
     warnings: [...own, ...against.filter(({ code }) => !isPersonal(code))],
     limits: [

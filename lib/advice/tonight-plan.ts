@@ -72,16 +72,20 @@ function plannedOn(night: NightRun, slots: readonly PlanSlot[], maxPasses: numbe
   return truly(night, starts)
 }
 
+/** Set times as the passes leave the sheet to one another; a pass that is no longer good on it is left out. */
 function truly(night: NightRun, starts: readonly PlannedStart[]): PlannedStart[] {
   const { layer } = night.setting
   const judged = judgePasses(
     night,
     starts.map(({ startMillis }) => ({ startsAt: toIso(startMillis), ...layer })),
   )
-  return starts.map((start, index) => {
-    const setBy = judged[index]?.setBy
-    return setBy ? { ...start, setMillis: Date.parse(setBy) } : start
-  })
+  const spoiled = judged.findIndex((pass) => !pass?.isAdvisable)
+  if (spoiled >= 0)
+    return truly(
+      night,
+      starts.filter((_, index) => index !== spoiled),
+    )
+  return starts.map((start, index) => ({ ...start, setMillis: Date.parse(judged[index]?.setBy ?? '') }))
 }
 
 function slotsOfHour(

@@ -58,22 +58,26 @@ export function HourPanel({ hour, name, reader, onStep, onClose }: HourPanelProp
 
 function KnownHour({ hour, reader }: { hour: TonightHour; reader: WordOptions }) {
   return (
-    <div className="grid gap-x-14 gap-y-3 lg:grid-cols-[1fr_1fr_1.2fr]">
-      <Facts
-        isDense
-        rows={[
-          freezingOrMelting(hour, reader),
-          {
-            name: 'Poured then, set by',
-            figure: hour.setsAt ? doneByText(hour.setsAt, reader) : 'not within the forecast',
-          },
-          ...(hour.weather?.airTemperatureC != null
-            ? [{ name: 'Air', figure: temperatureText(hour.weather.airTemperatureC, reader) }]
-            : []),
-          ...(hour.windChillC === null ? [] : [{ name: 'Feels like', figure: windChillText(hour.windChillC, reader) }]),
-        ]}
-      />
-      {hour.parts ? <HeatBalance parts={hour.parts} net={hour.netHeatLossWm2 ?? 0} reader={reader} /> : null}
+    <div className="grid gap-x-14 gap-y-3 lg:grid-cols-[1fr_1.4fr]">
+      <div className="grid content-start gap-y-3">
+        <Facts
+          isDense
+          rows={[
+            freezingOrMelting(hour, reader),
+            {
+              name: 'Poured then, set by',
+              figure: hour.setsAt ? doneByText(hour.setsAt, reader) : 'not within the forecast',
+            },
+            ...(hour.weather?.airTemperatureC != null
+              ? [{ name: 'Air', figure: temperatureText(hour.weather.airTemperatureC, reader) }]
+              : []),
+            ...(hour.windChillC === null
+              ? []
+              : [{ name: 'Feels like', figure: windChillText(hour.windChillC, reader) }]),
+          ]}
+        />
+        {hour.parts ? <HeatBalance parts={hour.parts} net={hour.netHeatLossWm2 ?? 0} reader={reader} /> : null}
+      </div>
       <HourReasons hour={hour} reader={reader} />
     </div>
   )

@@ -5,7 +5,10 @@ import { test as base, expect, type Page } from '@playwright/test'
 export { expect }
 
 /** Chromium's own words for answers that a journey provokes on purpose. */
-const EXPECTED = [/Failed to load resource: the server responded with a status of (404|422|403)/]
+const EXPECTED = [
+  /Failed to load resource: the server responded with a status of (404|422|403)/,
+  /Failed to load resource: net::ERR_INTERNET_DISCONNECTED/,
+]
 
 export const test = base.extend<{ cleanConsole: void }>({
   cleanConsole: [

@@ -15,7 +15,7 @@ export function DataSource({ view, now }: { view: TonightView; now: number }) {
       <a href={forecast.attribution.url} rel="noreferrer" className="underline">
         {forecast.attribution.text}
       </a>
-      , {forecast.attribution.licence}.
+      {forecast.attribution.licence ? `, ${forecast.attribution.licence}` : ''}.
     </p>
   )
 }

@@ -2,7 +2,7 @@
 import { ICE_DENSITY, WATER_DENSITY } from '@/lib/physics/constants'
 import { tonightDate } from './night'
 import { summariseNight, type NightSummary, type NightVerdict } from './night-summary'
-import { FLOOD } from './thresholds'
+import { AGREEMENT, FLOOD } from './thresholds'
 import { estimatePasses, type NightPasses } from './week-passes'
 import { addDays, toIso } from './zoned-time'
 import type { AdviceWindow, Judgement, Phase, Reason, ScoredHour, Thaw } from './types'
@@ -100,6 +100,7 @@ function nightAhead(
   index: number,
 ): Omit<NightAhead, 'snowToClearCm'> {
   const passes = passesOf(summary, hours, setting)
+  const window = windowOf(summary)
   const isWhole = hours.every((hour) => hour.isKnown)
   const air = hours.flatMap(({ weather }) => (weather ? [weather.airTemperatureC] : []))
   const lastEnd = Date.parse(hours.at(-1)?.time ?? summary.startsAt) + HOUR_MILLIS
@@ -109,8 +110,8 @@ function nightAhead(
     endsAt: summary.endsAt,
     verdict: verdictOf(summary, hours),
     isFar: index >= NEAR_NIGHTS,
-    window: summary.window,
-    agreement: agreementOf(summary),
+    window,
+    agreement: agreementOf(window, summary.windows),
     passes,
     weatherMm: isWhole && HAS_ICE.includes(setting.phase) ? weatherChange(judgement.hours, hours) : null,
     floodsMm: ((passes?.count ?? 0) * setting.layerMm * WATER_DENSITY) / ICE_DENSITY,
@@ -132,7 +133,16 @@ function verdictOf({ verdict, thaw }: NightSummary, hours: readonly ScoredHour[]
   return thawing.length >= THAW_HOURS && mild.length >= hours.length / 2 ? 'thaw' : 'hold'
 }
 
-function agreementOf({ window, windows }: NightSummary): NightAhead['agreement'] {
+/** A time to fill is a day's and reaches over noon: of several the night has the one that lies in it most. */
+function windowOf({ window, windows, startsAt, endsAt }: NightSummary): AdviceWindow | null {
+  if (window?.kind !== 'fill') return window
+  const inside = (one: AdviceWindow) =>
+    Math.min(Date.parse(one.endsAt), Date.parse(endsAt)) - Math.max(Date.parse(one.startsAt), Date.parse(startsAt))
+  const fills = windows.filter(({ kind, agreement }) => kind === 'fill' && agreement >= AGREEMENT.least)
+  return fills.reduce((best, one) => (inside(one) > inside(best) ? one : best), fills[0] ?? window)
+}
+
+function agreementOf(window: AdviceWindow | null, windows: readonly AdviceWindow[]): NightAhead['agreement'] {
   const asked = window ?? [...windows].sort((a, b) => b.agreement - a.agreement)[0]
   if (!asked || asked.runs === 0) return null
   return { agreeing: Math.round(asked.agreement * asked.runs), runs: asked.runs }

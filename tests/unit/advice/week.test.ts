@@ -138,6 +138,17 @@ test('where the forecast has no good hour, no runs were asked', () => {
   expect(nightsAhead(judgementOf(hoursOf(24)), SETTING)[0]?.agreement).toBeNull()
 })
 
+test('a night has the time to fill that lies in it most', () => {
+  const fill = (from: number, to: number) => windowAt(from, to, { kind: 'fill' })
+  // 3 pm to 10 pm, then 8 am to 10 pm of the next day: 7 h and 4 h in the first night, 10 h in the second.
+  const windows = [fill(3, 10), fill(20, 34)]
+  const nights = nightsAhead(judgementOf(hoursOf(48), { windows }), { ...SETTING, phase: 'waiting' })
+  expect(nights.map(({ verdict, window }) => [verdict, window?.startsAt])).toEqual([
+    ['fill', at(3)],
+    ['fill', at(20)],
+  ])
+})
+
 test('ice gained or lost is the sheet at the end of the night less that at its start', () => {
   const sheet = (thicknessMm: number) => ({ thicknessMm, temperatureC: 0, liquidMm: 0, snowCoverCm: 0 })
   // 90 mm through the first night, then half a millimetre an hour is lost: 12 mm in the second.

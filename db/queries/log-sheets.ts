@@ -30,16 +30,16 @@ export async function findHourOfSheet(db: Db, access: RinkAccess, at: Date): Pro
     )
 }
 
-/** The newest reading in a span that was written or changed after an instant. */
+/** The newest reading in a span that was written or changed since an instant. */
 export async function findReadingSince(
   db: Db,
   access: RinkAccess,
-  { from, to, writtenAfter }: { from: Date; to: Date; writtenAfter: Date },
+  { from, to, writtenSince }: { from: Date; to: Date; writtenSince: Date },
 ): Promise<number | undefined> {
   const row = await db('log_entries')
     .where({ rink_id: access.rinkId, kind: 'reading', deleted_at: null })
     .whereBetween('happened_at', [from, to])
-    .where('updated_at', '>', writtenAfter)
+    .where('updated_at', '>=', writtenSince)
     .orderBy('happened_at', 'desc')
     .first<{ thicknessMm: number } | undefined>({ thicknessMm: 'thickness_mm' })
   return row?.thicknessMm

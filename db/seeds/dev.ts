@@ -1,10 +1,12 @@
 // Demo people and rinks, made through the services as a person would make them. Repeating it changes nothing.
 import type { Db } from '@/db/knex'
 import { putPushSubscription } from '@/db/queries/push-subscriptions'
+import { getRinkHead } from '@/db/queries/rinks'
 import { systemRinkAccess } from '@/lib/access/system'
 import { hashPassword } from '@/lib/auth/passwords'
 import { setUpRinkSchema } from '@/lib/schemas/rinks'
 import { setUpRink } from '@/lib/services/rinks'
+import { seedLogNight } from './log'
 import { DEMO_PASSWORD, DEMO_PEOPLE, type DemoPerson } from './people'
 import { seedPastNights } from './past-nights'
 import { DEMO_RINKS } from './rinks'
@@ -64,7 +66,9 @@ async function seedRinks(db: Db, ids: Record<DemoPerson, string>, now: Date): Pr
       .insert({ rink_id: rinkId, user_id: ids.crew })
       .onConflict(['rink_id', 'user_id'])
       .ignore()
-    await seedPastNights(db, systemRinkAccess<'view'>(rinkId), now)
+    const access = systemRinkAccess<'view'>(rinkId)
+    const { timeZone } = await getRinkHead(db, access)
+    await seedPastNights(db, access, now, (night, date) => seedLogNight({ db, ids, rinkId, timeZone }, night, date))
   }
 }
 

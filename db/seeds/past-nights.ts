@@ -13,7 +13,13 @@ const HOUR_MILLIS = 3_600_000
 const INVENTED = { text: 'Weather invented for the demo', url: '', licence: '' }
 
 /** Once: a rink that has a settled night keeps its record. Nobody is told of nights that are over. */
-export async function seedPastNights(db: Db, access: RinkAccess<'view'>, now: Date): Promise<void> {
+export async function seedPastNights(
+  db: Db,
+  access: RinkAccess<'view'>,
+  now: Date,
+  /** What people did once the night was judged. */
+  spendNight: (index: number, nightDate: string) => Promise<void>,
+): Promise<void> {
   const rink = await db('rinks').where({ id: access.rinkId }).first('time_zone', 'grid_cell_id')
   if (!rink || (await db('night_outcomes').where({ rink_id: access.rinkId }).first('night_date'))) return
   const tonight = tonightDate(now, rink.time_zone)
@@ -38,6 +44,7 @@ export async function seedPastNights(db: Db, access: RinkAccess<'view'>, now: Da
     // With the weather of the night that ended, which this forecast has.
     if (index > 0) await settleRinkNight({ db, now: judgedAt }, access, addDays(nightDate, -1))
     await refreshOutlook({ db, now: judgedAt }, access)
+    await spendNight(index, nightDate)
   }
   await told.update({ muted_through: null })
 }

@@ -51,7 +51,7 @@ export async function modelSheetAt(
   const measured = await findReadingSince(db, access, {
     from: hoursBefore(at, READING_HOURS),
     to: at,
-    writtenAfter: hour?.judgedAt ?? new Date(0),
+    writtenSince: hour?.judgedAt ?? new Date(0),
   })
   const thicknessMm = measured ?? known?.thicknessMm
   if (thicknessMm === undefined) return undefined
@@ -83,7 +83,9 @@ async function reportSheetAt(trx: Db, access: RinkAccess<'writeLog'>, at: Date, 
 /** Readings that are no longer so leave marks: where the model went from them, and what was swept after them. */
 async function forgetReadings(trx: Db, access: RinkAccess<'writeLog'>, before: Told | undefined, now: Date) {
   if (before?.kind !== 'reading' || before.happenedAt < hoursBefore(now, LOOK_BACK_HOURS)) return false
-  await deleteModelledSheetsFrom(trx, access, before.happenedAt)
+  // A run takes a reported sheet from the start of its hour on.
+  const hourMillis = Math.floor(before.happenedAt.getTime() / HOUR_MILLIS) * HOUR_MILLIS
+  await deleteModelledSheetsFrom(trx, access, new Date(hourMillis))
   return true
 }
 

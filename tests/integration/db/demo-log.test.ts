@@ -1,0 +1,25 @@
+// The demo's log: what people could have written, once.
+import { afterAll, beforeAll, expect, test } from 'vitest'
+import { seedDemo } from '@/db/seeds/dev'
+import { DEMO_LOG } from '@/db/seeds/log-nights'
+import { createTestDatabase, type TestDatabase } from '../../support/test-database'
+
+const NOW = new Date('2027-01-20T17:00:00Z')
+let database: TestDatabase
+beforeAll(async () => {
+  database = await createTestDatabase()
+})
+afterAll(() => database.drop())
+
+test('three weeks of entries with answers, and seeding again adds none', async () => {
+  const entries = () => database.db('log_entries').orderBy('happened_at').select('id', 'kind', 'outcome', 'version')
+  await seedDemo(database.db, NOW)
+  const first = await entries()
+  await seedDemo(database.db, new Date(NOW.getTime() + 60_000))
+  expect(await entries()).toEqual(first)
+  expect(first).toHaveLength(DEMO_LOG.length)
+  const floods = first.filter(({ kind }) => kind === 'flood')
+  expect(new Set(floods.map(({ outcome }) => outcome))).toEqual(new Set(['set', 'wet', 'spoiled', null]))
+  // The forecast of the bad nights aside, most floods were said to be set by some time.
+  expect(floods.filter(({ outcome }) => outcome === 'set').length).toBeGreaterThan(12)
+}, 120_000)

@@ -138,7 +138,7 @@ test('while waiting, the fill has its start, hose, dates by runs, and times to s
   for (const words of [
     'Thu 14 January, 10 am',
     '8 h 30 min, 12,000 L',
-    'Mon 18 January · Tue 19 January · later',
+    'about Tue 19 January (Mon 18 January to later)',
     'not within the forecast',
     '16 of 20 runs',
   ])

@@ -19,7 +19,8 @@ export function FillAhead({ outlook, reader }: { outlook: NonNullable<WeekView['
           <Facts rows={factsOf(fill, reader)} />
         </div>
         <p className="mt-2 text-small text-graphite">
-          Dates are those by which one, five and nine of ten forecast runs get there. Drill before anyone skates.
+          Half of the forecast runs get there by the date; the span is from one run in ten to nine in ten. Drill before
+          anyone skates.
         </p>
       </section>
       <section className="mt-7 lg:mt-0">
@@ -45,10 +46,11 @@ function factsOf(fill: FillOutlook, reader: WordOptions): Fact[] {
   ]
 }
 
+/** "about Tue 19 January (Mon 18 January to later)"; the span is left out when all runs agree on the day. */
 function spreadText({ p10, p50, p90 }: Spread, reader: WordOptions): string {
   if (!p10) return 'not within the forecast'
-  const days = [p10, p50, p90].map((at) => (at ? longDayText(at, reader) : 'later'))
-  return [...new Set(days)].join(' · ')
+  const [early, middle, late] = [p10, p50, p90].map((at) => (at ? longDayText(at, reader) : 'later'))
+  return early === late ? `about ${middle}` : `about ${middle} (${early} to ${late})`
 }
 
 function windowFact(window: AdviceWindow, reader: WordOptions): Fact {

@@ -22,7 +22,7 @@ export function holdUntilText(
 type TurnWriter = (values: WhatWouldTurn['values'], words: WordOptions) => string
 
 const TURNS: Record<WhatWouldTurn['code'], TurnWriter> = {
-  thinner: (v, w) => `A thinner layer, ${layerText(num(v, 'layerMm'), w)}`,
+  thinner: (v, w) => `A layer of only ${layerText(num(v, 'layerMm'), w)}`,
   clear_sky: () => 'A clear sky',
   dry: () => 'No snow and no rain',
   calm: () => 'Calm air',

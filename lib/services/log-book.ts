@@ -20,8 +20,8 @@ import type { WordOptions } from '@/lib/words/options'
 import { chartsOf, skatingDays, type LogCharts } from './log-charts'
 import { entryView, readerOf } from './log-view'
 
-/** Nights on one page. Ours: two weeks, what a person scrolls through on a phone. */
-const NIGHTS_A_PAGE = 14
+/** Nights with entries on one page. Ours: what a person scrolls through on a phone. */
+const NIGHTS_A_PAGE = 7
 
 export interface LogFrame {
   rink: { id: string; name: string; timeZone: string; people: number }

@@ -13,6 +13,7 @@ import { thicknessDays, type ThicknessDay } from './log-charts'
 import { entryView } from './log-view'
 
 export interface SeasonView extends LogFrame {
+  presentYear: number
   totals: SeasonTotals
   /** By the flow of each source as it is set now; null when nothing was poured. */
   hoseHours: number | null
@@ -44,6 +45,7 @@ export async function getSeason(context: ServiceContext, rinkId: string, year?: 
   return {
     ...frame,
     season,
+    presentYear: frame.season.year,
     totals,
     hoseHours: totals.waterL > 0 ? hoursOf(byKind, frame.usual.sources) : null,
     waterCost: price === null ? null : (totals.waterL / 1000) * price,

@@ -40,22 +40,23 @@ export function muchWaterText(litres: number, words: WordOptions): string {
   return `${numberText(litres / 1000, 1, words)} m³`
 }
 
-/** "3 mm, 310 L, cold tap at 6 °C"; "8.9 cm"; empty for what has no figures. */
+/** "3 mm, 310 L, cold tap"; "8.9 cm"; empty for what has no figures. */
 export function entryFacts(entry: EntryView, words: WordOptions): string {
-  const { layerMm, waterL, waterKind, waterTemperatureC, thicknessMm } = entry
-  const source = waterKind === null ? 'water' : WATER_KIND_WORDS[waterKind]
+  const { layerMm, waterL, waterKind, thicknessMm } = entry
   const parts = [
     layerMm === null ? '' : layerText(layerMm, words),
     waterL === null ? '' : muchWaterText(waterL, words),
-    waterTemperatureC === null ? '' : `${source} at ${temperatureText(waterTemperatureC, words)}`,
+    waterKind === null ? '' : WATER_KIND_WORDS[waterKind],
     thicknessMm === null ? '' : iceText(thicknessMm, words),
   ]
   return parts.filter(Boolean).join(', ')
 }
 
-/** "Flood, 3 mm, 310 L, cold tap at 6 °C. Two low spots by the gate." */
+/** "Flood, 3 mm, 310 L, cold tap at 6 °C, 8:02 pm. Two low spots by the gate." */
 export function entrySentence(entry: EntryView, words: WordOptions): string {
-  const facts = entryFacts(entry, words)
+  const { waterTemperatureC } = entry
+  const warmth = waterTemperatureC === null ? '' : ` at ${temperatureText(waterTemperatureC, words)}`
+  const facts = `${entryFacts(entry, words)}${warmth}`
   const what = `${KIND_WORDS[entry.kind]}${facts ? `, ${facts}` : ''}, ${entryTime(entry.happenedAt, entry.nightDate, words)}.`
   return [what, outcomeText(entry, words), entry.note].filter(Boolean).join(' ')
 }

@@ -6,7 +6,7 @@ import type { LogView } from '@/lib/services/log-book'
 import { entryFacts, entryRemark, entryTime, floodResult, KIND_WORDS, nightHeading } from '@/lib/words/log'
 import { SetQuestion } from './set-question'
 
-const HALF_DAY_MILLIS = 12 * 3_600_000
+const DAY_MILLIS = 24 * 3_600_000
 
 export function Nights({ view }: { view: LogView }) {
   const { nights, reader, readAt } = view
@@ -27,7 +27,10 @@ export function Nights({ view }: { view: LogView }) {
 function EntryLine({ entry, view }: { entry: EntryView; view: LogView }) {
   const { reader, rink, mayWrite, readAt } = view
   const facts = entryFacts(entry, reader)
-  const isOpen = entry.kind === 'flood' && (entry.outcome === null || entry.outcome === 'wet')
+  const ageMillis = Date.parse(readAt) - Date.parse(entry.happenedAt)
+  // Still wet is no last word, as long as somebody may look again.
+  const isOpen =
+    entry.kind === 'flood' && (entry.outcome === null || (entry.outcome === 'wet' && ageMillis < DAY_MILLIS))
   const about = `${KIND_WORDS[entry.kind]} of ${entryTime(entry.happenedAt, entry.nightDate, reader)}`
   return (
     <li className="grid grid-cols-[76px_1fr] gap-x-2.5 border-b border-rule sm:grid-cols-[76px_1fr_auto]">
@@ -51,7 +54,7 @@ function EntryLine({ entry, view }: { entry: EntryView; view: LogView }) {
             rinkId={rink.id}
             entryId={entry.id}
             version={entry.version}
-            isRecent={Date.parse(readAt) - Date.parse(entry.happenedAt) < HALF_DAY_MILLIS}
+            isRecent={ageMillis < DAY_MILLIS / 2}
             about={about}
           />
         ) : null}

@@ -25,7 +25,7 @@ export default async function SeasonPage({ params, searchParams }: PageProps<'/r
       <h1 className="max-w-[26ch] text-verdict font-medium tracking-tight lg:text-verdict-wide print:text-lead">
         {seasonHeadline(totals, new Date(view.readAt), reader)}
       </h1>
-      <OtherSeasons rinkId={rink.id} year={season.year} />
+      <OtherSeasons rinkId={rink.id} year={season.year} present={view.presentYear} />
       <div className="mt-4 gap-x-14 lg:grid lg:grid-cols-2 print:grid print:grid-cols-2 print:gap-x-8">
         <section className="break-inside-avoid">
           <h2 className="mb-2 font-semibold">The season in figures</h2>
@@ -94,7 +94,7 @@ function KeptRates({ rates, rinkId, year }: { rates: SeasonView['rates']; rinkId
   )
 }
 
-function OtherSeasons({ rinkId, year }: { rinkId: string; year: number }) {
+function OtherSeasons({ rinkId, year, present }: { rinkId: string; year: number; present: number }) {
   const link = (other: number) => (
     <Link
       className="inline-flex min-h-touch items-center text-ink underline"
@@ -109,7 +109,7 @@ function OtherSeasons({ rinkId, year }: { rinkId: string; year: number }) {
         All of the log
       </Link>
       {link(year - 1)}
-      {link(year + 1)}
+      {year < present ? link(year + 1) : null}
     </p>
   )
 }

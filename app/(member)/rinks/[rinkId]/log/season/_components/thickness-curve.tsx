@@ -1,62 +1,78 @@
 // The season's thickness as a drawing of the server, so that it prints: the model as a line, what was drilled as marks.
-import { dayText, shortDayText } from '@/components/rinks/reader'
-import type { ThicknessDay } from '@/lib/services/log-charts'
+import { dayText } from '@/components/rinks/reader'
 import { scaleOf } from '@/lib/schemas/measures'
+import type { ThicknessDay } from '@/lib/services/log-charts'
 import type { WordOptions } from '@/lib/words/options'
 
-const WIDE = 720
-const HIGH = 180
-const LEFT = 44
-const BOTTOM = 24
-const TOP = 10
-const MARK = 4
+/** The drawing is stretched to its frame; strokes keep their width, and the words stand outside. */
+const SIDE = 1000
+/** A scale that ends on a round figure above the thickest day. [mm] */
+const SCALE_STEP_MM = 20
 
 export function ThicknessCurve({ days, reader }: { days: ThicknessDay[]; reader: WordOptions }) {
   const first = days[0]
   const last = days.at(-1)
   if (!first || !last) return null
-  const most = Math.max(10, ...days.flatMap(({ modelMm, readingMm }) => [modelMm ?? 0, readingMm ?? 0]))
-  const x = (index: number) => LEFT + (index / Math.max(1, days.length - 1)) * (WIDE - LEFT - 8)
-  const y = (mm: number) => TOP + (1 - mm / most) * (HIGH - TOP - BOTTOM)
-  const line = days.flatMap(({ modelMm }, index) =>
-    modelMm === null ? [] : [`${x(index).toFixed(1)},${y(modelMm).toFixed(1)}`],
-  )
+  const thickest = Math.max(1, ...days.flatMap(({ modelMm, readingMm }) => [modelMm ?? 0, readingMm ?? 0]))
+  const most = Math.ceil(thickest / SCALE_STEP_MM) * SCALE_STEP_MM
+  const at = (index: number, mm: number) =>
+    `${((index / Math.max(1, days.length - 1)) * SIDE).toFixed(1)},${((1 - mm / most) * SIDE).toFixed(1)}`
   const { fromSi, unit } = scaleOf('iceThickness', reader.units)
+  const marks = [most, most / 2, 0]
   return (
-    <svg
-      viewBox={`0 0 ${WIDE} ${HIGH}`}
-      className="w-full"
-      role="img"
-      aria-label={`Thickness from ${dayText(first.date)} to ${dayText(last.date)}`}
-    >
-      {[0, most / 2, most].map((mm) => (
-        <g key={mm}>
-          <line x1={LEFT} x2={WIDE - 8} y1={y(mm)} y2={y(mm)} stroke="var(--rule)" />
-          <text x={LEFT - 6} y={y(mm) + 4} textAnchor="end" fontSize={12} fill="var(--graphite)">
-            {fromSi(mm).toFixed(1)}
-          </text>
-        </g>
-      ))}
-      <polyline points={line.join(' ')} fill="none" stroke="var(--ink)" strokeWidth={1.8} />
-      {days.map(({ date, readingMm }, index) =>
-        readingMm === null ? null : (
-          <rect
-            key={date}
-            x={x(index) - MARK}
-            y={y(readingMm) - MARK}
-            width={2 * MARK}
-            height={2 * MARK}
-            fill="var(--lamp)"
+    <figure>
+      <div className="grid grid-cols-[auto_1fr] gap-x-2">
+        <div
+          aria-hidden="true"
+          className="flex flex-col justify-between text-right text-small leading-none text-graphite"
+        >
+          {marks.map((mm) => (
+            <span key={mm}>{fromSi(mm).toFixed(1)}</span>
+          ))}
+        </div>
+        <svg
+          viewBox={`0 0 ${SIDE} ${SIDE}`}
+          preserveAspectRatio="none"
+          className="h-44 w-full overflow-visible"
+          role="img"
+          aria-label={`Thickness from ${dayText(first.date)} to ${dayText(last.date)}`}
+        >
+          {marks.map((mm) => (
+            <polyline
+              key={mm}
+              points={`${at(0, mm)} ${SIDE},${at(0, mm).split(',')[1]}`}
+              {...STROKE}
+              stroke="var(--rule)"
+            />
+          ))}
+          <polyline
+            points={days.flatMap(({ modelMm }, index) => (modelMm === null ? [] : [at(index, modelMm)])).join(' ')}
+            {...STROKE}
             stroke="var(--ink)"
+            strokeWidth={1.8}
           />
-        ),
-      )}
-      <text x={LEFT} y={HIGH - 6} fontSize={12} fill="var(--graphite)">
-        {shortDayText(first.date)}
-      </text>
-      <text x={WIDE - 8} y={HIGH - 6} textAnchor="end" fontSize={12} fill="var(--graphite)">
-        {dayText(last.date)}; line: model, squares: drilled, {unit}
-      </text>
-    </svg>
+          {days.map(({ date, readingMm }, index) =>
+            readingMm === null ? null : <Drilled key={date} point={at(index, readingMm)} />,
+          )}
+        </svg>
+      </div>
+      <figcaption className="mt-1 text-small text-graphite">
+        {dayText(first.date)} to {dayText(last.date)}, {unit}. Line: the model, at the end of each day. Squares:
+        drilled.
+      </figcaption>
+    </figure>
+  )
+}
+
+const STROKE = { fill: 'none', vectorEffect: 'non-scaling-stroke' } as const
+
+/** A stroke without length, whose square ends are the mark: it keeps its shape however the drawing is stretched. */
+function Drilled({ point }: { point: string }) {
+  const mark = { d: `M${point} h0.01`, strokeLinecap: 'square', ...STROKE } as const
+  return (
+    <>
+      <path {...mark} stroke="var(--ink)" strokeWidth={11} />
+      <path {...mark} stroke="var(--lamp)" strokeWidth={8} />
+    </>
   )
 }

@@ -27,6 +27,9 @@ const config: Config = {
         lead: ['21px', '1.35'],
         verdict: ['28px', '1.22'],
         'verdict-wide': ['40px', '1.15'],
+        // On paper at the gate.
+        sign: ['72px', '1.1'],
+        'sign-name': ['44px', '1.2'],
       },
       maxWidth: { line: '68ch', page: '1180px' },
       minHeight: { touch: '48px' },

@@ -19,6 +19,7 @@ const KINDS: Record<string, string> = {
   'flood-tonight': 'Good night to flood',
   'flood-changed': 'The hours changed',
   'flood-closed': 'No flood after all',
+  'fill-check': 'Look after the hose',
 }
 
 const STATES: Record<AlertMessage['state'], string> = {

@@ -6,6 +6,7 @@ export type MessageKind =
   | 'flood-tonight'
   | 'flood-changed'
   | 'flood-closed'
+  | 'fill-check'
   | 'verify-address'
   | 'sign-in-link'
   | 'reset-password'

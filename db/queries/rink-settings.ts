@@ -27,6 +27,7 @@ export type RinkChanges = Partial<
     | 'wind_limit_mps'
     | 'wind_chill_limit_c'
     | 'floor'
+    | 'water_price_per_m3'
   >
 >
 

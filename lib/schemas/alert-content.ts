@@ -13,7 +13,14 @@ const wordsSchema = z.object({
 
 export const alertContentSchema = z.object({ rinkId: z.uuid(), nightDate: z.iso.date(), words: wordsSchema })
 
+/** A look at the hose of a running fill: one sentence says what to look at, the next how far the fill is. */
+export const fillCheckContentSchema = z.object({
+  rinkId: z.uuid(),
+  words: z.object({ rinkName: z.string(), sentence: z.string(), progress: z.string(), cautions: z.array(z.string()) }),
+})
+
 /** Account mail names its link; the note about a known address has none. */
 export const linkContentSchema = z.object({ linkId: z.uuid() })
 
 export type AlertContent = z.infer<typeof alertContentSchema>
+export type FillCheckContent = z.infer<typeof fillCheckContentSchema>

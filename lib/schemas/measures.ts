@@ -44,6 +44,14 @@ const WINDS: Record<Units['wind'], Scale> = {
 }
 const gallons = (unit: string): Scale => ({ unit, decimals: 1, toSi: gallonsToLitres, fromSi: litresToGallons })
 
+/** A thousand gallons are 3.785 m³. */
+const PER_1000_GALLONS: Scale = {
+  unit: 'per 1000 US gal',
+  decimals: 2,
+  toSi: litresToGallons,
+  fromSi: gallonsToLitres,
+}
+
 const thickness = ({ ice }: Units) => (ice === 'in' ? INCHES : CENTIMETRES)
 const warmth = ({ temperature }: Units) => (temperature === 'F' ? FAHRENHEIT : plain('°C', 1))
 
@@ -56,6 +64,11 @@ export const MEASURES = {
   /** How far the ground lies below its highest point. */
   drop: { least: 0, most: 1000, scaleIn: thickness },
   boardHeight: { least: 50, most: 1500, scaleIn: thickness },
+  /** Board above the water. */
+  freeboard: { least: 0, most: 500, scaleIn: thickness },
+  /** Water over the highest point of the floor. */
+  leastDepth: { least: 10, most: 1000, scaleIn: thickness },
+  lowCornerDepth: { least: 0, most: 1500, scaleIn: thickness },
   carriesSkater: { least: 70, most: 300, scaleIn: thickness },
   flow: {
     least: 1,
@@ -63,6 +76,12 @@ export const MEASURES = {
     scaleIn: ({ water }) => (water === 'gal' ? gallons('US gal/min') : plain('L/min', 1)),
   },
   bucket: { least: 1, most: 1000, scaleIn: ({ water }) => (water === 'gal' ? gallons('US gal') : plain('L', 1)) },
+  /** In the keeper's money for a cubic metre; with gallons, for a thousand of them. */
+  waterPrice: {
+    least: 0,
+    most: 1000,
+    scaleIn: ({ water }) => (water === 'gal' ? PER_1000_GALLONS : plain('per m³', 2)),
+  },
   waterTemperature: { least: 0, most: 95, scaleIn: warmth },
   windChill: { least: -60, most: 0, scaleIn: warmth },
   windLimit: { least: 1, most: 30, scaleIn: ({ wind }) => WINDS[wind] },

@@ -1,5 +1,6 @@
 // Puts together what the model is asked: the rink, its water, its sheet, what was poured, and the forecast.
 import type { Db } from '@/db/knex'
+import { findNewestFill, listFillSessions } from '@/db/queries/fills'
 import { listFloodsSince, type PouredPass } from '@/db/queries/floods'
 import type { StoredForecast } from '@/db/queries/forecasts'
 import type { RinkForJudging } from '@/db/queries/rinks'
@@ -8,6 +9,7 @@ import type { RinkAccess } from '@/lib/access/proofs'
 import { MODEL_VERSION } from '@/lib/advice/judge'
 import type { Yard } from '@/lib/advice/yard/types'
 import type { JudgeInput } from '@/lib/advice/types'
+import { litresBy } from './fill-facts'
 import { findYardInUse } from './yard-in-use'
 
 const HOUR_MILLIS = 3_600_000
@@ -28,6 +30,21 @@ function sheetOf(sheet: StoredSheet | undefined, firstHourAt: Date): JudgeInput[
   }
 }
 
+/** The depth that was wanted of a fill under way, and what of it is in; once it is over, the depth that it came to. */
+async function waterOfFill(
+  db: Db,
+  access: RinkAccess,
+  { phase, lengthM, widthM }: RinkForJudging,
+  now: Date,
+): Promise<Partial<JudgeInput['water']>> {
+  if (phase !== 'filling' && phase !== 'freezing') return {}
+  const fill = await findNewestFill(db, access)
+  if (!fill || (phase === 'filling') !== (fill.finishedAt === null)) return {}
+  const litres = litresBy(await listFillSessions(db, fill.id), fill.finishedAt ?? now)
+  if (phase === 'filling') return { fillDepthMm: fill.targetDepthMm, filledLitres: litres }
+  return { fillDepthMm: Math.min(1000, Math.max(20, litres / (lengthM * widthM))) }
+}
+
 /** What the model is asked about a rink now; undefined when the forecast is empty. */
 export async function gatherJudgeInput(
   db: Db,
@@ -39,7 +56,8 @@ export async function gatherJudgeInput(
   const firstHourAt = new Date(firstHour.time)
   const sheet = await findStartingSheet(db, rink.id, { firstHourAt, now })
   const poured = await listFloodsSince(db, access, sheet && sheet.asOf > firstHourAt ? sheet.asOf : firstHourAt)
-  return judgeInputOf({ rink, yard: await findYardInUse(db, rink), forecast, sheet, poured, firstHourAt, now })
+  const input = judgeInputOf({ rink, yard: await findYardInUse(db, rink), forecast, sheet, poured, firstHourAt, now })
+  return { ...input, water: { ...input.water, ...(await waterOfFill(db, access, rink, now)) } }
 }
 
 export function judgeInputOf(facts: {

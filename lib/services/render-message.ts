@@ -9,8 +9,9 @@ import {
   verifyAddressMail,
 } from '@/lib/messaging/templates/account'
 import { alertMail, alertPush, type AlertWords } from '@/lib/messaging/templates/alerts'
+import { fillCheckMail, fillCheckPush, type FillCheckWords } from '@/lib/messaging/templates/fill-check'
 import type { MailWords } from '@/lib/messaging/templates/letter'
-import { alertContentSchema, linkContentSchema } from '@/lib/schemas/alert-content'
+import { alertContentSchema, fillCheckContentSchema, linkContentSchema } from '@/lib/schemas/alert-content'
 import { unsubscribeUrl } from './unsubscribe'
 
 export interface RenderSettings {
@@ -40,11 +41,21 @@ function alertWords(message: MessageToDeliver, { publicUrl, secret }: RenderSett
   }
 }
 
+function fillCheckWords(message: MessageToDeliver, { publicUrl, secret }: RenderSettings): FillCheckWords {
+  const { rinkId, words } = fillCheckContentSchema.parse(message.content)
+  return {
+    ...words,
+    fillingUrl: `${publicUrl}/rinks/${rinkId}/filling`,
+    manageUrl: `${publicUrl}/rinks/${rinkId}/alerts`,
+    unsubscribeUrl: unsubscribeUrl(publicUrl, secret, { userId: message.userId, rinkId }),
+  }
+}
+
 function accountMail(message: MessageToDeliver, { publicUrl, secret }: RenderSettings): MailWords {
   if (message.kind === 'address-already-registered') {
     return addressAlreadyRegisteredMail({ signInUrl: `${publicUrl}/sign-in`, resetUrl: `${publicUrl}/reset` })
   }
-  if (isAlert(message.kind)) throw new Error(`${message.kind} is no account mail`)
+  if (isAlert(message.kind) || message.kind === 'fill-check') throw new Error(`${message.kind} is no account mail`)
   const { purpose, write } = LINK_MAILS[message.kind]
   const { linkId } = linkContentSchema.parse(message.content)
   return write({
@@ -60,6 +71,10 @@ function lifetime(seconds: number): string {
 /** The mail, with the same Message-ID at every try. */
 export function renderEmail(message: MessageToDeliver, settings: RenderSettings): EmailMessage {
   const messageId = `<${message.id}@${new URL(settings.publicUrl).hostname}>`
+  if (message.kind === 'fill-check') {
+    const words = fillCheckWords(message, settings)
+    return { to: message.email, messageId, ...fillCheckMail(words), unsubscribeUrl: words.unsubscribeUrl }
+  }
   if (!isAlert(message.kind)) return { to: message.email, messageId, ...accountMail(message, settings) }
   const words = alertWords(message, settings)
   return { to: message.email, messageId, ...alertMail(message.kind, words), unsubscribeUrl: words.unsubscribeUrl }
@@ -67,6 +82,7 @@ export function renderEmail(message: MessageToDeliver, settings: RenderSettings)
 
 /** What the service worker shows; one tag per rink and night, so that newer news replaces older. */
 export function renderPush(message: MessageToDeliver, settings: RenderSettings): PushMessage['payload'] {
+  if (message.kind === 'fill-check') return fillCheckPush(fillCheckWords(message, settings), `fill:${message.rinkId}`)
   if (!isAlert(message.kind)) throw new Error(`${message.kind} is not sent by push`)
   const { rinkId, nightDate } = alertContentSchema.parse(message.content)
   return alertPush(message.kind, alertWords(message, settings), `night:${rinkId}:${nightDate}`)

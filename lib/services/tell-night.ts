@@ -5,7 +5,6 @@ import { listToldAlerts, type ToldAlert } from '@/db/queries/alerts'
 import { listFloodsSince } from '@/db/queries/floods'
 import { enqueueJob } from '@/db/queries/jobs'
 import { promiseMessage } from '@/db/queries/messages'
-import { listEnabledPushSubscriptions } from '@/db/queries/push-subscriptions'
 import type { RinkForJudging } from '@/db/queries/rinks'
 import type { Db } from '@/db/knex'
 import { isGranted } from '@/lib/access/permissions'
@@ -14,6 +13,7 @@ import { dueAlert, type AlertKind } from '@/lib/advice/alert-due'
 import { nightBounds } from '@/lib/advice/night'
 import type { NightSummary } from '@/lib/advice/night-summary'
 import { instantOfLocal } from '@/lib/advice/zoned-time'
+import { channelsOf, type Channel } from './alert-channels'
 import { alertContent } from './alert-content'
 
 /** The night as it stands, inside the transaction that decides about it. */
@@ -26,8 +26,6 @@ export interface NightToTell {
   window: AdvisedWindow | undefined
   forecastExpiresAt: Date
 }
-
-type Channel = ToldAlert['channel']
 
 /** Promises what is due to each keeper and crew member; those whose time of day is still to come get a job at it. */
 export async function tellNight(night: NightToTell): Promise<void> {
@@ -61,14 +59,6 @@ export async function tellNight(night: NightToTell): Promise<void> {
 function tellInstant(tellAt: string, nightDate: string, timeZone: string): Date {
   const [hours = 0, minutes = 0] = tellAt.split(':').map(Number)
   return new Date(instantOfLocal(nightDate, hours * 60 + minutes, timeZone))
-}
-
-async function channelsOf(trx: Db, person: AlertRecipient): Promise<Channel[]> {
-  const hasDevice = person.wantsPush && (await listEnabledPushSubscriptions(trx, person.userId)).length > 0
-  return [
-    ...(person.wantsEmail && !person.isEmailRefused ? ['email' as const] : []),
-    ...(hasDevice ? ['push' as const] : []),
-  ]
 }
 
 function dueTo(

@@ -1,0 +1,120 @@
+// Ice that freezes: the estimate in a sentence, its course ahead, holes drilled, snow, and what to keep in mind.
+import { StandingCautions } from '@/components/rinks/standing-cautions'
+import { Facts } from '@/components/ui/facts'
+import { Notice } from '@/components/ui/notice'
+import type { FreezingOutlook } from '@/lib/advice/freezing'
+import type { FreezingView } from '@/lib/schemas/freezing-view'
+import { spreadText } from '@/lib/words/filling'
+import { freezingSentence, snowOnIceText } from '@/lib/words/freezing'
+import { capitalised, iceText, snowText } from '@/lib/words/quantities'
+import { clockText, weekdayText } from '@/lib/words/times'
+import { KeepOffSign } from './keep-off-sign'
+import { OpenRink, ReadingForm } from './ice-forms'
+import { ThicknessAhead } from './thickness-ahead'
+
+interface Props {
+  view: FreezingView
+  outlook: FreezingOutlook
+  entryKey: string
+}
+
+export function FreezingIce({ view, outlook, entryKey }: Props) {
+  const { reader, rink } = view
+  const now = new Date(view.readAt)
+  const [lead = '', ...rest] = freezingSentence(outlook, now, reader).split(/(?<=\.) (?=\S)/)
+  return (
+    <>
+      <div className="print:hidden">
+        <h1 className="mb-2 max-w-[24ch] text-verdict font-medium tracking-tight lg:text-verdict-wide">{lead}</h1>
+        <p className="mb-1 max-w-[60ch] text-lead">{rest.join(' ')}</p>
+        <p className="mb-5 max-w-[60ch] text-graphite">
+          An estimate over {outlook.runs} forecast runs. Drill and measure before anyone skates; the keeper decides.
+        </p>
+        {outlook.snow.map((caution) => (
+          <Notice key={caution.code} tone="caution">
+            <p>{snowOnIceText(caution, reader)}</p>
+          </Notice>
+        ))}
+        <ThicknessAhead ahead={outlook.ahead} carriesSkaterMm={rink.carriesSkaterMm} reader={reader} />
+        <div className="gap-x-14 lg:grid lg:grid-cols-2">
+          <WhenItCarries outlook={outlook} now={now} view={view} />
+          <div>
+            <Drilled view={view} />
+            {view.mayWrite ? <ReadingForm rinkId={rink.id} units={reader.units} entryKey={entryKey} /> : null}
+            {view.mayManage && view.isDrilledThick ? <OpenRink rinkId={rink.id} /> : null}
+          </div>
+        </div>
+        <StandingCautions
+          codes={['thickness_is_estimate', 'land_only', 'not_alone']}
+          reader={reader}
+          heading="Keep in mind"
+        />
+      </div>
+      <KeepOffSign view={view} outlook={outlook} />
+    </>
+  )
+}
+
+function WhenItCarries({
+  outlook,
+  now,
+  view: { reader, rink },
+}: {
+  outlook: FreezingOutlook
+  now: Date
+  view: FreezingView
+}) {
+  const when = (spread: FreezingOutlook['skinAt']) => capitalised(spreadText(spread, now, reader))
+  const { snowCoverCm, liquidMm } = outlook.now
+  const rows = [
+    { name: 'Skinned over', text: when(outlook.skinAt) },
+    { name: `Carries a skater, ${iceText(rink.carriesSkaterMm, reader)}`, text: when(outlook.carriesSkaterAt) },
+    { name: 'Frozen through', text: when(outlook.frozenThroughAt) },
+    ...(snowCoverCm >= 0.1 ? [{ name: 'Snow on it', text: snowText(snowCoverCm, reader) }] : []),
+    ...(liquidMm >= 0.5 ? [{ name: 'Water on it', text: iceText(liquidMm, reader) }] : []),
+  ]
+  return (
+    <section className="mt-8">
+      <h2 className="mb-2 font-semibold">By when</h2>
+      <dl className="border-t border-rule">
+        {rows.map(({ name, text }) => (
+          <div key={name} className="border-b border-rule py-[9px]">
+            <dt className="text-note text-graphite">{name}</dt>
+            <dd className="font-medium">{text}</dd>
+          </div>
+        ))}
+      </dl>
+      <p className="mt-2 text-small text-graphite">
+        From the day by which one forecast run of ten gets there to the one by which nine of ten do.
+      </p>
+    </section>
+  )
+}
+
+function Drilled({ view: { reading, reader } }: { view: FreezingView }) {
+  if (!reading) {
+    return (
+      <section className="mt-8">
+        <h2 className="mb-2 font-semibold">Drilled</h2>
+        <p className="max-w-line border-t border-rule pt-3 text-graphite">
+          Nobody has drilled since the fill, or not for three days. A hole near the edge, where you can stand beside the
+          ice, corrects everything on this page.
+        </p>
+      </section>
+    )
+  }
+  const at = `${weekdayText(reading.at, reader)} ${clockText(reading.at, reader)}`
+  return (
+    <section className="mt-8">
+      <h2 className="mb-2 font-semibold">Drilled</h2>
+      <div className="border-t border-rule">
+        <Facts
+          rows={[
+            { name: `${at}${reading.by ? `, by ${reading.by}` : ''}`, figure: iceText(reading.thicknessMm, reader) },
+          ]}
+        />
+      </div>
+      <p className="mt-2 text-small text-graphite">The estimate starts from the newest hole.</p>
+    </section>
+  )
+}

@@ -1,0 +1,51 @@
+// How thick a drilled hole was, and the keeper's word that the rink is open.
+'use client'
+import { ActionForm } from '@/components/ui/action-form'
+import { Disclosure } from '@/components/ui/disclosure'
+import { TextField } from '@/components/ui/field'
+import { unitOf } from '@/lib/schemas/measures'
+import { unitsCode, type Units } from '@/lib/units'
+import { openForSkatingAction, writeReadingAction } from '../actions'
+
+export function ReadingForm({ rinkId, units, entryKey }: { rinkId: string; units: Units; entryKey: string }) {
+  return (
+    <section className="mt-6">
+      <ActionForm action={writeReadingAction} submit="Log this hole" look="plain">
+        {({ status, values, fields }) => (
+          <>
+            <input type="hidden" name="rinkId" value={rinkId} />
+            <input type="hidden" name="units" value={unitsCode(units)} />
+            <input type="hidden" name="kind" value="reading" />
+            <input type="hidden" name="minutesAgo" value="0" />
+            <input type="hidden" name="entryKey" value={entryKey} />
+            <TextField
+              label="Ice in a hole drilled now"
+              name="thickness"
+              inputMode="decimal"
+              unit={unitOf('iceThickness', units)}
+              hint="The thinnest of several holes, clear ice only. Reach from outside the boards while it is thin."
+              defaultValue={status === 'error' ? (values?.thickness ?? '') : ''}
+              error={fields?.thickness}
+            />
+          </>
+        )}
+      </ActionForm>
+    </section>
+  )
+}
+
+export function OpenRink({ rinkId }: { rinkId: string }) {
+  return (
+    <section className="mt-6 border-t border-rule pt-2">
+      <Disclosure summary="Open for skating">
+        <p className="mb-3 max-w-line text-note text-graphite">
+          You have drilled, and the hole was as thick as you want it. Thickness between holes stays an estimate; you
+          decide. Skaters then see the rink as open, and the nights turn to flooding.
+        </p>
+        <ActionForm action={openForSkatingAction} submit="Open the rink">
+          {() => <input type="hidden" name="rinkId" value={rinkId} />}
+        </ActionForm>
+      </Disclosure>
+    </section>
+  )
+}

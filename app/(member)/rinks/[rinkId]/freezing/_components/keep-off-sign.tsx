@@ -1,0 +1,40 @@
+// The sign for the gate. On paper it is all there is; on screen it shows what will be printed.
+import { PrintButton } from '@/components/ui/print-button'
+import type { FreezingOutlook } from '@/lib/advice/freezing'
+import type { FreezingView } from '@/lib/schemas/freezing-view'
+import { iceText } from '@/lib/words/quantities'
+import { clockText } from '@/lib/words/times'
+
+export function KeepOffSign({ view, outlook }: { view: FreezingView; outlook: FreezingOutlook }) {
+  const { rink, reader, sinceAt, readAt } = view
+  const date = (at: string) =>
+    new Intl.DateTimeFormat(reader.locale, {
+      weekday: 'long',
+      day: 'numeric',
+      month: 'long',
+      timeZone: reader.timeZone,
+    }).format(Date.parse(at))
+  return (
+    <section className="mt-10 print:mt-0" aria-labelledby="keep-off">
+      <div className="mb-4 flex flex-wrap items-center justify-between gap-3 print:hidden">
+        <h2 className="font-semibold">A sign for the gate</h2>
+        <PrintButton>Print the sign</PrintButton>
+      </div>
+      <div className="border-[3px] border-rust bg-sheet px-5 py-7 text-center lg:py-10 print:border-[8px] print:border-black print:bg-white print:py-[3cm] print:text-black">
+        <p id="keep-off" className="text-verdict-wide font-semibold tracking-tight print:text-sign">
+          Keep off: thin ice
+        </p>
+        <p className="mt-3 text-verdict font-medium print:mt-8 print:text-sign-name">{rink.name}</p>
+        <p className="mx-auto mt-5 max-w-line text-lead print:mt-10 print:text-verdict">
+          {sinceAt ? `Freezing since ${date(sinceAt)}. ` : ''}
+          Estimated at {clockText(readAt, reader)} on {date(readAt)}: {iceText(outlook.now.thicknessMm, reader)} of ice
+          {outlook.now.waterBelowMm > 0.5 ? ' with water under it' : ''}. It wants{' '}
+          {iceText(rink.carriesSkaterMm, reader)} to carry a skater.
+        </p>
+        <p className="mx-auto mt-4 max-w-line text-body font-medium print:mt-8 print:text-verdict">
+          An estimate is no measurement. Nobody goes on before the keeper has drilled and opened the rink.
+        </p>
+      </div>
+    </section>
+  )
+}

@@ -1,0 +1,62 @@
+// When nothing freezes here: where the season is instead, and the way there.
+import type { Route } from 'next'
+import { ButtonLink } from '@/components/ui/button'
+import type { Phase } from '@/lib/advice/types'
+import type { FreezingView } from '@/lib/schemas/freezing-view'
+
+interface Words {
+  title: string
+  text: string
+  path: string
+  word: string
+}
+
+const BEFORE: Words = {
+  title: 'No water is in yet.',
+  text: 'Once a fill is finished, this page follows the ice: how thick it is, and when it should carry a skater.',
+  path: '/filling',
+  word: 'To the fill',
+}
+
+const WORDS: Record<Phase, Words> = {
+  planning: BEFORE,
+  waiting: BEFORE,
+  filling: { ...BEFORE, title: 'The water is still running in.' },
+  freezing: {
+    title: 'No forecast has been read yet.',
+    text: 'The ice is reckoned from the weather. It takes a few seconds once the weather service has answered; we ask again every few minutes. Until then, keep off.',
+    path: '/freezing',
+    word: 'Look again',
+  },
+  skating: {
+    title: 'The rink is open.',
+    text: 'From here on the night sheet says when to flood. Thickness stays an estimate: drill before the first skaters, after a thaw and after snow.',
+    path: '',
+    word: 'To the night sheet',
+  },
+  thaw: {
+    title: 'The ice is thawing.',
+    text: 'Keep off. The night sheet says how much is lost and when the cold returns; drill before anyone goes back on.',
+    path: '',
+    word: 'To the night sheet',
+  },
+  closed: {
+    title: 'Closed for the season.',
+    text: 'Nothing is followed until the rink is opened again in its settings.',
+    path: '/log/season',
+    word: 'The season in figures',
+  },
+}
+
+export function NotFreezing({ view: { rink } }: { view: FreezingView }) {
+  const { title, text, path, word } = WORDS[rink.phase]
+  return (
+    <>
+      <h1 className="mb-2 max-w-[24ch] text-verdict font-medium tracking-tight lg:text-verdict-wide">{title}</h1>
+      <p className="mb-5 max-w-line text-graphite">{text}</p>
+      <ButtonLink look="main" href={`/rinks/${rink.id}${path}` as Route}>
+        {word}
+      </ButtonLink>
+    </>
+  )
+}

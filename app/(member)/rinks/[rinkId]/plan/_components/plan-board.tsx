@@ -1,0 +1,104 @@
+// The plan: the sums follow what is typed at once. Without script the form goes to the address, and the server reckons.
+'use client'
+import { startTransition, useActionState, type MouseEvent } from 'react'
+import { Button } from '@/components/ui/button'
+import { Notice } from '@/components/ui/notice'
+import { PrintButton } from '@/components/ui/print-button'
+import { IDLE } from '@/lib/http/form-state'
+import { unitsCode } from '@/lib/units'
+import { depthText, lengthText } from '@/lib/words/build-quantities'
+import type { WordOptions } from '@/lib/words/options'
+import { sumItems, sumsLead } from '@/lib/words/sums'
+import { keepPlanAction } from '../actions'
+import { GroundFields } from './ground-fields'
+import { PlanCautions } from './plan-cautions'
+import type { PlanValues } from './plan-values'
+import { SectionFigure } from './section-figure'
+import { SumList } from './sum-list'
+import { usePlanForm } from './use-plan-form'
+import { WaterFields } from './water-fields'
+import { Wetted } from './wetted'
+
+interface Props {
+  rinkId: string
+  /** What was typed before, else what the rink has. */
+  initial: PlanValues
+  kept: PlanValues
+  reader: WordOptions
+  mayManage: boolean
+  years: readonly number[]
+}
+
+export function PlanBoard({ rinkId, initial, kept, reader, mayManage, years }: Props) {
+  const [state, keep, isPending] = useActionState(keepPlanAction, IDLE)
+  // Without script the page comes back whole after keeping, and this is where what was typed is found again.
+  const form = usePlanForm(state.values ?? initial, kept, reader.units)
+  const { sums } = form
+  const send = (event: MouseEvent<HTMLButtonElement>) => {
+    const element = event.currentTarget.form
+    if (!element) return
+    // By hand, because React empties a form that it sends itself.
+    event.preventDefault()
+    startTransition(() => keep(new FormData(element)))
+  }
+  return (
+    <>
+      <h1 className="mb-5 max-w-[24ch] text-verdict font-medium tracking-tight lg:text-verdict-wide print:text-lead">
+        {sumsLead(sums, reader)}
+      </h1>
+      <p className="mb-3 hidden print:block">
+        {lengthText(sums.ground.how.values.lengthM ?? 0, reader)} ×{' '}
+        {lengthText(sums.ground.how.values.widthM ?? 0, reader)}. Corners below the string:{' '}
+        {form.values.floorKind === 'level'
+          ? 'level'
+          : sums.corners.map(({ floorM }) => depthText(floorM, reader)).join(', ')}
+        .
+      </p>
+      <SectionFigure sums={sums} reader={reader} />
+      <div className="gap-x-14 lg:grid lg:grid-cols-[1.25fr_1fr] print:block">
+        <form method="get" className="mt-8 print:hidden" noValidate onSubmit={(event) => event.preventDefault()}>
+          <input type="hidden" name="rinkId" value={rinkId} />
+          <input type="hidden" name="units" value={unitsCode(reader.units)} />
+          <h2 className="mb-3 font-semibold">The ground</h2>
+          <GroundFields form={form} units={reader.units} />
+          <h2 className="mb-3 font-semibold">Water and boards</h2>
+          <WaterFields form={form} units={reader.units} years={years} />
+          {state.message ? (
+            <Notice tone={state.status === 'error' ? 'caution' : 'plain'} live>
+              {state.message} {Object.values(state.fields ?? {})[0] ?? ''}
+            </Notice>
+          ) : null}
+          <div className="flex flex-wrap gap-3">
+            {form.isHydrated ? null : (
+              <Button type="submit" look="main">
+                Work out the sums
+              </Button>
+            )}
+            {mayManage ? (
+              <Button type="submit" formAction={keep} onClick={send} disabled={isPending}>
+                Keep these for the rink
+              </Button>
+            ) : null}
+            <PrintButton>Print</PrintButton>
+          </div>
+          {mayManage ? (
+            <p className="mt-2 max-w-line text-note text-graphite">
+              Keeps size, floor, boards, price, flow and the mean depth of the fill.
+            </p>
+          ) : null}
+        </form>
+        <section className="mt-8 print:mt-3">
+          <h2 className="mb-2 font-semibold">What it takes</h2>
+          {form.isSound ? null : (
+            <Notice tone="caution" live>
+              <p>These are still the sums of the last figures that made sense: something in the form needs a look.</p>
+            </Notice>
+          )}
+          <SumList items={sumItems(sums, reader)} />
+        </section>
+      </div>
+      <Wetted sums={sums} reader={reader} />
+      <PlanCautions cautions={sums.cautions} reader={reader} />
+    </>
+  )
+}

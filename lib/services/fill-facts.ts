@@ -1,0 +1,57 @@
+// A fill as the advice takes it: sessions and readings with instants as text, the corner that is read, the water poured.
+import type { Fill, FillCheck, FillSession } from '@/db/queries/fills'
+import type { RinkForJudging } from '@/db/queries/rinks'
+import { litresPouredBy, type FillProgressInput, type HoseSession } from '@/lib/advice/fill-progress'
+import type { LevelReading } from '@/lib/advice/leak-warning'
+import { cornerDepthsM, floorOf } from '@/lib/physics/floor'
+
+export type RinkSize = Pick<RinkForJudging, 'lengthM' | 'widthM' | 'floor'>
+
+/** 1 mm on 1 m² is 1 L. */
+export function targetLitres({ lengthM, widthM }: RinkSize, { targetDepthMm }: Pick<Fill, 'targetDepthMm'>): number {
+  return targetDepthMm * lengthM * widthM
+}
+
+export function hoseSessions(sessions: readonly FillSession[]): HoseSession[] {
+  return sessions.map(({ startedAt, stoppedAt, flowLPerMin }) => ({
+    startedAt: startedAt.toISOString(),
+    stoppedAt: stoppedAt?.toISOString() ?? null,
+    flowLPerMin,
+  }))
+}
+
+/** Water that the hose has brought by an instant. [L] */
+export function litresBy(sessions: readonly FillSession[], at: Date): number {
+  return litresPouredBy(hoseSessions(sessions), at.getTime())
+}
+
+/** The corner over which water is measured: the lowest, the first of equals. */
+export function lowCornerOf({ lengthM, widthM, floor }: RinkSize): 0 | 1 | 2 | 3 {
+  const depths = cornerDepthsM(floorOf(lengthM, widthM, floor))
+  return depths.indexOf(Math.max(...depths)) as 0 | 1 | 2 | 3
+}
+
+/** Looks with a depth are readings of the level; the others only show that somebody was there. */
+export function levelReadings(rink: RinkSize, checks: readonly FillCheck[]): LevelReading[] {
+  const corner = lowCornerOf(rink)
+  return checks.flatMap(({ checkedAt, lowCornerDepthMm }) =>
+    lowCornerDepthMm === null ? [] : [{ at: checkedAt.toISOString(), corner, depthMm: lowCornerDepthMm }],
+  )
+}
+
+export function progressInput(
+  rink: RinkSize,
+  fill: Fill,
+  { sessions, checks, now }: { sessions: readonly FillSession[]; checks: readonly FillCheck[]; now: Date },
+): FillProgressInput {
+  return {
+    now: now.toISOString(),
+    lengthM: rink.lengthM,
+    widthM: rink.widthM,
+    floor: rink.floor,
+    targetL: targetLitres(rink, fill),
+    sessions: hoseSessions(sessions),
+    readings: levelReadings(rink, checks),
+    checkedAt: checks.map(({ checkedAt }) => checkedAt.toISOString()),
+  }
+}

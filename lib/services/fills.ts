@@ -1,0 +1,162 @@
+// Running a fill: start, pause, resume, look, finish. Each is one transaction, and of two people at once one is told of the other.
+import {
+  deleteFill,
+  findNewestFill,
+  finishFill as closeFill,
+  insertFill,
+  insertFillCheck,
+  insertFillSession,
+  listFillSessions,
+  lockOpenFill,
+  movePhase,
+  stopFillSession,
+  type Fill,
+} from '@/db/queries/fills'
+import { enqueueRefresh } from '@/db/queries/jobs'
+import { insertEntry } from '@/db/queries/log-entries'
+import { insertReportedSheet } from '@/db/queries/sheet-states'
+import { findRinkForJudging, type RinkForJudging } from '@/db/queries/rinks'
+import type { Db } from '@/db/knex'
+import type { RinkAccess } from '@/lib/access/proofs'
+import { requireRink } from '@/lib/access/require-rink'
+import { nightDateOf } from '@/lib/advice/night'
+import type { ServiceContext } from '@/lib/context'
+import { ConflictError, NotFoundError } from '@/lib/errors'
+import { hasIce } from '@/lib/schemas/rink-choices'
+import type { CheckFillInput, ResumeFillInput, StartFillInput } from '@/lib/schemas/fills'
+import { litresBy } from './fill-facts'
+import { setFillReminders } from './fill-reminders'
+
+/** Less water than this in all was no fill. [L] Ours. */
+const LEAST_LITRES = 1
+/** What there is before the first ice. */
+const OPEN_WATER = { thicknessMm: 0, temperatureC: 0, snowCoverCm: 0 }
+
+interface OpenFill {
+  trx: Db
+  access: RinkAccess<'writeLog'>
+  rink: RinkForJudging
+  fill: Fill
+}
+
+/**
+ * Starts a fill with the hose running.
+ *
+ * @throws ConflictError when one is open already, or when ice is there: a fill starts before it.
+ */
+export async function startFill(context: ServiceContext, input: StartFillInput): Promise<void> {
+  const { db, now, viewer } = context
+  const access = await requireRink(context, input.rinkId, 'writeLog')
+  await db.transaction(async (trx) => {
+    const rink = await getRink(trx, access)
+    const targetDepthMm = input.targetDepthMm ?? rink.water.fillDepthMm
+    const fillId = await insertFill(trx, access, { startedBy: viewer.userId, targetDepthMm }, now)
+    const fill = await findNewestFill(trx, access)
+    if (!fillId || !fill) throw alreadyOpen(fill)
+    if (hasIce(rink.phase)) {
+      throw new ConflictError('There is ice on this rink. Its keeper can set it back to waiting in the rink settings.')
+    }
+    await insertFillSession(trx, fillId, input.flowLPerMin ?? rink.water.flowLPerMin, now)
+    await movePhase(trx, access, 'filling', now)
+    await enqueueRefresh(trx, rink.id)
+    await setFillReminders(trx, access, { rink, fill, now, viewer })
+  })
+}
+
+function alreadyOpen(fill: Fill | undefined): ConflictError {
+  return new ConflictError(`${fill?.startedByName ?? 'Somebody'} has started this fill already: it stands below.`)
+}
+
+/** @throws ConflictError when the hose is off already. */
+export async function pauseFill(context: ServiceContext, { rinkId }: { rinkId: string }): Promise<void> {
+  const { now, viewer } = context
+  await atOpenFill(context, rinkId, async ({ trx, access, rink, fill }) => {
+    if (!(await stopFillSession(trx, fill.id, now))) throw new ConflictError('The hose is off already.')
+    await setFillReminders(trx, access, { rink, fill, now, viewer })
+    await enqueueRefresh(trx, rinkId)
+  })
+}
+
+/** @throws ConflictError when the hose runs already. */
+export async function resumeFill(context: ServiceContext, input: ResumeFillInput): Promise<void> {
+  const { now, viewer } = context
+  await atOpenFill(context, input.rinkId, async ({ trx, access, rink, fill }) => {
+    const last = (await listFillSessions(trx, fill.id)).at(-1)
+    const flowLPerMin = input.flowLPerMin ?? last?.flowLPerMin ?? rink.water.flowLPerMin
+    if (!(await insertFillSession(trx, fill.id, flowLPerMin, now))) throw new ConflictError('The hose runs already.')
+    await setFillReminders(trx, access, { rink, fill, now, viewer })
+    await enqueueRefresh(trx, input.rinkId)
+  })
+}
+
+/** Somebody was there: the next look is due two hours from now. */
+export async function checkFill(context: ServiceContext, input: CheckFillInput): Promise<void> {
+  const { now, viewer } = context
+  await atOpenFill(context, input.rinkId, async ({ trx, access, rink, fill }) => {
+    const { lowCornerDepthMm, note } = input
+    await insertFillCheck(trx, fill.id, { checkedBy: viewer.userId, lowCornerDepthMm, note }, now)
+    await setFillReminders(trx, access, { rink, fill, now, viewer })
+  })
+}
+
+/** The water is in: it goes into the log, and the rink freezes from open water. A fill without water never was. */
+export async function finishFill(context: ServiceContext, { rinkId }: { rinkId: string }): Promise<void> {
+  const { now } = context
+  await atOpenFill(context, rinkId, async (open) => {
+    const { trx, access } = open
+    if (!(await endFill(context, open, ''))) return
+    await insertReportedSheet(trx, rinkId, OPEN_WATER, now)
+    await movePhase(trx, access, 'freezing', now)
+  })
+}
+
+/** The fill came to nothing, a torn liner for one: its water is logged, and the rink waits again. */
+export async function giveUpFill(context: ServiceContext, { rinkId }: { rinkId: string }): Promise<void> {
+  await atOpenFill(context, rinkId, async (open) => {
+    const isEnded = await endFill(context, open, 'Given up before it was full.')
+    if (isEnded) await movePhase(open.trx, open.access, 'waiting', context.now)
+  })
+}
+
+/** @returns false when no water ran: then the fill is gone and the rink waits. */
+async function endFill({ now, viewer }: ServiceContext, open: OpenFill, note: string): Promise<boolean> {
+  const { trx, access, rink, fill } = open
+  await stopFillSession(trx, fill.id, now)
+  const waterL = litresBy(await listFillSessions(trx, fill.id), now)
+  await closeFill(trx, fill.id, now)
+  await setFillReminders(trx, access, { rink, fill, now, viewer })
+  await enqueueRefresh(trx, rink.id)
+  if (waterL < LEAST_LITRES) {
+    await deleteFill(trx, fill.id)
+    await movePhase(trx, access, 'waiting', now)
+    return false
+  }
+  const water = { waterL, waterTemperatureC: rink.water.temperatureC, waterKind: rink.water.kind }
+  const when = { happenedAt: now, nightDate: nightDateOf(now, rink.timeZone) }
+  await insertEntry(
+    trx,
+    access,
+    { kind: 'fill', entryKey: fill.id, writtenBy: viewer.userId, ...when, ...water, note },
+    now,
+  )
+  return true
+}
+
+async function atOpenFill(
+  context: ServiceContext,
+  rinkId: string,
+  work: (open: OpenFill) => Promise<void>,
+): Promise<void> {
+  const access = await requireRink(context, rinkId, 'writeLog')
+  await context.db.transaction(async (trx) => {
+    const fill = await lockOpenFill(trx, access)
+    if (!fill) throw new ConflictError('This fill is finished. Load the page again to see how it stands.')
+    await work({ trx, access, fill, rink: await getRink(trx, access) })
+  })
+}
+
+async function getRink(trx: Db, access: RinkAccess): Promise<RinkForJudging> {
+  const rink = await findRinkForJudging(trx, access.rinkId)
+  if (!rink) throw new NotFoundError('Rink')
+  return rink
+}

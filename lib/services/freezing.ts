@@ -1,0 +1,91 @@
+// A rink that freezes: what the Freezing page shows, and the keeper's word that it is open.
+import { findNewestFill } from '@/db/queries/fills'
+import { findNewestForecast } from '@/db/queries/forecasts'
+import { enqueueRefresh } from '@/db/queries/jobs'
+import { findMembership } from '@/db/queries/members'
+import { findNewestReading, type Reading } from '@/db/queries/readings'
+import { changeRink, lockRink } from '@/db/queries/rink-settings'
+import { findRinkForJudging, type RinkForJudging } from '@/db/queries/rinks'
+import { findAccount } from '@/db/queries/users'
+import type { Db } from '@/db/knex'
+import { isGranted } from '@/lib/access/permissions'
+import type { RinkAccess } from '@/lib/access/proofs'
+import { requireRink } from '@/lib/access/require-rink'
+import { freezingOutlook, type FreezingOutlook } from '@/lib/advice/freezing'
+import type { ServiceContext } from '@/lib/context'
+import { ConflictError, NotFoundError } from '@/lib/errors'
+import type { FreezingView } from '@/lib/schemas/freezing-view'
+import { rinkIdSchema } from '@/lib/schemas/rinks'
+import { gatherJudgeInput } from './judge-input'
+
+/** A hole drilled longer ago says little about today's ice. [h] Ours. */
+const READING_HOURS = 72
+const HOUR_MILLIS = 3_600_000
+
+/** @throws NotFoundError for strangers. */
+export async function getFreezing(context: ServiceContext, rinkId: string): Promise<FreezingView> {
+  const access = await requireRink(context, rinkIdSchema.parse(rinkId), 'view')
+  const { db, now, viewer } = context
+  const [rink, person, member] = await Promise.all([
+    findRinkForJudging(db, access.rinkId),
+    findAccount(db, viewer.userId),
+    findMembership(db, { rinkId: access.rinkId, userId: viewer.userId }),
+  ])
+  if (!rink || !person || !member) throw new NotFoundError('Rink')
+  const { sinceAt, reading } = await drilledSinceFill(db, access, now)
+  return {
+    readAt: now.toISOString(),
+    rink: { id: rink.id, name: rink.name, phase: rink.phase, carriesSkaterMm: rink.carriesSkaterMm },
+    reader: { units: person.units, clock: person.clock, timeZone: rink.timeZone, locale: 'en' },
+    mayWrite: isGranted(member.role, 'writeLog'),
+    mayManage: isGranted(member.role, 'manage'),
+    outlook: rink.phase === 'freezing' ? await outlookOf(db, access, rink, now) : null,
+    sinceAt: sinceAt?.toISOString() ?? null,
+    reading: reading ? { ...reading, at: reading.at.toISOString() } : null,
+    isDrilledThick: isThick(rink, reading),
+  }
+}
+
+async function outlookOf(db: Db, access: RinkAccess, rink: RinkForJudging, now: Date): Promise<FreezingOutlook | null> {
+  const forecast = await findNewestForecast(db, rink.gridCellId)
+  const input = forecast && (await gatherJudgeInput(db, access, { rink, forecast, now }))
+  return input ? freezingOutlook(input) : null
+}
+
+async function drilledSinceFill(
+  db: Db,
+  access: RinkAccess,
+  now: Date,
+): Promise<{ sinceAt: Date | null; reading: Reading | undefined }> {
+  const sinceAt = (await findNewestFill(db, access))?.finishedAt ?? null
+  const recent = new Date(now.getTime() - READING_HOURS * HOUR_MILLIS)
+  const after = sinceAt !== null && sinceAt > recent ? sinceAt : recent
+  return { sinceAt, reading: await findNewestReading(db, access, after) }
+}
+
+function isThick({ carriesSkaterMm }: RinkForJudging, reading: Reading | undefined): boolean {
+  return reading !== undefined && reading.thicknessMm >= carriesSkaterMm
+}
+
+/**
+ * The keeper has drilled and opens the rink.
+ *
+ * @throws ConflictError when it does not freeze any more, or when the newest hole is too thin or too old.
+ */
+export async function openForSkating(context: ServiceContext, { rinkId }: { rinkId: string }): Promise<void> {
+  const { db, now } = context
+  const access = await requireRink(context, rinkId, 'manage')
+  await db.transaction(async (trx) => {
+    await lockRink(trx, access)
+    const rink = await findRinkForJudging(trx, access.rinkId)
+    if (rink?.phase !== 'freezing') {
+      throw new ConflictError('This rink is no longer freezing. Load the page again to see how it stands.')
+    }
+    const { reading } = await drilledSinceFill(trx, access, now)
+    if (!isThick(rink, reading)) {
+      throw new ConflictError('Drill first: no hole of the last three days is thick enough.')
+    }
+    await changeRink(trx, access, { phase: 'skating' }, now)
+    await enqueueRefresh(trx, rinkId)
+  })
+}

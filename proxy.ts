@@ -4,7 +4,7 @@
 import { randomBytes } from 'node:crypto'
 import { NextResponse, type NextRequest } from 'next/server'
 import { PATH_HEADER } from '@/lib/auth/next-path'
-import { sessionCookie } from '@/lib/auth/session-cookie'
+import { SESSION_SECONDS, sessionCookie } from '@/lib/auth/session-cookie'
 import { readEnvironment } from '@/lib/env'
 import { contentSecurityPolicy } from '@/lib/http/content-security-policy'
 import { BODY_LIMIT_BYTES } from '@/lib/http/read-json'
@@ -38,7 +38,19 @@ export function proxy(request: NextRequest): NextResponse {
   headers.set(PATH_HEADER, pathname + search)
   const response = NextResponse.next({ request: { headers } })
   response.headers.set('Content-Security-Policy', policy)
+  slideCookie(request, response, PUBLIC_URL)
   return response
+}
+
+/**
+ * A visit starts the cookie's winter anew, as it does the session's. Only when a page is opened: data that is fetched
+ * in the background could arrive after a new sign-in, and would put the old cookie back.
+ */
+function slideCookie(request: NextRequest, response: NextResponse, publicUrl: string): void {
+  const { name, options } = sessionCookie(publicUrl)
+  const token = request.cookies.get(name)?.value
+  if (!token || request.method !== 'GET' || request.headers.get('sec-fetch-mode') !== 'navigate') return
+  response.cookies.set(name, token, { ...options, maxAge: SESSION_SECONDS })
 }
 
 export const config = {

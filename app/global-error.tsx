@@ -10,9 +10,7 @@ export default function GlobalError({ retry }: { retry: () => void }) {
         <title>Nightsheet</title>
         <main className="mx-auto max-w-page px-5 pt-7">
           <h1 className="mb-2 text-verdict font-medium tracking-tight">Nightsheet broke on our side</h1>
-          <p className="mb-6 max-w-line text-graphite">
-            Nothing that you stored is lost. Please try again in a few minutes.
-          </p>
+          <p className="mb-6 max-w-line text-graphite">Nothing that you stored is lost. Try again in a few minutes.</p>
           <Button look="main" onClick={retry}>
             Try again
           </Button>

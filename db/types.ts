@@ -35,7 +35,8 @@ export interface SessionRow {
 export interface AccountLinkRow {
   id: string
   user_id: string
-  purpose: 'verify' | 'sign-in' | 'reset'
+  purpose: 'verify' | 'sign-in' | 'reset' | 'change-email'
+  new_email: string | null
   created_at: Date
   expires_at: Date
   used_at: Date | null

@@ -26,7 +26,7 @@ export class InvalidInputError extends AppError {
 
 export class NotSignedInError extends AppError {
   constructor() {
-    super('not_signed_in', 'Please sign in first.')
+    super('not_signed_in', 'Sign in first.')
   }
 }
 
@@ -54,6 +54,6 @@ export class ConflictError extends AppError {
 
 export class RateLimitedError extends AppError {
   constructor(readonly retryAfterSeconds: number) {
-    super('rate_limited', 'Too many tries. Please wait a few minutes and try again.')
+    super('rate_limited', 'Too many tries. Wait a few minutes and try again.')
   }
 }

@@ -10,6 +10,7 @@ export type FormAction = (state: FormState, formData: FormData) => Promise<FormS
 export function ActionForm({
   action,
   submit,
+  submitLabel,
   look = 'main',
   otherButtons,
   children,
@@ -17,6 +18,8 @@ export function ActionForm({
   action: FormAction
   /** What the button says. */
   submit: string
+  /** The same said in full, where several buttons say alike. */
+  submitLabel?: string
   look?: 'main' | 'plain'
   /** Further ways to submit, told apart by their name and value. */
   otherButtons?: ReactNode
@@ -37,7 +40,7 @@ export function ActionForm({
       ) : null}
       {children?.(state)}
       <div className="flex flex-wrap gap-3">
-        <Button type="submit" look={look} disabled={isPending}>
+        <Button type="submit" look={look} disabled={isPending} aria-label={submitLabel}>
           {submit}
         </Button>
         {otherButtons}

@@ -4,6 +4,8 @@ import type { InputHTMLAttributes, ReactNode, SelectHTMLAttributes, TextareaHTML
 interface Around {
   label: string
   name: string
+  /** Where two forms of a page ask for the same; otherwise the name serves. */
+  fieldId?: string
   hint?: ReactNode
   error?: string
 }
@@ -11,24 +13,24 @@ interface Around {
 const BOX =
   'min-h-touch w-full rounded border-[1.5px] border-graphite bg-sheet px-3 text-body text-ink aria-invalid:border-rust'
 
-export function describedBy({ name, hint, error }: Omit<Around, 'label'>): string | undefined {
-  return [hint ? `${name}-hint` : '', error ? `${name}-error` : ''].filter(Boolean).join(' ') || undefined
+export function describedBy({ name, fieldId = name, hint, error }: Omit<Around, 'label'>): string | undefined {
+  return [hint ? `${fieldId}-hint` : '', error ? `${fieldId}-error` : ''].filter(Boolean).join(' ') || undefined
 }
 
-export function FieldFrame({ label, name, hint, error, children }: Around & { children: ReactNode }) {
+export function FieldFrame({ label, name, fieldId = name, hint, error, children }: Around & { children: ReactNode }) {
   return (
     <div className="mb-5">
-      <label htmlFor={name} className="mb-1 block font-medium">
+      <label htmlFor={fieldId} className="mb-1 block font-medium">
         {label}
       </label>
       {hint ? (
-        <p id={`${name}-hint`} className="mb-1 text-note text-graphite">
+        <p id={`${fieldId}-hint`} className="mb-1 text-note text-graphite">
           {hint}
         </p>
       ) : null}
       {children}
       {error ? (
-        <p id={`${name}-error`} className="mt-1 text-note text-rust">
+        <p id={`${fieldId}-error`} className="mt-1 text-note text-rust">
           {error}
         </p>
       ) : null}
@@ -39,20 +41,21 @@ export function FieldFrame({ label, name, hint, error, children }: Around & { ch
 export function TextField({
   label,
   name,
+  fieldId = name,
   hint,
   error,
   unit,
   ...rest
 }: Around & { unit?: string } & InputHTMLAttributes<HTMLInputElement>) {
   return (
-    <FieldFrame label={label} name={name} hint={hint} error={error}>
+    <FieldFrame label={label} name={name} fieldId={fieldId} hint={hint} error={error}>
       <div className="flex items-center gap-2">
         <input
-          id={name}
+          id={fieldId}
           name={name}
           className={BOX}
           aria-invalid={error ? true : undefined}
-          aria-describedby={describedBy({ name, hint, error })}
+          aria-describedby={describedBy({ name, fieldId, hint, error })}
           {...rest}
         />
         {unit ? <span className="shrink-0 text-graphite">{unit}</span> : null}

@@ -11,11 +11,17 @@ interface LinkReference {
 
 export async function insertAccountLink(
   db: Db,
-  link: { userId: string; purpose: LinkPurpose; expiresAt: Date },
+  link: { userId: string; purpose: LinkPurpose; expiresAt: Date; newEmail?: string },
   now: Date,
 ): Promise<{ id: string }> {
   const [stored] = await db('account_links')
-    .insert({ user_id: link.userId, purpose: link.purpose, created_at: now, expires_at: link.expiresAt })
+    .insert({
+      user_id: link.userId,
+      purpose: link.purpose,
+      created_at: now,
+      expires_at: link.expiresAt,
+      new_email: link.newEmail ?? null,
+    })
     .returning('id')
   if (!stored) throw new Error('An insert returned no row')
   return stored
@@ -29,8 +35,8 @@ export async function findGoodAccountLink(
   db: Db,
   link: LinkReference,
   now: Date,
-): Promise<{ userId: string } | undefined> {
-  return stillGood(db, link, now).first({ userId: 'user_id' })
+): Promise<{ userId: string; newEmail: string | null } | undefined> {
+  return stillGood(db, link, now).first({ userId: 'user_id', newEmail: 'new_email' })
 }
 
 /** Uses a link up: of two who try at once, one gets the person and the other nothing. */
@@ -38,9 +44,9 @@ export async function consumeAccountLink(
   db: Db,
   link: LinkReference,
   now: Date,
-): Promise<{ userId: string } | undefined> {
-  const [used] = await stillGood(db, link, now).update({ used_at: now }).returning('user_id')
-  return used && { userId: used.user_id }
+): Promise<{ userId: string; newEmail: string | null } | undefined> {
+  const [used] = await stillGood(db, link, now).update({ used_at: now }).returning(['user_id', 'new_email'])
+  return used && { userId: used.user_id, newEmail: used.new_email }
 }
 
 /** Makes every outstanding link of a person worthless. */

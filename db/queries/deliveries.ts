@@ -23,6 +23,7 @@ export interface MessageToDeliver {
 export async function findMessageToDeliver(db: Db, messageId: string): Promise<MessageToDeliver | undefined> {
   const message = await db('messages as m')
     .join('users as u', 'u.id', 'm.user_id')
+    .leftJoin('account_links as l', db.raw(`l.id::text = m.content->>'linkId'`))
     .where({ 'm.id': messageId, 'm.state': 'promised' })
     .select({
       id: 'm.id',
@@ -33,7 +34,8 @@ export async function findMessageToDeliver(db: Db, messageId: string): Promise<M
       content: 'm.content',
       expiresAt: 'm.expires_at',
       createdAt: 'm.created_at',
-      email: 'u.email',
+      // A new address is confirmed by whoever reads its mail.
+      email: db.raw('coalesce(l.new_email, u.email)'),
     })
     .select(
       db.raw(

@@ -11,6 +11,9 @@ export type MessageKind =
   | 'sign-in-link'
   | 'reset-password'
   | 'address-already-registered'
+  | 'test'
+  | 'change-address'
+  | 'deletion-asked'
 
 export type MessageState = 'promised' | 'delivered' | 'expired' | 'dead'
 

@@ -1,6 +1,6 @@
 // Deletes rows that nobody will read again.
 import type { Db } from '@/db/knex'
-import { deleteUnconfirmedUsersBefore } from './users'
+import { deleteDueAccounts, deleteUnconfirmedUsersBefore } from './users'
 
 const HOUR_MILLIS = 3_600_000
 
@@ -47,6 +47,7 @@ export async function pruneExpired(db: Db, now: Date): Promise<Record<string, nu
     .whereNot({ key: '' })
     .where('last_started_at', '<', before(KEEP_HOURS.runs))
     .delete()
+  const accounts = await deleteDueAccounts(db, now)
   const unconfirmed = await deleteUnconfirmedUsersBefore(db, before(KEEP_HOURS.unconfirmed))
-  return { unconfirmed, outlooks, sheets, sessions, links, limits, runs }
+  return { accounts, unconfirmed, outlooks, sheets, sessions, links, limits, runs }
 }

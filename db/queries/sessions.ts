@@ -8,11 +8,12 @@ export interface SessionWithUser {
   isAdmin: boolean
   emailVerifiedAt: Date | null
   expiresAt: Date
+  lastSeenAt: Date
 }
 
 export async function insertSession(
   db: Db,
-  session: { tokenHash: string; userId: string; expiresAt: Date },
+  session: { tokenHash: string; userId: string; expiresAt: Date; device?: string },
   now: Date,
 ): Promise<void> {
   await db('sessions').insert({
@@ -20,6 +21,8 @@ export async function insertSession(
     user_id: session.userId,
     created_at: now,
     expires_at: session.expiresAt,
+    device: session.device ?? '',
+    last_seen_at: now,
   })
 }
 
@@ -36,6 +39,7 @@ export async function findSession(db: Db, tokenHash: string, now: Date): Promise
       isAdmin: 'u.is_admin',
       emailVerifiedAt: 'u.email_verified_at',
       expiresAt: 's.expires_at',
+      lastSeenAt: 's.last_seen_at',
     })
 }
 
@@ -49,4 +53,42 @@ export async function deleteSession(db: Db, tokenHash: string): Promise<void> {
 
 export async function deleteSessionsOf(db: Db, userId: string): Promise<number> {
   return db('sessions').where({ user_id: userId }).delete()
+}
+
+/** Noted now and then, not at every look. */
+export async function noteSeen(db: Db, tokenHash: string, now: Date): Promise<void> {
+  await db('sessions').where({ token_hash: tokenHash }).update({ last_seen_at: now })
+}
+
+export interface SessionOfUser {
+  /** The beginning of the token's hash: enough to tell one's sessions apart, nothing that signs in. */
+  handle: string
+  device: string
+  createdAt: Date
+  lastSeenAt: Date
+}
+
+const HANDLE_LENGTH = 16
+export const sessionHandle = (tokenHash: string) => tokenHash.slice(0, HANDLE_LENGTH)
+
+export async function listSessionsOf(db: Db, userId: string, now: Date): Promise<SessionOfUser[]> {
+  return db('sessions')
+    .where({ user_id: userId })
+    .where('expires_at', '>', now)
+    .orderBy([{ column: 'last_seen_at', order: 'desc' }, 'token_hash'])
+    .select({
+      handle: db.raw(`left(token_hash, ${HANDLE_LENGTH})`),
+      device: 'device',
+      createdAt: 'created_at',
+      lastSeenAt: 'last_seen_at',
+    })
+}
+
+/** One's own only. @returns false when there is no such session any more. */
+export async function deleteSessionByHandle(db: Db, userId: string, handle: string): Promise<boolean> {
+  const ended = await db('sessions')
+    .where({ user_id: userId })
+    .whereRaw(`left(token_hash, ${HANDLE_LENGTH}) = ?`, [handle])
+    .delete()
+  return ended > 0
 }

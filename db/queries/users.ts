@@ -19,6 +19,8 @@ export interface AccountRow {
   hasPassword: boolean
   /** The mail server refused this address for good. */
   isEmailRefused: boolean
+  /** The day on which the account goes, when that was asked for. */
+  deletionDueAt: Date | null
 }
 
 /**
@@ -66,6 +68,7 @@ export async function findAccount(db: Db, userId: string): Promise<AccountRow | 
       'clock',
       'theme',
       unitsColumn(db, 'users').wrap('', ' as units'),
+      db.ref('deletion_due_at').as('deletionDueAt'),
       db.raw('password_hash is not null as "hasPassword"'),
       db.raw('email_refused_at is not null as "isEmailRefused"'),
     )
@@ -117,4 +120,51 @@ export async function chooseUnits(db: Db, userId: string, units: Units, now: Dat
 /** A refusal for good: alerts leave the address alone from now on, and the alerts page says so. */
 export async function noteEmailRefused(db: Db, userId: string, now: Date): Promise<void> {
   await db('users').where({ id: userId }).update({ email_refused_at: now })
+}
+
+/** @returns false when the address has an account already. */
+export async function changeEmail(trx: Db, userId: string, email: string, now: Date): Promise<boolean> {
+  const taken = await trx('users').where({ email }).whereNot({ id: userId }).first('id')
+  if (taken) return false
+  await trx('users')
+    .where({ id: userId })
+    .update({ email, email_verified_at: now, email_refused_at: null, updated_at: now })
+  return true
+}
+
+/** `null` keeps the account after all. */
+export async function setDeletionDue(db: Db, userId: string, dueAt: Date | null, now: Date): Promise<void> {
+  await db('users').where({ id: userId }).update({ deletion_due_at: dueAt, updated_at: now })
+}
+
+/** Rinks that nobody else keeps: they go with the account. */
+export async function listRinksKeptAlone(db: Db, userId: string): Promise<{ id: string; name: string }[]> {
+  return db('rink_members as m')
+    .join('rinks as r', 'r.id', 'm.rink_id')
+    .where({ 'm.user_id': userId, 'm.role': 'keeper' })
+    .whereNotExists(
+      db('rink_members as k')
+        .select(db.raw('1'))
+        .whereRaw(`k.rink_id = m.rink_id and k.role = 'keeper' and k.user_id <> m.user_id`),
+    )
+    .orderBy(['r.name', 'r.id'])
+    .select({ id: 'r.id', name: 'r.name' })
+}
+
+/** Accounts whose time is up, with the rinks that only they keep; what they wrote in others' logs stays, unnamed. */
+export async function deleteDueAccounts(db: Db, now: Date): Promise<number> {
+  return db.transaction(async (trx) => {
+    const due = await trx('users').where('deletion_due_at', '<=', now).forUpdate().select('id')
+    for (const { id } of due) {
+      const rinks = await listRinksKeptAlone(trx, id)
+      await trx('rinks')
+        .whereIn(
+          'id',
+          rinks.map((rink) => rink.id),
+        )
+        .delete()
+      await trx('users').where({ id }).delete()
+    }
+    return due.length
+  })
 }

@@ -12,10 +12,16 @@ export const LINK_LIFETIME_SECONDS: Record<LinkPurpose, number> = {
   verify: 24 * 60 * MINUTE_SECONDS,
   'sign-in': 30 * MINUTE_SECONDS,
   reset: 30 * MINUTE_SECONDS,
+  'change-email': 24 * 60 * MINUTE_SECONDS,
 }
 
 /** Pages with a button: mail scanners that open every link use none of them up. */
-const PATHS: Record<LinkPurpose, string> = { verify: '/verify', 'sign-in': '/sign-in/link', reset: '/reset/new' }
+const PATHS: Record<LinkPurpose, string> = {
+  verify: '/verify',
+  'sign-in': '/sign-in/link',
+  reset: '/reset/new',
+  'change-email': '/change-email',
+}
 
 const KEY = /^([0-9a-f]{8}(?:-[0-9a-f]{4}){3}-[0-9a-f]{12})\.([A-Za-z0-9_-]{43})$/
 

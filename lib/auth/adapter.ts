@@ -1,15 +1,20 @@
 // next-auth's view of our tables: sessions and who they belong to. Accounts are made by our services, never by next-auth.
 import type { Adapter } from 'next-auth/adapters'
 import type { Db } from '@/db/knex'
-import { deleteSession, extendSession, findSession } from '@/db/queries/sessions'
+import { deleteSession, extendSession, findSession, noteSeen } from '@/db/queries/sessions'
 import { readClock } from '@/lib/clock'
 import { hashSessionToken } from './session-tokens'
+
+/** How exactly a session knows when it was last used. */
+const SEEN_STEP_MILLIS = 10 * 60_000
 
 export function sessionAdapter(db: Db): Adapter {
   return {
     getSessionAndUser: async (sessionToken) => {
-      const found = await findSession(db, hashSessionToken(sessionToken), readClock())
+      const [tokenHash, now] = [hashSessionToken(sessionToken), readClock()]
+      const found = await findSession(db, tokenHash, now)
       if (!found) return null
+      if (now.getTime() - found.lastSeenAt.getTime() > SEEN_STEP_MILLIS) await noteSeen(db, tokenHash, now)
       const { userId, name, email, isAdmin, emailVerifiedAt, expiresAt } = found
       return {
         session: { sessionToken, userId, expires: expiresAt },

@@ -1,4 +1,5 @@
 // next-auth: reads every session, and signs in and out over its own routes by the same services as our forms.
+import { headers } from 'next/headers'
 import type { AuthOptions } from 'next-auth'
 import CredentialsProvider from 'next-auth/providers/credentials'
 import { ZodError } from 'zod'
@@ -10,8 +11,8 @@ import { signInWithLink, signInWithPassword, type SignedIn } from '@/lib/service
 import { sessionAdapter } from './adapter'
 import { openContext } from './open-context'
 import { sharedPool } from './pool'
-import { sessionCookie } from './session-cookie'
-import { openSession, SESSION_SECONDS } from './sessions'
+import { SESSION_SECONDS, sessionCookie } from './session-cookie'
+import { openSession } from './sessions'
 
 declare module 'next-auth' {
   interface Session {
@@ -70,7 +71,8 @@ export function authOptions(): AuthOptions {
       // what this returns, so a session row takes the place of the signed token.
       encode: async ({ token }) => {
         if (!token?.sub) throw new Error('Signed in without a person')
-        return (await openSession(sharedPool(), token.sub, readClock())).token
+        return (await openSession(sharedPool(), token.sub, readClock(), (await headers()).get('user-agent') ?? ''))
+          .token
       },
     },
     callbacks: {

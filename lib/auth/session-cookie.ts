@@ -1,5 +1,8 @@
 // The cookie that carries the session, by one definition for next-auth, for our own sign-in and for proxy.ts.
 
+/** A winter: nobody should have to sign in with gloves on. Every visit within it starts it anew. */
+export const SESSION_SECONDS = 180 * 24 * 60 * 60
+
 export interface SessionCookie {
   name: string
   options: { httpOnly: true; sameSite: 'lax'; path: '/'; secure: boolean }

@@ -1,9 +1,9 @@
 // Reads the signed-in person from the request, and starts and ends sessions in this browser.
 import 'server-only'
-import { cookies } from 'next/headers'
+import { cookies, headers } from 'next/headers'
 import { getServerSession } from 'next-auth'
 import { cache } from 'react'
-import { deleteSession } from '@/db/queries/sessions'
+import { deleteSession, sessionHandle } from '@/db/queries/sessions'
 import { readClock } from '@/lib/clock'
 import type { Viewer } from '@/lib/context'
 import { readEnvironment } from '@/lib/env'
@@ -22,7 +22,12 @@ export const readViewer = cache(async (): Promise<Viewer | undefined> => {
 /** Signs a person in, in this browser; a session that it had before ends. For server actions, which may set cookies. */
 export async function startSession(userId: string): Promise<void> {
   await endSession()
-  const { token, expiresAt } = await openSession(sharedPool(), userId, readClock())
+  const { token, expiresAt } = await openSession(
+    sharedPool(),
+    userId,
+    readClock(),
+    (await headers()).get('user-agent') ?? '',
+  )
   const { name, options } = sessionCookie(readEnvironment().PUBLIC_URL)
   const jar = await cookies()
   jar.set(name, token, { ...options, expires: expiresAt })
@@ -37,4 +42,11 @@ export async function endSession(): Promise<void> {
   await deleteSession(sharedPool(), hashSessionToken(token))
   // `delete` alone leaves out Secure, and browsers then ignore it for a __Host- cookie.
   jar.set(name, '', { ...options, maxAge: 0 })
+}
+
+/** By which this browser finds itself in the list of sessions. */
+export async function presentSessionHandle(): Promise<string | undefined> {
+  const { name } = sessionCookie(readEnvironment().PUBLIC_URL)
+  const token = (await cookies()).get(name)?.value
+  return token && sessionHandle(hashSessionToken(token))
 }

@@ -31,7 +31,7 @@ function translate(error: unknown, request: Request): Response {
     return refuse(STATUS[error.code], { code: error.code, message: error.message, ...fields }, wait)
   }
   logFailure('route.failed', error, { method: request.method, path: new URL(request.url).pathname })
-  return refuse(500, { code: 'internal', message: 'Something broke on our side. Please try again in a minute.' })
+  return refuse(500, { code: 'internal', message: 'Something broke on our side. Try again in a minute.' })
 }
 
 /**

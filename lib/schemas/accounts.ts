@@ -71,6 +71,25 @@ export const accountSchema = z
   })
   .transform(({ name, clock, theme, ...units }) => ({ name, clock, theme, units }))
 
+/** Without a device the test goes by mail. */
+export const testSchema = z.object({ deviceId: z.uuid('That is no device.').optional() })
+export const ownDeviceSchema = z.object({ deviceId: z.uuid('That is no device.') })
+export const testIdSchema = z.uuid('That is no test.')
+
+/** The present password, where there is one: whoever finds a phone unlocked shall not take the account along. */
+const presentPasswordSchema = z
+  .string()
+  .max(200, 'At most 200 characters.')
+  .default('')
+  .transform((password) => password.normalize('NFC'))
+
+export const emailChangeSchema = z.object({ email: emailSchema, currentPassword: presentPasswordSchema })
+export const deletionSchema = z.object({ currentPassword: presentPasswordSchema })
+export const endSessionSchema = z.object({ handle: z.string().regex(/^[0-9a-f]{16}$/, 'That is no session.') })
+
+export type TestInput = z.output<typeof testSchema>
+export type EmailChangeInput = z.output<typeof emailChangeSchema>
+export type DeletionInput = z.output<typeof deletionSchema>
 export type SignUpInput = z.output<typeof signUpSchema>
 export type PasswordSignInInput = z.output<typeof passwordSignInSchema>
 export type MailRequestInput = z.output<typeof mailRequestSchema>

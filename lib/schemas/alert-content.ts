@@ -22,5 +22,10 @@ export const fillCheckContentSchema = z.object({
 /** Account mail names its link; the note about a known address has none. */
 export const linkContentSchema = z.object({ linkId: z.uuid() })
 
+/** A test of one device names it. */
+export const testContentSchema = z.object({ deviceId: z.uuid().optional() })
+
+export const deletionContentSchema = z.object({ dueAt: z.iso.datetime() })
+
 export type AlertContent = z.infer<typeof alertContentSchema>
 export type FillCheckContent = z.infer<typeof fillCheckContentSchema>

@@ -8,6 +8,7 @@ const KINDS: Record<LinkPurpose, MessageKind> = {
   verify: 'verify-address',
   'sign-in': 'sign-in-link',
   reset: 'reset-password',
+  'change-email': 'change-address',
 }
 
 const NOTE_LIFETIME_SECONDS = 24 * 60 * 60
@@ -17,9 +18,15 @@ function later(now: Date, seconds: number): Date {
 }
 
 /** A new link and its mail; the mail is dropped when it could only arrive with a dead link. */
-export async function promiseLink(trx: Db, userId: string, purpose: LinkPurpose, now: Date): Promise<void> {
+export async function promiseLink(
+  trx: Db,
+  userId: string,
+  purpose: LinkPurpose,
+  now: Date,
+  newEmail?: string,
+): Promise<void> {
   const expiresAt = later(now, LINK_LIFETIME_SECONDS[purpose])
-  const link = await insertAccountLink(trx, { userId, purpose, expiresAt }, now)
+  const link = await insertAccountLink(trx, { userId, purpose, expiresAt, newEmail }, now)
   const kind = KINDS[purpose]
   const content = { linkId: link.id }
   await promiseMessage(
@@ -35,4 +42,13 @@ export async function promiseAlreadyRegistered(trx: Db, userId: string, now: Dat
   const dedupeKey = `${kind}:${userId}:${now.toISOString()}`
   const expiresAt = later(now, NOTE_LIFETIME_SECONDS)
   await promiseMessage(trx, { dedupeKey, userId, channel: 'email', kind, content: {}, sendAt: now, expiresAt }, now)
+}
+
+/** Confirms that an account is to go, with the way to keep it. */
+export async function promiseDeletionMail(trx: Db, userId: string, dueAt: Date, now: Date): Promise<void> {
+  const kind = 'deletion-asked'
+  const dedupeKey = `${kind}:${userId}:${now.toISOString()}`
+  const expiresAt = later(now, NOTE_LIFETIME_SECONDS)
+  const content = { dueAt: dueAt.toISOString() }
+  await promiseMessage(trx, { dedupeKey, userId, channel: 'email', kind, content, sendAt: now, expiresAt }, now)
 }

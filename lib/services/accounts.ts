@@ -3,7 +3,9 @@ import type { Db } from '@/db/knex'
 import { consumeAccountLink, findGoodAccountLink, voidAccountLinks, type LinkPurpose } from '@/db/queries/account-links'
 import { deleteSessionsOf } from '@/db/queries/sessions'
 import {
+  changeEmail,
   confirmEmail,
+  findAccount,
   findEmail,
   findUserForSignIn,
   isOnAnyRink,
@@ -21,13 +23,15 @@ import { spend, spendByVisitor } from './rate-limits'
 export interface SignedIn {
   userId: string
   hasRink: boolean
+  /** Its deletion was asked for, and may be taken back. */
+  isLeaving: boolean
 }
 
 /** One sentence for a wrong password, an unknown address and an unconfirmed one. */
 export const SIGN_IN_REFUSED =
   'That did not work: the password is not right, or the address is not confirmed yet. If it is not, a new link is on its way.'
 
-export const LINK_REFUSED = 'This link has been used or has run out. Please ask for a new one.'
+export const LINK_REFUSED = 'This link has been used or has run out. Ask for a new one.'
 
 /** Mails a link that confirms the address; somebody who is known already gets a mail that says so. */
 export async function signUp(context: OpenContext, { email, name, password }: SignUpInput): Promise<void> {
@@ -88,14 +92,22 @@ export async function findLinkOwner(
 ): Promise<{ email: string } | undefined> {
   const link = openLinkKey(secret, purpose, key)
   const good = link && (await findGoodAccountLink(db, link, now))
-  const email = good && (await findEmail(db, good.userId))
+  const email = good && (good.newEmail ?? (await findEmail(db, good.userId)))
   return email ? { email } : undefined
 }
 
-/** Confirms the address that the link was mailed to. @throws InvalidInputError when the link no longer works. */
-export function confirmAddress(context: OpenContext, key: string): Promise<SignedIn> {
+/**
+ * Confirms the address that the link was mailed to. The password typed at sign-up stays only where the link is opened in
+ * the browser that signed up: elsewhere somebody else may have typed it.
+ *
+ * @param signedUpAs The address that this browser signed up with.
+ * @throws InvalidInputError when the link no longer works.
+ */
+export function confirmAddress(context: OpenContext, key: string, signedUpAs: string | undefined): Promise<SignedIn> {
   return withLink(context, 'verify', key, async (trx, userId) => {
-    await confirmEmail(trx, userId, context.now)
+    const isFirstProof = await confirmEmail(trx, userId, context.now)
+    const isSameBrowser = signedUpAs !== undefined && signedUpAs === (await findEmail(trx, userId))
+    if (isFirstProof && !isSameBrowser) await setPasswordHash(trx, userId, null, context.now)
   })
 }
 
@@ -124,22 +136,32 @@ export async function resetPassword(
   })
 }
 
+/** Makes the address that the link was mailed to the account's. @throws InvalidInputError when the link no longer works. */
+export function takeNewAddress(context: OpenContext, key: string): Promise<SignedIn> {
+  return withLink(context, 'change-email', key, async (trx, userId, newEmail) => {
+    const isChanged = newEmail !== null && (await changeEmail(trx, userId, newEmail, context.now))
+    if (!isChanged) throw new InvalidInputError(LINK_REFUSED)
+    await voidAccountLinks(trx, userId, context.now)
+  })
+}
+
 async function withLink(
   { db, now, secret }: OpenContext,
   purpose: LinkPurpose,
   key: string,
-  work: (trx: Db, userId: string) => Promise<void>,
+  work: (trx: Db, userId: string, newEmail: string | null) => Promise<void>,
 ): Promise<SignedIn> {
   const link = openLinkKey(secret, purpose, key)
   if (!link) throw new InvalidInputError(LINK_REFUSED)
   return db.transaction(async (trx) => {
     const used = await consumeAccountLink(trx, link, now)
     if (!used) throw new InvalidInputError(LINK_REFUSED)
-    await work(trx, used.userId)
+    await work(trx, used.userId, used.newEmail)
     return signedIn(trx, used.userId)
   })
 }
 
 async function signedIn(db: Db, userId: string): Promise<SignedIn> {
-  return { userId, hasRink: await isOnAnyRink(db, userId) }
+  const account = await findAccount(db, userId)
+  return { userId, hasRink: await isOnAnyRink(db, userId), isLeaving: Boolean(account?.deletionDueAt) }
 }

@@ -1,5 +1,4 @@
 // How a person wants to hear about a rink, and for how long they want silence.
-import { createHash } from 'node:crypto'
 import {
   DEFAULT_PREFERENCES,
   findAlertPreferences,
@@ -7,7 +6,6 @@ import {
   type AlertPreferences,
 } from '@/db/queries/alert-preferences'
 import { enqueueDecision } from '@/db/queries/jobs'
-import { listDevices, type DeviceRow } from '@/db/queries/push-subscriptions'
 import { getRinkHead } from '@/db/queries/rinks'
 import { listToldMessages, type ToldMessageRow } from '@/db/queries/told-messages'
 import { findAccount } from '@/db/queries/users'
@@ -18,16 +16,7 @@ import type { ServiceContext } from '@/lib/context'
 import { InvalidInputError, NotFoundError } from '@/lib/errors'
 import type { AlertPreferencesInput, MuteInput } from '@/lib/schemas/alerts'
 import type { Units } from '@/lib/units'
-
-export interface Device {
-  id: string
-  /** Who carries the pushes: names the browser well enough to tell a phone from a laptop. */
-  pushHost: string
-  /** SHA-256 of the address, by which a browser knows itself in the list. */
-  fingerprint: string
-  addedAt: Date
-  disabledReason: string | null
-}
+import { listOwnDevices, type Device } from './push-subscriptions'
 
 /** What the person was told, as the page lists it. */
 export type ToldMessage = ToldMessageRow
@@ -48,11 +37,6 @@ export interface AlertSettings {
 const TOLD_SHOWN = 30
 const LONGEST_MUTE_DAYS = 366
 
-function toDevice({ id, endpoint, createdAt, disabledReason }: DeviceRow): Device {
-  const fingerprint = createHash('sha256').update(endpoint).digest('hex')
-  return { id, pushHost: new URL(endpoint).hostname, fingerprint, addedAt: createdAt, disabledReason }
-}
-
 /** @throws ForbiddenError for skaters, who are not told; NotFoundError for strangers. */
 export async function getAlertSettings(context: ServiceContext, rinkId: string): Promise<AlertSettings> {
   const { db, now, viewer } = context
@@ -68,7 +52,7 @@ export async function getAlertSettings(context: ServiceContext, rinkId: string):
     isEmailRefused: account.isEmailRefused,
     units: account.units,
     clock: account.clock,
-    devices: (await listDevices(db, viewer.userId)).map(toDevice),
+    devices: await listOwnDevices(context),
     told: await listToldMessages(db, access, viewer.userId, TOLD_SHOWN),
   }
 }

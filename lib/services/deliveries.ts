@@ -14,6 +14,7 @@ import { logEvent } from '@/lib/log'
 import { DeliveryError, type EmailTransport, type PushTransport } from '@/lib/messaging/port'
 import { nextAttemptAt } from '@/lib/messaging/retry'
 import { pushTopic } from '@/lib/messaging/push-topic'
+import { testContentSchema } from '@/lib/schemas/alert-content'
 import { renderEmail, renderPush, type RenderSettings } from './render-message'
 
 export interface Delivering {
@@ -101,7 +102,7 @@ async function sendEmail(delivering: Delivering, message: MessageToDeliver): Pro
 async function sendPushes(delivering: Delivering, message: MessageToDeliver): Promise<Failure[]> {
   const { db, readClock } = delivering
   const served = new Set(await listDeliveredDevices(db, message.id))
-  const devices = (await listEnabledPushSubscriptions(db, message.userId)).filter(({ id }) => !served.has(id))
+  const devices = (await devicesFor(db, message)).filter(({ id }) => !served.has(id))
   const payload = renderPush(message, delivering.settings)
   const failures: Failure[] = []
   for (const { id, ...subscription } of devices) {
@@ -119,4 +120,12 @@ async function sendPushes(delivering: Delivering, message: MessageToDeliver): Pr
   const isServed = served.size > 0 || devices.length > failures.length
   if (isServed) return failures.filter((failure) => !failure.isPermanent)
   return failures.length > 0 ? failures : [{ isPermanent: true, retryAfterSeconds: null }]
+}
+
+/** All of the person's; a test goes to the one that is tried. */
+async function devicesFor(db: Db, message: MessageToDeliver) {
+  const devices = await listEnabledPushSubscriptions(db, message.userId)
+  if (message.kind !== 'test') return devices
+  const { deviceId } = testContentSchema.parse(message.content)
+  return devices.filter(({ id }) => id === deviceId)
 }

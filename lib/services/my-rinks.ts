@@ -1,7 +1,9 @@
 // A person's rinks with what tonight holds for each, in a sentence.
+import { listMembers } from '@/db/queries/members'
 import { listNewestSummaries } from '@/db/queries/outlooks'
 import { listRinksOfUser, type RinkOfUser } from '@/db/queries/rinks'
 import { findAccount } from '@/db/queries/users'
+import type { Role } from '@/lib/access/permissions'
 import { requireRink } from '@/lib/access/require-rink'
 import { tonightDate } from '@/lib/advice/night'
 import type { ServiceContext } from '@/lib/context'
@@ -36,4 +38,22 @@ export async function getMyRink(context: ServiceContext, rinkId: string): Promis
   const rink = (await listRinksOfUser(context.db, context.viewer.userId)).find(({ id }) => id === access.rinkId)
   if (!rink) throw new NotFoundError('Rink')
   return rink
+}
+
+export interface WhoMay {
+  rinkName: string
+  role: Role
+  /** Names of those who keep it. */
+  keepers: string[]
+}
+
+/** For a member who opened what their role may not. @throws NotFoundError for strangers. */
+export async function getWhoMay(context: ServiceContext, rinkId: string): Promise<WhoMay> {
+  const access = await requireRink(context, rinkIdSchema.parse(rinkId), 'view')
+  const [{ name, role }, people] = await Promise.all([getMyRink(context, rinkId), listMembers(context.db, access)])
+  return {
+    rinkName: name,
+    role,
+    keepers: people.filter((person) => person.role === 'keeper').map((person) => person.name),
+  }
 }

@@ -1,13 +1,14 @@
-// A signed-in person's own account: how they are called, how they read figures, their password and their sessions.
+// A signed-in person's own account: how they are called, how they read figures, their address and their password.
 import { voidAccountLinks } from '@/db/queries/account-links'
 import { deleteSessionsOf } from '@/db/queries/sessions'
-import { findAccount, findPasswordHash, setPasswordHash, updateAccount } from '@/db/queries/users'
+import { findAccount, findPasswordHash, findUserForSignIn, setPasswordHash, updateAccount } from '@/db/queries/users'
 import { hashPassword, verifyPassword } from '@/lib/auth/passwords'
 import type { ServiceContext } from '@/lib/context'
 import { InvalidInputError, NotFoundError } from '@/lib/errors'
-import type { AccountInput, PasswordChangeInput } from '@/lib/schemas/accounts'
+import type { AccountInput, EmailChangeInput, PasswordChangeInput } from '@/lib/schemas/accounts'
 import type { ThemeChoice } from '@/lib/schemas/themes'
 import type { Units } from '@/lib/units'
+import { promiseAlreadyRegistered, promiseLink } from './account-mail'
 import { spend } from './rate-limits'
 
 export interface AccountView {
@@ -17,6 +18,9 @@ export interface AccountView {
   clock: '12' | '24'
   theme: ThemeChoice
   hasPassword: boolean
+  isEmailRefused: boolean
+  /** The day on which the account goes, when that was asked for. */
+  deletionDueAt: Date | null
 }
 
 export async function getAccount({ db, viewer }: ServiceContext): Promise<AccountView> {
@@ -32,11 +36,7 @@ export async function saveAccount({ db, now, viewer }: ServiceContext, input: Ac
 /** Ends every session, this one too: the caller opens a new one. Somebody without a password may set a first one. */
 export async function changePassword(context: ServiceContext, input: PasswordChangeInput): Promise<void> {
   const { db, now, viewer } = context
-  await spend(context, 'passwordChangeByUser', viewer.userId)
-  const present = await findPasswordHash(db, viewer.userId)
-  if (present && !(await verifyPassword(present, input.currentPassword))) {
-    throw new InvalidInputError('Nothing was changed.', { currentPassword: 'This is not your present password.' })
-  }
+  await requirePassword(context, input.currentPassword)
   const passwordHash = await hashPassword(input.newPassword)
   await db.transaction(async (trx) => {
     await setPasswordHash(trx, viewer.userId, passwordHash, now)
@@ -45,10 +45,29 @@ export async function changePassword(context: ServiceContext, input: PasswordCha
   })
 }
 
-/** Every browser, this one too. Links that are still on their way sign nobody in any more. */
-export async function signOutEverywhere({ db, now, viewer }: ServiceContext): Promise<void> {
+/** @throws InvalidInputError at the field when a password is set and this is not it. */
+export async function requirePassword(context: ServiceContext, typed: string): Promise<void> {
+  await spend(context, 'passwordChangeByUser', context.viewer.userId)
+  const present = await findPasswordHash(context.db, context.viewer.userId)
+  if (present && !(await verifyPassword(present, typed))) {
+    throw new InvalidInputError('Nothing was changed.', { currentPassword: 'This is not your present password.' })
+  }
+}
+
+/**
+ * Mails a link to the new address; until it is pressed the old one stays. An address that has an account gets a mail
+ * that says so, and the page answers alike.
+ */
+export async function askForEmailChange(context: ServiceContext, input: EmailChangeInput): Promise<void> {
+  const { db, now, viewer } = context
+  await requirePassword(context, input.currentPassword)
+  await spend(context, 'mailByEmail', input.email)
+  const known = await findUserForSignIn(db, input.email)
+  if (known?.id === viewer.userId) {
+    throw new InvalidInputError('Nothing was changed.', { email: 'This is your address already.' })
+  }
   await db.transaction(async (trx) => {
-    await deleteSessionsOf(trx, viewer.userId)
-    await voidAccountLinks(trx, viewer.userId, now)
+    if (known) await promiseAlreadyRegistered(trx, known.id, now)
+    else await promiseLink(trx, viewer.userId, 'change-email', now, input.email)
   })
 }

@@ -1,9 +1,11 @@
 // The devices on which a person gets notifications.
-import { createECDH } from 'node:crypto'
+import { createECDH, createHash } from 'node:crypto'
 import {
   countPushSubscriptions,
   deletePushSubscription,
+  listDevices,
   putPushSubscription,
+  type DeviceRow,
   type PushKeys,
 } from '@/db/queries/push-subscriptions'
 import { enqueueDecision } from '@/db/queries/jobs'
@@ -13,6 +15,25 @@ import type { ServiceContext } from '@/lib/context'
 import { ConflictError, InvalidInputError, NotFoundError } from '@/lib/errors'
 import { isAllowedPushEndpoint } from '@/lib/messaging/push-services'
 import type { PushSubscriptionInput } from '@/lib/schemas/alerts'
+
+export interface Device {
+  id: string
+  /** Who carries the pushes: names the browser well enough to tell a phone from a laptop. */
+  pushHost: string
+  /** SHA-256 of the address, by which a browser knows itself in the list. */
+  fingerprint: string
+  addedAt: Date
+  disabledReason: string | null
+}
+
+function toDevice({ id, endpoint, createdAt, disabledReason }: DeviceRow): Device {
+  const fingerprint = createHash('sha256').update(endpoint).digest('hex')
+  return { id, pushHost: new URL(endpoint).hostname, fingerprint, addedAt: createdAt, disabledReason }
+}
+
+export async function listOwnDevices({ db, viewer }: ServiceContext): Promise<Device[]> {
+  return (await listDevices(db, viewer.userId)).map(toDevice)
+}
 
 /** More phones than a household has; each alert goes to every one. */
 const MOST_DEVICES = 20

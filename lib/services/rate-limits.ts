@@ -14,6 +14,7 @@ export const LIMITS = {
   mailByEmail: { hits: 6, seconds: HOUR_SECONDS },
   mailByVisitor: { hits: 200, seconds: HOUR_SECONDS },
   signUpByVisitor: { hits: 100, seconds: HOUR_SECONDS },
+  testByUser: { hits: 12, seconds: HOUR_SECONDS },
   passwordChangeByUser: { hits: 10, seconds: QUARTER_HOUR_SECONDS },
   // Each may ask for the weather of one more place.
   setUpByUser: { hits: 40, seconds: HOUR_SECONDS },

@@ -1,17 +1,26 @@
 // Turns a promised message into the mail or push that goes out.
+import { formatInTimeZone } from 'date-fns-tz'
 import { LINK_LIFETIME_SECONDS, linkUrl } from '@/lib/auth/account-links'
 import type { MessageToDeliver } from '@/db/queries/deliveries'
 import type { EmailMessage, PushMessage } from '@/lib/messaging/port'
 import {
   addressAlreadyRegisteredMail,
+  changeAddressMail,
+  deletionAskedMail,
   resetPasswordMail,
   signInLinkMail,
+  testMail,
   verifyAddressMail,
 } from '@/lib/messaging/templates/account'
 import { alertMail, alertPush, type AlertWords } from '@/lib/messaging/templates/alerts'
 import { fillCheckMail, fillCheckPush, type FillCheckWords } from '@/lib/messaging/templates/fill-check'
 import type { MailWords } from '@/lib/messaging/templates/letter'
-import { alertContentSchema, fillCheckContentSchema, linkContentSchema } from '@/lib/schemas/alert-content'
+import {
+  alertContentSchema,
+  fillCheckContentSchema,
+  linkContentSchema,
+  deletionContentSchema,
+} from '@/lib/schemas/alert-content'
 import { unsubscribeUrl } from './unsubscribe'
 
 export interface RenderSettings {
@@ -25,6 +34,7 @@ const LINK_MAILS = {
   'verify-address': { purpose: 'verify', write: verifyAddressMail },
   'sign-in-link': { purpose: 'sign-in', write: signInLinkMail },
   'reset-password': { purpose: 'reset', write: resetPasswordMail },
+  'change-address': { purpose: 'change-email', write: changeAddressMail },
 } as const
 
 function isAlert(kind: MessageToDeliver['kind']): kind is AlertKind {
@@ -55,6 +65,11 @@ function accountMail(message: MessageToDeliver, { publicUrl, secret }: RenderSet
   if (message.kind === 'address-already-registered') {
     return addressAlreadyRegisteredMail({ signInUrl: `${publicUrl}/sign-in`, resetUrl: `${publicUrl}/reset` })
   }
+  if (message.kind === 'test') return testMail({ accountUrl: `${publicUrl}/account` })
+  if (message.kind === 'deletion-asked') {
+    const { dueAt } = deletionContentSchema.parse(message.content)
+    return deletionAskedMail({ on: formatInTimeZone(dueAt, 'UTC', 'd MMMM yyyy'), signInUrl: `${publicUrl}/sign-in` })
+  }
   if (isAlert(message.kind) || message.kind === 'fill-check') throw new Error(`${message.kind} is no account mail`)
   const { purpose, write } = LINK_MAILS[message.kind]
   const { linkId } = linkContentSchema.parse(message.content)
@@ -83,6 +98,10 @@ export function renderEmail(message: MessageToDeliver, settings: RenderSettings)
 /** What the service worker shows; one tag per rink and night, so that newer news replaces older. */
 export function renderPush(message: MessageToDeliver, settings: RenderSettings): PushMessage['payload'] {
   if (message.kind === 'fill-check') return fillCheckPush(fillCheckWords(message, settings), `fill:${message.rinkId}`)
+  if (message.kind === 'test') {
+    const body = 'Word of a good night will come the same way.'
+    return { title: 'This device is told', body, url: `${settings.publicUrl}/account`, tag: `test:${message.id}` }
+  }
   if (!isAlert(message.kind)) throw new Error(`${message.kind} is not sent by push`)
   const { rinkId, nightDate } = alertContentSchema.parse(message.content)
   return alertPush(message.kind, alertWords(message, settings), `night:${rinkId}:${nightDate}`)

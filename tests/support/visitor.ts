@@ -42,6 +42,6 @@ export async function newestKey(db: Knex, email: string, purpose: LinkPurpose): 
 /** Signs up and confirms. */
 export async function newMember(db: Knex, email = newEmail()): Promise<{ email: string; userId: string }> {
   await signUp(visitor(db), { name: 'Anna', email, password: PASSWORD })
-  const { userId } = await confirmAddress(visitor(db), await newestKey(db, email, 'verify'))
+  const { userId } = await confirmAddress(visitor(db), await newestKey(db, email, 'verify'), email)
   return { email, userId }
 }

@@ -1,11 +1,7 @@
 'use client'
 // Signs out, and lets the service worker forget the night sheets that it keeps for when there is no network.
 import { ActionForm, type FormAction } from '@/components/ui/action-form'
-
-function forgetKeptPages(): void {
-  // Absent on plain http and in old browsers; then nothing was kept.
-  navigator.serviceWorker?.controller?.postMessage('forget')
-}
+import { forgetKeptPages } from './forget-kept-pages'
 
 export function SignOutForm({
   action,

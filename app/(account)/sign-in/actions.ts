@@ -1,10 +1,9 @@
 'use server'
 // Sign-in by password, or by a link that we mail.
-import type { Route } from 'next'
 import { redirect } from 'next/navigation'
-import { localPath } from '@/lib/auth/next-path'
 import { openContext } from '@/lib/auth/open-context'
 import { startSession } from '@/lib/auth/session'
+import { wayIn } from '@/lib/auth/way-in'
 import { atLeast, MAIL_ANSWER_MILLIS } from '@/lib/http/at-least'
 import { formAction } from '@/lib/http/form-action'
 import { passwordSignInSchema, signInFormSchema } from '@/lib/schemas/accounts'
@@ -17,7 +16,7 @@ export const signInAction = formAction(signInFormSchema, async ({ by, next, ...i
     await atLeast(MAIL_ANSWER_MILLIS, requestLink(context, input, 'sign-in'))
     return goToCheckYourMail(input.email, 'sign-in')
   }
-  const { userId, hasRink } = await signInWithPassword(context, passwordSignInSchema.parse(input))
-  await startSession(userId)
-  redirect((localPath(next) ?? (hasRink ? '/rinks' : '/rinks/new')) as Route)
+  const signedIn = await signInWithPassword(context, passwordSignInSchema.parse(input))
+  await startSession(signedIn.userId)
+  redirect(wayIn(signedIn, next))
 })

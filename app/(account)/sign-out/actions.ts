@@ -5,7 +5,7 @@ import { z } from 'zod'
 import { requestContext } from '@/lib/auth/request-context'
 import { endSession } from '@/lib/auth/session'
 import { formAction } from '@/lib/http/form-action'
-import { signOutEverywhere } from '@/lib/services/own-account'
+import { signOutEverywhere } from '@/lib/services/own-sessions'
 
 const nothing = z.object({})
 

@@ -1,11 +1,21 @@
 'use server'
 // Changes to one's own account.
 import { refresh } from 'next/cache'
+import { redirect } from 'next/navigation'
+import { z } from 'zod'
 import { requestContext } from '@/lib/auth/request-context'
 import { startSession } from '@/lib/auth/session'
 import { formAction } from '@/lib/http/form-action'
-import { accountSchema, passwordChangeSchema } from '@/lib/schemas/accounts'
-import { changePassword, saveAccount } from '@/lib/services/own-account'
+import {
+  accountSchema,
+  deletionSchema,
+  emailChangeSchema,
+  endSessionSchema,
+  passwordChangeSchema,
+} from '@/lib/schemas/accounts'
+import { askForDeletion, keepAccount } from '@/lib/services/account-deletion'
+import { askForEmailChange, changePassword, saveAccount } from '@/lib/services/own-account'
+import { endOwnSession } from '@/lib/services/own-sessions'
 
 export const saveAccountAction = formAction(accountSchema, async (input) => {
   await saveAccount(await requestContext(), input)
@@ -19,4 +29,24 @@ export const changePasswordAction = formAction(passwordChangeSchema, async (inpu
   await startSession(context.viewer.userId)
   refresh()
   return 'Your password is changed, and every other device is signed out.'
+})
+
+export const changeEmailAction = formAction(emailChangeSchema, async (input) => {
+  await askForEmailChange(await requestContext(), input)
+  return `A mail is on its way to ${input.email}. Press the button in it within a day.`
+})
+
+export const endSessionAction = formAction(endSessionSchema, async ({ handle }) => {
+  await endOwnSession(await requestContext(), handle)
+  refresh()
+})
+
+export const askForDeletionAction = formAction(deletionSchema, async (input) => {
+  await askForDeletion(await requestContext(), input)
+  redirect('/account/keep')
+})
+
+export const keepAccountAction = formAction(z.object({}), async () => {
+  await keepAccount(await requestContext())
+  redirect('/account')
 })

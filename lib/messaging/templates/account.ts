@@ -73,6 +73,49 @@ export function addressAlreadyRegisteredMail({
   })
 }
 
+/** Goes to the new address: only its reader can make it the account's. */
+export function changeAddressMail({ url, validFor }: LinkMail): MailWords {
+  return writeLetter({
+    ...ACCOUNT_LETTER,
+    subject: 'Confirm your new e-mail address for Nightsheet',
+    heading: 'Confirm your new address',
+    paragraphs: [
+      'Until it is confirmed, everything goes to the old address as before.',
+      `The link works once, within ${validFor}.`,
+    ],
+    action: { label: 'Use this address', url },
+    closing: [NOT_YOU],
+    reason: 'You get this because somebody asked to use this address for their Nightsheet account.',
+  })
+}
+
+/** @param on The day on which the account goes, in words. */
+export function deletionAskedMail({ on, signInUrl }: { on: string; signInUrl: string }): MailWords {
+  return writeLetter({
+    ...ACCOUNT_LETTER,
+    subject: `Your Nightsheet account goes on ${on}`,
+    heading: `Your account goes on ${on}`,
+    paragraphs: [
+      'You asked us to delete it. Until then you can sign in and keep it; afterwards it is gone for good, with the rinks that only you keep.',
+    ],
+    action: { label: 'Sign in to keep it', url: signInUrl },
+    closing: ['If you did not ask for this, sign in, keep the account and change its password.'],
+    reason: 'You get this because the deletion of your Nightsheet account was asked for.',
+  })
+}
+
+export function testMail({ accountUrl }: { accountUrl: string }): MailWords {
+  return writeLetter({
+    ...ACCOUNT_LETTER,
+    subject: 'A test from Nightsheet',
+    heading: 'This mail reached you',
+    paragraphs: ['Word of a good night will come the same way.'],
+    action: { label: 'Back to your account', url: accountUrl },
+    closing: [],
+    reason: 'You get this because you asked for a test on your account page.',
+  })
+}
+
 const NOT_YOU = 'If you did not ask for this, there is nothing to do: nothing changes unless the link is opened.'
 
 const ACCOUNT_LETTER: Pick<Letter, 'kicker' | 'lists' | 'footLinks'> = {

@@ -26,7 +26,7 @@ import {
   visitor,
 } from '@/tests/support/visitor'
 
-const REFUSED = { code: 'invalid_input', message: 'This link has been used or has run out. Please ask for a new one.' }
+const REFUSED = { code: 'invalid_input', message: 'This link has been used or has run out. Ask for a new one.' }
 
 let database: TestDatabase
 beforeAll(async () => {
@@ -49,7 +49,7 @@ test('a link is mailed to a known address, and nothing happens for an unknown on
   expect(await requestLink(visitor(database.db), { email }, 'sign-in')).toBeUndefined()
   expect(await messages()).toBe(before + 1)
   const key = await newestKey(database.db, email, 'sign-in')
-  expect(await signInWithLink(visitor(database.db), key)).toEqual({ userId, hasRink: false })
+  expect(await signInWithLink(visitor(database.db), key)).toEqual({ userId, hasRink: false, isLeaving: false })
 })
 
 test('the mail is dropped no later than its link dies', async () => {
@@ -89,7 +89,7 @@ test.each([
   expect(await findLinkOwner(visitor(database.db, minutesLater(lastMinute)), purpose, key)).toEqual({ email })
   const late = visitor(database.db, minutesLater(deadMinute))
   expect(await findLinkOwner(late, purpose, key)).toBeUndefined()
-  if (purpose === 'verify') await expect(confirmAddress(late, key)).rejects.toMatchObject(REFUSED)
+  if (purpose === 'verify') await expect(confirmAddress(late, key, undefined)).rejects.toMatchObject(REFUSED)
   if (purpose === 'sign-in') await expect(signInWithLink(late, key)).rejects.toMatchObject(REFUSED)
   if (purpose === 'reset') await expect(resetPassword(late, { key, password: PASSWORD })).rejects.toMatchObject(REFUSED)
 })

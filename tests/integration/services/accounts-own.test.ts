@@ -3,10 +3,12 @@ import { METRIC, type Units } from '@/lib/units'
 import { afterAll, beforeAll, expect, test } from 'vitest'
 import { pruneExpired } from '@/db/queries/prune'
 import { sessionAdapter } from '@/lib/auth/adapter'
-import { openSession, SESSION_SECONDS } from '@/lib/auth/sessions'
+import { SESSION_SECONDS } from '@/lib/auth/session-cookie'
+import { openSession } from '@/lib/auth/sessions'
 import type { ServiceContext } from '@/lib/context'
 import { requestLink, signInWithLink, signInWithPassword, signUp } from '@/lib/services/accounts'
-import { changePassword, getAccount, saveAccount, signOutEverywhere } from '@/lib/services/own-account'
+import { changePassword, getAccount, saveAccount } from '@/lib/services/own-account'
+import { signOutEverywhere } from '@/lib/services/own-sessions'
 import { LIMITS } from '@/lib/services/rate-limits'
 import { createTestDatabase, type TestDatabase } from '@/tests/support/test-database'
 import { newEmail, newestKey, newMember, NOW, PASSWORD, visitor } from '@/tests/support/visitor'
@@ -107,6 +109,7 @@ test('name, units and clock are kept, one’s own only', async () => {
     theme: 'dark',
     hasPassword: true,
     isEmailRefused: false,
+    deletionDueAt: null,
   }
   expect(await getAccount(as(userId))).toEqual(expected)
   expect(await getAccount(as(other.userId))).toMatchObject({

@@ -28,6 +28,7 @@ test('the right password of a confirmed address signs in', async () => {
   expect(await signInWithPassword(visitor(database.db), { email, password: PASSWORD })).toEqual({
     userId,
     hasRink: false,
+    isLeaving: false,
   })
 })
 

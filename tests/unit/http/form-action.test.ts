@@ -69,7 +69,7 @@ describe('formAction', () => {
 })
 
 describe('orNotFound', () => {
-  test.each([new NotFoundError('Rink'), new ForbiddenError(), z.uuid().safeParse('x').error])(
+  test.each([new NotFoundError('Rink'), z.uuid().safeParse('x').error])(
     '%o looks like a page that does not exist',
     async (error) => {
       await expect(orNotFound(Promise.reject(error))).rejects.toThrow('NEXT_HTTP_ERROR_FALLBACK;404')

@@ -41,7 +41,7 @@ test.each([
     422,
     { code: 'invalid_input', message: 'No.', fields: { flow: 'Too much.' } },
   ],
-  [new NotSignedInError(), 401, { code: 'not_signed_in', message: 'Please sign in first.' }],
+  [new NotSignedInError(), 401, { code: 'not_signed_in', message: 'Sign in first.' }],
   [new NotFoundError('Rink'), 404, { code: 'not_found', message: 'Rink not found.' }],
   [new ForbiddenError(), 403, { code: 'forbidden', message: 'Your role on this rink does not allow that.' }],
   [new ConflictError('Taken.'), 409, { code: 'conflict', message: 'Taken.' }],

@@ -1,11 +1,14 @@
 'use client'
-// One address, two ways in: the password, or a link by mail.
+// One address, two ways in: the password, or a link by mail. Whoever had this browser before left nothing behind.
+import { useEffect } from 'react'
+import { forgetKeptPages } from '@/app/(account)/_components/forget-kept-pages'
 import { ActionForm } from '@/components/ui/action-form'
 import { Button } from '@/components/ui/button'
-import { TextField } from '@/components/ui/field'
+import { EmailField, PasswordField } from '@/components/ui/person-fields'
 import { signInAction } from '../actions'
 
 export function SignInForm({ next }: { next?: string }) {
+  useEffect(forgetKeptPages, [])
   const byLink = (
     <Button type="submit" name="by" value="link">
       Send me a link instead
@@ -13,24 +16,11 @@ export function SignInForm({ next }: { next?: string }) {
   )
   return (
     <ActionForm action={signInAction} submit="Sign in" otherButtons={byLink}>
-      {({ fields, values }) => (
+      {(state) => (
         <>
           {next ? <input type="hidden" name="next" value={next} /> : null}
-          <TextField
-            label="E-mail"
-            name="email"
-            type="email"
-            autoComplete="username"
-            defaultValue={values?.email}
-            error={fields?.email}
-          />
-          <TextField
-            label="Password"
-            name="password"
-            type="password"
-            autoComplete="current-password"
-            error={fields?.password}
-          />
+          <EmailField {...state} />
+          <PasswordField {...state} />
         </>
       )}
     </ActionForm>

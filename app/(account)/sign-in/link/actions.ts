@@ -3,12 +3,13 @@
 import { redirect } from 'next/navigation'
 import { openContext } from '@/lib/auth/open-context'
 import { startSession } from '@/lib/auth/session'
+import { wayIn } from '@/lib/auth/way-in'
 import { formAction } from '@/lib/http/form-action'
 import { linkSchema } from '@/lib/schemas/accounts'
 import { signInWithLink } from '@/lib/services/accounts'
 
 export const signInWithLinkAction = formAction(linkSchema, async ({ key }) => {
-  const { userId, hasRink } = await signInWithLink(await openContext(), key)
-  await startSession(userId)
-  redirect(hasRink ? '/rinks' : '/rinks/new')
+  const signedIn = await signInWithLink(await openContext(), key)
+  await startSession(signedIn.userId)
+  redirect(wayIn(signedIn))
 })

@@ -1,8 +1,7 @@
 'use client'
 // The present password and the next one; who has none yet may set a first.
 import { ActionForm } from '@/components/ui/action-form'
-import { TextField } from '@/components/ui/field'
-import { MIN_PASSWORD_LENGTH } from '@/lib/schemas/accounts'
+import { FiledUnder, NewPasswordField, PasswordField } from '@/components/ui/person-fields'
 import { changePasswordAction } from '../actions'
 
 export function PasswordChangeForm({ email, hasPassword }: { email: string; hasPassword: boolean }) {
@@ -12,27 +11,11 @@ export function PasswordChangeForm({ email, hasPassword }: { email: string; hasP
       submit={hasPassword ? 'Change the password' : 'Set a password'}
       look="plain"
     >
-      {({ fields }) => (
+      {(state) => (
         <>
-          {/* Password managers file the new password under this name. */}
-          <input type="email" autoComplete="username" value={email} readOnly hidden />
-          {hasPassword ? (
-            <TextField
-              label="Present password"
-              name="currentPassword"
-              type="password"
-              autoComplete="current-password"
-              error={fields?.currentPassword}
-            />
-          ) : null}
-          <TextField
-            label="New password"
-            name="newPassword"
-            type="password"
-            hint={`At least ${MIN_PASSWORD_LENGTH} characters. Every other device is signed out.`}
-            autoComplete="new-password"
-            error={fields?.newPassword}
-          />
+          <FiledUnder email={email} />
+          {hasPassword ? <PasswordField {...state} name="currentPassword" label="Present password" /> : null}
+          <NewPasswordField {...state} name="newPassword" note="Every other device is signed out." />
         </>
       )}
     </ActionForm>

@@ -1,7 +1,8 @@
 // One's devices, with what is wrong with them and a way to take each off.
 import { formatInTimeZone } from 'date-fns-tz'
 import { browserName } from '@/components/alerts/words'
-import type { Device } from '@/lib/services/alert-preferences'
+import { TestButton } from '@/components/alerts/test-button'
+import type { Device } from '@/lib/services/push-subscriptions'
 import { RemoveDevice } from './remove-device'
 
 export function DeviceList({ rinkId, timeZone, devices }: { rinkId: string; timeZone: string; devices: Device[] }) {
@@ -23,6 +24,7 @@ export function DeviceList({ rinkId, timeZone, devices }: { rinkId: string; time
             )}
           </div>
           <RemoveDevice rinkId={rinkId} deviceId={id} name={browserName(pushHost)} />
+          {disabledReason === null ? <TestButton deviceId={id} to={browserName(pushHost)} /> : null}
         </li>
       ))}
     </ul>

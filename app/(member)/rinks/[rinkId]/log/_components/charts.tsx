@@ -47,7 +47,7 @@ function Chart({ title, summary, isEmpty, table, children }: ChartProps) {
             {isNear ? children : null}
           </div>
           <Disclosure summary="Show as table" className="text-small">
-            <DataTable caption={title} {...table} />
+            <DataTable caption={`${title}, in figures`} {...table} />
           </Disclosure>
         </>
       )}

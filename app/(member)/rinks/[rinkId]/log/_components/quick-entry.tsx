@@ -3,6 +3,7 @@
 import { useState, type MouseEvent } from 'react'
 import { Button } from '@/components/ui/button'
 import { Notice } from '@/components/ui/notice'
+import type { FormState } from '@/lib/http/form-state'
 import { LOG_KINDS, type LogKind } from '@/lib/schemas/log-choices'
 import type { LogFrame } from '@/lib/services/log-book'
 import { unitsCode } from '@/lib/units'
@@ -35,9 +36,11 @@ type QuickEntryProps = Pick<LogFrame, 'usual' | 'reader'> & {
 
 export function QuickEntry({ open, ...rest }: QuickEntryProps) {
   const [kind, setKind] = useState(open)
+  const [news, setNews] = useState<string>()
   const choose = (event: MouseEvent<HTMLButtonElement>, chosen: LogKind) => {
     event.preventDefault()
     setKind(chosen === kind ? null : chosen)
+    setNews(undefined)
   }
   return (
     <section aria-label="Write into the log" className="print:hidden">
@@ -57,7 +60,16 @@ export function QuickEntry({ open, ...rest }: QuickEntryProps) {
           </Button>
         ))}
       </form>
-      <EntryForm key={kind ?? ''} {...rest} kind={kind} onSaved={() => setKind(null)} />
+      {news ? <Notice live>{news}</Notice> : null}
+      <EntryForm
+        key={kind ?? ''}
+        {...rest}
+        kind={kind}
+        onSaved={({ message }) => {
+          setKind(null)
+          setNews(message)
+        }}
+      />
     </section>
   )
 }
@@ -75,7 +87,7 @@ const SUBMITS: Record<LogKind, string> = {
 
 interface EntryFormProps extends Omit<QuickEntryProps, 'open'> {
   kind: LogKind | null
-  onSaved: () => void
+  onSaved: (saved: FormState) => void
 }
 
 function EntryForm({ kind, onSaved, usual, reader, rinkId, entryKey }: EntryFormProps) {
@@ -109,7 +121,7 @@ function EntryForm({ kind, onSaved, usual, reader, rinkId, entryKey }: EntryForm
         onSubmit={(event) => submit(event, onSaved)}
         noValidate
         hidden={isSending}
-        aria-label={KIND_WORDS[shown]}
+        aria-label={`${KIND_WORDS[shown]}: a new entry`}
         className="mt-4 max-w-[34rem]"
       >
         <input type="hidden" name="rinkId" value={rinkId} />

@@ -14,7 +14,7 @@ export function useSend(action: FormAction) {
   const [answer, setAnswer] = useState<FormState | null>(null)
   const [isSending, start] = useTransition()
 
-  function submit(event: FormEvent<HTMLFormElement>, onSaved?: () => void) {
+  function submit(event: FormEvent<HTMLFormElement>, onSaved?: (saved: FormState) => void) {
     event.preventDefault()
     const button = (event.nativeEvent as SubmitEvent).submitter
     const fields = new FormData(event.currentTarget, button)
@@ -22,7 +22,7 @@ export function useSend(action: FormAction) {
       const result = await action(IDLE, fields).catch(() => NO_ANSWER)
       start(() => {
         setAnswer(result)
-        if (result.status === 'ok') onSaved?.()
+        if (result.status === 'ok') onSaved?.(result)
       })
     })
   }

@@ -1,12 +1,19 @@
 // The night strip as plain SVG: readable before any script runs. All positions come from night-strip-layout.ts.
-import type { StripBar } from './night-strip-layout'
+import { memo } from 'react'
+import type { StripBar, StripLayout } from './night-strip-layout'
 import { Ground, Patterns } from './strip-ground'
 import { Floor, Now, Passes } from './strip-marks'
 import type { StripPartProps } from './strip-parts'
 
 const TEXT = 12
 
-export function NightStripDrawing({ id, layout, words }: StripPartProps & { id: string }) {
+interface DrawingProps extends StripPartProps {
+  id: string
+  /** Apart from the layout, so that a moved pass draws nothing else anew. */
+  brackets?: StripLayout['brackets']
+}
+
+export function NightStripDrawing({ id, layout, words, brackets = layout.brackets }: DrawingProps) {
   const { frame } = layout
   return (
     <svg
@@ -17,6 +24,17 @@ export function NightStripDrawing({ id, layout, words }: StripPartProps & { id: 
       className="block h-auto w-full"
       fontSize={TEXT}
     >
+      <SteadyParts id={id} layout={layout} words={words} />
+      <Passes layout={layout} words={words} brackets={brackets} />
+      <Now layout={layout} word={words.now} />
+    </svg>
+  )
+}
+
+const SteadyParts = memo(function SteadyParts({ id, layout, words }: StripPartProps & { id: string }) {
+  const { frame } = layout
+  return (
+    <>
       <title id={`${id}-title`}>{words.title}</title>
       <desc id={`${id}-description`}>{words.description}</desc>
       <Patterns id={id} />
@@ -45,11 +63,9 @@ export function NightStripDrawing({ id, layout, words }: StripPartProps & { id: 
       ))}
       <AirLine layout={layout} words={words} />
       <Floor layout={layout} words={words} />
-      <Passes layout={layout} words={words} />
-      <Now layout={layout} word={words.now} />
-    </svg>
+    </>
   )
-}
+})
 
 function Bar({ bar, barred }: { bar: StripBar; barred: string }) {
   const { x, y, width, height, verdict } = bar

@@ -195,7 +195,10 @@ function marksOf(hour: StripHour, middle: number): StripLayout['marks'] {
   return marks
 }
 
-function bracketsOf(input: StripInput): StripLayout['brackets'] {
+/** Where the passes stand; all that moving one changes. */
+export function bracketsOf(
+  input: Pick<StripInput, 'frame' | 'startsAt' | 'endsAt' | 'passes'>,
+): StripLayout['brackets'] {
   return input.passes
     .filter((pass) => pass.startsAt < input.endsAt && pass.setBy > input.startsAt)
     .map(({ number, startsAt, setBy, isPoured }) => {

@@ -40,11 +40,11 @@ export function Floor({ layout, words }: StripPartProps) {
 }
 
 /** From pour to set; a poured pass is a wedge at its pour. */
-export function Passes({ layout, words }: StripPartProps) {
+export function Passes({ layout, words, brackets }: StripPartProps & { brackets: StripLayout['brackets'] }) {
   const top = layout.frame.plotTop - 11
   return (
     <g>
-      {layout.brackets.map(({ number, x, width, isPoured }) => (
+      {brackets.map(({ number, x, width, isPoured }) => (
         <g key={number}>
           {isPoured ? (
             <path d={`M${x - 5},${top} h10 l-5,9 z`} className="fill-ink" />

@@ -1,8 +1,8 @@
 // The night strip of one rink: drawing, hours to open, legend, and the same numbers as a table.
 'use client'
-import { memo, useMemo, useState } from 'react'
+import { memo, useCallback, useMemo, useState } from 'react'
 import { useHydrated } from '../hooks/use-hydrated'
-import { layOutNightStrip } from '../charts/night-strip-layout'
+import { bracketsOf, layOutNightStrip } from '../charts/night-strip-layout'
 import { NightStripDrawing } from '../charts/night-strip-drawing'
 import { StripHours } from '../charts/strip-hours'
 import { hourNames } from './hour-names'
@@ -10,11 +10,12 @@ import { HourPanel } from './hour-panel'
 import { NightLegend } from './night-legend'
 import { NightTable } from './night-table'
 import { readerOf } from './reader'
-import { hoursOfNight, stripHours, stripInput, type StripSize, type StripSource } from './strip-input'
+import { hoursOfNight, stripHours, stripInput, stripPasses, type StripSize, type StripSource } from './strip-input'
 import { stripWords } from './strip-words'
 
 const Legend = memo(NightLegend)
 const Table = memo(NightTable)
+const Hours = memo(StripHours)
 
 const SHOWN: Record<StripSize, string> = {
   wide: 'relative hidden min-[720px]:block print:block',
@@ -26,27 +27,33 @@ export function NightStrip({ source, now }: { source: StripSource; now: number }
   const [selected, setSelected] = useState<number | null>(null)
   const isHydrated = useHydrated()
   const { night, rink, viewer } = source
-  const { hours: scored, passes } = source.outlook
+  const { hours: scored } = source.outlook
   // Hours stay as they are while passes are moved: only the figures are laid out again then.
   const { reader, hours, names, drawn } = useMemo(
     () => readHours({ night, rink, viewer, outlook: { hours: scored, passes: [] } }, now),
     [night, rink, viewer, scored, now],
   )
   const figures = useMemo(
-    () => layOut({ night, rink, viewer, outlook: { hours: scored, passes } }, { reader, hours, drawn }, now),
-    [night, rink, viewer, scored, passes, reader, hours, drawn, now],
+    () => layOut({ night, rink, viewer, outlook: { hours: scored, passes: [] } }, { reader, hours, drawn }, now),
+    [night, rink, viewer, scored, reader, hours, drawn, now],
   )
+  const nameOf = useCallback((index: number) => names[index] ?? '', [names])
   const present = drawn.findIndex((hour) => hour.startsAt + 3_600_000 > now)
   return (
     <figure className="-mx-5 border-y border-rule bg-sheet pt-3 lg:mx-0 lg:border-x print:mx-0 print:border-x">
-      {figures.map(({ size, layout, words }) => (
+      {figures.map(({ size, input, layout, words }) => (
         <div key={size} className={SHOWN[size]}>
-          <NightStripDrawing id={`strip-${size}`} layout={layout} words={words} />
+          <NightStripDrawing
+            id={`strip-${size}`}
+            layout={layout}
+            words={words}
+            brackets={bracketsOf({ ...input, passes: stripPasses(source) })}
+          />
           {isHydrated ? (
-            <StripHours
+            <Hours
               layout={layout}
               label="Hours of the night"
-              nameOf={(index) => names[index] ?? ''}
+              nameOf={nameOf}
               selected={selected}
               start={Math.max(present, 0)}
               onSelect={setSelected}
@@ -80,7 +87,7 @@ function readHours(source: StripSource, now: number) {
 function layOut(source: StripSource, { reader, hours, drawn }: Omit<ReadHours, 'names'>, now: number) {
   return (['wide', 'narrow'] as const).map((size) => {
     const input = stripInput(source, drawn, now, size)
-    return { size, layout: layOutNightStrip(input), words: stripWords(input, hours, reader) }
+    return { size, input, layout: layOutNightStrip(input), words: stripWords(input, hours, reader) }
   })
 }
 

@@ -2,7 +2,7 @@
 import { addDays, instantOfLocal } from '@/lib/advice/zoned-time'
 import type { TonightHour, TonightView } from '@/lib/schemas/tonight-view'
 import { celsiusToFahrenheit, mmToInches, type Units } from '@/lib/units'
-import type { StripFrame, StripHour, StripInput } from '../charts/night-strip-layout'
+import type { StripFrame, StripHour, StripInput, StripPass } from '../charts/night-strip-layout'
 
 export type StripSize = 'wide' | 'narrow'
 
@@ -77,19 +77,23 @@ export function spanOf(
   }
 }
 
+export function stripPasses({ night, outlook }: Pick<StripSource, 'night' | 'outlook'>): StripPass[] {
+  return outlook.passes.map(({ number, startsAt, setBy, poured }) => ({
+    number,
+    startsAt: Date.parse(startsAt),
+    // A pass that does not set is drawn to the end of the night.
+    setBy: Date.parse(setBy ?? night.endsAt),
+    isPoured: poured !== null,
+  }))
+}
+
 export function stripInput(source: StripSource, hours: StripHour[], now: number, size: StripSize): StripInput {
-  const { night, outlook, viewer } = source
+  const { night, viewer } = source
   return {
     frame: FRAMES[size],
     ...spanOf(source, size),
     hours,
-    passes: outlook.passes.map(({ number, startsAt, setBy, poured }) => ({
-      number,
-      startsAt: Date.parse(startsAt),
-      // A pass that does not set is drawn to the end of the night.
-      setBy: Date.parse(setBy ?? night.endsAt),
-      isPoured: poured !== null,
-    })),
+    passes: stripPasses(source),
     sunsetAt: night.sunsetAt === null ? null : Date.parse(night.sunsetAt),
     sunriseAt: night.sunriseAt === null ? null : Date.parse(night.sunriseAt),
     now,

@@ -19,6 +19,8 @@ import type { TonightPass, TonightView } from '@/lib/schemas/tonight-view'
 import { daysAhead } from './days-ahead'
 import { judgeOwnPasses } from './own-passes'
 
+const MORNING_MILLIS = 3 * 3_600_000
+
 /** @throws NotFoundError when the viewer is no member of the rink. */
 export async function getTonight(context: ServiceContext, rinkId: string): Promise<TonightView> {
   const access = await requireRink(context, rinkId, 'view')
@@ -88,7 +90,8 @@ async function outlookOf(
   const { startsAt, endsAt } = nightBounds(nightDate, timeZone)
   const [hours, floods, own] = await Promise.all([
     listScoredHours(db, outlook.id),
-    listFloodsSince(db, access, startsAt),
+    // "Tonight" turns at 9 am, three hours before its night begins.
+    listFloodsSince(db, access, new Date(startsAt.getTime() - MORNING_MILLIS)),
     judgeOwnPasses({ db, now }, access, rink, nightDate),
   ])
   const judgement = { modelVersion: outlook.modelVersion, hours, ...outlook.advice }

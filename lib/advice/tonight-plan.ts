@@ -56,36 +56,40 @@ export function planTonight(
 }
 
 /**
- * Plans, and tells when each pass is set on the very sheet that the passes before it leave. Where that is later than the
- * slots had it, the rest of the night is planned anew from then on.
+ * Plans, and tells when each pass is set on the very sheet that the passes before it leave. Where a pass would start before
+ * the one before it is set, or is no longer good on that sheet, the night is planned anew from a later quarter hour on.
  */
 function plannedOn(night: NightRun, slots: readonly PlanSlot[], maxPasses: number): PlannedStart[] {
-  let starts = planPasses(slots, maxPasses)
-  for (let kept = 1; kept <= maxPasses; kept += 1) {
-    starts = truly(night, starts)
-    const early = starts.findIndex(({ startMillis }, index) => startMillis < (starts[index - 1]?.setMillis ?? 0))
-    if (early < 0) return starts
-    const free = (starts[early - 1] as PlannedStart).setMillis
-    const later = slots.filter(({ startMillis }) => startMillis >= free).map((slot) => ({ ...slot, first: slot.later }))
-    starts = [...starts.slice(0, early), ...planPasses(later, maxPasses - early)]
+  let starts = truly(night, planPasses(slots, maxPasses))
+  // Each round moves a start later or drops it, so that there are no more rounds than quarter hours.
+  for (let round = 0; round < slots.length; round += 1) {
+    const bad = starts.findIndex(({ startMillis, isAdvisable }, index) => {
+      return !isAdvisable || startMillis < (starts[index - 1]?.setMillis ?? 0)
+    })
+    if (bad < 0) return starts
+    const { startMillis } = starts[bad] as TrueStart
+    const free = Math.max(startMillis + STEP_MILLIS, starts[bad - 1]?.setMillis ?? 0)
+    const later = slots.filter((slot) => slot.startMillis >= free).map((slot) => ({ ...slot, first: slot.later }))
+    starts = truly(night, [...starts.slice(0, bad), ...planPasses(later, maxPasses - bad)])
   }
-  return truly(night, starts)
+  return starts.filter(({ isAdvisable }) => isAdvisable)
 }
 
-/** Set times as the passes leave the sheet to one another; a pass that is no longer good on it is left out. */
-function truly(night: NightRun, starts: readonly PlannedStart[]): PlannedStart[] {
+interface TrueStart extends PlannedStart {
+  isAdvisable: boolean
+}
+
+/** Set times as the passes leave the sheet to one another. */
+function truly(night: NightRun, starts: readonly PlannedStart[]): TrueStart[] {
   const { layer } = night.setting
   const judged = judgePasses(
     night,
     starts.map(({ startMillis }) => ({ startsAt: toIso(startMillis), ...layer })),
   )
-  const spoiled = judged.findIndex((pass) => !pass?.isAdvisable)
-  if (spoiled >= 0)
-    return truly(
-      night,
-      starts.filter((_, index) => index !== spoiled),
-    )
-  return starts.map((start, index) => ({ ...start, setMillis: Date.parse(judged[index]?.setBy ?? '') }))
+  return starts.map((start, index) => {
+    const { setBy, isAdvisable } = judged[index] ?? { setBy: null, isAdvisable: false }
+    return { ...start, isAdvisable, setMillis: setBy ? Date.parse(setBy) : start.setMillis }
+  })
 }
 
 function slotsOfHour(

@@ -38,8 +38,10 @@ export function TestButton({ deviceId, to }: { deviceId?: string; to: string }) 
   const text = fault || (messageId ? fateText(data ?? { state: 'promised', error: null }, deviceId !== undefined) : '')
   return (
     <div>
-      <Button onClick={send} aria-label={`Send a test to ${to}`}>
-        Send me a test
+      <Button onClick={send}>
+        <span>
+          Send me a test<span className="sr-only"> to {to}</span>
+        </span>
       </Button>
       <p role="status" className="mt-1 text-note text-graphite empty:hidden">
         {text}

@@ -5,7 +5,7 @@ import type { ButtonHTMLAttributes, ReactNode } from 'react'
 type Look = 'main' | 'plain' | 'quiet'
 
 const SHAPE =
-  'inline-flex min-h-touch items-center justify-center gap-2 rounded px-[18px] font-medium disabled:cursor-not-allowed disabled:opacity-60'
+  'inline-flex min-h-touch shrink-0 items-center justify-center gap-2 rounded px-[18px] font-medium disabled:cursor-not-allowed disabled:opacity-60'
 const LOOKS: Record<Look, string> = {
   main: 'border-[1.5px] border-ink bg-ink text-paper',
   plain: 'border-[1.5px] border-ink bg-transparent text-ink',

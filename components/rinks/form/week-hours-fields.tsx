@@ -59,11 +59,7 @@ function HoursRow({ form, row }: { form: RinkForm; row: number }) {
           <DayTick key={day} day={DAY_NAMES[day - 1] ?? ''} {...form.tick(hoursField.day(row, day))} />
         ))}
       </div>
-      {isHydrated && isUsed(form, row) ? (
-        <Button look="quiet" onClick={clear} className="px-0">
-          Leave these out
-        </Button>
-      ) : null}
+      {isHydrated && isUsed(form, row) ? <Button onClick={clear}>Leave these out</Button> : null}
     </fieldset>
   )
 }

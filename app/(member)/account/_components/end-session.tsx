@@ -5,12 +5,7 @@ import { endSessionAction } from '../actions'
 
 export function EndSession({ handle, device }: { handle: string; device: string }) {
   return (
-    <ActionForm
-      action={endSessionAction}
-      submit="Sign out"
-      submitLabel={`Sign out ${device || 'that browser'}`}
-      look="plain"
-    >
+    <ActionForm action={endSessionAction} submit="End" submitLabel={`End ${device || 'that browser'}`} look="plain">
       {() => <input type="hidden" name="handle" value={handle} />}
     </ActionForm>
   )

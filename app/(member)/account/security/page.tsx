@@ -37,7 +37,7 @@ export default async function SecurityPage() {
         <ul className="mb-5 list-none border-t border-rule p-0">
           {sessions.map(({ handle, device, createdAt, lastSeenAt }) => (
             <li key={handle} className="flex items-center justify-between gap-4 border-b border-rule py-2">
-              <p>
+              <p className="min-w-0">
                 {device || 'A browser that does not say which'}
                 {handle === present ? <span className="text-graphite">, this one</span> : null}
                 <span className="block text-note text-graphite">

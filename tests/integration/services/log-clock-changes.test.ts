@@ -1,6 +1,6 @@
 // Nights in which the clocks change, 1 November 2026 and 14 March 2027 at Toronto: right hours, each counted once.
 import { afterAll, beforeAll, beforeEach, expect, test } from 'vitest'
-import { InvalidInputError } from '@/lib/errors'
+import type { InvalidInputError } from '@/lib/errors'
 import { changeEntry, writeEntry } from '@/lib/services/log'
 import { getEntry, getLog } from '@/lib/services/log-book'
 import { entryTime } from '@/lib/words/log'

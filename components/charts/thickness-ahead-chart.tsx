@@ -26,19 +26,26 @@ interface Props {
 }
 
 const TEXT = { fontSize: 12, fill: 'var(--graphite)' }
-/** A tick where a day begins: every eighth of the three-hour steps. */
+/** A tick for each day: every eighth of the three-hour steps. */
 const DAY_STEPS = 8
+/** Distances of the lines, in the reader's unit: the first that needs no more than five. */
+const NICE = [0.5, 1, 2, 2.5, 5, 10, 20, 50]
 
 export default function ThicknessAheadChart({ points, carries, unit }: Props) {
-  const dayOf = new Map(points.map(({ when, day }) => [when, day]))
+  const rows = points.map((point, step) => ({ ...point, step }))
+  const most = Math.max(carries * 1.1, ...points.map(({ spread }) => spread[1]))
+  const between = NICE.find((step) => most / step <= 5) ?? most
   return (
     <ResponsiveContainer width="100%" height="100%">
-      <ComposedChart data={points} margin={{ top: 12, right: 8, bottom: 0, left: 0 }} accessibilityLayer={false}>
+      <ComposedChart data={rows} margin={{ top: 12, right: 8, bottom: 0, left: 0 }} accessibilityLayer={false}>
         <CartesianGrid vertical={false} stroke="var(--rule)" />
         <XAxis
-          dataKey="when"
-          ticks={points.filter((_, index) => index % DAY_STEPS === 0).map(({ when }) => when)}
-          tickFormatter={(when: string) => dayOf.get(when) ?? ''}
+          dataKey="step"
+          type="number"
+          domain={[0, Math.max(1, points.length - 1)]}
+          ticks={rows.filter(({ step }) => step % DAY_STEPS === 0).map(({ step }) => step)}
+          interval="equidistantPreserveStart"
+          tickFormatter={(step: number) => points[step]?.day ?? ''}
           tick={TEXT}
           tickLine={false}
           axisLine={{ stroke: 'var(--graphite)' }}
@@ -48,9 +55,11 @@ export default function ThicknessAheadChart({ points, carries, unit }: Props) {
           tick={TEXT}
           tickLine={false}
           axisLine={false}
-          domain={[0, (most: number) => Math.ceil(Math.max(most, carries * 1.1))]}
+          domain={[0, Math.ceil(most / between) * between]}
+          ticks={Array.from({ length: Math.ceil(most / between) + 1 }, (_, line) => line * between)}
         />
         <Tooltip
+          labelFormatter={(step) => points[Number(step)]?.when ?? ''}
           isAnimationActive={false}
           contentStyle={{
             background: 'var(--sheet)',

@@ -148,9 +148,7 @@ export async function movePhase(
   await trx('rinks').where({ id: access.rinkId }).update({ phase, updated_at: now }).increment('settings_version')
 }
 
-/** Drops the reminders of a rink's fill that have not gone out. */
-export async function dropFillReminders(trx: Db, access: RinkAccess<'writeLog'>, now: Date): Promise<void> {
-  await trx('messages')
-    .where({ rink_id: access.rinkId, kind: 'fill-check', state: 'promised' })
-    .update({ state: 'expired', settled_at: now })
+/** Takes back the reminders of a rink's fill that have not gone out: somebody was there, and others take their place. */
+export async function dropFillReminders(trx: Db, access: RinkAccess<'writeLog'>): Promise<void> {
+  await trx('messages').where({ rink_id: access.rinkId, kind: 'fill-check', state: 'promised' }).delete()
 }

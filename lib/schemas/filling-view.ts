@@ -28,5 +28,14 @@ export interface OpenFillView {
   lowCorner: number
   sessions: { startedAt: string; stoppedAt: string | null; litres: number }[]
   /** Newest first. */
-  checks: { at: string; by: string | null; lowCornerDepthMm: number | null; note: string }[]
+  checks: FillLook[]
+}
+
+export interface FillLook {
+  at: string
+  by: string | null
+  lowCornerDepthMm: number | null
+  /** What the flow should have made it by then. */
+  reckonedDepthMm: number
+  note: string
 }

@@ -4,6 +4,7 @@ import type { RinkForJudging } from '@/db/queries/rinks'
 import { litresPouredBy, type FillProgressInput, type HoseSession } from '@/lib/advice/fill-progress'
 import type { LevelReading } from '@/lib/advice/leak-warning'
 import { cornerDepthsM, floorOf } from '@/lib/physics/floor'
+import { levelOf } from '@/lib/physics/stage'
 
 export type RinkSize = Pick<RinkForJudging, 'lengthM' | 'widthM' | 'floor'>
 
@@ -31,11 +32,17 @@ export function lowCornerOf({ lengthM, widthM, floor }: RinkSize): 0 | 1 | 2 | 3
   return depths.indexOf(Math.max(...depths)) as 0 | 1 | 2 | 3
 }
 
+/** Water over the lowest corner once so many litres stand on the floor. [mm] */
+export function lowCornerDepthMm({ lengthM, widthM, floor }: RinkSize, litres: number): number {
+  const ground = floorOf(lengthM, widthM, floor)
+  return Math.max(0, Math.max(...cornerDepthsM(ground)) - levelOf(ground, litres / 1000)) * 1000
+}
+
 /** Looks with a depth are readings of the level; the others only show that somebody was there. */
 export function levelReadings(rink: RinkSize, checks: readonly FillCheck[]): LevelReading[] {
   const corner = lowCornerOf(rink)
-  return checks.flatMap(({ checkedAt, lowCornerDepthMm }) =>
-    lowCornerDepthMm === null ? [] : [{ at: checkedAt.toISOString(), corner, depthMm: lowCornerDepthMm }],
+  return checks.flatMap(({ checkedAt, lowCornerDepthMm: depthMm }) =>
+    depthMm === null ? [] : [{ at: checkedAt.toISOString(), corner, depthMm }],
   )
 }
 

@@ -36,7 +36,7 @@ export async function setFillReminders(
   access: RinkAccess<'writeLog'>,
   { rink, fill, now, viewer }: { rink: RinkForJudging; fill: Fill } & Pick<ServiceContext, 'now' | 'viewer'>,
 ): Promise<void> {
-  await dropFillReminders(trx, access, now)
+  await dropFillReminders(trx, access)
   const sessions = await listFillSessions(trx, fill.id)
   const running = sessions.find(({ stoppedAt }) => stoppedAt === null)
   if (!running) return

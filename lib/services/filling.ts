@@ -14,7 +14,7 @@ import type { ServiceContext } from '@/lib/context'
 import { NotFoundError } from '@/lib/errors'
 import type { FillingView, OpenFillView } from '@/lib/schemas/filling-view'
 import { rinkIdSchema } from '@/lib/schemas/rinks'
-import { litresBy, lowCornerOf, progressInput, targetLitres } from './fill-facts'
+import { litresBy, lowCornerDepthMm as reckonedDepthMm, lowCornerOf, progressInput, targetLitres } from './fill-facts'
 
 /** @throws NotFoundError for strangers. */
 export async function getFilling(context: ServiceContext, rinkId: string): Promise<FillingView> {
@@ -67,7 +67,13 @@ async function openFillView(
       litres: litresBy([session], now),
     })),
     checks: checks
-      .map(({ checkedAt, by, lowCornerDepthMm, note }) => ({ at: checkedAt.toISOString(), by, lowCornerDepthMm, note }))
+      .map(({ checkedAt, by, lowCornerDepthMm, note }) => ({
+        at: checkedAt.toISOString(),
+        by,
+        lowCornerDepthMm,
+        reckonedDepthMm: reckonedDepthMm(rink, litresBy(sessions, checkedAt)),
+        note,
+      }))
       .reverse(),
   }
 }

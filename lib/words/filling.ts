@@ -57,7 +57,10 @@ export function spreadText(
   now: Date,
   words: WordOptions,
 ): string {
-  if (!spread.p50) return 'not within the forecast'
+  if (!spread.p50) {
+    if (!spread.p10) return 'not within the forecast'
+    return `not within the forecast in most runs; ${dayPartText(spread.p10, now, words)} at the earliest`
+  }
   const middle = dayPartText(spread.p50, now, words)
   const early = spread.p10 ? dayPartText(spread.p10, now, words) : middle
   if (!spread.p90) return `${middle}, or later than the forecast reaches`

@@ -1,7 +1,8 @@
 // Water at each corner by the flow of the hose, beside what was last read at the lowest.
 import { CORNER_NAMES } from '@/components/rinks/corner-names'
 import { Facts } from '@/components/ui/facts'
-import type { OpenFillView } from '@/lib/schemas/filling-view'
+import { FILLING } from '@/lib/advice/thresholds'
+import type { FillLook, OpenFillView } from '@/lib/schemas/filling-view'
 import { depthText } from '@/lib/words/build-quantities'
 import type { WordOptions } from '@/lib/words/options'
 import { iceText } from '@/lib/words/quantities'
@@ -23,9 +24,19 @@ export function Corners({ fill, reader }: { fill: OpenFillView; reader: WordOpti
       <p className="mt-2 text-small text-graphite">
         Reckoned from the flow and the floor.{' '}
         {read
-          ? `Last read at the lowest corner: ${iceText(read.lowCornerDepthMm ?? 0, reader)} at ${clockText(read.at, reader)}.`
+          ? readText(read, reader)
           : 'Nobody has read the level yet: a stick at the lowest corner tells of a leak early.'}
       </p>
     </section>
   )
+}
+
+/** Beside what was read, what the flow should have made it; where they differ, what to do. */
+function readText({ at, lowCornerDepthMm, reckonedDepthMm }: FillLook, reader: WordOptions): string {
+  const depthMm = lowCornerDepthMm ?? 0
+  const words = `Last read at the lowest corner: ${iceText(depthMm, reader)} at ${clockText(at, reader)}`
+  const toleranceMm = FILLING.readingToleranceMm + FILLING.flowTolerance * reckonedDepthMm
+  if (Math.abs(depthMm - reckonedDepthMm) <= toleranceMm) return `${words}, as the flow has it.`
+  const advice = depthMm < reckonedDepthMm ? 'Look for a leak, or measure the flow again.' : 'Measure the flow again.'
+  return `${words}, where the flow would make it ${iceText(reckonedDepthMm, reader)}. ${advice}`
 }

@@ -30,7 +30,7 @@ export function OpenFill({ view, fill }: { view: FillingView; fill: OpenFillView
       ))}
       <div className="gap-x-14 lg:grid lg:grid-cols-2">
         <div>
-          {check ? <p className="mt-6 max-w-line font-medium">{check}</p> : null}
+          {check ? <p className="mt-8 max-w-line font-medium">{check}</p> : null}
           {mayWrite ? (
             <>
               <HoseForm {...form} isRunning={progress.isRunning} flowLPerMin={fill.flowLPerMin} />

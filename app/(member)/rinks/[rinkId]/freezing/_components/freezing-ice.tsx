@@ -44,11 +44,7 @@ export function FreezingIce({ view, outlook, entryKey }: Props) {
             {view.mayManage && view.isDrilledThick ? <OpenRink rinkId={rink.id} /> : null}
           </div>
         </div>
-        <StandingCautions
-          codes={['thickness_is_estimate', 'land_only', 'not_alone']}
-          reader={reader}
-          heading="Keep in mind"
-        />
+        <StandingCautions codes={['thickness_is_estimate', 'land_only']} reader={reader} heading="Keep in mind" />
       </div>
       <KeepOffSign view={view} outlook={outlook} />
     </>

@@ -55,7 +55,7 @@ export function PlanBoard({ rinkId, initial, kept, reader, mayManage, years }: P
         .
       </p>
       <SectionFigure sums={sums} reader={reader} />
-      <div className="gap-x-14 lg:grid lg:grid-cols-[1.25fr_1fr] print:block">
+      <div className="gap-x-14 lg:grid lg:grid-cols-[1.25fr_1fr] lg:grid-rows-[auto_1fr] print:block">
         <form method="get" className="mt-8 print:hidden" noValidate onSubmit={(event) => event.preventDefault()}>
           <input type="hidden" name="rinkId" value={rinkId} />
           <input type="hidden" name="units" value={unitsCode(reader.units)} />
@@ -87,7 +87,7 @@ export function PlanBoard({ rinkId, initial, kept, reader, mayManage, years }: P
             </p>
           ) : null}
         </form>
-        <section className="mt-8 print:mt-3">
+        <section className="mt-8 lg:row-span-2 print:mt-3">
           <h2 className="mb-2 font-semibold">What it takes</h2>
           {form.isSound ? null : (
             <Notice tone="caution" live>
@@ -96,8 +96,8 @@ export function PlanBoard({ rinkId, initial, kept, reader, mayManage, years }: P
           )}
           <SumList items={sumItems(sums, reader)} />
         </section>
+        <Wetted sums={sums} reader={reader} />
       </div>
-      <Wetted sums={sums} reader={reader} />
       <PlanCautions cautions={sums.cautions} reader={reader} />
     </>
   )

@@ -9,10 +9,12 @@ export function SumList({ items }: { items: readonly SumItem[] }) {
           <dt>{label}</dt>
           <dd className="text-right text-lead font-semibold print:text-body">{figure}</dd>
           <dd className="col-span-2 text-note text-graphite">
-            {detail}
-            <details className="print:hidden">
-              <summary className="inline-flex min-h-touch cursor-pointer items-center text-small underline lg:min-h-8">
-                how<span className="sr-only"> “{label}” is reckoned</span>
+            <details>
+              <summary className="flex min-h-touch cursor-pointer items-center justify-between gap-4 lg:min-h-8 print:min-h-0">
+                <span>{detail}</span>
+                <span className="shrink-0 text-small underline print:hidden">
+                  how<span className="sr-only"> “{label}” is reckoned</span>
+                </span>
               </summary>
               <p className="text-small text-ink">{how.formula}</p>
               <p className="mt-1 text-small text-ink">{how.worked}</p>

@@ -1,0 +1,83 @@
+// A freezing rink: reckoned from open water, corrected by a drilled hole, opened by its keeper alone.
+import { afterAll, beforeAll, beforeEach, expect, test } from 'vitest'
+import { insertForecast } from '@/db/queries/forecasts'
+import { ConflictError, ForbiddenError, NotFoundError } from '@/lib/errors'
+import { startFillSchema } from '@/lib/schemas/fills'
+import { getFreezing, openForSkating } from '@/lib/services/freezing'
+import { finishFill, startFill } from '@/lib/services/fills'
+import { writeEntry } from '@/lib/services/log'
+import { steadyHours } from '@/tests/support/advice-weather'
+import { createCast, type Cast } from '@/tests/support/cast'
+import { typedEntry } from '@/tests/support/log-form'
+import { createTestDatabase, type TestDatabase } from '@/tests/support/test-database'
+
+// The steady hours begin on Tuesday, 12 January 2027, at 17:00 UTC.
+const FILLED = new Date('2027-01-12T18:00:00Z')
+const later = (hours: number) => new Date(FILLED.getTime() + hours * 3_600_000)
+
+let database: TestDatabase
+let cast: Cast
+
+beforeAll(async () => {
+  database = await createTestDatabase()
+})
+afterAll(() => database.drop())
+beforeEach(async () => {
+  cast = await createCast(database.db, later(-30), { phase: 'waiting', iceThickness: '' })
+  await insertForecast(database.db, {
+    cellId: cast.cellId,
+    slotAt: later(-1),
+    provider: 'test',
+    issuedAt: null,
+    fetchedAt: later(-1),
+    expiresAt: later(5),
+    hours: steadyHours(10 * 24, { airTemperatureC: -10 }),
+    members: null,
+    attribution: { text: 'Test', url: 'https://weather.example', licence: 'none' },
+  })
+  await startFill(cast.keeper.at(later(-7)), startFillSchema.parse({ rinkId: cast.rinkId, units: 'metric' }))
+  await finishFill(cast.keeper.at(FILLED), { rinkId: cast.rinkId })
+})
+
+const drill = (thickness: string, at: Date) =>
+  writeEntry(cast.crew.at(at), typedEntry(cast.rinkId, { kind: 'reading', thickness }))
+const freezing = (at: Date, actor = cast.keeper) => getFreezing(actor.at(at), cast.rinkId)
+const open = (at: Date, actor = cast.keeper) => openForSkating(actor.at(at), { rinkId: cast.rinkId })
+
+test('ice grows from open water, everybody of the rink sees it, a stranger nothing', async () => {
+  const view = await freezing(later(24), cast.skater)
+  const { outlook } = view
+  expect(view).toMatchObject({ mayWrite: false, mayManage: false, sinceAt: FILLED.toISOString() })
+  // Stefan's law at -10 °C bounds it from above: √(2 · 2.2 · 10 · 86,400 / (917 · 333,500)) m = 11.1 cm without any resistance.
+  expect(outlook?.now.thicknessMm).toBeGreaterThan(20)
+  expect(outlook?.now.thicknessMm).toBeLessThan(111)
+  expect(outlook?.carriesSkaterAt.p50).not.toBeNull()
+  await expect(freezing(later(24), cast.stranger)).rejects.toThrow(NotFoundError)
+})
+
+test('a drilled hole corrects the estimate', async () => {
+  const before = (await freezing(later(24))).outlook?.now.thicknessMm ?? 0
+  await drill('2', later(24))
+  const view = await freezing(later(24))
+  expect(before).toBeGreaterThan(25)
+  expect(view.outlook?.now.thicknessMm).toBeCloseTo(20, 0)
+  expect(view.reading).toMatchObject({ thicknessMm: 20, by: 'Crew' })
+  expect(view.isDrilledThick).toBe(false)
+})
+
+test('the keeper opens it once the hole is thick enough; crew does not, and a second time it is open already', async () => {
+  await drill('6', later(48))
+  await expect(open(later(48))).rejects.toThrow(ConflictError)
+  await drill('10', later(72))
+  expect((await freezing(later(72))).isDrilledThick).toBe(true)
+  await expect(open(later(72), cast.crew)).rejects.toThrow(ForbiddenError)
+  await expect(open(later(72), cast.stranger)).rejects.toThrow(NotFoundError)
+  const results = await Promise.allSettled([open(later(72)), open(later(72))])
+  expect(results.map(({ status }) => status).sort()).toEqual(['fulfilled', 'rejected'])
+  expect((await freezing(later(73))).rink.phase).toBe('skating')
+})
+
+test('a hole drilled before the fill, or long ago, opens nothing', async () => {
+  await drill('10', later(24))
+  await expect(open(later(24 + 73))).rejects.toThrow(ConflictError)
+})

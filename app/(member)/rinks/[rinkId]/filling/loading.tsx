@@ -1,7 +1,7 @@
 // The outline of the Filling page while it is read.
 export default function FillingLoading() {
   return (
-    <div role="status">
+    <div role="status" className="noscript:hidden">
       <span className="sr-only">Reading how the fill stands</span>
       <div aria-hidden="true" className="motion-safe:animate-pulse">
         <div className="h-[68px] max-w-[22ch] bg-rule/40 text-verdict lg:h-[92px] lg:text-verdict-wide" />

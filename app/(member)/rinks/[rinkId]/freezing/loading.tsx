@@ -1,7 +1,7 @@
 // The outline of the Freezing page while it is reckoned.
 export default function FreezingLoading() {
   return (
-    <div role="status">
+    <div role="status" className="noscript:hidden">
       <span className="sr-only">Reckoning the ice</span>
       <div aria-hidden="true" className="motion-safe:animate-pulse">
         <div className="h-[68px] max-w-[22ch] bg-rule/40 text-verdict lg:h-[92px] lg:text-verdict-wide" />

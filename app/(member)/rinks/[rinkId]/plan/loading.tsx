@@ -1,7 +1,7 @@
 // The outline of the building plan while it is read.
 export default function PlanLoading() {
   return (
-    <div role="status">
+    <div role="status" className="noscript:hidden">
       <span className="sr-only">Reading the plan</span>
       <div aria-hidden="true" className="motion-safe:animate-pulse">
         <div className="mb-6 h-[102px] max-w-[22ch] bg-rule/40 text-verdict lg:h-[92px] lg:text-verdict-wide" />

@@ -43,10 +43,10 @@ export function PlanBoard({ rinkId, initial, kept, reader, mayManage, years }: P
   }
   return (
     <>
-      <h1 className="mb-5 max-w-[24ch] text-verdict font-medium tracking-tight lg:text-verdict-wide print:text-lead">
+      <h1 className="mb-5 max-w-[24ch] text-verdict font-medium tracking-tight lg:text-verdict-wide print:mb-1 print:max-w-none print:text-lead">
         {sumsLead(sums, reader)}
       </h1>
-      <p className="mb-3 hidden print:block">
+      <p className="mb-1 hidden text-note print:block">
         {lengthText(sums.ground.how.values.lengthM ?? 0, reader)} ×{' '}
         {lengthText(sums.ground.how.values.widthM ?? 0, reader)}. Corners below the string:{' '}
         {form.values.floorKind === 'level'

@@ -9,7 +9,7 @@ const ALWAYS = ['backflow', 'run_off', 'electric_leads', 'land_only']
 
 export function PlanCautions({ cautions, reader }: { cautions: readonly Caution[]; reader: WordOptions }) {
   return (
-    <section className="mt-8 print:mt-3">
+    <section className="mt-8 print:mt-2 print:[&_p]:text-small">
       <h2 className="mb-2 font-semibold">Mind before you build</h2>
       <Notice tone="caution">
         {cautions.map((caution) => (

@@ -33,7 +33,7 @@ export function SectionFigure({ sums, reader }: { sums: BuildSums; reader: WordO
       : `fall ${depthText(ground.fallM, reader)} over ${lengthText(lengthM, reader)}`,
   }
   return (
-    <figure className="-mx-5 border-y border-rule bg-sheet px-5 py-4 lg:mx-0 lg:border-x print:mx-0 print:border-0 print:p-0">
+    <figure className="-mx-5 border-y border-rule bg-sheet px-5 py-4 lg:mx-0 lg:border-x print:mx-auto print:w-[72%] print:border-0 print:p-0">
       <CrossSection sums={sums} labels={labels} />
       <figcaption className="pt-2 text-small text-graphite">
         {isLevel ? 'Cut along the rink' : 'Cut from the high to the low corner'}; upright scale{' '}

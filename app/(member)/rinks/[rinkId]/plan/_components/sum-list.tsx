@@ -5,10 +5,13 @@ export function SumList({ items }: { items: readonly SumItem[] }) {
   return (
     <dl className="border-t border-rule print:grid print:grid-cols-2 print:gap-x-8">
       {items.map(({ id, label, figure, detail, how }) => (
-        <div key={id} className="grid grid-cols-[1fr_auto] gap-x-4 border-b border-rule py-[11px] print:py-1">
+        <div
+          key={id}
+          className="grid grid-cols-[1fr_auto] gap-x-4 border-b border-rule py-[11px] print:py-0.5 print:text-note"
+        >
           <dt>{label}</dt>
-          <dd className="text-right text-lead font-semibold print:text-body">{figure}</dd>
-          <dd className="col-span-2 text-note text-graphite">
+          <dd className="text-right text-lead font-semibold print:text-note">{figure}</dd>
+          <dd className="col-span-2 text-note text-graphite print:text-small">
             <details>
               <summary className="flex min-h-touch cursor-pointer items-center justify-between gap-4 lg:min-h-8 print:min-h-0">
                 <span>{detail}</span>

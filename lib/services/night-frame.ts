@@ -1,20 +1,13 @@
 // A night as a screen frames it: noon to noon, with the sun's own times.
 import { nightBounds } from '@/lib/advice/night'
 import { sunUpDownMillis } from '@/lib/physics/sun'
+import type { TonightView } from '@/lib/schemas/tonight-view'
 
-export interface NightFrame {
-  date: string
-  startsAt: string
-  endsAt: string
-  /** Null where the sun does not set or rise within the night. */
-  sunsetAt: string | null
-  sunriseAt: string | null
-}
-
+/** Sunset and sunrise are null where they do not fall within the night. */
 export function nightFrame(
   rink: { latitudeDeg: number; longitudeDeg: number; timeZone: string },
   date: string,
-): NightFrame {
+): TonightView['night'] {
   const { startsAt, endsAt } = nightBounds(date, rink.timeZone)
   const sunAt = (noon: Date) => sunUpDownMillis(noon.getTime(), rink.latitudeDeg, rink.longitudeDeg)
   const within = (millis: number | null) =>

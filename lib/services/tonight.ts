@@ -1,9 +1,7 @@
 // The night sheet: everything the Tonight page shows of one rink and one night.
-import { getTimes } from 'suncalc'
 import { findAlertPreferences } from '@/db/queries/alert-preferences'
 import { findCellTrouble } from '@/db/queries/cell-reads'
-import { listFloodsSince, type PouredPass } from '@/db/queries/floods'
-import { findForecastHead } from '@/db/queries/forecasts'
+import { listFloodsSince } from '@/db/queries/floods'
 import { findMembership, listMembers } from '@/db/queries/members'
 import { findNewestOutlook, listScoredHours, type StoredOutlook } from '@/db/queries/outlooks'
 import { findRinkForJudging, type RinkForJudging } from '@/db/queries/rinks'
@@ -12,12 +10,14 @@ import { requireRink } from '@/lib/access/require-rink'
 import type { RinkAccess } from '@/lib/access/proofs'
 import { nightBounds, tonightDate } from '@/lib/advice/night'
 import { summariseNight } from '@/lib/advice/night-summary'
-import type { PlannedPass } from '@/lib/advice/types'
 import type { ServiceContext } from '@/lib/context'
 import { NotFoundError } from '@/lib/errors'
-import type { TonightPass, TonightView } from '@/lib/schemas/tonight-view'
+import type { TonightView } from '@/lib/schemas/tonight-view'
 import { daysAhead } from './days-ahead'
+import { forecastRead } from './forecast-read'
+import { nightFrame } from './night-frame'
 import { judgeOwnPasses } from './own-passes'
+import { passesOf } from './tonight-passes'
 
 const MORNING_MILLIS = 3 * 3_600_000
 
@@ -57,25 +57,10 @@ export async function getTonight(context: ServiceContext, rinkId: string): Promi
       clock: person.clock,
       mutedThrough: preferences?.mutedThroughDate ?? null,
     },
-    night: nightOf(rink, nightDate),
+    night: nightFrame(rink, nightDate),
     outlook: outlook ? await outlookOf(context, access, rink, outlook, nightDate) : null,
-    forecast: outlook ? await forecastOf(context, outlook) : null,
+    forecast: outlook ? await forecastRead(context, outlook.forecastId) : null,
     lastReadFailed: (await findCellTrouble(db, rink.gridCellId)) !== null,
-  }
-}
-
-function nightOf(rink: RinkForJudging, date: string): TonightView['night'] {
-  const { startsAt, endsAt } = nightBounds(date, rink.timeZone)
-  const iso = (at: Date | null, isWithin: (at: Date) => boolean) => (at && isWithin(at) ? at.toISOString() : null)
-  const evening = getTimes(startsAt, rink.latitudeDeg, rink.longitudeDeg)
-  const morning = getTimes(endsAt, rink.latitudeDeg, rink.longitudeDeg)
-  const isWithin = (at: Date) => at >= startsAt && at <= endsAt
-  return {
-    date,
-    startsAt: startsAt.toISOString(),
-    endsAt: endsAt.toISOString(),
-    sunsetAt: iso(evening.sunset, isWithin),
-    sunriseAt: iso(morning.sunrise, isWithin),
   }
 }
 
@@ -110,79 +95,3 @@ async function outlookOf(
 }
 
 const isoHour = (at: Date) => at.toISOString().replace('.000Z', 'Z')
-
-type Plan = Pick<NonNullable<TonightView['outlook']>, 'passes' | 'ownPlan'>
-
-/** What was poured first, then what is still planned: the keeper's own plan where there is one. */
-function passesOf(
-  rink: RinkForJudging,
-  poured: readonly PouredPass[],
-  own: Awaited<ReturnType<typeof judgeOwnPasses>>,
-  planned: readonly PlannedPass[],
-  judgedAt: Date,
-): Plan {
-  const done = poured.map((flood, index) => pouredView(rink, flood, index))
-  const isPoured = ({ number }: TonightPass) => done.some((pass) => pass.number === number)
-  const open = own ? own.passes : advisedPasses(rink, poured, planned, judgedAt)
-  return { passes: [...done, ...open.filter((pass) => !isPoured(pass))], ownPlan: own && { by: own.by } }
-}
-
-function pouredView({ water }: RinkForJudging, flood: PouredPass, index: number): TonightPass {
-  const at = flood.pouredAt.toISOString()
-  const saidSetByAt = flood.saidSetByAt?.toISOString() ?? null
-  return {
-    number: flood.passNumber ?? index + 1,
-    startsAt: at,
-    setBy: saidSetByAt ?? at,
-    layerMm: flood.layerMm,
-    waterL: flood.waterL,
-    hoseMinutes: 0,
-    temperatureC: flood.waterTemperatureC,
-    flowLPerMin: water.flowLPerMin,
-    warnings: [],
-    limits: [],
-    poured: {
-      at,
-      by: flood.by,
-      entry: { id: flood.id, version: flood.version },
-      saidSetByAt,
-      outcome: flood.outcome,
-      outcomeAt: flood.outcomeAt?.toISOString() ?? null,
-    },
-  }
-}
-
-/** Numbered on from what was poured. A plan made before a pass was poured still holds it. */
-function advisedPasses(
-  { water }: RinkForJudging,
-  poured: readonly PouredPass[],
-  planned: readonly PlannedPass[],
-  judgedAt: Date,
-): TonightPass[] {
-  const known = poured.flatMap(({ passNumber, pouredAt }, index) =>
-    pouredAt <= judgedAt ? [passNumber ?? index + 1] : [],
-  )
-  const last = Math.max(0, ...known)
-  const { temperatureC, flowLPerMin } = water
-  return planned.map((pass, index) => ({
-    ...pass,
-    number: last + index + 1,
-    temperatureC,
-    flowLPerMin,
-    warnings: [],
-    limits: [],
-    poured: null,
-  }))
-}
-
-async function forecastOf({ db, now }: ServiceContext, outlook: StoredOutlook): Promise<TonightView['forecast']> {
-  const forecast = await findForecastHead(db, outlook.forecastId)
-  if (!forecast) return null
-  return {
-    provider: forecast.provider,
-    issuedAt: forecast.issuedAt?.toISOString() ?? null,
-    fetchedAt: forecast.fetchedAt.toISOString(),
-    isStale: now >= forecast.expiresAt,
-    attribution: forecast.attribution,
-  }
-}

@@ -1,6 +1,5 @@
 // The nights ahead of a rink: everything the Week page shows.
 import { findCellTrouble } from '@/db/queries/cell-reads'
-import { findForecastHead } from '@/db/queries/forecasts'
 import { findNewestOutlook, listScoredHours, type StoredOutlook } from '@/db/queries/outlooks'
 import { findRinkForJudging, type RinkForJudging } from '@/db/queries/rinks'
 import { findAccount } from '@/db/queries/users'
@@ -12,6 +11,7 @@ import type { ServiceContext } from '@/lib/context'
 import { NotFoundError } from '@/lib/errors'
 import { rinkIdSchema } from '@/lib/schemas/rinks'
 import type { WeekNight, WeekView } from '@/lib/schemas/week-view'
+import { forecastRead } from './forecast-read'
 import { nightFrame } from './night-frame'
 
 const NIGHTS = 10
@@ -34,7 +34,7 @@ export async function getWeek(context: ServiceContext, rinkId: string, openDate?
     rink: { id: rink.id, name: rink.name, timeZone: rink.timeZone, phase: rink.phase },
     viewer: { units: person.units, clock: person.clock },
     outlook: outlook ? await outlookOf(context, rink, outlook, openDate) : null,
-    forecast: outlook ? await forecastOf(context, outlook) : null,
+    forecast: outlook ? await forecastRead(context, outlook.forecastId) : null,
     lastReadFailed: (await findCellTrouble(db, rink.gridCellId)) !== null,
   }
 }
@@ -81,16 +81,4 @@ function drawnNight(judgement: Judgement, rink: RinkForJudging, night: NightAhea
     freezeRateMmPerH: isKnown ? freezeRateMmPerH : null,
   }))
   return { ...night, sunsetAt, sunriseAt, bars }
-}
-
-async function forecastOf({ db, now }: ServiceContext, outlook: StoredOutlook): Promise<WeekView['forecast']> {
-  const forecast = await findForecastHead(db, outlook.forecastId)
-  if (!forecast) return null
-  return {
-    provider: forecast.provider,
-    issuedAt: forecast.issuedAt?.toISOString() ?? null,
-    fetchedAt: forecast.fetchedAt.toISOString(),
-    isStale: now >= forecast.expiresAt,
-    attribution: forecast.attribution,
-  }
 }

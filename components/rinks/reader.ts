@@ -1,12 +1,17 @@
 // How the reader of a night sheet wants figures, and how old things are.
 import type { TonightView } from '@/lib/schemas/tonight-view'
-import type { WordOptions } from '@/lib/words/options'
+import { wordsFor, type WordOptions } from '@/lib/words/options'
 
 export { dayText, nightLabel, shortDayText } from '@/lib/words/night-label'
 
+interface Reader {
+  viewer: Pick<TonightView['viewer'], 'units' | 'clock'>
+  rink: Pick<TonightView['rink'], 'timeZone'>
+}
+
 /** Units and clock are the person's; times are told in the rink's zone. */
-export function readerOf({ viewer, rink }: Pick<TonightView, 'viewer' | 'rink'>): WordOptions {
-  return { units: viewer.units, clock: viewer.clock, timeZone: rink.timeZone, locale: 'en' }
+export function readerOf({ viewer, rink }: Reader): WordOptions {
+  return wordsFor(viewer, rink.timeZone)
 }
 
 /** How long ago, in the largest unit that fits. */

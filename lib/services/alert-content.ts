@@ -6,7 +6,7 @@ import type { AlertContent } from '@/lib/schemas/alert-content'
 import { cautionText } from '@/lib/words/cautions'
 import { sureSentence, verdictSentence } from '@/lib/words/night'
 import { nightLabel } from '@/lib/words/night-label'
-import type { WordOptions } from '@/lib/words/options'
+import { wordsFor } from '@/lib/words/options'
 import { passLine } from '@/lib/words/pass'
 import { whyList } from '@/lib/words/why'
 
@@ -17,7 +17,7 @@ export function alertContent(
   { rink, summary, person }: { rink: RinkForJudging; summary: NightSummary; person: AlertRecipient },
   now: Date,
 ): AlertContent {
-  const words: WordOptions = { timeZone: rink.timeZone, units: person.units, clock: person.clock, locale: 'en' }
+  const words = wordsFor(person, rink.timeZone)
   return {
     rinkId: rink.id,
     nightDate: summary.nightDate,

@@ -10,7 +10,7 @@ import { seasonOf, seasonOfYear, type Season } from '@/lib/advice/season'
 import type { LearnedYard } from '@/lib/advice/yard/types'
 import type { ServiceContext } from '@/lib/context'
 import { NotFoundError } from '@/lib/errors'
-import type { WordOptions } from '@/lib/words/options'
+import { wordsFor, type WordOptions } from '@/lib/words/options'
 
 export interface KeptView {
   rink: { id: string; name: string; timeZone: string }
@@ -35,7 +35,7 @@ export async function getKeptNights(context: ServiceContext, rinkId: string, yea
   ])
   return {
     rink: { id: rinkId, ...rink },
-    reader: { units: account.units, clock: account.clock, timeZone: rink.timeZone, locale: 'en' },
+    reader: wordsFor(account, rink.timeZone),
     season,
     rates: keptRates(nights),
     nights,

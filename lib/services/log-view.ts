@@ -4,7 +4,7 @@ import { findAccount } from '@/db/queries/users'
 import type { ServiceContext } from '@/lib/context'
 import { NotFoundError } from '@/lib/errors'
 import type { EntryView } from '@/lib/schemas/log-choices'
-import type { WordOptions } from '@/lib/words/options'
+import { wordsFor, type WordOptions } from '@/lib/words/options'
 
 const iso = (at: Date | string | null) => (at === null ? null : new Date(at).toISOString())
 
@@ -34,5 +34,5 @@ export function entryView(entry: LogEntry | Revision['was']): EntryView {
 export async function readerOf({ db, viewer }: ServiceContext, timeZone: string): Promise<WordOptions> {
   const account = await findAccount(db, viewer.userId)
   if (!account) throw new NotFoundError('Account')
-  return { units: account.units, clock: account.clock, timeZone, locale: 'en' }
+  return wordsFor(account, timeZone)
 }

@@ -10,6 +10,7 @@ import type { ServiceContext } from '@/lib/context'
 import { NotFoundError } from '@/lib/errors'
 import { rinkIdSchema } from '@/lib/schemas/rinks'
 import { verdictSentence } from '@/lib/words/night'
+import { wordsFor } from '@/lib/words/options'
 
 export interface MyRink extends RinkOfUser {
   /** Null before the first outlook, or when the newest one is of another night. */
@@ -26,7 +27,7 @@ export async function listMyRinksTonight({ db, now, viewer }: ServiceContext): P
   return rinks.map((rink) => {
     const summary = byRink.get(rink.id)
     if (!summary || !account || summary.nightDate !== tonightDate(now, rink.timeZone)) return { ...rink, tonight: null }
-    const words = { timeZone: rink.timeZone, units: account.units, clock: account.clock, locale: 'en' }
+    const words = wordsFor(account, rink.timeZone)
     const isGood = summary.verdict === 'flood' || summary.verdict === 'fill'
     return { ...rink, tonight: { isGood, sentence: verdictSentence(summary, now, words) } }
   })

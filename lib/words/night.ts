@@ -3,7 +3,7 @@ import type { NightSummary } from '@/lib/advice/night-summary'
 import type { WordOptions } from './options'
 import { capitalised, countText, durationText } from './quantities'
 import { reasonClause } from './reasons'
-import { clockText, dayPartText, doneByText, nightText, spanText } from './times'
+import { dayPartText, doneByText, nightText, spanText } from './times'
 
 /** Layers up to this depth are called thin. [mm] */
 const THIN_MM = 5
@@ -81,9 +81,4 @@ function beforeText(setBy: string, precipitation: NightSummary['precipitation'])
   if (minutes < 90) return `, ${durationText(Math.floor(minutes / 10) * 10)} before ${precipitation.kind}`
   const hours = Math.floor(minutes / 60)
   return `, ${countText(hours)} ${hours === 1 ? 'hour' : 'hours'} before ${precipitation.kind}`
-}
-
-/** One planned pass: "3 mm over the whole sheet" is the screen's; this is when, for messages: "8 pm, set by 9:50 pm". */
-export function passTimes(pass: NightSummary['passes'][number], words: WordOptions): string {
-  return `${clockText(pass.startsAt, words)}, set by ${doneByText(pass.setBy, words)}`
 }

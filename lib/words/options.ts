@@ -10,6 +10,11 @@ export interface WordOptions {
   locale: string
 }
 
+/** As a person wants figures and the clock; times are told in the rink's zone. */
+export function wordsFor({ units, clock }: Pick<WordOptions, 'units' | 'clock'>, timeZone: string): WordOptions {
+  return { units, clock, timeZone, locale: 'en' }
+}
+
 /** What `npm run score` writes. */
 export function plainWords(timeZone: string): WordOptions {
   return { timeZone, units: METRIC, clock: '24', locale: 'en' }

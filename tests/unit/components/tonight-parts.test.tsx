@@ -2,7 +2,7 @@
 import { renderToStaticMarkup } from 'react-dom/server'
 import { describe, expect, test } from 'vitest'
 import { entriesFor, entryOf } from '@/app/(member)/_components/navigation'
-import { DataSource } from '@/app/(member)/rinks/[rinkId]/_components/data-source'
+import { DataSource } from '@/components/rinks/data-source'
 import { passWords, setWords } from '@/app/(member)/rinks/[rinkId]/_components/pass-words'
 import { isAsked } from '@/app/(member)/rinks/[rinkId]/_components/when-asked'
 import { StatusNotices } from '@/app/(member)/rinks/[rinkId]/_components/status-notices'

@@ -2,7 +2,8 @@
 import { readerOf } from '@/components/rinks/reader'
 import type { PouredPassView, TonightPass, TonightView } from '@/lib/schemas/tonight-view'
 import type { WordOptions } from '@/lib/words/options'
-import { durationText, layerText, temperatureText, waterText } from '@/lib/words/quantities'
+import { passLayer } from '@/lib/words/pass'
+import { durationText, temperatureText, waterText } from '@/lib/words/quantities'
 import { clockText, doneByText } from '@/lib/words/times'
 
 /** Water this much warmer than the rink's usual source is worth a word. [°C] */
@@ -14,7 +15,7 @@ export function passWords(pass: TonightPass, view: WordsView): { what: string; d
   const reader = readerOf(view)
   const isHot = pass.temperatureC >= view.rink.water.temperatureC + WARMER_C
   const hot = isHot ? `, water at ${temperatureText(pass.temperatureC, reader)}` : ''
-  const what = `${layerText(pass.layerMm, reader)} over the whole sheet${hot}`
+  const what = `${passLayer(pass, reader)}${hot}`
   const water = waterText(pass.waterL, reader)
   if (pass.poured) return { what, detail: `${water}, poured${pass.poured.by ? ` by ${pass.poured.by}` : ''}` }
   const set = pass.setBy ? `set by ${doneByText(pass.setBy, reader)}` : 'not set within the forecast'

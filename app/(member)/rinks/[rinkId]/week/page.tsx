@@ -1,16 +1,16 @@
 // The nights ahead at a glance; a night's link opens its hours in place. All of it is drawn on the server.
 import type { Metadata } from 'next'
+import { DataSource } from '@/components/rinks/data-source'
+import { readerOf } from '@/components/rinks/reader'
 import { pageContext } from '@/lib/auth/request-context'
 import { orNotFound } from '@/lib/http/or-not-found'
 import { dateSchema } from '@/lib/schemas/local-time'
 import type { WeekView } from '@/lib/schemas/week-view'
 import { getWeek } from '@/lib/services/week'
-import type { WordOptions } from '@/lib/words/options'
 import { FillAhead } from './_components/fill-ahead'
 import { NightList } from './_components/night-list'
 import { WeekHeadline } from './_components/week-headline'
 import { WeekNotices } from './_components/week-notices'
-import { WeekSource } from './_components/week-source'
 import { WithoutNights } from './_components/without-nights'
 
 export const metadata: Metadata = { title: 'The nights ahead' }
@@ -25,7 +25,7 @@ export default async function WeekPage({ params, searchParams }: PageProps<'/rin
 }
 
 function Nights({ view, outlook }: { view: WeekView; outlook: NonNullable<WeekView['outlook']> }) {
-  const reader: WordOptions = { ...view.viewer, timeZone: view.rink.timeZone, locale: 'en' }
+  const reader = readerOf(view)
   const isBeforeFill = view.rink.phase === 'waiting' || view.rink.phase === 'filling'
   return (
     <>
@@ -33,7 +33,8 @@ function Nights({ view, outlook }: { view: WeekView; outlook: NonNullable<WeekVi
       <WeekHeadline view={view} outlook={outlook} reader={reader} />
       {isBeforeFill ? <FillAhead outlook={outlook} reader={reader} /> : null}
       <NightList view={view} outlook={outlook} reader={reader} />
-      <WeekSource view={view} reader={reader} />
+      <DataSource view={view} now={Date.parse(view.readAt)} />
+      <p className="mt-2 text-small text-graphite">Thickness is an estimate: drill and measure before anyone skates.</p>
     </>
   )
 }

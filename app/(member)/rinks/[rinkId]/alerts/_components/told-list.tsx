@@ -3,13 +3,14 @@ import { fateText, kindText } from '@/components/alerts/words'
 import { dayText } from '@/components/rinks/reader'
 import { localDateOf } from '@/lib/advice/zoned-time'
 import type { AlertSettings } from '@/lib/services/alert-preferences'
+import { wordsFor } from '@/lib/words/options'
 import { clockText } from '@/lib/words/times'
 
 export function ToldList({ settings: { told, rink, units, clock } }: { settings: AlertSettings }) {
   if (told.length === 0) {
     return <p className="text-graphite">Nothing yet. The first word comes on the afternoon before a good night.</p>
   }
-  const words = { units, clock, timeZone: rink.timeZone, locale: 'en' }
+  const words = wordsFor({ units, clock }, rink.timeZone)
   return (
     <ul>
       {told.map((message) => {

@@ -1,9 +1,15 @@
 // How old the data are, where they come from, and by which licence they may be shown.
-import { ageText, readerOf } from '@/components/rinks/reader'
+import { ageText, readerOf } from './reader'
 import { clockText } from '@/lib/words/times'
 import type { TonightView } from '@/lib/schemas/tonight-view'
 
-export function DataSource({ view, now }: { view: TonightView; now: number }) {
+type SourceView = Pick<TonightView, 'forecast'> & {
+  rink: Pick<TonightView['rink'], 'timeZone'>
+  viewer: Pick<TonightView['viewer'], 'units' | 'clock'>
+  outlook: { judgedAt: string; modelVersion: string } | null
+}
+
+export function DataSource({ view, now }: { view: SourceView; now: number }) {
   const { forecast, outlook } = view
   if (!forecast || !outlook) return null
   const reader = readerOf(view)

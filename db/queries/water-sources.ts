@@ -29,7 +29,7 @@ function toColumns(water: WaterRow) {
 }
 
 /** The usual one first. */
-export async function listWaterSourcesOf(db: Db, access: RinkAccess): Promise<WaterSource[]> {
+export async function listWaterSources(db: Db, access: RinkAccess): Promise<WaterSource[]> {
   return db('water_sources')
     .where({ rink_id: access.rinkId })
     .orderBy([{ column: 'is_default', order: 'desc' }, 'kind', 'id'])

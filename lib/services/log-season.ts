@@ -1,7 +1,7 @@
 // A season on one page: what was done, what it took, how the ice stood, how the advice held, and what next year needs.
 import { listEntries } from '@/db/queries/log-lists'
 import { findLimits, sumWaterByKind } from '@/db/queries/log-season'
-import type { WaterSource } from '@/db/queries/log-water'
+import type { WaterSource } from '@/db/queries/water-sources'
 import { listNightOutcomes } from '@/db/queries/night-outcomes'
 import { requireRink } from '@/lib/access/require-rink'
 import { keptRates, type KeptRates } from '@/lib/advice/kept-rates'

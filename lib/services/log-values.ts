@@ -1,7 +1,7 @@
 // What an entry says where the person left a field empty: the rink's own layer, area and water.
 import { findHourOfSheet } from '@/db/queries/log-sheets'
 import type { EntryValues } from '@/db/queries/log-entries'
-import { listWaterSources } from '@/db/queries/log-water'
+import { listWaterSources } from '@/db/queries/water-sources'
 import type { RinkForJudging } from '@/db/queries/rinks'
 import type { Db } from '@/db/knex'
 import type { RinkAccess } from '@/lib/access/proofs'

@@ -1,7 +1,7 @@
 // The model of one night, for passes wherever they are put: in a browser, or for passes that were poured or moved.
 import { findNewestForecast } from '@/db/queries/forecasts'
 import { findRinkForJudging, type RinkForJudging } from '@/db/queries/rinks'
-import { listWaterSourcesOf } from '@/db/queries/water-sources'
+import { listWaterSources } from '@/db/queries/water-sources'
 import type { RinkAccess } from '@/lib/access/proofs'
 import { requireRink } from '@/lib/access/require-rink'
 import { tonightDate } from '@/lib/advice/night'
@@ -35,7 +35,7 @@ export async function getMovableNight(context: ServiceContext, rinkId: string): 
   if (!rink) throw new NotFoundError('Rink')
   const model = await readNightModel(context, access, rink, tonightDate(context.now, rink.timeZone))
   if (!model) throw new NotFoundError('Forecast')
-  const sources = await listWaterSourcesOf(context.db, access)
+  const sources = await listWaterSources(context.db, access)
   return { model, waters: watersOf(sources), areaM2: rink.lengthM * rink.widthM }
 }
 

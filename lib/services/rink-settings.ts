@@ -3,7 +3,7 @@ import { findOrCreateGridCell } from '@/db/queries/grid-cells'
 import { enqueuePull, enqueueRefresh } from '@/db/queries/jobs'
 import { changeRink, lockRink, replaceAvailableHours, type RinkChanges } from '@/db/queries/rink-settings'
 import { findRinkForJudging, type RinkForJudging } from '@/db/queries/rinks'
-import { listWaterSourcesOf, type WaterSource } from '@/db/queries/water-sources'
+import { listWaterSources, type WaterSource } from '@/db/queries/water-sources'
 import type { Db } from '@/db/knex'
 import type { RinkAccess } from '@/lib/access/proofs'
 import { requireRink } from '@/lib/access/require-rink'
@@ -29,7 +29,7 @@ export async function getRinkSettings(context: ServiceContext, rinkId: string): 
   const access = await requireRink(context, rinkId, 'manage')
   const rink = await findRinkForJudging(context.db, rinkId)
   if (!rink) throw new NotFoundError('Rink')
-  return { ...rink, sources: await listWaterSourcesOf(context.db, access) }
+  return { ...rink, sources: await listWaterSources(context.db, access) }
 }
 
 type Work = (trx: Db, access: RinkAccess<'manage'>) => Promise<RinkChanges>

@@ -1,5 +1,5 @@
 // A rink's taps: which there are, and which is the usual one.
-import { deleteWater, insertWater, listWaterSourcesOf, makeWaterUsual, updateWater } from '@/db/queries/water-sources'
+import { deleteWater, insertWater, listWaterSources, makeWaterUsual, updateWater } from '@/db/queries/water-sources'
 import type { ServiceContext } from '@/lib/context'
 import { InvalidInputError, NotFoundError } from '@/lib/errors'
 import type { OneWaterInput, SaveWaterInput } from '@/lib/schemas/rink-settings'
@@ -15,7 +15,7 @@ export async function saveWater(context: ServiceContext, input: SaveWaterInput):
       if (!(await updateWater(trx, access, input.sourceId, input.water))) throw new NotFoundError('Source')
       return {}
     }
-    const known = await listWaterSourcesOf(trx, access)
+    const known = await listWaterSources(trx, access)
     if (known.length >= MOST_SOURCES) throw new InvalidInputError(`At most ${MOST_SOURCES} sources: remove one first.`)
     await insertWater(trx, input.rinkId, input.water, known.length === 0)
     return {}
@@ -34,7 +34,7 @@ export async function pourFromWater(context: ServiceContext, { rinkId, sourceId 
 export async function removeWater(context: ServiceContext, { rinkId, sourceId }: OneWaterInput): Promise<void> {
   await changing(context, rinkId, async (trx, access) => {
     if (await deleteWater(trx, access, sourceId)) return {}
-    const known = await listWaterSourcesOf(trx, access)
+    const known = await listWaterSources(trx, access)
     if (!known.some(({ id }) => id === sourceId)) throw new NotFoundError('Source')
     throw new InvalidInputError(
       known.length === 1 ? 'A rink needs water: the last source stays.' : 'Make another source the usual one first.',

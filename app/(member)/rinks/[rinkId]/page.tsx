@@ -3,9 +3,9 @@
 import type { Metadata } from 'next'
 import { headers } from 'next/headers'
 import { cache, Suspense } from 'react'
-import { z } from 'zod'
 import { pageContext } from '@/lib/auth/request-context'
 import { orNotFound } from '@/lib/http/or-not-found'
+import { rinkIdSchema } from '@/lib/schemas/rinks'
 import { getTonight } from '@/lib/services/tonight'
 import { TonightSheet } from './_components/tonight-sheet'
 import { TonightSkeleton } from './_components/tonight-skeleton'
@@ -14,7 +14,7 @@ import { TonightSkeleton } from './_components/tonight-skeleton'
 const readTonight = cache(async (rinkId: string) => orNotFound(readOf(rinkId)))
 
 async function readOf(rinkId: string) {
-  return getTonight(await pageContext(), z.uuid().parse(rinkId))
+  return getTonight(await pageContext(), rinkIdSchema.parse(rinkId))
 }
 
 export async function generateMetadata({ params }: PageProps<'/rinks/[rinkId]'>): Promise<Metadata> {

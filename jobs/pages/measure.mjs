@@ -1,8 +1,10 @@
-// `npm run measure`: Lighthouse (mobile) on the pages people wait for, and how much script each loads first.
+// `npm run measure`: Lighthouse (mobile) on the pages people wait for, how much script each loads first, and how soon a tap
+// shows a changed plan.
 import lighthouse from 'lighthouse'
-import { address, findLoggedRink, openBrowser, signIn } from './browser.mjs'
+import { address, findLoggedRink, listRinks, openBrowser, signIn } from './browser.mjs'
 
 const PORT = 9333
+const TAPS = ['Later', 'Thicker', 'Later', 'Thinner', 'Earlier', 'Earlier', 'Later', 'Thicker', 'Thinner']
 const CATEGORIES = ['performance', 'accessibility', 'best-practices']
 /** A page without a single client component: what every route of this build loads. */
 const EMPTY = '/help/cautions'
@@ -23,6 +25,43 @@ async function scriptBytes(browser, url, state) {
   await page.goto(url, { waitUntil: 'networkidle' })
   await context.close()
   return bytes
+}
+
+/** The first rink of the list with passes planned tonight; the demo has one at any hour. */
+async function findPlannedRink(page) {
+  for (const rink of await listRinks(page)) {
+    await page.goto(rink)
+    if (await page.getByRole('button', { name: 'Change the plan' }).isVisible()) return rink
+  }
+  throw new Error('No rink of the demo has a plan tonight.')
+}
+
+/** Milliseconds from a click in the open pass until its row reads differently and is painted, on a phone four times slower. */
+async function tapTimes(browser, rink, state) {
+  const context = await browser.newContext({ storageState: state, viewport: { width: 390, height: 844 } })
+  const page = await context.newPage()
+  await page.goto(rink, { waitUntil: 'networkidle' })
+  await page.getByRole('button', { name: 'Change the plan' }).click()
+  await page.getByRole('button', { name: 'Later', exact: true }).waitFor()
+  const client = await context.newCDPSession(page)
+  await client.send('Emulation.setCPUThrottlingRate', { rate: 4 })
+  const times = []
+  for (const name of TAPS) times.push(await page.evaluate(tapToPaint, name))
+  await context.close()
+  return times
+}
+
+/** Runs in the page. */
+async function tapToPaint(name) {
+  const group = document.querySelector('[role=group][aria-label^="Change pass"]')
+  const row = group.closest('li')
+  const button = [...group.querySelectorAll('button')].find((one) => one.textContent.trim() === name)
+  const before = row.textContent
+  const start = performance.now()
+  button.click()
+  while (row.textContent === before) await new Promise((resolve) => setTimeout(resolve, 0))
+  await new Promise((resolve) => requestAnimationFrame(() => setTimeout(resolve, 0)))
+  return performance.now() - start
 }
 
 const browser = await openBrowser([`--remote-debugging-port=${PORT}`])
@@ -55,4 +94,8 @@ for (const [name, url] of Object.entries(pages)) {
   const bytes = await scriptBytes(browser, url, state)
   console.log(`Script   ${name} ${(bytes / 1024).toFixed(1)} KiB, ${(bytes / empty).toFixed(2)} times the empty route`)
 }
+
+const taps = await tapTimes(browser, await findPlannedRink(page), state)
+console.log(`Tap to changed plan at 4x CPU slow-down: ${taps.map((ms) => ms.toFixed(0)).join(' ')} ms`)
+console.log(`         median ${taps.sort((a, b) => a - b)[Math.floor(taps.length / 2)].toFixed(0)} ms`)
 await browser.close()

@@ -92,6 +92,10 @@ describe('whether a poured pass is set', () => {
     expect(isAsked(POURED, at(9.7))).toBe(true)
   })
 
+  test('a pass that no hour of the forecast sets keeps people off', () => {
+    expect(setWords({ ...POURED, saidSetByAt: null }, at(9), readerOf(view))).toMatch(/^Keep off/)
+  })
+
   test('found set or spoiled is the last word; found wet is asked again after half an hour', () => {
     const wet = { ...POURED, outcome: 'wet', outcomeAt: isoAt(9.75) } as const
     expect(setWords(wet, at(9.8), readerOf(view))).toBe('Still wet at 9:45 pm: keep off.')

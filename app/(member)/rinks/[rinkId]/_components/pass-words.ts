@@ -22,11 +22,12 @@ export function passWords(pass: TonightPass, view: WordsView): { what: string; d
   return { what, detail: `${water}, ${durationText(pass.hoseMinutes)} of hose; ${set}` }
 }
 
-/** A poured pass: how long to keep off, or what somebody found. Empty when neither is known. */
+/** A poured pass: how long to keep off, or what somebody found. Empty once it should be set: then the page asks. */
 export function setWords(poured: PouredPassView, now: number, reader: WordOptions): string {
   const { outcome, outcomeAt, saidSetByAt } = poured
   if (outcome && outcomeAt) return FOUND[outcome](clockText(outcomeAt, reader))
-  if (saidSetByAt && Date.parse(saidSetByAt) > now) return `Keep off until ${doneByText(saidSetByAt, reader)}.`
+  if (!saidSetByAt) return 'Keep off: when it sets is not known.'
+  if (Date.parse(saidSetByAt) > now) return `Keep off until ${doneByText(saidSetByAt, reader)}.`
   return ''
 }
 

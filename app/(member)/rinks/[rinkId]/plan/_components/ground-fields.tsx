@@ -6,6 +6,7 @@ import { CORNER_NAMES } from '@/components/rinks/corner-names'
 import { CORNER_FIELDS } from '@/lib/schemas/build-plan'
 import { unitOf } from '@/lib/schemas/measures'
 import type { Units } from '@/lib/units'
+import { BY_ADDRESS } from './by-address'
 import { PointGrid } from './point-grid'
 import type { PlanForm } from './use-plan-form'
 
@@ -45,7 +46,7 @@ export function GroundFields({ form, units }: { form: PlanForm; units: Units }) 
       </div>
       {kind === 'grid' ? <PointGrid form={form} units={units} /> : null}
       {isHydrated ? null : (
-        <Button type="submit" className="mb-5">
+        <Button type="submit" className="mb-5" {...BY_ADDRESS}>
           Show the fields for this ground
         </Button>
       )}

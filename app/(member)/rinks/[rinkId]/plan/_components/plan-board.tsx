@@ -10,6 +10,7 @@ import { depthText, lengthText } from '@/lib/words/build-quantities'
 import type { WordOptions } from '@/lib/words/options'
 import { sumItems, sumsLead } from '@/lib/words/sums'
 import { keepPlanAction } from '../actions'
+import { BY_ADDRESS } from './by-address'
 import { GroundFields } from './ground-fields'
 import { PlanCautions } from './plan-cautions'
 import type { PlanValues } from './plan-values'
@@ -56,7 +57,7 @@ export function PlanBoard({ rinkId, initial, kept, reader, mayManage, years }: P
       </p>
       <SectionFigure sums={sums} reader={reader} />
       <div className="gap-x-14 lg:grid lg:grid-cols-[1.25fr_1fr] lg:grid-rows-[auto_1fr] print:block">
-        <form method="get" className="mt-8 print:hidden" noValidate onSubmit={(event) => event.preventDefault()}>
+        <form action={keep} className="mt-8 print:hidden" noValidate onSubmit={(event) => event.preventDefault()}>
           <input type="hidden" name="rinkId" value={rinkId} />
           <input type="hidden" name="units" value={unitsCode(reader.units)} />
           <h2 className="mb-3 font-semibold">The ground</h2>
@@ -70,12 +71,12 @@ export function PlanBoard({ rinkId, initial, kept, reader, mayManage, years }: P
           ) : null}
           <div className="flex flex-wrap gap-3">
             {form.isHydrated ? null : (
-              <Button type="submit" look="main">
+              <Button type="submit" look="main" {...BY_ADDRESS}>
                 Work out the sums
               </Button>
             )}
             {mayManage ? (
-              <Button type="submit" formAction={keep} onClick={send} disabled={isPending}>
+              <Button type="submit" onClick={send} disabled={isPending}>
                 Keep these for the rink
               </Button>
             ) : null}

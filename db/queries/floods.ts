@@ -79,8 +79,3 @@ export async function listFloodsSince(db: Db, access: RinkAccess, since: Date): 
       by: 'u.name',
     })
 }
-
-/** Counts a change that the advice depends on. */
-export async function bumpSettingsVersion(trx: Db, access: RinkAccess<'writeLog'>, now: Date): Promise<void> {
-  await trx('rinks').where({ id: access.rinkId }).update({ updated_at: now }).increment('settings_version')
-}

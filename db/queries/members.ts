@@ -2,6 +2,7 @@
 import type { Db } from '@/db/knex'
 import type { RinkAccess } from '@/lib/access/proofs'
 import type { Role } from '@/lib/access/permissions'
+import { lockRink } from './rink-settings'
 
 export interface MemberRow {
   userId: string
@@ -40,7 +41,7 @@ export async function insertMember(
 /** Their choice of alerts goes along. @returns what they were, undefined when they had left already. */
 export async function deleteMember(trx: Db, access: RinkAccess, userId: string): Promise<{ role: Role } | undefined> {
   // The rink's lock first: of two keepers who leave at once, the second sees that the first is gone.
-  await trx('rinks').where({ id: access.rinkId }).forUpdate().first('id')
+  await lockRink(trx, access)
   await trx('alert_preferences').where({ rink_id: access.rinkId, user_id: userId }).delete()
   const [left] = await trx('rink_members').where({ rink_id: access.rinkId, user_id: userId }).delete('role')
   return left && { role: left.role }

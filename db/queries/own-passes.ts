@@ -1,6 +1,7 @@
 // The keeper's own passes of a night.
 import type { Db } from '@/db/knex'
 import type { RinkAccess } from '@/lib/access/proofs'
+import { lockRink } from './rink-settings'
 
 export interface OwnPass {
   number: number
@@ -38,7 +39,7 @@ export async function replaceOwnPasses(
   passes: readonly OwnPass[],
   { changedBy, now }: { changedBy: string; now: Date },
 ): Promise<void> {
-  await trx('rinks').where({ id: access.rinkId }).forUpdate().first('id')
+  await lockRink(trx, access)
   await trx('own_passes').where({ rink_id: access.rinkId, night_date: nightDate }).delete()
   if (passes.length === 0) return
   await trx('own_passes').insert(

@@ -31,9 +31,17 @@ export type RinkChanges = Partial<
   >
 >
 
-/** Of two changes at once the second waits here until the first is done. */
-export async function lockRink(trx: Db, access: RinkAccess<'manage'>): Promise<void> {
-  await trx('rinks').where({ id: access.rinkId }).forUpdate().first('id')
+/**
+ * Of two changes at once, or of two workers deciding at once, the second waits here until the first is done. "No key":
+ * rows that name the rink hold a share of its key, and two that had each written one would wait for each other for ever.
+ */
+export async function lockRink(trx: Db, access: RinkAccess): Promise<void> {
+  await trx('rinks').where({ id: access.rinkId }).forNoKeyUpdate().first('id')
+}
+
+/** Counts a change beside the rink's own columns that the advice depends on: water poured, what was learned. */
+export async function countChange(trx: Db, access: RinkAccess<'writeLog'>, now: Date): Promise<void> {
+  await trx('rinks').where({ id: access.rinkId }).update({ updated_at: now }).increment('settings_version')
 }
 
 /** Counts the change, too. */

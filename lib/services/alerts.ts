@@ -7,6 +7,7 @@ import {
 } from '@/db/queries/advised-windows'
 import { findForecastHead } from '@/db/queries/forecasts'
 import { findNewestOutlook, type StoredOutlook } from '@/db/queries/outlooks'
+import { lockRink } from '@/db/queries/rink-settings'
 import { findRinkForJudging, type RinkForJudging } from '@/db/queries/rinks'
 import type { Db } from '@/db/knex'
 import type { RinkAccess } from '@/lib/access/proofs'
@@ -21,14 +22,6 @@ interface Deciding {
   now: Date
 }
 
-/**
- * Two workers never decide one rink at the same time; the lock goes with the transaction. "No key": rows that name the
- * rink hold a share of its key, and two workers that had each written one would wait for each other for ever.
- */
-async function lockRink(trx: Db, rinkId: string): Promise<void> {
-  await trx.raw('select id from rinks where id = ? for no key update', [rinkId])
-}
-
 /** Brings the advised window of the night up to date and promises what there is to tell about it. */
 export async function adviseNight(
   deciding: Deciding,
@@ -36,7 +29,7 @@ export async function adviseNight(
   outlook: JudgedOutlook,
   forecastExpiresAt: Date,
 ): Promise<void> {
-  await lockRink(deciding.trx, rink.id)
+  await lockRink(deciding.trx, deciding.access)
   const newest = await findNewestOutlook(deciding.trx, deciding.access)
   // While we judged, another worker judged later facts and has told people of them: ours would take that back.
   if (newest && newest.judgedAt > deciding.now) return
@@ -49,7 +42,7 @@ export async function adviseNight(
 /** Tells those whose time of day has come, with the outlook that stands. */
 export async function decideAlerts({ db, now }: { db: Db; now: Date }, access: RinkAccess<'view'>): Promise<void> {
   await db.transaction(async (trx) => {
-    await lockRink(trx, access.rinkId)
+    await lockRink(trx, access)
     const rink = await findRinkForJudging(trx, access.rinkId)
     const outlook = await findNewestOutlook(trx, access)
     const forecast = outlook && (await findForecastHead(trx, outlook.forecastId))

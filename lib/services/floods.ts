@@ -1,8 +1,9 @@
 // Passes poured tonight: checked off once, taken back when it was a slip.
 import { randomUUID } from 'node:crypto'
-import { bumpSettingsVersion, insertFlood } from '@/db/queries/floods'
+import { insertFlood } from '@/db/queries/floods'
 import { enqueueRefresh } from '@/db/queries/jobs'
 import { lockPass, updateEntry } from '@/db/queries/log-entries'
+import { countChange } from '@/db/queries/rink-settings'
 import { findRinkForJudging, type RinkForJudging } from '@/db/queries/rinks'
 import type { RinkAccess } from '@/lib/access/proofs'
 import { requireRink } from '@/lib/access/require-rink'
@@ -56,7 +57,7 @@ export async function checkOffPass(context: ServiceContext, input: CheckOffPass 
       now,
     )
     if (!isNew) return
-    await bumpSettingsVersion(trx, access, now)
+    await countChange(trx, access, now)
     await enqueueRefresh(trx, input.rinkId)
   })
 }
@@ -83,7 +84,7 @@ export async function undoPass(context: ServiceContext, input: UndoPass): Promis
     const entry = await lockPass(trx, access, input)
     if (!entry) return
     await updateEntry(trx, entry, { deletedAt: now }, { changedBy: viewer.userId, now })
-    await bumpSettingsVersion(trx, access, now)
+    await countChange(trx, access, now)
     await enqueueRefresh(trx, input.rinkId)
   })
 }

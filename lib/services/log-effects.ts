@@ -1,5 +1,4 @@
 // What an entry of the log does to the model: floods are poured onto the sheet, readings and swept snow set where it starts from.
-import { bumpSettingsVersion } from '@/db/queries/floods'
 import { enqueueRefresh } from '@/db/queries/jobs'
 import type { LogEntry } from '@/db/queries/log-entries'
 import {
@@ -13,6 +12,7 @@ import {
 } from '@/db/queries/log-sheets'
 import { insertReportedSheet } from '@/db/queries/sheet-states'
 import type { Db } from '@/db/knex'
+import { countChange } from '@/db/queries/rink-settings'
 import type { RinkAccess } from '@/lib/access/proofs'
 
 const HOUR_MILLIS = 3_600_000
@@ -111,6 +111,6 @@ export async function followLog(
     const swept = await listSweptBetween(trx, access, { after: happenedAt, to: now })
     for (const at of swept) await reportSheetAt(trx, access, at, !isForgotten)
   }
-  await bumpSettingsVersion(trx, access, now)
+  await countChange(trx, access, now)
   await enqueueRefresh(trx, access.rinkId)
 }

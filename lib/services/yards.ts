@@ -1,6 +1,7 @@
 // The yard teaches the model: what people found is kept with its weather, and the yard's factors are learned from it.
 import { enqueueRefresh } from '@/db/queries/jobs'
-import { bumpSettingsVersion, listFloodsSince } from '@/db/queries/floods'
+import { listFloodsSince } from '@/db/queries/floods'
+import { countChange } from '@/db/queries/rink-settings'
 import { findRinkForJudging, type RinkForJudging } from '@/db/queries/rinks'
 import { findSheetBefore, type StoredSheet } from '@/db/queries/sheet-states'
 import {
@@ -53,7 +54,7 @@ export async function learnRinkYard(
   await db.transaction(async (trx) => {
     await putYardEstimate(trx, rink.id, { estimatedAt: now, modelVersion: MODEL_VERSION, learned })
     if (isSameYard(used, learned)) return
-    await bumpSettingsVersion(trx, access, now)
+    await countChange(trx, access, now)
     await enqueueRefresh(trx, rink.id)
   })
   return learned

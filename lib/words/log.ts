@@ -3,6 +3,7 @@ import { formatInTimeZone } from 'date-fns-tz'
 import { tonightDate } from '@/lib/advice/night'
 import { localDateOf, zoneOffsetMinutes } from '@/lib/advice/zoned-time'
 import type { EntryView, LogKind, Outcome } from '@/lib/schemas/log-choices'
+import { dayText } from './night-label'
 import type { WordOptions } from './options'
 import { capitalised, iceText, layerText, numberText, temperatureText, waterText } from './quantities'
 import { clockText } from './times'
@@ -118,7 +119,7 @@ function zoneLetters(millis: number, { locale, timeZone }: WordOptions): string 
 
 /** "Tonight, Tue 12 January"; "Sun 10 January" */
 export function nightHeading(nightDate: string, now: Date, words: WordOptions): string {
-  const day = formatInTimeZone(`${nightDate}T12:00:00Z`, 'UTC', 'EEE d MMMM')
+  const day = dayText(nightDate)
   return nightDate === tonightDate(now, words.timeZone) ? `Tonight, ${day}` : day
 }
 

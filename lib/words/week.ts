@@ -2,6 +2,7 @@
 import type { FillOutlook, Phase } from '@/lib/advice/types'
 import type { WeekSummary } from '@/lib/advice/week-summary'
 import { addDays, localDateOf } from '@/lib/advice/zoned-time'
+import { dayText } from './night-label'
 import type { WordOptions } from './options'
 import { capitalised, countText, iceText, layerText } from './quantities'
 import { dayPartText, nightText, weekdayText } from './times'
@@ -49,7 +50,7 @@ function thawHeadline(summary: WeekSummary, now: Date, words: WordOptions): Week
     return { before: 'A', key, after: `.${after || ' No good night after it in this forecast.'}`, tone: 'thaw' }
   }
   const count = goodBeforeThaw === 0 ? 'No good night' : capitalised(nightsText(goodBeforeThaw))
-  const key = `thaw ${dayText(thaw.startsAt, now, words)}`
+  const key = `thaw ${nearDayText(thaw.startsAt, now, words)}`
   return { before: `${count} before the`, key, after: goodBeforeThaw === 0 ? `.${after}` : '.', tone: 'thaw' }
 }
 
@@ -108,7 +109,7 @@ function spreadText({ startsAt, carriesSkaterAt: { p10, p50, p90 } }: FillOutloo
 }
 
 /** "today", "tomorrow", "on Sunday". */
-function dayText(at: string, now: Date, words: WordOptions): string {
+function nearDayText(at: string, now: Date, words: WordOptions): string {
   const date = localDateOf(Date.parse(at), words.timeZone)
   const today = localDateOf(now.getTime(), words.timeZone)
   if (date === today) return 'today'
@@ -116,10 +117,8 @@ function dayText(at: string, now: Date, words: WordOptions): string {
 }
 
 /** "Thu 21 January" */
-export function longDayText(at: string, { locale, timeZone }: WordOptions): string {
-  const part = (options: Intl.DateTimeFormatOptions) =>
-    new Intl.DateTimeFormat(locale, { ...options, timeZone }).format(Date.parse(at))
-  return `${part({ weekday: 'short' })} ${part({ day: 'numeric' })} ${part({ month: 'long' })}`
+export function longDayText(at: string, { timeZone }: WordOptions): string {
+  return dayText(localDateOf(Date.parse(at), timeZone))
 }
 
 function joined(names: string[]): string {

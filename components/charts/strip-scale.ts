@@ -9,7 +9,7 @@ export interface Scale {
 const ROUND_STEPS = [1, 2, 5, 10]
 
 /** The smallest step of 1, 2 or 5 times a power of ten that needs at most `most` steps from `low` to `high`. */
-export function roundStep(low: number, high: number, most: number): number {
+function roundStep(low: number, high: number, most: number): number {
   const rough = Math.max(high - low, Number.EPSILON) / most
   const power = 10 ** Math.floor(Math.log10(rough))
   const factor = ROUND_STEPS.find((step) => step * power >= rough * (1 - 1e-9)) ?? 10

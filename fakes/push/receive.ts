@@ -12,7 +12,7 @@ export const PUSH_FAULTS = ['404', '410', '413', '429', '503', 'hang'] as const
 export type PushFault = (typeof PUSH_FAULTS)[number]
 
 /** Asked for with 429 and 503. */
-export const RETRY_AFTER_SECONDS = 120
+const RETRY_AFTER_SECONDS = 120
 /** RFC 8030 section 7.2: a service must take 4,096 bytes; ours takes no more. */
 const LARGEST_PUSH = 4096
 

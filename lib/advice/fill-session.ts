@@ -57,7 +57,7 @@ function hourMarks(setting: Setting, run: ForecastRun): HourMarks {
 }
 
 /** Whether a running cold hose and the hands at it bear an hour well enough for a good score. */
-export function isHoseBorne(hour: PreparedHour): boolean {
+function isHoseBorne(hour: PreparedHour): boolean {
   if (!hour.isKnown) return false
   const { hose, hands } = hoseAndHands(hour.airTemperatureC, windChillC(hour.airTemperatureC, hour.windSpeedMps))
   return 100 * Math.min(hose, hands) >= VERDICT.goodScore

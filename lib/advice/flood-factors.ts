@@ -138,7 +138,7 @@ function knownMinutesToSet(
 }
 
 /** Whole hours are counted, the first and the last too: when in the hour it falls is not known. */
-export function wetBetween(run: ForecastRun, index: number, untilMillis: number): number {
+function wetBetween(run: ForecastRun, index: number, untilMillis: number): number {
   const first = run.hours[0] as PreparedHour
   const end = Math.ceil((untilMillis - first.startsAtMillis) / HOUR_MILLIS)
   const last = Math.min(run.hours.length, Math.max(index + 1, end))

@@ -8,7 +8,7 @@ const SURFACE_CELL_M = 0.005
 const CELL_GROWTH = 0.45
 
 /** Cell thickness wanted at a depth. [m] */
-export function wantedCellM(depthM: number): number {
+function wantedCellM(depthM: number): number {
   return SURFACE_CELL_M + CELL_GROWTH * depthM
 }
 

@@ -7,7 +7,7 @@ const QUARTER_MILLIS = 900_000
 const OCTANT_DEG = 45
 
 /** Whether a site keeps any sunshine off. */
-export function isShaded(site: Site): boolean {
+function isShaded(site: Site): boolean {
   return site.horizonDeg !== undefined || (site.shade ?? 0) > 0
 }
 

@@ -1,6 +1,7 @@
 // Kinds of fields that forms share: quantities in the person's units, lines of text, boxes to tick.
 import { z } from 'zod'
 import { unitsOfCode, type Units } from '@/lib/units'
+import { NOTE_LENGTH } from './log-choices'
 import { fitsMeasure, parseNumber, rangeMessage, scaleOf, type MeasureName } from './measures'
 
 /** A quantity in the person's units, as SI. */
@@ -62,3 +63,15 @@ export const secondsSchema = z.string().transform((text, context) => {
   context.addIssue('Between 1 and 3600 seconds.')
   return z.NEVER
 })
+
+/** A remark in one's own words, on several lines if need be. */
+export const noteSchema = z
+  .string()
+  .default('')
+  .transform((text) => text.replaceAll('\r\n', '\n').trim())
+  .pipe(
+    z
+      .string()
+      .max(NOTE_LENGTH, `At most ${NOTE_LENGTH} characters.`)
+      .regex(/^[\P{Cc}\n]*$/u, 'Letters, figures and spaces only.'),
+  )

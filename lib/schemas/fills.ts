@@ -1,7 +1,6 @@
 // What is done at a running fill: start, pause, resume, look, finish. Fields as people type them, in their own units.
 import { z } from 'zod'
-import { inUnitsOf, measured, orEmpty } from './fields'
-import { NOTE_LENGTH } from './log-choices'
+import { inUnitsOf, measured, noteSchema, orEmpty } from './fields'
 import { rinkIdSchema } from './rinks'
 
 /** Empty depth and flow are the rink's own. */
@@ -21,17 +20,6 @@ export const resumeFillSchema = inUnitsOf((units) =>
     .object({ rinkId: rinkIdSchema, flow: orEmpty(measured('flow', units)) })
     .transform(({ rinkId, flow }) => ({ rinkId, flowLPerMin: flow })),
 )
-
-const noteSchema = z
-  .string()
-  .default('')
-  .transform((text) => text.replaceAll('\r\n', '\n').trim())
-  .pipe(
-    z
-      .string()
-      .max(NOTE_LENGTH, `At most ${NOTE_LENGTH} characters.`)
-      .regex(/^[\P{Cc}\n]*$/u, 'Letters, figures and spaces only.'),
-  )
 
 /** Both may be empty: somebody was there, and all was well. */
 export const checkFillSchema = inUnitsOf((units) =>

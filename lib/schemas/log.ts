@@ -1,8 +1,8 @@
 // Writing into the log, changing it, answering for a flood: the fields as people type them, in their own units.
 import { z } from 'zod'
 import type { Units } from '@/lib/units'
-import { inUnitsOf, measured, orEmpty } from './fields'
-import { LOG_KINDS, NOTE_LENGTH, OUTCOMES, WHICH_HOURS } from './log-choices'
+import { inUnitsOf, measured, noteSchema, orEmpty } from './fields'
+import { LOG_KINDS, OUTCOMES, WHICH_HOURS } from './log-choices'
 import { clockTimeSchema, dateSchema } from './local-time'
 import { parseNumber, scaleOf } from './measures'
 import { WATER_KINDS } from './rink-choices'
@@ -33,17 +33,6 @@ const minutesAgoSchema = z.string().transform((text, context) => {
   context.addIssue('A number of minutes, or give date and time.')
   return z.NEVER
 })
-
-const noteSchema = z
-  .string()
-  .default('')
-  .transform((text) => text.replaceAll('\r\n', '\n').trim())
-  .pipe(
-    z
-      .string()
-      .max(NOTE_LENGTH, `At most ${NOTE_LENGTH} characters.`)
-      .regex(/^[\P{Cc}\n]*$/u, 'Letters, figures and spaces only.'),
-  )
 
 /** When it happened: minutes ago, or by the rink's clock. A time alone is the last time the clock showed it. */
 const whenFields = {

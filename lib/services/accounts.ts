@@ -31,7 +31,7 @@ export interface SignedIn {
 export const SIGN_IN_REFUSED =
   'That did not work: the password is not right, or the address is not confirmed yet. If it is not, a new link is on its way.'
 
-export const LINK_REFUSED = 'This link has been used or has run out. Ask for a new one.'
+const LINK_REFUSED = 'This link has been used or has run out. Ask for a new one.'
 
 /** Mails a link that confirms the address; somebody who is known already gets a mail that says so. */
 export async function signUp(context: OpenContext, { email, name, password }: SignUpInput): Promise<void> {

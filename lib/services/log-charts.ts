@@ -62,7 +62,7 @@ function mean(values: readonly number[] | undefined): number | null {
 }
 
 /** Every week of the span has its place, flooded or not. */
-export function weeksOf(nights: readonly { nightDate: string; floods: number }[]): LogCharts['weeks'] {
+function weeksOf(nights: readonly { nightDate: string; floods: number }[]): LogCharts['weeks'] {
   const flooded = nights.filter(({ floods }) => floods > 0).map(({ nightDate }) => nightDate)
   const [first, last] = [flooded[0], flooded.at(-1)]
   if (first === undefined || last === undefined) return []

@@ -30,7 +30,7 @@ export function minuteOf(time: string): number {
  * @param known What an entry said before: a time left as it was stays the same instant, in a doubled hour too.
  * @throws InvalidInputError for a time that a clock change skipped, and for one that it showed twice when nobody said which.
  */
-export function instantByClock(
+function instantByClock(
   clock: { date: string; time: string; which?: WhichHour },
   timeZone: string,
   known?: Date,

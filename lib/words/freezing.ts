@@ -2,7 +2,7 @@
 import type { FreezingOutlook } from '@/lib/advice/freezing'
 import type { Caution } from '@/lib/advice/types'
 import { shareText } from './build-quantities'
-import { CAUTION_CODES, cautionText } from './cautions'
+import { cautionText } from './cautions'
 import { num, text, type ClauseWriter } from './clause'
 import { spreadText } from './filling'
 import type { WordOptions } from './options'
@@ -46,8 +46,6 @@ function bearsText(v: Parameters<ClauseWriter>[0], w: WordOptions): string {
     ? ` It should reach ${limit} by ${weekdayText(at, w)} ${clockText(at, w)}.`
     : ` It does not reach ${limit} within the forecast.`
 }
-
-export const SNOW_CODES: readonly string[] = [...Object.keys(SNOW_WRITERS), ...CAUTION_CODES]
 
 /** What to do about snow on a freezing rink. */
 export function snowOnIceText(caution: Caution, words: WordOptions): string {

@@ -76,7 +76,7 @@ function readingRemark({ thicknessMm, modelThicknessMm }: EntryView, words: Word
   return `The model had ${iceText(modelThicknessMm, words)}; it now follows the measure.`
 }
 
-export function outcomeText({ outcome, outcomeAt }: EntryView, words: WordOptions): string {
+function outcomeText({ outcome, outcomeAt }: EntryView, words: WordOptions): string {
   if (!outcome || !outcomeAt) return ''
   const at = clockText(outcomeAt, words)
   if (outcome === 'set') return `It was set at ${at}.`

@@ -54,6 +54,7 @@ export interface HourAgreement {
 /** What the runs asked so far say of the hours of a window. */
 export type RangeTally = { range: HourRange; shares: Float64Array; scoreSums: Float64Array }
 
+/** No run asked yet. */
 export function startTally(range: HourRange): RangeTally {
   const length = range.to - range.from
   return { range, shares: new Float64Array(length), scoreSums: new Float64Array(length) }

@@ -16,6 +16,7 @@ export function hosePlanOf({ input }: Setting): HosePlan {
   return { litres, hoseHours: litres / flowLPerMin / 60 }
 }
 
+/** The rink's floor as measured; flat where it was not. */
 export function floorOfRink({ input }: Setting): FloorGrid {
   return floorOf(input.rink.lengthM, input.rink.widthM, input.rink.floor)
 }

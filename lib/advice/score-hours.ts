@@ -20,6 +20,7 @@ export function scoreOf({ ice, person }: { ice: number; person: number }): numbe
   return Math.round(100 * Math.min(ice, person))
 }
 
+/** Whether a start is worth getting the hose out for: a score of VERDICT.goodScore or more. */
 export function isGood(start: { ice: number; person: number }): boolean {
   return scoreOf(start) >= VERDICT.goodScore
 }

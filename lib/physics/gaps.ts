@@ -65,6 +65,7 @@ export function hasNeeded(record: HourlyRecord): boolean {
   return hasSky && isNumber(record.precipitationMm) && NEEDED.every((field) => isNumber(record[field]))
 }
 
+/** False for what is missing, and for what is no number. */
 export function isNumber(value: number | null | undefined): value is number {
   return typeof value === 'number' && Number.isFinite(value)
 }

@@ -50,6 +50,7 @@ export function diffuseShare(cloudCover: number): number {
  * @param startsAtMillis Start of the hour. [ms since 1970-01-01 UTC]
  * @param site Place, skyline, `shade` (share of direct sunshine that trees or a cloth keep off, 0-1), `skyView`.
  * @returns Flux on the rink. [W/m²]
+ * @throws RangeError for a cloud cover, shade or skyline out of range.
  */
 export function sunshineOnRinkWm2(globalWm2: number, cloudCover: number, startsAtMillis: number, site: Site): number {
   if (globalWm2 <= 0 || !isShaded(site)) return globalWm2

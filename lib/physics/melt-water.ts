@@ -43,7 +43,17 @@ export function snowMeltedCm(
   return (meltKgM2 / inRange('densityKgM3 [kg/m³]', snow.densityKgM3, 10, 600)) * 100
 }
 
-/** Snow that just brings water up over floating ice: Archimedes, h_i (ρ_w - ρ_i) / ρ_s. [cm] */
+/**
+ * Snow that just brings water up over floating ice.
+ *
+ * @param iceMm Ice. [mm], 0 to 3000
+ * @param iceDensity Of the ice. [kg/m³]
+ * @param snowDensity Of the snow. [kg/m³], 10 to 600
+ * @returns Depth of snow. [cm]
+ * @throws RangeError outside the ranges.
+ *
+ * Source: Archimedes, h_i (ρ_w - ρ_i) / ρ_s.
+ */
 export function snowThatFloodsIceCm(iceMm: number, iceDensity: number, snowDensity: number): number {
   inRange('iceMm [mm]', iceMm, 0, 3000)
   return ((iceMm / 10) * (WATER_DENSITY - iceDensity)) / inRange('snowDensity [kg/m³]', snowDensity, 10, 600)

@@ -47,7 +47,15 @@ function newSnowDepthCm(snowMm: number, airTemperatureC: number): number {
   return snowMm > 0 ? (snowMm * 100) / newSnowDensity(airTemperatureC) : 0
 }
 
-/** Splits what falls into rain and snow where the record does not. */
+/**
+ * Splits what falls into rain and snow where the record does not.
+ *
+ * @param record The hour; what it says of rain and snow itself comes first.
+ * @param airTemperatureC Its air. [°C]
+ * @param precipitationMm What falls in all, as water. [mm]
+ * @returns Rain as water [mm] and the depth of new snow [cm].
+ * @throws RangeError for rain outside 0-200 mm or snow outside 0-100 cm.
+ */
 export function precipitationPhase(
   record: HourlyRecord,
   airTemperatureC: number,

@@ -94,7 +94,14 @@ export function fillByHour(
   })
 }
 
-/** Hours of running hose. @param litres [L] @param flowLPerMin [L/min] @returns [h] */
+/**
+ * Hours of running hose.
+ *
+ * @param litres Water. [L]
+ * @param flowLPerMin Flow. [L/min], 0.1 to 2000
+ * @returns [h]
+ * @throws RangeError for a flow out of range.
+ */
 export function hoseHours(litres: number, flowLPerMin: number): number {
   return litres / inRange('flowLPerMin [L/min]', flowLPerMin, 0.1, 2000) / 60
 }

@@ -93,6 +93,9 @@ export function neumannLambda(kelvinsBelow: number): number {
  * @param kelvinsBelow Freezing point less surface. [K], 0 to 60
  * @param hours Time. [h], 0 or more
  * @returns Thickness. [m]
+ * @throws RangeError outside the ranges.
+ *
+ * Source: as neumannLambda.
  */
 export function neumannThicknessM(kelvinsBelow: number, hours: number): number {
   const diffusivity = ICE_CONDUCTIVITY / (ICE_DENSITY * ICE_HEAT_CAPACITY)

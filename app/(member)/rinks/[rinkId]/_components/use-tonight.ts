@@ -28,6 +28,8 @@ export function useTonight(initial: TonightView) {
   const isOnline = useOnline()
   const [isFresh, setIsFresh] = useState(true)
   const [awaited, setAwaited] = useState<Awaited>(null)
+  // What the server has just sent need not be asked for again; a sheet kept by the service worker is older.
+  const [isKept] = useState(() => Date.now() - Date.parse(initial.readAt) > MINUTE)
   // Kept between renders: a new function would start the wait anew, and the minute would never be over.
   const refreshInterval = useCallback(
     (latest?: TonightView) => pauseBefore(latest ?? initial, awaited),
@@ -35,6 +37,7 @@ export function useTonight(initial: TonightView) {
   )
   const { data, error, mutate } = useSWR<TonightView, Error>(key, fetchJson<TonightView>, {
     fallbackData: initial,
+    revalidateOnMount: isKept,
     refreshInterval,
     dedupingInterval: 1000,
     onErrorRetry: (_error, _key, _config, retry, { retryCount }) => setTimeout(() => retry({ retryCount }), MINUTE / 4),

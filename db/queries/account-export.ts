@@ -7,12 +7,24 @@ const TABLES_OF_A_RINK = [
   'available_hours',
   'log_entries',
   'fills',
+  'own_passes',
   'night_outcomes',
   'advised_windows',
 ] as const
 
+const TABLES_OF_A_FILL = ['fill_sessions', 'fill_checks'] as const
+
 /** Columns that only the machine reads. */
-const LEFT_OUT = ['rink_id', 'outlook_id', 'forecast_id', 'entry_key', 'written_by', 'started_by']
+const LEFT_OUT = [
+  'rink_id',
+  'outlook_id',
+  'forecast_id',
+  'entry_key',
+  'written_by',
+  'started_by',
+  'checked_by',
+  'changed_by',
+]
 
 export async function readAccountForExport(db: Db, userId: string): Promise<Record<string, unknown>> {
   const [account] = await db('users')
@@ -39,6 +51,10 @@ export async function readAccountForExport(db: Db, userId: string): Promise<Reco
   return { account, devices, sessions, messages, rinks: await rinksOf(db, userId) }
 }
 
+function readable(row: Record<string, unknown>): Record<string, unknown> {
+  return Object.fromEntries(Object.entries(row).filter(([key]) => !LEFT_OUT.includes(key)))
+}
+
 async function rinksOf(db: Db, userId: string): Promise<unknown[]> {
   const memberships = await db('rink_members').where({ user_id: userId }).orderBy('joined_at')
   const rinks: unknown[] = []
@@ -51,9 +67,11 @@ async function rinksOf(db: Db, userId: string): Promise<unknown[]> {
     const parts: Record<string, unknown> = {}
     for (const table of TABLES_OF_A_RINK) {
       const rows = await db<Record<string, unknown>>(table).where({ rink_id }).select()
-      parts[table] = rows.map((row) =>
-        Object.fromEntries(Object.entries(row).filter(([key]) => !LEFT_OUT.includes(key))),
-      )
+      parts[table] = rows.map(readable)
+    }
+    for (const table of TABLES_OF_A_FILL) {
+      const fills = db('fills').where({ rink_id }).select('id')
+      parts[table] = (await db<Record<string, unknown>>(table).whereIn('fill_id', fills).select()).map(readable)
     }
     rinks.push({ role, joined_at, settings, alerts: alerts[0] ?? null, ...parts })
   }

@@ -13,6 +13,7 @@ import {
   type Fill,
 } from '@/db/queries/fills'
 import { enqueueRefresh } from '@/db/queries/jobs'
+import { countChange } from '@/db/queries/rink-settings'
 import { insertEntry } from '@/db/queries/log-entries'
 import { insertReportedSheet } from '@/db/queries/sheet-states'
 import { findRinkForJudging, type RinkForJudging } from '@/db/queries/rinks'
@@ -73,6 +74,7 @@ export async function pauseFill(context: ServiceContext, { rinkId }: { rinkId: s
   await atOpenFill(context, rinkId, async ({ trx, access, rink, fill }) => {
     if (!(await stopFillSession(trx, fill.id, now))) throw new ConflictError('The hose is off already.')
     await setFillReminders(trx, access, { rink, fill, now, viewer })
+    await countChange(trx, access, now)
     await enqueueRefresh(trx, rinkId)
   })
 }
@@ -85,6 +87,7 @@ export async function resumeFill(context: ServiceContext, input: ResumeFillInput
     const flowLPerMin = input.flowLPerMin ?? last?.flowLPerMin ?? rink.water.flowLPerMin
     if (!(await insertFillSession(trx, fill.id, flowLPerMin, now))) throw new ConflictError('The hose runs already.')
     await setFillReminders(trx, access, { rink, fill, now, viewer })
+    await countChange(trx, access, now)
     await enqueueRefresh(trx, input.rinkId)
   })
 }

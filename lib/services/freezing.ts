@@ -47,7 +47,7 @@ export async function getFreezing(context: ServiceContext, rinkId: string): Prom
 }
 
 async function outlookOf(db: Db, access: RinkAccess, rink: RinkForJudging, now: Date): Promise<FreezingOutlook | null> {
-  const forecast = await findNewestForecast(db, rink.gridCellId)
+  const forecast = await findNewestForecast(db, rink.gridCellId, now)
   const input = forecast && (await gatherJudgeInput(db, access, { rink, forecast, now }))
   return input ? freezingOutlook(input) : null
 }

@@ -4,8 +4,9 @@ import { MEMBER_PAGES, OPEN_PAGES, RINK_PAGES } from '../../jobs/pages/list.mjs'
 import { openBirchLane, seedTheDemo, signInAsKeeper } from './demo'
 import { expect, expectAccessible, test } from './fixtures'
 
-/** A desk of 1280 px at 200 % zoom has 640 px. */
+/** A desk of 1280 px at 200 % zoom has 640 px: there only the fit is looked at. */
 const WIDTHS = [390, 640, 1280]
+const ZOOMED = 640
 
 test.beforeAll(seedTheDemo)
 
@@ -17,7 +18,7 @@ async function expectFit(page: Page, path: string): Promise<void> {
     await page.setViewportSize({ width, height: width === 390 ? 844 : 800 })
     const isTooWide = await page.evaluate(() => document.documentElement.scrollWidth > window.innerWidth)
     expect(isTooWide, `${path} is wider than ${width} px`).toBe(false)
-    await expectAccessible(page)
+    if (width !== ZOOMED) await expectAccessible(page)
   }
 }
 

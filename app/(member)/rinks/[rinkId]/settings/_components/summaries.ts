@@ -4,6 +4,7 @@ import { skyPercent } from '@/components/rinks/form/settings-values'
 import { BASE_CHOICES, SHELTER_CHOICES } from '@/components/rinks/form/yard-fields'
 import type { RinkSettings } from '@/lib/services/rink-settings'
 import type { WordOptions } from '@/lib/words/options'
+import { clockText } from '@/lib/words/times'
 import { flowText, iceText, sizeText, windChillText, windText } from '@/lib/words/quantities'
 
 const DAY_NAMES = ['Mon', 'Tue', 'Wed', 'Thu', 'Fri', 'Sat', 'Sun']
@@ -17,7 +18,7 @@ export function summaries(rink: RinkSettings, words: WordOptions): { path: strin
   return [
     { path: 'ice', word: 'Ice now', says: PHASE_WORDS[rink.phase] },
     { path: 'water', word: 'Water', says: others > 0 ? `${water}; ${others} more` : water },
-    { path: 'hours', word: 'Hours', says: rink.available.map((hours) => hoursText(hours)).join('; ') },
+    { path: 'hours', word: 'Hours', says: rink.available.map((hours) => hoursText(hours, words)).join('; ') },
     { path: 'limits', word: 'Limits', says: limitsText(rink, words) },
     { path: 'yard', word: 'Size, floor and shelter', says: yardText(rink, words) },
     {
@@ -28,9 +29,11 @@ export function summaries(rink: RinkSettings, words: WordOptions): { path: strin
   ]
 }
 
-function hoursText({ from, to, weekdays }: RinkSettings['available'][number]): string {
+function hoursText({ from, to, weekdays }: RinkSettings['available'][number], words: WordOptions): string {
   const days = weekdays.length === 7 ? 'every day' : weekdays.map((day) => DAY_NAMES[day - 1]).join(', ')
-  return `${from} to ${to} ${days}`
+  // A wall time has no date: any day of UTC tells how its hour is written.
+  const [start, end] = [from, to].map((time) => clockText(`2026-01-01T${time}:00Z`, { ...words, timeZone: 'UTC' }))
+  return `${start} to ${end} ${days}`
 }
 
 function limitsText({ windLimitMps, windChillLimitC, carriesSkaterMm }: RinkSettings, words: WordOptions): string {

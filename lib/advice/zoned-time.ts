@@ -14,6 +14,11 @@ function formatterOf(timeZone: string): Intl.DateTimeFormat {
   return formatter
 }
 
+// Clocks change on the quarter hour, so an offset holds for all of one; the same few nights are asked for over and over.
+const QUARTER = 15 * MINUTE
+const MOST_OFFSETS = 10_000
+const offsets = new Map<string, number>()
+
 /**
  * Offset of a zone from UTC at an instant, from the platform's own zone data.
  *
@@ -23,6 +28,17 @@ function formatterOf(timeZone: string): Intl.DateTimeFormat {
  * @throws RangeError for an unknown zone.
  */
 export function zoneOffsetMinutes(atMillis: number, timeZone: string): number {
+  const quarter = Math.floor(atMillis / QUARTER)
+  const key = `${timeZone} ${quarter}`
+  const known = offsets.get(key)
+  if (known !== undefined) return known
+  const offset = readOffset(quarter * QUARTER, timeZone)
+  if (offsets.size >= MOST_OFFSETS) offsets.clear()
+  offsets.set(key, offset)
+  return offset
+}
+
+function readOffset(atMillis: number, timeZone: string): number {
   const found = /GMT([+-])(\d\d):(\d\d)/.exec(formatterOf(timeZone).format(atMillis))
   if (!found) return 0
   return (found[1] === '-' ? -1 : 1) * (Number(found[2]) * 60 + Number(found[3]))

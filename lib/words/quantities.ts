@@ -10,15 +10,26 @@ import {
 } from '@/lib/units'
 import type { WordOptions } from './options'
 
+// Making a formatter takes a tenth of a millisecond: too long for every figure of a page that follows a thumb.
+const formatters = new Map<string, Intl.NumberFormat>()
+
+function formatterOf(locale: string, digits: number, useGrouping: boolean): Intl.NumberFormat {
+  const key = `${locale} ${digits} ${useGrouping}`
+  let formatter = formatters.get(key)
+  if (!formatter) {
+    const format = { minimumFractionDigits: digits, maximumFractionDigits: digits, useGrouping }
+    formatter = new Intl.NumberFormat(locale, format)
+    formatters.set(key, formatter)
+  }
+  return formatter
+}
+
 /** A real minus sign, and no "−0". */
 export function numberText(value: number, digits: number, { locale }: Pick<WordOptions, 'locale'>): string {
   const rounded = Number(value.toFixed(digits)) + 0
-  const format = {
-    minimumFractionDigits: digits,
-    maximumFractionDigits: digits,
-    useGrouping: Math.abs(rounded) >= 10_000,
-  }
-  return rounded.toLocaleString(locale, format).replace('-', '−')
+  return formatterOf(locale, digits, Math.abs(rounded) >= 10_000)
+    .format(rounded)
+    .replace('-', '−')
 }
 
 export function temperatureText(temperatureC: number, words: WordOptions): string {

@@ -64,10 +64,10 @@ function JudgedNight({ view, now, change, checkOffs }: JudgedNightProps) {
   const drawn = useMemo(() => ({ ...view, outlook: { ...view.outlook, passes } }), [view, passes])
   return (
     <>
-      <Verdict view={view} summary={summary} now={now} />
-      <PhaseNote rink={view.rink} viewer={view.viewer} />
+      <SteadyVerdict view={view} summary={summary} now={now} />
+      <SteadyPhase rink={view.rink} viewer={view.viewer} />
       <NightStrip source={drawn} now={now} />
-      <ZoneNote view={view} />
+      <SteadyZone view={view} />
       <div className="lg:grid lg:grid-cols-[1.25fr_1fr] lg:gap-x-14 print:block">
         <section>
           <h2 className="mt-8 mb-2 text-body font-semibold">The plan</h2>
@@ -80,7 +80,7 @@ function JudgedNight({ view, now, change, checkOffs }: JudgedNightProps) {
                 : 'No pass is planned for this night.'}
             </p>
           )}
-          {isGranted(view.viewer.role, 'receiveAlerts') ? <Mute view={view} change={change} /> : null}
+          {isGranted(view.viewer.role, 'receiveAlerts') ? <SteadyMute view={view} change={change} /> : null}
           <SteadyForYou view={view} />
         </section>
         <SteadyReasons view={view} now={now} />
@@ -91,6 +91,10 @@ function JudgedNight({ view, now, change, checkOffs }: JudgedNightProps) {
 }
 
 // Moving a pass changes none of these: they are drawn again only when the view does.
+const SteadyVerdict = memo(Verdict)
+const SteadyPhase = memo(PhaseNote)
+const SteadyZone = memo(ZoneNote)
+const SteadyMute = memo(Mute)
 const SteadyDays = memo(DaysAhead)
 
 const SteadyForYou = memo(function ForYouAndTheIce({ view }: { view: Judged }) {

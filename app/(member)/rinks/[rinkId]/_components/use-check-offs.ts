@@ -1,7 +1,8 @@
 // Check-offs that the server may not have yet: shown at once, sent when there is a network, each once, taken back when refused.
 'use client'
 import { useCallback, useEffect, useRef, useState } from 'react'
-import type { KeptCheckOff } from '@/components/rinks/kept-check-offs'
+// Loaded with the page: a phone that has lost its network cannot fetch it any more.
+import { drop, keep, listKept, send, type KeptCheckOff } from '@/components/rinks/kept-check-offs'
 import type { TonightPass, TonightView } from '@/lib/schemas/tonight-view'
 
 export interface CheckOffs {
@@ -17,8 +18,6 @@ export interface CheckOffs {
   dismiss: (entryKey: string) => void
 }
 
-const loadKept = () => import('@/components/rinks/kept-check-offs')
-
 export function useCheckOffs(view: TonightView, readAgain: () => Promise<unknown>): CheckOffs {
   const { id: rinkId } = view.rink
   const { id: userId } = view.viewer
@@ -28,7 +27,6 @@ export function useCheckOffs(view: TonightView, readAgain: () => Promise<unknown
   const sending = useRef(false)
 
   const readKept = useCallback(async () => {
-    const { listKept } = await loadKept()
     const kept = await listKept(userId, rinkId)
     setWaiting(kept.filter((one) => !one.refused))
     setRefused(kept.filter((one) => one.refused))
@@ -39,7 +37,6 @@ export function useCheckOffs(view: TonightView, readAgain: () => Promise<unknown
     if (sending.current) return
     sending.current = true
     try {
-      const { send } = await loadKept()
       const left = await readKept()
       const outcomes = await Promise.all(left.map(async (one) => [one.entryKey, await send(one)] as const))
       setStuck(new Set(outcomes.flatMap(([key, outcome]) => (outcome === 'stuck' ? [key] : []))))
@@ -76,7 +73,6 @@ export function useCheckOffs(view: TonightView, readAgain: () => Promise<unknown
       pouredAt: new Date().toISOString(),
     }
     setWaiting((before) => [...before, made])
-    const { keep } = await loadKept()
     await keep(made)
     await sendKept()
     return null
@@ -85,7 +81,6 @@ export function useCheckOffs(view: TonightView, readAgain: () => Promise<unknown
   async function takeBack(passNumber: number): Promise<boolean> {
     const one = waiting.find((kept) => kept.passNumber === passNumber && kept.nightDate === view.night.date)
     if (!one) return false
-    const { drop } = await loadKept()
     await drop(one.entryKey)
     setWaiting((before) => before.filter(({ entryKey }) => entryKey !== one.entryKey))
     return true
@@ -93,7 +88,7 @@ export function useCheckOffs(view: TonightView, readAgain: () => Promise<unknown
 
   function dismiss(entryKey: string): void {
     setRefused((before) => before.filter((one) => one.entryKey !== entryKey))
-    void loadKept().then(({ drop }) => drop(entryKey))
+    void drop(entryKey)
   }
 
   const ofTonight = waiting.filter(({ nightDate }) => nightDate === view.night.date)

@@ -1,5 +1,4 @@
 // Check-offs on this device until the server has them: kept in IndexedDB, where the service worker finds them too.
-// Fetched on demand: only a device that checks off needs the database.
 import { createStore, del, set, values } from 'idb-keyval'
 import { checkOffsPath } from '@/lib/cache-keys/outlook'
 

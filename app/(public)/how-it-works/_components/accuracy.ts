@@ -31,8 +31,8 @@ export interface AdviceFigure {
 
 export const ADVICE_FIGURES: AdviceFigure[] = [
   { who: 'Nightsheet, if forecasts were perfect', usedPercent: 95.9, spoiledPercent: 0 },
-  { who: 'Nightsheet, forecast read anew each hour', usedPercent: 89.6, spoiledPercent: 3.1 },
-  { who: 'Nightsheet, told once in the afternoon', usedPercent: 83.1, spoiledPercent: 4.4 },
+  { who: 'Nightsheet, forecast read anew each hour', usedPercent: 89, spoiledPercent: 3.7 },
+  { who: 'Nightsheet, told once in the afternoon', usedPercent: 85.9, spoiledPercent: 4.8 },
   { who: 'Flood at −2 °C or colder', usedPercent: 74, spoiledPercent: 9 },
   { who: 'Flood at −4 °C or colder', usedPercent: 61.8, spoiledPercent: 5 },
   { who: 'Flood at −5 °C or colder', usedPercent: 55.3, spoiledPercent: 2.9 },

@@ -1,7 +1,6 @@
 // Setting up a rink: all or nothing, and once.
 import { findAccount } from '@/db/queries/users'
 import { IMPERIAL } from '@/lib/units'
-import { randomUUID } from 'node:crypto'
 import { afterAll, beforeAll, beforeEach, describe, expect, test } from 'vitest'
 import { findRinkForJudging } from '@/db/queries/rinks'
 import { setUpRinkSchema } from '@/lib/schemas/rinks'

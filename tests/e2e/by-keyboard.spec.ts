@@ -1,10 +1,15 @@
 // An evening with a keyboard and nothing else, on a desk at 200 % zoom: 1280 by 800 pixels become 640 by 400.
-import { openBirchLane, seedTheDemo } from './demo'
+import { forgetEntriesSince, openBirchLane, seedTheDemo } from './demo'
 import { expect, test } from './fixtures'
 import { press, tabTo } from './person'
 
 test.use({ viewport: { width: 640, height: 400 } })
-test.beforeAll(seedTheDemo)
+let seededAt = new Date()
+test.beforeAll(async () => {
+  await seedTheDemo()
+  seededAt = new Date()
+})
+test.afterAll(() => forgetEntriesSince(seededAt))
 
 test('sign in, read the night, check off, log, mute, and change a setting, by keyboard at 200 % zoom', async ({
   page,

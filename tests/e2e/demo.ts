@@ -5,6 +5,16 @@ import { DEMO_PASSWORD } from '@/db/seeds/people'
 import { seedDemo } from '@/db/seeds/dev'
 import { expect } from './fixtures'
 
+/** Journeys share the demo: what one wrote into its log is gone before the next looks at tonight's passes. */
+export async function forgetEntriesSince(instant: Date): Promise<void> {
+  const db = createPool(process.env.DATABASE_URL ?? '')
+  try {
+    await db('log_entries').where('created_at', '>=', instant).delete()
+  } finally {
+    await db.destroy()
+  }
+}
+
 /** Repeating it changes nothing. The worker reads the weather and judges within seconds. */
 export async function seedTheDemo(): Promise<void> {
   const db = createPool(process.env.DATABASE_URL ?? '')

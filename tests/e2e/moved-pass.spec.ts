@@ -11,7 +11,7 @@ async function openPlannedRink(page: Page): Promise<void> {
     await page.goto('/rinks')
     await page
       .getByRole('link', { name: /Flood .* passes/ })
-      .first()
+      .last()
       .click({ timeout: 3000 })
   }).toPass({ timeout: 90_000 })
   await expect(page.getByRole('button', { name: 'Change the plan' })).toBeVisible()

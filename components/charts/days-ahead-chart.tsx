@@ -1,6 +1,7 @@
 // Ten days ahead: what could freeze each day as bars, low and high of the air as lines. Loaded on demand (recharts is heavy).
 'use client'
 import { Bar, CartesianGrid, Cell, ComposedChart, Line, ResponsiveContainer, Tooltip, XAxis, YAxis } from 'recharts'
+import { AXIS, FLOOR, LINE, TIP } from './chart-parts'
 
 export interface DayColumn {
   day: string
@@ -19,43 +20,24 @@ interface DaysAheadChartProps {
 
 const AIR = [{ key: 'high' }, { key: 'low', dash: '4 3' }]
 /** Lines lie on a casing, so that they stay visible across solid bars. */
-const LINE = { yAxisId: 'air', dot: false, activeDot: false, isAnimationActive: false }
-const TEXT = { fontSize: 12, fill: 'var(--graphite)' }
+const AIR_LINE = { yAxisId: 'air', ...LINE }
 
 export default function DaysAheadChart({ days, depthUnit, airUnit }: DaysAheadChartProps) {
   return (
     <ResponsiveContainer width="100%" height="100%">
       <ComposedChart data={days} margin={{ top: 12, right: 4, bottom: 0, left: 0 }} accessibilityLayer={false}>
         <CartesianGrid vertical={false} stroke="var(--rule)" />
-        <XAxis
-          dataKey="day"
-          tick={TEXT}
-          tickLine={false}
-          axisLine={{ stroke: 'var(--graphite)' }}
-          interval="equidistantPreserveStart"
-        />
-        <YAxis yAxisId="depth" width={34} tick={TEXT} tickLine={false} axisLine={false} />
+        <XAxis dataKey="day" {...AXIS} {...FLOOR} />
+        <YAxis yAxisId="depth" width={34} {...AXIS} axisLine={false} />
         <YAxis
           yAxisId="air"
           orientation="right"
           width={38}
-          tick={TEXT}
-          tickLine={false}
+          {...AXIS}
           axisLine={false}
           tickFormatter={(value: number) => `${value}°`.replace('-', '−')}
         />
-        <Tooltip
-          isAnimationActive={false}
-          cursor={{ fill: 'var(--night)' }}
-          contentStyle={{
-            background: 'var(--sheet)',
-            border: '1px solid var(--graphite)',
-            borderRadius: 4,
-            fontSize: 13,
-          }}
-          labelStyle={{ color: 'var(--ink)' }}
-          itemStyle={{ color: 'var(--ink)' }}
-        />
+        <Tooltip {...TIP} cursor={{ fill: 'var(--night)' }} />
         <Bar
           yAxisId="depth"
           dataKey="freezable"
@@ -75,7 +57,7 @@ export default function DaysAheadChart({ days, depthUnit, airUnit }: DaysAheadCh
         {AIR.map(({ key }) => (
           <Line
             key={`${key}-casing`}
-            {...LINE}
+            {...AIR_LINE}
             dataKey={key}
             stroke="var(--paper)"
             strokeWidth={4.6}
@@ -83,15 +65,7 @@ export default function DaysAheadChart({ days, depthUnit, airUnit }: DaysAheadCh
           />
         ))}
         {AIR.map(({ key, dash }) => (
-          <Line
-            key={key}
-            {...LINE}
-            dataKey={key}
-            unit={` ${airUnit}`}
-            stroke="var(--ink)"
-            strokeWidth={1.8}
-            strokeDasharray={dash}
-          />
+          <Line key={key} {...AIR_LINE} dataKey={key} unit={` ${airUnit}`} stroke="var(--ink)" strokeDasharray={dash} />
         ))}
       </ComposedChart>
     </ResponsiveContainer>

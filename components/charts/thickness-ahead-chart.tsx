@@ -11,6 +11,7 @@ import {
   XAxis,
   YAxis,
 } from 'recharts'
+import { AXIS, FLOOR, LINE, TIP } from './chart-parts'
 
 export interface ThicknessPoint {
   when: string
@@ -25,7 +26,6 @@ interface Props {
   unit: string
 }
 
-const TEXT = { fontSize: 12, fill: 'var(--graphite)' }
 /** A tick for each day: every eighth of the three-hour steps. */
 const DAY_STEPS = 8
 /** Distances of the lines, in the reader's unit: the first that needs no more than five. */
@@ -44,32 +44,18 @@ export default function ThicknessAheadChart({ points, carries, unit }: Props) {
           type="number"
           domain={[0, Math.max(1, points.length - 1)]}
           ticks={rows.filter(({ step }) => step % DAY_STEPS === 0).map(({ step }) => step)}
-          interval="equidistantPreserveStart"
           tickFormatter={(step: number) => points[step]?.day ?? ''}
-          tick={TEXT}
-          tickLine={false}
-          axisLine={{ stroke: 'var(--graphite)' }}
+          {...AXIS}
+          {...FLOOR}
         />
         <YAxis
           width={40}
-          tick={TEXT}
-          tickLine={false}
+          {...AXIS}
           axisLine={false}
           domain={[0, Math.ceil(most / between) * between]}
           ticks={Array.from({ length: Math.ceil(most / between) + 1 }, (_, line) => line * between)}
         />
-        <Tooltip
-          labelFormatter={(step) => points[Number(step)]?.when ?? ''}
-          isAnimationActive={false}
-          contentStyle={{
-            background: 'var(--sheet)',
-            border: '1px solid var(--graphite)',
-            borderRadius: 4,
-            fontSize: 13,
-          }}
-          labelStyle={{ color: 'var(--ink)' }}
-          itemStyle={{ color: 'var(--ink)' }}
-        />
+        <Tooltip {...TIP} labelFormatter={(step) => points[Number(step)]?.when ?? ''} />
         <Area
           dataKey="spread"
           name="eight of ten runs"
@@ -81,16 +67,7 @@ export default function ThicknessAheadChart({ points, carries, unit }: Props) {
           isAnimationActive={false}
           activeDot={false}
         />
-        <Line
-          dataKey="middle"
-          name="middle"
-          unit={` ${unit}`}
-          stroke="var(--ink)"
-          strokeWidth={1.8}
-          dot={false}
-          activeDot={false}
-          isAnimationActive={false}
-        />
+        <Line dataKey="middle" name="middle" unit={` ${unit}`} stroke="var(--ink)" {...LINE} />
         <ReferenceLine y={carries} stroke="var(--rust)" strokeDasharray="6 4" />
       </ComposedChart>
     </ResponsiveContainer>

@@ -1,7 +1,7 @@
 // Ice thickness day by day: the model as a line, what was drilled as marks. Loaded on demand (recharts is heavy).
 'use client'
 import { CartesianGrid, ComposedChart, Line, ResponsiveContainer, Scatter, Tooltip, XAxis, YAxis } from 'recharts'
-import { AXIS, TIP } from './chart-parts'
+import { AXIS, FLOOR, LINE, TIP } from '@/components/charts/chart-parts'
 
 export interface ThicknessPoint {
   day: string
@@ -14,19 +14,10 @@ export default function ThicknessChart({ days, unit }: { days: ThicknessPoint[];
     <ResponsiveContainer width="100%" height="100%">
       <ComposedChart data={days} margin={{ top: 12, right: 4, bottom: 0, left: 0 }} accessibilityLayer={false}>
         <CartesianGrid vertical={false} stroke="var(--rule)" />
-        <XAxis dataKey="day" {...AXIS} axisLine={{ stroke: 'var(--graphite)' }} interval="equidistantPreserveStart" />
+        <XAxis dataKey="day" {...AXIS} {...FLOOR} />
         <YAxis width={40} {...AXIS} axisLine={false} />
         <Tooltip {...TIP} cursor={{ stroke: 'var(--graphite)' }} />
-        <Line
-          dataKey="model"
-          name="model"
-          unit={` ${unit}`}
-          stroke="var(--ink)"
-          strokeWidth={1.8}
-          dot={false}
-          connectNulls
-          isAnimationActive={false}
-        />
+        <Line dataKey="model" name="model" unit={` ${unit}`} stroke="var(--ink)" connectNulls {...LINE} />
         <Scatter
           dataKey="measured"
           name="measured"

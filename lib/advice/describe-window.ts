@@ -1,4 +1,5 @@
 // A range of good hours turned into a window: to the quarter hour, with its latest start and when the last layer is set.
+import { HOUR_MILLIS } from '@/lib/physics/constants'
 import type { PreparedHour } from '@/lib/physics/types'
 import { judgeFloodStart, setsAtOf } from './flood-factors'
 import type { ForecastRun } from './forecast-run'
@@ -9,7 +10,6 @@ import { toIso } from './zoned-time'
 import type { HourRange } from './windows'
 import type { AdviceWindow, ScoredHour } from './types'
 
-const HOUR_MILLIS = 3_600_000
 const QUARTERS = Array.from({ length: 60 / PLAN.stepMinutes }, (_, step) => (step * PLAN.stepMinutes) / 60)
 
 /** Without its agreement, which needs the other forecast runs. */

@@ -1,4 +1,5 @@
 // What the fill will be: when to start, how much water and hose, when it skins over and when it carries skaters.
+import { HOUR_MILLIS } from '@/lib/physics/constants'
 import { followGrowth, growFill, type FillGrowth } from '@/lib/physics/fill'
 import { fillSession } from './fill-session'
 import { fillHours, fillSpans } from './fill-spans'
@@ -10,7 +11,6 @@ import { FILL } from './thresholds'
 import { toIso } from './zoned-time'
 import type { FillOutlook } from './types'
 
-const HOUR_MILLIS = 3_600_000
 /** Ice of this many millimetres a millimetre of water: 999.8 / 916.7 kg/m³ (IAPWS). */
 const ICE_PER_WATER = 1.09
 

@@ -1,4 +1,5 @@
 // A fill while it runs: water so far, how it stands on the floor, when it is done, when to look next, and what to fear.
+import { HOUR_MILLIS, MINUTE_MILLIS } from '@/lib/physics/constants'
 import { cornerDepthsM, floorOf, type FloorGrid, type FloorShape } from '@/lib/physics/floor'
 import { hoseHours, levelOf, stageAt } from '@/lib/physics/stage'
 import { hoseWarning, type HoseHour } from './hose-warning'
@@ -6,9 +7,6 @@ import { leakWarning, levelOfReading, type LevelReading } from './leak-warning'
 import { FILLING } from './thresholds'
 import { toIso } from './zoned-time'
 import type { Caution } from './types'
-
-const HOUR_MILLIS = 3_600_000
-const MINUTE_MILLIS = 60_000
 
 /** One time of running hose, as logged. */
 export interface HoseSession {

@@ -1,4 +1,5 @@
 // A fill as a keeper sees it: when the hose runs, and how the water stands hour by hour.
+import { HOUR_MILLIS, MINUTE_MILLIS } from '@/lib/physics/constants'
 import { cornerDepthsM } from '@/lib/physics/floor'
 import { levelOf, stageAt } from '@/lib/physics/stage'
 import type { PreparedHour } from '@/lib/physics/types'
@@ -8,9 +9,6 @@ import type { ForecastRun } from './forecast-run'
 import type { Setting } from './setting'
 import { toIso } from './zoned-time'
 import type { FillHour, FillSpan } from './types'
-
-const HOUR_MILLIS = 3_600_000
-const MINUTE_MILLIS = 60_000
 
 /**
  * When the hose runs, neighbouring hours joined. The last span ends in the minute in which the water is in.

@@ -1,4 +1,5 @@
 // The factors of a flood started at one moment, as numbers from 0 to 1; flood-reasons.ts puts names to them.
+import { HOUR_MILLIS, MINUTE_MILLIS } from '@/lib/physics/constants'
 import { minutesToSet } from '@/lib/physics/layer'
 import { freezeRateMmPerH } from '@/lib/physics/balance'
 import { clearSnow, reportSheet, type SheetState } from '@/lib/physics/sheet'
@@ -12,10 +13,8 @@ import { FLOOD, PERSON } from './thresholds'
 import { toIso } from './zoned-time'
 import type { SheetReport } from './types'
 
-const MINUTE_MILLIS = 60_000
 /** Sums of tenths are a hair off. */
 const ROUNDING_MM = 1e-6
-const HOUR_MILLIS = 3_600_000
 
 export interface FloodFactors {
   bears: number

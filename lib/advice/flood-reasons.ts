@@ -1,4 +1,5 @@
 // Names for the factors of a flood: each becomes a reason with its code, its value and the numbers its sentence needs.
+import { HOUR_MILLIS, MINUTE_MILLIS } from '@/lib/physics/constants'
 import type { HeatBalanceParts } from '@/lib/physics/types'
 import { wetMmOf, type ForecastRun } from './forecast-run'
 import { toIso } from './zoned-time'
@@ -6,9 +7,6 @@ import { FLOOD } from './thresholds'
 import { setsAtOf, type FloodStart } from './flood-factors'
 import type { Setting } from './setting'
 import type { Reason } from './types'
-
-const MINUTE_MILLIS = 60_000
-const HOUR_MILLIS = 3_600_000
 
 /**
  * All factors of a flood as reasons, the one that lets least through first; limits of the person are among them, each

@@ -1,4 +1,5 @@
 // One forecast run seen by the advice: prepared hours, running sums, and the sheet carried through them.
+import { HOUR_MILLIS } from '@/lib/physics/constants'
 import { advanceSheet, createSheet, pourLayer, reportSheet, type SheetState } from '@/lib/physics/sheet'
 import { minutesToSet, type Layer } from '@/lib/physics/layer'
 import type { PreparedHour } from '@/lib/physics/types'
@@ -6,8 +7,6 @@ import { deepestFillMm } from './fill-water'
 import { readStoredSheet } from './stored-sheet'
 import type { Setting } from './setting'
 import type { SheetReport } from './types'
-
-const HOUR_MILLIS = 3_600_000
 
 export interface ForecastRun {
   hours: PreparedHour[]

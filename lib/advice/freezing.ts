@@ -1,4 +1,5 @@
 // A rink that freezes: how thick it is, how thick it will be, when it carries a skater, and what to do about snow on it.
+import { HOUR_MILLIS } from '@/lib/physics/constants'
 import { prepareHours } from '@/lib/physics/prepare'
 import { reportSheet, type SheetState } from '@/lib/physics/sheet'
 import { otherRuns } from './agreement'
@@ -12,7 +13,6 @@ import { FILL } from './thresholds'
 import { toIso } from './zoned-time'
 import type { Caution, JudgeInput, JudgeOptions, Spread } from './types'
 
-const HOUR_MILLIS = 3_600_000
 /** The chart of the days ahead has a value each so many hours. */
 const EVERY_HOURS = 3
 

@@ -1,9 +1,8 @@
 // When the hose of a fill is in danger of freezing, running or left lying.
+import { HOUR_MILLIS } from '@/lib/physics/constants'
 import { GARDEN_HOSE, hoseFilmWm2K, stillHoseHours } from '@/lib/physics/hose'
 import { FILLING } from './thresholds'
 import type { Caution } from './types'
-
-const HOUR_MILLIS = 3_600_000
 
 /** An hour of the forecast at the rink. */
 export interface HoseHour {

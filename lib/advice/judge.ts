@@ -1,4 +1,5 @@
 // The one way in: weather, rink and settings go in, scored hours, windows, a plan, the fill and thaws come out.
+import { HOUR_MILLIS } from '@/lib/physics/constants'
 import { prepareHours } from '@/lib/physics/prepare'
 import { reportSheet, type SheetState } from '@/lib/physics/sheet'
 import { addToTally, bestHour, hourAgreements, otherRuns, startTally, type HourAgreement } from './agreement'
@@ -17,7 +18,6 @@ import type { AdviceWindow, Judgement, JudgeInput, JudgeOptions, ScoredHour } fr
 
 /** Changes when the same input may give another judgement. */
 export const MODEL_VERSION = 'nightsheet-2'
-const HOUR_MILLIS = 3_600_000
 /** Hours after a window that other runs need, so that its last layer can set in them. */
 const HOURS_TO_SET = 24
 

@@ -1,10 +1,10 @@
 // Whether the level that was read falls, or rises less than the hose should make it.
+import { HOUR_MILLIS } from '@/lib/physics/constants'
 import { cornerDepthsM, floorExtremesM, type FloorGrid } from '@/lib/physics/floor'
 import { levelOf, stageAt } from '@/lib/physics/stage'
 import { FILLING } from './thresholds'
 import type { Caution } from './types'
 
-const HOUR_MILLIS = 3_600_000
 const MM_PER_M = 1000
 
 /** A level as a keeper reads it. */

@@ -1,4 +1,5 @@
 // Passes as the keeper wants them: when each would be set on the sheet that the ones before leave, and what speaks against it.
+import { HOUR_MILLIS } from '@/lib/physics/constants'
 import { wetSurfaceBalance } from '@/lib/physics/balance'
 import { advanceSheet, advanceSheetPart, clearSnow, pourLayer, type SheetState } from '@/lib/physics/sheet'
 import type { PreparedHour } from '@/lib/physics/types'
@@ -11,7 +12,6 @@ import { isGood } from './score-hours'
 import { isAvailableAt } from './setting'
 import type { Reason } from './types'
 
-const HOUR_MILLIS = 3_600_000
 /** A factor below this is worth a warning; above it, it is a matter of taste. Ours. [0-1] */
 const WARN_BELOW = 0.5
 /** Half an inch at once freezes slowly, takes in air and stays soft. Rule D02: U.S. Ice Rink Association. [mm] */

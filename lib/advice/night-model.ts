@@ -1,4 +1,5 @@
 // One night packed small: what a browser needs to reckon passes with the same model that judged it.
+import { HOUR_MILLIS } from '@/lib/physics/constants'
 import { prepareHours } from '@/lib/physics/prepare'
 import type { PreparedHour } from '@/lib/physics/types'
 import { carrySheet, type ForecastRun } from './forecast-run'
@@ -6,7 +7,6 @@ import { nightBounds } from './night'
 import { makeSetting, type Setting } from './setting'
 import type { JudgeInput } from './types'
 
-const HOUR_MILLIS = 3_600_000
 /** A layer poured at the end of the night has this long to set. [h] */
 const HOURS_TO_SET = 24
 

@@ -1,4 +1,5 @@
 // One night in data: the verdict, its window and passes, why, and what to mind. Page, alerts and words all use this.
+import { HOUR_MILLIS } from '@/lib/physics/constants'
 import { nightBounds } from './night'
 import { cautionsOf, whyOf } from './night-why'
 import { AGREEMENT } from './thresholds'
@@ -46,7 +47,7 @@ export interface NightSummary {
   cautions: Caution[]
 }
 
-const PRECIPITATION_LOOKAHEAD_MILLIS = 12 * 3_600_000
+const PRECIPITATION_LOOKAHEAD_MILLIS = 12 * HOUR_MILLIS
 /** A trace below this is not worth a word; the limit of the advice is in thresholds.ts. */
 const WORTH_SAYING_MM = 0.1
 
@@ -67,7 +68,7 @@ export function summariseNight(
   const toMillis = bounds.endsAt.getTime()
   const hours = judgement.hours.filter((hour) => {
     const startsAt = Date.parse(hour.time)
-    return startsAt + 3_600_000 > fromMillis && startsAt < toMillis
+    return startsAt + HOUR_MILLIS > fromMillis && startsAt < toMillis
   })
   const windows = judgement.windows.filter(
     (w) => Date.parse(w.endsAt) > fromMillis && Date.parse(w.startsAt) < toMillis,
@@ -127,7 +128,7 @@ function leadingHoldReason(hours: ScoredHour[]): Reason | null {
   const outside = known.filter((hour) => hour.verdict !== 'hold' && hour.isAvailable === false)
   const first = outside[0]
   if (first) {
-    const lastMillis = Date.parse((outside.at(-1) ?? first).time) + 3_600_000
+    const lastMillis = Date.parse((outside.at(-1) ?? first).time) + HOUR_MILLIS
     return { code: 'outside_your_hours', factor: 0, values: { startsAt: first.time, endsAt: toIso(lastMillis) } }
   }
   const reachable = known.filter((hour) => hour.isAvailable !== false)
@@ -142,7 +143,7 @@ function nextPrecipitation(hours: ScoredHour[], fromMillis: number, toMillis: nu
   let coming: ComingPrecipitation | null = null
   for (const { time, weather } of hours) {
     const startsAt = Date.parse(time)
-    if (startsAt + 3_600_000 <= fromMillis || startsAt >= toMillis) continue
+    if (startsAt + HOUR_MILLIS <= fromMillis || startsAt >= toMillis) continue
     const isWet = weather != null && (weather.precipitationMm > WORTH_SAYING_MM || weather.snowfallCm > WORTH_SAYING_MM)
     if (!isWet) {
       if (coming) break
@@ -150,7 +151,7 @@ function nextPrecipitation(hours: ScoredHour[], fromMillis: number, toMillis: nu
     }
     const kind = weather.snowfallCm > 0 ? 'snow' : 'rain'
     coming ??= { kind, startsAt: time, endsAt: time, rainMm: 0, snowfallCm: 0 }
-    coming.endsAt = toIso(startsAt + 3_600_000)
+    coming.endsAt = toIso(startsAt + HOUR_MILLIS)
     coming.rainMm += weather.rainMm
     coming.snowfallCm += weather.snowfallCm
   }

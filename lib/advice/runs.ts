@@ -1,10 +1,10 @@
 // Other runs of the same forecast: the provider's members when there are any, else runs perturbed by the error model.
+import { HOUR_MILLIS } from '@/lib/physics/constants'
 import type { HourlyRecord } from '@/lib/physics/types'
 import { ERROR_MEMORY_HOURS, errorAt, FORECAST_ERROR } from './error-model'
 import { normalFrom, seededUniform } from './random'
 import { randomStart, type RunStart } from './run-starts'
 
-const HOUR_MILLIS = 3_600_000
 /** Longwave from the sky rises with the air and with cloud: 4 ε σ T³ near 0 °C, and what full cloud adds. [W/m² per K, W/m²] Ours. */
 const LONGWAVE_PER_K = 3.8
 const LONGWAVE_PER_CLOUD = 70

@@ -1,4 +1,5 @@
 // Every hour of a run with its scores, verdict and reasons, as the hour in which the keeper would start.
+import { HOUR_MILLIS, MINUTE_MILLIS } from '@/lib/physics/constants'
 import { wetSurfaceBalance } from '@/lib/physics/balance'
 import { dewPointC } from '@/lib/physics/humidity'
 import type { PreparedHour } from '@/lib/physics/types'
@@ -11,9 +12,6 @@ import { snowRuleReasons } from './snow-rules'
 import { PLAN, VERDICT } from './thresholds'
 import { toIso } from './zoned-time'
 import type { HourWeather, Reason, ScoredHour, SheetReport } from './types'
-
-const HOUR_MILLIS = 3_600_000
-const MINUTE_MILLIS = 60_000
 
 /** Score of a start, 0-100: the worse of what the ice and what the person allow, never their mean. */
 export function scoreOf({ ice, person }: { ice: number; person: number }): number {

@@ -1,14 +1,12 @@
 // What all parts of one judgement share: the rink's clock, its site, its layer, when the keeper can go out.
+import { DAY_MILLIS, HOUR_MILLIS, MINUTE_MILLIS } from '@/lib/physics/constants'
 import { RINK_WIND_RATIO, shelterFactor } from '@/lib/physics/site'
 import { NEEDED } from './thresholds'
 import { addDays, instantOfLocal, localDateOf, steadyOffsetMinutes, zoneOffsetsMinutes } from './zoned-time'
 import type { Site } from '@/lib/physics/types'
 import type { JudgeInput } from './types'
 
-const HOUR_MILLIS = 3_600_000
-const MINUTE_MILLIS = 60_000
 const MINUTES_A_DAY = 1440
-const DAY_MILLIS = 24 * HOUR_MILLIS
 
 /** Half-open, in minutes of the local day; `days` has bit 0 for Monday to bit 6 for Sunday. */
 interface MinuteRange {

@@ -1,10 +1,10 @@
 // What came of a night's advice, once it is over: kept or broken, by people's reports, else by the later weather.
+import { HOUR_MILLIS } from '@/lib/physics/constants'
 import { NEEDED } from './thresholds'
 import { instantOfLocal, localDateOf, addDays } from './zoned-time'
 import { localMinuteOf } from './night'
 import type { Judgement, PlannedPass, ScoredHour } from './types'
 
-const HOUR_MILLIS = 3_600_000
 /** More than this between pour and set spoils a layer, as in the advice (rule I05: Les Versants). [mm] */
 const SPOILS_MM = 0.1
 

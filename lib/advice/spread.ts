@@ -1,8 +1,7 @@
 // Quantiles over forecast runs.
+import { MINUTE_MILLIS } from '@/lib/physics/constants'
 import { toIso } from './zoned-time'
 import type { Spread } from './types'
-
-const MINUTE_MILLIS = 60_000
 
 /**
  * Nearest-rank quantile.

@@ -1,9 +1,8 @@
 // Thaw spells: a day or more in which no hour is good for flooding and the sheet loses ice.
+import { HOUR_MILLIS } from '@/lib/physics/constants'
 import { THAW } from './thresholds'
 import { toIso } from './zoned-time'
 import type { Thaw } from './types'
-
-const HOUR_MILLIS = 3_600_000
 
 /** An hour as the search for thaws sees it. */
 export interface ThawHour {

@@ -1,4 +1,5 @@
 // The plan for tonight: quarter hours as slots, each with a first pass and a pass on a sheet that has just been flooded.
+import { HOUR_MILLIS, MINUTE_MILLIS } from '@/lib/physics/constants'
 import { advanceSheet, clearSnow, pourLayer, type SheetState } from '@/lib/physics/sheet'
 import { minutesToSet } from '@/lib/physics/layer'
 import type { PreparedHour } from '@/lib/physics/types'
@@ -14,8 +15,6 @@ import { PLAN } from './thresholds'
 import { toIso } from './zoned-time'
 import type { PlannedPass, ScoredHour } from './types'
 
-const HOUR_MILLIS = 3_600_000
-const MINUTE_MILLIS = 60_000
 const STEP_MILLIS = PLAN.stepMinutes * MINUTE_MILLIS
 
 /**

@@ -1,5 +1,5 @@
 // The nights ahead, one by one: verdict, ice gained or lost, what falls, and how many forecast runs agree.
-import { ICE_DENSITY, WATER_DENSITY } from '@/lib/physics/constants'
+import { HOUR_MILLIS, ICE_DENSITY, WATER_DENSITY } from '@/lib/physics/constants'
 import { tonightDate } from './night'
 import { summariseNight, type NightSummary, type NightVerdict } from './night-summary'
 import { AGREEMENT, FLOOD } from './thresholds'
@@ -7,7 +7,6 @@ import { estimatePasses, type NightPasses } from './week-passes'
 import { addDays, toIso } from './zoned-time'
 import type { AdviceWindow, Judgement, Phase, Reason, ScoredHour, Thaw } from './types'
 
-const HOUR_MILLIS = 3_600_000
 /** From the fourth night on people plan with a forecast and do not decide on it. Ours. */
 const NEAR_NIGHTS = 3
 /** A night of which the forecast covers less than half tells nothing. Ours. */

@@ -1,4 +1,5 @@
 // On a night to hold off: what would make it good. The night is judged again with one thing changed, and the smallest change told.
+import { HOUR_MILLIS } from '@/lib/physics/constants'
 import { prepareHours } from '@/lib/physics/prepare'
 import type { HourlyRecord, PreparedHour } from '@/lib/physics/types'
 import { judgeFloodStart } from './flood-factors'
@@ -8,7 +9,6 @@ import { packNight, type NightModel } from './night-model'
 import { isGood, isHourAvailable } from './score-hours'
 import type { JudgeInput, Phase } from './types'
 
-const HOUR_MILLIS = 3_600_000
 /** Degrees tried, in order. Ours: beyond 10 °C it is another night. [°C] */
 const COLDER_C = [1, 2, 3, 4, 5, 6, 8, 10]
 /** Cloud below this share is no reason to wish for a clear sky. Ours. [0-1] */

@@ -1,4 +1,5 @@
 // When a forecast moves a window, is that worth a word? Small shifts are not; a window that closes always is.
+import { MINUTE_MILLIS } from '@/lib/physics/constants'
 import type { NightSummary } from './night-summary'
 import type { AdviceWindow, Reason } from './types'
 
@@ -10,8 +11,6 @@ export type AdvisedTimes = { state: 'open'; startsAt: Date; endsAt: Date; latest
 
 export type WindowStep =
   { step: 'keep' } | { step: 'open'; window: AdviceWindow } | { step: 'close'; reason: Reason | null }
-
-const MINUTE_MILLIS = 60_000
 
 /**
  * What becomes of the advised window of a night when a new summary arrives.

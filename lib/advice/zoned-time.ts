@@ -1,6 +1,5 @@
 // Wall clocks: a zone's offset at an instant, and the instant of a local date and time, right on clock-change nights.
-const MINUTE = 60_000
-const DAY = 86_400_000
+import { DAY_MILLIS, MINUTE_MILLIS } from '@/lib/physics/constants'
 
 // Making a formatter takes a tenth of a millisecond, using one a few microseconds.
 const formatters = new Map<string, Intl.DateTimeFormat>()
@@ -15,7 +14,7 @@ function formatterOf(timeZone: string): Intl.DateTimeFormat {
 }
 
 // Clocks change on the quarter hour, so an offset holds for all of one; the same few nights are asked for over and over.
-const QUARTER = 15 * MINUTE
+const QUARTER = 15 * MINUTE_MILLIS
 const MOST_OFFSETS = 10_000
 const offsets = new Map<string, number>()
 
@@ -47,7 +46,7 @@ function readOffset(atMillis: number, timeZone: string): number {
 /** The offset of a whole stretch when it begins and ends with the same and is too short to change and change back; else null. [min] */
 export function steadyOffsetMinutes(fromMillis: number, toMillis: number, timeZone: string): number | null {
   const atFirst = zoneOffsetMinutes(fromMillis, timeZone)
-  const isShort = toMillis - fromMillis < 25 * DAY
+  const isShort = toMillis - fromMillis < 25 * DAY_MILLIS
   return isShort && atFirst === zoneOffsetMinutes(toMillis, timeZone) ? atFirst : null
 }
 
@@ -66,7 +65,7 @@ export function zoneOffsetsMinutes(atMillis: readonly number[], timeZone: string
 
 /** Local calendar date of an instant, 'yyyy-MM-dd'. */
 export function localDateOf(atMillis: number, timeZone: string): string {
-  return toIso(atMillis + zoneOffsetMinutes(atMillis, timeZone) * MINUTE).slice(0, 10)
+  return toIso(atMillis + zoneOffsetMinutes(atMillis, timeZone) * MINUTE_MILLIS).slice(0, 10)
 }
 
 /**
@@ -78,13 +77,13 @@ export function localDateOf(atMillis: number, timeZone: string): string {
  * @returns Instant. [ms since the epoch]
  */
 export function instantOfLocal(date: string, minuteOfDay: number, timeZone: string): number {
-  const wall = Date.parse(`${date}T00:00:00Z`) + minuteOfDay * MINUTE
-  const before = zoneOffsetMinutes(wall - DAY, timeZone)
-  const after = zoneOffsetMinutes(wall + DAY, timeZone)
-  const early = wall - Math.max(before, after) * MINUTE
-  const late = wall - Math.min(before, after) * MINUTE
+  const wall = Date.parse(`${date}T00:00:00Z`) + minuteOfDay * MINUTE_MILLIS
+  const before = zoneOffsetMinutes(wall - DAY_MILLIS, timeZone)
+  const after = zoneOffsetMinutes(wall + DAY_MILLIS, timeZone)
+  const early = wall - Math.max(before, after) * MINUTE_MILLIS
+  const late = wall - Math.min(before, after) * MINUTE_MILLIS
   for (const candidate of [early, late]) {
-    if (candidate + zoneOffsetMinutes(candidate, timeZone) * MINUTE === wall) return candidate
+    if (candidate + zoneOffsetMinutes(candidate, timeZone) * MINUTE_MILLIS === wall) return candidate
   }
   // In the gap: the change itself is the first moment whose clock shows more than asked.
   return firstInstantOfOffset(early, late, after, timeZone)
@@ -93,8 +92,8 @@ export function instantOfLocal(date: string, minuteOfDay: number, timeZone: stri
 function firstInstantOfOffset(low: number, high: number, offset: number, timeZone: string): number {
   let from = low
   let to = high
-  while (to - from > MINUTE) {
-    const middle = from + Math.floor((to - from) / 2 / MINUTE) * MINUTE
+  while (to - from > MINUTE_MILLIS) {
+    const middle = from + Math.floor((to - from) / 2 / MINUTE_MILLIS) * MINUTE_MILLIS
     if (zoneOffsetMinutes(middle, timeZone) === offset) to = middle
     else from = middle
   }
@@ -103,7 +102,7 @@ function firstInstantOfOffset(low: number, high: number, offset: number, timeZon
 
 /** The calendar date some days later, 'yyyy-MM-dd'. */
 export function addDays(date: string, days: number): string {
-  return toIso(Date.parse(`${date}T00:00:00Z`) + days * DAY).slice(0, 10)
+  return toIso(Date.parse(`${date}T00:00:00Z`) + days * DAY_MILLIS).slice(0, 10)
 }
 
 const TWO_DIGITS = Array.from({ length: 60 }, (_, number) => String(number).padStart(2, '0'))
@@ -115,12 +114,12 @@ let cachedDate = ''
  * date of the day last written is kept.
  */
 export function toIso(atMillis: number): string {
-  const day = Math.floor(atMillis / DAY)
+  const day = Math.floor(atMillis / DAY_MILLIS)
   if (day !== cachedDay) {
     cachedDate = new Date(atMillis).toISOString().slice(0, 11)
     cachedDay = day
   }
-  const second = Math.floor((atMillis - day * DAY) / 1000)
+  const second = Math.floor((atMillis - day * DAY_MILLIS) / 1000)
   const minute = Math.floor(second / 60)
   const clock = `${TWO_DIGITS[Math.floor(minute / 60)]}:${TWO_DIGITS[minute % 60]}:${TWO_DIGITS[second % 60]}`
   return `${cachedDate}${clock}Z`

@@ -36,3 +36,7 @@ export const SURFACE_EMISSIVITY = 0.97
 export const STANDARD_PRESSURE_HPA = 1013.25
 /** Seconds in the model's hour. [s] */
 export const HOUR_SECONDS = 3600
+/** The same and its parts, for instants counted in milliseconds. [ms] By definition. */
+export const HOUR_MILLIS = 3_600_000
+export const MINUTE_MILLIS = 60_000
+export const DAY_MILLIS = 24 * HOUR_MILLIS

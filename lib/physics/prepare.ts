@@ -1,7 +1,7 @@
 // From provider-neutral records to hours without gaps, seen from one rink.
 import { bridgeLoneGaps, hasNeeded } from './gaps'
 import { inRange } from './check'
-import { STANDARD_PRESSURE_HPA } from './constants'
+import { HOUR_MILLIS, STANDARD_PRESSURE_HPA } from './constants'
 import { saturationOverWaterHpa } from './humidity'
 import { windAtRinkMps } from './site'
 import { blackBodyWm2, clearSkyEmissivity, cloudySkyEmissivity, longwaveOnRinkWm2 } from './sky'
@@ -10,7 +10,6 @@ import { sunshineOnRinkWm2 } from './horizon'
 import { clearSkyShortwaveAtWm2, cloudShortwaveFactor } from './sun'
 import type { HourlyRecord, PreparedHour, Site } from './types'
 
-const HOUR_MILLIS = 3_600_000
 /** Gust over mean wind where no gust is reported. [-] Usual ratio over land, 1.4-1.6; from memory. */
 const GUST_FACTOR = 1.5
 

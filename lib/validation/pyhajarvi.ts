@@ -1,4 +1,5 @@
 // Säkylän Pyhäjärvi: the model driven by measured weather against drilled ice.
+import { HOUR_MILLIS } from '@/lib/physics/constants'
 import { advanceSheet, createSheet, reportSheet } from '@/lib/physics/sheet'
 import { ashtonThicknessM, stefanThicknessM } from '@/lib/physics/stefan'
 import { dewPointFromHumidityC } from '@/lib/physics/humidity'
@@ -7,7 +8,6 @@ import { prepareHours } from '@/lib/physics/prepare'
 import { summarise, type ValidationLine } from './scores'
 import type { HourlyRecord } from '@/lib/physics/types'
 
-const HOUR_MILLIS = 3_600_000
 const SITE = { latitudeDeg: 61, longitudeDeg: 22.29, shelter: 1, skyView: 1 }
 /** Mean depth of the lake. [mm] */
 const DEPTH_MM = 5400

@@ -1,9 +1,8 @@
 // Refuses reports that contradict themselves before anything is learned from them.
+import { HOUR_MILLIS, MINUTE_MILLIS } from '@/lib/physics/constants'
 import { inRange } from '@/lib/physics/check'
 import type { YardLesson, YardReport } from './types'
 
-const HOUR_MILLIS = 3_600_000
-const MINUTE_MILLIS = 60_000
 /** A layer that was watched for longer than this was not watched. [min] Ours: four days. */
 const LONGEST_WATCH_MINUTES = 4 * 24 * 60
 

@@ -1,4 +1,5 @@
 // What a report should have been in a yard, by the model: minutes until set, or thickness.
+import { HOUR_MILLIS } from '@/lib/physics/constants'
 import { advanceSheet, createSheet, pourLayer, reportSheet, type SheetState } from '@/lib/physics/sheet'
 import { minutesToSet } from '@/lib/physics/layer'
 import { prepareHours } from '@/lib/physics/prepare'
@@ -6,8 +7,6 @@ import type { PreparedHour } from '@/lib/physics/types'
 import { readStoredSheet } from '../stored-sheet'
 import { SHELTER_NODES, SKY_VIEW_NODES } from './figures'
 import type { Yard, YardLesson, YardReport } from './types'
-
-const HOUR_MILLIS = 3_600_000
 
 export type Place = Pick<YardLesson, 'latitudeDeg' | 'longitudeDeg'>
 

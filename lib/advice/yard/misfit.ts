@@ -1,12 +1,9 @@
 // How badly a yard fits a report, in standard deviations, soft towards wild ones.
+import { DAY_MILLIS, HOUR_MILLIS, MINUTE_MILLIS } from '@/lib/physics/constants'
 import { reportSheet } from '@/lib/physics/sheet'
 import { DRILLED, MOMENT_MINUTES, SET_TIME_LOG_SD, WILD_BEYOND_SD } from './figures'
 import { expectedInAny, startingSheet, type Place } from './expected'
 import type { LayerReport, Yard, YardReport } from './types'
-
-const MINUTE_MILLIS = 60_000
-const HOUR_MILLIS = 3_600_000
-const DAY_MILLIS = 24 * HOUR_MILLIS
 
 /** A report ready to be held against any yard. */
 export interface HeldReport {

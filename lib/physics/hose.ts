@@ -1,9 +1,7 @@
 // The hose: what flows through it, and how long still water in it stays liquid.
 import { FUSION_J_PER_KG, ICE_CONDUCTIVITY, WATER_DENSITY, WATER_HEAT_CAPACITY } from './constants'
+import { cylinderNusselt } from './convection'
 import { inRange } from './check'
-
-/** Hazen-Williams factor for m and m³/s, from the US form below. */
-const HEAD_FACTOR = 10.9617
 
 /**
  * Flow by the bucket test.
@@ -17,38 +15,6 @@ const HEAD_FACTOR = 10.9617
  */
 export function bucketFlowLPerMin(litres: number, seconds: number): number {
   return (inRange('litres [L]', litres, 1e-6, 1e6) * 60) / inRange('seconds [s]', seconds, 1e-6, 1e6)
-}
-
-/**
- * Head lost to friction in a pipe or hose.
- *
- * @param flowM3PerS Flow. [m³/s]
- * @param diameterM Bore. [m]
- * @param lengthM Length. [m]
- * @param smoothness Hazen-Williams coefficient. [-], 140-150 for plastic and rubber
- * @returns Head. [m of water]
- *
- * Source: Hazen-Williams as printed in US units, 0.2083 (100/C)^1.852 q^1.852 / d^4.8655 ft per 100 ft, converted.
- */
-export function frictionHeadM(flowM3PerS: number, diameterM: number, lengthM: number, smoothness = 140): number {
-  return (HEAD_FACTOR * lengthM * Math.pow(flowM3PerS / smoothness, 1.852)) / Math.pow(diameterM, 4.8655)
-}
-
-/**
- * Flow of an open-ended hose when friction takes all the pressure.
- *
- * @param pressurePa Pressure at the tap. [Pa]
- * @param diameterM Bore. [m]
- * @param lengthM Length. [m]
- * @param smoothness Hazen-Williams coefficient. [-]
- * @returns Flow. [L/min]; fittings left out, so an upper bound
- *
- * Source: Hazen-Williams solved for the flow.
- */
-export function openHoseFlowLPerMin(pressurePa: number, diameterM: number, lengthM: number, smoothness = 140): number {
-  const headM = pressurePa / (WATER_DENSITY * 9.80665)
-  const flow = smoothness * Math.pow((headM * Math.pow(diameterM, 4.8655)) / (HEAD_FACTOR * lengthM), 1 / 1.852)
-  return flow * 60_000
 }
 
 /** A pipe or hose as a thermal resistance around still water. */
@@ -109,14 +75,12 @@ const STILL_FILM_WM2K = 10
  * @returns Coefficient, never below that of still air. [W m⁻² K⁻¹]
  * @throws RangeError outside the ranges.
  *
- * Source: Churchill & Bernstein 1977, cylinder in cross flow; from memory, held against Incropera's example 7.4.
+ * Source: cylinderNusselt with air near 0 °C, held against Incropera's example 7.4.
  */
 export function hoseFilmWm2K(windMps: number, outsideM: number): number {
   const speed = inRange('windMps [m/s]', windMps, 0, 40)
   const reynolds = (speed * inRange('outsideM [m]', outsideM, 0.001, 0.5)) / AIR.viscosity
-  const front = (0.62 * Math.sqrt(reynolds) * Math.cbrt(AIR.prandtl)) / (1 + (0.4 / AIR.prandtl) ** (2 / 3)) ** 0.25
-  const nusselt = 0.3 + front * (1 + (reynolds / 282_000) ** (5 / 8)) ** (4 / 5)
-  return Math.max(STILL_FILM_WM2K, (nusselt * AIR.conductivity) / outsideM)
+  return Math.max(STILL_FILM_WM2K, (cylinderNusselt(reynolds, AIR.prandtl) * AIR.conductivity) / outsideM)
 }
 
 /**

@@ -1,4 +1,4 @@
-// Water vapour: saturation over water and ice, dew and frost point, the psychrometric coefficient.
+// Water vapour: saturation over water and ice, dew point, the psychrometric coefficient.
 import { AIR_HEAT_CAPACITY, VAPORISATION_J_PER_KG, VAPOUR_MASS_RATIO, ZERO_CELSIUS_K } from './constants'
 import { inRange } from './check'
 
@@ -50,21 +50,6 @@ export function dewPointC(vapourPressureHpa: number): number {
     dewPoint -= Math.log(saturationOverWaterHpa(Math.max(-80, dewPoint)) / vapourPressureHpa) / relativeSlope
   }
   return dewPoint
-}
-
-/**
- * Frost point (over ice) from vapour pressure.
- *
- * @param vapourPressureHpa Vapour pressure. [hPa], above 0 to 6.112
- * @returns Frost point. [°C]
- * @throws RangeError outside the range: above 6.112 hPa there is no frost point.
- *
- * Source: inversion of the WMO-No. 8 Magnus form over ice.
- */
-export function frostPointC(vapourPressureHpa: number): number {
-  inRange('vapourPressureHpa [hPa]', vapourPressureHpa, 1e-6, 6.112)
-  const logRatio = Math.log(vapourPressureHpa / 6.112)
-  return (272.62 * logRatio) / (22.46 - logRatio)
 }
 
 /**

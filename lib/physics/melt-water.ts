@@ -1,5 +1,5 @@
-// Water that has to go somewhere in spring, and snow that water melts under the liner.
-import { FUSION_J_PER_KG, ICE_HEAT_CAPACITY, WATER_DENSITY, WATER_HEAT_CAPACITY } from './constants'
+// Water that has to go somewhere in spring, and snow that brings water up over floating ice.
+import { WATER_DENSITY } from './constants'
 import { inRange } from './check'
 
 /**
@@ -18,29 +18,6 @@ export function meltWaterM3(pouredL: number, areaM2: number, sublimatedMm = 0, s
   const lostL = inRange('sublimatedMm [mm]', sublimatedMm, 0, 500) * inRange('areaM2 [m²]', areaM2, 0.01, 1e6)
   const keptL = inRange('pouredL [L]', pouredL, 0, 1e9) - lostL - inRange('shavedL [L]', shavedL, 0, 1e9)
   return Math.max(0, keptL) / 1000
-}
-
-/**
- * Depth of snow that a fill can melt with its own warmth alone, while all of it stays liquid.
- *
- * @param waterMm Water over it. [mm], 0 to 3000
- * @param waterC Its temperature. [°C], 0 to 40
- * @param snow Density [kg/m³], 10 to 600, and temperature [°C], -40 to 0, of the snow.
- * @returns Snow melted once the water is down to 0 °C. [cm]
- * @throws RangeError outside the ranges.
- *
- * Source: balance of heat, c_w T of the water against L + c_i |T| of the snow.
- */
-export function snowMeltedCm(
-  waterMm: number,
-  waterC: number,
-  snow: { densityKgM3: number; temperatureC: number },
-): number {
-  const warmthJM2 =
-    inRange('waterMm [mm]', waterMm, 0, 3000) * WATER_HEAT_CAPACITY * inRange('waterC [°C]', waterC, 0, 40)
-  const coldC = inRange('temperatureC [°C]', snow.temperatureC, -40, 0)
-  const meltKgM2 = warmthJM2 / (FUSION_J_PER_KG - ICE_HEAT_CAPACITY * coldC)
-  return (meltKgM2 / inRange('densityKgM3 [kg/m³]', snow.densityKgM3, 10, 600)) * 100
 }
 
 /**

@@ -48,25 +48,6 @@ export function ashtonThicknessM(
 }
 
 /**
- * Time in which ice grows from one thickness to another at a steady temperature by the same form.
- *
- * @param fromM Ice at the start. [m]
- * @param toM Ice wanted. [m], at least `fromM`
- * @param kelvinsBelow Freezing point less air. [K], above 0
- * @param bulkWm2K Transfer between surface and air. [W m⁻² K⁻¹]
- * @returns Time. [h]
- * @throws RangeError for arguments out of range.
- *
- * Source: Ashton 1989, integrated here.
- */
-export function ashtonHours(fromM: number, toM: number, kelvinsBelow: number, bulkWm2K: number): number {
-  inRange('fromM [m]', fromM, 0, toM)
-  inRange('kelvinsBelow [K]', kelvinsBelow, 1e-6, 100)
-  const path = (toM - fromM) / bulkWm2K + (toM * toM - fromM * fromM) / (2 * ICE_CONDUCTIVITY)
-  return (LATENT * path) / kelvinsBelow / 3600
-}
-
-/**
  * Growth constant λ of Neumann's exact solution, h = 2 λ √(α t), for water at 0 °C.
  *
  * @param kelvinsBelow Freezing point less surface. [K], 0 to 60
@@ -111,21 +92,6 @@ function errorFunction(x: number): number {
     sum += term / (2 * n + 1)
   }
   return (2 / Math.sqrt(Math.PI)) * sum
-}
-
-/**
- * Ice thickness by a degree-day coefficient.
- *
- * @param coefficient By exposure: windy lake 2.7, average lake with snow 1.7-2.4, river 1.4-1.7. [cm (°C d)^-1/2]
- * @param freezingDegreeDays Degree-days below 0 °C. [°C d], 0 or more
- * @returns Thickness. [cm]
- * @throws RangeError for negative arguments.
- *
- * Source: US Army Corps of Engineers, EM 1110-2-1612 and ERDC/CRREL TN 04-3; season-scale lake ice, poor under 10 cm.
- */
-export function degreeDayThicknessCm(coefficient: number, freezingDegreeDays: number): number {
-  inRange('coefficient [cm (°C d)^-1/2]', coefficient, 0, 4)
-  return coefficient * Math.sqrt(inRange('freezingDegreeDays [°C d]', freezingDegreeDays, 0, 1e5))
 }
 
 /** Bulk coefficient of the fall-back. [W m⁻² K⁻¹] Middle of Ashton's 10-30. */

@@ -43,19 +43,3 @@ export function frostbiteBand(windChill: number): FrostbiteBand {
   if (rounded > -55) return { fromMinutes: 2, toMinutes: 5 }
   return { fromMinutes: 0, toMinutes: 2 }
 }
-
-/**
- * Minutes to frostbite in strong wind.
- *
- * @param airTemperatureC Air. [°C], below -4.8
- * @param windSpeedMps Wind at 10 m. [m/s], 25 to 80 km/h
- * @returns Minutes, or null where the equation does not hold (outside the wind range, or over 30 minutes).
- *
- * Source: equation in the United States' forecast software: [-24.5 (0.667 V + 4.8) + 2111] (-4.8 - T)^-1.668, V in km/h.
- */
-export function frostbiteMinutes(airTemperatureC: number, windSpeedMps: number): number | null {
-  const windKmh = windSpeedMps * KMH_PER_MPS
-  if (!(windKmh > 25 && windKmh <= 80 && airTemperatureC < -4.8)) return null
-  const minutes = (-24.5 * (0.667 * windKmh + 4.8) + 2111) * Math.pow(-4.8 - airTemperatureC, -1.668)
-  return minutes <= 30 ? minutes : null
-}

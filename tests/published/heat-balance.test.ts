@@ -9,16 +9,12 @@ import {
   SURFACE_EMISSIVITY,
   VAPORISATION_J_PER_KG,
 } from '@/lib/physics/constants'
-import { cylinderNusselt, plateNusselt, warmFaceUpNusselt } from '@/lib/physics/convection'
+import { cylinderNusselt } from '@/lib/physics/convection'
 import { psychrometricHpaPerK, saturationOverWaterHpa } from '@/lib/physics/humidity'
 import { blackBodyWm2, clearSkyEmissivity, cloudySkyEmissivity } from '@/lib/physics/sky'
-import { frozenByColdMm } from '@/lib/physics/water-heat'
-import {
-  CLEAR_SKY_EMISSIVITIES,
-  crawfordDuchonEmissivity,
-  faoNetLongwaveMj,
-  indoorRinkTransfer,
-} from '@/lib/validation/published-forms'
+import { CLEAR_SKY_EMISSIVITIES } from '@/lib/validation/published-forms'
+import { frozenByColdMm, indoorRinkTransfer, plateNusselt, warmFaceUpNusselt } from '../support/published-forms/heat'
+import { crawfordDuchonEmissivity, faoNetLongwaveMj } from '../support/published-forms/sky-and-sun'
 import { steadyHour } from '../support/steady-hours'
 
 describe('longwave', () => {

@@ -1,13 +1,13 @@
 // Water vapour against handbooks and releases. The source stands beside each value.
 import { describe, expect, test } from 'vitest'
+import { dewPointFromHumidityC, saturationOverIceHpa, saturationOverWaterHpa } from '@/lib/physics/humidity'
 import {
-  dewPointFromHumidityC,
-  frostPointC,
-  saturationOverIceHpa,
-  saturationOverWaterHpa,
-} from '@/lib/physics/humidity'
-import { humidityRatio, ratioFromWetBulb, vapourFromWetBulbHpa, wetBulbC } from '@/lib/physics/psychrometry'
-import { iapwsSaturationPa, iapwsSublimationPa } from '@/lib/validation/published-forms'
+  humidityRatio,
+  ratioFromWetBulb,
+  vapourFromWetBulbHpa,
+  wetBulbC,
+} from '../support/published-forms/psychrometry'
+import { frostPointC, iapwsSaturationPa, iapwsSublimationPa } from '../support/published-forms/vapour'
 
 describe('saturation over ice', () => {
   test.each([

@@ -2,15 +2,9 @@
 import { describe, expect, test } from 'vitest'
 import { freezeRateMmPerH, wetSurfaceBalance } from '@/lib/physics/balance'
 import { prepareHours } from '@/lib/physics/prepare'
-import { heatToFreezeJ } from '@/lib/physics/water-heat'
-import {
-  ashtonHours,
-  ashtonThicknessM,
-  degreeDayThicknessCm,
-  neumannLambda,
-  neumannThicknessM,
-  stefanThicknessM,
-} from '@/lib/physics/stefan'
+import { ashtonThicknessM, neumannLambda, neumannThicknessM, stefanThicknessM } from '@/lib/physics/stefan'
+import { heatToFreezeJ } from '../support/published-forms/heat'
+import { ashtonHours, degreeDayThicknessCm } from '../support/published-forms/ice-and-snow'
 
 const M_PER_INCH = 0.0254
 /** One °F day is 1/1.8 °C day, so a coefficient in inch per root °F day is this many cm per root °C day. */

@@ -7,7 +7,7 @@ import {
   sunPositionDeg,
   sunUpDownMillis,
 } from '@/lib/physics/sun'
-import { extraterrestrialMj, julianDate } from '@/lib/validation/published-forms'
+import { extraterrestrialMj, julianDate } from '../support/published-forms/sky-and-sun'
 
 const PLACES: Record<string, [number, number]> = {
   Stockholm: [59.32938, 18.06871],

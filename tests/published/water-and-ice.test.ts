@@ -1,11 +1,12 @@
 // Hoses, floors, floating loads and snow against published tables and worked examples. The source stands beside each value.
 import { describe, expect, test } from 'vitest'
-import { bucketFlowLPerMin, frictionHeadM, hoursToCool, openHoseFlowLPerMin } from '@/lib/physics/hose'
+import { bucketFlowLPerMin, hoursToCool } from '@/lib/physics/hose'
 import { FUSION_J_PER_KG, WATER_HEAT_CAPACITY } from '@/lib/physics/constants'
-import { floatingLoadKg, CAUTIOUS_GOLD_PA } from '@/lib/physics/bearing'
 import { floorFromCorners } from '@/lib/physics/floor'
 import { hoseHours, stageAt } from '@/lib/physics/stage'
 import { newSnowDensity, snowConductivity } from '@/lib/physics/snow'
+import { frictionHeadM, openHoseFlowLPerMin } from '../support/published-forms/hose-flow'
+import { CAUTIOUS_GOLD_PA, floatingLoadKg } from '../support/published-forms/ice-and-snow'
 
 const M_PER_INCH = 0.0254
 const M_PER_FOOT = 0.3048

@@ -1,8 +1,8 @@
 // Wind chill, frostbite and the wind profile against official charts. The source stands beside each value.
 import { describe, expect, test } from 'vitest'
-import { frostbiteBand, frostbiteMinutes, windChillC } from '@/lib/physics/wind-chill'
-import { usWindChillF } from '@/lib/validation/published-forms'
+import { frostbiteBand, windChillC } from '@/lib/physics/wind-chill'
 import { logLawRatio, OPEN_GROUND_ROUGHNESS_M } from '@/lib/physics/site'
+import { frostbiteMinutes, usWindChillF } from '../support/published-forms/skin'
 
 // Environment Canada wind chill chart (2001 index), 132 of its 192 cells; columns are air temperatures.
 const AIR_C = [5, 0, -5, -10, -15, -20, -25, -30, -35, -40, -45, -50]

@@ -5,12 +5,12 @@ import { fillProgress } from '@/lib/advice/fill-progress'
 import { judge } from '@/lib/advice/judge'
 import type { ScoredHour } from '@/lib/advice/types'
 import { floorFromCorners } from '@/lib/physics/floor'
-import { openHoseFlowLPerMin } from '@/lib/physics/hose'
 import { linerAcrossM } from '@/lib/physics/liner'
-import { snowMeltedCm } from '@/lib/physics/melt-water'
 import { fillByHour, hoseHours, stageAt } from '@/lib/physics/stage'
-import { heatToFreezeJ } from '@/lib/physics/water-heat'
 import { hourOf, inputOf } from '../../support/advice-weather'
+import { heatToFreezeJ } from '../../support/published-forms/heat'
+import { openHoseFlowLPerMin } from '../../support/published-forms/hose-flow'
+import { snowMeltedCm } from '../../support/published-forms/ice-and-snow'
 
 const M_PER_FOOT = 0.3048
 const M_PER_INCH = 0.0254

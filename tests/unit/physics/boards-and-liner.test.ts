@@ -3,7 +3,8 @@ import { describe, expect, test } from 'vitest'
 import { boardHeightM, footMomentNmPerM, freezingRiseM, lumberFor, waterPushNPerM } from '@/lib/physics/boards'
 import { GARDEN_HOSE, hoseFilmWm2K, stillHoseHours } from '@/lib/physics/hose'
 import { linerAcrossM, linerToOrderM } from '@/lib/physics/liner'
-import { meltWaterM3, snowMeltedCm, snowThatFloodsIceCm } from '@/lib/physics/melt-water'
+import { meltWaterM3, snowThatFloodsIceCm } from '@/lib/physics/melt-water'
+import { snowMeltedCm } from '../../support/published-forms/ice-and-snow'
 
 const N_PER_LB = 4.4482216
 const M_PER_FOOT = 0.3048

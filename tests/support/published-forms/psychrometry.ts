@@ -1,7 +1,7 @@
 // Wet bulb and humidity ratio: what moist air can do to a drop or a wetted thermometer.
-import { VAPOUR_MASS_RATIO } from './constants'
-import { inRange } from './check'
-import { saturationOverIceHpa, saturationOverWaterHpa } from './humidity'
+import { VAPOUR_MASS_RATIO } from '@/lib/physics/constants'
+import { inRange } from '@/lib/physics/check'
+import { saturationOverIceHpa, saturationOverWaterHpa } from '@/lib/physics/humidity'
 
 /** Psychrometer coefficients of an aspirated thermometer, wick wet and wick iced. [1/K] AMS Glossary of Meteorology. */
 const WET_WICK = 6.6e-4

@@ -1,15 +1,11 @@
 // The demo's log: what people could have written, once.
-import { afterAll, beforeAll, expect, test } from 'vitest'
+import { expect, test } from 'vitest'
 import { seedDemo } from '@/db/seeds/dev'
 import { DEMO_LOG } from '@/db/seeds/log-nights'
-import { createTestDatabase, type TestDatabase } from '../../support/test-database'
+import { givenDatabase } from '@/tests/support/given-cast'
 
 const NOW = new Date('2027-01-20T17:00:00Z')
-let database: TestDatabase
-beforeAll(async () => {
-  database = await createTestDatabase()
-})
-afterAll(() => database.drop())
+const database = givenDatabase()
 
 test('three weeks of entries with answers, and seeding again adds none', async () => {
   const entries = () => database.db('log_entries').orderBy('happened_at').select('id', 'kind', 'outcome', 'version')

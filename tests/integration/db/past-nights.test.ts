@@ -1,15 +1,11 @@
 // The demo's record: three weeks judged and settled, once, and nobody is told of them.
-import { afterAll, beforeAll, expect, test } from 'vitest'
+import { expect, test } from 'vitest'
 import { seedDemo } from '@/db/seeds/dev'
 import { PAST_NIGHTS } from '@/db/seeds/past-weather'
-import { createTestDatabase, type TestDatabase } from '../../support/test-database'
+import { givenDatabase } from '@/tests/support/given-cast'
 
 const NOW = new Date('2027-01-20T17:00:00Z')
-let database: TestDatabase
-beforeAll(async () => {
-  database = await createTestDatabase()
-})
-afterAll(() => database.drop())
+const database = givenDatabase()
 
 test('the record is kept and broken, and seeding again changes nothing', async () => {
   const record = () => database.db('night_outcomes').orderBy('night_date').select('night_date', 'said', 'result')

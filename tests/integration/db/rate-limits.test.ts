@@ -1,16 +1,12 @@
 // Counting tries: at once, by window, by visitor.
 import { randomUUID } from 'node:crypto'
-import { afterAll, beforeAll, expect, test } from 'vitest'
+import { expect, test } from 'vitest'
 import { countHit } from '@/db/queries/rate-limits'
 import { LIMITS, spend, spendByVisitor } from '@/lib/services/rate-limits'
-import { createTestDatabase, type TestDatabase } from '@/tests/support/test-database'
+import { givenDatabase } from '@/tests/support/given-cast'
 import { minutesLater, NOW, visitor } from '@/tests/support/visitor'
 
-let database: TestDatabase
-beforeAll(async () => {
-  database = await createTestDatabase()
-})
-afterAll(() => database.drop())
+const database = givenDatabase()
 
 test('thirty tries at once are counted one by one', async () => {
   const key = randomUUID()

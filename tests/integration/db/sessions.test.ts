@@ -1,16 +1,12 @@
 // Rows of sessions and links: found, extended, ended.
-import { afterAll, beforeAll, expect, test } from 'vitest'
+import { expect, test } from 'vitest'
 import { consumeAccountLink, findGoodAccountLink, insertAccountLink } from '@/db/queries/account-links'
 import { extendSession, findSession, insertSession } from '@/db/queries/sessions'
 import { hashSessionToken } from '@/lib/auth/session-tokens'
-import { createTestDatabase, type TestDatabase } from '@/tests/support/test-database'
+import { givenDatabase } from '@/tests/support/given-cast'
 import { minutesLater, newMember, NOW } from '@/tests/support/visitor'
 
-let database: TestDatabase
-beforeAll(async () => {
-  database = await createTestDatabase()
-})
-afterAll(() => database.drop())
+const database = givenDatabase()
 
 test('a session lives until it expires, and longer when extended', async () => {
   const { userId } = await newMember(database.db)

@@ -12,22 +12,18 @@ import { startWeatherFake, type WeatherFake } from '@/fakes/weather/server'
 import { getHealth } from '@/lib/services/health'
 import { createCast, type Cast } from '@/tests/support/cast'
 import { eveningPlace } from '@/tests/support/evening-place'
-import { createTestDatabase, type TestDatabase } from '@/tests/support/test-database'
+import { givenDatabase } from '@/tests/support/given-cast'
 
 const START_MILLIS = 60_000
 
-let database: TestDatabase
+const database = givenDatabase()
 let weather: WeatherFake
 let mail: MailFake
 let cast: Cast
 const workers = new Set<ChildProcess>()
 
 beforeAll(async () => {
-  ;[database, weather, mail] = await Promise.all([
-    createTestDatabase(),
-    startWeatherFake({ port: 0 }),
-    startMailFake({ smtpPort: 0, pagePort: 0 }),
-  ])
+  ;[weather, mail] = await Promise.all([startWeatherFake({ port: 0 }), startMailFake({ smtpPort: 0, pagePort: 0 })])
   const place = eveningPlace(new Date())
   cast = await createCast(database.db, new Date(), {
     latitude: String(place.latitudeDeg),
@@ -39,7 +35,7 @@ beforeAll(async () => {
 afterEach(async () => {
   await Promise.all([...workers].map((worker) => end(worker, 'SIGKILL')))
 })
-afterAll(() => Promise.all([database.drop(), weather.close(), mail.close()]))
+afterAll(() => Promise.all([weather.close(), mail.close()]))
 
 async function startWorker(): Promise<ChildProcess> {
   const vapid = webPush.generateVAPIDKeys()

@@ -1,5 +1,5 @@
 // A new address, sessions one by one, tests of channels, everything to take along, and the end of an account.
-import { afterAll, beforeAll, beforeEach, describe, expect, test } from 'vitest'
+import { beforeEach, describe, expect, test } from 'vitest'
 import { findMessageToDeliver } from '@/db/queries/deliveries'
 import { pruneExpired } from '@/db/queries/prune'
 import { putPushSubscription } from '@/db/queries/push-subscriptions'
@@ -11,16 +11,11 @@ import { confirmAddress, signInWithPassword, signUp, takeNewAddress } from '@/li
 import { askForEmailChange, getAccount } from '@/lib/services/own-account'
 import { endOwnSession, listOwnSessions } from '@/lib/services/own-sessions'
 import { getTest, sendTest } from '@/lib/services/test-messages'
-import { createCast, type Cast } from '@/tests/support/cast'
-import { createTestDatabase, type TestDatabase } from '@/tests/support/test-database'
+import { givenCast, givenDatabase } from '@/tests/support/given-cast'
 import { mailsTo, newEmail, newestKey, newMember, NOW, PASSWORD, visitor } from '@/tests/support/visitor'
 
-let database: TestDatabase
+const database = givenDatabase()
 let anna: { email: string; userId: string }
-beforeAll(async () => {
-  database = await createTestDatabase()
-})
-afterAll(() => database.drop())
 beforeEach(async () => {
   anna = await newMember(database.db)
 })
@@ -138,10 +133,7 @@ describe('a test', () => {
 })
 
 describe('with a rink', () => {
-  let cast: Cast
-  beforeEach(async () => {
-    cast = await createCast(database.db, NOW)
-  })
+  const cast = givenCast(database, NOW)
 
   test('everything can be taken along, and no secret is in it', async () => {
     await database.db('users').where({ id: cast.keeper.userId }).update({ password_hash: 'never-told' })

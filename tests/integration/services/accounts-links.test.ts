@@ -1,5 +1,5 @@
 // Mailed links: once, in time, for one purpose, and made by us.
-import { afterAll, beforeAll, describe, expect, test } from 'vitest'
+import { describe, expect, test } from 'vitest'
 import { insertSession } from '@/db/queries/sessions'
 import { hashSessionToken } from '@/lib/auth/session-tokens'
 import { linkKey, linkUrl } from '@/lib/auth/account-links'
@@ -13,7 +13,7 @@ import {
   signUp,
 } from '@/lib/services/accounts'
 import { LIMITS } from '@/lib/services/rate-limits'
-import { createTestDatabase, type TestDatabase } from '@/tests/support/test-database'
+import { givenDatabase } from '@/tests/support/given-cast'
 import {
   mailsTo,
   minutesLater,
@@ -28,11 +28,7 @@ import {
 
 const REFUSED = { code: 'invalid_input', message: 'This link has been used or has run out. Ask for a new one.' }
 
-let database: TestDatabase
-beforeAll(async () => {
-  database = await createTestDatabase()
-})
-afterAll(() => database.drop())
+const database = givenDatabase()
 
 async function mailedSignInKey(email: string): Promise<string> {
   await requestLink(visitor(database.db), { email }, 'sign-in')

@@ -1,6 +1,6 @@
 // One's own account and its sessions, as next-auth sees them.
 import { METRIC, type Units } from '@/lib/units'
-import { afterAll, beforeAll, expect, test } from 'vitest'
+import { expect, test } from 'vitest'
 import { pruneExpired } from '@/db/queries/prune'
 import { sessionAdapter } from '@/lib/auth/adapter'
 import { SESSION_SECONDS } from '@/lib/auth/session-cookie'
@@ -10,14 +10,10 @@ import { requestLink, signInWithLink, signInWithPassword, signUp } from '@/lib/s
 import { changePassword, getAccount, saveAccount } from '@/lib/services/own-account'
 import { signOutEverywhere } from '@/lib/services/own-sessions'
 import { LIMITS } from '@/lib/services/rate-limits'
-import { createTestDatabase, type TestDatabase } from '@/tests/support/test-database'
+import { givenDatabase } from '@/tests/support/given-cast'
 import { newEmail, newestKey, newMember, NOW, PASSWORD, visitor } from '@/tests/support/visitor'
 
-let database: TestDatabase
-beforeAll(async () => {
-  database = await createTestDatabase()
-})
-afterAll(() => database.drop())
+const database = givenDatabase()
 
 // next-auth's adapter reads the clock itself, so sessions here begin in the present.
 const present = () => new Date()

@@ -1,15 +1,11 @@
 // Signing in: one refusal for every reason, after the same work.
-import { afterAll, beforeAll, expect, test } from 'vitest'
+import { expect, test } from 'vitest'
 import { signInWithPassword, signUp, SIGN_IN_REFUSED } from '@/lib/services/accounts'
 import { LIMITS } from '@/lib/services/rate-limits'
-import { createTestDatabase, type TestDatabase } from '@/tests/support/test-database'
+import { givenDatabase } from '@/tests/support/given-cast'
 import { mailsTo, minutesLater, newEmail, newMember, PASSWORD, visitor } from '@/tests/support/visitor'
 
-let database: TestDatabase
-beforeAll(async () => {
-  database = await createTestDatabase()
-})
-afterAll(() => database.drop())
+const database = givenDatabase()
 
 async function refusal(email: string, password: string): Promise<unknown> {
   return signInWithPassword(visitor(database.db), { email, password }).then(

@@ -1,14 +1,10 @@
 // Signing up: the same answer whoever asks, and nobody gets an account with an address that is not theirs.
-import { afterAll, beforeAll, expect, test } from 'vitest'
+import { expect, test } from 'vitest'
 import { confirmAddress, signInWithPassword, signUp } from '@/lib/services/accounts'
-import { createTestDatabase, type TestDatabase } from '@/tests/support/test-database'
+import { givenDatabase } from '@/tests/support/given-cast'
 import { mailsTo, minutesLater, newEmail, newestKey, newMember, PASSWORD, visitor } from '@/tests/support/visitor'
 
-let database: TestDatabase
-beforeAll(async () => {
-  database = await createTestDatabase()
-})
-afterAll(() => database.drop())
+const database = givenDatabase()
 
 const userOf = (email: string) => database.db('users').where({ email }).first()
 

@@ -1,13 +1,12 @@
 // Deciding what to tell: once per night, channel and person; changes and closings; silence when there is nothing.
-import { afterAll, beforeAll, beforeEach, describe, expect, test } from 'vitest'
+import { describe, expect, test } from 'vitest'
 import { systemRinkAccess } from '@/lib/access/system'
 import type { HourlyRecord } from '@/lib/physics/types'
 import { decideAlerts } from '@/lib/services/alerts'
 import { checkOffPass } from '@/lib/services/floods'
-import { createCast, type Cast } from '@/tests/support/cast'
+import { givenCast, givenDatabase } from '@/tests/support/given-cast'
 import { judgeNow, storeForecast } from '@/tests/support/night-at-the-rink'
 import { SNOW, THAW } from '@/tests/support/night-weather'
-import { createTestDatabase, type TestDatabase } from '@/tests/support/test-database'
 
 // Toronto is five hours behind: 16:10, 17:10, … on 12 January by the rink's clock.
 const AT_16_10 = new Date('2027-01-12T21:10:00Z')
@@ -17,16 +16,8 @@ const AT_14_10 = new Date('2027-01-12T19:10:00Z')
 const AT_15_30 = new Date('2027-01-12T20:30:00Z')
 const NIGHT = '2027-01-12'
 
-let database: TestDatabase
-let cast: Cast
-
-beforeAll(async () => {
-  database = await createTestDatabase()
-})
-afterAll(() => database.drop())
-beforeEach(async () => {
-  cast = await createCast(database.db, AT_14_10)
-})
+const database = givenDatabase()
+const cast = givenCast(database, AT_14_10)
 
 async function told(): Promise<string[]> {
   const rows = await database

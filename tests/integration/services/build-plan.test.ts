@@ -1,25 +1,17 @@
 // The building plan: everybody of the rink reckons, its keeper keeps.
-import { afterAll, beforeAll, beforeEach, expect, test } from 'vitest'
+import { expect, test } from 'vitest'
 import { findRinkForJudging } from '@/db/queries/rinks'
 import { ForbiddenError, InvalidInputError, NotFoundError } from '@/lib/errors'
 import { keepPlanSchema } from '@/lib/schemas/build-plan'
 import { getPlan, keepPlan } from '@/lib/services/build-plan'
-import { createCast, type Actor, type Cast } from '@/tests/support/cast'
+import type { Actor } from '@/tests/support/cast'
+import { givenCast, givenDatabase } from '@/tests/support/given-cast'
 import { planForm } from '@/tests/support/plan-form'
-import { createTestDatabase, type TestDatabase } from '@/tests/support/test-database'
 
 const NOW = new Date('2026-09-12T18:00:00Z')
 
-let database: TestDatabase
-let cast: Cast
-
-beforeAll(async () => {
-  database = await createTestDatabase()
-})
-afterAll(() => database.drop())
-beforeEach(async () => {
-  cast = await createCast(database.db, NOW, { phase: 'planning', iceThickness: '' })
-})
+const database = givenDatabase()
+const cast = givenCast(database, NOW, { phase: 'planning', iceThickness: '' })
 
 const keep = (actor: Actor, changes: Record<string, string> = {}) =>
   keepPlan(actor.at(NOW), keepPlanSchema.parse({ ...planForm(changes), rinkId: cast.rinkId }))

@@ -11,23 +11,21 @@ import { startPushFake, type PushFake } from '@/fakes/push/server'
 import { createSmtpTransport } from '@/lib/messaging/smtp'
 import { createWebPushTransport } from '@/lib/messaging/web-push'
 import { deliverMessage, type Delivering } from '@/lib/services/deliveries'
-import { createCast, type Cast } from '@/tests/support/cast'
+import { givenCast, givenDatabase } from '@/tests/support/given-cast'
 import { SETTINGS } from '@/tests/support/night-at-the-rink'
-import { createTestDatabase, type TestDatabase } from '@/tests/support/test-database'
 
 const NOW = new Date('2027-01-12T21:10:00Z')
 const LATER = new Date('2027-01-13T04:00:00Z')
 
-let database: TestDatabase
+const database = givenDatabase()
+const cast = givenCast(database, NOW)
 let mail: MailFake
 let push: PushFake
-let cast: Cast
 let delivering: Delivering
 
 beforeAll(async () => {
   const caFile = path.join(tmpdir(), `nightsheet-${randomUUID()}.pem`)
-  ;[database, mail, push] = await Promise.all([
-    createTestDatabase(),
+  ;[mail, push] = await Promise.all([
     startMailFake({ smtpPort: 0, pagePort: 0 }),
     startPushFake({ port: 0, pagePort: 0, caFile }),
   ])
@@ -40,9 +38,8 @@ beforeAll(async () => {
     settings: SETTINGS,
   }
 })
-afterAll(() => Promise.all([database.drop(), mail.close(), push.close()]))
+afterAll(() => Promise.all([mail.close(), push.close()]))
 beforeEach(async () => {
-  cast = await createCast(database.db, NOW)
   await fetch(`${mail.url}/api/messages`, { method: 'DELETE' })
   await fetch(`${push.url}/api/messages`, { method: 'DELETE' })
 })

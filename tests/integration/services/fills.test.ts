@@ -1,27 +1,19 @@
 // A fill from its start to its end: by those who may, once at a time, paused over days, with reminders while the hose runs.
-import { afterAll, beforeAll, beforeEach, describe, expect, test } from 'vitest'
+import { describe, expect, test } from 'vitest'
 import { ConflictError, ForbiddenError, NotFoundError } from '@/lib/errors'
 import { checkFillSchema, resumeFillSchema, startFillSchema } from '@/lib/schemas/fills'
 import { getFilling } from '@/lib/services/filling'
 import { checkFill, finishFill, giveUpFill, pauseFill, resumeFill, startFill } from '@/lib/services/fills'
-import { createCast, type Actor, type Cast } from '@/tests/support/cast'
-import { createTestDatabase, type TestDatabase } from '@/tests/support/test-database'
+import type { Actor } from '@/tests/support/cast'
+import { givenCast, givenDatabase } from '@/tests/support/given-cast'
 
 // Sunday, 1 pm at the rink.
 const NOW = new Date('2027-01-03T18:00:00Z')
 const later = (hours: number) => new Date(NOW.getTime() + hours * 3_600_000)
 
-let database: TestDatabase
-let cast: Cast
-
-beforeAll(async () => {
-  database = await createTestDatabase()
-})
-afterAll(() => database.drop())
-beforeEach(async () => {
-  // 10 m by 10 m, 10 cm of water, 25 L/min: 10,000 L in 6 h 40 min.
-  cast = await createCast(database.db, new Date('2027-01-02T19:00:00Z'), { phase: 'waiting', iceThickness: '' })
-})
+const database = givenDatabase()
+// 10 m by 10 m, 10 cm of water, 25 L/min: 10,000 L in 6 h 40 min.
+const cast = givenCast(database, new Date('2027-01-02T19:00:00Z'), { phase: 'waiting', iceThickness: '' })
 
 const form = (changes: Record<string, string> = {}) => ({ rinkId: cast.rinkId, units: 'metric', ...changes })
 const start = (actor: Actor, at = NOW, changes = {}) => startFill(actor.at(at), startFillSchema.parse(form(changes)))

@@ -1,24 +1,19 @@
 // Checking off a pass: once, by those who may, for tonight; and what that does to the sheet and the plan.
-import { afterAll, beforeAll, beforeEach, describe, expect, test } from 'vitest'
+import { beforeEach, describe, expect, test } from 'vitest'
 import { ForbiddenError, InvalidInputError, NotFoundError } from '@/lib/errors'
 import { checkOffPass, undoPass } from '@/lib/services/floods'
 import { getTonight } from '@/lib/services/tonight'
-import { createCast, type Actor, type Cast } from '@/tests/support/cast'
+import type { Actor } from '@/tests/support/cast'
+import { givenCast, givenDatabase } from '@/tests/support/given-cast'
 import { judgeNow, storeForecast } from '@/tests/support/night-at-the-rink'
-import { createTestDatabase, type TestDatabase } from '@/tests/support/test-database'
 
 const NOW = new Date('2027-01-12T23:10:00Z')
 const NIGHT = '2027-01-12'
 
-let database: TestDatabase
-let cast: Cast
+const database = givenDatabase()
+const cast = givenCast(database, new Date('2027-01-12T19:10:00Z'))
 
-beforeAll(async () => {
-  database = await createTestDatabase()
-})
-afterAll(() => database.drop())
 beforeEach(async () => {
-  cast = await createCast(database.db, new Date('2027-01-12T19:10:00Z'))
   await storeForecast(database.db, cast, NOW)
   await judgeNow(database.db, cast, NOW)
 })

@@ -5,8 +5,8 @@ import { startWeatherFake, type WeatherFake } from '@/fakes/weather/server'
 import { pullForecast, slotOf, startSweep } from '@/lib/services/forecasts'
 import { createOpenMeteo } from '@/lib/weather/open-meteo'
 import type { WeatherProvider } from '@/lib/weather/port'
-import { createCast, rinkForm, type Cast } from '@/tests/support/cast'
-import { createTestDatabase, type TestDatabase } from '@/tests/support/test-database'
+import { rinkForm } from '@/tests/support/cast'
+import { givenCast, givenDatabase } from '@/tests/support/given-cast'
 import { setUpRinkSchema } from '@/lib/schemas/rinks'
 import { setUpRink } from '@/lib/services/rinks'
 
@@ -15,18 +15,17 @@ const NOW = new Date()
 const HOUR_MILLIS = 3_600_000
 const NEXT_HOUR = new Date(NOW.getTime() + HOUR_MILLIS)
 
-let database: TestDatabase
+const database = givenDatabase()
+const cast = givenCast(database, NOW)
 let weather: WeatherFake
 let provider: WeatherProvider
-let cast: Cast
 
 beforeAll(async () => {
-  ;[database, weather] = await Promise.all([createTestDatabase(), startWeatherFake({ port: 0 })])
+  weather = await startWeatherFake({ port: 0 })
   provider = createOpenMeteo({ baseUrl: weather.url, userAgent: 'Nightsheet tests', retryDelayMs: 1 })
 })
-afterAll(() => Promise.all([database.drop(), weather.close()]))
+afterAll(() => weather.close())
 beforeEach(async () => {
-  cast = await createCast(database.db, NOW)
   await fetch(`${weather.url}/__fake/requests`, { method: 'DELETE' })
   await fetch(`${weather.url}/__fake/fault`, { method: 'DELETE' })
 })

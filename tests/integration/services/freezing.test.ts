@@ -1,5 +1,5 @@
 // A freezing rink: reckoned from open water, corrected by a drilled hole, opened by its keeper alone.
-import { afterAll, beforeAll, beforeEach, expect, test } from 'vitest'
+import { beforeEach, expect, test } from 'vitest'
 import { insertForecast } from '@/db/queries/forecasts'
 import { ConflictError, ForbiddenError, NotFoundError } from '@/lib/errors'
 import { startFillSchema } from '@/lib/schemas/fills'
@@ -7,23 +7,17 @@ import { getFreezing, openForSkating } from '@/lib/services/freezing'
 import { finishFill, startFill } from '@/lib/services/fills'
 import { writeEntry } from '@/lib/services/log'
 import { steadyHours } from '@/tests/support/advice-weather'
-import { createCast, type Cast } from '@/tests/support/cast'
+import { givenCast, givenDatabase } from '@/tests/support/given-cast'
 import { typedEntry } from '@/tests/support/log-form'
-import { createTestDatabase, type TestDatabase } from '@/tests/support/test-database'
 
 // The steady hours begin on Tuesday, 12 January 2027, at 17:00 UTC.
 const FILLED = new Date('2027-01-12T18:00:00Z')
 const later = (hours: number) => new Date(FILLED.getTime() + hours * 3_600_000)
 
-let database: TestDatabase
-let cast: Cast
+const database = givenDatabase()
+const cast = givenCast(database, later(-30), { phase: 'waiting', iceThickness: '' })
 
-beforeAll(async () => {
-  database = await createTestDatabase()
-})
-afterAll(() => database.drop())
 beforeEach(async () => {
-  cast = await createCast(database.db, later(-30), { phase: 'waiting', iceThickness: '' })
   await insertForecast(database.db, {
     cellId: cast.cellId,
     slotAt: later(-1),

@@ -1,23 +1,14 @@
 // Nights in which the clocks change, 1 November 2026 and 14 March 2027 at Toronto: right hours, each counted once.
-import { afterAll, beforeAll, beforeEach, expect, test } from 'vitest'
+import { expect, test } from 'vitest'
 import type { InvalidInputError } from '@/lib/errors'
 import { changeEntry, writeEntry } from '@/lib/services/log'
 import { getEntry, getLog } from '@/lib/services/log-book'
 import { entryTime } from '@/lib/words/log'
-import { createCast, type Cast } from '@/tests/support/cast'
+import { givenCast, givenDatabase } from '@/tests/support/given-cast'
 import { typedChange, typedEntry } from '@/tests/support/log-form'
-import { createTestDatabase, type TestDatabase } from '@/tests/support/test-database'
 
-let database: TestDatabase
-let cast: Cast
-
-beforeAll(async () => {
-  database = await createTestDatabase()
-})
-afterAll(() => database.drop())
-beforeEach(async () => {
-  cast = await createCast(database.db, new Date('2026-10-31T19:10:00Z'))
-})
+const database = givenDatabase()
+const cast = givenCast(database, new Date('2026-10-31T19:10:00Z'))
 
 const write = async (now: string, changes: Record<string, string>) => {
   const { entryId } = await writeEntry(cast.keeper.at(new Date(now)), typedEntry(cast.rinkId, changes))

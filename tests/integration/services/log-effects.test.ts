@@ -1,28 +1,19 @@
 // What the log does to the model: readings and swept snow set the sheet that a run starts from.
-import { afterAll, beforeAll, beforeEach, describe, expect, test } from 'vitest'
+import { beforeEach, describe, expect, test } from 'vitest'
 import { pruneExpired } from '@/db/queries/prune'
 import { keepModelledSheet } from '@/db/queries/sheet-states'
 import { changeEntry, deleteEntry, writeEntry } from '@/lib/services/log'
 import { getLog } from '@/lib/services/log-book'
-import { createCast, type Cast } from '@/tests/support/cast'
+import { givenCast, givenDatabase } from '@/tests/support/given-cast'
 import { typedChange, typedEntry } from '@/tests/support/log-form'
 import { judgeNow, storeForecast } from '@/tests/support/night-at-the-rink'
-import { createTestDatabase, type TestDatabase } from '@/tests/support/test-database'
 
 const NOW = new Date('2027-01-12T23:10:00Z')
 const later = (minutes: number) => new Date(NOW.getTime() + minutes * 60_000)
 const CREATED = new Date('2027-01-12T19:10:00Z')
 
-let database: TestDatabase
-let cast: Cast
-
-beforeAll(async () => {
-  database = await createTestDatabase()
-})
-afterAll(() => database.drop())
-beforeEach(async () => {
-  cast = await createCast(database.db, CREATED)
-})
+const database = givenDatabase()
+const cast = givenCast(database, CREATED)
 
 const write = async (changes: Record<string, string>, now = NOW) =>
   (await writeEntry(cast.crew.at(now), typedEntry(cast.rinkId, changes))).entryId

@@ -1,27 +1,19 @@
 // Lists, sums and files of the log: filtered and paged by night, summed by season, safe to open in a spreadsheet.
-import { afterAll, beforeAll, beforeEach, expect, test } from 'vitest'
+import { expect, test } from 'vitest'
 import { NotFoundError, RateLimitedError } from '@/lib/errors'
 import { logQuerySchema } from '@/lib/schemas/log-query'
 import { writeEntry } from '@/lib/services/log'
 import { getLog } from '@/lib/services/log-book'
 import { exportLog } from '@/lib/services/log-export'
 import { getSeason } from '@/lib/services/log-season'
-import { createCast, type Actor, type Cast } from '@/tests/support/cast'
+import type { Actor } from '@/tests/support/cast'
+import { givenCast, givenDatabase } from '@/tests/support/given-cast'
 import { typedEntry } from '@/tests/support/log-form'
-import { createTestDatabase, type TestDatabase } from '@/tests/support/test-database'
 
 const NOW = new Date('2027-01-12T23:10:00Z')
 
-let database: TestDatabase
-let cast: Cast
-
-beforeAll(async () => {
-  database = await createTestDatabase()
-})
-afterAll(() => database.drop())
-beforeEach(async () => {
-  cast = await createCast(database.db, new Date('2026-12-01T19:10:00Z'))
-})
+const database = givenDatabase()
+const cast = givenCast(database, new Date('2026-12-01T19:10:00Z'))
 
 const write = (actor: Actor, changes: Record<string, string>) =>
   writeEntry(actor.at(NOW), typedEntry(cast.rinkId, changes))

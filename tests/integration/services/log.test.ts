@@ -1,29 +1,21 @@
 // The log: written once, by those who may, at a time that was; changed with history, and never over somebody unseen.
 import { randomUUID } from 'node:crypto'
-import { afterAll, beforeAll, beforeEach, describe, expect, test } from 'vitest'
+import { describe, expect, test } from 'vitest'
 import { ConflictError, ForbiddenError, InvalidInputError, NotFoundError } from '@/lib/errors'
 import { answerSetSchema } from '@/lib/schemas/log'
 import { answerSet, changeEntry, deleteEntry, restoreEntry, writeEntry } from '@/lib/services/log'
 import { getEntry, getLog } from '@/lib/services/log-book'
 import { checkOffPass } from '@/lib/services/floods'
-import { createCast, type Actor, type Cast } from '@/tests/support/cast'
+import { createCast, type Actor } from '@/tests/support/cast'
+import { givenCast, givenDatabase } from '@/tests/support/given-cast'
 import { typedChange, typedEntry } from '@/tests/support/log-form'
-import { createTestDatabase, type TestDatabase } from '@/tests/support/test-database'
 
 // Tuesday, 6:10 pm at the rink.
 const NOW = new Date('2027-01-12T23:10:00Z')
 const later = (minutes: number) => new Date(NOW.getTime() + minutes * 60_000)
 
-let database: TestDatabase
-let cast: Cast
-
-beforeAll(async () => {
-  database = await createTestDatabase()
-})
-afterAll(() => database.drop())
-beforeEach(async () => {
-  cast = await createCast(database.db, new Date('2027-01-12T19:10:00Z'))
-})
+const database = givenDatabase()
+const cast = givenCast(database, new Date('2027-01-12T19:10:00Z'))
 
 const write = (actor: Actor, changes: Record<string, string> = {}, now = NOW) =>
   writeEntry(actor.at(now), typedEntry(cast.rinkId, changes))

@@ -1,26 +1,18 @@
 // Settling nights that are over, with the weather that came and what people found.
-import { afterAll, beforeAll, beforeEach, expect, test } from 'vitest'
+import { expect, test } from 'vitest'
 import { systemRinkAccess } from '@/lib/access/system'
 import { settleRinkNight, startSettling } from '@/lib/services/night-outcomes'
-import { createCast, type Cast } from '../../support/cast'
+import { givenCast, givenDatabase } from '@/tests/support/given-cast'
 import { judgeNow, storeForecast } from '../../support/night-at-the-rink'
 import { SNOW } from '../../support/night-weather'
-import { createTestDatabase, type TestDatabase } from '../../support/test-database'
 
 const NIGHT = '2027-01-12'
 /** 3 pm and 1:30 pm the next day in Toronto. */
 const AFTERNOON = new Date('2027-01-12T20:00:00Z')
 const NEXT_DAY = new Date('2027-01-13T18:30:00Z')
 
-let database: TestDatabase
-let cast: Cast
-beforeAll(async () => {
-  database = await createTestDatabase()
-})
-afterAll(() => database.drop())
-beforeEach(async () => {
-  cast = await createCast(database.db, new Date('2027-01-12T19:10:00Z'))
-})
+const database = givenDatabase()
+const cast = givenCast(database, new Date('2027-01-12T19:10:00Z'))
 
 const settle = () => settleRinkNight({ db: database.db, now: NEXT_DAY }, systemRinkAccess<'view'>(cast.rinkId), NIGHT)
 const outcome = () => database.db('night_outcomes').where({ rink_id: cast.rinkId }).first()

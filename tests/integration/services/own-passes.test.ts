@@ -1,29 +1,24 @@
 // The keeper's own plan: kept, seen by the crew, judged by the model, followed by check-offs, and dropped again.
 import { randomUUID } from 'node:crypto'
-import { afterAll, beforeAll, beforeEach, describe, expect, test } from 'vitest'
+import { beforeEach, describe, expect, test } from 'vitest'
 import { ForbiddenError, InvalidInputError, NotFoundError } from '@/lib/errors'
 import { keepOwnPassesSchema, type KeepOwnPasses } from '@/lib/schemas/own-passes'
 import { checkOffPass } from '@/lib/services/floods'
 import { getMovableNight } from '@/lib/services/night-model'
 import { dropOwnPasses, keepOwnPasses } from '@/lib/services/own-passes'
 import { getTonight } from '@/lib/services/tonight'
-import { createCast, type Actor, type Cast } from '@/tests/support/cast'
+import type { Actor } from '@/tests/support/cast'
+import { givenCast, givenDatabase } from '@/tests/support/given-cast'
 import { judgeNow, storeForecast } from '@/tests/support/night-at-the-rink'
 import { SNOW } from '@/tests/support/night-weather'
-import { createTestDatabase, type TestDatabase } from '@/tests/support/test-database'
 
 const NOW = new Date('2027-01-12T23:10:00Z')
 const NIGHT = '2027-01-12'
 
-let database: TestDatabase
-let cast: Cast
+const database = givenDatabase()
+const cast = givenCast(database, new Date('2027-01-12T19:10:00Z'))
 
-beforeAll(async () => {
-  database = await createTestDatabase()
-})
-afterAll(() => database.drop())
 beforeEach(async () => {
-  cast = await createCast(database.db, new Date('2027-01-12T19:10:00Z'))
   await storeForecast(database.db, cast, NOW)
   await judgeNow(database.db, cast, NOW)
 })

@@ -1,23 +1,19 @@
 // A person's devices: known push services only, one account each, and nobody else's.
 import { createECDH, randomBytes, randomUUID } from 'node:crypto'
-import { afterAll, beforeAll, beforeEach, describe, expect, test } from 'vitest'
+import { beforeEach, describe, expect, test } from 'vitest'
 import { ConflictError, InvalidInputError, NotFoundError } from '@/lib/errors'
 import { BodyTooLargeError, readJson } from '@/lib/http/read-json'
 import { pushSubscriptionSchema } from '@/lib/schemas/alerts'
 import { addDevice, forgetDevice, removeDevice, replaceDevice } from '@/lib/services/push-subscriptions'
 import { addActor, type Actor } from '@/tests/support/cast'
-import { createTestDatabase, type TestDatabase } from '@/tests/support/test-database'
+import { givenDatabase } from '@/tests/support/given-cast'
 
 const NOW = new Date('2027-01-12T19:10:00Z')
 
-let database: TestDatabase
+const database = givenDatabase()
 let anna: Actor
 let bo: Actor
 
-beforeAll(async () => {
-  database = await createTestDatabase()
-})
-afterAll(() => database.drop())
 beforeEach(async () => {
   anna = await addActor(database.db, 'Anna')
   bo = await addActor(database.db, 'Bo')

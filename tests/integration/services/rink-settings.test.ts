@@ -1,6 +1,6 @@
 // Changing a rink, its water and its end: by its keeper, counted, and judged anew.
 import { randomUUID } from 'node:crypto'
-import { afterAll, beforeAll, beforeEach, describe, expect, test } from 'vitest'
+import { describe, expect, test } from 'vitest'
 import { findRinkForJudging } from '@/db/queries/rinks'
 import { ForbiddenError, NotFoundError } from '@/lib/errors'
 import * as schemas from '@/lib/schemas/rink-settings'
@@ -8,8 +8,8 @@ import { deleteRink, getLeaving, leaveRink } from '@/lib/services/rink-end'
 import * as services from '@/lib/services/rink-settings'
 import { listMyRinks } from '@/lib/services/rinks'
 import { pourFromWater, removeWater, saveWater } from '@/lib/services/water-sources'
-import { createCast, type Actor, type Cast } from '@/tests/support/cast'
-import { createTestDatabase, type TestDatabase } from '@/tests/support/test-database'
+import { createCast, type Actor } from '@/tests/support/cast'
+import { givenCast, givenDatabase } from '@/tests/support/given-cast'
 
 const NOW = new Date('2027-01-12T19:10:00Z')
 const LATER = new Date('2027-01-12T20:10:00Z')
@@ -17,16 +17,8 @@ const LATER = new Date('2027-01-12T20:10:00Z')
 const KENORA = { latitude: '49.77', longitude: '-94.49' }
 const EAST = { latitude: '46.5', longitude: '-81' }
 
-let database: TestDatabase
-let cast: Cast
-
-beforeAll(async () => {
-  database = await createTestDatabase()
-})
-afterAll(() => database.drop())
-beforeEach(async () => {
-  cast = await createCast(database.db, NOW)
-})
+const database = givenDatabase()
+const cast = givenCast(database, NOW)
 
 const read = () => services.getRinkSettings(cast.keeper.at(LATER), cast.rinkId)
 const place = (fields: Record<string, string>, actor: Actor = cast.keeper) =>

@@ -1,25 +1,17 @@
 // Setting up a rink: all or nothing, and once.
 import { findAccount } from '@/db/queries/users'
 import { IMPERIAL } from '@/lib/units'
-import { afterAll, beforeAll, beforeEach, describe, expect, test } from 'vitest'
+import { describe, expect, test } from 'vitest'
 import { findRinkForJudging } from '@/db/queries/rinks'
 import { setUpRinkSchema } from '@/lib/schemas/rinks'
 import { listMyRinks, setUpRink } from '@/lib/services/rinks'
-import { addActor, createCast, rinkForm, type Actor, type Cast } from '@/tests/support/cast'
-import { createTestDatabase, type TestDatabase } from '@/tests/support/test-database'
+import { addActor, rinkForm, type Actor } from '@/tests/support/cast'
+import { givenCast, givenDatabase } from '@/tests/support/given-cast'
 
 const NOW = new Date('2027-01-12T19:10:00Z')
 
-let database: TestDatabase
-let cast: Cast
-
-beforeAll(async () => {
-  database = await createTestDatabase()
-})
-afterAll(() => database.drop())
-beforeEach(async () => {
-  cast = await createCast(database.db, NOW)
-})
+const database = givenDatabase()
+const cast = givenCast(database, NOW)
 
 const setUp = (actor: Actor, form = rinkForm()) => setUpRink(actor.at(NOW), setUpRinkSchema.parse(form))
 const count = async (table: string) => Number((await database.db(table).count({ rows: '*' }).first())?.rows)

@@ -1,20 +1,18 @@
 // The theme of a person's pages: their choice, and the sky over their rink.
-import { afterAll, beforeAll, expect, test } from 'vitest'
+import { beforeAll, expect, test } from 'vitest'
 import { getPageTheme, SYSTEM_THEME } from '@/lib/services/themes'
 import { createCast, addActor, type Cast } from '@/tests/support/cast'
-import { createTestDatabase, type TestDatabase } from '@/tests/support/test-database'
+import { givenDatabase } from '@/tests/support/given-cast'
 
 // 5 pm and noon at the rink's longitude, in mid-January.
 const EVENING = new Date('2027-01-12T22:30:00Z')
 const NOON = new Date('2027-01-12T17:00:00Z')
 
-let database: TestDatabase
+const database = givenDatabase()
 let cast: Cast
 beforeAll(async () => {
-  database = await createTestDatabase()
   cast = await createCast(database.db, EVENING)
 })
-afterAll(() => database.drop())
 
 const choose = (userId: string, theme: 'system' | 'light' | 'dark' | 'dark-after-sunset') =>
   database.db('users').where({ id: userId }).update({ theme })

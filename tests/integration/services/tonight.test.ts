@@ -1,22 +1,13 @@
 // The night sheet as read back: before the first forecast, fresh, and old.
-import { afterAll, beforeAll, beforeEach, expect, test } from 'vitest'
+import { expect, test } from 'vitest'
 import { getTonight } from '@/lib/services/tonight'
-import { createCast, type Cast } from '@/tests/support/cast'
+import { givenCast, givenDatabase } from '@/tests/support/given-cast'
 import { judgeNow, storeForecast } from '@/tests/support/night-at-the-rink'
-import { createTestDatabase, type TestDatabase } from '@/tests/support/test-database'
 
 const NOW = new Date('2027-01-12T23:10:00Z')
 
-let database: TestDatabase
-let cast: Cast
-
-beforeAll(async () => {
-  database = await createTestDatabase()
-})
-afterAll(() => database.drop())
-beforeEach(async () => {
-  cast = await createCast(database.db, new Date('2027-01-12T19:10:00Z'))
-})
+const database = givenDatabase()
+const cast = givenCast(database, new Date('2027-01-12T19:10:00Z'))
 
 const view = (now: Date) => getTonight(cast.keeper.at(now), cast.rinkId)
 

@@ -1,29 +1,20 @@
 // Unsubscribing by a mail's link, and choosing under Alerts: by the right person, for one rink, as often as one likes.
 import { createHash } from 'node:crypto'
-import { afterAll, beforeAll, beforeEach, describe, expect, test } from 'vitest'
+import { describe, expect, test } from 'vitest'
 import { promiseMessage } from '@/db/queries/messages'
 import { putPushSubscription } from '@/db/queries/push-subscriptions'
 import { ForbiddenError, InvalidInputError, NotFoundError } from '@/lib/errors'
 import { alertPreferencesSchema, muteSchema } from '@/lib/schemas/alerts'
 import { chooseAlertPreferences, getAlertSettings, muteAlerts } from '@/lib/services/alert-preferences'
 import { getMailChoice, unsubscribeByToken, unsubscribeToken, unsubscribeUrl } from '@/lib/services/unsubscribe'
-import { createCast, type Cast } from '@/tests/support/cast'
-import { createTestDatabase, type TestDatabase } from '@/tests/support/test-database'
+import { givenCast, givenDatabase } from '@/tests/support/given-cast'
 
 // 2:10 pm in Toronto on 12 January.
 const NOW = new Date('2027-01-12T19:10:00Z')
 const SECRET = 'a secret that only these tests use, long enough'
 
-let database: TestDatabase
-let cast: Cast
-
-beforeAll(async () => {
-  database = await createTestDatabase()
-})
-afterAll(() => database.drop())
-beforeEach(async () => {
-  cast = await createCast(database.db, NOW)
-})
+const database = givenDatabase()
+const cast = givenCast(database, NOW)
 
 const context = () => ({ db: database.db, now: NOW })
 const preferences = async (userId: string) =>

@@ -1,24 +1,15 @@
 // The nights ahead as read back: who may see them, before the first forecast, a night opened, and clock changes.
-import { afterAll, beforeAll, beforeEach, expect, test } from 'vitest'
+import { expect, test } from 'vitest'
 import { NotFoundError } from '@/lib/errors'
 import { getWeek } from '@/lib/services/week'
-import { createCast, type Cast } from '@/tests/support/cast'
+import { givenCast, givenDatabase } from '@/tests/support/given-cast'
 import { judgeNow, storeForecast } from '@/tests/support/night-at-the-rink'
 import { THAW } from '@/tests/support/night-weather'
-import { createTestDatabase, type TestDatabase } from '@/tests/support/test-database'
 
 const NOW = new Date('2027-01-12T23:10:00Z')
 
-let database: TestDatabase
-let cast: Cast
-
-beforeAll(async () => {
-  database = await createTestDatabase()
-})
-afterAll(() => database.drop())
-beforeEach(async () => {
-  cast = await createCast(database.db, new Date('2027-01-12T19:10:00Z'))
-})
+const database = givenDatabase()
+const cast = givenCast(database, new Date('2027-01-12T19:10:00Z'))
 
 async function judged(now: Date, ...change: Parameters<typeof storeForecast>[3][]) {
   await storeForecast(database.db, cast, now, ...change)
@@ -104,7 +95,7 @@ test('after six hours the forecast is called stale', async () => {
 })
 
 test('while waiting for the fill the windows to fill are listed', async () => {
-  cast = await createCast(database.db, new Date('2027-01-12T19:10:00Z'), { phase: 'waiting' })
+  await database.db('rinks').where({ id: cast.rinkId }).update({ phase: 'waiting' })
   // Mild enough for hose and hands until Friday noon, then hard cold.
   const coldFrom = Date.parse('2027-01-14T05:00:00Z')
   await judged(NOW, (at) => (at.getTime() < coldFrom ? { airTemperatureC: -1, dewPointC: -4 } : {}))

@@ -1,29 +1,21 @@
 // The yard teaches the model: reports are kept with their weather, and learned factors reach the next judgement.
-import { afterAll, beforeAll, beforeEach, expect, test } from 'vitest'
+import { expect, test } from 'vitest'
 import { insertForecast } from '@/db/queries/forecasts'
 import { findRinkForJudging } from '@/db/queries/rinks'
 import { systemRinkAccess } from '@/lib/access/system'
 import { shelterFactor } from '@/lib/physics/site'
 import { findYardInUse } from '@/lib/services/yard-in-use'
 import { learnRinkYard } from '@/lib/services/yards'
-import { createCast, type Cast } from '../../support/cast'
+import { givenCast, givenDatabase } from '@/tests/support/given-cast'
 import { hoursFrom } from '../../support/night-weather'
-import { createTestDatabase, type TestDatabase } from '../../support/test-database'
 
 const HOUR = 3_600_000
 const DAY = 24 * HOUR
 /** 7 pm in Toronto. */
 const FIRST_POUR = new Date('2027-01-06T00:00:00Z')
 
-let database: TestDatabase
-let cast: Cast
-beforeAll(async () => {
-  database = await createTestDatabase()
-})
-afterAll(() => database.drop())
-beforeEach(async () => {
-  cast = await createCast(database.db, new Date(FIRST_POUR.getTime() - 6 * HOUR))
-})
+const database = givenDatabase()
+const cast = givenCast(database, new Date(FIRST_POUR.getTime() - 6 * HOUR))
 
 const learn = (now: Date) => learnRinkYard({ db: database.db, now }, systemRinkAccess<'writeLog'>(cast.rinkId))
 const inUse = async () => {

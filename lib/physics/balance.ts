@@ -31,10 +31,13 @@ export interface SurfaceLaw extends SurfaceBalance {
 }
 
 /**
- * What falls in an hour, as heat it takes from a surface at 0 °C: rain brings its warmth, snow takes what melting it costs.
+ * What falls in an hour, as heat it takes from a surface at 0 °C: rain brings its warmth, snow takes what melting it
+ * costs.
  *
  * @param hour Prepared hour.
  * @returns Flux, positive when it cools. [W/m²]
+ *
+ * Source: balance of heat, rain at air temperature; ours.
  */
 export function precipitationHeatWm2(hour: PreparedHour): number {
   const snowMm = Math.max(0, hour.precipitationMm - hour.rainMm)
@@ -85,7 +88,14 @@ export function surfaceBalance(hour: PreparedHour, kind: SurfaceKind, surfaceTem
 let lastHour: PreparedHour | null = null
 let lastLaw: SurfaceLaw | null = null
 
-/** The law of a wet surface around 0 °C, without precipitation. */
+/**
+ * The law of a wet surface around 0 °C, without precipitation.
+ *
+ * @param hour Prepared hour, known.
+ * @returns Balance [W/m²] and its slope [W m⁻² K⁻¹] at 0 °C.
+ *
+ * Source: surfaceLaw.
+ */
 export function wetLaw(hour: PreparedHour): SurfaceLaw {
   if (lastHour !== hour || lastLaw === null) {
     lastLaw = surfaceLaw(hour, 'wet', 0)
@@ -100,6 +110,8 @@ export function wetLaw(hour: PreparedHour): SurfaceLaw {
  * @param hour Prepared hour; `isKnown` must be true.
  * @returns Net loss and its parts, precipitation included. [W/m²]
  * @throws RangeError for an unknown hour.
+ *
+ * Source: surfaceBalance at 0 °C with precipitationHeatWm2.
  */
 export function wetSurfaceBalance(hour: PreparedHour): SurfaceBalance {
   const { parts } = wetLaw(hour)
@@ -113,7 +125,10 @@ export function wetSurfaceBalance(hour: PreparedHour): SurfaceBalance {
  * @param hour Prepared hour.
  * @param kind What the surface is.
  * @param aroundC Where the line touches. [°C]
- * @returns Balance there and slope. The slope is a secant over one kelvin, at least the radiative one.
+ * @returns Balance there [W/m²] and slope [W m⁻² K⁻¹]. The slope is a secant over one kelvin, at least the radiative
+ *   one.
+ *
+ * Source: linearisation of surfaceBalance; ours.
  */
 export function surfaceLaw(hour: PreparedHour, kind: SurfaceKind, aroundC: number): SurfaceLaw {
   const here = surfaceBalance(hour, kind, aroundC)

@@ -53,25 +53,57 @@ const updated = new Float64Array(LARGEST)
 /** Conduction from the mean of a water layer to a face at 0 °C: π²/4 k/h, the first decay mode of a slab warm on one side. */
 const WATER_FACE = Math.PI ** 2 / 4
 
-/** Temperature of a cell. [°C] */
+/**
+ * Temperature of a cell.
+ *
+ * @param massKgM2 Mass of the cell. [kg/m²], above 0
+ * @param enthalpyJM2 Its enthalpy, 0 for water at 0 °C. [J/m²]
+ * @returns Temperature. [°C]
+ *
+ * Source: definition of enthalpy: sensible heat of ice, heat of fusion, sensible heat of water.
+ */
 export function cellTemperatureC(massKgM2: number, enthalpyJM2: number): number {
   const frozen = -FUSION_J_PER_KG * massKgM2
   if (enthalpyJM2 < frozen) return (enthalpyJM2 - frozen) / (massKgM2 * ICE_HEAT_CAPACITY)
   return enthalpyJM2 > 0 ? enthalpyJM2 / (massKgM2 * WATER_HEAT_CAPACITY) : 0
 }
 
-/** Liquid in a cell. [kg/m²] */
+/**
+ * Liquid in a cell.
+ *
+ * @param massKgM2 Mass of the cell. [kg/m²], above 0
+ * @param enthalpyJM2 Its enthalpy, 0 for water at 0 °C. [J/m²]
+ * @returns Liquid, 0 to the mass of the cell. [kg/m²]
+ *
+ * Source: definition of enthalpy.
+ */
 export function cellLiquidKgM2(massKgM2: number, enthalpyJM2: number): number {
   return Math.min(massKgM2, Math.max(0, massKgM2 + enthalpyJM2 / FUSION_J_PER_KG))
 }
 
-/** Thickness of a cell. [m] */
+/**
+ * Thickness of a cell.
+ *
+ * @param massKgM2 Mass of the cell. [kg/m²], above 0
+ * @param enthalpyJM2 Its enthalpy, 0 for water at 0 °C. [J/m²]
+ * @returns Thickness. [m]
+ *
+ * Source: densities of ice and water.
+ */
 export function cellThicknessM(massKgM2: number, enthalpyJM2: number): number {
   const liquid = cellLiquidKgM2(massKgM2, enthalpyJM2)
   return liquid / WATER_DENSITY + (massKgM2 - liquid) / ICE_DENSITY
 }
 
-/** Resistance between the middle of a cell and its face. A cell at 0 °C holds its faces there. [m² K/W] */
+/**
+ * Resistance between the middle of a cell and its face. A cell at 0 °C holds its faces there.
+ *
+ * @param massKgM2 Mass of the cell. [kg/m²], above 0
+ * @param enthalpyJM2 Its enthalpy, 0 for water at 0 °C. [J/m²]
+ * @returns Resistance, 0 for a mixed cell. [m² K/W]
+ *
+ * Source: conduction over half a cell of ice; of water by its first decay mode, WATER_FACE.
+ */
 export function faceResistance(massKgM2: number, enthalpyJM2: number): number {
   const kind = phaseOf(massKgM2, enthalpyJM2)
   if (kind === Phase.Mixed) return 0
@@ -81,8 +113,14 @@ export function faceResistance(massKgM2: number, enthalpyJM2: number): number {
 }
 
 /**
- * Advances a column by one implicit (backward Euler) step. Enthalpy changes only by the flows returned, whatever the phase
- * changes inside, so energy is conserved to rounding.
+ * Advances a column by one implicit (backward Euler) step. Enthalpy changes only by the flows returned, whatever the
+ * phase changes inside, so energy is conserved to rounding.
+ *
+ * @param column Cells from the top down; enthalpies change in place.
+ * @param step Length [s], law at the top, heat at the foot and inside [W/m²].
+ * @returns Enthalpy out of the top and in at the foot [J/m²], and the top cell's temperature [°C].
+ *
+ * Source: enthalpy method with backward Euler, textbook form; from memory.
  */
 export function stepColumn(column: Column, step: ColumnStep): ColumnFlows {
   const { massKgM2: mass, enthalpyJM2: enthalpy } = column

@@ -21,8 +21,10 @@ export interface FillGrowth {
  * @param hours Prepared hours; unknown ones stand still.
  * @param startIndex Hour in which the full depth is in.
  * @param thicknessesMm Ice thicknesses to time. [mm]
- * @returns Times in hours, interpolated within the hour.
+ * @returns Times, interpolated within the hour; null where the hours end first. [h]
  * @throws RangeError for a value out of range.
+ *
+ * Source: advanceSheet, hour by hour.
  */
 export function growFill(
   fill: { depthMm: number; waterTemperatureC: number; base: Base },
@@ -48,7 +50,9 @@ export function growFill(
  * @param hours Prepared hours.
  * @param startIndex First hour.
  * @param thicknessesMm Ice thicknesses to time. [mm]
- * @returns As growFill.
+ * @returns As growFill. [h]
+ *
+ * Source: advanceSheet, hour by hour.
  */
 export function followGrowth(
   start: SheetState,

@@ -23,8 +23,10 @@ const MOST_POINTS = 50
  * @param lengthM Length. [m], above 0 to 500
  * @param widthM Width. [m], above 0 to 500
  * @param cornersM Floor below the line at the corners, going round: two on one end, two on the other. [m], -5 to 5
- * @returns Grid for the other functions.
+ * @returns Grid of depths for the other functions. [m]
  * @throws RangeError for a value out of range or not four corners.
+ *
+ * Source: bilinear between the corners; ours.
  */
 export function floorFromCorners(lengthM: number, widthM: number, cornersM: readonly number[]): FloorGrid {
   if (cornersM.length !== 4) throw new RangeError(`cornersM must hold four depths, got ${cornersM.length}`)
@@ -41,8 +43,10 @@ export function floorFromCorners(lengthM: number, widthM: number, cornersM: read
  * @param lengthM Length. [m], above 0 to 500
  * @param widthM Width. [m], above 0 to 500
  * @param depthsM Floor below the line, rows along the length. [m], -5 to 5; 2 by 2 to 50 by 50 points, rows alike
- * @returns Grid for the other functions.
+ * @returns Grid of depths for the other functions. [m]
  * @throws RangeError for a value out of range or rows that differ in length.
+ *
+ * Source: as measured.
  */
 export function floorFromGrid(lengthM: number, widthM: number, depthsM: readonly (readonly number[])[]): FloorGrid {
   inRange('lengthM [m]', lengthM, 0.1, 500)
@@ -57,21 +61,45 @@ export function floorFromGrid(lengthM: number, widthM: number, depthsM: readonly
   return { lengthM, widthM, depthsM: depthsM.map((row) => [...row]) }
 }
 
-/** The floor of a rink as measured; level ground when nothing was. @throws RangeError as the two functions above. */
+/**
+ * The floor of a rink as measured; level ground when nothing was.
+ *
+ * @param lengthM Length. [m], above 0 to 500
+ * @param widthM Width. [m], above 0 to 500
+ * @param shape Corners or a grid of depths below the line [m], -5 to 5; null when not measured.
+ * @returns Grid of depths. [m]
+ * @throws RangeError as floorFromCorners and floorFromGrid.
+ *
+ * Source: as measured.
+ */
 export function floorOf(lengthM: number, widthM: number, shape?: FloorShape | null): FloorGrid {
   if (!shape) return floorFromCorners(lengthM, widthM, [0, 0, 0, 0])
   if ('cornersM' in shape) return floorFromCorners(lengthM, widthM, shape.cornersM)
   return floorFromGrid(lengthM, widthM, shape.depthsM)
 }
 
-/** Floor below the line at the four corners, going round as in floorFromCorners. [m] */
+/**
+ * Floor below the line at the four corners, going round as in floorFromCorners.
+ *
+ * @param floor Floor.
+ * @returns Depths. [m]
+ *
+ * Source: as measured.
+ */
 export function cornerDepthsM({ depthsM }: FloorGrid): [number, number, number, number] {
   const first = depthsM[0]!
   const last = depthsM[depthsM.length - 1]!
   return [first[0]!, first[first.length - 1]!, last[last.length - 1]!, last[0]!]
 }
 
-/** The highest and the lowest point of the floor, below the line. [m] */
+/**
+ * The highest and the lowest point of the floor, below the line.
+ *
+ * @param floor Floor.
+ * @returns Least and greatest depth below the line. [m]
+ *
+ * Source: as measured.
+ */
 export function floorExtremesM({ depthsM }: FloorGrid): { highestM: number; lowestM: number } {
   let highestM = Number.POSITIVE_INFINITY
   let lowestM = Number.NEGATIVE_INFINITY

@@ -18,7 +18,10 @@ const BRIDGED = [
  * Fills single missing values from the hour before and the hour after.
  *
  * @param records Hours in order.
- * @returns Copies with every lone gap filled by the mean of its neighbours; longer gaps stay null.
+ * @returns Copies, in the units of the records, with every lone gap filled by the mean of its neighbours; longer gaps
+ *   stay null.
+ *
+ * Source: ours.
  */
 export function bridgeLoneGaps(records: readonly HourlyRecord[]): HourlyRecord[] {
   const bridged = records.slice()
@@ -59,13 +62,27 @@ function bridge(before: HourlyRecord, record: HourlyRecord, after: HourlyRecord)
   return filled ?? record
 }
 
-/** True when the model can work with the hour. */
+/**
+ * True when the model can work with the hour.
+ *
+ * @param record Hour of a forecast.
+ * @returns Whether sky, precipitation and the other needed fields are there.
+ *
+ * Source: ours.
+ */
 export function hasNeeded(record: HourlyRecord): boolean {
   const hasSky = isNumber(record.cloudCover) || isNumber(record.longwaveDownWm2)
   return hasSky && isNumber(record.precipitationMm) && NEEDED.every((field) => isNumber(record[field]))
 }
 
-/** False for what is missing, and for what is no number. */
+/**
+ * False for what is missing, and for what is no number.
+ *
+ * @param value Number, null or undefined.
+ * @returns Whether it is a finite number.
+ *
+ * Source: ours.
+ */
 export function isNumber(value: number | null | undefined): value is number {
   return typeof value === 'number' && Number.isFinite(value)
 }

@@ -12,7 +12,14 @@ function wantedCellM(depthM: number): number {
   return SURFACE_CELL_M + CELL_GROWTH * depthM
 }
 
-/** Cell thicknesses for new ice of a given thickness. [m] */
+/**
+ * Cell thicknesses for new ice of a given thickness.
+ *
+ * @param thicknessM Ice. [m], 0 or more
+ * @returns Thicknesses from the top down, `thicknessM` in all. [m]
+ *
+ * Source: ours.
+ */
 export function cellThicknesses(thicknessM: number): number[] {
   const cells: number[] = []
   let depth = 0
@@ -25,7 +32,13 @@ export function cellThicknesses(thicknessM: number): number[] {
   return cells
 }
 
-/** Merges ice cells that have become too thin and splits those too thick; mass and enthalpy stay exactly as they are. */
+/**
+ * Merges ice cells that have become too thin and splits those too thick; mass and enthalpy stay exactly as they are.
+ *
+ * @param column Cells from the top down; changed in place.
+ *
+ * Source: ours; what is conserved is tested in tests/unit/physics/sheet.test.ts.
+ */
 export function tidyCells(column: Column): void {
   const { massKgM2: mass, enthalpyJM2: enthalpy } = column
   let depth = 0

@@ -8,7 +8,14 @@ import type { Base } from './types'
  */
 const GROUND_HEAT_WM2: Record<Base, number> = { liner: 5, ground: 5, snow: 2 }
 
-/** Heat into the ice or water from what it lies on. [W/m²] */
+/**
+ * Heat into the ice or water from what it lies on.
+ *
+ * @param base What it lies on.
+ * @returns Flux, positive upwards. [W/m²]
+ *
+ * Source: GROUND_HEAT_WM2 in this file.
+ */
 export function groundHeatWm2(base: Base): number {
   return GROUND_HEAT_WM2[base]
 }

@@ -18,6 +18,8 @@ function isShaded(site: Site): boolean {
  * @param azimuthDeg Direction, from north clockwise. [°]
  * @returns Height, between two of the eight by a straight line. [°]
  * @throws RangeError for a height out of range or a list that is not eight long.
+ *
+ * Source: straight line between octants; ours.
  */
 export function skylineDeg(horizonDeg: number | readonly number[], azimuthDeg: number): number {
   if (typeof horizonDeg === 'number') return inRange('horizonDeg [°]', horizonDeg, 0, 90)
@@ -51,6 +53,8 @@ export function diffuseShare(cloudCover: number): number {
  * @param site Place, skyline, `shade` (share of direct sunshine that trees or a cloth keep off, 0-1), `skyView`.
  * @returns Flux on the rink. [W/m²]
  * @throws RangeError for a cloud cover, shade or skyline out of range.
+ *
+ * Source: direct sunshine over the skyline, diffuse by the open share of the sky; ours.
  */
 export function sunshineOnRinkWm2(globalWm2: number, cloudCover: number, startsAtMillis: number, site: Site): number {
   if (globalWm2 <= 0 || !isShaded(site)) return globalWm2

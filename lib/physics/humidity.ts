@@ -59,6 +59,8 @@ export function dewPointC(vapourPressureHpa: number): number {
  * @param relativeHumidity Share of saturation over water. [0-1], above 0 to 1
  * @returns Dew point. [°C]
  * @throws RangeError outside the ranges.
+ *
+ * Source: definition of relative humidity, dewPointC.
  */
 export function dewPointFromHumidityC(temperatureC: number, relativeHumidity: number): number {
   inRange('relativeHumidity [0-1]', relativeHumidity, 1e-4, 1)

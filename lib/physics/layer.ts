@@ -36,11 +36,12 @@ const CLOSE_JM2 = 10
  * @param startIndex Hour in which the layer is poured.
  * @param startFraction Share of that hour already past. [0-1)
  * @param layer Depth and temperature of the water; ranges at the fields.
- * @returns Minutes, or null when it does not set within the hours or an unknown hour comes first.
+ * @returns Time, or null when it does not set within the hours or an unknown hour comes first. [min]
  * @throws RangeError for arguments out of range.
  *
- * Source: energy of the layer against the loss of its surface (through the skin that forms: h + G h²/2k, Ashton 1989) and
- * the decay modes of the sheet (sheet-cold.ts). Holds within the tolerance shown in tests/unit/physics/layer.test.ts.
+ * Source: energy of the layer against the loss of its surface (through the skin that forms: h + G h²/2k, Ashton 1989)
+ * and the decay modes of the sheet (sheet-cold.ts). Holds within the tolerance shown in
+ * tests/unit/physics/layer.test.ts.
  */
 export function minutesToSet(
   state: SheetState,

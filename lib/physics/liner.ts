@@ -22,7 +22,7 @@ export interface LinerAllowance extends LinerEdges {
  *
  * @param insideM Rink between the boards. [m], 0.1 to 500
  * @param edges Ranges at the fields.
- * @returns [m]
+ * @returns Length of liner. [m]
  * @throws RangeError outside the ranges.
  *
  * Source: geometry; up and over the boards is common practice.

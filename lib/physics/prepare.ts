@@ -18,8 +18,11 @@ const GUST_FACTOR = 1.5
  *
  * @param records Consecutive hours, oldest first.
  * @param site Place, shelter [0-1] and open sky [0-1].
- * @returns As many hours as records.
- * @throws RangeError when hours are not consecutive, a value is out of its physical range or the site is off the globe.
+ * @returns As many hours as records, in the units of PreparedHour; `isKnown` is false where too much is missing.
+ * @throws RangeError when hours are not consecutive, a value is out of its physical range or the site is off the
+ *   globe.
+ *
+ * Source: the functions of this folder that it calls; what each hour needs is in gaps.ts.
  */
 export function prepareHours(records: readonly HourlyRecord[], site: Site): PreparedHour[] {
   inRange('latitudeDeg [°]', site.latitudeDeg, -90, 90)
@@ -44,6 +47,11 @@ export function prepareHours(records: readonly HourlyRecord[], site: Site): Prep
  * @param records Bridged hours of the other run.
  * @param before The hours as prepared for the first run; their times stand for these.
  * @param from First hour that differs; earlier ones are taken over.
+ * @param site As for prepareHours.
+ * @returns As many hours as records.
+ * @throws RangeError for a value out of its physical range.
+ *
+ * Source: as prepareHours.
  */
 export function prepareLike(
   records: readonly HourlyRecord[],

@@ -37,7 +37,9 @@ function cellOf(share: number, points: number): [index: number, fraction: number
  * The cut from the highest measured point to the lowest; on level ground along the length.
  *
  * @param floor Floor.
- * @returns Points at equal distances, the highest first.
+ * @returns Points at equal distances along the cut, the highest first: distance and floor below the line. [m]
+ *
+ * Source: bilinear, floorDepthM.
  */
 export function highToLowSection(floor: FloorGrid): SectionPoint[] {
   const [from, to] = ends(floor)

@@ -38,10 +38,10 @@ export interface SheetCold {
  *
  * @param state Sheet at the time of pouring.
  * @param bottomWm2 Ground heat into its foot (not for a sheet on water, whose foot is at 0 °C). [W/m²]
- * @returns Modes of the heat it can draw from above, good until the next call.
+ * @returns Modes of the heat it can draw from above [J/m²] and their rates [1/s], good until the next call.
  *
- * Source: heat equation on a slab, Carslaw & Jaeger; face at 0 °C, foot insulated (on the ground) or at 0 °C (on water).
- * The front of new ice that moves up from the sheet slows the draw by the Stefan number; see `slowed`.
+ * Source: heat equation on a slab, Carslaw & Jaeger; face at 0 °C, foot insulated (on the ground) or at 0 °C (on
+ * water). The front of new ice that moves up from the sheet slows the draw by the Stefan number; see `slowed`.
  */
 export function sheetCold(state: SheetState, bottomWm2: number): SheetCold {
   const { massKgM2: mass, enthalpyJM2: enthalpy } = state
@@ -120,8 +120,10 @@ function slowed(topC: number): number {
  * @param cold Modes.
  * @param held Heat the modes still hold at its start. [J/m²]
  * @param seconds Its length. [s]
- * @returns Heat. [J/m²] Never negative: once the ground gives more than the sheet takes, the sheet melts at its foot, and none
- * of that reaches the layer.
+ * @returns Heat. [J/m²] Never negative: once the ground gives more than the sheet takes, the sheet melts at its foot,
+ *   and none of that reaches the layer.
+ *
+ * Source: exponential decay of the modes of sheetCold.
  */
 export function heatDrawnJM2(cold: SheetCold, held: Float64Array, seconds: number): number {
   let drawn = -cold.bottomWm2 * seconds
@@ -131,7 +133,15 @@ export function heatDrawnJM2(cold: SheetCold, held: Float64Array, seconds: numbe
   return drawn > 0 ? drawn : 0
 }
 
-/** Lets the modes decay for a stretch of time; spent ones become exactly 0. */
+/**
+ * Lets the modes decay for a stretch of time; spent ones become exactly 0.
+ *
+ * @param cold Modes.
+ * @param held Heat the modes hold; changed in place. [J/m²]
+ * @param seconds Length of the stretch. [s], 0 or more
+ *
+ * Source: exponential decay of the modes of sheetCold.
+ */
 export function decayModes(cold: SheetCold, held: Float64Array, seconds: number): void {
   for (let m = 0; m < MODES; m++) {
     if (held[m] === 0) continue

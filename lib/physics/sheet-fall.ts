@@ -9,7 +9,15 @@ const SWALLOWS_KG = 0.3
 /** Rain that makes a cell of its own on dry ice. [kg/m²] Less is mixed into the top cell, where the cold freezes it. */
 const OWN_CELL_KG = 1
 
-/** Puts the hour's rain and snow on the sheet. Returns the enthalpy they bring. [J/m²] */
+/**
+ * Puts the hour's rain and snow on the sheet.
+ *
+ * @param state Sheet; changed in place.
+ * @param hour Prepared hour, known.
+ * @returns Enthalpy they bring. [J/m²]
+ *
+ * Source: balance of mass and heat; rain comes at air temperature, snow that lies at 0 °C; ours.
+ */
 export function fallOnSheet(state: SheetState, hour: PreparedHour): number {
   const snowKg = Math.max(0, hour.precipitationMm - hour.rainMm)
   let broughtJM2 = 0
@@ -32,7 +40,13 @@ export function fallOnSheet(state: SheetState, hour: PreparedHour): number {
   return broughtJM2
 }
 
-/** Snow whose ice has melted away under it falls into the water. */
+/**
+ * Snow whose ice has melted away under it falls into the water.
+ *
+ * @param state Sheet; changed in place.
+ *
+ * Source: ours; mass and enthalpy are kept.
+ */
 export function sinkSnow(state: SheetState): void {
   if (state.snowKgM2 <= 0 || state.massKgM2.length > 0 || state.belowKgM2 <= 0) return
   mixIntoOpenWater(state, state.snowKgM2, -FUSION_J_PER_KG * state.snowKgM2)
@@ -40,7 +54,15 @@ export function sinkSnow(state: SheetState): void {
   state.snowDepthCm = 0
 }
 
-/** A measured snow depth replaces the modelled one. Returns the enthalpy that comes with the change. [J/m²] */
+/**
+ * A measured snow depth replaces the modelled one.
+ *
+ * @param state Sheet; changed in place.
+ * @param hour Prepared hour; `snowOnIceCm` null changes nothing. [cm]
+ * @returns Enthalpy that comes with the change. [J/m²]
+ *
+ * Source: depth by SETTLED_SNOW_DENSITY.
+ */
 export function setMeasuredSnow(state: SheetState, hour: PreparedHour): number {
   if (hour.snowOnIceCm === null) return 0
   const massKgM2 = (hour.snowOnIceCm / 100) * SETTLED_SNOW_DENSITY
@@ -50,7 +72,16 @@ export function setMeasuredSnow(state: SheetState, hour: PreparedHour): number {
   return broughtJM2
 }
 
-/** Adds mass to whatever the top is: a wet cell, ice (as a wet cell of its own when there is enough), open water, bare ground. */
+/**
+ * Adds mass to whatever the top is: a wet cell, ice (as a wet cell of its own when there is enough), open water, bare
+ * ground.
+ *
+ * @param state Sheet; changed in place.
+ * @param massKgM2 Mass to add. [kg/m²], above 0
+ * @param enthalpyJM2 Its enthalpy, 0 for water at 0 °C. [J/m²]
+ *
+ * Source: ours; mass and enthalpy are kept.
+ */
 export function addToTop(state: SheetState, massKgM2: number, enthalpyJM2: number): void {
   const top = state.massKgM2[0]
   if (top === undefined) {

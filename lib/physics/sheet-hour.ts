@@ -20,7 +20,16 @@ export interface HourResult {
   receivedJM2: number
 }
 
-/** Carries a sheet through a known hour, or through a share of one, and accounts for every joule. */
+/**
+ * Carries a sheet through a known hour, or through a share of one, and accounts for every joule.
+ *
+ * @param before Sheet at the start; not changed.
+ * @param hour Prepared hour, known.
+ * @param share Of the hour. [0-1], above 0
+ * @returns Sheet at the end, and the enthalpy that came and went. [J/m²]
+ *
+ * Source: balance of heat; the parts are in the files it calls.
+ */
 export function runHour(before: SheetState, hour: PreparedHour, share = 1): HourResult {
   // Written out: a spread costs more than the physics of a quiet hour.
   const state: SheetState = {
@@ -76,7 +85,17 @@ function sinkMeltedFoot(state: SheetState): void {
   }
 }
 
-/** Conducts for a while under a closed surface and lets the foot grow or melt. Returns enthalpy received. [J/m²] */
+/**
+ * Conducts for a while under a closed surface and lets the foot grow or melt.
+ *
+ * @param state Sheet; changed in place.
+ * @param surface From closeSurface.
+ * @param groundWm2 Heat from below. [W/m²]
+ * @param seconds Length of the step. [s], above 0
+ * @returns Enthalpy received. [J/m²]
+ *
+ * Source: stepColumn.
+ */
 export function conductThrough(state: SheetState, surface: ClosedSurface, groundWm2: number, seconds: number): number {
   const { sharedWm2, throughWm2, absorbedWm2 } = surface.sun
   const isFloating = state.belowKgM2 > 0
@@ -164,7 +183,15 @@ function dropDust(state: SheetState): number {
   return -enthalpyJM2
 }
 
-/** Short steps while water freezes at the top or young ice grows; an implicit hour is enough for a sheet that only breathes. */
+/**
+ * Short steps while water freezes at the top or young ice grows; an implicit hour is enough for a sheet that only
+ * breathes.
+ *
+ * @param state Sheet.
+ * @returns Steps. [1/h], 4 or 1
+ *
+ * Source: ours.
+ */
 export function stepsPerHour(state: SheetState): number {
   if (state.massKgM2.length === 0) return 4
   const isWet = state.enthalpyJM2[0]! > -FUSION_J_PER_KG * state.massKgM2[0]!

@@ -40,7 +40,16 @@ const WARMEST_FILM_C = 60
 /** The law is drawn anew when the surface turns out further than this from where it was drawn. [K] */
 const REDRAW_K = 1
 
-/** Closes the balance of the surface for the coming step. */
+/**
+ * Closes the balance of the surface for the coming step.
+ *
+ * @param state Sheet.
+ * @param hour Prepared hour, known.
+ * @param seconds Length of the step. [s], above 0
+ * @returns What it is, and its loss [W/m²] as a straight line of the top cell's temperature.
+ *
+ * Source: surfaceLaw through the resistances above the top cell.
+ */
 export function closeSurface(state: SheetState, hour: PreparedHour, seconds: number): ClosedSurface {
   const mass = state.massKgM2[0]!
   const enthalpy = state.enthalpyJM2[0]!
@@ -58,7 +67,18 @@ export function closeSurface(state: SheetState, hour: PreparedHour, seconds: num
   return passedThrough('wet', law, NO_SUNSHINE, skin)
 }
 
-/** Sets the surface temperature once the step is known and melts snow. Returns enthalpy besides the column's flows. [J/m²] */
+/**
+ * Sets the surface temperature once the step is known and melts snow.
+ *
+ * @param state Sheet; changed in place.
+ * @param hour Prepared hour, known.
+ * @param surface From closeSurface.
+ * @param topC Top cell at the end of the step. [°C]
+ * @param seconds Length of the step. [s], above 0
+ * @returns Enthalpy besides the column's flows. [J/m²]
+ *
+ * Source: balance of heat at the surface.
+ */
 export function finishSurface(
   state: SheetState,
   hour: PreparedHour,
@@ -77,13 +97,31 @@ export function finishSurface(
   return meltSnow(state, Math.max(0, surface.snowGainWm2 + topC / surface.resistance) * seconds)
 }
 
-/** Mass that goes off as vapour, or comes as frost (negative). [kg/m²] */
+/**
+ * Mass that goes off as vapour, or comes as frost (negative).
+ *
+ * @param surface From closeSurface.
+ * @param seconds Length of the step. [s], above 0
+ * @returns Mass. [kg/m²]
+ *
+ * Source: latent flux over the latent heat.
+ */
 export function vapourLossKgM2(surface: ClosedSurface, seconds: number): number {
   const heat = surface.kind === 'wet' ? VAPORISATION_J_PER_KG : SUBLIMATION_J_PER_KG
   return (surface.latentWm2 * seconds) / heat
 }
 
-/** A thin film warms or cools so fast within a step that its law must be drawn where it will end. */
+/**
+ * The law of a film of water, drawn where the step will end: a thin film warms or cools fast within it.
+ *
+ * @param hour Prepared hour, known.
+ * @param kind Film on ice or open water.
+ * @param waterC Water at the start. [°C], 0 or more
+ * @param capacityWm2K Heat capacity of the film over the step. [W m⁻² K⁻¹], above 0
+ * @returns Balance [W/m²] and slope [W m⁻² K⁻¹].
+ *
+ * Source: surfaceLaw, iterated; ours.
+ */
 export function warmWaterLaw(
   hour: PreparedHour,
   kind: 'wet' | 'water',
@@ -122,7 +160,17 @@ function frozenSurface(
   return meltingIce(law, sun, meltsAll ? law.slopeWm2K : 0)
 }
 
-/** A surface that passes its loss on to the top cell through a resistance. */
+/**
+ * A surface that passes its loss on to the top cell through a resistance.
+ *
+ * @param kind What the surface is.
+ * @param law Its law.
+ * @param sun Sunshine shared out below it. [W/m²]
+ * @param resistance Between surface and top cell. [m² K/W], 0 or more
+ * @returns Surface as the top cell sees it. [W/m²]
+ *
+ * Source: resistances in series.
+ */
 export function passedThrough(
   kind: SurfaceKind,
   law: SurfaceLaw,

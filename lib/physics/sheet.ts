@@ -27,12 +27,14 @@ export interface NewSheet {
 }
 
 /**
- * Makes a sheet from what a keeper knows of it. Ice on the ground has one temperature; ice on water is 0 °C at its foot and
- * twice as cold at its top as in the mean.
+ * Makes a sheet from what a keeper knows of it. Ice on the ground has one temperature; ice on water is 0 °C at its
+ * foot and twice as cold at its top as in the mean.
  *
  * @param sheet What is known; ranges at the fields.
- * @returns State to carry forward.
+ * @returns State to carry forward; masses [kg/m²] and enthalpies [J/m²] per cell.
  * @throws RangeError for a value out of range.
+ *
+ * Source: mean of a straight profile; ours.
  */
 export function createSheet(sheet: NewSheet): SheetState {
   const thicknessM = inRange('thicknessMm [mm]', sheet.thicknessMm, 0, 3000) / 1000
@@ -73,6 +75,8 @@ export function createSheet(sheet: NewSheet): SheetState {
  * @param state Sheet at the start of the hour.
  * @param hour Prepared hour; an unknown one leaves the sheet as it is.
  * @returns Sheet at the end of the hour; the state given is not changed.
+ *
+ * Source: runHour.
  */
 export function advanceSheet(state: SheetState, hour: PreparedHour): SheetState {
   return hour.isKnown ? runHour(state, hour).state : state
@@ -86,6 +90,8 @@ export function advanceSheet(state: SheetState, hour: PreparedHour): SheetState 
  * @param share Of the hour, 0 to 1; 0 leaves the sheet as it is.
  * @returns Sheet at the end of the part; the state given is not changed.
  * @throws RangeError for a share out of range.
+ *
+ * Source: runHour.
  */
 export function advanceSheetPart(state: SheetState, hour: PreparedHour, share: number): SheetState {
   inRange('share [0-1]', share, 0, 1)
@@ -99,6 +105,8 @@ export function advanceSheetPart(state: SheetState, hour: PreparedHour, share: n
  * @param layer Depth [mm], above 0 to 500, and water temperature [°C], 0 to 100.
  * @returns Sheet after, the water on top.
  * @throws RangeError for a value out of range.
+ *
+ * Source: balance of mass and heat.
  */
 export function pourLayer(state: SheetState, layer: { layerMm: number; temperatureC: number }): SheetState {
   const layerKgM2 = inRange('layerMm [mm]', layer.layerMm, 0, 500)
@@ -111,7 +119,14 @@ export function pourLayer(state: SheetState, layer: { layerMm: number; temperatu
   return { ...state, ...column, snowKgM2: 0, snowDepthCm: 0, surfaceTemperatureC: 0 }
 }
 
-/** Clears the snow off. */
+/**
+ * Clears the snow off.
+ *
+ * @param state Sheet; not changed.
+ * @returns The same sheet without snow.
+ *
+ * Source: ours; clearing is taken as complete.
+ */
 export function clearSnow(state: SheetState): SheetState {
   return { ...state, snowKgM2: 0, snowDepthCm: 0 }
 }
@@ -120,7 +135,10 @@ export function clearSnow(state: SheetState): SheetState {
  * What a keeper would measure.
  *
  * @param state Sheet.
- * @returns Ice [mm], mean temperature of the ice [°C], water on or in the sheet (not what ground heat melts under it) [mm], snow [cm].
+ * @returns Ice [mm], mean temperature of the ice [°C], water on or in the sheet (not what ground heat melts under it)
+ *   [mm], snow [cm].
+ *
+ * Source: definition of enthalpy; densities of ice and water.
  */
 export function reportSheet(state: SheetState): {
   thicknessMm: number
@@ -152,7 +170,14 @@ function isFootFilm(state: SheetState, cell: number): boolean {
   return cellLiquidKgM2(state.massKgM2[cell - 1]!, state.enthalpyJM2[cell - 1]!) === 0
 }
 
-/** All enthalpy in and on the sheet and in the water below, 0 for liquid water at 0 °C. [J/m²] */
+/**
+ * All enthalpy in and on the sheet and in the water below.
+ *
+ * @param state Sheet.
+ * @returns Enthalpy, 0 for liquid water at 0 °C. [J/m²]
+ *
+ * Source: definition; what the tests of conservation reckon with.
+ */
 export function sheetEnthalpyJM2(state: SheetState): number {
   const inCells = state.enthalpyJM2.reduce((sum, one) => sum + one, 0)
   return inCells - FUSION_J_PER_KG * state.snowKgM2 + state.belowKgM2 * WATER_HEAT_CAPACITY * state.belowTemperatureC

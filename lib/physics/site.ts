@@ -19,6 +19,8 @@ const SHELTER_FACTORS: Record<ShelterName, number> = { open: 1, suburban: 0.6, t
  * @param shelter Name, or the factor itself. [0-1]
  * @returns Factor on the wind at rink height over open ground. [0-1]
  * @throws RangeError for a number outside 0-1 or an unknown name.
+ *
+ * Source: SHELTER_FACTORS in this file.
  */
 export function shelterFactor(shelter: ShelterName | number): number {
   if (typeof shelter === 'number') return inRange('shelter [0-1]', shelter, 0, 1)
@@ -52,6 +54,8 @@ export const RINK_WIND_RATIO = logLawRatio(RINK_WIND_HEIGHT_M, 10, OPEN_GROUND_R
  * @param windSpeedMps Wind at 10 m. [m/s], 0 or more
  * @param shelter Factor of the yard. [0-1]
  * @returns Wind at rink height. [m/s]
+ *
+ * Source: RINK_WIND_RATIO, log law over open ground, times the yard's factor.
  */
 export function windAtRinkMps(windSpeedMps: number, shelter: number): number {
   return windSpeedMps * RINK_WIND_RATIO * shelter

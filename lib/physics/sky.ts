@@ -7,6 +7,8 @@ import { inRange } from './check'
  *
  * @param temperatureC Temperature. [°C], above -273.15
  * @returns Emitted flux. [W/m²]
+ *
+ * Source: Stefan-Boltzmann law.
  */
 export function blackBodyWm2(temperatureC: number): number {
   const kelvin = temperatureC + ZERO_CELSIUS_K
@@ -46,12 +48,15 @@ export function cloudySkyEmissivity(clearEmissivity: number, cloudCover: number)
 }
 
 /**
- * Longwave that reaches the rink: the open part of the dome from the sky, the rest from walls and trees at air temperature.
+ * Longwave that reaches the rink: the open part of the dome from the sky, the rest from walls and trees at air
+ * temperature.
  *
  * @param skyWm2 Flux from the unobstructed sky. [W/m²]
  * @param temperatureC Air temperature. [°C]
  * @param skyView Open share of the dome. [0-1]
  * @returns Flux on a horizontal surface. [W/m²]
+ *
+ * Source: share of the dome; walls at air temperature are our assumption.
  */
 export function longwaveOnRinkWm2(skyWm2: number, temperatureC: number, skyView: number): number {
   return skyView * skyWm2 + (1 - skyView) * blackBodyWm2(temperatureC)

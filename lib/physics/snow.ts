@@ -36,7 +36,15 @@ export function snowConductivity(density: number): number {
   return heavy < 0.156 ? 0.023 + 0.234 * heavy : 0.138 - 1.01 * heavy + 3.233 * heavy * heavy
 }
 
-/** Depth of snow one hour later as it settles, its mass unchanged. [cm] */
+/**
+ * Depth of snow one hour later as it settles, its mass unchanged.
+ *
+ * @param depthCm Depth now. [cm], 0 or more
+ * @param massKgM2 Mass of the snow. [kg/m²], 0 or more
+ * @returns Depth. [cm]
+ *
+ * Source: exponential approach to SETTLED_SNOW_DENSITY; ours.
+ */
 export function settledDepthCm(depthCm: number, massKgM2: number): number {
   const floorCm = (massKgM2 / SETTLED_SNOW_DENSITY) * 100
   return depthCm <= floorCm ? depthCm : floorCm + (depthCm - floorCm) * Math.exp(-1 / SETTLING_HOURS)
@@ -55,6 +63,8 @@ function newSnowDepthCm(snowMm: number, airTemperatureC: number): number {
  * @param precipitationMm What falls in all, as water. [mm]
  * @returns Rain as water [mm] and the depth of new snow [cm].
  * @throws RangeError for rain outside 0-200 mm or snow outside 0-100 cm.
+ *
+ * Source: what the record says, else by air temperature; RAIN_ABOVE_C and newSnowDensity in this file.
  */
 export function precipitationPhase(
   record: HourlyRecord,

@@ -22,10 +22,10 @@ export interface Stage {
  *
  * @param floor Floor.
  * @param levelM Water surface below the reference line (0 is at the line). [m]
- * @returns Volume, wet share and greatest depth.
+ * @returns Volume [m³], wet share [0-1] and greatest depth [m].
  *
- * Source: prisms over triangles: each piece of the grid is four triangles about its middle, exact for a plane floor with
- * any shore line, and for the bilinear floor between points wherever it is all wet.
+ * Source: prisms over triangles: each piece of the grid is four triangles about its middle, exact for a plane floor
+ * with any shore line, and for the bilinear floor between points wherever it is all wet.
  */
 export function stageAt(floor: FloorGrid, levelM: number): Stage {
   const rows = floor.depthsM.length - 1
@@ -77,8 +77,10 @@ export function levelOf(floor: FloorGrid, volumeM3: number): number {
  * @param floor Floor.
  * @param flowLPerMin Flow. [L/min], above 0 to 2000
  * @param volumeM3 Water wanted. [m³]
- * @returns Level below the line and stage at full hours and at the end.
+ * @returns Time [h], level below the line [m] and stage at full hours and at the end.
  * @throws RangeError for a flow out of range.
+ *
+ * Source: balance of volume, levelOf.
  */
 export function fillByHour(
   floor: FloorGrid,

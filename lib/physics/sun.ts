@@ -26,7 +26,17 @@ export function sunPositionDeg(
   return { altitudeDeg: altitude, azimuthDeg: azimuth }
 }
 
-/** Altitude alone of the above. [°] */
+/**
+ * Altitude of the sun alone, see sunPositionDeg.
+ *
+ * @param atMillis Instant. [ms since 1970-01-01 UTC]
+ * @param latitudeDeg Latitude. [°], -90 to 90
+ * @param longitudeDeg Longitude. [°], -180 to 180
+ * @returns Altitude above the horizon. [°]
+ * @throws RangeError for a place off the globe.
+ *
+ * Source: sunPositionDeg.
+ */
 export function sunAltitudeDeg(atMillis: number, latitudeDeg: number, longitudeDeg: number): number {
   return sunPositionDeg(atMillis, latitudeDeg, longitudeDeg).altitudeDeg
 }
@@ -50,13 +60,15 @@ let clearSkyPlace = ''
 const MOST_HOURS_KEPT = 5000
 
 /**
- * The same at an instant and place.
+ * Sunshine from a clear sky at an instant and place.
  *
  * @param atMillis Instant. [ms since 1970-01-01 UTC]
  * @param latitudeDeg Latitude. [°], -90 to 90
  * @param longitudeDeg Longitude. [°], -180 to 180
  * @returns Flux. [W/m²]
  * @throws RangeError for a place off the globe.
+ *
+ * Source: clearSkyShortwaveWm2 at the sun's altitude.
  */
 export function clearSkyShortwaveAtWm2(atMillis: number, latitudeDeg: number, longitudeDeg: number): number {
   const place = `${latitudeDeg} ${longitudeDeg}`

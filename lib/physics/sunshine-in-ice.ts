@@ -19,7 +19,15 @@ export interface SharedSunshine {
 /** Night, or a surface that keeps all sunshine to itself. */
 export const NO_SUNSHINE: SharedSunshine = { sharedWm2: 0, absorbedWm2: null, throughWm2: 0 }
 
-/** Shares absorbed sunshine out over the cells of a bare sheet. */
+/**
+ * Shares absorbed sunshine out over the cells of a bare sheet.
+ *
+ * @param state Sheet.
+ * @param absorbedAtAllWm2 Sunshine that is not thrown back. [W/m²]
+ * @returns What goes below the surface, per cell and through the foot. [W/m²]
+ *
+ * Source: Beer's law; PASSING_SHARE and EXTINCTION_PER_M in this file.
+ */
 export function shareSunshine(state: SheetState, absorbedAtAllWm2: number): SharedSunshine {
   if (absorbedAtAllWm2 <= 0) return NO_SUNSHINE
   const sharedWm2 = absorbedAtAllWm2 * PASSING_SHARE

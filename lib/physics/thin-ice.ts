@@ -12,7 +12,14 @@ export interface LinearLoss {
 /** Ice thinner than this on water grows by the closed form. [kg/m²] 25 mm */
 const THIN_KG = 25e-3 * ICE_DENSITY
 
-/** Thin, bare, without water on it, afloat, and not melting from the last hour. */
+/**
+ * Thin, bare, without water on it, afloat, and not melting from the last hour.
+ *
+ * @param state Sheet.
+ * @returns Whether it is all of that.
+ *
+ * Source: ours.
+ */
 export function isThinIce(state: SheetState): boolean {
   if (state.belowKgM2 <= 0 || state.snowKgM2 > 0) return false
   let mass = 0
@@ -20,7 +27,17 @@ export function isThinIce(state: SheetState): boolean {
   return mass < THIN_KG
 }
 
-/** Cools open water to 0 °C and freezes it in what is left of the step. Returns enthalpy received. [J/m²] */
+/**
+ * Cools open water to 0 °C and freezes it in what is left of the step.
+ *
+ * @param state Sheet without ice; changed in place.
+ * @param law Loss at 0 °C [W/m²] and its slope [W m⁻² K⁻¹].
+ * @param groundWm2 Heat from below. [W/m²]
+ * @param seconds Length of the step. [s], above 0
+ * @returns Enthalpy received. [J/m²]
+ *
+ * Source: balance of heat of a mixed layer, backward Euler.
+ */
 export function freezeOpenWater(state: SheetState, law: LinearLoss, groundWm2: number, seconds: number): number {
   const capacity = state.belowKgM2 * WATER_HEAT_CAPACITY
   const gainWm2 = groundWm2 - law.lossAt0Wm2 - law.slopeWm2K * state.belowTemperatureC
@@ -37,8 +54,16 @@ export function freezeOpenWater(state: SheetState, law: LinearLoss, groundWm2: n
 }
 
 /**
- * Grows (or melts) thin floating ice by the closed form h + G h²/2k: exact for a steady loss at 0 °C that falls off with slope G.
- * Returns enthalpy received. [J/m²]
+ * Grows (or melts) thin floating ice by the closed form h + G h²/2k: exact for a steady loss at 0 °C that falls off
+ * with slope G.
+ *
+ * @param state Sheet; changed in place.
+ * @param law Loss at 0 °C [W/m²] and its slope [W m⁻² K⁻¹].
+ * @param groundWm2 Heat from below. [W/m²]
+ * @param seconds Length of the step. [s], above 0
+ * @returns Enthalpy received. [J/m²]
+ *
+ * Source: Ashton 1989, integrated here.
  */
 export function growThinIce(state: SheetState, law: LinearLoss, groundWm2: number, seconds: number): number {
   const { lossAt0Wm2, slopeWm2K } = law

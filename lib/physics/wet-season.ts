@@ -18,7 +18,14 @@ export interface WetSeason {
 // Keyed by identity: prepared hours are never changed once made, so the same key always means the same answer.
 const wetSeasons = new WeakMap<readonly PreparedHour[], WetSeason>()
 
-/** The wet season of a run of hours. */
+/**
+ * The wet season of a run of hours, kept for as long as the run is.
+ *
+ * @param hours Prepared hours.
+ * @returns Loss [W/m²], its slope [W m⁻² K⁻¹] and what falls [kg/m²], hour by hour.
+ *
+ * Source: surfaceLaw at 0 °C with precipitationHeatWm2.
+ */
 export function wetSeason(hours: readonly PreparedHour[]): WetSeason {
   const known = wetSeasons.get(hours)
   if (known && known.lossWm2.length === hours.length) return known

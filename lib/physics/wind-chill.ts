@@ -8,11 +8,11 @@ const KMH_PER_MPS = 3.6
  *
  * @param airTemperatureC Air. [°C], -60 to 50; above 10 °C the index is the air temperature
  * @param windSpeedMps Wind at 10 m. [m/s], 0 to 100
- * @returns Index, on a scale like °C.
+ * @returns Index, on a scale like °C. [-]
  * @throws RangeError outside the ranges.
  *
- * Source: Environment Canada 2001, 13.12 + 0.6215 T - 11.37 V^0.16 + 0.3965 T V^0.16 (V in km/h); below 5 km/h
- * T + V (-1.59 + 0.1345 T) / 5, from memory.
+ * Source: Environment Canada 2001, 13.12 + 0.6215 T - 11.37 V^0.16 + 0.3965 T V^0.16 (V in km/h); below 5 km/h T + V
+ * (-1.59 + 0.1345 T) / 5, from memory.
  */
 export function windChillC(airTemperatureC: number, windSpeedMps: number): number {
   inRange('airTemperatureC [°C]', airTemperatureC, -60, 50)
@@ -30,8 +30,8 @@ export type FrostbiteBand = { fromMinutes: number; toMinutes: number } | null
 /**
  * Time to frostbite by wind chill.
  *
- * @param windChill Index.
- * @returns Band of minutes, or null.
+ * @param windChill Index. [-]
+ * @returns Band, or null when bare skin lasts more than half an hour. [min]
  *
  * Source: Environment Canada bands: -28 to -39 10-30 min, -40 to -47 5-10, -48 to -54 2-5, -55 and colder under 2.
  */

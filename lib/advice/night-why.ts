@@ -23,10 +23,10 @@ export function whyOf(
   const inWindow = window ? night.filter((h) => h.time >= window.startsAt && h.time < window.endsAt) : night
   const told = inWindow.length > 0 ? inWindow : night
   if (told.length === 0) return []
-  const reasons = [skyReason(told), airReason(told), vapourReason(told), ...sunReason(told), sheetReason(told)]
+  const reasons = [skyReason(told), airReason(told), vapourReason(told), ...sunReason(told), ...sheetReason(told)]
   reasons.push(...ruleReason(told, window))
   if (window) reasons.push(...slowingReason(night, told, window))
-  if (precipitation) reasons.push(precipitationReason(precipitation))
+  if (precipitation) reasons.push(precipitationReason(precipitation, night.at(-1)?.time ?? ''))
   return reasons
 }
 
@@ -82,9 +82,13 @@ function ruleReason(hours: KnownHour[], window: AdviceWindow | null): Reason[] {
   return !window && isSlow ? [{ code: 'why_slow_for_cold', factor: 1, values }] : []
 }
 
-function sheetReason(hours: KnownHour[]): Reason {
+/** Less than this is no sheet to speak of. Ours. [mm] */
+const SHEETLESS_MM = 1
+
+function sheetReason(hours: KnownHour[]): Reason[] {
   const { thicknessMm, temperatureC } = (hours[0] as KnownHour).sheet
-  return { code: 'why_sheet', factor: 1, values: { thicknessMm, temperatureC } }
+  if (thicknessMm < SHEETLESS_MM) return []
+  return [{ code: 'why_sheet', factor: 1, values: { thicknessMm, temperatureC } }]
 }
 
 /** The first hour after the window, before the sun is up, in which water freezes at half the window's pace or less. */
@@ -99,10 +103,12 @@ function slowingReason(night: KnownHour[], told: KnownHour[], window: AdviceWind
   return [{ code: 'why_slower_later', factor: 1, values }]
 }
 
-function precipitationReason({ kind, startsAt, rainMm, snowfallCm }: ComingPrecipitation): Reason {
+/** What comes after the night's last hour is told with its day. */
+function precipitationReason({ kind, startsAt, rainMm, snowfallCm }: ComingPrecipitation, lastHourAt: string): Reason {
+  const when: Reason['values'] = startsAt > lastHourAt ? { startsAt, isAfterNight: 1 } : { startsAt }
   return kind === 'snow'
-    ? { code: 'why_snow', factor: 1, values: { startsAt, snowfallCm } }
-    : { code: 'why_rain', factor: 1, values: { startsAt, rainMm } }
+    ? { code: 'why_snow', factor: 1, values: { ...when, snowfallCm } }
+    : { code: 'why_rain', factor: 1, values: { ...when, rainMm } }
 }
 
 /** These always apply, so they come last. */

@@ -4,7 +4,7 @@ import { num, text } from './clause'
 import { coolingText, holdingText } from './flood-clauses'
 import type { WordOptions } from './options'
 import { fluxText, iceText, rainText, rateText, snowText, temperatureText, windText } from './quantities'
-import { clockText } from './times'
+import { clockText, weekdayText } from './times'
 
 export interface WhyItem {
   label: string
@@ -54,12 +54,12 @@ const WRITERS: Record<string, WhyWriter> = {
     figure: rateText(num(v, 'freezeRateMmPerH'), w),
   }),
   why_snow: (v, w) => ({
-    label: `From ${clockText(text(v, 'startsAt'), w)}`,
+    label: fromText(v, w),
     detail: 'snow; a wet pass would crust.',
     figure: snowText(num(v, 'snowfallCm'), w),
   }),
   why_rain: (v, w) => ({
-    label: `From ${clockText(text(v, 'startsAt'), w)}`,
+    label: fromText(v, w),
     detail: 'rain; nothing sets under it.',
     figure: rainText(num(v, 'rainMm'), w),
   }),
@@ -70,6 +70,13 @@ export const WHY_CODES: readonly string[] = Object.keys(WRITERS)
 /** The list in words, in the order of the summary. */
 export function whyList(why: readonly Reason[], words: WordOptions): WhyItem[] {
   return why.flatMap(({ code, values }) => WRITERS[code]?.(values, words) ?? [])
+}
+
+/** "From 5 am"; "From Wednesday 5 pm" once the night is over. */
+function fromText(v: Reason['values'], w: WordOptions): string {
+  const startsAt = text(v, 'startsAt')
+  const day = v.isAfterNight === 1 ? `${weekdayText(startsAt, w)} ` : ''
+  return `From ${day}${clockText(startsAt, w)}`
 }
 
 function skyWords(longwaveWm2: number, cloudCover: number | null): Pick<WhyItem, 'label' | 'detail'> {

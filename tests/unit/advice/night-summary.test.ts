@@ -8,9 +8,9 @@ const options = { nightDate: '2027-01-12', now: new Date('2027-01-12T21:00:00Z')
 
 function hour(
   index: number,
-  given: { verdict?: Verdict; code?: string; isAvailable?: boolean; snowfallCm?: number } = {},
+  given: { verdict?: Verdict; code?: string; isAvailable?: boolean; snowfallCm?: number; thicknessMm?: number } = {},
 ): ScoredHour {
-  const { verdict = 'hold', code = 'slow_though_cold', isAvailable = true, snowfallCm = 0 } = given
+  const { verdict = 'hold', code = 'slow_though_cold', isAvailable = true, snowfallCm = 0, thicknessMm = 90 } = given
   const flood = verdict === 'flood' ? 80 : 0
   return {
     time: timeOf(index),
@@ -23,7 +23,7 @@ function hour(
     scores: { fill: 0, flood, hold: 100 - flood },
     verdict,
     reasons: [{ code, factor: verdict === 'flood' ? 0.9 : 0, values: { startsAt: timeOf(index) } }],
-    sheet: { thicknessMm: 90, temperatureC: -4, liquidMm: 0, snowCoverCm: 0 },
+    sheet: { thicknessMm, temperatureC: -4, liquidMm: 0, snowCoverCm: 0 },
     weather: {
       airTemperatureC: -8,
       dewPointC: -12,
@@ -111,6 +111,25 @@ describe('a good night', () => {
     const codes = summary.cautions.map((caution) => caution.code)
     expect(codes.slice(0, 2)).toEqual(['cold_skin', 'hose_freezes_between'])
     expect(codes).toEqual(expect.arrayContaining(['not_alone', 'thickness_is_estimate', 'land_only']))
+  })
+})
+
+describe('what is said of the sheet and of the day after', () => {
+  const whyOf = (fields: Parameters<typeof hours48>[0]) => summariseNight(judgement(hours48(fields), []), options).why
+
+  test('ground without ice gives no help and needs no line', () => {
+    expect(whyOf(() => ({})).map(({ code }) => code)).toContain('why_sheet')
+    expect(whyOf(() => ({ thicknessMm: 0 })).map(({ code }) => code)).not.toContain('why_sheet')
+  })
+
+  // The night has 24 hours from noon: hour 23 is its last, hour 27 is 3 pm the next day.
+  test.each([
+    [23, undefined],
+    [27, 1],
+  ])('snow from hour %i on', (from, isAfterNight) => {
+    const reason = whyOf((i) => (i >= from ? { snowfallCm: 1 } : {})).find(({ code }) => code === 'why_snow')
+    expect(reason?.values.startsAt).toBe(timeOf(from))
+    expect(reason?.values.isAfterNight).toBe(isAfterNight)
   })
 })
 

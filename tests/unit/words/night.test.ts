@@ -171,3 +171,12 @@ test('every caution has words', () => {
   for (const code of CAUTION_CODES)
     expect(cautionText({ code, values: { at: '2027-01-13T05:00:00Z' } }, words)).toMatch(/\.$/)
 })
+
+test('rain within the night is told by its hour, rain after it with its day', () => {
+  // 5 pm on Wednesday 13 January 2027 in Toronto.
+  const values = { startsAt: '2027-01-13T22:00:00Z', rainMm: 8.6 }
+  const labelOf = (more: Record<string, number>) =>
+    whyList([{ code: 'why_rain', factor: 1, values: { ...values, ...more } }], words)[0]?.label
+  expect(labelOf({})).toBe('From 5 pm')
+  expect(labelOf({ isAfterNight: 1 })).toBe('From Wednesday 5 pm')
+})

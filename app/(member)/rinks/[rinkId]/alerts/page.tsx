@@ -2,8 +2,8 @@
 import type { Metadata } from 'next'
 import type { ReactNode } from 'react'
 import { DeviceSwitch } from '@/components/alerts/device-switch'
+import { RinkFrame } from '@/components/rinks/rink-frame'
 import { Notice } from '@/components/ui/notice'
-import { PageFrame } from '@/components/ui/page-frame'
 import { pageContext } from '@/lib/auth/request-context'
 import { readEnvironment } from '@/lib/env'
 import { orNotFound } from '@/lib/http/or-not-found'
@@ -22,8 +22,7 @@ export default async function AlertsPage({ params }: PageProps<'/rinks/[rinkId]/
   const { rink, preferences, tonightDate, email, devices } = settings
   const enabled = devices.filter(({ disabledReason }) => disabledReason === null)
   return (
-    <PageFrame>
-      <p className="text-note text-graphite">{rink.name}</p>
+    <RinkFrame name={rink.name} about="Alerts">
       <h1 className="mb-6 max-w-[26ch] text-verdict font-medium lg:text-verdict-wide">{standingText(settings)}</h1>
       <div className="gap-x-14 lg:grid lg:grid-cols-2">
         <div className="max-w-[34rem]">
@@ -60,7 +59,7 @@ export default async function AlertsPage({ params }: PageProps<'/rinks/[rinkId]/
           <ToldList settings={settings} />
         </Section>
       </div>
-    </PageFrame>
+    </RinkFrame>
   )
 }
 

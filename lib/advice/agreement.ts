@@ -18,8 +18,16 @@ function countRuns({ input }: Setting, options: JudgeOptions): number {
 }
 
 /**
- * The other runs one after the other, with the sheet carried through each as far as anybody asks; one at a time, so that
- * none needs to be kept. Perturbed runs differ from now on: what lies before is the main run's.
+ * The other runs one after the other, with the sheet carried through each as far as anybody asks; one at a time, so
+ * that none needs to be kept. Perturbed runs differ from now on: what lies before is the main run's.
+ *
+ * @param setting Rink, from makeSetting.
+ * @param options Members or the number of perturbed runs, and their seed.
+ * @param main Run of the forecast itself.
+ * @param hourCount How far the sheets are carried. [h]
+ * @returns Runs, made as they are asked for.
+ *
+ * Source: ours.
  */
 export function* otherRuns(
   setting: Setting,
@@ -54,13 +62,28 @@ export interface HourAgreement {
 /** What the runs asked so far say of the hours of a window. */
 export type RangeTally = { range: HourRange; shares: Float64Array; scoreSums: Float64Array }
 
-/** No run asked yet. */
+/**
+ * A tally of which no run has been asked yet.
+ *
+ * @param range Hours of the window.
+ * @returns Shares and sums of scores, all 0.
+ *
+ * Source: ours.
+ */
 export function startTally(range: HourRange): RangeTally {
   const length = range.to - range.from
   return { range, shares: new Float64Array(length), scoreSums: new Float64Array(length) }
 }
 
-/** Asks one run about the hours of a window. */
+/**
+ * Asks one run about the hours of a window.
+ *
+ * @param tally Tally; changed in place.
+ * @param setting Rink, from makeSetting.
+ * @param run Forecast run with its sheet.
+ *
+ * Source: ours.
+ */
 export function addToTally({ range, shares, scoreSums }: RangeTally, setting: Setting, run: ForecastRun): void {
   const cache: GrowthCache = new Map()
   for (let index = range.from; index < range.to; index += 1) {
@@ -87,11 +110,15 @@ function fillScore(setting: Setting, run: ForecastRun, index: number, cache: Gro
 }
 
 /**
- * How the runs see each hour of a window. The window's best hour is the one in which most runs come off, and the share at
- * that hour is the window's agreement; held against measured nights in `npm run bench:advice`.
+ * How the runs see each hour of a window. The window's best hour is the one in which most runs come off, and the share
+ * at that hour is the window's agreement; held against measured nights in `npm run bench:advice`.
  *
+ * @param tally Counts of the window.
  * @param runs How many have been asked.
  * @param scores The forecast's own scores for the range, which stand where there are no other runs.
+ * @returns For each hour the share of runs that come off [0-1] and their mean score [0-100].
+ *
+ * Source: ours.
  */
 export function hourAgreements(tally: RangeTally, runs: number, scores: readonly number[]): HourAgreement[] {
   if (runs === 0) return scores.map((score) => ({ share: 1, meanScore: score }))
@@ -101,7 +128,14 @@ export function hourAgreements(tally: RangeTally, runs: number, scores: readonly
   }))
 }
 
-/** Hour of the window in which most runs come off; of equals the one with the highest mean score, then the earliest. */
+/**
+ * Hour of the window in which most runs come off; of equals the one with the highest mean score, then the earliest.
+ *
+ * @param agreements Of the window's hours, in order.
+ * @returns Place in the list, from 0.
+ *
+ * Source: ours.
+ */
 export function bestHour(agreements: readonly HourAgreement[]): number {
   let best = 0
   for (const [index, { share, meanScore }] of agreements.entries()) {

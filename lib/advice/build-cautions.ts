@@ -3,7 +3,15 @@ import { BUILD } from './thresholds'
 import type { BuildSums } from './build-types'
 import type { Caution } from './types'
 
-/** Cautions of the sums, those that stop a build first. */
+/**
+ * Cautions of the sums, those that stop a build first.
+ *
+ * @param sums Sums of the Plan page; units in their names.
+ * @param boards Freeboard and the boards the keeper has. [m], height null when none are
+ * @returns Codes and numbers, gravest first.
+ *
+ * Source: limits in BUILD.
+ */
 export function buildCautions(
   sums: Omit<BuildSums, 'cautions'>,
   { freeboardM, boardHeightM }: { freeboardM: number; boardHeightM: number | null },

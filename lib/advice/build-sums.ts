@@ -16,8 +16,11 @@ import type { BuildInput, BuildSums, CornerSum, How, SourceId, SumId, WettedHour
  * All sums of the Plan page.
  *
  * @param input Ranges and defaults at the fields.
- * @returns Data; sentences, formulas and sources in words are made in lib/words/sums.ts.
+ * @returns Sums, each with its unit in its name; sentences, formulas and sources in words are made in
+ *   lib/words/sums.ts.
  * @throws RangeError for a value out of range.
+ *
+ * Source: the physics it calls; limits in BUILD.
  */
 export function buildSums(input: BuildInput): BuildSums {
   const floor = floorOf(input.lengthM, input.widthM, input.floor)

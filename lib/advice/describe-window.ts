@@ -16,8 +16,17 @@ const QUARTERS = Array.from({ length: 60 / PLAN.stepMinutes }, (_, step) => (ste
 export type WindowDraft = Omit<AdviceWindow, 'agreement' | 'runs'>
 
 /**
+ * Puts one window into figures.
+ *
+ * @param setting Rink, from makeSetting.
+ * @param run Forecast run with its sheet.
+ * @param scored Hours as scored, one for each hour of the run.
+ * @param range Hours of the window.
  * @param bestHour Hour of the range that the forecast runs like best.
  * @param fillSetBy When the water of a fill started in the range is skinned over, for fill windows.
+ * @returns Window without its agreement; instants are ISO 8601.
+ *
+ * Source: ours.
  */
 export function describeWindow(
   setting: Setting,

@@ -6,9 +6,10 @@ import type { Ramp } from './thresholds'
  *
  * @param value The factor, in the ramp's unit.
  * @param ramp Its two ends; `one` may lie above or below `zero`.
- * @returns 0 to 1.
+ * @returns Desirability. [0-1]
  *
- * Source: G. Derringer, R. Suich, J. Quality Technology 12 (1980), one-sided transformation with exponent 1; from memory.
+ * Source: G. Derringer, R. Suich, J. Quality Technology 12 (1980), one-sided transformation with exponent 1; from
+ * memory.
  */
 export function rampDesirability(value: number, ramp: Ramp): number {
   return Math.min(1, Math.max(0, (value - ramp.zero) / (ramp.one - ramp.zero)))
@@ -19,7 +20,7 @@ export function rampDesirability(value: number, ramp: Ramp): number {
  *
  * @param factors 0 to 1 each, by name.
  * @param weights Exponents, above 0, for the same names.
- * @returns 0 to 1; 0 when any factor is 0.
+ * @returns Desirability, 0 when any factor is 0. [0-1]
  *
  * Source: as above, with the weights of G. Derringer, Quality Progress 27 (1994); from memory.
  */

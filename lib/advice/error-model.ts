@@ -34,7 +34,15 @@ export const FORECAST_ERROR = {
 /** Errors of one hour and the next are alike: they fade with this time. [h] Ours. */
 export const ERROR_MEMORY_HOURS = 12
 
-/** Value of a growth at a lead time. [h] */
+/**
+ * Value of a growth at a lead time.
+ *
+ * @param growth Value now and how much it grows in a day.
+ * @param leadHours Lead time; before now counts as now. [h]
+ * @returns Value, in the unit of the growth.
+ *
+ * Source: straight line; ours.
+ */
 export function errorAt(growth: ErrorGrowth, leadHours: number): number {
   return growth.start + (growth.perDay * Math.max(0, leadHours)) / 24
 }

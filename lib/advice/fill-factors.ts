@@ -43,7 +43,17 @@ export interface FillStart {
 /** Growth by the hour in which the water is in: many starts share one. */
 export type GrowthCache = Map<number, FillGrowth>
 
-/** Judges a fill started in an hour. */
+/**
+ * Judges a fill started in an hour.
+ *
+ * @param setting Rink, from makeSetting.
+ * @param run Forecast run with its sheet.
+ * @param index Hour of the start; must be known.
+ * @param cache Growths of this run already worked out.
+ * @returns Shares for ice and person [0-1], what became of the fill, and its reasons.
+ *
+ * Source: limits in FILL and PERSON; weights as in overallDesirability.
+ */
 export function judgeFillStart(setting: Setting, run: ForecastRun, index: number, cache: GrowthCache): FillStart {
   const session = fillSession(setting, run, index)
   const outcome = session ? outcomeOf(setting, run, session, cache) : null

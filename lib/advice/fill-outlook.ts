@@ -17,9 +17,14 @@ const ICE_PER_WATER = 1.09
 /**
  * Outlook of the fill over all forecast runs.
  *
+ * @param setting Rink, from makeSetting.
  * @param main The forecast itself.
- * @param grown How the fill freezes in each run, see growthOf; quantiles are over them, the first is the forecast's own.
+ * @param grown How the fill freezes in each run, see growthOf; quantiles are over them, the first is the forecast's
+ *   own.
  * @param startIndex Hour in which the fill starts, or null when no hour is good.
+ * @returns Water [L], hose time [h] and instants in ISO 8601, null where not known.
+ *
+ * Source: growFill in each run; quantiles by nearest rank.
  */
 export function fillOutlook(
   setting: Setting,
@@ -52,7 +57,16 @@ export interface Grown {
   frozenMillis: number
 }
 
-/** How the fill freezes in one run; null when there is none. */
+/**
+ * How the fill freezes in one run; null when there is none.
+ *
+ * @param setting Rink, from makeSetting.
+ * @param run Forecast run with its sheet.
+ * @param startIndex Hour of the start; null when no hour is good.
+ * @returns Instants of skin and bearing, null when there is no fill to follow. [ms since the epoch]
+ *
+ * Source: growFill, followGrowth.
+ */
 export function growthOf(setting: Setting, run: ForecastRun, startIndex: number | null): Grown | null {
   const { phase, base } = setting.input.rink
   const { temperatureC } = setting.input.water

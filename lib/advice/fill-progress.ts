@@ -66,8 +66,11 @@ export interface FillProgress {
  * How a fill stands now.
  *
  * @param input See the fields.
- * @returns Everything the Filling page shows.
- * @throws RangeError for a floor or a flow out of range, an unreadable instant, or sessions that end before they start.
+ * @returns Everything the Filling page shows; units in its names.
+ * @throws RangeError for a floor or a flow out of range, an unreadable instant, or sessions that end before they
+ *   start.
+ *
+ * Source: balance of volume; limits in FILLING.
  */
 export function fillProgress(input: FillProgressInput): FillProgress {
   const nowMillis = instantOf(input.now)
@@ -107,7 +110,12 @@ export function fillProgress(input: FillProgressInput): FillProgress {
 /**
  * Water that all sessions have brought by an instant. A session that has not stopped runs on.
  *
+ * @param sessions Hose sessions with their flow. [L/min]
+ * @param atMillis Instant. [ms since the epoch]
+ * @returns Water. [L]
  * @throws RangeError for a session that ends before it starts.
+ *
+ * Source: flow times time.
  */
 export function litresPouredBy(sessions: readonly HoseSession[], atMillis: number): number {
   return sessions.reduce((sum, { startedAt, stoppedAt, flowLPerMin }) => {

@@ -12,7 +12,17 @@ export interface FillLimits {
   lowestWindChillC: number
 }
 
-/** All factors of a fill as reasons, the one that lets least through first. */
+/**
+ * All factors of a fill as reasons, the one that lets least through first.
+ *
+ * @param setting Rink, from makeSetting.
+ * @param factors Desirabilities. [0-1]
+ * @param outcome What becomes of the fill; null when the forecast ends first.
+ * @param limits What hose and hands let through. [0-1]
+ * @returns Codes and numbers.
+ *
+ * Source: ours.
+ */
 export function fillReasons(
   setting: Setting,
   factors: FillFactors,

@@ -20,7 +20,12 @@ export interface FillSession {
  * counts in any case, since the question is what a start then would be like. Where such hours are too few or too far
  * apart, it is what the keeper's hours give, and the cold in them speaks for itself.
  *
- * @returns Null when the forecast ends before the fill is done.
+ * @param setting Rink, from makeSetting.
+ * @param run Forecast run with its sheet.
+ * @param startIndex Hour in which the fill starts.
+ * @returns Hours of the run in which the hose runs; null when the forecast ends before the fill is done.
+ *
+ * Source: ours.
  */
 export function fillSession(setting: Setting, run: ForecastRun, startIndex: number): FillSession | null {
   const needed = Math.max(1, Math.ceil(hosePlanOf(setting).hoseHours - 1e-9))
@@ -63,7 +68,15 @@ function isHoseBorne(hour: PreparedHour): boolean {
   return 100 * Math.min(hose, hands) >= VERDICT.goodScore
 }
 
-/** What the hose and the hands let through, 0-1 each. */
+/**
+ * What the hose and the hands let through.
+ *
+ * @param airTemperatureC Lowest air. [°C]
+ * @param windChill Lowest index of windChillC. [-]
+ * @returns Desirabilities. [0-1]
+ *
+ * Source: ramps in PERSON.
+ */
 export function hoseAndHands(airTemperatureC: number, windChill: number): { hose: number; hands: number } {
   return {
     hose: rampDesirability(airTemperatureC, PERSON.fillHoseC),

@@ -13,7 +13,12 @@ import type { FillHour, FillSpan } from './types'
 /**
  * When the hose runs, neighbouring hours joined. The last span ends in the minute in which the water is in.
  *
+ * @param setting Rink, from makeSetting.
+ * @param run Forecast run with its sheet.
  * @param startIndex Hour in which the fill starts.
+ * @returns Spans with their water [L], in order; none when the forecast ends before the fill is done.
+ *
+ * Source: fillSession, flow times time.
  */
 export function fillSpans(setting: Setting, run: ForecastRun, startIndex: number): FillSpan[] {
   const { litres } = hosePlanOf(setting)
@@ -36,7 +41,15 @@ export function fillSpans(setting: Setting, run: ForecastRun, startIndex: number
   }))
 }
 
-/** How the water stands after each hour of hose, and at the end of each span. */
+/**
+ * How the water stands after each hour of hose, and at the end of each span.
+ *
+ * @param setting Rink, from makeSetting.
+ * @param spans From fillSpans.
+ * @returns Level and corner depths [m], water so far [L] and wetted share [0-1], by instant.
+ *
+ * Source: balance of volume, levelOf.
+ */
 export function fillHours(setting: Setting, spans: readonly FillSpan[]): FillHour[] {
   const floor = floorOfRink(setting)
   const corners = cornerDepthsM(floor)

@@ -61,6 +61,9 @@ export interface FloodStart {
  * @param index Hour of the start; must be known.
  * @param fraction Share of that hour gone by, 0 to below 1.
  * @param sheet The sheet to pour on, when it is not the run's own.
+ * @returns Shares for ice and person [0-1], their factors, and the set time. [min]
+ *
+ * Source: limits in FLOOD and PERSON; set time by minutesToSet; weights as in overallDesirability.
  */
 export function judgeFloodStart(
   setting: Setting,
@@ -104,7 +107,14 @@ export function judgeFloodStart(
   return start
 }
 
-/** Set times are told to the minute, and never too early. */
+/**
+ * When a flood has set, told to the minute and never too early.
+ *
+ * @param start Start [ms since the epoch] and set time [min], null when it does not set.
+ * @returns Instant in ISO 8601, or null.
+ *
+ * Source: ours.
+ */
 export function setsAtOf({ startMillis, setMinutes }: Pick<FloodStart, 'startMillis' | 'setMinutes'>): string | null {
   return setMinutes === null ? null : toIso(Math.ceil(startMillis / MINUTE_MILLIS + setMinutes) * MINUTE_MILLIS)
 }

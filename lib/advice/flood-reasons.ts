@@ -11,6 +11,15 @@ import type { Reason } from './types'
 /**
  * All factors of a flood as reasons, the one that lets least through first; limits of the person are among them, each
  * with its own value.
+ *
+ * @param start From judgeFloodStart.
+ * @param parts Parts of the heat balance. [W/m²]
+ * @param setting Rink, from makeSetting.
+ * @param run Forecast run with its sheet.
+ * @param index Hour of the run.
+ * @returns Codes and numbers.
+ *
+ * Source: ours.
  */
 export function floodReasons(
   start: FloodStart,

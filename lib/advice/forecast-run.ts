@@ -24,7 +24,14 @@ export interface ForecastRun {
   pouredSetMillis: number | null
 }
 
-/** Water in what falls; where only the depth of snow is given, a centimetre is taken as a millimetre. */
+/**
+ * Water in what falls; where only the depth of snow is given, a centimetre is taken as a millimetre.
+ *
+ * @param hour Prepared hour, known.
+ * @returns Water. [mm]
+ *
+ * Source: common practice, 1 cm of snow is about 1 mm of water; from memory.
+ */
 export function wetMmOf(hour: PreparedHour): number {
   return hour.precipitationMm > 0 ? hour.precipitationMm : hour.snowfallCm
 }
@@ -38,7 +45,12 @@ export interface SharedStart {
 /**
  * Carries the sheet of the input through a run of hours.
  *
+ * @param setting Rink, from makeSetting.
+ * @param hours Prepared hours of the run.
  * @param shared What it has in common with the main run: sheets are taken from there, and no reports are made.
+ * @returns The run: its hours, the sheet at the start of each, and what a keeper would measure.
+ *
+ * Source: advanceSheet, hour by hour.
  */
 export function carrySheet(setting: Setting, hours: PreparedHour[], shared?: SharedStart): ForecastRun {
   const from = shared?.count ?? 0

@@ -48,13 +48,15 @@ export interface FreezingOutlook {
 /**
  * Follows a freezing rink through the forecast and its other runs.
  *
- * A drilled reading corrects it: give the reading as `input.sheet` (thickness, temperature, snow) with `asOf` its hour and
- * no `state`, and everything starts from there.
+ * A drilled reading corrects it: give the reading as `input.sheet` (thickness, temperature, snow) with `asOf` its hour
+ * and no `state`, and everything starts from there.
  *
  * @param input As for `judge`, phase 'freezing'.
  * @param options Other runs and their seed, as for `judge`.
- * @returns The sheet at `now` and ahead to the end of the forecast.
+ * @returns The sheet at `now` and ahead to the end of the forecast. [mm], [°C] and instants in ISO 8601
  * @throws RangeError as `judge` does.
+ *
+ * Source: advanceSheet in each run; quantiles by nearest rank.
  */
 export function freezingOutlook(input: JudgeInput, options: JudgeOptions = {}): FreezingOutlook {
   const setting = makeSetting({ ...input, rink: { ...input.rink, phase: 'freezing' } })

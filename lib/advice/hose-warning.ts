@@ -22,8 +22,9 @@ export interface HoseQuestion {
 /**
  * Warns of frost in the hose within the next day.
  *
- * @returns 'running_hose_freezes' from when a running hose is in danger; 'still_hose_freezes' while it is off, with how
- *   long a full hose has from the first hour of frost; null when neither is in sight.
+ * @param question Hours ahead, now [ms since the epoch], whether the hose runs, and its water. [°C]
+ * @returns 'running_hose_freezes' from when a running hose is in danger; 'still_hose_freezes' while it is off, with
+ *   how long a full hose has from the first hour of frost; null when neither is in sight.
  *
  * Source: the running hose by common practice (FILLING.hoseFreezesC); the still one by its heat, see stillHoseHours.
  */

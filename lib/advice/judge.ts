@@ -24,11 +24,13 @@ const HOURS_TO_SET = 24
 /**
  * Judges a forecast for one rink.
  *
- * @param input Rink, water, sheet, hours and settings; see JudgeInput. Hours must follow each other without a gap; what
- *   is missing in them is null.
+ * @param input Rink, water, sheet, hours and settings; see JudgeInput. Hours must follow each other without a gap;
+ *   what is missing in them is null.
  * @param options Other runs and their seed, and the hour at which the sheet's state is wanted.
  * @returns Scores for every hour given, and from `now` on the windows, the plan of tonight, the fill and thaws.
  * @throws RangeError for values out of range, hours that do not follow each other, or an unknown zone.
+ *
+ * Source: the functions of this folder that it calls; limits and their sources in thresholds.ts.
  */
 export function judge(input: JudgeInput, options: JudgeOptions = {}): Judgement {
   const setting = makeSetting(input)

@@ -27,7 +27,14 @@ const BANDS = [
   [0.9, 1],
 ] as const
 
-/** Rates over settled nights; nights whose outcome nobody knows are counted apart. */
+/**
+ * Rates over settled nights; nights whose outcome nobody knows are counted apart.
+ *
+ * @param nights Settled nights; agreement [0-1] or null.
+ * @returns Counts and shares [0-1], by what was said and by band of agreement.
+ *
+ * Source: count of those that came true over those known.
+ */
 export function keptRates(nights: readonly KeptNight[]): KeptRates {
   const known = nights.filter(({ result }) => result !== 'unknown')
   const floods = known.filter(({ said }) => said === 'flood')

@@ -24,7 +24,15 @@ export interface LeakQuestion {
   evaporationMmPerDay: number
 }
 
-/** Water surface below the line, from a reading. [m] */
+/**
+ * Water surface below the line, from a reading.
+ *
+ * @param floor Floor.
+ * @param reading Distance below the line, or depth at a corner or the lowest place. [mm]
+ * @returns Level below the line. [m]
+ *
+ * Source: geometry.
+ */
 export function levelOfReading(floor: FloorGrid, reading: LevelReading): number {
   if ('belowLineMm' in reading) return reading.belowLineMm / MM_PER_M
   if ('lowestDepthMm' in reading) return floorExtremesM(floor).lowestM - reading.lowestDepthMm / MM_PER_M
@@ -32,8 +40,10 @@ export function levelOfReading(floor: FloorGrid, reading: LevelReading): number 
 }
 
 /**
- * Compares the latest reading with each earlier one of the last day: where should the level be by now, and where is it?
+ * Compares the latest reading with each earlier one of the last day: where should the level be by now, and where is
+ * it?
  *
+ * @param question Floor, readings [mm], water brought by an instant [L] and evaporation. [mm/d]
  * @returns 'level_falls' when less water stands than before, 'level_lags' when it rises less than the hose should make
  *   it, null when all is well within what readings, bucket test and evaporation allow.
  *

@@ -43,6 +43,8 @@ export interface JudgedPass extends WantedPass {
  * @param night From `unpackNight`.
  * @param wanted Passes; each must start in a known hour of the night. Snow is taken as cleared before each.
  * @returns One judgement per pass, in the order given; null where the hour is unknown or outside the forecast.
+ *
+ * Source: judgeFloodStart on the sheet that the passes before leave.
  */
 export function judgePasses(night: NightRun, wanted: readonly WantedPass[]): (JudgedPass | null)[] {
   const judged = new Map<WantedPass, JudgedPass | null>()

@@ -30,6 +30,8 @@ export interface NightRun {
  * @param nightDate 'yyyy-MM-dd', see night.ts.
  * @returns The night's hours and a day more, and the sheet at their start; null when the forecast has none of them.
  * @throws RangeError as `judge` does.
+ *
+ * Source: carrySheet.
  */
 export function packNight(input: JudgeInput, nightDate: string): NightModel | null {
   const whole = makeSetting(input)
@@ -57,7 +59,14 @@ export function packNight(input: JudgeInput, nightDate: string): NightModel | nu
 /** The state says it all; these stand where the type wants numbers. */
 const BARE = { thicknessMm: 0, temperatureC: 0, snowCoverCm: 0 }
 
-/** Unpacks a night: carries the sheet through its hours as the judgement did. */
+/**
+ * Unpacks a night: carries the sheet through its hours as the judgement did.
+ *
+ * @param model From packNight.
+ * @returns Rink and run, as the judgement had them.
+ *
+ * Source: carrySheet.
+ */
 export function unpackNight({ setting, hours }: NightModel): NightRun {
   return { setting, run: carrySheet(setting, hours) }
 }

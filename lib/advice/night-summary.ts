@@ -58,6 +58,10 @@ const WORTH_SAYING_MM = 0.1
  * @param options.nightDate 'yyyy-MM-dd', see night.ts.
  * @param options.now Nothing before it is advised.
  * @param options.timeZone IANA zone of the rink.
+ * @returns Verdict, window, passes, reasons and cautions of the night; instants in ISO 8601.
+ * @throws RangeError for an unknown zone.
+ *
+ * Source: ours.
  */
 export function summariseNight(
   judgement: Judgement,

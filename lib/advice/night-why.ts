@@ -13,7 +13,16 @@ const SUNLESS_WM2 = 5
 
 const mean = (values: number[]) => values.reduce((sum, value) => sum + value, 0) / values.length
 
-/** Reasons for the list under the plan: the window's hours, or without a window the night's, then what comes after. */
+/**
+ * Reasons for the list under the plan: the window's hours, or without a window the night's, then what comes after.
+ *
+ * @param hours The night's hours as scored.
+ * @param window The night's window, or null.
+ * @param precipitation What falls next, or null.
+ * @returns Codes and numbers; none when no hour is known.
+ *
+ * Source: ours.
+ */
 export function whyOf(
   hours: ScoredHour[],
   window: AdviceWindow | null,
@@ -117,7 +126,16 @@ const STANDING: Caution[] = [
   { code: 'land_only', values: {} },
 ]
 
-/** What the keeper must mind if they go out in these hours, gravest first; the standing cautions come last. */
+/**
+ * What the keeper must mind if they go out in these hours, gravest first; the standing cautions come last.
+ *
+ * @param hours The night's hours as scored.
+ * @param window The night's window, or null.
+ * @param passes Passes planned.
+ * @returns Codes and numbers.
+ *
+ * Source: limits in CAUTIONS; order ours.
+ */
 export function cautionsOf(hours: ScoredHour[], window: AdviceWindow | null, passes: PlannedPass[]): Caution[] {
   if (!window) return [...snowRuleCautions(hours), ...STANDING]
   const lastStart = passes.at(-1)?.startsAt ?? window.endsAt

@@ -6,7 +6,16 @@ const NOON_MINUTE = 12 * 60
 const TONIGHT_TURNS_AT_MINUTE = 9 * 60
 const MINUTES_A_DAY = 24 * 60
 
-/** Minutes on the rink's clock since local midnight. */
+/**
+ * Minutes on the rink's clock since local midnight.
+ *
+ * @param atMillis Instant. [ms since the epoch]
+ * @param timeZone IANA zone of the rink.
+ * @returns Minutes. [min], 0 to 1439
+ * @throws RangeError for an unknown zone.
+ *
+ * Source: definition.
+ */
 export function localMinuteOf(atMillis: number, timeZone: string): number {
   const local = Math.floor(atMillis / 60_000) + zoneOffsetMinutes(atMillis, timeZone)
   return ((local % MINUTES_A_DAY) + MINUTES_A_DAY) % MINUTES_A_DAY
@@ -18,6 +27,9 @@ export function localMinuteOf(atMillis: number, timeZone: string): number {
  * @param instant Any instant.
  * @param timeZone IANA zone of the rink.
  * @returns Date of the noon the night began at, 'yyyy-MM-dd'.
+ * @throws RangeError for an unknown zone.
+ *
+ * Source: ours: a night runs from noon to noon.
  */
 export function nightDateOf(instant: Date, timeZone: string): string {
   const atMillis = instant.getTime()
@@ -26,8 +38,15 @@ export function nightDateOf(instant: Date, timeZone: string): string {
 }
 
 /**
- * The night people mean by "tonight": before 9 am by the rink's clock the one still running, from 9 am the one to come.
- * The hour is ours: floods of the early shift end by then, and plans for the evening have not begun.
+ * The night people mean by "tonight": before 9 am by the rink's clock the one still running, from 9 am the one to
+ * come. The hour is ours: floods of the early shift end by then, and plans for the evening have not begun.
+ *
+ * @param now Instant of asking.
+ * @param timeZone IANA zone of the rink.
+ * @returns Date of the noon the night began at, 'yyyy-MM-dd'.
+ * @throws RangeError for an unknown zone.
+ *
+ * Source: ours.
  */
 export function tonightDate(now: Date, timeZone: string): string {
   const atMillis = now.getTime()
@@ -39,7 +58,11 @@ export function tonightDate(now: Date, timeZone: string): string {
  * First and last instant of a night. A night is 23 or 25 hours long when the clocks change in it.
  *
  * @param nightDate 'yyyy-MM-dd'
+ * @param timeZone IANA zone of the rink.
  * @returns Local noon of that date, and of the next (not part of the night).
+ * @throws RangeError for an unknown zone.
+ *
+ * Source: ours: a night runs from noon to noon.
  */
 export function nightBounds(nightDate: string, timeZone: string): { startsAt: Date; endsAt: Date } {
   return {

@@ -11,7 +11,14 @@ const PERSONAL: ReadonlySet<string> = new Set([
   'hands_bear',
 ])
 
-/** Whether the reason with this code limits the person or the hose, not the ice. */
+/**
+ * Whether the reason with this code limits the person or the hose, not the ice.
+ *
+ * @param code Code of a reason.
+ * @returns Whether it does.
+ *
+ * Source: ours.
+ */
 export function isPersonal(code: string): boolean {
   return PERSONAL.has(code)
 }

@@ -36,6 +36,8 @@ const NOTHING: Chain = { gain: 0, passes: 0, endMillis: Number.NEGATIVE_INFINITY
  * @param slots Possible starts in ascending order.
  * @param maxPasses Most passes, 0 or more.
  * @returns Passes in order of time; none when no pass brings anything.
+ *
+ * Source: dynamic programming over starts and passes; ours.
  */
 export function planPasses(slots: readonly PlanSlot[], maxPasses: number): PlannedStart[] {
   if (maxPasses <= 0) return []

@@ -1,9 +1,12 @@
 // Random numbers from a seed, so that perturbed forecasts are the same for the same input.
 
 /**
- * Uniform numbers from 0 to below 1, by the 32-bit mixing generator known as mulberry32 (public domain; from memory).
+ * Uniform numbers from 0 to below 1, the same for the same seed.
  *
  * @param seed Any integer.
+ * @returns Generator; each call gives the next number. [0-1)
+ *
+ * Source: the 32-bit mixing generator known as mulberry32 (public domain; from memory).
  */
 export function seededUniform(seed: number): () => number {
   let state = seed >>> 0
@@ -15,7 +18,14 @@ export function seededUniform(seed: number): () => number {
   }
 }
 
-/** Standard normal numbers from uniform ones (Box & Muller 1958). */
+/**
+ * Standard normal numbers from uniform ones.
+ *
+ * @param uniform Generator of numbers from 0 to below 1.
+ * @returns Generator; each call gives the next number. [-]
+ *
+ * Source: Box & Muller 1958; from memory.
+ */
 export function normalFrom(uniform: () => number): () => number {
   return () => Math.sqrt(-2 * Math.log(1 - uniform())) * Math.cos(2 * Math.PI * uniform())
 }
@@ -24,6 +34,7 @@ export function normalFrom(uniform: () => number): () => number {
  * Standard normal number below which a share of all lies.
  *
  * @param share Above 0 to below 1.
+ * @returns Number, 0 for half. [standard deviations]
  *
  * Source: Winitzki 2008, closed form for the inverse error function with a = 0.147; off by 0.2 % at most; from memory.
  */

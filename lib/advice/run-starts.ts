@@ -22,6 +22,7 @@ const NAMES = ['timing', 'amount', 'air', 'dew', 'wind', 'cloud', 'miss', 'unfor
  *
  * @param count Runs.
  * @param seed Same seed, same starts.
+ * @returns As many starts as runs. [standard deviations], chances [0-1)
  *
  * Source: McKay, Beckman & Conover 1979, Technometrics 21, 239; from memory.
  */
@@ -45,7 +46,15 @@ export function spreadStarts(count: number, seed: number): RunStart[] {
   })
 }
 
-/** One start drawn at random. */
+/**
+ * One start drawn at random.
+ *
+ * @param uniform Generator of numbers from 0 to below 1.
+ * @param normal Generator of standard normal numbers.
+ * @returns Start. [standard deviations], chances [0-1)
+ *
+ * Source: independent draws.
+ */
 export function randomStart(uniform: () => number, normal: () => number): RunStart {
   return {
     timing: normal(),

@@ -19,6 +19,9 @@ const BLOCK_HOURS = 12
  * @param nowMillis Lead times count from here. [ms]
  * @param seed Same seed, same run.
  * @param given Where the run begins; drawn from the seed when absent.
+ * @returns As many hours, in the units of the forecast.
+ *
+ * Source: growth of errors in error-model.ts.
  */
 export function perturbRun(
   hours: readonly HourlyRecord[],
@@ -52,7 +55,15 @@ export function perturbRun(
   })
 }
 
-/** Index of the first hour that perturbation touches; the number of hours when it touches none. */
+/**
+ * Index of the first hour that perturbation touches; the number of hours when it touches none.
+ *
+ * @param hours The forecast.
+ * @param nowMillis Lead times count from here. [ms since the epoch]
+ * @returns Index, from 0.
+ *
+ * Source: ours: known hours are not perturbed.
+ */
 export function firstPerturbed(hours: readonly HourlyRecord[], nowMillis: number): number {
   const first = hours[0]
   if (!first) return 0

@@ -13,17 +13,39 @@ import { PLAN, VERDICT } from './thresholds'
 import { toIso } from './zoned-time'
 import type { HourWeather, Reason, ScoredHour, SheetReport } from './types'
 
-/** Score of a start, 0-100: the worse of what the ice and what the person allow, never their mean. */
+/**
+ * Score of a start: the worse of what the ice and what the person allow, never their mean.
+ *
+ * @param start Shares for ice and person. [0-1]
+ * @returns Score, whole. [0-100]
+ *
+ * Source: ours.
+ */
 export function scoreOf({ ice, person }: { ice: number; person: number }): number {
   return Math.round(100 * Math.min(ice, person))
 }
 
-/** Whether a start is worth getting the hose out for: a score of VERDICT.goodScore or more. */
+/**
+ * Whether a start is worth getting the hose out for.
+ *
+ * @param start Shares for ice and person. [0-1]
+ * @returns Whether its score is VERDICT.goodScore or more.
+ *
+ * Source: VERDICT in thresholds.ts.
+ */
 export function isGood(start: { ice: number; person: number }): boolean {
   return scoreOf(start) >= VERDICT.goodScore
 }
 
-/** Whether the keeper can go out in some quarter of an hour. */
+/**
+ * Whether the keeper can go out in some quarter of an hour.
+ *
+ * @param setting Rink, from makeSetting.
+ * @param startMillis Start of the hour. [ms since the epoch]
+ * @returns Whether one quarter is within the keeper's hours.
+ *
+ * Source: ours.
+ */
 export function isHourAvailable(setting: Setting, startMillis: number): boolean {
   const step = PLAN.stepMinutes * MINUTE_MILLIS
   for (let at = startMillis; at < startMillis + HOUR_MILLIS; at += step) if (isAvailableAt(setting, at)) return true
@@ -33,7 +55,13 @@ export function isHourAvailable(setting: Setting, startMillis: number): boolean 
 /**
  * Scores one hour.
  *
+ * @param setting Rink, from makeSetting.
+ * @param run Forecast run with its sheet.
+ * @param index Hour of the run.
  * @param fill What a fill started in this hour would be, where the phase asks for one.
+ * @returns Scores [0-100], verdict, reasons and figures of the hour; units in their names.
+ *
+ * Source: judgeFloodStart, judgeFillStart.
  */
 export function scoreHour(setting: Setting, run: ForecastRun, index: number, fill: FillStart | null): ScoredHour {
   const hour = run.hours[index] as PreparedHour
@@ -127,7 +155,15 @@ function roundReasons(reasons: Reason[]): Reason[] {
 
 const POWERS = [1, 10, 100, 1000] as const
 
-/** Rounded for reading, and never -0. */
+/**
+ * Rounded for reading, and never -0.
+ *
+ * @param value Any finite number.
+ * @param digits Decimals kept.
+ * @returns The number, in its own unit.
+ *
+ * Source: ours.
+ */
 export function round(value: number, digits: 0 | 1 | 2 | 3): number {
   const power = POWERS[digits]
   return Math.round(value * power) / power + 0

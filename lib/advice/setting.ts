@@ -31,7 +31,15 @@ export interface Setting {
   ranges: MinuteRange[]
 }
 
-/** @throws RangeError for an unknown zone, a shelter out of range or an unreadable time. */
+/**
+ * Works out what all hours of a judgement share: site, clock, the keeper's hours and when ice is needed.
+ *
+ * @param input Input of `judge`.
+ * @returns Rink, ready for the other functions.
+ * @throws RangeError for an unknown zone, a shelter out of range or an unreadable time.
+ *
+ * Source: ours.
+ */
 export function makeSetting(input: JudgeInput): Setting {
   const { rink, water } = input
   const shelter = shelterFactor(rink.shelter)
@@ -104,7 +112,15 @@ function minuteOf(clock: string): number {
   return Number(clock.slice(0, 2)) * 60 + Number(clock.slice(3, 5))
 }
 
-/** Whether the keeper can go out at an instant. */
+/**
+ * Whether the keeper can go out at an instant.
+ *
+ * @param setting Rink, from makeSetting.
+ * @param atMillis Instant. [ms since the epoch]
+ * @returns Whether it is within the keeper's hours.
+ *
+ * Source: ours.
+ */
 export function isAvailableAt(setting: Setting, atMillis: number): boolean {
   const index = Math.floor((atMillis - setting.firstMillis) / HOUR_MILLIS)
   const offset = setting.offsets[Math.min(Math.max(0, index), setting.offsets.length - 1)] ?? 0
@@ -116,7 +132,15 @@ export function isAvailableAt(setting: Setting, atMillis: number): boolean {
   return setting.ranges.some(({ from, to, days }) => minute >= from && minute < to && (days >> weekday) % 2 === 1)
 }
 
-/** When a flood started at an instant must be set: the first 7 am that leaves it a fair time. */
+/**
+ * When a flood started at an instant must be set: the first 7 am that leaves it a fair time.
+ *
+ * @param setting Rink, from makeSetting.
+ * @param startMillis Start of the flood. [ms since the epoch]
+ * @returns Instant. [ms since the epoch]
+ *
+ * Source: NEEDED in thresholds.ts.
+ */
 export function neededMillis(setting: Setting, startMillis: number): number {
   const least = startMillis + NEEDED.leastMinutesAhead * MINUTE_MILLIS
   const days = setting.readyMillis

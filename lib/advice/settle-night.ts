@@ -46,13 +46,17 @@ export type SettledCode =
  * Settles one night.
  *
  * A report counts before the weather. Without one, a flood was good advice when every pass, poured on the hour it was
- * advised for, would have set by 7 am with no more than 0.1 mm of rain or snow before; holding off was good advice when
- * the later weather has no flood window in the keeper's hours.
+ * advised for, would have set by 7 am with no more than 0.1 mm of rain or snow before; holding off was good advice
+ * when the later weather has no flood window in the keeper's hours.
  *
  * @param night What was said.
  * @param hindsight Judgement of the same night with the weather as it came, from the night's start on.
  * @param reports What people found, of layers poured in this night.
  * @param timeZone IANA zone of the rink.
+ * @returns Whether it was good advice, and what settled it.
+ * @throws RangeError for an unknown zone.
+ *
+ * Source: ours.
  */
 export function settleNight(
   night: SaidNight,

@@ -22,6 +22,7 @@ export interface SnowQuestion {
 /**
  * What snow means for a sheet that still floats or is thin.
  *
+ * @param question Sheet now, run, its hour, and the ice ahead. [mm]
  * @returns Codes and numbers, the most pressing first; empty when there is nothing to do.
  *
  * Source: Archimedes for the load; Ashton 1989 for the growth under snow; Village of Fox Point (snow cannot be cleared
@@ -43,7 +44,7 @@ export function snowOnThinIce({ sheet, run, nowIndex, ahead }: SnowQuestion): Ca
  * @param thicknessMm Ice. [mm]
  * @param snowCm Snow. [cm]
  * @param densityKgM3 Of the snow. [kg/m³], 10 to 600
- * @returns 0-1
+ * @returns Share. [0-1]
  *
  * Source: Ashton 1989: growth goes with 1 / (1/H + h/k + h_s/k_s), H of 20 W/m²K taken.
  */

@@ -4,7 +4,15 @@ import type { ForecastRun } from './forecast-run'
 import { FLOOD, SNOW_RULES } from './thresholds'
 import type { Reason, SheetReport } from './types'
 
-/** Remarks on an hour; they carry factor 1, because they change no score. */
+/**
+ * Remarks on an hour; they carry factor 1, because they change no score.
+ *
+ * @param run Forecast run with its sheet.
+ * @param index Hour of the run.
+ * @returns One code with its numbers, or none.
+ *
+ * Source: rules G01 and I08 through the thresholds.
+ */
 export function snowRuleReasons(run: ForecastRun, index: number): Reason[] {
   const snowCm = (run.reports[index] as SheetReport).snowCoverCm
   const reason = snowCm > FLOOD.snowToClearCm.one ? finishClearing(run, index) : freeFlood(run, index)

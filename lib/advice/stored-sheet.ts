@@ -10,8 +10,10 @@ const NUMBERS = ['snowKgM2', 'snowDepthCm', 'belowKgM2', 'belowTemperatureC', 's
  * Reads a state that `judge` gave out.
  *
  * @param stored What was kept.
- * @returns The same state, fit for physics.
+ * @returns The same state, fit for physics; units of SheetState.
  * @throws RangeError when it is not one.
+ *
+ * Source: ours.
  */
 export function readStoredSheet(stored: unknown): SheetState {
   const state = stored as Record<string, unknown> | null

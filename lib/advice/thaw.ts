@@ -15,11 +15,14 @@ export interface ThawHour {
 }
 
 /**
- * Finds thaws. Within each run of hours without a good one, the thaw is the part from the first loss of ice to the last.
+ * Finds thaws. Within each run of hours without a good one, the thaw is the part from the first loss of ice to the
+ * last.
  *
  * @param hours In order of time, without gaps.
  * @param startThicknessMm Ice at the start of the first hour. [mm]
- * @returns Thaws in order, each of at least THAW.leastHours with a loss of at least THAW.leastLossMm.
+ * @returns Thaws in order, each of at least THAW.leastHours with a loss of at least THAW.leastLossMm. [mm]
+ *
+ * Source: THAW in thresholds.ts; ours.
  */
 export function findThaws(hours: readonly ThawHour[], startThicknessMm: number): Thaw[] {
   const thaws: Thaw[] = []

@@ -20,7 +20,14 @@ const STEP_MILLIS = PLAN.stepMinutes * MINUTE_MILLIS
 /**
  * Passes for the night that `now` is in, poured ones counted against `maxPasses`.
  *
- * @param shares For hours of windows, the share of forecast runs that find them good: a pass is worth its score times that.
+ * @param setting Rink, from makeSetting.
+ * @param run Forecast run with its sheet.
+ * @param scored Hours as scored, one for each hour of the run.
+ * @param shares For hours of windows, the share of forecast runs that find them good: a pass is worth its score times
+ *   that.
+ * @returns Passes in order of time, with layer [mm], water [L] and hose time [min].
+ *
+ * Source: planPasses; set times by minutesToSet.
  */
 export function planTonight(
   setting: Setting,

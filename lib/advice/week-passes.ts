@@ -16,13 +16,16 @@ export interface NightPasses {
 }
 
 /**
- * Passes one after the other from the start of the window, each once the last is set. Every pass is taken to set as fast
- * as the first one of its hour would; on a sheet that the pass before has warmed it takes somewhat longer, so the count is
- * an upper one.
+ * Passes one after the other from the start of the window, each once the last is set. Every pass is taken to set as
+ * fast as the first one of its hour would; on a sheet that the pass before has warmed it takes somewhat longer, so
+ * the count is an upper one.
  *
+ * @param window Window of the night.
  * @param hours The night's hours, in order.
  * @param maxPasses Most passes of a night, 0 or more.
- * @returns Null when no pass fits.
+ * @returns Number of passes, first pour and last set in ISO 8601; null when no pass fits.
+ *
+ * Source: ours.
  */
 export function estimatePasses(
   window: AdviceWindow,

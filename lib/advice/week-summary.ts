@@ -19,7 +19,16 @@ export interface WeekSummary {
   freezableMm: number
 }
 
-/** @param now Nothing before it counts. */
+/**
+ * What the nights ahead come to.
+ *
+ * @param nights From nightsAhead.
+ * @param judgement Result of `judge`.
+ * @param now Nothing before it counts.
+ * @returns Good nights, the first thaw and the sheet at its thinnest. [mm]
+ *
+ * Source: ours.
+ */
 export function summariseWeek(
   nights: readonly NightAhead[],
   { hours, thaws }: Pick<Judgement, 'hours' | 'thaws'>,

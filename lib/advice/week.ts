@@ -73,7 +73,11 @@ export interface WeekSetting {
  *
  * @param judgement Result of `judge`, or the same shape read back from storage.
  * @param setting.layerMm Water of one pass. [mm], above 0
- * @returns Nights in order. Passes of the planned night are the plan's; those of other nights are estimated from the window.
+ * @returns Nights in order. Passes of the planned night are the plan's; those of other nights are estimated from the
+ *   window.
+ * @throws RangeError for an unknown zone.
+ *
+ * Source: summariseNight; passes by estimatePasses.
  */
 export function nightsAhead(judgement: Judgement, setting: WeekSetting): NightAhead[] {
   const tonight = tonightDate(setting.now, setting.timeZone)

@@ -37,9 +37,11 @@ const WITH_A_SHEET: readonly Phase[] = ['freezing', 'skating', 'thaw']
  *
  * @param input What the night was judged from.
  * @param nightDate 'yyyy-MM-dd', see night.ts.
- * @returns Each change that alone makes an hour of the keeper's good; none when no single one does, in phases without a sheet
- *   to flood, or when the forecast does not reach the night.
+ * @returns Each change that alone makes an hour of the keeper's good; none when no single one does, in phases without
+ *   a sheet to flood, or when the forecast does not reach the night.
  * @throws RangeError as `judge` does.
+ *
+ * Source: ours: each change is tried on the night's own model.
  */
 export function whatWouldTurn(input: JudgeInput, nightDate: string): WhatWouldTurn[] {
   if (!WITH_A_SHEET.includes(input.rink.phase)) return []

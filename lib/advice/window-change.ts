@@ -17,7 +17,11 @@ export type WindowStep =
  *
  * @param advised The version that stands, or undefined when nothing was advised for the night.
  * @param summary The night as the newest forecast has it.
+ * @param kind Which advice it is about.
  * @param now A start that has passed is no change: the old window is compared from now on.
+ * @returns Keep, open, move or close, with the window it is about.
+ *
+ * Source: WORTH_TELLING_MINUTES; ours.
  */
 export function nextWindowStep(
   advised: AdvisedTimes | undefined,

@@ -21,7 +21,9 @@ export interface HourRange {
  * goes out, so hours that are good but in which nobody can go out end it; they keep their scores and verdicts.
  *
  * @param hours In order of time, without gaps.
- * @returns Runs in order of time.
+ * @returns Runs in order of time; places in the list, the end not part of them.
+ *
+ * Source: ours.
  */
 export function findWindows(hours: readonly WindowHour[]): HourRange[] {
   const ranges: HourRange[] = []

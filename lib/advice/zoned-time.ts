@@ -25,6 +25,8 @@ const offsets = new Map<string, number>()
  * @param timeZone IANA zone.
  * @returns Offset, positive east. [min]
  * @throws RangeError for an unknown zone.
+ *
+ * Source: the platform's IANA data.
  */
 export function zoneOffsetMinutes(atMillis: number, timeZone: string): number {
   const quarter = Math.floor(atMillis / QUARTER)
@@ -43,7 +45,17 @@ function readOffset(atMillis: number, timeZone: string): number {
   return (found[1] === '-' ? -1 : 1) * (Number(found[2]) * 60 + Number(found[3]))
 }
 
-/** The offset of a whole stretch when it begins and ends with the same and is too short to change and change back; else null. [min] */
+/**
+ * The offset of a whole stretch when it begins and ends with the same and is too short to change and change back.
+ *
+ * @param fromMillis Start. [ms since the epoch]
+ * @param toMillis End. [ms since the epoch]
+ * @param timeZone IANA zone of the rink.
+ * @returns Offset, positive east; null when it may change. [min]
+ * @throws RangeError for an unknown zone.
+ *
+ * Source: ours.
+ */
 export function steadyOffsetMinutes(fromMillis: number, toMillis: number, timeZone: string): number | null {
   const atFirst = zoneOffsetMinutes(fromMillis, timeZone)
   const isShort = toMillis - fromMillis < 25 * DAY_MILLIS
@@ -53,7 +65,12 @@ export function steadyOffsetMinutes(fromMillis: number, toMillis: number, timeZo
 /**
  * Offsets of many ascending instants, cheaply where no clock changes between them.
  *
+ * @param atMillis Instants, ascending. [ms since the epoch]
+ * @param timeZone IANA zone of the rink.
  * @returns Offsets, positive east, one for each instant. [min]
+ * @throws RangeError for an unknown zone.
+ *
+ * Source: zoneOffsetMinutes.
  */
 export function zoneOffsetsMinutes(atMillis: readonly number[], timeZone: string): number[] {
   const first = atMillis[0]
@@ -63,18 +80,31 @@ export function zoneOffsetsMinutes(atMillis: readonly number[], timeZone: string
   return atMillis.map((millis) => steady ?? zoneOffsetMinutes(millis, timeZone))
 }
 
-/** Local calendar date of an instant, 'yyyy-MM-dd'. */
+/**
+ * Local calendar date of an instant.
+ *
+ * @param atMillis Instant. [ms since the epoch]
+ * @param timeZone IANA zone of the rink.
+ * @returns Date, 'yyyy-MM-dd'.
+ * @throws RangeError for an unknown zone.
+ *
+ * Source: zoneOffsetMinutes.
+ */
 export function localDateOf(atMillis: number, timeZone: string): string {
   return toIso(atMillis + zoneOffsetMinutes(atMillis, timeZone) * MINUTE_MILLIS).slice(0, 10)
 }
 
 /**
- * Instant at which a zone's clock shows a date and time. A time that a clock change skips gives the first instant after
- * the gap; a time that occurs twice gives the first.
+ * Instant at which a zone's clock shows a date and time. A time that a clock change skips gives the first instant
+ * after the gap; a time that occurs twice gives the first.
  *
  * @param date 'yyyy-MM-dd'
  * @param minuteOfDay Minutes after local midnight by the clock, 0-1439.
+ * @param timeZone IANA zone of the rink.
  * @returns Instant. [ms since the epoch]
+ * @throws RangeError for an unknown zone.
+ *
+ * Source: ours.
  */
 export function instantOfLocal(date: string, minuteOfDay: number, timeZone: string): number {
   const wall = Date.parse(`${date}T00:00:00Z`) + minuteOfDay * MINUTE_MILLIS
@@ -100,7 +130,15 @@ function firstInstantOfOffset(low: number, high: number, offset: number, timeZon
   return to
 }
 
-/** The calendar date some days later, 'yyyy-MM-dd'. */
+/**
+ * The calendar date some days later.
+ *
+ * @param date 'yyyy-MM-dd'
+ * @param days Whole days, negative for earlier. [d]
+ * @returns Date, 'yyyy-MM-dd'.
+ *
+ * Source: Gregorian calendar.
+ */
 export function addDays(date: string, days: number): string {
   return toIso(Date.parse(`${date}T00:00:00Z`) + days * DAY_MILLIS).slice(0, 10)
 }
@@ -110,8 +148,13 @@ let cachedDay = Number.NaN
 let cachedDate = ''
 
 /**
- * ISO 8601 in UTC without milliseconds, as in the records of the forecast. A judgement writes thousands of these, so the
- * date of the day last written is kept.
+ * ISO 8601 in UTC without milliseconds, as in the records of the forecast. A judgement writes thousands of these, so
+ * the date of the day last written is kept.
+ *
+ * @param atMillis Instant. [ms since the epoch]
+ * @returns Instant to the second, ISO 8601.
+ *
+ * Source: ours.
  */
 export function toIso(atMillis: number): string {
   const day = Math.floor(atMillis / DAY_MILLIS)

@@ -6,7 +6,14 @@ import type { YardLesson, YardReport } from './types'
 /** A layer that was watched for longer than this was not watched. [min] Ours: four days. */
 const LONGEST_WATCH_MINUTES = 4 * 24 * 60
 
-/** @throws RangeError naming what is wrong. */
+/**
+ * Refuses a lesson that no yard can be learned from.
+ *
+ * @param lesson Place [°], prior [0-1] and reports; ranges at the fields.
+ * @throws RangeError naming what is wrong.
+ *
+ * Source: ours.
+ */
 export function checkLesson({ latitudeDeg, longitudeDeg, prior, reports }: YardLesson): void {
   inRange('latitudeDeg [°]', latitudeDeg, -90, 90)
   inRange('longitudeDeg [°]', longitudeDeg, -180, 180)

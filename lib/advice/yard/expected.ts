@@ -10,7 +10,17 @@ import type { Yard, YardLesson, YardReport } from './types'
 
 export type Place = Pick<YardLesson, 'latitudeDeg' | 'longitudeDeg'>
 
-/** Minutes from the last pour until set, or thickness [mm]; null when weather is missing before the report. */
+/**
+ * What a report would read if the yard were so.
+ *
+ * @param yard Shelter and open sky. [0-1]
+ * @param report Report; ranges at the fields.
+ * @param place Latitude and longitude. [°]
+ * @returns Minutes from the last pour until set [min], or thickness [mm]; null when weather is missing before the
+ *   report.
+ *
+ * Source: minutesToSet, advanceSheet.
+ */
 export function expectedIn(yard: Yard, report: YardReport, place: Place): number | null {
   const prepared = prepareHours(report.hours, { ...place, ...yard })
   const firstUnknown = prepared.findIndex((hour) => !hour.isKnown)
@@ -40,14 +50,28 @@ function carry(start: SheetState, hours: readonly PreparedHour[], poured: YardRe
   }, start)
 }
 
-/** The sheet at the start of the report's hours. */
+/**
+ * The sheet at the start of the report's hours.
+ *
+ * @param report Report; ranges at the fields.
+ * @returns Sheet.
+ * @throws RangeError for a sheet out of range.
+ *
+ * Source: createSheet, readStoredSheet.
+ */
 export function startingSheet({ sheet }: YardReport): SheetState {
   return 'state' in sheet ? readStoredSheet(sheet.state) : createSheet(sheet)
 }
 
 /**
- * The same for any yard, worked out at a few and read off between them: fits ask thousands of times. A set time is read off
- * as its inverse, which is nearly straight in both factors. Null as above.
+ * As expectedIn for any yard, worked out at a few and read off between them: fits ask thousands of times. A set time
+ * is read off as its inverse, which is nearly straight in both factors.
+ *
+ * @param report Report; ranges at the fields.
+ * @param place Latitude and longitude. [°]
+ * @returns Function of the yard, as expectedIn [min] or [mm]; null as there.
+ *
+ * Source: bilinear between nodes; ours.
  */
 export function expectedInAny(report: YardReport, place: Place): ((yard: Yard) => number) | null {
   const inverse = report.kind !== 'drilled'

@@ -40,7 +40,16 @@ export function fitYard(reports: readonly HeldReport[], prior: Yard): Yard {
   return toYard(parameterValues)
 }
 
-/** Standard deviation of each factor about the fit, from the curvature of the squares there (Laplace). [0-1 scale] */
+/**
+ * Standard deviation of each factor about the fit, from the curvature of the squares there.
+ *
+ * @param reports Readied reports.
+ * @param prior Shelter and open sky as the keeper gave them. [0-1]
+ * @param yard The fit. [0-1]
+ * @returns Standard deviations, on the scale of the factors. [0-1]
+ *
+ * Source: Laplace approximation; from memory.
+ */
 export function yardSd(reports: readonly HeldReport[], prior: Yard, yard: Yard): Yard {
   const here = allMisfits(reports, prior, yard)
   const slope = (moved: Yard) =>

@@ -12,11 +12,13 @@ import type { LearnedYard, Yard, YardLesson } from './types'
  * prior's by more than their scatter. Otherwise the prior stands, exactly.
  *
  * @param lesson Place, prior and reports; ranges at the fields.
- * @returns Factors to use and what was learned.
- * @throws RangeError for a value out of range, an unreadable time, a report before its pour or a pour outside its hours.
+ * @returns Factors to use [0-1] and what was learned.
+ * @throws RangeError for a value out of range, an unreadable time, a report before its pour or a pour outside its
+ *   hours.
  *
- * Source: maximum a posteriori estimate with a normal prior; leave-one-out cross-validation after Stone (1974), from memory,
- * by whole nights. Known limit: a layer that is always deeper or warmer than told is learned as part of the yard.
+ * Source: maximum a posteriori estimate with a normal prior; leave-one-out cross-validation after Stone (1974), from
+ * memory, by whole nights. Known limit: a layer that is always deeper or warmer than told is learned as part of the
+ * yard.
  */
 export function learnYard(lesson: YardLesson): LearnedYard {
   checkLesson(lesson)

@@ -1,7 +1,7 @@
 // The night strip of one rink: drawing, hours to open, legend, and the same numbers as a table.
 'use client'
 import { memo, useCallback, useMemo, useState } from 'react'
-import { useHydrated } from '../hooks/use-hydrated'
+import { useMedia } from '../hooks/use-media'
 import { bracketsOf, layOutNightStrip } from '../charts/night-strip-layout'
 import { NightStripDrawing } from '../charts/night-strip-drawing'
 import { StripHours } from '../charts/strip-hours'
@@ -17,6 +17,9 @@ const Legend = memo(NightLegend)
 const Table = memo(NightTable)
 const Hours = memo(StripHours)
 
+/** The same width as in SHOWN. */
+const WIDE = '(min-width: 720px)'
+
 const SHOWN: Record<StripSize, string> = {
   wide: 'relative hidden min-[720px]:block print:block',
   narrow: 'relative min-[720px]:hidden print:hidden',
@@ -25,7 +28,9 @@ const SHOWN: Record<StripSize, string> = {
 /** The drawing and its hours; the table and the legend are drawn anew only when the hours change. */
 export function NightStrip({ source, now }: { source: StripSource; now: number }) {
   const [selected, setSelected] = useState<number | null>(null)
-  const isHydrated = useHydrated()
+  // Hours that nobody sees need not answer a touch.
+  const isWide = useMedia(WIDE)
+  const shown = isWide === null ? null : isWide ? 'wide' : 'narrow'
   const { night, rink, viewer } = source
   const { hours: scored } = source.outlook
   // Hours stay as they are while passes are moved: only the figures are laid out again then.
@@ -49,7 +54,7 @@ export function NightStrip({ source, now }: { source: StripSource; now: number }
             words={words}
             brackets={bracketsOf({ ...input, passes: stripPasses(source) })}
           />
-          {isHydrated ? (
+          {size === shown ? (
             <Hours
               layout={layout}
               label="Hours of the night"

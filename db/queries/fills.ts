@@ -1,6 +1,5 @@
 // Fills with their hose sessions and looks. Unique indexes decide: one open fill a rink, one running hose a fill.
 import type { Db } from '@/db/knex'
-import type { RinkRow } from '@/db/types'
 import type { RinkAccess } from '@/lib/access/proofs'
 
 export interface Fill {
@@ -136,16 +135,6 @@ export async function listFillChecks(db: Db, fillId: string): Promise<FillCheck[
       lowCornerDepthMm: 'c.low_corner_depth_mm',
       note: 'c.note',
     })
-}
-
-/** The work itself moves a rink on: crew may do it. The change is counted, so that older outlooks are known to be old. */
-export async function movePhase(
-  trx: Db,
-  access: RinkAccess<'writeLog'>,
-  phase: RinkRow['phase'],
-  now: Date,
-): Promise<void> {
-  await trx('rinks').where({ id: access.rinkId }).update({ phase, updated_at: now }).increment('settings_version')
 }
 
 /** Takes back the reminders of a rink's fill that have not gone out: somebody was there, and others take their place. */

@@ -41,10 +41,19 @@ export async function lockRink(trx: Db, access: RinkAccess): Promise<void> {
 
 /** Counts a change beside the rink's own columns that the advice depends on: water poured, what was learned. */
 export async function countChange(trx: Db, access: RinkAccess<'writeLog'>, now: Date): Promise<void> {
-  await trx('rinks').where({ id: access.rinkId }).update({ updated_at: now }).increment('settings_version')
+  await updateCounted(trx, access, {}, now)
 }
 
-/** Counts the change, too. */
+/** The work itself moves a rink on: crew may do it. */
+export async function movePhase(
+  trx: Db,
+  access: RinkAccess<'writeLog'>,
+  phase: RinkRow['phase'],
+  now: Date,
+): Promise<void> {
+  await updateCounted(trx, access, { phase }, now)
+}
+
 export async function changeRink(
   trx: Db,
   access: RinkAccess<'manage'>,
@@ -52,8 +61,17 @@ export async function changeRink(
   now: Date,
 ): Promise<void> {
   const columns = floor === undefined ? changes : { ...changes, floor: floor === null ? null : JSON.stringify(floor) }
+  await updateCounted(trx, access, columns, now)
+}
+
+async function updateCounted(
+  trx: Db,
+  { rinkId }: RinkAccess<'writeLog'> | RinkAccess<'manage'>,
+  columns: Partial<RinkRow>,
+  now: Date,
+): Promise<void> {
   await trx('rinks')
-    .where({ id: access.rinkId })
+    .where({ id: rinkId })
     .update({ ...columns, updated_at: now })
     .increment('settings_version')
 }

@@ -8,12 +8,11 @@ import {
   insertFillSession,
   listFillSessions,
   lockOpenFill,
-  movePhase,
   stopFillSession,
   type Fill,
 } from '@/db/queries/fills'
 import { enqueueRefresh } from '@/db/queries/jobs'
-import { countChange } from '@/db/queries/rink-settings'
+import { countChange, movePhase } from '@/db/queries/rink-settings'
 import { insertEntry } from '@/db/queries/log-entries'
 import { insertReportedSheet } from '@/db/queries/sheet-states'
 import { findRinkForJudging, type RinkForJudging } from '@/db/queries/rinks'

@@ -1,22 +1,20 @@
 // The plan of a build: where its form starts, and keeping what came of it for the rink.
 import { findWaterPrice, setFillWater } from '@/db/queries/build-plans'
-import { findMembership } from '@/db/queries/members'
-import { findRinkForJudging, type HoursRow, type RinkForJudging } from '@/db/queries/rinks'
+import type { HoursRow, RinkForJudging } from '@/db/queries/rinks'
 import { findAccount } from '@/db/queries/users'
 import { isGranted } from '@/lib/access/permissions'
-import { requireRink } from '@/lib/access/require-rink'
 import { buildSums } from '@/lib/advice/build-sums'
 import { nightDateOf } from '@/lib/advice/night'
 import { seasonOf } from '@/lib/advice/season'
 import type { Phase } from '@/lib/advice/types'
 import type { ServiceContext } from '@/lib/context'
-import { InvalidInputError, NotFoundError } from '@/lib/errors'
+import { InvalidInputError } from '@/lib/errors'
 import { floorExtremesM, floorOf, type FloorShape } from '@/lib/physics/floor'
 import { levelOf } from '@/lib/physics/stage'
 import type { KeepPlanInput } from '@/lib/schemas/build-plan'
 import { fitsMeasure, rangeMessage } from '@/lib/schemas/measures'
-import { rinkIdSchema } from '@/lib/schemas/rinks'
 import type { WordOptions } from '@/lib/words/options'
+import { getRinkAndReader } from './rink-and-reader'
 import { changing } from './rink-settings'
 
 export interface PlanView {
@@ -40,19 +38,11 @@ export interface PlanView {
 
 /** @throws NotFoundError for strangers. */
 export async function getPlan(context: ServiceContext, rinkId: string): Promise<PlanView> {
-  const access = await requireRink(context, rinkIdSchema.parse(rinkId), 'view')
-  const { db, now, viewer } = context
-  const [rink, person, member, waterPricePerM3] = await Promise.all([
-    findRinkForJudging(db, access.rinkId),
-    findAccount(db, viewer.userId),
-    findMembership(db, { rinkId: access.rinkId, userId: viewer.userId }),
-    findWaterPrice(db, access),
-  ])
-  if (!rink || !person || !member) throw new NotFoundError('Rink')
+  const { access, rink, reader, role } = await getRinkAndReader(context, rinkId)
   return {
     rink: { id: rink.id, name: rink.name, phase: rink.phase },
-    reader: { units: person.units, clock: person.clock, timeZone: rink.timeZone, locale: 'en' },
-    mayManage: isGranted(member.role, 'manage'),
+    reader,
+    mayManage: isGranted(role, 'manage'),
     start: {
       lengthM: rink.lengthM,
       widthM: rink.widthM,
@@ -60,9 +50,9 @@ export async function getPlan(context: ServiceContext, rinkId: string): Promise<
       leastDepthMm: leastDepthMm(rink),
       flowLPerMin: rink.water.flowLPerMin,
       hoursInOneGo: Math.max(...rink.available.map(hoursOf)),
-      waterPricePerM3,
+      waterPricePerM3: await findWaterPrice(context.db, access),
       boardHeightMm: rink.boardHeightMm,
-      seasonYear: seasonOf(nightDateOf(now, rink.timeZone)).year,
+      seasonYear: seasonOf(nightDateOf(context.now, rink.timeZone)).year,
     },
   }
 }

@@ -1,39 +1,29 @@
 // How a fill stands: everything the Filling page shows.
 import { listFillChecks, listFillSessions, findNewestFill, type Fill, type FillSession } from '@/db/queries/fills'
-import { findMembership } from '@/db/queries/members'
 import { findNewestOutlook, listScoredHours } from '@/db/queries/outlooks'
-import { findRinkForJudging, type RinkForJudging } from '@/db/queries/rinks'
-import { findAccount } from '@/db/queries/users'
+import type { RinkForJudging } from '@/db/queries/rinks'
 import type { Db } from '@/db/knex'
 import { isGranted } from '@/lib/access/permissions'
 import type { RinkAccess } from '@/lib/access/proofs'
-import { requireRink } from '@/lib/access/require-rink'
 import { fillProgress } from '@/lib/advice/fill-progress'
 import type { HoseHour } from '@/lib/advice/hose-warning'
 import type { ServiceContext } from '@/lib/context'
-import { NotFoundError } from '@/lib/errors'
 import type { FillingView, OpenFillView } from '@/lib/schemas/filling-view'
-import { rinkIdSchema } from '@/lib/schemas/rinks'
 import { litresBy, lowCornerDepthMm as reckonedDepthMm, lowCornerOf, progressInput, targetLitres } from './fill-facts'
+import { getRinkAndReader } from './rink-and-reader'
 
 /** @throws NotFoundError for strangers. */
 export async function getFilling(context: ServiceContext, rinkId: string): Promise<FillingView> {
-  const access = await requireRink(context, rinkIdSchema.parse(rinkId), 'view')
-  const { db, now, viewer } = context
-  const [rink, person, member, fill] = await Promise.all([
-    findRinkForJudging(db, access.rinkId),
-    findAccount(db, viewer.userId),
-    findMembership(db, { rinkId: access.rinkId, userId: viewer.userId }),
-    findNewestFill(db, access),
-  ])
-  if (!rink || !person || !member) throw new NotFoundError('Rink')
+  const { access, rink, reader, role } = await getRinkAndReader(context, rinkId)
+  const { db, now } = context
+  const fill = await findNewestFill(db, access)
   const sessions = fill ? await listFillSessions(db, fill.id) : []
   const isOpen = fill !== undefined && fill.finishedAt === null
   return {
     readAt: now.toISOString(),
     rink: { id: rink.id, name: rink.name, phase: rink.phase },
-    reader: { units: person.units, clock: person.clock, timeZone: rink.timeZone, locale: 'en' },
-    mayWrite: isGranted(member.role, 'writeLog'),
+    reader,
+    mayWrite: isGranted(role, 'writeLog'),
     usual: { fillDepthMm: rink.water.fillDepthMm, flowLPerMin: rink.water.flowLPerMin },
     fill: isOpen ? await openFillView(context, access, { rink, fill, sessions }) : null,
     last: fill?.finishedAt

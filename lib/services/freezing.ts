@@ -2,21 +2,19 @@
 import { findNewestFill } from '@/db/queries/fills'
 import { findNewestForecast } from '@/db/queries/forecasts'
 import { enqueueRefresh } from '@/db/queries/jobs'
-import { findMembership } from '@/db/queries/members'
 import { findNewestReading, type Reading } from '@/db/queries/readings'
 import { changeRink, lockRink } from '@/db/queries/rink-settings'
 import { findRinkForJudging, type RinkForJudging } from '@/db/queries/rinks'
-import { findAccount } from '@/db/queries/users'
 import type { Db } from '@/db/knex'
 import { isGranted } from '@/lib/access/permissions'
 import type { RinkAccess } from '@/lib/access/proofs'
 import { requireRink } from '@/lib/access/require-rink'
 import { freezingOutlook, type FreezingOutlook } from '@/lib/advice/freezing'
 import type { ServiceContext } from '@/lib/context'
-import { ConflictError, NotFoundError } from '@/lib/errors'
+import { ConflictError } from '@/lib/errors'
 import type { FreezingView } from '@/lib/schemas/freezing-view'
-import { rinkIdSchema } from '@/lib/schemas/rinks'
 import { gatherJudgeInput } from './judge-input'
+import { getRinkAndReader } from './rink-and-reader'
 
 /** A hole drilled longer ago says little about today's ice. [h] Ours. */
 const READING_HOURS = 72
@@ -24,21 +22,15 @@ const HOUR_MILLIS = 3_600_000
 
 /** @throws NotFoundError for strangers. */
 export async function getFreezing(context: ServiceContext, rinkId: string): Promise<FreezingView> {
-  const access = await requireRink(context, rinkIdSchema.parse(rinkId), 'view')
-  const { db, now, viewer } = context
-  const [rink, person, member] = await Promise.all([
-    findRinkForJudging(db, access.rinkId),
-    findAccount(db, viewer.userId),
-    findMembership(db, { rinkId: access.rinkId, userId: viewer.userId }),
-  ])
-  if (!rink || !person || !member) throw new NotFoundError('Rink')
+  const { access, rink, reader, role } = await getRinkAndReader(context, rinkId)
+  const { db, now } = context
   const { sinceAt, reading } = await drilledSinceFill(db, access, now)
   return {
     readAt: now.toISOString(),
     rink: { id: rink.id, name: rink.name, phase: rink.phase, carriesSkaterMm: rink.carriesSkaterMm },
-    reader: { units: person.units, clock: person.clock, timeZone: rink.timeZone, locale: 'en' },
-    mayWrite: isGranted(member.role, 'writeLog'),
-    mayManage: isGranted(member.role, 'manage'),
+    reader,
+    mayWrite: isGranted(role, 'writeLog'),
+    mayManage: isGranted(role, 'manage'),
     outlook: rink.phase === 'freezing' ? await outlookOf(db, access, rink, now) : null,
     sinceAt: sinceAt?.toISOString() ?? null,
     reading: reading ? { ...reading, at: reading.at.toISOString() } : null,

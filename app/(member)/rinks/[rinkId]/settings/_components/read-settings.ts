@@ -4,11 +4,10 @@ import { pageContext } from '@/lib/auth/request-context'
 import { orNotFound } from '@/lib/http/or-not-found'
 import { getAccount } from '@/lib/services/own-account'
 import { getRinkSettings, type RinkSettings } from '@/lib/services/rink-settings'
-import type { WordOptions } from '@/lib/words/options'
+import { wordsFor, type WordOptions } from '@/lib/words/options'
 
 export async function readSettings(rinkId: string): Promise<{ rink: RinkSettings; words: WordOptions }> {
   const context = await pageContext()
   const rink = await orNotFound(getRinkSettings(context, rinkId))
-  const { units, clock } = await orNotFound(getAccount(context))
-  return { rink, words: { units, clock, timeZone: rink.timeZone, locale: 'en' } }
+  return { rink, words: wordsFor(await orNotFound(getAccount(context)), rink.timeZone) }
 }

@@ -6,6 +6,7 @@ import { z } from 'zod'
 import { requestContext } from '@/lib/auth/request-context'
 import { startSession } from '@/lib/auth/session'
 import { formAction } from '@/lib/http/form-action'
+import { serviceAction } from '@/lib/http/service-action'
 import {
   accountSchema,
   deletionSchema,
@@ -17,11 +18,7 @@ import { askForDeletion, keepAccount } from '@/lib/services/account-deletion'
 import { askForEmailChange, changePassword, saveAccount } from '@/lib/services/own-account'
 import { endOwnSession } from '@/lib/services/own-sessions'
 
-export const saveAccountAction = formAction(accountSchema, async (input) => {
-  await saveAccount(await requestContext(), input)
-  refresh()
-  return 'Saved.'
-})
+export const saveAccountAction = serviceAction(accountSchema, saveAccount, 'Saved.')
 
 export const changePasswordAction = formAction(passwordChangeSchema, async (input) => {
   const context = await requestContext()
@@ -36,10 +33,7 @@ export const changeEmailAction = formAction(emailChangeSchema, async (input) => 
   return `A mail is on its way to ${input.email}. Press the button in it within a day.`
 })
 
-export const endSessionAction = formAction(endSessionSchema, async ({ handle }) => {
-  await endOwnSession(await requestContext(), handle)
-  refresh()
-})
+export const endSessionAction = serviceAction(endSessionSchema, (context, { handle }) => endOwnSession(context, handle))
 
 export const askForDeletionAction = formAction(deletionSchema, async (input) => {
   await askForDeletion(await requestContext(), input)

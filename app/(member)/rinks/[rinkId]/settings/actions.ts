@@ -1,10 +1,10 @@
 'use server'
 // Changes what the advice for a rink depends on, one page at a time.
 import type { Route } from 'next'
-import { refresh } from 'next/cache'
 import { redirect } from 'next/navigation'
 import { requestContext } from '@/lib/auth/request-context'
 import { formAction } from '@/lib/http/form-action'
+import { serviceAction } from '@/lib/http/service-action'
 import {
   changeHoursSchema,
   changeIceSchema,
@@ -21,46 +21,18 @@ import { removeWater, saveWater, pourFromWater } from '@/lib/services/water-sour
 
 const SAVED = 'Saved. Tonight is being worked out anew.'
 
-export const changePlaceAction = formAction(changePlaceSchema, async (input) => {
-  await changePlace(await requestContext(), input)
-  refresh()
-  return SAVED
-})
-
-export const changeYardAction = formAction(changeYardSchema, async (input) => {
-  await changeYard(await requestContext(), input)
-  refresh()
-  return SAVED
-})
-
-export const changeIceAction = formAction(changeIceSchema, async (input) => {
-  await changeIce(await requestContext(), input)
-  refresh()
-  return SAVED
-})
-
-export const changeHoursAction = formAction(changeHoursSchema, async (input) => {
-  await changeHours(await requestContext(), input)
-  refresh()
-  return SAVED
-})
-
-export const changeLimitsAction = formAction(changeLimitsSchema, async (input) => {
-  await changeLimits(await requestContext(), input)
-  refresh()
-  return SAVED
-})
+export const changePlaceAction = serviceAction(changePlaceSchema, changePlace, SAVED)
+export const changeYardAction = serviceAction(changeYardSchema, changeYard, SAVED)
+export const changeIceAction = serviceAction(changeIceSchema, changeIce, SAVED)
+export const changeHoursAction = serviceAction(changeHoursSchema, changeHours, SAVED)
+export const changeLimitsAction = serviceAction(changeLimitsSchema, changeLimits, SAVED)
 
 export const saveWaterAction = formAction(saveWaterSchema, async (input) => {
   await saveWater(await requestContext(), input)
   redirect(`/rinks/${input.rinkId}/settings/water` as Route)
 })
 
-export const pourFromAction = formAction(oneWaterSchema, async (input) => {
-  await pourFromWater(await requestContext(), input)
-  refresh()
-  return 'Plans pour from this one now.'
-})
+export const pourFromAction = serviceAction(oneWaterSchema, pourFromWater, 'Plans pour from this one now.')
 
 export const removeWaterAction = formAction(oneWaterSchema, async (input) => {
   await removeWater(await requestContext(), input)

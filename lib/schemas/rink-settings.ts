@@ -8,15 +8,7 @@ import { parseGrid } from './floor'
 import { readHours } from './hours'
 import { timeZoneSchema } from './local-time'
 import { FLOOR_KINDS, hasIce, SKIES, SKY_VIEWS } from './rink-choices'
-import {
-  choiceFields,
-  checkFlow,
-  flowOf,
-  maxPassesSchema,
-  rinkIdSchema,
-  waterFields,
-  waterTemperatureOf,
-} from './rinks'
+import { choiceFields, checkFlow, checkIce, maxPassesSchema, rinkIdSchema, waterFields, waterOf } from './rinks'
 
 export const changePlaceSchema = z
   .object({
@@ -95,14 +87,7 @@ export const changeIceSchema = inUnitsOf((units) =>
       phase: choiceFields.phase,
       iceThickness: orEmpty(measured('iceThickness', units)),
     })
-    .superRefine(({ phase, iceThickness }, context) => {
-      if (phase === 'skating' && iceThickness === 0)
-        context.addIssue({
-          code: 'custom',
-          path: ['iceThickness'],
-          message: 'Ice that carries skaters has a thickness.',
-        })
-    })
+    .superRefine(checkIce)
     .transform(({ rinkId, phase, iceThickness }) => ({
       rinkId,
       phase,
@@ -118,13 +103,7 @@ export const saveWaterSchema = inUnitsOf((units) =>
     .transform((fields) => ({
       rinkId: fields.rinkId,
       sourceId: fields.sourceId,
-      water: {
-        kind: fields.waterKind,
-        flowLPerMin: flowOf(fields),
-        temperatureC: waterTemperatureOf(fields),
-        layerMm: fields.layer,
-        fillDepthMm: fields.fillDepth,
-      },
+      water: waterOf(fields),
     })),
 )
 

@@ -92,14 +92,22 @@ export function checkFlow(fields: WaterFields, units: Units, context: z.Refineme
   }
 }
 
+/** People skate on ice, not on bare ground. */
+export function checkIce(
+  { phase, iceThickness }: Pick<Fields, 'phase' | 'iceThickness'>,
+  context: z.RefinementCtx,
+): void {
+  if (phase !== 'skating' || iceThickness !== 0) return
+  context.addIssue({ code: 'custom', path: ['iceThickness'], message: 'Ice that carries skaters has a thickness.' })
+}
+
 /** What single fields cannot know: the answers have to fit each other. */
 function checkTogether(fields: Fields & { units: Units }, context: z.RefinementCtx): void {
   const refuse = (field: string, message: string) => context.addIssue({ code: 'custom', path: [field], message })
   const { moreHoursFrom, moreHoursTo } = fields
   checkFlow(fields, fields.units, context)
   if (fields.hoursFrom === fields.hoursTo) refuse('hoursTo', 'These hours end when they start.')
-  if (fields.phase === 'skating' && fields.iceThickness === 0)
-    refuse('iceThickness', 'Ice that carries skaters has a thickness.')
+  checkIce(fields, context)
   if ((moreHoursFrom === undefined) !== (moreHoursTo === undefined)) {
     refuse(moreHoursFrom === undefined ? 'moreHoursFrom' : 'moreHoursTo', 'These hours need a start and an end.')
   }
@@ -123,15 +131,21 @@ function askForThickness({ phase, iceThickness }: Fields, context: z.RefinementC
 }
 
 /** Typed, else measured by bucket, else what such a source usually gives. [L/min] */
-export function flowOf({ flow, bucketSize, bucketSeconds, waterKind }: WaterFields): number {
+function flowOf({ flow, bucketSize, bucketSeconds, waterKind }: WaterFields): number {
   if (flow !== undefined) return flow
   if (bucketSize !== undefined && bucketSeconds !== undefined) return bucketFlowLPerMin(bucketSize, bucketSeconds)
   return WATER_DEFAULTS[waterKind].flowLPerMin
 }
 
-/** [°C] */
-export function waterTemperatureOf({ waterTemperature, waterKind }: WaterFields): number {
-  return waterTemperature ?? WATER_DEFAULTS[waterKind].temperatureC
+/** A source as it is stored, in SI. */
+export function waterOf(fields: WaterFields) {
+  return {
+    kind: fields.waterKind,
+    flowLPerMin: flowOf(fields),
+    temperatureC: fields.waterTemperature ?? WATER_DEFAULTS[fields.waterKind].temperatureC,
+    layerMm: fields.layer,
+    fillDepthMm: fields.fillDepth,
+  }
 }
 
 /** From the fields of the form to what is stored, in SI. */
@@ -152,13 +166,7 @@ function toRink(fields: Fields) {
     phase: fields.phase,
     /** As the keeper reports it now; undefined when nothing was said. */
     iceThicknessMm: hasIce(fields.phase) ? fields.iceThickness : undefined,
-    water: {
-      kind: fields.waterKind,
-      flowLPerMin: flowOf(fields),
-      temperatureC: waterTemperatureOf(fields),
-      layerMm: fields.layer,
-      fillDepthMm: fields.fillDepth,
-    },
+    water: waterOf(fields),
     maxPasses: fields.maxPasses,
     available: [{ from: fields.hoursFrom, to: fields.hoursTo }, ...more].map((hours) => ({
       ...hours,

@@ -34,14 +34,16 @@ export async function findMessageToDeliver(db: Db, messageId: string): Promise<M
       content: 'm.content',
       expiresAt: 'm.expires_at',
       createdAt: 'm.created_at',
-      // A new address is confirmed by whoever reads its mail.
-      email: db.raw('coalesce(l.new_email, u.email)'),
+      // A new address is confirmed by whoever reads its mail; of a changed one the old address hears.
+      email: db.raw(`coalesce(m.content->>'oldEmail', l.new_email, u.email)`),
     })
     .select(
       db.raw(
         `exists (select 1 from messages newer
                  where newer.user_id = m.user_id and newer.rink_id = m.rink_id and newer.night_date = m.night_date
-                   and newer.channel = m.channel and newer.created_at > m.created_at) as "isOvertaken"`,
+                   and newer.channel = m.channel and newer.created_at > m.created_at
+                   -- A look at a hose is no news of the night.
+                   and (newer.kind = 'fill-check') = (m.kind = 'fill-check')) as "isOvertaken"`,
       ),
       db.raw(
         `m.rink_id is not null and (

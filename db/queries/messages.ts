@@ -13,6 +13,7 @@ export type MessageKind =
   | 'address-already-registered'
   | 'test'
   | 'change-address'
+  | 'address-changed'
   | 'deletion-asked'
 
 export type MessageState = 'promised' | 'delivered' | 'expired' | 'dead'

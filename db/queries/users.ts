@@ -118,18 +118,24 @@ export async function chooseUnits(db: Db, userId: string, units: Units, now: Dat
 }
 
 /** A refusal for good: alerts leave the address alone from now on, and the alerts page says so. */
-export async function noteEmailRefused(db: Db, userId: string, now: Date): Promise<void> {
-  await db('users').where({ id: userId }).update({ email_refused_at: now })
+export async function noteEmailRefused(db: Db, userId: string, email: string, now: Date): Promise<void> {
+  // Some mail goes to an address that is not the account's, not yet or no more.
+  await db('users').where({ id: userId, email }).update({ email_refused_at: now })
 }
 
-/** @returns false when the address has an account already. */
+const UNIQUE_VIOLATION = '23505'
+
+/** @returns false when the address has an account already: of two who take it at once, one gets it. */
 export async function changeEmail(trx: Db, userId: string, email: string, now: Date): Promise<boolean> {
-  const taken = await trx('users').where({ email }).whereNot({ id: userId }).first('id')
-  if (taken) return false
-  await trx('users')
-    .where({ id: userId })
-    .update({ email, email_verified_at: now, email_refused_at: null, updated_at: now })
-  return true
+  const row = { email, email_verified_at: now, email_refused_at: null, updated_at: now }
+  try {
+    // In a savepoint: the refusal must not end the caller's transaction.
+    await trx.transaction((savepoint) => savepoint('users').where({ id: userId }).update(row))
+    return true
+  } catch (error) {
+    if ((error as { code?: string }).code === UNIQUE_VIOLATION) return false
+    throw error
+  }
 }
 
 /** `null` keeps the account after all. */

@@ -19,12 +19,22 @@ export interface AlertQuestion {
   hasPoured: boolean
 }
 
+/** @param mutedThroughDate The last silent night, 'yyyy-MM-dd'; null when nothing is silent. */
+export function isMuted(mutedThroughDate: string | null, nightDate: string): boolean {
+  return mutedThroughDate !== null && mutedThroughDate >= nightDate
+}
+
 /** A forecast that flips all evening must not ring all evening. Ours. */
 const MOST_CHANGES_A_NIGHT = 3
 
 /**
- * What to tell now, or null. Same question, same answer; the caller's unique key makes it happen once.
- * In a thaw no window is advised, so nothing is due: that is the silence.
+ * What to tell now, or null. Same question, same answer; the caller's unique key makes it happen once. In a thaw no
+ * window is advised, so nothing is due: that is the silence.
+ *
+ * @param question What was said and told, and what is so now.
+ * @returns Kind of alert, or null.
+ *
+ * Source: ours.
  */
 export function dueAlert(question: AlertQuestion): AlertKind | null {
   const { now, tellAt, window, told } = question

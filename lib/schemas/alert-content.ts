@@ -25,7 +25,11 @@ export const linkContentSchema = z.object({ linkId: z.uuid() })
 /** A test of one device names it. */
 export const testContentSchema = z.object({ deviceId: z.uuid().optional() })
 
+/** The note about a changed address goes to the one that was left. */
+export const addressChangedContentSchema = z.object({ oldEmail: z.email() })
+
 export const deletionContentSchema = z.object({ dueAt: z.iso.datetime() })
 
 export type AlertContent = z.infer<typeof alertContentSchema>
+export type AddressChangedContent = z.infer<typeof addressChangedContentSchema>
 export type FillCheckContent = z.infer<typeof fillCheckContentSchema>

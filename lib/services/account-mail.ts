@@ -3,6 +3,7 @@ import type { Db } from '@/db/knex'
 import { insertAccountLink, type LinkPurpose } from '@/db/queries/account-links'
 import { promiseMessage, type MessageKind } from '@/db/queries/messages'
 import { LINK_LIFETIME_SECONDS } from '@/lib/auth/account-links'
+import type { AddressChangedContent } from '@/lib/schemas/alert-content'
 
 const KINDS: Record<LinkPurpose, MessageKind> = {
   verify: 'verify-address',
@@ -42,6 +43,15 @@ export async function promiseAlreadyRegistered(trx: Db, userId: string, now: Dat
   const dedupeKey = `${kind}:${userId}:${now.toISOString()}`
   const expiresAt = later(now, NOTE_LIFETIME_SECONDS)
   await promiseMessage(trx, { dedupeKey, userId, channel: 'email', kind, content: {}, sendAt: now, expiresAt }, now)
+}
+
+/** Tells the address that an account had: its owner may not be who changed it. */
+export async function promiseAddressChangedMail(trx: Db, userId: string, oldEmail: string, now: Date): Promise<void> {
+  const kind = 'address-changed'
+  const dedupeKey = `${kind}:${userId}:${now.toISOString()}`
+  const expiresAt = later(now, NOTE_LIFETIME_SECONDS)
+  const content: AddressChangedContent = { oldEmail }
+  await promiseMessage(trx, { dedupeKey, userId, channel: 'email', kind, content, sendAt: now, expiresAt }, now)
 }
 
 /** Confirms that an account is to go, with the way to keep it. */

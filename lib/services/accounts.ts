@@ -17,7 +17,7 @@ import { hashPassword, verifyPassword } from '@/lib/auth/passwords'
 import type { OpenContext } from '@/lib/context'
 import { InvalidInputError } from '@/lib/errors'
 import type { MailRequestInput, NewPasswordByLinkInput, PasswordSignInInput, SignUpInput } from '@/lib/schemas/accounts'
-import { promiseAlreadyRegistered, promiseLink } from './account-mail'
+import { promiseAddressChangedMail, promiseAlreadyRegistered, promiseLink } from './account-mail'
 import { spend, spendByVisitor } from './rate-limits'
 
 export interface SignedIn {
@@ -136,11 +136,17 @@ export async function resetPassword(
   })
 }
 
-/** Makes the address that the link was mailed to the account's. @throws InvalidInputError when the link no longer works. */
+/**
+ * Makes the address that the link was mailed to the account's, and tells the one before.
+ *
+ * @throws InvalidInputError when the link no longer works.
+ */
 export function takeNewAddress(context: OpenContext, key: string): Promise<SignedIn> {
   return withLink(context, 'change-email', key, async (trx, userId, newEmail) => {
+    const oldEmail = await findEmail(trx, userId)
     const isChanged = newEmail !== null && (await changeEmail(trx, userId, newEmail, context.now))
     if (!isChanged) throw new InvalidInputError(LINK_REFUSED)
+    if (oldEmail) await promiseAddressChangedMail(trx, userId, oldEmail, context.now)
     await voidAccountLinks(trx, userId, context.now)
   })
 }

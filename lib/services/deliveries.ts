@@ -94,7 +94,7 @@ async function attempt(
 async function sendEmail(delivering: Delivering, message: MessageToDeliver): Promise<Failure[]> {
   const mail = renderEmail(message, delivering.settings)
   const failure = await attempt(delivering, { messageId: message.id }, () => delivering.email.send(mail))
-  if (failure?.isPermanent) await noteEmailRefused(delivering.db, message.userId, delivering.readClock())
+  if (failure?.isPermanent) await noteEmailRefused(delivering.db, message.userId, mail.to, delivering.readClock())
   return failure ? [failure] : []
 }
 

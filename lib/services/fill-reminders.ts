@@ -6,6 +6,7 @@ import type { RinkForJudging } from '@/db/queries/rinks'
 import type { Db } from '@/db/knex'
 import { isGranted } from '@/lib/access/permissions'
 import type { RinkAccess } from '@/lib/access/proofs'
+import { isMuted } from '@/lib/advice/alert-due'
 import { tonightDate } from '@/lib/advice/night'
 import { FILLING } from '@/lib/advice/thresholds'
 import type { ServiceContext } from '@/lib/context'
@@ -48,14 +49,9 @@ export async function setFillReminders(
   const lookers = (await listFillChecks(trx, fill.id)).map(({ byId }) => byId)
   const keepers = new Set([fill.startedBy, viewer.userId, ...lookers])
   const people = (await listAlertRecipients(trx, access)).filter(
-    (person) => keepers.has(person.userId) && isTold(person, tonightDate(now, rink.timeZone)),
+    ({ userId, role, isEmailVerified }) => keepers.has(userId) && isGranted(role, 'receiveAlerts') && isEmailVerified,
   )
   for (const person of people) await remind(trx, { rink, fill, person, now }, reminders)
-}
-
-function isTold({ role, isEmailVerified, mutedThroughDate }: AlertRecipient, tonight: string): boolean {
-  const isMuted = mutedThroughDate !== null && mutedThroughDate >= tonight
-  return isGranted(role, 'receiveAlerts') && isEmailVerified && !isMuted
 }
 
 function remindersOf(now: Date, minutesLeft: number): Omit<Reminder, 'litres'>[] {
@@ -75,12 +71,16 @@ async function remind(
   for (const channel of await channelsOf(trx, person)) {
     for (const reminder of reminders) {
       const { dueAt } = reminder
+      // Silence that begins later is seen on delivery.
+      const nightDate = tonightDate(dueAt, rink.timeZone)
+      if (isMuted(person.mutedThroughDate, nightDate)) continue
       await promiseMessage(
         trx,
         {
           dedupeKey: `fill-check:${fill.id}:${dueAt.toISOString()}:${channel}:${person.userId}`,
           userId: person.userId,
           rinkId: rink.id,
+          nightDate,
           channel,
           kind: 'fill-check',
           content: { ...contentOf(rink, person, reminder) },

@@ -5,6 +5,7 @@ import type { MessageToDeliver } from '@/db/queries/deliveries'
 import type { EmailMessage, PushMessage } from '@/lib/messaging/port'
 import {
   addressAlreadyRegisteredMail,
+  addressChangedMail,
   changeAddressMail,
   deletionAskedMail,
   resetPasswordMail,
@@ -65,6 +66,7 @@ function accountMail(message: MessageToDeliver, { publicUrl, secret }: RenderSet
   if (message.kind === 'address-already-registered') {
     return addressAlreadyRegisteredMail({ signInUrl: `${publicUrl}/sign-in`, resetUrl: `${publicUrl}/reset` })
   }
+  if (message.kind === 'address-changed') return addressChangedMail({ signInUrl: `${publicUrl}/sign-in` })
   if (message.kind === 'test') return testMail({ accountUrl: `${publicUrl}/account` })
   if (message.kind === 'deletion-asked') {
     const { dueAt } = deletionContentSchema.parse(message.content)

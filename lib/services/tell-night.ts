@@ -9,7 +9,7 @@ import type { RinkForJudging } from '@/db/queries/rinks'
 import type { Db } from '@/db/knex'
 import { isGranted } from '@/lib/access/permissions'
 import type { RinkAccess } from '@/lib/access/proofs'
-import { dueAlert, type AlertKind } from '@/lib/advice/alert-due'
+import { dueAlert, isMuted, type AlertKind } from '@/lib/advice/alert-due'
 import { nightBounds } from '@/lib/advice/night'
 import type { NightSummary } from '@/lib/advice/night-summary'
 import { instantOfLocal } from '@/lib/advice/zoned-time'
@@ -69,7 +69,7 @@ function dueTo(
   return dueAlert({
     now,
     tellAt: facts.tellAt,
-    isMuted: person.mutedThroughDate !== null && person.mutedThroughDate >= summary.nightDate,
+    isMuted: isMuted(person.mutedThroughDate, summary.nightDate),
     isForecastStale: now >= forecastExpiresAt,
     window: window
       ? {

@@ -89,6 +89,19 @@ export function changeAddressMail({ url, validFor }: LinkMail): MailWords {
   })
 }
 
+/** Goes to the address that was left. It does not name the new one: it may be read by somebody else by now. */
+export function addressChangedMail({ signInUrl }: { signInUrl: string }): MailWords {
+  return writeLetter({
+    ...ACCOUNT_LETTER,
+    subject: 'Your Nightsheet account has a new e-mail address',
+    heading: 'Your account has a new address',
+    paragraphs: ['From now on everything goes to the new one. This address hears no more from us.'],
+    action: { label: 'Sign in', url: signInUrl },
+    closing: ['If you did not change it, somebody else has your password: tell whoever runs this server at once.'],
+    reason: 'You get this because this was the address of a Nightsheet account until now.',
+  })
+}
+
 /** @param on The day on which the account goes, in words. */
 export function deletionAskedMail({ on, signInUrl }: { on: string; signInUrl: string }): MailWords {
   return writeLetter({

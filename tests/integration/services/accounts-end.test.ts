@@ -10,8 +10,10 @@ import { exportAccount } from '@/lib/services/account-export'
 import { confirmAddress, signInWithPassword, signUp, takeNewAddress } from '@/lib/services/accounts'
 import { askForEmailChange, getAccount } from '@/lib/services/own-account'
 import { endOwnSession, listOwnSessions } from '@/lib/services/own-sessions'
+import { renderEmail } from '@/lib/services/render-message'
 import { getTest, sendTest } from '@/lib/services/test-messages'
 import { givenCast, givenDatabase } from '@/tests/support/given-cast'
+import { SETTINGS } from '@/tests/support/night-at-the-rink'
 import { mailsTo, newEmail, newestKey, newMember, NOW, PASSWORD, visitor } from '@/tests/support/visitor'
 
 const database = givenDatabase()
@@ -40,6 +42,31 @@ describe('a new address', () => {
       userId: anna.userId,
     })
     await expect(takeNewAddress(visitor(database.db), key)).rejects.toMatchObject({ code: 'invalid_input' })
+  })
+
+  test('is told to the address that was left, which does not learn the new one', async () => {
+    const email = newEmail()
+    await askForEmailChange(as(anna.userId), { email, currentPassword: PASSWORD })
+    await takeNewAddress(visitor(database.db), await newestKey(database.db, anna.email, 'change-email'))
+    const message = await newestMessage(anna.userId, 'address-changed')
+    expect(message).toMatchObject({ email: anna.email })
+    const mail = renderEmail({ ...message!, attempts: 0 }, SETTINGS)
+    expect(mail).toMatchObject({ to: anna.email, subject: expect.stringContaining('new e-mail address') })
+    expect(mail.text + mail.html).not.toContain(email)
+  })
+
+  test('goes to one of two who take it at once', async () => {
+    const email = newEmail()
+    const other = await newMember(database.db)
+    const keys = []
+    for (const person of [anna, other]) {
+      await askForEmailChange(as(person.userId), { email, currentPassword: PASSWORD })
+      keys.push(await newestKey(database.db, person.email, 'change-email'))
+    }
+    const taken = await Promise.allSettled(keys.map((key) => takeNewAddress(visitor(database.db), key)))
+    expect(taken.map(({ status }) => status).sort()).toEqual(['fulfilled', 'rejected'])
+    const refused = taken.find((one) => one.status === 'rejected')
+    expect(refused?.reason).toMatchObject({ code: 'invalid_input' })
   })
 
   test('needs the password', async () => {

@@ -1,11 +1,14 @@
 // A fill from its start to its end: by those who may, once at a time, paused over days, with reminders while the hose runs.
 import { describe, expect, test } from 'vitest'
+import { findMessageToDeliver } from '@/db/queries/deliveries'
 import { ConflictError, ForbiddenError, NotFoundError } from '@/lib/errors'
 import { checkFillSchema, resumeFillSchema, startFillSchema } from '@/lib/schemas/fills'
 import { getFilling } from '@/lib/services/filling'
 import { checkFill, finishFill, giveUpFill, pauseFill, resumeFill, startFill } from '@/lib/services/fills'
+import { renderEmail, renderPush } from '@/lib/services/render-message'
 import type { Actor } from '@/tests/support/cast'
 import { givenCast, givenDatabase } from '@/tests/support/given-cast'
+import { SETTINGS } from '@/tests/support/night-at-the-rink'
 
 // Sunday, 1 pm at the rink.
 const NOW = new Date('2027-01-03T18:00:00Z')
@@ -163,10 +166,32 @@ describe('reminders', () => {
     expect(await reminders()).toHaveLength(0)
   })
 
-  test('leave out who is muted or wants no mail', async () => {
-    const quiet = { rink_id: cast.rinkId, user_id: cast.crew.userId, wants_email: false, updated_at: NOW }
+  test.each([{ wants_email: false }, { muted_through: '2027-01-03' }])('leave out who said no: %o', async (choice) => {
+    const quiet = { rink_id: cast.rinkId, user_id: cast.crew.userId, ...choice, updated_at: NOW }
     await database.db('alert_preferences').insert(quiet)
     await start(cast.crew)
     expect(await reminders()).toHaveLength(0)
+  })
+
+  test('promised before somebody asks for silence are not sent', async () => {
+    await start(cast.crew)
+    const [first] = await reminders()
+    const quiet = { rink_id: cast.rinkId, user_id: cast.crew.userId, muted_through: '2027-01-03', updated_at: NOW }
+    await database.db('alert_preferences').insert(quiet)
+    expect(await findMessageToDeliver(database.db, first!.id)).toMatchObject({ isUnwanted: true })
+  })
+
+  test('say what should be in by then, and lead to where a look is logged', async () => {
+    await start(cast.crew)
+    const [first] = await reminders()
+    const message = await findMessageToDeliver(database.db, first!.id)
+    // Two hours at 25 L/min.
+    const push = renderPush(message!, SETTINGS)
+    expect(push).toMatchObject({ url: expect.stringMatching(new RegExp(`/rinks/${cast.rinkId}/filling$`)) })
+    expect(push.body).toMatch(/\b3.?000.L\b/)
+    const mail = renderEmail(message!, SETTINGS)
+    expect(mail.to).toBe(cast.crew.email)
+    expect(mail.text).toMatch(/\b3.?000.L\b/)
+    expect(mail.text).toMatch(/electric/i)
   })
 })

@@ -58,9 +58,9 @@ describe('over many runs', () => {
     // 5 + 3 % a day are missed: 32 of 400 at a day ahead, with a deviation of 5.
     expect(400 - came.length).toBeGreaterThan(12)
     expect(400 - came.length).toBeLessThan(52)
+    // Timing is off by 0.7 + 0.8 h a day, 1.5 h, and by the rounding to hours (1/12 h²): 1.53 h, known to 3.7 %.
     const { deviation } = spread(came)
-    expect(deviation).toBeGreaterThan(1)
-    expect(deviation).toBeLessThan(2.2)
+    expect(Math.abs(deviation / 1.53 - 1)).toBeLessThan(0.11)
   })
 })
 
@@ -69,8 +69,25 @@ test('seeded numbers are uniform and normal', () => {
   const normal = normalFrom(seededUniform(2))
   const draws = Array.from({ length: 10_000 }, () => ({ flat: uniform(), bell: normal() }))
   const share = (test: (draw: { flat: number; bell: number }) => boolean) => draws.filter(test).length / draws.length
-  expect(share(({ flat }) => flat < 0.25)).toBeCloseTo(0.25, 1)
-  expect(share(({ bell }) => Math.abs(bell) < 1)).toBeCloseTo(0.683, 1)
-  expect(share(({ bell }) => bell > 1.645)).toBeCloseTo(0.05, 1)
+  // Of 10 000 draws a share p is known to √(p (1 - p)) / 100; three of that are allowed.
+  const isShare = (found: number, of: number) => Math.abs(found - of) < 0.03 * Math.sqrt(of * (1 - of))
+  expect(
+    isShare(
+      share(({ flat }) => flat < 0.25),
+      0.25,
+    ),
+  ).toBe(true)
+  expect(
+    isShare(
+      share(({ bell }) => Math.abs(bell) < 1),
+      0.6827,
+    ),
+  ).toBe(true)
+  expect(
+    isShare(
+      share(({ bell }) => bell > 1.645),
+      0.05,
+    ),
+  ).toBe(true)
   expect(draws.every(({ flat, bell }) => flat >= 0 && flat < 1 && Number.isFinite(bell))).toBe(true)
 })

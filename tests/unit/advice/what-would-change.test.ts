@@ -45,7 +45,9 @@ test('rain and warmth together: no single change turns it', () => {
 
 test('only hours to come in which the keeper can go out count', () => {
   const mild = steadyHours(72, { airTemperatureC: 1, dewPointC: 0, cloudCover: 1 })
-  for (const { values } of ask(mild, { now: timeOf(8.5) })) {
+  const turns = ask(mild, { now: timeOf(8.5) })
+  expect(turns.length).toBeGreaterThan(0)
+  for (const { values } of turns) {
     // Hours from 5 pm to 1 am are five to thirteen after noon.
     expect(String(values.goodAt) >= timeOf(8) && String(values.goodAt) < timeOf(13)).toBe(true)
   }

@@ -10,7 +10,7 @@ import { carrySheet, type ForecastRun } from './forecast-run'
 import { round, scoreHour } from './score-hours'
 import { makeSetting, type Setting } from './setting'
 import { findThaws } from './thaw'
-import { VERDICT } from './thresholds'
+import { AGREEMENT, VERDICT } from './thresholds'
 import { planTonight } from './tonight-plan'
 import { findWindows, type HourRange } from './windows'
 import { toIso } from './zoned-time'
@@ -38,7 +38,8 @@ export function judge(input: JudgeInput, options: JudgeOptions = {}): Judgement 
   const fills = fillStarts(setting, main)
   const hours = main.hours.map((_, index) => scoreHour(setting, main, index, fills[index] ?? null))
   const ranges = openRanges(setting, main, hours)
-  const { agreements, growths, runs } = askRuns(setting, options, main, ranges, hours)
+  const { agreements, runs } = askRuns(setting, options, main, ranges, hours)
+  const fillStart = fillStartIndex(ranges, agreements)
   const windows = ranges.map((range, index): AdviceWindow => {
     const ofRange = agreements[index] as HourAgreement[]
     const best = bestHour(ofRange)
@@ -55,7 +56,7 @@ export function judge(input: JudgeInput, options: JudgeOptions = {}): Judgement 
     hours,
     windows,
     plan: { passes: planTonight(setting, main, hours, shareAt) },
-    fill: fillOutlook(setting, main, growths, fillStartIndex(ranges, hours)),
+    fill: fillOutlook(setting, main, growthsFrom(setting, options, main, fillStart), fillStart),
     thaws: thawsOf(main, hours),
     ...(options.stateAt === undefined ? {} : { sheetState: sheetStateAt(main, options.stateAt) }),
   }
@@ -85,12 +86,10 @@ function openRanges(setting: Setting, run: ForecastRun, hours: readonly ScoredHo
 interface Asked {
   /** For each range. */
   agreements: HourAgreement[][]
-  /** How the fill freezes in the main run and in the others. */
-  growths: (Grown | null)[]
   runs: number
 }
 
-/** Asks the other runs, where anything hangs on them. */
+/** Asks the other runs about the windows, where there are any. */
 function askRuns(
   setting: Setting,
   options: JudgeOptions,
@@ -99,30 +98,32 @@ function askRuns(
   hours: readonly ScoredHour[],
 ): Asked {
   const tallies = ranges.map(startTally)
-  const startIndex = fillStartIndex(ranges, hours)
-  const growths = [growthOf(setting, main, startIndex)]
   let runs = 0
-  if (needsRuns(setting, ranges)) {
+  if (ranges.length > 0) {
     for (const run of otherRuns(setting, options, main, hoursNeeded(setting, ranges, main))) {
       runs += 1
       for (const tally of tallies) addToTally(tally, setting, run)
-      growths.push(growthOf(setting, run, startIndex))
     }
   }
-  return {
-    agreements: tallies.map((tally) => hourAgreements(tally, runs, scoresOf(hours, tally.range))),
-    growths,
-    runs,
-  }
+  return { agreements: tallies.map((tally) => hourAgreements(tally, runs, scoresOf(hours, tally.range))), runs }
 }
 
-function needsRuns(setting: Setting, ranges: readonly HourRange[]): boolean {
-  return ranges.length > 0 || setting.input.rink.phase === 'freezing'
+/** How the fill freezes in the forecast's own run and in the others, where something is filled or freezes. */
+function growthsFrom(
+  setting: Setting,
+  options: JudgeOptions,
+  main: ForecastRun,
+  startIndex: number | null,
+): (Grown | null)[] {
+  const own = growthOf(setting, main, startIndex)
+  if (own === null) return [own]
+  const others = otherRuns(setting, options, main, main.hours.length)
+  return [own, ...Array.from(others, (run) => growthOf(setting, run, startIndex))]
 }
 
-/** Fill and freezing look to the end of the forecast; floods only until the last window's last layer is set. */
+/** A fill is judged by what comes long after it; floods only need their last layer to set. */
 function hoursNeeded(setting: Setting, ranges: readonly HourRange[], run: ForecastRun): number {
-  const isFloodOnly = ranges.every((range) => range.kind === 'flood') && setting.input.rink.phase !== 'freezing'
+  const isFloodOnly = ranges.every((range) => range.kind === 'flood')
   return isFloodOnly ? Math.min(run.hours.length, (ranges.at(-1)?.to ?? 0) + HOURS_TO_SET) : run.hours.length
 }
 
@@ -131,12 +132,14 @@ function skinAtOf(run: ForecastRun, fill: FillStart | null | undefined): string 
   return index == null ? null : toIso((run.hours[0]?.startsAtMillis ?? 0) + index * HOUR_MILLIS)
 }
 
-/** The best hour of the first fill window. */
-function fillStartIndex(ranges: readonly HourRange[], hours: readonly ScoredHour[]): number | null {
-  const range = ranges.find((one) => one.kind === 'fill')
-  if (!range) return null
-  const inRange = scoresOf(hours, range)
-  return range.from + inRange.indexOf(Math.max(...inRange))
+/** The best hour of the first fill window that enough runs see: a fill that they doubt is no advice to start. */
+function fillStartIndex(ranges: readonly HourRange[], agreements: readonly HourAgreement[][]): number | null {
+  for (const [index, range] of ranges.entries()) {
+    const ofRange = agreements[index] as HourAgreement[]
+    const best = bestHour(ofRange)
+    if (range.kind === 'fill' && (ofRange[best]?.share ?? 1) >= AGREEMENT.least) return range.from + best
+  }
+  return null
 }
 
 function thawsOf(run: ForecastRun, hours: readonly ScoredHour[]) {

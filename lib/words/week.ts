@@ -1,5 +1,5 @@
 // The week in sentences: its headline, and how far to trust it.
-import type { FillOutlook, Phase } from '@/lib/advice/types'
+import type { AdviceWindow, FillOutlook, Phase } from '@/lib/advice/types'
 import type { WeekSummary } from '@/lib/advice/week-summary'
 import { addDays, localDateOf } from '@/lib/advice/zoned-time'
 import { dayText } from './night-label'
@@ -19,13 +19,16 @@ interface Week {
   phase: Phase
   summary: WeekSummary
   fill: FillOutlook
+  /** Times to fill, with those that too few runs see. */
+  fillWindows: readonly AdviceWindow[]
 }
 
 const plain = (before: string): WeekHeadline => ({ before, key: '', after: '', tone: 'plain' })
 
-export function weekHeadline({ phase, summary, fill }: Week, now: Date, words: WordOptions): WeekHeadline {
+export function weekHeadline(week: Week, now: Date, words: WordOptions): WeekHeadline {
+  const { phase, summary, fill } = week
   if (phase === 'planning') return plain('Nothing to flood yet: the rink is still being planned.')
-  if (phase === 'waiting' || phase === 'filling') return fillHeadline(phase, summary, fill, now, words)
+  if (phase === 'waiting' || phase === 'filling') return fillHeadline(week, now, words)
   if (phase === 'freezing') return freezingHeadline(fill, now, words)
   if (summary.thaw) return thawHeadline(summary, now, words)
   return countHeadline(summary.goodDates.length, summary.nights)
@@ -54,14 +57,11 @@ function thawHeadline(summary: WeekSummary, now: Date, words: WordOptions): Week
   return { before: `${count} before the`, key, after: goodBeforeThaw === 0 ? `.${after}` : '.', tone: 'thaw' }
 }
 
-function fillHeadline(
-  phase: Phase,
-  summary: WeekSummary,
-  fill: FillOutlook,
-  now: Date,
-  words: WordOptions,
-): WeekHeadline {
-  if (!fill.startsAt) return plain(`No time to fill in the ${countText(summary.nights)} days ahead.`)
+function fillHeadline({ phase, summary, fill, fillWindows }: Week, now: Date, words: WordOptions): WeekHeadline {
+  if (!fill.startsAt) {
+    const doubt = fillWindows.length > 0 ? ' that enough forecast runs see' : ''
+    return plain(`No time to fill${doubt} in the ${countText(summary.nights)} days ahead.`)
+  }
   const { p50 } = fill.carriesSkaterAt
   const carries = p50 ? `: skaters from about ${longDayText(p50, words)}.` : '.'
   const when = dayPartText(fill.startsAt, now, words)
@@ -77,7 +77,7 @@ function freezingHeadline(fill: FillOutlook, now: Date, words: WordOptions): Wee
 }
 
 /** What stands under the headline: what the near nights could bring, what the thaw takes, how wide the dates are. */
-export function weekDetail({ phase, summary, fill }: Week, now: Date, words: WordOptions): string {
+export function weekDetail({ phase, summary, fill }: Omit<Week, 'fillWindows'>, now: Date, words: WordOptions): string {
   if (phase === 'planning')
     return `About ${layerText(Math.round(summary.freezableMm), words)} of water could freeze in these nights.`
   if (phase === 'waiting' || phase === 'filling' || phase === 'freezing') return spreadText(fill, words)

@@ -2,7 +2,8 @@
 import { describe, expect, test } from 'vitest'
 import { judge } from '@/lib/advice/judge'
 import type { JudgeInput } from '@/lib/advice/types'
-import { hourOf, HOUR_MILLIS, inputOf, timeOf } from '../../support/advice-weather'
+import { HOUR_MILLIS, MINUTE_MILLIS } from '@/lib/physics/constants'
+import { hourOf, inputOf, timeOf } from '../../support/advice-weather'
 import { scoreExample } from '../../support/score-example'
 import { scoreInputSchema } from '@/lib/schemas/score'
 
@@ -45,7 +46,7 @@ describe('sessions', () => {
     )
     // 10 000 L ÷ 40 L/min = 250 min.
     expect(fill.sessions?.at(-1)?.endsAt).toBe(
-      new Date(Date.parse(timeOf(0)) + 250 * 60_000).toISOString().replace('.000', ''),
+      new Date(Date.parse(timeOf(0)) + 250 * MINUTE_MILLIS).toISOString().replace('.000', ''),
     )
   })
   test('what is in already is not poured again', () => {
@@ -63,6 +64,28 @@ describe('sessions', () => {
       alone,
     )
     expect([fill.startsAt, fill.sessions, fill.hours]).toEqual([null, [], []])
+  })
+})
+
+describe('runs that doubt the first time to start', () => {
+  // -1 °C on the first and the third afternoon and -9 °C after each; in seven of ten members the first is too cold for a hose.
+  const afternoons = (first: number) => (hour: number) => (hour < 10 ? first : hour >= 48 && hour < 58 ? -1 : -9)
+  const members = Array.from({ length: 10 }, (_, member) => waiting(afternoons(member < 3 ? -1 : -15)).hours)
+  const input = waiting(afternoons(-1), { available: always, members })
+
+  test('leave the start to the next that most of them see, as the windows say', () => {
+    const { fill, windows } = judge(input)
+    expect(windows.map(({ kind, agreement }) => [kind, agreement])).toEqual([
+      ['fill', 0.3],
+      ['fill', 1],
+    ])
+    expect(Date.parse(fill.startsAt!)).toBeGreaterThanOrEqual(Date.parse(timeOf(48)))
+    expect(fill.sessions?.[0]?.startsAt).toBe(fill.startsAt)
+  })
+  test('leave none where there is no other', () => {
+    const hours = input.hours.slice(0, 48)
+    const { fill } = judge({ ...input, hours, members: members.map((member) => member.slice(0, 48)) })
+    expect([fill.startsAt, fill.skinAt, fill.sessions]).toEqual([null, null, []])
   })
 })
 

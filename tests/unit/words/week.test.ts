@@ -1,6 +1,6 @@
 // The nights ahead in sentences.
 import { expect, test } from 'vitest'
-import type { FillOutlook } from '@/lib/advice/types'
+import type { AdviceWindow, FillOutlook } from '@/lib/advice/types'
 import type { NightAhead } from '@/lib/advice/week'
 import type { WeekSummary } from '@/lib/advice/week-summary'
 import { IMPERIAL, METRIC } from '@/lib/units'
@@ -29,8 +29,14 @@ const SUMMARY: WeekSummary = {
 /** From Sunday 17 January 9 am to Tuesday 19 January 6 pm. */
 const THAW = { startsAt: '2027-01-17T14:00:00Z', endsAt: '2027-01-19T23:00:00Z', lossMm: 7.6 }
 
-function headline(summary: Partial<WeekSummary>, phase: 'skating' | 'waiting' | 'freezing' = 'skating', fill = FILL) {
-  const { before, key, after } = weekHeadline({ phase, summary: { ...SUMMARY, ...summary }, fill }, NOW, READER)
+function headline(
+  summary: Partial<WeekSummary>,
+  phase: 'skating' | 'waiting' | 'freezing' = 'skating',
+  fill = FILL,
+  fillWindows: AdviceWindow[] = [],
+) {
+  const week = { phase, summary: { ...SUMMARY, ...summary }, fill, fillWindows }
+  const { before, key, after } = weekHeadline(week, NOW, READER)
   return [before, key && before ? ' ' : '', key, after].join('')
 }
 
@@ -60,6 +66,10 @@ test('before the fill the headline says when to fill and when skaters may come',
   const fill = { ...FILL, startsAt: '2027-01-14T15:00:00Z', carriesSkaterAt }
   expect(headline({}, 'waiting', fill)).toBe('Fill Thursday morning: skaters from about Tue 19 January.')
   expect(headline({}, 'waiting')).toBe('No time to fill in the ten days ahead.')
+  const doubtful = { kind: 'fill', agreement: 0.2, runs: 10 } as AdviceWindow
+  expect(headline({}, 'waiting', FILL, [doubtful])).toBe(
+    'No time to fill that enough forecast runs see in the ten days ahead.',
+  )
   expect(headline({}, 'freezing', fill)).toBe('Keep off: skaters from about Tue 19 January.')
   expect(weekDetail({ phase: 'waiting', summary: SUMMARY, fill }, NOW, READER)).toBe(
     'One forecast run in ten has it carry by Mon 18 January, nine in ten by Thu 21 January. Drill before anyone skates.',

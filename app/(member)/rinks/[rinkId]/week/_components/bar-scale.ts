@@ -1,4 +1,5 @@
 // One scale for the bars of all nights, so that they can be compared.
+import { HOUR_MILLIS } from '@/lib/physics/constants'
 import type { WeekNight } from '@/lib/schemas/week-view'
 
 export const BAR_FRAME = { width: 300, height: 44, baseline: 30 }
@@ -26,7 +27,6 @@ export interface Bar {
   isCut: boolean
 }
 
-const HOUR_MILLIS = 3_600_000
 const round = (value: number) => Math.round(value * 10) / 10
 
 /** Where an instant of the night lies across the frame. */

@@ -10,45 +10,53 @@ import { hoseHoursText } from '@/lib/words/week-night'
 
 export function FillAhead({ outlook, reader }: { outlook: NonNullable<WeekView['outlook']>; reader: WordOptions }) {
   const { fill, fillWindows } = outlook
-  if (!fill.startsAt) return null
+  if (fillWindows.length === 0) return null
   return (
     <div className="mb-8 gap-x-14 lg:grid lg:grid-cols-2">
-      <section>
-        <h2 className="mb-2 font-semibold">The fill</h2>
-        <div className="border-t border-rule">
-          <Facts rows={factsOf(fill, reader)} />
-        </div>
-        <p className="mt-2 text-small text-graphite">
-          Half of the forecast runs get there by the date; the span is from one run in ten to nine in ten. Drill before
-          anyone skates.
-        </p>
-      </section>
-      <section className="mt-7 lg:mt-0">
+      {fill.startsAt ? <TheFill fill={fill} startsAt={fill.startsAt} reader={reader} /> : null}
+      <section className="mt-7 first:mt-0 lg:mt-0">
         <h2 className="mb-2 font-semibold">Times to start</h2>
         <div className="border-t border-rule">
           <Facts rows={fillWindows.map((window) => windowFact(window, reader))} />
         </div>
+        {fill.startsAt ? null : (
+          <p className="mt-2 text-small text-graphite">Too few forecast runs see these yet. Wait until more do.</p>
+        )}
       </section>
     </div>
   )
 }
 
-const momentText = (at: string, reader: WordOptions) => `${longDayText(at, reader)}, ${doneByText(at, reader)}`
-
-function factsOf(fill: FillOutlook, reader: WordOptions): Fact[] {
+function TheFill({ fill, startsAt, reader }: { fill: FillOutlook; startsAt: string; reader: WordOptions }) {
   const skin = fill.skinAtSpread?.p50 ?? fill.skinAt
-  return [
-    ...(fill.startsAt ? [{ name: 'Best start', figure: momentText(fill.startsAt, reader) }] : []),
+  const rows: Fact[] = [
+    { name: 'Best start', figure: momentText(startsAt, reader) },
     { name: 'Hose', figure: `${hoseHoursText(fill.hoseHours)}, ${waterText(fill.litres, reader)}` },
     { name: 'Skinned over', figure: skin ? momentText(skin, reader) : 'not within the forecast' },
     { name: 'Carries skaters', figure: spreadText(fill.carriesSkaterAt, reader) },
     ...(fill.frozenThroughAt ? [{ name: 'Frozen through', figure: spreadText(fill.frozenThroughAt, reader) }] : []),
   ]
+  return (
+    <section>
+      <h2 className="mb-2 font-semibold">The fill</h2>
+      <div className="border-t border-rule">
+        <Facts rows={rows} />
+      </div>
+      <p className="mt-2 text-small text-graphite">
+        Half of the forecast runs get there by the date; the span is from one run in ten to nine in ten. Drill before
+        anyone skates.
+      </p>
+    </section>
+  )
 }
 
-/** "about Tue 19 January (Mon 18 January to later)"; the span is left out when all runs agree on the day. */
+const momentText = (at: string, reader: WordOptions) => `${longDayText(at, reader)}, ${doneByText(at, reader)}`
+
+/** "about Tue 19 January (Mon 18 January to later)"; the span is left out when all runs agree on the day, the middle
+    when fewer than half of them get there. */
 function spreadText({ p10, p50, p90 }: Spread, reader: WordOptions): string {
   if (!p10) return 'not within the forecast'
+  if (!p50) return `${longDayText(p10, reader)} or later`
   const [early, middle, late] = [p10, p50, p90].map((at) => (at ? longDayText(at, reader) : 'later'))
   return early === late ? `about ${middle}` : `about ${middle} (${early} to ${late})`
 }

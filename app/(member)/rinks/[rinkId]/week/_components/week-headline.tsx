@@ -18,7 +18,8 @@ interface WeekHeadlineProps {
 
 export function WeekHeadline({ view, outlook, reader }: WeekHeadlineProps) {
   const now = new Date(view.readAt)
-  const week = { phase: view.rink.phase, summary: outlook.summary, fill: outlook.fill }
+  const { summary, fill, fillWindows } = outlook
+  const week = { phase: view.rink.phase, summary, fill, fillWindows }
   const { before, key, after, tone } = weekHeadline(week, now, reader)
   const detail = weekDetail(week, now, reader)
   return (

@@ -2,11 +2,12 @@
 import pg from 'pg'
 import { PRESENCE_LOCK } from '@/db/queries/health'
 import { logEvent, logFailure } from '@/lib/log'
+import { MINUTE_MILLIS } from '@/lib/physics/constants'
 
 /** No handler runs this long: the time limits of providers and mail servers are far shorter. */
 const LONGEST_JOB_MINUTES = 15
 const REJOIN_MILLIS = 5_000
-const LOOK_ROUND_MILLIS = 5 * 60_000
+const LOOK_ROUND_MILLIS = 5 * MINUTE_MILLIS
 
 /**
  * Holds the presence lock for the life of this process, after freeing the jobs of workers that no longer live: all

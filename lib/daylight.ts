@@ -1,12 +1,12 @@
 // Whether the sun is down at a place, and when that changes next.
 import { getPosition, getTimes } from 'suncalc'
+import { DAY_MILLIS } from '@/lib/physics/constants'
 
 export interface ChangeOfLight {
   at: Date
   isDark: boolean
 }
 
-const DAY_MILLIS = 24 * 3_600_000
 /** From the day before to two days ahead: pages are left open overnight, seldom longer. Ours. */
 const DAYS = [-1, 0, 1, 2]
 

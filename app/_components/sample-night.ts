@@ -2,16 +2,16 @@
 import { judge, MODEL_VERSION } from '@/lib/advice/judge'
 import { nightBounds } from '@/lib/advice/night'
 import { summariseNight } from '@/lib/advice/night-summary'
+import { HOUR_MILLIS } from '@/lib/physics/constants'
 import type { HourlyRecord } from '@/lib/physics/types'
 import type { TonightView } from '@/lib/schemas/tonight-view'
 import { METRIC } from '@/lib/units'
 
-const HOUR = 3_600_000
 const TIME_ZONE = 'America/Toronto'
 const NIGHT_DATE = '2027-01-12'
 const PLACE = { latitude: 45.8, longitude: -77.1 }
 const { startsAt, endsAt } = nightBounds(NIGHT_DATE, TIME_ZONE)
-const NOW = new Date(startsAt.getTime() + 3.5 * HOUR)
+const NOW = new Date(startsAt.getTime() + 3.5 * HOUR_MILLIS)
 /** By hours after noon. */
 const SUNSET_HOUR = 4.7
 const SUNRISE_HOUR = 19.7
@@ -36,7 +36,7 @@ function weatherAt(hour: number): HourlyRecord {
   const isSnowing = hour >= 16 && hour < 21
   const isDay = hour < SUNSET_HOUR || hour > SUNRISE_HOUR
   return {
-    time: new Date(startsAt.getTime() + hour * HOUR).toISOString().replace('.000Z', 'Z'),
+    time: new Date(startsAt.getTime() + hour * HOUR_MILLIS).toISOString().replace('.000Z', 'Z'),
     airTemperatureC,
     dewPointC: airTemperatureC - (isSnowing ? 1 : 4),
     windSpeedMps: hour > 13 ? 4 : 2.5,
@@ -72,7 +72,7 @@ function judgeSample(): Sample {
     hours: Array.from({ length: 48 }, (_, hour) => weatherAt(hour)),
   })
   const summary = summariseNight(judgement, { nightDate: NIGHT_DATE, now: NOW, timeZone: TIME_ZONE })
-  const iso = (hour: number) => new Date(startsAt.getTime() + hour * HOUR).toISOString()
+  const iso = (hour: number) => new Date(startsAt.getTime() + hour * HOUR_MILLIS).toISOString()
   return {
     readAt: NOW.toISOString(),
     rink: { id: '', name: 'A sample rink', placeName: '', timeZone: TIME_ZONE, phase: 'skating', people: 1, water },

@@ -1,4 +1,5 @@
 // Geometry of the night strip: numbers in, positions out. It knows no words, no units and no zone.
+import { HOUR_MILLIS } from '@/lib/physics/constants'
 import { airScale, rateScale, type Scale } from './strip-scale'
 
 export type StripVerdict = 'flood' | 'fill' | 'hold'
@@ -74,7 +75,6 @@ export interface StripLayout {
   nowX: number | null
 }
 
-const HOUR = 3_600_000
 const LEAST_SNOW_CM = 0.05
 const LEAST_RAIN_MM = 0.05
 
@@ -91,7 +91,7 @@ export function xOf(input: Pick<StripInput, 'frame' | 'startsAt' | 'endsAt'>, at
 export function layOutNightStrip(input: StripInput): StripLayout {
   const { frame, now } = input
   const seen = input.hours.flatMap((hour, index) =>
-    hour.startsAt < input.endsAt && hour.startsAt + HOUR > input.startsAt
+    hour.startsAt < input.endsAt && hour.startsAt + HOUR_MILLIS > input.startsAt
       ? [{ hour, index, ...spanOf(input, hour) }]
       : [],
   )
@@ -123,7 +123,7 @@ type Seen = { hour: StripHour; index: number; x: number; width: number }
 
 function spanOf(input: StripInput, hour: StripHour): { x: number; width: number } {
   const x = xOf(input, hour.startsAt)
-  return { x, width: round(xOf(input, hour.startsAt + HOUR) - x) }
+  return { x, width: round(xOf(input, hour.startsAt + HOUR_MILLIS) - x) }
 }
 
 function yOf(frame: StripFrame, scale: Scale, value: number): number {

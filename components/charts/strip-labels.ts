@@ -1,9 +1,9 @@
 // Words along the strip: which hours carry a tick, and which runs of snow or rain carry an amount.
 import { zoneOffsetsMinutes } from '@/lib/advice/zoned-time'
+import { HOUR_MILLIS } from '@/lib/physics/constants'
 import type { StripHour } from './night-strip-layout'
 
 const QUARTER = 900_000
-const HOUR = 3_600_000
 
 /**
  * Instants at which the rink's clock shows every third hour. Found by walking in quarter hours, because zones may be
@@ -14,7 +14,7 @@ export function tickInstants(startsAt: number, endsAt: number, timeZone: string)
   const quarters = Array.from({ length: Math.floor((endsAt - first) / QUARTER) + 1 }, (_, n) => first + n * QUARTER)
   const offsets = zoneOffsetsMinutes(quarters, timeZone)
   return quarters.flatMap((at, index) => {
-    const localHour = (((at / HOUR + (offsets[index] ?? 0) / 60) % 24) + 24) % 24
+    const localHour = (((at / HOUR_MILLIS + (offsets[index] ?? 0) / 60) % 24) + 24) % 24
     return localHour % 3 === 0 ? [{ at, localHour }] : []
   })
 }
@@ -45,12 +45,17 @@ export function wetRuns(
     const isWet = hour.snowCm >= 0.05 || hour.rainMm >= 0.05
     if (!isWet || hour.startsAt < startsAt || hour.startsAt >= endsAt) continue
     const last = runs.at(-1)
-    if (last && hour.startsAt - last.endsAt <= HOUR) {
-      last.endsAt = hour.startsAt + HOUR
+    if (last && hour.startsAt - last.endsAt <= HOUR_MILLIS) {
+      last.endsAt = hour.startsAt + HOUR_MILLIS
       last.snowCm += hour.snowCm
       last.rainMm += hour.rainMm
     } else {
-      runs.push({ startsAt: hour.startsAt, endsAt: hour.startsAt + HOUR, snowCm: hour.snowCm, rainMm: hour.rainMm })
+      runs.push({
+        startsAt: hour.startsAt,
+        endsAt: hour.startsAt + HOUR_MILLIS,
+        snowCm: hour.snowCm,
+        rainMm: hour.rainMm,
+      })
     }
   }
   return runs

@@ -1,4 +1,5 @@
 // How the reader of a night sheet wants figures, and how old things are.
+import { MINUTE_MILLIS } from '@/lib/physics/constants'
 import type { TonightView } from '@/lib/schemas/tonight-view'
 import { wordsFor, type WordOptions } from '@/lib/words/options'
 
@@ -16,7 +17,7 @@ export function readerOf({ viewer, rink }: Reader): WordOptions {
 
 /** How long ago, in the largest unit that fits. */
 export function ageText(from: string, now: number): string {
-  const minutes = Math.max(0, Math.round((now - Date.parse(from)) / 60_000))
+  const minutes = Math.max(0, Math.round((now - Date.parse(from)) / MINUTE_MILLIS))
   if (minutes < 1) return 'just now'
   if (minutes < 60) return `${minutes} ${minutes === 1 ? 'minute' : 'minutes'} ago`
   const hours = Math.round(minutes / 60)

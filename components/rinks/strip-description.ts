@@ -1,4 +1,5 @@
 // The night in a few sentences, for people who do not see the strip.
+import { HOUR_MILLIS } from '@/lib/physics/constants'
 import type { TonightHour } from '@/lib/schemas/tonight-view'
 import type { WordOptions } from '@/lib/words/options'
 import { rateText, temperatureText } from '@/lib/words/quantities'
@@ -56,8 +57,8 @@ function runsOf(hours: TonightHour[]): [number, number][] {
   for (const hour of hours) {
     const at = Date.parse(hour.time)
     const last = runs.at(-1)
-    if (last && last[1] === at) last[1] = at + 3_600_000
-    else runs.push([at, at + 3_600_000])
+    if (last && last[1] === at) last[1] = at + HOUR_MILLIS
+    else runs.push([at, at + HOUR_MILLIS])
   }
   return runs
 }

@@ -1,5 +1,6 @@
 // From tonight's view to the numbers and words of the strip, in the reader's units and the rink's time.
 import { addDays, instantOfLocal } from '@/lib/advice/zoned-time'
+import { HOUR_MILLIS } from '@/lib/physics/constants'
 import type { TonightHour, TonightView } from '@/lib/schemas/tonight-view'
 import { celsiusToFahrenheit, mmToInches, type Units } from '@/lib/units'
 import type { StripFrame, StripHour, StripInput, StripPass } from '../charts/night-strip-layout'
@@ -18,15 +19,13 @@ export type StripSource = Pick<TonightView, 'rink' | 'viewer' | 'night'> & {
   outlook: Pick<NonNullable<TonightView['outlook']>, 'hours' | 'passes'>
 }
 
-const HOUR = 3_600_000
-
 /** The hours of the night, oldest first; hours to come that the forecast does not have are there, unknown. */
 export function hoursOfNight({ night, outlook }: Pick<StripSource, 'night' | 'outlook'>, now: number): TonightHour[] {
   const [from, to] = [Date.parse(night.startsAt), Date.parse(night.endsAt)]
-  const within = outlook.hours.filter(({ time }) => Date.parse(time) + HOUR > from && Date.parse(time) < to)
+  const within = outlook.hours.filter(({ time }) => Date.parse(time) + HOUR_MILLIS > from && Date.parse(time) < to)
   const known = new Set(within.map(({ time }) => Date.parse(time)))
   const missing: TonightHour[] = []
-  for (let at = Math.floor(Math.max(from, now) / HOUR) * HOUR; at < to; at += HOUR) {
+  for (let at = Math.floor(Math.max(from, now) / HOUR_MILLIS) * HOUR_MILLIS; at < to; at += HOUR_MILLIS) {
     if (!known.has(at)) missing.push(unknownHour(at))
   }
   return [...within, ...missing].sort((a, b) => Date.parse(a.time) - Date.parse(b.time))

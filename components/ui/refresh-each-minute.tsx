@@ -2,8 +2,7 @@
 'use client'
 import { useRouter } from 'next/navigation'
 import { useEffect } from 'react'
-
-const MINUTE_MILLIS = 60_000
+import { MINUTE_MILLIS } from '@/lib/physics/constants'
 
 export function RefreshEachMinute() {
   const router = useRouter()

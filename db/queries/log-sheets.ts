@@ -2,8 +2,7 @@
 import type { Db } from '@/db/knex'
 import type { RinkAccess } from '@/lib/access/proofs'
 import type { SheetReport } from '@/lib/advice/types'
-
-const HOUR_MILLIS = 3_600_000
+import { HOUR_MILLIS } from '@/lib/physics/constants'
 
 export interface HourOfSheet {
   judgedAt: Date

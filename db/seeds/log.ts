@@ -1,13 +1,13 @@
 // The demo's log, written through the services night by night. Fixed keys: repeating it changes nothing.
 import type { Db } from '@/db/knex'
 import { instantOfLocal } from '@/lib/advice/zoned-time'
+import { MINUTE_MILLIS } from '@/lib/physics/constants'
 import { writeEntrySchema } from '@/lib/schemas/log'
 import { answerSet, writeEntry } from '@/lib/services/log'
 import { METRIC, unitsCode } from '@/lib/units'
 import { DEMO_LOG, type DemoEntry } from './log-nights'
 import type { DemoPerson } from './people'
 
-const MINUTE_MILLIS = 60_000
 /** Nobody waits longer for a layer. */
 const OVERNIGHT_MILLIS = 11 * 60 * MINUTE_MILLIS
 

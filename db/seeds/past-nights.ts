@@ -4,12 +4,12 @@ import { insertForecast } from '@/db/queries/forecasts'
 import type { RinkAccess } from '@/lib/access/proofs'
 import { nightBounds, tonightDate } from '@/lib/advice/night'
 import { addDays } from '@/lib/advice/zoned-time'
+import { HOUR_MILLIS } from '@/lib/physics/constants'
 import { refreshOutlook } from '@/lib/services/outlooks'
 import { slotOf } from '@/lib/services/forecasts'
 import { settleRinkNight } from '@/lib/services/night-outcomes'
 import { PAST_NIGHTS, pastForecast } from './past-weather'
 
-const HOUR_MILLIS = 3_600_000
 const INVENTED = { text: 'Weather invented for the demo', url: '', licence: '' }
 
 /** Once: a rink that has a settled night keeps its record. Nobody is told of nights that are over. */

@@ -1,7 +1,6 @@
 // Invented weather of the three weeks before today, for the demo's record: as it was forecast, and as it came.
+import { HOUR_MILLIS } from '@/lib/physics/constants'
 import type { HourlyRecord } from '@/lib/physics/types'
-
-const HOUR_MILLIS = 3_600_000
 
 interface PastNight {
   lowC: number

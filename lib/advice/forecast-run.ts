@@ -1,5 +1,5 @@
 // One forecast run seen by the advice: prepared hours, running sums, and the sheet carried through them.
-import { HOUR_MILLIS } from '@/lib/physics/constants'
+import { HOUR_MILLIS, MINUTE_MILLIS } from '@/lib/physics/constants'
 import { advanceSheet, createSheet, pourLayer, reportSheet, type SheetState } from '@/lib/physics/sheet'
 import { minutesToSet, type Layer } from '@/lib/physics/layer'
 import type { PreparedHour } from '@/lib/physics/types'
@@ -99,7 +99,7 @@ function noteWhenSet(run: ForecastRun, sheet: SheetState, index: number, poured:
   const before = fraction < 0.5 ? (run.carried[index] as SheetState) : sheet
   const minutes = minutesToSet(before, run.hours, index, fraction, poured)
   const endMillis = startsAtMillis + (run.hours.length - index) * HOUR_MILLIS
-  run.pouredSetMillis = minutes === null ? endMillis : atMillis + minutes * 60_000
+  run.pouredSetMillis = minutes === null ? endMillis : atMillis + minutes * MINUTE_MILLIS
 }
 
 function startingSheet(setting: Setting): SheetState {

@@ -1,4 +1,5 @@
 // Nights: a night runs from local noon to the next local noon and is named by the date it begins on.
+import { MINUTE_MILLIS } from '@/lib/physics/constants'
 import { addDays, instantOfLocal, localDateOf, zoneOffsetMinutes } from './zoned-time'
 
 const NOON_MINUTE = 12 * 60
@@ -17,7 +18,7 @@ const MINUTES_A_DAY = 24 * 60
  * Source: definition.
  */
 export function localMinuteOf(atMillis: number, timeZone: string): number {
-  const local = Math.floor(atMillis / 60_000) + zoneOffsetMinutes(atMillis, timeZone)
+  const local = Math.floor(atMillis / MINUTE_MILLIS) + zoneOffsetMinutes(atMillis, timeZone)
   return ((local % MINUTES_A_DAY) + MINUTES_A_DAY) % MINUTES_A_DAY
 }
 

@@ -1,10 +1,10 @@
 // How many passes a later night has room for: a count from the window, until the plan of that day is made.
-import { HOUR_MILLIS } from '@/lib/physics/constants'
+import { HOUR_MILLIS, MINUTE_MILLIS } from '@/lib/physics/constants'
 import { PLAN } from './thresholds'
 import { toIso } from './zoned-time'
 import type { AdviceWindow, ScoredHour } from './types'
 
-const STEP_MILLIS = PLAN.stepMinutes * 60_000
+const STEP_MILLIS = PLAN.stepMinutes * MINUTE_MILLIS
 
 export interface NightPasses {
   count: number

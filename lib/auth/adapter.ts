@@ -3,10 +3,11 @@ import type { Adapter } from 'next-auth/adapters'
 import type { Db } from '@/db/knex'
 import { deleteSession, extendSession, findSession, noteSeen } from '@/db/queries/sessions'
 import { readClock } from '@/lib/clock'
+import { MINUTE_MILLIS } from '@/lib/physics/constants'
 import { hashSessionToken } from './session-tokens'
 
 /** How exactly a session knows when it was last used. */
-const SEEN_STEP_MILLIS = 10 * 60_000
+const SEEN_STEP_MILLIS = 10 * MINUTE_MILLIS
 
 export function sessionAdapter(db: Db): Adapter {
   return {

@@ -1,9 +1,9 @@
 // The document `npm run score` reads: the contract's field names, checked so that every fault has a JSON path.
 import { z } from 'zod'
+import { HOUR_MILLIS } from '@/lib/physics/constants'
 import { dewPointC, saturationOverWaterHpa } from '@/lib/physics/humidity'
 import type { HourlyRecord } from '@/lib/physics/types'
 
-const HOUR_MILLIS = 3_600_000
 /** Rounding in forecasts puts the dew point a little above the air now and then; more means humidity over 107 %. [°C] */
 const DEW_POINT_TOLERANCE_C = 1
 

@@ -1,13 +1,13 @@
 // The end of an account: asked for, waited for, and taken back.
 import { listRinksKeptAlone, setDeletionDue } from '@/db/queries/users'
 import type { ServiceContext } from '@/lib/context'
+import { DAY_MILLIS } from '@/lib/physics/constants'
 import type { DeletionInput } from '@/lib/schemas/accounts'
 import { promiseDeletionMail } from './account-mail'
 import { requirePassword } from './own-account'
 
 /** Long enough to come back from a trip and find the mail. Ours. */
 export const GRACE_DAYS = 14
-const DAY_MILLIS = 24 * 3_600_000
 
 /** What goes with the account: the rinks that nobody else keeps. */
 export function listRinksThatGo({ db, viewer }: ServiceContext): Promise<{ id: string; name: string }[]> {

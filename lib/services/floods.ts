@@ -12,13 +12,14 @@ import { tonightDate } from '@/lib/advice/night'
 import { unpackNight } from '@/lib/advice/night-model'
 import type { ServiceContext } from '@/lib/context'
 import { ForbiddenError, InvalidInputError, NotFoundError } from '@/lib/errors'
+import { HOUR_MILLIS, MINUTE_MILLIS } from '@/lib/physics/constants'
 import type { CheckOffPass, SentCheckOff, UndoPass } from '@/lib/schemas/floods'
 import { readNightModel } from './night-model'
 
 /** What a phone kept while it had no network may be this old. */
-const LATEST_NEWS_MILLIS = 48 * 3_600_000
+const LATEST_NEWS_MILLIS = 48 * HOUR_MILLIS
 /** Phones' clocks run a little ahead. */
-const CLOCK_AHEAD_MILLIS = 5 * 60_000
+const CLOCK_AHEAD_MILLIS = 5 * MINUTE_MILLIS
 
 /** What only a phone says of a check-off; without it the pass is poured now. */
 type Sent = Partial<Pick<SentCheckOff, 'entryKey' | 'pouredAt' | 'userId'>>

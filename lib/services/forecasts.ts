@@ -5,15 +5,15 @@ import { enqueuePull, enqueueRefresh } from '@/db/queries/jobs'
 import { startRun } from '@/db/queries/job-runs'
 import type { Db } from '@/db/knex'
 import { logEvent, logFailure } from '@/lib/log'
+import { HOUR_MILLIS, MINUTE_MILLIS } from '@/lib/physics/constants'
 import { WeatherError, type Forecast, type WeatherProvider } from '@/lib/weather/port'
 
-const MINUTE_MILLIS = 60_000
 /** After the adapter's own tries have failed; a wrong setting is looked at again by the next sweep. */
 const RETRY_MINUTES = { transient: 5, malformed: 5, throttled: 10, coverage: 360, refused: 60 } as const
 
 /** The hour an instant lies in, as forecasts and judgements are filed. */
 export function slotOf(now: Date): Date {
-  return new Date(Math.floor(now.getTime() / 3_600_000) * 3_600_000)
+  return new Date(Math.floor(now.getTime() / HOUR_MILLIS) * HOUR_MILLIS)
 }
 
 /**

@@ -12,13 +12,13 @@ import { requireRink } from '@/lib/access/require-rink'
 import { freezingOutlook, type FreezingOutlook } from '@/lib/advice/freezing'
 import type { ServiceContext } from '@/lib/context'
 import { ConflictError } from '@/lib/errors'
+import { HOUR_MILLIS } from '@/lib/physics/constants'
 import type { FreezingView } from '@/lib/schemas/freezing-view'
 import { gatherJudgeInput } from './judge-input'
 import { getRinkAndReader } from './rink-and-reader'
 
 /** A hole drilled longer ago says little about today's ice. [h] Ours. */
 const READING_HOURS = 72
-const HOUR_MILLIS = 3_600_000
 
 /** @throws NotFoundError for strangers. */
 export async function getFreezing(context: ServiceContext, rinkId: string): Promise<FreezingView> {

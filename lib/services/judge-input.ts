@@ -9,10 +9,9 @@ import type { RinkAccess } from '@/lib/access/proofs'
 import { MODEL_VERSION } from '@/lib/advice/judge'
 import type { Yard } from '@/lib/advice/yard/types'
 import type { JudgeInput } from '@/lib/advice/types'
+import { HOUR_MILLIS } from '@/lib/physics/constants'
 import { litresBy } from './fill-facts'
 import { findYardInUse } from './yard-in-use'
-
-const HOUR_MILLIS = 3_600_000
 
 /** What is on the ground before anybody reported a sheet. */
 const BARE = { thicknessMm: 0, temperatureC: 0, snowCoverCm: 0 }

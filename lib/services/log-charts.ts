@@ -5,8 +5,8 @@ import type { Db } from '@/db/knex'
 import type { RinkAccess } from '@/lib/access/proofs'
 import type { Season } from '@/lib/advice/season'
 import { addDays, localDateOf } from '@/lib/advice/zoned-time'
+import { DAY_MILLIS } from '@/lib/physics/constants'
 
-const DAY_MILLIS = 86_400_000
 const WEEK_DAYS = 7
 
 export interface ThicknessDay {

@@ -14,8 +14,8 @@ import { insertReportedSheet } from '@/db/queries/sheet-states'
 import type { Db } from '@/db/knex'
 import { countChange } from '@/db/queries/rink-settings'
 import type { RinkAccess } from '@/lib/access/proofs'
+import { HOUR_MILLIS } from '@/lib/physics/constants'
 
-const HOUR_MILLIS = 3_600_000
 /** What was last known of a sheet stands in for the hour this long. [h] Ours, as long as modelled sheets are kept. */
 const LOOK_BACK_HOURS = 72
 /** A reading outweighs what the model grew since for a day. [h] Ours. */

@@ -5,10 +5,10 @@ import { listWaterSources } from '@/db/queries/water-sources'
 import type { RinkForJudging } from '@/db/queries/rinks'
 import type { Db } from '@/db/knex'
 import type { RinkAccess } from '@/lib/access/proofs'
+import { HOUR_MILLIS } from '@/lib/physics/constants'
 import type { EntryInput } from '@/lib/schemas/log'
 import { WATER_DEFAULTS } from '@/lib/schemas/rink-choices'
 
-const HOUR_MILLIS = 3_600_000
 /** The model's set time is for the rink's usual layer; a film more makes no difference that anybody could see. [mm] Ours. */
 const SAME_LAYER_MM = 0.5
 /** The database keeps layers between these. [mm] */

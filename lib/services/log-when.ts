@@ -3,11 +3,10 @@ import { localMinuteOf, nightDateOf } from '@/lib/advice/night'
 import { seasonOf } from '@/lib/advice/season'
 import { addDays, instantOfLocal, localDateOf, zoneOffsetMinutes } from '@/lib/advice/zoned-time'
 import { InvalidInputError } from '@/lib/errors'
+import { DAY_MILLIS, MINUTE_MILLIS } from '@/lib/physics/constants'
 import type { When } from '@/lib/schemas/log'
 import type { WhichHour } from '@/lib/schemas/log-choices'
 
-const MINUTE_MILLIS = 60_000
-const DAY_MILLIS = 86_400_000
 /** Clocks of phones and servers differ by this much without anybody minding. [min] Ours. */
 const FUTURE_SLACK_MINUTES = 5
 

@@ -15,6 +15,7 @@ import type { RinkAccess } from '@/lib/access/proofs'
 import { requireRink } from '@/lib/access/require-rink'
 import type { ServiceContext } from '@/lib/context'
 import { ConflictError, InvalidInputError, NotFoundError } from '@/lib/errors'
+import { HOUR_MILLIS } from '@/lib/physics/constants'
 import type { AnswerSetInput, ChangeEntryInput, EntryId, WriteEntryInput } from '@/lib/schemas/log'
 import { changedSentence } from '@/lib/words/log'
 import { followLog, modelSheetAt } from './log-effects'
@@ -22,7 +23,6 @@ import { entryValues, saidForFlood } from './log-values'
 import { entryView, readerOf } from './log-view'
 import { firstAfter, happened } from './log-when'
 
-const HOUR_MILLIS = 3_600_000
 /** Without a time, what somebody found is taken as found now; not of a flood this old. [h] Ours. */
 const ANSWER_NOW_HOURS = 12
 

@@ -3,9 +3,9 @@ import { createHash } from 'node:crypto'
 import type { Db } from '@/db/knex'
 import { countHit } from '@/db/queries/rate-limits'
 import { RateLimitedError } from '@/lib/errors'
+import { HOUR_SECONDS } from '@/lib/physics/constants'
 
-const QUARTER_HOUR_SECONDS = 15 * 60
-const HOUR_SECONDS = 60 * 60
+const QUARTER_HOUR_SECONDS = HOUR_SECONDS / 4
 
 /** A household, a club or a test suite behind one address stays well below these; a guessing machine does not. */
 export const LIMITS = {

@@ -5,6 +5,7 @@ import { listDevices } from '@/db/queries/push-subscriptions'
 import { findMessageId, findTestState, type TestState } from '@/db/queries/test-messages'
 import type { ServiceContext } from '@/lib/context'
 import { NotFoundError } from '@/lib/errors'
+import { MINUTE_MILLIS } from '@/lib/physics/constants'
 import type { TestInput } from '@/lib/schemas/accounts'
 import { spend } from './rate-limits'
 
@@ -12,7 +13,7 @@ import { spend } from './rate-limits'
 export type Test = TestState
 
 /** A test that comes later than this confuses more than it says. */
-const LIFETIME_MILLIS = 10 * 60_000
+const LIFETIME_MILLIS = 10 * MINUTE_MILLIS
 
 /** @throws NotFoundError for a device that is not the viewer's; RateLimitedError after a dozen in an hour. */
 export async function sendTest(context: ServiceContext, { deviceId }: TestInput): Promise<{ messageId: string }> {

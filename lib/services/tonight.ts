@@ -12,6 +12,7 @@ import { nightBounds, tonightDate } from '@/lib/advice/night'
 import { summariseNight } from '@/lib/advice/night-summary'
 import type { ServiceContext } from '@/lib/context'
 import { NotFoundError } from '@/lib/errors'
+import { HOUR_MILLIS } from '@/lib/physics/constants'
 import type { TonightView } from '@/lib/schemas/tonight-view'
 import { daysAhead } from './days-ahead'
 import { forecastRead } from './forecast-read'
@@ -19,7 +20,7 @@ import { nightFrame } from './night-frame'
 import { judgeOwnPasses } from './own-passes'
 import { passesOf } from './tonight-passes'
 
-const MORNING_MILLIS = 3 * 3_600_000
+const MORNING_MILLIS = 3 * HOUR_MILLIS
 
 /** @throws NotFoundError when the viewer is no member of the rink. */
 export async function getTonight(context: ServiceContext, rinkId: string): Promise<TonightView> {

@@ -1,9 +1,9 @@
 // The weather of hours that are over, put together from the forecasts that knew them best.
 import { findNewestForecast, findOldestForecastSince } from '@/db/queries/forecasts'
 import type { Db } from '@/db/knex'
+import { HOUR_MILLIS } from '@/lib/physics/constants'
 import type { HourlyRecord } from '@/lib/physics/types'
 
-const HOUR_MILLIS = 3_600_000
 /** A forecast read so long after an hour still reaches back to it. [h] */
 const REACH_HOURS = 20
 

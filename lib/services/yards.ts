@@ -17,10 +17,10 @@ import type { RinkAccess } from '@/lib/access/proofs'
 import { MODEL_VERSION } from '@/lib/advice/judge'
 import { learnYard } from '@/lib/advice/yard/learn'
 import type { LearnedYard, YardReport } from '@/lib/advice/yard/types'
+import { DAY_MILLIS, HOUR_MILLIS, MINUTE_MILLIS } from '@/lib/physics/constants'
 import { weatherAsItCame } from './weather-as-it-came'
 import { isSameYard, priorOf } from './yard-in-use'
 
-const HOUR_MILLIS = 3_600_000
 /** The sheet's states are kept for three days, so an entry is looked at before. [h] */
 const FRESH_HOURS = 66
 /** A yard changes with its trees and boards: reports of one winter count. Ours. [d] */
@@ -47,7 +47,7 @@ export async function learnRinkYard(
   const before = await findYardEstimate(db, rink.id)
   const isNew = await keepReports(db, access, rink, now)
   if (!isNew && before && isSameYard(before.learned.prior, priorOf(rink))) return null
-  const reports = await listYardReports(db, access, new Date(now.getTime() - REPORTS_DAYS * 24 * HOUR_MILLIS))
+  const reports = await listYardReports(db, access, new Date(now.getTime() - REPORTS_DAYS * DAY_MILLIS))
   const { latitudeDeg, longitudeDeg } = rink
   const learned = learnYard({ latitudeDeg, longitudeDeg, prior: priorOf(rink), reports })
   const used = before?.learned ?? priorOf(rink)
@@ -107,7 +107,7 @@ async function reportOf(
 
 function layerKind({ outcome, updatedAt }: TellingEntry, seenAt: Date): 'set' | 'set_before' | 'wet' {
   if (outcome === 'wet') return 'wet'
-  return updatedAt.getTime() - seenAt.getTime() > NAMED_MINUTES * 60_000 ? 'set' : 'set_before'
+  return updatedAt.getTime() - seenAt.getTime() > NAMED_MINUTES * MINUTE_MILLIS ? 'set' : 'set_before'
 }
 
 function sheetOf(sheet: StoredSheet, rink: RinkForJudging): YardReport['sheet'] {

@@ -2,6 +2,7 @@
 import pRetry from 'p-retry'
 import { fetchWithLimit, OutboundError } from '@/lib/http/fetch-with-limit'
 import { logFailure } from '@/lib/log'
+import { HOUR_MILLIS } from '@/lib/physics/constants'
 import type { HourlyRecord } from '@/lib/physics/types'
 import { readBody } from './open-meteo/body'
 import { checkHours, toHours } from './open-meteo/hours'
@@ -11,7 +12,7 @@ import { ensembleUrl, FORECAST_UNITS, forecastUrl } from './open-meteo/request'
 import { WeatherError, type Forecast, type GridCell, type WeatherProvider } from './port'
 
 /** The service sends no expiry; after six hours two newer runs exist for every place, and tonight may have changed. */
-const FRESH_FOR_MS = 6 * 3_600_000
+const FRESH_FOR_MS = 6 * HOUR_MILLIS
 const BODY_CAP_BYTES = 5 * 1024 * 1024
 const ENSEMBLE_MODEL = 'ncep_gefs025'
 const TRIES = 3

@@ -1,10 +1,9 @@
 // A season in words: the headline of the log, and the sentences beside its charts.
 import { localDateOf } from '@/lib/advice/zoned-time'
+import { DAY_MILLIS } from '@/lib/physics/constants'
 import type { WordOptions } from './options'
 import { capitalised, countText, iceText } from './quantities'
 import { muchWaterText } from './log'
-
-const DAY_MILLIS = 86_400_000
 
 export interface SeasonFigures {
   floods: number

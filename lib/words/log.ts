@@ -2,14 +2,14 @@
 import { formatInTimeZone } from 'date-fns-tz'
 import { tonightDate } from '@/lib/advice/night'
 import { localDateOf, zoneOffsetMinutes } from '@/lib/advice/zoned-time'
+import { HOUR_MILLIS, MINUTE_MILLIS } from '@/lib/physics/constants'
 import type { EntryView, LogKind, Outcome } from '@/lib/schemas/log-choices'
 import { dayText } from './night-label'
 import type { WordOptions } from './options'
 import { capitalised, iceText, layerText, numberText, temperatureText, waterText } from './quantities'
 import { clockText } from './times'
 
-const HALF_DAY_MILLIS = 12 * 3_600_000
-const MINUTE_MILLIS = 60_000
+const HALF_DAY_MILLIS = 12 * HOUR_MILLIS
 /** Nobody stands by with a watch: found set this much after what was said still counts as kept. [min] Ours. */
 const GRACE_MINUTES = 15
 /** From here on cubic metres are read more easily. [L] */

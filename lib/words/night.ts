@@ -1,5 +1,6 @@
 // A night in sentences: the verdict, and how sure it is.
 import type { NightSummary } from '@/lib/advice/night-summary'
+import { MINUTE_MILLIS } from '@/lib/physics/constants'
 import type { WordOptions } from './options'
 import { capitalised, countText, durationText } from './quantities'
 import { reasonClause } from './reasons'
@@ -76,7 +77,7 @@ function lastPassText({ passes, lastSetBy, precipitation }: NightSummary, words:
 }
 
 function beforeText(setBy: string, precipitation: NightSummary['precipitation']): string {
-  const minutes = precipitation ? (Date.parse(precipitation.startsAt) - Date.parse(setBy)) / 60_000 : -1
+  const minutes = precipitation ? (Date.parse(precipitation.startsAt) - Date.parse(setBy)) / MINUTE_MILLIS : -1
   if (!precipitation || minutes < 0) return ''
   if (minutes < 90) return `, ${durationText(Math.floor(minutes / 10) * 10)} before ${precipitation.kind}`
   const hours = Math.floor(minutes / 60)

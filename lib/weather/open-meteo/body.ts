@@ -1,8 +1,7 @@
 // Reads a 200 body of Open-Meteo and refuses anything that is not a sound series of hours.
 import { z } from 'zod'
+import { HOUR_SECONDS } from '@/lib/physics/constants'
 import { WeatherError } from '../port'
-
-const HOUR_S = 3600
 
 const bodySchema = z.object({
   utc_offset_seconds: z.literal(0),
@@ -59,7 +58,7 @@ function checkTimes(times: number[], unit: string | undefined): void {
   if (unit !== 'unixtime') throw malformed(`time is in "${unit}" instead of "unixtime"`)
   times.forEach((time, index) => {
     const previous = times[index - 1]
-    if (time % HOUR_S !== 0 || (previous !== undefined && time !== previous + HOUR_S)) {
+    if (time % HOUR_SECONDS !== 0 || (previous !== undefined && time !== previous + HOUR_SECONDS)) {
       throw malformed(`hour ${index} does not follow the one before it`)
     }
   })

@@ -1,9 +1,9 @@
 // Turns the columns of a forecast into hourly records.
+import { HOUR_MILLIS } from '@/lib/physics/constants'
 import type { HourlyRecord } from '@/lib/physics/types'
 import { malformed, type HourlyBody } from './body'
 import type { ForecastVariable } from './request'
 
-const HOUR_S = 3600
 const SAME_HOUR = 0
 /** Open-Meteo labels sums, means and maxima by the END of their hour: those of hour t stand under the next label. */
 const NEXT_LABEL = 1
@@ -36,9 +36,9 @@ export function toHours(body: HourlyBody): HourlyRecord[] {
 export function checkHours(hours: HourlyRecord[], now: Date): void {
   const outlier = hours.find(({ airTemperatureC: t }) => t !== null && (t < -70 || t > 60))
   if (outlier) throw malformed(`${outlier.airTemperatureC} °C at ${outlier.time}`)
-  const ahead = hours.filter((hour) => Date.parse(hour.time) > now.getTime() - HOUR_S * 1000)
+  const ahead = hours.filter((hour) => Date.parse(hour.time) > now.getTime() - HOUR_MILLIS)
   const first = ahead[0]
-  if (!first || Date.parse(first.time) > now.getTime() + 2 * HOUR_S * 1000) {
+  if (!first || Date.parse(first.time) > now.getTime() + 2 * HOUR_MILLIS) {
     throw malformed(`first hour ahead is ${first?.time ?? 'missing'} at ${now.toISOString()}`)
   }
   const usable = ahead.filter((hour) => hour.airTemperatureC !== null && hour.windSpeedMps !== null).length

@@ -1,6 +1,7 @@
 // Says what an answer of Open-Meteo other than a forecast means, and when asking again makes sense.
 import { z } from 'zod'
 import type { OutboundResponse } from '@/lib/http/fetch-with-limit'
+import { DAY_MILLIS, HOUR_MILLIS, MINUTE_MILLIS } from '@/lib/physics/constants'
 import { WeatherError } from '../port'
 
 const refusalSchema = z.object({ reason: z.string() })
@@ -23,10 +24,10 @@ export function refusalOf(response: OutboundResponse, now: Date): WeatherError |
  */
 export function retryAt(reason: string, now: Date): Date {
   const endOf = (windowMs: number) => new Date((Math.floor(now.getTime() / windowMs) + 1) * windowMs + 1000)
-  if (/^daily/i.test(reason)) return endOf(24 * 3_600_000)
-  if (/^hourly/i.test(reason)) return endOf(3_600_000)
+  if (/^daily/i.test(reason)) return endOf(DAY_MILLIS)
+  if (/^hourly/i.test(reason)) return endOf(HOUR_MILLIS)
   if (/concurrent/i.test(reason)) return new Date(now.getTime() + 1000 + Math.round(Math.random() * 4000))
-  return endOf(60_000)
+  return endOf(MINUTE_MILLIS)
 }
 
 function refusalOfContentType(contentType: string): WeatherError | null {

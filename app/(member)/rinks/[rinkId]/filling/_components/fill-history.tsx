@@ -1,4 +1,5 @@
 // What was done at this fill: times of running hose, and looks.
+import { DAY_MILLIS } from '@/lib/physics/constants'
 import type { FillLook, OpenFillView } from '@/lib/schemas/filling-view'
 import type { WordOptions } from '@/lib/words/options'
 import { iceText, waterText } from '@/lib/words/quantities'
@@ -55,8 +56,6 @@ function hoseLines({ sessions, startedBy }: OpenFillView, reader: WordOptions, m
     note: index === 0 && startedBy ? `Started by ${startedBy}` : undefined,
   }))
 }
-
-const DAY_MILLIS = 86_400_000
 
 /** With its weekday once it is not within the day any more. */
 function momentText(at: string, now: string, reader: WordOptions): string {

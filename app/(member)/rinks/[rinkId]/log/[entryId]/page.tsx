@@ -5,6 +5,7 @@ import { RinkFrame } from '@/components/rinks/rink-frame'
 import { Notice } from '@/components/ui/notice'
 import { pageContext } from '@/lib/auth/request-context'
 import { orNotFound } from '@/lib/http/or-not-found'
+import { HOUR_MILLIS } from '@/lib/physics/constants'
 import { entrySchema } from '@/lib/schemas/log'
 import { getEntry, type EntryPage as EntryPageView } from '@/lib/services/log-book'
 import { entryFacts, entryRemark, entryTime, KIND_WORDS, nightHeading } from '@/lib/words/log'
@@ -16,7 +17,7 @@ import { RemoveForm } from './_components/remove-form'
 
 export const metadata: Metadata = { title: 'Log entry' }
 
-const HALF_DAY_MILLIS = 12 * 3_600_000
+const HALF_DAY_MILLIS = 12 * HOUR_MILLIS
 
 export default async function EntryPage({ params }: PageProps<'/rinks/[rinkId]/log/[entryId]'>) {
   const view = await orNotFound(readEntry(await params))

@@ -1,12 +1,11 @@
 // The log, night by night: what was done, what was said of it, and what came.
 import type { Route } from 'next'
 import Link from 'next/link'
+import { DAY_MILLIS } from '@/lib/physics/constants'
 import type { EntryView } from '@/lib/schemas/log-choices'
 import type { LogView } from '@/lib/services/log-book'
 import { entryFacts, entryRemark, entryTime, floodResult, KIND_WORDS, nightHeading } from '@/lib/words/log'
 import { SetQuestion } from './set-question'
-
-const DAY_MILLIS = 24 * 3_600_000
 
 export function Nights({ view }: { view: LogView }) {
   const { nights, reader, readAt } = view

@@ -4,6 +4,7 @@ import { perturbRun } from '@/lib/advice/runs'
 import { AGREEMENT, PERSON } from '@/lib/advice/thresholds'
 import type { JudgeInput } from '@/lib/advice/types'
 import { addDays, instantOfLocal } from '@/lib/advice/zoned-time'
+import { DAY_MILLIS, HOUR_MILLIS } from '@/lib/physics/constants'
 import { prepareHours } from '@/lib/physics/prepare'
 import { shelterFactor } from '@/lib/physics/site'
 import type { HourlyRecord, PreparedHour } from '@/lib/physics/types'
@@ -17,7 +18,6 @@ import {
   type TrueFlood,
 } from './true-nights'
 
-const HOUR_MILLIS = 3_600_000
 const SPIN_UP_HOURS = 72
 const FIRST_HOUR = 17
 const LAST_HOUR = 23
@@ -131,7 +131,7 @@ export function followHourly(nights: readonly BenchNight[], degradedSeed: number
 }
 
 function adviceAt(night: BenchNight, nowMillis: number, degradedSeed: number | null): BenchChoice {
-  const seed = (degradedSeed ?? 0) * 7919 + Math.floor(night.noonMillis / 86_400_000)
+  const seed = (degradedSeed ?? 0) * 7919 + Math.floor(night.noonMillis / DAY_MILLIS)
   const hours = degradedSeed === null ? night.hours : perturbRun(night.hours, nowMillis, seed)
   const { windows } = judge(inputOf(night, hours, nowMillis), {
     runs: degradedSeed === null ? 0 : AGREEMENT.defaultRuns,

@@ -2,6 +2,7 @@
 import type { Knex } from 'knex'
 import { insertForecast } from '@/db/queries/forecasts'
 import { systemRinkAccess } from '@/lib/access/system'
+import { HOUR_MILLIS } from '@/lib/physics/constants'
 import type { HourlyRecord } from '@/lib/physics/types'
 import { slotOf } from '@/lib/services/forecasts'
 import { refreshOutlook } from '@/lib/services/outlooks'
@@ -24,14 +25,14 @@ export async function storeForecast(
   change?: (at: Date) => Partial<HourlyRecord>,
 ): Promise<void> {
   const slotAt = slotOf(now)
-  const firstAt = new Date(slotAt.getTime() - DAY_HOURS * 3_600_000)
+  const firstAt = new Date(slotAt.getTime() - DAY_HOURS * HOUR_MILLIS)
   await insertForecast(db, {
     cellId: cast.cellId,
     provider: 'invented',
     slotAt,
     issuedAt: null,
     fetchedAt: now,
-    expiresAt: new Date(now.getTime() + 6 * 3_600_000),
+    expiresAt: new Date(now.getTime() + 6 * HOUR_MILLIS),
     hours: hoursFrom(firstAt, FORECAST_HOURS, change),
     members: null,
     attribution: { text: 'Invented weather', url: 'https://weather.example', licence: 'none' },

@@ -1,7 +1,6 @@
 // Invented hours for tests: a cold clear night, and what can come of it. Times are UTC.
+import { HOUR_MILLIS } from '@/lib/physics/constants'
 import type { HourlyRecord } from '@/lib/physics/types'
-
-const HOUR_MILLIS = 3_600_000
 
 /** One cold, clear, dry hour. */
 function coldHour(time: string): HourlyRecord {

@@ -1,4 +1,5 @@
 // Weather that stands still, for tests that compare with a table or a closed form.
+import { HOUR_MILLIS } from '@/lib/physics/constants'
 import { dewPointFromHumidityC } from '@/lib/physics/humidity'
 import { prepareHours } from '@/lib/physics/prepare'
 import type { HourlyRecord, PreparedHour, Site } from '@/lib/physics/types'
@@ -16,7 +17,7 @@ const FIRST_HOUR_MILLIS = Date.UTC(2027, 0, 12, 22)
 export function steadyHours(count: number, weather: SteadyWeather): PreparedHour[] {
   const { relativeHumidity = 0.8, site, ...rest } = weather
   const records = Array.from({ length: count }, (_, index): HourlyRecord => ({
-    time: new Date(FIRST_HOUR_MILLIS + index * 3_600_000).toISOString(),
+    time: new Date(FIRST_HOUR_MILLIS + index * HOUR_MILLIS).toISOString(),
     dewPointC: dewPointFromHumidityC(weather.airTemperatureC, relativeHumidity),
     windSpeedMps: 2,
     windGustMps: null,

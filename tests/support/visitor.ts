@@ -4,13 +4,14 @@ import type { Knex } from 'knex'
 import { linkKey } from '@/lib/auth/account-links'
 import type { LinkPurpose } from '@/db/queries/account-links'
 import type { OpenContext } from '@/lib/context'
+import { MINUTE_MILLIS } from '@/lib/physics/constants'
 import { confirmAddress, signUp } from '@/lib/services/accounts'
 
 export const SECRET = 'a secret that only these tests use, long enough'
 export const NOW = new Date('2027-01-12T20:00:00Z')
 export const PASSWORD = 'twelve litres a minute'
 
-export const minutesLater = (minutes: number): Date => new Date(NOW.getTime() + minutes * 60_000)
+export const minutesLater = (minutes: number): Date => new Date(NOW.getTime() + minutes * MINUTE_MILLIS)
 export const newEmail = (): string => `anna-${randomUUID()}@nightsheet.example`
 
 /** A visitor from an address of their own, so that tests do not use up each other's limits. */

@@ -2,12 +2,12 @@
 import { normalFrom, seededUniform } from '@/lib/advice/random'
 import { expectedIn } from '@/lib/advice/yard/expected'
 import type { LayerReport, Yard } from '@/lib/advice/yard/types'
+import { DAY_MILLIS, HOUR_MILLIS, MINUTE_MILLIS } from '@/lib/physics/constants'
 import { prepareHours } from '@/lib/physics/prepare'
 import type { HourlyRecord } from '@/lib/physics/types'
 import { JOKIOINEN_SITE, readJokioinen } from './measured-winters'
 import { carryPlainSheet, floodOnPlainSheet, plainSheet } from './true-nights'
 
-const HOUR_MILLIS = 3_600_000
 /** The sheet is known at noon and poured on at 18:00 UTC, 20:00 by the rink's clock. */
 const HOURS_BEFORE = 6
 const HOURS_AFTER = 24
@@ -23,7 +23,7 @@ export function measuredNights(fromAt: Date, toAt: Date): HourlyRecord[][] {
   const records = readJokioinen()
   const indexAt = new Map(records.map((record, index) => [Date.parse(record.time), index]))
   const nights: HourlyRecord[][] = []
-  for (let noon = fromAt.getTime(); noon <= toAt.getTime(); noon += 24 * HOUR_MILLIS) {
+  for (let noon = fromAt.getTime(); noon <= toAt.getTime(); noon += DAY_MILLIS) {
     const first = indexAt.get(noon)
     const last = indexAt.get(noon + (HOURS_BEFORE + HOURS_AFTER - 1) * HOUR_MILLIS)
     if (first === undefined || last !== first + HOURS_BEFORE + HOURS_AFTER - 1) continue
@@ -55,7 +55,7 @@ export function yardNights(nights: readonly HourlyRecord[][], yard: Yard, seed: 
       hours: records,
       sheet: { thicknessMm: THICKNESS_MM, temperatureC: sheetC, snowCoverCm: 0, base: 'liner' },
       poured: [{ at: pouredAt, ...LAYER }],
-      at: new Date(Date.parse(pouredAt) + saidMinutes * 60_000).toISOString(),
+      at: new Date(Date.parse(pouredAt) + saidMinutes * MINUTE_MILLIS).toISOString(),
     }
     return [{ report, trueMinutes }]
   })

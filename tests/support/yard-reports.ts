@@ -1,14 +1,12 @@
 // Reports from invented yards: what a keeper would write down of floods that plain explicit columns say the truth about.
 import { normalFrom, seededUniform } from '@/lib/advice/random'
 import type { LayerReport, Yard } from '@/lib/advice/yard/types'
+import { DAY_MILLIS, MINUTE_MILLIS } from '@/lib/physics/constants'
 import { groundHeatWm2 } from '@/lib/physics/ground'
 import { prepareHours } from '@/lib/physics/prepare'
 import type { HourlyRecord } from '@/lib/physics/types'
 import { explicitMinutesToSet } from './explicit-column'
 import { randomNight, seeded } from './random-weather'
-
-const MINUTE_MILLIS = 60_000
-const DAY_MILLIS = 86_400_000
 
 export const PLACE = { latitudeDeg: 46, longitudeDeg: -75 }
 /** As most keepers set it. */

@@ -2,6 +2,7 @@
 import { expect, test } from 'vitest'
 import { seedDemo } from '@/db/seeds/dev'
 import { PAST_NIGHTS } from '@/db/seeds/past-weather'
+import { MINUTE_MILLIS } from '@/lib/physics/constants'
 import { givenDatabase } from '@/tests/support/given-cast'
 
 const NOW = new Date('2027-01-20T17:00:00Z')
@@ -11,7 +12,7 @@ test('the record is kept and broken, and seeding again changes nothing', async (
   const record = () => database.db('night_outcomes').orderBy('night_date').select('night_date', 'said', 'result')
   await seedDemo(database.db, NOW)
   const first = await record()
-  await seedDemo(database.db, new Date(NOW.getTime() + 60_000))
+  await seedDemo(database.db, new Date(NOW.getTime() + MINUTE_MILLIS))
   expect(await record()).toEqual(first)
   // The last of them is settled by the worker's first round.
   expect(first).toHaveLength(PAST_NIGHTS - 1)

@@ -5,6 +5,7 @@ import { pruneExpired } from '@/db/queries/prune'
 import { putPushSubscription } from '@/db/queries/push-subscriptions'
 import { openSession } from '@/lib/auth/sessions'
 import type { ServiceContext } from '@/lib/context'
+import { DAY_MILLIS } from '@/lib/physics/constants'
 import { askForDeletion, keepAccount, listRinksThatGo } from '@/lib/services/account-deletion'
 import { exportAccount } from '@/lib/services/account-export'
 import { confirmAddress, signInWithPassword, signUp, takeNewAddress } from '@/lib/services/accounts'
@@ -23,7 +24,7 @@ beforeEach(async () => {
 })
 
 const as = (userId: string, now = NOW): ServiceContext => ({ db: database.db, now, viewer: { userId, isAdmin: false } })
-const daysLater = (days: number) => new Date(NOW.getTime() + days * 24 * 3_600_000)
+const daysLater = (days: number) => new Date(NOW.getTime() + days * DAY_MILLIS)
 const newestMessage = async (userId: string, kind: string) => {
   const row = await database.db('messages').where({ user_id: userId, kind }).orderBy('created_at', 'desc').first('id')
   return row && findMessageToDeliver(database.db, row.id)

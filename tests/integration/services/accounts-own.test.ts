@@ -6,6 +6,7 @@ import { sessionAdapter } from '@/lib/auth/adapter'
 import { SESSION_SECONDS } from '@/lib/auth/session-cookie'
 import { openSession } from '@/lib/auth/sessions'
 import type { ServiceContext } from '@/lib/context'
+import { DAY_MILLIS } from '@/lib/physics/constants'
 import { requestLink, signInWithLink, signInWithPassword, signUp } from '@/lib/services/accounts'
 import { changePassword, getAccount, saveAccount } from '@/lib/services/own-account'
 import { signOutEverywhere } from '@/lib/services/own-sessions'
@@ -122,7 +123,7 @@ test('pruning forgets what is over and nothing that still counts', async () => {
   const unconfirmed = newEmail()
   await signUp(visitor(database.db), { name: 'Gone', email: unconfirmed, password: PASSWORD })
   const { token } = await open(userId)
-  const inTwentyDays = new Date(NOW.getTime() + 20 * 24 * 60 * 60 * 1000)
+  const inTwentyDays = new Date(NOW.getTime() + 20 * DAY_MILLIS)
   await pruneExpired(database.db, inTwentyDays)
   expect(await read(token)).not.toBeNull()
   expect(await database.db('users').where({ email: unconfirmed })).toEqual([])

@@ -2,6 +2,7 @@
 import { describe, expect, test } from 'vitest'
 import { findMessageToDeliver } from '@/db/queries/deliveries'
 import { ConflictError, ForbiddenError, NotFoundError } from '@/lib/errors'
+import { HOUR_MILLIS } from '@/lib/physics/constants'
 import { checkFillSchema, resumeFillSchema, startFillSchema } from '@/lib/schemas/fills'
 import { getFilling } from '@/lib/services/filling'
 import { checkFill, finishFill, giveUpFill, pauseFill, resumeFill, startFill } from '@/lib/services/fills'
@@ -12,7 +13,7 @@ import { SETTINGS } from '@/tests/support/night-at-the-rink'
 
 // Sunday, 1 pm at the rink.
 const NOW = new Date('2027-01-03T18:00:00Z')
-const later = (hours: number) => new Date(NOW.getTime() + hours * 3_600_000)
+const later = (hours: number) => new Date(NOW.getTime() + hours * HOUR_MILLIS)
 
 const database = givenDatabase()
 // 10 m by 10 m, 10 cm of water, 25 L/min: 10,000 L in 6 h 40 min.

@@ -1,6 +1,7 @@
 // Checking off a pass: once, by those who may, for tonight; and what that does to the sheet and the plan.
 import { beforeEach, describe, expect, test } from 'vitest'
 import { ForbiddenError, InvalidInputError, NotFoundError } from '@/lib/errors'
+import { DAY_MILLIS } from '@/lib/physics/constants'
 import { checkOffPass, undoPass } from '@/lib/services/floods'
 import { getTonight } from '@/lib/services/tonight'
 import type { Actor } from '@/tests/support/cast'
@@ -75,7 +76,7 @@ describe('refusals', () => {
 
   test('taking back what was poured on a night that is over', async () => {
     await checkOffPass(cast.keeper.at(NOW), pass())
-    const tomorrow = new Date(NOW.getTime() + 24 * 3_600_000)
+    const tomorrow = new Date(NOW.getTime() + DAY_MILLIS)
     await expect(undoPass(cast.keeper.at(tomorrow), pass())).rejects.toThrow(InvalidInputError)
     expect(await floods()).toHaveLength(1)
   })

@@ -2,6 +2,7 @@
 import { afterAll, beforeAll, beforeEach, describe, expect, test } from 'vitest'
 import { findNewestForecast } from '@/db/queries/forecasts'
 import { startWeatherFake, type WeatherFake } from '@/fakes/weather/server'
+import { HOUR_MILLIS } from '@/lib/physics/constants'
 import { pullForecast, slotOf, startSweep } from '@/lib/services/forecasts'
 import { createOpenMeteo } from '@/lib/weather/open-meteo'
 import type { WeatherProvider } from '@/lib/weather/port'
@@ -12,7 +13,6 @@ import { setUpRink } from '@/lib/services/rinks'
 
 // The fake tells the weather of the present, so these tests run on the present.
 const NOW = new Date()
-const HOUR_MILLIS = 3_600_000
 const NEXT_HOUR = new Date(NOW.getTime() + HOUR_MILLIS)
 
 const database = givenDatabase()

@@ -2,6 +2,7 @@
 import { beforeEach, expect, test } from 'vitest'
 import { insertForecast } from '@/db/queries/forecasts'
 import { ConflictError, ForbiddenError, NotFoundError } from '@/lib/errors'
+import { HOUR_MILLIS } from '@/lib/physics/constants'
 import { startFillSchema } from '@/lib/schemas/fills'
 import { getFreezing, openForSkating } from '@/lib/services/freezing'
 import { finishFill, startFill } from '@/lib/services/fills'
@@ -12,7 +13,7 @@ import { typedEntry } from '@/tests/support/log-form'
 
 // The steady hours begin on Tuesday, 12 January 2027, at 17:00 UTC.
 const FILLED = new Date('2027-01-12T18:00:00Z')
-const later = (hours: number) => new Date(FILLED.getTime() + hours * 3_600_000)
+const later = (hours: number) => new Date(FILLED.getTime() + hours * HOUR_MILLIS)
 
 const database = givenDatabase()
 const cast = givenCast(database, later(-30), { phase: 'waiting', iceThickness: '' })

@@ -2,6 +2,7 @@
 import { beforeEach, describe, expect, test } from 'vitest'
 import { pruneExpired } from '@/db/queries/prune'
 import { keepModelledSheet } from '@/db/queries/sheet-states'
+import { MINUTE_MILLIS } from '@/lib/physics/constants'
 import { changeEntry, deleteEntry, writeEntry } from '@/lib/services/log'
 import { getLog } from '@/lib/services/log-book'
 import { givenCast, givenDatabase } from '@/tests/support/given-cast'
@@ -9,7 +10,7 @@ import { typedChange, typedEntry } from '@/tests/support/log-form'
 import { judgeNow, storeForecast } from '@/tests/support/night-at-the-rink'
 
 const NOW = new Date('2027-01-12T23:10:00Z')
-const later = (minutes: number) => new Date(NOW.getTime() + minutes * 60_000)
+const later = (minutes: number) => new Date(NOW.getTime() + minutes * MINUTE_MILLIS)
 const CREATED = new Date('2027-01-12T19:10:00Z')
 
 const database = givenDatabase()

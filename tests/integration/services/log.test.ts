@@ -2,6 +2,7 @@
 import { randomUUID } from 'node:crypto'
 import { describe, expect, test } from 'vitest'
 import { ConflictError, ForbiddenError, InvalidInputError, NotFoundError } from '@/lib/errors'
+import { MINUTE_MILLIS } from '@/lib/physics/constants'
 import { answerSetSchema } from '@/lib/schemas/log'
 import { answerSet, changeEntry, deleteEntry, restoreEntry, writeEntry } from '@/lib/services/log'
 import { getEntry, getLog } from '@/lib/services/log-book'
@@ -12,7 +13,7 @@ import { typedChange, typedEntry } from '@/tests/support/log-form'
 
 // Tuesday, 6:10 pm at the rink.
 const NOW = new Date('2027-01-12T23:10:00Z')
-const later = (minutes: number) => new Date(NOW.getTime() + minutes * 60_000)
+const later = (minutes: number) => new Date(NOW.getTime() + minutes * MINUTE_MILLIS)
 
 const database = givenDatabase()
 const cast = givenCast(database, new Date('2027-01-12T19:10:00Z'))

@@ -2,6 +2,7 @@
 import { randomUUID } from 'node:crypto'
 import { beforeEach, describe, expect, test } from 'vitest'
 import { ForbiddenError, InvalidInputError, NotFoundError } from '@/lib/errors'
+import { HOUR_MILLIS } from '@/lib/physics/constants'
 import { keepOwnPassesSchema, type KeepOwnPasses } from '@/lib/schemas/own-passes'
 import { checkOffPass } from '@/lib/services/floods'
 import { getMovableNight } from '@/lib/services/night-model'
@@ -91,7 +92,7 @@ test('a pass of the plan is checked off with its own water, and the rest of the 
 })
 
 test('warnings come with the plan: snow before it is set', async () => {
-  await storeForecast(database.db, cast, new Date(NOW.getTime() + 3_600_000), (at) =>
+  await storeForecast(database.db, cast, new Date(NOW.getTime() + HOUR_MILLIS), (at) =>
     at >= new Date('2027-01-13T02:00:00Z') ? SNOW : {},
   )
   await keepOwnPasses(cast.keeper.at(NOW), two())

@@ -3,19 +3,18 @@ import { expect, test } from 'vitest'
 import { insertForecast } from '@/db/queries/forecasts'
 import { findRinkForJudging } from '@/db/queries/rinks'
 import { systemRinkAccess } from '@/lib/access/system'
+import { DAY_MILLIS, HOUR_MILLIS } from '@/lib/physics/constants'
 import { shelterFactor } from '@/lib/physics/site'
 import { findYardInUse } from '@/lib/services/yard-in-use'
 import { learnRinkYard } from '@/lib/services/yards'
 import { givenCast, givenDatabase } from '@/tests/support/given-cast'
 import { hoursFrom } from '../../support/night-weather'
 
-const HOUR = 3_600_000
-const DAY = 24 * HOUR
 /** 7 pm in Toronto. */
 const FIRST_POUR = new Date('2027-01-06T00:00:00Z')
 
 const database = givenDatabase()
-const cast = givenCast(database, new Date(FIRST_POUR.getTime() - 6 * HOUR))
+const cast = givenCast(database, new Date(FIRST_POUR.getTime() - 6 * HOUR_MILLIS))
 
 const learn = (now: Date) => learnRinkYard({ db: database.db, now }, systemRinkAccess<'writeLog'>(cast.rinkId))
 const inUse = async () => {
@@ -25,8 +24,8 @@ const inUse = async () => {
 
 /** A windy night just below freezing, where wind says most, and a layer that was found set or wet. */
 async function night(index: number, found: { outcome: 'set' | 'wet'; afterHours: number }) {
-  const pouredAt = new Date(FIRST_POUR.getTime() + index * DAY)
-  const slotAt = new Date(pouredAt.getTime() + 15 * HOUR)
+  const pouredAt = new Date(FIRST_POUR.getTime() + index * DAY_MILLIS)
+  const slotAt = new Date(pouredAt.getTime() + 15 * HOUR_MILLIS)
   const windy = { airTemperatureC: -4, dewPointC: -7, windSpeedMps: 9, windGustMps: 13, cloudCover: 1 }
   await insertForecast(database.db, {
     cellId: cast.cellId,
@@ -34,34 +33,34 @@ async function night(index: number, found: { outcome: 'set' | 'wet'; afterHours:
     slotAt,
     issuedAt: null,
     fetchedAt: slotAt,
-    expiresAt: new Date(slotAt.getTime() + 6 * HOUR),
-    hours: hoursFrom(new Date(slotAt.getTime() - DAY), 72, () => windy),
+    expiresAt: new Date(slotAt.getTime() + 6 * HOUR_MILLIS),
+    hours: hoursFrom(new Date(slotAt.getTime() - DAY_MILLIS), 72, () => windy),
     members: null,
     attribution: { text: 'Invented weather', url: 'https://weather.example', licence: 'none' },
   })
   await database.db('sheet_states').insert({
     rink_id: cast.rinkId,
-    as_of: new Date(pouredAt.getTime() - HOUR),
+    as_of: new Date(pouredAt.getTime() - HOUR_MILLIS),
     origin: 'reported',
     thickness_mm: 90,
     temperature_c: -2,
     snow_cover_cm: 0,
   })
-  const outcomeAt = new Date(pouredAt.getTime() + found.afterHours * HOUR)
+  const outcomeAt = new Date(pouredAt.getTime() + found.afterHours * HOUR_MILLIS)
   await database.db('log_entries').insert({
     rink_id: cast.rinkId,
     kind: 'flood',
     happened_at: pouredAt,
-    night_date: new Date(pouredAt.getTime() - DAY).toISOString().slice(0, 10),
+    night_date: new Date(pouredAt.getTime() - DAY_MILLIS).toISOString().slice(0, 10),
     layer_mm: 3,
     water_l: 300,
     water_temperature_c: 6,
     outcome: found.outcome,
     outcome_at: outcomeAt,
     // The keeper names the time the next morning.
-    updated_at: new Date(pouredAt.getTime() + 12 * HOUR),
+    updated_at: new Date(pouredAt.getTime() + 12 * HOUR_MILLIS),
   })
-  return new Date(pouredAt.getTime() + 17 * HOUR)
+  return new Date(pouredAt.getTime() + 17 * HOUR_MILLIS)
 }
 
 test('without reports the yard is as its keeper set it', async () => {
@@ -79,7 +78,7 @@ test('layers that set far sooner in wind than a sheltered yard allows teach an o
   expect((await inUse()).shelter).toBe(learned!.shelter)
   expect((await version())!.settings_version).toBeGreaterThan(before!.settings_version)
   // Nothing new: nothing is done.
-  expect(await learn(new Date(FIRST_POUR.getTime() + 8 * DAY))).toBeNull()
+  expect(await learn(new Date(FIRST_POUR.getTime() + 8 * DAY_MILLIS))).toBeNull()
   // The keeper knows better: what was learned from other settings no longer counts.
   await database.db('rinks').where({ id: cast.rinkId }).update({ shelter: 'open' })
   expect((await inUse()).shelter).toBe(shelterFactor('open'))

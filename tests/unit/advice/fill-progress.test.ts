@@ -2,9 +2,10 @@
 import { describe, expect, test } from 'vitest'
 import { fillProgress, type FillProgressInput } from '@/lib/advice/fill-progress'
 import { levelOfReading } from '@/lib/advice/leak-warning'
+import { HOUR_MILLIS } from '@/lib/physics/constants'
 import { floorFromCorners } from '@/lib/physics/floor'
 
-const at = (hour: number) => new Date(Date.UTC(2026, 11, 20, 18) + hour * 3_600_000).toISOString()
+const at = (hour: number) => new Date(Date.UTC(2026, 11, 20, 18) + hour * HOUR_MILLIS).toISOString()
 /** 10 m square, falling 0.3 m along its length; the hose on at 18:00, three hours ago. */
 const WEDGE: FillProgressInput = {
   now: at(3),

@@ -4,11 +4,11 @@ import { judge } from '@/lib/advice/judge'
 import { judgePasses, type WantedPass } from '@/lib/advice/move-pass'
 import { packNight, unpackNight, type NightModel } from '@/lib/advice/night-model'
 import type { JudgeInput } from '@/lib/advice/types'
+import { MINUTE_MILLIS } from '@/lib/physics/constants'
 import { hourOf, inputOf, steadyHours, timeOf } from '../../support/advice-weather'
 import { randomNight } from '../../support/random-weather'
 
 const NIGHT = '2027-01-12'
-const MINUTE = 60_000
 
 /** As the browser gets it: through JSON. */
 const nightOf = (input: JudgeInput, nightDate = NIGHT) => {
@@ -24,7 +24,7 @@ const pass = (startsAt: string, given: Partial<WantedPass> = {}): WantedPass => 
 })
 const judgeOne = (input: JudgeInput, wanted: WantedPass) => judgePasses(nightOf(input), [wanted])[0] ?? null
 const minutesBetween = (from: string | null | undefined, to: string | null | undefined) =>
-  from && to ? (Date.parse(to) - Date.parse(from)) / MINUTE : Number.NaN
+  from && to ? (Date.parse(to) - Date.parse(from)) / MINUTE_MILLIS : Number.NaN
 
 describe('against the whole judgement', () => {
   test.each([1, 2, 3, 4, 5, 6, 7, 8])('a lone pass on the hour sets when the hour says, random night %i', (seed) => {

@@ -3,8 +3,8 @@ import { formatInTimeZone } from 'date-fns-tz'
 import { describe, expect, test } from 'vitest'
 import { nightBounds, nightDateOf, tonightDate } from '@/lib/advice/night'
 import { instantOfLocal, toIso, zoneOffsetMinutes, zoneOffsetsMinutes } from '@/lib/advice/zoned-time'
+import { HOUR_MILLIS, MINUTE_MILLIS } from '@/lib/physics/constants'
 
-const HOUR = 3_600_000
 const at = (iso: string) => new Date(iso)
 
 describe('the night an instant lies in', () => {
@@ -51,7 +51,7 @@ describe('the length of a night', () => {
     ['2027-11-06', 25],
   ])('the night of %s has %i hours', (night, hours) => {
     const { startsAt, endsAt } = nightBounds(night, 'America/Toronto')
-    expect((endsAt.getTime() - startsAt.getTime()) / HOUR).toBe(hours)
+    expect((endsAt.getTime() - startsAt.getTime()) / HOUR_MILLIS).toBe(hours)
   })
 
   test('nights follow each other without gap or overlap through a winter', () => {
@@ -88,17 +88,17 @@ describe('an instant from a wall clock', () => {
   test('offsets agree with an independent library through the hours around both changes', () => {
     for (const start of ['2027-03-14T00:00:00Z', '2027-11-07T00:00:00Z', '2027-03-28T00:00:00Z']) {
       for (let quarter = 0; quarter < 48; quarter += 1) {
-        const millis = Date.parse(start) + (quarter * HOUR) / 4
+        const millis = Date.parse(start) + (quarter * HOUR_MILLIS) / 4
         for (const zone of ['America/Toronto', 'Europe/Berlin', 'UTC', 'Asia/Kathmandu']) {
           const shown = formatInTimeZone(millis, zone, "yyyy-MM-dd'T'HH:mm:ss'Z'")
-          expect(millis + zoneOffsetMinutes(millis, zone) * 60_000).toBe(Date.parse(shown))
+          expect(millis + zoneOffsetMinutes(millis, zone) * MINUTE_MILLIS).toBe(Date.parse(shown))
         }
       }
     }
   })
 
   test('offsets of a run of hours across a change are each their own', () => {
-    const hours = Array.from({ length: 6 }, (_, hour) => Date.parse('2027-03-14T04:00:00Z') + hour * HOUR)
+    const hours = Array.from({ length: 6 }, (_, hour) => Date.parse('2027-03-14T04:00:00Z') + hour * HOUR_MILLIS)
     expect(zoneOffsetsMinutes(hours, 'America/Toronto')).toEqual([-300, -300, -300, -240, -240, -240])
     expect(zoneOffsetMinutes(Date.parse('2027-01-01T00:00:00Z'), 'America/St_Johns')).toBe(-210)
   })

@@ -2,11 +2,12 @@
 import { expect, test } from 'vitest'
 import { settleNight, type LayerReport, type SaidNight } from '@/lib/advice/settle-night'
 import type { AdviceWindow, ScoredHour } from '@/lib/advice/types'
+import { HOUR_MILLIS } from '@/lib/physics/constants'
 
 const ZONE = 'America/Toronto'
 /** 7 pm in Toronto. */
 const SEVEN_PM = Date.parse('2027-01-13T00:00:00Z')
-const at = (hoursAfterSeven: number) => new Date(SEVEN_PM + hoursAfterSeven * 3_600_000).toISOString()
+const at = (hoursAfterSeven: number) => new Date(SEVEN_PM + hoursAfterSeven * HOUR_MILLIS).toISOString()
 
 /** Sixteen hours from 7 pm; by default a layer sets in two hours and nothing falls. */
 function hoursOf(change: (index: number) => { setsAt?: string | null; precipitationMm?: number; isKnown?: boolean }) {

@@ -4,14 +4,14 @@ import { nightsAhead, type WeekSetting } from '@/lib/advice/week'
 import { estimatePasses } from '@/lib/advice/week-passes'
 import { summariseWeek } from '@/lib/advice/week-summary'
 import type { AdviceWindow, Judgement, ScoredHour } from '@/lib/advice/types'
+import { HOUR_MILLIS } from '@/lib/physics/constants'
 
-const HOUR = 3_600_000
 /** Noon in Toronto, 12 January 2027. */
 const NOON = Date.parse('2027-01-12T17:00:00Z')
-const at = (hours: number) => new Date(NOON + hours * HOUR).toISOString().replace('.000Z', 'Z')
+const at = (hours: number) => new Date(NOON + hours * HOUR_MILLIS).toISOString().replace('.000Z', 'Z')
 
 const SETTING: WeekSetting = {
-  now: new Date(NOON + 3 * HOUR),
+  now: new Date(NOON + 3 * HOUR_MILLIS),
   timeZone: 'America/Toronto',
   phase: 'skating',
   layerMm: 3,
@@ -199,7 +199,7 @@ test('nights in which the clocks change have 25 and 23 hours, each once', () => 
     const first = Date.parse(now)
     const hours = Array.from({ length: 72 }, (_, index) => ({
       ...hourAt(0),
-      time: new Date(first + index * HOUR).toISOString().replace('.000Z', 'Z'),
+      time: new Date(first + index * HOUR_MILLIS).toISOString().replace('.000Z', 'Z'),
     }))
     const nights = nightsAhead(judgementOf(hours), { ...SETTING, now: new Date(first) })
     return nights.find(({ nightDate }) => nightDate === date)

@@ -1,14 +1,14 @@
 // The strip's geometry, by hand: a frame of 26 hours' width makes every hour 10 units wide.
 import { describe, expect, test } from 'vitest'
 import { layOutNightStrip, type StripHour, type StripInput } from '@/components/charts/night-strip-layout'
+import { HOUR_MILLIS } from '@/lib/physics/constants'
 
-const HOUR = 3_600_000
 const NOON = Date.parse('2027-01-12T17:00:00Z')
 const frame = { width: 280, height: 200, left: 20, right: 20, plotTop: 40, plotBottom: 140 }
 
 function hour(index: number, change: Partial<StripHour> = {}): StripHour {
   return {
-    startsAt: NOON + index * HOUR,
+    startsAt: NOON + index * HOUR_MILLIS,
     verdict: 'hold',
     rate: 1,
     air: -5,
@@ -24,11 +24,11 @@ function night(change: Partial<StripInput> = {}): StripInput {
   return {
     frame,
     startsAt: NOON,
-    endsAt: NOON + 24 * HOUR,
+    endsAt: NOON + 24 * HOUR_MILLIS,
     hours,
     passes: [],
-    sunsetAt: NOON + 5 * HOUR,
-    sunriseAt: NOON + 19.5 * HOUR,
+    sunsetAt: NOON + 5 * HOUR_MILLIS,
+    sunriseAt: NOON + 19.5 * HOUR_MILLIS,
     now: null,
     leastRateTop: 1,
     ...change,
@@ -45,7 +45,7 @@ describe('across', () => {
 
   test.each([23, 25])('a night of %i hours fills the width', (count) => {
     const hours = Array.from({ length: count }, (_, index) => hour(index))
-    const { columns } = layOutNightStrip(night({ hours, endsAt: NOON + count * HOUR }))
+    const { columns } = layOutNightStrip(night({ hours, endsAt: NOON + count * HOUR_MILLIS }))
     const last = columns.at(-1)
     expect(columns).toHaveLength(count)
     expect((last?.x ?? 0) + (last?.width ?? 0)).toBeCloseTo(260, 1)
@@ -71,7 +71,7 @@ describe('across', () => {
   })
 
   test('a pass is a bracket from pour to set', () => {
-    const pass = { number: 1, startsAt: NOON + 8 * HOUR, setBy: NOON + 9.5 * HOUR, isPoured: false }
+    const pass = { number: 1, startsAt: NOON + 8 * HOUR_MILLIS, setBy: NOON + 9.5 * HOUR_MILLIS, isPoured: false }
     expect(layOutNightStrip(night({ passes: [pass] })).brackets).toEqual([
       { number: 1, x: 100, width: 15, isPoured: false },
     ])
@@ -84,7 +84,7 @@ describe('across', () => {
   })
 
   test('now is a line inside the night and nothing outside it', () => {
-    expect(layOutNightStrip(night({ now: NOON + 6 * HOUR })).nowX).toBe(80)
+    expect(layOutNightStrip(night({ now: NOON + 6 * HOUR_MILLIS })).nowX).toBe(80)
     expect(layOutNightStrip(night({ now: NOON - 1 })).nowX).toBeNull()
   })
 })

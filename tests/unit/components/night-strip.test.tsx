@@ -4,12 +4,11 @@ import { renderToStaticMarkup } from 'react-dom/server'
 import { describe, expect, test } from 'vitest'
 import { NightStrip } from '@/components/rinks/night-strip'
 import type { StripSource } from '@/components/rinks/strip-input'
+import { HOUR_MILLIS } from '@/lib/physics/constants'
 import type { TonightView } from '@/lib/schemas/tonight-view'
 import { hourAt, isoAt, NOON, outlookOf, tonightView } from '../../fixtures/tonight-view'
 
-const HOUR = 3_600_000
-
-function draw(change: Partial<TonightView> = {}, now = NOON + 6.7 * HOUR): string {
+function draw(change: Partial<TonightView> = {}, now = NOON + 6.7 * HOUR_MILLIS): string {
   return renderToStaticMarkup(<NightStrip source={tonightView(change) as StripSource} now={now} />)
 }
 
@@ -37,7 +36,7 @@ describe.each([
 ])('the night on which clocks go $name', ({ startsAt, endsAt, hours: count, after }) => {
   const from = Date.parse(startsAt)
   const hours = Array.from({ length: count }, (_, index) =>
-    hourAt(index % 24, { time: new Date(from + index * HOUR).toISOString() }),
+    hourAt(index % 24, { time: new Date(from + index * HOUR_MILLIS).toISOString() }),
   )
   const night = { date: startsAt.slice(0, 10), startsAt, endsAt, sunsetAt: null, sunriseAt: null }
   const markup = draw({ night, outlook: outlookOf({ hours, passes: [] }) }, from)

@@ -1,8 +1,8 @@
 // Hour ticks on ordinary nights, on nights that change the clocks and in zones off by half an hour; amounts; collisions.
 import { describe, expect, test } from 'vitest'
 import { placeLabels, tickInstants, tickLabel, wetRuns } from '@/components/charts/strip-labels'
+import { HOUR_MILLIS } from '@/lib/physics/constants'
 
-const HOUR = 3_600_000
 const at = (iso: string) => Date.parse(iso)
 
 describe('hour ticks', () => {
@@ -26,14 +26,14 @@ describe('hour ticks', () => {
     const ticks = tickInstants(at('2027-03-13T17:00:00Z'), at('2027-03-14T16:00:00Z'), 'America/Toronto')
     const [midnight, three] = [ticks.find((t) => t.localHour === 0), ticks.find((t) => t.localHour === 3)]
     expect(ticks).toHaveLength(9)
-    expect(((three?.at ?? 0) - (midnight?.at ?? 0)) / HOUR).toBe(2)
+    expect(((three?.at ?? 0) - (midnight?.at ?? 0)) / HOUR_MILLIS).toBe(2)
   })
 
   test('a night of 25 hours has 3 am four hours after midnight', () => {
     const ticks = tickInstants(at('2027-11-06T16:00:00Z'), at('2027-11-07T17:00:00Z'), 'America/Toronto')
     const [midnight, three] = [ticks.find((t) => t.localHour === 0), ticks.find((t) => t.localHour === 3)]
     expect(ticks).toHaveLength(9)
-    expect(((three?.at ?? 0) - (midnight?.at ?? 0)) / HOUR).toBe(4)
+    expect(((three?.at ?? 0) - (midnight?.at ?? 0)) / HOUR_MILLIS).toBe(4)
   })
 
   test("St. John's, three and a half hours behind, ticks on its own hours", () => {
@@ -50,7 +50,7 @@ describe('hour ticks', () => {
 test('snow with one dry hour between is one run with one amount', () => {
   const start = at('2027-01-13T04:00:00Z')
   const hours = [0.4, 0, 0.6, 0, 0, 1].map((snowCm, index) => ({
-    startsAt: start + index * HOUR,
+    startsAt: start + index * HOUR_MILLIS,
     verdict: 'hold' as const,
     rate: 1,
     air: -3,
@@ -58,9 +58,9 @@ test('snow with one dry hour between is one run with one amount', () => {
     rainMm: 0,
     isOpen: true,
   }))
-  const runs = wetRuns(hours, start, start + 24 * HOUR)
+  const runs = wetRuns(hours, start, start + 24 * HOUR_MILLIS)
   expect(runs.map((run) => run.snowCm)).toEqual([1, 1])
-  expect(runs[0]).toMatchObject({ startsAt: start, endsAt: start + 3 * HOUR })
+  expect(runs[0]).toMatchObject({ startsAt: start, endsAt: start + 3 * HOUR_MILLIS })
 })
 
 test('labels stay inside the width and never overlap', () => {

@@ -9,10 +9,11 @@ import { StatusNotices } from '@/app/(member)/rinks/[rinkId]/_components/status-
 import type { ReadTrouble } from '@/app/(member)/rinks/[rinkId]/_components/use-tonight'
 import { Verdict } from '@/app/(member)/rinks/[rinkId]/_components/verdict'
 import { ageText, nightLabel, readerOf } from '@/components/rinks/reader'
+import { HOUR_MILLIS, MINUTE_MILLIS } from '@/lib/physics/constants'
 import type { PouredPassView, TonightView } from '@/lib/schemas/tonight-view'
 import { isoAt, NOON, passAt, summaryOf, tonightView } from '../../fixtures/tonight-view'
 
-const NOW = NOON + 6.7 * 3_600_000
+const NOW = NOON + 6.7 * HOUR_MILLIS
 const textOf = (markup: string) => markup.replace(/<[^>]+>/g, '').replaceAll('\u00a0', ' ')
 
 describe('navigation', () => {
@@ -57,7 +58,7 @@ describe('a state that may be old', () => {
   })
 
   test('says as of when, and how long ago, without a connection', () => {
-    expect(say({}, 'offline', NOW + 3 * 3_600_000)).toContain('As of 6:42 pm, 3 hours ago. No connection')
+    expect(say({}, 'offline', NOW + 3 * HOUR_MILLIS)).toContain('As of 6:42 pm, 3 hours ago. No connection')
   })
 
   test('sends a signed-out person to sign-in', () => {
@@ -83,7 +84,7 @@ const POURED: PouredPassView = {
 
 describe('whether a poured pass is set', () => {
   const view = tonightView()
-  const at = (hours: number) => NOON + hours * 3_600_000
+  const at = (hours: number) => NOON + hours * HOUR_MILLIS
 
   test('keep off until it should be set; from then on the page asks', () => {
     expect(setWords(POURED, at(9), readerOf(view))).toBe('Keep off until 9:40 pm.')
@@ -138,6 +139,8 @@ test('nights are named by both their dates, ages by their largest unit', () => {
   expect(nightLabel('2027-01-12')).toBe('Tue 12 to Wed 13 January')
   expect(nightLabel('2027-01-31')).toBe('Sun 31 January to Mon 1 February')
   expect(
-    [0, 1, 59, 61, 60 * 47, 60 * 72].map((minutes) => ageText(new Date(NOW - minutes * 60_000).toISOString(), NOW)),
+    [0, 1, 59, 61, 60 * 47, 60 * 72].map((minutes) =>
+      ageText(new Date(NOW - minutes * MINUTE_MILLIS).toISOString(), NOW),
+    ),
   ).toEqual(['just now', '1 minute ago', '59 minutes ago', '1 hour ago', '47 hours ago', '3 days ago'])
 })

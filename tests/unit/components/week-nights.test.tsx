@@ -5,21 +5,21 @@ import { barScale, barsOf } from '@/app/(member)/rinks/[rinkId]/week/_components
 import { FillAhead } from '@/app/(member)/rinks/[rinkId]/week/_components/fill-ahead'
 import { NightList } from '@/app/(member)/rinks/[rinkId]/week/_components/night-list'
 import { WithoutNights } from '@/app/(member)/rinks/[rinkId]/week/_components/without-nights'
+import { DAY_MILLIS, HOUR_MILLIS } from '@/lib/physics/constants'
 import type { WeekNight, WeekView } from '@/lib/schemas/week-view'
 import { METRIC } from '@/lib/units'
 import { hourAt, WINDOW } from '../../fixtures/tonight-view'
 
 const READER = { timeZone: 'America/Toronto', units: METRIC, clock: '12', locale: 'en' } as const
-const DAY = 86_400_000
 
 /** Night `index` from Tuesday 12 January 2027, an hour a bar at 1 mm/h. */
 function nightAt(index: number, change: Partial<WeekNight> = {}): WeekNight {
-  const noon = Date.parse('2027-01-12T17:00:00Z') + index * DAY
+  const noon = Date.parse('2027-01-12T17:00:00Z') + index * DAY_MILLIS
   const iso = (millis: number) => new Date(millis).toISOString().replace('.000Z', 'Z')
   return {
     nightDate: iso(noon).slice(0, 10),
     startsAt: iso(noon),
-    endsAt: iso(noon + DAY),
+    endsAt: iso(noon + DAY_MILLIS),
     verdict: 'hold',
     isFar: index >= 3,
     window: null,
@@ -35,10 +35,10 @@ function nightAt(index: number, change: Partial<WeekNight> = {}): WeekNight {
     reason: { code: 'not_freezing', factor: 0, values: { airTemperatureC: 1 } },
     thaw: null,
     forecastEndsAt: null,
-    sunsetAt: iso(noon + 4.7 * 3_600_000),
-    sunriseAt: iso(noon + 19.7 * 3_600_000),
+    sunsetAt: iso(noon + 4.7 * HOUR_MILLIS),
+    sunriseAt: iso(noon + 19.7 * HOUR_MILLIS),
     bars: Array.from({ length: 24 }, (_, hour) => ({
-      startsAt: iso(noon + hour * 3_600_000),
+      startsAt: iso(noon + hour * HOUR_MILLIS),
       verdict: 'hold' as const,
       freezeRateMmPerH: 1,
     })),
@@ -119,7 +119,7 @@ test('an opened night brings its strip and its table, and its link closes it', (
 
 test('bars share one scale, hang under the line when it melts, and are cut where the frame ends', () => {
   const bars = [1, -0.5, -9, null].map((freezeRateMmPerH, hour) => ({
-    startsAt: new Date(Date.parse('2027-01-12T17:00:00Z') + hour * 3_600_000).toISOString(),
+    startsAt: new Date(Date.parse('2027-01-12T17:00:00Z') + hour * HOUR_MILLIS).toISOString(),
     verdict: 'hold' as const,
     freezeRateMmPerH,
   }))

@@ -3,6 +3,7 @@ import { describe, expect, test } from 'vitest'
 import { weatherAt, type Weather } from '@/fakes/weather/generate'
 import { snapToGrid, solarOffsetHours, tonightOf } from '@/fakes/weather/place'
 import { SCENARIOS, type ScenarioName } from '@/fakes/weather/scenarios'
+import { DAY_MILLIS } from '@/lib/physics/constants'
 
 const PLACES = [
   { name: 'Ontario', latitude: 45.9, longitude: -77.3 },
@@ -108,7 +109,7 @@ describe('every scenario', () => {
 
 test('tonight turns at six in the morning of the place', () => {
   const place = { longitude: -94.25 } // six hours behind
-  const day = Math.floor(Date.UTC(2027, 0, 12) / 86_400_000)
+  const day = Math.floor(Date.UTC(2027, 0, 12) / DAY_MILLIS)
   expect(tonightOf(Date.UTC(2027, 0, 12, 11, 59), place)).toBe(day - 1)
   expect(tonightOf(Date.UTC(2027, 0, 12, 12, 0), place)).toBe(day)
   expect(tonightOf(Date.UTC(2027, 0, 13, 5, 59), place)).toBe(day)

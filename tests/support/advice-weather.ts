@@ -1,11 +1,11 @@
 // Weather and rinks for tests of the advice: steady hours, and random but physical ones.
 import fc from 'fast-check'
 import type { JudgeInput } from '@/lib/advice/types'
+import { HOUR_MILLIS } from '@/lib/physics/constants'
 import type { HourlyRecord } from '@/lib/physics/types'
 
 /** Noon in Toronto. */
 export const FIRST_MILLIS = Date.parse('2027-01-12T17:00:00Z')
-export const HOUR_MILLIS = 3_600_000
 
 export const timeOf = (hour: number) => new Date(FIRST_MILLIS + hour * HOUR_MILLIS).toISOString().replace('.000Z', 'Z')
 

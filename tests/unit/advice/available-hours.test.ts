@@ -2,7 +2,8 @@
 import { describe, expect, test } from 'vitest'
 import { isAvailableAt, makeSetting } from '@/lib/advice/setting'
 import type { JudgeInput } from '@/lib/advice/types'
-import { HOUR_MILLIS, inputOf, steadyHours } from '../../support/advice-weather'
+import { HOUR_MILLIS } from '@/lib/physics/constants'
+import { inputOf, steadyHours } from '../../support/advice-weather'
 
 const FRIDAY = 5
 

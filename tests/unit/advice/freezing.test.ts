@@ -3,7 +3,8 @@ import { describe, expect, test } from 'vitest'
 import { freezingOutlook } from '@/lib/advice/freezing'
 import { growthUnderSnow } from '@/lib/advice/snow-on-thin-ice'
 import type { JudgeInput } from '@/lib/advice/types'
-import { hourOf, HOUR_MILLIS, inputOf, steadyHours } from '../../support/advice-weather'
+import { HOUR_MILLIS } from '@/lib/physics/constants'
+import { hourOf, inputOf, steadyHours } from '../../support/advice-weather'
 
 const sheet = { thicknessMm: 40, temperatureC: -3, snowCoverCm: 0 }
 const freezing = (hours: JudgeInput['hours'], given: Partial<JudgeInput> = {}): JudgeInput => {

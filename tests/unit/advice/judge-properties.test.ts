@@ -4,10 +4,11 @@ import { expect, test, vi } from 'vitest'
 import { judge } from '@/lib/advice/judge'
 import { summariseNight } from '@/lib/advice/night-summary'
 import type { JudgeInput, Judgement, ScoredHour } from '@/lib/advice/types'
+import { HOUR_MILLIS } from '@/lib/physics/constants'
 import { REASON_CODES, reasonText } from '@/lib/words/reasons'
 import { plainWords } from '@/lib/words/options'
 import { verdictSentence } from '@/lib/words/night'
-import { HOUR_MILLIS, inputOf, randomHours, randomInput } from '../../support/advice-weather'
+import { inputOf, randomHours, randomInput } from '../../support/advice-weather'
 
 // Sixty judgements of two days each, on a machine that may be busy.
 vi.setConfig({ testTimeout: 120_000 })

@@ -2,7 +2,8 @@
 import { describe, expect, test } from 'vitest'
 import { judge } from '@/lib/advice/judge'
 import type { Judgement, ScoredHour } from '@/lib/advice/types'
-import { hourOf, HOUR_MILLIS, inputOf, missingHour, steadyHours, timeOf } from '../../support/advice-weather'
+import { HOUR_MILLIS } from '@/lib/physics/constants'
+import { hourOf, inputOf, missingHour, steadyHours, timeOf } from '../../support/advice-weather'
 import { scoreExample } from '../../support/score-example'
 
 /** 8 pm local is the eighth hour after noon. */

@@ -4,8 +4,9 @@ import { describe, expect, test } from 'vitest'
 import { errorAt, FORECAST_ERROR } from '@/lib/advice/error-model'
 import { normalFrom, seededUniform } from '@/lib/advice/random'
 import { perturbRun } from '@/lib/advice/runs'
+import { HOUR_MILLIS } from '@/lib/physics/constants'
 import { prepareHours } from '@/lib/physics/prepare'
-import { FIRST_MILLIS, hourOf, HOUR_MILLIS, randomHours, steadyHours } from '../../support/advice-weather'
+import { FIRST_MILLIS, hourOf, randomHours, steadyHours } from '../../support/advice-weather'
 
 const site = { latitudeDeg: 45.9, longitudeDeg: -77.3, shelter: 0.6, skyView: 0.85 }
 

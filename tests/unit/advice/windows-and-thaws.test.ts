@@ -3,7 +3,8 @@ import { describe, expect, test } from 'vitest'
 import { findThaws, type ThawHour } from '@/lib/advice/thaw'
 import { findWindows } from '@/lib/advice/windows'
 import type { Verdict } from '@/lib/advice/types'
-import { FIRST_MILLIS, HOUR_MILLIS, timeOf } from '../../support/advice-weather'
+import { HOUR_MILLIS } from '@/lib/physics/constants'
+import { FIRST_MILLIS, timeOf } from '../../support/advice-weather'
 
 describe('windows', () => {
   const verdicts: Record<string, Verdict> = { f: 'flood', i: 'fill', h: 'hold' }

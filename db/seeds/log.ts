@@ -1,5 +1,6 @@
 // The demo's log, written through the services night by night. Fixed keys: repeating it changes nothing.
 import type { Db } from '@/db/knex'
+import { minuteOf } from '@/lib/advice/time-of-day'
 import { instantOfLocal } from '@/lib/advice/zoned-time'
 import { MINUTE_MILLIS } from '@/lib/physics/constants'
 import { writeEntrySchema } from '@/lib/schemas/log'
@@ -19,11 +20,6 @@ interface DemoRink {
 }
 
 const keyOf = (index: number) => `6a2f4a0e-3c1b-4a7c-9d55-${String(index).padStart(12, '0')}`
-
-function minuteOf(time: string): number {
-  const [hours = 0, minutes = 0] = time.split(':').map(Number)
-  return hours * 60 + minutes
-}
 
 /** Writes what was done in one night; each entry a minute after it happened, as from a phone. */
 export async function seedLogNight(rink: DemoRink, night: number, nightDate: string): Promise<void> {

@@ -1,11 +1,11 @@
 // Nights: a night runs from local noon to the next local noon and is named by the date it begins on.
 import { MINUTE_MILLIS } from '@/lib/physics/constants'
+import { MINUTES_A_DAY } from './time-of-day'
 import { addDays, instantOfLocal, localDateOf, zoneOffsetMinutes } from './zoned-time'
 
 const NOON_MINUTE = 12 * 60
 /** Up to this hour "tonight" is the night that is ending; from it on, the one to come. */
 const TONIGHT_TURNS_AT_MINUTE = 9 * 60
-const MINUTES_A_DAY = 24 * 60
 
 /**
  * Minutes on the rink's clock since local midnight.

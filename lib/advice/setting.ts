@@ -2,11 +2,10 @@
 import { DAY_MILLIS, HOUR_MILLIS, MINUTE_MILLIS } from '@/lib/physics/constants'
 import { RINK_WIND_RATIO, shelterFactor } from '@/lib/physics/site'
 import { NEEDED } from './thresholds'
+import { minuteOf, MINUTES_A_DAY } from './time-of-day'
 import { addDays, instantOfLocal, localDateOf, steadyOffsetMinutes, zoneOffsetsMinutes } from './zoned-time'
 import type { Site } from '@/lib/physics/types'
 import type { JudgeInput } from './types'
-
-const MINUTES_A_DAY = 1440
 
 /** Half-open, in minutes of the local day; `days` has bit 0 for Monday to bit 6 for Sunday. */
 interface MinuteRange {
@@ -106,10 +105,6 @@ function toRanges({ from, to, weekdays }: JudgeInput['available'][number]): Minu
     { from: start, to: MINUTES_A_DAY, days },
     { from: 0, to: end, days: daysAfter },
   ]
-}
-
-function minuteOf(clock: string): number {
-  return Number(clock.slice(0, 2)) * 60 + Number(clock.slice(3, 5))
 }
 
 /**

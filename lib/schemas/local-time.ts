@@ -1,8 +1,8 @@
 // Times of day, zones and dates as a rink's people type them.
 import { z } from 'zod'
+import { minuteOf, MINUTES_A_DAY } from '@/lib/advice/time-of-day'
 
 const CLOCK_TIME = /^([01][0-9]|2[0-3]):[0-5][0-9]$/
-const DAY_MINUTES = 24 * 60
 
 export const clockTimeSchema = z.string('Type a time, like 17:00.').regex(CLOCK_TIME, 'Type a time, like 17:00.')
 
@@ -29,24 +29,19 @@ export interface Hours {
   to: string
 }
 
-function minuteOf(time: string): number {
-  const [hours = 0, minutes = 0] = time.split(':').map(Number)
-  return hours * 60 + minutes
-}
-
 /** Hours that start on some days of the week only: Monday 1 to Sunday 7. */
 export interface WeekHours extends Hours {
   weekdays: number[]
 }
 
-const WEEK_MINUTES = 7 * DAY_MINUTES
+const WEEK_MINUTES = 7 * MINUTES_A_DAY
 export const EVERY_DAY = [1, 2, 3, 4, 5, 6, 7]
 
 /** Spans in minutes of the week; the last one may run over its end. */
 function weekSpans({ from, to, weekdays }: WeekHours): [start: number, end: number][] {
-  const length = (minuteOf(to) - minuteOf(from) + DAY_MINUTES) % DAY_MINUTES || DAY_MINUTES
+  const length = (minuteOf(to) - minuteOf(from) + MINUTES_A_DAY) % MINUTES_A_DAY || MINUTES_A_DAY
   return weekdays.map((day) => {
-    const start = (day - 1) * DAY_MINUTES + minuteOf(from)
+    const start = (day - 1) * MINUTES_A_DAY + minuteOf(from)
     return [start, start + length]
   })
 }

@@ -1,5 +1,6 @@
 // Writing into the log, changing it, answering for a flood: the fields as people type them, in their own units.
 import { z } from 'zod'
+import { MINUTES_A_DAY } from '@/lib/advice/time-of-day'
 import type { Units } from '@/lib/units'
 import { inUnitsOf, measured, noteSchema, orEmpty } from './fields'
 import { LOG_KINDS, OUTCOMES, WHICH_HOURS } from './log-choices'
@@ -10,7 +11,7 @@ import { rinkIdSchema } from './rinks'
 
 /** Most water that one entry may hold: a first fill of the largest rink we take, 100 m by 100 m, 10 cm deep. [L] Ours. */
 const MOST_WATER_L = 1_000_000
-const WEEK_MINUTES = 7 * 24 * 60
+const WEEK_MINUTES = 7 * MINUTES_A_DAY
 
 const entryIdSchema = z.uuid('That is no entry.')
 const versionSchema = z.coerce.number('Load this page again.').int().min(1)

@@ -1,6 +1,7 @@
 // When something happened, from what a person typed: minutes ago, or a time by the rink's clock.
 import { localMinuteOf, nightDateOf } from '@/lib/advice/night'
 import { seasonOf } from '@/lib/advice/season'
+import { minuteOf } from '@/lib/advice/time-of-day'
 import { addDays, instantOfLocal, localDateOf, zoneOffsetMinutes } from '@/lib/advice/zoned-time'
 import { InvalidInputError } from '@/lib/errors'
 import { DAY_MILLIS, MINUTE_MILLIS } from '@/lib/physics/constants'
@@ -17,11 +18,6 @@ interface Frame {
 
 const refuse = (field: string, message: string) =>
   new InvalidInputError('Some entries need another look.', { [field]: message })
-
-export function minuteOf(time: string): number {
-  const [hours = 0, minutes = 0] = time.split(':').map(Number)
-  return hours * 60 + minutes
-}
 
 /**
  * The instant at which the rink's clock showed a date and time.

@@ -12,6 +12,7 @@ import type { RinkAccess } from '@/lib/access/proofs'
 import { dueAlert, isMuted, type AlertKind } from '@/lib/advice/alert-due'
 import { nightBounds } from '@/lib/advice/night'
 import type { NightSummary } from '@/lib/advice/night-summary'
+import { minuteOf } from '@/lib/advice/time-of-day'
 import { instantOfLocal } from '@/lib/advice/zoned-time'
 import { channelsOf, type Channel } from './alert-channels'
 import { alertContent } from './alert-content'
@@ -57,8 +58,7 @@ export async function tellNight(night: NightToTell): Promise<void> {
 
 /** A person's time of day, on the date the night begins at. */
 function tellInstant(tellAt: string, nightDate: string, timeZone: string): Date {
-  const [hours = 0, minutes = 0] = tellAt.split(':').map(Number)
-  return new Date(instantOfLocal(nightDate, hours * 60 + minutes, timeZone))
+  return new Date(instantOfLocal(nightDate, minuteOf(tellAt), timeZone))
 }
 
 function dueTo(

@@ -19,7 +19,7 @@ const config: Config = {
         rust: 'var(--rust)',
         night: 'var(--night)',
       },
-      fontFamily: { sans: ['"IBM Plex Sans"', 'system-ui', 'sans-serif'] },
+      fontFamily: { sans: ['var(--font-plex-sans)', 'system-ui', 'sans-serif'] },
       fontSize: {
         small: ['13px', '1.45'],
         note: ['15px', '1.5'],

@@ -1,11 +1,12 @@
 'use client'
 // The frame of every page broke, so this one brings its own.
 import './globals.css'
+import { typeface } from './typeface'
 import { Button } from '@/components/ui/button'
 
 export default function GlobalError({ retry }: { retry: () => void }) {
   return (
-    <html lang="en">
+    <html lang="en" className={typeface.variable}>
       <body className="font-sans text-body">
         <title>Nightsheet</title>
         <main className="mx-auto max-w-page px-5 pt-7">

@@ -5,6 +5,7 @@ import type { ReactNode } from 'react'
 import { LightChanges } from '@/components/theme/light-changes'
 import { readPageTheme } from '@/lib/auth/page-theme'
 import './globals.css'
+import { typeface } from './typeface'
 
 export const metadata: Metadata = {
   title: { default: 'Nightsheet', template: '%s · Nightsheet' },
@@ -32,7 +33,7 @@ export default async function RootLayout({ children }: { children: ReactNode }) 
   await connection()
   const { theme, changes } = await readPageTheme()
   return (
-    <html lang="en" data-theme={theme}>
+    <html lang="en" data-theme={theme} className={typeface.variable}>
       <body className="font-sans text-body">
         {children}
         <LightChanges theme={theme} changes={changes} />

@@ -1,14 +1,18 @@
 // The present minute for the screen. The first render uses the server's reading, so that both sides draw the same.
 'use client'
-import { useEffect, useState } from 'react'
+import { startTransition, useEffect, useState } from 'react'
 
 const MINUTE = 60_000
+
+const minuteOf = (millis: number) => Math.floor(millis / MINUTE)
+const isLaterMinute = (before: number) => minuteOf(Date.now()) > minuteOf(before)
 
 /** @param readAt When the server read its clock, ISO text. */
 export function useClock(readAt: string): number {
   const [now, setNow] = useState(() => Date.parse(readAt))
   useEffect(() => {
-    const tick = () => setNow(Date.now())
+    // Within the same minute nothing reads differently; drawing anew gives way to a touch.
+    const tick = () => startTransition(() => setNow((before) => (isLaterMinute(before) ? Date.now() : before)))
     const first = setTimeout(tick, 0)
     const timer = setInterval(tick, MINUTE / 2)
     document.addEventListener('visibilitychange', tick)

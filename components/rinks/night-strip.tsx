@@ -1,6 +1,6 @@
 // The night strip of one rink: drawing, hours to open, legend, and the same numbers as a table.
 'use client'
-import { memo, useCallback, useMemo, useState } from 'react'
+import { memo, useCallback, useMemo, useState, type ComponentProps } from 'react'
 import { useMedia } from '../hooks/use-media'
 import { bracketsOf, layOutNightStrip } from '../charts/night-strip-layout'
 import { NightStripDrawing } from '../charts/night-strip-drawing'
@@ -15,7 +15,15 @@ import { stripWords } from './strip-words'
 
 const Legend = memo(NightLegend)
 const Table = memo(NightTable)
-const Hours = memo(StripHours)
+
+/** Hours that nobody sees need not answer a touch. */
+const ShownHours = memo(function ShownHours({
+  size,
+  ...hours
+}: { size: StripSize } & ComponentProps<typeof StripHours>) {
+  const isWide = useMedia(WIDE)
+  return isWide === (size === 'wide') ? <StripHours {...hours} /> : null
+})
 
 /** The same width as in SHOWN. */
 const WIDE = '(min-width: 720px)'
@@ -28,9 +36,6 @@ const SHOWN: Record<StripSize, string> = {
 /** The drawing and its hours; the table and the legend are drawn anew only when the hours change. */
 export function NightStrip({ source, now }: { source: StripSource; now: number }) {
   const [selected, setSelected] = useState<number | null>(null)
-  // Hours that nobody sees need not answer a touch.
-  const isWide = useMedia(WIDE)
-  const shown = isWide === null ? null : isWide ? 'wide' : 'narrow'
   const { night, rink, viewer } = source
   const { hours: scored } = source.outlook
   // Hours stay as they are while passes are moved: only the figures are laid out again then.
@@ -54,16 +59,15 @@ export function NightStrip({ source, now }: { source: StripSource; now: number }
             words={words}
             brackets={bracketsOf({ ...input, passes: stripPasses(source) })}
           />
-          {size === shown ? (
-            <Hours
-              layout={layout}
-              label="Hours of the night"
-              nameOf={nameOf}
-              selected={selected}
-              start={Math.max(present, 0)}
-              onSelect={setSelected}
-            />
-          ) : null}
+          <ShownHours
+            size={size}
+            layout={layout}
+            label="Hours of the night"
+            nameOf={nameOf}
+            selected={selected}
+            start={Math.max(present, 0)}
+            onSelect={setSelected}
+          />
         </div>
       ))}
       <HourPanel

@@ -23,13 +23,13 @@ export function useCheckOffs(view: TonightView, readAgain: () => Promise<unknown
   const { id: userId } = view.viewer
   const [waiting, setWaiting] = useState<KeptCheckOff[]>([])
   const [refused, setRefused] = useState<KeptCheckOff[]>([])
-  const [stuck, setStuck] = useState<ReadonlySet<string>>(new Set())
+  const [stuck, setStuck] = useState<readonly string[]>([])
   const sending = useRef(false)
 
   const readKept = useCallback(async () => {
     const kept = await listKept(userId, rinkId)
-    setWaiting(kept.filter((one) => !one.refused))
-    setRefused(kept.filter((one) => one.refused))
+    setWaiting(unlessBothEmpty(kept.filter((one) => !one.refused)))
+    setRefused(unlessBothEmpty(kept.filter((one) => one.refused)))
     return kept.filter((one) => !one.refused)
   }, [userId, rinkId])
 
@@ -39,7 +39,7 @@ export function useCheckOffs(view: TonightView, readAgain: () => Promise<unknown
     try {
       const left = await readKept()
       const outcomes = await Promise.all(left.map(async (one) => [one.entryKey, await send(one)] as const))
-      setStuck(new Set(outcomes.flatMap(([key, outcome]) => (outcome === 'stuck' ? [key] : []))))
+      setStuck(unlessBothEmpty(outcomes.flatMap(([key, outcome]) => (outcome === 'stuck' ? [key] : []))))
       // Read before it is taken off the list, so that it does not flicker.
       if (outcomes.some(([, outcome]) => outcome === 'sent')) await readAgain().catch(() => undefined)
       await readKept()
@@ -96,10 +96,15 @@ export function useCheckOffs(view: TonightView, readAgain: () => Promise<unknown
     shown: withWaiting(view, ofTonight),
     checkOff,
     takeBack,
-    isStuck: (passNumber) => ofTonight.some((one) => one.passNumber === passNumber && stuck.has(one.entryKey)),
+    isStuck: (passNumber) => ofTonight.some((one) => one.passNumber === passNumber && stuck.includes(one.entryKey)),
     refused,
     dismiss,
   }
+}
+
+/** Nothing kept before and nothing now, as on almost every visit: the page need not be drawn anew. */
+function unlessBothEmpty<T>(now: T[]): (before: readonly T[]) => T[] {
+  return (before) => (before.length + now.length === 0 ? (before as T[]) : now)
 }
 
 function withWaiting(view: TonightView, waiting: readonly KeptCheckOff[]): TonightView {

@@ -1,5 +1,5 @@
 // Fields for who somebody is: the address and the password, with the names that password managers know.
-import { MIN_PASSWORD_LENGTH } from '@/lib/schemas/accounts'
+import { MIN_PASSWORD_LENGTH } from '@/lib/schemas/password-length'
 import type { FormState } from '@/lib/http/form-state'
 import { TextField } from './field'
 

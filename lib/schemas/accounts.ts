@@ -1,9 +1,10 @@
 // What people type about themselves.
 import { z } from 'zod'
-import { THEMES } from './themes'
 import { UNIT_CHOICES, type UnitName } from '@/lib/units'
-
-export const MIN_PASSWORD_LENGTH = 10
+import { deviceIdSchema } from './alerts'
+import { lineOfText } from './fields'
+import { MIN_PASSWORD_LENGTH } from './password-length'
+import { THEMES } from './themes'
 
 const emailSchema = z
   .string('Type your e-mail address.')
@@ -13,25 +14,18 @@ const emailSchema = z
   .max(254, 'That address is too long.')
   .pipe(z.email('That does not look like an e-mail address: name@example.org'))
 
-const nameSchema = z
-  .string('Type your name.')
-  .trim()
-  .min(1, 'Type your name.')
-  .max(80, 'At most 80 characters.')
-  .regex(/^\P{Cc}*$/u, 'Letters, figures and spaces only.')
+const nameSchema = lineOfText('Type your name.', 80)
 
 /** Composed and decomposed accents are the same password, whatever keyboard typed it. */
-const givenPasswordSchema = z
-  .string('Type your password.')
-  .min(1, 'Type your password.')
-  .max(200, 'At most 200 characters.')
-  .transform((password) => password.normalize('NFC'))
+const passwordOf = (text: z.ZodString) =>
+  text.max(200, 'At most 200 characters.').transform((password) => password.normalize('NFC'))
 
-const newPasswordSchema = z
-  .string('Choose a password.')
-  .min(MIN_PASSWORD_LENGTH, `At least ${MIN_PASSWORD_LENGTH} characters.`)
-  .max(200, 'At most 200 characters.')
-  .transform((password) => password.normalize('NFC'))
+const givenPasswordSchema = passwordOf(z.string('Type your password.').min(1, 'Type your password.'))
+const newPasswordSchema = passwordOf(
+  z.string('Choose a password.').min(MIN_PASSWORD_LENGTH, `At least ${MIN_PASSWORD_LENGTH} characters.`),
+)
+/** Absent where there is none. Whoever finds a phone unlocked shall not take the account along. */
+const presentPasswordSchema = z.string().default('').pipe(passwordOf(z.string()))
 
 const keySchema = z.string('This link is not complete.').max(200, 'This link is not complete.')
 
@@ -49,11 +43,7 @@ export const linkSchema = z.object({ key: keySchema })
 export const newPasswordByLinkSchema = z.object({ key: keySchema, password: newPasswordSchema })
 export const passwordChangeSchema = z.object({
   // Absent for people who have only ever signed in by link.
-  currentPassword: z
-    .string()
-    .max(200, 'At most 200 characters.')
-    .default('')
-    .transform((password) => password.normalize('NFC')),
+  currentPassword: presentPasswordSchema,
   newPassword: newPasswordSchema,
 })
 const unitSchema = <Name extends UnitName>(name: Name) => z.enum(UNIT_CHOICES[name], 'Choose one of the units offered.')
@@ -72,16 +62,9 @@ export const accountSchema = z
   .transform(({ name, clock, theme, ...units }) => ({ name, clock, theme, units }))
 
 /** Without a device the test goes by mail. */
-export const testSchema = z.object({ deviceId: z.uuid('That is no device.').optional() })
-export const ownDeviceSchema = z.object({ deviceId: z.uuid('That is no device.') })
+export const testSchema = z.object({ deviceId: deviceIdSchema.optional() })
+export const ownDeviceSchema = z.object({ deviceId: deviceIdSchema })
 export const testIdSchema = z.uuid('That is no test.')
-
-/** The present password, where there is one: whoever finds a phone unlocked shall not take the account along. */
-const presentPasswordSchema = z
-  .string()
-  .max(200, 'At most 200 characters.')
-  .default('')
-  .transform((password) => password.normalize('NFC'))
 
 export const emailChangeSchema = z.object({ email: emailSchema, currentPassword: presentPasswordSchema })
 export const deletionSchema = z.object({ currentPassword: presentPasswordSchema })

@@ -1,6 +1,6 @@
 // How a person wants to be told, silence, and the addresses of their devices.
 import { z } from 'zod'
-import { tickSchema } from './fields'
+import { refuserIn, tickSchema } from './fields'
 import { clockTimeSchema, dateSchema } from './local-time'
 import { rinkIdSchema } from './rinks'
 
@@ -22,11 +22,12 @@ export const muteSchema = z
     if (until !== 'date') return { rinkId, until }
     const date = dateSchema.safeParse(throughDate)
     if (date.success) return { rinkId, until, throughDate: date.data }
-    context.addIssue({ code: 'custom', path: ['throughDate'], message: 'Choose the last silent night.' })
+    refuserIn(context)('throughDate', 'Choose the last silent night.')
     return z.NEVER
   })
 
-export const removeDeviceSchema = z.object({ rinkId: rinkIdSchema, deviceId: z.uuid('That is no device.') })
+export const deviceIdSchema = z.uuid('That is no device.')
+export const removeDeviceSchema = z.object({ rinkId: rinkIdSchema, deviceId: deviceIdSchema })
 
 const BASE64URL = /^[A-Za-z0-9_-]+={0,2}$/
 

@@ -3,15 +3,15 @@ import { z } from 'zod'
 import type { BuildInput } from '@/lib/advice/build-types'
 import type { FloorShape } from '@/lib/physics/floor'
 import { unitsOfCode, type Units } from '@/lib/units'
-import { measured, orEmpty, secondsSchema } from './fields'
-import { fitsMeasure, parseNumber, rangeMessage } from './measures'
+import { measured, orEmpty, passOn, refuserIn } from './fields'
+import { cornerFields, cornersOf } from './floor'
+import { fitsMeasure, parseNumber } from './measures'
 import { FLOOR_KINDS } from './rink-choices'
-import { bucketFlowLPerMin, rinkIdSchema } from './rinks'
+import { bucketFlowLPerMin, flowFields, noHoseMessage, rinkIdSchema } from './rinks'
 
 /** Points along one side of the grid, as the stored floor has them at most (floor.ts). */
 export const GRID = { least: 2, most: 20, usualRows: 4, usualColumns: 3 }
 
-export const CORNER_FIELDS = ['cornerNorth', 'cornerEast', 'cornerSouth', 'cornerWest'] as const
 export const pointField = (row: number, column: number) => `point-${row}-${column}`
 
 const LINER_STEP_FOOT_M = 0.3048
@@ -30,21 +30,15 @@ const hoursSchema = z.string().transform((text, context) => {
 })
 
 function planFields(units: Units) {
-  const drop = orEmpty(measured('drop', units))
   return {
     length: measured('side', units),
     width: measured('side', units),
     floorKind: z.enum(FLOOR_KINDS, 'Choose how you measured the floor.').default('level'),
-    cornerNorth: drop,
-    cornerEast: drop,
-    cornerSouth: drop,
-    cornerWest: drop,
+    ...cornerFields(units),
     rows: pointsSchema.default(GRID.usualRows),
     columns: pointsSchema.default(GRID.usualColumns),
     leastDepth: measured('leastDepth', units),
-    flow: orEmpty(measured('flow', units)),
-    bucketSize: orEmpty(measured('bucket', units)),
-    bucketSeconds: orEmpty(secondsSchema),
+    ...flowFields(units),
     hoursInOneGo: orEmpty(hoursSchema),
     waterPrice: orEmpty(measured('waterPrice', units)),
     boardHeight: orEmpty(measured('boardHeight', units)),
@@ -59,14 +53,14 @@ type Typed = Record<string, string | undefined>
 /** An empty point lies at the string. */
 function floorOfFields(fields: Fields, typed: Typed, units: Units, context: z.RefinementCtx): FloorShape | null {
   if (fields.floorKind === 'level') return null
-  if (fields.floorKind === 'corners') return { cornersM: CORNER_FIELDS.map((name) => (fields[name] ?? 0) / 1000) }
+  if (fields.floorKind === 'corners') return cornersOf(fields)
   const drop = orEmpty(measured('drop', units))
   const depthsM = Array.from({ length: fields.rows }, (_, row) =>
     Array.from({ length: fields.columns }, (_, column) => {
       const name = pointField(row + 1, column + 1)
       const depth = drop.safeParse(typed[name])
       if (!depth.success) {
-        context.addIssue({ code: 'custom', path: [name], message: depth.error.issues[0]?.message ?? '' })
+        refuserIn(context)(name, depth.error.issues[0]?.message ?? '')
       }
       return (depth.data ?? 0) / 1000
     }),
@@ -76,12 +70,10 @@ function floorOfFields(fields: Fields, typed: Typed, units: Units, context: z.Re
 
 /** A bucket that was timed counts before a flow that was typed. [L/min] */
 function flowOfFields({ flow, bucketSize, bucketSeconds }: Fields, units: Units, context: z.RefinementCtx): number {
-  const refuse = (field: string, message: string) => context.addIssue({ code: 'custom', path: [field], message })
+  const refuse = refuserIn(context)
   if (bucketSize !== undefined && bucketSeconds !== undefined) {
     const lPerMin = bucketFlowLPerMin(bucketSize, bucketSeconds)
-    if (!fitsMeasure('flow', lPerMin)) {
-      refuse('bucketSeconds', `That would be no hose we know. ${rangeMessage('flow', units)}`)
-    }
+    if (!fitsMeasure('flow', lPerMin)) refuse('bucketSeconds', noHoseMessage(units))
     return lPerMin
   }
   if (bucketSeconds !== undefined) refuse('bucketSize', 'How big is the bucket?')
@@ -114,7 +106,7 @@ export function buildPlanSchema(units: Units) {
   return z.record(z.string(), z.string().optional()).transform((typed, context): BuildInput => {
     const result = fields.safeParse(typed)
     if (result.success) return toInput(result.data, typed, units, context)
-    for (const { path, message } of result.error.issues) context.addIssue({ code: 'custom', path, message })
+    passOn(result.error, context)
     return z.NEVER
   })
 }
@@ -123,12 +115,12 @@ export function buildPlanSchema(units: Units) {
 export const keepPlanSchema = z.looseObject({ rinkId: rinkIdSchema, units: z.string() }).transform((typed, context) => {
   const units = unitsOfCode(typed.units)
   if (!units) {
-    context.addIssue({ code: 'custom', path: ['units'], message: 'Choose your units.' })
+    refuserIn(context)('units', 'Choose your units.')
     return z.NEVER
   }
   const result = buildPlanSchema(units).safeParse(typed)
   if (result.success) return { rinkId: typed.rinkId, plan: result.data }
-  for (const { path, message } of result.error.issues) context.addIssue({ code: 'custom', path, message })
+  passOn(result.error, context)
   return z.NEVER
 })
 

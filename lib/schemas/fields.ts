@@ -15,6 +15,15 @@ export function measured(measure: MeasureName, units: Units) {
   })
 }
 
+/** Lays faults at the fields that they belong to. */
+export const refuserIn = (context: z.RefinementCtx) => (field: string, message: string) =>
+  context.addIssue({ code: 'custom', path: [field], message })
+
+/** Hands on what another schema found, each fault at its field. */
+export function passOn({ issues }: z.ZodError, context: z.RefinementCtx): void {
+  for (const { path, message } of issues) context.addIssue({ code: 'custom', path, message })
+}
+
 /** The units that a form was typed in, by their code. */
 const unitsSchema = z.string('Choose your units.').transform((code, context) => {
   const units = unitsOfCode(code)
@@ -28,7 +37,7 @@ export function inUnitsOf<S extends z.ZodType>(schemaFor: (units: Units) => S) {
   return z.looseObject({ units: unitsSchema }).transform((fields, context): z.output<S> => {
     const result = schemaFor(fields.units).safeParse(fields)
     if (result.success) return result.data
-    for (const { path, message } of result.error.issues) context.addIssue({ code: 'custom', path, message })
+    passOn(result.error, context)
     return z.NEVER
   })
 }

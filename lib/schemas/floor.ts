@@ -2,6 +2,7 @@
 import { z } from 'zod'
 import type { FloorShape } from '@/lib/physics/floor'
 import type { Units } from '@/lib/units'
+import { measured, orEmpty } from './fields'
 import { fitsMeasure, parseNumber, rangeMessage, scaleOf } from './measures'
 
 /** A rink of a metre's fall is none; the database and the model take the same numbers. [m] */
@@ -21,6 +22,19 @@ function isGrid(rows: readonly (readonly number[])[]): boolean {
 /** What is stored, read; something that is no floor any more counts as level. */
 export function readFloor(stored: unknown): FloorShape | null {
   return floorShapeSchema.nullable().catch(null).parse(stored)
+}
+
+/** In the order in which corners are stored. */
+export const CORNER_FIELDS = ['cornerNorth', 'cornerEast', 'cornerSouth', 'cornerWest'] as const
+
+/** How far each corner lies below the string; an empty one lies at it. [mm] */
+export function cornerFields(units: Units) {
+  const drop = orEmpty(measured('drop', units))
+  return { cornerNorth: drop, cornerEast: drop, cornerSouth: drop, cornerWest: drop }
+}
+
+export function cornersOf(fields: z.output<z.ZodObject<ReturnType<typeof cornerFields>>>): { cornersM: number[] } {
+  return { cornersM: CORNER_FIELDS.map((name) => (fields[name] ?? 0) / 1000) }
 }
 
 /** Rows of numbers as typed, one row a line: a grid of depths [m], or what is wrong with it. */

@@ -1,5 +1,6 @@
 // The hours in which somebody can go out, as rows of a form: from, until, and a box for each weekday.
 import type { z } from 'zod'
+import { refuserIn } from './fields'
 import { clockTimeSchema, shareAMinute, type WeekHours } from './local-time'
 
 export const MOST_ROWS = 6
@@ -14,7 +15,7 @@ export const hoursField = {
 
 /** Rows that are filled in; an empty one is left out. Faults go to the field that they belong to. */
 export function readHours(fields: Record<string, unknown>, context: z.RefinementCtx): WeekHours[] {
-  const refuse = (field: string, message: string) => context.addIssue({ code: 'custom', path: [field], message })
+  const refuse = refuserIn(context)
   const rows: (WeekHours & { row: number })[] = []
   for (let row = 1; row <= MOST_ROWS; row++) {
     const [from, to] = [fields[hoursField.from(row)] || '', fields[hoursField.to(row)] || '']
@@ -34,7 +35,7 @@ function readRow(
   row: number,
   typed: { from: unknown; to: unknown },
   fields: Record<string, unknown>,
-  refuse: (field: string, message: string) => void,
+  refuse: ReturnType<typeof refuserIn>,
 ): WeekHours | undefined {
   const [from, to] = [clockTimeSchema.safeParse(typed.from), clockTimeSchema.safeParse(typed.to)]
   const weekdays = WEEKDAYS.filter((day) => fields[hoursField.day(row, day)] === 'on')

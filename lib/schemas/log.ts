@@ -2,7 +2,7 @@
 import { z } from 'zod'
 import { MINUTES_A_DAY } from '@/lib/advice/time-of-day'
 import type { Units } from '@/lib/units'
-import { inUnitsOf, measured, noteSchema, orEmpty } from './fields'
+import { inUnitsOf, measured, noteSchema, orEmpty, refuserIn } from './fields'
 import { LOG_KINDS, OUTCOMES, WHICH_HOURS } from './log-choices'
 import { clockTimeSchema, dateSchema } from './local-time'
 import { parseNumber, scaleOf } from './measures'
@@ -61,7 +61,7 @@ type Fields = z.output<z.ZodObject<ReturnType<typeof entryFields>>>
 
 /** What single fields cannot know: what each kind cannot do without. */
 function checkTogether(fields: Fields, context: z.RefinementCtx): void {
-  const refuse = (field: string, message: string) => context.addIssue({ code: 'custom', path: [field], message })
+  const refuse = refuserIn(context)
   if (fields.kind === 'fill' && fields.water === undefined) refuse('water', 'How much water went in?')
   if (fields.kind === 'reading' && fields.thickness === undefined) refuse('thickness', 'How thick is the ice?')
   if (fields.kind === 'note' && fields.note === '') refuse('note', 'Write what there is to note.')

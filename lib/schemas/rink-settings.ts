@@ -2,27 +2,32 @@
 import { z } from 'zod'
 import type { FloorShape } from '@/lib/physics/floor'
 import type { Units } from '@/lib/units'
-import { latitudeSchema, longitudeSchema } from './coordinates'
-import { inUnitsOf, lineOfText, measured, orEmpty } from './fields'
-import { parseGrid } from './floor'
+import { inUnitsOf, measured, orEmpty, refuserIn } from './fields'
+import { cornerFields, cornersOf, parseGrid } from './floor'
 import { readHours } from './hours'
 import { timeZoneSchema } from './local-time'
-import { FLOOR_KINDS, hasIce, SKIES, SKY_VIEWS } from './rink-choices'
-import { choiceFields, checkFlow, checkIce, maxPassesSchema, rinkIdSchema, waterFields, waterOf } from './rinks'
+import { FLOOR_KINDS, SKIES, SKY_VIEWS } from './rink-choices'
+import {
+  choiceFields,
+  checkFlow,
+  checkIce,
+  maxPassesSchema,
+  placeFields,
+  reportedIceMm,
+  rinkIdSchema,
+  waterFields,
+  waterOf,
+} from './rinks'
 
 export const changePlaceSchema = z
   .object({
     rinkId: rinkIdSchema,
-    name: lineOfText('Give the rink a name.', 60),
-    placeName: orEmpty(lineOfText('Name the place.', 120)),
-    latitude: latitudeSchema,
-    longitude: longitudeSchema,
+    ...placeFields,
     zoneBy: z.enum(['place', 'keeper'], 'Choose whose clock counts.').default('place'),
     timeZone: orEmpty(timeZoneSchema),
   })
   .superRefine(({ zoneBy, timeZone }, context) => {
-    if (zoneBy === 'keeper' && !timeZone)
-      context.addIssue({ code: 'custom', path: ['timeZone'], message: 'Choose the zone.' })
+    if (zoneBy === 'keeper' && !timeZone) refuserIn(context)('timeZone', 'Choose the zone.')
   })
   .transform(({ latitude, longitude, timeZone, zoneBy, ...rest }) => ({
     ...rest,
@@ -31,8 +36,6 @@ export const changePlaceSchema = z
     /** Undefined follows from the place. */
     timeZone: zoneBy === 'keeper' ? timeZone : undefined,
   }))
-
-const corner = (units: Units) => orEmpty(measured('drop', units))
 
 function yardFields(units: Units) {
   return {
@@ -44,10 +47,7 @@ function yardFields(units: Units) {
     /** A share that was set by hand stays as it is. */
     sky: z.enum([...SKIES, 'kept'], 'Choose how much sky the rink sees.'),
     floorKind: z.enum(FLOOR_KINDS, 'Choose how you measured the floor.').default('level'),
-    cornerNorth: corner(units),
-    cornerEast: corner(units),
-    cornerSouth: corner(units),
-    cornerWest: corner(units),
+    ...cornerFields(units),
     grid: z.string().max(4000, 'That is too long.').default(''),
     boardHeight: orEmpty(measured('boardHeight', units)),
   }
@@ -57,13 +57,10 @@ type YardFields = z.output<z.ZodObject<ReturnType<typeof yardFields>>>
 
 function floorFrom(fields: YardFields, units: Units, context: z.RefinementCtx): FloorShape | null {
   if (fields.floorKind === 'level') return null
-  if (fields.floorKind === 'corners') {
-    const { cornerNorth, cornerEast, cornerSouth, cornerWest } = fields
-    return { cornersM: [cornerNorth, cornerEast, cornerSouth, cornerWest].map((mm) => (mm ?? 0) / 1000) }
-  }
+  if (fields.floorKind === 'corners') return cornersOf(fields)
   const grid = parseGrid(fields.grid, units)
   if (!('fault' in grid)) return grid
-  context.addIssue({ code: 'custom', path: ['grid'], message: grid.fault })
+  refuserIn(context)('grid', grid.fault)
   return null
 }
 
@@ -88,12 +85,7 @@ export const changeIceSchema = inUnitsOf((units) =>
       iceThickness: orEmpty(measured('iceThickness', units)),
     })
     .superRefine(checkIce)
-    .transform(({ rinkId, phase, iceThickness }) => ({
-      rinkId,
-      phase,
-      /** As measured just now; undefined when nothing was said. */
-      iceThicknessMm: hasIce(phase) ? iceThickness : undefined,
-    })),
+    .transform(({ rinkId, ...ice }) => ({ rinkId, phase: ice.phase, iceThicknessMm: reportedIceMm(ice) })),
 )
 
 export const saveWaterSchema = inUnitsOf((units) =>

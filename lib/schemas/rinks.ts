@@ -3,7 +3,7 @@ import { z } from 'zod'
 import type { Units } from '@/lib/units'
 import { latitudeSchema, longitudeSchema } from './coordinates'
 import { clockTimeSchema, doOverlap, EVERY_DAY, timeZoneSchema } from './local-time'
-import { inUnitsOf, lineOfText, measured, orEmpty, secondsSchema, tickSchema } from './fields'
+import { inUnitsOf, lineOfText, measured, orEmpty, refuserIn, secondsSchema, tickSchema } from './fields'
 import { fitsMeasure, rangeMessage } from './measures'
 import {
   BASES,
@@ -34,14 +34,28 @@ export const maxPassesSchema = z.coerce
   .max(6, 'At most six.')
   .default(RINK_DEFAULTS.maxPasses)
 
+export const placeFields = {
+  name: lineOfText('Give the rink a name.', 60),
+  placeName: orEmpty(lineOfText('Name the place.', 120)),
+  latitude: latitudeSchema,
+  longitude: longitudeSchema,
+}
+
+/** What the hose gives: as known, or by the bucket test. */
+export function flowFields(units: Units) {
+  return {
+    flow: orEmpty(measured('flow', units)),
+    bucketSize: orEmpty(measured('bucket', units)),
+    bucketSeconds: orEmpty(secondsSchema),
+  }
+}
+
 /** One source of water, and what is poured from it. */
 export function waterFields(units: Units) {
   return {
     fillDepth: measured('fillDepth', units).default(RINK_DEFAULTS.fillDepthMm),
     waterKind: z.enum(WATER_KINDS, 'Choose where the water comes from.').default('cold-tap'),
-    flow: orEmpty(measured('flow', units)),
-    bucketSize: orEmpty(measured('bucket', units)),
-    bucketSeconds: orEmpty(secondsSchema),
+    ...flowFields(units),
     waterTemperature: orEmpty(measured('waterTemperature', units)),
     layer: measured('layer', units).default(RINK_DEFAULTS.layerMm),
   }
@@ -52,10 +66,7 @@ type WaterFields = z.output<z.ZodObject<ReturnType<typeof waterFields>>>
 function rinkFields(units: Units) {
   return {
     units: z.custom<Units>(),
-    name: lineOfText('Give the rink a name.', 60),
-    placeName: orEmpty(lineOfText('Name the place.', 120)),
-    latitude: latitudeSchema,
-    longitude: longitudeSchema,
+    ...placeFields,
     timeZone: orEmpty(timeZoneSchema),
     length: measured('side', units).default(RINK_DEFAULTS.sideM),
     width: measured('side', units).default(RINK_DEFAULTS.sideM),
@@ -77,9 +88,11 @@ export function bucketFlowLPerMin(litres: number, seconds: number): number {
   return (litres / seconds) * 60
 }
 
+export const noHoseMessage = (units: Units) => `That would be no hose we know. ${rangeMessage('flow', units)}`
+
 /** A bucket test needs both its numbers, and has to give a flow that a hose could have. */
 export function checkFlow(fields: WaterFields, units: Units, context: z.RefinementCtx): void {
-  const refuse = (field: string, message: string) => context.addIssue({ code: 'custom', path: [field], message })
+  const refuse = refuserIn(context)
   const { flow, bucketSize, bucketSeconds } = fields
   if (flow !== undefined) return
   if ((bucketSize === undefined) !== (bucketSeconds === undefined)) {
@@ -88,7 +101,7 @@ export function checkFlow(fields: WaterFields, units: Units, context: z.Refineme
       'The bucket test needs both: how big, and how long.',
     )
   } else if (!fitsMeasure('flow', flowOf(fields))) {
-    refuse('bucketSeconds', `That would be no hose we know. ${rangeMessage('flow', units)}`)
+    refuse('bucketSeconds', noHoseMessage(units))
   }
 }
 
@@ -98,12 +111,12 @@ export function checkIce(
   context: z.RefinementCtx,
 ): void {
   if (phase !== 'skating' || iceThickness !== 0) return
-  context.addIssue({ code: 'custom', path: ['iceThickness'], message: 'Ice that carries skaters has a thickness.' })
+  refuserIn(context)('iceThickness', 'Ice that carries skaters has a thickness.')
 }
 
 /** What single fields cannot know: the answers have to fit each other. */
 function checkTogether(fields: Fields & { units: Units }, context: z.RefinementCtx): void {
-  const refuse = (field: string, message: string) => context.addIssue({ code: 'custom', path: [field], message })
+  const refuse = refuserIn(context)
   const { moreHoursFrom, moreHoursTo } = fields
   checkFlow(fields, fields.units, context)
   if (fields.hoursFrom === fields.hoursTo) refuse('hoursTo', 'These hours end when they start.')
@@ -120,14 +133,15 @@ function checkTogether(fields: Fields & { units: Units }, context: z.RefinementC
   else if (doOverlap(first, second)) refuse('moreHoursFrom', 'These hours run into the ones above.')
 }
 
+/** As the keeper measured it just now; undefined when nothing was said. */
+export function reportedIceMm({ phase, iceThickness }: Pick<Fields, 'phase' | 'iceThickness'>): number | undefined {
+  return hasIce(phase) ? iceThickness : undefined
+}
+
 /** A rink that is new to us has told nothing of its ice yet. */
 function askForThickness({ phase, iceThickness }: Fields, context: z.RefinementCtx): void {
   if (phase !== 'skating' || iceThickness !== undefined) return
-  context.addIssue({
-    code: 'custom',
-    path: ['iceThickness'],
-    message: 'How thick is the ice? A drilled hole tells best.',
-  })
+  refuserIn(context)('iceThickness', 'How thick is the ice? A drilled hole tells best.')
 }
 
 /** Typed, else measured by bucket, else what such a source usually gives. [L/min] */
@@ -164,8 +178,7 @@ function toRink(fields: Fields) {
     shelter: fields.shelter,
     skyView: SKY_VIEWS[fields.sky],
     phase: fields.phase,
-    /** As the keeper reports it now; undefined when nothing was said. */
-    iceThicknessMm: hasIce(fields.phase) ? fields.iceThickness : undefined,
+    iceThicknessMm: reportedIceMm(fields),
     water: waterOf(fields),
     maxPasses: fields.maxPasses,
     available: [{ from: fields.hoursFrom, to: fields.hoursTo }, ...more].map((hours) => ({

@@ -3,7 +3,7 @@
 import { Button } from '@/components/ui/button'
 import { SelectField, TextField } from '@/components/ui/field'
 import { CORNER_NAMES } from '@/components/rinks/corner-names'
-import { CORNER_FIELDS } from '@/lib/schemas/build-plan'
+import { CORNER_FIELDS } from '@/lib/schemas/floor'
 import { unitOf } from '@/lib/schemas/measures'
 import type { Units } from '@/lib/units'
 import { BY_ADDRESS } from './by-address'

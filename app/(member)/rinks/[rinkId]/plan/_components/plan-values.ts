@@ -1,5 +1,6 @@
 // What the form of the plan starts from: what the rink has, in the person's units, or what stands in the address.
-import { CORNER_FIELDS, GRID, pointField } from '@/lib/schemas/build-plan'
+import { GRID, pointField } from '@/lib/schemas/build-plan'
+import { CORNER_FIELDS } from '@/lib/schemas/floor'
 import { typed } from '@/lib/schemas/measures'
 import type { PlanView } from '@/lib/services/build-plan'
 import type { Units } from '@/lib/units'

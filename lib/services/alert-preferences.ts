@@ -8,14 +8,14 @@ import {
 import { enqueueDecision } from '@/db/queries/jobs'
 import { getRinkHead } from '@/db/queries/rinks'
 import { listToldMessages, type ToldMessageRow } from '@/db/queries/told-messages'
-import { findAccount } from '@/db/queries/users'
 import { requireRink } from '@/lib/access/require-rink'
 import { tonightDate } from '@/lib/advice/night'
 import { addDays } from '@/lib/advice/zoned-time'
 import type { ServiceContext } from '@/lib/context'
-import { InvalidInputError, NotFoundError } from '@/lib/errors'
+import { InvalidInputError } from '@/lib/errors'
 import type { AlertPreferencesInput, MuteInput } from '@/lib/schemas/alerts'
 import type { Units } from '@/lib/units'
+import { getAccount } from './own-account'
 import { listOwnDevices, type Device } from './push-subscriptions'
 
 /** What the person was told, as the page lists it. */
@@ -41,8 +41,7 @@ const LONGEST_MUTE_DAYS = 366
 export async function getAlertSettings(context: ServiceContext, rinkId: string): Promise<AlertSettings> {
   const { db, now, viewer } = context
   const access = await requireRink(context, rinkId, 'receiveAlerts')
-  const account = await findAccount(db, viewer.userId)
-  if (!account) throw new NotFoundError('Account')
+  const account = await getAccount(context)
   const rink = await getRinkHead(db, access)
   return {
     rink,

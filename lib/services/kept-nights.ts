@@ -1,7 +1,6 @@
 // The open record: what was said of each night of a season, and what came of it.
 import { listNightOutcomes, type NightOutcome } from '@/db/queries/night-outcomes'
 import { getRinkHead } from '@/db/queries/rinks'
-import { findAccount } from '@/db/queries/users'
 import { findYardEstimate } from '@/db/queries/yards'
 import { requireRink } from '@/lib/access/require-rink'
 import { keptRates, type KeptRates } from '@/lib/advice/kept-rates'
@@ -9,8 +8,8 @@ import { nightDateOf } from '@/lib/advice/night'
 import { seasonOf, seasonOfYear, type Season } from '@/lib/advice/season'
 import type { LearnedYard } from '@/lib/advice/yard/types'
 import type { ServiceContext } from '@/lib/context'
-import { NotFoundError } from '@/lib/errors'
-import { wordsFor, type WordOptions } from '@/lib/words/options'
+import type { WordOptions } from '@/lib/words/options'
+import { readerOf } from './rink-and-reader'
 
 export interface KeptView {
   rink: { id: string; name: string; timeZone: string }
@@ -25,17 +24,17 @@ export interface KeptView {
 /** @param year The season that begins in that year; the present one by default. */
 export async function getKeptNights(context: ServiceContext, rinkId: string, year?: number): Promise<KeptView> {
   const access = await requireRink(context, rinkId, 'view')
-  const { db, now, viewer } = context
-  const [rink, account] = await Promise.all([getRinkHead(db, access), findAccount(db, viewer.userId)])
-  if (!account) throw new NotFoundError('Account')
+  const { db, now } = context
+  const rink = await getRinkHead(db, access)
   const season = year === undefined ? seasonOf(nightDateOf(now, rink.timeZone)) : seasonOfYear(year)
-  const [nights, estimate] = await Promise.all([
+  const [reader, nights, estimate] = await Promise.all([
+    readerOf(context, rink.timeZone),
     listNightOutcomes(db, access, season),
     findYardEstimate(db, access.rinkId),
   ])
   return {
     rink: { id: rinkId, ...rink },
-    reader: wordsFor(account, rink.timeZone),
+    reader,
     season,
     rates: keptRates(nights),
     nights,

@@ -18,7 +18,8 @@ import type { EntryView } from '@/lib/schemas/log-choices'
 import type { LogQuery } from '@/lib/schemas/log-query'
 import type { WordOptions } from '@/lib/words/options'
 import { chartsOf, skatingDays, type LogCharts } from './log-charts'
-import { entryView, readerOf } from './log-view'
+import { entryView } from './log-view'
+import { readerOf } from './rink-and-reader'
 
 /** Nights with entries on one page. Ours: what a person scrolls through on a phone. */
 const NIGHTS_A_PAGE = 7

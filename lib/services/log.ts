@@ -20,8 +20,9 @@ import type { AnswerSetInput, ChangeEntryInput, EntryId, WriteEntryInput } from 
 import { changedSentence } from '@/lib/words/log'
 import { followLog, modelSheetAt } from './log-effects'
 import { entryValues, saidForFlood } from './log-values'
-import { entryView, readerOf } from './log-view'
+import { entryView } from './log-view'
 import { firstAfter, happened } from './log-when'
+import { readerOf } from './rink-and-reader'
 
 /** Without a time, what somebody found is taken as found now; not of a flood this old. [h] Ours. */
 const ANSWER_NOW_HOURS = 12

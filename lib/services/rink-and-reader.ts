@@ -9,12 +9,18 @@ import type { ServiceContext } from '@/lib/context'
 import { NotFoundError } from '@/lib/errors'
 import { rinkIdSchema } from '@/lib/schemas/rinks'
 import { wordsFor, type WordOptions } from '@/lib/words/options'
+import { getAccount } from './own-account'
 
 export interface RinkAndReader {
   access: RinkAccess<'view'>
   rink: RinkForJudging
   reader: WordOptions
   role: Role
+}
+
+/** How the viewer reads figures and times; times are the rink's. */
+export async function readerOf(context: ServiceContext, timeZone: string): Promise<WordOptions> {
+  return wordsFor(await getAccount(context), timeZone)
 }
 
 /** @param rinkId As it stands in the address. @throws NotFoundError for strangers. */

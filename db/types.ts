@@ -93,6 +93,19 @@ export interface RinkMemberRow {
   joined_at: Date
 }
 
+export interface InvitationRow {
+  id: string
+  rink_id: string
+  email: string
+  role: Role
+  invited_by: string
+  created_at: Date
+  expires_at: Date
+  taken_at: Date | null
+  taken_by: string | null
+  withdrawn_at: Date | null
+}
+
 export interface WaterSourceRow {
   id: string
   rink_id: string
@@ -365,6 +378,7 @@ declare module 'knex/types/tables.js' {
     grid_cells: Table<GridCellRow>
     rinks: Table<RinkRow>
     rink_members: Table<RinkMemberRow>
+    invitations: Table<InvitationRow>
     water_sources: Table<WaterSourceRow>
     available_hours: Table<AvailableHoursRow>
     sheet_states: Table<SheetStateRow>

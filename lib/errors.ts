@@ -54,6 +54,7 @@ export class ConflictError extends AppError {
 
 export class RateLimitedError extends AppError {
   constructor(readonly retryAfterSeconds: number) {
-    super('rate_limited', 'Too many tries. Wait a few minutes and try again.')
+    const hours = Math.ceil(retryAfterSeconds / 3600)
+    super('rate_limited', `Too many tries. Wait ${hours > 1 ? `${hours} hours` : 'a few minutes'} and try again.`)
   }
 }

@@ -48,7 +48,12 @@ export async function readAccountForExport(db: Db, userId: string): Promise<Reco
     .orderBy('created_at')
     // A link's id opens nothing, but it is nothing to read either.
     .select(['kind', 'channel', 'night_date', 'state', 'created_at', 'settled_at', db.raw(`content->'words' as words`)])
-  return { account, devices, sessions, messages, rinks: await rinksOf(db, userId) }
+  const invitations = await db('invitations as i')
+    .join('rinks as r', 'r.id', 'i.rink_id')
+    .where({ 'i.invited_by': userId })
+    .orderBy('i.created_at')
+    .select('r.name as rink', 'i.email', 'i.role', 'i.created_at', 'i.expires_at', 'i.taken_at', 'i.withdrawn_at')
+  return { account, devices, sessions, messages, invitations, rinks: await rinksOf(db, userId) }
 }
 
 function readable(row: Record<string, unknown>): Record<string, unknown> {

@@ -14,7 +14,7 @@ export interface MessageToDeliver {
   email: string
   /** The person was promised newer news of the same night on the same channel. */
   isOvertaken: boolean
-  /** The person has muted the night, switched the channel off or left the rink since. */
+  /** The person has muted the night, switched the channel off or left the rink since; an invitation stands no more. */
   isUnwanted: boolean
   attempts: number
 }
@@ -24,6 +24,7 @@ export async function findMessageToDeliver(db: Db, messageId: string): Promise<M
   const message = await db('messages as m')
     .join('users as u', 'u.id', 'm.user_id')
     .leftJoin('account_links as l', db.raw(`l.id::text = m.content->>'linkId'`))
+    .leftJoin('invitations as i', db.raw(`i.id = (m.content->>'invitationId')::uuid`))
     .where({ 'm.id': messageId, 'm.state': 'promised' })
     .select({
       id: 'm.id',
@@ -34,8 +35,9 @@ export async function findMessageToDeliver(db: Db, messageId: string): Promise<M
       content: 'm.content',
       expiresAt: 'm.expires_at',
       createdAt: 'm.created_at',
-      // A new address is confirmed by whoever reads its mail; of a changed one the old address hears.
-      email: db.raw(`coalesce(m.content->>'oldEmail', l.new_email, u.email)`),
+      // A new address is confirmed by whoever reads its mail; of a changed one the old address hears; who is invited may
+      // have no account.
+      email: db.raw(`coalesce(m.content->>'oldEmail', i.email, l.new_email, u.email)`),
     })
     .select(
       db.raw(
@@ -52,7 +54,10 @@ export async function findMessageToDeliver(db: Db, messageId: string): Promise<M
                       where p.rink_id = m.rink_id and p.user_id = m.user_id
                         and (p.muted_through >= m.night_date
                              or not case m.channel when 'email' then p.wants_email else p.wants_push end))
-         ) as "isUnwanted"`,
+         )
+         -- Of an invitation that went with its rink, no mail must go to who sent it.
+         or m.kind = 'rink-invitation' and (i.id is null or i.taken_at is not null or i.withdrawn_at is not null)
+           as "isUnwanted"`,
       ),
     )
     .first<Omit<MessageToDeliver, 'attempts'> | undefined>()

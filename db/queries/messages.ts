@@ -15,6 +15,7 @@ export type MessageKind =
   | 'change-address'
   | 'address-changed'
   | 'deletion-asked'
+  | 'rink-invitation'
 
 export type MessageState = 'promised' | 'delivered' | 'expired' | 'dead'
 
@@ -26,7 +27,7 @@ export interface NewMessage {
   nightDate?: string
   channel: 'email' | 'push'
   kind: MessageKind
-  /** Finished words for alerts; for account mail `{ linkId }`, never a token. */
+  /** Finished words for alerts; for account mail `{ linkId }`, for an invitation its id; never a token. */
   content: Record<string, unknown>
   windowId?: string
   sendAt: Date

@@ -8,6 +8,7 @@ const KEEP_HOURS = {
   outlooks: 48,
   modelledSheets: 72,
   links: 24 * 7,
+  invitations: 24 * 14,
   rateLimits: 48,
   runs: 24 * 7,
   unconfirmed: 24 * 7,
@@ -41,6 +42,7 @@ export async function pruneExpired(db: Db, now: Date): Promise<Record<string, nu
     .delete()
   const sessions = await db('sessions').where('expires_at', '<', now).delete()
   const links = await db('account_links').where('expires_at', '<', before(KEEP_HOURS.links)).delete()
+  const invitations = await db('invitations').where('expires_at', '<', before(KEEP_HOURS.invitations)).delete()
   const limits = await db('rate_limits').where('window_starts_at', '<', before(KEEP_HOURS.rateLimits)).delete()
   const runs = await db('job_runs')
     .whereNot({ key: '' })
@@ -48,5 +50,5 @@ export async function pruneExpired(db: Db, now: Date): Promise<Record<string, nu
     .delete()
   const accounts = await deleteDueAccounts(db, now)
   const unconfirmed = await deleteUnconfirmedUsersBefore(db, before(KEEP_HOURS.unconfirmed))
-  return { accounts, unconfirmed, outlooks, sheets, sessions, links, limits, runs }
+  return { accounts, unconfirmed, outlooks, sheets, sessions, links, invitations, limits, runs }
 }

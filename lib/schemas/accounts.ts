@@ -6,7 +6,7 @@ import { lineOfText } from './fields'
 import { MIN_PASSWORD_LENGTH } from './password-length'
 import { THEMES } from './themes'
 
-const emailSchema = z
+export const emailSchema = z
   .string('Type your e-mail address.')
   .trim()
   .toLowerCase()
@@ -30,6 +30,8 @@ const presentPasswordSchema = z.string().default('').pipe(passwordOf(z.string())
 const keySchema = z.string('This link is not complete.').max(200, 'This link is not complete.')
 
 export const signUpSchema = z.object({ name: nameSchema, email: emailSchema, password: newPasswordSchema })
+/** With the page to come back to. */
+export const signUpFormSchema = signUpSchema.extend({ next: z.string().optional() })
 export const passwordSignInSchema = z.object({ email: emailSchema, password: givenPasswordSchema })
 /** One form with two buttons: the password counts only for one of them. */
 export const signInFormSchema = z.object({

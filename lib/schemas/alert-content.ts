@@ -1,5 +1,6 @@
 // What a promised alert carries: finished words, so that what is sent is what was decided. Links are added on delivery.
 import { z } from 'zod'
+import { roleSchema } from './people'
 
 const wordsSchema = z.object({
   rinkName: z.string(),
@@ -28,8 +29,15 @@ export const testContentSchema = z.object({ deviceId: z.uuid().optional() })
 /** The note about a changed address goes to the one that was left. */
 export const addressChangedContentSchema = z.object({ oldEmail: z.email() })
 
+/** An invitation names its row, which knows the address. */
+export const invitationContentSchema = z.object({
+  invitationId: z.uuid(),
+  words: z.object({ rinkName: z.string(), inviterName: z.string(), role: roleSchema }),
+})
+
 export const deletionContentSchema = z.object({ dueAt: z.iso.datetime() })
 
 export type AlertContent = z.infer<typeof alertContentSchema>
 export type AddressChangedContent = z.infer<typeof addressChangedContentSchema>
+export type InvitationContent = z.infer<typeof invitationContentSchema>
 export type FillCheckContent = z.infer<typeof fillCheckContentSchema>

@@ -6,6 +6,7 @@ import { RateLimitedError } from '@/lib/errors'
 import { HOUR_SECONDS } from '@/lib/physics/constants'
 
 const QUARTER_HOUR_SECONDS = HOUR_SECONDS / 4
+const DAY_SECONDS = 24 * HOUR_SECONDS
 
 /** A household, a club or a test suite behind one address stays well below these; a guessing machine does not. */
 export const LIMITS = {
@@ -16,6 +17,10 @@ export const LIMITS = {
   signUpByVisitor: { hits: 100, seconds: HOUR_SECONDS },
   testByUser: { hits: 12, seconds: HOUR_SECONDS },
   passwordChangeByUser: { hits: 10, seconds: QUARTER_HOUR_SECONDS },
+  // Each is a mail with words of the sender's to somebody who did not ask for it.
+  inviteByRink: { hits: 40, seconds: DAY_SECONDS },
+  inviteByUser: { hits: 60, seconds: DAY_SECONDS },
+  inviteToEmail: { hits: 6, seconds: DAY_SECONDS },
   // Each may ask for the weather of one more place.
   setUpByUser: { hits: 40, seconds: HOUR_SECONDS },
   // One search per pause in typing; each costs some milliseconds of processor.

@@ -15,13 +15,17 @@ import {
 } from '@/lib/messaging/templates/account'
 import { alertMail, alertPush, type AlertWords } from '@/lib/messaging/templates/alerts'
 import { fillCheckMail, fillCheckPush, type FillCheckWords } from '@/lib/messaging/templates/fill-check'
+import { invitationMail, type InvitationWords } from '@/lib/messaging/templates/invitation'
 import type { MailWords } from '@/lib/messaging/templates/letter'
 import {
   alertContentSchema,
   fillCheckContentSchema,
+  invitationContentSchema,
   linkContentSchema,
   deletionContentSchema,
 } from '@/lib/schemas/alert-content'
+import { AS_ROLE, ROLE_CAN } from '@/lib/words/roles'
+import { INVITATION_DAYS } from './invitations'
 import { unsubscribeUrl } from './unsubscribe'
 
 export interface RenderSettings {
@@ -62,11 +66,23 @@ function fillCheckWords(message: MessageToDeliver, { publicUrl, secret }: Render
   }
 }
 
+function invitationWords(message: MessageToDeliver, { publicUrl, secret }: RenderSettings): InvitationWords {
+  const { invitationId, words } = invitationContentSchema.parse(message.content)
+  return {
+    ...words,
+    asRole: AS_ROLE[words.role],
+    can: ROLE_CAN[words.role],
+    validFor: `${INVITATION_DAYS} days`,
+    url: linkUrl(publicUrl, secret, { id: invitationId, purpose: 'invitation' }),
+  }
+}
+
 function accountMail(message: MessageToDeliver, { publicUrl, secret }: RenderSettings): MailWords {
   if (message.kind === 'address-already-registered') {
     return addressAlreadyRegisteredMail({ signInUrl: `${publicUrl}/sign-in`, resetUrl: `${publicUrl}/reset` })
   }
   if (message.kind === 'address-changed') return addressChangedMail({ signInUrl: `${publicUrl}/sign-in` })
+  if (message.kind === 'rink-invitation') return invitationMail(invitationWords(message, { publicUrl, secret }))
   if (message.kind === 'test') return testMail({ accountUrl: `${publicUrl}/account` })
   if (message.kind === 'deletion-asked') {
     const { dueAt } = deletionContentSchema.parse(message.content)

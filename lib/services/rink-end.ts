@@ -36,11 +36,11 @@ export async function getLeaving(context: ServiceContext, rinkId: string): Promi
 export async function leaveRink(context: ServiceContext, rinkId: string): Promise<void> {
   const access = await requireRink(context, rinkId, 'view')
   await context.db.transaction(async (trx) => {
-    const left = await deleteMember(trx, access, context.viewer.userId)
+    const left = await deleteMember(trx, access, context.viewer.userId, context.now)
     if (!left) throw new NotFoundError('Rink')
     // Counted after the row is gone and under the lock of those that are left: two keepers cannot both leave at once.
     if (left.role === 'keeper' && (await countKeepers(trx, access)) === 0) {
-      throw new InvalidInputError('You are its only keeper. Delete the rink instead, or have somebody else keep it.')
+      throw new InvalidInputError('You are its only keeper. Make somebody else keeper first, or delete the rink.')
     }
   })
 }

@@ -182,6 +182,13 @@ export async function listRinksOfUser(db: Db, userId: string): Promise<RinkOfUse
     })
 }
 
+/** @throws NotFoundError for a rink that is gone. */
+export async function getRinkForJudging(db: Db, rinkId: string): Promise<RinkForJudging> {
+  const rink = await findRinkForJudging(db, rinkId)
+  if (!rink) throw new NotFoundError('Rink')
+  return rink
+}
+
 /** What a page about something else needs of its rink. */
 export async function getRinkHead(db: Db, access: RinkAccess): Promise<{ name: string; timeZone: string }> {
   const row = await db('rinks').where({ id: access.rinkId }).first({ name: 'name', timeZone: 'time_zone' })

@@ -4,14 +4,14 @@ import { insertFlood } from '@/db/queries/floods'
 import { enqueueRefresh } from '@/db/queries/jobs'
 import { lockPass, updateEntry } from '@/db/queries/log-entries'
 import { countChange } from '@/db/queries/rink-settings'
-import { findRinkForJudging, type RinkForJudging } from '@/db/queries/rinks'
+import { getRinkForJudging, type RinkForJudging } from '@/db/queries/rinks'
 import type { RinkAccess } from '@/lib/access/proofs'
 import { requireRink } from '@/lib/access/require-rink'
 import { judgePasses } from '@/lib/advice/move-pass'
 import { tonightDate } from '@/lib/advice/night'
 import { unpackNight } from '@/lib/advice/night-model'
 import type { ServiceContext } from '@/lib/context'
-import { ForbiddenError, InvalidInputError, NotFoundError } from '@/lib/errors'
+import { ForbiddenError, InvalidInputError } from '@/lib/errors'
 import { HOUR_MILLIS, MINUTE_MILLIS } from '@/lib/physics/constants'
 import type { CheckOffPass, SentCheckOff, UndoPass } from '@/lib/schemas/floods'
 import { readNightModel } from './night-model'
@@ -91,8 +91,7 @@ export async function undoPass(context: ServiceContext, input: UndoPass): Promis
 }
 
 async function getRinkIfTonight({ db, now }: ServiceContext, { rinkId, nightDate }: UndoPass): Promise<RinkForJudging> {
-  const rink = await findRinkForJudging(db, rinkId)
-  if (!rink) throw new NotFoundError('Rink')
+  const rink = await getRinkForJudging(db, rinkId)
   if (nightDate === tonightDate(now, rink.timeZone)) return rink
   throw new InvalidInputError('That night is over.', { nightDate: 'Only tonight’s passes can be checked off.' })
 }

@@ -4,7 +4,7 @@ import { listEntries, listNights, listWriters } from '@/db/queries/log-lists'
 import { findLimits, findNewestThickness, sumSeason, type SeasonSums } from '@/db/queries/log-season'
 import { findMembership, listMembers } from '@/db/queries/members'
 import { listNightOutcomes } from '@/db/queries/night-outcomes'
-import { findRinkForJudging } from '@/db/queries/rinks'
+import { getRinkForJudging } from '@/db/queries/rinks'
 import { listWaterSources, type WaterSource } from '@/db/queries/water-sources'
 import type { RinkAccess } from '@/lib/access/proofs'
 import { isGranted } from '@/lib/access/permissions'
@@ -53,8 +53,7 @@ export interface LogView extends LogFrame {
 /** Whose log it is and who reads it. @throws NotFoundError for strangers */
 export async function logFrame(context: ServiceContext, access: RinkAccess): Promise<LogFrame> {
   const { db, now, viewer } = context
-  const rink = await findRinkForJudging(db, access.rinkId)
-  if (!rink) throw new NotFoundError('Rink')
+  const rink = await getRinkForJudging(db, access.rinkId)
   const [membership, people, sources, reader] = await Promise.all([
     findMembership(db, { rinkId: rink.id, userId: viewer.userId }),
     listMembers(db, access),

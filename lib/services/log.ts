@@ -9,7 +9,7 @@ import {
   type EntryValues,
   type LogEntry,
 } from '@/db/queries/log-entries'
-import { findRinkForJudging, type RinkForJudging } from '@/db/queries/rinks'
+import { getRinkForJudging } from '@/db/queries/rinks'
 import type { Db } from '@/db/knex'
 import type { RinkAccess } from '@/lib/access/proofs'
 import { requireRink } from '@/lib/access/require-rink'
@@ -27,12 +27,6 @@ import { readerOf } from './rink-and-reader'
 /** Without a time, what somebody found is taken as found now; not of a flood this old. [h] Ours. */
 const ANSWER_NOW_HOURS = 12
 
-async function getRink(db: Db, access: RinkAccess): Promise<RinkForJudging> {
-  const rink = await findRinkForJudging(db, access.rinkId)
-  if (!rink) throw new NotFoundError('Rink')
-  return rink
-}
-
 /**
  * Writes an entry. The same key again, from a second tap or a phone that was offline, changes nothing.
  *
@@ -44,7 +38,7 @@ export async function writeEntry(context: ServiceContext, input: WriteEntryInput
   const access = await requireRink(context, input.rinkId, 'writeLog')
   const before = await findEntryIdByKey(db, access, input.entryKey)
   if (before) return { entryId: before }
-  const rink = await getRink(db, access)
+  const rink = await getRinkForJudging(db, access.rinkId)
   const when = happened(input.when, { now, timeZone: rink.timeZone })
   const values = await entryValues(db, access, input, rink)
   const { kind, entryKey } = input
@@ -68,7 +62,7 @@ export async function writeEntry(context: ServiceContext, input: WriteEntryInput
 export async function changeEntry(context: ServiceContext, input: ChangeEntryInput): Promise<void> {
   const { db, now } = context
   const access = await requireRink(context, input.rinkId, 'writeLog')
-  const rink = await getRink(db, access)
+  const rink = await getRinkForJudging(db, access.rinkId)
   const values = await entryValues(db, access, input, rink)
   await db.transaction(async (trx) => {
     const before = await lockUnchanged(context, trx, access, input, rink.timeZone)
@@ -110,7 +104,7 @@ export async function restoreEntry(context: ServiceContext, { rinkId, entryId }:
 export async function answerSet(context: ServiceContext, input: AnswerSetInput): Promise<void> {
   const { db, now } = context
   const access = await requireRink(context, input.rinkId, 'writeLog')
-  const { timeZone } = await getRink(db, access)
+  const { timeZone } = await getRinkForJudging(db, access.rinkId)
   await db.transaction(async (trx) => {
     const before = await lockUnchanged(context, trx, access, input, timeZone)
     if (before.kind !== 'flood') throw new InvalidInputError('Only a flood sets.')

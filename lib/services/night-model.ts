@@ -1,6 +1,6 @@
 // The model of one night, for passes wherever they are put: in a browser, or for passes that were poured or moved.
 import { findNewestForecast } from '@/db/queries/forecasts'
-import { findRinkForJudging, type RinkForJudging } from '@/db/queries/rinks'
+import { getRinkForJudging, type RinkForJudging } from '@/db/queries/rinks'
 import { listWaterSources } from '@/db/queries/water-sources'
 import type { RinkAccess } from '@/lib/access/proofs'
 import { requireRink } from '@/lib/access/require-rink'
@@ -31,8 +31,7 @@ export async function readNightModel(
  */
 export async function getMovableNight(context: ServiceContext, rinkId: string): Promise<MovableNight> {
   const access = await requireRink(context, rinkId, 'manage')
-  const rink = await findRinkForJudging(context.db, rinkId)
-  if (!rink) throw new NotFoundError('Rink')
+  const rink = await getRinkForJudging(context.db, rinkId)
   const model = await readNightModel(context, access, rink, tonightDate(context.now, rink.timeZone))
   if (!model) throw new NotFoundError('Forecast')
   const sources = await listWaterSources(context.db, access)

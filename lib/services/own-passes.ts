@@ -1,14 +1,14 @@
 // The keeper's own plan of a night: kept, judged with the newest forecast whenever it is shown, and dropped again.
 import { listFloodsSince } from '@/db/queries/floods'
 import { listOwnPasses, replaceOwnPasses, type OwnPass } from '@/db/queries/own-passes'
-import { findRinkForJudging, type RinkForJudging } from '@/db/queries/rinks'
+import { getRinkForJudging, type RinkForJudging } from '@/db/queries/rinks'
 import type { RinkAccess } from '@/lib/access/proofs'
 import { requireRink } from '@/lib/access/require-rink'
 import { judgePasses } from '@/lib/advice/move-pass'
 import { nightBounds, tonightDate } from '@/lib/advice/night'
 import { unpackNight } from '@/lib/advice/night-model'
 import type { ServiceContext } from '@/lib/context'
-import { InvalidInputError, NotFoundError } from '@/lib/errors'
+import { InvalidInputError } from '@/lib/errors'
 import type { DropOwnPasses, KeepOwnPasses } from '@/lib/schemas/own-passes'
 import type { TonightPass } from '@/lib/schemas/tonight-view'
 import { readNightModel } from './night-model'
@@ -47,8 +47,7 @@ export async function dropOwnPasses(context: ServiceContext, input: DropOwnPasse
 }
 
 async function tonightOf({ db, now }: ServiceContext, { rinkId, nightDate }: DropOwnPasses) {
-  const rink = await findRinkForJudging(db, rinkId)
-  if (!rink) throw new NotFoundError('Rink')
+  const rink = await getRinkForJudging(db, rinkId)
   if (nightDate === tonightDate(now, rink.timeZone)) return nightBounds(nightDate, rink.timeZone)
   throw new InvalidInputError('That night is over.', { nightDate: 'Only tonight’s plan can be changed.' })
 }

@@ -2,13 +2,12 @@
 import { findOrCreateGridCell } from '@/db/queries/grid-cells'
 import { enqueuePull, enqueueRefresh } from '@/db/queries/jobs'
 import { changeRink, lockRink, replaceAvailableHours, type RinkChanges } from '@/db/queries/rink-settings'
-import { findRinkForJudging, type RinkForJudging } from '@/db/queries/rinks'
+import { findRinkForJudging, getRinkForJudging, type RinkForJudging } from '@/db/queries/rinks'
 import { listWaterSources, type WaterSource } from '@/db/queries/water-sources'
 import type { Db } from '@/db/knex'
 import type { RinkAccess } from '@/lib/access/proofs'
 import { requireRink } from '@/lib/access/require-rink'
 import type { ServiceContext } from '@/lib/context'
-import { NotFoundError } from '@/lib/errors'
 import type {
   ChangeHoursInput,
   ChangeIceInput,
@@ -27,8 +26,7 @@ export interface RinkSettings extends RinkForJudging {
 /** For the settings pages. @throws ForbiddenError for crew and skaters, NotFoundError for strangers. */
 export async function getRinkSettings(context: ServiceContext, rinkId: string): Promise<RinkSettings> {
   const access = await requireRink(context, rinkId, 'manage')
-  const rink = await findRinkForJudging(context.db, rinkId)
-  if (!rink) throw new NotFoundError('Rink')
+  const rink = await getRinkForJudging(context.db, rinkId)
   return { ...rink, sources: await listWaterSources(context.db, access) }
 }
 

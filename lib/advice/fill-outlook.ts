@@ -11,9 +11,6 @@ import { FILL } from './thresholds'
 import { toIso } from './zoned-time'
 import type { FillOutlook } from './types'
 
-/** Ice of this many millimetres a millimetre of water: 999.8 / 916.7 kg/m³ (IAPWS). */
-const ICE_PER_WATER = 1.09
-
 /**
  * Outlook of the fill over all forecast runs.
  *
@@ -72,7 +69,7 @@ export function growthOf(setting: Setting, run: ForecastRun, startIndex: number 
   const { temperatureC } = setting.input.water
   const depthMm = deepestFillMm(setting)
   const carriesMm = setting.input.carriesSkaterMm ?? FILL.carriesSkaterMm
-  const wanted = [FILL.skinMm, Math.min(carriesMm, Math.floor(depthMm * ICE_PER_WATER))]
+  const wanted = [FILL.skinMm, carriesMm]
   if (phase === 'freezing') {
     const index = firstIndexFrom(run, setting.nowMillis)
     const sheet = run.sheets[index]

@@ -17,6 +17,9 @@ import type { Caution, JudgeInput, JudgeOptions, Spread } from './types'
 const EVERY_HOURS = 3
 
 /** Ice over the runs. [mm] In nine runs of ten it is at least p10. */
+/** Ice of this many millimetres a millimetre of water: 999.8 / 916.7 kg/m³ (IAPWS). */
+const ICE_PER_WATER = 1.09
+
 export interface ThicknessAhead {
   at: string
   p10: number
@@ -35,6 +38,8 @@ export interface FreezingOutlook {
     liquidMm: number
   }
   carriesSkaterMm: number
+  /** There is too little water for ice of that thickness: it carries once it is frozen to the floor. */
+  isShallow: boolean
   ahead: ThicknessAhead[]
   skinAt: Spread
   carriesSkaterAt: Spread
@@ -78,9 +83,11 @@ export function freezingOutlook(input: JudgeInput, options: JudgeOptions = {}): 
     ),
   )
   const sheet = main.carried[nowIndex] as SheetState
+  const now = sheetNow(setting, sheet, nowIndex)
   return {
-    now: sheetNow(setting, sheet, nowIndex),
+    now,
     carriesSkaterMm,
+    isShallow: now.thicknessMm + now.waterBelowMm * ICE_PER_WATER < carriesSkaterMm,
     ahead,
     skinAt: spread('skinMillis'),
     carriesSkaterAt: spread('carriesMillis'),

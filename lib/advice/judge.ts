@@ -17,7 +17,7 @@ import { toIso } from './zoned-time'
 import type { AdviceWindow, Judgement, JudgeInput, JudgeOptions, ScoredHour } from './types'
 
 /** Changes when the same input may give another judgement. */
-export const MODEL_VERSION = 'nightsheet-2'
+export const MODEL_VERSION = 'nightsheet-3'
 /** Hours after a window that other runs need, so that its last layer can set in them. */
 const HOURS_TO_SET = 24
 

@@ -16,8 +16,12 @@ export function fillProgressSentence(progress: FillProgress, words: WordOptions)
   return `${sofar} ${hoursLeft > 0 ? `${durationText(hoursLeft * 60)} of hose to go.` : 'The hose is off.'}`
 }
 
+/** Below this a figure would read as nothing. */
+const LEAST_DEPTH_M = 0.0005
+
 /** "Water covers 57 % of the floor, 16.0 cm at the deepest." */
 export function fillSpreadSentence({ wettedShare, deepestM }: FillProgress, words: WordOptions): string {
+  if (deepestM < LEAST_DEPTH_M) return 'The water has only begun to spread.'
   const part = wettedShare > 0.995 ? 'the whole floor' : `${shareText(wettedShare, words)} of the floor`
   return `Water covers ${part}, ${depthText(deepestM, words)} at the deepest.`
 }

@@ -17,7 +17,10 @@ import { num, text, type ClauseWriter } from './clause'
 
 export const FLOOD_CLAUSES: Record<string, ClauseWriter> = {
   phase_not_flooding: (v) => PHASE_CLAUSES[text(v, 'phase')] ?? 'there is no sheet to flood yet',
-  sheet_too_thin: (v, w) => `the sheet is ${iceText(num(v, 'thicknessMm'), w)} thick, too thin to walk on with a hose`,
+  sheet_too_thin: (v, w) =>
+    num(v, 'thicknessMm') < 0.5
+      ? 'there is no ice yet to walk on with a hose'
+      : `the sheet is ${iceText(num(v, 'thicknessMm'), w)} thick, too thin to walk on with a hose`,
   sheet_bears: (v, w) => `${iceText(num(v, 'thicknessMm'), w)} of ice should carry you and the hose; drill to be sure`,
   last_layer_wet: (v, w) => `${layerText(num(v, 'liquidMm'), w)} of water still lies on the sheet`,
   last_layer_set: () => 'the sheet is frozen to the top',

@@ -9,6 +9,11 @@ import type { WordOptions } from './options'
 import { capitalised, iceText, snowText } from './quantities'
 import { clockText, weekdayText } from './times'
 
+/** "Carries a skater, 10.0 cm" */
+export function carriesName(outlook: FreezingOutlook, words: WordOptions): string {
+  return `Carries a skater, ${outlook.isShallow ? 'frozen to the floor' : iceText(outlook.carriesSkaterMm, words)}`
+}
+
 /** "4.1 cm of ice on 8.3 cm of water. Carries a skater (10.0 cm) Thursday evening; …" */
 export function freezingSentence(outlook: FreezingOutlook, now: Date, words: WordOptions): string {
   const { thicknessMm, waterBelowMm } = outlook.now
@@ -18,7 +23,10 @@ export function freezingSentence(outlook: FreezingOutlook, now: Date, words: Wor
   if (thicknessMm >= outlook.carriesSkaterMm)
     return `${ice}${below}. By the model it carries: drill before anyone skates.`
   const when = capitalised(spreadText(outlook.carriesSkaterAt, now, words))
-  return `${ice}${below}. ${limit} to carry a skater: ${when.charAt(0).toLowerCase() + when.slice(1)}.`
+  const what = outlook.isShallow
+    ? `Too little water for ${limit} of ice, so it carries a skater once it is frozen to the floor`
+    : `${limit} to carry a skater`
+  return `${ice}${below}. ${what}: ${when.charAt(0).toLowerCase() + when.slice(1)}.`
 }
 
 const SNOW_WRITERS: Record<string, ClauseWriter> = {

@@ -4,7 +4,7 @@ import { fillProgress, type FillProgressInput } from '@/lib/advice/fill-progress
 import { freezingOutlook } from '@/lib/advice/freezing'
 import { METRIC } from '@/lib/units'
 import * as filling from '@/lib/words/filling'
-import { freezingSentence, snowOnIceText } from '@/lib/words/freezing'
+import { carriesName, freezingSentence, snowOnIceText } from '@/lib/words/freezing'
 import { inputOf, steadyHours } from '../../support/advice-weather'
 
 const words = { timeZone: 'UTC', units: METRIC, clock: '24' as const, locale: 'en' }
@@ -66,6 +66,19 @@ describe('freezing', () => {
   test('a sheet that carries still asks for the drill', () => {
     const thick = { ...outlook, now: { ...outlook.now, thicknessMm: 110 } }
     expect(freezingSentence(thick, new Date(given.now), words)).toContain('drill before anyone skates')
+  })
+  test('where there is too little water for the thickness wanted, it carries once frozen to the floor', () => {
+    // 3 cm of water make 3.3 cm of ice.
+    const water = { ...given.water, fillDepthMm: 30 }
+    const sheet = { thicknessMm: 0, temperatureC: 0, snowCoverCm: 0 }
+    const shallow = freezingOutlook({ ...given, water, sheet, rink: { ...given.rink, phase: 'freezing' } }, { runs: 0 })
+    expect(shallow.carriesSkaterAt).toEqual(shallow.frozenThroughAt)
+    const text = freezingSentence(shallow, new Date(given.now), words)
+    expect(text).toMatch(
+      /^No ice yet on 3\.0 cm of water\. Too little water for 10\.0 cm of ice, so .* frozen to the floor: /,
+    )
+    expect(carriesName(shallow, words)).toBe('Carries a skater, frozen to the floor')
+    expect(carriesName(outlook, words)).toBe('Carries a skater, 10.0 cm')
   })
   test('every word about snow', () => {
     expect(outlook.snow.length).toBeGreaterThan(1)

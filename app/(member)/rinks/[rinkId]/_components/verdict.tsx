@@ -3,6 +3,7 @@ import { readerOf } from '@/components/rinks/reader'
 import type { NightSummary } from '@/lib/advice/night-summary'
 import type { TonightView } from '@/lib/schemas/tonight-view'
 import { sureSentence, verdictParts } from '@/lib/words/night'
+import { unbroken } from '@/lib/words/unbroken'
 
 const LEAD_COLOURS: Record<NightSummary['verdict'], string> = {
   flood: 'text-lamp-text',
@@ -10,9 +11,6 @@ const LEAD_COLOURS: Record<NightSummary['verdict'], string> = {
   hold: 'text-ink',
   unknown: 'text-ink',
 }
-
-/** A time of day stays on one line. */
-const unbroken = (text: string) => text.replace(/(\d) (am|pm)/g, '$1\u00a0$2')
 
 export function Verdict({
   view,

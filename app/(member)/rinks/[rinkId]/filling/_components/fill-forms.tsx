@@ -88,7 +88,8 @@ export function CheckForm({ lowCorner, isFirst, ...form }: Props & { lowCorner: 
   )
 }
 
-export function FinishForms({ rinkId }: { rinkId: string }) {
+/** @param missing How much of the fill is not in yet, in words; empty when nothing to speak of. */
+export function FinishForms({ rinkId, missing }: { rinkId: string; missing: string }) {
   const hidden = () => <input type="hidden" name="rinkId" value={rinkId} />
   return (
     <section className="mt-8 border-t border-rule pt-2">
@@ -97,6 +98,11 @@ export function FinishForms({ rinkId }: { rinkId: string }) {
           Turns the reckoning of the hose off, writes the fill into the log and follows the freezing from here on. The
           rink is closed until you open it.
         </p>
+        {missing ? (
+          <p className="mb-3 max-w-line border-l-[3px] border-rust pl-3.5 text-note">
+            {missing} of the fill are not in yet. To go on another day, pause instead.
+          </p>
+        ) : null}
         <ActionForm action={finishFillAction} submit="Finish the fill">
           {hidden}
         </ActionForm>

@@ -5,7 +5,8 @@ import { StandingCautions } from '@/components/rinks/standing-cautions'
 import { hasIce } from '@/lib/schemas/rink-choices'
 import type { FillingView } from '@/lib/schemas/filling-view'
 import { waterText } from '@/lib/words/quantities'
-import { weekdayText } from '@/lib/words/times'
+import { clockText } from '@/lib/words/times'
+import { longDayText } from '@/lib/words/week'
 import { FILLING_CAUTIONS } from './filling-cautions'
 import { StartFill } from './start-fill'
 
@@ -41,7 +42,7 @@ export function NoFill({ view }: { view: FillingView }) {
 
 function wordsOf({ rink, last, mayWrite, reader }: FillingView): { title: string; text: string } {
   const water = last
-    ? `${waterText(last.litres, reader)} went in, done on ${weekdayText(last.finishedAt, reader)}.`
+    ? `${waterText(last.litres, reader)} went in, done on ${longDayText(last.finishedAt, reader)} at ${clockText(last.finishedAt, reader)}.`
     : ''
   if (rink.phase === 'freezing') return { title: 'The water is in.', text: `${water} Now it freezes: keep off.`.trim() }
   if (hasIce(rink.phase)) {

@@ -3,11 +3,16 @@ import { StandingCautions } from '@/components/rinks/standing-cautions'
 import { Notice } from '@/components/ui/notice'
 import type { FillingView, OpenFillView } from '@/lib/schemas/filling-view'
 import { fillProgressSentence, fillSpreadSentence, fillWarningText, nextCheckSentence } from '@/lib/words/filling'
+import { unbroken } from '@/lib/words/unbroken'
+import { waterText } from '@/lib/words/quantities'
 import { Corners } from './corners'
 import { FillBar } from './fill-bar'
 import { FillHistory } from './fill-history'
 import { FILLING_CAUTIONS } from './filling-cautions'
 import { CheckForm, FinishForms, HoseForm } from './fill-forms'
+
+/** A bucket test and a floor are known to a tenth or so. Ours. */
+const NEARLY = 0.9
 
 export function OpenFill({ view, fill }: { view: FillingView; fill: OpenFillView }) {
   const { reader, rink, mayWrite } = view
@@ -19,7 +24,7 @@ export function OpenFill({ view, fill }: { view: FillingView; fill: OpenFillView
   return (
     <>
       <h1 className="mb-2 max-w-[24ch] text-verdict font-medium tracking-tight lg:text-verdict-wide">
-        {lead} <em className="font-semibold text-hose not-italic">{rest.join(' ')}</em>
+        {lead} <em className="font-semibold text-hose not-italic">{unbroken(rest.join(' '))}</em>
       </h1>
       <p className="mb-5 max-w-[60ch] text-graphite">{fillSpreadSentence(progress, reader)}</p>
       <FillBar fill={fill} reader={reader} />
@@ -35,7 +40,10 @@ export function OpenFill({ view, fill }: { view: FillingView; fill: OpenFillView
             <>
               <HoseForm {...form} isRunning={progress.isRunning} flowLPerMin={fill.flowLPerMin} />
               <CheckForm {...form} lowCorner={fill.lowCorner} isFirst={progress.isCheckDue} />
-              <FinishForms rinkId={rink.id} />
+              <FinishForms
+                rinkId={rink.id}
+                missing={progress.doneShare < NEARLY ? waterText(progress.litresLeft, reader) : ''}
+              />
             </>
           ) : null}
         </div>

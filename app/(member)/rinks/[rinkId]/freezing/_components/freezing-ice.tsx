@@ -5,7 +5,7 @@ import { Notice } from '@/components/ui/notice'
 import type { FreezingOutlook } from '@/lib/advice/freezing'
 import type { FreezingView } from '@/lib/schemas/freezing-view'
 import { spreadText } from '@/lib/words/filling'
-import { freezingSentence, snowOnIceText } from '@/lib/words/freezing'
+import { carriesName, freezingSentence, snowOnIceText } from '@/lib/words/freezing'
 import { capitalised, iceText, snowText } from '@/lib/words/quantities'
 import { clockText, weekdayText } from '@/lib/words/times'
 import { KeepOffSign } from './keep-off-sign'
@@ -54,7 +54,7 @@ export function FreezingIce({ view, outlook, entryKey }: Props) {
 function WhenItCarries({
   outlook,
   now,
-  view: { reader, rink },
+  view: { reader },
 }: {
   outlook: FreezingOutlook
   now: Date
@@ -64,7 +64,7 @@ function WhenItCarries({
   const { snowCoverCm, liquidMm } = outlook.now
   const rows = [
     { name: 'Skinned over', text: when(outlook.skinAt) },
-    { name: `Carries a skater, ${iceText(rink.carriesSkaterMm, reader)}`, text: when(outlook.carriesSkaterAt) },
+    { name: carriesName(outlook, reader), text: when(outlook.carriesSkaterAt) },
     { name: 'Frozen through', text: when(outlook.frozenThroughAt) },
     ...(snowCoverCm >= 0.1 ? [{ name: 'Snow on it', text: snowText(snowCoverCm, reader) }] : []),
     ...(liquidMm >= 0.5 ? [{ name: 'Water on it', text: iceText(liquidMm, reader) }] : []),

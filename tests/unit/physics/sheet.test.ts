@@ -1,15 +1,7 @@
 // The sheet: energy and mass are kept, a stored sheet goes on where it stopped, and thaw and frost do what they must.
 import { describe, expect, test } from 'vitest'
-import {
-  advanceSheet,
-  advanceSheetPart,
-  clearSnow,
-  createSheet,
-  pourLayer,
-  reportSheet,
-  sheetEnthalpyJM2,
-} from '@/lib/physics/sheet'
-import { FUSION_J_PER_KG } from '@/lib/physics/constants'
+import { advanceSheet, advanceSheetPart, clearSnow, createSheet, pourLayer, reportSheet } from '@/lib/physics/sheet'
+import { FUSION_J_PER_KG, WATER_HEAT_CAPACITY } from '@/lib/physics/constants'
 import { prepareHours } from '@/lib/physics/prepare'
 import { runHour } from '@/lib/physics/sheet-hour'
 import { randomWeather, seeded } from '../../support/random-weather'
@@ -31,6 +23,12 @@ function randomSheet(seed: number): SheetState {
     waterTemperatureC: isFloating ? pick(0, 8) : 0,
     base: 'liner',
   })
+}
+
+/** All that is in and on the sheet and in the water below; 0 for liquid water at 0 °C. [J/m²] */
+function sheetEnthalpyJM2(state: SheetState): number {
+  const inCells = state.enthalpyJM2.reduce((sum, one) => sum + one, 0)
+  return inCells - FUSION_J_PER_KG * state.snowKgM2 + state.belowKgM2 * WATER_HEAT_CAPACITY * state.belowTemperatureC
 }
 
 describe('conservation', () => {

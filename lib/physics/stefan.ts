@@ -1,8 +1,8 @@
 // Closed forms of ice growth: a check on the full model, and what is left when only air temperatures are known.
-import { FUSION_J_PER_KG, ICE_CONDUCTIVITY, ICE_DENSITY, ICE_HEAT_CAPACITY } from './constants'
+import { FUSION_J_PER_KG, HOUR_SECONDS, ICE_CONDUCTIVITY, ICE_DENSITY, ICE_HEAT_CAPACITY } from './constants'
 import { inRange } from './check'
 
-const DAY_SECONDS = 86_400
+const DAY_SECONDS = 24 * HOUR_SECONDS
 const LATENT = FUSION_J_PER_KG * ICE_DENSITY
 
 /**
@@ -80,7 +80,7 @@ export function neumannLambda(kelvinsBelow: number): number {
  */
 export function neumannThicknessM(kelvinsBelow: number, hours: number): number {
   const diffusivity = ICE_CONDUCTIVITY / (ICE_DENSITY * ICE_HEAT_CAPACITY)
-  return 2 * neumannLambda(kelvinsBelow) * Math.sqrt(diffusivity * inRange('hours [h]', hours, 0, 1e6) * 3600)
+  return 2 * neumannLambda(kelvinsBelow) * Math.sqrt(diffusivity * inRange('hours [h]', hours, 0, 1e6) * HOUR_SECONDS)
 }
 
 /** Error function by its power series; for the small arguments of ice growth ten terms are exact to rounding. */

@@ -2,12 +2,13 @@
 import { z } from 'zod'
 import type { BuildInput } from '@/lib/advice/build-types'
 import type { FloorShape } from '@/lib/physics/floor'
+import { bucketFlowLPerMin } from '@/lib/physics/hose'
 import { unitsOfCode, type Units } from '@/lib/units'
 import { measured, orEmpty, passOn, refuserIn } from './fields'
 import { cornerFields, cornersOf } from './floor'
 import { fitsMeasure, parseNumber } from './measures'
 import { FLOOR_KINDS } from './rink-choices'
-import { bucketFlowLPerMin, flowFields, noHoseMessage, rinkIdSchema } from './rinks'
+import { flowFields, noHoseMessage, rinkIdSchema } from './rinks'
 
 /** Points along one side of the grid, as the stored floor has them at most (floor.ts). */
 export const GRID = { least: 2, most: 20, usualRows: 4, usualColumns: 3 }

@@ -68,7 +68,7 @@ export const tickSchema = z
 /** A duration as typed. [s] */
 export const secondsSchema = z.string().transform((text, context) => {
   const seconds = parseNumber(text) ?? NaN
-  if (seconds > 0 && seconds <= 3600) return seconds
+  if (seconds >= 1 && seconds <= 3600) return seconds
   context.addIssue('Between 1 and 3600 seconds.')
   return z.NEVER
 })

@@ -1,5 +1,6 @@
 // Setting up a rink: one set of fields for the form, the action, the service and the tests. Settings share them (rink-settings.ts).
 import { z } from 'zod'
+import { bucketFlowLPerMin } from '@/lib/physics/hose'
 import type { Units } from '@/lib/units'
 import { latitudeSchema, longitudeSchema } from './coordinates'
 import { clockTimeSchema, doOverlap, EVERY_DAY, timeZoneSchema } from './local-time'
@@ -82,11 +83,6 @@ function rinkFields(units: Units) {
 }
 
 type Fields = z.output<z.ZodObject<ReturnType<typeof rinkFields>>>
-
-/** The flow of a bucket test. [L/min] */
-export function bucketFlowLPerMin(litres: number, seconds: number): number {
-  return (litres / seconds) * 60
-}
 
 export const noHoseMessage = (units: Units) => `That would be no hose we know. ${rangeMessage('flow', units)}`
 

@@ -70,6 +70,7 @@ test.each([
   ['a flow of 500 L/min', { flow: '500' }, 'flow'],
   ['a flow of 106 US gal/min', { units: 'imperial', flow: '106' }, 'flow'],
   ['a bucket that fills in no time', { bucketSize: '12', bucketSeconds: '0' }, 'bucketSeconds'],
+  ['a bucket that fills in half a second', { bucketSize: '2', bucketSeconds: '0.5' }, 'bucketSeconds'],
   ['a bucket that fills too fast for any hose', { bucketSize: '100', bucketSeconds: '1' }, 'bucketSeconds'],
   ['a bucket without a time', { bucketSize: '12' }, 'bucketSeconds'],
   ['a time without a bucket', { bucketSeconds: '30' }, 'bucketSize'],

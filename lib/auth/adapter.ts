@@ -9,17 +9,15 @@ import { hashSessionToken } from './session-tokens'
 /** How exactly a session knows when it was last used. */
 const SEEN_STEP_MILLIS = 10 * MINUTE_MILLIS
 
-export function sessionAdapter(db: Db): Adapter {
+/** @param onFault Hears of a session that could not be read. */
+export function sessionAdapter(db: Db, onFault?: (fault: unknown) => void): Adapter {
   return {
     getSessionAndUser: async (sessionToken) => {
-      const [tokenHash, now] = [hashSessionToken(sessionToken), readClock()]
-      const found = await findSession(db, tokenHash, now)
-      if (!found) return null
-      if (now.getTime() - found.lastSeenAt.getTime() > SEEN_STEP_MILLIS) await noteSeen(db, tokenHash, now)
-      const { userId, name, email, isAdmin, emailVerifiedAt, expiresAt } = found
-      return {
-        session: { sessionToken, userId, expires: expiresAt },
-        user: { id: userId, name, email, isAdmin, emailVerified: emailVerifiedAt },
+      try {
+        return await readSession(db, sessionToken)
+      } catch (fault) {
+        onFault?.(fault)
+        throw fault
       }
     },
     updateSession: async ({ sessionToken, expires }) => {
@@ -29,5 +27,17 @@ export function sessionAdapter(db: Db): Adapter {
     deleteSession: async (sessionToken) => {
       await deleteSession(db, hashSessionToken(sessionToken))
     },
+  }
+}
+
+async function readSession(db: Db, sessionToken: string) {
+  const [tokenHash, now] = [hashSessionToken(sessionToken), readClock()]
+  const found = await findSession(db, tokenHash, now)
+  if (!found) return null
+  if (now.getTime() - found.lastSeenAt.getTime() > SEEN_STEP_MILLIS) await noteSeen(db, tokenHash, now)
+  const { userId, name, email, isAdmin, emailVerifiedAt, expiresAt } = found
+  return {
+    session: { sessionToken, userId, expires: expiresAt },
+    user: { id: userId, name, email, isAdmin, emailVerified: emailVerifiedAt },
   }
 }

@@ -51,15 +51,19 @@ const providers = [
   }),
 ]
 
-/** Made when first needed, because a build has no settings. */
-export function authOptions(): AuthOptions {
+/**
+ * Made when first needed, because a build has no settings.
+ *
+ * @param onFault Hears why a session could not be read, which next-auth logs and keeps to itself.
+ */
+export function authOptions(onFault?: (fault: unknown) => void): AuthOptions {
   const { NEXTAUTH_SECRET, PUBLIC_URL } = readEnvironment()
   // next-auth takes its own address from here and nowhere else.
   process.env.NEXTAUTH_URL = PUBLIC_URL
   const cookie = sessionCookie(PUBLIC_URL)
   return {
     secret: NEXTAUTH_SECRET,
-    adapter: sessionAdapter(sharedPool()),
+    adapter: sessionAdapter(sharedPool(), onFault),
     // No `strategy`: the adapter makes it "database". Named outright, next-auth refuses providers like ours.
     session: { maxAge: SESSION_SECONDS, updateAge: DAY_SECONDS },
     useSecureCookies: cookie.options.secure,

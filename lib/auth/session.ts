@@ -13,9 +13,15 @@ import { sessionCookie } from './session-cookie'
 import { hashSessionToken } from './session-tokens'
 import { openSession } from './sessions'
 
-/** Once per rendering, however many parts of a page ask. */
+/**
+ * Once per rendering, however many parts of a page ask.
+ *
+ * @throws what the database threw: next-auth alone would take somebody whose session cannot be read for a stranger.
+ */
 export const readViewer = cache(async (): Promise<Viewer | undefined> => {
-  const session = await getServerSession(authOptions())
+  const faults: unknown[] = []
+  const session = await getServerSession(authOptions((fault) => faults.push(fault)))
+  if (faults.length > 0) throw faults[0]
   return session ? { userId: session.user.id, isAdmin: session.user.isAdmin } : undefined
 })
 

@@ -2,6 +2,7 @@
 import { unstable_rethrow } from 'next/navigation'
 import { ZodError, type z } from 'zod'
 import { AppError, ConflictError, InvalidInputError } from '@/lib/errors'
+import { logFailure } from '@/lib/log'
 import { faultsByField, INVALID_INPUT_MESSAGE } from './errors-by-field'
 import type { FormState } from './form-state'
 
@@ -21,6 +22,8 @@ function withoutPasswords(fields: Record<string, string>): Record<string, string
   return Object.fromEntries(Object.entries(fields).filter(([name]) => !/password/i.test(name)))
 }
 
+const BROKEN_MESSAGE = 'Something broke on our side. What you typed is still here: try again in a minute.'
+
 function faultState(error: unknown, values: Record<string, string>): FormState {
   if (error instanceof ZodError) {
     return { status: 'error', message: INVALID_INPUT_MESSAGE, fields: faultsByField(error), values }
@@ -30,10 +33,11 @@ function faultState(error: unknown, values: Record<string, string>): FormState {
     const latest = error instanceof ConflictError ? { latest: error.latest } : {}
     return { status: 'error', message: error.message, fields, values, ...latest }
   }
-  throw error
+  logFailure('action.failed', error)
+  return { status: 'error', message: BROKEN_MESSAGE, values }
 }
 
-/** Makes a server action for useActionState. Errors that are not meant for people go on to error.tsx. */
+/** Makes a server action for useActionState. What was typed stays on the page, whatever breaks. */
 export function formAction<S extends z.ZodType>(
   schema: S,
   work: Work<S>,

@@ -24,98 +24,109 @@ export function sumsLead(sums: BuildSums, words: WordOptions): string {
 
 /** Every sum as a line: label, figure, what it means, and how it was made. */
 export function sumItems(sums: BuildSums, words: WordOptions): SumItem[] {
-  const { ground, water, flow, hose, sessions, wetted, cost, boards, push, expansion, liner, orderBy, meltWater } = sums
-  const item = (id: SumId, label: string, figure: string, detail: string, { how }: { how: How }): SumItem => ({
-    id,
-    label,
-    figure,
-    detail,
-    how: howWords(how, words),
-  })
-  const items = [
-    item(
-      'ground',
-      'Ground',
-      areaText(ground.areaM2, words),
-      `${depthText(ground.fallM, words)} from the highest point to the lowest.`,
-      ground,
-    ),
-    item(
-      'water',
-      'Water',
-      volumeText(water.volumeM3, words),
-      `Mean depth ${depthText(water.meanDepthM, words)}, deepest ${depthText(water.deepestM, words)}.`,
-      water,
-    ),
-    item(
-      'flow',
-      'Flow',
-      flowText(flow.lPerMin, words),
-      'Measure it again on the day, with the hose at its full length.',
-      flow,
-    ),
-    item(
-      'hose',
-      'Hose',
-      durationText(roundedHours(hose.hours)),
-      `At ${flowText(flow.lPerMin, words)}; ${wettedDetail(sums, words)}`,
-      hose,
-    ),
-    item(
-      'sessions',
-      'Times out',
-      countText(sessions.count),
-      `About ${durationText(roundedHours(sessions.hoursEach))} of hose each.`,
-      sessions,
-    ),
-    item('wetted', 'Wetted', areaText(wetted.byHour[0]?.wettedM2 ?? 0, words), 'After the first hour of hose.', wetted),
-    cost
-      ? item(
-          'cost',
-          'Water bill',
-          numberText(cost.amount, 2, words),
-          'At the price you gave, without sewer charges.',
-          cost,
-        )
-      : null,
-    item(
-      'boards',
-      'Boards at the low corner',
-      `${depthText(boards.heightM, words)} or more`,
-      boardsDetail(sums, words),
-      boards,
-    ),
-    item(
-      'push',
-      'Push on the boards',
-      pushText(push.pushNPerM, words),
-      `${momentText(push.footMomentNmPerM, words)} at the foot, at the low corner.`,
-      push,
-    ),
-    item(
-      'expansion',
-      'Rise on freezing',
-      depthText(expansion.riseM, words),
-      'Ice takes a tenth more room than water, and between boards it goes up and out.',
-      expansion,
-    ),
-    item(
-      'liner',
-      'Liner',
-      `${lengthText(liner.lengthM, words)} × ${lengthText(liner.widthM, words)}`,
-      'Up, over and down the outside, with folds and some to spare.',
-      liner,
-    ),
-    item('orderBy', 'Order the liner by', dateText(orderBy.date, words), 'By late November stock is thin.', orderBy),
-    item(
-      'meltWater',
-      'Melt water in spring',
-      volumeText(meltWater.volumeM3, words),
-      'Decide now where it runs: not toward a neighbour.',
-      meltWater,
-    ),
+  const lines = [...waterLines(sums, words), ...boardLines(sums, words), ...linerLines(sums, words)]
+  return lines.map(({ how, ...line }) => ({ id: how.formulaId, ...line, how: howWords(how, words) }))
+}
+
+type Line = Omit<SumItem, 'id' | 'how'> & { how: How }
+
+function waterLines(sums: BuildSums, words: WordOptions): Line[] {
+  const { ground, water, flow, hose, sessions, wetted, cost } = sums
+  return [
+    {
+      label: 'Ground',
+      figure: areaText(ground.areaM2, words),
+      detail: `${depthText(ground.fallM, words)} from the highest point to the lowest.`,
+      how: ground.how,
+    },
+    {
+      label: 'Water',
+      figure: volumeText(water.volumeM3, words),
+      detail: `Mean depth ${depthText(water.meanDepthM, words)}, deepest ${depthText(water.deepestM, words)}.`,
+      how: water.how,
+    },
+    {
+      label: 'Flow',
+      figure: flowText(flow.lPerMin, words),
+      detail: 'Measure it again on the day, with the hose at its full length.',
+      how: flow.how,
+    },
+    {
+      label: 'Hose',
+      figure: durationText(roundedHours(hose.hours)),
+      detail: `At ${flowText(flow.lPerMin, words)}; ${wettedDetail(sums, words)}`,
+      how: hose.how,
+    },
+    {
+      label: 'Times out',
+      figure: countText(sessions.count),
+      detail: `About ${durationText(roundedHours(sessions.hoursEach))} of hose each.`,
+      how: sessions.how,
+    },
+    {
+      label: 'Wetted',
+      figure: areaText(wetted.byHour[0]?.wettedM2 ?? 0, words),
+      detail: 'After the first hour of hose.',
+      how: wetted.how,
+    },
+    ...(cost ? [costLine(cost, words)] : []),
   ]
-  return items.filter((one) => one !== null)
+}
+
+function costLine({ amount, how }: NonNullable<BuildSums['cost']>, words: WordOptions): Line {
+  return {
+    label: 'Water bill',
+    figure: numberText(amount, 2, words),
+    detail: 'At the price you gave, without sewer charges.',
+    how,
+  }
+}
+
+function boardLines(sums: BuildSums, words: WordOptions): Line[] {
+  const { boards, push, expansion } = sums
+  return [
+    {
+      label: 'Boards at the low corner',
+      figure: `${depthText(boards.heightM, words)} or more`,
+      detail: boardsDetail(sums, words),
+      how: boards.how,
+    },
+    {
+      label: 'Push on the boards',
+      figure: pushText(push.pushNPerM, words),
+      detail: `${momentText(push.footMomentNmPerM, words)} at the foot, at the low corner.`,
+      how: push.how,
+    },
+    {
+      label: 'Rise on freezing',
+      figure: depthText(expansion.riseM, words),
+      detail: 'Ice takes a tenth more room than water, and between boards it goes up and out.',
+      how: expansion.how,
+    },
+  ]
+}
+
+function linerLines({ liner, orderBy, meltWater }: BuildSums, words: WordOptions): Line[] {
+  return [
+    {
+      label: 'Liner',
+      figure: `${lengthText(liner.lengthM, words)} × ${lengthText(liner.widthM, words)}`,
+      detail: 'Up, over and down the outside, with folds and some to spare.',
+      how: liner.how,
+    },
+    {
+      label: 'Order the liner by',
+      figure: dateText(orderBy.date, words),
+      detail: 'By late November stock is thin.',
+      how: orderBy.how,
+    },
+    {
+      label: 'Melt water in spring',
+      figure: volumeText(meltWater.volumeM3, words),
+      detail: 'Decide now where it runs: not toward a neighbour.',
+      how: meltWater.how,
+    },
+  ]
 }
 
 /** "the first three hours wet about half the floor" by what is nearest to three hours. */

@@ -1,13 +1,12 @@
 // Behind the bars: the night, missing hours, the grid, and the patterns that the strip fills with.
+import { BarredPattern } from './barred-pattern'
 import { FLOOR, type StripPartProps } from './strip-parts'
 
 /** Verdicts differ by pattern first: horizontal bars for fill, a slanted hatch where the forecast is missing. */
 export function Patterns({ id }: { id: string }) {
   return (
     <defs>
-      <pattern id={`${id}-barred`} width={4} height={4} patternUnits="userSpaceOnUse">
-        <rect width={4} height={1.8} className="fill-hose" />
-      </pattern>
+      <BarredPattern id={`${id}-barred`} />
       <pattern id={`${id}-hatch`} width={6} height={6} patternUnits="userSpaceOnUse" patternTransform="rotate(45)">
         <rect width={1.2} height={6} className="fill-still" />
       </pattern>

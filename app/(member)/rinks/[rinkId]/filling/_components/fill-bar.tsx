@@ -1,4 +1,5 @@
 // How much of the water is in, as a barred bar; the words are in the sentence above and in the caption.
+import { BarredPattern } from '@/components/charts/barred-pattern'
 import type { OpenFillView } from '@/lib/schemas/filling-view'
 import type { WordOptions } from '@/lib/words/options'
 import { flowText, iceText, waterText } from '@/lib/words/quantities'
@@ -19,9 +20,7 @@ export function FillBar({ fill, reader }: { fill: OpenFillView; reader: WordOpti
         className="block h-7 w-full"
       >
         <defs>
-          <pattern id="fill-barred" width="4" height="4" patternUnits="userSpaceOnUse">
-            <rect width="4" height="1.8" className="fill-hose" />
-          </pattern>
+          <BarredPattern id="fill-barred" />
         </defs>
         <rect width={WIDTH * progress.doneShare} height={HEIGHT} fill="url(#fill-barred)" />
         <rect

@@ -1,4 +1,5 @@
 // How the water spreads over the floor, hour by hour of hose: small bars, and the same as a table.
+import { BarredPattern } from '@/components/charts/barred-pattern'
 import { DataTable } from '@/components/ui/data-table'
 import { Disclosure } from '@/components/ui/disclosure'
 import type { BuildSums, WettedHour } from '@/lib/advice/build-types'
@@ -63,9 +64,7 @@ function Bars({ hours, description }: { hours: readonly WettedHour[]; descriptio
       preserveAspectRatio="xMinYMax meet"
     >
       <defs>
-        <pattern id="wetted-barred" width="4" height="4" patternUnits="userSpaceOnUse">
-          <rect width="4" height="1.8" className="fill-hose" />
-        </pattern>
+        <BarredPattern id="wetted-barred" />
       </defs>
       {hours.map(({ hours: at, wettedShare }, index) => (
         <rect

@@ -39,6 +39,12 @@ export async function storeForecast(
   })
 }
 
+/** The same, and what the job then judges. */
+export async function judgeForecast(...[db, cast, now, change]: Parameters<typeof storeForecast>): Promise<void> {
+  await storeForecast(db, cast, now, change)
+  await judgeNow(db, cast, now)
+}
+
 /** Judges the rink as the job does. */
 export function judgeNow(db: Knex, cast: Cast, now: Date): Promise<boolean> {
   return refreshOutlook({ db, now }, systemRinkAccess<'view'>(cast.rinkId))

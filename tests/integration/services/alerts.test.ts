@@ -5,7 +5,7 @@ import type { HourlyRecord } from '@/lib/physics/types'
 import { decideAlerts } from '@/lib/services/alerts'
 import { checkOffPass } from '@/lib/services/floods'
 import { givenCast, givenDatabase } from '@/tests/support/given-cast'
-import { judgeNow, storeForecast } from '@/tests/support/night-at-the-rink'
+import { judgeForecast, judgeNow, storeForecast } from '@/tests/support/night-at-the-rink'
 import { SNOW, THAW } from '@/tests/support/night-weather'
 
 // Toronto is five hours behind: 16:10, 17:10, … on 12 January by the rink's clock.
@@ -41,8 +41,7 @@ const windows = () =>
     .select('version', 'state')
 
 async function judgeAt(now: Date, change?: (at: Date) => Partial<HourlyRecord>): Promise<void> {
-  await storeForecast(database.db, cast, now, change)
-  await judgeNow(database.db, cast, now)
+  await judgeForecast(database.db, cast, now, change)
 }
 
 const snowFrom = (from: string) => (at: Date) => (at >= new Date(from) ? SNOW : {})

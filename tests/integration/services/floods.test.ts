@@ -6,7 +6,7 @@ import { checkOffPass, undoPass } from '@/lib/services/floods'
 import { getTonight } from '@/lib/services/tonight'
 import type { Actor } from '@/tests/support/cast'
 import { givenCast, givenDatabase } from '@/tests/support/given-cast'
-import { judgeNow, storeForecast } from '@/tests/support/night-at-the-rink'
+import { judgeForecast, judgeNow } from '@/tests/support/night-at-the-rink'
 
 const NOW = new Date('2027-01-12T23:10:00Z')
 const NIGHT = '2027-01-12'
@@ -15,8 +15,7 @@ const database = givenDatabase()
 const cast = givenCast(database, new Date('2027-01-12T19:10:00Z'))
 
 beforeEach(async () => {
-  await storeForecast(database.db, cast, NOW)
-  await judgeNow(database.db, cast, NOW)
+  await judgeForecast(database.db, cast, NOW)
 })
 
 const pass = (changes = {}) => ({ rinkId: cast.rinkId, nightDate: NIGHT, passNumber: 1, layerMm: 3, ...changes })

@@ -7,7 +7,7 @@ import { changeEntry, deleteEntry, writeEntry } from '@/lib/services/log'
 import { getLog } from '@/lib/services/log-book'
 import { givenCast, givenDatabase } from '@/tests/support/given-cast'
 import { typedChange, typedEntry } from '@/tests/support/log-form'
-import { judgeNow, storeForecast } from '@/tests/support/night-at-the-rink'
+import { judgeForecast, judgeNow } from '@/tests/support/night-at-the-rink'
 
 const NOW = new Date('2027-01-12T23:10:00Z')
 const later = (minutes: number) => new Date(NOW.getTime() + minutes * MINUTE_MILLIS)
@@ -41,8 +41,7 @@ test('sweeping a sheet of which nothing is known says nothing of its thickness',
 
 describe('with an outlook', () => {
   beforeEach(async () => {
-    await storeForecast(database.db, cast, NOW)
-    await judgeNow(database.db, cast, NOW)
+    await judgeForecast(database.db, cast, NOW)
   })
 
   const modelNow = async () => {

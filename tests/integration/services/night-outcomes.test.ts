@@ -3,7 +3,7 @@ import { expect, test } from 'vitest'
 import { systemRinkAccess } from '@/lib/access/system'
 import { settleRinkNight, startSettling } from '@/lib/services/night-outcomes'
 import { givenCast, givenDatabase } from '@/tests/support/given-cast'
-import { judgeNow, storeForecast } from '../../support/night-at-the-rink'
+import { judgeForecast, storeForecast } from '../../support/night-at-the-rink'
 import { SNOW } from '../../support/night-weather'
 
 const NIGHT = '2027-01-12'
@@ -25,24 +25,21 @@ const queued = async () => {
 }
 
 test('a flood that the later weather bears out is kept', async () => {
-  await storeForecast(database.db, cast, AFTERNOON)
-  await judgeNow(database.db, cast, AFTERNOON)
+  await judgeForecast(database.db, cast, AFTERNOON)
   await storeForecast(database.db, cast, NEXT_DAY)
   expect(await settle()).toBe(true)
   expect(await outcome()).toMatchObject({ said: 'flood', result: 'kept', source: 'weather', night_date: NIGHT })
 })
 
 test('a flood that snow fell on is broken, and settled once', async () => {
-  await storeForecast(database.db, cast, AFTERNOON)
-  await judgeNow(database.db, cast, AFTERNOON)
+  await judgeForecast(database.db, cast, AFTERNOON)
   await storeForecast(database.db, cast, NEXT_DAY, () => SNOW)
   expect((await Promise.all([settle(), settle()])).sort()).toEqual([false, true])
   expect(await outcome()).toMatchObject({ said: 'flood', result: 'broken', detail: { code: 'precipitation' } })
 })
 
 test('holding off in snow that came is kept; when the sky cleared instead, a night was missed', async () => {
-  await storeForecast(database.db, cast, AFTERNOON, () => SNOW)
-  await judgeNow(database.db, cast, AFTERNOON)
+  await judgeForecast(database.db, cast, AFTERNOON, () => SNOW)
   await storeForecast(database.db, cast, NEXT_DAY, () => SNOW)
   await settle()
   expect(await outcome()).toMatchObject({ said: 'hold', result: 'kept' })
@@ -57,8 +54,7 @@ test('holding off in snow that came is kept; when the sky cleared instead, a nig
 })
 
 test('what somebody found counts before the weather', async () => {
-  await storeForecast(database.db, cast, AFTERNOON)
-  await judgeNow(database.db, cast, AFTERNOON)
+  await judgeForecast(database.db, cast, AFTERNOON)
   await database.db('log_entries').insert({
     rink_id: cast.rinkId,
     kind: 'flood',
@@ -77,8 +73,7 @@ test('what somebody found counts before the weather', async () => {
 })
 
 test('nights are asked for once they are over, and not again when settled', async () => {
-  await storeForecast(database.db, cast, AFTERNOON)
-  await judgeNow(database.db, cast, AFTERNOON)
+  await judgeForecast(database.db, cast, AFTERNOON)
   await startSettling(database.db, new Date('2027-01-13T17:30:00Z'))
   expect(await queued()).toEqual([])
   await startSettling(database.db, NEXT_DAY)

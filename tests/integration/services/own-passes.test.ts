@@ -10,7 +10,7 @@ import { dropOwnPasses, keepOwnPasses } from '@/lib/services/own-passes'
 import { getTonight } from '@/lib/services/tonight'
 import type { Actor } from '@/tests/support/cast'
 import { givenCast, givenDatabase } from '@/tests/support/given-cast'
-import { judgeNow, storeForecast } from '@/tests/support/night-at-the-rink'
+import { judgeForecast, storeForecast } from '@/tests/support/night-at-the-rink'
 import { SNOW } from '@/tests/support/night-weather'
 
 const NOW = new Date('2027-01-12T23:10:00Z')
@@ -20,8 +20,7 @@ const database = givenDatabase()
 const cast = givenCast(database, new Date('2027-01-12T19:10:00Z'))
 
 beforeEach(async () => {
-  await storeForecast(database.db, cast, NOW)
-  await judgeNow(database.db, cast, NOW)
+  await judgeForecast(database.db, cast, NOW)
 })
 
 const tonight = (actor: Actor, now = NOW) => getTonight(actor.at(now), cast.rinkId)

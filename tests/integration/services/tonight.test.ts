@@ -2,7 +2,7 @@
 import { expect, test } from 'vitest'
 import { getTonight } from '@/lib/services/tonight'
 import { givenCast, givenDatabase } from '@/tests/support/given-cast'
-import { judgeNow, storeForecast } from '@/tests/support/night-at-the-rink'
+import { judgeForecast } from '@/tests/support/night-at-the-rink'
 
 const NOW = new Date('2027-01-12T23:10:00Z')
 
@@ -23,8 +23,7 @@ test('before the first forecast there is no outlook, and the night is known all 
 })
 
 test('a judged night has 24 hours from noon to noon, ten days are cut to what is there, and a plan', async () => {
-  await storeForecast(database.db, cast, NOW)
-  await judgeNow(database.db, cast, NOW)
+  await judgeForecast(database.db, cast, NOW)
   const tonight = await view(NOW)
   const hours = tonight.outlook?.hours ?? []
   expect(hours).toHaveLength(24)
@@ -37,27 +36,23 @@ test('a judged night has 24 hours from noon to noon, ten days are cut to what is
 
 test('a night with a clock change has its 25 hours, each once', async () => {
   const saturday = new Date('2026-10-31T22:10:00Z')
-  await storeForecast(database.db, cast, saturday)
-  await judgeNow(database.db, cast, saturday)
+  await judgeForecast(database.db, cast, saturday)
   const times = (await view(saturday)).outlook?.hours.map((hour) => hour.time) ?? []
   expect(times).toHaveLength(25)
   expect(new Set(times).size).toBe(25)
 })
 
 test('after six hours the forecast is called stale', async () => {
-  await storeForecast(database.db, cast, NOW)
-  await judgeNow(database.db, cast, NOW)
+  await judgeForecast(database.db, cast, NOW)
   expect((await view(new Date('2027-01-13T05:10:00Z'))).forecast?.isStale).toBe(true)
 })
 
 test('yesterday’s sheet is where today starts', async () => {
-  await storeForecast(database.db, cast, NOW)
-  await judgeNow(database.db, cast, NOW)
+  await judgeForecast(database.db, cast, NOW)
   const kept = await database.db('sheet_states').where({ rink_id: cast.rinkId, origin: 'modelled' }).first()
   expect(kept?.as_of).toEqual(new Date('2027-01-12T23:00:00Z'))
   const nextDay = new Date('2027-01-13T23:10:00Z')
-  await storeForecast(database.db, cast, nextDay)
-  await judgeNow(database.db, cast, nextDay)
+  await judgeForecast(database.db, cast, nextDay)
   const today = await view(nextDay)
   const yesterday = await database
     .db('scored_hours as h')

@@ -3,7 +3,7 @@ import { expect, test } from 'vitest'
 import { NotFoundError } from '@/lib/errors'
 import { getWeek } from '@/lib/services/week'
 import { givenCast, givenDatabase } from '@/tests/support/given-cast'
-import { judgeNow, storeForecast } from '@/tests/support/night-at-the-rink'
+import { judgeForecast } from '@/tests/support/night-at-the-rink'
 import { THAW } from '@/tests/support/night-weather'
 
 const NOW = new Date('2027-01-12T23:10:00Z')
@@ -11,9 +11,8 @@ const NOW = new Date('2027-01-12T23:10:00Z')
 const database = givenDatabase()
 const cast = givenCast(database, new Date('2027-01-12T19:10:00Z'))
 
-async function judged(now: Date, ...change: Parameters<typeof storeForecast>[3][]) {
-  await storeForecast(database.db, cast, now, ...change)
-  await judgeNow(database.db, cast, now)
+async function judged(now: Date, ...change: Parameters<typeof judgeForecast>[3][]) {
+  await judgeForecast(database.db, cast, now, ...change)
 }
 
 test('keeper, crew and skater see the nights; a stranger cannot see that the rink exists', async () => {

@@ -1,7 +1,7 @@
 // Who asks, and when: every page, action and route handler starts with one of these.
 import 'server-only'
 import { headers } from 'next/headers'
-import { redirect } from 'next/navigation'
+import { redirect, unstable_rethrow } from 'next/navigation'
 import { connection } from 'next/server'
 import { readClock } from '@/lib/clock'
 import type { ServiceContext, Viewer } from '@/lib/context'
@@ -10,22 +10,29 @@ import { localPath, PATH_HEADER } from './next-path'
 import { sharedPool } from './pool'
 import { readViewer } from './session'
 
-/** The viewer, or undefined for a stranger. */
+/** For open pages, which serve a stranger as well: also while nobody's session can be read. */
 export async function maybeViewer(): Promise<Viewer | undefined> {
   await connection()
-  return readViewer()
+  try {
+    return await readViewer()
+  } catch (error) {
+    unstable_rethrow(error)
+    return undefined
+  }
 }
 
 /** For actions and route handlers. @throws NotSignedInError */
 export async function requestContext(): Promise<ServiceContext> {
-  const viewer = await maybeViewer()
+  await connection()
+  const viewer = await readViewer()
   if (!viewer) throw new NotSignedInError()
   return { db: sharedPool(), now: readClock(), viewer }
 }
 
 /** For pages: strangers go to sign-in, and come back afterwards. */
 export async function pageContext(): Promise<ServiceContext> {
-  const viewer = await maybeViewer()
+  await connection()
+  const viewer = await readViewer()
   if (viewer) return { db: sharedPool(), now: readClock(), viewer }
   const path = localPath((await headers()).get(PATH_HEADER))
   redirect(path ? `/sign-in?next=${encodeURIComponent(path)}` : '/sign-in')

@@ -3,41 +3,10 @@ import { advanceSheet, createSheet, reportSheet } from '@/lib/physics/sheet'
 import { ashtonThicknessM, neumannThicknessM, stefanThicknessM } from '@/lib/physics/stefan'
 import { blackBodyWm2 } from '@/lib/physics/sky'
 import { columnThicknessM, NO_RESISTANCE_WM2K } from './exact-solutions'
-import { dewPointFromHumidityC } from '@/lib/physics/humidity'
-import { prepareHours } from '@/lib/physics/prepare'
 import { readTable } from './measured'
 import { summarise, type ValidationLine } from './scores'
+import { steadyHour, steadyHours } from './steady-hours'
 import { surfaceBalance } from '@/lib/physics/balance'
-import type { HourlyRecord, PreparedHour } from '@/lib/physics/types'
-
-const OPEN_SITE = { latitudeDeg: 60, longitudeDeg: 25, shelter: 1, skyView: 1 }
-
-function steadyHours(
-  count: number,
-  airC: number,
-  humidityPct: number,
-  windMps: number,
-  skyEmissivity = 0.8,
-): PreparedHour[] {
-  const record: Omit<HourlyRecord, 'time'> = {
-    airTemperatureC: airC,
-    dewPointC: dewPointFromHumidityC(airC, humidityPct / 100),
-    windSpeedMps: windMps,
-    windGustMps: null,
-    cloudCover: 0,
-    shortwaveWm2: 0,
-    precipitationMm: 0,
-    rainMm: 0,
-    snowfallCm: 0,
-    pressureHpa: 1013.25,
-    longwaveDownWm2: skyEmissivity * blackBodyWm2(airC),
-  }
-  const at = (hour: number) => new Date(Date.UTC(2027, 0, 10, hour)).toISOString()
-  return prepareHours(
-    Array.from({ length: count }, (_, hour) => ({ ...record, time: at(hour) })),
-    OPEN_SITE,
-  )
-}
 
 /** Sensible and latent flux of a wet surface at 0 °C, 1-6 m/s, each held against FLake. */
 export function validateWetFluxes(): ValidationLine {
@@ -45,8 +14,12 @@ export function validateWetFluxes(): ValidationLine {
   for (const row of readTable('oracles/flake_wet_surface_fluxes_at_0c.csv')) {
     const windMps = Number(row.wind_10m_ms)
     if (windMps < 1 || windMps > 6) continue
-    const [hour] = steadyHours(1, Number(row.t_air_c), Number(row.rh_pct_water), windMps)
-    const { sensible, latent } = surfaceBalance(hour!, 'wet', 0).parts
+    const hour = steadyHour({
+      airTemperatureC: Number(row.t_air_c),
+      relativeHumidity: Number(row.rh_pct_water) / 100,
+      windSpeedMps: windMps,
+    })
+    const { sensible, latent } = surfaceBalance(hour, 'wet', 0).parts
     const flakeSensible = Number(row.q_sensible_wm2)
     if (flakeSensible > 1) errors.push((sensible / flakeSensible - 1) * 100)
     errors.push((latent / Number(row.q_latent_wm2) - 1) * 100)
@@ -108,13 +81,13 @@ export function validateSteadyGrowth(): ValidationLine {
   const errors: number[] = []
   for (const row of readTable('oracles/flake_constant_weather_growth.csv')) {
     const start = Number(row.ice_start_m)
-    const hours = steadyHours(
-      48,
-      Number(row.air_c),
-      Number(row.rh_pct_water),
-      Number(row.wind_10m_ms),
-      Number(row.sky_emissivity),
-    )
+    const airTemperatureC = Number(row.air_c)
+    const hours = steadyHours(48, {
+      airTemperatureC,
+      relativeHumidity: Number(row.rh_pct_water) / 100,
+      windSpeedMps: Number(row.wind_10m_ms),
+      longwaveDownWm2: Number(row.sky_emissivity) * blackBodyWm2(airTemperatureC),
+    })
     const sheet = createSheet({
       thicknessMm: start * 1000,
       temperatureC: Math.min(0, Number(row.surface_c_24h) / 2),

@@ -15,7 +15,7 @@ import { blackBodyWm2, clearSkyEmissivity, cloudySkyEmissivity } from '@/lib/phy
 import { CLEAR_SKY_EMISSIVITIES } from '@/lib/validation/published-forms'
 import { frozenByColdMm, indoorRinkTransfer, plateNusselt, warmFaceUpNusselt } from '../support/published-forms/heat'
 import { crawfordDuchonEmissivity, faoNetLongwaveMj } from '../support/published-forms/sky-and-sun'
-import { steadyHour } from '../support/steady-hours'
+import { steadyHour } from '@/lib/validation/steady-hours'
 
 describe('longwave', () => {
   // Prata 1996, Q. J. R. Meteorol. Soc. 122, 1127, at 263.15 K and 2.0 hPa; coefficients seen in code, value computed from them.

@@ -4,7 +4,7 @@ import { freezeRateMmPerH, wetSurfaceBalance } from '@/lib/physics/balance'
 import { ashtonThicknessM, neumannLambda, neumannThicknessM, stefanThicknessM } from '@/lib/physics/stefan'
 import { heatToFreezeJ } from '../support/published-forms/heat'
 import { ashtonHours, degreeDayThicknessCm } from '../support/published-forms/ice-and-snow'
-import { steadyHour } from '../support/steady-hours'
+import { steadyHour } from '@/lib/validation/steady-hours'
 
 const M_PER_INCH = 0.0254
 /** One °F day is 1/1.8 °C day, so a coefficient in inch per root °F day is this many cm per root °C day. */

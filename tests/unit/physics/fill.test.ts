@@ -1,7 +1,7 @@
 // A filled rink: it cools, skins over, thickens and freezes through.
 import { describe, expect, test } from 'vitest'
 import { growFill } from '@/lib/physics/fill'
-import { steadyHours } from '../../support/steady-hours'
+import { steadyHours } from '@/lib/validation/steady-hours'
 
 const COLD = steadyHours(240, { airTemperatureC: -10, windSpeedMps: 2, site: { shelter: 0.6, skyView: 0.85 } })
 

@@ -8,7 +8,7 @@ import { ICE_DENSITY } from '@/lib/physics/constants'
 import { minutesToSet } from '@/lib/physics/layer'
 import { prepareHours } from '@/lib/physics/prepare'
 import { randomNight, seeded } from '../../support/random-weather'
-import { steadyHours } from '../../support/steady-hours'
+import { steadyHours } from '@/lib/validation/steady-hours'
 import { wetSurfaceBalance } from '@/lib/physics/balance'
 
 const SITE = { latitudeDeg: 46, longitudeDeg: -77, shelter: 0.6, skyView: 0.85 }

@@ -5,7 +5,7 @@ import { FUSION_J_PER_KG, WATER_HEAT_CAPACITY } from '@/lib/physics/constants'
 import { prepareHours } from '@/lib/physics/prepare'
 import { runHour } from '@/lib/physics/sheet-hour'
 import { randomWeather, seeded } from '../../support/random-weather'
-import { steadyHour, steadyHours } from '../../support/steady-hours'
+import { steadyHour, steadyHours } from '@/lib/validation/steady-hours'
 import type { SheetState } from '@/lib/physics/sheet'
 
 const SITE = { latitudeDeg: 46, longitudeDeg: -77, shelter: 0.6, skyView: 0.85 }

@@ -1,4 +1,4 @@
-// Weather that stands still, for tests that compare with a table or a closed form.
+// Weather that stands still, for what compares the model with a table or a closed form.
 import { HOUR_MILLIS } from '@/lib/physics/constants'
 import { dewPointFromHumidityC } from '@/lib/physics/humidity'
 import { prepareHours } from '@/lib/physics/prepare'

@@ -1,4 +1,5 @@
 // From tonight's view to the numbers and words of the strip, in the reader's units and the rink's time.
+import { UNKNOWN_HOUR } from '@/lib/advice/unknown-hour'
 import { addDays, instantOfLocal } from '@/lib/advice/zoned-time'
 import { HOUR_MILLIS } from '@/lib/physics/constants'
 import type { TonightHour, TonightView } from '@/lib/schemas/tonight-view'
@@ -34,17 +35,9 @@ export function hoursOfNight({ night, outlook }: Pick<StripSource, 'night' | 'ou
 function unknownHour(at: number): TonightHour {
   return {
     time: new Date(at).toISOString(),
-    isKnown: false,
-    netHeatLossWm2: null,
-    parts: null,
-    freezeRateMmPerH: null,
-    windChillC: null,
-    setsAt: null,
-    scores: { fill: 0, flood: 0, hold: 100 },
-    verdict: 'hold',
+    ...UNKNOWN_HOUR,
     reasons: [],
     sheet: { thicknessMm: 0, temperatureC: 0, liquidMm: 0, snowCoverCm: 0 },
-    weather: null,
   }
 }
 

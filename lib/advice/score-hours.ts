@@ -10,6 +10,7 @@ import type { ForecastRun } from './forecast-run'
 import { isAvailableAt, type Setting } from './setting'
 import { snowRuleReasons } from './snow-rules'
 import { PLAN, VERDICT } from './thresholds'
+import { UNKNOWN_HOUR } from './unknown-hour'
 import { toIso } from './zoned-time'
 import type { HourWeather, Reason, ScoredHour, SheetReport } from './types'
 
@@ -104,18 +105,10 @@ export function scoreHour(setting: Setting, run: ForecastRun, index: number, fil
 function unknownHour(hour: PreparedHour, sheet: SheetReport, isAvailable: boolean): ScoredHour {
   return {
     time: toIso(hour.startsAtMillis),
-    isKnown: false,
-    netHeatLossWm2: null,
-    parts: null,
-    freezeRateMmPerH: null,
-    windChillC: null,
-    setsAt: null,
-    scores: { fill: 0, flood: 0, hold: 100 },
-    verdict: 'hold',
+    ...UNKNOWN_HOUR,
     reasons: [{ code: 'weather_unknown', factor: 0, values: {} }],
     sheet,
     limits: { ice: 0, person: 0 },
-    weather: null,
     isAvailable,
   }
 }

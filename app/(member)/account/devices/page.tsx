@@ -1,10 +1,10 @@
 // Where alerts go: every device and the mailbox, each with a test.
 import type { Metadata } from 'next'
+import { pushSetup } from '@/app/(member)/_components/push-setup'
 import { browserName } from '@/components/alerts/words'
 import { DeviceSwitch } from '@/components/alerts/device-switch'
 import { TestButton } from '@/components/alerts/test-button'
 import { pageContext } from '@/lib/auth/request-context'
-import { readEnvironment } from '@/lib/env'
 import { orNotFound } from '@/lib/http/or-not-found'
 import { getAccount } from '@/lib/services/own-account'
 import { listOwnDevices } from '@/lib/services/push-subscriptions'
@@ -19,14 +19,10 @@ export default async function DevicesPage() {
   const context = await pageContext()
   const { email, isEmailRefused } = await orNotFound(getAccount(context))
   const devices = await listOwnDevices(context)
-  const enabled = devices.filter(({ disabledReason }) => disabledReason === null)
   return (
     <AccountFrame title="Devices and mail">
       <Section title="This device">
-        <DeviceSwitch
-          vapidPublicKey={readEnvironment().VAPID_PUBLIC_KEY}
-          fingerprints={enabled.map(({ fingerprint }) => fingerprint)}
-        />
+        <DeviceSwitch {...pushSetup(devices)} />
       </Section>
       <Section title="Your devices">
         {devices.length === 0 ? <p className="text-graphite">No device is told yet.</p> : null}

@@ -1,11 +1,11 @@
 // Alerts: when and how one is told about this rink, silence, devices, and what one was told.
 import type { Metadata } from 'next'
 import type { ReactNode } from 'react'
+import { pushSetup } from '@/app/(member)/_components/push-setup'
 import { DeviceSwitch } from '@/components/alerts/device-switch'
 import { RinkFrame } from '@/components/rinks/rink-frame'
 import { Notice } from '@/components/ui/notice'
 import { pageContext } from '@/lib/auth/request-context'
-import { readEnvironment } from '@/lib/env'
 import { orNotFound } from '@/lib/http/or-not-found'
 import { getAlertSettings } from '@/lib/services/alert-preferences'
 import { standingText } from './_components/alert-words'
@@ -20,7 +20,6 @@ export default async function AlertsPage({ params }: PageProps<'/rinks/[rinkId]/
   const { rinkId } = await params
   const settings = await orNotFound(getAlertSettings(await pageContext(), rinkId))
   const { rink, preferences, tonightDate, email, devices } = settings
-  const enabled = devices.filter(({ disabledReason }) => disabledReason === null)
   return (
     <RinkFrame name={rink.name} about="Alerts">
       <h1 className="mb-6 max-w-[26ch] text-verdict font-medium lg:text-verdict-wide">{standingText(settings)}</h1>
@@ -46,10 +45,7 @@ export default async function AlertsPage({ params }: PageProps<'/rinks/[rinkId]/
             />
           </Section>
           <Section title="This device">
-            <DeviceSwitch
-              vapidPublicKey={readEnvironment().VAPID_PUBLIC_KEY}
-              fingerprints={enabled.map(({ fingerprint }) => fingerprint)}
-            />
+            <DeviceSwitch {...pushSetup(devices)} />
           </Section>
           <Section title="Your devices">
             <DeviceList rinkId={rinkId} timeZone={rink.timeZone} devices={devices} />

@@ -1,6 +1,6 @@
 // Changing one pass: earlier or later, thinner or thicker, other water. All passes after it follow at once, by the same model.
 'use client'
-import { useMemo } from 'react'
+import { useEffect, useEffectEvent, useMemo } from 'react'
 import useSWR from 'swr'
 import { readerOf } from '@/components/rinks/reader'
 import { Button } from '@/components/ui/button'
@@ -36,8 +36,15 @@ function Mover({ view, passes, number, onMove, movable }: PassMoverProps & { mov
   const night = useMemo(() => unpackNight(movable.model), [movable])
   const reader = readerOf(view)
   const pass = passes.find((one) => one.number === number)
+  const moved = (by: Move) => movePass({ night, movable, passes, number, by })
+  // The first judgement in a browser takes three times as long as any after it: it is made before the first tap.
+  const warmUp = useEffectEvent(() => moved({ minutes: 0 }))
+  useEffect(() => {
+    const timer = setTimeout(warmUp, 0)
+    return () => clearTimeout(timer)
+  }, [])
   if (!pass) return null
-  const move = (by: Move) => onMove(movePass({ night, movable, passes, number, by }))
+  const move = (by: Move) => onMove(moved(by))
   const steps = stepsOf(pass, view)
   return (
     <div role="group" aria-label={`Change pass ${number}`} className="mt-3 grid gap-3 print:hidden">

@@ -12,12 +12,15 @@ interface LegendProps {
 
 export function NightLegend({ night, reader, drawn }: LegendProps) {
   const { sunsetAt, sunriseAt } = night
+  const has = (verdict: StripHour['verdict']) => drawn.some((hour) => hour.verdict === verdict)
   return (
     <ul className="flex list-none pt-2 flex-wrap gap-x-[18px] gap-y-1 p-0 text-small text-graphite">
-      <Key word="flood">
-        <rect x={1} y={1} width={13} height={11} className="fill-lamp stroke-lamp-text" />
-      </Key>
-      {drawn.some((hour) => hour.verdict === 'fill') ? (
+      {has('flood') ? (
+        <Key word="flood">
+          <rect x={1} y={1} width={13} height={11} className="fill-lamp stroke-lamp-text" />
+        </Key>
+      ) : null}
+      {has('fill') ? (
         <Key word="fill">
           <path d="M1,2 h13 M1,6 h13 M1,10 h13" className="stroke-hose" strokeWidth={1.8} />
         </Key>

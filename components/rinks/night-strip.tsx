@@ -1,6 +1,7 @@
 // The night strip of one rink: drawing, hours to open, legend, and the same numbers as a table.
 'use client'
 import { memo, useCallback, useMemo, useState, type ComponentProps } from 'react'
+import { HOUR_MILLIS } from '@/lib/physics/constants'
 import { useMedia } from '../hooks/use-media'
 import { bracketsOf, layOutNightStrip } from '../charts/night-strip-layout'
 import { NightStripDrawing } from '../charts/night-strip-drawing'
@@ -48,7 +49,7 @@ export function NightStrip({ source, now }: { source: StripSource; now: number }
     [night, rink, viewer, scored, reader, hours, drawn, now],
   )
   const nameOf = useCallback((index: number) => names[index] ?? '', [names])
-  const present = drawn.findIndex((hour) => hour.startsAt + 3_600_000 > now)
+  const present = drawn.findIndex((hour) => hour.startsAt + HOUR_MILLIS > now)
   return (
     <figure className="-mx-5 border-y border-rule bg-sheet pt-3 lg:mx-0 lg:border-x print:mx-0 print:border-x">
       {figures.map(({ size, input, layout, words }) => (

@@ -10,14 +10,15 @@ import { isMuted } from '@/lib/advice/alert-due'
 import { tonightDate } from '@/lib/advice/night'
 import { FILLING } from '@/lib/advice/thresholds'
 import type { ServiceContext } from '@/lib/context'
+import { HOUR_MILLIS, MINUTE_MILLIS } from '@/lib/physics/constants'
 import type { FillCheckContent } from '@/lib/schemas/alert-content'
 import { cautionText } from '@/lib/words/cautions'
 import { fillReminder } from '@/lib/words/fill-reminder'
+import { wordsFor } from '@/lib/words/options'
 import { channelsOf } from './alert-channels'
 import { litresBy, targetLitres } from './fill-facts'
 
-const MINUTE_MILLIS = 60_000
-const STEP_MILLIS = FILLING.checkEveryHours * 60 * MINUTE_MILLIS
+const STEP_MILLIS = FILLING.checkEveryHours * HOUR_MILLIS
 /** Nobody is called out for longer than this after the last look: a day and a night. Ours. */
 const MOST_REMINDERS = 12
 const TAKE_CARE = ['backflow', 'wet_pavement', 'electric_leads', 'not_alone']
@@ -95,7 +96,7 @@ async function remind(
 }
 
 function contentOf(rink: RinkForJudging, person: AlertRecipient, { litres, isDone }: Reminder): FillCheckContent {
-  const words = { timeZone: rink.timeZone, units: person.units, clock: person.clock, locale: 'en' }
+  const words = wordsFor(person, rink.timeZone)
   return {
     rinkId: rink.id,
     words: {

@@ -15,13 +15,13 @@ import { enqueueRefresh } from '@/db/queries/jobs'
 import { countChange, movePhase } from '@/db/queries/rink-settings'
 import { insertEntry } from '@/db/queries/log-entries'
 import { insertReportedSheet } from '@/db/queries/sheet-states'
-import { findRinkForJudging, type RinkForJudging } from '@/db/queries/rinks'
+import { getRinkForJudging, type RinkForJudging } from '@/db/queries/rinks'
 import type { Db } from '@/db/knex'
 import type { RinkAccess } from '@/lib/access/proofs'
 import { requireRink } from '@/lib/access/require-rink'
 import { nightDateOf } from '@/lib/advice/night'
 import type { ServiceContext } from '@/lib/context'
-import { ConflictError, NotFoundError } from '@/lib/errors'
+import { ConflictError } from '@/lib/errors'
 import { hasIce } from '@/lib/schemas/rink-choices'
 import type { CheckFillInput, ResumeFillInput, StartFillInput } from '@/lib/schemas/fills'
 import { litresBy } from './fill-facts'
@@ -48,7 +48,7 @@ export async function startFill(context: ServiceContext, input: StartFillInput):
   const { db, now, viewer } = context
   const access = await requireRink(context, input.rinkId, 'writeLog')
   await db.transaction(async (trx) => {
-    const rink = await getRink(trx, access)
+    const rink = await getRinkForJudging(trx, access.rinkId)
     const targetDepthMm = input.targetDepthMm ?? rink.water.fillDepthMm
     const fillId = await insertFill(trx, access, { startedBy: viewer.userId, targetDepthMm }, now)
     const fill = await findNewestFill(trx, access)
@@ -153,12 +153,6 @@ async function atOpenFill(
   await context.db.transaction(async (trx) => {
     const fill = await lockOpenFill(trx, access)
     if (!fill) throw new ConflictError('This fill is finished. Load the page again to see how it stands.')
-    await work({ trx, access, fill, rink: await getRink(trx, access) })
+    await work({ trx, access, fill, rink: await getRinkForJudging(trx, access.rinkId) })
   })
-}
-
-async function getRink(trx: Db, access: RinkAccess): Promise<RinkForJudging> {
-  const rink = await findRinkForJudging(trx, access.rinkId)
-  if (!rink) throw new NotFoundError('Rink')
-  return rink
 }

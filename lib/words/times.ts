@@ -1,13 +1,12 @@
 // Times in words, always by the rink's clock.
 import { localMinuteOf, nightDateOf, tonightDate } from '@/lib/advice/night'
 import { addDays, localDateOf } from '@/lib/advice/zoned-time'
+import { MINUTE_MILLIS } from '@/lib/physics/constants'
 import type { WordOptions } from './options'
-
-const MINUTE = 60_000
 
 /** "8 pm", "1:50 am", "midnight"; on a 24-hour clock "20:00". */
 export function clockText(at: string | Date, words: WordOptions): string {
-  const minute = localMinuteOf(Math.round(new Date(at).getTime() / MINUTE) * MINUTE, words.timeZone)
+  const minute = localMinuteOf(Math.round(new Date(at).getTime() / MINUTE_MILLIS) * MINUTE_MILLIS, words.timeZone)
   const hour = Math.floor(minute / 60)
   const twoDigits = (number: number) => String(number).padStart(2, '0')
   if (words.clock === '24') return `${twoDigits(hour)}:${twoDigits(minute % 60)}`
@@ -19,7 +18,7 @@ export function clockText(at: string | Date, words: WordOptions): string {
 
 /** A moment by which something is done, to the next five minutes, so that the promise holds. */
 export function doneByText(at: string, words: WordOptions): string {
-  return clockText(new Date(Math.ceil(Date.parse(at) / (5 * MINUTE)) * 5 * MINUTE), words)
+  return clockText(new Date(Math.ceil(Date.parse(at) / (5 * MINUTE_MILLIS)) * 5 * MINUTE_MILLIS), words)
 }
 
 /** Name of the weekday of an instant, by the rink's clock. */

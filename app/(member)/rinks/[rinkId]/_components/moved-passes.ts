@@ -1,9 +1,10 @@
 // What a move makes of the plan: the pass changed, and every pass of the night judged anew.
 import { judgePasses } from '@/lib/advice/move-pass'
 import type { NightRun } from '@/lib/advice/night-model'
+import { MINUTE_MILLIS } from '@/lib/physics/constants'
 import type { MovableNight, TonightPass, TonightView, WaterChoice } from '@/lib/schemas/tonight-view'
 
-const STEP = 15 * 60_000
+const STEP = 15 * MINUTE_MILLIS
 const LEAST_MM = 0.5
 const MOST_MM = 20
 
@@ -35,7 +36,7 @@ function withMove(pass: TonightPass, by: Move, areaM2: number): TonightPass {
   const waterL = layerMm * areaM2
   return {
     ...pass,
-    startsAt: 'minutes' in by ? onQuarter(Date.parse(pass.startsAt) + by.minutes * 60_000) : pass.startsAt,
+    startsAt: 'minutes' in by ? onQuarter(Date.parse(pass.startsAt) + by.minutes * MINUTE_MILLIS) : pass.startsAt,
     layerMm,
     temperatureC,
     flowLPerMin,

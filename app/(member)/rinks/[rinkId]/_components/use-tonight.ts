@@ -6,9 +6,9 @@ import { useOnline } from '@/components/hooks/use-online'
 import { outlookKey } from '@/lib/cache-keys/outlook'
 import { fetchJson, FetchJsonError } from '@/lib/http/fetch-json'
 import type { FormState } from '@/lib/http/form-state'
+import { MINUTE_MILLIS } from '@/lib/physics/constants'
 import type { TonightView } from '@/lib/schemas/tonight-view'
 
-const MINUTE = 60_000
 const SOON = 2000
 const NO_ANSWER = 'There was no answer from the server, so nothing was changed. Try again when you have a connection.'
 
@@ -29,7 +29,7 @@ export function useTonight(initial: TonightView) {
   const [isFresh, setIsFresh] = useState(true)
   const [awaited, setAwaited] = useState<Awaited>(null)
   // What the server has just sent need not be asked for again; a sheet kept by the service worker is older.
-  const [isKept] = useState(() => Date.now() - Date.parse(initial.readAt) > MINUTE)
+  const [isKept] = useState(() => Date.now() - Date.parse(initial.readAt) > MINUTE_MILLIS)
   // Kept between renders: a new function would start the wait anew, and the minute would never be over.
   const refreshInterval = useCallback(
     (latest?: TonightView) => pauseBefore(latest ?? initial, awaited),
@@ -40,7 +40,8 @@ export function useTonight(initial: TonightView) {
     revalidateOnMount: isKept,
     refreshInterval,
     dedupingInterval: 1000,
-    onErrorRetry: (_error, _key, _config, retry, { retryCount }) => setTimeout(() => retry({ retryCount }), MINUTE / 4),
+    onErrorRetry: (_error, _key, _config, retry, { retryCount }) =>
+      setTimeout(() => retry({ retryCount }), MINUTE_MILLIS / 4),
     onError: () => setIsFresh(false),
     onSuccess: () => setIsFresh(true),
   })
@@ -50,7 +51,7 @@ export function useTonight(initial: TonightView) {
   const change: ChangeView = async (work, shown) => {
     try {
       await mutate(doThenRead(work, key), { optimisticData: shown, rollbackOnError: true, revalidate: false })
-      setAwaited({ judgedAt: judgedAt ?? null, until: Date.now() + MINUTE / 2 })
+      setAwaited({ judgedAt: judgedAt ?? null, until: Date.now() + MINUTE_MILLIS / 2 })
       return null
     } catch (fault) {
       return fault instanceof Refused ? fault.message : NO_ANSWER
@@ -59,7 +60,7 @@ export function useTonight(initial: TonightView) {
 
   /** After something was sent by another way than `change`: a new judgement is on its way too. */
   const readAfterChange = useCallback(async () => {
-    setAwaited({ judgedAt: judgedAt ?? null, until: Date.now() + MINUTE / 2 })
+    setAwaited({ judgedAt: judgedAt ?? null, until: Date.now() + MINUTE_MILLIS / 2 })
     await mutate()
   }, [mutate, judgedAt])
 
@@ -77,7 +78,7 @@ async function doThenRead(work: () => Promise<FormState>, key: string): Promise<
 function pauseBefore({ outlook }: TonightView, awaited: Awaited): number {
   if (!outlook) return SOON
   const isAwaited = awaited !== null && outlook.judgedAt === awaited.judgedAt && Date.now() < awaited.until
-  return isAwaited ? SOON : MINUTE
+  return isAwaited ? SOON : MINUTE_MILLIS
 }
 
 function troubleOf(isOnline: boolean, error: Error | undefined): ReadTrouble {

@@ -1,10 +1,11 @@
 // When the page asks whether a poured pass is set.
+import { HOUR_MILLIS, MINUTE_MILLIS } from '@/lib/physics/constants'
 import type { PouredPassView } from '@/lib/schemas/tonight-view'
 
 /** Asked so long after the pour where nobody knows when it should be set. [ms] */
-const ASK_AFTER = 2 * 3_600_000
+const ASK_AFTER = 2 * HOUR_MILLIS
 /** "Still wet" is no last word: asked again after so long. [ms] */
-const ASK_AGAIN = 30 * 60_000
+const ASK_AGAIN = 30 * MINUTE_MILLIS
 
 /** Whether it is time to ask. */
 export function isAsked({ entry, outcome, outcomeAt, saidSetByAt, at }: PouredPassView, now: number): boolean {

@@ -2,7 +2,7 @@
 import fs from 'node:fs'
 import path from 'node:path'
 import { address, findLoggedRink, listRinks, openBrowser, signIn } from './browser.mjs'
-import { MEMBER_PAGES, OPEN_PAGES, RINK_PAGES } from './list.mjs'
+import { findLinkedPage, LINKED_PAGES, MEMBER_PAGES, OPEN_PAGES, RINK_PAGES } from './list.mjs'
 
 const FOLDER = '.data/pictures'
 const WIDTHS = { 390: 844, 1280: 900 }
@@ -33,6 +33,9 @@ await signIn(page)
 for (const [name, where] of Object.entries(MEMBER_PAGES).filter(isWanted)) await picture(page, name, address + where)
 const rink = await findLoggedRink(page)
 for (const [name, where] of Object.entries(RINK_PAGES).filter(isWanted)) await picture(page, name, rink + where)
+for (const [name, linked] of Object.entries(LINKED_PAGES).filter(isWanted)) {
+  await picture(page, name, await findLinkedPage(page, rink, linked))
+}
 // The same page says different things of a rink that waits, floods or thaws.
 for (const [index, other] of (await listRinks(page)).entries()) {
   const name = `tonight-${index + 1}`

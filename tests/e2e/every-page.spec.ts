@@ -1,6 +1,6 @@
 // Every page, on a phone, on a desk and at 200 % zoom, light and dark: readable by everybody, never wider than the screen.
 import type { Page } from '@playwright/test'
-import { MEMBER_PAGES, OPEN_PAGES, RINK_PAGES } from '../../jobs/pages/list.mjs'
+import { findLinkedPage, LINKED_PAGES, MEMBER_PAGES, OPEN_PAGES, RINK_PAGES } from '../../jobs/pages/list.mjs'
 import { openBirchLane, seedTheDemo, signInAsKeeper } from './demo'
 import { expect, expectAccessible, test } from './fixtures'
 
@@ -27,9 +27,12 @@ test('pages that need no account', async ({ page }) => {
 })
 
 test('pages of a person and of a rink', async ({ page }) => {
-  test.setTimeout(300_000)
+  test.setTimeout(600_000)
   await signInAsKeeper(page)
   for (const path of Object.values(MEMBER_PAGES)) await expectFit(page, path)
   const rink = await openBirchLane(page)
   for (const path of Object.values(RINK_PAGES)) await expectFit(page, rink + path)
+  for (const linked of Object.values(LINKED_PAGES)) {
+    await expectFit(page, (await findLinkedPage(page, rink, linked)) ?? `no link ${linked.href}`)
+  }
 })

@@ -14,7 +14,7 @@ export const signInAction = formAction(signInFormSchema, async ({ by, next, ...i
   const context = await openContext()
   if (by === 'link') {
     await atLeast(MAIL_ANSWER_MILLIS, requestLink(context, input, 'sign-in'))
-    return goToCheckYourMail(input.email, 'sign-in')
+    return goToCheckYourMail(input.email, 'sign-in', next)
   }
   const signedIn = await signInWithPassword(context, passwordSignInSchema.parse(input))
   await startSession(signedIn.userId)

@@ -7,10 +7,10 @@ import { wayIn } from '@/lib/auth/way-in'
 import { formAction } from '@/lib/http/form-action'
 import { linkSchema } from '@/lib/schemas/accounts'
 import { confirmAddress } from '@/lib/services/accounts'
-import { readSignedUpAddress } from '../mailed-address'
+import { readSignedUpAddress, takeComeBackPath } from '../mailed-address'
 
 export const confirmAddressAction = formAction(linkSchema, async ({ key }) => {
   const signedIn = await confirmAddress(await openContext(), key, await readSignedUpAddress())
   await startSession(signedIn.userId)
-  redirect(wayIn(signedIn))
+  redirect(wayIn(signedIn, await takeComeBackPath()))
 })

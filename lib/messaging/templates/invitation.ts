@@ -40,7 +40,7 @@ export function invitationMail({ asRole, can, validFor, url, ...names }: Invitat
     ],
     lists: [],
     action: { label: 'See the invitation', url },
-    closing: [`If you do not know ${inviterName}, leave this mail unanswered: you hear no more of it.`],
+    closing: [`If you do not know ${inviterName}, leave this mail unanswered: nothing happens then.`],
     reason: `You get this because ${inviterName} typed this address to invite you.`,
     footLinks: [],
   })

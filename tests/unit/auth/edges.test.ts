@@ -1,6 +1,6 @@
 // The small decisions at the edge: where to return to, who is asking, which cookie.
 import { expect, test } from 'vitest'
-import { localPath } from '@/lib/auth/next-path'
+import { localPath, withNext } from '@/lib/auth/next-path'
 import { hashPassword, verifyPassword } from '@/lib/auth/passwords'
 import { sessionCookie } from '@/lib/auth/session-cookie'
 import { createSessionToken, hashSessionToken } from '@/lib/auth/session-tokens'
@@ -16,6 +16,9 @@ test.each([
   '/\\evil.example',
   '/\t/evil.example',
   '\\/evil.example',
+  '/.//evil.example',
+  '/rinks/..//evil.example/rinks',
+  '/%2e//evil.example',
   'javascript:alert(1)',
   'rinks',
   '',
@@ -28,6 +31,13 @@ test.each([
 
 test('a path that climbs is flattened', () => {
   expect(localPath('/rinks/../account')).toBe('/account')
+})
+
+test('a door carries the page behind it, whole, or nothing', () => {
+  const next = '/invitation?key=a.b&c=d'
+  const { pathname, searchParams } = new URL(withNext('/sign-up', next), 'https://nightsheet.test')
+  expect([pathname, [...searchParams]]).toEqual(['/sign-up', [['next', next]]])
+  expect(withNext('/sign-in', undefined)).toBe('/sign-in')
 })
 
 test('the visitor is what our own proxy saw, not what the visitor wrote', () => {

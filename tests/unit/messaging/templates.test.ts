@@ -8,6 +8,7 @@ import {
 } from '@/lib/messaging/templates/account'
 import { alertMail, alertPush } from '@/lib/messaging/templates/alerts'
 import type { AlertKind, AlertWords } from '@/lib/messaging/templates/alerts'
+import { invitationMail } from '@/lib/messaging/templates/invitation'
 
 const words: AlertWords = {
   rinkName: 'Birch Lane',
@@ -172,5 +173,46 @@ describe('account mail', () => {
     for (const { subject, text } of [...accountMails, ...kinds.map((kind) => alertMail(kind, words))]) {
       expect(subject + text).not.toContain('!')
     }
+  })
+})
+
+describe('an invitation', () => {
+  const invitation = {
+    rinkName: 'Birch Lane',
+    inviterName: 'Maren Holt',
+    asRole: 'as crew',
+    can: 'write the log',
+    validFor: '14 days',
+    url: 'https://nightsheet.test/invitation?key=abc',
+  }
+
+  test('says who invites to what, as what, and for how long, in the text and in the HTML', () => {
+    const { subject, text, html } = invitationMail(invitation)
+    expect(subject).toBe('Maren Holt invites you to Birch Lane')
+    for (const part of ['Maren Holt', 'Join Birch Lane as crew', 'You could write the log.', '14 days']) {
+      expect(text).toContain(part)
+      expect(visibleText(html)).toContain(part)
+    }
+    expect(text).toContain(invitation.url)
+  })
+
+  test.each([
+    'Win a prize: https://evil.example/now',
+    'evil.example',
+    'claim@evil.example',
+    'Maren\r\nBcc: all@evil.example',
+    '<a href="https://evil.example">Maren</a>',
+  ])('a name is no place for an address or a line: %o', (name) => {
+    const { subject, text, html } = invitationMail({ ...invitation, inviterName: name, rinkName: name })
+    expect(subject).not.toMatch(/[\r\n]/)
+    for (const side of [subject, text, visibleText(html)])
+      expect(side).not.toMatch(/evil\.example|https?:\/\/evil|@evil/)
+    expect(html).not.toContain('<a href="https://evil')
+  })
+
+  test('a name keeps its dots and dashes, and a long one is cut', () => {
+    const { subject } = invitationMail({ ...invitation, inviterName: 'J. O’Neill-Berg', rinkName: 'x'.repeat(200) })
+    expect(subject).toMatch(/^J\. O’Neill-Berg invites you to x+…$/)
+    expect(subject.length).toBeLessThanOrEqual(140)
   })
 })

@@ -7,9 +7,10 @@ import { wayIn } from '@/lib/auth/way-in'
 import { formAction } from '@/lib/http/form-action'
 import { linkSchema } from '@/lib/schemas/accounts'
 import { signInWithLink } from '@/lib/services/accounts'
+import { takeComeBackPath } from '../../mailed-address'
 
 export const signInWithLinkAction = formAction(linkSchema, async ({ key }) => {
   const signedIn = await signInWithLink(await openContext(), key)
   await startSession(signedIn.userId)
-  redirect(wayIn(signedIn))
+  redirect(wayIn(signedIn, await takeComeBackPath()))
 })

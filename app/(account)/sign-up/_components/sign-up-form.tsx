@@ -5,11 +5,12 @@ import { TextField } from '@/components/ui/field'
 import { EmailField, NewPasswordField } from '@/components/ui/person-fields'
 import { signUpAction } from '../actions'
 
-export function SignUpForm() {
+export function SignUpForm({ next }: { next?: string }) {
   return (
     <ActionForm action={signUpAction} submit="Sign up">
       {(state) => (
         <>
+          {next ? <input type="hidden" name="next" value={next} /> : null}
           <TextField
             label="Name"
             name="name"

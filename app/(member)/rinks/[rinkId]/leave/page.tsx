@@ -20,11 +20,14 @@ export default async function LeavePage({ params }: PageProps<'/rinks/[rinkId]/l
         </h1>
         <p className="mb-5 max-w-line">
           {isOnlyKeeper
-            ? 'A rink needs a keeper, so you cannot leave it. You can delete it, with its log, for everybody on it.'
+            ? 'A rink needs a keeper, so you cannot leave it yet. Make somebody else keeper first, or delete it, with its log, for everybody on it.'
             : 'You hear no more of it and see it no more. What you wrote in its log stays.'}
         </p>
         {isOnlyKeeper ? (
-          <ButtonLink href={`/rinks/${rinkId}/settings/delete` as Route}>Delete the rink</ButtonLink>
+          <div className="flex flex-wrap gap-3">
+            <ButtonLink href={`/rinks/${rinkId}/people` as Route}>People</ButtonLink>
+            <ButtonLink href={`/rinks/${rinkId}/settings/delete` as Route}>Delete the rink</ButtonLink>
+          </div>
         ) : (
           <LeaveForm rinkId={rinkId} />
         )}

@@ -36,6 +36,7 @@ const GROUPS: { title: string; places: Place[] }[] = [
     title: 'This rink',
     places: [
       { path: 'alerts', word: 'Alerts', about: 'When and how you are told', needs: 'receiveAlerts' },
+      { path: 'people', word: 'People', about: 'Keeper, crew and skaters', needs: 'view' },
       { path: 'settings', word: 'Rink settings', about: 'Place, floor, water, hours, limits', needs: 'manage' },
     ],
   },

@@ -18,8 +18,8 @@ export default async function DataPage() {
     <AccountFrame title="Your data">
       <Section title="Take everything along">
         <p className="mb-4 max-w-line">
-          One JSON file: your account, your rinks with their settings and logs, your alerts and what you were told. No
-          passwords and no keys are in it.
+          One JSON file: your account, your rinks with their settings and logs, whom you invited, your alerts and what
+          you were told. No passwords and no keys are in it.
         </p>
         <a
           href="/api/account/export"
@@ -37,7 +37,7 @@ export default async function DataPage() {
         {rinks.length > 0 ? (
           <p className="mb-4 max-w-line border-l-[3px] border-rust pl-3.5">
             Only you keep {rinks.map(({ name }) => name).join(', ')}: {rinks.length === 1 ? 'it goes' : 'they go'} too,
-            for everybody.
+            for everybody. To leave {rinks.length === 1 ? 'it' : 'them'} to others, make one of its people keeper first.
           </p>
         ) : null}
         <DeletionForm hasPassword={hasPassword} />

@@ -32,6 +32,7 @@ export const RINK_PAGES = {
   freezing: '/freezing',
   alerts: '/alerts',
   settings: '/settings',
+  people: '/people',
   'settings-place': '/settings/place',
   'settings-yard': '/settings/yard',
   'settings-ice': '/settings/ice',

@@ -120,6 +120,11 @@ export async function findInvitation(db: Db, invitationId: string): Promise<Invi
     })
 }
 
+/** The newest to an address that its owner has confirmed. */
+export async function findInvitationTo(db: Db, email: string, now: Date): Promise<{ id: string } | undefined> {
+  return standing(db).where({ email }).where('expires_at', '>', now).orderBy('created_at', 'desc').first('id')
+}
+
 /** Uses an invitation up: of two who try at once, one gets the role and the other nothing. */
 export async function takeInvitation(
   trx: Db,

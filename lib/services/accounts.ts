@@ -1,6 +1,7 @@
 // Becoming known, signing in, and getting back in. No answer here tells a visitor whether an address has an account.
 import type { Db } from '@/db/knex'
 import { consumeAccountLink, findGoodAccountLink, voidAccountLinks, type LinkPurpose } from '@/db/queries/account-links'
+import { findInvitationTo } from '@/db/queries/invitations'
 import { deleteSessionsOf } from '@/db/queries/sessions'
 import {
   changeEmail,
@@ -12,7 +13,7 @@ import {
   putUnconfirmedUser,
   setPasswordHash,
 } from '@/db/queries/users'
-import { openLinkKey } from '@/lib/auth/account-links'
+import { linkUrl, openLinkKey } from '@/lib/auth/account-links'
 import { hashPassword, verifyPassword } from '@/lib/auth/passwords'
 import type { OpenContext } from '@/lib/context'
 import { InvalidInputError } from '@/lib/errors'
@@ -25,6 +26,8 @@ export interface SignedIn {
   hasRink: boolean
   /** Its deletion was asked for, and may be taken back. */
   isLeaving: boolean
+  /** Where an invitation to their address waits, for somebody without a rink. */
+  invitationPath?: string
 }
 
 /** One sentence for a wrong password, an unknown address and an unconfirmed one. */
@@ -74,7 +77,7 @@ export async function signInWithPassword(
   await spend(context, 'signInByEmail', email)
   const user = await findUserForSignIn(context.db, email)
   const matches = await verifyPassword(user?.passwordHash, password)
-  if (user && matches && user.emailVerifiedAt) return signedIn(context.db, user.id)
+  if (user && matches && user.emailVerifiedAt) return signedIn(context, user.id)
   if (user && matches) await resendConfirmation(context, user.id, email)
   throw new InvalidInputError(SIGN_IN_REFUSED)
 }
@@ -163,11 +166,21 @@ async function withLink(
     const used = await consumeAccountLink(trx, link, now)
     if (!used) throw new InvalidInputError(LINK_REFUSED)
     await work(trx, used.userId, used.newEmail)
-    return signedIn(trx, used.userId)
+    return signedIn({ db: trx, now, secret }, used.userId)
   })
 }
 
-async function signedIn(db: Db, userId: string): Promise<SignedIn> {
-  const account = await findAccount(db, userId)
-  return { userId, hasRink: await isOnAnyRink(db, userId), isLeaving: Boolean(account?.deletionDueAt) }
+type SigningIn = Pick<OpenContext, 'db' | 'now' | 'secret'>
+
+async function signedIn(context: SigningIn, userId: string): Promise<SignedIn> {
+  const account = await findAccount(context.db, userId)
+  const hasRink = await isOnAnyRink(context.db, userId)
+  const invitationPath = account && !hasRink ? await findInvitationPath(context, account.email) : undefined
+  return { userId, hasRink, isLeaving: Boolean(account?.deletionDueAt), invitationPath }
+}
+
+/** The address is confirmed: its owner could as well open the mail that went there. */
+async function findInvitationPath({ db, now, secret }: SigningIn, email: string): Promise<string | undefined> {
+  const invitation = await findInvitationTo(db, email, now)
+  return invitation && linkUrl('', secret, { id: invitation.id, purpose: 'invitation' })
 }

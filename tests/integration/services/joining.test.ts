@@ -1,12 +1,14 @@
 // Answering an invitation: once, in time, by whoever holds its key, and never by looking at it.
 import { randomUUID } from 'node:crypto'
 import { beforeEach, describe, expect, test } from 'vitest'
+import { insertAccountLink } from '@/db/queries/account-links'
 import { listAlertRecipients } from '@/db/queries/alert-preferences'
 import { systemRinkAccess } from '@/lib/access/system'
 import type { Role } from '@/lib/access/permissions'
 import { linkKey } from '@/lib/auth/account-links'
 import type { OpenContext } from '@/lib/context'
 import { DAY_MILLIS } from '@/lib/physics/constants'
+import { signInWithLink } from '@/lib/services/accounts'
 import { invite, MOST_PEOPLE, takeInvitationBack } from '@/lib/services/invitations'
 import { join, readInvitation } from '@/lib/services/joining'
 import { getMyRink } from '@/lib/services/my-rinks'
@@ -165,5 +167,31 @@ describe('one that cannot be taken says why', () => {
     })
     const late = both[0].status === 'rejected' ? nils : cast.stranger
     expect(await read(late === nils ? first : second, late)).toMatchObject({ state: 'open' })
+  })
+})
+
+describe('at the door', () => {
+  const signInAgain = async (actor: Actor, now = NOW) => {
+    const { id } = await insertAccountLink(
+      database.db,
+      { userId: actor.userId, purpose: 'sign-in', expiresAt: new Date(now.getTime() + DAY_MILLIS) },
+      now,
+    )
+    return signInWithLink(open(now), linkKey(SETTINGS.secret, { id, purpose: 'sign-in' }))
+  }
+
+  test('who has no rink is led to the invitation that waits for their address, while it stands', async () => {
+    expect((await signInAgain(nils)).invitationPath).toBeUndefined()
+    const key = await invited()
+    expect(await signInAgain(nils)).toMatchObject({ hasRink: false, invitationPath: `/invitation?key=${key}` })
+    expect((await signInAgain(cast.stranger)).invitationPath).toBeUndefined()
+    expect((await signInAgain(nils, TOO_LATE)).invitationPath).toBeUndefined()
+    await takeBack()
+    expect((await signInAgain(nils)).invitationPath).toBeUndefined()
+  })
+
+  test('who has one goes there', async () => {
+    await invited('crew', cast.crew.email)
+    expect(await signInAgain(cast.crew)).toMatchObject({ hasRink: true, invitationPath: undefined })
   })
 })

@@ -40,7 +40,11 @@ function Join({
         <Link href="/sign-out" className="py-3 text-ink underline">
           sign out
         </Link>{' '}
-        and open the link in the mail again.
+        and open the link in the mail again. Or{' '}
+        <Link href="/rinks" className="py-3 text-ink underline">
+          go to your rinks
+        </Link>{' '}
+        and decide later.
       </p>
     </>
   )

@@ -54,7 +54,7 @@ test('a keeper invites somebody, who signs up, joins and sees tonight as crew', 
     await theirs.getByRole('button', { name: `Join as ${name}` }).click()
     await expect(theirs).toHaveURL(/\/rinks\/[0-9a-f-]{36}$/)
     await expect(theirs.getByRole('heading', { level: 1 })).toHaveText(/Flood|Hold|Fill/)
-    await expect(theirs.getByRole('button', { name: 'Pass 1 is poured' })).toBeVisible()
+    await expect(theirs.getByRole('button', { name: 'Mute for tonight' }), 'crew are told').toBeVisible()
     await theirs.goto(invitation)
     await expect(theirs.getByText('You are on it as crew.')).toBeVisible()
     await theirs.goto(people)

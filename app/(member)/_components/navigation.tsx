@@ -1,6 +1,6 @@
 // The way round: a bar under the thumb on phones, a rail at the left from 1024 px.
 'use client'
-import Link from 'next/link'
+import Link, { useLinkStatus } from 'next/link'
 import type { Route } from 'next'
 import { useParams, usePathname } from 'next/navigation'
 import type { Role } from '@/lib/access/permissions'
@@ -32,10 +32,17 @@ export function entryOf(pathname: string, entries: readonly Entry[]): Entry | un
   return isDeeper && nearest.word === 'Tonight' ? entries.at(-1) : nearest
 }
 
+/** A tap is answered at once, also where the page takes its time. */
+function Word({ children }: { children: string }) {
+  const { pending } = useLinkStatus()
+  return <span data-pending={pending || undefined}>{children}</span>
+}
+
 const LINK =
   'grid min-h-[60px] flex-1 place-items-center text-small text-graphite no-underline aria-[current]:font-semibold aria-[current]:text-ink ' +
   'aria-[current]:shadow-[inset_0_3px_0_var(--lamp)] lg:min-h-[52px] lg:flex-none lg:justify-items-start lg:px-6 lg:text-note ' +
-  'lg:aria-[current]:shadow-[inset_3px_0_0_var(--lamp)]'
+  'lg:aria-[current]:shadow-[inset_3px_0_0_var(--lamp)] ' +
+  'has-data-pending:text-ink has-data-pending:shadow-[inset_0_3px_0_var(--graphite)] lg:has-data-pending:shadow-[inset_3px_0_0_var(--graphite)]'
 
 export function Navigation({ rinks }: { rinks: { id: string; role: Role }[] }) {
   const { rinkId } = useParams<{ rinkId?: string }>()
@@ -55,7 +62,7 @@ export function Navigation({ rinks }: { rinks: { id: string; role: Role }[] }) {
           aria-current={entry !== current ? undefined : pathname === entry.href ? 'page' : 'true'}
           className={LINK}
         >
-          {entry.word}
+          <Word>{entry.word}</Word>
         </Link>
       ))}
     </nav>

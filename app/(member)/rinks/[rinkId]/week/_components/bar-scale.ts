@@ -27,7 +27,8 @@ export interface Bar {
   isCut: boolean
 }
 
-const round = (value: number) => Math.round(value * 10) / 10
+/** To a tenth of a unit of the frame. */
+export const round = (value: number) => Math.round(value * 10) / 10
 
 /** Where an instant of the night lies across the frame. */
 export function placeOf(night: Pick<WeekNight, 'startsAt' | 'endsAt'>, at: string): number {

@@ -22,7 +22,7 @@ function withoutPasswords(fields: Record<string, string>): Record<string, string
   return Object.fromEntries(Object.entries(fields).filter(([name]) => !/password/i.test(name)))
 }
 
-const BROKEN_MESSAGE = 'Something broke on our side. What you typed is still here: try again in a minute.'
+const BROKEN_MESSAGE = 'Something broke on our side. Nothing that you typed is lost: try again in a minute.'
 
 function faultState(error: unknown, values: Record<string, string>): FormState {
   if (error instanceof ZodError) {

@@ -1,12 +1,16 @@
 // What the model made of a forecast for one rink: the outlook and its scored hours.
 import type { Db } from '@/db/knex'
 import type { RinkAccess } from '@/lib/access/proofs'
+import type { NightRuns } from '@/lib/advice/night-runs'
 import type { NightSummary } from '@/lib/advice/night-summary'
 import type { Judgement, ScoredHour } from '@/lib/advice/types'
 import type { WhatWouldTurn } from '@/lib/advice/what-would-change'
 
-/** A judgement without its hours. `wouldTurn` is absent in outlooks from before it was asked. */
-export type Advice = Pick<Judgement, 'windows' | 'plan' | 'fill' | 'thaws'> & { wouldTurn?: WhatWouldTurn[] }
+/** A judgement without its hours. What is optional is absent in outlooks from before it was asked. */
+export type Advice = Pick<Judgement, 'windows' | 'plan' | 'fill' | 'thaws'> & {
+  wouldTurn?: WhatWouldTurn[]
+  otherNights?: NightRuns[]
+}
 
 export interface StoredOutlook {
   id: string

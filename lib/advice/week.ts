@@ -2,6 +2,7 @@
 import { HOUR_MILLIS, ICE_DENSITY, WATER_DENSITY } from '@/lib/physics/constants'
 import { tonightDate } from './night'
 import { summariseNight, type NightSummary, type NightVerdict } from './night-summary'
+import type { NightRuns } from './night-runs'
 import { AGREEMENT, FLOOD } from './thresholds'
 import { estimatePasses, type NightPasses } from './week-passes'
 import { addDays, toIso } from './zoned-time'
@@ -34,7 +35,7 @@ export interface NightAhead {
   /** Beyond the horizon of a decision. */
   isFar: boolean
   window: AdviceWindow | null
-  /** Runs that find the window good, or of the best window that too few agree with; null where no run was asked. */
+  /** Runs that find the window good, or the best hour where there is none to advise; null where no run was asked. */
   agreement: { agreeing: number; runs: number } | null
   /** Null when nothing is to be poured. */
   passes: NightPasses | null
@@ -64,6 +65,8 @@ export interface WeekSetting {
   maxPasses: number
   /** The night that the judgement's plan is for; an old one planned for another. */
   plannedDate: string
+  /** Of nights without a window, see askOtherNights. */
+  otherNights: readonly NightRuns[]
   /** At most so many nights. */
   nights: number
 }
@@ -114,7 +117,7 @@ function nightAhead(
     verdict: verdictOf(summary, hours),
     isFar: index >= NEAR_NIGHTS,
     window,
-    agreement: agreementOf(window, summary.windows),
+    agreement: agreementOf(window, summary, setting.otherNights),
     passes,
     weatherMm: isWhole && HAS_ICE.includes(setting.phase) ? weatherChange(judgement.hours, hours) : null,
     floodsMm: ((passes?.count ?? 0) * setting.layerMm * WATER_DENSITY) / ICE_DENSITY,
@@ -145,10 +148,15 @@ function windowOf({ window, windows, startsAt, endsAt }: NightSummary): AdviceWi
   return fills.reduce((best, one) => (inside(one) > inside(best) ? one : best), fills[0] ?? window)
 }
 
-function agreementOf(window: AdviceWindow | null, windows: readonly AdviceWindow[]): NightAhead['agreement'] {
+function agreementOf(
+  window: AdviceWindow | null,
+  { windows, nightDate }: NightSummary,
+  otherNights: readonly NightRuns[],
+): NightAhead['agreement'] {
   const asked = window ?? [...windows].sort((a, b) => b.agreement - a.agreement)[0]
-  if (!asked || asked.runs === 0) return null
-  return { agreeing: Math.round(asked.agreement * asked.runs), runs: asked.runs }
+  if (asked) return asked.runs === 0 ? null : { agreeing: Math.round(asked.agreement * asked.runs), runs: asked.runs }
+  const other = otherNights.find((one) => one.nightDate === nightDate)
+  return other ? { agreeing: other.agreeing, runs: other.runs } : null
 }
 
 function passesOf(summary: NightSummary, hours: ScoredHour[], setting: WeekSetting): NightPasses | null {

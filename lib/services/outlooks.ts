@@ -7,6 +7,7 @@ import type { Db } from '@/db/knex'
 import type { RinkAccess } from '@/lib/access/proofs'
 import { judge } from '@/lib/advice/judge'
 import { tonightDate } from '@/lib/advice/night'
+import { askOtherNights } from '@/lib/advice/night-runs'
 import { summariseNight } from '@/lib/advice/night-summary'
 import type { Judgement, JudgeInput } from '@/lib/advice/types'
 import { whatWouldTurn } from '@/lib/advice/what-would-change'
@@ -38,6 +39,7 @@ export async function refreshOutlook({ db, now }: { db: Db; now: Date }, access:
     timeZone: rink.timeZone,
   })
   const wouldTurn = summary.verdict === 'hold' ? whatWouldTurn(input, summary.nightDate) : []
+  const otherNights = askOtherNights(input, judgement.windows)
   return db.transaction(async (trx) => {
     const outlookId = await insertOutlook(trx, {
       rinkId: rink.id,
@@ -55,6 +57,7 @@ export async function refreshOutlook({ db, now }: { db: Db; now: Date }, access:
         fill: judgement.fill,
         thaws: judgement.thaws,
         wouldTurn,
+        otherNights,
       },
     })
     if (!outlookId) return false

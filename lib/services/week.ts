@@ -55,6 +55,7 @@ async function outlookOf(
     maxPasses,
     layerMm: water.layerMm,
     plannedDate: outlook.nightDate,
+    otherNights: outlook.advice.otherNights ?? [],
     nights: NIGHTS,
   })
   const asked = nights.find((night) => night.nightDate === openDate)

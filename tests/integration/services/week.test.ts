@@ -73,6 +73,9 @@ test('a thaw on the way is in the summary, and its nights lose ice', async () =>
   await judged(NOW, (at) => (at.getTime() >= thawFrom ? THAW : {}))
   const { outlook } = await getWeek(cast.keeper.at(NOW), cast.rinkId)
   expect(outlook?.summary.thaw).not.toBeNull()
+  // Nights of the thaw have no window; the runs were asked about them all the same, and none sees a good hour.
+  expect(outlook?.nights.map(({ agreement }) => agreement?.runs)).toEqual([24, 24, 24, 24])
+  expect(outlook?.nights.at(-1)).toMatchObject({ window: null, agreement: { agreeing: 0 } })
   const thawing = outlook?.nights.find(({ nightDate }) => nightDate === '2027-01-14')
   expect(thawing?.verdict).toBe('thaw')
   expect(thawing?.weatherMm).toBeLessThan(0)

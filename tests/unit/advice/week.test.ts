@@ -17,6 +17,7 @@ const SETTING: WeekSetting = {
   layerMm: 3,
   maxPasses: 3,
   plannedDate: '2027-01-12',
+  otherNights: [],
   nights: 10,
 }
 
@@ -136,6 +137,15 @@ test('a window that too few runs agree with is no good night, and says how many 
 
 test('where the forecast has no good hour, no runs were asked', () => {
   expect(nightsAhead(judgementOf(hoursOf(24)), SETTING)[0]?.agreement).toBeNull()
+})
+
+test('a night to hold off says how many runs would not', () => {
+  const otherNights = [{ nightDate: '2027-01-13', agreeing: 5, runs: 24 }]
+  const nights = nightsAhead(judgementOf(hoursOf(48)), { ...SETTING, otherNights })
+  expect(nights.map(({ verdict, agreement }) => [verdict, agreement])).toEqual([
+    ['hold', null],
+    ['hold', { agreeing: 5, runs: 24 }],
+  ])
 })
 
 test('a night has the time to fill that lies in it most', () => {

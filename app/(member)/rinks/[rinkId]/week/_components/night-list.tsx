@@ -36,8 +36,8 @@ export function NightList({ view, outlook, reader }: NightListProps) {
         Bars: how fast water would freeze, hour by hour from noon to noon, all nights to one scale; below the line it
         melts. Solid is an hour to flood, barred one to fill, an outline one to hold off; the darker ground is the
         night. Beside them: ice gained or lost from noon to noon with the floods named, and how many forecast runs find
-        good hours. Runs are asked only about nights in which the forecast itself has good hours. Passes of later nights
-        are counted from their good hours; the plan is made on the day.
+        good hours when you can go out. Passes of later nights are counted from their good hours; the plan is made on
+        the day.
       </p>
     </>
   )

@@ -4,8 +4,8 @@ import type { BuildInput } from '@/lib/advice/build-types'
 import type { FloorShape } from '@/lib/physics/floor'
 import { bucketFlowLPerMin } from '@/lib/physics/hose'
 import { unitsOfCode, type Units } from '@/lib/units'
-import { measured, orEmpty, passOn, refuserIn } from './fields'
-import { cornerFields, cornersOf } from './floor'
+import { measured, orEmpty, passOn, refuserIn, withoutHidden } from './fields'
+import { cornerFields, cornersOf, hiddenFloorFields } from './floor'
 import { fitsMeasure, parseNumber } from './measures'
 import { FLOOR_KINDS } from './rink-choices'
 import { flowFields, noHoseMessage, rinkIdSchema } from './rinks'
@@ -103,7 +103,10 @@ function toInput(fields: Fields, typed: Typed, units: Units, context: z.Refineme
 
 /** What was typed, as the sums take it. */
 export function buildPlanSchema(units: Units) {
-  const fields = z.object(planFields(units))
+  const fields = withoutHidden(
+    ({ floorKind }) => hiddenFloorFields(floorKind, ['rows', 'columns']),
+    z.object(planFields(units)),
+  )
   return z.record(z.string(), z.string().optional()).transform((typed, context): BuildInput => {
     const result = fields.safeParse(typed)
     if (result.success) return toInput(result.data, typed, units, context)

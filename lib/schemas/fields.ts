@@ -42,6 +42,18 @@ export function inUnitsOf<S extends z.ZodType>(schemaFor: (units: Units) => S) {
   })
 }
 
+/** What a form hides for the answers given is neither judged nor kept: nobody could see a fault of it, and mend it. */
+export function withoutHidden<S extends z.ZodType>(
+  namesHidden: (fields: Readonly<Record<string, unknown>>) => readonly string[],
+  schema: S,
+) {
+  return z.preprocess((sent) => {
+    if (typeof sent !== 'object' || sent === null) return sent
+    const hidden = namesHidden({ ...sent })
+    return Object.fromEntries(Object.entries(sent).filter(([name]) => !hidden.includes(name)))
+  }, schema)
+}
+
 /** Turns what an empty field sends into no value at all. */
 export function orEmpty<S extends z.ZodType>(schema: S) {
   return z.preprocess(

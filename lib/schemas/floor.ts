@@ -27,6 +27,12 @@ export function readFloor(stored: unknown): FloorShape | null {
 /** In the order in which corners are stored. */
 export const CORNER_FIELDS = ['cornerNorth', 'cornerEast', 'cornerSouth', 'cornerWest'] as const
 
+/** Of the ways to measure a floor only the one that was chosen is asked for. */
+export function hiddenFloorFields(kind: unknown, gridFields: readonly string[]): readonly string[] {
+  if (kind === 'corners') return gridFields
+  return kind === 'grid' ? CORNER_FIELDS : [...CORNER_FIELDS, ...gridFields]
+}
+
 /** How far each corner lies below the string; an empty one lies at it. [mm] */
 export function cornerFields(units: Units) {
   const drop = orEmpty(measured('drop', units))

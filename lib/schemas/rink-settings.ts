@@ -2,8 +2,8 @@
 import { z } from 'zod'
 import type { FloorShape } from '@/lib/physics/floor'
 import type { Units } from '@/lib/units'
-import { inUnitsOf, measured, orEmpty, refuserIn } from './fields'
-import { cornerFields, cornersOf, parseGrid } from './floor'
+import { inUnitsOf, measured, orEmpty, refuserIn, withoutHidden } from './fields'
+import { cornerFields, cornersOf, hiddenFloorFields, parseGrid } from './floor'
 import { readHours } from './hours'
 import { timeZoneSchema } from './local-time'
 import { FLOOR_KINDS, SKIES, SKY_VIEWS } from './rink-choices'
@@ -11,6 +11,7 @@ import {
   choiceFields,
   checkFlow,
   checkIce,
+  hiddenIceFields,
   maxPassesSchema,
   placeFields,
   reportedIceMm,
@@ -19,23 +20,26 @@ import {
   waterOf,
 } from './rinks'
 
-export const changePlaceSchema = z
-  .object({
-    rinkId: rinkIdSchema,
-    ...placeFields,
-    zoneBy: z.enum(['place', 'keeper'], 'Choose whose clock counts.').default('place'),
-    timeZone: orEmpty(timeZoneSchema),
-  })
-  .superRefine(({ zoneBy, timeZone }, context) => {
-    if (zoneBy === 'keeper' && !timeZone) refuserIn(context)('timeZone', 'Choose the zone.')
-  })
-  .transform(({ latitude, longitude, timeZone, zoneBy, ...rest }) => ({
-    ...rest,
-    latitudeDeg: latitude,
-    longitudeDeg: longitude,
-    /** Undefined follows from the place. */
-    timeZone: zoneBy === 'keeper' ? timeZone : undefined,
-  }))
+export const changePlaceSchema = withoutHidden(
+  ({ zoneBy }) => (zoneBy === 'keeper' ? [] : ['timeZone']),
+  z
+    .object({
+      rinkId: rinkIdSchema,
+      ...placeFields,
+      zoneBy: z.enum(['place', 'keeper'], 'Choose whose clock counts.').default('place'),
+      timeZone: orEmpty(timeZoneSchema),
+    })
+    .superRefine(({ zoneBy, timeZone }, context) => {
+      if (zoneBy === 'keeper' && !timeZone) refuserIn(context)('timeZone', 'Choose the zone.')
+    })
+    .transform(({ latitude, longitude, timeZone, zoneBy, ...rest }) => ({
+      ...rest,
+      latitudeDeg: latitude,
+      longitudeDeg: longitude,
+      /** Undefined follows from the place. */
+      timeZone: zoneBy === 'keeper' ? timeZone : undefined,
+    })),
+)
 
 function yardFields(units: Units) {
   return {
@@ -65,27 +69,33 @@ function floorFrom(fields: YardFields, units: Units, context: z.RefinementCtx): 
 }
 
 export const changeYardSchema = inUnitsOf((units) =>
-  z.object(yardFields(units)).transform((fields, context) => ({
-    rinkId: fields.rinkId,
-    lengthM: fields.length,
-    widthM: fields.width,
-    base: fields.base,
-    shelter: fields.shelter,
-    skyView: fields.sky === 'kept' ? undefined : SKY_VIEWS[fields.sky],
-    floor: floorFrom(fields, units, context),
-    boardHeightMm: fields.boardHeight ?? null,
-  })),
+  withoutHidden(
+    ({ floorKind }) => hiddenFloorFields(floorKind, ['grid']),
+    z.object(yardFields(units)).transform((fields, context) => ({
+      rinkId: fields.rinkId,
+      lengthM: fields.length,
+      widthM: fields.width,
+      base: fields.base,
+      shelter: fields.shelter,
+      skyView: fields.sky === 'kept' ? undefined : SKY_VIEWS[fields.sky],
+      floor: floorFrom(fields, units, context),
+      boardHeightMm: fields.boardHeight ?? null,
+    })),
+  ),
 )
 
 export const changeIceSchema = inUnitsOf((units) =>
-  z
-    .object({
-      rinkId: rinkIdSchema,
-      phase: choiceFields.phase,
-      iceThickness: orEmpty(measured('iceThickness', units)),
-    })
-    .superRefine(checkIce)
-    .transform(({ rinkId, ...ice }) => ({ rinkId, phase: ice.phase, iceThicknessMm: reportedIceMm(ice) })),
+  withoutHidden(
+    hiddenIceFields,
+    z
+      .object({
+        rinkId: rinkIdSchema,
+        phase: choiceFields.phase,
+        iceThickness: orEmpty(measured('iceThickness', units)),
+      })
+      .superRefine(checkIce)
+      .transform(({ rinkId, ...ice }) => ({ rinkId, phase: ice.phase, iceThicknessMm: reportedIceMm(ice) })),
+  ),
 )
 
 export const saveWaterSchema = inUnitsOf((units) =>

@@ -4,7 +4,7 @@ import { bucketFlowLPerMin } from '@/lib/physics/hose'
 import type { Units } from '@/lib/units'
 import { latitudeSchema, longitudeSchema } from './coordinates'
 import { clockTimeSchema, doOverlap, EVERY_DAY, timeZoneSchema } from './local-time'
-import { inUnitsOf, lineOfText, measured, orEmpty, refuserIn, secondsSchema, tickSchema } from './fields'
+import { inUnitsOf, lineOfText, measured, orEmpty, refuserIn, secondsSchema, tickSchema, withoutHidden } from './fields'
 import { fitsMeasure, rangeMessage } from './measures'
 import {
   BASES,
@@ -129,6 +129,15 @@ function checkTogether(fields: Fields & { units: Units }, context: z.RefinementC
   else if (doOverlap(first, second)) refuse('moreHoursFrom', 'These hours run into the ones above.')
 }
 
+/** Without ice nobody is asked how thick it is. */
+export function hiddenIceFields({ phase }: Readonly<Record<string, unknown>>): readonly string[] {
+  return PHASES.some((name) => name === phase && hasIce(name)) ? [] : ['iceThickness']
+}
+
+/** Only a liner is asked how deep its water stands. */
+const hiddenFields = (fields: Readonly<Record<string, unknown>>) =>
+  (fields.base ?? 'liner') === 'liner' ? hiddenIceFields(fields) : [...hiddenIceFields(fields), 'fillDepth']
+
 /** As the keeper measured it just now; undefined when nothing was said. */
 export function reportedIceMm({ phase, iceThickness }: Pick<Fields, 'phase' | 'iceThickness'>): number | undefined {
   return hasIce(phase) ? iceThickness : undefined
@@ -195,16 +204,19 @@ const toldFields = {
 const creationFields = { creationKey: z.uuid('Load this page again.'), ...toldFields }
 
 export const setUpRinkSchema = inUnitsOf((units) =>
-  z
-    .object({ ...rinkFields(units), ...creationFields })
-    .superRefine(checkTogether)
-    .superRefine(askForThickness)
-    .transform((fields) => ({
-      creationKey: fields.creationKey,
-      units: fields.units,
-      rink: toRink(fields),
-      told: { tellAt: fields.tellAt, wantsPush: fields.wantsPush, wantsEmail: fields.wantsEmail },
-    })),
+  withoutHidden(
+    hiddenFields,
+    z
+      .object({ ...rinkFields(units), ...creationFields })
+      .superRefine(checkTogether)
+      .superRefine(askForThickness)
+      .transform((fields) => ({
+        creationKey: fields.creationKey,
+        units: fields.units,
+        rink: toRink(fields),
+        told: { tellAt: fields.tellAt, wantsPush: fields.wantsPush, wantsEmail: fields.wantsEmail },
+      })),
+  ),
 )
 
 export type SetUpRinkInput = z.output<typeof setUpRinkSchema>

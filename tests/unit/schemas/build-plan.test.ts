@@ -53,6 +53,8 @@ describe('what is refused', () => {
     [{ bucketSeconds: '20' }, { bucketSize: 'How big is the bucket?' }],
     [{ flow: '' }, { flow: 'Type the flow, or time a bucket.' }],
     [{ hoursInOneGo: '30' }, { hoursInOneGo: 'Between a quarter of an hour and 24 hours.' }],
+    [{ floorKind: 'corners', cornerEast: 'deep', rows: '1' }, { cornerEast: 'Type a number here.' }],
+    [{ floorKind: 'level', cornerEast: 'deep', rows: '1' }, {}],
     [{ floorKind: 'grid', rows: '1', columns: '3' }, { rows: 'At least 2.' }],
     [{ floorKind: 'grid', rows: '2', columns: '2', 'point-2-1': 'deep' }, { 'point-2-1': 'Type a number here.' }],
   ])('%j', (changes, expected) => {

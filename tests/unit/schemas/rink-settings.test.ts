@@ -136,6 +136,15 @@ test('ice that was not measured stays unsaid; skaters on no ice are refused', ()
   expect(faultsOf(changeIceSchema, { phase: 'skating', iceThickness: '0' })).toEqual(['iceThickness'])
 })
 
+test('a thickness without ice, and a floor measured otherwise, are not judged', () => {
+  expect(faultsOf(changeIceSchema, { phase: 'waiting', iceThickness: '-3' })).toEqual([])
+  expect(faultsOf(changeIceSchema, { phase: 'thaw', iceThickness: '-3' })).toEqual(['iceThickness'])
+  const yard = { length: '10', width: '10', sky: 'yard', cornerNorth: 'deep', grid: 'x'.repeat(4001) }
+  expect(faultsOf(changeYardSchema, { ...yard, floorKind: 'level' })).toEqual([])
+  expect(faultsOf(changeYardSchema, { ...yard, floorKind: 'corners' })).toEqual(['cornerNorth'])
+  expect(faultsOf(changeYardSchema, { ...yard, floorKind: 'grid' })).toEqual(['grid'])
+})
+
 test('a source of water is one of the known kinds, and a source of this site', () => {
   expect(faultsOf(saveWaterSchema, { waterKind: 'lake' })).toEqual(['waterKind'])
   expect(faultsOf(saveWaterSchema, { sourceId: 'mine' })).toEqual(['sourceId'])

@@ -99,6 +99,19 @@ test.each([
   expect(Object.keys(faultsOf(fields))).toEqual([field])
 })
 
+test('what the form hides is not judged', () => {
+  const { rink } = setUpRinkSchema.parse({
+    ...MUSTS,
+    phase: 'waiting',
+    iceThickness: '-3',
+    base: 'ground',
+    fillDepth: '?',
+  })
+  expect(rink.iceThicknessMm).toBeUndefined()
+  expect(Object.keys(faultsOf({ phase: 'freezing', iceThickness: '-3' }))).toEqual(['iceThickness'])
+  expect(Object.keys(faultsOf({ fillDepth: '?' }))).toEqual(['fillDepth'])
+})
+
 test('the limits themselves are accepted', () => {
   expect(
     faultsOf({ length: '2', width: '100', flow: '400', layer: '0.5', waterTemperature: '95', fillDepth: '100' }),

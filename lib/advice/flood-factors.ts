@@ -40,6 +40,8 @@ export interface FloodStart {
   windAtRinkMps: number
   gustAtRinkMps: number
   sheet: SheetReport
+  /** Unfrozen water under the ice. [mm] */
+  waterBelowMm: number
   setMinutes: number | null
   neededMillis: number
   /** From pour to set and a margin, or to when it is needed if it does not set. [mm] */
@@ -93,6 +95,7 @@ export function judgeFloodStart(
     windAtRinkMps: hour.windAtRinkMps,
     gustAtRinkMps: hour.windGustMps * setting.gustFactor,
     sheet: report,
+    waterBelowMm: sheet.belowKgM2,
     setMinutes,
     neededMillis: needed,
     wetMm: wetBetween(run, index, untilMillis),
@@ -165,7 +168,7 @@ function floodFactors(start: FloodStart, setting: Setting): FloodFactors {
   const isDry = start.wetMm <= FLOOD.precipitationMm + ROUNDING_MM
   const slack = setMinutes === null ? 0 : (start.neededMillis - start.startMillis) / MINUTE_MILLIS - setMinutes
   return {
-    bears: bearsFlood(setting, sheet.thicknessMm),
+    bears: bearsFlood(setting, start),
     rate: rampDesirability(start.rateMmPerH, FLOOD.freezeRateMmPerH),
     dry: isDry ? 1 - (1 - FLOOD.traceFactor) * (start.wetMm / FLOOD.precipitationMm) : 0,
     set: setDesirability(setMinutes),
@@ -188,12 +191,14 @@ function setDesirability(setMinutes: number | null): number {
   return Math.min(1, Math.exp(-(setMinutes - FLOOD.set.quickMinutes) / FLOOD.set.fadeMinutes))
 }
 
-/** On bare ground and on snow the sheet is built up by floods, so only a lined sheet must first bear the person. */
-function bearsFlood({ input }: Setting, thicknessMm: number): number {
+/** On bare ground and on snow the sheet is built up by floods; a fill, or a lined sheet, has to be ice that bears the person. */
+function bearsFlood({ input }: Setting, { sheet, waterBelowMm }: FloodStart): number {
   const { phase, base } = input.rink
   if (phase === 'planning' || phase === 'waiting' || phase === 'filling' || phase === 'closed') {
     const isBuiltByFloods = base !== 'liner' && phase === 'filling'
     return isBuiltByFloods ? 1 : 0
   }
-  return base === 'liner' || phase === 'freezing' ? rampDesirability(thicknessMm, FLOOD.bearsMm) : 1
+  if (base !== 'liner' && phase !== 'freezing') return 1
+  if (waterBelowMm > 0) return rampDesirability(sheet.thicknessMm, FLOOD.bearsMm)
+  return sheet.thicknessMm >= FLOOD.leastIceMm ? 1 : 0
 }

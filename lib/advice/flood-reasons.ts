@@ -47,9 +47,10 @@ export function floodReasons(
   return reasons.sort((a, b) => a.factor - b.factor)
 }
 
-function bearsReason({ factors, sheet }: FloodStart, { input }: Setting): Reason {
-  const values = { thicknessMm: sheet.thicknessMm, neededMm: FLOOD.bearsMm.one, phase: input.rink.phase }
-  const isWrongPhase = !['freezing', 'skating', 'thaw'].includes(input.rink.phase)
+function bearsReason({ factors, sheet, waterBelowMm }: FloodStart, { input }: Setting): Reason {
+  const { phase } = input.rink
+  const values = { thicknessMm: sheet.thicknessMm, waterBelowMm, neededMm: FLOOD.bearsMm.one, phase }
+  const isWrongPhase = !['freezing', 'skating', 'thaw'].includes(phase)
   if (factors.bears === 0 && isWrongPhase) return { code: 'phase_not_flooding', factor: 0, values }
   return { code: factors.bears < 1 ? 'sheet_too_thin' : 'sheet_bears', factor: factors.bears, values }
 }

@@ -65,8 +65,10 @@ export const FLOOD = {
    * is cleared within 12 h). [cm]
    */
   snowToClearCm: { one: 0.3, zero: 10 } satisfies Ramp,
-  /** A lined sheet that carries a person with a hose. Rule G01: Marsh Canada (2 in); the lower end is ours. [mm] */
+  /** Floating ice that carries a person with a hose. Rule G01: Marsh Canada (2 in); the lower end is ours. [mm] */
   bearsMm: { one: 50, zero: 30 } satisfies Ramp,
+  /** With no water under it the floor carries the person; less than this is no sheet. Ours. [mm] */
+  leastIceMm: 0.5,
   /** Exponents of the geometric mean. Ours: the set time says most. */
   weights: { set: 4, slack: 2, rate: 2, dry: 2, wind: 1, gust: 1, air: 1, lastLayer: 1, snow: 1, bears: 1 },
 }

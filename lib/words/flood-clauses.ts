@@ -21,7 +21,14 @@ export const FLOOD_CLAUSES: Record<string, ClauseWriter> = {
     num(v, 'thicknessMm') < 0.5
       ? 'there is no ice yet to walk on with a hose'
       : `the sheet is ${iceText(num(v, 'thicknessMm'), w)} thick, too thin to walk on with a hose`,
-  sheet_bears: (v, w) => `${iceText(num(v, 'thicknessMm'), w)} of ice should carry you and the hose; drill to be sure`,
+  sheet_bears: (v, w) => {
+    const ice = iceText(num(v, 'thicknessMm'), w)
+    const isOnFloor = v.waterBelowMm === 0 && num(v, 'thicknessMm') < num(v, 'neededMm')
+    if (!isOnFloor) return `${ice} of ice should carry you and the hose; drill to be sure`
+    return num(v, 'thicknessMm') < 0.5
+      ? 'the ground carries you and the hose'
+      : `no water should be left under the ${ice} of ice, so the floor carries you and the hose; drill to be sure`
+  },
   last_layer_wet: (v, w) => `${layerText(num(v, 'liquidMm'), w)} of water still lies on the sheet`,
   last_layer_set: () => 'the sheet is frozen to the top',
   freezes_well: (v, w) => `${rateText(num(v, 'freezeRateMmPerH'), w)} freezes`,

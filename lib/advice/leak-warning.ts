@@ -40,8 +40,8 @@ export function levelOfReading(floor: FloorGrid, reading: LevelReading): number 
 }
 
 /**
- * Compares the latest reading with each earlier one of the last day: where should the level be by now, and where is
- * it?
+ * Compares the latest reading with each one of the last day that is old enough for a rate: where should the level be
+ * by now, and where is it?
  *
  * @param question Floor, readings [mm], water brought by an instant [L] and evaporation. [mm/d]
  * @returns 'level_falls' when less water stands than before, 'level_lags' when it rises less than the hose should make
@@ -53,9 +53,10 @@ export function leakWarning(question: LeakQuestion): Caution | null {
   const ascending = [...question.readings].sort((a, b) => Date.parse(a.at) - Date.parse(b.at))
   const latest = ascending.pop()
   if (!latest) return null
-  const from = Date.parse(latest.at) - FILLING.leakLookBackHours * HOUR_MILLIS
+  const hoursBefore = ({ at }: LevelReading) => (Date.parse(latest.at) - Date.parse(at)) / HOUR_MILLIS
   const found = ascending
-    .filter(({ at }) => Date.parse(at) >= from && Date.parse(at) < Date.parse(latest.at))
+    .filter((earlier) => hoursBefore(earlier) >= FILLING.leastHoursBetweenReadings)
+    .filter((earlier) => hoursBefore(earlier) <= FILLING.leakLookBackHours)
     .map((earlier) => compare(question, earlier, latest))
     .filter((one) => one.excessMm > 0)
     .sort((a, b) => b.excessMm - a.excessMm)
@@ -77,7 +78,7 @@ function compare({ floor, pouredLBy, evaporationMmPerDay }: LeakQuestion, earlie
   const toleranceMm = FILLING.readingToleranceMm + FILLING.flowTolerance * Math.max(0, expectedRiseMm)
   const lostL = Math.max(0, volumeBeforeM3 + broughtM3 - stageAt(floor, after).volumeM3) * 1000
   const isFalling = riseMm < -FILLING.readingToleranceMm
-  const values = { riseMm, expectedRiseMm, shortfallMm, hours, lostLPerHour: hours > 0 ? lostL / hours : 0 }
+  const values = { riseMm, expectedRiseMm, shortfallMm, hours, lostLPerHour: lostL / hours }
   const code = isFalling ? 'level_falls' : 'level_lags'
   return {
     excessMm: shortfallMm - toleranceMm,

@@ -136,6 +136,8 @@ export const FILLING = {
   hoseAheadHours: 24,
   /** What a level read off a stick is good for, two readings together. Ours. [mm] */
   readingToleranceMm: 5,
+  /** Two looks closer together than this tell of no rate: a slip of the stick would read as a burst. Ours. [h] */
+  leastHoursBetweenReadings: 0.5,
   /** A hose gives this much less than the bucket said before the level tells of a leak. Ours. [share of the rise] */
   flowTolerance: 0.15,
   /** Evaporation allowed for: a latent loss of 60 W/m² over a day, typical of open water in light wind at -10 °C. Derived. [mm/day] */

@@ -97,6 +97,20 @@ describe('a leak', () => {
   test('a slow leak shows over several readings', () => {
     expect(level([[0, 50], [2, 46.5], [4, 43]])).toMatchObject({ code: 'level_falls', values: { since: at(0) } }) // prettier-ignore
   })
+  // A stick is good for a few millimetres, so looks a minute apart differ by chance, and 20 mm lost in ten seconds
+  // would be 720 000 L an hour from 100 m². Half an hour on, the same 20 mm are 2000 L, 4000 L an hour.
+  test('looks moments apart tell of no rate; a later one still compares with both', () => {
+    const tenSeconds = 10 / 3600
+    expect(level([[0, 50], [tenSeconds, 30]])).toBeNull() // prettier-ignore
+    expect(level([[0, 50], [0.49, 30]])).toBeNull() // prettier-ignore
+    const leak = level([[0, 50], [tenSeconds, 50], [0.5, 30]]) // prettier-ignore
+    expect(leak).toMatchObject({ code: 'level_falls', values: { since: at(0) } })
+    expect(leak?.values.lostLPerHour).toBeCloseTo(4000, 3)
+  })
+  test('after looks moments apart the next one compares with what came before', () => {
+    const leak = level([[0, 50], [2, 42], [2.01, 42]]) // prettier-ignore
+    expect(leak).toMatchObject({ code: 'level_falls', values: { since: at(0) } })
+  })
   // Two hours of hose are 30 mm; 5 mm and 15 % are allowed, 9.5 mm in all.
   test('the level rises less than the hose should make it', () => {
     expect(level([[0, 50], [2, 73]], true)).toBeNull() // prettier-ignore

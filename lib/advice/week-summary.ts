@@ -16,7 +16,6 @@ export interface WeekSummary {
   nearFloodsMm: number
   /** The sheet at its thinnest from now on, without floods to come. */
   thinnest: { thicknessMm: number; at: string } | null
-  freezableMm: number
 }
 
 /**
@@ -49,7 +48,6 @@ export function summariseWeek(
     nearGoodDates: near.map(({ nightDate }) => nightDate),
     nearFloodsMm: near.reduce((sum, { floodsMm }) => sum + floodsMm, 0),
     thinnest: thinnestOf(hours, now, lastEnd),
-    freezableMm: nights.reduce((sum, { freezableMm }) => sum + (freezableMm ?? 0), 0),
   }
 }
 

@@ -27,7 +27,6 @@ const plain = (before: string): WeekHeadline => ({ before, key: '', after: '', t
 
 export function weekHeadline(week: Week, now: Date, words: WordOptions): WeekHeadline {
   const { phase, summary, fill } = week
-  if (phase === 'planning') return plain('Nothing to flood yet: the rink is still being planned.')
   if (phase === 'waiting' || phase === 'filling') return fillHeadline(week, now, words)
   if (phase === 'freezing') return freezingHeadline(fill, now, words)
   if (summary.thaw) return thawHeadline(summary, now, words)
@@ -78,8 +77,6 @@ function freezingHeadline(fill: FillOutlook, now: Date, words: WordOptions): Wee
 
 /** What stands under the headline: what the near nights could bring, what the thaw takes, how wide the dates are. */
 export function weekDetail({ phase, summary, fill }: Omit<Week, 'fillWindows'>, now: Date, words: WordOptions): string {
-  if (phase === 'planning')
-    return `About ${layerText(Math.round(summary.freezableMm), words)} of water could freeze in these nights.`
   if (phase === 'waiting' || phase === 'filling' || phase === 'freezing') return spreadText(fill, words)
   return [floodsText(summary, now, words), thawText(summary, words)].filter(Boolean).join(' ')
 }

@@ -62,7 +62,6 @@ function viewOf(nights: WeekNight[], change: Partial<NonNullable<WeekView['outlo
       nearGoodDates: [],
       nearFloodsMm: 0,
       thinnest: null,
-      freezableMm: 0,
     },
     fill: { startsAt: '2027-01-14T15:00:00Z', hoseHours: 8.5, litres: 12_000, skinAt: null, carriesSkaterAt: spread },
     fillWindows: [{ ...WINDOW, kind: 'fill', agreement: 0.8, runs: 20 }],

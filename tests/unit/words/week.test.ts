@@ -24,7 +24,6 @@ const SUMMARY: WeekSummary = {
   nearGoodDates: ['2027-01-12', '2027-01-14'],
   nearFloodsMm: 16.4,
   thinnest: { thicknessMm: 82, at: '2027-01-18T17:00:00Z' },
-  freezableMm: 95,
 }
 /** From Sunday 17 January 9 am to Tuesday 19 January 6 pm. */
 const THAW = { startsAt: '2027-01-17T14:00:00Z', endsAt: '2027-01-19T23:00:00Z', lossMm: 7.6 }

@@ -1,7 +1,6 @@
 // In phases that are about more than tonight's flood: what the rink is at, and the page for it.
 import Link from 'next/link'
 import type { Route } from 'next'
-import { isGranted } from '@/lib/access/permissions'
 import type { Phase } from '@/lib/advice/types'
 import type { TonightView } from '@/lib/schemas/tonight-view'
 
@@ -12,11 +11,6 @@ interface PhaseWords {
 }
 
 const WORDS: Partial<Record<Phase, PhaseWords>> = {
-  planning: {
-    text: 'This rink is being planned. Sums of water, boards and liner, and the fill days to come, are there already.',
-    link: 'Plan the rink',
-    path: 'plan',
-  },
   waiting: {
     text: 'This rink waits for its fill day.',
     link: 'Fill days of the week',
@@ -37,29 +31,20 @@ const WORDS: Partial<Record<Phase, PhaseWords>> = {
     link: 'The week to come',
     path: 'week',
   },
-  closed: {
-    text: 'This rink is closed for the season.',
-    link: 'The season in figures',
-    path: 'log/season',
-  },
 }
 
-export function PhaseNote({ rink, viewer }: Pick<TonightView, 'rink' | 'viewer'>) {
+export function PhaseNote({ rink }: Pick<TonightView, 'rink'>) {
   const words = WORDS[rink.phase]
   if (!words) return null
-  // Planning is the keeper's; everybody else has nothing to open there.
-  const isOpen = rink.phase !== 'planning' || isGranted(viewer.role, 'manage')
   return (
     <p className="mb-5 max-w-[60ch]">
       {words.text}{' '}
-      {isOpen ? (
-        <Link
-          href={`/rinks/${rink.id}/${words.path}` as Route}
-          className="inline-flex min-h-touch items-center underline print:hidden"
-        >
-          {words.link}
-        </Link>
-      ) : null}
+      <Link
+        href={`/rinks/${rink.id}/${words.path}` as Route}
+        className="inline-flex min-h-touch items-center underline print:hidden"
+      >
+        {words.link}
+      </Link>
     </p>
   )
 }

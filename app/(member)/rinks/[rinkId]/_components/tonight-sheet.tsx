@@ -14,6 +14,7 @@ import { DaysAhead } from './days-ahead'
 import { FirstForecast } from './first-forecast'
 import { HoldNote } from './hold-note'
 import { Mute } from './mute'
+import { OFF_SEASON, OffSeason } from './off-season'
 import { PhaseNote } from './phase-note'
 import { Plan } from './plan'
 import { RefusedCheckOffs } from './refused-check-offs'
@@ -39,7 +40,9 @@ export function TonightSheet({ initial }: { initial: TonightView }) {
       <main>
         <StatusNotices view={view} now={now} trouble={trouble} onReadAgain={readAgain} />
         <RefusedCheckOffs view={view} checkOffs={checkOffs} />
-        {isJudged(view) ? (
+        {OFF_SEASON[view.rink.phase] ? (
+          <OffSeason rink={view.rink} role={view.viewer.role} />
+        ) : isJudged(view) ? (
           <JudgedNight view={view} now={now} change={change} checkOffs={checkOffs} />
         ) : (
           <FirstForecast hasFailed={view.lastReadFailed} />
@@ -65,7 +68,7 @@ function JudgedNight({ view, now, change, checkOffs }: JudgedNightProps) {
   return (
     <>
       <SteadyVerdict view={view} summary={summary} now={now} />
-      <SteadyPhase rink={view.rink} viewer={view.viewer} />
+      <SteadyPhase rink={view.rink} />
       <NightStrip source={drawn} now={now} />
       <SteadyZone view={view} />
       <div className="lg:grid lg:grid-cols-[1.25fr_1fr] lg:gap-x-14 print:block">

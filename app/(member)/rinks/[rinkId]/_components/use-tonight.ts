@@ -8,6 +8,7 @@ import { fetchJson, FetchJsonError } from '@/lib/http/fetch-json'
 import type { FormState } from '@/lib/http/form-state'
 import { MINUTE_MILLIS } from '@/lib/physics/constants'
 import type { TonightView } from '@/lib/schemas/tonight-view'
+import { OFF_SEASON } from './off-season'
 
 const SOON = 2000
 const NO_ANSWER = 'There was no answer from the server, so nothing was changed. Try again when you have a connection.'
@@ -75,7 +76,8 @@ async function doThenRead(work: () => Promise<FormState>, key: string): Promise<
 }
 
 /** Short while the server still judges: the first forecast, or the plan after something was changed. */
-function pauseBefore({ outlook }: TonightView, awaited: Awaited): number {
+function pauseBefore({ outlook, rink }: TonightView, awaited: Awaited): number {
+  if (OFF_SEASON[rink.phase]) return MINUTE_MILLIS
   if (!outlook) return SOON
   const isAwaited = awaited !== null && outlook.judgedAt === awaited.judgedAt && Date.now() < awaited.until
   return isAwaited ? SOON : MINUTE_MILLIS

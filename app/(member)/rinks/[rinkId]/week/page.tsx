@@ -7,6 +7,7 @@ import { orNotFound } from '@/lib/http/or-not-found'
 import { dateSchema } from '@/lib/schemas/local-time'
 import type { WeekView } from '@/lib/schemas/week-view'
 import { getWeek } from '@/lib/services/week'
+import { OFF_SEASON } from '../_components/off-season'
 import { FillAhead } from './_components/fill-ahead'
 import { NightList } from './_components/night-list'
 import { WeekHeadline } from './_components/week-headline'
@@ -20,7 +21,7 @@ export default async function WeekPage({ params, searchParams }: PageProps<'/rin
   const openDate = dateSchema.safeParse(night).data
   const view = await orNotFound(getWeek(await pageContext(), rinkId, openDate))
   const { outlook } = view
-  if (view.rink.phase === 'closed' || !outlook || outlook.nights.length === 0) return <WithoutNights view={view} />
+  if (OFF_SEASON[view.rink.phase] || !outlook || outlook.nights.length === 0) return <WithoutNights view={view} />
   return <Nights view={view} outlook={outlook} />
 }
 

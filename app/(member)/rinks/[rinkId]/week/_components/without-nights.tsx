@@ -1,5 +1,6 @@
-// When there are no nights to show: the season is over, or no forecast has been read yet.
+// When there are no nights to show: the season has not begun or is over, or no forecast has been read yet.
 import type { Route } from 'next'
+import { OFF_SEASON } from '../../_components/off-season'
 import { ButtonLink } from '@/components/ui/button'
 import type { WeekView } from '@/lib/schemas/week-view'
 
@@ -23,13 +24,8 @@ export function WithoutNights({ view }: { view: WeekView }) {
 }
 
 function wordsOf({ rink, outlook, lastReadFailed }: WeekView): Words {
-  if (rink.phase === 'closed') {
-    return {
-      title: 'Closed for the season.',
-      text: 'No forecast is read and nobody is told anything until the rink is opened again in its settings.',
-      link: { path: '/log/season', word: 'The season in figures' },
-    }
-  }
+  const offSeason = OFF_SEASON[rink.phase]
+  if (offSeason) return { ...offSeason, link: { ...offSeason.link, path: `/${offSeason.link.path}` } }
   const again = { path: '/week', word: 'Look again' }
   if (outlook) {
     return {

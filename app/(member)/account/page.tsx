@@ -33,7 +33,7 @@ export default async function AccountPage() {
         <p className="mb-6 break-words text-graphite">{email}</p>
         {deletionDueAt ? (
           <Notice tone="caution">
-            This account goes on {dayOf(deletionDueAt)}.{' '}
+            This account will be deleted on {dayOf(deletionDueAt)}.{' '}
             <Link href={'/account/keep' as Route} className="inline-flex min-h-touch items-center underline">
               Keep it
             </Link>

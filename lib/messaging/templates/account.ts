@@ -102,12 +102,12 @@ export function addressChangedMail({ signInUrl }: { signInUrl: string }): MailWo
   })
 }
 
-/** @param on The day on which the account goes, in words. */
+/** @param on The day on which the account is deleted, in words. */
 export function deletionAskedMail({ on, signInUrl }: { on: string; signInUrl: string }): MailWords {
   return writeLetter({
     ...ACCOUNT_LETTER,
-    subject: `Your Nightsheet account goes on ${on}`,
-    heading: `Your account goes on ${on}`,
+    subject: `Your Nightsheet account will be deleted on ${on}`,
+    heading: `Your account will be deleted on ${on}`,
     paragraphs: [
       'You asked us to delete it. Until then you can sign in and keep it; afterwards it is gone for good, with the rinks that only you keep.',
     ],

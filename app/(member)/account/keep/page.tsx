@@ -20,7 +20,7 @@ export default async function KeepPage() {
   return (
     <PageFrame>
       <div className="max-w-[34rem]">
-        <h1 className="mb-3 text-verdict font-medium">Your account goes on {dayOf(deletionDueAt)}.</h1>
+        <h1 className="mb-3 text-verdict font-medium">Your account will be deleted on {dayOf(deletionDueAt)}.</h1>
         <p className="mb-5 max-w-line">
           You asked for it.
           {rinks.length > 0

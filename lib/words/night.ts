@@ -4,7 +4,7 @@ import { MINUTE_MILLIS } from '@/lib/physics/constants'
 import type { WordOptions } from './options'
 import { capitalised, countText, durationText } from './quantities'
 import { reasonClause } from './reasons'
-import { dayPartText, doneByText, nightText, spanText } from './times'
+import { dayPartText, doneBy, doneByText, nightText, spanText } from './times'
 
 /** Layers up to this depth are called thin. [mm] */
 const THIN_MM = 5
@@ -76,10 +76,16 @@ function lastPassText({ passes, lastSetBy, precipitation }: NightSummary, words:
   return `${which} is set by ${doneByText(lastSetBy, words)}${beforeText(lastSetBy, precipitation)}.`
 }
 
+/** A few minutes over are not worth a word; more would be lost in a whole number of hours. [min] */
+const HOURS_ARE_EXACT_WITHIN = 10
+
+/** Counted from the time that is told, so that both agree. */
 function beforeText(setBy: string, precipitation: NightSummary['precipitation']): string {
-  const minutes = precipitation ? (Date.parse(precipitation.startsAt) - Date.parse(setBy)) / MINUTE_MILLIS : -1
-  if (!precipitation || minutes < 0) return ''
+  if (!precipitation) return ''
+  const minutes = (Date.parse(precipitation.startsAt) - doneBy(setBy).getTime()) / MINUTE_MILLIS
+  if (minutes < 0) return ''
   if (minutes < 90) return `, ${durationText(Math.floor(minutes / 10) * 10)} before ${precipitation.kind}`
   const hours = Math.floor(minutes / 60)
-  return `, ${countText(hours)} ${hours === 1 ? 'hour' : 'hours'} before ${precipitation.kind}`
+  const more = minutes - hours * 60 > HOURS_ARE_EXACT_WITHIN ? 'more than ' : ''
+  return `, ${more}${countText(hours)} ${hours === 1 ? 'hour' : 'hours'} before ${precipitation.kind}`
 }

@@ -1,7 +1,7 @@
 // Times in words, always by the rink's clock.
 import { localMinuteOf, nightDateOf, tonightDate } from '@/lib/advice/night'
 import { addDays, localDateOf } from '@/lib/advice/zoned-time'
-import { MINUTE_MILLIS } from '@/lib/physics/constants'
+import { HOUR_MILLIS, MINUTE_MILLIS } from '@/lib/physics/constants'
 import type { WordOptions } from './options'
 
 /** "8 pm", "1:50 am", "midnight"; on a 24-hour clock "20:00". */
@@ -16,9 +16,29 @@ export function clockText(at: string | Date, words: WordOptions): string {
   return `${hour % 12 || 12}${past} ${hour < 12 ? 'am' : 'pm'}`
 }
 
-/** A moment by which something is done, to the next five minutes, so that the promise holds. */
+/** To the next five minutes, so that a promise holds. */
+export function doneBy(at: string): Date {
+  return new Date(Math.ceil(Date.parse(at) / (5 * MINUTE_MILLIS)) * 5 * MINUTE_MILLIS)
+}
+
+/** A moment by which something is done. */
 export function doneByText(at: string, words: WordOptions): string {
-  return clockText(new Date(Math.ceil(Date.parse(at) / (5 * MINUTE_MILLIS)) * 5 * MINUTE_MILLIS), words)
+  return clockText(doneBy(at), words)
+}
+
+/** After so long a time of day alone may be that of another day. */
+const SAME_NIGHT_MILLIS = 12 * HOUR_MILLIS
+
+/** The same of what was begun at a moment: "1:50 am"; with its weekday, "Wed 6 pm", in another night or long after. */
+export function doneByDayText(at: string, begunAt: string, words: WordOptions): string {
+  const done = doneBy(at)
+  const begun = new Date(begunAt)
+  const isSameNight =
+    nightDateOf(done, words.timeZone) === nightDateOf(begun, words.timeZone) &&
+    done.getTime() - begun.getTime() <= SAME_NIGHT_MILLIS
+  if (isSameNight) return clockText(done, words)
+  const weekday = new Intl.DateTimeFormat(words.locale, { weekday: 'short', timeZone: words.timeZone })
+  return `${weekday.format(done)} ${clockText(done, words)}`
 }
 
 /** Name of the weekday of an instant, by the rink's clock. */

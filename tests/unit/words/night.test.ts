@@ -98,6 +98,18 @@ describe('how sure', () => {
     )
   })
 
+  test.each([
+    ['2027-01-13T09:40:00Z', 'more than two hours before snow'],
+    ['2027-01-13T08:50:00Z', 'two hours before snow'],
+    ['2027-01-13T08:25:00Z', 'more than one hour before snow'],
+    ['2027-01-13T07:25:00Z', '30 min before snow'],
+  ])('set by 1:50 am, and snow at %s', (startsAt, expected) => {
+    const precipitation = { ...flood.precipitation!, startsAt }
+    expect(sureSentence({ ...flood, precipitation }, words)).toBe(
+      `9 of 10 forecast runs agree. The last pass is set by 1:50 am, ${expected}.`,
+    )
+  })
+
   test('all agree, one pass, no snow', () => {
     const summary = { ...flood, agreement: 1, passes: flood.passes.slice(2), precipitation: null }
     expect(sureSentence(summary, words)).toBe('All 10 forecast runs agree. The pass is set by 1:50 am.')

@@ -6,7 +6,7 @@ import { Button } from '../ui/button'
 import { Facts } from '../ui/facts'
 import type { WordOptions } from '@/lib/words/options'
 import { fluxText, rateText, temperatureText, windChillText } from '@/lib/words/quantities'
-import { doneByText } from '@/lib/words/times'
+import { doneByDayText } from '@/lib/words/times'
 import { HourReasons } from './hour-reasons'
 import { VERDICT_WORDS } from './verdict-words'
 
@@ -66,7 +66,7 @@ function KnownHour({ hour, reader }: { hour: TonightHour; reader: WordOptions })
             freezingOrMelting(hour, reader),
             {
               name: 'Poured then, set by',
-              figure: hour.setsAt ? doneByText(hour.setsAt, reader) : 'not within the forecast',
+              figure: hour.setsAt ? doneByDayText(hour.setsAt, hour.time, reader) : 'not within the forecast',
             },
             ...(hour.weather?.airTemperatureC != null
               ? [{ name: 'Air', figure: temperatureText(hour.weather.airTemperatureC, reader) }]
@@ -106,7 +106,7 @@ function spokenHour(hour: TonightHour, name: string, reader: WordOptions): strin
   if (!hour.isKnown) return `${name}: no forecast.`
   const { name: does, figure } = freezingOrMelting(hour, reader)
   const set = hour.setsAt
-    ? `Poured then, set by ${doneByText(hour.setsAt, reader)}.`
+    ? `Poured then, set by ${doneByDayText(hour.setsAt, hour.time, reader)}.`
     : 'Poured then, not set within the forecast.'
   return `${name}: ${VERDICT_WORDS[hour.verdict]}. ${does} ${figure}. ${set}`
 }

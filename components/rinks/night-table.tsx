@@ -2,7 +2,7 @@
 import type { TonightHour } from '@/lib/schemas/tonight-view'
 import type { WordOptions } from '@/lib/words/options'
 import { numberText } from '@/lib/words/quantities'
-import { doneByText } from '@/lib/words/times'
+import { doneByDayText } from '@/lib/words/times'
 import type { StripHour } from '../charts/night-strip-layout'
 import { DataTable } from '../ui/data-table'
 import { Disclosure } from '../ui/disclosure'
@@ -34,6 +34,9 @@ export function NightTable({ hours, names, drawn, reader }: NightTableProps) {
   return (
     <Disclosure summary="Show as table" className="text-small">
       <DataTable caption="Freeze rate, set time and weather by hour" columns={columns} rows={rows} />
+      <p className="max-w-line pb-3 text-graphite">
+        Each hour is judged as if it alone were poured, so a pass of the plan may set at another time.
+      </p>
     </Disclosure>
   )
 }
@@ -44,7 +47,7 @@ function cellsOf(hour: TonightHour, drawn: StripHour | undefined, reader: WordOp
   return [
     VERDICT_WORDS[hour.verdict],
     figure(drawn?.rate, reader.units.ice === 'in' ? 2 : 1),
-    hour.setsAt ? doneByText(hour.setsAt, reader) : hour.isKnown ? 'not set' : 'unknown',
+    hour.setsAt ? doneByDayText(hour.setsAt, hour.time, reader) : hour.isKnown ? 'not set' : 'unknown',
     figure(drawn?.air, 0),
     hour.weather && drawn ? amountText(drawn, reader) || 'nothing' : 'no forecast',
   ]

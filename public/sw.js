@@ -161,6 +161,9 @@ function answerOf(request) {
 
 /** The person may have signed out, so that whoever uses the browser next finds nothing. */
 self.addEventListener('message', (event) => {
+  const { sheet, isChanged } = event.data ?? {}
+  // An open sheet was read anew, or somebody changed it: the copy shall not bring back what they undid.
+  if (NIGHT_SHEET.test(sheet)) event.waitUntil(keepFresh(sheet, isChanged))
   if (event.data !== 'forget') return
   const forgotten = Promise.all([caches.delete(PAGES), caches.delete(FILES)])
   event.waitUntil(forgotten.then(() => event.ports[0]?.postMessage('forgotten')))
@@ -194,9 +197,9 @@ async function keepPage(path, response) {
 }
 
 /** Moving between screens fetches data, not pages; so a visit to a sheet also fetches its page, now and then. */
-async function keepFresh(path) {
+async function keepFresh(path, isChanged = false) {
   const kept = await (await caches.open(PAGES)).match(path)
-  if (kept && Date.now() - Date.parse(kept.headers.get('Date')) < FRESH_MILLIS) return
+  if (!isChanged && kept && Date.now() - Date.parse(kept.headers.get('Date')) < FRESH_MILLIS) return
   await fetch(path, { redirect: 'manual', headers: { Accept: 'text/html' } }).then(
     (response) => keepPage(path, response),
     () => undefined,

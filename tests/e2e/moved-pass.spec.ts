@@ -123,6 +123,17 @@ test('a check-off without a network waits on the phone, and is sent once', async
     await expect(page.getByText(/poured by Maren/)).toBeHidden({ timeout: 20_000 })
   })
 
+  await test.step('also from the copy for when there is no network', async () => {
+    const copy = () =>
+      page.evaluate(async () => (await (await caches.open('night-sheets-1')).match(location.pathname))?.text())
+    await expect.poll(copy, { timeout: 20_000 }).not.toMatch(/poured by/)
+    await context.setOffline(true)
+    await page.reload()
+    await expect(page.getByText(/No connection/)).toBeVisible()
+    await expect(check).toHaveAttribute('aria-pressed', 'false')
+    await context.setOffline(false)
+  })
+
   await test.step('whoever signs in next finds nothing kept', async () => {
     await page.goto('/sign-out')
     await page.getByRole('button', { name: 'Sign out' }).click()

@@ -44,7 +44,10 @@ export function useTonight(initial: TonightView) {
     onErrorRetry: (_error, _key, _config, retry, { retryCount }) =>
       setTimeout(() => retry({ retryCount }), MINUTE_MILLIS / 4),
     onError: () => setIsFresh(false),
-    onSuccess: () => setIsFresh(true),
+    onSuccess: () => {
+      setIsFresh(true)
+      keepCopy(initial.rink.id, false)
+    },
   })
   const view = data ?? initial
   const judgedAt = view.outlook?.judgedAt
@@ -53,6 +56,7 @@ export function useTonight(initial: TonightView) {
     try {
       await mutate(doThenRead(work, key), { optimisticData: shown, rollbackOnError: true, revalidate: false })
       setAwaited({ judgedAt: judgedAt ?? null, until: Date.now() + MINUTE_MILLIS / 2 })
+      keepCopy(initial.rink.id, true)
       return null
     } catch (fault) {
       return fault instanceof Refused ? fault.message : NO_ANSWER
@@ -63,10 +67,16 @@ export function useTonight(initial: TonightView) {
   const readAfterChange = useCallback(async () => {
     setAwaited({ judgedAt: judgedAt ?? null, until: Date.now() + MINUTE_MILLIS / 2 })
     await mutate()
-  }, [mutate, judgedAt])
+    keepCopy(initial.rink.id, true)
+  }, [mutate, judgedAt, initial.rink.id])
 
   const trouble = troubleOf(isOnline, isFresh ? undefined : error)
   return { view, trouble, change, readAgain: () => void mutate(), readAfterChange }
+}
+
+/** Has the service worker renew its copy of the sheet: at once after a change, else when it is some minutes old. */
+function keepCopy(rinkId: string, isChanged: boolean): void {
+  navigator.serviceWorker?.controller?.postMessage({ sheet: `/rinks/${rinkId}`, isChanged })
 }
 
 async function doThenRead(work: () => Promise<FormState>, key: string): Promise<TonightView> {

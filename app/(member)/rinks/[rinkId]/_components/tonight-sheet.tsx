@@ -19,6 +19,7 @@ import { PhaseNote } from './phase-note'
 import { Plan } from './plan'
 import { RefusedCheckOffs } from './refused-check-offs'
 import { StatusNotices, ZoneNote } from './status-notices'
+import { summaryOfPlan } from './summary-of-plan'
 import { useCheckOffs, type CheckOffs } from './use-check-offs'
 import { useTonight, type ChangeView } from './use-tonight'
 import { Verdict } from './verdict'
@@ -61,8 +62,13 @@ interface JudgedNightProps {
 
 function JudgedNight({ view, now, change, checkOffs }: JudgedNightProps) {
   const [moved, setMoved] = useState<TonightPass[] | null>(null)
-  const { days, summary } = view.outlook
+  const { days, ownPlan } = view.outlook
   const passes = moved ?? view.outlook.passes
+  const isOwn = moved !== null || ownPlan !== null
+  const summary = useMemo(
+    () => (isOwn ? summaryOfPlan(view.outlook.summary, passes) : view.outlook.summary),
+    [isOwn, view.outlook.summary, passes],
+  )
   // A moved pass is drawn at once, before it is kept.
   const drawn = useMemo(() => ({ ...view, outlook: { ...view.outlook, passes } }), [view, passes])
   return (

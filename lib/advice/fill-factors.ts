@@ -19,17 +19,25 @@ export interface FillFactors {
   air: number
 }
 
+/** A figure and the hour it belongs to: a fill split over days may meet it in a later night than its own. */
+export interface FigureOfHour {
+  figure: number
+  at: string
+}
+
 /** What the hours of a fill and after it bring; null where the forecast does not reach. */
 export interface FillOutcome {
   session: FillSession
   hasGap: boolean
-  lowestAirC: number
-  highestAirC: number
-  lowestWindChillC: number
-  highestGustMps: number
+  lowestAirC: FigureOfHour
+  highestAirC: FigureOfHour
+  lowestWindChillC: FigureOfHour
+  highestGustMps: FigureOfHour
   lookAheadHours: number
   iceAfterMm: number
   snowBeforeSkinCm: number
+  /** Hour of its first flake; null without snow. */
+  snowStartsAt: string | null
   skinIndex: number | null
 }
 
@@ -59,16 +67,34 @@ export function judgeFillStart(setting: Setting, run: ForecastRun, index: number
   const outcome = session ? outcomeOf(setting, run, session, cache) : null
   const factors = outcome ? factorsOf(setting, outcome) : { cold: 0, snow: 1, liner: 1, air: 1 }
   const hour = run.hours[index] as PreparedHour
-  const lowestAirC = outcome?.lowestAirC ?? hour.airTemperatureC
-  const lowestWindChillC = outcome?.lowestWindChillC ?? windChillC(hour.airTemperatureC, hour.windSpeedMps)
-  const { hose, hands } = hoseAndHands(lowestAirC, lowestWindChillC)
+  const lowestAirC = outcome?.lowestAirC ?? lowestOf([hour], airOf)
+  const lowestWindChillC = outcome?.lowestWindChillC ?? lowestOf([hour], chillOf)
+  const { hose, hands } = hoseAndHands(lowestAirC.figure, lowestWindChillC.figure)
   const limits = { hose, hands, lowestAirC, lowestWindChillC }
   return {
     ice: outcome?.hasGap ? 0 : overallDesirability(factors, FILL.weights),
     person: Math.min(hose, hands),
     outcome,
-    reasons: fillReasons(setting, factors, outcome, limits),
+    reasons: fillReasons(setting, hour.time, factors, outcome, limits),
   }
+}
+
+const airOf = (hour: PreparedHour) => hour.airTemperatureC
+const chillOf = (hour: PreparedHour) => windChillC(hour.airTemperatureC, hour.windSpeedMps)
+
+/** The earliest hour among equals. */
+function lowestOf(hours: readonly PreparedHour[], of: (hour: PreparedHour) => number): FigureOfHour {
+  let lowest: FigureOfHour = { figure: Number.POSITIVE_INFINITY, at: '' }
+  for (const hour of hours) {
+    const figure = of(hour)
+    if (figure < lowest.figure) lowest = { figure, at: hour.time }
+  }
+  return lowest
+}
+
+function highestOf(hours: readonly PreparedHour[], of: (hour: PreparedHour) => number): FigureOfHour {
+  const { figure, at } = lowestOf(hours, (hour) => -of(hour))
+  return { figure: -figure, at }
 }
 
 function outcomeOf(setting: Setting, run: ForecastRun, session: FillSession, cache: GrowthCache): FillOutcome {
@@ -77,14 +103,14 @@ function outcomeOf(setting: Setting, run: ForecastRun, session: FillSession, cac
   const weather = {
     session,
     hasGap: hours.some((hour) => !hour.isKnown),
-    lowestAirC: Math.min(...hours.map((hour) => hour.airTemperatureC)),
-    highestAirC: Math.max(...hours.map((hour) => hour.airTemperatureC)),
-    lowestWindChillC: Math.min(...hours.map((hour) => windChillC(hour.airTemperatureC, hour.windSpeedMps))),
-    highestGustMps: Math.max(...hours.map((hour) => hour.windGustMps)) * setting.gustFactor,
+    lowestAirC: lowestOf(hours, airOf),
+    highestAirC: highestOf(hours, airOf),
+    lowestWindChillC: lowestOf(hours, chillOf),
+    highestGustMps: highestOf(hours, (hour) => hour.windGustMps * setting.gustFactor),
     lookAheadHours: Math.min(FILL.coldLookAheadHours, run.hours.length - session.doneIndex),
   }
   if (weather.lookAheadHours < FILL.leastLookAheadHours || weather.hasGap) {
-    return { ...weather, iceAfterMm: 0, snowBeforeSkinCm: 0, skinIndex: null }
+    return { ...weather, iceAfterMm: 0, snowBeforeSkinCm: 0, snowStartsAt: null, skinIndex: null }
   }
   const grownFrom = growthStart(run, session.doneIndex)
   const growth = growthFrom(setting, run, grownFrom, cache)
@@ -95,6 +121,7 @@ function outcomeOf(setting: Setting, run: ForecastRun, session: FillSession, cac
     ...weather,
     iceAfterMm: reportSheet(growth.state).thicknessMm,
     snowBeforeSkinCm: untilSkin.reduce((sum, hour) => sum + hour.snowfallCm, 0),
+    snowStartsAt: untilSkin.find((hour) => hour.snowfallCm > 0)?.time ?? null,
     skinIndex,
   }
 }
@@ -128,7 +155,7 @@ function factorsOf(setting: Setting, outcome: FillOutcome): FillFactors {
   return {
     cold: outcome.lookAheadHours < FILL.leastLookAheadHours ? 0 : rampDesirability(outcome.iceAfterMm, wanted),
     snow: rampDesirability(outcome.snowBeforeSkinCm, FILL.snowBeforeSkinCm),
-    liner: setting.input.rink.base === 'liner' ? rampDesirability(outcome.highestGustMps, FILL.linerGustMps) : 1,
-    air: rampDesirability(outcome.highestAirC, FILL.airTooWarmC),
+    liner: setting.input.rink.base === 'liner' ? rampDesirability(outcome.highestGustMps.figure, FILL.linerGustMps) : 1,
+    air: rampDesirability(outcome.highestAirC.figure, FILL.airTooWarmC),
   }
 }

@@ -129,11 +129,11 @@ function doubtReason(windows: AdviceWindow[]): Reason | null {
 /** The reason that leads in most of the hours in which the keeper could go out; earliest first among equals. */
 function leadingHoldReason(hours: ScoredHour[]): Reason | null {
   const known = hours.filter((hour) => hour.isKnown)
-  const outside = known.filter((hour) => hour.verdict !== 'hold' && hour.isAvailable === false)
-  const first = outside[0]
-  if (first) {
-    const lastMillis = Date.parse((outside.at(-1) ?? first).time) + HOUR_MILLIS
-    return { code: 'outside_your_hours', factor: 0, values: { startsAt: first.time, endsAt: toIso(lastMillis) } }
+  const outside = longestStretch(known.filter((hour) => hour.verdict !== 'hold' && hour.isAvailable === false))
+  const [first, last] = [outside[0], outside.at(-1)]
+  if (first && last) {
+    const endsAt = toIso(Date.parse(last.time) + HOUR_MILLIS)
+    return { code: 'outside_your_hours', factor: 0, values: { startsAt: first.time, endsAt } }
   }
   const reachable = known.filter((hour) => hour.isAvailable !== false)
   const leads = (reachable.length > 0 ? reachable : known).flatMap((hour) => hour.reasons.slice(0, 1))
@@ -141,6 +141,18 @@ function leadingHoldReason(hours: ScoredHour[]): Reason | null {
   for (const lead of leads) counts.set(lead.code, (counts.get(lead.code) ?? 0) + 1)
   const most = Math.max(0, ...counts.values())
   return leads.find((lead) => counts.get(lead.code) === most) ?? null
+}
+
+/** The longest run of hours that follow one another, the earliest of equals: good hours can lie on both sides of the keeper's. */
+function longestStretch(hours: readonly ScoredHour[]): ScoredHour[] {
+  const stretches: ScoredHour[][] = []
+  for (const hour of hours) {
+    const current = stretches.at(-1)
+    const before = current?.at(-1)
+    if (before && Date.parse(hour.time) - Date.parse(before.time) === HOUR_MILLIS) current?.push(hour)
+    else stretches.push([hour])
+  }
+  return stretches.reduce((longest, one) => (one.length > longest.length ? one : longest), [])
 }
 
 function nextPrecipitation(hours: ScoredHour[], fromMillis: number, toMillis: number): ComingPrecipitation | null {

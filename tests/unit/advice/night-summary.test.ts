@@ -155,6 +155,17 @@ describe('a night to hold off', () => {
     })
   })
 
+  // The keeper's hours, 7 pm to 1 am (7 to 12), part the good ones: four before them, seven after.
+  test('good hours on both sides of the keeper’s: the longest unbroken stretch of them', () => {
+    const isGood = (i: number) => (i >= 3 && i < 7) || (i >= 13 && i < 20)
+    const night = judgement(
+      hours48((i) => ({ isAvailable: i >= 7 && i < 13, verdict: isGood(i) ? 'flood' : 'hold' })),
+      [],
+    )
+    const { values } = summariseNight(night, { ...options, now: new Date(timeOf(0)) }).leadingReason ?? {}
+    expect(values).toEqual({ startsAt: timeOf(13), endsAt: timeOf(20) })
+  })
+
   test('a window that too few runs see is no advice, and no pass is told', () => {
     const night = judgement(
       hours48((i) => ({ verdict: i === 9 ? 'flood' : 'hold' })),

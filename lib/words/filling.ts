@@ -55,12 +55,13 @@ export function fillWarningText({ code, values }: Caution, words: WordOptions): 
   return WARNINGS[code]?.(values, words) ?? ''
 }
 
-/** When something happens over the runs: "Thursday evening, between Wednesday night and Friday morning". */
+/** When something happens over the runs: "Thursday evening; from Wednesday night to Friday morning over the forecast runs". */
 export function spreadText(
   spread: { p10: string | null; p50: string | null; p90: string | null },
   now: Date,
   words: WordOptions,
 ): string {
+  if (spread.p50 && Date.parse(spread.p50) <= now.getTime()) return 'by the model already'
   if (!spread.p50) {
     if (!spread.p10) return 'not within the forecast'
     return `not within the forecast in most runs; ${dayPartText(spread.p10, now, words)} at the earliest`

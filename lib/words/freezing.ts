@@ -6,7 +6,7 @@ import { cautionText } from './cautions'
 import { num, text, type ClauseWriter } from './clause'
 import { spreadText } from './filling'
 import type { WordOptions } from './options'
-import { capitalised, iceText, snowText } from './quantities'
+import { iceText, snowText } from './quantities'
 import { clockText, weekdayText } from './times'
 
 /** "Carries a skater, 10.0 cm" */
@@ -14,19 +14,40 @@ export function carriesName(outlook: FreezingOutlook, words: WordOptions): strin
   return `Carries a skater, ${outlook.isShallow ? 'frozen to the floor' : iceText(outlook.carriesSkaterMm, words)}`
 }
 
+/** Below this a figure would read as no ice, or no water. [mm] */
+const LEAST_MM = 0.5
+
+/** Whether the estimate is as thick as wanted, or has no more water to freeze. The keeper still drills and opens. */
+function isReached({ now, carriesSkaterMm, isShallow }: FreezingOutlook): boolean {
+  const isThrough = now.thicknessMm > LEAST_MM && now.waterBelowMm <= LEAST_MM
+  return now.thicknessMm >= carriesSkaterMm || (isShallow && isThrough)
+}
+
 /** "4.1 cm of ice on 8.3 cm of water. Carries a skater (10.0 cm) Thursday evening; …" */
 export function freezingSentence(outlook: FreezingOutlook, now: Date, words: WordOptions): string {
   const { thicknessMm, waterBelowMm } = outlook.now
-  const ice = thicknessMm > 0.5 ? `${iceText(thicknessMm, words)} of ice` : 'No ice yet'
-  const below = waterBelowMm > 0.5 ? ` on ${iceText(waterBelowMm, words)} of water` : ', frozen through'
+  const ice = thicknessMm > LEAST_MM ? `${iceText(thicknessMm, words)} of ice` : 'No ice yet'
+  const below = waterBelowMm > LEAST_MM ? ` on ${iceText(waterBelowMm, words)} of water` : ', frozen through'
   const limit = iceText(outlook.carriesSkaterMm, words)
-  if (thicknessMm >= outlook.carriesSkaterMm)
-    return `${ice}${below}. By the model it carries: drill before anyone skates.`
-  const when = capitalised(spreadText(outlook.carriesSkaterAt, now, words))
+  if (isReached(outlook)) return `${ice}${below}. By the model it carries: drill before anyone skates.`
   const what = outlook.isShallow
     ? `Too little water for ${limit} of ice, so it carries a skater once it is frozen to the floor`
     : `${limit} to carry a skater`
-  return `${ice}${below}. ${what}: ${when.charAt(0).toLowerCase() + when.slice(1)}.`
+  return `${ice}${below}. ${what}: ${spreadText(outlook.carriesSkaterAt, now, words)}.`
+}
+
+/** What the sign for the gate says large: ice that may be thick enough is not called thin, and is still not open. */
+export function signTitle(outlook: FreezingOutlook): string {
+  return isReached(outlook) ? 'Keep off until it is opened' : 'Keep off: thin ice'
+}
+
+/** "4.1 cm of ice with water under it. It wants 10.0 cm to carry a skater." */
+export function signEstimate(outlook: FreezingOutlook, words: WordOptions): string {
+  const { thicknessMm, waterBelowMm } = outlook.now
+  const ice = `${iceText(thicknessMm, words)} of ice${waterBelowMm > LEAST_MM ? ' with water under it' : ''}.`
+  if (isReached(outlook)) return ice
+  const wanted = outlook.isShallow ? 'has to freeze to the floor' : `wants ${iceText(outlook.carriesSkaterMm, words)}`
+  return `${ice} It ${wanted} to carry a skater.`
 }
 
 const SNOW_WRITERS: Record<string, ClauseWriter> = {

@@ -4,7 +4,7 @@ import { fillProgress, type FillProgressInput } from '@/lib/advice/fill-progress
 import { freezingOutlook } from '@/lib/advice/freezing'
 import { METRIC } from '@/lib/units'
 import * as filling from '@/lib/words/filling'
-import { carriesName, freezingSentence, snowOnIceText } from '@/lib/words/freezing'
+import { carriesName, freezingSentence, signEstimate, signTitle, snowOnIceText } from '@/lib/words/freezing'
 import { inputOf, steadyHours } from '../../support/advice-weather'
 
 const words = { timeZone: 'UTC', units: METRIC, clock: '24' as const, locale: 'en' }
@@ -80,6 +80,27 @@ describe('freezing', () => {
     expect(carriesName(shallow, words)).toBe('Carries a skater, frozen to the floor')
     expect(carriesName(outlook, words)).toBe('Carries a skater, 10.0 cm')
   })
+  // 22 mm with no water left is all the ice that the fill makes, so it is at its limit though short of 100 mm.
+  const onFloor = { ...outlook, isShallow: true, now: { ...outlook.now, thicknessMm: 22, waterBelowMm: 0 } }
+  test('a shallow fill that is frozen through has reached what it can', () => {
+    expect(freezingSentence(onFloor, new Date(given.now), words)).toBe(
+      '2.2 cm of ice, frozen through. By the model it carries: drill before anyone skates.',
+    )
+  })
+  test('the sign for the gate: thin while it is thin; from the limit of 100 mm on closed, but not thin', () => {
+    const at = (thicknessMm: number) => ({ ...outlook, now: { ...outlook.now, thicknessMm } })
+    expect([signTitle(at(99)), signTitle(at(100)), signTitle(at(115)), signTitle(onFloor)]).toEqual([
+      'Keep off: thin ice',
+      'Keep off until it is opened',
+      'Keep off until it is opened',
+      'Keep off until it is opened',
+    ])
+    expect(signEstimate(at(41), words)).toBe('4.1 cm of ice with water under it. It wants 10.0 cm to carry a skater.')
+    expect(signEstimate(at(115), words)).toBe('11.5 cm of ice with water under it.')
+    expect(signEstimate(onFloor, words)).toBe('2.2 cm of ice.')
+    const shallow = { ...at(12), isShallow: true }
+    expect(signEstimate(shallow, words)).toContain('It has to freeze to the floor to carry a skater.')
+  })
   test('every word about snow', () => {
     expect(outlook.snow.length).toBeGreaterThan(1)
     for (const caution of outlook.snow) expect(snowOnIceText(caution, words)).toMatch(/\.$/)
@@ -94,5 +115,13 @@ describe('freezing', () => {
       'Wednesday evening, or later than the forecast reaches',
     )
     expect(filling.spreadText({ p10: null, p50: null, p90: null }, now, words)).toBe('not within the forecast')
+  })
+  test('what the estimate has reached is not told as to come', () => {
+    const now = new Date('2026-12-20T12:00:00Z')
+    const reached = { p10: '2026-12-20T12:00:00Z', p50: '2026-12-20T12:00:00Z', p90: '2026-12-20T12:00:00Z' }
+    expect(filling.spreadText(reached, now, words)).toBe('by the model already')
+    // The middle run gets there in an hour: that is still to come.
+    const soon = '2026-12-20T13:00:00Z'
+    expect(filling.spreadText({ p10: soon, p50: soon, p90: soon }, now, words)).toBe('this afternoon')
   })
 })

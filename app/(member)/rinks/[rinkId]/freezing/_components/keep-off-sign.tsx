@@ -2,7 +2,7 @@
 import { PrintButton } from '@/components/ui/print-button'
 import type { FreezingOutlook } from '@/lib/advice/freezing'
 import type { FreezingView } from '@/lib/schemas/freezing-view'
-import { iceText } from '@/lib/words/quantities'
+import { signEstimate, signTitle } from '@/lib/words/freezing'
 import { clockText } from '@/lib/words/times'
 
 export function KeepOffSign({ view, outlook }: { view: FreezingView; outlook: FreezingOutlook }) {
@@ -22,14 +22,12 @@ export function KeepOffSign({ view, outlook }: { view: FreezingView; outlook: Fr
       </div>
       <div className="border-[3px] border-rust bg-sheet px-5 py-7 text-center lg:py-10 print:border-[8px] print:border-black print:bg-white print:py-[3cm] print:text-black">
         <p id="keep-off" className="text-verdict-wide font-semibold tracking-tight print:text-sign">
-          Keep off: thin ice
+          {signTitle(outlook)}
         </p>
         <p className="mt-3 text-verdict font-medium print:mt-8 print:text-sign-name">{rink.name}</p>
         <p className="mx-auto mt-5 max-w-line text-lead print:mt-10 print:text-verdict">
           {sinceAt ? `Freezing since ${date(sinceAt)}. ` : ''}
-          Estimated at {clockText(readAt, reader)} on {date(readAt)}: {iceText(outlook.now.thicknessMm, reader)} of ice
-          {outlook.now.waterBelowMm > 0.5 ? ' with water under it' : ''}. It wants{' '}
-          {iceText(rink.carriesSkaterMm, reader)} to carry a skater.
+          Estimated at {clockText(readAt, reader)} on {date(readAt)}: {signEstimate(outlook, reader)}
         </p>
         <p className="mx-auto mt-4 max-w-line text-body font-medium print:mt-8 print:text-verdict">
           An estimate is no measurement. Nobody goes on before the keeper has drilled and opened the rink.

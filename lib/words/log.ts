@@ -35,6 +35,9 @@ export const WATER_KIND_WORDS: Record<NonNullable<EntryView['waterKind']>, strin
   tanker: 'tanker',
 }
 
+/** Ice is as safe as its thinnest place, and clear ice carries what white ice does not. */
+export const READING_HINT = 'The thinnest of several holes, clear ice only.'
+
 /** Litres, or cubic metres when there are many; gallons for those who read gallons. */
 export function muchWaterText(litres: number, words: WordOptions): string {
   if (words.units.water === 'gal' || litres < MANY_LITRES) return waterText(litres, words)

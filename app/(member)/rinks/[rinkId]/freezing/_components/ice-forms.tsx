@@ -5,6 +5,7 @@ import { Disclosure } from '@/components/ui/disclosure'
 import { TextField } from '@/components/ui/field'
 import { unitOf } from '@/lib/schemas/measures'
 import { unitsCode, type Units } from '@/lib/units'
+import { READING_HINT } from '@/lib/words/log'
 import { openForSkatingAction, writeReadingAction } from '../actions'
 
 export function ReadingForm({ rinkId, units, entryKey }: { rinkId: string; units: Units; entryKey: string }) {
@@ -23,7 +24,7 @@ export function ReadingForm({ rinkId, units, entryKey }: { rinkId: string; units
               name="thickness"
               inputMode="decimal"
               unit={unitOf('iceThickness', units)}
-              hint="The thinnest of several holes, clear ice only. Reach from outside the boards while it is thin."
+              hint={`${READING_HINT} Reach from outside the boards while it is thin.`}
               defaultValue={status === 'error' ? (values?.thickness ?? '') : ''}
               error={fields?.thickness}
             />

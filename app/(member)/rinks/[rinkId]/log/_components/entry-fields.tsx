@@ -6,7 +6,7 @@ import { NOTE_LENGTH, type LogKind } from '@/lib/schemas/log-choices'
 import { scaleOf, unitOf } from '@/lib/schemas/measures'
 import { WATER_KINDS } from '@/lib/schemas/rink-choices'
 import type { Units } from '@/lib/units'
-import { WATER_KIND_WORDS } from '@/lib/words/log'
+import { READING_HINT, WATER_KIND_WORDS } from '@/lib/words/log'
 import { capitalised } from '@/lib/words/quantities'
 import type { EntryValues } from './entry-values'
 import { Stepper } from './stepper'
@@ -46,7 +46,7 @@ export function MainFields(props: FieldsProps) {
         step={PRESSES.ice[units.ice]}
         from={scaleOf('iceThickness', units).fromSi(100)}
         defaultValue={values.thickness ?? ''}
-        hint="Drilled. The mean, when you drilled several holes."
+        hint={READING_HINT}
         error={faults.thickness}
       />
     )

@@ -10,6 +10,7 @@ import { orNotFound } from '@/lib/http/or-not-found'
 import { logQuerySchema, type LogQuery } from '@/lib/schemas/log-query'
 import { getLog, type LogView } from '@/lib/services/log-book'
 import { seasonHeadline } from '@/lib/words/log-season'
+import { unbroken } from '@/lib/words/unbroken'
 import { Charts } from './_components/charts'
 import { Filters, isFiltered, logAddress } from './_components/filters'
 import { Nights } from './_components/nights'
@@ -25,7 +26,7 @@ export default async function LogPage({ params, searchParams }: PageProps<'/rink
   return (
     <RinkFrame name={rink.name} about={`Season ${seasonName(season)}`} people={rink.people}>
       <h1 className="max-w-[24ch] text-verdict font-medium tracking-tight lg:text-verdict-wide">
-        {seasonHeadline(totals, new Date(view.readAt), reader)}
+        {unbroken(seasonHeadline(totals, new Date(view.readAt), reader))}
       </h1>
       {mayWrite ? (
         <QuickEntry rinkId={rink.id} entryKey={randomUUID()} usual={usual} reader={reader} open={query.write ?? null} />

@@ -8,6 +8,7 @@ import { spreadText } from '@/lib/words/filling'
 import { carriesName, freezingSentence, snowOnIceText } from '@/lib/words/freezing'
 import { capitalised, iceText, snowText } from '@/lib/words/quantities'
 import { clockText, weekdayText } from '@/lib/words/times'
+import { unbroken } from '@/lib/words/unbroken'
 import { KeepOffSign } from './keep-off-sign'
 import { OpenRink, ReadingForm } from './ice-forms'
 import { ThicknessAhead } from './thickness-ahead'
@@ -25,10 +26,12 @@ export function FreezingIce({ view, outlook, entryKey }: Props) {
   return (
     <>
       <div className="print:hidden">
-        <h1 className="mb-2 max-w-[24ch] text-verdict font-medium tracking-tight lg:text-verdict-wide">{lead}</h1>
-        <p className="mb-1 max-w-[60ch] text-lead">{rest.join(' ')}</p>
+        <h1 className="mb-2 max-w-[24ch] text-verdict font-medium tracking-tight lg:text-verdict-wide">
+          {unbroken(lead)}
+        </h1>
+        <p className="mb-1 max-w-[60ch] text-lead">{unbroken(rest.join(' '))}</p>
         <p className="mb-5 max-w-[60ch] text-graphite">
-          An estimate over {outlook.runs} forecast runs. Drill and measure before anyone skates; the keeper decides.
+          An estimate over {runsText(outlook.runs)}: a drilled hole is worth more, and the keeper decides.
         </p>
         {outlook.snow.map((caution) => (
           <Notice key={caution.code} tone="caution">
@@ -50,6 +53,9 @@ export function FreezingIce({ view, outlook, entryKey }: Props) {
     </>
   )
 }
+
+/** The forecast is one of the runs; elsewhere only the others are counted. */
+const runsText = (runs: number) => (runs > 1 ? `the forecast and ${runs - 1} other runs` : 'the forecast alone')
 
 function WhenItCarries({
   outlook,

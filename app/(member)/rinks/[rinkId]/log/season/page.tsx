@@ -9,6 +9,7 @@ import { seasonYearSchema } from '@/lib/schemas/season'
 import { getSeason, type SeasonView } from '@/lib/services/log-season'
 import { rateText } from '@/lib/words/kept'
 import { seasonHeadline, thicknessSummary } from '@/lib/words/log-season'
+import { unbroken } from '@/lib/words/unbroken'
 import { durationText, numberText } from '@/lib/words/quantities'
 import { Totals, totalFigures, type Figure } from '../_components/totals'
 import { EntryLines, NextYear } from './_components/lists'
@@ -23,7 +24,7 @@ export default async function SeasonPage({ params, searchParams }: PageProps<'/r
   return (
     <RinkFrame name={rink.name} about={`Season ${seasonName(season)}`} people={rink.people}>
       <h1 className="max-w-[26ch] text-verdict font-medium tracking-tight lg:text-verdict-wide print:text-lead">
-        {seasonHeadline(totals, new Date(view.readAt), reader)}
+        {unbroken(seasonHeadline(totals, new Date(view.readAt), reader))}
       </h1>
       <OtherSeasons rinkId={rink.id} year={season.year} present={view.presentYear} />
       <div className="mt-4 gap-x-14 lg:grid lg:grid-cols-2 print:grid print:grid-cols-2 print:gap-x-8">

@@ -7,6 +7,7 @@ import { buildSums } from '@/lib/advice/build-sums'
 import { nightDateOf } from '@/lib/advice/night'
 import { seasonOf } from '@/lib/advice/season'
 import type { Phase } from '@/lib/advice/types'
+import { localDateOf } from '@/lib/advice/zoned-time'
 import type { ServiceContext } from '@/lib/context'
 import { InvalidInputError } from '@/lib/errors'
 import { floorExtremesM, floorOf, type FloorShape } from '@/lib/physics/floor'
@@ -21,6 +22,8 @@ export interface PlanView {
   rink: { id: string; name: string; phase: Phase }
   reader: WordOptions
   mayManage: boolean
+  /** At the rink, 'yyyy-MM-dd'. */
+  today: string
   /** What the rink has now, in SI. */
   start: {
     lengthM: number
@@ -43,6 +46,7 @@ export async function getPlan(context: ServiceContext, rinkId: string): Promise<
     rink: { id: rink.id, name: rink.name, phase: rink.phase },
     reader,
     mayManage: isGranted(role, 'manage'),
+    today: localDateOf(context.now.getTime(), rink.timeZone),
     start: {
       lengthM: rink.lengthM,
       widthM: rink.widthM,

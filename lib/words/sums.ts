@@ -1,5 +1,6 @@
 // The building plan in sentences: the lead, and each sum with its figure.
 import type { BuildSums, How, SumId } from '@/lib/advice/build-types'
+import { BUILD } from '@/lib/advice/thresholds'
 import { depthText, lengthText, momentText, pushText, roundedHours, shareText, volumeText } from './build-quantities'
 import { num } from './clause'
 import type { WordOptions } from './options'
@@ -22,9 +23,13 @@ export function sumsLead(sums: BuildSums, words: WordOptions): string {
   return `${volumeText(sums.water.volumeM3, words)} of water, about ${hose} of hose, ${goes}.`
 }
 
-/** Every sum as a line: label, figure, what it means, and how it was made. */
-export function sumItems(sums: BuildSums, words: WordOptions): SumItem[] {
-  const lines = [...waterLines(sums, words), ...boardLines(sums, words), ...linerLines(sums, words)]
+/**
+ * Every sum as a line: label, figure, what it means, and how it was made.
+ *
+ * @param today Date at the rink, 'yyyy-MM-dd': it tells whether the day to order by is past.
+ */
+export function sumItems(sums: BuildSums, today: string, words: WordOptions): SumItem[] {
+  const lines = [...waterLines(sums, words), ...boardLines(sums, words), ...linerLines(sums, today, words)]
   return lines.map(({ how, ...line }) => ({ id: how.formulaId, ...line, how: howWords(how, words) }))
 }
 
@@ -106,7 +111,7 @@ function boardLines(sums: BuildSums, words: WordOptions): Line[] {
   ]
 }
 
-function linerLines({ liner, orderBy, meltWater }: BuildSums, words: WordOptions): Line[] {
+function linerLines({ liner, orderBy, meltWater }: BuildSums, today: string, words: WordOptions): Line[] {
   return [
     {
       label: 'Liner',
@@ -117,7 +122,7 @@ function linerLines({ liner, orderBy, meltWater }: BuildSums, words: WordOptions
     {
       label: 'Order the liner by',
       figure: dateText(orderBy.date, words),
-      detail: 'By late November stock is thin.',
+      detail: orderDetail(orderBy.date, today),
       how: orderBy.how,
     },
     {
@@ -127,6 +132,20 @@ function linerLines({ liner, orderBy, meltWater }: BuildSums, words: WordOptions
       how: meltWater.how,
     },
   ]
+}
+
+function orderDetail(date: string, today: string): string {
+  if (today <= date) return 'By late November stock is thin.'
+  return 'That day is past. Order now, ask first what lies in stock, and pay for express delivery: no fill before it is here.'
+}
+
+/** For the list of next year: the same day as in the plan, without its year. */
+export function orderByText(words: WordOptions): string {
+  const format = { day: 'numeric', month: 'long', timeZone: 'UTC' } as const
+  const day = new Intl.DateTimeFormat(words.locale, format).format(
+    Date.parse(`2001-${BUILD.orderByMonthDay}T12:00:00Z`),
+  )
+  return `Order liner, boards and brackets by ${day}: boards go up in late October, and shipping takes weeks.`
 }
 
 /** "the first three hours wet about half the floor" by what is nearest to three hours. */

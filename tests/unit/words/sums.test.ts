@@ -3,7 +3,7 @@ import { describe, expect, test } from 'vitest'
 import { buildSums } from '@/lib/advice/build-sums'
 import { IMPERIAL, METRIC } from '@/lib/units'
 import { SUM_CAUTION_CODES, sumCautionText } from '@/lib/words/sum-cautions'
-import { sumItems, sumsLead } from '@/lib/words/sums'
+import { orderByText, sumItems, sumsLead } from '@/lib/words/sums'
 
 const metric = { timeZone: 'America/Toronto', units: METRIC, clock: '24' as const, locale: 'en' }
 const imperial = { ...metric, units: IMPERIAL }
@@ -18,7 +18,8 @@ const sums = buildSums({
   boardHeightM: 0.3,
   seasonYear: 2026,
 })
-const itemOf = (id: string, words = metric) => sumItems(sums, words).find((item) => item.id === id)!
+const TODAY = '2026-09-01'
+const itemOf = (id: string, words = metric) => sumItems(sums, TODAY, words).find((item) => item.id === id)!
 
 describe('sums in words', () => {
   test('the lead', () => expect(sumsLead(sums, metric)).toBe('17.6 m³ of water, about 12 hours of hose, in two goes.'))
@@ -33,6 +34,12 @@ describe('sums in words', () => {
     expect(itemOf('orderBy').figure).toBe('September 30, 2026')
     expect(itemOf('cost').figure).toBe('52.92')
   })
+  test('the day to order by, before it and past it', () => {
+    const detailOn = (today: string) => sumItems(sums, today, metric).find(({ id }) => id === 'orderBy')?.detail
+    expect(detailOn('2026-09-30')).toBe('By late November stock is thin.')
+    expect(detailOn('2026-10-01')).toMatch(/^That day is past. Order now/)
+    expect(orderByText(metric)).toMatch(/^Order liner, boards and brackets by September 30:/)
+  })
   // 502.3 N/m × 0.3048 m / 4.448 N = 34.4 lb; 53.6 N m/m / 4.448 = 12.0 lb ft/ft.
   test('push in pounds', () => {
     expect(itemOf('push', imperial).figure).toBe('34 lb on each foot')
@@ -40,7 +47,7 @@ describe('sums in words', () => {
   })
   test('every sum has a formula, the same with figures, and a source', () => {
     for (const words of [metric, imperial]) {
-      for (const { figure, detail, how } of sumItems(sums, words)) {
+      for (const { figure, detail, how } of sumItems(sums, TODAY, words)) {
         for (const text of [figure, detail, how.formula, how.worked, how.source]) {
           expect(text.length).toBeGreaterThan(0)
           expect(text).not.toMatch(/NaN|undefined|Infinity/)

@@ -10,7 +10,7 @@ export const metadata: Metadata = { title: 'Plan the build' }
 
 export default async function PlanPage({ params, searchParams }: PageProps<'/rinks/[rinkId]/plan'>) {
   const [{ rinkId }, query] = await Promise.all([params, searchParams])
-  const { rink, reader, mayManage, start } = await orNotFound(getPlan(await pageContext(), rinkId))
+  const { rink, reader, mayManage, today, start } = await orNotFound(getPlan(await pageContext(), rinkId))
   const kept = startValues(start, reader.units)
   const initial = { ...kept, ...typedValues(query) }
   return (
@@ -20,6 +20,7 @@ export default async function PlanPage({ params, searchParams }: PageProps<'/rin
       kept={kept}
       reader={reader}
       mayManage={mayManage}
+      today={today}
       years={[start.seasonYear, start.seasonYear + 1]}
     />
   )

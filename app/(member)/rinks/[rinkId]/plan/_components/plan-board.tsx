@@ -6,14 +6,15 @@ import { Notice } from '@/components/ui/notice'
 import { PrintButton } from '@/components/ui/print-button'
 import { IDLE } from '@/lib/http/form-state'
 import { unitsCode } from '@/lib/units'
-import { depthText, lengthText } from '@/lib/words/build-quantities'
 import type { WordOptions } from '@/lib/words/options'
 import { sumItems, sumsLead } from '@/lib/words/sums'
+import { unbroken } from '@/lib/words/unbroken'
 import { keepPlanAction } from '../actions'
 import { BY_ADDRESS } from './by-address'
 import { GroundFields } from './ground-fields'
 import { PlanCautions } from './plan-cautions'
 import type { PlanValues } from './plan-values'
+import { PrintedGround } from './printed-ground'
 import { SectionFigure } from './section-figure'
 import { SumList } from './sum-list'
 import { usePlanForm } from './use-plan-form'
@@ -27,10 +28,12 @@ interface Props {
   kept: PlanValues
   reader: WordOptions
   mayManage: boolean
+  /** At the rink, 'yyyy-MM-dd'. */
+  today: string
   years: readonly number[]
 }
 
-export function PlanBoard({ rinkId, initial, kept, reader, mayManage, years }: Props) {
+export function PlanBoard({ rinkId, initial, kept, reader, mayManage, today, years }: Props) {
   const [state, keep, isPending] = useActionState(keepPlanAction, IDLE)
   // Without script the page comes back whole after keeping, and this is where what was typed is found again.
   const form = usePlanForm(state.values ?? initial, kept, reader.units)
@@ -45,16 +48,9 @@ export function PlanBoard({ rinkId, initial, kept, reader, mayManage, years }: P
   return (
     <>
       <h1 className="mb-5 max-w-[24ch] text-verdict font-medium tracking-tight lg:text-verdict-wide print:mb-1 print:max-w-none print:text-lead">
-        {sumsLead(sums, reader)}
+        {unbroken(sumsLead(sums, reader))}
       </h1>
-      <p className="mb-1 hidden text-note print:block">
-        {lengthText(sums.ground.how.values.lengthM ?? 0, reader)} ×{' '}
-        {lengthText(sums.ground.how.values.widthM ?? 0, reader)}. Corners below the string:{' '}
-        {form.values.floorKind === 'level'
-          ? 'level'
-          : sums.corners.map(({ floorM }) => depthText(floorM, reader)).join(', ')}
-        .
-      </p>
+      <PrintedGround form={form} reader={reader} />
       <SectionFigure sums={sums} reader={reader} />
       <div className="gap-x-14 lg:grid lg:grid-cols-[1.25fr_1fr] lg:grid-rows-[auto_1fr] print:block">
         <form action={keep} className="mt-8 print:hidden" noValidate onSubmit={(event) => event.preventDefault()}>
@@ -95,7 +91,7 @@ export function PlanBoard({ rinkId, initial, kept, reader, mayManage, years }: P
               <p>These are still the sums of the last figures that made sense: something in the form needs a look.</p>
             </Notice>
           )}
-          <SumList items={sumItems(sums, reader)} />
+          <SumList items={sumItems(sums, today, reader)} />
         </section>
         <Wetted sums={sums} reader={reader} />
       </div>

@@ -79,10 +79,10 @@ function Faults({ form, rows, columns }: { form: PlanForm; rows: number; columns
   )
 }
 
-const steps = (count: number) => Array.from({ length: count }, (_, index) => index + 1)
+export const steps = (count: number) => Array.from({ length: count }, (_, index) => index + 1)
 
 /** While a count is being typed it may be none. */
-function countOf(text: string | undefined): number {
+export function countOf(text: string | undefined): number {
   const count = Math.trunc(Number(text))
   return Number.isNaN(count) ? GRID.least : Math.min(GRID.most, Math.max(GRID.least, count))
 }

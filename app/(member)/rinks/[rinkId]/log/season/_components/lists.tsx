@@ -3,6 +3,7 @@ import { dayText } from '@/components/rinks/reader'
 import type { EntryView } from '@/lib/schemas/log-choices'
 import type { SeasonView } from '@/lib/services/log-season'
 import type { WordOptions } from '@/lib/words/options'
+import { orderByText } from '@/lib/words/sums'
 import { clockText } from '@/lib/words/times'
 
 export function EntryLines({ entries, reader, empty }: { entries: EntryView[]; reader: WordOptions; empty: string }) {
@@ -19,10 +20,6 @@ export function EntryLines({ entries, reader, empty }: { entries: EntryView[]; r
   )
 }
 
-/** No public source states a date for ordering a liner; boards go up in late October and shipping takes weeks. Ours. */
-const ORDER_BY =
-  'Order liner, boards and brackets by early October: boards go up in late October, and shipping takes weeks.'
-
 export function NextYear({ view }: { view: SeasonView }) {
   const tasks = view.repairs.filter(({ note }) => note !== '')
   return (
@@ -31,7 +28,7 @@ export function NextYear({ view }: { view: SeasonView }) {
       <ul className="list-none border-t border-rule p-0">
         <li className="flex gap-3 border-b border-rule py-2 text-note">
           <Box />
-          {ORDER_BY}
+          {orderByText(view.reader)}
         </li>
         {tasks.map(({ id, nightDate, note }) => (
           <li key={id} className="flex gap-3 border-b border-rule py-2 text-note">

@@ -51,6 +51,8 @@ function thawHeadline(summary: WeekSummary, now: Date, words: WordOptions): Week
     const key = `thaw until ${dayPartText(thaw.endsAt, now, words)}`
     return { before: 'A', key, after: `.${after || ' No good night after it in this forecast.'}`, tone: 'thaw' }
   }
+  const isToday = localDateOf(Date.parse(thaw.startsAt), words.timeZone) === localDateOf(now.getTime(), words.timeZone)
+  if (goodBeforeThaw === 0 && isToday) return { before: 'A', key: 'thaw today', after: `.${after}`, tone: 'thaw' }
   const count = goodBeforeThaw === 0 ? 'No good night' : capitalised(nightsText(goodBeforeThaw))
   const key = `thaw ${nearDayText(thaw.startsAt, now, words)}`
   return { before: `${count} before the`, key, after: goodBeforeThaw === 0 ? `.${after}` : '.', tone: 'thaw' }
@@ -77,7 +79,7 @@ function freezingHeadline(fill: FillOutlook, now: Date, words: WordOptions): Wee
 
 /** What stands under the headline: what the near nights could bring, what the thaw takes, how wide the dates are. */
 export function weekDetail({ phase, summary, fill }: Omit<Week, 'fillWindows'>, now: Date, words: WordOptions): string {
-  if (phase === 'waiting' || phase === 'filling' || phase === 'freezing') return spreadText(fill, words)
+  if (phase === 'waiting' || phase === 'filling' || phase === 'freezing') return spreadText(fill, phase, now, words)
   return [floodsText(summary, now, words), thawText(summary, words)].filter(Boolean).join(' ')
 }
 
@@ -98,11 +100,15 @@ function thawText({ thaw, thinnest }: WeekSummary, words: WordOptions): string {
 }
 
 /** "Nine of ten forecast runs have it carry skaters by Sat 23 January, one of ten by Wed 20 January." */
-function spreadText({ startsAt, carriesSkaterAt: { p10, p50, p90 } }: FillOutlook, words: WordOptions): string {
+function spreadText(fill: FillOutlook, phase: Phase, now: Date, words: WordOptions): string {
+  const { startsAt, carriesSkaterAt } = fill
+  const { p10, p50, p90 } = carriesSkaterAt
   if (!p50) return startsAt ? 'The forecast ends before the ice carries skaters.' : ''
   const early = p10 ? `one forecast run in ten has it carry by ${longDayText(p10, words)}` : ''
   const late = p90 ? `nine in ten by ${longDayText(p90, words)}` : 'one in ten not before the forecast ends'
-  return capitalised(`${[early, late].filter(Boolean).join(', ')}. Drill before anyone skates.`)
+  // The headline says so of a sheet that carries by now.
+  const drill = phase === 'freezing' && Date.parse(p50) <= now.getTime() ? '' : ' Drill before anyone skates.'
+  return capitalised(`${[early, late].filter(Boolean).join(', ')}.${drill}`)
 }
 
 /** "today", "tomorrow", "on Sunday". */

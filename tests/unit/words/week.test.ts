@@ -48,6 +48,8 @@ test('the headline counts the good nights and names the thaw', () => {
   expect(headline({ thaw: { ...THAW, startsAt: '2027-01-13T14:00:00Z' }, goodBeforeThaw: 1 })).toBe(
     'One good night before the thaw tomorrow.',
   )
+  const today = { ...THAW, startsAt: '2027-01-12T23:00:00Z' }
+  expect(headline({ thaw: today, goodBeforeThaw: 0, goodAfterThaw: 2 })).toBe('A thaw today. Two good nights after it.')
   expect(headline({ thaw: THAW, isThawOn: true, goodAfterThaw: 1 })).toBe(
     'A thaw until Tuesday evening. One good night after it.',
   )
@@ -69,6 +71,13 @@ test('before the fill the headline says when to fill and when skaters may come',
   expect(headline({}, 'waiting', FILL, [doubtful])).toBe(
     'No time to fill that enough forecast runs see in the ten days ahead.',
   )
+  const carries = {
+    ...fill,
+    carriesSkaterAt: { ...carriesSkaterAt, p10: '2027-01-11T12:00:00Z', p50: '2027-01-12T12:00:00Z' },
+  }
+  const said =
+    headline({}, 'freezing', carries) + weekDetail({ phase: 'freezing', summary: SUMMARY, fill: carries }, NOW, READER)
+  expect(said.match(/Drill before anyone skates/g)).toHaveLength(1)
   expect(headline({}, 'freezing', fill)).toBe('Keep off: skaters from about Tue 19 January.')
   expect(weekDetail({ phase: 'waiting', summary: SUMMARY, fill }, NOW, READER)).toBe(
     'One forecast run in ten has it carry by Mon 18 January, nine in ten by Thu 21 January. Drill before anyone skates.',

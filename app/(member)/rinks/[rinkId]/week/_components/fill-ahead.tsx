@@ -43,8 +43,7 @@ function TheFill({ fill, startsAt, reader }: { fill: FillOutlook; startsAt: stri
         <Facts rows={rows} />
       </div>
       <p className="mt-2 text-small text-graphite">
-        Half of the forecast runs get there by the date; the span is from one run in ten to nine in ten. Drill before
-        anyone skates.
+        Half of the forecast runs get there by the date; the span is from one run in ten to nine in ten.
       </p>
     </section>
   )

@@ -117,13 +117,23 @@ export function fitsMeasure(measure: MeasureName, valueSi: number): boolean {
   return valueSi >= least && valueSi <= most
 }
 
+/** Decimals that a limit is told with: hundredths of an inch matter of a film of water, not of a board. */
+function limitDecimals(value: number, decimals: number): number {
+  const size = Math.abs(value)
+  return Math.min(decimals, size >= 20 ? 0 : size >= 1 ? 1 : 2)
+}
+
+function rounded(value: number, decimals: number, round: (value: number) => number): number {
+  const step = 10 ** limitDecimals(value, decimals)
+  // Six decimals are enough of a unit that was reckoned over: 0.3 is not to become 0.30000000000000004.
+  return round(Number((value * step).toFixed(6))) / step
+}
+
 /** "Between 2 and 100 m." The limits are rounded inward, so that what they promise is accepted. */
 export function rangeMessage(measure: MeasureName, units: Units): string {
   const { least, most } = MEASURES[measure]
   const { unit, decimals, fromSi } = scaleOf(measure, units)
-  const step = 10 ** decimals
-  const tidy = (value: number) => Number(value.toFixed(6))
-  const low = Math.ceil(tidy(fromSi(least) * step)) / step
-  const high = Math.floor(tidy(fromSi(most) * step)) / step
+  const low = rounded(fromSi(least), decimals, Math.ceil)
+  const high = rounded(fromSi(most), decimals, Math.floor)
   return `Between ${low} and ${high} ${unit}.`
 }

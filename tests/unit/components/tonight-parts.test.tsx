@@ -4,7 +4,7 @@ import { describe, expect, test } from 'vitest'
 import { entriesFor, entryOf } from '@/app/(member)/_components/navigation'
 import { DataSource } from '@/components/rinks/data-source'
 import { passWords, setWords } from '@/app/(member)/rinks/[rinkId]/_components/pass-words'
-import { isAsked } from '@/app/(member)/rinks/[rinkId]/_components/when-asked'
+import { hasMoreToLose, isAsked } from '@/app/(member)/rinks/[rinkId]/_components/when-asked'
 import { StatusNotices } from '@/app/(member)/rinks/[rinkId]/_components/status-notices'
 import type { ReadTrouble } from '@/app/(member)/rinks/[rinkId]/_components/use-tonight'
 import { Verdict } from '@/app/(member)/rinks/[rinkId]/_components/verdict'
@@ -91,6 +91,13 @@ describe('whether a poured pass is set', () => {
     expect(isAsked(POURED, at(9))).toBe(false)
     expect(setWords(POURED, at(9.7), readerOf(view))).toBe('')
     expect(isAsked(POURED, at(9.7))).toBe(true)
+  })
+
+  test('taking it out asks first once it was answered for or changed', () => {
+    expect(hasMoreToLose(POURED)).toBe(false)
+    expect(hasMoreToLose({ ...POURED, entry: null })).toBe(false)
+    expect(hasMoreToLose({ ...POURED, outcome: 'set', outcomeAt: isoAt(10) })).toBe(true)
+    expect(hasMoreToLose({ ...POURED, entry: { ...POURED.entry!, version: 2 } })).toBe(true)
   })
 
   test('a pass that no hour of the forecast sets keeps people off', () => {

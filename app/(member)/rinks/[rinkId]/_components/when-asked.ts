@@ -1,4 +1,4 @@
-// When the page asks whether a poured pass is set.
+// When the page asks of a poured pass: whether it is set, and whether it is really to leave the log.
 import { HOUR_MILLIS, MINUTE_MILLIS } from '@/lib/physics/constants'
 import type { PouredPassView } from '@/lib/schemas/tonight-view'
 
@@ -12,4 +12,9 @@ export function isAsked({ entry, outcome, outcomeAt, saidSetByAt, at }: PouredPa
   if (!entry || outcome === 'set' || outcome === 'spoiled') return false
   if (outcome === 'wet') return now >= Date.parse(outcomeAt ?? at) + ASK_AGAIN
   return now >= (saidSetByAt ? Date.parse(saidSetByAt) : Date.parse(at) + ASK_AFTER)
+}
+
+/** A slip is taken back at once; what somebody answered or changed since is not lost by one touch. */
+export function hasMoreToLose({ entry, outcome }: PouredPassView): boolean {
+  return outcome !== null || (entry !== null && entry.version > 1)
 }

@@ -2,6 +2,7 @@
 import { describe, expect, test } from 'vitest'
 import {
   addressAlreadyRegisteredMail,
+  deletionAskedMail,
   resetPasswordMail,
   signInLinkMail,
   verifyAddressMail,
@@ -215,4 +216,10 @@ describe('an invitation', () => {
     expect(subject).toMatch(/^J\. O’Neill-Berg invites you to x+…$/)
     expect(subject.length).toBeLessThanOrEqual(140)
   })
+})
+
+test('the end of an account cannot be read as its going on', () => {
+  const { subject, text } = deletionAskedMail({ on: '15 December 2026', signInUrl: link.url })
+  expect(subject).toBe('Your Nightsheet account will be deleted on 15 December 2026')
+  expect(text).toContain('Your account will be deleted on 15 December 2026')
 })

@@ -64,6 +64,11 @@ function floodedBySnow(sheet: SheetState, thicknessMm: number, snowCoverCm: numb
   return snowCoverCm > bornCm ? { code: 'snow_floods_ice', values: { snowCoverCm, bornCm, thicknessMm } } : null
 }
 
+/** With no water under it the floor carries whoever clears the sheet, and nothing is left to freeze. */
+function liesOnFloor({ belowKgM2 }: SheetState, thicknessMm: number): boolean {
+  return belowKgM2 <= 0 && thicknessMm >= FLOOD.leastIceMm
+}
+
 function clearOrLeave(
   sheet: SheetState,
   thicknessMm: number,
@@ -71,6 +76,7 @@ function clearOrLeave(
   ahead: SnowQuestion['ahead'],
 ): Caution | null {
   if (snowCoverCm <= FLOOD.snowToClearCm.one) return null
+  if (liesOnFloor(sheet, thicknessMm)) return { code: 'clear_snow_on_floor', values: { snowCoverCm, thicknessMm } }
   const growthShare = growthUnderSnow(thicknessMm, snowCoverCm, densityOf(sheet))
   const values = { snowCoverCm, thicknessMm, growthShare, bearsMm: FLOOD.bearsMm.one }
   if (thicknessMm >= FLOOD.bearsMm.one) return { code: 'clear_snow_now', values }
@@ -83,9 +89,11 @@ function snowDue(run: ForecastRun, nowIndex: number, thicknessMm: number): Cauti
   const coming = run.hours.slice(nowIndex, nowIndex + SNOW_ON_THIN_ICE.aheadHours)
   const snowfallCm = coming.reduce((sum, hour) => sum + hour.snowfallCm, 0)
   if (snowfallCm < SNOW_ON_THIN_ICE.leastCm || thicknessMm >= FLOOD.bearsMm.one) return null
+  const sheet = run.carried[nowIndex]
+  if (sheet && liesOnFloor(sheet, thicknessMm)) return null
   const startsAt = coming.find((hour) => hour.snowfallCm > 0)?.time ?? ''
   const bornCm = snowThatFloodsIceCm(thicknessMm, ICE_DENSITY, SNOW_ON_THIN_ICE.newSnowKgM3)
-  const isFloating = (run.carried[nowIndex]?.belowKgM2 ?? 0) > 0
+  const isFloating = (sheet?.belowKgM2 ?? 0) > 0
   const code = isFloating && snowfallCm > bornCm ? 'snow_due_will_flood' : 'snow_due_on_thin_ice'
   return { code, values: { snowfallCm, startsAt, thicknessMm, bornCm, bearsMm: FLOOD.bearsMm.one } }
 }

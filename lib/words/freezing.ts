@@ -52,20 +52,38 @@ export function signEstimate(outlook: FreezingOutlook, words: WordOptions): stri
 
 const SNOW_WRITERS: Record<string, ClauseWriter> = {
   snow_floods_ice: (v, w) =>
-    `${snowText(num(v, 'snowCoverCm'), w)} of snow is more than ${iceText(num(v, 'thicknessMm'), w)} of floating ice bears ` +
-    `(${snowText(num(v, 'bornCm'), w)}): water comes up through it and freezes as slush. Let that freeze through before you do anything.`,
+    `${snowText(num(v, 'snowCoverCm'), w)} of snow is more than ${iceOrSkin(v, w, ' of floating ice')} bears` +
+    `${bornText(v, w)}: water comes up through it and freezes as slush. Let that freeze through before you do anything.`,
   clear_snow_now: (v, w) =>
     `Clear ${snowText(num(v, 'snowCoverCm'), w)} of snow now, all of it: under it the ice grows at ${shareText(num(v, 'growthShare'), w)} ` +
     `of its pace. Drill first; one light person with a shovel, nobody near open water.`,
+  clear_snow_on_floor: (v, w) =>
+    `Clear ${snowText(num(v, 'snowCoverCm'), w)} of snow, all of it, before the next flood. No water should be left under ` +
+    `the ${iceText(num(v, 'thicknessMm'), w)} of ice; drill first to be sure.`,
   leave_snow: (v, w) =>
-    `Leave the snow: ${iceText(num(v, 'thicknessMm'), w)} does not carry anybody to clear it. The ice grows at ` +
+    `Leave the snow: ${iceOrSkin(v, w)} does not carry anybody to clear it. The ice grows at ` +
     `${shareText(num(v, 'growthShare'), w)} of its pace under it; what you can reach, pull off from outside the boards.${bearsText(v, w)}`,
   snow_due_on_thin_ice: (v, w) =>
-    `${snowText(num(v, 'snowfallCm'), w)} of snow is due from ${weekdayText(text(v, 'startsAt'), w)} ${clockText(text(v, 'startsAt'), w)}, before the ` +
-    `ice carries anybody to clear it (${iceText(num(v, 'bearsMm'), w)}). It will slow the freezing.`,
+    `${dueText(v, w)}, before the ice carries anybody to clear it (${iceText(num(v, 'bearsMm'), w)}). It will slow the freezing.`,
   snow_due_will_flood: (v, w) =>
-    `${snowText(num(v, 'snowfallCm'), w)} of snow is due from ${weekdayText(text(v, 'startsAt'), w)} ${clockText(text(v, 'startsAt'), w)}, more than ` +
-    `${iceText(num(v, 'thicknessMm'), w)} of floating ice bears (${snowText(num(v, 'bornCm'), w)}): expect water to come up and slush.`,
+    num(v, 'thicknessMm') < LEAST_MM
+      ? `${dueText(v, w)}, and no ice is there to hold it: expect it to sink into the water and freeze as slush.`
+      : `${dueText(v, w)}, more than ${iceOrSkin(v, w, ' of floating ice')} bears${bornText(v, w)}: expect water to come up and slush.`,
+}
+
+/** "4.1 cm of floating ice", never "0.0 cm". */
+function iceOrSkin(v: Parameters<ClauseWriter>[0], w: WordOptions, what = ''): string {
+  return num(v, 'thicknessMm') < LEAST_MM ? 'so thin a skin' : `${iceText(num(v, 'thicknessMm'), w)}${what}`
+}
+
+function bornText(v: Parameters<ClauseWriter>[0], w: WordOptions): string {
+  return num(v, 'thicknessMm') < LEAST_MM ? '' : ` (${snowText(num(v, 'bornCm'), w)})`
+}
+
+/** "3.0 cm of snow is due from Friday 5 pm" */
+function dueText(v: Parameters<ClauseWriter>[0], w: WordOptions): string {
+  const startsAt = text(v, 'startsAt')
+  return `${snowText(num(v, 'snowfallCm'), w)} of snow is due from ${weekdayText(startsAt, w)} ${clockText(startsAt, w)}`
 }
 
 function bearsText(v: Parameters<ClauseWriter>[0], w: WordOptions): string {

@@ -77,6 +77,14 @@ describe('snow on thin ice', () => {
   test('on 8 cm it is cleared', () => {
     expect(codesOf({ sheet: { ...sheet, thicknessMm: 80, snowCoverCm: 2 } })).toEqual(['clear_snow_now'])
   })
+  // 40 mm of water would be 43.6 mm of ice: 44 mm lie on the floor, which carries whoever clears them.
+  test('on 44 mm frozen to the floor it is cleared, and snow to come is no worry of thin ice', () => {
+    const water = { temperatureC: 6, flowLPerMin: 25, layerMm: 3, fillDepthMm: 40 }
+    const onFloor = { ...sheet, thicknessMm: 44 }
+    expect(codesOf({ water, sheet: { ...onFloor, snowCoverCm: 3 } })).toEqual(['clear_snow_on_floor'])
+    const snowy = steadyHours(72, { snowfallCm: 1, precipitationMm: 1, cloudCover: 1 })
+    expect(codesOf({ water, sheet: onFloor }, snowy)).toEqual([])
+  })
   test('bare ice under a clear sky needs nothing', () => expect(codesOf({})).toEqual([]))
   // 4 cm at 100 kg/m³ are 4 kg/m², more than 3.3.
   test('snow to come is told before it falls', () => {

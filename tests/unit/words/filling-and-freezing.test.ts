@@ -105,6 +105,28 @@ describe('freezing', () => {
     expect(outlook.snow.length).toBeGreaterThan(1)
     for (const caution of outlook.snow) expect(snowOnIceText(caution, words)).toMatch(/\.$/)
   })
+  // 20 January 2027 is a Wednesday.
+  test('weekdays keep their capital after the colon', () => {
+    const wednesday = { p10: '2027-01-20T18:00:00Z', p50: '2027-01-20T18:00:00Z', p90: '2027-01-20T18:00:00Z' }
+    const text = freezingSentence({ ...outlook, carriesSkaterAt: wednesday }, new Date(given.now), words)
+    expect(text).toMatch(/10\.0 cm to carry a skater: Wednesday evening\.$/)
+    const never = freezingSentence(
+      { ...outlook, carriesSkaterAt: { p10: null, p50: null, p90: null } },
+      new Date(given.now),
+      words,
+    )
+    expect(never).toMatch(/to carry a skater: not within the forecast\.$/)
+  })
+  test('of snow on ice that is not there no thickness is told', () => {
+    const values = { thicknessMm: 0, bornCm: 0, bearsMm: 50, snowfallCm: 4, snowCoverCm: 2, growthShare: 0.5 }
+    const say = (code: string) =>
+      snowOnIceText({ code, values: { ...values, startsAt: '2027-01-13T17:00:00Z' } }, words)
+    expect(say('snow_due_will_flood')).toBe(
+      '4.0 cm of snow is due from Wednesday 17:00, and no ice is there to hold it: expect it to sink into the water and freeze as slush.',
+    )
+    for (const code of ['snow_floods_ice', 'leave_snow', 'snow_due_will_flood'])
+      expect(say(code)).not.toContain('0.0 cm')
+  })
   test('a spread in words', () => {
     const now = new Date('2026-12-20T12:00:00Z')
     const at = (day: number) => `2026-12-${day}T18:00:00Z`

@@ -1,6 +1,9 @@
 // The round button of a pass. A form, so that it works before any script; with script the list changes at once.
 'use client'
+import type { Route } from 'next'
+import Link from 'next/link'
 import { useActionState, useRef, useState, type FormEvent } from 'react'
+import { useHydrated } from '@/components/hooks/use-hydrated'
 import { Button } from '@/components/ui/button'
 import { IDLE } from '@/lib/http/form-state'
 import type { TonightPass, TonightView } from '@/lib/schemas/tonight-view'
@@ -8,6 +11,8 @@ import { markPassAction } from '../actions'
 import type { CheckOffs } from './use-check-offs'
 import type { ChangeView } from './use-tonight'
 import { hasMoreToLose } from './when-asked'
+
+const ROUND = 'grid h-12 w-12 cursor-pointer place-items-center rounded-full border-[1.5px] border-ink'
 
 interface CheckOffProps {
   view: TonightView
@@ -21,7 +26,9 @@ export function CheckOff({ view, pass, change, checkOffs, onFault }: CheckOffPro
   const [state, submitWithoutScript] = useActionState(markPassAction, IDLE)
   const [isAsking, setIsAsking] = useState(false)
   const button = useRef<HTMLButtonElement>(null)
+  const isHydrated = useHydrated()
   const isPoured = pass.poured !== null
+  const asksFirst = pass.poured !== null && hasMoreToLose(pass.poured)
 
   const fields = {
     rinkId: view.rink.id,
@@ -40,7 +47,7 @@ export function CheckOff({ view, pass, change, checkOffs, onFault }: CheckOffPro
 
   async function submit(event: FormEvent<HTMLFormElement>) {
     event.preventDefault()
-    if (pass.poured && hasMoreToLose(pass.poured)) return setIsAsking(!isAsking)
+    if (asksFirst) return setIsAsking(!isAsking)
     if (isPoured) return takeOut()
     onFault(null)
     onFault(await checkOffs.checkOff(pass))
@@ -52,6 +59,7 @@ export function CheckOff({ view, pass, change, checkOffs, onFault }: CheckOffPro
     if (isYes) await takeOut()
   }
 
+  if (asksFirst && !isHydrated) return <ToItsEntry view={view} pass={pass} />
   return (
     <>
       <form action={submitWithoutScript} onSubmit={submit} className="print:hidden">
@@ -63,16 +71,37 @@ export function CheckOff({ view, pass, change, checkOffs, onFault }: CheckOffPro
           type="submit"
           aria-pressed={isPoured}
           aria-label={`Pass ${pass.number} is poured`}
-          className="grid h-12 w-12 cursor-pointer place-items-center rounded-full border-[1.5px] border-ink text-ink aria-pressed:bg-ink aria-pressed:text-paper"
+          className={`${ROUND} text-ink aria-pressed:bg-ink aria-pressed:text-paper`}
         >
-          <svg viewBox="0 0 20 20" width={20} height={20} aria-hidden="true">
-            <path d="M4,10.5 l4,4 l8,-9" fill="none" stroke="currentColor" strokeWidth={2} />
-          </svg>
+          <Tick />
         </button>
         {state.status === 'error' ? <p className="mt-1 text-note text-rust">{state.message}</p> : null}
       </form>
       {isAsking && isPoured ? <TakeOutQuestion number={pass.number} onAnswer={answer} /> : null}
     </>
+  )
+}
+
+/** Before any script nothing can be asked in place: the entry's own page asks. */
+function ToItsEntry({ view, pass: { number, poured } }: Pick<CheckOffProps, 'view' | 'pass'>) {
+  const entry = poured?.entry ? `/${poured.entry.id}` : ''
+  return (
+    <Link
+      href={`/rinks/${view.rink.id}/log${entry}` as Route}
+      prefetch={false}
+      aria-label={`Pass ${number} is poured: open it in the log`}
+      className={`${ROUND} bg-ink text-paper print:hidden`}
+    >
+      <Tick />
+    </Link>
+  )
+}
+
+function Tick() {
+  return (
+    <svg viewBox="0 0 20 20" width={20} height={20} aria-hidden="true">
+      <path d="M4,10.5 l4,4 l8,-9" fill="none" stroke="currentColor" strokeWidth={2} />
+    </svg>
   )
 }
 

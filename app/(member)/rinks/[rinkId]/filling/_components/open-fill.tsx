@@ -24,7 +24,7 @@ export function OpenFill({ view, fill }: { view: FillingView; fill: OpenFillView
   return (
     <>
       <h1 className="mb-2 max-w-[24ch] text-verdict font-medium tracking-tight lg:text-verdict-wide">
-        {lead} <em className="font-semibold text-hose not-italic">{unbroken(rest.join(' '))}</em>
+        {unbroken(lead)} <em className="font-semibold text-hose not-italic">{unbroken(rest.join(' '))}</em>
       </h1>
       <p className="mb-5 max-w-[60ch] text-graphite">{fillSpreadSentence(progress, reader)}</p>
       <FillBar fill={fill} reader={reader} />

@@ -1,5 +1,5 @@
 // Passes as the keeper wants them: when each would be set on the sheet that the ones before leave, and what speaks against it.
-import { HOUR_MILLIS } from '@/lib/physics/constants'
+import { HOUR_MILLIS, MINUTE_MILLIS } from '@/lib/physics/constants'
 import { wetSurfaceBalance } from '@/lib/physics/balance'
 import { advanceSheet, advanceSheetPart, clearSnow, pourLayer, type SheetState } from '@/lib/physics/sheet'
 import type { PreparedHour } from '@/lib/physics/types'
@@ -10,6 +10,7 @@ import type { NightRun } from './night-model'
 import { isPersonal } from './personal'
 import { isGood } from './score-hours'
 import { isAvailableAt } from './setting'
+import { toIso } from './zoned-time'
 import type { Reason } from './types'
 
 /** A factor below this is worth a warning; above it, it is a matter of taste. Ours. [0-1] */
@@ -23,6 +24,8 @@ export interface WantedPass {
   layerMm: number
   /** Of the water. [°C], 0 to 100 */
   temperatureC: number
+  /** How long the hose is out for it [min]; without it no pass is told to wait for the hose. */
+  hoseMinutes?: number
 }
 
 export interface JudgedPass extends WantedPass {
@@ -50,8 +53,11 @@ export function judgePasses(night: NightRun, wanted: readonly WantedPass[]): (Ju
   const judged = new Map<WantedPass, JudgedPass | null>()
   const inOrder = [...wanted].sort((a, b) => Date.parse(a.startsAt) - Date.parse(b.startsAt))
   let before: Poured | null = null
+  let hose: HoseOut | null = null
   for (const [place, pass] of inOrder.entries()) {
     const at = placeOf(night, pass)
+    const waitsFor: HoseOut | null = hose
+    hose = laterOf(hose, pass)
     if (!at) {
       judged.set(pass, null)
       continue
@@ -60,10 +66,21 @@ export function judgePasses(night: NightRun, wanted: readonly WantedPass[]): (Ju
     // The first of the night meets the sheet of the full hour, as every scored hour does.
     const met = before ? under : (night.run.sheets[at.index] as SheetState)
     const start = judgeFloodStart(withLayer(night, pass), night.run, at.index, at.fraction, met)
-    judged.set(pass, judgedPass(night, pass, start, at.index, inOrder[place + 1]))
+    judged.set(pass, judgedPass(night, pass, start, at.index, { waitsFor, next: inOrder[place + 1] }))
     before = { ...at, sheet: pourLayer(clearSnow(under), pass) }
   }
   return wanted.map((pass) => judged.get(pass) ?? null)
+}
+
+/** The pass for which the hose is out longest. */
+interface HoseOut {
+  startsAt: string
+  untilMillis: number
+}
+
+function laterOf(hose: HoseOut | null, { startsAt, hoseMinutes = 0 }: WantedPass): HoseOut {
+  const untilMillis = Date.parse(startsAt) + hoseMinutes * MINUTE_MILLIS
+  return hose && hose.untilMillis >= untilMillis ? hose : { startsAt, untilMillis }
 }
 
 interface Place {
@@ -106,12 +123,16 @@ function judgedPass(
   pass: WantedPass,
   start: FloodStart,
   index: number,
-  next: WantedPass | undefined,
+  { waitsFor, next }: { waitsFor: HoseOut | null; next: WantedPass | undefined },
 ): JudgedPass {
   const setBy = setsAtOf(start)
   const reasons = floodReasons(start, wetSurfaceBalance(start.hour).parts, setting, run, index)
   const against = reasons.filter(({ factor }) => factor < WARN_BELOW)
   const own: Reason[] = []
+  if (waitsFor && waitsFor.untilMillis > start.startMillis) {
+    const values = { startsAt: waitsFor.startsAt, until: toIso(waitsFor.untilMillis) }
+    own.push({ code: 'hose_still_out', factor: 0, values })
+  }
   if (setBy !== null && next && Date.parse(setBy) > Date.parse(next.startsAt)) {
     own.push({ code: 'not_set_before_next', factor: 0, values: { setsAt: setBy, nextAt: next.startsAt } })
   }

@@ -66,29 +66,29 @@ export async function judgeOwnPasses(
   const judged = model
     ? judgePasses(
         unpackNight(model),
-        own.map(({ startsAt, layerMm, waterTemperatureC }) => ({
-          startsAt: startsAt.toISOString(),
-          layerMm,
-          temperatureC: waterTemperatureC,
+        own.map((pass) => ({
+          startsAt: pass.startsAt.toISOString(),
+          layerMm: pass.layerMm,
+          temperatureC: pass.waterTemperatureC,
+          hoseMinutes: hoseMinutesOf(pass, rink),
         })),
       )
     : []
   return { by: first.by, passes: own.map((pass, index) => toView(pass, judged[index] ?? null, rink)) }
 }
 
-function toView(
-  pass: OwnPass,
-  judged: ReturnType<typeof judgePasses>[number],
-  { lengthM, widthM }: RinkForJudging,
-): TonightPass {
-  const waterL = pass.layerMm * lengthM * widthM
+function hoseMinutesOf({ layerMm, flowLPerMin }: OwnPass, { lengthM, widthM }: RinkForJudging): number {
+  return Math.ceil((layerMm * lengthM * widthM) / flowLPerMin)
+}
+
+function toView(pass: OwnPass, judged: ReturnType<typeof judgePasses>[number], rink: RinkForJudging): TonightPass {
   return {
     number: pass.number,
     startsAt: pass.startsAt.toISOString(),
     setBy: judged?.setBy ?? null,
     layerMm: pass.layerMm,
-    waterL: Math.round(waterL),
-    hoseMinutes: Math.ceil(waterL / pass.flowLPerMin),
+    waterL: Math.round(pass.layerMm * rink.lengthM * rink.widthM),
+    hoseMinutes: hoseMinutesOf(pass, rink),
     temperatureC: pass.waterTemperatureC,
     flowLPerMin: pass.flowLPerMin,
     warnings: judged?.warnings ?? [],

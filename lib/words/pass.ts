@@ -24,6 +24,8 @@ export function passLine(pass: PlannedPass, words: WordOptions): { at: string; w
 const WARNINGS: Record<string, ClauseWriter> = {
   not_set_before_next: (v, w) =>
     `It is set by ${doneByText(text(v, 'setsAt'), w)}, after the next pass at ${clockText(text(v, 'nextAt'), w)}.`,
+  hose_still_out: (v, w) =>
+    `The hose is still out for the pass at ${clockText(text(v, 'startsAt'), w)}, until ${clockText(text(v, 'until'), w)}.`,
   layer_too_thick: (v, w) =>
     `${layerText(num(v, 'layerMm'), w)} at once freezes slowly, takes in air and stays soft. Two thin passes hold better.`,
   outside_hours_you_set: (v, w) => `${clockText(text(v, 'startsAt'), w)} is outside the hours you set.`,

@@ -100,6 +100,16 @@ test('warnings come with the plan: snow before it is set', async () => {
   expect(passes?.[1]?.warnings.map(({ code }) => code)).toContain('snow_before_set')
 })
 
+// 3 mm on 10 m by 10 m are 300 L, at 2 L/min 150 min of hose: out from 00:00 until 02:30, past the second pass at 02:00.
+test('warnings come with the plan: the hose is out for the pass before', async () => {
+  const slow = pass(1, '2027-01-13T00:00:00Z', { flowLPerMin: 2 })
+  await keepOwnPasses(cast.keeper.at(NOW), plan([slow, pass(2, '2027-01-13T02:00:00Z')]))
+  const passes = (await tonight(cast.keeper)).outlook?.passes
+  expect(passes?.[1]?.warnings.find(({ code }) => code === 'hose_still_out')?.values).toMatchObject({
+    until: '2027-01-13T02:30:00Z',
+  })
+})
+
 describe('refusals', () => {
   test('crew and skaters see the plan and do not change it', async () => {
     for (const actor of [cast.crew, cast.skater]) {

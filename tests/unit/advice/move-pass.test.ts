@@ -114,6 +114,22 @@ describe('warnings', () => {
     expect(second?.ice).toContain('last_layer_wet')
   })
 
+  // 800 L at 8 L/min are 100 min of hose: from 8 pm (hour 8) until 9:40 pm.
+  test('the hose is still out for the pass before', () => {
+    const night = nightOf(clear)
+    const long = pass(timeOf(8), { hoseMinutes: 100 })
+    const warned = (...wanted: WantedPass[]) =>
+      judgePasses(night, wanted).map((one) => one?.warnings.find(({ code }) => code === 'hose_still_out')?.values)
+    const until = { startsAt: timeOf(8), until: '2027-01-13T02:40:00Z' }
+    expect(warned(long, pass(timeOf(9.5)))).toEqual([undefined, until])
+    expect(warned(pass(timeOf(9.5)), long)).toEqual([until, undefined])
+    // A short pass in between does not take the long one's hose in.
+    expect(warned(long, pass(timeOf(8.5), { hoseMinutes: 12 }), pass(timeOf(9)))).toEqual([undefined, until, until])
+    // In by 9:40, so the pass at 9:45 has it, and so has any where no hose time is known.
+    expect(warned(long, pass(timeOf(9.75)))).toEqual([undefined, undefined])
+    expect(warned(pass(timeOf(8)), pass(timeOf(9.5)))).toEqual([undefined, undefined])
+  })
+
   test('not set before snow', () => {
     const snowy = steadyHours(72).map((hour, index) =>
       index < 10 ? hour : hourOf(index, { precipitationMm: 1, snowfallCm: 1 }),

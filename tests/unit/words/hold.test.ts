@@ -40,6 +40,7 @@ test('every warning of a moved pass has words of its own', () => {
     setsAt: goodAt,
     nextAt: goodAt,
     startsAt: goodAt,
+    until: '2027-01-13T02:40:00Z',
     at: goodAt,
     layerMm: 13,
     windChillC: -30,
@@ -48,6 +49,8 @@ test('every warning of a moved pass has words of its own', () => {
   const said = PASS_WARNING_CODES.map((code) => passWarningText({ code, factor: 0, values }, words))
   expect(new Set(said).size).toBe(PASS_WARNING_CODES.length)
   expect(said[0]).toBe('It is set by 9 pm, after the next pass at 9 pm.')
+  // 02:40 in UTC is 9:40 pm in Toronto.
+  expect(said).toContain('The hose is still out for the pass at 9 pm, until 9:40 pm.')
   expect(waterSourceText({ kind: 'hot-tap', temperatureC: 45 }, words)).toBe('Hot tap, 45 °C')
 })
 

@@ -6,6 +6,7 @@ import { clearSnow, reportSheet, type SheetState } from '@/lib/physics/sheet'
 import type { PreparedHour } from '@/lib/physics/types'
 import { wetSeason } from '@/lib/physics/wet-season'
 import { windChillC } from '@/lib/physics/wind-chill'
+import { bearsFlood, waterBelowMm } from './bearing'
 import { overallDesirability, rampDesirability } from './desirability'
 import type { ForecastRun } from './forecast-run'
 import { neededMillis, type Setting } from './setting'
@@ -40,7 +41,7 @@ export interface FloodStart {
   windAtRinkMps: number
   gustAtRinkMps: number
   sheet: SheetReport
-  /** Unfrozen water under the ice. [mm] */
+  /** Unfrozen water that is, or may be, under the ice. [mm] */
   waterBelowMm: number
   setMinutes: number | null
   neededMillis: number
@@ -95,7 +96,7 @@ export function judgeFloodStart(
     windAtRinkMps: hour.windAtRinkMps,
     gustAtRinkMps: hour.windGustMps * setting.gustFactor,
     sheet: report,
-    waterBelowMm: sheet.belowKgM2,
+    waterBelowMm: waterBelowMm(setting, sheet, report),
     setMinutes,
     neededMillis: needed,
     wetMm: wetBetween(run, index, untilMillis),
@@ -168,7 +169,7 @@ function floodFactors(start: FloodStart, setting: Setting): FloodFactors {
   const isDry = start.wetMm <= FLOOD.precipitationMm + ROUNDING_MM
   const slack = setMinutes === null ? 0 : (start.neededMillis - start.startMillis) / MINUTE_MILLIS - setMinutes
   return {
-    bears: bearsFlood(setting, start),
+    bears: bearsFlood(setting, sheet.thicknessMm, start.waterBelowMm),
     rate: rampDesirability(start.rateMmPerH, FLOOD.freezeRateMmPerH),
     dry: isDry ? 1 - (1 - FLOOD.traceFactor) * (start.wetMm / FLOOD.precipitationMm) : 0,
     set: setDesirability(setMinutes),
@@ -189,16 +190,4 @@ function floodFactors(start: FloodStart, setting: Setting): FloodFactors {
 function setDesirability(setMinutes: number | null): number {
   if (setMinutes === null || setMinutes > FLOOD.longestSetMinutes) return 0
   return Math.min(1, Math.exp(-(setMinutes - FLOOD.set.quickMinutes) / FLOOD.set.fadeMinutes))
-}
-
-/** On bare ground and on snow the sheet is built up by floods; a fill, or a lined sheet, has to be ice that bears the person. */
-function bearsFlood({ input }: Setting, { sheet, waterBelowMm }: FloodStart): number {
-  const { phase, base } = input.rink
-  if (phase === 'planning' || phase === 'waiting' || phase === 'filling' || phase === 'closed') {
-    const isBuiltByFloods = base !== 'liner' && phase === 'filling'
-    return isBuiltByFloods ? 1 : 0
-  }
-  if (base !== 'liner' && phase !== 'freezing') return 1
-  if (waterBelowMm > 0) return rampDesirability(sheet.thicknessMm, FLOOD.bearsMm)
-  return sheet.thicknessMm >= FLOOD.leastIceMm ? 1 : 0
 }

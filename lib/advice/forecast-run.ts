@@ -120,4 +120,4 @@ function startingSheet(setting: Setting): SheetState {
 }
 
 /** Depth of water that a depth of ice was: ice of 916.7 kg/m³ at 0 °C (CRC Handbook, IAPWS). */
-const ICE_TO_WATER = 0.9167
+export const ICE_TO_WATER = 0.9167

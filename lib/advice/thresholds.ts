@@ -69,6 +69,8 @@ export const FLOOD = {
   bearsMm: { one: 50, zero: 30 } satisfies Ramp,
   /** With no water under it the floor carries the person; less than this is no sheet. Ours. [mm] */
   leastIceMm: 0.5,
+  /** So much of a fill may have gone by wind and sun, or in rounding a hole, before water is thought to be under a sheet. Ours. [mm] */
+  lostOfFillMm: 10,
   /** Exponents of the geometric mean. Ours: the set time says most. */
   weights: { set: 4, slack: 2, rate: 2, dry: 2, wind: 1, gust: 1, air: 1, lastLayer: 1, snow: 1, bears: 1 },
 }

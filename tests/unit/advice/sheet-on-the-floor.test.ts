@@ -32,8 +32,8 @@ describe('with no water under it', () => {
     )
   })
 
-  test('so does a lined sheet of 22 mm that is being skated on', () => {
-    expect(standing(22, 120, { phase: 'skating' })).toMatchObject({ code: 'sheet_bears', verdict: 'flood' })
+  test('so does a lined sheet of 22 mm from 20 mm of water that is being skated on', () => {
+    expect(standing(22, 20, { phase: 'skating' })).toMatchObject({ code: 'sheet_bears', verdict: 'flood' })
   })
 })
 
@@ -43,6 +43,11 @@ describe('with water under it', () => {
     const afloat = standing(22, 120, { base })
     expect(afloat).toMatchObject({ code: 'sheet_too_thin', factor: 0, verdict: 'hold' })
     expect(afloat.says).toBe('the sheet is 2.2 cm thick, too thin to walk on with a hose')
+  })
+
+  // A hole tells nothing of the water: 22 mm of ice are 20 of the 120 mm poured, and the other 100 may be under it.
+  test.each(['skating', 'thaw'] as const)('a lined sheet of 22 mm on a deep fill keeps people off in %s', (phase) => {
+    expect(standing(22, 120, { phase })).toMatchObject({ code: 'sheet_too_thin', factor: 0, verdict: 'hold' })
   })
 
   test('no ice at all is told as such', () => {

@@ -19,6 +19,9 @@ const KINDS: Record<string, string> = {
   'flood-tonight': 'Good night to flood',
   'flood-changed': 'The hours changed',
   'flood-closed': 'No flood after all',
+  'fill-ahead': 'A day to fill',
+  'fill-changed': 'The day to fill changed',
+  'fill-closed': 'No day to fill after all',
   'fill-check': 'Look after the hose',
 }
 

@@ -1,5 +1,6 @@
 // A promised message on its way out: claim, attempts, settlement.
 import type { Db } from '@/db/knex'
+import { FILL_DAY_KINDS } from './fill-days'
 import type { MessageKind, MessageState } from './messages'
 
 export interface MessageToDeliver {
@@ -12,7 +13,7 @@ export interface MessageToDeliver {
   expiresAt: Date
   createdAt: Date
   email: string
-  /** The person was promised newer news of the same night on the same channel. */
+  /** The person was promised newer news of the same night, or of the day to fill, on the same channel. */
   isOvertaken: boolean
   /** The person has muted the night, switched the channel off or left the rink since; an invitation stands no more. */
   isUnwanted: boolean
@@ -42,10 +43,15 @@ export async function findMessageToDeliver(db: Db, messageId: string): Promise<M
     .select(
       db.raw(
         `exists (select 1 from messages newer
-                 where newer.user_id = m.user_id and newer.rink_id = m.rink_id and newer.night_date = m.night_date
+                 where newer.user_id = m.user_id and newer.rink_id = m.rink_id
                    and newer.channel = m.channel and newer.created_at > m.created_at
-                   -- A look at a hose is no news of the night.
-                   and (newer.kind = 'fill-check') = (m.kind = 'fill-check')) as "isOvertaken"`,
+                   and case when m.kind = any(:fillDays)
+                     -- Of the day to fill the last word counts, on whichever night it was said.
+                     then newer.kind = any(:fillDays)
+                     -- Neither it nor a look at a hose is news of the night.
+                     else newer.night_date = m.night_date and newer.kind <> all(:fillDays)
+                       and (newer.kind = 'fill-check') = (m.kind = 'fill-check') end) as "isOvertaken"`,
+        { fillDays: FILL_DAY_KINDS },
       ),
       db.raw(
         `m.rink_id is not null and (
@@ -55,9 +61,13 @@ export async function findMessageToDeliver(db: Db, messageId: string): Promise<M
                         and (p.muted_through >= m.night_date
                              or not case m.channel when 'email' then p.wants_email else p.wants_push end))
          )
+         -- A day to fill is news for as long as the rink waits.
+         or m.kind = any(:fillDays)
+           and not exists (select 1 from rinks r where r.id = m.rink_id and r.phase = 'waiting')
          -- Of an invitation that went with its rink, no mail must go to who sent it.
          or m.kind = 'rink-invitation' and (i.id is null or i.taken_at is not null or i.withdrawn_at is not null)
            as "isUnwanted"`,
+        { fillDays: FILL_DAY_KINDS },
       ),
     )
     .first<Omit<MessageToDeliver, 'attempts'> | undefined>()

@@ -7,6 +7,7 @@ export interface ToldMessageRow {
   id: string
   kind: MessageKind
   channel: 'email' | 'push'
+  /** The night it is about. */
   nightDate: string | null
   state: MessageState
   createdAt: Date
@@ -23,13 +24,13 @@ export async function listToldMessages(
     .where({ rink_id: access.rinkId, user_id: userId })
     .orderBy([{ column: 'created_at', order: 'desc' }, 'id'])
     .limit(limit)
-    .select<ToldMessageRow[]>({
+    .select({
       id: 'id',
       kind: 'kind',
       channel: 'channel',
-      nightDate: 'night_date',
       state: 'state',
       createdAt: 'created_at',
       settledAt: 'settled_at',
     })
+    .select<ToldMessageRow[]>(db.raw(`coalesce((content->>'fillDate')::date, night_date) as "nightDate"`))
 }

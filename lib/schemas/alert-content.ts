@@ -20,6 +20,26 @@ export const fillCheckContentSchema = z.object({
   words: z.object({ rinkName: z.string(), sentence: z.string(), progress: z.string(), cautions: z.array(z.string()) }),
 })
 
+/** The day to fill: which night, from when, and its words. What is told once is read back from here. */
+export const fillDayContentSchema = z.object({
+  rinkId: z.uuid(),
+  fillDate: z.iso.date(),
+  startsAt: z.iso.datetime(),
+  words: z.object({
+    rinkName: z.string(),
+    nightLabel: z.string(),
+    sentence: z.string(),
+    /** What becomes of what was told before; empty at the first word. */
+    before: z.string(),
+    sure: z.string(),
+    plan: z.string(),
+    /** That it is no decision yet; empty when it is. */
+    caveat: z.string(),
+    ready: z.array(z.string()),
+    cautions: z.array(z.string()),
+  }),
+})
+
 /** Account mail names its link; the note about a known address has none. */
 export const linkContentSchema = z.object({ linkId: z.uuid() })
 
@@ -40,4 +60,5 @@ export const deletionContentSchema = z.object({ dueAt: z.iso.datetime() })
 export type AlertContent = z.infer<typeof alertContentSchema>
 export type AddressChangedContent = z.infer<typeof addressChangedContentSchema>
 export type InvitationContent = z.infer<typeof invitationContentSchema>
+export type FillDayContent = z.infer<typeof fillDayContentSchema>
 export type FillCheckContent = z.infer<typeof fillCheckContentSchema>

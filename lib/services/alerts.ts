@@ -12,9 +12,13 @@ import { findRinkForJudging, type RinkForJudging } from '@/db/queries/rinks'
 import type { Db } from '@/db/knex'
 import type { RinkAccess } from '@/lib/access/proofs'
 import { nextWindowStep } from '@/lib/advice/window-change'
+import { tellFillDay } from './tell-fill-day'
 import { tellNight } from './tell-night'
 
-type JudgedOutlook = Pick<StoredOutlook, 'id' | 'forecastId' | 'modelVersion' | 'summary'>
+type JudgedOutlook = Pick<
+  StoredOutlook,
+  'id' | 'forecastId' | 'settingsVersion' | 'modelVersion' | 'summary' | 'advice'
+>
 
 interface Deciding {
   trx: Db
@@ -22,7 +26,7 @@ interface Deciding {
   now: Date
 }
 
-/** Brings the advised window of the night up to date and promises what there is to tell about it. */
+/** Brings the advised window of the night up to date and promises what there is to tell about it, and of a day to fill. */
 export async function adviseNight(
   deciding: Deciding,
   rink: RinkForJudging,
@@ -37,6 +41,8 @@ export async function adviseNight(
   await stepWindow(deciding, rink, outlook, { ...night, kind: 'fill' })
   const window = await stepWindow(deciding, rink, outlook, { ...night, kind: 'flood' })
   await tellNight({ ...deciding, rink, summary: outlook.summary, window, forecastExpiresAt })
+  const { settingsVersion, advice } = outlook
+  await tellFillDay({ ...deciding, rink, settingsVersion, advice, forecastExpiresAt })
 }
 
 /** Tells those whose time of day has come, with the outlook that stands. */
@@ -48,7 +54,9 @@ export async function decideAlerts({ db, now }: { db: Db; now: Date }, access: R
     const forecast = outlook && (await findForecastHead(trx, outlook.forecastId))
     if (!rink || !outlook || !forecast) return
     const window = await findAdvisedWindow(trx, { rinkId: rink.id, nightDate: outlook.nightDate, kind: 'flood' })
-    await tellNight({ trx, access, now, rink, summary: outlook.summary, window, forecastExpiresAt: forecast.expiresAt })
+    const telling = { trx, access, now, rink, forecastExpiresAt: forecast.expiresAt }
+    await tellNight({ ...telling, summary: outlook.summary, window })
+    await tellFillDay({ ...telling, settingsVersion: outlook.settingsVersion, advice: outlook.advice })
   })
 }
 

@@ -40,31 +40,27 @@ export async function refreshOutlook({ db, now }: { db: Db; now: Date }, access:
   })
   const wouldTurn = summary.verdict === 'hold' ? whatWouldTurn(input, summary.nightDate) : []
   const otherNights = askOtherNights(input, judgement.windows)
+  const { modelVersion, windows, plan, fill, thaws } = judgement
+  const outlook = {
+    forecastId: forecast.id,
+    settingsVersion: rink.settingsVersion,
+    modelVersion,
+    summary,
+    advice: { windows, plan, fill, thaws, wouldTurn, otherNights },
+  }
   return db.transaction(async (trx) => {
     const outlookId = await insertOutlook(trx, {
+      ...outlook,
       rinkId: rink.id,
-      forecastId: forecast.id,
-      settingsVersion: rink.settingsVersion,
-      modelVersion: judgement.modelVersion,
       judgedAt: now,
       slotAt,
       timeZone: rink.timeZone,
       nightDate: summary.nightDate,
-      summary,
-      advice: {
-        windows: judgement.windows,
-        plan: judgement.plan,
-        fill: judgement.fill,
-        thaws: judgement.thaws,
-        wouldTurn,
-        otherNights,
-      },
     })
     if (!outlookId) return false
     await insertScoredHours(trx, outlookId, judgement.hours)
     await keepSheet(trx, rink.id, judgement)
-    const outlook = { id: outlookId, forecastId: forecast.id, modelVersion: judgement.modelVersion, summary }
-    await adviseNight({ trx, access, now }, rink, outlook, forecast.expiresAt)
+    await adviseNight({ trx, access, now }, rink, { id: outlookId, ...outlook }, forecast.expiresAt)
     return true
   })
 }

@@ -15,11 +15,13 @@ import {
 } from '@/lib/messaging/templates/account'
 import { alertMail, alertPush, type AlertWords } from '@/lib/messaging/templates/alerts'
 import { fillCheckMail, fillCheckPush, type FillCheckWords } from '@/lib/messaging/templates/fill-check'
+import { fillDayMail, fillDayPush, type FillDayKind, type FillDayWords } from '@/lib/messaging/templates/fill-day'
 import { invitationMail, type InvitationWords } from '@/lib/messaging/templates/invitation'
 import type { MailWords } from '@/lib/messaging/templates/letter'
 import {
   alertContentSchema,
   fillCheckContentSchema,
+  fillDayContentSchema,
   invitationContentSchema,
   linkContentSchema,
   deletionContentSchema,
@@ -66,6 +68,20 @@ function fillCheckWords(message: MessageToDeliver, { publicUrl, secret }: Render
   }
 }
 
+function isFillDay(kind: MessageToDeliver['kind']): kind is FillDayKind {
+  return kind !== 'fill-check' && kind.startsWith('fill-')
+}
+
+function fillDayWords(message: MessageToDeliver, { publicUrl, secret }: RenderSettings): FillDayWords {
+  const { rinkId, words } = fillDayContentSchema.parse(message.content)
+  return {
+    ...words,
+    weekUrl: `${publicUrl}/rinks/${rinkId}/week`,
+    manageUrl: `${publicUrl}/rinks/${rinkId}/alerts`,
+    unsubscribeUrl: unsubscribeUrl(publicUrl, secret, { userId: message.userId, rinkId }),
+  }
+}
+
 function invitationWords(message: MessageToDeliver, { publicUrl, secret }: RenderSettings): InvitationWords {
   const { invitationId, words } = invitationContentSchema.parse(message.content)
   return {
@@ -88,7 +104,8 @@ function accountMail(message: MessageToDeliver, { publicUrl, secret }: RenderSet
     const { dueAt } = deletionContentSchema.parse(message.content)
     return deletionAskedMail({ on: formatInTimeZone(dueAt, 'UTC', 'd MMMM yyyy'), signInUrl: `${publicUrl}/sign-in` })
   }
-  if (isAlert(message.kind) || message.kind === 'fill-check') throw new Error(`${message.kind} is no account mail`)
+  if (isAlert(message.kind) || isFillDay(message.kind) || message.kind === 'fill-check')
+    throw new Error(`${message.kind} is no account mail`)
   const { purpose, write } = LINK_MAILS[message.kind]
   const { linkId } = linkContentSchema.parse(message.content)
   return write({
@@ -108,6 +125,10 @@ export function renderEmail(message: MessageToDeliver, settings: RenderSettings)
     const words = fillCheckWords(message, settings)
     return { to: message.email, messageId, ...fillCheckMail(words), unsubscribeUrl: words.unsubscribeUrl }
   }
+  if (isFillDay(message.kind)) {
+    const words = fillDayWords(message, settings)
+    return { to: message.email, messageId, ...fillDayMail(message.kind, words), unsubscribeUrl: words.unsubscribeUrl }
+  }
   if (!isAlert(message.kind)) return { to: message.email, messageId, ...accountMail(message, settings) }
   const words = alertWords(message, settings)
   return { to: message.email, messageId, ...alertMail(message.kind, words), unsubscribeUrl: words.unsubscribeUrl }
@@ -116,6 +137,9 @@ export function renderEmail(message: MessageToDeliver, settings: RenderSettings)
 /** What the service worker shows; one tag per rink and night, so that newer news replaces older. */
 export function renderPush(message: MessageToDeliver, settings: RenderSettings): PushMessage['payload'] {
   if (message.kind === 'fill-check') return fillCheckPush(fillCheckWords(message, settings), `fill:${message.rinkId}`)
+  if (isFillDay(message.kind)) {
+    return fillDayPush(message.kind, fillDayWords(message, settings), `fill-day:${message.rinkId}`)
+  }
   if (message.kind === 'test') {
     const body = 'Word of a good night will come the same way.'
     return { title: 'This device is told', body, url: `${settings.publicUrl}/account`, tag: `test:${message.id}` }

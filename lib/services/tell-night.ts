@@ -1,5 +1,5 @@
 // Telling people about a night: who, on which channel, and whether there is anything to say.
-import { listAlertRecipients, type AlertRecipient } from '@/db/queries/alert-preferences'
+import type { AlertRecipient } from '@/db/queries/alert-preferences'
 import type { AdvisedWindow } from '@/db/queries/advised-windows'
 import { listToldAlerts, type ToldAlert } from '@/db/queries/alerts'
 import { listFloodsSince } from '@/db/queries/floods'
@@ -7,15 +7,13 @@ import { enqueueJob } from '@/db/queries/jobs'
 import { promiseMessage } from '@/db/queries/messages'
 import type { RinkForJudging } from '@/db/queries/rinks'
 import type { Db } from '@/db/knex'
-import { isGranted } from '@/lib/access/permissions'
 import type { RinkAccess } from '@/lib/access/proofs'
 import { dueAlert, isMuted, type AlertKind } from '@/lib/advice/alert-due'
 import { nightBounds } from '@/lib/advice/night'
 import type { NightSummary } from '@/lib/advice/night-summary'
-import { minuteOf } from '@/lib/advice/time-of-day'
-import { instantOfLocal } from '@/lib/advice/zoned-time'
 import { channelsOf, type Channel } from './alert-channels'
 import { alertContent } from './alert-content'
+import { listPeopleToTell, tellInstant } from './people-to-tell'
 
 /** The night as it stands, inside the transaction that decides about it. */
 export interface NightToTell {
@@ -31,13 +29,10 @@ export interface NightToTell {
 /** Promises what is due to each keeper and crew member; those whose time of day is still to come get a job at it. */
 export async function tellNight(night: NightToTell): Promise<void> {
   const { trx, access, now, rink, summary } = night
-  const recipients = (await listAlertRecipients(trx, access)).filter(
-    (person) => isGranted(person.role, 'receiveAlerts') && person.isEmailVerified,
-  )
   const told = await listToldAlerts(trx, { rinkId: rink.id, nightDate: summary.nightDate })
   const poured = await listFloodsSince(trx, access, nightBounds(summary.nightDate, rink.timeZone).startsAt)
   const hasPoured = poured.some((pass) => pass.nightDate === summary.nightDate)
-  for (const person of recipients) {
+  for (const person of await listPeopleToTell(trx, access)) {
     const tellAt = tellInstant(person.tellAt, summary.nightDate, rink.timeZone)
     if (tellAt > now) {
       await enqueueJob(
@@ -54,11 +49,6 @@ export async function tellNight(night: NightToTell): Promise<void> {
       if (kind) await promiseAlert(night, person, channel, kind)
     }
   }
-}
-
-/** A person's time of day, on the date the night begins at. */
-function tellInstant(tellAt: string, nightDate: string, timeZone: string): Date {
-  return new Date(instantOfLocal(nightDate, minuteOf(tellAt), timeZone))
 }
 
 function dueTo(

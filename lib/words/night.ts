@@ -63,7 +63,8 @@ export function sureSentence(summary: NightSummary, words: WordOptions): string 
   return sentences.filter((sentence) => sentence !== '').join(' ')
 }
 
-function agreementText({ agreement, runs }: NightSummary): string {
+/** "9 of 10 forecast runs agree." Empty where no other run was asked. */
+export function agreementText({ agreement, runs }: Pick<NightSummary, 'agreement' | 'runs'>): string {
   if (agreement === null || runs === 0) return ''
   const agreeing = Math.round(agreement * runs)
   if (agreeing === runs) return runs === 1 ? '' : `All ${runs} forecast runs agree.`

@@ -52,12 +52,18 @@ const PARTS: [fromMinute: number, name: string][] = [
   [5 * 60, 'morning'],
 ]
 
+/** Undefined from 9 pm to 5 am. */
+function partOfDay(instant: number, { timeZone }: WordOptions): string | undefined {
+  const minute = localMinuteOf(instant, timeZone)
+  return minute >= 21 * 60 ? undefined : PARTS.find(([from]) => minute >= from)?.[1]
+}
+
 /** "Thursday evening", "tomorrow morning", "this evening", "Wednesday night" for the small hours. */
 export function dayPartText(at: string, now: Date, words: WordOptions): string {
   const instant = Date.parse(at)
-  const part = PARTS.find(([from]) => localMinuteOf(instant, words.timeZone) >= from)?.[1]
+  const part = partOfDay(instant, words)
   const nightDate = nightDateOf(new Date(instant), words.timeZone)
-  if (!part || localMinuteOf(instant, words.timeZone) >= 21 * 60) return nightText(nightDate, now, words)
+  if (!part) return nightText(nightDate, now, words)
   const date = localDateOf(instant, words.timeZone)
   const today = localDateOf(now.getTime(), words.timeZone)
   if (date === today) return `this ${part}`
@@ -65,13 +71,25 @@ export function dayPartText(at: string, now: Date, words: WordOptions): string {
   return `${weekdayText(at, words)} ${part}`
 }
 
+/** "Thursday evening, 14 January", for what is read on another day than it was written on. */
+export function datedPartText(at: string, words: WordOptions): string {
+  const instant = Date.parse(at)
+  const part = partOfDay(instant, words)
+  const date = part ? localDateOf(instant, words.timeZone) : nightDateOf(new Date(instant), words.timeZone)
+  const dayAndMonth = new Intl.DateTimeFormat('en-GB', { day: 'numeric', month: 'long', timeZone: 'UTC' })
+  return `${weekdayOfDate(date, words)} ${part ?? 'night'}, ${dayAndMonth.format(Date.parse(`${date}T00:00:00Z`))}`
+}
+
 /** "tonight", "tomorrow night", "Thursday night". */
 export function nightText(nightDate: string, now: Date, words: WordOptions): string {
   const tonight = tonightDate(now, words.timeZone)
   if (nightDate === tonight) return 'tonight'
   if (nightDate === addDays(tonight, 1)) return 'tomorrow night'
-  const weekday = new Intl.DateTimeFormat(words.locale, { weekday: 'long', timeZone: 'UTC' })
-  return `${weekday.format(Date.parse(`${nightDate}T00:00:00Z`))} night`
+  return `${weekdayOfDate(nightDate, words)} night`
+}
+
+function weekdayOfDate(date: string, { locale }: WordOptions): string {
+  return new Intl.DateTimeFormat(locale, { weekday: 'long', timeZone: 'UTC' }).format(Date.parse(`${date}T00:00:00Z`))
 }
 
 /** "between 8 pm and 1 am"; "until 1 am" once it has begun. */

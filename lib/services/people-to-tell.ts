@@ -1,0 +1,19 @@
+// Who is told about a rink, and from when on in a night.
+import { listAlertRecipients, type AlertRecipient } from '@/db/queries/alert-preferences'
+import type { Db } from '@/db/knex'
+import { isGranted } from '@/lib/access/permissions'
+import type { RinkAccess } from '@/lib/access/proofs'
+import { minuteOf } from '@/lib/advice/time-of-day'
+import { instantOfLocal } from '@/lib/advice/zoned-time'
+
+/** Keepers and crew whose address is confirmed. */
+export async function listPeopleToTell(trx: Db, access: RinkAccess<'view'>): Promise<AlertRecipient[]> {
+  return (await listAlertRecipients(trx, access)).filter(
+    (person) => isGranted(person.role, 'receiveAlerts') && person.isEmailVerified,
+  )
+}
+
+/** A person's time of day, on the date the night begins at. */
+export function tellInstant(tellAt: string, nightDate: string, timeZone: string): Date {
+  return new Date(instantOfLocal(nightDate, minuteOf(tellAt), timeZone))
+}

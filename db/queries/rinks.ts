@@ -190,8 +190,13 @@ export async function getRinkForJudging(db: Db, rinkId: string): Promise<RinkFor
 }
 
 /** What a page about something else needs of its rink. */
-export async function getRinkHead(db: Db, access: RinkAccess): Promise<{ name: string; timeZone: string }> {
-  const row = await db('rinks').where({ id: access.rinkId }).first({ name: 'name', timeZone: 'time_zone' })
+export async function getRinkHead(
+  db: Db,
+  access: RinkAccess,
+): Promise<Pick<RinkOfUser, 'name' | 'timeZone' | 'phase'>> {
+  const row = await db('rinks')
+    .where({ id: access.rinkId })
+    .first({ name: 'name', timeZone: 'time_zone', phase: 'phase' })
   if (!row) throw new NotFoundError('Rink')
   return row
 }

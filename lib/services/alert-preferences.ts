@@ -10,6 +10,7 @@ import { getRinkHead } from '@/db/queries/rinks'
 import { listToldMessages, type ToldMessageRow } from '@/db/queries/told-messages'
 import { requireRink } from '@/lib/access/require-rink'
 import { tonightDate } from '@/lib/advice/night'
+import type { Phase } from '@/lib/advice/types'
 import { addDays } from '@/lib/advice/zoned-time'
 import type { ServiceContext } from '@/lib/context'
 import { InvalidInputError } from '@/lib/errors'
@@ -22,7 +23,7 @@ import { listOwnDevices, type Device } from './push-subscriptions'
 export type ToldMessage = ToldMessageRow
 
 export interface AlertSettings {
-  rink: { name: string; timeZone: string }
+  rink: { name: string; timeZone: string; phase: Phase }
   tonightDate: string
   preferences: AlertPreferences
   email: string

@@ -13,6 +13,7 @@ import { DeviceList } from './_components/device-list'
 import { MuteForm } from './_components/mute-form'
 import { PreferencesForm } from './_components/preferences-form'
 import { ToldList } from './_components/told-list'
+import { ToldOf } from './_components/told-of'
 
 export const metadata: Metadata = { title: 'Alerts' }
 
@@ -51,9 +52,14 @@ export default async function AlertsPage({ params }: PageProps<'/rinks/[rinkId]/
             <DeviceList rinkId={rinkId} timeZone={rink.timeZone} devices={devices} />
           </Section>
         </div>
-        <Section title="What you were told">
-          <ToldList settings={settings} />
-        </Section>
+        <div>
+          <Section title="What you are told of">
+            <ToldOf phase={rink.phase} />
+          </Section>
+          <Section title="What you were told">
+            <ToldList settings={settings} />
+          </Section>
+        </div>
       </div>
     </RinkFrame>
   )

@@ -8,7 +8,7 @@ import { clockText } from '@/lib/words/times'
 
 export function ToldList({ settings: { told, rink, units, clock } }: { settings: AlertSettings }) {
   if (told.length === 0) {
-    return <p className="text-graphite">Nothing yet. The first word comes on the afternoon before a good night.</p>
+    return <p className="text-graphite">Nothing yet.</p>
   }
   const words = wordsFor({ units, clock }, rink.timeZone)
   return (

@@ -22,6 +22,7 @@ const KINDS: Record<string, string> = {
   'fill-ahead': 'A day to fill',
   'fill-changed': 'The day to fill changed',
   'fill-closed': 'No day to fill after all',
+  'thaw-ahead': 'A thaw ahead',
   'fill-check': 'Look after the hose',
 }
 

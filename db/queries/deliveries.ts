@@ -48,9 +48,10 @@ export async function findMessageToDeliver(db: Db, messageId: string): Promise<M
                    and case when m.kind = any(:fillDays)
                      -- Of the day to fill the last word counts, on whichever night it was said.
                      then newer.kind = any(:fillDays)
-                     -- Neither it nor a look at a hose is news of the night.
+                     -- Neither it, a look at a hose nor a thaw is news of the night.
                      else newer.night_date = m.night_date and newer.kind <> all(:fillDays)
-                       and (newer.kind = 'fill-check') = (m.kind = 'fill-check') end) as "isOvertaken"`,
+                       and (newer.kind = 'fill-check') = (m.kind = 'fill-check')
+                       and (newer.kind = 'thaw-ahead') = (m.kind = 'thaw-ahead') end) as "isOvertaken"`,
         { fillDays: FILL_DAY_KINDS },
       ),
       db.raw(

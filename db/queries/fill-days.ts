@@ -1,4 +1,4 @@
-// What people heard of the day to fill, and whether it may still be told.
+// What people heard of the day to fill.
 import type { Db } from '@/db/knex'
 import type { FillDayKind, ToldFillDay } from '@/lib/advice/fill-day-due'
 
@@ -24,10 +24,4 @@ export async function listToldFillDays(db: Db, rinkId: string, since: Date): Pro
         db.raw(`content->>'fillDate' as "fillDate", (content->>'startsAt')::timestamptz as "startsAt"`),
       )
   )
-}
-
-/** Whether the rink waits for its fill and stands as it was judged. Asked with the rink's row locked. */
-export async function isWaitingAsJudged(db: Db, rinkId: string, settingsVersion: number): Promise<boolean> {
-  const row = await db('rinks').where({ id: rinkId, phase: 'waiting', settings_version: settingsVersion }).first('id')
-  return row !== undefined
 }

@@ -10,6 +10,7 @@ export type MessageKind =
   | 'fill-ahead'
   | 'fill-changed'
   | 'fill-closed'
+  | 'thaw-ahead'
   | 'verify-address'
   | 'sign-in-link'
   | 'reset-password'

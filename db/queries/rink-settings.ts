@@ -2,7 +2,7 @@
 import type { Db } from '@/db/knex'
 import type { RinkRow } from '@/db/types'
 import type { RinkAccess } from '@/lib/access/proofs'
-import type { HoursRow } from './rinks'
+import type { HoursRow, RinkForJudging } from './rinks'
 
 /** What settings pages change. */
 export type RinkChanges = Partial<
@@ -37,6 +37,16 @@ export type RinkChanges = Partial<
  */
 export async function lockRink(trx: Db, access: RinkAccess): Promise<void> {
   await trx('rinks').where({ id: access.rinkId }).forNoKeyUpdate().first('id')
+}
+
+/** Whether the rink is in a phase and stands as it was judged. Asked with the rink's row locked. */
+export async function isAsJudged(
+  trx: Db,
+  access: RinkAccess,
+  { phase, settingsVersion }: Pick<RinkForJudging, 'phase' | 'settingsVersion'>,
+): Promise<boolean> {
+  const row = await trx('rinks').where({ id: access.rinkId, phase, settings_version: settingsVersion }).first('id')
+  return row !== undefined
 }
 
 /** Counts a change beside the rink's own columns that the advice depends on: water poured, what was learned. */

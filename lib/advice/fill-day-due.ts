@@ -1,5 +1,6 @@
 // Is there something to tell one person about the day to fill, now? Once a date; silence otherwise.
-import { DAY_MILLIS, HOUR_MILLIS } from '@/lib/physics/constants'
+import { DAY_MILLIS } from '@/lib/physics/constants'
+import { isTimeToTell } from './time-to-tell'
 import { addDays } from './zoned-time'
 
 export type FillDayKind = 'fill-ahead' | 'fill-changed' | 'fill-closed'
@@ -35,8 +36,6 @@ export const FILL_DAYS_AHEAD = 5
 const MOST_CHANGES_A_WEEK = 3
 /** From a day before the start on, a plan becomes a decision: changes are told at once. Ours. */
 const DECISION_MILLIS = DAY_MILLIS
-/** News that can wait is told in these hours from the person's time of day on, and not at night. Ours. */
-const LISTENING_MILLIS = 6 * HOUR_MILLIS
 
 /**
  * Whether a start is near enough to be decided on rather than planned with.
@@ -68,7 +67,7 @@ export function dueFillDay(question: FillDayQuestion): FillDayKind | null {
   const seen = question.start && question.start.fillDate <= lastDate ? question.start : null
   const [last] = told
   if (last && last.kind !== 'fill-closed' && last.fillDate >= tonightDate) return dueChange(question, last, seen)
-  if (!seen || !isTime(question, seen.startsAt)) return null
+  if (!seen || !isTimeToTell(question, seen.startsAt)) return null
   // A date that was told and called off before has come back.
   if (told.some(({ fillDate }) => fillDate === seen.fillDate)) return isSpent(question) ? null : 'fill-changed'
   return isSpent(question) && !isFillNear(seen.startsAt, question.now) ? null : 'fill-ahead'
@@ -79,7 +78,7 @@ function dueChange(question: FillDayQuestion, standing: FillStart, seen: FillSta
   // Once its start has come the keeper sees for himself; and a shift within the night changes nobody's day.
   if (question.now >= standing.startsAt || seen?.fillDate === standing.fillDate) return null
   const first = seen && seen.startsAt < standing.startsAt ? seen.startsAt : standing.startsAt
-  if (!isFillNear(first, question.now) && !isTime(question, first)) return null
+  if (!isFillNear(first, question.now) && !isTimeToTell(question, first)) return null
   // A day that does not hold is always taken back: somebody may be about to lay the liner.
   return seen && !isSpent(question) ? 'fill-changed' : 'fill-closed'
 }
@@ -88,12 +87,4 @@ function isSpent({ now, told }: FillDayQuestion): boolean {
   const weekAgo = now.getTime() - 7 * DAY_MILLIS
   const changes = told.filter(({ kind, toldAt }) => kind !== 'fill-ahead' && toldAt.getTime() > weekAgo)
   return changes.length >= MOST_CHANGES_A_WEEK
-}
-
-/** At the person's time of day, or when the next would come after the start. */
-function isTime({ now, tellAt }: FillDayQuestion, startsAt: Date): boolean {
-  const since = now.getTime() - tellAt.getTime()
-  if (since >= 0 && since < LISTENING_MILLIS) return true
-  const nextMillis = since < 0 ? tellAt.getTime() : tellAt.getTime() + DAY_MILLIS
-  return startsAt.getTime() <= nextMillis
 }

@@ -12,7 +12,13 @@ const wordsSchema = z.object({
   why: z.array(z.string()),
 })
 
-export const alertContentSchema = z.object({ rinkId: z.uuid(), nightDate: z.iso.date(), words: wordsSchema })
+export const alertContentSchema = z.object({
+  rinkId: z.uuid(),
+  nightDate: z.iso.date(),
+  /** The thaw that is told of: what is told once is read back from here. */
+  thaw: z.object({ startsAt: z.iso.datetime(), endsAt: z.iso.datetime() }).optional(),
+  words: wordsSchema,
+})
 
 /** A look at the hose of a running fill: one sentence says what to look at, the next how far the fill is. */
 export const fillCheckContentSchema = z.object({

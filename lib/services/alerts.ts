@@ -12,8 +12,10 @@ import { findRinkForJudging, type RinkForJudging } from '@/db/queries/rinks'
 import type { Db } from '@/db/knex'
 import type { RinkAccess } from '@/lib/access/proofs'
 import { nextWindowStep } from '@/lib/advice/window-change'
+import type { RinkToTell } from './people-to-tell'
 import { tellFillDay } from './tell-fill-day'
 import { tellNight } from './tell-night'
+import { tellThaw } from './tell-thaw'
 
 type JudgedOutlook = Pick<
   StoredOutlook,
@@ -26,7 +28,7 @@ interface Deciding {
   now: Date
 }
 
-/** Brings the advised window of the night up to date and promises what there is to tell about it, and of a day to fill. */
+/** Brings the advised window of the night up to date and promises what there is to tell about it, and of the days ahead. */
 export async function adviseNight(
   deciding: Deciding,
   rink: RinkForJudging,
@@ -42,7 +44,13 @@ export async function adviseNight(
   const window = await stepWindow(deciding, rink, outlook, { ...night, kind: 'flood' })
   await tellNight({ ...deciding, rink, summary: outlook.summary, window, forecastExpiresAt })
   const { settingsVersion, advice } = outlook
-  await tellFillDay({ ...deciding, rink, settingsVersion, advice, forecastExpiresAt })
+  await tellAhead({ ...deciding, rink, settingsVersion, advice, forecastExpiresAt })
+}
+
+/** What is to come in the days ahead, by the rink's phase. */
+async function tellAhead(telling: RinkToTell): Promise<void> {
+  if (telling.rink.phase === 'waiting') await tellFillDay(telling)
+  if (telling.rink.phase === 'skating') await tellThaw(telling)
 }
 
 /** Tells those whose time of day has come, with the outlook that stands. */
@@ -56,7 +64,7 @@ export async function decideAlerts({ db, now }: { db: Db; now: Date }, access: R
     const window = await findAdvisedWindow(trx, { rinkId: rink.id, nightDate: outlook.nightDate, kind: 'flood' })
     const telling = { trx, access, now, rink, forecastExpiresAt: forecast.expiresAt }
     await tellNight({ ...telling, summary: outlook.summary, window })
-    await tellFillDay({ ...telling, settingsVersion: outlook.settingsVersion, advice: outlook.advice })
+    await tellAhead({ ...telling, settingsVersion: outlook.settingsVersion, advice: outlook.advice })
   })
 }
 

@@ -13,7 +13,7 @@ import {
   testMail,
   verifyAddressMail,
 } from '@/lib/messaging/templates/account'
-import { alertMail, alertPush, type AlertWords } from '@/lib/messaging/templates/alerts'
+import { alertMail, alertPush, type AlertKind, type AlertWords } from '@/lib/messaging/templates/alerts'
 import { fillCheckMail, fillCheckPush, type FillCheckWords } from '@/lib/messaging/templates/fill-check'
 import { fillDayMail, fillDayPush, type FillDayKind, type FillDayWords } from '@/lib/messaging/templates/fill-day'
 import { invitationMail, type InvitationWords } from '@/lib/messaging/templates/invitation'
@@ -35,8 +35,6 @@ export interface RenderSettings {
   secret: string
 }
 
-type AlertKind = Extract<MessageToDeliver['kind'], `flood-${string}`>
-
 const LINK_MAILS = {
   'verify-address': { purpose: 'verify', write: verifyAddressMail },
   'sign-in-link': { purpose: 'sign-in', write: signInLinkMail },
@@ -45,7 +43,7 @@ const LINK_MAILS = {
 } as const
 
 function isAlert(kind: MessageToDeliver['kind']): kind is AlertKind {
-  return kind.startsWith('flood-')
+  return kind === 'thaw-ahead' || kind.startsWith('flood-')
 }
 
 function alertWords(message: MessageToDeliver, { publicUrl, secret }: RenderSettings): AlertWords {
@@ -146,5 +144,6 @@ export function renderPush(message: MessageToDeliver, settings: RenderSettings):
   }
   if (!isAlert(message.kind)) throw new Error(`${message.kind} is not sent by push`)
   const { rinkId, nightDate } = alertContentSchema.parse(message.content)
-  return alertPush(message.kind, alertWords(message, settings), `night:${rinkId}:${nightDate}`)
+  const tag = message.kind === 'thaw-ahead' ? `thaw:${rinkId}` : `night:${rinkId}:${nightDate}`
+  return alertPush(message.kind, alertWords(message, settings), tag)
 }

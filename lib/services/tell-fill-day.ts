@@ -1,11 +1,8 @@
 // Telling people of a rink that waits for its fill which day that will be: who, on which channel, and what is due.
 import type { AlertRecipient } from '@/db/queries/alert-preferences'
-import { isWaitingAsJudged, listToldFillDays } from '@/db/queries/fill-days'
+import { listToldFillDays } from '@/db/queries/fill-days'
 import { promiseMessage } from '@/db/queries/messages'
-import type { Advice } from '@/db/queries/outlooks'
-import type { RinkForJudging } from '@/db/queries/rinks'
-import type { Db } from '@/db/knex'
-import type { RinkAccess } from '@/lib/access/proofs'
+import { isAsJudged } from '@/db/queries/rink-settings'
 import { isMuted } from '@/lib/advice/alert-due'
 import { dueFillDay, type FillDayKind, type FillStart, type ToldFillDay } from '@/lib/advice/fill-day-due'
 import { nightDateOf, tonightDate } from '@/lib/advice/night'
@@ -16,28 +13,16 @@ import { fillDayText } from '@/lib/words/fill-day'
 import { nightLabel } from '@/lib/words/night-label'
 import { wordsFor } from '@/lib/words/options'
 import { channelsOf, type Channel } from './alert-channels'
-import { listPeopleToTell, tellInstant } from './people-to-tell'
-
-/** The rink as it was judged, inside the transaction that decides about it and holds the rink's row. */
-export interface FillDayToTell {
-  trx: Db
-  access: RinkAccess<'view'>
-  now: Date
-  rink: RinkForJudging
-  /** Of the rink's settings when it was judged. */
-  settingsVersion: number
-  advice: Pick<Advice, 'fill' | 'windows'>
-  forecastExpiresAt: Date
-}
+import { listPeopleToTell, tellInstant, type RinkToTell } from './people-to-tell'
 
 /** What was told longer ago than this is of another cold spell. Ours. */
 const TOLD_DAYS = 14
 const TAKE_CARE = ['backflow', 'wet_pavement', 'run_off', 'electric_leads', 'not_alone']
 
 /** Promises what is due. Those whose time of day is still to come have a job at it from `tellNight`. */
-export async function tellFillDay(telling: FillDayToTell): Promise<void> {
+export async function tellFillDay(telling: RinkToTell): Promise<void> {
   const { trx, access, now, rink } = telling
-  if (!(await isWaitingAsJudged(trx, rink.id, telling.settingsVersion))) return
+  if (!(await isAsJudged(trx, access, { phase: 'waiting', settingsVersion: telling.settingsVersion }))) return
   const night = tonightDate(now, rink.timeZone)
   const start = startOf(telling)
   const told = await listToldFillDays(trx, rink.id, new Date(now.getTime() - TOLD_DAYS * DAY_MILLIS))
@@ -58,7 +43,7 @@ export async function tellFillDay(telling: FillDayToTell): Promise<void> {
   }
 }
 
-function startOf({ rink, advice: { fill } }: FillDayToTell): FillStart | null {
+function startOf({ rink, advice: { fill } }: RinkToTell): FillStart | null {
   if (!fill.startsAt || fill.litres <= 0) return null
   const startsAt = new Date(fill.startsAt)
   return { startsAt, fillDate: nightDateOf(startsAt, rink.timeZone) }
@@ -72,7 +57,7 @@ interface DueFillDay {
   heard: readonly ToldFillDay[]
 }
 
-async function promiseFillDay(telling: FillDayToTell, due: DueFillDay): Promise<void> {
+async function promiseFillDay(telling: RinkToTell, due: DueFillDay): Promise<void> {
   const { trx, now, rink } = telling
   const { person, channel, kind, heard } = due
   const day = kind === 'fill-closed' ? heard[0] : due.start
@@ -100,7 +85,7 @@ async function promiseFillDay(telling: FillDayToTell, due: DueFillDay): Promise<
 }
 
 /** Late news of a start is dropped; an hour of hose that has begun can still be started in. */
-function expiryOf({ now, advice: { windows } }: FillDayToTell, { startsAt }: FillStart): Date {
+function expiryOf({ now, advice: { windows } }: RinkToTell, { startsAt }: FillStart): Date {
   if (startsAt > now) return startsAt
   const running = windows.find(
     (one) => one.kind === 'fill' && Date.parse(one.startsAt) <= startsAt.getTime() && new Date(one.endsAt) > now,
@@ -108,7 +93,7 @@ function expiryOf({ now, advice: { windows } }: FillDayToTell, { startsAt }: Fil
   return running ? new Date(running.endsAt) : startsAt
 }
 
-function contentOf({ rink, advice, now }: FillDayToTell, due: DueFillDay, day: FillStart): FillDayContent {
+function contentOf({ rink, advice, now }: RinkToTell, due: DueFillDay, day: FillStart): FillDayContent {
   const { person, kind, heard } = due
   const words = wordsFor(person, rink.timeZone)
   const news = { kind, day, before: heard[0] ?? null, base: rink.base, ...advice }

@@ -3,7 +3,7 @@ import { writeLetter } from './letter'
 import type { MailWords } from './letter'
 import { cutPolitely, oneLine } from './plain'
 
-export type AlertKind = 'flood-tonight' | 'flood-changed' | 'flood-closed' | 'thaw-begins' | 'cold-returns'
+export type AlertKind = 'flood-tonight' | 'flood-changed' | 'flood-closed' | 'thaw-ahead'
 
 export interface AlertWords {
   rinkName: string
@@ -48,12 +48,7 @@ const FRAMES: Record<AlertKind, Frame> = {
     opening: 'The window for this night has closed. What we told you before no longer holds.',
     pushTitle: (rinkName) => `${rinkName}: called off`,
   },
-  'thaw-begins': {
-    subjectLead: '',
-    opening: 'You will hear nothing more from us until the cold returns.',
-    pushTitle: (rinkName) => `${rinkName}: thaw`,
-  },
-  'cold-returns': { subjectLead: '', opening: '', pushTitle: (rinkName) => `${rinkName}: cold returns` },
+  'thaw-ahead': { subjectLead: '', opening: '', pushTitle: (rinkName) => `${rinkName}: thaw` },
 }
 
 const LONGEST_NAME = 60

@@ -23,7 +23,7 @@ const words: AlertWords = {
   unsubscribeUrl: 'https://nightsheet.test/api/unsubscribe?token=abc',
   manageUrl: 'https://nightsheet.test/rinks/1/alerts',
 }
-const kinds: AlertKind[] = ['flood-tonight', 'flood-changed', 'flood-closed', 'thaw-begins', 'cold-returns']
+const kinds: AlertKind[] = ['flood-tonight', 'flood-changed', 'flood-closed', 'thaw-ahead']
 const link = { url: 'https://nightsheet.test/sign-in?token=abc', validFor: '15 minutes' }
 const accountMails = [
   verifyAddressMail(link),

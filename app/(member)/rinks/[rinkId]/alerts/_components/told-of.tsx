@@ -16,7 +16,8 @@ const ROWS: { phases: Phase[]; name: string; toldOf: string }[] = [
   {
     phases: ['skating'],
     name: 'Skating',
-    toldOf: 'A good night to flood, once. Again when its hours change or it is called off.',
+    toldOf:
+      'A good night to flood, once. Again when its hours change or it is called off. A thaw, once, within a day of it.',
   },
   { phases: ['thaw'], name: 'Thaw', toldOf: 'Nothing, until a night is good to flood again.' },
   { phases: ['planning', 'closed'], name: 'Before and after the season', toldOf: 'Nothing.' },

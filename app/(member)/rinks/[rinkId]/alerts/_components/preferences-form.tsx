@@ -24,7 +24,7 @@ export function PreferencesForm({ rinkId, email, timeZone, tellAt, wantsEmail, w
             label="Tell me at"
             name="tellAt"
             type="time"
-            hint={`By the clock at the rink (${timeZone}). News of a change comes when it happens.`}
+            hint={`By the clock at the rink (${timeZone}). What cannot wait comes when it happens.`}
             defaultValue={values?.tellAt ?? tellAt}
             error={fields?.tellAt}
           />

@@ -60,7 +60,7 @@ export function fillDayText(news: FillDayNews, now: Date, words: WordOptions): F
       GROUND[news.base],
       'Boards or banks standing and level, and the low corner known.',
       'Hose run through and drained, its washers tight, a backflow preventer on the tap.',
-      'Leave to use the water: local restrictions come first.',
+      'A look at local water restrictions: they come first.',
     ],
   }
 }

@@ -52,12 +52,12 @@ test('the keeper fills a rink, lets it freeze and opens it', async ({ page }) =>
   await test.step('a thin hole opens nothing, a thick one does', async () => {
     await page.getByLabel('Ice in a hole drilled now').fill('4')
     await page.getByRole('button', { name: 'Log this hole' }).click()
-    await expect(title).toHaveText(/^4\.0 cm of ice/)
+    await expect(title).toHaveText(/^4\.0\scm of ice/)
     await expect(page.getByText('Open for skating')).toBeHidden()
     await page.reload()
     await page.getByLabel('Ice in a hole drilled now').fill('11')
     await page.getByRole('button', { name: 'Log this hole' }).click()
-    await expect(title).toHaveText(/^11\.0 cm of ice/)
+    await expect(title).toHaveText(/^11\.0\scm of ice/)
     await page.getByText('Open for skating').click()
     await page.getByRole('button', { name: 'Open the rink' }).click()
     await expect(async () => {

@@ -25,6 +25,7 @@ export function useCheckOffs(view: TonightView, readAgain: () => Promise<unknown
   const [refused, setRefused] = useState<KeptCheckOff[]>([])
   const [stuck, setStuck] = useState<readonly string[]>([])
   const sending = useRef(false)
+  const isAskedAgain = useRef(false)
 
   const readKept = useCallback(async () => {
     const kept = await listKept(userId, rinkId)
@@ -33,20 +34,29 @@ export function useCheckOffs(view: TonightView, readAgain: () => Promise<unknown
     return kept.filter((one) => !one.refused)
   }, [userId, rinkId])
 
+  const sendOnce = useCallback(async () => {
+    const left = await readKept()
+    const outcomes = await Promise.all(left.map(async (one) => [one.entryKey, await send(one)] as const))
+    setStuck(unlessBothEmpty(outcomes.flatMap(([key, outcome]) => (outcome === 'stuck' ? [key] : []))))
+    // Read before it is taken off the list, so that it does not flicker.
+    if (outcomes.some(([, outcome]) => outcome === 'sent')) await readAgain().catch(() => undefined)
+    await readKept()
+  }, [readKept, readAgain])
+
   const sendKept = useCallback(async () => {
+    // What is kept while another send is under way goes right after it.
+    isAskedAgain.current = sending.current
     if (sending.current) return
     sending.current = true
     try {
-      const left = await readKept()
-      const outcomes = await Promise.all(left.map(async (one) => [one.entryKey, await send(one)] as const))
-      setStuck(unlessBothEmpty(outcomes.flatMap(([key, outcome]) => (outcome === 'stuck' ? [key] : []))))
-      // Read before it is taken off the list, so that it does not flicker.
-      if (outcomes.some(([, outcome]) => outcome === 'sent')) await readAgain().catch(() => undefined)
-      await readKept()
+      do {
+        isAskedAgain.current = false
+        await sendOnce()
+      } while (isAskedAgain.current)
     } finally {
       sending.current = false
     }
-  }, [readKept, readAgain])
+  }, [sendOnce])
 
   useEffect(() => {
     const first = setTimeout(() => void sendKept(), 0)

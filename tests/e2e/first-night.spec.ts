@@ -114,8 +114,11 @@ test('a keeper signs up, sets a rink up, sees tonight and is told', async ({ pag
   })
 
   await test.step('mute and unmute', async () => {
+    // It shows before the server has it; who leaves sooner takes it along.
+    const kept = page.waitForResponse((response) => (response.request().postData() ?? '').includes('until'))
     await page.getByRole('button', { name: 'Mute for tonight' }).click()
     await expect(page.getByText('Alerts are silent tonight.')).toBeVisible()
+    await kept
     await page.reload()
     await expect(page.getByText('Alerts are silent tonight.')).toBeVisible()
     await page.getByRole('button', { name: 'Unmute' }).click()

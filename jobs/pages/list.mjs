@@ -59,6 +59,9 @@ export const LINKED_PAGES = {
  */
 export async function findLinkedPage(page, rink, { on, href, not = [] }) {
   await page.goto(rink + on)
-  const links = await page.locator(`main a[href*="${href}"]`).evaluateAll((all) => all.map((link) => link.href))
+  const found = page.locator(`main a[href*="${href}"]`)
+  // The page may still be on its way behind its outline.
+  await found.first().waitFor()
+  const links = await found.evaluateAll((all) => all.map((link) => link.href.split('#')[0]))
   return links.find((link) => !not.some((part) => link.includes(part)))
 }

@@ -4,7 +4,7 @@ import { prepareHours } from '@/lib/physics/prepare'
 import { reportSheet, type SheetState } from '@/lib/physics/sheet'
 import { otherRuns } from './agreement'
 import { growthOf, type Grown } from './fill-outlook'
-import { carrySheet, type ForecastRun } from './forecast-run'
+import { ICE_TO_WATER, carrySheet, type ForecastRun } from './forecast-run'
 import { round } from './score-hours'
 import { makeSetting, type Setting } from './setting'
 import { snowOnThinIce } from './snow-on-thin-ice'
@@ -17,9 +17,6 @@ import type { Caution, JudgeInput, JudgeOptions, Spread } from './types'
 const EVERY_HOURS = 3
 
 /** Ice over the runs. [mm] In nine runs of ten it is at least p10. */
-/** Ice of this many millimetres a millimetre of water: 999.8 / 916.7 kg/m³ (IAPWS). */
-const ICE_PER_WATER = 1.09
-
 export interface ThicknessAhead {
   at: string
   p10: number
@@ -87,7 +84,7 @@ export function freezingOutlook(input: JudgeInput, options: JudgeOptions = {}): 
   return {
     now,
     carriesSkaterMm,
-    isShallow: now.thicknessMm + now.waterBelowMm * ICE_PER_WATER < carriesSkaterMm,
+    isShallow: now.thicknessMm * ICE_TO_WATER + now.waterBelowMm < carriesSkaterMm * ICE_TO_WATER,
     ahead,
     skinAt: spread('skinMillis'),
     carriesSkaterAt: spread('carriesMillis'),

@@ -1,7 +1,7 @@
 // How many forecast runs find a good hour in each night ahead, also in those for which the forecast itself says hold off.
 import { HOUR_MILLIS } from '@/lib/physics/constants'
 import { prepareHours } from '@/lib/physics/prepare'
-import { addToTally, bestHour, hourAgreements, otherRuns, startTally } from './agreement'
+import { addToTally, otherRuns, startTally } from './agreement'
 import { carrySheet } from './forecast-run'
 import { nightDateOf } from './night'
 import { isHourAvailable } from './score-hours'
@@ -56,11 +56,9 @@ export function askOtherNights(
   }
   if (runs === 0) return []
   const nights = new Map<string, number>()
-  for (const tally of tallies) {
-    const hours = hourAgreements(tally, runs, Array.from(tally.shares))
-    const agreeing = Math.round((hours[bestHour(hours)]?.share ?? 0) * runs)
-    const nightDate = nightOf(setting, tally.range.from)
-    nights.set(nightDate, Math.max(agreeing, nights.get(nightDate) ?? 0))
+  for (const { range, shares } of tallies) {
+    const nightDate = nightOf(setting, range.from)
+    nights.set(nightDate, Math.max(...shares, nights.get(nightDate) ?? 0))
   }
   return Array.from(nights, ([nightDate, agreeing]) => ({ nightDate, agreeing, runs }))
 }

@@ -1,5 +1,6 @@
 // Turns a promised message into the mail or push that goes out.
 import { formatInTimeZone } from 'date-fns-tz'
+import type { FillDayKind } from '@/lib/advice/fill-day-due'
 import { LINK_LIFETIME_SECONDS, linkUrl } from '@/lib/auth/account-links'
 import type { MessageToDeliver } from '@/db/queries/deliveries'
 import type { EmailMessage, PushMessage } from '@/lib/messaging/port'
@@ -15,7 +16,7 @@ import {
 } from '@/lib/messaging/templates/account'
 import { alertMail, alertPush, type AlertKind, type AlertWords } from '@/lib/messaging/templates/alerts'
 import { fillCheckMail, fillCheckPush, type FillCheckWords } from '@/lib/messaging/templates/fill-check'
-import { fillDayMail, fillDayPush, type FillDayKind, type FillDayWords } from '@/lib/messaging/templates/fill-day'
+import { fillDayMail, fillDayPush, type FillDayWords } from '@/lib/messaging/templates/fill-day'
 import { invitationMail, type InvitationWords } from '@/lib/messaging/templates/invitation'
 import type { MailWords } from '@/lib/messaging/templates/letter'
 import {

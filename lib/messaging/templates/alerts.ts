@@ -1,7 +1,7 @@
 // What is said about a night: as a mail and as a push. The words come finished; here they are only laid out.
 import { writeLetter } from './letter'
 import type { MailWords } from './letter'
-import { cutPolitely, oneLine } from './plain'
+import { pushBody, shortName, waysOut } from './rink-news'
 
 export type AlertKind = 'flood-tonight' | 'flood-changed' | 'flood-closed' | 'thaw-ahead'
 
@@ -51,13 +51,10 @@ const FRAMES: Record<AlertKind, Frame> = {
   'thaw-ahead': { subjectLead: '', opening: '', pushTitle: (rinkName) => `${rinkName}: thaw` },
 }
 
-const LONGEST_NAME = 60
-const LONGEST_BODY = 180
-
 /** @throws RangeError when a link is no web address. */
 export function alertMail(kind: AlertKind, words: AlertWords): MailWords {
   const { subjectLead, opening } = FRAMES[kind]
-  const rinkName = shortName(words)
+  const rinkName = shortName(words.rinkName)
   return writeLetter({
     subject: `${rinkName}: ${subjectLead}${words.sentence.replace(/\.$/, '')}`,
     kicker: `${rinkName}, ${words.nightLabel}`,
@@ -71,23 +68,16 @@ export function alertMail(kind: AlertKind, words: AlertWords): MailWords {
     action: { label: 'Open the night sheet', url: words.tonightUrl },
     closing: ['Thickness is an estimate: drill and measure before anyone skates.'],
     reason: `You get this because you asked to be told about ${rinkName}.`,
-    footLinks: [
-      { label: 'Stop these mails', url: words.unsubscribeUrl },
-      { label: 'Choose how and when you are told', url: words.manageUrl },
-    ],
+    footLinks: waysOut(words),
   })
 }
 
 /** `tag` makes a newer notification take the place of an older one: the same for one rink and night. */
 export function alertPush(kind: AlertKind, words: AlertWords, tag: string): PushWords {
   return {
-    title: FRAMES[kind].pushTitle(shortName(words)),
-    body: cutPolitely(oneLine(`${words.sentence} ${words.sure}`), LONGEST_BODY),
+    title: FRAMES[kind].pushTitle(shortName(words.rinkName)),
+    body: pushBody(words.sentence, words.sure),
     url: words.tonightUrl,
     tag,
   }
-}
-
-function shortName({ rinkName }: AlertWords): string {
-  return cutPolitely(oneLine(rinkName), LONGEST_NAME)
 }

@@ -1,7 +1,7 @@
 // The reminder to look after a running hose, as a mail and as a push. The words come finished.
 import type { PushWords } from './alerts'
 import { writeLetter, type MailWords } from './letter'
-import { cutPolitely, oneLine } from './plain'
+import { pushBody, shortName, waysOut } from './rink-news'
 
 export interface FillCheckWords {
   rinkName: string
@@ -15,12 +15,9 @@ export interface FillCheckWords {
   manageUrl: string
 }
 
-const LONGEST_NAME = 60
-const LONGEST_BODY = 180
-
 /** @throws RangeError when a link is no web address. */
 export function fillCheckMail(words: FillCheckWords): MailWords {
-  const rinkName = cutPolitely(oneLine(words.rinkName), LONGEST_NAME)
+  const rinkName = shortName(words.rinkName)
   return writeLetter({
     subject: `${rinkName}: ${words.sentence.replace(/\.$/, '')}`,
     kicker: `${rinkName}, filling`,
@@ -30,17 +27,14 @@ export function fillCheckMail(words: FillCheckWords): MailWords {
     action: { label: 'Log what you saw', url: words.fillingUrl },
     closing: [],
     reason: `You get this because you look after the fill of ${rinkName}. A look that is logged, or a pause, ends it.`,
-    footLinks: [
-      { label: 'Stop these mails', url: words.unsubscribeUrl },
-      { label: 'Choose how and when you are told', url: words.manageUrl },
-    ],
+    footLinks: waysOut(words),
   })
 }
 
 export function fillCheckPush({ rinkName, sentence, progress, fillingUrl }: FillCheckWords, tag: string): PushWords {
   return {
-    title: `${cutPolitely(oneLine(rinkName), LONGEST_NAME)}: the hose runs`,
-    body: cutPolitely(oneLine(`${sentence} ${progress}`), LONGEST_BODY),
+    title: `${shortName(rinkName)}: the hose runs`,
+    body: pushBody(sentence, progress),
     url: fillingUrl,
     tag,
   }

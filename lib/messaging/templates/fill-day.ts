@@ -1,15 +1,11 @@
 // The day to fill, as a mail and as a push. The words come finished.
+import type { FillDayKind } from '@/lib/advice/fill-day-due'
 import type { FillDayContent } from '@/lib/schemas/alert-content'
 import type { PushWords } from './alerts'
 import { writeLetter, type MailWords } from './letter'
-import { cutPolitely, oneLine } from './plain'
-
-export type FillDayKind = 'fill-ahead' | 'fill-changed' | 'fill-closed'
+import { pushBody, shortName, waysOut } from './rink-news'
 
 export type FillDayWords = FillDayContent['words'] & { weekUrl: string; unsubscribeUrl: string; manageUrl: string }
-
-const LONGEST_NAME = 60
-const LONGEST_BODY = 180
 
 const FRAMES: Record<FillDayKind, { subjectLead: string; pushTitle: string }> = {
   'fill-ahead': { subjectLead: '', pushTitle: 'a day to fill' },
@@ -19,7 +15,7 @@ const FRAMES: Record<FillDayKind, { subjectLead: string; pushTitle: string }> = 
 
 /** @throws RangeError when a link is no web address. */
 export function fillDayMail(kind: FillDayKind, words: FillDayWords): MailWords {
-  const rinkName = shortName(words)
+  const rinkName = shortName(words.rinkName)
   return writeLetter({
     subject: `${rinkName}: ${FRAMES[kind].subjectLead}${words.sentence.replace(/\.$/, '')}`,
     kicker: `${rinkName}, ${words.nightLabel}`,
@@ -32,23 +28,16 @@ export function fillDayMail(kind: FillDayKind, words: FillDayWords): MailWords {
     action: { label: 'Open the week', url: words.weekUrl },
     closing: ['Thickness is an estimate: drill and measure before anyone skates.'],
     reason: `You get this because you asked to be told about ${rinkName}.`,
-    footLinks: [
-      { label: 'Stop these mails', url: words.unsubscribeUrl },
-      { label: 'Choose how and when you are told', url: words.manageUrl },
-    ],
+    footLinks: waysOut(words),
   })
 }
 
 /** `tag` makes a newer notification take the place of an older one: the same for one rink. */
 export function fillDayPush(kind: FillDayKind, words: FillDayWords, tag: string): PushWords {
   return {
-    title: `${shortName(words)}: ${FRAMES[kind].pushTitle}`,
-    body: cutPolitely(oneLine([words.sentence, words.sure, words.plan].filter(Boolean).join(' ')), LONGEST_BODY),
+    title: `${shortName(words.rinkName)}: ${FRAMES[kind].pushTitle}`,
+    body: pushBody(words.sentence, words.sure, words.plan),
     url: words.weekUrl,
     tag,
   }
-}
-
-function shortName({ rinkName }: FillDayWords): string {
-  return cutPolitely(oneLine(rinkName), LONGEST_NAME)
 }

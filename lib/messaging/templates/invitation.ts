@@ -1,6 +1,7 @@
 // The mail that invites somebody to a rink. The names are people's own words: short, and never a link.
 import { writeLetter, type MailWords } from './letter'
-import { cutPolitely, oneLine } from './plain'
+import { oneLine } from './plain'
+import { shortName } from './rink-news'
 
 export interface InvitationWords {
   rinkName: string
@@ -14,17 +15,8 @@ export interface InvitationWords {
   url: string
 }
 
-const LONGEST_NAME = 60
-
 /** The dot between two letters would make mail programs see a web address in a name. */
-function plainName(name: string): string {
-  return cutPolitely(
-    oneLine(name)
-      .replace(/[./:@]+(?=\S)/g, ' ')
-      .trim(),
-    LONGEST_NAME,
-  )
-}
+const plainName = (name: string) => shortName(oneLine(name).replace(/[./:@]+(?=\S)/g, ' '))
 
 /** @throws RangeError when the link is no web address. */
 export function invitationMail({ asRole, can, validFor, url, ...names }: InvitationWords): MailWords {

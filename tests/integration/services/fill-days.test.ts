@@ -10,6 +10,7 @@ import { startFill } from '@/lib/services/fills'
 import { renderEmail, renderPush } from '@/lib/services/render-message'
 import { givenCast, givenDatabase } from '@/tests/support/given-cast'
 import { judgeForecast, judgeNow, SETTINGS, storeForecast } from '@/tests/support/night-at-the-rink'
+import { addDevice, listMessages, listTold } from '@/tests/support/told'
 
 // Toronto is five hours behind: 14:10, 15:30, … on Tuesday 12 January by the rink's clock.
 const AT_14_10 = new Date('2027-01-12T19:10:00Z')
@@ -38,36 +39,17 @@ const tooCold = () => TOO_COLD
 const judgeAt = (now: Date, change: (at: Date) => Partial<HourlyRecord>) =>
   judgeForecast(database.db, cast, now, change)
 
-const messages = () =>
-  database.db('messages').where({ rink_id: cast.rinkId }).orderBy(['created_at', 'dedupe_key']).select()
-
-async function told(): Promise<string[]> {
-  const names = new Map([
-    [cast.keeper.userId, 'keeper'],
-    [cast.crew.userId, 'crew'],
-  ])
-  return (await messages()).map(
-    ({ kind, channel, user_id, content }) =>
-      `${kind} ${(content as { fillDate?: string }).fillDate} ${channel} ${names.get(user_id) ?? 'somebody'}`,
-  )
-}
+const messages = () => listMessages(database, cast)
+const told = () => listTold(database, cast)
 
 const both = (kind: string, date: string) => [`${kind} ${date} email crew`, `${kind} ${date} email keeper`]
 
 async function expectTold(...expected: string[][]): Promise<void> {
-  expect((await told()).sort()).toEqual(expected.flat().sort())
+  expect(await told()).toEqual(expected.flat().sort())
 }
 
 const choose = (choice: Record<string, unknown>) =>
   database.db('alert_preferences').where({ rink_id: cast.rinkId, user_id: cast.keeper.userId }).update(choice)
-
-const addDevice = () =>
-  database.db('push_subscriptions').insert({
-    user_id: cast.keeper.userId,
-    endpoint: `https://push.example/${cast.rinkId}`,
-    p256dh: 'key',
-    auth: 'auth',
-  })
 
 async function deliverable(kind: string, channel = 'email'): Promise<MessageToDeliver> {
   const row = (await messages()).find(
@@ -97,7 +79,7 @@ describe('a day to fill ahead', () => {
 
   test('is told by each channel, a device added later by push alone', async () => {
     await judgeAt(AT_16_10, mildOn(14))
-    await addDevice()
+    await addDevice(database, cast)
     await decideAlerts({ db: database.db, now: AT_17_10 }, rinkAccess())
     await decideAlerts({ db: database.db, now: AT_18_10 }, rinkAccess())
     await expectTold(both('fill-ahead', '2027-01-14'), ['fill-ahead 2027-01-14 push keeper'])
@@ -234,7 +216,7 @@ describe('what goes out', () => {
   })
 
   test('the push opens the week, and the next takes its place', async () => {
-    await addDevice()
+    await addDevice(database, cast)
     await judgeAt(AT_16_10, mildOn(14))
     const push = renderPush(await deliverable('fill-ahead', 'push'), SETTINGS)
     expect(push).toMatchObject({

@@ -6,6 +6,7 @@ import { decideAlerts } from '@/lib/services/alerts'
 import { renderEmail, renderPush } from '@/lib/services/render-message'
 import { givenCast, givenDatabase } from '@/tests/support/given-cast'
 import { judgeForecast, judgeNow, SETTINGS, storeForecast } from '@/tests/support/night-at-the-rink'
+import { addDevice, listMessages, listTold } from '@/tests/support/told'
 import { SNOW, THAW } from '@/tests/support/night-weather'
 
 // Toronto is five hours behind: 14:10, 15:30, … on Tuesday 12 January by the rink's clock.
@@ -31,28 +32,10 @@ const IN_TWO_DAYS = '2027-01-14T15:00:00Z'
 
 const judgeAt = (now: Date, from: string, to?: string) => judgeForecast(database.db, cast, now, thawFrom(from, to))
 
-const messages = () =>
-  database.db('messages').where({ rink_id: cast.rinkId }).orderBy(['created_at', 'dedupe_key']).select()
-
-async function told(): Promise<string[]> {
-  const names = new Map([
-    [cast.keeper.userId, 'keeper'],
-    [cast.crew.userId, 'crew'],
-  ])
-  return (await messages())
-    .map(({ kind, channel, user_id }) => `${kind} ${channel} ${names.get(user_id) ?? 'somebody'}`)
-    .sort()
-}
+const messages = () => listMessages(database, cast)
+const told = () => listTold(database, cast)
 
 const TOLD_ONCE = ['thaw-ahead email crew', 'thaw-ahead email keeper']
-
-const addDevice = () =>
-  database.db('push_subscriptions').insert({
-    user_id: cast.keeper.userId,
-    endpoint: `https://push.example/${cast.rinkId}`,
-    p256dh: 'key',
-    auth: 'auth',
-  })
 
 describe('a thaw within a day', () => {
   test('is told once however often and by however many workers it is judged and decided', async () => {
@@ -67,7 +50,7 @@ describe('a thaw within a day', () => {
   })
 
   test('is told by each channel', async () => {
-    await addDevice()
+    await addDevice(database, cast)
     await judgeAt(AT_16_10, TOMORROW)
     expect(await told()).toEqual([...TOLD_ONCE, 'thaw-ahead push keeper'])
   })
@@ -88,7 +71,7 @@ describe('a thaw within a day', () => {
   })
 
   test('says from when until when and how much ice it takes', async () => {
-    await addDevice()
+    await addDevice(database, cast)
     await judgeAt(AT_16_10, TOMORROW, '2027-01-14T22:00:00Z')
     const rows = (await messages()).filter(({ user_id }) => user_id === cast.keeper.userId)
     const [mailRow, pushRow] = [rows.find((one) => one.channel === 'email'), rows.find((one) => one.channel === 'push')]

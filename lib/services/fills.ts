@@ -11,7 +11,7 @@ import {
   stopFillSession,
   type Fill,
 } from '@/db/queries/fills'
-import { enqueueRefresh } from '@/db/queries/jobs'
+import { enqueuePull, enqueueRefresh } from '@/db/queries/jobs'
 import { countChange, movePhase } from '@/db/queries/rink-settings'
 import { insertEntry } from '@/db/queries/log-entries'
 import { insertReportedSheet } from '@/db/queries/sheet-states'
@@ -58,6 +58,8 @@ export async function startFill(context: ServiceContext, input: StartFillInput):
     }
     await insertFillSession(trx, fillId, input.flowLPerMin ?? rink.water.flowLPerMin, now)
     await movePhase(trx, access, 'filling', now)
+    // Of a rink that was being planned no weather has been read.
+    await enqueuePull(trx, rink.gridCellId)
     await enqueueRefresh(trx, rink.id)
     await setFillReminders(trx, access, { rink, fill, now, viewer })
   })

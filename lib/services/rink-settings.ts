@@ -78,9 +78,11 @@ export async function changeYard(context: ServiceContext, { rinkId, ...yard }: C
   }))
 }
 
-/** What there is now, and how thick it was measured. */
+/** What there is now, and how thick it was measured. Another phase may be the first for which the weather is read. */
 export async function changeIce(context: ServiceContext, input: ChangeIceInput): Promise<void> {
   await changing(context, input.rinkId, async (trx) => {
+    const { phase, gridCellId } = await getRinkForJudging(trx, input.rinkId)
+    if (phase !== input.phase) await enqueuePull(trx, gridCellId)
     if (input.iceThicknessMm !== undefined) await reportIce(trx, input.rinkId, input.iceThicknessMm, context.now)
     return { phase: input.phase }
   })

@@ -68,6 +68,16 @@ const jobs = async (task: string) =>
 const EVENINGS = { from1: '20:00', to1: '23:30', day1_1: 'on', day1_5: 'on' }
 
 describe('a change by the keeper', () => {
+  test('to another phase has the weather read: off the season nobody did', async () => {
+    await ice({ phase: 'planning' })
+    await database.db.raw('delete from graphile_worker._private_jobs')
+    await ice({ phase: 'planning' })
+    expect(await jobs('pull-forecast')).toEqual([])
+    await ice({ phase: 'waiting' })
+    const { grid_cell_id: cellId } = (await database.db('rinks').where({ id: cast.rinkId }).first('grid_cell_id'))!
+    expect(await jobs('pull-forecast')).toEqual([`pull:${cellId}`])
+  })
+
   test('is counted and judged, and leaves the rest alone', async () => {
     const before = await read()
     await hours(EVENINGS)

@@ -40,11 +40,17 @@ export function Floor({ layout, words }: StripPartProps) {
 }
 
 /** From pour to set; a poured pass is a wedge at its pour. */
+/** A pass that is still wet when the next begins has its name over what is before that. */
+function roomOf(brackets: StripLayout['brackets'], place: number): number {
+  const { x = 0, width = 0 } = brackets[place] ?? {}
+  return Math.min(width, ...brackets.map((other) => other.x - x).filter((ahead) => ahead > 0))
+}
+
 export function Passes({ layout, words, brackets }: StripPartProps & { brackets: StripLayout['brackets'] }) {
   const top = layout.frame.plotTop - 11
   return (
     <g>
-      {brackets.map(({ number, x, width, isPoured }) => (
+      {brackets.map(({ number, x, width, isPoured }, place) => (
         <g key={number}>
           {isPoured ? (
             <path d={`M${x - 5},${top} h10 l-5,9 z`} className="fill-ink" />
@@ -56,8 +62,14 @@ export function Passes({ layout, words, brackets }: StripPartProps & { brackets:
               strokeWidth={1.4}
             />
           )}
-          <text x={isPoured ? x : x + width / 2} y={top - 6} textAnchor="middle" className="fill-ink" fontWeight={500}>
-            {words.passLabel(number, isPoured ? 0 : width)}
+          <text
+            x={isPoured ? x : x + roomOf(brackets, place) / 2}
+            y={top - 6}
+            textAnchor="middle"
+            className="fill-ink"
+            fontWeight={500}
+          >
+            {words.passLabel(number, isPoured ? 0 : roomOf(brackets, place))}
           </text>
         </g>
       ))}

@@ -6,7 +6,7 @@ import { NightStrip } from '@/components/rinks/night-strip'
 import type { StripSource } from '@/components/rinks/strip-input'
 import { HOUR_MILLIS } from '@/lib/physics/constants'
 import type { TonightView } from '@/lib/schemas/tonight-view'
-import { hourAt, isoAt, NOON, outlookOf, tonightView } from '../../fixtures/tonight-view'
+import { hourAt, isoAt, NOON, outlookOf, passAt, tonightView } from '../../fixtures/tonight-view'
 
 function draw(change: Partial<TonightView> = {}, now = NOON + 6.7 * HOUR_MILLIS): string {
   return renderToStaticMarkup(<NightStrip source={tonightView(change) as StripSource} now={now} />)
@@ -92,6 +92,17 @@ describe('the night strip', () => {
     expect(markup).toContain('fill="url(#strip-wide-barred)"')
     expect(markup).toContain('class="fill-lamp stroke-lamp-text"')
     expect(markup).toContain('>fill<')
+  })
+
+  test('names of passes that are still wet when the next begins do not lie over each other', () => {
+    // From 8 pm, 9 pm and 10 pm, each wet until 4 am: an hour of the wide strip is (800 - 38 - 44) / 24 = 29.9 px.
+    const passes = [passAt(1, 8, 16), passAt(2, 9, 16), passAt(3, 10, 16)]
+    const [wide = ''] = draw({ outlook: outlookOf({ passes }) }).split('</svg>')
+    const names = [...wide.matchAll(/<text x="([\d.]+)"[^>]*>(Pass \d|\d)<\/text>/g)].filter(
+      ([tag]) => tag.includes('font-weight') && tag.includes('fill-ink'),
+    )
+    expect(names.map(([, , name]) => name)).toEqual(['1', '2', 'Pass 3'])
+    expect(Number(names[1]?.[1]) - Number(names[0]?.[1])).toBeCloseTo(29.9, 0)
   })
 
   test('hours to come without a forecast are hatched and named', () => {

@@ -92,15 +92,20 @@ function JudgedNight({ view, now, change, checkOffs }: JudgedNightProps) {
           {isGranted(view.viewer.role, 'receiveAlerts') ? <SteadyMute view={view} change={change} /> : null}
           <SteadyForYou view={view} />
         </section>
-        <SteadyReasons view={view} now={now} />
+        <div>
+          <SteadyReasons view={view} now={now} />
+          <WaterAndHose water={view.rink.water} passes={passes} reader={readerOf(view)} />
+          <SteadySource view={view} now={now} />
+        </div>
       </div>
       <SteadyDays view={view} days={days} />
     </>
   )
 }
 
-// Moving a pass changes none of these: they are drawn again only when the view does.
+// Each is drawn again only when what it shows changes: moving a pass changes the verdict's count and time alone.
 const SteadyVerdict = memo(Verdict)
+const SteadySource = memo(DataSource)
 const SteadyPhase = memo(PhaseNote)
 const SteadyZone = memo(ZoneNote)
 const SteadyMute = memo(Mute)
@@ -119,11 +124,9 @@ const SteadyForYou = memo(function ForYouAndTheIce({ view }: { view: Judged }) {
 
 const SteadyReasons = memo(function Reasons({ view, now }: { view: Judged; now: number }) {
   return (
-    <div>
+    <>
       <HoldNote view={view} now={now} />
       <Why summary={view.outlook.summary} reader={readerOf(view)} />
-      <WaterAndHose view={view} />
-      <DataSource view={view} now={now} />
-    </div>
+    </>
   )
 })

@@ -1,14 +1,20 @@
 // The water tonight's plan rests on: what the tap gives, and what the passes take in all.
 import { Facts } from '@/components/ui/facts'
-import { readerOf } from '@/components/rinks/reader'
 import { durationText, temperatureText, waterText } from '@/lib/words/quantities'
-import type { TonightView } from '@/lib/schemas/tonight-view'
+import type { TonightPass, TonightView } from '@/lib/schemas/tonight-view'
+import type { WordOptions } from '@/lib/words/options'
 
-export function WaterAndHose({ view }: { view: TonightView }) {
-  const reader = readerOf(view)
-  const planned = (view.outlook?.passes ?? []).filter((pass) => pass.poured === null)
+interface WaterAndHoseProps {
+  water: TonightView['rink']['water']
+  /** As moved so far. */
+  passes: readonly TonightPass[]
+  reader: WordOptions
+}
+
+export function WaterAndHose({ water, passes, reader }: WaterAndHoseProps) {
+  const planned = passes.filter((pass) => pass.poured === null)
   // A pass of the keeper's may take other water than the rink usually gets.
-  const waters = planned.length > 0 ? planned : [view.rink.water]
+  const waters = planned.length > 0 ? planned : [water]
   const temperatures = new Set(waters.map(({ temperatureC }) => temperatureText(temperatureC, reader)))
   const flows = new Set(waters.map(({ flowLPerMin }) => waterText(flowLPerMin, reader)))
   const litres = planned.reduce((sum, pass) => sum + pass.waterL, 0)

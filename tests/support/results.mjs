@@ -2,7 +2,7 @@
 import fs from 'node:fs'
 import { stripVTControlCharacters } from 'node:util'
 
-const MESSAGE_LINES = 6
+const MESSAGE_LINES = 20
 
 const shorten = (message = '') =>
   stripVTControlCharacters(message).trim().split('\n').slice(0, MESSAGE_LINES).join('\n')

@@ -8,6 +8,8 @@ export { expect }
 const EXPECTED = [
   /Failed to load resource: the server responded with a status of (404|422|403)/,
   /Failed to load resource: net::ERR_INTERNET_DISCONNECTED/,
+  // A file that the service worker was asked for without a network.
+  /Failed to load resource: net::ERR_FAILED \S+\/_next\/static\//,
 ]
 
 export const test = base.extend<{ cleanConsole: void }>({
@@ -16,8 +18,8 @@ export const test = base.extend<{ cleanConsole: void }>({
       const errors: string[] = []
       page.on('pageerror', (error) => errors.push(String(error)))
       page.on('console', (message) => {
-        if (message.type() === 'error' && !EXPECTED.some((known) => known.test(message.text())))
-          errors.push(message.text())
+        const said = `${message.text()} ${message.location().url}`.trim()
+        if (message.type() === 'error' && !EXPECTED.some((known) => known.test(said))) errors.push(said)
       })
       await run()
       expect(errors, 'nothing unexpected on the console').toEqual([])

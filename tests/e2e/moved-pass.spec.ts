@@ -108,6 +108,12 @@ test('a check-off without a network waits on the phone, and is sent once', async
     await expect(page.getByText('Waiting to be sent from this device.')).toBeVisible()
   })
 
+  await test.step('a chart that cannot be fetched leaves the rest of the sheet alone', async () => {
+    await page.getByRole('heading', { name: 'The days ahead' }).scrollIntoViewIfNeeded()
+    await expect(page.getByText(/The chart could not be fetched/)).toBeVisible()
+    await expect(check).toBeVisible()
+  })
+
   await test.step('it is sent when the network is back', async () => {
     await context.setOffline(false)
     await expect(page.getByText(/poured by Maren/)).toHaveCount(1, { timeout: 30_000 })

@@ -6,6 +6,7 @@ import { DataSource } from '@/components/rinks/data-source'
 import { passWords, setWords } from '@/app/(member)/rinks/[rinkId]/_components/pass-words'
 import { hasMoreToLose, isAsked } from '@/app/(member)/rinks/[rinkId]/_components/when-asked'
 import { StatusNotices } from '@/app/(member)/rinks/[rinkId]/_components/status-notices'
+import { TroubleBar } from '@/app/(member)/rinks/[rinkId]/_components/trouble-bar'
 import type { ReadTrouble } from '@/app/(member)/rinks/[rinkId]/_components/use-tonight'
 import { Verdict } from '@/app/(member)/rinks/[rinkId]/_components/verdict'
 import { ageText, nightLabel, readerOf } from '@/components/rinks/reader'
@@ -46,23 +47,21 @@ test('the verdict sets off its first words and keeps times of day on one line', 
 })
 
 describe('a state that may be old', () => {
-  const say = (change: Partial<TonightView>, trouble: ReadTrouble = null, now = NOW) =>
-    textOf(
-      renderToStaticMarkup(
-        <StatusNotices view={tonightView(change)} now={now} trouble={trouble} onReadAgain={() => {}} />,
-      ),
-    )
+  const say = (change: Partial<TonightView>) =>
+    textOf(renderToStaticMarkup(<StatusNotices view={tonightView(change)} now={NOW} />))
+  const sayTrouble = (trouble: NonNullable<ReadTrouble>, now = NOW) =>
+    textOf(renderToStaticMarkup(<TroubleBar view={tonightView()} now={now} trouble={trouble} onReadAgain={() => {}} />))
 
   test('is silent while all is fresh', () => {
     expect(say({})).toBe('')
   })
 
   test('says as of when, and how long ago, without a connection', () => {
-    expect(say({}, 'offline', NOW + 3 * HOUR_MILLIS)).toContain('As of 6:42 pm, 3 hours ago. No connection')
+    expect(sayTrouble('offline', NOW + 3 * HOUR_MILLIS)).toContain('No connection. As of 6:42 pm, 3 hours ago.')
   })
 
   test('sends a signed-out person to sign-in', () => {
-    expect(say({}, 'signed-out')).toContain('Sign in to see the newest state')
+    expect(sayTrouble('signed-out')).toMatch(/You are signed out on this device\. As of .*Sign in$/)
   })
 
   test('gives a stale forecast its age, and does not repeat that the last read failed', () => {

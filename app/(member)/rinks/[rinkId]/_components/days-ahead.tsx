@@ -1,8 +1,6 @@
 // The ten days to come: a chart that is fetched once it is nearly in view, and the same numbers as a table.
 'use client'
-import dynamic from 'next/dynamic'
-import { useRef } from 'react'
-import { useNearViewport } from '@/components/hooks/use-near-viewport'
+import { ChartFrame } from '@/components/charts/chart-frame'
 import { dayText, readerOf, shortDayText } from '@/components/rinks/reader'
 import type { WordOptions } from '@/lib/words/options'
 import { layerText, rainText, snowText, temperatureText } from '@/lib/words/quantities'
@@ -11,7 +9,7 @@ import { Disclosure } from '@/components/ui/disclosure'
 import type { DayAhead, TonightView } from '@/lib/schemas/tonight-view'
 import { celsiusToFahrenheit, mmToInches } from '@/lib/units'
 
-const Chart = dynamic(() => import('@/components/charts/days-ahead-chart'), { ssr: false })
+const loadChart = () => import('@/components/charts/days-ahead-chart')
 
 const COLUMNS = [
   { head: 'Day' },
@@ -24,19 +22,17 @@ const COLUMNS = [
 ]
 
 export function DaysAhead({ view, days }: { view: TonightView; days: DayAhead[] }) {
-  const frame = useRef<HTMLDivElement>(null)
-  const isNear = useNearViewport(frame)
   const reader = readerOf(view)
   const depthUnit = reader.units.ice === 'in' ? 'in' : 'mm'
   const airUnit = `°${reader.units.temperature}`
   return (
     <section className="mt-10">
       <h2 className="mb-2 text-body font-semibold">The days ahead</h2>
-      <div ref={frame} aria-hidden="true" className="h-[240px]">
-        {isNear ? (
-          <Chart days={days.map((day) => columnOf(day, reader))} depthUnit={depthUnit} airUnit={airUnit} />
-        ) : null}
-      </div>
+      <ChartFrame
+        load={loadChart}
+        chart={{ days: days.map((day) => columnOf(day, reader)), depthUnit, airUnit }}
+        className="h-[240px]"
+      />
       <p className="mt-1 text-small text-graphite">
         Bars: {depthUnit === 'in' ? 'inches' : depthUnit} of water that could freeze in the day, solid where there are
         hours to flood. Lines: high of the air, and low dashed, {airUnit}.

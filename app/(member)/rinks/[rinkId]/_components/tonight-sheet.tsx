@@ -20,6 +20,7 @@ import { Plan } from './plan'
 import { RefusedCheckOffs } from './refused-check-offs'
 import { StatusNotices, ZoneNote } from './status-notices'
 import { summaryOfPlan } from './summary-of-plan'
+import { TroubleBar } from './trouble-bar'
 import { useCheckOffs, type CheckOffs } from './use-check-offs'
 import { useTonight, type ChangeView } from './use-tonight'
 import { Verdict } from './verdict'
@@ -39,7 +40,7 @@ export function TonightSheet({ initial }: { initial: TonightView }) {
     <div className="mx-auto max-w-page px-5 pb-24 lg:px-9 lg:pb-12 print:p-0">
       <RinkHeader name={view.rink.name} about={nightLabel(view.night.date)} people={view.rink.people} />
       <main>
-        <StatusNotices view={view} now={now} trouble={trouble} onReadAgain={readAgain} />
+        <StatusNotices view={view} now={now} />
         <RefusedCheckOffs view={view} checkOffs={checkOffs} />
         {OFF_SEASON[view.rink.phase] ? (
           <OffSeason rink={view.rink} role={view.viewer.role} />
@@ -48,6 +49,7 @@ export function TonightSheet({ initial }: { initial: TonightView }) {
         ) : (
           <FirstForecast hasFailed={view.lastReadFailed} />
         )}
+        {trouble ? <TroubleBar view={view} now={now} trouble={trouble} onReadAgain={readAgain} /> : null}
       </main>
     </div>
   )
@@ -79,7 +81,7 @@ function JudgedNight({ view, now, change, checkOffs }: JudgedNightProps) {
       <SteadyZone view={view} />
       <div className="lg:grid lg:grid-cols-[1.25fr_1fr] lg:gap-x-14 print:block">
         <section>
-          <h2 className="mt-8 mb-2 text-body font-semibold">The plan</h2>
+          <h2 className="mb-2 text-body font-semibold">The plan</h2>
           {passes.length > 0 ? (
             <Plan view={view} passes={passes} now={now} change={change} checkOffs={checkOffs} onMove={setMoved} />
           ) : (

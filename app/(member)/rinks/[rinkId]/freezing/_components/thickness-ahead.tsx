@@ -1,8 +1,6 @@
 // Thickness ahead over the forecast runs: a sentence, a chart fetched once it is nearly in view, and the same as a table.
 'use client'
-import dynamic from 'next/dynamic'
-import { useRef } from 'react'
-import { useNearViewport } from '@/components/hooks/use-near-viewport'
+import { ChartFrame } from '@/components/charts/chart-frame'
 import { DataTable } from '@/components/ui/data-table'
 import { Disclosure } from '@/components/ui/disclosure'
 import type { ThicknessAhead as Ahead } from '@/lib/advice/freezing'
@@ -11,7 +9,7 @@ import type { WordOptions } from '@/lib/words/options'
 import { iceText } from '@/lib/words/quantities'
 import { clockText, weekdayText } from '@/lib/words/times'
 
-const Chart = dynamic(() => import('@/components/charts/thickness-ahead-chart'), { ssr: false })
+const loadChart = () => import('@/components/charts/thickness-ahead-chart')
 
 /** The chart has each of the three hours, the table every twelfth. */
 const TABLE_STEP = 4
@@ -30,8 +28,6 @@ interface Props {
 }
 
 export function ThicknessAhead({ ahead, carriesSkaterMm, reader }: Props) {
-  const frame = useRef<HTMLDivElement>(null)
-  const isNear = useNearViewport(frame)
   const isInches = reader.units.ice === 'in'
   const inUnit = (mm: number) => Number((isInches ? mmToInches(mm) : mm / 10).toFixed(2))
   const momentText = (at: string) => `${weekdayText(at, reader)} ${clockText(at, reader)}`
@@ -45,9 +41,11 @@ export function ThicknessAhead({ ahead, carriesSkaterMm, reader }: Props) {
     <section className="mt-7">
       <h2 className="mb-2 font-semibold">Thickness ahead</h2>
       <figure className="-mx-5 border-y border-rule bg-sheet px-3 pt-3 pb-2 lg:mx-0 lg:border-x">
-        <div ref={frame} aria-hidden="true" className="h-[220px]">
-          {isNear ? <Chart points={points} carries={inUnit(carriesSkaterMm)} unit={isInches ? 'in' : 'cm'} /> : null}
-        </div>
+        <ChartFrame
+          load={loadChart}
+          chart={{ points, carries: inUnit(carriesSkaterMm), unit: isInches ? 'in' : 'cm' }}
+          className="h-[220px]"
+        />
         <figcaption className="px-2 text-small text-graphite">
           {summaryOf(ahead, reader)} Line: the middle run; band: eight runs of ten; dashed:{' '}
           {iceText(carriesSkaterMm, reader)}, which carries a skater.

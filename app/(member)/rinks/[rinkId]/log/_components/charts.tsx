@@ -1,8 +1,7 @@
 // The season's charts: fetched once they are nearly in view, each with its sentence and the same numbers as a table.
 'use client'
-import dynamic from 'next/dynamic'
-import { useRef, type ReactNode } from 'react'
-import { useNearViewport } from '@/components/hooks/use-near-viewport'
+import type { ReactNode } from 'react'
+import { ChartFrame } from '@/components/charts/chart-frame'
 import { dayText, shortDayText } from '@/components/rinks/reader'
 import { DataTable, type Column } from '@/components/ui/data-table'
 import { Disclosure } from '@/components/ui/disclosure'
@@ -13,8 +12,9 @@ import { thicknessSummary, waterSummary, weeksSummary } from '@/lib/words/log-se
 import type { WordOptions } from '@/lib/words/options'
 import { iceText } from '@/lib/words/quantities'
 
-const ThicknessChart = dynamic(() => import('./thickness-chart'), { ssr: false })
-const BarsChart = dynamic(() => import('./bars-chart'), { ssr: false })
+const loadThickness = () => import('./thickness-chart')
+const loadBars = () => import('./bars-chart')
+const HEIGHT = 'h-[220px]'
 
 export function Charts({ charts, reader }: { charts: LogCharts; reader: WordOptions }) {
   return (
@@ -35,17 +35,13 @@ interface ChartProps {
 }
 
 function Chart({ title, summary, isEmpty, table, children }: ChartProps) {
-  const frame = useRef<HTMLDivElement>(null)
-  const isNear = useNearViewport(frame)
   return (
     <section className="mb-10">
       <h2 className="mb-1 font-semibold">{title}</h2>
       <p className="mb-2 text-note text-graphite">{summary}</p>
       {isEmpty ? null : (
         <>
-          <div ref={frame} aria-hidden="true" className="h-[220px]">
-            {isNear ? children : null}
-          </div>
+          {children}
           <Disclosure summary="Show as table" className="text-small">
             <DataTable caption={`${title}, in figures`} {...table} />
           </Disclosure>
@@ -73,13 +69,17 @@ function Thickness({ days, reader }: { days: LogCharts['thickness']; reader: Wor
         })),
       }}
     >
-      <ThicknessChart
-        unit={unit}
-        days={days.map(({ date, modelMm, readingMm }) => ({
-          day: shortDayText(date),
-          model: shown(modelMm),
-          measured: shown(readingMm),
-        }))}
+      <ChartFrame
+        load={loadThickness}
+        className={HEIGHT}
+        chart={{
+          unit,
+          days: days.map(({ date, modelMm, readingMm }) => ({
+            day: shortDayText(date),
+            model: shown(modelMm),
+            measured: shown(readingMm),
+          })),
+        }}
       />
     </Chart>
   )
@@ -100,14 +100,18 @@ function Water({ nights, reader }: { nights: LogCharts['water']; reader: WordOpt
         })),
       }}
     >
-      <BarsChart
-        name="water"
-        unit={reader.units.water}
-        look="water"
-        bars={nights.map(({ nightDate, waterL }) => ({
-          day: shortDayText(nightDate),
-          value: Math.round(fromSi(waterL)),
-        }))}
+      <ChartFrame
+        load={loadBars}
+        className={HEIGHT}
+        chart={{
+          name: 'water',
+          unit: reader.units.water,
+          look: 'water',
+          bars: nights.map(({ nightDate, waterL }) => ({
+            day: shortDayText(nightDate),
+            value: Math.round(fromSi(waterL)),
+          })),
+        }}
       />
     </Chart>
   )
@@ -124,11 +128,15 @@ function Weeks({ weeks }: { weeks: LogCharts['weeks'] }) {
         rows: weeks.map(({ from, nights }) => ({ key: from, cells: [dayText(from), String(nights)] })),
       }}
     >
-      <BarsChart
-        name="nights flooded"
-        unit=""
-        look="nights"
-        bars={weeks.map(({ from, nights }) => ({ day: shortDayText(from), value: nights }))}
+      <ChartFrame
+        load={loadBars}
+        className={HEIGHT}
+        chart={{
+          name: 'nights flooded',
+          unit: '',
+          look: 'nights',
+          bars: weeks.map(({ from, nights }) => ({ day: shortDayText(from), value: nights })),
+        }}
       />
     </Chart>
   )

@@ -33,7 +33,9 @@ export function TroubleBar({ view, now, trouble, onReadAgain }: TroubleBarProps)
       >
         <div className="mx-auto flex max-w-page items-center justify-between gap-4">
           <p className="border-l-[3px] border-rust py-0.5 pl-3.5">
-            {unbroken(`${WHAT[trouble]} As of ${clockText(view.readAt, readerOf(view))}, ${ageText(view.readAt, now)}.`)}
+            {unbroken(
+              `${WHAT[trouble]} As of ${clockText(view.readAt, readerOf(view))}, ${ageText(view.readAt, now)}.`,
+            )}
           </p>
           <WayOut trouble={trouble} onReadAgain={onReadAgain} />
         </div>

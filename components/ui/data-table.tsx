@@ -23,7 +23,7 @@ export function DataTable({
               <th
                 key={head}
                 scope="col"
-                className={`border-b border-rule py-1.5 pr-3 align-bottom font-medium ${isFigure ? 'text-right' : 'text-left'}`}
+                className={`border-b border-rule py-1.5 pr-2.5 align-bottom font-medium last:pr-0 ${isFigure ? 'text-right' : 'text-left'}`}
               >
                 {head}
               </th>
@@ -34,7 +34,7 @@ export function DataTable({
           {rows.map(({ key, cells }) => (
             <tr key={key}>
               {cells.map((cell, index) => {
-                const look = `border-b border-rule py-1.5 pr-3 whitespace-nowrap ${columns[index]?.isFigure ? 'text-right' : 'text-left'}`
+                const look = `border-b border-rule py-1.5 pr-2.5 whitespace-nowrap last:pr-0 ${columns[index]?.isFigure ? 'text-right' : 'text-left'}`
                 return index === 0 ? (
                   <th key={columns[index]?.head} scope="row" className={`${look} font-medium`}>
                     {cell}

@@ -13,7 +13,7 @@ export interface ThicknessDay {
   date: string
   /** The last the model had of the day. [mm] */
   modelMm: number | null
-  /** Measured on the day, the mean when somebody measured twice. [mm] */
+  /** Measured on the day; of several holes the thinnest, which is the one that counts. [mm] */
   readingMm: number | null
 }
 
@@ -41,10 +41,10 @@ export async function thicknessDays(
     listEntries(db, access, { kind: 'reading', from: season.from, to: season.to }),
   ])
   const model = new Map(days.map(({ date, thicknessMm }) => [date, thicknessMm]))
-  const measured = new Map<string, number[]>()
+  const measured = new Map<string, number>()
   for (const { happenedAt, thicknessMm } of readings) {
     const date = localDateOf(happenedAt.getTime(), timeZone)
-    if (thicknessMm !== null) measured.set(date, [...(measured.get(date) ?? []), thicknessMm])
+    if (thicknessMm !== null) measured.set(date, Math.min(thicknessMm, measured.get(date) ?? Infinity))
   }
   const known = [...model.keys(), ...measured.keys()].sort()
   const [first, last] = [known[0], known.at(-1)]
@@ -52,13 +52,8 @@ export async function thicknessDays(
   return datesBetween(first, last).map((date) => ({
     date,
     modelMm: model.get(date) ?? null,
-    readingMm: mean(measured.get(date)),
+    readingMm: measured.get(date) ?? null,
   }))
-}
-
-function mean(values: readonly number[] | undefined): number | null {
-  if (!values || values.length === 0) return null
-  return values.reduce((sum, value) => sum + value, 0) / values.length
 }
 
 /** Every week of the span has its place, flooded or not. */

@@ -38,6 +38,12 @@ export function temperatureText(temperatureC: number, words: WordOptions): strin
     : `${numberText(temperatureC, 0, words)} °C`
 }
 
+/** "−2 to −9 °C", or one figure where both read alike. */
+export function temperatureRangeText(fromC: number, toC: number, words: WordOptions): string {
+  const [from, to] = [temperatureText(fromC, words), temperatureText(toC, words)]
+  return from === to ? to : `${from.replace(/ °[CF]$/, '')} to ${to}`
+}
+
 /** Warm temperatures with their plus sign, where the sign is the point. */
 export function signedTemperatureText(temperatureC: number, words: WordOptions): string {
   const isAbove = words.units.temperature === 'C' && Math.round(temperatureC) > 0

@@ -3,7 +3,7 @@ import type { Reason } from '@/lib/advice/types'
 import { num, text } from './clause'
 import { coolingText, holdingText } from './flood-clauses'
 import type { WordOptions } from './options'
-import { fluxText, iceText, rainText, rateText, snowText, temperatureText, windText } from './quantities'
+import { fluxText, iceText, rainText, rateText, snowText, temperatureRangeText, temperatureText, windText } from './quantities'
 import { clockText, weekdayText } from './times'
 
 export interface WhyItem {
@@ -21,7 +21,7 @@ const WRITERS: Record<string, WhyWriter> = {
   }),
   why_air: (v, w) => ({
     label: airLabel(num(v, 'highC'), num(v, 'windAtRinkMps')),
-    detail: `${rangeText(v, w)}, ${windText(num(v, 'windAtRinkMps'), w)} in your yard.`,
+    detail: `${temperatureRangeText(num(v, 'highC'), num(v, 'lowC'), w)}, ${windText(num(v, 'windAtRinkMps'), w)} in your yard.`,
     figure: fluxText(num(v, 'sensibleWm2'), w),
   }),
   why_vapour: (v, w) => ({ ...vapourWords(num(v, 'latentWm2')), figure: fluxText(num(v, 'latentWm2'), w) }),
@@ -89,14 +89,6 @@ function airLabel(highC: number, windMps: number): string {
   const air = highC > 0 ? 'Mild air' : highC > -4 ? 'Cool air' : 'Cold air'
   const wind = windMps < 0.7 ? 'hardly any wind' : windMps < 3 ? 'light wind' : 'wind'
   return `${air}, ${wind}.`
-}
-
-function rangeText(v: Reason['values'], w: WordOptions): string {
-  const high = temperatureText(num(v, 'highC'), w)
-  const low = temperatureText(num(v, 'lowC'), w)
-  if (high === low) return high
-  const highNumber = high.replace(/ °[CF]$/, '')
-  return `${highNumber} to ${low}`
 }
 
 function vapourWords(latentWm2: number): Pick<WhyItem, 'label' | 'detail'> {

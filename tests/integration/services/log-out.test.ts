@@ -64,6 +64,12 @@ test('a season’s sums, hose hours and lists', async () => {
   await expect(getSeason(cast.stranger.at(NOW), cast.rinkId)).rejects.toThrow(NotFoundError)
 })
 
+test('of several holes of a day the thinnest is drawn', async () => {
+  for (const thickness of ['9.4', '8.1', '9']) await write(cast.keeper, { kind: 'reading', thickness })
+  const { thickness } = (await log()).charts
+  expect(thickness.map(({ readingMm }) => readingMm)).toEqual([81])
+})
+
 test('CSV: a mark for UTF-8, units in the headings, lines as RFC 4180 ends them, and no formula runs', async () => {
   await write(cast.crew, { note: '=1+1, "quoted"\nsecond line', onDate: '2027-01-11', atTime: '20:00' })
   await write(cast.keeper, { kind: 'note', note: '-2 on the porch, à côté' })

@@ -1,9 +1,9 @@
 // The ten days to come: a chart that is fetched once it is nearly in view, and the same numbers as a table.
 'use client'
 import { ChartFrame } from '@/components/charts/chart-frame'
-import { dayText, readerOf, shortDayText } from '@/components/rinks/reader'
+import { readerOf, shortDayText } from '@/components/rinks/reader'
 import type { WordOptions } from '@/lib/words/options'
-import { layerText, rainText, snowText, temperatureText } from '@/lib/words/quantities'
+import { layerText, rainText, snowText, temperatureRangeText } from '@/lib/words/quantities'
 import { DataTable } from '@/components/ui/data-table'
 import { Disclosure } from '@/components/ui/disclosure'
 import type { DayAhead, TonightView } from '@/lib/schemas/tonight-view'
@@ -13,8 +13,7 @@ const loadChart = () => import('@/components/charts/days-ahead-chart')
 
 const COLUMNS = [
   { head: 'Day' },
-  { head: 'Low', isFigure: true },
-  { head: 'High', isFigure: true },
+  { head: 'Air', isFigure: true },
   { head: 'Could freeze', isFigure: true },
   { head: 'Hours to flood', isFigure: true },
   { head: 'Snow', isFigure: true },
@@ -68,9 +67,8 @@ function cellsOf(day: DayAhead, reader: WordOptions): string[] {
   const text = (value: number | null, write: (value: number, reader: WordOptions) => string) =>
     value === null ? 'unknown' : write(value, reader)
   return [
-    dayText(day.date),
-    text(day.lowC, temperatureText),
-    text(day.highC, temperatureText),
+    shortDayText(day.date),
+    day.lowC === null || day.highC === null ? 'unknown' : temperatureRangeText(day.lowC, day.highC, reader),
     text(day.freezableMm, layerText),
     String(day.floodHours),
     text(day.snowCm, snowText),

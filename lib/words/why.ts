@@ -3,7 +3,16 @@ import type { Reason } from '@/lib/advice/types'
 import { num, text } from './clause'
 import { coolingText, holdingText } from './flood-clauses'
 import type { WordOptions } from './options'
-import { fluxText, iceText, rainText, rateText, snowText, temperatureRangeText, temperatureText, windText } from './quantities'
+import {
+  fluxText,
+  iceText,
+  rainText,
+  rateText,
+  snowText,
+  temperatureRangeText,
+  temperatureText,
+  windText,
+} from './quantities'
 import { clockText, weekdayText } from './times'
 
 export interface WhyItem {

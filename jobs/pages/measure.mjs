@@ -1,11 +1,14 @@
 // `npm run measure`: Lighthouse (mobile) on the pages people wait for, how much script each loads first, and how soon a tap
 // shows a changed plan.
-import lighthouse from 'lighthouse'
+import lighthouse, { defaultConfig } from 'lighthouse'
 import { address, findLoggedRink, listRinks, openBrowser, signIn } from './browser.mjs'
 
 const PORT = 9333
 const TAPS = ['Later', 'Thicker', 'Later', 'Thinner', 'Earlier', 'Earlier', 'Later', 'Thicker', 'Thinner']
 const CATEGORIES = ['performance', 'accessibility', 'best-practices']
+const MOBILE = defaultConfig.settings.throttling
+/** Middle of its bracket in Lighthouse's docs/throttling.md, which asks to calibrate the slow-down on slower machines. */
+const HIGH_END_DESKTOP_INDEX = 1750
 /** A page without a single client component: what every route of this build loads. */
 const EMPTY = '/help/cautions'
 
@@ -73,16 +76,32 @@ const state = await context.storageState()
 const cookie = state.cookies.map(({ name, value }) => `${name}=${value}`).join('; ')
 
 const pages = { Tonight: tonight, Week: `${tonight}/week`, Front: `${address}/` }
-for (const [name, url] of Object.entries(pages)) {
+for (const [name, url] of Object.entries({ ...pages, Empty: address + EMPTY })) {
   const extraHeaders = name === 'Front' ? {} : { Cookie: cookie }
-  const { lhr } = await lighthouse(url, { port: PORT, onlyCategories: CATEGORIES, extraHeaders, logLevel: 'error' })
+  const look = async (cpuSlowdownMultiplier) => {
+    const flags = { port: PORT, onlyCategories: CATEGORIES, extraHeaders, logLevel: 'error' }
+    return (await lighthouse(url, { ...flags, throttling: { ...MOBILE, cpuSlowdownMultiplier } })).lhr
+  }
+  const usual = await look(MOBILE.cpuSlowdownMultiplier)
+  report(name, usual)
+  report('', await look(sameSlowness(usual.environment.benchmarkIndex)))
+}
+
+function report(name, lhr) {
   const scores = CATEGORIES.map((one) => `${one} ${Math.round(lhr.categories[one].score * 100)}`)
+  const { cpuSlowdownMultiplier } = lhr.configSettings.throttling
+  const { benchmarkIndex } = lhr.environment
+  console.log(`${name.padEnd(8)} ${scores.join(', ')} (index ${benchmarkIndex} slowed ${cpuSlowdownMultiplier} times)`)
   const missed = Object.values(lhr.audits).filter(
     ({ id, score }) => score !== null && score < 0.9 && CATEGORIES.some((one) => isWeighed(lhr, one, id)),
   )
-  // Lighthouse slows the processor four times; its own index says how fast that processor is: about 1000 and more on a desk.
-  console.log(`${name.padEnd(8)} ${scores.join(', ')} (benchmark index ${lhr.environment.benchmarkIndex})`)
   for (const { id, displayValue } of missed) console.log(`         below 0.9: ${id} ${displayValue ?? ''}`)
+}
+
+/** Lighthouse's fixed slow-down makes a mid-tier phone of a high-end desktop; this one makes the same phone of this machine. */
+function sameSlowness(benchmarkIndex) {
+  const slowness = (MOBILE.cpuSlowdownMultiplier * benchmarkIndex) / HIGH_END_DESKTOP_INDEX
+  return Number(Math.max(1, slowness).toFixed(1))
 }
 
 function isWeighed(lhr, category, id) {

@@ -15,17 +15,33 @@ export function passesOf(
   planned: readonly PlannedPass[],
   judgedAt: Date,
 ): Plan {
-  const done = poured.map((flood, index) => pouredView(rink, flood, index))
-  const isPoured = ({ number }: TonightPass) => done.some((pass) => pass.number === number)
-  const open = own ? own.passes : advisedPasses(rink, poured, planned, judgedAt)
+  const numbers = numbersOf(poured)
+  const done = poured.map((flood, index) => pouredView(rink, flood, numbers[index] as number))
+  const isPoured = ({ number }: TonightPass) => numbers.includes(number)
+  // A plan made before a pass was poured still holds it.
+  const known = done.filter(({ startsAt }) => Date.parse(startsAt) <= judgedAt.getTime())
+  const last = Math.max(0, ...known.map(({ number }) => number))
+  const open = own ? own.passes : advisedPasses(rink, planned, last)
   return { passes: [...done, ...open.filter((pass) => !isPoured(pass))], ownPlan: own && { by: own.by } }
 }
 
-function pouredView({ water }: RinkForJudging, flood: PouredPass, index: number): TonightPass {
+/** A check-off keeps the number of its pass; a flood that was only logged takes the first one free. */
+function numbersOf(poured: readonly PouredPass[]): number[] {
+  const taken = new Set(poured.map(({ passNumber }) => passNumber))
+  return poured.map(({ passNumber }) => {
+    if (passNumber !== null) return passNumber
+    let free = 1
+    while (taken.has(free)) free += 1
+    taken.add(free)
+    return free
+  })
+}
+
+function pouredView({ water }: RinkForJudging, flood: PouredPass, number: number): TonightPass {
   const at = flood.pouredAt.toISOString()
   const saidSetByAt = flood.saidSetByAt?.toISOString() ?? null
   return {
-    number: flood.passNumber ?? index + 1,
+    number,
     startsAt: at,
     setBy: saidSetByAt ?? at,
     layerMm: flood.layerMm,
@@ -46,18 +62,12 @@ function pouredView({ water }: RinkForJudging, flood: PouredPass, index: number)
   }
 }
 
-/** Numbered on from what was poured. A plan made before a pass was poured still holds it. */
+/** Numbered on from the last that was poured. */
 function advisedPasses(
-  { water }: RinkForJudging,
-  poured: readonly PouredPass[],
+  { water: { temperatureC, flowLPerMin } }: RinkForJudging,
   planned: readonly PlannedPass[],
-  judgedAt: Date,
+  last: number,
 ): TonightPass[] {
-  const known = poured.flatMap(({ passNumber, pouredAt }, index) =>
-    pouredAt <= judgedAt ? [passNumber ?? index + 1] : [],
-  )
-  const last = Math.max(0, ...known)
-  const { temperatureC, flowLPerMin } = water
   return planned.map((pass, index) => ({
     ...pass,
     number: last + index + 1,

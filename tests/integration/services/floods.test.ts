@@ -3,9 +3,11 @@ import { beforeEach, describe, expect, test } from 'vitest'
 import { ForbiddenError, InvalidInputError, NotFoundError } from '@/lib/errors'
 import { DAY_MILLIS } from '@/lib/physics/constants'
 import { checkOffPass, undoPass } from '@/lib/services/floods'
+import { writeEntry } from '@/lib/services/log'
 import { getTonight } from '@/lib/services/tonight'
 import type { Actor } from '@/tests/support/cast'
 import { givenCast, givenDatabase } from '@/tests/support/given-cast'
+import { typedEntry } from '@/tests/support/log-form'
 import { judgeForecast, judgeNow } from '@/tests/support/night-at-the-rink'
 
 const NOW = new Date('2027-01-12T23:10:00Z')
@@ -34,6 +36,18 @@ test('checking off twice, or from two phones at once, logs it once', async () =>
   await Promise.all([checkOffPass(cast.crew.at(NOW), pass()), checkOffPass(cast.keeper.at(NOW), pass())])
   await checkOffPass(cast.crew.at(NOW), pass())
   expect(await floods()).toHaveLength(1)
+})
+
+test('a flood written down for an hour earlier takes a number that no pass has', async () => {
+  await checkOffPass(cast.crew.at(NOW), pass())
+  await writeEntry(cast.keeper.at(NOW), typedEntry(cast.rinkId, { minutesAgo: '60' }))
+  await writeEntry(cast.keeper.at(NOW), typedEntry(cast.rinkId, { minutesAgo: '30' }))
+  const poured = (await tonight(cast.keeper)).outlook?.passes.filter((one) => one.poured !== null) ?? []
+  expect(poured.map(({ number, poured: by }) => [number, by?.by])).toEqual([
+    [2, 'Keeper'],
+    [3, 'Keeper'],
+    [1, 'Crew'],
+  ])
 })
 
 test('the night is judged anew with the poured layer in the sheet', async () => {

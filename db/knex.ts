@@ -19,6 +19,8 @@ export function knexConfig(connectionString: string): Knex.Config {
     client: 'pg',
     connection: { connectionString, application_name: 'nightsheet' },
     pool: { min: 0, max: 10 },
+    // A failure is logged and shown to the admin: it names the query, never the addresses and keys that went into it.
+    compileSqlOnError: false,
     migrations: { directory: path.join(folder, 'migrations'), extension: 'ts' },
   }
 }

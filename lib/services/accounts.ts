@@ -4,7 +4,6 @@ import { consumeAccountLink, findGoodAccountLink, voidAccountLinks, type LinkPur
 import { findInvitationTo } from '@/db/queries/invitations'
 import { deleteSessionsOf } from '@/db/queries/sessions'
 import {
-  changeEmail,
   confirmEmail,
   findAccount,
   findEmail,
@@ -18,7 +17,7 @@ import { hashPassword, verifyPassword } from '@/lib/auth/passwords'
 import type { OpenContext } from '@/lib/context'
 import { InvalidInputError } from '@/lib/errors'
 import type { MailRequestInput, NewPasswordByLinkInput, PasswordSignInInput, SignUpInput } from '@/lib/schemas/accounts'
-import { promiseAddressChangedMail, promiseAlreadyRegistered, promiseLink } from './account-mail'
+import { promiseAlreadyRegistered, promiseLink } from './account-mail'
 import { spend, spendByVisitor } from './rate-limits'
 
 export interface SignedIn {
@@ -29,6 +28,9 @@ export interface SignedIn {
   /** Where an invitation to their address waits, for somebody without a rink. */
   invitationPath?: string
 }
+
+/** Links that sign in whoever presses them. */
+type WayInPurpose = Exclude<LinkPurpose, 'change-email'>
 
 /** One sentence for a wrong password, an unknown address and an unconfirmed one. */
 export const SIGN_IN_REFUSED =
@@ -60,7 +62,7 @@ async function remindKnownUser(trx: Db, email: string, now: Date): Promise<void>
 export async function requestLink(
   context: OpenContext,
   { email }: MailRequestInput,
-  purpose: Exclude<LinkPurpose, 'verify'>,
+  purpose: 'sign-in' | 'reset',
 ): Promise<void> {
   await spendByVisitor(context, 'mailByVisitor')
   await spend(context, 'mailByEmail', email)
@@ -90,12 +92,12 @@ async function resendConfirmation(context: OpenContext, userId: string, email: s
 /** Whose account a link opens, without using it up; undefined when it no longer works. */
 export async function findLinkOwner(
   { db, now, secret }: OpenContext,
-  purpose: LinkPurpose,
+  purpose: WayInPurpose,
   key: string,
 ): Promise<{ email: string } | undefined> {
   const link = openLinkKey(secret, purpose, key)
   const good = link && (await findGoodAccountLink(db, link, now))
-  const email = good && (good.newEmail ?? (await findEmail(db, good.userId)))
+  const email = good && (await findEmail(db, good.userId))
   return email ? { email } : undefined
 }
 
@@ -139,33 +141,18 @@ export async function resetPassword(
   })
 }
 
-/**
- * Makes the address that the link was mailed to the account's, and tells the one before.
- *
- * @throws InvalidInputError when the link no longer works.
- */
-export function takeNewAddress(context: OpenContext, key: string): Promise<SignedIn> {
-  return withLink(context, 'change-email', key, async (trx, userId, newEmail) => {
-    const oldEmail = await findEmail(trx, userId)
-    const isChanged = newEmail !== null && (await changeEmail(trx, userId, newEmail, context.now))
-    if (!isChanged) throw new InvalidInputError(LINK_REFUSED)
-    if (oldEmail) await promiseAddressChangedMail(trx, userId, oldEmail, context.now)
-    await voidAccountLinks(trx, userId, context.now)
-  })
-}
-
 async function withLink(
   { db, now, secret }: OpenContext,
-  purpose: LinkPurpose,
+  purpose: WayInPurpose,
   key: string,
-  work: (trx: Db, userId: string, newEmail: string | null) => Promise<void>,
+  work: (trx: Db, userId: string) => Promise<void>,
 ): Promise<SignedIn> {
   const link = openLinkKey(secret, purpose, key)
   if (!link) throw new InvalidInputError(LINK_REFUSED)
   return db.transaction(async (trx) => {
     const used = await consumeAccountLink(trx, link, now)
     if (!used) throw new InvalidInputError(LINK_REFUSED)
-    await work(trx, used.userId, used.newEmail)
+    await work(trx, used.userId)
     return signedIn({ db: trx, now, secret }, used.userId)
   })
 }

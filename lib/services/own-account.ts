@@ -1,14 +1,13 @@
-// A signed-in person's own account: how they are called, how they read figures, their address and their password.
+// A signed-in person's own account: how they are called, how they read figures, and their password.
 import { voidAccountLinks } from '@/db/queries/account-links'
 import { deleteSessionsOf } from '@/db/queries/sessions'
-import { findAccount, findPasswordHash, findUserForSignIn, setPasswordHash, updateAccount } from '@/db/queries/users'
+import { findAccount, findPasswordHash, setPasswordHash, updateAccount } from '@/db/queries/users'
 import { hashPassword, verifyPassword } from '@/lib/auth/passwords'
 import type { ServiceContext } from '@/lib/context'
 import { InvalidInputError, NotFoundError } from '@/lib/errors'
-import type { AccountInput, EmailChangeInput, PasswordChangeInput } from '@/lib/schemas/accounts'
+import type { AccountInput, PasswordChangeInput } from '@/lib/schemas/accounts'
 import type { ThemeChoice } from '@/lib/schemas/themes'
 import type { Units } from '@/lib/units'
-import { promiseAlreadyRegistered, promiseLink } from './account-mail'
 import { spend } from './rate-limits'
 
 export interface AccountView {
@@ -52,22 +51,4 @@ export async function requirePassword(context: ServiceContext, typed: string): P
   if (present && !(await verifyPassword(present, typed))) {
     throw new InvalidInputError('Nothing was changed.', { currentPassword: 'This is not your present password.' })
   }
-}
-
-/**
- * Mails a link to the new address; until it is pressed the old one stays. An address that has an account gets a mail
- * that says so, and the page answers alike.
- */
-export async function askForEmailChange(context: ServiceContext, input: EmailChangeInput): Promise<void> {
-  const { db, now, viewer } = context
-  await requirePassword(context, input.currentPassword)
-  await spend(context, 'mailByEmail', input.email)
-  const known = await findUserForSignIn(db, input.email)
-  if (known?.id === viewer.userId) {
-    throw new InvalidInputError('Nothing was changed.', { email: 'This is your address already.' })
-  }
-  await db.transaction(async (trx) => {
-    if (known) await promiseAlreadyRegistered(trx, known.id, now)
-    else await promiseLink(trx, viewer.userId, 'change-email', now, input.email)
-  })
 }

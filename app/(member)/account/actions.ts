@@ -15,7 +15,8 @@ import {
   passwordChangeSchema,
 } from '@/lib/schemas/accounts'
 import { askForDeletion, keepAccount } from '@/lib/services/account-deletion'
-import { askForEmailChange, changePassword, saveAccount } from '@/lib/services/own-account'
+import { askForEmailChange } from '@/lib/services/new-address'
+import { changePassword, saveAccount } from '@/lib/services/own-account'
 import { endOwnSession } from '@/lib/services/own-sessions'
 
 export const saveAccountAction = serviceAction(accountSchema, saveAccount, 'Saved.')
@@ -30,7 +31,7 @@ export const changePasswordAction = formAction(passwordChangeSchema, async (inpu
 
 export const changeEmailAction = formAction(emailChangeSchema, async (input) => {
   await askForEmailChange(await requestContext(), input)
-  return `A mail is on its way to ${input.email}. Press the button in it within a day.`
+  return `A mail is on its way to ${input.email}. Open it within a day, in a browser where you are signed in.`
 })
 
 export const endSessionAction = serviceAction(endSessionSchema, (context, { handle }) => endOwnSession(context, handle))

@@ -1,4 +1,4 @@
-// A new address, sessions one by one, tests of channels, everything to take along, and the end of an account.
+// An unasked confirmation, sessions one by one, tests of channels, everything to take along, and the end of an account.
 import { beforeEach, describe, expect, test } from 'vitest'
 import { findMessageToDeliver } from '@/db/queries/deliveries'
 import { pruneExpired } from '@/db/queries/prune'
@@ -8,13 +8,11 @@ import type { ServiceContext } from '@/lib/context'
 import { DAY_MILLIS } from '@/lib/physics/constants'
 import { askForDeletion, keepAccount, listRinksThatGo } from '@/lib/services/account-deletion'
 import { exportAccount } from '@/lib/services/account-export'
-import { confirmAddress, signInWithPassword, signUp, takeNewAddress } from '@/lib/services/accounts'
-import { askForEmailChange, getAccount } from '@/lib/services/own-account'
+import { confirmAddress, signInWithPassword, signUp } from '@/lib/services/accounts'
+import { getAccount } from '@/lib/services/own-account'
 import { endOwnSession, listOwnSessions } from '@/lib/services/own-sessions'
-import { renderEmail } from '@/lib/services/render-message'
 import { getTest, sendTest } from '@/lib/services/test-messages'
 import { givenCast, givenDatabase } from '@/tests/support/given-cast'
-import { SETTINGS } from '@/tests/support/night-at-the-rink'
 import { mailsTo, newEmail, newestKey, newMember, NOW, PASSWORD, visitor } from '@/tests/support/visitor'
 
 const database = givenDatabase()
@@ -29,68 +27,6 @@ const newestMessage = async (userId: string, kind: string) => {
   const row = await database.db('messages').where({ user_id: userId, kind }).orderBy('created_at', 'desc').first('id')
   return row && findMessageToDeliver(database.db, row.id)
 }
-
-describe('a new address', () => {
-  test('counts once the mail that went there was answered, and not before', async () => {
-    const email = newEmail()
-    await askForEmailChange(as(anna.userId), { email, currentPassword: PASSWORD })
-    expect(await newestMessage(anna.userId, 'change-address')).toMatchObject({ email })
-    expect(await getAccount(as(anna.userId))).toMatchObject({ email: anna.email })
-    const key = await newestKey(database.db, anna.email, 'change-email')
-    expect(await takeNewAddress(visitor(database.db), key)).toMatchObject({ userId: anna.userId })
-    expect(await getAccount(as(anna.userId))).toMatchObject({ email })
-    expect(await signInWithPassword(visitor(database.db), { email, password: PASSWORD })).toMatchObject({
-      userId: anna.userId,
-    })
-    await expect(takeNewAddress(visitor(database.db), key)).rejects.toMatchObject({ code: 'invalid_input' })
-  })
-
-  test('is told to the address that was left, which does not learn the new one', async () => {
-    const email = newEmail()
-    await askForEmailChange(as(anna.userId), { email, currentPassword: PASSWORD })
-    await takeNewAddress(visitor(database.db), await newestKey(database.db, anna.email, 'change-email'))
-    const message = await newestMessage(anna.userId, 'address-changed')
-    expect(message).toMatchObject({ email: anna.email })
-    const mail = renderEmail({ ...message!, attempts: 0 }, SETTINGS)
-    expect(mail).toMatchObject({ to: anna.email, subject: expect.stringContaining('new e-mail address') })
-    expect(mail.text + mail.html).not.toContain(email)
-  })
-
-  test('goes to one of two who take it at once', async () => {
-    const email = newEmail()
-    const other = await newMember(database.db)
-    const keys = []
-    for (const person of [anna, other]) {
-      await askForEmailChange(as(person.userId), { email, currentPassword: PASSWORD })
-      keys.push(await newestKey(database.db, person.email, 'change-email'))
-    }
-    const taken = await Promise.allSettled(keys.map((key) => takeNewAddress(visitor(database.db), key)))
-    expect(taken.map(({ status }) => status).sort()).toEqual(['fulfilled', 'rejected'])
-    const refused = taken.find((one) => one.status === 'rejected')
-    expect(refused?.reason).toMatchObject({ code: 'invalid_input' })
-  })
-
-  test('needs the password', async () => {
-    const asked = askForEmailChange(as(anna.userId), { email: newEmail(), currentPassword: 'a guess' })
-    await expect(asked).rejects.toMatchObject({ fields: { currentPassword: expect.any(String) } })
-  })
-
-  test('that belongs to somebody is not taken, and its owner is told', async () => {
-    const other = await newMember(database.db)
-    await askForEmailChange(as(anna.userId), { email: other.email, currentPassword: PASSWORD })
-    expect((await mailsTo(database.db, other.email)).map(({ kind }) => kind)).toContain('address-already-registered')
-    expect(await newestMessage(anna.userId, 'change-address')).toBeUndefined()
-  })
-
-  test('that somebody took meanwhile stays theirs', async () => {
-    const email = newEmail()
-    await askForEmailChange(as(anna.userId), { email, currentPassword: PASSWORD })
-    const key = await newestKey(database.db, anna.email, 'change-email')
-    await newMember(database.db, email)
-    await expect(takeNewAddress(visitor(database.db), key)).rejects.toMatchObject({ code: 'invalid_input' })
-    expect(await getAccount(as(anna.userId))).toMatchObject({ email: anna.email })
-  })
-})
 
 describe('an unasked confirmation', () => {
   const signedUp = async () => {

@@ -17,6 +17,7 @@ export interface MessageToDeliver {
   isOvertaken: boolean
   /** The person has muted the night, switched the channel off or left the rink since; an invitation stands no more. */
   isUnwanted: boolean
+  /** Tries since it was promised, the last time that it was. */
   attempts: number
 }
 
@@ -75,9 +76,17 @@ export async function findMessageToDeliver(db: Db, messageId: string): Promise<M
   if (!message) return undefined
   const counted = await db('delivery_attempts')
     .where({ message_id: messageId })
+    .where('attempted_at', '>=', message.createdAt)
     .countDistinct({ tries: 'attempted_at' })
     .first()
   return { ...message, attempts: Number(counted?.tries ?? 0) }
+}
+
+/** Whether a mail server, or one device at least, took this message. */
+export async function isTaken(db: Db, messageId: string): Promise<boolean> {
+  return (
+    (await db('delivery_attempts').where({ message_id: messageId, outcome: 'delivered' }).first('id')) !== undefined
+  )
 }
 
 /** Devices that took this message already: another try leaves them alone. */

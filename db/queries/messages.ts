@@ -24,7 +24,7 @@ export type MessageKind =
 export type MessageState = 'promised' | 'delivered' | 'expired' | 'dead'
 
 export interface NewMessage {
-  /** Why this message exists once: the same key again changes nothing. */
+  /** Why this message exists once: the same key again changes nothing, unless the message was given up. */
   dedupeKey: string
   userId: string
   rinkId?: string
@@ -39,29 +39,36 @@ export interface NewMessage {
 }
 
 /**
- * Promises a message and its delivery together: called inside the transaction of the decision.
- * @returns true when this call made the promise, false when it stood already.
+ * Promises a message and its delivery together: called inside the transaction of the decision. One that was given up is
+ * promised anew, with what is said now: what never arrived was not told.
+ *
+ * @returns true when this call made the promise, false when it stands already or was kept.
  */
 export async function promiseMessage(trx: Db, message: NewMessage, now: Date): Promise<boolean> {
+  const promised = {
+    dedupe_key: message.dedupeKey,
+    user_id: message.userId,
+    rink_id: message.rinkId ?? null,
+    night_date: message.nightDate ?? null,
+    channel: message.channel,
+    kind: message.kind,
+    content: JSON.stringify(message.content),
+    window_id: message.windowId ?? null,
+    send_at: message.sendAt,
+    expires_at: message.expiresAt,
+    state: 'promised' as const,
+    settled_at: null,
+    created_at: now,
+  }
   const [row] = await trx('messages')
-    .insert({
-      dedupe_key: message.dedupeKey,
-      user_id: message.userId,
-      rink_id: message.rinkId ?? null,
-      night_date: message.nightDate ?? null,
-      channel: message.channel,
-      kind: message.kind,
-      content: JSON.stringify(message.content),
-      window_id: message.windowId ?? null,
-      send_at: message.sendAt,
-      expires_at: message.expiresAt,
-      created_at: now,
-    })
+    .insert(promised)
     .onConflict('dedupe_key')
-    .ignore()
+    .merge(promised)
+    // Of two decisions at once the second waits for the first here, and then finds a promise that stands.
+    .whereIn('messages.state', ['dead', 'expired'])
     .returning('id')
   if (!row) return false
-  await enqueueDelivery(trx, row.id as string, message.sendAt)
+  await enqueueDelivery(trx, row.id, message.sendAt)
   return true
 }
 

@@ -2,6 +2,7 @@
 import {
   findMessageToDeliver,
   insertAttempt,
+  isTaken,
   listDeliveredDevices,
   settleMessage,
   type MessageToDeliver,
@@ -41,35 +42,36 @@ export async function deliverMessage(delivering: Delivering, messageId: string):
   if (!message) return
   // An older message that was held up must not have the last word, nor one that the person has said no to since.
   if (readClock() >= message.expiresAt || message.isOvertaken || message.isUnwanted) {
-    await settleMessage(db, message.id, 'expired', readClock())
-    logEvent('message.expired', { messageId: message.id, kind: message.kind })
-    return
+    return end(delivering, message, (await isTaken(db, message.id)) ? 'delivered' : 'expired')
   }
   const failures =
     message.channel === 'email' ? await sendEmail(delivering, message) : await sendPushes(delivering, message)
   await settle(delivering, message, failures)
 }
 
-async function settle({ db, readClock }: Delivering, message: MessageToDeliver, failures: Failure[]): Promise<void> {
-  const now = readClock()
+async function settle(delivering: Delivering, message: MessageToDeliver, failures: Failure[]): Promise<void> {
+  const { db, readClock } = delivering
   const temporary = failures.filter((failure) => !failure.isPermanent)
-  if (temporary.length === 0) {
-    const state = failures.length === 0 ? 'delivered' : 'dead'
-    if (await settleMessage(db, message.id, state, now))
-      logEvent(`message.${state}`, { messageId: message.id, kind: message.kind })
-    return
-  }
+  if (temporary.length === 0) return end(delivering, message, failures.length === 0 ? 'delivered' : 'dead')
   const retryAfterSeconds = Math.max(...temporary.map((failure) => failure.retryAfterSeconds ?? 0))
   const again = nextAttemptAt({
     attempt: message.attempts + 1,
-    now,
+    now: readClock(),
     expiresAt: message.expiresAt,
     retryAfterSeconds,
     key: message.id,
   })
-  if (again) await enqueueDelivery(db, message.id, again)
-  else if (await settleMessage(db, message.id, 'dead', now))
-    logEvent('message.dead', { messageId: message.id, kind: message.kind })
+  if (again) return enqueueDelivery(db, message.id, again)
+  // One device that took it is enough: given up, it would count as not told, and be told there a second time.
+  await end(delivering, message, (await isTaken(db, message.id)) ? 'delivered' : 'dead')
+}
+
+async function end(
+  { db, readClock }: Delivering,
+  { id: messageId, kind }: MessageToDeliver,
+  state: 'delivered' | 'expired' | 'dead',
+): Promise<void> {
+  if (await settleMessage(db, messageId, state, readClock())) logEvent(`message.${state}`, { messageId, kind })
 }
 
 /** Sends one thing and keeps the attempt; undefined when it went. */

@@ -1,48 +1,18 @@
 // Delivering: over real SMTP and real encrypted push; retries, expiry, and a crash between sending and settling.
-import { randomUUID } from 'node:crypto'
-import { tmpdir } from 'node:os'
-import path from 'node:path'
-import { afterAll, beforeAll, beforeEach, describe, expect, test } from 'vitest'
-import webPush from 'web-push'
+import { describe, expect, test } from 'vitest'
 import { promiseMessage, type MessageKind } from '@/db/queries/messages'
 import { putPushSubscription } from '@/db/queries/push-subscriptions'
-import { startMailFake, type MailFake } from '@/fakes/mail/server'
-import { startPushFake, type PushFake } from '@/fakes/push/server'
-import { createSmtpTransport } from '@/lib/messaging/smtp'
-import { createWebPushTransport } from '@/lib/messaging/web-push'
-import { deliverMessage, type Delivering } from '@/lib/services/deliveries'
+import { HOUR_MILLIS, MINUTE_MILLIS } from '@/lib/physics/constants'
+import { deliverMessage } from '@/lib/services/deliveries'
 import { givenCast, givenDatabase } from '@/tests/support/given-cast'
-import { SETTINGS } from '@/tests/support/night-at-the-rink'
+import { caughtMails, caughtPushes, givenDelivering, refuseNext, subscribe } from '@/tests/support/given-delivering'
 
 const NOW = new Date('2027-01-12T21:10:00Z')
 const LATER = new Date('2027-01-13T04:00:00Z')
 
 const database = givenDatabase()
 const cast = givenCast(database, NOW)
-let mail: MailFake
-let push: PushFake
-let delivering: Delivering
-
-beforeAll(async () => {
-  const caFile = path.join(tmpdir(), `nightsheet-${randomUUID()}.pem`)
-  ;[mail, push] = await Promise.all([
-    startMailFake({ smtpPort: 0, pagePort: 0 }),
-    startPushFake({ port: 0, pagePort: 0, caFile }),
-  ])
-  const vapid = { ...webPush.generateVAPIDKeys(), subject: 'mailto:keeper@nightsheet.example' }
-  delivering = {
-    db: database.db,
-    readClock: () => NOW,
-    email: createSmtpTransport({ url: mail.smtpUrl, from: 'Nightsheet <night@nightsheet.example>' }),
-    push: createWebPushTransport({ vapid, extraOrigins: [push.origin], caFile }),
-    settings: SETTINGS,
-  }
-})
-afterAll(() => Promise.all([mail.close(), push.close()]))
-beforeEach(async () => {
-  await fetch(`${mail.url}/api/messages`, { method: 'DELETE' })
-  await fetch(`${push.url}/api/messages`, { method: 'DELETE' })
-})
+const delivering = givenDelivering(database, NOW)
 
 const WORDS = {
   rinkName: 'Birch Lane',
@@ -54,7 +24,12 @@ const WORDS = {
   why: [],
 }
 
-async function promise(channel: 'email' | 'push', kind: MessageKind = 'flood-tonight', now = NOW): Promise<string> {
+async function promise(
+  channel: 'email' | 'push',
+  kind: MessageKind = 'flood-tonight',
+  now = NOW,
+  expiresAt = LATER,
+): Promise<string> {
   const dedupeKey = `${kind}:${cast.rinkId}:2027-01-12:${channel}:${cast.keeper.userId}`
   await promiseMessage(
     database.db,
@@ -67,7 +42,7 @@ async function promise(channel: 'email' | 'push', kind: MessageKind = 'flood-ton
       kind,
       content: { rinkId: cast.rinkId, nightDate: '2027-01-12', words: WORDS },
       sendAt: NOW,
-      expiresAt: LATER,
+      expiresAt,
     },
     now,
   )
@@ -78,30 +53,12 @@ async function promise(channel: 'email' | 'push', kind: MessageKind = 'flood-ton
 const stateOf = async (id: string) => (await database.db('messages').where({ id }).first('state'))?.state
 
 async function addDevice(): Promise<{ id: string; deviceId: string }> {
-  const response = await fetch(`${push.url}/subscriptions`, { method: 'POST', body: '{}' })
-  const { id, endpoint, keys } = (await response.json()) as {
-    id: string
-    endpoint: string
-    keys: { p256dh: string; auth: string }
-  }
+  const { id, endpoint, keys } = await subscribe(delivering)
   const { id: deviceId } = await putPushSubscription(database.db, cast.keeper.userId, { endpoint, ...keys }, NOW)
   return { id, deviceId }
 }
 
-async function caughtMail(): Promise<{ id: string; to: string[]; subject: string }[]> {
-  return (await fetch(`${mail.url}/api/messages?to=${encodeURIComponent(cast.keeper.email)}`)).json()
-}
-
-async function caughtPushes(id: string): Promise<{ text: string }[]> {
-  return (await fetch(`${push.url}/api/messages?id=${id}`)).json()
-}
-
-const fault = (url: string, kind: string, times: number) =>
-  fetch(`${url}/__fake/fault`, {
-    method: 'POST',
-    headers: { 'content-type': 'application/json' },
-    body: JSON.stringify({ kind, times }),
-  })
+const caughtMail = () => caughtMails(delivering, cast.keeper.email)
 
 describe('mail', () => {
   test('arrives with one-click unsubscribe, and once however often the job runs', async () => {
@@ -110,7 +67,7 @@ describe('mail', () => {
     await deliverMessage(delivering, id)
     const caught = await caughtMail()
     expect(caught).toHaveLength(1)
-    const raw = await (await fetch(`${mail.url}/api/messages/${caught[0]?.id}`)).text()
+    const raw = await (await fetch(`${delivering.mail.url}/api/messages/${caught[0]?.id}`)).text()
     expect(raw).toContain('List-Unsubscribe=One-Click')
     expect(raw).toContain(`${id}@rink.example`)
     expect(await stateOf(id)).toBe('delivered')
@@ -118,7 +75,7 @@ describe('mail', () => {
 
   test('is tried again after a temporary refusal', async () => {
     const id = await promise('email')
-    await fault(mail.url, '451', 1)
+    await refuseNext(delivering.mail, '451')
     await deliverMessage(delivering, id)
     expect(await stateOf(id)).toBe('promised')
     const { rows } = await database.db.raw('select run_at > ? as later from graphile_worker.jobs where key = ?', [
@@ -132,7 +89,7 @@ describe('mail', () => {
 
   test('is given up after a refusal for good', async () => {
     const id = await promise('email')
-    await fault(mail.url, '550', 1)
+    await refuseNext(delivering.mail, '550')
     await deliverMessage(delivering, id)
     expect(await stateOf(id)).toBe('dead')
     expect(await database.db('delivery_attempts').where({ message_id: id }).select('outcome')).toEqual([
@@ -140,6 +97,23 @@ describe('mail', () => {
     ])
     const person = await database.db('users').where({ id: cast.keeper.userId }).first('email_refused_at')
     expect(person?.email_refused_at).toEqual(NOW)
+  })
+
+  test('counts its tries anew when it is promised again after it was given up', async () => {
+    const id = await promise('email')
+    await refuseNext(delivering.mail, '451', 6)
+    for (const minutes of [0, 1, 2, 4, 8])
+      await deliverMessage({ ...delivering, readClock: () => new Date(NOW.getTime() + minutes * MINUTE_MILLIS) }, id)
+    const beforeLater = new Date(LATER.getTime() - MINUTE_MILLIS)
+    await deliverMessage({ ...delivering, readClock: () => beforeLater }, id)
+    expect(await stateOf(id)).toBe('dead')
+
+    expect(await promise('email', 'flood-tonight', beforeLater, new Date(LATER.getTime() + HOUR_MILLIS))).toBe(id)
+    await refuseNext(delivering.mail, '451')
+    await deliverMessage({ ...delivering, readClock: () => LATER }, id)
+    const { rows } = await database.db.raw('select run_at from graphile_worker.jobs where key = ?', [`message:${id}`])
+    // The first wait is half a minute at most, the sixth a quarter of an hour.
+    expect(rows[0].run_at.getTime() - LATER.getTime()).toBeLessThanOrEqual(MINUTE_MILLIS)
   })
 
   test('is dropped when it is late news', async () => {
@@ -155,7 +129,7 @@ describe('mail', () => {
     await deliverMessage(delivering, newer)
     await deliverMessage(delivering, held)
     expect(await database.db('messages').where({ id: held }).first('state')).toEqual({ state: 'expired' })
-    expect(await (await fetch(`${mail.url}/api/messages`)).json()).toHaveLength(1)
+    expect(await caughtMail()).toHaveLength(1)
   })
 
   test.each([{ muted_through: '2027-01-12' }, { wants_email: false }])(
@@ -176,7 +150,7 @@ describe('mail', () => {
     await database.db.raw('alter table delivery_attempts drop constraint crash')
     await deliverMessage(delivering, id)
     const raws = await Promise.all(
-      (await caughtMail()).map(async (one) => (await fetch(`${mail.url}/api/messages/${one.id}`)).text()),
+      (await caughtMail()).map(async (one) => (await fetch(`${delivering.mail.url}/api/messages/${one.id}`)).text()),
     )
     expect(raws).toHaveLength(2)
     expect(raws.every((raw) => raw.includes(`${id}@rink.example`))).toBe(true)
@@ -191,7 +165,7 @@ describe('push', () => {
     await deliverMessage(delivering, id)
     await deliverMessage(delivering, id)
     for (const device of [one, two]) {
-      const caught = await caughtPushes(device.id)
+      const caught = await caughtPushes(delivering, device.id)
       expect(caught).toHaveLength(1)
       expect(JSON.parse(caught[0]?.text ?? '')).toMatchObject({
         body: `${WORDS.sentence} ${WORDS.sure}`,
@@ -204,19 +178,38 @@ describe('push', () => {
   test('tries again only the device that failed', async () => {
     const [one, two] = [await addDevice(), await addDevice()]
     const id = await promise('push')
-    await fault(push.url, '503', 1)
+    await refuseNext(delivering.pushService, '503')
     await deliverMessage(delivering, id)
     expect(await stateOf(id)).toBe('promised')
     await deliverMessage(delivering, id)
     expect(await stateOf(id)).toBe('delivered')
-    expect(await caughtPushes(one.id)).toHaveLength(1)
-    expect(await caughtPushes(two.id)).toHaveLength(1)
+    expect(await caughtPushes(delivering, one.id)).toHaveLength(1)
+    expect(await caughtPushes(delivering, two.id)).toHaveLength(1)
+  })
+
+  test.each([
+    ['is refused until it is too late', { wants_push: true }, LATER.getTime() - 1000, 1],
+    ['is late news', { wants_push: true }, LATER.getTime(), 0],
+    ['is not wanted any more', { wants_push: false }, NOW.getTime(), 0],
+  ])('one device took counts as told, though for the other it %s', async (_why, choice, atMillis, refusals) => {
+    const devices = [await addDevice(), await addDevice()]
+    const id = await promise('push')
+    await refuseNext(delivering.pushService, '503')
+    await deliverMessage(delivering, id)
+    expect(await stateOf(id)).toBe('promised')
+
+    await database.db('alert_preferences').where({ rink_id: cast.rinkId, user_id: cast.keeper.userId }).update(choice)
+    if (refusals > 0) await refuseNext(delivering.pushService, '503')
+    await deliverMessage({ ...delivering, readClock: () => new Date(atMillis) }, id)
+    expect(await stateOf(id)).toBe('delivered')
+    const caught = await Promise.all(devices.map((device) => caughtPushes(delivering, device.id)))
+    expect(caught.flat()).toHaveLength(1)
   })
 
   test('disables a device that is gone, and says why', async () => {
     const { deviceId } = await addDevice()
     const id = await promise('push')
-    await fault(push.url, '410', 1)
+    await refuseNext(delivering.pushService, '410')
     await deliverMessage(delivering, id)
     const device = await database
       .db('push_subscriptions')

@@ -4,6 +4,7 @@ import type { FreezingOutlook } from '@/lib/advice/freezing'
 import type { Phase } from '@/lib/advice/types'
 import type { WordOptions } from '@/lib/words/options'
 import { rinkIdSchema } from './rinks'
+import type { TonightView } from './tonight-view'
 
 export interface FreezingView {
   readAt: string
@@ -11,8 +12,12 @@ export interface FreezingView {
   reader: WordOptions
   mayWrite: boolean
   mayManage: boolean
-  /** Null unless the rink is freezing and a forecast has been read. */
+  /** Null unless the rink is freezing and a forecast has been read that reaches this hour. */
   outlook: FreezingOutlook | null
+  /** The newest one read, however old; null unless the rink is freezing. */
+  forecast: TonightView['forecast']
+  /** The newest try to read one failed. */
+  lastReadFailed: boolean
   /** When the water was in; null when no fill was followed here. */
   sinceAt: string | null
   /** The newest since the fill. */

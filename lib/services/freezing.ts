@@ -1,4 +1,5 @@
 // A rink that freezes: what the Freezing page shows, and the keeper's word that it is open.
+import { findCellTrouble } from '@/db/queries/cell-reads'
 import { findNewestFill } from '@/db/queries/fills'
 import { findNewestForecast } from '@/db/queries/forecasts'
 import { enqueueRefresh } from '@/db/queries/jobs'
@@ -9,11 +10,12 @@ import type { Db } from '@/db/knex'
 import { isGranted } from '@/lib/access/permissions'
 import type { RinkAccess } from '@/lib/access/proofs'
 import { requireRink } from '@/lib/access/require-rink'
-import { freezingOutlook, type FreezingOutlook } from '@/lib/advice/freezing'
+import { freezingOutlook } from '@/lib/advice/freezing'
 import type { ServiceContext } from '@/lib/context'
 import { ConflictError } from '@/lib/errors'
 import { HOUR_MILLIS } from '@/lib/physics/constants'
 import type { FreezingView } from '@/lib/schemas/freezing-view'
+import { forecastRead } from './forecast-read'
 import { gatherJudgeInput } from './judge-input'
 import { getRinkAndReader } from './rink-and-reader'
 
@@ -31,17 +33,24 @@ export async function getFreezing(context: ServiceContext, rinkId: string): Prom
     reader,
     mayWrite: isGranted(role, 'writeLog'),
     mayManage: isGranted(role, 'manage'),
-    outlook: rink.phase === 'freezing' ? await outlookOf(db, access, rink, now) : null,
+    ...(rink.phase === 'freezing' ? await estimate(context, access, rink) : { outlook: null, forecast: null }),
+    lastReadFailed: (await findCellTrouble(db, rink.gridCellId)) !== null,
     sinceAt: sinceAt?.toISOString() ?? null,
     reading: reading ? { ...reading, at: reading.at.toISOString() } : null,
     isDrilledThick: isThick(rink, reading),
   }
 }
 
-async function outlookOf(db: Db, access: RinkAccess, rink: RinkForJudging, now: Date): Promise<FreezingOutlook | null> {
+/** Ice as the newest forecast has it; none past its last hour, for the weather since is not known. */
+async function estimate(
+  { db, now }: ServiceContext,
+  access: RinkAccess,
+  rink: RinkForJudging,
+): Promise<Pick<FreezingView, 'outlook' | 'forecast'>> {
   const forecast = await findNewestForecast(db, rink.gridCellId, now)
-  const input = forecast && (await gatherJudgeInput(db, access, { rink, forecast, now }))
-  return input ? freezingOutlook(input) : null
+  if (!forecast) return { outlook: null, forecast: null }
+  const input = await gatherJudgeInput(db, access, { rink, forecast, now })
+  return { outlook: input ? freezingOutlook(input) : null, forecast: await forecastRead({ db, now }, forecast.id) }
 }
 
 async function drilledSinceFill(

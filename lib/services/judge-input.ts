@@ -44,14 +44,18 @@ async function waterOfFill(
   return { fillDepthMm: Math.min(1000, Math.max(20, litres / (lengthM * widthM))) }
 }
 
-/** What the model is asked about a rink now; undefined when the forecast is empty. */
+function endOf({ hours }: Pick<StoredForecast, 'hours'>): number {
+  return Date.parse(hours.at(-1)?.time ?? '') + HOUR_MILLIS
+}
+
+/** What the model is asked about a rink now; undefined when the forecast is empty, or so old that it ends before now. */
 export async function gatherJudgeInput(
   db: Db,
   access: RinkAccess,
   { rink, forecast, now }: { rink: RinkForJudging; forecast: StoredForecast; now: Date },
 ): Promise<JudgeInput | undefined> {
   const firstHour = forecast.hours[0]
-  if (!firstHour) return undefined
+  if (!firstHour || endOf(forecast) <= now.getTime()) return undefined
   const firstHourAt = new Date(firstHour.time)
   const sheet = await findStartingSheet(db, rink.id, { firstHourAt, now })
   const poured = await listFloodsSince(db, access, sheet && sheet.asOf > firstHourAt ? sheet.asOf : firstHourAt)

@@ -65,7 +65,7 @@ export async function refreshOutlook({ db, now }: { db: Db; now: Date }, access:
   })
 }
 
-/** Runs the model; the slow part, outside any transaction. */
+/** Runs the model; the slow part, outside any transaction. Undefined where there is nothing new to judge by. */
 async function judgeRink(db: Db, access: RinkAccess<'view'>, slotAt: Date, now: Date): Promise<Judged | undefined> {
   const rink = await findRinkForJudging(db, access.rinkId)
   const forecast = rink && (await findNewestForecast(db, rink.gridCellId, now))

@@ -1,10 +1,12 @@
 // A freezing rink in words: how thick, when it carries, and what to do about snow.
 import type { FreezingOutlook } from '@/lib/advice/freezing'
 import type { Caution } from '@/lib/advice/types'
+import { localDateOf } from '@/lib/advice/zoned-time'
 import { shareText } from './build-quantities'
 import { cautionText } from './cautions'
 import { num, text, type ClauseWriter } from './clause'
 import { spreadText } from './filling'
+import { dayText } from './night-label'
 import type { WordOptions } from './options'
 import { iceText, snowText } from './quantities'
 import { clockText, weekdayText } from './times'
@@ -17,6 +19,9 @@ export function carriesName(outlook: FreezingOutlook, words: WordOptions): strin
 /** Below this a figure would read as no ice, or no water. [mm] */
 const LEAST_MM = 0.5
 
+/** Whether the weather behind an estimate is as new as can be, or older than it was to be used. */
+export type WeatherAge = 'fresh' | 'stale'
+
 /** Whether the estimate is as thick as wanted, or has no more water to freeze. The keeper still drills and opens. */
 function isReached({ now, carriesSkaterMm, isShallow }: FreezingOutlook): boolean {
   const isThrough = now.thicknessMm > LEAST_MM && now.waterBelowMm <= LEAST_MM
@@ -24,30 +29,48 @@ function isReached({ now, carriesSkaterMm, isShallow }: FreezingOutlook): boolea
 }
 
 /** "4.1 cm of ice on 8.3 cm of water. Carries a skater (10.0 cm) Thursday evening; …" */
-export function freezingSentence(outlook: FreezingOutlook, now: Date, words: WordOptions): string {
+export function freezingSentence(
+  outlook: FreezingOutlook,
+  now: Date,
+  words: WordOptions,
+  weather: WeatherAge = 'fresh',
+): string {
   const { thicknessMm, waterBelowMm } = outlook.now
   const ice = thicknessMm > LEAST_MM ? `${iceText(thicknessMm, words)} of ice` : 'No ice yet'
   const below = waterBelowMm > LEAST_MM ? ` on ${iceText(waterBelowMm, words)} of water` : ', frozen through'
   const limit = iceText(outlook.carriesSkaterMm, words)
-  if (isReached(outlook)) return `${ice}${below}. By the model it carries: drill before anyone skates.`
+  if (isReached(outlook)) {
+    const word = weather === 'stale' ? 'From old weather, so it proves nothing' : 'By the model it carries'
+    return `${ice}${below}. ${word}: drill before anyone skates.`
+  }
   const what = outlook.isShallow
     ? `Too little water for ${limit} of ice, so it carries a skater once it is frozen to the floor`
     : `${limit} to carry a skater`
   return `${ice}${below}. ${what}: ${spreadText(outlook.carriesSkaterAt, now, words)}.`
 }
 
-/** What the sign for the gate says large: ice that may be thick enough is not called thin, and is still not open. */
-export function signTitle(outlook: FreezingOutlook): string {
-  return isReached(outlook) ? 'Keep off until it is opened' : 'Keep off: thin ice'
+/**
+ * What the sign for the gate says large: ice that may be thick enough is not called thin, and is still not open. Of ice
+ * that only old weather makes thick nothing is known.
+ */
+export function signTitle(outlook: FreezingOutlook, weather: WeatherAge = 'fresh'): string {
+  if (!isReached(outlook)) return 'Keep off: thin ice'
+  return weather === 'stale' ? 'Keep off: nobody knows the ice' : 'Keep off until it is opened'
 }
 
-/** "4.1 cm of ice with water under it. It wants 10.0 cm to carry a skater." */
-export function signEstimate(outlook: FreezingOutlook, words: WordOptions): string {
+/** "4.1 cm of ice with water under it. It wants 10.0 cm to carry a skater."; empty where old weather makes it thick. */
+export function signEstimate(outlook: FreezingOutlook, words: WordOptions, weather: WeatherAge = 'fresh'): string {
   const { thicknessMm, waterBelowMm } = outlook.now
   const ice = `${iceText(thicknessMm, words)} of ice${waterBelowMm > LEAST_MM ? ' with water under it' : ''}.`
-  if (isReached(outlook)) return ice
+  if (isReached(outlook)) return weather === 'stale' ? '' : ice
   const wanted = outlook.isShallow ? 'has to freeze to the floor' : `wants ${iceText(outlook.carriesSkaterMm, words)}`
   return `${ice} It ${wanted} to carry a skater.`
+}
+
+/** "The weather behind this was read at 6:05 am on Sat 9 January; none newer could be had." */
+export function oldWeatherText(fetchedAt: string, words: WordOptions): string {
+  const date = dayText(localDateOf(Date.parse(fetchedAt), words.timeZone))
+  return `The weather behind this was read at ${clockText(fetchedAt, words)} on ${date}; none newer could be had.`
 }
 
 const SNOW_WRITERS: Record<string, ClauseWriter> = {

@@ -6,6 +6,8 @@ import { HOUR_MILLIS } from '@/lib/physics/constants'
 import { startFillSchema } from '@/lib/schemas/fills'
 import { getFreezing, openForSkating } from '@/lib/services/freezing'
 import { finishFill, startFill } from '@/lib/services/fills'
+import { requireRink } from '@/lib/access/require-rink'
+import { refreshOutlook } from '@/lib/services/outlooks'
 import { writeEntry } from '@/lib/services/log'
 import { steadyHours } from '@/tests/support/advice-weather'
 import { givenCast, givenDatabase } from '@/tests/support/given-cast'
@@ -75,4 +77,27 @@ test('the keeper opens it once the hole is thick enough; crew does not, and a se
 test('a hole drilled before the fill, or long ago, opens nothing', async () => {
   await drill('10', later(24))
   await expect(open(later(24 + 73))).rejects.toThrow(ConflictError)
+})
+
+// The forecast was read an hour before the fill, holds for six hours and has ten days from 17:00 UTC: 239 h after the fill.
+test('a forecast past its time is called stale, and past its last hour nothing is reckoned from it', async () => {
+  expect((await freezing(later(4))).forecast).toMatchObject({ isStale: false, fetchedAt: later(-1).toISOString() })
+  const old = await freezing(later(6))
+  expect(old.forecast?.isStale).toBe(true)
+  expect(old.outlook).not.toBeNull()
+  expect((await freezing(later(238.9))).outlook).not.toBeNull()
+  const runOut = await freezing(later(239))
+  expect(runOut.outlook).toBeNull()
+  expect(runOut.forecast).toMatchObject({ isStale: true, fetchedAt: later(-1).toISOString() })
+})
+
+test('nothing is judged from a forecast that has run out', async () => {
+  const judged = async (hours: number) => {
+    const { db, now, ...keeper } = cast.keeper.at(later(hours))
+    return refreshOutlook({ db, now }, await requireRink({ db, now, ...keeper }, cast.rinkId, 'view'))
+  }
+  expect(await judged(238)).toBe(true)
+  expect(await judged(240)).toBe(false)
+  // A rink taken up again in autumn, whose weather was last read in March.
+  expect(await judged(200 * 24)).toBe(false)
 })

@@ -4,7 +4,14 @@ import { fillProgress, type FillProgressInput } from '@/lib/advice/fill-progress
 import { freezingOutlook } from '@/lib/advice/freezing'
 import { METRIC } from '@/lib/units'
 import * as filling from '@/lib/words/filling'
-import { carriesName, freezingSentence, signEstimate, signTitle, snowOnIceText } from '@/lib/words/freezing'
+import {
+  carriesName,
+  freezingSentence,
+  oldWeatherText,
+  signEstimate,
+  signTitle,
+  snowOnIceText,
+} from '@/lib/words/freezing'
 import { inputOf, steadyHours } from '../../support/advice-weather'
 
 const words = { timeZone: 'UTC', units: METRIC, clock: '24' as const, locale: 'en' }
@@ -100,6 +107,25 @@ describe('freezing', () => {
     expect(signEstimate(onFloor, words)).toBe('2.2 cm of ice.')
     const shallow = { ...at(12), isShallow: true }
     expect(signEstimate(shallow, words)).toContain('It has to freeze to the floor to carry a skater.')
+  })
+  test('from old weather no ice is said to carry, on the page or at the gate', () => {
+    const thick = { ...outlook, now: { ...outlook.now, thicknessMm: 115 } }
+    for (const reached of [thick, onFloor]) {
+      const said = [
+        freezingSentence(reached, new Date(given.now), words, 'stale'),
+        signTitle(reached, 'stale'),
+        signEstimate(reached, words, 'stale'),
+      ].join(' ')
+      expect(said).toContain('drill before anyone skates')
+      expect(said).toContain('Keep off: nobody knows the ice')
+      expect(said).not.toMatch(/it carries|opened/)
+    }
+    expect(signEstimate(thick, words, 'stale')).toBe('')
+    expect(signTitle(outlook, 'stale')).toBe('Keep off: thin ice')
+    // 9 January 2027 is a Saturday.
+    expect(oldWeatherText('2027-01-09T11:05:00Z', words)).toBe(
+      'The weather behind this was read at 11:05 on Sat 9 January; none newer could be had.',
+    )
   })
   test('every word about snow', () => {
     expect(outlook.snow.length).toBeGreaterThan(1)

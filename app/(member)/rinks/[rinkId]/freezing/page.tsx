@@ -12,11 +12,12 @@ export const metadata: Metadata = { title: 'Freezing' }
 
 export default async function FreezingPage({ params }: PageProps<'/rinks/[rinkId]/freezing'>) {
   const view = await orNotFound(getFreezing(await pageContext(), (await params).rinkId))
-  if (!view.outlook) return <NotFreezing view={view} />
+  const entryKey = randomUUID()
+  if (!view.outlook) return <NotFreezing view={view} entryKey={entryKey} />
   return (
     <>
       <RefreshEachMinute />
-      <FreezingIce view={view} outlook={view.outlook} entryKey={randomUUID()} />
+      <FreezingIce view={view} outlook={view.outlook} entryKey={entryKey} />
     </>
   )
 }

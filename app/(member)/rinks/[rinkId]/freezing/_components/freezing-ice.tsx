@@ -1,16 +1,17 @@
 // Ice that freezes: the estimate in a sentence, its course ahead, holes drilled, snow, and what to keep in mind.
+import { DataSource } from '@/components/rinks/data-source'
+import { ForecastNotice } from '@/components/rinks/forecast-notice'
 import { StandingCautions } from '@/components/rinks/standing-cautions'
-import { Facts } from '@/components/ui/facts'
 import { Notice } from '@/components/ui/notice'
 import type { FreezingOutlook } from '@/lib/advice/freezing'
+import { MODEL_VERSION } from '@/lib/advice/judge'
 import type { FreezingView } from '@/lib/schemas/freezing-view'
 import { spreadText } from '@/lib/words/filling'
 import { carriesName, freezingSentence, snowOnIceText } from '@/lib/words/freezing'
 import { capitalised, iceText, snowText } from '@/lib/words/quantities'
-import { clockText, weekdayText } from '@/lib/words/times'
 import { unbroken } from '@/lib/words/unbroken'
+import { Drilled } from './drilled'
 import { KeepOffSign } from './keep-off-sign'
-import { OpenRink, ReadingForm } from './ice-forms'
 import { ThicknessAhead } from './thickness-ahead'
 
 interface Props {
@@ -20,12 +21,14 @@ interface Props {
 }
 
 export function FreezingIce({ view, outlook, entryKey }: Props) {
-  const { reader, rink } = view
+  const { reader, rink, forecast, lastReadFailed } = view
   const now = new Date(view.readAt)
-  const [lead = '', ...rest] = freezingSentence(outlook, now, reader).split(/(?<=\.) (?=\S)/)
+  const weather = forecast?.isStale ? 'stale' : 'fresh'
+  const [lead = '', ...rest] = freezingSentence(outlook, now, reader, weather).split(/(?<=\.) (?=\S)/)
   return (
     <>
       <div className="print:hidden">
+        <ForecastNotice forecast={forecast} lastReadFailed={lastReadFailed} now={now.getTime()} />
         <h1 className="mb-2 max-w-[24ch] text-verdict font-medium tracking-tight lg:text-verdict-wide">
           {unbroken(lead)}
         </h1>
@@ -42,16 +45,21 @@ export function FreezingIce({ view, outlook, entryKey }: Props) {
         <div className="gap-x-14 lg:grid lg:grid-cols-2">
           <WhenItCarries outlook={outlook} now={now} view={view} />
           <div>
-            <Drilled view={view} />
-            {view.mayWrite ? <ReadingForm rinkId={rink.id} units={reader.units} entryKey={entryKey} /> : null}
-            {view.mayManage && view.isDrilledThick ? <OpenRink rinkId={rink.id} /> : null}
+            <Drilled view={view} entryKey={entryKey} />
           </div>
         </div>
         <StandingCautions codes={['thickness_is_estimate', 'land_only']} reader={reader} heading="Keep in mind" />
+        <Source view={view} />
       </div>
-      <KeepOffSign view={view} outlook={outlook} />
+      <KeepOffSign view={view} outlook={outlook} weather={weather} />
     </>
   )
+}
+
+/** Ice is reckoned whenever the page is read. */
+function Source({ view: { forecast, reader, readAt } }: { view: FreezingView }) {
+  const source = { forecast, rink: reader, viewer: reader, outlook: { judgedAt: readAt, modelVersion: MODEL_VERSION } }
+  return <DataSource view={source} now={Date.parse(readAt)} />
 }
 
 /** The forecast is one of the runs; elsewhere only the others are counted. */
@@ -89,34 +97,6 @@ function WhenItCarries({
       <p className="mt-2 text-small text-graphite">
         From the day by which one forecast run of ten gets there to the one by which nine of ten do.
       </p>
-    </section>
-  )
-}
-
-function Drilled({ view: { reading, reader } }: { view: FreezingView }) {
-  if (!reading) {
-    return (
-      <section className="mt-8">
-        <h2 className="mb-2 font-semibold">Drilled</h2>
-        <p className="max-w-line border-t border-rule pt-3 text-graphite">
-          Nobody has drilled since the fill, or not for three days. A hole near the edge, where you can stand beside the
-          ice, corrects everything on this page.
-        </p>
-      </section>
-    )
-  }
-  const at = `${weekdayText(reading.at, reader)} ${clockText(reading.at, reader)}`
-  return (
-    <section className="mt-8">
-      <h2 className="mb-2 font-semibold">Drilled</h2>
-      <div className="border-t border-rule">
-        <Facts
-          rows={[
-            { name: `${at}${reading.by ? `, by ${reading.by}` : ''}`, figure: iceText(reading.thicknessMm, reader) },
-          ]}
-        />
-      </div>
-      <p className="mt-2 text-small text-graphite">The estimate starts from the newest hole.</p>
     </section>
   )
 }

@@ -3,6 +3,7 @@ import type { Route } from 'next'
 import { ButtonLink } from '@/components/ui/button'
 import type { Phase } from '@/lib/advice/types'
 import type { FreezingView } from '@/lib/schemas/freezing-view'
+import { Drilled } from './drilled'
 
 interface Words {
   title: string
@@ -48,8 +49,17 @@ const WORDS: Record<Phase, Words> = {
   },
 }
 
-export function NotFreezing({ view: { rink } }: { view: FreezingView }) {
-  const { title, text, path, word } = WORDS[rink.phase]
+/** The newest forecast does not reach this hour. */
+const RUN_OUT: Words = {
+  title: 'How thick the ice is cannot be reckoned.',
+  text: 'The newest forecast has run out, and no newer one could be had; we ask again every hour. Until one comes, keep off: only a drilled hole tells how thick it is.',
+  path: '/freezing',
+  word: 'Look again',
+}
+
+export function NotFreezing({ view, entryKey }: { view: FreezingView; entryKey: string }) {
+  const { rink, forecast } = view
+  const { title, text, path, word } = rink.phase === 'freezing' && forecast ? RUN_OUT : WORDS[rink.phase]
   return (
     <>
       <h1 className="mb-2 max-w-[24ch] text-verdict font-medium tracking-tight lg:text-verdict-wide">{title}</h1>
@@ -57,6 +67,7 @@ export function NotFreezing({ view: { rink } }: { view: FreezingView }) {
       <ButtonLink look="main" href={`/rinks/${rink.id}${path}` as Route}>
         {word}
       </ButtonLink>
+      {rink.phase === 'freezing' ? <Drilled view={view} entryKey={entryKey} /> : null}
     </>
   )
 }

@@ -4,6 +4,8 @@ import type { Db } from '@/db/knex'
 export interface Viewer {
   userId: string
   isAdmin: boolean
+  /** When this browser was signed in: by password, or from the mailbox. */
+  signedInAt?: Date
 }
 
 export interface ServiceContext {

@@ -7,6 +7,7 @@ export interface SessionWithUser {
   email: string
   isAdmin: boolean
   emailVerifiedAt: Date | null
+  createdAt: Date
   expiresAt: Date
   lastSeenAt: Date
 }
@@ -38,6 +39,7 @@ export async function findSession(db: Db, tokenHash: string, now: Date): Promise
       email: 'u.email',
       isAdmin: 'u.is_admin',
       emailVerifiedAt: 'u.email_verified_at',
+      createdAt: 's.created_at',
       expiresAt: 's.expires_at',
       lastSeenAt: 's.last_seen_at',
     })

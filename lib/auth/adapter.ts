@@ -35,9 +35,9 @@ async function readSession(db: Db, sessionToken: string) {
   const found = await findSession(db, tokenHash, now)
   if (!found) return null
   if (now.getTime() - found.lastSeenAt.getTime() > SEEN_STEP_MILLIS) await noteSeen(db, tokenHash, now)
-  const { userId, name, email, isAdmin, emailVerifiedAt, expiresAt } = found
+  const { userId, name, email, isAdmin, emailVerifiedAt, createdAt, expiresAt } = found
   return {
     session: { sessionToken, userId, expires: expiresAt },
-    user: { id: userId, name, email, isAdmin, emailVerified: emailVerifiedAt },
+    user: { id: userId, name, email, isAdmin, emailVerified: emailVerifiedAt, signedInAt: createdAt },
   }
 }

@@ -16,10 +16,11 @@ import { openSession } from './sessions'
 
 declare module 'next-auth' {
   interface Session {
-    user: { id: string; name: string; isAdmin: boolean }
+    user: { id: string; name: string; isAdmin: boolean; signedInAt?: Date }
   }
   interface User {
     isAdmin?: boolean
+    signedInAt?: Date
   }
 }
 
@@ -82,7 +83,7 @@ export function authOptions(onFault?: (fault: unknown) => void): AuthOptions {
     callbacks: {
       session: ({ session, user }) => ({
         expires: session.expires,
-        user: { id: user.id, name: user.name ?? '', isAdmin: user.isAdmin ?? false },
+        user: { id: user.id, name: user.name ?? '', isAdmin: user.isAdmin ?? false, signedInAt: user.signedInAt },
       }),
     },
   }

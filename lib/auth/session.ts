@@ -22,7 +22,9 @@ export const readViewer = cache(async (): Promise<Viewer | undefined> => {
   const faults: unknown[] = []
   const session = await getServerSession(authOptions((fault) => faults.push(fault)))
   if (faults.length > 0) throw faults[0]
-  return session ? { userId: session.user.id, isAdmin: session.user.isAdmin } : undefined
+  if (!session) return undefined
+  const { id: userId, isAdmin, signedInAt } = session.user
+  return { userId, isAdmin, signedInAt }
 })
 
 /** Signs a person in, in this browser; a session that it had before ends. For server actions, which may set cookies. */

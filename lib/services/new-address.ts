@@ -6,7 +6,7 @@ import type { OpenContext, ServiceContext, Viewer } from '@/lib/context'
 import { InvalidInputError } from '@/lib/errors'
 import type { EmailChangeInput } from '@/lib/schemas/accounts'
 import { promiseAddressChangedMail, promiseAlreadyRegistered, promiseLink } from './account-mail'
-import { requirePassword } from './own-account'
+import { requireOwner } from './own-account'
 import { spend } from './rate-limits'
 
 const LINK_REFUSED = 'This link has been used or has run out. Ask for a new one.'
@@ -18,7 +18,7 @@ const NOT_YOURS = 'Another account asked for this address. Sign in with that one
  */
 export async function askForEmailChange(context: ServiceContext, input: EmailChangeInput): Promise<void> {
   const { db, now, viewer } = context
-  await requirePassword(context, input.currentPassword)
+  await requireOwner(context, input.currentPassword)
   await spend(context, 'mailByEmail', input.email)
   const known = await findUserForSignIn(db, input.email)
   if (known?.id === viewer.userId) {

@@ -3,6 +3,8 @@
 import { refresh } from 'next/cache'
 import { redirect } from 'next/navigation'
 import { z } from 'zod'
+import { goToCheckYourMail } from '@/app/(account)/mailed-address'
+import { openContext } from '@/lib/auth/open-context'
 import { requestContext } from '@/lib/auth/request-context'
 import { startSession } from '@/lib/auth/session'
 import { formAction } from '@/lib/http/form-action'
@@ -15,8 +17,9 @@ import {
   passwordChangeSchema,
 } from '@/lib/schemas/accounts'
 import { askForDeletion, keepAccount } from '@/lib/services/account-deletion'
+import { requestLink } from '@/lib/services/accounts'
 import { askForEmailChange } from '@/lib/services/new-address'
-import { changePassword, saveAccount } from '@/lib/services/own-account'
+import { changePassword, getAccount, saveAccount } from '@/lib/services/own-account'
 import { endOwnSession } from '@/lib/services/own-sessions'
 
 export const saveAccountAction = serviceAction(accountSchema, saveAccount, 'Saved.')
@@ -27,6 +30,13 @@ export const changePasswordAction = formAction(passwordChangeSchema, async (inpu
   await startSession(context.viewer.userId)
   refresh()
   return 'Your password is changed, and every other device is signed out.'
+})
+
+/** Signing in anew from the mailbox is how somebody without a password shows that the account is theirs. */
+export const askMailboxAction = formAction(z.object({}), async () => {
+  const { email } = await getAccount(await requestContext())
+  await requestLink(await openContext(), { email }, 'sign-in')
+  await goToCheckYourMail(email, 'sign-in', '/account/security')
 })
 
 export const changeEmailAction = formAction(emailChangeSchema, async (input) => {

@@ -8,17 +8,22 @@ import { openSession } from '@/lib/auth/sessions'
 import type { ServiceContext } from '@/lib/context'
 import { DAY_MILLIS } from '@/lib/physics/constants'
 import { requestLink, signInWithLink, signInWithPassword, signUp } from '@/lib/services/accounts'
+import { askForEmailChange } from '@/lib/services/new-address'
 import { changePassword, getAccount, saveAccount } from '@/lib/services/own-account'
 import { signOutEverywhere } from '@/lib/services/own-sessions'
 import { LIMITS } from '@/lib/services/rate-limits'
 import { givenDatabase } from '@/tests/support/given-cast'
-import { newEmail, newestKey, newMember, NOW, PASSWORD, visitor } from '@/tests/support/visitor'
+import { mailsTo, minutesLater, newEmail, newestKey, newMember, NOW, PASSWORD, visitor } from '@/tests/support/visitor'
 
 const database = givenDatabase()
 
 // next-auth's adapter reads the clock itself, so sessions here begin in the present.
 const present = () => new Date()
-const as = (userId: string, now = NOW): ServiceContext => ({ db: database.db, now, viewer: { userId, isAdmin: false } })
+const as = (userId: string, signedInAt?: Date): ServiceContext => ({
+  db: database.db,
+  now: NOW,
+  viewer: { userId, isAdmin: false, signedInAt },
+})
 const open = (userId: string) => openSession(database.db, userId, present())
 const read = (token: string) => sessionAdapter(database.db).getSessionAndUser?.(token)
 
@@ -27,7 +32,7 @@ test('a session is found by its token, which the database does not hold', async 
   const { token, expiresAt } = await open(userId)
   expect(await read(token)).toMatchObject({
     session: { sessionToken: token, userId, expires: expiresAt },
-    user: { id: userId, email, name: 'Anna', isAdmin: false },
+    user: { id: userId, email, name: 'Anna', isAdmin: false, signedInAt: expect.any(Date) },
   })
   expect(JSON.stringify(await database.db('sessions').select())).not.toContain(token)
   expect(await read(`${token}x`)).toBeNull()
@@ -82,13 +87,32 @@ test('guessing the present password is limited', async () => {
   await expect(guess()).rejects.toMatchObject({ code: 'rate_limited' })
 })
 
-test('somebody who only ever used links sets a first password', async () => {
+async function linkOnly(): Promise<{ email: string; userId: string }> {
   const email = newEmail()
   await signUp(visitor(database.db), { name: 'Lin', email, password: PASSWORD })
   await requestLink(visitor(database.db), { email }, 'sign-in')
   const { userId } = await signInWithLink(visitor(database.db), await newestKey(database.db, email, 'sign-in'))
+  return { email, userId }
+}
+
+test('without a password the account moves only for somebody who came from its mailbox in the last half hour', async () => {
+  const { email, userId } = await linkOnly()
+  for (const signedInAt of [undefined, minutesLater(-31)]) {
+    const context = as(userId, signedInAt)
+    const moved = askForEmailChange(context, { email: newEmail(), currentPassword: '' })
+    await expect(moved).rejects.toMatchObject({ code: 'invalid_input' })
+    const locked = changePassword(context, { currentPassword: '', newPassword: 'a thief’s own' })
+    await expect(locked).rejects.toMatchObject({ code: 'invalid_input' })
+  }
+  expect((await mailsTo(database.db, email)).map(({ kind }) => kind)).not.toContain('change-address')
+  await askForEmailChange(as(userId, minutesLater(-29)), { email: newEmail(), currentPassword: '' })
+  expect((await mailsTo(database.db, email)).map(({ kind }) => kind)).toContain('change-address')
+})
+
+test('somebody who only ever used links sets a first password', async () => {
+  const { userId } = await linkOnly()
   expect(await getAccount(as(userId))).toMatchObject({ hasPassword: false })
-  await changePassword(as(userId), { currentPassword: '', newPassword: 'a first password' })
+  await changePassword(as(userId, NOW), { currentPassword: '', newPassword: 'a first password' })
   expect(await getAccount(as(userId))).toMatchObject({ hasPassword: true })
 })
 

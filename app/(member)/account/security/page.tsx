@@ -6,9 +6,10 @@ import { ageText } from '@/components/rinks/reader'
 import { pageContext } from '@/lib/auth/request-context'
 import { presentSessionHandle } from '@/lib/auth/session'
 import { orNotFound } from '@/lib/http/or-not-found'
-import { getAccount } from '@/lib/services/own-account'
+import { getAccount, isVouchedFor, VOUCHED_MINUTES } from '@/lib/services/own-account'
 import { listOwnSessions } from '@/lib/services/own-sessions'
 import { AccountFrame } from '../_components/account-frame'
+import { AskMailbox } from '../_components/ask-mailbox'
 import { dayOf } from '../_components/dates'
 import { EmailChangeForm } from '../_components/email-change-form'
 import { EndSession } from '../_components/end-session'
@@ -20,6 +21,7 @@ export const metadata: Metadata = { title: 'Address, password, sign-ins' }
 export default async function SecurityPage() {
   const context = await pageContext()
   const { email, hasPassword } = await orNotFound(getAccount(context))
+  const isOwner = hasPassword || isVouchedFor(context)
   const [sessions, present] = [await listOwnSessions(context), await presentSessionHandle()]
   return (
     <AccountFrame title="Address, password, sign-ins">
@@ -28,10 +30,14 @@ export default async function SecurityPage() {
           {email}
           <span className="block text-note text-graphite">It stays until the new one is confirmed.</span>
         </p>
-        <EmailChangeForm hasPassword={hasPassword} />
+        {isOwner ? <EmailChangeForm hasPassword={hasPassword} /> : <AskMailbox minutes={VOUCHED_MINUTES} />}
       </Section>
       <Section title="Password">
-        <PasswordChangeForm email={email} hasPassword={hasPassword} />
+        {isOwner ? (
+          <PasswordChangeForm email={email} hasPassword={hasPassword} />
+        ) : (
+          <p className="max-w-line">None yet. You can set one after the link above.</p>
+        )}
       </Section>
       <Section title="Where you are signed in">
         <ul className="mb-5 list-none border-t border-rule p-0">

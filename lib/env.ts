@@ -6,7 +6,9 @@ const base64Url = (what: string) => z.string().regex(/^[A-Za-z0-9_-]{40,}$/, `mu
 const environmentSchema = z.object({
   DATABASE_URL: z.string().regex(/^postgres(ql)?:\/\//, 'must be a postgres:// address'),
   PUBLIC_URL: z
-    .url({ protocol: /^https?$/, message: 'must be the http(s) address that people type' })
+    .url({ protocol: /^https?$/, message: 'must be the address that people type' })
+    // Elsewhere browsers give no service worker, no push and no random keys on plain http.
+    .regex(/^https:|^http:\/\/(localhost|127\.0\.0\.1|\[::1\])([:/]|$)/, 'must be https, or http on localhost')
     .transform((url) => url.replace(/\/$/, '')),
   NEXTAUTH_SECRET: z.string().min(32, 'must be at least 32 random characters'),
   WEATHER_PROVIDER: z.enum(['open-meteo'], 'must be open-meteo').default('open-meteo'),

@@ -1,11 +1,10 @@
-'use client'
 // A form whose server action answers with a FormState: says what happened, keeps what was typed, works without scripts.
-import { useActionState, useEffect, useRef, type ReactNode } from 'react'
-import { IDLE, type FormState } from '@/lib/http/form-state'
+'use client'
+import { useEffect, useRef, type ReactNode } from 'react'
+import { useSend } from '@/components/hooks/use-send'
+import type { FormAction, FormState } from '@/lib/http/form-state'
 import { Button } from './button'
 import { Notice } from './notice'
-
-export type FormAction = (state: FormState, formData: FormData) => Promise<FormState>
 
 export function ActionForm({
   action,
@@ -26,13 +25,15 @@ export function ActionForm({
   /** The fields, given what the form knows. */
   children?: (state: FormState) => ReactNode
 }) {
-  const [state, run, isPending] = useActionState(action, IDLE)
+  const { state, post, submit: send, isSending } = useSend(action)
   const form = useRef<HTMLFormElement>(null)
   useEffect(() => {
     if (state.status === 'error') form.current?.querySelector<HTMLElement>('[aria-invalid=true]')?.focus()
+    // What was saved is what the fields start from now.
+    if (state.status === 'ok') form.current?.reset()
   }, [state])
   return (
-    <form ref={form} action={run} noValidate>
+    <form ref={form} action={post} onSubmit={send} noValidate>
       {state.message ? (
         <Notice tone={state.status === 'error' ? 'caution' : 'plain'} live>
           {state.message}
@@ -40,7 +41,7 @@ export function ActionForm({
       ) : null}
       {children?.(state)}
       <div className="flex flex-wrap gap-3">
-        <Button type="submit" look={look} disabled={isPending} aria-label={submitLabel}>
+        <Button type="submit" look={look} disabled={isSending} aria-label={submitLabel}>
           {submit}
         </Button>
         {otherButtons}

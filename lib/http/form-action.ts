@@ -4,23 +4,10 @@ import { ZodError, type z } from 'zod'
 import { AppError, ConflictError, InvalidInputError } from '@/lib/errors'
 import { logFailure } from '@/lib/log'
 import { faultsByField, INVALID_INPUT_MESSAGE } from './errors-by-field'
-import type { FormState } from './form-state'
+import { textFields, withoutPasswords, type FormAction, type FormState } from './form-state'
 
 /** Runs with the parsed input; what it returns is shown as the good news. A redirect passes through. */
 type Work<S extends z.ZodType> = (input: z.output<S>) => Promise<string | void>
-
-/** The text fields of a form. Next's own fields and files are left out. */
-function textFields(formData: FormData): Record<string, string> {
-  const fields: Record<string, string> = {}
-  for (const [name, value] of formData) {
-    if (typeof value === 'string' && !name.startsWith('$ACTION')) fields[name] = value
-  }
-  return fields
-}
-
-function withoutPasswords(fields: Record<string, string>): Record<string, string> {
-  return Object.fromEntries(Object.entries(fields).filter(([name]) => !/password/i.test(name)))
-}
 
 const BROKEN_MESSAGE = 'Something broke on our side. Nothing that you typed is lost: try again in a minute.'
 
@@ -38,10 +25,7 @@ function faultState(error: unknown, values: Record<string, string>): FormState {
 }
 
 /** Makes a server action for useActionState. What was typed stays on the page, whatever breaks. */
-export function formAction<S extends z.ZodType>(
-  schema: S,
-  work: Work<S>,
-): (state: FormState, formData: FormData) => Promise<FormState> {
+export function formAction<S extends z.ZodType>(schema: S, work: Work<S>): FormAction {
   return async (_state, formData) => {
     const fields = textFields(formData)
     const values = withoutPasswords(fields)

@@ -45,6 +45,15 @@ test('the keeper moves a pass, and the plan follows at once', async ({ page, con
     await context.setOffline(false)
   })
 
+  await test.step('a pass that is checked off meanwhile counts at once, and can be taken back', async () => {
+    const check = page.getByRole('button', { name: 'Pass 1 is poured' })
+    await page.getByRole('button', { name: 'Later', exact: true }).click()
+    await check.click()
+    await expect(page.getByText(/poured by Maren/)).toHaveCount(1)
+    await check.click()
+    await expect(page.getByText(/poured by Maren/)).toBeHidden()
+  })
+
   await test.step('keep it, with hot water', async () => {
     await page.getByText(/Hot tap/).click()
     await page.getByRole('button', { name: 'Keep this plan' }).click()

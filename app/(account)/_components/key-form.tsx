@@ -1,6 +1,7 @@
 'use client'
 // The button behind a mailed link: only a press uses the link up, so mail scanners may open it as they like.
-import { ActionForm, type FormAction } from '@/components/ui/action-form'
+import { ActionForm } from '@/components/ui/action-form'
+import type { FormAction } from '@/lib/http/form-state'
 
 export function KeyForm({ action, linkKey, submit }: { action: FormAction; linkKey: string; submit: string }) {
   return (

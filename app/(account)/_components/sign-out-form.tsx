@@ -1,6 +1,7 @@
 'use client'
 // Signs out, and lets the service worker forget the night sheets that it keeps for when there is no network.
-import { ActionForm, type FormAction } from '@/components/ui/action-form'
+import { ActionForm } from '@/components/ui/action-form'
+import type { FormAction } from '@/lib/http/form-state'
 import { forgetKeptPages } from './forget-kept-pages'
 
 export function SignOutForm({

@@ -17,7 +17,7 @@ interface Props {
 }
 
 export function RinkFormFrame({ form, submit, busy, children }: Props) {
-  const { state, isPending } = form
+  const { state, isSending } = form
   const element = useRef<HTMLFormElement>(null)
   useEffect(() => {
     if (state.status === 'error') element.current?.querySelector<HTMLElement>(FAULTY)?.focus()
@@ -25,7 +25,7 @@ export function RinkFormFrame({ form, submit, busy, children }: Props) {
   // Without script the page comes back at its top, far from the button.
   const hasFaults = Object.keys(state.fields ?? {}).length > 0
   return (
-    <form ref={element} action={form.dispatch} onSubmit={form.submit} noValidate>
+    <form ref={element} action={form.post} onSubmit={form.submit} noValidate>
       {hasFaults ? <Notice tone="caution">{state.message}</Notice> : null}
       {children}
       {state.message ? (
@@ -33,8 +33,8 @@ export function RinkFormFrame({ form, submit, busy, children }: Props) {
           {state.message}
         </Notice>
       ) : null}
-      <Button type="submit" look="main" disabled={isPending} className="mt-2 w-full lg:w-auto">
-        {isPending ? busy : submit}
+      <Button type="submit" look="main" disabled={isSending} className="mt-2 w-full lg:w-auto">
+        {isSending ? busy : submit}
       </Button>
     </form>
   )

@@ -1,8 +1,8 @@
 // The state of the rink form: what is typed, what was wrong with it, and the way to the server.
 'use client'
-import { startTransition, useActionState, useState, type FormEvent } from 'react'
-import type { FormAction } from '@/components/ui/action-form'
-import { IDLE, type FormState } from '@/lib/http/form-state'
+import { useState } from 'react'
+import { useSend } from '@/components/hooks/use-send'
+import type { FormAction, FormState } from '@/lib/http/form-state'
 import { unitOf } from '@/lib/schemas/measures'
 import { unitsOfCode, type Units } from '@/lib/units'
 import { inUnits, MEASURE_OF, unitsIn, type FormValues } from './values'
@@ -11,7 +11,7 @@ export type RinkForm = ReturnType<typeof useRinkForm>
 
 /** @param followsPlace Whether the units may follow the place until somebody chooses them. */
 export function useRinkForm(action: FormAction, initial: FormValues, followsPlace = false) {
-  const [state, dispatch, isPending] = useActionState(action, IDLE)
+  const { state, post, submit, isSending } = useSend(action)
   // Without script the page comes back whole, and this is where what was typed is found again.
   const [values, setValues] = useState<FormValues>(state.values ?? initial)
   // A fault is shown until its field is touched.
@@ -29,8 +29,9 @@ export function useRinkForm(action: FormAction, initial: FormValues, followsPlac
 
   return {
     state,
-    dispatch,
-    isPending,
+    post,
+    submit,
+    isSending,
     values,
     units,
     set,
@@ -45,12 +46,6 @@ export function useRinkForm(action: FormAction, initial: FormValues, followsPlac
       if (!mayFollow || !suggested) return
       setOfferedUnits([suggested])
       setValues((before) => inUnits(before, suggested))
-    },
-    /** Sent by hand, because React empties a form that it sends itself. */
-    submit: (event: FormEvent<HTMLFormElement>) => {
-      event.preventDefault()
-      const sent = new FormData(event.currentTarget)
-      startTransition(() => dispatch(sent))
     },
     error,
     text: (name: string) => ({

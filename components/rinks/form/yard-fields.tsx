@@ -26,7 +26,7 @@ export const SHELTER_CHOICES = [
   },
 ]
 
-export const SKY_CHOICES = [
+const SKY_CHOICES = [
   { value: 'wide', label: 'Almost all of it', note: 'Nothing higher than a fence far away.' },
   { value: 'edged', label: 'Most of it', note: 'Roofs and trees stand along the edges.' },
   { value: 'yard', label: 'About two thirds', note: 'Houses or tall trees on two or three sides.' },

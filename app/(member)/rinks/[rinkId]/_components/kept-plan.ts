@@ -1,4 +1,4 @@
-// The keeper's own plan on its way to the server: what is sent, and what is shown meanwhile.
+// The keeper's own plan until the server has it: what is sent, and what is shown meanwhile.
 import type { TonightPass, TonightView } from '@/lib/schemas/tonight-view'
 
 export function planFields({ rink, night }: TonightView, passes: readonly TonightPass[]): FormData {
@@ -24,4 +24,9 @@ export function planFields({ rink, night }: TonightView, passes: readonly Tonigh
 export function withOwnPlan(view: TonightView, passes: TonightPass[]): TonightView {
   if (!view.outlook) return view
   return { ...view, outlook: { ...view.outlook, passes, ownPlan: { by: null } } }
+}
+
+/** Passes as the keeper moves them, with what was checked off meanwhile. */
+export function withPoured(moved: TonightPass[], current: readonly TonightPass[]): TonightPass[] {
+  return moved.map((pass) => current.find(({ number, poured }) => poured !== null && number === pass.number) ?? pass)
 }

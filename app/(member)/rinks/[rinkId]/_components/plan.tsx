@@ -42,7 +42,7 @@ export function Plan({ view, passes, now, change, checkOffs, onMove }: PlanProps
         {passes.map((pass) => (
           <li key={pass.number} className="border-b border-rule py-[13px]">
             <PassRow view={view} pass={pass} now={now} change={change} checkOffs={checkOffs} onFault={setFault} />
-            {moving === pass.number ? (
+            {moving === pass.number && !pass.poured ? (
               <PassMover view={view} passes={passes} number={pass.number} onMove={onMove} />
             ) : moving !== null && !pass.poured ? (
               <button

@@ -13,6 +13,7 @@ import { isForPerson } from '@/lib/words/cautions'
 import { DaysAhead } from './days-ahead'
 import { FirstForecast } from './first-forecast'
 import { HoldNote } from './hold-note'
+import { withPoured } from './kept-plan'
 import { Mute } from './mute'
 import { OFF_SEASON, OffSeason } from './off-season'
 import { PhaseNote } from './phase-note'
@@ -65,7 +66,10 @@ interface JudgedNightProps {
 function JudgedNight({ view, now, change, checkOffs }: JudgedNightProps) {
   const [moved, setMoved] = useState<TonightPass[] | null>(null)
   const { days, ownPlan } = view.outlook
-  const passes = moved ?? view.outlook.passes
+  const passes = useMemo(
+    () => (moved ? withPoured(moved, view.outlook.passes) : view.outlook.passes),
+    [moved, view.outlook.passes],
+  )
   const isOwn = moved !== null || ownPlan !== null
   const summary = useMemo(
     () => (isOwn ? summaryOfPlan(view.outlook.summary, passes) : view.outlook.summary),

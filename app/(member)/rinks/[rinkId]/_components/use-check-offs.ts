@@ -9,7 +9,7 @@ export interface CheckOffs {
   /** The view with what this device has checked off. */
   shown: TonightView
   checkOff: (pass: TonightPass) => Promise<string | null>
-  /** True when the check-off was still on this device only. */
+  /** True when the check-off was on this device only; else the server has to be asked to take it back too. */
   takeBack: (passNumber: number) => Promise<boolean>
   /** A try to send it has failed; it waits for a network. */
   isStuck: (passNumber: number) => boolean
@@ -24,8 +24,10 @@ export function useCheckOffs(view: TonightView, readAgain: () => Promise<unknown
   const [waiting, setWaiting] = useState<KeptCheckOff[]>([])
   const [refused, setRefused] = useState<KeptCheckOff[]>([])
   const [stuck, setStuck] = useState<readonly string[]>([])
-  const sending = useRef(false)
+  const underWay = useRef<Promise<void> | null>(null)
   const isAskedAgain = useRef(false)
+  /** Keys of those that were sent with a network: the server may have them although no answer came. */
+  const sentOut = useRef(new Set<string>())
 
   const readKept = useCallback(async () => {
     const kept = await listKept(userId, rinkId)
@@ -36,6 +38,7 @@ export function useCheckOffs(view: TonightView, readAgain: () => Promise<unknown
 
   const sendOnce = useCallback(async () => {
     const left = await readKept()
+    if (navigator.onLine) for (const { entryKey } of left) sentOut.current.add(entryKey)
     const outcomes = await Promise.all(left.map(async (one) => [one.entryKey, await send(one)] as const))
     setStuck(unlessBothEmpty(outcomes.flatMap(([key, outcome]) => (outcome === 'stuck' ? [key] : []))))
     // Read before it is taken off the list, so that it does not flicker.
@@ -45,17 +48,12 @@ export function useCheckOffs(view: TonightView, readAgain: () => Promise<unknown
 
   const sendKept = useCallback(async () => {
     // What is kept while another send is under way goes right after it.
-    isAskedAgain.current = sending.current
-    if (sending.current) return
-    sending.current = true
-    try {
-      do {
-        isAskedAgain.current = false
-        await sendOnce()
-      } while (isAskedAgain.current)
-    } finally {
-      sending.current = false
-    }
+    isAskedAgain.current = underWay.current !== null
+    if (underWay.current) return
+    underWay.current = untilNotAsked(isAskedAgain, sendOnce).finally(() => {
+      underWay.current = null
+    })
+    await underWay.current
   }, [sendOnce])
 
   useEffect(() => {
@@ -91,9 +89,10 @@ export function useCheckOffs(view: TonightView, readAgain: () => Promise<unknown
   async function takeBack(passNumber: number): Promise<boolean> {
     const one = waiting.find((kept) => kept.passNumber === passNumber && kept.nightDate === view.night.date)
     if (!one) return false
-    await drop(one.entryKey)
     setWaiting((before) => before.filter(({ entryKey }) => entryKey !== one.entryKey))
-    return true
+    await drop(one.entryKey)
+    await underWay.current
+    return !sentOut.current.has(one.entryKey)
   }
 
   function dismiss(entryKey: string): void {
@@ -110,6 +109,13 @@ export function useCheckOffs(view: TonightView, readAgain: () => Promise<unknown
     refused,
     dismiss,
   }
+}
+
+async function untilNotAsked(isAskedAgain: { current: boolean }, work: () => Promise<void>): Promise<void> {
+  do {
+    isAskedAgain.current = false
+    await work()
+  } while (isAskedAgain.current)
 }
 
 /** Nothing kept before and nothing now, as on almost every visit: the page need not be drawn anew. */

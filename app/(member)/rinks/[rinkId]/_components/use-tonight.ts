@@ -5,13 +5,12 @@ import useSWR from 'swr'
 import { useOnline } from '@/components/hooks/use-online'
 import { outlookKey } from '@/lib/cache-keys/outlook'
 import { fetchJson, FetchJsonError } from '@/lib/http/fetch-json'
-import type { FormState } from '@/lib/http/form-state'
+import { NO_ANSWER, type FormState } from '@/lib/http/form-state'
 import { MINUTE_MILLIS } from '@/lib/physics/constants'
 import type { TonightView } from '@/lib/schemas/tonight-view'
 import { OFF_SEASON } from './off-season'
 
 const SOON = 2000
-const NO_ANSWER = 'There was no answer from the server, so nothing was changed. Try again when you have a connection.'
 
 /** Why what is on screen may be old: no network, signed out, no longer on the rink's list, or a fault of ours. */
 export type ReadTrouble = 'offline' | 'signed-out' | 'gone' | 'failed' | null
@@ -59,7 +58,7 @@ export function useTonight(initial: TonightView) {
       keepCopy(initial.rink.id, true)
       return null
     } catch (fault) {
-      return fault instanceof Refused ? fault.message : NO_ANSWER
+      return fault instanceof Refused ? fault.message : NO_ANSWER.message
     }
   }
 
@@ -86,9 +85,9 @@ async function doThenRead(work: () => Promise<FormState>, key: string): Promise<
 }
 
 /** Short while the server still judges: the first forecast, or the plan after something was changed. */
-function pauseBefore({ outlook, rink }: TonightView, awaited: Awaited): number {
+function pauseBefore({ outlook, rink, lastReadFailed }: TonightView, awaited: Awaited): number {
   if (OFF_SEASON[rink.phase]) return MINUTE_MILLIS
-  if (!outlook) return SOON
+  if (!outlook) return lastReadFailed ? MINUTE_MILLIS / 4 : SOON
   const isAwaited = awaited !== null && outlook.judgedAt === awaited.judgedAt && Date.now() < awaited.until
   return isAwaited ? SOON : MINUTE_MILLIS
 }

@@ -11,7 +11,7 @@ import { KIND_WORDS } from '@/lib/words/log'
 import { writeEntryAction } from '../actions'
 import { MainFields, MoreFields } from './entry-fields'
 import { newValues, type EntryValues } from './entry-values'
-import { useSend } from './use-send'
+import { useSend } from '@/components/hooks/use-send'
 import { AgoFields, AnotherTime } from './when-fields'
 
 /** As the buttons stand: what is done most comes first. */

@@ -5,7 +5,7 @@ import { Button } from '@/components/ui/button'
 import { OUTCOMES, type Outcome } from '@/lib/schemas/log-choices'
 import { OUTCOME_WORDS } from '@/lib/words/log'
 import { answerSetAction } from '../actions'
-import { useSend } from './use-send'
+import { useSend } from '@/components/hooks/use-send'
 
 export interface SetQuestionProps {
   rinkId: string

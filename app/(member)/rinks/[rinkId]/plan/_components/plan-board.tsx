@@ -1,10 +1,10 @@
 // The plan: the sums follow what is typed at once. Without script the form goes to the address, and the server reckons.
 'use client'
-import { startTransition, useActionState, type MouseEvent } from 'react'
+import type { MouseEvent } from 'react'
+import { useSend } from '@/components/hooks/use-send'
 import { Button } from '@/components/ui/button'
 import { Notice } from '@/components/ui/notice'
 import { PrintButton } from '@/components/ui/print-button'
-import { IDLE } from '@/lib/http/form-state'
 import { unitsCode } from '@/lib/units'
 import type { WordOptions } from '@/lib/words/options'
 import { sumItems, sumsLead } from '@/lib/words/sums'
@@ -34,16 +34,15 @@ interface Props {
 }
 
 export function PlanBoard({ rinkId, initial, kept, reader, mayManage, today, years }: Props) {
-  const [state, keep, isPending] = useActionState(keepPlanAction, IDLE)
+  const { state, post, send, isSending } = useSend(keepPlanAction)
   // Without script the page comes back whole after keeping, and this is where what was typed is found again.
   const form = usePlanForm(state.values ?? initial, kept, reader.units)
   const { sums } = form
-  const send = (event: MouseEvent<HTMLButtonElement>) => {
+  const keep = (event: MouseEvent<HTMLButtonElement>) => {
     const element = event.currentTarget.form
     if (!element) return
-    // By hand, because React empties a form that it sends itself.
     event.preventDefault()
-    startTransition(() => keep(new FormData(element)))
+    send(new FormData(element))
   }
   return (
     <>
@@ -53,7 +52,7 @@ export function PlanBoard({ rinkId, initial, kept, reader, mayManage, today, yea
       <PrintedGround form={form} reader={reader} />
       <SectionFigure sums={sums} reader={reader} />
       <div className="gap-x-14 lg:grid lg:grid-cols-[1.25fr_1fr] lg:grid-rows-[auto_1fr] print:block">
-        <form action={keep} className="mt-8 print:hidden" noValidate onSubmit={(event) => event.preventDefault()}>
+        <form action={post} className="mt-8 print:hidden" noValidate onSubmit={(event) => event.preventDefault()}>
           <input type="hidden" name="rinkId" value={rinkId} />
           <input type="hidden" name="units" value={unitsCode(reader.units)} />
           <h2 className="mb-3 font-semibold">The ground</h2>
@@ -72,7 +71,7 @@ export function PlanBoard({ rinkId, initial, kept, reader, mayManage, today, yea
               </Button>
             )}
             {mayManage ? (
-              <Button type="submit" onClick={send} disabled={isPending}>
+              <Button type="submit" onClick={keep} disabled={isSending}>
                 Keep these for the rink
               </Button>
             ) : null}

@@ -1,6 +1,7 @@
 // A button that does one thing to one source of water.
 'use client'
-import { ActionForm, type FormAction } from '@/components/ui/action-form'
+import { ActionForm } from '@/components/ui/action-form'
+import type { FormAction } from '@/lib/http/form-state'
 
 export function OneTap({
   action,

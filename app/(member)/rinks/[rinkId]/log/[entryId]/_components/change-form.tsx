@@ -7,7 +7,7 @@ import { unitsCode, type Units } from '@/lib/units'
 import { changeEntryAction } from '../../actions'
 import { MainFields, Note, Water } from '../../_components/entry-fields'
 import type { EntryValues } from '../../_components/entry-values'
-import { useSend } from '../../_components/use-send'
+import { useSend } from '@/components/hooks/use-send'
 import { DayAndTime } from '../../_components/when-fields'
 
 interface ChangeFormProps {

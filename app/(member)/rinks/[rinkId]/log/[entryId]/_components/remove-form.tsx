@@ -3,7 +3,7 @@
 import { Button } from '@/components/ui/button'
 import { Notice } from '@/components/ui/notice'
 import { deleteEntryAction, restoreEntryAction } from '../../actions'
-import { useSend } from '../../_components/use-send'
+import { useSend } from '@/components/hooks/use-send'
 
 export function RemoveForm({ rinkId, entryId, isDeleted }: { rinkId: string; entryId: string; isDeleted: boolean }) {
   const { state, post, submit, isSending } = useSend(isDeleted ? restoreEntryAction : deleteEntryAction)

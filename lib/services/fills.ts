@@ -1,8 +1,6 @@
 // Running a fill: start, pause, resume, look, finish. Each is one transaction, and of two people at once one is told of the other.
 import {
-  deleteFill,
   findNewestFill,
-  finishFill as closeFill,
   insertFill,
   insertFillCheck,
   insertFillSession,
@@ -12,32 +10,19 @@ import {
   type Fill,
 } from '@/db/queries/fills'
 import { enqueuePull, enqueueRefresh } from '@/db/queries/jobs'
-import { countChange, movePhase } from '@/db/queries/rink-settings'
-import { insertEntry } from '@/db/queries/log-entries'
+import { countChange, lockRink, movePhase } from '@/db/queries/rink-settings'
 import { insertReportedSheet } from '@/db/queries/sheet-states'
-import { getRinkForJudging, type RinkForJudging } from '@/db/queries/rinks'
-import type { Db } from '@/db/knex'
-import type { RinkAccess } from '@/lib/access/proofs'
+import { getRinkForJudging } from '@/db/queries/rinks'
 import { requireRink } from '@/lib/access/require-rink'
-import { nightDateOf } from '@/lib/advice/night'
 import type { ServiceContext } from '@/lib/context'
 import { ConflictError } from '@/lib/errors'
 import { hasIce } from '@/lib/schemas/rink-choices'
 import type { CheckFillInput, ResumeFillInput, StartFillInput } from '@/lib/schemas/fills'
-import { litresBy } from './fill-facts'
+import { endFill, type OpenFill } from './end-fill'
 import { setFillReminders } from './fill-reminders'
 
-/** Less water than this in all was no fill. [L] Ours. */
-const LEAST_LITRES = 1
 /** What there is before the first ice. */
 const OPEN_WATER = { thicknessMm: 0, temperatureC: 0, snowCoverCm: 0 }
-
-interface OpenFill {
-  trx: Db
-  access: RinkAccess<'writeLog'>
-  rink: RinkForJudging
-  fill: Fill
-}
 
 /**
  * Starts a fill with the hose running.
@@ -48,6 +33,7 @@ export async function startFill(context: ServiceContext, input: StartFillInput):
   const { db, now, viewer } = context
   const access = await requireRink(context, input.rinkId, 'writeLog')
   await db.transaction(async (trx) => {
+    await lockRink(trx, access)
     const rink = await getRinkForJudging(trx, access.rinkId)
     const targetDepthMm = input.targetDepthMm ?? rink.water.fillDepthMm
     const fillId = await insertFill(trx, access, { startedBy: viewer.userId, targetDepthMm }, now)
@@ -108,42 +94,18 @@ export async function finishFill(context: ServiceContext, { rinkId }: { rinkId: 
   const { now } = context
   await atOpenFill(context, rinkId, async (open) => {
     const { trx, access } = open
-    if (!(await endFill(context, open, ''))) return
-    await insertReportedSheet(trx, rinkId, OPEN_WATER, now)
-    await movePhase(trx, access, 'freezing', now)
+    const isFilled = await endFill(context, open, '')
+    if (isFilled) await insertReportedSheet(trx, rinkId, OPEN_WATER, now)
+    await movePhase(trx, access, isFilled ? 'freezing' : 'waiting', now)
   })
 }
 
 /** The fill came to nothing, a torn liner for one: its water is logged, and the rink waits again. */
 export async function giveUpFill(context: ServiceContext, { rinkId }: { rinkId: string }): Promise<void> {
   await atOpenFill(context, rinkId, async (open) => {
-    const isEnded = await endFill(context, open, 'Given up before it was full.')
-    if (isEnded) await movePhase(open.trx, open.access, 'waiting', context.now)
+    await endFill(context, open, 'Given up before it was full.')
+    await movePhase(open.trx, open.access, 'waiting', context.now)
   })
-}
-
-/** @returns false when no water ran: then the fill is gone and the rink waits. */
-async function endFill({ now, viewer }: ServiceContext, open: OpenFill, note: string): Promise<boolean> {
-  const { trx, access, rink, fill } = open
-  await stopFillSession(trx, fill.id, now)
-  const waterL = litresBy(await listFillSessions(trx, fill.id), now)
-  await closeFill(trx, fill.id, now)
-  await setFillReminders(trx, access, { rink, fill, now, viewer })
-  await enqueueRefresh(trx, rink.id)
-  if (waterL < LEAST_LITRES) {
-    await deleteFill(trx, fill.id)
-    await movePhase(trx, access, 'waiting', now)
-    return false
-  }
-  const water = { waterL, waterTemperatureC: rink.water.temperatureC, waterKind: rink.water.kind }
-  const when = { happenedAt: now, nightDate: nightDateOf(now, rink.timeZone) }
-  await insertEntry(
-    trx,
-    access,
-    { kind: 'fill', entryKey: fill.id, writtenBy: viewer.userId, ...when, ...water, note },
-    now,
-  )
-  return true
 }
 
 async function atOpenFill(
@@ -153,8 +115,13 @@ async function atOpenFill(
 ): Promise<void> {
   const access = await requireRink(context, rinkId, 'writeLog')
   await context.db.transaction(async (trx) => {
+    // The rink before the fill, as its settings do: of two who each held one, both would wait.
+    await lockRink(trx, access)
     const fill = await lockOpenFill(trx, access)
-    if (!fill) throw new ConflictError('This fill is finished. Load the page again to see how it stands.')
-    await work({ trx, access, fill, rink: await getRinkForJudging(trx, access.rinkId) })
+    const rink = await getRinkForJudging(trx, access.rinkId)
+    if (!fill || rink.phase !== 'filling') {
+      throw new ConflictError('This fill is finished. Load the page again to see how it stands.')
+    }
+    await work({ trx, access, fill, rink })
   })
 }

@@ -1,4 +1,5 @@
 // Changing what a rink's advice depends on, one page at a time. Each change is counted, and the night is judged again.
+import { lockOpenFill } from '@/db/queries/fills'
 import { findOrCreateGridCell } from '@/db/queries/grid-cells'
 import { enqueuePull, enqueueRefresh } from '@/db/queries/jobs'
 import { changeRink, lockRink, replaceAvailableHours, type RinkChanges } from '@/db/queries/rink-settings'
@@ -16,6 +17,7 @@ import type {
   ChangeYardInput,
 } from '@/lib/schemas/rink-settings'
 import { cellOf } from '@/lib/weather/cell'
+import { endFill, likelyEnd } from './end-fill'
 import { placeOf } from './place-rink'
 import { reportIce } from './rinks'
 
@@ -78,14 +80,28 @@ export async function changeYard(context: ServiceContext, { rinkId, ...yard }: C
   }))
 }
 
-/** What there is now, and how thick it was measured. Another phase may be the first for which the weather is read. */
+/**
+ * What there is now, and how thick it was measured. Another phase may be the first for which the weather is read, and
+ * ends a fill that nobody has ended.
+ */
 export async function changeIce(context: ServiceContext, input: ChangeIceInput): Promise<void> {
   await changing(context, input.rinkId, async (trx) => {
-    const { phase, gridCellId } = await getRinkForJudging(trx, input.rinkId)
-    if (phase !== input.phase) await enqueuePull(trx, gridCellId)
+    const rink = await getRinkForJudging(trx, input.rinkId)
+    if (rink.phase !== input.phase) await enqueuePull(trx, rink.gridCellId)
+    if (input.phase !== 'filling') await endOpenFill(context, trx, rink)
     if (input.iceThicknessMm !== undefined) await reportIce(trx, input.rinkId, input.iceThicknessMm, context.now)
     return { phase: input.phase }
   })
+}
+
+/** Counts the water up to when the fill was likely over: a hose that nobody stopped here did not run until today. */
+async function endOpenFill(context: ServiceContext, trx: Db, rink: RinkForJudging): Promise<void> {
+  const access = await requireRink({ ...context, db: trx }, rink.id, 'writeLog')
+  const fill = await lockOpenFill(trx, access)
+  if (!fill) return
+  const open = { trx, access, rink, fill }
+  const note = 'Nobody finished this fill; it ended when the rink was set otherwise in its settings.'
+  await endFill(context, open, note, await likelyEnd(open, context.now))
 }
 
 /** When somebody can go out, and how often in a night. */

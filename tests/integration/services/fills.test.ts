@@ -3,9 +3,11 @@ import { describe, expect, test } from 'vitest'
 import { findMessageToDeliver } from '@/db/queries/deliveries'
 import { ConflictError, ForbiddenError, NotFoundError } from '@/lib/errors'
 import { HOUR_MILLIS } from '@/lib/physics/constants'
+import { changeIceSchema } from '@/lib/schemas/rink-settings'
 import { checkFillSchema, resumeFillSchema, startFillSchema } from '@/lib/schemas/fills'
 import { getFilling } from '@/lib/services/filling'
 import { checkFill, finishFill, giveUpFill, pauseFill, resumeFill, startFill } from '@/lib/services/fills'
+import { changeIce } from '@/lib/services/rink-settings'
 import { renderEmail, renderPush } from '@/lib/services/render-message'
 import type { Actor } from '@/tests/support/cast'
 import { givenCast, givenDatabase } from '@/tests/support/given-cast'
@@ -136,6 +138,60 @@ describe('finishing', () => {
     expect(await database.db('log_entries').where({ rink_id: cast.rinkId }).first('water_l')).toEqual({ water_l: 1500 })
     await start(cast.keeper, later(30))
     expect((await filling(later(31))).fill?.progress.litres).toBeCloseTo(1500, 6)
+  })
+})
+
+describe('a fill that nobody ended, and a rink set otherwise in its settings', () => {
+  const set = (at: Date, fields: Record<string, string> = {}) =>
+    changeIce(cast.keeper.at(at), changeIceSchema.parse(form({ phase: 'skating', iceThickness: '12', ...fields })))
+  const fillEntry = () => database.db('log_entries').where({ rink_id: cast.rinkId, kind: 'fill' }).first()
+
+  test('ends when the water wanted was in, not three weeks later, and Finish finds it finished', async () => {
+    await start(cast.keeper)
+    await set(later(21 * 24))
+    expect(await phase()).toBe('skating')
+    // 10,000 L at 25 L/min: 6 h 40 min.
+    expect(await fillEntry()).toMatchObject({ water_l: 10_000, happened_at: later(6 + 2 / 3) })
+    expect((await filling(later(21 * 24))).fill).toBeNull()
+    expect(await reminders()).toHaveLength(0)
+    await expect(finish(cast.crew, later(21 * 24))).rejects.toThrow(ConflictError)
+    expect(await phase()).toBe('skating')
+    const sheets = database.db('sheet_states').where({ rink_id: cast.rinkId }).orderBy('as_of', 'desc')
+    expect(await sheets.first()).toMatchObject({ thickness_mm: 120 })
+  })
+
+  test('counts a hose that somebody looked after later, one turned off, and one that has only begun', async () => {
+    await start(cast.keeper)
+    await look(cast.crew, later(8))
+    await set(later(30))
+    expect(await fillEntry()).toMatchObject({ water_l: 8 * 1500, happened_at: later(8) })
+    await set(later(31), { phase: 'waiting', iceThickness: '' })
+    await database.db('log_entries').where({ rink_id: cast.rinkId }).delete()
+    await start(cast.keeper, later(32))
+    await pause(cast.keeper, later(34))
+    await set(later(60), { phase: 'closed' })
+    expect(await fillEntry()).toMatchObject({ water_l: 2 * 1500, happened_at: later(34) })
+  })
+
+  test('is left open where the rink is said to be filling still', async () => {
+    await start(cast.keeper)
+    await set(later(1), { phase: 'filling' })
+    expect((await filling(later(1))).fill).not.toBeNull()
+  })
+
+  test('left open from before, is neither finished nor given up on a rink with ice', async () => {
+    await start(cast.keeper)
+    await database.db('rinks').where({ id: cast.rinkId }).update({ phase: 'skating' })
+    await expect(finish(cast.crew, later(2))).rejects.toThrow(ConflictError)
+    await expect(giveUpFill(cast.crew.at(later(2)), { rinkId: cast.rinkId })).rejects.toThrow(ConflictError)
+    expect(await phase()).toBe('skating')
+  })
+
+  test('finished and set at once: one after the other, and it ends once', async () => {
+    await start(cast.keeper)
+    await Promise.allSettled([finish(cast.crew, later(4)), set(later(4))])
+    expect(await database.db('log_entries').where({ rink_id: cast.rinkId, kind: 'fill' })).toHaveLength(1)
+    expect(await phase()).toBe('skating')
   })
 })
 

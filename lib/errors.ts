@@ -1,6 +1,7 @@
 // Errors a person may see. Services throw them; route(), formAction() and orNotFound() translate them, nobody else.
 
-export type AppErrorCode = 'invalid_input' | 'not_signed_in' | 'not_found' | 'forbidden' | 'conflict' | 'rate_limited'
+export type AppErrorCode =
+  'invalid_input' | 'not_signed_in' | 'not_found' | 'forbidden' | 'conflict' | 'other_account' | 'rate_limited'
 
 /** `message` is fit for the person; anything that is not an AppError is a bug and stays inside. */
 export class AppError extends Error {
@@ -42,6 +43,13 @@ export class ForbiddenError extends AppError {
   }
 }
 
+/** What a device kept for one account arrives while another is signed in there: to be sent again later, not refused. */
+export class OtherAccountError extends AppError {
+  constructor() {
+    super('other_account', 'Somebody else is signed in here. Sign in as the person who entered this.')
+  }
+}
+
 /** `latest` holds the fields that the form must send to overwrite deliberately. */
 export class ConflictError extends AppError {
   constructor(
@@ -54,7 +62,12 @@ export class ConflictError extends AppError {
 
 export class RateLimitedError extends AppError {
   constructor(readonly retryAfterSeconds: number) {
-    const hours = Math.ceil(retryAfterSeconds / 3600)
-    super('rate_limited', `Too many tries. Wait ${hours > 1 ? `${hours} hours` : 'a few minutes'} and try again.`)
+    super('rate_limited', `Too many tries. Try again in ${waitText(retryAfterSeconds)}.`)
   }
+}
+
+function waitText(seconds: number): string {
+  const minutes = Math.ceil(seconds / 60)
+  if (minutes > 60) return `${Math.ceil(minutes / 60)} hours`
+  return minutes === 1 ? '1 minute' : `${minutes} minutes`
 }

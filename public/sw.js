@@ -3,6 +3,9 @@
 
 const PAGES = 'night-sheets-1'
 const FILES = 'files-1'
+/** What the server has not been told yet. */
+const UNTOLD = 'untold-1'
+const NAMES = [PAGES, FILES, UNTOLD]
 const MOST_PAGES = 10
 const MOST_FILES = 120
 /** A phone at the far end of a yard may hold a weak line for minutes. */
@@ -22,7 +25,7 @@ self.addEventListener('activate', (event) => event.waitUntil(takeOver()))
 
 async function takeOver() {
   const names = await caches.keys()
-  await Promise.all(names.filter((name) => name !== PAGES && name !== FILES).map((name) => caches.delete(name)))
+  await Promise.all(names.filter((name) => !NAMES.includes(name)).map((name) => caches.delete(name)))
   await self.clients.claim()
 }
 
@@ -71,17 +74,31 @@ async function openTab(address) {
   return open ? open.focus() : self.clients.openWindow(target.href)
 }
 
+const SUBSCRIPTIONS = '/api/push-subscriptions'
+
 /** The browser gave the device a new address: without this its owner would stop hearing from us. */
 self.addEventListener('pushsubscriptionchange', (event) => event.waitUntil(replaceSubscription(event)))
 
 async function replaceSubscription({ oldSubscription, newSubscription }) {
   const subscription = newSubscription ?? (await subscribeAgain(oldSubscription))
   if (!subscription) return
-  await fetch('/api/push-subscriptions', {
-    method: 'PUT',
-    headers: { 'Content-Type': 'application/json' },
-    body: JSON.stringify({ oldEndpoint: oldSubscription?.endpoint ?? null, subscription: subscription.toJSON() }),
-  })
+  const body = JSON.stringify({ oldEndpoint: oldSubscription?.endpoint ?? null, subscription: subscription.toJSON() })
+  const untold = await caches.open(UNTOLD)
+  await untold.put(SUBSCRIPTIONS, new Response(body))
+  await tellReplacement()
+}
+
+/** Also with every page, until the server has answered: a browser that starts up may have no network yet. */
+async function tellReplacement() {
+  const untold = await caches.open(UNTOLD)
+  const body = await (await untold.match(SUBSCRIPTIONS))?.text()
+  if (!body) return
+  const present = await self.registration.pushManager.getSubscription()
+  // Switched off meanwhile, or replaced once more: then this is no news.
+  const isNews = present?.endpoint === JSON.parse(body).subscription.endpoint
+  const headers = { 'Content-Type': 'application/json' }
+  const response = isNews && (await fetch(SUBSCRIPTIONS, { method: 'PUT', headers, body }).catch(() => null))
+  if (!isNews || isLastWord(response)) await untold.delete(SUBSCRIPTIONS)
 }
 
 function subscribeAgain(oldSubscription) {
@@ -98,8 +115,9 @@ self.addEventListener('fetch', (event) => {
   const url = new URL(request.url)
   if (url.origin !== self.location.origin) return
   // Somebody signs in or out: whoever comes next must not find the sheets of whoever was here before.
-  if (request.method === 'POST' && DOORS.test(url.pathname)) event.waitUntil(caches.delete(PAGES))
+  if (request.method === 'POST' && DOORS.test(url.pathname)) event.waitUntil(forget([PAGES]))
   if (request.method !== 'GET') return
+  if (request.mode === 'navigate') event.waitUntil(tellReplacement())
   if (url.pathname.startsWith('/_next/static/')) event.respondWith(answerFile(event))
   else if (request.mode === 'navigate') event.respondWith(answerPage(event, url.pathname))
   else if (NIGHT_SHEET.test(url.pathname) && isVisit(request)) event.waitUntil(keepFresh(url.pathname))
@@ -109,8 +127,12 @@ self.addEventListener('fetch', (event) => {
 
 const DATABASE = 'nightsheet'
 const CHECK_OFFS = 'check-offs'
-/** Sign-in, waiting and broken servers pass; other refusals are the last word. */
-const PASSING = [401, 408, 425, 429]
+/** Sign-in, waiting, another account signed in and broken servers pass; other refusals are the last word. */
+const PASSING = [401, 408, 409, 425, 429]
+
+function isLastWord(response) {
+  return response !== null && response.status < 500 && !PASSING.includes(response.status)
+}
 
 self.addEventListener('sync', (event) => {
   if (event.tag === CHECK_OFFS) event.waitUntil(sendCheckOffs())
@@ -132,7 +154,7 @@ async function sendCheckOff(store, checkOff) {
     headers: { 'Content-Type': 'application/json' },
     body: JSON.stringify(checkOff),
   }).catch(() => null)
-  if (response === null || response.status >= 500 || PASSING.includes(response.status)) return true
+  if (!isLastWord(response)) return true
   if (response.ok) {
     await answerOf(store('readwrite').delete(checkOff.entryKey))
     return false
@@ -165,17 +187,25 @@ self.addEventListener('message', (event) => {
   // An open sheet was read anew, or somebody changed it: the copy shall not bring back what they undid.
   if (NIGHT_SHEET.test(sheet)) event.waitUntil(keepFresh(sheet, isChanged))
   if (event.data !== 'forget') return
-  const forgotten = Promise.all([caches.delete(PAGES), caches.delete(FILES)])
-  event.waitUntil(forgotten.then(() => event.ports[0]?.postMessage('forgotten')))
+  event.waitUntil(forget(NAMES).then(() => event.ports[0]?.postMessage('forgotten')))
 })
+
+/** Raised when somebody leaves or comes in: what was asked for before is not kept afterwards. */
+let visit = 1
+
+async function forget(names) {
+  visit += 1
+  await Promise.all(names.map((name) => caches.delete(name)))
+}
 
 /** Network first; the copy when the network fails, the server breaks, or neither answers in time. */
 async function answerPage(event, path) {
+  const askedIn = visit
   const fromNetwork = fetch(event.request)
   if (!NIGHT_SHEET.test(path)) return fromNetwork.catch(offlinePage)
   const kept = await (await caches.open(PAGES)).match(path)
   const answered = fromNetwork.then((response) => {
-    event.waitUntil(keepPage(path, response.clone()))
+    event.waitUntil(keepPage(path, response.clone(), askedIn))
     return response.status >= 500 && kept ? kept : response
   })
   event.waitUntil(answered.catch(() => undefined))
@@ -185,13 +215,13 @@ async function answerPage(event, path) {
 }
 
 /** After a redirect or a refusal the reader may no longer see the sheet: then the copy goes too. */
-async function keepPage(path, response) {
+async function keepPage(path, response, askedIn) {
   if (response.status >= 500) return
   const pages = await caches.open(PAGES)
   const text = response.ok && !response.redirected ? await response.clone().text() : ''
   if (BROKEN.test(text)) return
   await pages.delete(path)
-  if (!text || REFUSED.test(text)) return
+  if (!text || REFUSED.test(text) || askedIn !== visit) return
   await pages.put(path, response)
   await drop(pages, MOST_PAGES)
 }
@@ -200,8 +230,9 @@ async function keepPage(path, response) {
 async function keepFresh(path, isChanged = false) {
   const kept = await (await caches.open(PAGES)).match(path)
   if (!isChanged && kept && Date.now() - Date.parse(kept.headers.get('Date')) < FRESH_MILLIS) return
+  const askedIn = visit
   await fetch(path, { redirect: 'manual', headers: { Accept: 'text/html' } }).then(
-    (response) => keepPage(path, response),
+    (response) => keepPage(path, response, askedIn),
     () => undefined,
   )
 }

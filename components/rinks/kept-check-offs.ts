@@ -24,8 +24,8 @@ const DATABASE = 'nightsheet'
 const STORE = 'check-offs'
 const SYNC_TAG = 'check-offs'
 
-/** Sign-in, waiting and broken servers pass; other refusals are the last word. */
-const PASSING = new Set([401, 408, 425, 429])
+/** Sign-in, waiting, another account signed in and broken servers pass; other refusals are the last word. */
+const PASSING = new Set([401, 408, 409, 425, 429])
 
 const store = createStore(DATABASE, STORE)
 

@@ -9,7 +9,7 @@ export function faultsByField(error: ZodError): Record<string, string> {
   return faults
 }
 
-export const INVALID_INPUT_MESSAGE = 'Some entries need another look.'
+export const INVALID_INPUT_MESSAGE = 'Something here needs another look.'
 
 export const STATUS: Record<AppErrorCode, number> = {
   invalid_input: 422,
@@ -17,5 +17,6 @@ export const STATUS: Record<AppErrorCode, number> = {
   not_found: 404,
   forbidden: 403,
   conflict: 409,
+  other_account: 409,
   rate_limited: 429,
 }

@@ -11,7 +11,7 @@ import { judgePasses } from '@/lib/advice/move-pass'
 import { tonightDate } from '@/lib/advice/night'
 import { unpackNight } from '@/lib/advice/night-model'
 import type { ServiceContext } from '@/lib/context'
-import { ForbiddenError, InvalidInputError } from '@/lib/errors'
+import { InvalidInputError, OtherAccountError } from '@/lib/errors'
 import { HOUR_MILLIS, MINUTE_MILLIS } from '@/lib/physics/constants'
 import type { CheckOffPass, SentCheckOff, UndoPass } from '@/lib/schemas/floods'
 import { readNightModel } from './night-model'
@@ -28,13 +28,14 @@ type Sent = Partial<Pick<SentCheckOff, 'entryKey' | 'pouredAt' | 'userId'>>
  * Logs a pass as poured. The plan is judged anew, since the sheet has grown and carries water.
  * Checking off the same pass again, or sending the same check-off twice, changes nothing.
  *
- * @throws ForbiddenError for skaters, and for what somebody else kept on this device; InvalidInputError for a night other
- *   than the one that was tonight when it was poured.
+ * @throws ForbiddenError for skaters; OtherAccountError for what somebody else kept on this device; InvalidInputError for a
+ *   night other than the one that was tonight when it was poured.
  */
 export async function checkOffPass(context: ServiceContext, input: CheckOffPass & Sent): Promise<void> {
-  const access = await requireRink(context, input.rinkId, 'writeLog')
   const { db, now, viewer } = context
-  if (input.userId !== undefined && input.userId !== viewer.userId) throw new ForbiddenError()
+  // Before access: that whoever is signed in here now may not see the rink is no answer to who poured.
+  if (input.userId !== undefined && input.userId !== viewer.userId) throw new OtherAccountError()
+  const access = await requireRink(context, input.rinkId, 'writeLog')
   const pouredAt = pouredAtOf(input, now)
   const rink = await getRinkIfTonight({ ...context, now: pouredAt }, input)
   const waterTemperatureC = input.waterTemperatureC ?? rink.water.temperatureC

@@ -55,6 +55,14 @@ test('the alerts’ text is the advised plan’s: keeping a plan promises nothin
   expect(await messages()).toEqual(before)
 })
 
+test('a pass poured in the morning, when tonight had begun, is no part of a plan any more', async () => {
+  const at1010 = cast.crew.at(new Date('2027-01-12T15:10:00Z'))
+  await checkOffPass(at1010, { rinkId: cast.rinkId, nightDate: NIGHT, passNumber: 1, layerMm: 3 })
+  await keepOwnPasses(cast.keeper.at(NOW), two())
+  const kept = await database.db('own_passes').where({ rink_id: cast.rinkId }).select('pass_number')
+  expect(kept).toEqual([{ pass_number: 2 }])
+})
+
 test('back to the advised plan', async () => {
   const advised = await tonight(cast.keeper)
   await keepOwnPasses(cast.keeper.at(NOW), two())
@@ -170,7 +178,9 @@ describe('check-offs that a phone kept without a network', () => {
 
   test('are not sent in another person’s name, nor when they are days old', async () => {
     const later = new Date('2027-01-13T01:30:00Z')
-    await expect(checkOffPass(cast.keeper.at(later), sent())).rejects.toThrow(ForbiddenError)
+    for (const other of [cast.keeper, cast.skater, cast.stranger]) {
+      await expect(checkOffPass(other.at(later), sent())).rejects.toMatchObject({ code: 'other_account' })
+    }
     await expect(checkOffPass(cast.crew.at(new Date('2027-01-16T01:00:00Z')), sent())).rejects.toThrow(
       InvalidInputError,
     )

@@ -8,6 +8,7 @@ import {
   InvalidInputError,
   NotFoundError,
   NotSignedInError,
+  OtherAccountError,
   RateLimitedError,
 } from '@/lib/errors'
 import { readJson } from '@/lib/http/read-json'
@@ -44,6 +45,11 @@ test.each([
   [new NotSignedInError(), 401, { code: 'not_signed_in', message: 'Sign in first.' }],
   [new NotFoundError('Rink'), 404, { code: 'not_found', message: 'Rink not found.' }],
   [new ForbiddenError(), 403, { code: 'forbidden', message: 'Your role on this rink does not allow that.' }],
+  [
+    new OtherAccountError(),
+    409,
+    { code: 'other_account', message: 'Somebody else is signed in here. Sign in as the person who entered this.' },
+  ],
   [new ConflictError('Taken.'), 409, { code: 'conflict', message: 'Taken.' }],
 ])('%o becomes its status', async (error, status, fault) => {
   const answer = await failing(error)(new Request(URL_HERE), {})
@@ -54,6 +60,16 @@ test.each([
 test('a limit says how long to wait', async () => {
   const answer = await failing(new RateLimitedError(90))(new Request(URL_HERE), {})
   expect([answer.status, answer.headers.get('retry-after')]).toEqual([429, '90'])
+})
+
+test.each([
+  [30, '1 minute'],
+  [90, '2 minutes'],
+  [12 * 60, '12 minutes'],
+  [3600, '60 minutes'],
+  [3601, '2 hours'],
+])('a wait of %i s is said as %s', (seconds, wait) => {
+  expect(new RateLimitedError(seconds).message).toBe(`Too many tries. Try again in ${wait}.`)
 })
 
 test('a bug is logged and shows no internals', async () => {

@@ -11,3 +11,13 @@ export async function countHit(db: Db, key: string, windowStartsAt: Date): Promi
   if (!row) throw new Error('An upsert returned no row')
   return row.hits
 }
+
+export async function takeBackHit(db: Db, key: string, windowStartsAt: Date): Promise<void> {
+  const counter = { key, window_starts_at: windowStartsAt }
+  const lowered = await db('rate_limits').where(counter).where('hits', '>', 1).decrement('hits', 1)
+  // A row stands for at least one try.
+  if (lowered === 0)
+    await db('rate_limits')
+      .where({ ...counter, hits: 1 })
+      .delete()
+}

@@ -18,7 +18,7 @@ import type { OpenContext } from '@/lib/context'
 import { InvalidInputError } from '@/lib/errors'
 import type { MailRequestInput, NewPasswordByLinkInput, PasswordSignInInput, SignUpInput } from '@/lib/schemas/accounts'
 import { promiseAlreadyRegistered, promiseLink } from './account-mail'
-import { spend, spendByVisitor } from './rate-limits'
+import { giveBackOnEmail, spendByVisitor, spendOnEmail } from './rate-limits'
 
 export interface SignedIn {
   userId: string
@@ -42,7 +42,7 @@ const LINK_REFUSED = 'This link has been used or has run out. Ask for a new one.
 export async function signUp(context: OpenContext, { email, name, password }: SignUpInput): Promise<void> {
   const { db, now } = context
   await spendByVisitor(context, 'signUpByVisitor')
-  await spend(context, 'mailByEmail', email)
+  await spendOnEmail(context, { limit: 'mailByEmail', email, from: context.ipAddress })
   const passwordHash = await hashPassword(password)
   await db.transaction(async (trx) => {
     const user = await putUnconfirmedUser(trx, { email, name, passwordHash }, now)
@@ -65,7 +65,7 @@ export async function requestLink(
   purpose: 'sign-in' | 'reset',
 ): Promise<void> {
   await spendByVisitor(context, 'mailByVisitor')
-  await spend(context, 'mailByEmail', email)
+  await spendOnEmail(context, { limit: 'mailByEmail', email, from: context.ipAddress })
   const user = await findUserForSignIn(context.db, email)
   if (user) await context.db.transaction((trx) => promiseLink(trx, user.id, purpose, context.now))
 }
@@ -76,16 +76,20 @@ export async function signInWithPassword(
   { email, password }: PasswordSignInInput,
 ): Promise<SignedIn> {
   await spendByVisitor(context, 'signInByVisitor')
-  await spend(context, 'signInByEmail', email)
+  const attempt = { limit: 'signInByEmail', email, from: context.ipAddress } as const
+  await spendOnEmail(context, attempt)
   const user = await findUserForSignIn(context.db, email)
   const matches = await verifyPassword(user?.passwordHash, password)
-  if (user && matches && user.emailVerifiedAt) return signedIn(context, user.id)
+  if (user && matches && user.emailVerifiedAt) {
+    await giveBackOnEmail(context, attempt)
+    return signedIn(context, user.id)
+  }
   if (user && matches) await resendConfirmation(context, user.id, email)
   throw new InvalidInputError(SIGN_IN_REFUSED)
 }
 
 async function resendConfirmation(context: OpenContext, userId: string, email: string): Promise<void> {
-  await spend(context, 'mailByEmail', email)
+  await spendOnEmail(context, { limit: 'mailByEmail', email, from: context.ipAddress })
   await context.db.transaction((trx) => promiseLink(trx, userId, 'verify', context.now))
 }
 

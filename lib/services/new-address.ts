@@ -7,7 +7,7 @@ import { InvalidInputError } from '@/lib/errors'
 import type { EmailChangeInput } from '@/lib/schemas/accounts'
 import { promiseAddressChangedMail, promiseAlreadyRegistered, promiseLink } from './account-mail'
 import { requireOwner } from './own-account'
-import { spend } from './rate-limits'
+import { spendOnEmail } from './rate-limits'
 
 const LINK_REFUSED = 'This link has been used or has run out. Ask for a new one.'
 const NOT_YOURS = 'Another account asked for this address. Sign in with that one, and open the link again.'
@@ -19,7 +19,7 @@ const NOT_YOURS = 'Another account asked for this address. Sign in with that one
 export async function askForEmailChange(context: ServiceContext, input: EmailChangeInput): Promise<void> {
   const { db, now, viewer } = context
   await requireOwner(context, input.currentPassword)
-  await spend(context, 'mailByEmail', input.email)
+  await spendOnEmail(context, { limit: 'mailByEmail', email: input.email, from: viewer.userId })
   const known = await findUserForSignIn(db, input.email)
   if (known?.id === viewer.userId) {
     throw new InvalidInputError('Nothing was changed.', { email: 'This is your address already.' })

@@ -153,6 +153,16 @@ test('mails to one address are limited, known or not, and the limit ends with th
   }
 })
 
+test('somebody else cannot use up the mails that an owner may ask for', async () => {
+  const { email } = await newMember(database.db)
+  const other = visitor(database.db, NOW, '203.0.113.9')
+  for (let hit = 0; hit < LIMITS.mailByEmailAndVisitor.hits; hit++) await requestLink(other, { email }, 'sign-in')
+  for (let hit = 0; hit < LIMITS.mailByEmail.hits; hit++) {
+    await expect(requestLink(other, { email }, 'sign-in')).rejects.toMatchObject({ code: 'rate_limited' })
+  }
+  await expect(requestLink(visitor(database.db), { email }, 'sign-in')).resolves.toBeUndefined()
+})
+
 test('the address in the mail leads to the page of its purpose', () => {
   const id = '6b203df5-2bdf-4757-a047-5c08e20f33d1'
   const path = (purpose: 'verify' | 'sign-in' | 'reset') =>

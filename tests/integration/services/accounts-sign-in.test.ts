@@ -1,9 +1,10 @@
 // Signing in: one refusal for every reason, after the same work.
+import { randomUUID } from 'node:crypto'
 import { expect, test } from 'vitest'
 import { signInWithPassword, signUp, SIGN_IN_REFUSED } from '@/lib/services/accounts'
-import { LIMITS } from '@/lib/services/rate-limits'
+import { LIMITS, spendOnEmail } from '@/lib/services/rate-limits'
 import { givenDatabase } from '@/tests/support/given-cast'
-import { mailsTo, minutesLater, newEmail, newMember, PASSWORD, visitor } from '@/tests/support/visitor'
+import { mailsTo, minutesLater, newEmail, newMember, NOW, PASSWORD, visitor } from '@/tests/support/visitor'
 
 const database = givenDatabase()
 
@@ -17,6 +18,13 @@ async function refusal(email: string, password: string): Promise<unknown> {
       fields: error.fields,
     }),
   )
+}
+
+/** All the tries that the address has, each from somewhere else. */
+async function guessFromEverywhere(email: string): Promise<void> {
+  for (let hit = 0; hit < LIMITS.signInByEmail.hits; hit++) {
+    await spendOnEmail({ db: database.db, now: NOW }, { limit: 'signInByEmail', email, from: randomUUID() })
+  }
 }
 
 test('the right password of a confirmed address signs in', async () => {
@@ -56,9 +64,29 @@ test('the right password of an unconfirmed address brings a fresh link', async (
   expect((await mailsTo(database.db, email)).map(({ kind }) => kind)).toEqual(['verify-address', 'verify-address'])
 })
 
+test('whoever guesses from one place is stopped there, and shuts nobody else out', async () => {
+  const { email, userId } = await newMember(database.db)
+  const guesser = visitor(database.db, NOW, '203.0.113.9')
+  const guess = () => signInWithPassword(guesser, { email, password: 'a guess' })
+  for (let hit = 0; hit < LIMITS.signInByEmailAndVisitor.hits; hit++)
+    await expect(guess()).rejects.toThrow(SIGN_IN_REFUSED)
+  for (let hit = 0; hit < LIMITS.signInByEmail.hits; hit++) {
+    await expect(guess()).rejects.toMatchObject({ code: 'rate_limited' })
+  }
+  expect(await signInWithPassword(visitor(database.db), { email, password: PASSWORD })).toMatchObject({ userId })
+})
+
+test('the right password counts for no try', async () => {
+  const { email, userId } = await newMember(database.db)
+  const owner = visitor(database.db, NOW, '203.0.113.10')
+  for (let hit = 0; hit < LIMITS.signInByEmailAndVisitor.hits + 2; hit++) {
+    expect(await signInWithPassword(owner, { email, password: PASSWORD })).toMatchObject({ userId })
+  }
+})
+
 test('after too many tries on one address even the right password waits', async () => {
   const { email } = await newMember(database.db)
-  for (let hit = 0; hit < LIMITS.signInByEmail.hits; hit++) await refusal(email, 'a guess')
+  await guessFromEverywhere(email)
   const attempt = signInWithPassword(visitor(database.db), { email, password: PASSWORD })
   // NOW is on the quarter hour, so the whole window is still ahead.
   await expect(attempt).rejects.toMatchObject({ code: 'rate_limited', retryAfterSeconds: 900 })
@@ -68,6 +96,6 @@ test('after too many tries on one address even the right password waits', async 
 
 test('an unknown address is limited like a known one', async () => {
   const email = newEmail()
-  for (let hit = 0; hit < LIMITS.signInByEmail.hits; hit++) await refusal(email, 'a guess')
+  await guessFromEverywhere(email)
   expect(await refusal(email, 'a guess')).toMatchObject({ code: 'rate_limited' })
 })

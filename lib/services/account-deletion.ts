@@ -1,5 +1,5 @@
 // The end of an account: asked for, waited for, and taken back.
-import { listRinksKeptAlone, setDeletionDue } from '@/db/queries/users'
+import { listRinksKeptAlone, setDeletionDue } from '@/db/queries/account-ends'
 import type { ServiceContext } from '@/lib/context'
 import { DAY_MILLIS } from '@/lib/physics/constants'
 import type { DeletionInput } from '@/lib/schemas/accounts'

@@ -1,8 +1,12 @@
 // An unasked confirmation, sessions one by one, tests of channels, everything to take along, and the end of an account.
+import { setTimeout } from 'node:timers/promises'
+import type { Knex } from 'knex'
 import { beforeEach, describe, expect, test } from 'vitest'
 import { findMessageToDeliver } from '@/db/queries/deliveries'
+import { deleteMember } from '@/db/queries/members'
 import { pruneExpired } from '@/db/queries/prune'
 import { putPushSubscription } from '@/db/queries/push-subscriptions'
+import { systemRinkAccess } from '@/lib/access/system'
 import { openSession } from '@/lib/auth/sessions'
 import type { ServiceContext } from '@/lib/context'
 import { DAY_MILLIS } from '@/lib/physics/constants'
@@ -23,6 +27,16 @@ beforeEach(async () => {
 
 const as = (userId: string, now = NOW): ServiceContext => ({ db: database.db, now, viewer: { userId, isAdmin: false } })
 const daysLater = (days: number) => new Date(NOW.getTime() + days * DAY_MILLIS)
+/** Until somebody waits for a row, or for so long that nobody will. */
+async function waitForLock(db: Knex): Promise<void> {
+  for (let look = 0; look < 40; look++) {
+    const { rows } = await db.raw(
+      `select 1 from pg_stat_activity where wait_event_type = 'Lock' and datname = current_database()`,
+    )
+    if (rows.length > 0) return
+    await setTimeout(50)
+  }
+}
 const newestMessage = async (userId: string, kind: string) => {
   const row = await database.db('messages').where({ user_id: userId, kind }).orderBy('created_at', 'desc').first('id')
   return row && findMessageToDeliver(database.db, row.id)
@@ -144,6 +158,19 @@ describe('with a rink', () => {
     await askForDeletion(cast.keeper.at(NOW), { currentPassword: '' })
     await pruneExpired(database.db, daysLater(15))
     expect(await database.db('rinks').where({ id: cast.rinkId })).toHaveLength(1)
+  })
+
+  test('a keeper who leaves while the other’s account ends leaves no rink without a keeper', async () => {
+    const { rinkId, keeper, crew } = cast
+    await database.db('rink_members').where({ rink_id: rinkId, user_id: crew.userId }).update({ role: 'keeper' })
+    await askForDeletion(keeper.at(NOW), { currentPassword: '' })
+    const leaving = await database.db.transaction()
+    await deleteMember(leaving, systemRinkAccess(rinkId), crew.userId, NOW)
+    const ending = pruneExpired(database.db, daysLater(15))
+    await waitForLock(database.db)
+    await leaving.commit()
+    await ending
+    expect(await database.db('rinks').where({ id: rinkId })).toEqual([])
   })
 
   test('asking needs the password', async () => {

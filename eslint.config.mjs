@@ -39,7 +39,27 @@ const config = [
             zone('./app', './jobs', 'Routes promise work through services.'),
             zone('./app', './fakes', 'The product reaches fakes by URL.'),
             zone('./lib', './fakes', 'The product reaches fakes by URL.'),
-            zone('./app', './lib/access/system.ts', 'Only jobs act as the system.'),
+            ...['./app', './components', './lib/services', './lib/http', './lib/auth'].map((target) =>
+              zone(target, './lib/access/system.ts', 'Only jobs act as the system.'),
+            ),
+          ],
+        },
+      ],
+    },
+  },
+  {
+    files: ['components/**', 'db/**'],
+    ignores: ['db/seeds/**'],
+    rules: {
+      '@typescript-eslint/no-restricted-imports': [
+        'error',
+        {
+          patterns: [
+            {
+              group: ['@/lib/services/*'],
+              allowTypeImports: true,
+              message: 'Services stand above: routes and jobs call them. Their types may be named.',
+            },
           ],
         },
       ],

@@ -1,4 +1,5 @@
-// The scheduled job acts for nobody in particular. Importable from jobs/ only (eslint.config.mjs).
+// The scheduled job acts for nobody in particular. Jobs, seeds and tests import it; routes, screens and
+// services may not (eslint.config.mjs).
 import type { RinkPermission } from './permissions'
 import type { RinkAccess } from './proofs'
 

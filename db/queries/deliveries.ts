@@ -1,5 +1,6 @@
 // A promised message on its way out: claim, attempts, settlement.
 import type { Db } from '@/db/knex'
+import { isGranted, type Role } from '@/lib/access/permissions'
 import { FILL_DAY_KINDS } from './fill-days'
 import type { MessageKind, MessageState } from './messages'
 
@@ -15,7 +16,8 @@ export interface MessageToDeliver {
   email: string
   /** The person was promised newer news of the same night, or of the day to fill, on the same channel. */
   isOvertaken: boolean
-  /** The person has muted the night, switched the channel off or left the rink since; an invitation stands no more. */
+  /** The person has muted the night, switched the channel off, left the rink or may be told of it no more since; an
+   *  invitation stands no more. */
   isUnwanted: boolean
   /** Tries since it was promised, the last time that it was. */
   attempts: number
@@ -25,8 +27,9 @@ export interface MessageToDeliver {
 export async function findMessageToDeliver(db: Db, messageId: string): Promise<MessageToDeliver | undefined> {
   const message = await db('messages as m')
     .join('users as u', 'u.id', 'm.user_id')
-    .leftJoin('account_links as l', db.raw(`l.id::text = m.content->>'linkId'`))
+    .leftJoin('account_links as l', db.raw(`l.id = (m.content->>'linkId')::uuid`))
     .leftJoin('invitations as i', db.raw(`i.id = (m.content->>'invitationId')::uuid`))
+    .leftJoin('rink_members as k', (on) => on.on('k.rink_id', 'm.rink_id').andOn('k.user_id', 'm.user_id'))
     .where({ 'm.id': messageId, 'm.state': 'promised' })
     .select({
       id: 'm.id',
@@ -37,6 +40,7 @@ export async function findMessageToDeliver(db: Db, messageId: string): Promise<M
       content: 'm.content',
       expiresAt: 'm.expires_at',
       createdAt: 'm.created_at',
+      role: 'k.role',
       // A new address is confirmed by whoever reads its mail; of a changed one the old address hears; who is invited may
       // have no account.
       email: db.raw(`coalesce(m.content->>'oldEmail', i.email, l.new_email, u.email)`),
@@ -56,13 +60,10 @@ export async function findMessageToDeliver(db: Db, messageId: string): Promise<M
         { fillDays: FILL_DAY_KINDS },
       ),
       db.raw(
-        `m.rink_id is not null and (
-           not exists (select 1 from rink_members k where k.rink_id = m.rink_id and k.user_id = m.user_id)
-           or exists (select 1 from alert_preferences p
-                      where p.rink_id = m.rink_id and p.user_id = m.user_id
-                        and (p.muted_through >= m.night_date
-                             or not case m.channel when 'email' then p.wants_email else p.wants_push end))
-         )
+        `exists (select 1 from alert_preferences p
+                 where p.rink_id = m.rink_id and p.user_id = m.user_id
+                   and (p.muted_through >= m.night_date
+                        or not case m.channel when 'email' then p.wants_email else p.wants_push end))
          -- A day to fill is news for as long as the rink waits.
          or m.kind = any(:fillDays)
            and not exists (select 1 from rinks r where r.id = m.rink_id and r.phase = 'waiting')
@@ -72,14 +73,16 @@ export async function findMessageToDeliver(db: Db, messageId: string): Promise<M
         { fillDays: FILL_DAY_KINDS },
       ),
     )
-    .first<Omit<MessageToDeliver, 'attempts'> | undefined>()
+    .first<(Omit<MessageToDeliver, 'attempts'> & { role: Role | null }) | undefined>()
   if (!message) return undefined
   const counted = await db('delivery_attempts')
     .where({ message_id: messageId })
     .where('attempted_at', '>=', message.createdAt)
     .countDistinct({ tries: 'attempted_at' })
     .first()
-  return { ...message, attempts: Number(counted?.tries ?? 0) }
+  const { role, ...rest } = message
+  const isOutsider = message.rinkId !== null && !(role && isGranted(role, 'receiveAlerts'))
+  return { ...rest, isUnwanted: message.isUnwanted || isOutsider, attempts: Number(counted?.tries ?? 0) }
 }
 
 /** Whether a mail server, or one device at least, took this message. */

@@ -143,6 +143,14 @@ describe('mail', () => {
     },
   )
 
+  test('is not sent to somebody who skates only since it was promised', async () => {
+    const id = await promise('email')
+    await database.db('rink_members').where({ user_id: cast.keeper.userId }).update({ role: 'skater' })
+    await deliverMessage(delivering, id)
+    expect(await stateOf(id)).toBe('expired')
+    expect(await caughtMail()).toEqual([])
+  })
+
   test('sent again after a crash before settling keeps its Message-ID', async () => {
     const id = await promise('email')
     await database.db.raw(`alter table delivery_attempts add constraint crash check (message_id <> '${id}') not valid`)

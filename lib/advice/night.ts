@@ -56,6 +56,20 @@ export function tonightDate(now: Date, timeZone: string): string {
 }
 
 /**
+ * When a night becomes what people mean by "tonight"; passes of it may be poured from then on.
+ *
+ * @param nightDate 'yyyy-MM-dd'
+ * @param timeZone IANA zone of the rink.
+ * @returns 9 am of that date by the rink's clock, three hours before the night begins.
+ * @throws RangeError for an unknown zone.
+ *
+ * Source: ours, as in `tonightDate`.
+ */
+export function tonightStartsAt(nightDate: string, timeZone: string): Date {
+  return new Date(instantOfLocal(nightDate, TONIGHT_TURNS_AT_MINUTE, timeZone))
+}
+
+/**
  * First and last instant of a night. A night is 23 or 25 hours long when the clocks change in it.
  *
  * @param nightDate 'yyyy-MM-dd'

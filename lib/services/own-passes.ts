@@ -5,7 +5,7 @@ import { getRinkForJudging, type RinkForJudging } from '@/db/queries/rinks'
 import type { RinkAccess } from '@/lib/access/proofs'
 import { requireRink } from '@/lib/access/require-rink'
 import { judgePasses } from '@/lib/advice/move-pass'
-import { nightBounds, tonightDate } from '@/lib/advice/night'
+import { nightBounds, tonightDate, tonightStartsAt } from '@/lib/advice/night'
 import { unpackNight } from '@/lib/advice/night-model'
 import type { ServiceContext } from '@/lib/context'
 import { InvalidInputError } from '@/lib/errors'
@@ -21,14 +21,14 @@ import { readNightModel } from './night-model'
 export async function keepOwnPasses(context: ServiceContext, input: KeepOwnPasses): Promise<void> {
   const access = await requireRink(context, input.rinkId, 'manage')
   const { db, now, viewer } = context
-  const { startsAt, endsAt } = await tonightOf(context, input)
+  const { startsAt, endsAt, turnsAt } = await tonightOf(context, input)
   if (input.passes.some((pass) => pass.startsAt < startsAt || pass.startsAt >= endsAt)) {
     throw new InvalidInputError('A pass has to start between noon and noon.', {
       passes: 'A pass lies outside this night.',
     })
   }
   await db.transaction(async (trx) => {
-    const poured = await listFloodsSince(trx, access, startsAt)
+    const poured = await listFloodsSince(trx, access, turnsAt)
     const isPoured = (number: number) => poured.some((flood) => flood.passNumber === number)
     const passes = input.passes
       .filter(({ number }) => !isPoured(number))
@@ -48,8 +48,10 @@ export async function dropOwnPasses(context: ServiceContext, input: DropOwnPasse
 
 async function tonightOf({ db, now }: ServiceContext, { rinkId, nightDate }: DropOwnPasses) {
   const rink = await getRinkForJudging(db, rinkId)
-  if (nightDate === tonightDate(now, rink.timeZone)) return nightBounds(nightDate, rink.timeZone)
-  throw new InvalidInputError('That night is over.', { nightDate: 'Only tonight’s plan can be changed.' })
+  if (nightDate !== tonightDate(now, rink.timeZone)) {
+    throw new InvalidInputError('That night is over.', { nightDate: 'Only tonight’s plan can be changed.' })
+  }
+  return { ...nightBounds(nightDate, rink.timeZone), turnsAt: tonightStartsAt(nightDate, rink.timeZone) }
 }
 
 /** The keeper's plan of a night as it stands with the newest forecast; null when the advised plan stands. */

@@ -9,7 +9,7 @@ import type { RinkForJudging } from '@/db/queries/rinks'
 import type { Db } from '@/db/knex'
 import type { RinkAccess } from '@/lib/access/proofs'
 import { dueAlert, isMuted, type AlertKind } from '@/lib/advice/alert-due'
-import { nightBounds } from '@/lib/advice/night'
+import { tonightStartsAt } from '@/lib/advice/night'
 import type { NightSummary } from '@/lib/advice/night-summary'
 import { channelsOf, type Channel } from './alert-channels'
 import { alertContent } from './alert-content'
@@ -30,7 +30,7 @@ export interface NightToTell {
 export async function tellNight(night: NightToTell): Promise<void> {
   const { trx, access, now, rink, summary } = night
   const told = await listToldAlerts(trx, { rinkId: rink.id, nightDate: summary.nightDate })
-  const poured = await listFloodsSince(trx, access, nightBounds(summary.nightDate, rink.timeZone).startsAt)
+  const poured = await listFloodsSince(trx, access, tonightStartsAt(summary.nightDate, rink.timeZone))
   const hasPoured = poured.some((pass) => pass.nightDate === summary.nightDate)
   for (const person of await listPeopleToTell(trx, access)) {
     const tellAt = tellInstant(person.tellAt, summary.nightDate, rink.timeZone)

@@ -8,19 +8,16 @@ import { findRinkForJudging, type RinkForJudging } from '@/db/queries/rinks'
 import { findAccount } from '@/db/queries/users'
 import { requireRink } from '@/lib/access/require-rink'
 import type { RinkAccess } from '@/lib/access/proofs'
-import { nightBounds, tonightDate } from '@/lib/advice/night'
+import { nightBounds, tonightDate, tonightStartsAt } from '@/lib/advice/night'
 import { summariseNight } from '@/lib/advice/night-summary'
 import type { ServiceContext } from '@/lib/context'
 import { NotFoundError } from '@/lib/errors'
-import { HOUR_MILLIS } from '@/lib/physics/constants'
 import type { TonightView } from '@/lib/schemas/tonight-view'
 import { daysAhead } from './days-ahead'
 import { forecastRead } from './forecast-read'
 import { nightFrame } from './night-frame'
 import { judgeOwnPasses } from './own-passes'
 import { passesOf } from './tonight-passes'
-
-const MORNING_MILLIS = 3 * HOUR_MILLIS
 
 /** @throws NotFoundError when the viewer is no member of the rink. */
 export async function getTonight(context: ServiceContext, rinkId: string): Promise<TonightView> {
@@ -76,8 +73,7 @@ async function outlookOf(
   const { startsAt, endsAt } = nightBounds(nightDate, timeZone)
   const [hours, floods, own] = await Promise.all([
     listScoredHours(db, outlook.id),
-    // "Tonight" turns at 9 am, three hours before its night begins.
-    listFloodsSince(db, access, new Date(startsAt.getTime() - MORNING_MILLIS)),
+    listFloodsSince(db, access, tonightStartsAt(nightDate, timeZone)),
     judgeOwnPasses({ db, now }, access, rink, nightDate),
   ])
   const judgement = { modelVersion: outlook.modelVersion, hours, ...outlook.advice }

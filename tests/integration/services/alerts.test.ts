@@ -159,6 +159,13 @@ describe('a changed forecast', () => {
 })
 
 describe('silence', () => {
+  test('once somebody has poured in the morning, when tonight had begun', async () => {
+    const at1010 = cast.crew.at(new Date('2027-01-12T15:10:00Z'))
+    await checkOffPass(at1010, { rinkId: cast.rinkId, nightDate: NIGHT, passNumber: 1, layerMm: 3 })
+    await judgeAt(AT_16_10)
+    expect(await told()).toEqual([])
+  })
+
   test('through a thaw', async () => {
     await judgeAt(AT_16_10, () => THAW)
     expect(await told()).toEqual([])

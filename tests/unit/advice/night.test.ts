@@ -1,7 +1,7 @@
 // Nights and wall clocks, above all on the nights when the clocks change.
 import { formatInTimeZone } from 'date-fns-tz'
 import { describe, expect, test } from 'vitest'
-import { nightBounds, nightDateOf, tonightDate } from '@/lib/advice/night'
+import { nightBounds, nightDateOf, tonightDate, tonightStartsAt } from '@/lib/advice/night'
 import { instantOfLocal, toIso, zoneOffsetMinutes, zoneOffsetsMinutes } from '@/lib/advice/zoned-time'
 import { HOUR_MILLIS, MINUTE_MILLIS } from '@/lib/physics/constants'
 
@@ -22,6 +22,16 @@ describe('the night an instant lies in', () => {
     expect(tonightDate(at('2027-01-13T13:59:00Z'), 'America/Toronto')).toBe('2027-01-12')
     expect(tonightDate(at('2027-01-13T14:00:00Z'), 'America/Toronto')).toBe('2027-01-13')
     expect(tonightDate(at('2027-01-13T20:00:00Z'), 'America/Toronto')).toBe('2027-01-13')
+  })
+
+  // The clocks in Toronto go forward on 14 March: 9 am is 13:00Z from then on.
+  test.each([
+    ['2027-01-13', '2027-01-13T14:00:00Z'],
+    ['2027-03-14', '2027-03-14T13:00:00Z'],
+  ])('the night of %s is tonight from %s on', (night, iso) => {
+    expect(tonightStartsAt(night, 'America/Toronto')).toEqual(at(iso))
+    expect(tonightDate(at(iso), 'America/Toronto')).toBe(night)
+    expect(tonightDate(new Date(at(iso).getTime() - 1), 'America/Toronto')).not.toBe(night)
   })
 
   test('works east of Greenwich and in a zone of half hours', () => {

@@ -1,4 +1,4 @@
-// Every job by name: its payload, its handler, how often it is tried. The queue knows nothing else of them.
+// Every job by name: its payload and its handler. How often one is tried is the queue's own; messages have an expiry.
 import type { Task } from 'graphile-worker'
 import { z } from 'zod'
 import type { JobPayloads } from '@/db/queries/jobs'

@@ -23,8 +23,18 @@ export async function putPushSubscription(db: Db, userId: string, keys: PushKeys
   return stored
 }
 
-export async function countPushSubscriptions(db: Db, userId: string): Promise<number> {
-  const row = await db('push_subscriptions').where({ user_id: userId }).count({ devices: '*' }).first()
+/**
+ * How many devices the person is told on besides one: what is gone, or comes back, takes no place. Locks the person, so
+ * that of two devices that are added at once the second sees the first.
+ */
+export async function countOtherDevices(trx: Db, userId: string, endpoint: string): Promise<number> {
+  await trx('users').where({ id: userId }).forNoKeyUpdate().first('id')
+  const row = await trx('push_subscriptions')
+    .where({ user_id: userId })
+    .whereNot({ endpoint })
+    .whereNull('disabled_at')
+    .count({ devices: '*' })
+    .first()
   return Number(row?.devices ?? 0)
 }
 

@@ -1,4 +1,4 @@
-// Clears away what has served its purpose. Forecasts, advised windows, floods and messages stay: they are the record.
+// Clears away what has served its purpose. Forecasts, advised windows and the log stay: they are the record.
 import { pruneExpired } from '@/db/queries/prune'
 import { logEvent } from '@/lib/log'
 import type { WorkerParts } from '../parts'

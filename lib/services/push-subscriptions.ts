@@ -1,7 +1,7 @@
 // The devices on which a person gets notifications.
 import { createECDH, createHash } from 'node:crypto'
 import {
-  countPushSubscriptions,
+  countOtherDevices,
   deletePushSubscription,
   listDevices,
   putPushSubscription,
@@ -64,8 +64,8 @@ function checkedKeys({ endpoint, keys }: PushSubscriptionInput, pushOrigins: rea
   return { endpoint, ...keys }
 }
 
-async function refuseTooMany(db: Db, userId: string): Promise<void> {
-  if ((await countPushSubscriptions(db, userId)) < MOST_DEVICES) return
+async function refuseTooMany(trx: Db, userId: string, { endpoint }: PushKeys): Promise<void> {
+  if ((await countOtherDevices(trx, userId, endpoint)) < MOST_DEVICES) return
   throw new ConflictError(`You have ${MOST_DEVICES} devices already. Remove one under Alerts first.`)
 }
 
@@ -80,8 +80,8 @@ export async function addDevice(
   pushOrigins: readonly string[],
 ): Promise<{ id: string }> {
   const keys = checkedKeys(subscription, pushOrigins)
-  await refuseTooMany(db, viewer.userId)
   return db.transaction(async (trx) => {
+    await refuseTooMany(trx, viewer.userId, keys)
     const device = await putPushSubscription(trx, viewer.userId, keys, now)
     // Whoever adds a device in the evening wants to hear of tonight on it too.
     for (const { id } of await listRinksOfUser(trx, viewer.userId)) await enqueueDecision(trx, id)
@@ -98,7 +98,7 @@ export async function replaceDevice(
   const keys = checkedKeys(subscription, pushOrigins)
   return db.transaction(async (trx) => {
     if (oldEndpoint) await deletePushSubscription(trx, viewer.userId, { endpoint: oldEndpoint })
-    await refuseTooMany(trx, viewer.userId)
+    await refuseTooMany(trx, viewer.userId, keys)
     return putPushSubscription(trx, viewer.userId, keys, now)
   })
 }

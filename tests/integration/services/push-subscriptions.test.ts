@@ -1,8 +1,10 @@
 // A person's devices: known push services only, one account each, and nobody else's.
 import { createECDH, randomBytes, randomUUID } from 'node:crypto'
 import { beforeEach, describe, expect, test } from 'vitest'
+import { pruneExpired } from '@/db/queries/prune'
 import { ConflictError, InvalidInputError, NotFoundError } from '@/lib/errors'
 import { BodyTooLargeError, readJson } from '@/lib/http/read-json'
+import { DAY_MILLIS } from '@/lib/physics/constants'
 import { pushSubscriptionSchema } from '@/lib/schemas/alerts'
 import { addDevice, forgetDevice, removeDevice, replaceDevice } from '@/lib/services/push-subscriptions'
 import { addActor, type Actor } from '@/tests/support/cast'
@@ -79,6 +81,51 @@ describe('adding', () => {
     await expect(addDevice(anna.at(NOW), subscription(), [])).rejects.toThrow(ConflictError)
     await expect(replaceDevice(anna.at(NOW), { subscription: subscription() }, [])).rejects.toThrow(ConflictError)
   })
+})
+
+describe('the limit of twenty', () => {
+  const add = (device = subscription()) => addDevice(anna.at(NOW), device, [])
+  const addSome = async (count: number) => {
+    for (let device = 0; device < count; device += 1) await add()
+  }
+
+  test('leaves out devices that are gone', async () => {
+    await addSome(20)
+    const gone = await devicesOf(anna).first('id')
+    await database.db('push_subscriptions').where({ id: gone?.id }).update({ disabled_at: NOW, disabled_reason: '410' })
+    await add()
+    expect(await devicesOf(anna).whereNull('disabled_at')).toHaveLength(20)
+  })
+
+  test('lets a device renew its keys, also the twentieth', async () => {
+    await addSome(19)
+    const last = subscription()
+    await add(last)
+    const renewed = subscription(last.endpoint)
+    await add(renewed)
+    await replaceDevice(anna.at(NOW), { subscription: renewed }, [])
+    expect(await devicesOf(anna).where({ endpoint: last.endpoint })).toMatchObject([renewed.keys])
+  })
+
+  test('holds when several are added at once', async () => {
+    await addSome(19)
+    const outcomes = await Promise.allSettled([add(), add(), add(), add()])
+    expect(outcomes.filter(({ status }) => status === 'fulfilled')).toHaveLength(1)
+    expect(await devicesOf(anna)).toHaveLength(20)
+  })
+})
+
+test('a device that is gone is forgotten a month later, one that is told on never', async () => {
+  const [gone, told] = [subscription(), subscription()]
+  await addDevice(anna.at(NOW), gone, [])
+  await addDevice(anna.at(NOW), told, [])
+  const ofGone = { endpoint: gone.endpoint }
+  await database.db('push_subscriptions').where(ofGone).update({ disabled_at: NOW, disabled_reason: '410' })
+  const daysLater = (days: number) => new Date(NOW.getTime() + days * DAY_MILLIS)
+  await pruneExpired(database.db, daysLater(29))
+  expect(await devicesOf(anna)).toHaveLength(2)
+  await pruneExpired(database.db, daysLater(31))
+  expect((await devicesOf(anna)).map(({ endpoint }) => endpoint)).toEqual([told.endpoint])
 })
 
 describe('moving and removing', () => {

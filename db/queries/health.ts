@@ -20,7 +20,8 @@ export const PRESENCE_LOCK = 7_204_811
 export async function readVitals(db: Db, now: Date): Promise<Vitals> {
   const { rows } = await db.raw<{ rows: Vitals[] }>(
     `with in_season as (
-       select r.id, (select max(f.expires_at) from forecasts f where f.grid_cell_id = r.grid_cell_id) as good_until
+       select r.id, (select f.expires_at from forecasts f where f.grid_cell_id = r.grid_cell_id
+                     order by f.slot_at desc limit 1) as good_until
        from rinks r where r.phase not in ('planning', 'closed'))
      select (select count(*)::int from in_season) as "rinksInSeason",
             (select count(*)::int from in_season where good_until is null or good_until <= :now) as "rinksWithoutForecast",

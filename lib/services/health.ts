@@ -36,6 +36,20 @@ export async function getHealth(db: Db, now: Date): Promise<Health> {
   }
 }
 
+/** Anybody may ask, and every answer costs queries over all rinks. Ours. */
+const REUSED_MILLIS = 10_000
+
+/** Reads the state of the product, and gives the same answer to all who ask within ten seconds. */
+export function createHealthReader(): (db: Db, now: Date) => Promise<Health> {
+  let last: { readAt: Date; health: Promise<Health> } | undefined
+  return (db, now) => {
+    if (!last || now.getTime() - last.readAt.getTime() >= REUSED_MILLIS) {
+      last = { readAt: now, health: getHealth(db, now) }
+    }
+    return last.health
+  }
+}
+
 const NOTHING_KNOWN = {
   workers: 0,
   rinksInSeason: 0,

@@ -1,7 +1,8 @@
 // Deletes rows that nobody will read again.
 import type { Db } from '@/db/knex'
 import { HOUR_MILLIS } from '@/lib/physics/constants'
-import { deleteDueAccounts, deleteUnconfirmedUsersBefore } from './users'
+import { deleteDueAccounts } from './account-ends'
+import { deleteUnconfirmedUsersBefore } from './users'
 
 /** How long each kind of row is kept. Ours. [h] */
 const KEEP_HOURS = {

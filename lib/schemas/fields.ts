@@ -2,14 +2,15 @@
 import { z } from 'zod'
 import { unitsOfCode, type Units } from '@/lib/units'
 import { NOTE_LENGTH } from './log-choices'
-import { fitsMeasure, parseNumber, rangeMessage, scaleOf, type MeasureName } from './measures'
+import { fitted, parseNumber, rangeMessage, scaleOf, type MeasureName } from './measures'
 
 /** A quantity in the person's units, as SI. */
 export function measured(measure: MeasureName, units: Units) {
   return z.string().transform((text, context) => {
     const value = parseNumber(text)
     const valueSi = value === undefined ? NaN : scaleOf(measure, units).toSi(value)
-    if (fitsMeasure(measure, valueSi)) return valueSi
+    const fitting = fitted(measure, units, valueSi)
+    if (fitting !== undefined) return fitting
     context.addIssue(value === undefined ? 'Type a number here.' : rangeMessage(measure, units))
     return z.NEVER
   })

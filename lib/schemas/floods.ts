@@ -1,16 +1,17 @@
 // Checking off a pass, and taking that back.
 import { z } from 'zod'
+import { MEASURES } from './measures'
 
 const nightDateSchema = z.iso.date('Which night?')
 
-export const undoPassSchema = z.object({
+const undoPassSchema = z.object({
   rinkId: z.uuid(),
   nightDate: nightDateSchema,
   passNumber: z.coerce.number().int().min(1).max(20),
 })
 
 export const checkOffPassSchema = undoPassSchema.extend({
-  layerMm: z.coerce.number('How thick was it?').min(0.1).max(100),
+  layerMm: z.coerce.number('How thick was it?').min(MEASURES.pouredLayer.least).max(MEASURES.pouredLayer.most),
   /** The rink's own water when absent. */
   waterTemperatureC: z.coerce.number('How warm was the water?').min(0).max(95).optional(),
 })

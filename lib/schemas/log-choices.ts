@@ -13,6 +13,14 @@ export type WhichHour = (typeof WHICH_HOURS)[number]
 /** Longest note. The database refuses longer ones too. */
 export const NOTE_LENGTH = 500
 
+/** One litre more or less is the rounding of what was typed. [L] Ours. */
+const SAME_WATER_L = 1
+
+/** Whether the water is what the layer takes on so large a rink: a form then leaves it to follow the layer. */
+export function followsLayer({ layerMm, waterL }: Pick<EntryView, 'layerMm' | 'waterL'>, areaM2: number): boolean {
+  return layerMm !== null && waterL !== null && Math.abs(layerMm * areaM2 - waterL) < SAME_WATER_L
+}
+
 /** What an entry said: as listed, and as its history keeps it. Instants are ISO text. */
 export interface EntryView {
   id: string

@@ -5,28 +5,14 @@ import type { Units } from '@/lib/units'
 import { inUnitsOf, measured, noteSchema, orEmpty, refuserIn } from './fields'
 import { LOG_KINDS, OUTCOMES, WHICH_HOURS } from './log-choices'
 import { clockTimeSchema, dateSchema } from './local-time'
-import { parseNumber, scaleOf } from './measures'
+import { parseNumber } from './measures'
 import { WATER_KINDS } from './rink-choices'
 import { rinkIdSchema } from './rinks'
 
-/** Most water that one entry may hold: a first fill of the largest rink we take, 100 m by 100 m, 10 cm deep. [L] Ours. */
-const MOST_WATER_L = 1_000_000
 const WEEK_MINUTES = 7 * MINUTES_A_DAY
 
 const entryIdSchema = z.uuid('That is no entry.')
 const versionSchema = z.coerce.number('Load this page again.').int().min(1)
-
-function amountOfWater(units: Units) {
-  const { unit, toSi } = scaleOf('bucket', units)
-  return z.string().transform((text, context) => {
-    const litres = toSi(parseNumber(text) ?? NaN)
-    if (litres >= 1 && litres <= MOST_WATER_L) return litres
-    context.addIssue(
-      Number.isNaN(litres) ? 'Type a number here.' : `More than nothing, at most a big fill, in ${unit}.`,
-    )
-    return z.NEVER
-  })
-}
 
 const minutesAgoSchema = z.string().transform((text, context) => {
   const minutes = parseNumber(text) ?? NaN
@@ -47,8 +33,8 @@ function entryFields(units: Units) {
   return {
     rinkId: rinkIdSchema,
     kind: z.enum(LOG_KINDS, 'Choose what was done.'),
-    layer: orEmpty(measured('layer', units)),
-    water: orEmpty(amountOfWater(units)),
+    layer: orEmpty(measured('pouredLayer', units)),
+    water: orEmpty(measured('pouredWater', units)),
     waterTemperature: orEmpty(measured('waterTemperature', units)),
     waterKind: orEmpty(z.enum(WATER_KINDS, 'Choose where the water came from.')),
     thickness: orEmpty(measured('iceThickness', units)),
@@ -99,7 +85,7 @@ export const changeEntrySchema = inUnitsOf((units) =>
   z
     .object({ entryId: entryIdSchema, version: versionSchema, ...entryFields(units) })
     .superRefine(checkTogether)
-    .transform((fields) => ({ entryId: fields.entryId, version: fields.version, ...toEntry(fields) })),
+    .transform((fields) => ({ entryId: fields.entryId, version: fields.version, units, ...toEntry(fields) })),
 )
 
 export const entrySchema = z.object({ rinkId: rinkIdSchema, entryId: entryIdSchema })

@@ -34,6 +34,8 @@ const same = (value: number) => value
 const plain = (unit: string, decimals: number): Scale => ({ unit, decimals, toSi: same, fromSi: same })
 
 const INCHES: Scale = { unit: 'in', decimals: 2, toSi: inchesToMm, fromSi: mmToInches }
+/** A tenth of a millimetre is 0.004 in. */
+const FINE_INCHES: Scale = { ...INCHES, decimals: 3 }
 const CENTIMETRES: Scale = { unit: 'cm', decimals: 1, toSi: (cm) => cm * 10, fromSi: (mm) => mm / 10 }
 const FEET: Scale = { unit: 'ft', decimals: 1, toSi: feetToMetres, fromSi: metresToFeet }
 const FAHRENHEIT: Scale = { unit: '°F', decimals: 0, toSi: fahrenheitToCelsius, fromSi: celsiusToFahrenheit }
@@ -53,6 +55,7 @@ const PER_1000_GALLONS: Scale = {
 }
 
 const thickness = ({ ice }: Units) => (ice === 'in' ? INCHES : CENTIMETRES)
+const film = ({ ice }: Units) => (ice === 'in' ? INCHES : plain('mm', 1))
 const warmth = ({ temperature }: Units) => (temperature === 'F' ? FAHRENHEIT : plain('°C', 1))
 
 /** Keyed by the quantity; SI is m, mm, L/min, L, m/s and °C. */
@@ -60,7 +63,10 @@ export const MEASURES = {
   side: { least: 2, most: 100, scaleIn: ({ size }) => (size === 'ft' ? FEET : plain('m', 1)) },
   iceThickness: { least: 0, most: 2000, scaleIn: thickness },
   fillDepth: { least: 20, most: 1000, scaleIn: thickness },
-  layer: { least: 0.5, most: 30, scaleIn: ({ ice }) => (ice === 'in' ? INCHES : plain('mm', 1)) },
+  /** As the rink's usual one is set. */
+  layer: { least: 0.5, most: 30, scaleIn: film },
+  /** As one pour came out: little water on a large rink, or a corner that took much. */
+  pouredLayer: { least: 0.1, most: 100, scaleIn: (units) => (units.ice === 'in' ? FINE_INCHES : film(units)) },
   /** How far the ground lies below its highest point. */
   drop: { least: 0, most: 1000, scaleIn: thickness },
   boardHeight: { least: 50, most: 1500, scaleIn: thickness },
@@ -74,6 +80,12 @@ export const MEASURES = {
     least: 1,
     most: 400,
     scaleIn: ({ water }) => (water === 'gal' ? gallons('US gal/min') : plain('L/min', 1)),
+  },
+  /** Of one entry of the log; at most a first fill of the largest rink we take, 100 m by 100 m, 10 cm deep. Ours. */
+  pouredWater: {
+    least: 1,
+    most: 1_000_000,
+    scaleIn: ({ water }) => (water === 'gal' ? { ...gallons('US gal'), decimals: 0 } : plain('L', 0)),
   },
   bucket: { least: 1, most: 1000, scaleIn: ({ water }) => (water === 'gal' ? gallons('US gal') : plain('L', 1)) },
   /** In the keeper's money for a cubic metre; with gallons, for a thousand of them. */
@@ -111,10 +123,24 @@ export function parseNumber(text: string): number | undefined {
   return NUMBER.test(tidy) ? Number(tidy.replace(',', '.')) : undefined
 }
 
-/** Between the limits, also where they look rounded in the person's units. */
+/** Between the limits. */
 export function fitsMeasure(measure: MeasureName, valueSi: number): boolean {
   const { least, most } = MEASURES[measure]
   return valueSi >= least && valueSi <= most
+}
+
+/** The value where it fits; a limit where the value looks like it in the person's units, as 9.906 mm does of 10 in inches. */
+export function fitted(measure: MeasureName, units: Units, valueSi: number): number | undefined {
+  if (fitsMeasure(measure, valueSi)) return valueSi
+  const { least, most } = MEASURES[measure]
+  const limit = valueSi < least ? least : most
+  return typed(measure, units, valueSi) === typed(measure, units, limit) ? limit : undefined
+}
+
+/** What is stored where the value sent is only its rounding that a form showed: else a mended note would move figures. */
+export function unlessAsShown(measure: MeasureName, units: Units, sentSi: number, storedSi: number): number {
+  const shownSi = scaleOf(measure, units).toSi(Number(typed(measure, units, storedSi)))
+  return sentSi === fitted(measure, units, shownSi) ? storedSi : sentSi
 }
 
 /** Decimals that a limit is told with: hundredths of an inch matter of a film of water, not of a board. */

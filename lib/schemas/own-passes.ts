@@ -1,10 +1,11 @@
 // The keeper's own plan of a night, as the page sends it.
 import { z } from 'zod'
+import { MEASURES } from './measures'
 
 const ownPassSchema = z.object({
   number: z.number().int().min(1).max(20),
   startsAt: z.iso.datetime().transform((text) => new Date(text)),
-  layerMm: z.number('How thick?').min(0.5, 'At least half a millimetre.').max(50, 'At most 50 mm.'),
+  layerMm: z.number('How thick?').min(MEASURES.layer.least).max(MEASURES.layer.most),
   temperatureC: z.number('How warm?').min(0).max(95),
   flowLPerMin: z.number().positive().max(5000),
 })

@@ -1,18 +1,18 @@
 // What an entry says where the person left a field empty: the rink's own layer, area and water.
 import { findHourOfSheet } from '@/db/queries/log-sheets'
-import type { EntryValues } from '@/db/queries/log-entries'
+import type { EntryValues, LogEntry } from '@/db/queries/log-entries'
 import { listWaterSources } from '@/db/queries/water-sources'
 import type { RinkForJudging } from '@/db/queries/rinks'
 import type { Db } from '@/db/knex'
 import type { RinkAccess } from '@/lib/access/proofs'
 import { HOUR_MILLIS } from '@/lib/physics/constants'
-import type { EntryInput } from '@/lib/schemas/log'
+import type { ChangeEntryInput, EntryInput } from '@/lib/schemas/log'
+import { followsLayer } from '@/lib/schemas/log-choices'
+import { MEASURES, unlessAsShown, type MeasureName } from '@/lib/schemas/measures'
 import { WATER_DEFAULTS } from '@/lib/schemas/rink-choices'
 
 /** The model's set time is for the rink's usual layer; a film more makes no difference that anybody could see. [mm] Ours. */
 const SAME_LAYER_MM = 0.5
-/** The database keeps layers between these. [mm] */
-const LAYER_MM = { least: 0.1, most: 100 }
 
 type SaidValues = Pick<EntryValues, 'layerMm' | 'waterL' | 'waterTemperatureC' | 'waterKind' | 'thicknessMm' | 'note'>
 
@@ -38,7 +38,27 @@ export async function entryValues(
 
 function layerOf(waterL: number | undefined, areaM2: number): number | undefined {
   if (waterL === undefined) return undefined
-  return Math.min(LAYER_MM.most, Math.max(LAYER_MM.least, waterL / areaM2))
+  const { least, most } = MEASURES.pouredLayer
+  return Math.min(most, Math.max(least, waterL / areaM2))
+}
+
+/** The input with the figures of the entry where the form sent them back as it had shown them, rounded. */
+export function withUnchanged(
+  input: ChangeEntryInput,
+  before: LogEntry,
+  { lengthM, widthM }: RinkForJudging,
+): ChangeEntryInput {
+  const unless = (measure: MeasureName, sent: number | undefined, stored: number | null) =>
+    sent === undefined || stored === null ? sent : unlessAsShown(measure, input.units, sent, stored)
+  const layerMm = unless('pouredLayer', input.layerMm, before.layerMm)
+  const isFollowing = input.waterL === undefined && layerMm === before.layerMm && followsLayer(before, lengthM * widthM)
+  return {
+    ...input,
+    layerMm,
+    waterL: isFollowing ? (before.waterL ?? undefined) : unless('pouredWater', input.waterL, before.waterL),
+    waterTemperatureC: unless('waterTemperature', input.waterTemperatureC, before.waterTemperatureC),
+    thicknessMm: unless('iceThickness', input.thicknessMm, before.thicknessMm),
+  }
 }
 
 /**

@@ -19,7 +19,7 @@ import { HOUR_MILLIS } from '@/lib/physics/constants'
 import type { AnswerSetInput, ChangeEntryInput, EntryId, WriteEntryInput } from '@/lib/schemas/log'
 import { changedSentence } from '@/lib/words/log'
 import { followLog, modelSheetAt } from './log-effects'
-import { entryValues, saidForFlood } from './log-values'
+import { entryValues, saidForFlood, withUnchanged } from './log-values'
 import { entryView } from './log-view'
 import { firstAfter, happened } from './log-when'
 import { readerOf } from './rink-and-reader'
@@ -63,7 +63,6 @@ export async function changeEntry(context: ServiceContext, input: ChangeEntryInp
   const { db, now } = context
   const access = await requireRink(context, input.rinkId, 'writeLog')
   const rink = await getRinkForJudging(db, access.rinkId)
-  const values = await entryValues(db, access, input, rink)
   await db.transaction(async (trx) => {
     const before = await lockUnchanged(context, trx, access, input, rink.timeZone)
     if (before.kind !== input.kind)
@@ -72,6 +71,7 @@ export async function changeEntry(context: ServiceContext, input: ChangeEntryInp
     refuseAfterOutcome(before, when.happenedAt)
     const movedMillis = when.happenedAt.getTime() - before.happenedAt.getTime()
     const said = before.saidSetByAt && new Date(before.saidSetByAt.getTime() + movedMillis)
+    const values = await entryValues(trx, access, withUnchanged(input, before, rink), rink)
     // A planned pass belongs to its night.
     const passNumber = when.nightDate === before.nightDate ? before.passNumber : null
     await saveChange(context, trx, access, before, { ...values, ...when, saidSetByAt: said, passNumber })
@@ -115,7 +115,7 @@ export async function answerSet(context: ServiceContext, input: AnswerSetInput):
 }
 
 function foundAt(flood: LogEntry, time: string | undefined, { now, timeZone }: { now: Date; timeZone: string }): Date {
-  const refuse = (message: string) => new InvalidInputError('Some entries need another look.', { atTime: message })
+  const refuse = (message: string) => new InvalidInputError('Something here needs another look.', { atTime: message })
   if (time === undefined) {
     const isLongAgo = now.getTime() - flood.happenedAt.getTime() > ANSWER_NOW_HOURS * HOUR_MILLIS
     if (isLongAgo) throw refuse('At what time did you see it?')
@@ -145,7 +145,7 @@ async function lockUnchanged(
 
 function refuseAfterOutcome(before: LogEntry, happenedAt: Date): void {
   if (!before.outcomeAt || happenedAt <= before.outcomeAt) return
-  throw new InvalidInputError('Some entries need another look.', {
+  throw new InvalidInputError('Something here needs another look.', {
     atTime: 'Somebody saw how it set before that. Take that answer back first.',
   })
 }

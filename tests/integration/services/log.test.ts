@@ -4,6 +4,7 @@ import { describe, expect, test } from 'vitest'
 import { ConflictError, ForbiddenError, InvalidInputError, NotFoundError } from '@/lib/errors'
 import { MINUTE_MILLIS } from '@/lib/physics/constants'
 import { answerSetSchema } from '@/lib/schemas/log'
+import { IMPERIAL, unitsCode } from '@/lib/units'
 import { answerSet, changeEntry, deleteEntry, restoreEntry, writeEntry } from '@/lib/services/log'
 import { getEntry, getLog } from '@/lib/services/log-book'
 import { checkOffPass } from '@/lib/services/floods'
@@ -180,6 +181,47 @@ describe('changing', () => {
     await restoreEntry(cast.crew.at(later(3)), ids)
     const passes = await rows().whereNull('deleted_at').orderBy('happened_at').select('pass_number')
     expect(passes.map(({ pass_number }) => pass_number)).toEqual([null, 1])
+  })
+})
+
+describe('a mended note', () => {
+  const IN_INCHES = { units: unitsCode(IMPERIAL) }
+  // As the form showed it: the time of NOW at the rink.
+  const at = { minutesAgo: '', onDate: '2027-01-12', atTime: '18:10' }
+
+  test('leaves figures as they are that were shown rounded, in inches and °F too, and has nothing judged', async () => {
+    const { entryId } = await write(cast.crew, { layer: '3' })
+    const before = await settingsVersion()
+    // 3 mm are 0.118 in and 6 °C are 42.8 °F; water that follows the layer is not sent.
+    const shown = { ...at, ...IN_INCHES, layer: '0.118', waterTemperature: '43', waterKind: 'cold-tap' }
+    await change(cast.keeper, entryId, 1, { ...shown, note: 'By the gate' })
+    const kept = { layerMm: 3, waterL: 300, waterTemperatureC: 6 }
+    expect(await entry(entryId)).toMatchObject({ ...kept, note: 'By the gate', version: 2 })
+    expect(await settingsVersion()).toBe(before)
+    await change(cast.keeper, entryId, 2, { ...shown, layer: '0.2', note: '' })
+    expect((await entry(entryId)).layerMm).toBeCloseTo(5.08, 6)
+    expect(await settingsVersion()).toBe(before + 1)
+  })
+
+  test('of a reading leaves the thickness', async () => {
+    const { entryId } = await write(cast.crew, { kind: 'reading', thickness: '8.9' })
+    // 89 mm are 3.504 in.
+    await change(cast.crew, entryId, 1, { ...at, ...IN_INCHES, kind: 'reading', thickness: '3.5', note: 'At the gate' })
+    expect(await entry(entryId)).toMatchObject({ thicknessMm: 89, note: 'At the gate' })
+  })
+
+  test('of a flood of little water is kept: 28 L on 100 m² are 0.28 mm, shown as 0.3', async () => {
+    const { entryId } = await write(cast.crew, { water: '28' })
+    await change(cast.crew, entryId, 1, {
+      ...at,
+      layer: '0.3',
+      waterKind: 'cold-tap',
+      waterTemperature: '6',
+      note: 'Edges',
+    })
+    const { layerMm, waterL, note } = await entry(entryId)
+    expect({ waterL, note }).toEqual({ waterL: 28, note: 'Edges' })
+    expect(layerMm).toBeCloseTo(0.28, 9)
   })
 })
 

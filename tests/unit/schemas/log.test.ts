@@ -43,7 +43,7 @@ test('what belongs to another kind is left out', () => {
 describe('words at the field', () => {
   test.each([
     [{ layer: 'thin' }, { layer: 'Type a number here.' }],
-    [{ layer: '50' }, { layer: 'Between 0.5 and 30 mm.' }],
+    [{ layer: '200' }, { layer: 'Between 0.1 and 100 mm.' }],
     [{ kind: 'reading' }, { thickness: 'How thick is the ice?' }],
     [{ kind: 'reading', thickness: '-2' }, { thickness: 'Between 0 and 200 cm.' }],
     [{ kind: 'fill' }, { water: 'How much water went in?' }],

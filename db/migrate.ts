@@ -5,7 +5,7 @@ import { runMigrations } from 'graphile-worker'
 import { createPool } from './knex'
 
 /** @throws when the database cannot be reached or a migration fails; nothing is half done. */
-export async function migrateToLatest(connectionString: string): Promise<void> {
+async function migrateToLatest(connectionString: string): Promise<void> {
   const db = createPool(connectionString)
   try {
     await db.migrate.latest()

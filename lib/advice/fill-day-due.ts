@@ -31,7 +31,7 @@ export interface FillDayQuestion {
 }
 
 /** A rink that is laid out and waits needs its people ready, and no forecast decides further ahead. Ours. */
-export const FILL_DAYS_AHEAD = 5
+const FILL_DAYS_AHEAD = 5
 /** A forecast that moves the day about must not ring every day; counted are moves and closings. Ours. */
 const MOST_CHANGES_A_WEEK = 3
 /** From a day before the start on, a plan becomes a decision: changes are told at once. Ours. */

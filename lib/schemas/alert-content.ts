@@ -52,8 +52,8 @@ export const linkContentSchema = z.object({ linkId: z.uuid() })
 /** A test of one device names it. */
 export const testContentSchema = z.object({ deviceId: z.uuid().optional() })
 
-/** The note about a changed address goes to the one that was left. */
-export const addressChangedContentSchema = z.object({ oldEmail: z.email() })
+/** The note about a changed address goes to the one that was left. Read by the query that delivers it. */
+export type AddressChangedContent = { oldEmail: string }
 
 /** An invitation names its row, which knows the address. */
 export const invitationContentSchema = z.object({
@@ -64,7 +64,6 @@ export const invitationContentSchema = z.object({
 export const deletionContentSchema = z.object({ dueAt: z.iso.datetime() })
 
 export type AlertContent = z.infer<typeof alertContentSchema>
-export type AddressChangedContent = z.infer<typeof addressChangedContentSchema>
 export type InvitationContent = z.infer<typeof invitationContentSchema>
 export type FillDayContent = z.infer<typeof fillDayContentSchema>
 export type FillCheckContent = z.infer<typeof fillCheckContentSchema>

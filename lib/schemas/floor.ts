@@ -10,7 +10,7 @@ const depthSchema = z.number().min(-5).max(5)
 const MOST_POINTS = 20
 
 /** As it is stored: corners go round from the north one, rows of a grid follow one another along the length. */
-export const floorShapeSchema = z.union([
+const floorShapeSchema = z.union([
   z.object({ cornersM: z.array(depthSchema).length(4) }),
   z.object({ depthsM: z.array(z.array(depthSchema).min(2).max(MOST_POINTS)).min(2).max(MOST_POINTS).refine(isGrid) }),
 ])

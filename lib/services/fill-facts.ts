@@ -13,7 +13,7 @@ export function targetLitres({ lengthM, widthM }: RinkSize, { targetDepthMm }: P
   return targetDepthMm * lengthM * widthM
 }
 
-export function hoseSessions(sessions: readonly FillSession[]): HoseSession[] {
+function hoseSessions(sessions: readonly FillSession[]): HoseSession[] {
   return sessions.map(({ startedAt, stoppedAt, flowLPerMin }) => ({
     startedAt: startedAt.toISOString(),
     stoppedAt: stoppedAt?.toISOString() ?? null,
@@ -39,7 +39,7 @@ export function lowCornerDepthMm({ lengthM, widthM, floor }: RinkSize, litres: n
 }
 
 /** Looks with a depth are readings of the level; the others only show that somebody was there. */
-export function levelReadings(rink: RinkSize, checks: readonly FillCheck[]): LevelReading[] {
+function levelReadings(rink: RinkSize, checks: readonly FillCheck[]): LevelReading[] {
   const corner = lowCornerOf(rink)
   return checks.flatMap(({ checkedAt, lowCornerDepthMm: depthMm }) =>
     depthMm === null ? [] : [{ at: checkedAt.toISOString(), corner, depthMm }],

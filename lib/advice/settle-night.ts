@@ -1,6 +1,6 @@
 // What came of a night's advice, once it is over: kept or broken, by people's reports, else by the later weather.
-import { HOUR_MILLIS } from '@/lib/physics/constants'
-import { NEEDED } from './thresholds'
+import { HOUR_MILLIS, MINUTE_MILLIS } from '@/lib/physics/constants'
+import { FOUND, NEEDED } from './thresholds'
 import { instantOfLocal, localDateOf, addDays } from './zoned-time'
 import { localMinuteOf } from './night'
 import type { Judgement, PlannedPass, ScoredHour } from './types'
@@ -45,7 +45,7 @@ export type SettledCode =
 /**
  * Settles one night.
  *
- * A report counts before the weather. Without one, a flood was good advice when every pass, poured on the hour it was
+ * A report counts before the weather; wet is broken from a quarter of an hour after what was said. Without one, a flood was good advice when every pass, poured on the hour it was
  * advised for, would have set by 7 am with no more than 0.1 mm of rain or snow before; holding off was good advice
  * when the later weather has no flood window in the keeper's hours.
  *
@@ -79,10 +79,23 @@ const NO_WEATHER: SettledNight = { result: 'unknown', source: 'none', detail: { 
 function settledByReports(reports: readonly LayerReport[]): SettledNight | null {
   const spoiled = reports.find(({ outcome }) => outcome === 'spoiled')
   if (spoiled) return byReport('broken', 'found_spoiled', spoiled)
-  const wet = reports.find(({ outcome, at, saidSetBy }) => outcome === 'wet' && saidSetBy !== null && at > saidSetBy)
+  const wet = reports.find(({ outcome, at, saidSetBy }) => outcome === 'wet' && saidSetBy && isLate(at, saidSetBy))
   if (wet) return byReport('broken', 'found_wet', wet)
   const set = reports.findLast(({ outcome }) => outcome === 'set')
   return set ? byReport('kept', 'found_set', set) : null
+}
+
+/**
+ * Whether somebody looked later than what was said, and the grace that a look without a watch is given.
+ *
+ * @param at When they looked. ISO 8601
+ * @param saidSetBy By when it was said to be set. ISO 8601
+ * @returns Whether what they found then tells against what was said.
+ *
+ * Source: FOUND in thresholds.ts.
+ */
+export function isLate(at: string, saidSetBy: string): boolean {
+  return Date.parse(at) - Date.parse(saidSetBy) > FOUND.graceMinutes * MINUTE_MILLIS
 }
 
 function byReport(result: 'kept' | 'broken', code: SettledCode, { at, saidSetBy }: LayerReport): SettledNight {

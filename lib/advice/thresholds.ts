@@ -75,6 +75,18 @@ export const FLOOD = {
   weights: { set: 4, slack: 2, rate: 2, dry: 2, wind: 1, gust: 1, air: 1, lastLayer: 1, snow: 1, bears: 1 },
 }
 
+/** What came of a flood, once somebody looked. */
+export const FOUND = {
+  /** Nobody stands by with a watch: this much after what was said still counts as kept. Ours. [min] */
+  graceMinutes: 15,
+}
+
+/** A sheet as people tell of it. */
+export const REPORTED = {
+  /** Nobody measures it, and a sheet forgets it within a day: a little below freezing. Ours. [°C] */
+  iceTemperatureC: -2,
+}
+
 /** Limits of the person and the hose; they cap the score, they are never averaged with the ice. */
 export const PERSON = {
   /** A hose in a flood. Rules C20: Appleton Parks (0 °F), C23: Copperfield Mahogany (below -20 °C hoses freeze). 0.4 at -20. [°C] */

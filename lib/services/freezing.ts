@@ -19,8 +19,8 @@ import { forecastRead } from './forecast-read'
 import { gatherJudgeInput } from './judge-input'
 import { getRinkAndReader } from './rink-and-reader'
 
-/** A hole drilled longer ago says little about today's ice. [h] Ours. */
-const READING_HOURS = 72
+/** A hole drilled longer ago opens no rink: it says little about today's ice. [h] Ours. */
+const OPENS_HOURS = 72
 
 /** @throws NotFoundError for strangers. */
 export async function getFreezing(context: ServiceContext, rinkId: string): Promise<FreezingView> {
@@ -59,7 +59,7 @@ async function drilledSinceFill(
   now: Date,
 ): Promise<{ sinceAt: Date | null; reading: Reading | undefined }> {
   const sinceAt = (await findNewestFill(db, access))?.finishedAt ?? null
-  const recent = new Date(now.getTime() - READING_HOURS * HOUR_MILLIS)
+  const recent = new Date(now.getTime() - OPENS_HOURS * HOUR_MILLIS)
   const after = sinceAt !== null && sinceAt > recent ? sinceAt : recent
   return { sinceAt, reading: await findNewestReading(db, access, after) }
 }

@@ -14,14 +14,13 @@ import { insertReportedSheet } from '@/db/queries/sheet-states'
 import type { Db } from '@/db/knex'
 import { countChange } from '@/db/queries/rink-settings'
 import type { RinkAccess } from '@/lib/access/proofs'
+import { REPORTED } from '@/lib/advice/thresholds'
 import { HOUR_MILLIS } from '@/lib/physics/constants'
 
 /** What was last known of a sheet stands in for the hour this long. [h] Ours, as long as modelled sheets are kept. */
 const LOOK_BACK_HOURS = 72
 /** A reading outweighs what the model grew since for a day. [h] Ours. */
-const READING_HOURS = 24
-/** Nobody measures it, and a sheet forgets it within a day: a little below freezing. [°C] Ours, as at set-up. */
-const UNMEASURED_TEMPERATURE_C = -2
+const OUTWEIGHS_HOURS = 24
 
 type Told = Pick<LogEntry, 'kind' | 'happenedAt'>
 
@@ -49,7 +48,7 @@ export async function modelSheetAt(
   const hour = isOutlookTrue ? await findHourOfSheet(db, access, at) : undefined
   const known = hour?.sheet ?? (await findSheetBetween(db, access, { from: hoursBefore(at, LOOK_BACK_HOURS), to: at }))
   const measured = await findReadingSince(db, access, {
-    from: hoursBefore(at, READING_HOURS),
+    from: hoursBefore(at, OUTWEIGHS_HOURS),
     to: at,
     writtenSince: hour?.judgedAt ?? new Date(0),
   })
@@ -57,7 +56,7 @@ export async function modelSheetAt(
   if (thicknessMm === undefined) return undefined
   return {
     thicknessMm,
-    temperatureC: Math.min(0, known?.temperatureC ?? UNMEASURED_TEMPERATURE_C),
+    temperatureC: Math.min(0, known?.temperatureC ?? REPORTED.iceTemperatureC),
     snowCoverCm: known?.snowCoverCm ?? 0,
   }
 }
@@ -75,7 +74,7 @@ async function reportSheetAt(trx: Db, access: RinkAccess<'writeLog'>, at: Date, 
   const thicknessMm = entries.findLast(({ kind }) => kind === 'reading')?.thicknessMm ?? model?.thicknessMm
   if (thicknessMm === undefined) return
   const isSwept = entries.some(({ kind }) => kind !== 'reading')
-  const temperatureC = thicknessMm > 0 ? (model?.temperatureC ?? UNMEASURED_TEMPERATURE_C) : 0
+  const temperatureC = thicknessMm > 0 ? (model?.temperatureC ?? REPORTED.iceTemperatureC) : 0
   const snowCoverCm = isSwept ? 0 : (model?.snowCoverCm ?? 0)
   await insertReportedSheet(trx, access.rinkId, { thicknessMm, temperatureC, snowCoverCm }, at)
 }

@@ -10,6 +10,7 @@ import { chooseUnits } from '@/db/queries/users'
 import { insertWater } from '@/db/queries/water-sources'
 import type { Db } from '@/db/knex'
 import { requireRink } from '@/lib/access/require-rink'
+import { REPORTED } from '@/lib/advice/thresholds'
 import type { ServiceContext } from '@/lib/context'
 import { NotFoundError } from '@/lib/errors'
 import { timeZoneAt } from '@/lib/places/time-zone'
@@ -18,12 +19,9 @@ import { cellOf } from '@/lib/weather/cell'
 import { placeOf } from './place-rink'
 import { spend } from './rate-limits'
 
-/** Nobody measures it, and a sheet forgets it within a day: a little below freezing. [°C] Ours. */
-const REPORTED_ICE_TEMPERATURE_C = -2
-
 /** Keeps what the keeper says of the ice at this moment. */
 export async function reportIce(trx: Db, rinkId: string, thicknessMm: number, now: Date): Promise<void> {
-  const temperatureC = thicknessMm > 0 ? REPORTED_ICE_TEMPERATURE_C : 0
+  const temperatureC = thicknessMm > 0 ? REPORTED.iceTemperatureC : 0
   await insertReportedSheet(trx, rinkId, { thicknessMm, temperatureC, snowCoverCm: 0 }, now)
 }
 

@@ -1,6 +1,7 @@
 // The log in words: what an entry says, when, and what came of a flood.
 import { formatInTimeZone } from 'date-fns-tz'
 import { tonightDate } from '@/lib/advice/night'
+import { isLate } from '@/lib/advice/settle-night'
 import { localDateOf, zoneOffsetMinutes } from '@/lib/advice/zoned-time'
 import { HOUR_MILLIS, MINUTE_MILLIS } from '@/lib/physics/constants'
 import type { EntryView, LogKind, Outcome } from '@/lib/schemas/log-choices'
@@ -10,8 +11,6 @@ import { capitalised, iceText, layerText, numberText, temperatureText, waterText
 import { clockText } from './times'
 
 const HALF_DAY_MILLIS = 12 * HOUR_MILLIS
-/** Nobody stands by with a watch: found set this much after what was said still counts as kept. [min] Ours. */
-const GRACE_MINUTES = 15
 /** From here on cubic metres are read more easily. [L] */
 const MANY_LITRES = 2000
 
@@ -92,9 +91,8 @@ function outcomeText({ outcome, outcomeAt }: EntryView, words: WordOptions): str
 export function floodResult({ outcome, outcomeAt, saidSetByAt }: EntryView): 'kept' | 'broken' | null {
   if (!outcome || !outcomeAt || !saidSetByAt) return null
   if (outcome === 'spoiled') return 'broken'
-  const lateMillis = Date.parse(outcomeAt) - Date.parse(saidSetByAt) - GRACE_MINUTES * MINUTE_MILLIS
-  if (outcome === 'set') return lateMillis <= 0 ? 'kept' : null
-  return lateMillis > 0 ? 'broken' : null
+  if (isLate(outcomeAt, saidSetByAt)) return outcome === 'wet' ? 'broken' : null
+  return outcome === 'set' ? 'kept' : null
 }
 
 /** "9:12 pm"; "Wed 1:30 am" past midnight; with the zone's letters in an hour that the clock shows twice. */

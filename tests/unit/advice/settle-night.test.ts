@@ -138,3 +138,10 @@ test('wet before it was said to be set says nothing against the word', () => {
     ),
   ).toMatchObject({ result: 'kept', source: 'weather' })
 })
+
+test('still wet a quarter of an hour after what was said is within its grace, a minute more is not', () => {
+  const dry = hoursOf(() => ({}))
+  const lateBy = (minutes: number) => settle(flood(0), dry, [report('wet', 2 + minutes / 60)])
+  expect(lateBy(15)).toMatchObject({ source: 'weather' })
+  expect(lateBy(16)).toMatchObject({ result: 'broken', detail: { code: 'found_wet' } })
+})

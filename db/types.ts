@@ -189,6 +189,7 @@ export interface FillRow {
   started_by: string | null
   target_depth_mm: number
   finished_at: Date | null
+  given_up: boolean
 }
 
 export interface FillSessionRow {

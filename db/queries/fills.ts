@@ -43,6 +43,11 @@ export async function findNewestFill(db: Db, access: RinkAccess): Promise<Fill |
   return fillsOf(db, access).orderBy('f.started_at', 'desc').first<Fill | undefined>(FILL)
 }
 
+/** The fill whose water stands on the rink, or is to: the newest that was not given up. */
+export async function findStandingFill(db: Db, access: RinkAccess): Promise<Fill | undefined> {
+  return fillsOf(db, access).where('f.given_up', false).orderBy('f.started_at', 'desc').first<Fill | undefined>(FILL)
+}
+
 /** The open fill, held until the transaction ends: of two changes at once the second sees the first. */
 export async function lockOpenFill(trx: Db, access: RinkAccess<'writeLog'>): Promise<Fill | undefined> {
   return fillsOf(trx, access).whereNull('f.finished_at').forUpdate('f').first<Fill | undefined>(FILL)
@@ -68,8 +73,12 @@ export async function insertFill(
   return row?.id
 }
 
-export async function finishFill(trx: Db, fillId: string, now: Date): Promise<void> {
-  await trx('fills').where({ id: fillId }).update({ finished_at: now })
+export async function finishFill(
+  trx: Db,
+  fillId: string,
+  { endedAt, isGivenUp }: { endedAt: Date; isGivenUp: boolean },
+): Promise<void> {
+  await trx('fills').where({ id: fillId }).update({ finished_at: endedAt, given_up: isGivenUp })
 }
 
 /** A fill into which no water ran never was. */

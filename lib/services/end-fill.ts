@@ -28,16 +28,23 @@ export interface OpenFill {
   fill: Fill
 }
 
+interface End {
+  endedAt: Date
+  /** Its water does not stand on the rink. */
+  isGivenUp: boolean
+  /** For the log. */
+  note: string
+}
+
 /** @returns false when no water ran: then the fill is gone. */
 export async function endFill(
   { now, viewer }: Pick<ServiceContext, 'now' | 'viewer'>,
   { trx, access, rink, fill }: OpenFill,
-  note: string,
-  endedAt = now,
+  { endedAt, isGivenUp, note }: End,
 ): Promise<boolean> {
   await stopFillSession(trx, fill.id, endedAt)
   const waterL = litresBy(await listFillSessions(trx, fill.id), now)
-  await finishFill(trx, fill.id, endedAt)
+  await finishFill(trx, fill.id, { endedAt, isGivenUp })
   await setFillReminders(trx, access, { rink, fill, now, viewer })
   await enqueueRefresh(trx, rink.id)
   if (waterL < LEAST_LITRES) {

@@ -2,9 +2,9 @@
 import type { Fill, FillCheck, FillSession } from '@/db/queries/fills'
 import type { RinkForJudging } from '@/db/queries/rinks'
 import { litresPouredBy, type FillProgressInput, type HoseSession } from '@/lib/advice/fill-progress'
-import type { LevelReading } from '@/lib/advice/leak-warning'
+import { levelOfReading, type LevelReading } from '@/lib/advice/leak-warning'
 import { cornerDepthsM, floorOf } from '@/lib/physics/floor'
-import { levelOf } from '@/lib/physics/stage'
+import { levelOf, stageAt } from '@/lib/physics/stage'
 
 export type RinkSize = Pick<RinkForJudging, 'lengthM' | 'widthM' | 'floor'>
 
@@ -24,6 +24,23 @@ function hoseSessions(sessions: readonly FillSession[]): HoseSession[] {
 /** Water that the hose has brought by an instant. [L] */
 export function litresBy(sessions: readonly FillSession[], at: Date): number {
   return litresPouredBy(hoseSessions(sessions), at.getTime())
+}
+
+/**
+ * Mean depth of the water that a finished fill left. What was measured over the lowest corner counts where it is more than
+ * the hose is known to have brought: whoever writes the hose down late has water that the log does not know. [mm]
+ */
+export function filledDepthMm(
+  rink: RinkSize,
+  { finishedAt }: Pick<Fill, 'finishedAt'>,
+  { sessions, checks }: { sessions: readonly FillSession[]; checks: readonly FillCheck[] },
+): number {
+  const areaM2 = rink.lengthM * rink.widthM
+  const pouredMm = litresBy(sessions, finishedAt ?? new Date(0)) / areaM2
+  const reading = levelReadings(rink, checks).at(-1)
+  if (!reading) return pouredMm
+  const floor = floorOf(rink.lengthM, rink.widthM, rink.floor)
+  return Math.max(pouredMm, (stageAt(floor, levelOfReading(floor, reading)).volumeM3 / areaM2) * 1000)
 }
 
 /** The corner over which water is measured: the lowest, the first of equals. */

@@ -94,7 +94,7 @@ export async function finishFill(context: ServiceContext, { rinkId }: { rinkId: 
   const { now } = context
   await atOpenFill(context, rinkId, async (open) => {
     const { trx, access } = open
-    const isFilled = await endFill(context, open, '')
+    const isFilled = await endFill(context, open, { endedAt: now, isGivenUp: false, note: '' })
     if (isFilled) await insertReportedSheet(trx, rinkId, OPEN_WATER, now)
     await movePhase(trx, access, isFilled ? 'freezing' : 'waiting', now)
   })
@@ -103,8 +103,9 @@ export async function finishFill(context: ServiceContext, { rinkId }: { rinkId: 
 /** The fill came to nothing, a torn liner for one: its water is logged, and the rink waits again. */
 export async function giveUpFill(context: ServiceContext, { rinkId }: { rinkId: string }): Promise<void> {
   await atOpenFill(context, rinkId, async (open) => {
-    await endFill(context, open, 'Given up before it was full.')
-    await movePhase(open.trx, open.access, 'waiting', context.now)
+    const { now } = context
+    await endFill(context, open, { endedAt: now, isGivenUp: true, note: 'Given up before it was full.' })
+    await movePhase(open.trx, open.access, 'waiting', now)
   })
 }
 

@@ -1,6 +1,6 @@
 // A rink that freezes: what the Freezing page shows, and the keeper's word that it is open.
 import { findCellTrouble } from '@/db/queries/cell-reads'
-import { findNewestFill } from '@/db/queries/fills'
+import { findStandingFill } from '@/db/queries/fills'
 import { findNewestForecast } from '@/db/queries/forecasts'
 import { enqueueRefresh } from '@/db/queries/jobs'
 import { findNewestReading, type Reading } from '@/db/queries/readings'
@@ -58,7 +58,7 @@ async function drilledSinceFill(
   access: RinkAccess,
   now: Date,
 ): Promise<{ sinceAt: Date | null; reading: Reading | undefined }> {
-  const sinceAt = (await findNewestFill(db, access))?.finishedAt ?? null
+  const sinceAt = (await findStandingFill(db, access))?.finishedAt ?? null
   const recent = new Date(now.getTime() - OPENS_HOURS * HOUR_MILLIS)
   const after = sinceAt !== null && sinceAt > recent ? sinceAt : recent
   return { sinceAt, reading: await findNewestReading(db, access, after) }

@@ -1,6 +1,6 @@
 // Puts together what the model is asked: the rink, its water, its sheet, what was poured, and the forecast.
 import type { Db } from '@/db/knex'
-import { findNewestFill, listFillSessions } from '@/db/queries/fills'
+import { findStandingFill, listFillChecks, listFillSessions } from '@/db/queries/fills'
 import { listFloodsSince, type PouredPass } from '@/db/queries/floods'
 import type { StoredForecast } from '@/db/queries/forecasts'
 import type { RinkForJudging } from '@/db/queries/rinks'
@@ -9,12 +9,19 @@ import type { RinkAccess } from '@/lib/access/proofs'
 import { MODEL_VERSION } from '@/lib/advice/judge'
 import type { Yard } from '@/lib/advice/yard/types'
 import type { JudgeInput } from '@/lib/advice/types'
-import { HOUR_MILLIS } from '@/lib/physics/constants'
-import { litresBy } from './fill-facts'
+import { HOUR_MILLIS, ICE_DENSITY, WATER_DENSITY } from '@/lib/physics/constants'
+import { filledDepthMm, litresBy } from './fill-facts'
 import { findYardInUse } from './yard-in-use'
 
 /** What is on the ground before anybody reported a sheet. */
 const BARE = { thicknessMm: 0, temperatureC: 0, snowCoverCm: 0 }
+
+const ICE_TO_WATER = ICE_DENSITY / WATER_DENSITY
+/** A hole is read to half a centimetre. Common practice. [mm] */
+const READ_WITHIN_MM = 5
+/** What the model takes as the depth of a fill. [mm] */
+const LEAST_FILL_MM = 20
+const MOST_FILL_MM = 1000
 
 function sheetOf(sheet: StoredSheet | undefined, firstHourAt: Date): JudgeInput['sheet'] {
   if (!sheet) return BARE
@@ -33,15 +40,18 @@ function sheetOf(sheet: StoredSheet | undefined, firstHourAt: Date): JudgeInput[
 async function waterOfFill(
   db: Db,
   access: RinkAccess,
-  { phase, lengthM, widthM }: RinkForJudging,
-  now: Date,
+  { rink, sheetMm, now }: { rink: RinkForJudging; sheetMm: number; now: Date },
 ): Promise<Partial<JudgeInput['water']>> {
-  if (phase !== 'filling' && phase !== 'freezing') return {}
-  const fill = await findNewestFill(db, access)
-  if (!fill || (phase === 'filling') !== (fill.finishedAt === null)) return {}
-  const litres = litresBy(await listFillSessions(db, fill.id), fill.finishedAt ?? now)
-  if (phase === 'filling') return { fillDepthMm: fill.targetDepthMm, filledLitres: litres }
-  return { fillDepthMm: Math.min(1000, Math.max(20, litres / (lengthM * widthM))) }
+  if (rink.phase !== 'filling' && rink.phase !== 'freezing') return {}
+  const fill = await findStandingFill(db, access)
+  if (!fill || (rink.phase === 'filling') !== (fill.finishedAt === null)) return {}
+  const sessions = await listFillSessions(db, fill.id)
+  if (rink.phase === 'filling') return { fillDepthMm: fill.targetDepthMm, filledLitres: litresBy(sessions, now) }
+  const filledMm = filledDepthMm(rink, fill, { sessions, checks: await listFillChecks(db, fill.id) })
+  // Ice thicker than that froze of more water than was counted: nothing says then that it stands on the floor.
+  const isMoreThanCounted = (sheetMm - READ_WITHIN_MM) * ICE_TO_WATER > filledMm
+  const depthMm = isMoreThanCounted ? Math.max(filledMm, fill.targetDepthMm) : filledMm
+  return { fillDepthMm: Math.min(MOST_FILL_MM, Math.max(LEAST_FILL_MM, depthMm)) }
 }
 
 function endOf({ hours }: Pick<StoredForecast, 'hours'>): number {
@@ -60,7 +70,10 @@ export async function gatherJudgeInput(
   const sheet = await findStartingSheet(db, rink.id, { firstHourAt, now })
   const poured = await listFloodsSince(db, access, sheet && sheet.asOf > firstHourAt ? sheet.asOf : firstHourAt)
   const input = judgeInputOf({ rink, yard: await findYardInUse(db, rink), forecast, sheet, poured, firstHourAt, now })
-  return { ...input, water: { ...input.water, ...(await waterOfFill(db, access, rink, now)) } }
+  return {
+    ...input,
+    water: { ...input.water, ...(await waterOfFill(db, access, { rink, sheetMm: sheet?.thicknessMm ?? 0, now })) },
+  }
 }
 
 export function judgeInputOf(facts: {

@@ -1,5 +1,6 @@
 // The log to take along: CSV as RFC 4180 has it, safe to open in a spreadsheet, or JSON. SI units, named in the headings.
 import { stringify } from 'csv-stringify/sync'
+import { roundToNearestMinutes } from 'date-fns'
 import { formatInTimeZone } from 'date-fns-tz'
 import { listEntries } from '@/db/queries/log-lists'
 import type { LogEntry } from '@/db/queries/log-entries'
@@ -18,22 +19,25 @@ export interface LogFile {
 
 const iso = (at: Date | null) => at?.toISOString() ?? null
 
+/** What was typed in other units is kept to the last bit of them; a reader of the file wants the figure. */
+const figure = (value: number | null, decimals: number) => (value === null ? null : Number(value.toFixed(decimals)))
+
 /** One entry under the headings of the file. Local times carry their offset, so that a doubled hour stays two. */
 function toRecord(entry: LogEntry, timeZone: string) {
   return {
     id: entry.id,
     kind: entry.kind,
     happened_at_utc: iso(entry.happenedAt),
-    happened_at_local: formatInTimeZone(entry.happenedAt, timeZone, 'yyyy-MM-dd HH:mm xxx'),
+    happened_at_local: formatInTimeZone(roundToNearestMinutes(entry.happenedAt), timeZone, 'yyyy-MM-dd HH:mm xxx'),
     time_zone: timeZone,
     night_date: entry.nightDate,
     pass_number: entry.passNumber,
-    layer_mm: entry.layerMm,
-    water_l: entry.waterL,
-    water_temperature_c: entry.waterTemperatureC,
+    layer_mm: figure(entry.layerMm, 2),
+    water_l: figure(entry.waterL, 1),
+    water_temperature_c: figure(entry.waterTemperatureC, 1),
     water_source: entry.waterKind,
-    ice_thickness_mm: entry.thicknessMm,
-    model_ice_thickness_mm: entry.modelThicknessMm,
+    ice_thickness_mm: figure(entry.thicknessMm, 1),
+    model_ice_thickness_mm: figure(entry.modelThicknessMm, 1),
     said_set_by_utc: iso(entry.saidSetByAt),
     outcome: entry.outcome,
     outcome_at_utc: iso(entry.outcomeAt),

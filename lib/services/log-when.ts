@@ -17,7 +17,7 @@ interface Frame {
 }
 
 const refuse = (field: string, message: string) =>
-  new InvalidInputError('Some entries need another look.', { [field]: message })
+  new InvalidInputError('Something here needs another look.', { [field]: message })
 
 /**
  * The instant at which the rink's clock showed a date and time.

@@ -16,6 +16,7 @@ import type {
   ChangePlaceInput,
   ChangeYardInput,
 } from '@/lib/schemas/rink-settings'
+import { hasIce } from '@/lib/schemas/rink-choices'
 import { cellOf } from '@/lib/weather/cell'
 import { endFill, likelyEnd } from './end-fill'
 import { placeOf } from './place-rink'
@@ -88,20 +89,20 @@ export async function changeIce(context: ServiceContext, input: ChangeIceInput):
   await changing(context, input.rinkId, async (trx) => {
     const rink = await getRinkForJudging(trx, input.rinkId)
     if (rink.phase !== input.phase) await enqueuePull(trx, rink.gridCellId)
-    if (input.phase !== 'filling') await endOpenFill(context, trx, rink)
+    if (input.phase !== 'filling') await endOpenFill(context, trx, rink, !hasIce(input.phase))
     if (input.iceThicknessMm !== undefined) await reportIce(trx, input.rinkId, input.iceThicknessMm, context.now)
     return { phase: input.phase }
   })
 }
 
 /** Counts the water up to when the fill was likely over: a hose that nobody stopped here did not run until today. */
-async function endOpenFill(context: ServiceContext, trx: Db, rink: RinkForJudging): Promise<void> {
+async function endOpenFill(context: ServiceContext, trx: Db, rink: RinkForJudging, isGivenUp: boolean): Promise<void> {
   const access = await requireRink({ ...context, db: trx }, rink.id, 'writeLog')
   const fill = await lockOpenFill(trx, access)
   if (!fill) return
   const open = { trx, access, rink, fill }
   const note = 'Nobody finished this fill; it ended when the rink was set otherwise in its settings.'
-  await endFill(context, open, note, await likelyEnd(open, context.now))
+  await endFill(context, open, { endedAt: await likelyEnd(open, context.now), isGivenUp, note })
 }
 
 /** When somebody can go out, and how often in a night. */

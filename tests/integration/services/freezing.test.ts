@@ -2,10 +2,11 @@
 import { beforeEach, expect, test } from 'vitest'
 import { insertForecast } from '@/db/queries/forecasts'
 import { ConflictError, ForbiddenError, NotFoundError } from '@/lib/errors'
-import { HOUR_MILLIS } from '@/lib/physics/constants'
-import { startFillSchema } from '@/lib/schemas/fills'
+import { HOUR_MILLIS, MINUTE_MILLIS } from '@/lib/physics/constants'
+import { checkFillSchema, startFillSchema } from '@/lib/schemas/fills'
 import { getFreezing, openForSkating } from '@/lib/services/freezing'
-import { finishFill, startFill } from '@/lib/services/fills'
+import { checkFill, finishFill, giveUpFill, startFill } from '@/lib/services/fills'
+import { changeIce } from '@/lib/services/rink-settings'
 import { requireRink } from '@/lib/access/require-rink'
 import { refreshOutlook } from '@/lib/services/outlooks'
 import { writeEntry } from '@/lib/services/log'
@@ -50,6 +51,42 @@ test('ice grows from open water, everybody of the rink sees it, a stranger nothi
   expect(outlook?.now.thicknessMm).toBeLessThan(111)
   expect(outlook?.carriesSkaterAt.p50).not.toBeNull()
   await expect(freezing(later(24), cast.stranger)).rejects.toThrow(NotFoundError)
+})
+
+/** A fill that somebody wrote down too late: a minute of hose, 25 L on 100 m². */
+async function fillInAMinute(depthMm: string, at: Date) {
+  const aMinute = new Date(at.getTime() + MINUTE_MILLIS)
+  await changeIce(cast.keeper.at(at), { rinkId: cast.rinkId, phase: 'waiting', iceThicknessMm: undefined })
+  await startFill(cast.keeper.at(at), startFillSchema.parse({ rinkId: cast.rinkId, units: 'metric' }))
+  const look = { rinkId: cast.rinkId, units: 'metric', lowCornerDepth: depthMm, note: '' }
+  await checkFill(cast.keeper.at(at), checkFillSchema.parse(look))
+  await finishFill(cast.keeper.at(aMinute), { rinkId: cast.rinkId })
+}
+
+test('what was measured at the low corner counts over a hose that was written down late', async () => {
+  await fillInAMinute('9', later(1))
+  const { now } = (await freezing(later(2))).outlook ?? {}
+  // 9 cm of water on level ground, of which the ice has taken its 917 of 1000.
+  expect((now?.waterBelowMm ?? 0) + (now?.thicknessMm ?? 0) * 0.917).toBeCloseTo(90, 0)
+})
+
+test('ice that is thicker than the water that was counted does not stand on the floor for that', async () => {
+  await fillInAMinute('', later(1))
+  await drill('7', later(30))
+  const { outlook } = await freezing(later(30))
+  expect(outlook?.now.thicknessMm).toBeCloseTo(70, 0)
+  // The fill that was wanted is 10 cm deep: 100 - 0.917 × 70.
+  expect(outlook?.now.waterBelowMm).toBeCloseTo(36, 0)
+})
+
+test('a fill that was given up leaves the one before it on the rink', async () => {
+  await changeIce(cast.keeper.at(later(1)), { rinkId: cast.rinkId, phase: 'waiting', iceThicknessMm: undefined })
+  await startFill(cast.keeper.at(later(1)), startFillSchema.parse({ rinkId: cast.rinkId, units: 'metric' }))
+  await giveUpFill(cast.keeper.at(later(1.1)), { rinkId: cast.rinkId })
+  await changeIce(cast.keeper.at(later(2)), { rinkId: cast.rinkId, phase: 'freezing', iceThicknessMm: 20 })
+  const { now } = (await freezing(later(2))).outlook ?? {}
+  // Seven hours at 25 L/min on 100 m² are 105 mm.
+  expect((now?.waterBelowMm ?? 0) + (now?.thicknessMm ?? 0) * 0.917).toBeCloseTo(105, 0)
 })
 
 test('a drilled hole corrects the estimate', async () => {

@@ -34,7 +34,10 @@ export interface WetRun {
   rainMm: number
 }
 
-/** Runs of hours with snow or rain between two instants; one dry hour does not break a run. */
+/**
+ * Runs of hours with snow or rain, as far as they lie between two instants; one dry hour does not break a run. The amount
+ * is that of the whole run, so that the phone's shorter strip tells the same as the wide one.
+ */
 export function wetRuns(
   hours: Pick<StripHour, 'startsAt' | 'snowCm' | 'rainMm'>[],
   startsAt: number,
@@ -43,7 +46,7 @@ export function wetRuns(
   const runs: WetRun[] = []
   for (const hour of hours) {
     const isWet = hour.snowCm >= 0.05 || hour.rainMm >= 0.05
-    if (!isWet || hour.startsAt < startsAt || hour.startsAt >= endsAt) continue
+    if (!isWet) continue
     const last = runs.at(-1)
     if (last && hour.startsAt - last.endsAt <= HOUR_MILLIS) {
       last.endsAt = hour.startsAt + HOUR_MILLIS
@@ -59,6 +62,8 @@ export function wetRuns(
     }
   }
   return runs
+    .filter((run) => run.endsAt > startsAt && run.startsAt < endsAt)
+    .map((run) => ({ ...run, startsAt: Math.max(run.startsAt, startsAt), endsAt: Math.min(run.endsAt, endsAt) }))
 }
 
 export interface PlacedLabel {

@@ -1,6 +1,7 @@
 // A form whose server action answers with a FormState: says what happened, keeps what was typed, works without scripts.
 'use client'
-import { useEffect, useRef, type ReactNode } from 'react'
+import { useEffect, type ReactNode } from 'react'
+import { useFirstFault } from '@/components/hooks/use-first-fault'
 import { useSend } from '@/components/hooks/use-send'
 import type { FormAction, FormState } from '@/lib/http/form-state'
 import { Button } from './button'
@@ -26,12 +27,11 @@ export function ActionForm({
   children?: (state: FormState) => ReactNode
 }) {
   const { state, post, submit: send, isSending } = useSend(action)
-  const form = useRef<HTMLFormElement>(null)
+  const form = useFirstFault(state, isSending)
   useEffect(() => {
-    if (state.status === 'error') form.current?.querySelector<HTMLElement>('[aria-invalid=true]')?.focus()
     // What was saved is what the fields start from now.
     if (state.status === 'ok') form.current?.reset()
-  }, [state])
+  }, [state, form])
   return (
     <form ref={form} action={post} onSubmit={send} noValidate>
       {state.message ? (

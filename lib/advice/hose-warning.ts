@@ -23,7 +23,7 @@ export interface HoseQuestion {
  * Warns of frost in the hose within the next day.
  *
  * @param question Hours ahead, now [ms since the epoch], whether the hose runs, and its water. [°C]
- * @returns 'running_hose_freezes' from when a running hose is in danger; 'still_hose_freezes' while it is off, with
+ * @returns 'running_hose_freezes' from when a running hose is in danger, '…_now' when it is already; 'still_hose_freezes' while it is off, with
  *   how long a full hose has from the first hour of frost; null when neither is in sight.
  *
  * Source: the running hose by common practice (FILLING.hoseFreezesC); the still one by its heat, see stillHoseHours.
@@ -33,15 +33,16 @@ export function hoseWarning({ hours, nowMillis, isRunning, waterTemperatureC }: 
     const startMillis = Date.parse(time)
     return startMillis + HOUR_MILLIS > nowMillis && startMillis < nowMillis + FILLING.hoseAheadHours * HOUR_MILLIS
   })
-  return isRunning ? runningHose(ahead) : stillHose(ahead, waterTemperatureC)
+  return isRunning ? runningHose(ahead, nowMillis) : stillHose(ahead, waterTemperatureC)
 }
 
-function runningHose(ahead: readonly HoseHour[]): Caution | null {
+function runningHose(ahead: readonly HoseHour[], nowMillis: number): Caution | null {
   const first = ahead.find(({ airTemperatureC }) => airTemperatureC !== null && airTemperatureC <= FILLING.hoseFreezesC)
   if (!first) return null
   const lowestC = Math.min(...ahead.map(({ airTemperatureC }) => airTemperatureC ?? Number.POSITIVE_INFINITY))
   const values = { startsAt: first.time, airTemperatureC: first.airTemperatureC ?? 0, lowestC }
-  return { code: 'running_hose_freezes', values }
+  const isNow = Date.parse(first.time) <= nowMillis
+  return { code: isNow ? 'running_hose_freezes_now' : 'running_hose_freezes', values }
 }
 
 function stillHose(ahead: readonly HoseHour[], waterTemperatureC: number): Caution | null {

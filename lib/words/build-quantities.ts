@@ -37,9 +37,12 @@ export function pushText(newtonPerM: number, words: WordOptions): string {
 /** Turning moment at the foot of the boards. */
 export function momentText(newtonMPerM: number, words: WordOptions): string {
   return words.units.size === 'ft'
-    ? `${numberText(newtonMPerM / N_PER_LB, 0, words)} lb ft on each foot`
-    : `${numberText(newtonMPerM, 0, words)} N m on each metre`
+    ? `${momentFigure(newtonMPerM / N_PER_LB, words)} lb ft on each foot`
+    : `${momentFigure(newtonMPerM, words)} N m on each metre`
 }
+
+/** Low boards have a moment below one: no zero that is none. */
+const momentFigure = (value: number, words: WordOptions) => numberText(value, value < 10 ? 1 : 0, words)
 
 export function shareText(share: number, words: WordOptions): string {
   return `${numberText(share * 100, 0, words)} %`

@@ -43,6 +43,9 @@ const WARNINGS: Record<string, ClauseWriter> = {
   running_hose_freezes: (v, w) =>
     `From ${clockText(text(v, 'startsAt'), w)} it is ${temperatureText(num(v, 'airTemperatureC'), w)} or colder: a running cold hose has ` +
     `frozen at that. Stop before, walk the water out of the hose and take it in.`,
+  running_hose_freezes_now: (v, w) =>
+    `It is ${temperatureText(num(v, 'airTemperatureC'), w)} now: a running cold hose has frozen at that. Stop, walk the water out of the ` +
+    `hose and take it in.`,
   still_hose_freezes: (v, w) =>
     `Drain the hose and take it in: left full at ${temperatureText(num(v, 'airTemperatureC'), w)} ice begins in it after ` +
     `${durationText(Math.max(5, Math.round(num(v, 'minutesToIce') / 5) * 5))}.`,

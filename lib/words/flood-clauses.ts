@@ -42,8 +42,7 @@ export const FLOOD_CLAUSES: Record<string, ClauseWriter> = {
       : 'water gains more heat than it loses'),
   freezes_slowly: (v, w) => `only ${rateText(num(v, 'freezeRateMmPerH'), w)} freezes`,
   sun_warms: (v, w) => `the sun puts ${fluxText(num(v, 'shortwaveWm2'), w)} into the water`,
-  not_freezing: (v, w) =>
-    `at ${signedTemperatureText(num(v, 'airTemperatureC'), w)} water does not freeze in this hour`,
+  not_freezing: (v, w) => `at ${signedTemperatureText(num(v, 'airTemperatureC'), w)} water does not freeze`,
   dry_until_set: () => 'no snow or rain comes before the layer is set',
   trace_before_set: (v, w) => `a trace of snow or rain is possible around ${clockText(text(v, 'startsAt'), w)}`,
   snow_before_set: (v, w) => `snow from ${clockText(text(v, 'startsAt'), w)} would land on wet water`,

@@ -10,7 +10,7 @@ const CAUTIONS: Record<string, ClauseWriter> = {
   boards_too_low: (v, w) =>
     `Your boards of ${depthText(num(v, 'haveM'), w)} are too low: the low corner wants ${depthText(num(v, 'wantedM'), w)}.`,
   brace_low_side: (v, w) =>
-    `Brace the low side first: twice the depth pushes four times as hard, and a board that gave way at the end of a fill let 70,000 L go in seconds. ` +
+    `Brace the low side first: twice the depth pushes four times as hard, and a board that gave way at the end of a fill let ${volumeText(70, w)} go in seconds. ` +
     `Yours holds ${depthText(num(v, 'waterM'), w)} of water.`,
   fill_half_first: () => 'With one board on another, fill half and let that freeze before the rest.',
   ice_rises: (v, w) =>

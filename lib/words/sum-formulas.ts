@@ -18,7 +18,7 @@ const FORMULAS: Record<SumId, string> = {
   ground: 'Fall = lowest point − highest point below the string; area = length × width',
   water: 'Volume = sum over the floor of (floor − water level) wherever it is wet; mean depth = volume ÷ area',
   flow: 'Flow = bucket ÷ seconds × 60',
-  hose: 'Hours = litres ÷ flow ÷ 60',
+  hose: 'Hours = water ÷ flow a minute ÷ 60',
   sessions: 'Times out = hours of hose ÷ hours in one go, rounded up',
   wetted:
     'After each hour: the level at which (flow × time) of water stands on the floor, and the part of the floor below it',

@@ -80,11 +80,13 @@ export function datedPartText(at: string, words: WordOptions): string {
   return `${weekdayOfDate(date, words)} ${part ?? 'night'}, ${dayAndMonth.format(Date.parse(`${date}T00:00:00Z`))}`
 }
 
-/** "tonight", "tomorrow night", "Thursday night". */
+/** "tonight", "tomorrow night", "Thursday night"; in the small hours, which are still tonight, "the coming night". */
 export function nightText(nightDate: string, now: Date, words: WordOptions): string {
   const tonight = tonightDate(now, words.timeZone)
   if (nightDate === tonight) return 'tonight'
-  if (nightDate === addDays(tonight, 1)) return 'tomorrow night'
+  const today = localDateOf(now.getTime(), words.timeZone)
+  if (nightDate === today) return 'the coming night'
+  if (nightDate === addDays(today, 1)) return 'tomorrow night'
   return `${weekdayOfDate(nightDate, words)} night`
 }
 

@@ -23,6 +23,7 @@ async function expectFit(page: Page, path: string): Promise<void> {
 }
 
 test('pages that need no account', async ({ page }) => {
+  test.setTimeout(300_000)
   for (const path of Object.values(OPEN_PAGES)) await expectFit(page, path)
 })
 

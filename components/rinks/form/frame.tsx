@@ -1,13 +1,10 @@
 // The form round the rink's fields: sends them, says what came of it, and leads to the first fault.
 'use client'
-import { useEffect, useRef, type ReactNode } from 'react'
+import type { ReactNode } from 'react'
+import { useFirstFault } from '@/components/hooks/use-first-fault'
 import { Button } from '@/components/ui/button'
 import { Notice } from '@/components/ui/notice'
 import type { RinkForm } from './use-rink-form'
-
-/** Whatever a fault belongs to: a field, or a group of choices. */
-const FAULTY =
-  'input[aria-invalid=true], select[aria-invalid=true], textarea[aria-invalid=true], fieldset[aria-invalid=true] input'
 
 interface Props {
   form: RinkForm
@@ -18,10 +15,7 @@ interface Props {
 
 export function RinkFormFrame({ form, submit, busy, children }: Props) {
   const { state, isSending } = form
-  const element = useRef<HTMLFormElement>(null)
-  useEffect(() => {
-    if (state.status === 'error') element.current?.querySelector<HTMLElement>(FAULTY)?.focus()
-  }, [state])
+  const element = useFirstFault(state, isSending)
   // Without script the page comes back at its top, far from the button.
   const hasFaults = Object.keys(state.fields ?? {}).length > 0
   return (

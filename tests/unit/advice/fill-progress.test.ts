@@ -139,6 +139,8 @@ describe('frost in the hose', () => {
   test('a running hose is warned from the first hour at -4 °C', () => {
     const { hose } = fillProgress({ ...WEDGE, hours: hours([-1, -2, -4.5, -7]) })
     expect(hose).toMatchObject({ code: 'running_hose_freezes', values: { startsAt: at(5), lowestC: -7 } })
+    const already = fillProgress({ ...WEDGE, hours: hours([-4.5, -7]) }).hose
+    expect(already).toMatchObject({ code: 'running_hose_freezes_now', values: { airTemperatureC: -4.5 } })
     expect(fillProgress({ ...WEDGE, hours: hours([-1, -2, -3, -3.5]) }).hose).toBeNull()
   })
   test('a hose left lying is warned of any frost', () => {

@@ -63,6 +63,14 @@ test('snow with one dry hour between is one run with one amount', () => {
   expect(runs[0]).toMatchObject({ startsAt: start, endsAt: start + 3 * HOUR_MILLIS })
 })
 
+test('a run that begins before the strip keeps its whole amount', () => {
+  const start = at('2027-01-13T04:00:00Z')
+  const hours = [0.4, 0.6, 1].map((snowCm, index) => ({ startsAt: start + index * HOUR_MILLIS, snowCm, rainMm: 0 }))
+  const [run] = wetRuns(hours, start + 2 * HOUR_MILLIS, start + 9 * HOUR_MILLIS)
+  expect(run).toEqual({ startsAt: start + 2 * HOUR_MILLIS, endsAt: start + 3 * HOUR_MILLIS, snowCm: 2, rainMm: 0 })
+  expect(wetRuns(hours, start + 3 * HOUR_MILLIS, start + 9 * HOUR_MILLIS)).toEqual([])
+})
+
 test('labels stay inside the width and never overlap', () => {
   const placed = placeLabels(
     [

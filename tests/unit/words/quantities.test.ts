@@ -97,6 +97,10 @@ describe('times by the rink’s clock', () => {
   test('nights and spans', () => {
     expect(nightText('2027-01-12', now, metric)).toBe('tonight')
     expect(nightText('2027-01-14', now, metric)).toBe('Thursday night')
+    const smallHours = new Date('2027-01-13T10:00:00Z') // Wednesday, 5 am: still the night of Tuesday
+    expect(nightText('2027-01-12', smallHours, metric)).toBe('tonight')
+    expect(nightText('2027-01-13', smallHours, metric)).toBe('the coming night')
+    expect(nightText('2027-01-14', smallHours, metric)).toBe('tomorrow night')
     expect(spanText('2027-01-13T01:00:00Z', '2027-01-13T06:00:00Z', now, metric)).toBe('between 8 pm and 1 am')
     expect(spanText('2027-01-12T20:00:00Z', '2027-01-13T06:00:00Z', now, metric)).toBe('until 1 am')
   })

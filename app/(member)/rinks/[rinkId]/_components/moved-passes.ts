@@ -2,11 +2,11 @@
 import { judgePasses } from '@/lib/advice/move-pass'
 import type { NightRun } from '@/lib/advice/night-model'
 import { MINUTE_MILLIS } from '@/lib/physics/constants'
+import { MEASURES } from '@/lib/schemas/measures'
 import type { MovableNight, TonightPass, TonightView, WaterChoice } from '@/lib/schemas/tonight-view'
 
 const STEP = 15 * MINUTE_MILLIS
-const LEAST_MM = 0.5
-const MOST_MM = 20
+const LAYER_STEP_MM = 0.5
 
 export type Move = { minutes: number } | { layerMm: number } | { water: WaterChoice }
 
@@ -53,7 +53,7 @@ export function stepsOf(pass: TonightPass, { night, readAt }: Pick<TonightView, 
   return {
     earlier: at - STEP >= Math.max(Date.parse(night.startsAt), Date.parse(readAt) - STEP),
     later: at + STEP < Date.parse(night.endsAt),
-    thinner: pass.layerMm - 0.5 >= LEAST_MM,
-    thicker: pass.layerMm + 0.5 <= MOST_MM,
+    thinner: pass.layerMm - LAYER_STEP_MM >= MEASURES.layer.least,
+    thicker: pass.layerMm + LAYER_STEP_MM <= MEASURES.layer.most,
   }
 }

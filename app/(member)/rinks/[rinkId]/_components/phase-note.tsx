@@ -13,7 +13,7 @@ interface PhaseWords {
 const WORDS: Partial<Record<Phase, PhaseWords>> = {
   waiting: {
     text: 'This rink waits for its fill day.',
-    link: 'Fill days of the week',
+    link: 'See the fill days',
     path: 'week',
   },
   filling: {
@@ -33,8 +33,27 @@ const WORDS: Partial<Record<Phase, PhaseWords>> = {
   },
 }
 
-export function PhaseNote({ rink }: Pick<TonightView, 'rink'>) {
-  const words = WORDS[rink.phase]
+/** Water may go on again before anybody may. */
+const COLD_IS_BACK: PhaseWords = {
+  text: 'The rink was set to thawing, and the cold is back. Keep skaters off until you have drilled and it carries again.',
+  link: 'Say what there is now',
+  path: 'settings/ice',
+}
+
+interface PhaseNoteProps extends Pick<TonightView, 'rink'> {
+  isFloodNight: boolean
+  mayManage: boolean
+}
+
+function wordsOf({ rink, isFloodNight, mayManage }: PhaseNoteProps): PhaseWords | undefined {
+  const usual = WORDS[rink.phase]
+  if (rink.phase !== 'thaw' || !isFloodNight) return usual
+  return mayManage ? COLD_IS_BACK : { ...COLD_IS_BACK, link: 'The week to come', path: 'week' }
+}
+
+export function PhaseNote(props: PhaseNoteProps) {
+  const { rink } = props
+  const words = wordsOf(props)
   if (!words) return null
   return (
     <p className="mb-5 max-w-[60ch]">

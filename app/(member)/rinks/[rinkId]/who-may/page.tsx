@@ -10,13 +10,12 @@ export const metadata: Metadata = { title: 'Not with your role' }
 
 export default async function WhoMayPage({ params }: PageProps<'/rinks/[rinkId]/who-may'>) {
   const { rinkId } = await params
-  const { rinkName, role, keepers } = await orNotFound(getWhoMay(await pageContext(), rinkId))
-  const tellsSkater = role === 'skater' ? 'its crew or its keeper' : 'its keeper'
+  const { rinkName, keepers } = await orNotFound(getWhoMay(await pageContext(), rinkId))
   return (
     <RinkFrame name={rinkName} about="Not with your role">
-      <h1 className="mb-3 text-verdict font-medium">Only {tellsSkater} can open that page.</h1>
+      <h1 className="mb-3 text-verdict font-medium">That page is not for your role on this rink.</h1>
       <p className="mb-5 max-w-line">
-        {keepers.length === 1 ? 'Its keeper is' : 'Its keepers are'} {keepers.join(', ')}.
+        {keepers.length === 1 ? 'Its keeper is' : 'Its keepers are'} {keepers.join(', ')}: ask there.
       </p>
       <ButtonLink href={`/rinks/${rinkId}` as Route}>Back to tonight</ButtonLink>
     </RinkFrame>

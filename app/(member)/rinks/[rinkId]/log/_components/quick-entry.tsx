@@ -1,6 +1,8 @@
 // Writing an entry with gloves on: choose what was done, then one button. The line shows at once and goes back if it fails.
 'use client'
 import { useState, type MouseEvent } from 'react'
+import { useFirstFault } from '@/components/hooks/use-first-fault'
+import { useSend } from '@/components/hooks/use-send'
 import { Button } from '@/components/ui/button'
 import { Notice } from '@/components/ui/notice'
 import type { FormState } from '@/lib/http/form-state'
@@ -11,7 +13,6 @@ import { KIND_WORDS } from '@/lib/words/log'
 import { writeEntryAction } from '../actions'
 import { MainFields, MoreFields } from './entry-fields'
 import { newValues, type EntryValues } from './entry-values'
-import { useSend } from '@/components/hooks/use-send'
 import { AgoFields, AnotherTime } from './when-fields'
 
 /** As the buttons stand: what is done most comes first. */
@@ -92,6 +93,7 @@ interface EntryFormProps extends Omit<QuickEntryProps, 'open'> {
 
 function EntryForm({ kind, onSaved, usual, reader, rinkId, entryKey }: EntryFormProps) {
   const { state, post, submit, isSending } = useSend(writeEntryAction)
+  const form = useFirstFault(state, isSending)
   const shown = kind ?? sentKind(state.status === 'error' ? state.values : undefined)
   if (shown === null) {
     return state.message ? (
@@ -117,6 +119,7 @@ function EntryForm({ kind, onSaved, usual, reader, rinkId, entryKey }: EntryForm
         </Notice>
       ) : null}
       <form
+        ref={form}
         action={post}
         onSubmit={(event) => submit(event, onSaved)}
         noValidate

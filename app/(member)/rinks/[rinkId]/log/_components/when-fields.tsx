@@ -45,9 +45,13 @@ function WhichHour({ error, chosen }: { error?: string; chosen?: string }) {
     { value: 'second', label: 'The second time, after it' },
   ]
   return (
-    <fieldset className="mb-5">
+    <fieldset className="mb-5" aria-invalid={error ? true : undefined} aria-describedby={error && 'which-hour-error'}>
       <legend className="font-medium">Which of the two?</legend>
-      {error ? <p className="text-note text-rust">{error}</p> : null}
+      {error ? (
+        <p id="which-hour-error" className="text-note text-rust">
+          {error}
+        </p>
+      ) : null}
       {choices.map(({ value, label }) => (
         <label key={value} className="flex min-h-touch items-center gap-3">
           <input

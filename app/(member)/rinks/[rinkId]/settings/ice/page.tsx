@@ -13,7 +13,7 @@ export default async function IceSettingsPage({ params }: PageProps<'/rinks/[rin
     <SettingsPage
       rink={rink}
       title="Ice now"
-      lead="The season moves this on by itself as you log; correct it here when it is wrong."
+      lead="A fill moves this on by itself, and so does opening the rink. A thaw, its end and the end of the season you set here."
     >
       <IceForm initial={iceValues(rink, words.units)} />
     </SettingsPage>

@@ -1,5 +1,7 @@
 // Changing an entry. When somebody else was faster, both versions are in sight before one overwrites the other.
 'use client'
+import { useFirstFault } from '@/components/hooks/use-first-fault'
+import { useSend } from '@/components/hooks/use-send'
 import { Button } from '@/components/ui/button'
 import { Notice } from '@/components/ui/notice'
 import type { LogKind } from '@/lib/schemas/log-choices'
@@ -7,7 +9,6 @@ import { unitsCode, type Units } from '@/lib/units'
 import { changeEntryAction } from '../../actions'
 import { MainFields, Note, Water } from '../../_components/entry-fields'
 import type { EntryValues } from '../../_components/entry-values'
-import { useSend } from '@/components/hooks/use-send'
 import { DayAndTime } from '../../_components/when-fields'
 
 interface ChangeFormProps {
@@ -21,6 +22,7 @@ interface ChangeFormProps {
 
 export function ChangeForm({ rinkId, entryId, kind, version, units, initial }: ChangeFormProps) {
   const { state, post, submit, isSending } = useSend(changeEntryAction)
+  const form = useFirstFault(state, isSending)
   const isError = state.status === 'error'
   const values = (isError && state.values) || initial
   const faults = state.fields ?? {}
@@ -31,6 +33,7 @@ export function ChangeForm({ rinkId, entryId, kind, version, units, initial }: C
     // What was typed stays while the page reads itself anew under the form; a saved change starts it afresh.
     <form
       key={isError ? 'typed' : version}
+      ref={form}
       action={post}
       onSubmit={(event) => submit(event)}
       noValidate

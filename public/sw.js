@@ -271,7 +271,8 @@ async function offlinePage() {
     `<!doctype html><html lang="en"><meta charset="utf-8"><meta name="viewport" content="width=device-width,initial-scale=1">
 <title>No network · Nightsheet</title><style>:root{color-scheme:light dark}body{font:17px/1.5 "IBM Plex Sans",system-ui,sans-serif;max-width:36rem;margin:48px auto;padding:0 20px}
 h1{font-size:28px;font-weight:500}a{color:inherit;display:inline-block;padding:12px 0}</style>
-<h1>No network.</h1><p>This page could not be fetched. Try again where the signal is better.</p>${found}</html>`,
+<h1>No network.</h1><p>This page could not be fetched. It is fetched again by itself once there is a network.</p>
+<p><a href="">Try again</a></p>${found}<script>addEventListener('online', () => location.reload())</script></html>`,
     { status: 503, headers: { 'Content-Type': 'text/html; charset=utf-8' } },
   )
 }

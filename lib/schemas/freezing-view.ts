@@ -22,6 +22,8 @@ export interface FreezingView {
   sinceAt: string | null
   /** The newest since the fill. */
   reading: { at: string; thicknessMm: number; by: string | null } | null
+  /** Ice of the whole rink as last measured or modelled, where there is any. [mm] */
+  sheetMm: number | null
   /** Drilled at least as thick as the keeper wants it, so that they may open the rink. */
   isDrilledThick: boolean
 }

@@ -3,6 +3,7 @@ import { findCellTrouble } from '@/db/queries/cell-reads'
 import { findStandingFill } from '@/db/queries/fills'
 import { findNewestForecast } from '@/db/queries/forecasts'
 import { enqueueRefresh } from '@/db/queries/jobs'
+import { findNewestThickness } from '@/db/queries/log-season'
 import { findNewestReading, type Reading } from '@/db/queries/readings'
 import { changeRink, lockRink } from '@/db/queries/rink-settings'
 import { findRinkForJudging, type RinkForJudging } from '@/db/queries/rinks'
@@ -15,12 +16,16 @@ import type { ServiceContext } from '@/lib/context'
 import { ConflictError } from '@/lib/errors'
 import { HOUR_MILLIS } from '@/lib/physics/constants'
 import type { FreezingView } from '@/lib/schemas/freezing-view'
+import { hasIce } from '@/lib/schemas/rink-choices'
 import { forecastRead } from './forecast-read'
 import { gatherJudgeInput } from './judge-input'
 import { getRinkAndReader } from './rink-and-reader'
 
 /** A hole drilled longer ago opens no rink: it says little about today's ice. [h] Ours. */
 const OPENS_HOURS = 72
+
+/** Half of the tenth of an inch that ice is shown to: a hole of the limit's own figure is thick enough. [mm] */
+const SHOWN_WITHIN_MM = 1.27
 
 /** @throws NotFoundError for strangers. */
 export async function getFreezing(context: ServiceContext, rinkId: string): Promise<FreezingView> {
@@ -37,6 +42,7 @@ export async function getFreezing(context: ServiceContext, rinkId: string): Prom
     lastReadFailed: (await findCellTrouble(db, rink.gridCellId)) !== null,
     sinceAt: sinceAt?.toISOString() ?? null,
     reading: reading ? { ...reading, at: reading.at.toISOString() } : null,
+    sheetMm: hasIce(rink.phase) ? ((await findNewestThickness(db, access, now)) ?? null) : null,
     isDrilledThick: isThick(rink, reading),
   }
 }
@@ -65,7 +71,7 @@ async function drilledSinceFill(
 }
 
 function isThick({ carriesSkaterMm }: RinkForJudging, reading: Reading | undefined): boolean {
-  return reading !== undefined && reading.thicknessMm >= carriesSkaterMm
+  return reading !== undefined && reading.thicknessMm + SHOWN_WITHIN_MM >= carriesSkaterMm
 }
 
 /**

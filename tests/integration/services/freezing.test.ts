@@ -79,6 +79,14 @@ test('ice that is thicker than the water that was counted does not stand on the 
   expect(outlook?.now.waterBelowMm).toBeCloseTo(36, 0)
 })
 
+test('a hole that reads like the limit in inches is as thick as the limit', async () => {
+  // 3.9 in, where 100 mm are shown as 3.9 in.
+  await drill('9.9', later(30))
+  expect((await freezing(later(30))).isDrilledThick).toBe(true)
+  await drill('9.8', later(31))
+  expect((await freezing(later(31))).isDrilledThick).toBe(false)
+})
+
 test('a fill that was given up leaves the one before it on the rink', async () => {
   await changeIce(cast.keeper.at(later(1)), { rinkId: cast.rinkId, phase: 'waiting', iceThicknessMm: undefined })
   await startFill(cast.keeper.at(later(1)), startFillSchema.parse({ rinkId: cast.rinkId, units: 'metric' }))
@@ -95,6 +103,7 @@ test('a drilled hole corrects the estimate', async () => {
   const view = await freezing(later(24))
   expect(before).toBeGreaterThan(25)
   expect(view.outlook?.now.thicknessMm).toBeCloseTo(20, 0)
+  expect(view.sheetMm).toBe(20)
   expect(view.reading).toMatchObject({ thicknessMm: 20, by: 'Crew' })
   expect(view.isDrilledThick).toBe(false)
 })

@@ -27,6 +27,7 @@ const view: FreezingView = {
   lastReadFailed: true,
   sinceAt: null,
   reading: null,
+  sheetMm: null,
   isDrilledThick: false,
 }
 const textOf = (markup: string) => markup.replace(/<[^>]+>/g, ' ').replace(/[\s\u00a0]+/g, ' ')

@@ -1,4 +1,6 @@
 // The newest drilled hole, the form for another, and the keeper's word that the rink is open.
+import type { Route } from 'next'
+import Link from 'next/link'
 import { Facts } from '@/components/ui/facts'
 import type { FreezingView } from '@/lib/schemas/freezing-view'
 import { iceText } from '@/lib/words/quantities'
@@ -6,12 +8,22 @@ import { clockText, weekdayText } from '@/lib/words/times'
 import { OpenRink, ReadingForm } from './ice-forms'
 
 export function Drilled({ view, entryKey }: { view: FreezingView; entryKey: string }) {
-  const { rink, reader, mayWrite, mayManage, isDrilledThick } = view
+  const { rink, reader, reading, mayWrite, mayManage, isDrilledThick } = view
   return (
     <>
       <NewestHole view={view} />
       {mayWrite ? <ReadingForm rinkId={rink.id} units={reader.units} entryKey={entryKey} /> : null}
       {mayManage && isDrilledThick ? <OpenRink rinkId={rink.id} /> : null}
+      {mayManage && reading && !isDrilledThick ? (
+        <p className="mt-4 max-w-line text-note text-graphite">
+          The rink is opened here once a hole is {iceText(rink.carriesSkaterMm, reader)} thick, your limit. Where all
+          the water has frozen to the floor with less, say so in its{' '}
+          <Link href={`/rinks/${rink.id}/settings/ice` as Route} className="underline">
+            settings
+          </Link>
+          .
+        </p>
+      ) : null}
     </>
   )
 }

@@ -1,8 +1,10 @@
 // When nothing freezes here: where the season is instead, and the way there.
 import type { Route } from 'next'
 import { ButtonLink } from '@/components/ui/button'
+import { Notice } from '@/components/ui/notice'
 import type { Phase } from '@/lib/advice/types'
 import type { FreezingView } from '@/lib/schemas/freezing-view'
+import { iceText } from '@/lib/words/quantities'
 import { Drilled } from './drilled'
 
 interface Words {
@@ -30,16 +32,16 @@ const WORDS: Record<Phase, Words> = {
     word: 'Look again',
   },
   skating: {
-    title: 'The rink is open.',
+    title: 'Open, by its keeper’s word.',
     text: 'From here on the night sheet says when to flood. Thickness stays an estimate: drill before the first skaters, after a thaw and after snow.',
     path: '',
     word: 'To the night sheet',
   },
   thaw: {
     title: 'The ice is thawing.',
-    text: 'Keep off. The night sheet says how much is lost and when the cold returns; drill before anyone goes back on.',
-    path: '',
-    word: 'To the night sheet',
+    text: 'Keep off. The week says how much is lost and when the cold returns; drill before anyone goes back on.',
+    path: '/week',
+    word: 'To the week',
   },
   closed: {
     title: 'Closed for the season.',
@@ -58,11 +60,21 @@ const RUN_OUT: Words = {
 }
 
 export function NotFreezing({ view, entryKey }: { view: FreezingView; entryKey: string }) {
-  const { rink, forecast } = view
+  const { rink, forecast, sheetMm, reader } = view
   const { title, text, path, word } = rink.phase === 'freezing' && forecast ? RUN_OUT : WORDS[rink.phase]
+  const isUnderLimit = rink.phase === 'skating' && sheetMm !== null && sheetMm < rink.carriesSkaterMm
   return (
     <>
       <h1 className="mb-2 max-w-[24ch] text-verdict font-medium tracking-tight lg:text-verdict-wide">{title}</h1>
+      {isUnderLimit ? (
+        <Notice tone="caution">
+          <p>
+            {iceText(sheetMm, reader)} of ice by the newest estimate, which is under the{' '}
+            {iceText(rink.carriesSkaterMm, reader)} that carry a skater here. Keep off until a drilled hole says
+            otherwise.
+          </p>
+        </Notice>
+      ) : null}
       <p className="mb-5 max-w-line text-graphite">{text}</p>
       <ButtonLink look="main" href={`/rinks/${rink.id}${path}` as Route}>
         {word}

@@ -46,7 +46,8 @@ export async function getSeason(context: ServiceContext, rinkId: string, year?: 
     ...frame,
     season,
     presentYear: frame.season.year,
-    totals,
+    // The ice of today is none of a season that is over.
+    totals: season.year < frame.season.year ? { ...totals, thicknessMm: null } : totals,
     hoseHours: totals.waterL > 0 ? hoursOf(byKind, frame.usual.sources) : null,
     waterCost: price === null ? null : (totals.waterL / 1000) * price,
     thickness,

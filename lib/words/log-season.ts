@@ -29,6 +29,13 @@ export function seasonHeadline(season: SeasonFigures, now: Date, words: WordOpti
   return `${capitalised(parts.filter(Boolean).join(', '))}.`
 }
 
+/** "41 floods on 20 nights.", of a season that is over. */
+export function pastSeasonHeadline({ floods, nightsFlooded }: SeasonFigures): string {
+  if (floods === 0) return 'No flood in the log of that season.'
+  const nights = `${countText(nightsFlooded)} ${nightsFlooded === 1 ? 'night' : 'nights'}`
+  return `${capitalised(countText(floods))} ${floods === 1 ? 'flood' : 'floods'} on ${nights}.`
+}
+
 function sinceText(at: Date, now: Date, { timeZone }: WordOptions): string {
   const day = (instant: Date) => Date.parse(localDateOf(instant.getTime(), timeZone))
   const days = Math.round((day(now) - day(at)) / DAY_MILLIS)

@@ -61,6 +61,7 @@ test('a season’s sums, hose hours and lists', async () => {
   expect(season.thaws.map(({ note }) => note)).toEqual(['Rain'])
   expect(season.repairs.map(({ note }) => note)).toEqual(['North boards'])
   expect((await getSeason(cast.skater.at(NOW), cast.rinkId, 2025)).totals.floods).toBe(0)
+  expect((await getSeason(cast.skater.at(NOW), cast.rinkId, 2025)).totals.thicknessMm).toBeNull()
   await expect(getSeason(cast.stranger.at(NOW), cast.rinkId)).rejects.toThrow(NotFoundError)
 })
 

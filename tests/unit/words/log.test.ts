@@ -3,7 +3,13 @@ import { describe, expect, test } from 'vitest'
 import type { EntryView } from '@/lib/schemas/log-choices'
 import { IMPERIAL, METRIC } from '@/lib/units'
 import { changedSentence, entryFacts, entryRemark, entryTime, floodResult, nightHeading } from '@/lib/words/log'
-import { seasonHeadline, thicknessSummary, waterSummary, weeksSummary } from '@/lib/words/log-season'
+import {
+  pastSeasonHeadline,
+  seasonHeadline,
+  thicknessSummary,
+  waterSummary,
+  weeksSummary,
+} from '@/lib/words/log-season'
 import type { WordOptions } from '@/lib/words/options'
 
 const WORDS: WordOptions = { timeZone: 'America/Toronto', units: METRIC, clock: '12', locale: 'en' }
@@ -106,6 +112,8 @@ describe('the season', () => {
     expect(seasonHeadline({ ...season, floods: 1 }, NOW, WORDS)).toBe('One flood, 8.9 cm, no thaw so far.')
     const today = { ...season, thicknessMm: null, lastThawAt: new Date('2027-01-12T20:00:00Z') }
     expect(seasonHeadline(today, NOW, WORDS)).toBe('41 floods, a thaw today.')
+    expect(pastSeasonHeadline({ ...season, floods: 41, nightsFlooded: 20 })).toBe('41 floods on 20 nights.')
+    expect(pastSeasonHeadline({ ...season, floods: 0, nightsFlooded: 0 })).toBe('No flood in the log of that season.')
   })
   test('with nothing in it', () => {
     const empty = { ...season, floods: 0, thicknessMm: null }

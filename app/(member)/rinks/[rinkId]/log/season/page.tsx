@@ -8,7 +8,7 @@ import { orNotFound } from '@/lib/http/or-not-found'
 import { seasonYearSchema } from '@/lib/schemas/season'
 import { getSeason, type SeasonView } from '@/lib/services/log-season'
 import { rateText } from '@/lib/words/kept'
-import { seasonHeadline, thicknessSummary } from '@/lib/words/log-season'
+import { pastSeasonHeadline, seasonHeadline, thicknessSummary } from '@/lib/words/log-season'
 import { unbroken } from '@/lib/words/unbroken'
 import { durationText, numberText } from '@/lib/words/quantities'
 import { Totals, totalFigures, type Figure } from '../_components/totals'
@@ -21,10 +21,11 @@ export default async function SeasonPage({ params, searchParams }: PageProps<'/r
   const year = seasonYearSchema.parse((await searchParams).season)
   const view = await orNotFound(getSeason(await pageContext(), (await params).rinkId, year))
   const { rink, season, reader, totals, thickness } = view
+  const isOver = season.year < view.presentYear
   return (
     <RinkFrame name={rink.name} about={`Season ${seasonName(season)}`} people={rink.people}>
       <h1 className="max-w-[26ch] text-verdict font-medium tracking-tight lg:text-verdict-wide print:text-lead">
-        {unbroken(seasonHeadline(totals, new Date(view.readAt), reader))}
+        {isOver ? pastSeasonHeadline(totals) : unbroken(seasonHeadline(totals, new Date(view.readAt), reader))}
       </h1>
       <OtherSeasons rinkId={rink.id} year={season.year} present={view.presentYear} />
       <div className="mt-4 gap-x-14 lg:grid lg:grid-cols-2 print:grid print:grid-cols-2 print:gap-x-8">

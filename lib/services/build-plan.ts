@@ -88,7 +88,9 @@ export async function keepPlan(context: ServiceContext, { rinkId, plan }: KeepPl
   if (!fitsMeasure('fillDepth', fillDepthMm)) {
     const person = await findAccount(context.db, context.viewer.userId)
     const range = person ? rangeMessage('fillDepth', person.units) : ''
-    throw new InvalidInputError('Something here needs another look.', { leastDepth: `Mean depth of the fill: ${range}` })
+    throw new InvalidInputError('Something here needs another look.', {
+      leastDepth: `Mean depth of the fill: ${range}`,
+    })
   }
   await changing(context, rinkId, async (trx, access) => {
     await setFillWater(trx, access, { fillDepthMm, flowLPerMin: flow.lPerMin })

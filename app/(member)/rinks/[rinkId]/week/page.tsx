@@ -1,6 +1,7 @@
 // The nights ahead at a glance; a night's link opens its hours in place. All of it is drawn on the server.
 import type { Metadata } from 'next'
 import { DataSource } from '@/components/rinks/data-source'
+import { ForecastNotice } from '@/components/rinks/forecast-notice'
 import { readerOf } from '@/components/rinks/reader'
 import { pageContext } from '@/lib/auth/request-context'
 import { orNotFound } from '@/lib/http/or-not-found'
@@ -11,7 +12,6 @@ import { OFF_SEASON } from '../_components/off-season'
 import { FillAhead } from './_components/fill-ahead'
 import { NightList } from './_components/night-list'
 import { WeekHeadline } from './_components/week-headline'
-import { WeekNotices } from './_components/week-notices'
 import { WithoutNights } from './_components/without-nights'
 
 export const metadata: Metadata = { title: 'The nights ahead' }
@@ -30,7 +30,7 @@ function Nights({ view, outlook }: { view: WeekView; outlook: NonNullable<WeekVi
   const isBeforeFill = view.rink.phase === 'waiting' || view.rink.phase === 'filling'
   return (
     <>
-      <WeekNotices view={view} />
+      <ForecastNotice forecast={view.forecast} lastReadFailed={view.lastReadFailed} now={Date.parse(view.readAt)} />
       <WeekHeadline view={view} outlook={outlook} reader={reader} />
       {isBeforeFill ? <FillAhead outlook={outlook} reader={reader} /> : null}
       <NightList view={view} outlook={outlook} reader={reader} />

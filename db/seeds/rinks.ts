@@ -9,7 +9,7 @@ const USUAL = {
   shelter: 'suburban',
   sky: 'edged',
   phase: 'skating',
-  iceThickness: '9',
+  iceThickness: '11',
   fillDepth: '10',
   waterKind: 'cold-tap',
   flow: '25',

@@ -95,6 +95,8 @@ function thawText({ thaw, thinnest }: WeekSummary, words: WordOptions): string {
   if (!thaw) return ''
   const loss = `The thaw takes about ${layerText(Math.max(1, Math.round(thaw.lossMm)), words)} in this forecast`
   if (!thinnest) return `${loss}.`
+  // Thinnest before it begins: the cold before the thaw brings more than the thaw takes.
+  if (Date.parse(thinnest.at) < Date.parse(thaw.startsAt)) return `${loss}, less than the cold before it brings.`
   if (thinnest.thicknessMm < 1) return `${loss}, and with it the whole sheet.`
   return `${loss}; without floods the sheet comes down to ${iceText(thinnest.thicknessMm, words)}.`
 }

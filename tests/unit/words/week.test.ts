@@ -90,6 +90,8 @@ test('the line under it adds up near floods and says what the thaw takes', () =>
     'Floods tonight and Thursday night could add about 16 mm of ice. The thaw takes about 8 mm in this forecast; ' +
       'without floods the sheet comes down to 8.2 cm.',
   )
+  const nowThinnest = { thicknessMm: 90, at: '2027-01-12T22:00:00Z' }
+  expect(detail({ ...SUMMARY, thaw: THAW, thinnest: nowThinnest })).toMatch(/, less than the cold before it brings\.$/)
   expect(detail({ ...SUMMARY, nearGoodDates: [], goodDates: ['2027-01-16'] })).toBe(
     'The first good night is Saturday night.',
   )

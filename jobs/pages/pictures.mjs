@@ -10,6 +10,14 @@ const THEMES = ['light', 'dark']
 const wanted = process.argv.slice(2)
 const isWanted = ([name]) => wanted.length === 0 || wanted.includes(name)
 
+/** Charts come once they are nearly in view. */
+async function lookThrough(page) {
+  await page.evaluate(() => scrollTo(0, document.body.scrollHeight))
+  await page.waitForTimeout(300)
+  await page.waitForLoadState('networkidle')
+  await page.evaluate(() => scrollTo(0, 0))
+}
+
 async function picture(page, name, url) {
   for (const [width, height] of Object.entries(WIDTHS)) {
     await page.setViewportSize({ width: Number(width), height })
@@ -17,6 +25,7 @@ async function picture(page, name, url) {
       await page.emulateMedia({ colorScheme, reducedMotion: 'reduce' })
       const response = await page.goto(url)
       await page.waitForLoadState('networkidle')
+      await lookThrough(page)
       const file = path.join(FOLDER, `${name}-${width}-${colorScheme}.png`)
       await page.screenshot({ path: file, fullPage: true })
       const isTooWide = await page.evaluate(() => document.documentElement.scrollWidth > window.innerWidth)

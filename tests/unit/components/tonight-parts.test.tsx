@@ -5,11 +5,14 @@ import { entriesFor, entryOf } from '@/app/(member)/_components/navigation'
 import { DataSource } from '@/components/rinks/data-source'
 import { passWords, setWords } from '@/app/(member)/rinks/[rinkId]/_components/pass-words'
 import { hasMoreToLose, isAsked } from '@/app/(member)/rinks/[rinkId]/_components/when-asked'
+import { PhaseNote } from '@/app/(member)/rinks/[rinkId]/_components/phase-note'
 import { StatusNotices } from '@/app/(member)/rinks/[rinkId]/_components/status-notices'
 import { TroubleBar } from '@/app/(member)/rinks/[rinkId]/_components/trouble-bar'
 import type { ReadTrouble } from '@/app/(member)/rinks/[rinkId]/_components/use-tonight'
 import { Verdict } from '@/app/(member)/rinks/[rinkId]/_components/verdict'
 import { ageText, nightLabel, readerOf } from '@/components/rinks/reader'
+import type { Role } from '@/lib/access/permissions'
+import type { Phase } from '@/lib/advice/types'
 import { HOUR_MILLIS, MINUTE_MILLIS } from '@/lib/physics/constants'
 import type { PouredPassView, TonightView } from '@/lib/schemas/tonight-view'
 import { isoAt, NOON, passAt, summaryOf, tonightView } from '../../fixtures/tonight-view'
@@ -149,4 +152,22 @@ test('nights are named by both their dates, ages by their largest unit', () => {
       ageText(new Date(NOW - minutes * MINUTE_MILLIS).toISOString(), NOW),
     ),
   ).toEqual(['just now', '1 minute ago', '59 minutes ago', '1 hour ago', '47 hours ago', '3 days ago'])
+})
+
+describe('what the rink is at', () => {
+  const note = (phase: Phase, role: Role, isFloodNight = true) => {
+    const rink = { ...tonightView().rink, phase }
+    return textOf(renderToStaticMarkup(<PhaseNote rink={rink} role={role} isFloodNight={isFloodNight} />))
+  }
+
+  test('who comes to skate reads whether it is open; who floods has the plan', () => {
+    expect(note('skating', 'skater')).toContain('Open for skating, by its keeper’s word')
+    expect(note('skating', 'keeper')).toBe('')
+  })
+
+  test('in a thaw everybody stays off; once the cold is back its keeper is led to say so', () => {
+    expect(note('thaw', 'keeper', false)).toContain('Stay off')
+    expect(note('thaw', 'keeper')).toMatch(/the cold is back.*Say what there is now$/)
+    expect(note('thaw', 'crew')).toMatch(/the cold is back.*The week to come$/)
+  })
 })

@@ -1,6 +1,7 @@
 // In phases that are about more than tonight's flood: what the rink is at, and the page for it.
 import Link from 'next/link'
 import type { Route } from 'next'
+import { isGranted, type Role } from '@/lib/access/permissions'
 import type { Phase } from '@/lib/advice/types'
 import type { TonightView } from '@/lib/schemas/tonight-view'
 
@@ -40,15 +41,22 @@ const COLD_IS_BACK: PhaseWords = {
   path: 'settings/ice',
 }
 
-interface PhaseNoteProps extends Pick<TonightView, 'rink'> {
-  isFloodNight: boolean
-  mayManage: boolean
+/** For who comes to skate, not to flood. */
+const OPEN: PhaseWords = {
+  text: 'Open for skating, by its keeper’s word; thickness stays an estimate.',
+  link: 'How the ice stands',
+  path: 'freezing',
 }
 
-function wordsOf({ rink, isFloodNight, mayManage }: PhaseNoteProps): PhaseWords | undefined {
-  const usual = WORDS[rink.phase]
-  if (rink.phase !== 'thaw' || !isFloodNight) return usual
-  return mayManage ? COLD_IS_BACK : { ...COLD_IS_BACK, link: 'The week to come', path: 'week' }
+interface PhaseNoteProps extends Pick<TonightView, 'rink'> {
+  isFloodNight: boolean
+  role: Role
+}
+
+function wordsOf({ rink, isFloodNight, role }: PhaseNoteProps): PhaseWords | undefined {
+  if (rink.phase === 'skating' && role === 'skater') return OPEN
+  if (rink.phase !== 'thaw' || !isFloodNight) return WORDS[rink.phase]
+  return isGranted(role, 'manage') ? COLD_IS_BACK : { ...COLD_IS_BACK, link: 'The week to come', path: 'week' }
 }
 
 export function PhaseNote(props: PhaseNoteProps) {

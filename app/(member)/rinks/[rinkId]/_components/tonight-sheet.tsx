@@ -80,11 +80,7 @@ function JudgedNight({ view, now, change, checkOffs }: JudgedNightProps) {
   return (
     <>
       <SteadyVerdict view={view} summary={summary} now={now} />
-      <SteadyPhase
-        rink={view.rink}
-        isFloodNight={summary.verdict === 'flood'}
-        mayManage={isGranted(view.viewer.role, 'manage')}
-      />
+      <SteadyPhase rink={view.rink} isFloodNight={summary.verdict === 'flood'} role={view.viewer.role} />
       <NightStrip source={drawn} now={now} />
       <SteadyZone view={view} />
       <div className="lg:grid lg:grid-cols-[1.25fr_1fr] lg:gap-x-14 print:block">

@@ -24,9 +24,6 @@ import { getRinkAndReader } from './rink-and-reader'
 /** A hole drilled longer ago opens no rink: it says little about today's ice. [h] Ours. */
 const OPENS_HOURS = 72
 
-/** Half of the tenth of an inch that ice is shown to: a hole of the limit's own figure is thick enough. [mm] */
-const SHOWN_WITHIN_MM = 1.27
-
 /** @throws NotFoundError for strangers. */
 export async function getFreezing(context: ServiceContext, rinkId: string): Promise<FreezingView> {
   const { access, rink, reader, role } = await getRinkAndReader(context, rinkId)
@@ -71,7 +68,7 @@ async function drilledSinceFill(
 }
 
 function isThick({ carriesSkaterMm }: RinkForJudging, reading: Reading | undefined): boolean {
-  return reading !== undefined && reading.thicknessMm + SHOWN_WITHIN_MM >= carriesSkaterMm
+  return reading !== undefined && reading.thicknessMm >= carriesSkaterMm
 }
 
 /**

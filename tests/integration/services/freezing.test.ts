@@ -79,12 +79,10 @@ test('ice that is thicker than the water that was counted does not stand on the 
   expect(outlook?.now.waterBelowMm).toBeCloseTo(36, 0)
 })
 
-test('a hole that reads like the limit in inches is as thick as the limit', async () => {
-  // 3.9 in, where 100 mm are shown as 3.9 in.
+test('a hole a millimetre under the limit opens no rink', async () => {
   await drill('9.9', later(30))
-  expect((await freezing(later(30))).isDrilledThick).toBe(true)
-  await drill('9.8', later(31))
-  expect((await freezing(later(31))).isDrilledThick).toBe(false)
+  expect((await freezing(later(30))).isDrilledThick).toBe(false)
+  await expect(open(later(30))).rejects.toThrow(ConflictError)
 })
 
 test('a fill that was given up leaves the one before it on the rink', async () => {

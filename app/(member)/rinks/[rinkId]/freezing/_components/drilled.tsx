@@ -3,6 +3,7 @@ import type { Route } from 'next'
 import Link from 'next/link'
 import { Facts } from '@/components/ui/facts'
 import type { FreezingView } from '@/lib/schemas/freezing-view'
+import { typed, unitOf } from '@/lib/schemas/measures'
 import { iceText } from '@/lib/words/quantities'
 import { clockText, weekdayText } from '@/lib/words/times'
 import { OpenRink, ReadingForm } from './ice-forms'
@@ -16,8 +17,9 @@ export function Drilled({ view, entryKey }: { view: FreezingView; entryKey: stri
       {mayManage && isDrilledThick ? <OpenRink rinkId={rink.id} /> : null}
       {mayManage && reading && !isDrilledThick ? (
         <p className="mt-4 max-w-line text-note text-graphite">
-          The rink is opened here once a hole is {iceText(rink.carriesSkaterMm, reader)} thick, your limit. Where all
-          the water has frozen to the floor with less, say so in its{' '}
+          The rink is opened here once a hole is {typed('carriesSkater', reader.units, rink.carriesSkaterMm)}{' '}
+          {unitOf('carriesSkater', reader.units)} thick, your limit. Where all the water has frozen to the floor with
+          less, say so in its{' '}
           <Link href={`/rinks/${rink.id}/settings/ice` as Route} className="underline">
             settings
           </Link>

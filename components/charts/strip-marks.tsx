@@ -39,13 +39,13 @@ export function Floor({ layout, words }: StripPartProps) {
   )
 }
 
-/** From pour to set; a poured pass is a wedge at its pour. */
 /** A pass that is still wet when the next begins has its name over what is before that. */
 function roomOf(brackets: StripLayout['brackets'], place: number): number {
   const { x = 0, width = 0 } = brackets[place] ?? {}
   return Math.min(width, ...brackets.map((other) => other.x - x).filter((ahead) => ahead > 0))
 }
 
+/** From pour to set; a poured pass is a wedge at its pour. */
 export function Passes({ layout, words, brackets }: StripPartProps & { brackets: StripLayout['brackets'] }) {
   const top = layout.frame.plotTop - 11
   return (

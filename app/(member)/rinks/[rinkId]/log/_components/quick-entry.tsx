@@ -1,6 +1,7 @@
 // Writing an entry with gloves on: choose what was done, then one button. The line shows at once and goes back if it fails.
 'use client'
 import { useState, type MouseEvent } from 'react'
+import { useEntryKey } from '@/components/hooks/use-entry-key'
 import { useFirstFault } from '@/components/hooks/use-first-fault'
 import { useSend } from '@/components/hooks/use-send'
 import { Button } from '@/components/ui/button'
@@ -94,6 +95,7 @@ interface EntryFormProps extends Omit<QuickEntryProps, 'open'> {
 function EntryForm({ kind, onSaved, usual, reader, rinkId, entryKey }: EntryFormProps) {
   const { state, post, submit, isSending } = useSend(writeEntryAction)
   const form = useFirstFault(state, isSending)
+  const key = useEntryKey(state, entryKey)
   const shown = kind ?? sentKind(state.status === 'error' ? state.values : undefined)
   if (shown === null) {
     return state.message ? (
@@ -128,7 +130,7 @@ function EntryForm({ kind, onSaved, usual, reader, rinkId, entryKey }: EntryForm
         className="mt-4 max-w-[34rem]"
       >
         <input type="hidden" name="rinkId" value={rinkId} />
-        <input type="hidden" name="entryKey" value={entryKey} />
+        <input type="hidden" name="entryKey" value={key} />
         <input type="hidden" name="kind" value={shown} />
         <input type="hidden" name="units" value={unitsCode(reader.units)} />
         <MainFields {...fields} />
